@@ -1,0 +1,67 @@
+/** Shop rules: what the shop decides. Each default's basis is in `lib/measure/rules`. */
+import { z } from 'zod';
+
+const mmValue = z.number().finite().min(0).max(5_000);
+
+/** Rules of the measuring engine. Lengths in millimetres, angles in degrees. */
+export const fitRules = z.object({
+  unit: z.enum(['in', 'mm']),
+  /** Step to which cut sizes are rounded: 1/16 in = 1.5875, 1/32, 1, 0.5. */
+  stepMm: z.number().positive(),
+  region: z.enum(['US', 'UK', 'AU', 'EU']),
+  /** Heights at which a wall's length is asked for. */
+  readingHeightsMm: z.array(mmValue).min(1).max(6),
+  fillerLeastMm: mmValue,
+  fillerAimMm: mmValue,
+  fillerMostMm: mmValue,
+  /** Least filler at an inside corner between two runs: doors, drawers. */
+  cornerFillerDoorsMm: mmValue,
+  cornerFillerDrawersMm: mmValue,
+  gableClearanceMm: mmValue,
+  jointGrowthMm: z.number().min(0).max(5),
+  unitBuildToleranceMm: z.number().min(0).max(5),
+  /** Plane in which a filler's width counts. */
+  fillerPlane: z.enum(['door-front', 'carcass-front']),
+  scribeMarginMm: mmValue,
+  scribeLeastMm: mmValue,
+  scribeStepMm: z.number().positive(),
+  /** Assumed greatest bow of a wall not read, mm over its length; widens uncertainty. */
+  usualBowMm: mmValue,
+  /** Agreement of two readings of one thing. */
+  repeatAgreementMm: mmValue,
+  baseTopMm: mmValue,
+  counterTopMm: mmValue,
+  kickHeightMm: mmValue,
+  kickDepthMm: mmValue,
+  counterToWallUnitMm: mmValue,
+  legMinMm: mmValue,
+  legMaxMm: mmValue,
+  floorFallFlagMm: mmValue,
+  floorFallDecisionMm: mmValue,
+  studSpacingsMm: z.array(mmValue),
+  ceilingScribeLeastMm: mmValue,
+  tiltMarginMm: mmValue,
+  aisleLeastMm: mmValue,
+  /** Which published rule set gives the verdicts; `shop` for the shop's own. */
+  ruleSet: z.string().max(40),
+});
+export type FitRules = z.infer<typeof fitRules>;
+
+/** Rules of booking and telling. Times are local, in the shop's zone. */
+export const bookingRules = z.object({
+  dayStart: z.string().regex(/^\d\d:\d\d$/),
+  dayEnd: z.string().regex(/^\d\d:\d\d$/),
+  /** ISO weekdays worked, 1 Monday … 7 Sunday. */
+  workdays: z.array(z.number().int().min(1).max(7)),
+  closedDays: z.array(z.iso.date()),
+  windowMinutes: z.number().int().min(15).max(480),
+  leadWorkdays: z.number().int().min(0).max(260),
+  measureMinutesPerRoom: z.number().int().min(10).max(480),
+  installMinutesPerUnit: z.number().int().min(10).max(480),
+  quietFrom: z.string().regex(/^\d\d:\d\d$/),
+  quietUntil: z.string().regex(/^\d\d:\d\d$/),
+});
+export type BookingRules = z.infer<typeof bookingRules>;
+
+export const shopRules = z.object({ fit: fitRules, booking: bookingRules });
+export type ShopRules = z.infer<typeof shopRules>;

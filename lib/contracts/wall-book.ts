@@ -1,0 +1,361 @@
+/**
+ * The wall book on the wire and in the engine: a room's walls, its readings and its runs.
+ * Frames and signs are those of DEVELOPERS.md "Frames and signs": x along the wall left to right seen
+ * from inside, y out of the wall into the room, z up from the datum. Walls run clockwise seen from above.
+ */
+import { z } from 'zod';
+
+const id = z.uuid();
+const lengthMm = z.number().finite().min(0).max(100_000);
+const offsetMm = z.number().finite().min(-5_000).max(100_000);
+const heightMm = z.number().finite().min(-2_000).max(12_000);
+
+/** What the tool touched; decides whether a thickness is still to come. */
+export const touches = z.enum([
+  'plaster',
+  'board',
+  'bare-stud',
+  'skirting',
+  'tile',
+  'casing',
+  'existing-cabinet',
+]);
+export type Touches = z.infer<typeof touches>;
+
+const common = {
+  /** Made on the phone; sending it twice changes nothing. */
+  id,
+  roomId: id,
+  toolId: id,
+  /** Instant, ISO 8601 in UTC, by the phone's clock. */
+  takenAt: z.iso.datetime(),
+  /** The text as typed, for the record: "95 1/16", "900 / 1200 / 1502". */
+  typed: z.string().max(80),
+  unit: z.enum(['in', 'mm']),
+  touches: touches.default('board'),
+  /** The reading this one corrects; that one stays, marked. */
+  replaces: id.optional(),
+};
+
+export const lengthReading = z.object({
+  ...common,
+  kind: z.literal('length'),
+  wallId: id,
+  zMm: heightMm,
+  /** 0 at the wall; the front depth where it was read at the face line. */
+  yMm: offsetMm.default(0),
+  valueMm: lengthMm,
+});
+
+/** A corner is named by the wall that begins at it: the corner at that wall's LEFT end. */
+export const cornerReading = z.object({
+  ...common,
+  kind: z.literal('corner'),
+  cornerWallId: id,
+  zMm: heightMm,
+  by: z.discriminatedUnion('method', [
+    z.object({
+      method: z.literal('legs'),
+      /** a: along the left arm, that is the end of the wall before. */
+      legLeftMm: lengthMm,
+      /** b: along the right arm, that is the start of this wall. */
+      legRightMm: lengthMm,
+      /** c: between the two marks. */
+      diagonalMm: lengthMm,
+      /** Outside corner: leg a lies on a straightedge carried past the corner. */
+      carriedPast: z.boolean().default(false),
+    }),
+    z.object({ method: z.literal('angle'), angleDeg: z.number().gt(0).lt(360) }),
+  ]),
+});
+
+export const setUpKind = z.enum(['straightedge', 'plumb-level', 'laser-plane']);
+
+export const faceReading = z.object({
+  ...common,
+  kind: z.literal('face'),
+  wallId: id,
+  xMm: offsetMm,
+  zMm: heightMm,
+  /** Gap from the reference to the wall; larger where the wall falls back. */
+  gapMm: z.number().finite().min(-300).max(300),
+  /** Gaps are comparable only inside one set-up. */
+  setUpId: id,
+  setUpKind,
+});
+
+export const floorReading = z.object({
+  ...common,
+  kind: z.literal('floor'),
+  wallId: id,
+  xMm: offsetMm,
+  yMm: offsetMm,
+  /** Down from the level line to the floor; the high point has the smallest drop. */
+  dropMm: lengthMm,
+  setUpId: id,
+});
+
+export const ceilingReading = z.object({
+  ...common,
+  kind: z.literal('ceiling'),
+  wallId: id,
+  xMm: offsetMm,
+  yMm: offsetMm,
+  /** Up from the same level line as the floor's drops of this set-up. */
+  riseMm: lengthMm,
+  setUpId: id,
+});
+
+export const diagonalReading = z.object({
+  ...common,
+  kind: z.literal('diagonal'),
+  fromCornerWallId: id,
+  toCornerWallId: id,
+  zMm: heightMm,
+  valueMm: lengthMm,
+});
+
+/** Across the room between two facing walls; ties the two chains of a galley. */
+export const widthReading = z.object({
+  ...common,
+  kind: z.literal('width'),
+  wallId: id,
+  xMm: offsetMm,
+  toWallId: id,
+  zMm: heightMm,
+  valueMm: lengthMm,
+});
+
+export const featureKind = z.enum([
+  'window',
+  'door',
+  'opening',
+  'outlet',
+  'switch',
+  'water',
+  'waste',
+  'gas',
+  'vent',
+  'radiator',
+  'panel',
+  'beam',
+  'pipe',
+  'other',
+]);
+export type FeatureKind = z.infer<typeof featureKind>;
+
+export const featureReading = z.object({
+  ...common,
+  kind: z.literal('feature'),
+  wallId: id,
+  feature: featureKind,
+  x0Mm: offsetMm,
+  x1Mm: offsetMm,
+  z0Mm: heightMm,
+  z1Mm: heightMm,
+  projectionMm: z.number().finite().min(-500).max(2_000).default(0),
+  /** Which way a door or casement opens, seen from inside; none for the rest. */
+  swing: z.enum(['none', 'in-left', 'in-right', 'out-left', 'out-right']).default('none'),
+  note: z.string().max(200).default(''),
+});
+
+export const studReading = z.object({
+  ...common,
+  kind: z.literal('stud'),
+  wallId: id,
+  xMm: offsetMm,
+  at: z.enum(['centre', 'left-edge', 'right-edge']),
+});
+
+export const doorwayReading = z.object({
+  ...common,
+  kind: z.literal('doorway'),
+  name: z.string().max(60),
+  /** Clear width past the leaf and the stop. */
+  clearWidthMm: lengthMm,
+  clearHeightMm: lengthMm,
+  /** Of the passage behind, where the way in turns. */
+  passageWidthMm: lengthMm.optional(),
+});
+
+/** Takes a reading back; both stay in the book. */
+export const withdrawal = z.object({
+  ...common,
+  kind: z.literal('withdrawal'),
+  readingId: id,
+  reason: z.string().min(1).max(200),
+});
+
+/** A reading that was asked for and could not be taken, with the reason. */
+export const skip = z.object({
+  ...common,
+  kind: z.literal('skip'),
+  /** The key of the reading asked for, as `whatIsMissing` names it. */
+  slot: z.string().max(120),
+  reason: z.string().min(1).max(200),
+});
+
+export const reading = z.discriminatedUnion('kind', [
+  lengthReading,
+  cornerReading,
+  faceReading,
+  floorReading,
+  ceilingReading,
+  diagonalReading,
+  widthReading,
+  featureReading,
+  studReading,
+  doorwayReading,
+  withdrawal,
+  skip,
+]);
+export type Reading = z.infer<typeof reading>;
+export type ReadingKind = Reading['kind'];
+export type ReadingOf<K extends ReadingKind> = Extract<Reading, { kind: K }>;
+
+export const tool = z.object({
+  id,
+  name: z.string().min(1).max(60),
+  /** Maximum permissible error; see MEASURE "Tools and uncertainty" in DEVELOPERS.md. */
+  spec: z.discriminatedUnion('kind', [
+    z.object({
+      kind: z.literal('tape'),
+      accuracyClass: z.enum(['I', 'II', 'III']),
+      stepMm: z.number().positive(),
+      repeatabilityMm: z.number().min(0),
+    }),
+    z.object({
+      kind: z.literal('laser'),
+      mpeMm: z.number().positive(),
+      stepMm: z.number().positive(),
+      repeatabilityMm: z.number().min(0),
+    }),
+    z.object({
+      kind: z.literal('angle-finder'),
+      mpeDeg: z.number().positive(),
+      stepDeg: z.number().positive(),
+      repeatabilityDeg: z.number().min(0),
+    }),
+    z.object({
+      kind: z.literal('level'),
+      mpeMmPerM: z.number().positive(),
+      stepMm: z.number().positive(),
+      repeatabilityMm: z.number().min(0),
+    }),
+  ]),
+});
+export type Tool = z.infer<typeof tool>;
+
+export const wall = z.object({
+  id,
+  /** "A", "B" … in walking order. */
+  name: z.string().min(1).max(12),
+  /** As drawn, before it is read. */
+  nominalLengthMm: lengthMm,
+  /** Nominal interior angle of the corner at this wall's left end; null where a chain begins in the open. */
+  leftCornerDeg: z.number().gt(0).lt(360).nullable(),
+});
+export type Wall = z.infer<typeof wall>;
+
+export const room = z.object({
+  id,
+  name: z.string().min(1).max(60),
+  /** Walls clockwise. A closed room is one closed chain; an L is one open chain; a galley is two. */
+  chains: z
+    .array(z.object({ closed: z.boolean(), walls: z.array(wall).min(1).max(40) }))
+    .min(1)
+    .max(4),
+  /** Faces still to come: thickness to be added to bare studs, floor build-up to be laid. */
+  wallThicknessToComeMm: z.number().min(0).max(100).default(0),
+  floorToComeMm: z.number().min(0).max(200).default(0),
+});
+export type Room = z.infer<typeof room>;
+
+/** What a run meets at one end. */
+export const runEnd = z.discriminatedUnion('kind', [
+  /** The next wall, at the corner. */
+  z.object({ kind: z.literal('wall') }),
+  /** Free: a finished end, up to a limit measured along the wall from its left corner. */
+  z.object({ kind: z.literal('open'), limitMm: lengthMm }),
+  /** Another run that stands on the next wall: its front is in the way. `through` runs into the corner. */
+  z.object({
+    kind: z.literal('run'),
+    runId: id,
+    through: z.enum(['this', 'other', 'both-stop', 'corner-unit']),
+  }),
+  /** A door or window casing at xMm. */
+  z.object({ kind: z.literal('casing'), xMm: lengthMm }),
+  /** A cabinet set in an earlier phase, its end face at xMm. */
+  z.object({ kind: z.literal('existing'), xMm: lengthMm }),
+]);
+export type RunEnd = z.infer<typeof runEnd>;
+
+export const unitKind = z.enum([
+  'base',
+  'drawers',
+  'sink',
+  'corner',
+  'wall',
+  'tall',
+  'panel',
+  'dishwasher',
+  'range',
+  'refrigerator',
+  'hood',
+  'open',
+]);
+export type UnitKind = z.infer<typeof unitKind>;
+
+export const unit = z.object({
+  id,
+  name: z.string().max(40).default(''),
+  kind: unitKind,
+  widthMm: z.number().positive().max(5_000),
+  /** Null: fixed. Else it may be built between min and max in steps from its present width, or to stock widths. */
+  alterable: z
+    .object({
+      minMm: z.number().positive(),
+      maxMm: z.number().positive(),
+      stepMm: z.number().positive(),
+      stockMm: z.array(z.number().positive()).optional(),
+    })
+    .nullable()
+    .default(null),
+});
+export type Unit = z.infer<typeof unit>;
+
+export const run = z.object({
+  id,
+  wallId: id,
+  name: z.string().min(1).max(40),
+  level: z.enum(['base', 'wall', 'tall']),
+  left: runEnd,
+  right: runEnd,
+  /** Carcass depth without the door. */
+  carcassDepthMm: z.number().positive().max(2_000),
+  bumperMm: z.number().min(0).max(20).default(2),
+  doorMm: z.number().min(0).max(60).default(19),
+  /** Height band of the boxes above the finished floor at the high point. */
+  z0Mm: heightMm,
+  z1Mm: heightMm,
+  units: z.array(unit).max(60),
+  /** Where the slack goes. `centred` puts the middle of a unit on a mark along the wall. */
+  share: z
+    .discriminatedUnion('how', [
+      z.object({ how: z.literal('equal') }),
+      z.object({ how: z.literal('left') }),
+      z.object({ how: z.literal('right') }),
+      z.object({ how: z.literal('centred'), unitId: id, markMm: lengthMm }),
+    ])
+    .default({ how: 'equal' }),
+  /** Runs that share a counter (and so one datum) carry the same mark; null stands alone. */
+  counterGroup: z.string().max(20).nullable().default(null),
+});
+export type Run = z.infer<typeof run>;
+
+export const wallBook = z.object({
+  room,
+  readings: z.array(reading),
+  tools: z.array(tool),
+});
+export type WallBook = z.infer<typeof wallBook>;
