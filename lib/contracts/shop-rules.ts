@@ -42,6 +42,32 @@ export const fitRules = z.object({
   ceilingScribeLeastMm: mmValue,
   tiltMarginMm: mmValue,
   aisleLeastMm: mmValue,
+  /** Wall out of plumb or bowed over the height read: flag, serious. */
+  plumbFlagMm: mmValue.default(6),
+  plumbSeriousMm: mmValue.default(13),
+  /** Corner out of square over `cornerFlagOverMm` of depth. */
+  cornerFlagMm: mmValue.default(6),
+  cornerFlagOverMm: z.number().positive().max(5_000).default(600),
+  /** Pieces of a wall against the whole: ask, refuse to release. */
+  piecesAskMm: mmValue.default(3),
+  piecesRefuseMm: mmValue.default(6),
+  /** Gap left at a wall before it is closed: aim, reject. */
+  wallGapAimMm: mmValue.default(3),
+  wallGapRejectMm: mmValue.default(6),
+  /** Back scribe of tall units and of refrigerator panels; other edges use `scribeLeastMm`. */
+  scribeLeastTallMm: mmValue.default(19),
+  scribeLeastFridgePanelMm: mmValue.default(25),
+  /** Studs behind a hung box by its width, narrowest first; wider than the last needs the last. */
+  studsNeeded: z
+    .array(z.object({ toWidthMm: z.number().positive(), studs: z.number().int().min(1).max(6) }))
+    .min(1)
+    .default([
+      { toWidthMm: 460, studs: 1 },
+      { toWidthMm: 1_000, studs: 2 },
+      { toWidthMm: 1_250, studs: 3 },
+    ]),
+  /** Least distance of a fixing screw from the end of a box's rail. */
+  screwEdgeMm: mmValue.default(19),
   /** Which published rule set gives the verdicts; `shop` for the shop's own. */
   ruleSet: z.string().max(40),
 });
