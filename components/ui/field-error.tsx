@@ -1,0 +1,11 @@
+import { Glyph } from './glyph';
+/** What is wrong with one field and what to type instead. */
+export function FieldError({ id, error }: { id?: string; error?: string }) {
+  if (!error) return null;
+  return (
+    <p id={id} className="text-note font-medium text-chalk">
+      <Glyph name="problem" className="mr-1" />
+      {error}
+    </p>
+  );
+}

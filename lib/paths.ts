@@ -1,0 +1,80 @@
+/** Every address of the product, in one place: links and requests are made from these and from nothing else. */
+
+const part = encodeURIComponent;
+
+/** Addresses of pages. */
+export const paths = {
+  front: () => '/',
+  check: () => '/check',
+  /** `next` is where to go after signing in; only an address on this site is followed. */
+  signIn: (next?: string) => (next ? `/sign-in?next=${part(next)}` : '/sign-in'),
+  signUp: () => '/sign-up',
+  join: (invitationId: string) => `/join/${part(invitationId)}`,
+
+  diary: () => '/diary',
+  /** The diary opened at a civil date, "2026-05-12". */
+  diaryOn: (date: string) => `/diary?on=${part(date)}`,
+  jobs: () => '/jobs',
+  newJob: () => '/jobs/new',
+  job: (jobId: string) => `/jobs/${part(jobId)}`,
+  room: (jobId: string, roomId: string) => `/jobs/${part(jobId)}/rooms/${part(roomId)}`,
+  /** The released sheet, by the letter of its revision. */
+  sheet: (jobId: string, roomId: string, revision: string) =>
+    `/jobs/${part(jobId)}/rooms/${part(roomId)}/sheets/${part(revision)}`,
+  bench: () => '/bench',
+  crews: () => '/crews',
+  messages: () => '/messages',
+  rules: () => '/rules',
+
+  today: () => '/today',
+  todayVisit: (visitId: string) => `/today/${part(visitId)}`,
+  walls: (roomId: string) => `/walls/${part(roomId)}`,
+
+  /** The customer's page; the token is the whole of the permission. */
+  customerVisit: (token: string) => `/v/${part(token)}`,
+
+  demo: () => '/demo',
+  demoPhone: () => '/demo/phone',
+} as const;
+
+/** Addresses that answer requests. */
+export const apiPaths = {
+  signIn: () => '/api/auth/sign-in/email',
+  signOut: () => '/api/auth/sign-out',
+  switchShop: () => '/api/people/switch-shop',
+  shops: () => '/api/shops',
+  joinShop: () => '/api/people/join',
+  people: () => '/api/people',
+  invitations: () => '/api/people/invitations',
+
+  jobs: () => '/api/jobs',
+  jobSearch: (search: string) => `/api/jobs?search=${part(search)}`,
+  job: (jobId: string) => `/api/jobs/${part(jobId)}`,
+  rooms: () => '/api/rooms',
+  room: (roomId: string) => `/api/rooms/${part(roomId)}`,
+  readings: () => '/api/readings',
+  fit: (roomId: string) => `/api/fits?room=${part(roomId)}`,
+  sheets: () => '/api/sheets',
+
+  visits: () => '/api/visits',
+  visit: (visitId: string) => `/api/visits/${part(visitId)}`,
+  openings: () => '/api/openings',
+  waiting: () => '/api/waiting',
+  crews: () => '/api/crews',
+  crew: (crewId: string) => `/api/crews/${part(crewId)}`,
+  rules: () => '/api/rules',
+  messages: () => '/api/messages',
+
+  customerVisit: (token: string) => `/api/v/${part(token)}`,
+  health: () => '/api/health',
+} as const;
+
+/**
+ * An address on this site, or the fallback. Anything else ("https://…", "//…", "/\…") could lead a
+ * person who has just signed in to a stranger's page.
+ * Example: `safeNext('//evil.example', '/diary')` is `/diary`.
+ */
+export function safeNext(next: string | null | undefined, fallback: string): string {
+  if (!next || !/^\/(?![/\\])/.test(next) || /[\u0000-\u001f\\]/.test(next)) return fallback;
+  return next;
+}
