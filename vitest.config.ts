@@ -16,11 +16,30 @@ export default defineConfig({
         resolve,
         test: {
           name: 'unit',
-          include: [
-            'tests/lib/**/*.test.ts',
-            'tests/reference/**/*.test.ts',
-            'tests/rules/**/*.test.ts',
-          ],
+          include: ['lib', 'reference', 'rules', 'components'].map((part) => `tests/${part}/**/*.test.ts`),
+        },
+      },
+      {
+        resolve,
+        test: {
+          name: 'database',
+          include: ['tests/server/**/*.test.ts', 'tests/api/**/*.test.ts'],
+          globalSetup: 'tests/setup/template-database.ts',
+          setupFiles: ['tests/setup/own-database.ts'],
+          maxWorkers: 2,
+          testTimeout: 30_000,
+          hookTimeout: 60_000,
+        },
+      },
+      {
+        resolve,
+        test: {
+          name: 'browser',
+          include: ['tests/browser/**/*.test.ts'],
+          globalSetup: 'tests/setup/running-server.ts',
+          fileParallelism: false,
+          testTimeout: 180_000,
+          hookTimeout: 180_000,
         },
       },
     ],

@@ -1,0 +1,42 @@
+import { drizzle } from 'drizzle-orm/node-postgres';
+import { migrate } from 'drizzle-orm/node-postgres/migrator';
+import { Client, Pool } from 'pg';
+import type { OpenDatabase } from './database';
+import { migrationsFolder } from './migrations-folder';
+import * as schema from './schema';
+
+/** Two starters migrate one after the other: the second finds nothing to do. */
+const migrationLock = 7_305_551;
+
+export async function openServer(databaseUrl: string): Promise<OpenDatabase> {
+  await migrateOnce(databaseUrl);
+  const pool = new Pool({ connectionString: databaseUrl, max: 10 });
+  return {
+    db: drizzle(pool, { schema }),
+    kind: 'server',
+    listen: (channel, hear) => listen(databaseUrl, channel, hear),
+    dump: () => {
+      throw new Error('A PostgreSQL server is backed up with its own tools (pg_dump).');
+    },
+    close: () => pool.end(),
+  };
+}
+
+async function migrateOnce(databaseUrl: string) {
+  const client = new Client({ connectionString: databaseUrl });
+  await client.connect();
+  try {
+    await client.query('SELECT pg_advisory_lock($1)', [migrationLock]);
+    await migrate(drizzle(client, { schema }), { migrationsFolder: migrationsFolder() });
+  } finally {
+    await client.end();
+  }
+}
+
+async function listen(databaseUrl: string, channel: string, hear: (payload: string) => void) {
+  const client = new Client({ connectionString: databaseUrl });
+  await client.connect();
+  client.on('notification', (message) => hear(message.payload ?? ''));
+  await client.query(`LISTEN "${channel.replaceAll('"', '')}"`);
+  return () => client.end();
+}

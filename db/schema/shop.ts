@@ -1,0 +1,21 @@
+import { sql } from 'drizzle-orm';
+import { check, integer, jsonb, pgTable, text, timestamp } from 'drizzle-orm/pg-core';
+import type { ShopRules } from '@/lib/contracts/shop-rules';
+
+/** A cabinet shop: where, in what units, by which rules. Every other table hangs from it. */
+export const shops = pgTable(
+  'shops',
+  {
+    id: text('id').primaryKey(),
+    name: text('name').notNull(),
+    phone: text('phone').notNull().default(''),
+    email: text('email').notNull().default(''),
+    region: text('region', { enum: ['US', 'UK', 'AU', 'EU'] }).notNull(),
+    /** IANA zone; everything a person types or reads is in it. */
+    zone: text('zone').notNull(),
+    rules: jsonb('rules').$type<ShopRules>().notNull(),
+    nextJobNumber: integer('next_job_number').notNull().default(1),
+    createdAt: timestamp('created_at', { withTimezone: true, mode: 'date' }).notNull().defaultNow(),
+  },
+  (table) => [check('shops_region', sql`${table.region} in ('US', 'UK', 'AU', 'EU')`)],
+);

@@ -1,0 +1,109 @@
+import {
+  doublePrecision,
+  foreignKey,
+  jsonb,
+  pgTable,
+  primaryKey,
+  text,
+  unique,
+  uuid,
+} from 'drizzle-orm/pg-core';
+import type { Tool } from '@/lib/contracts/wall-book';
+import { roles } from '@/lib/permissions';
+import { user } from './auth';
+import { createdAt, instant, shopColumns } from './columns';
+
+/** A person at work in the shop; signs in when `user_id` is set. */
+export const people = pgTable(
+  'people',
+  {
+    ...shopColumns(),
+    userId: text('user_id').references(() => user.id, { onDelete: 'set null' }),
+    name: text('name').notNull(),
+    phone: text('phone').notNull().default(''),
+    role: text('role', { enum: roles }).notNull(),
+    /** Left the shop: may no longer sign in here; the name stays in the story. */
+    leftAt: instant('left_at'),
+    createdAt: createdAt(),
+  },
+  (table) => [
+    unique('people_shop_id').on(table.shopId, table.id),
+    unique('people_one_per_user').on(table.shopId, table.userId),
+  ],
+);
+
+/** An invitation by e-mail; only the token's hash is kept. */
+export const invitations = pgTable(
+  'invitations',
+  {
+    ...shopColumns(),
+    email: text('email').notNull(),
+    role: text('role', { enum: roles }).notNull(),
+    tokenHash: text('token_hash').notNull(),
+    endsAt: instant('ends_at').notNull(),
+    invitedBy: uuid('invited_by').notNull(),
+    acceptedAt: instant('accepted_at'),
+    createdAt: createdAt(),
+  },
+  (table) => [
+    unique('invitations_token').on(table.tokenHash),
+    foreignKey({
+      name: 'invitations_person',
+      columns: [table.shopId, table.invitedBy],
+      foreignColumns: [people.shopId, people.id],
+    }),
+  ],
+);
+
+/** Who goes out together: a fitting crew, or one measurer. */
+export const crews = pgTable(
+  'crews',
+  {
+    ...shopColumns(),
+    name: text('name').notNull(),
+    does: text('does', { enum: ['measure', 'fit'] }).notNull(),
+    /** One of the crew colours of the look, by number. */
+    colour: text('colour', { enum: ['1', '2', '3', '4', '5', '6'] }).notNull(),
+    baseLatitude: doublePrecision('base_latitude'),
+    baseLongitude: doublePrecision('base_longitude'),
+    createdAt: createdAt(),
+  },
+  (table) => [
+    unique('crews_shop_id').on(table.shopId, table.id),
+    unique('crews_name').on(table.shopId, table.name),
+  ],
+);
+
+export const crewPeople = pgTable(
+  'crew_people',
+  {
+    shopId: text('shop_id').notNull(),
+    crewId: uuid('crew_id').notNull(),
+    personId: uuid('person_id').notNull(),
+  },
+  (table) => [
+    primaryKey({ columns: [table.crewId, table.personId] }),
+    foreignKey({
+      name: 'crew_people_crew',
+      columns: [table.shopId, table.crewId],
+      foreignColumns: [crews.shopId, crews.id],
+    }).onDelete('cascade'),
+    foreignKey({
+      name: 'crew_people_person',
+      columns: [table.shopId, table.personId],
+      foreignColumns: [people.shopId, people.id],
+    }).onDelete('cascade'),
+  ],
+);
+
+/** Measuring tools and their accuracy. */
+export const tools = pgTable(
+  'tools',
+  {
+    ...shopColumns(),
+    name: text('name').notNull(),
+    spec: jsonb('spec').$type<Tool['spec']>().notNull(),
+    createdAt: createdAt(),
+  },
+  (table) => [unique('tools_shop_id').on(table.shopId, table.id)],
+);

@@ -1,0 +1,3 @@
+CREATE EXTENSION IF NOT EXISTS btree_gist;
+--> statement-breakpoint
+CREATE EXTENSION IF NOT EXISTS pg_trgm;

@@ -1,0 +1,126 @@
+/** Rooms, readings, runs, fits and releases on the wire. The shapes themselves are the wall book's. */
+import { z } from 'zod';
+import type { Fit } from '@/lib/measure/fit';
+import type { MissingReading } from '@/lib/measure/missing-reading';
+import type { FitRules } from './shop-rules';
+import type { Run } from './wall-book';
+import { reading, room, run, type Tool, type WallBook } from './wall-book';
+
+const id = z.uuid();
+
+/** The phone or the office makes the ids, so that a room begun without signal keeps its name. */
+export const saveRoomInput = z.object({ jobId: id, room });
+export type SaveRoomInput = z.infer<typeof saveRoomInput>;
+
+/** Sent in order, any number of times; the answer names what is now safe with the office. */
+export const recordReadingsInput = z.object({
+  roomId: id,
+  readings: z.array(z.unknown()).min(1).max(500),
+});
+export type RecordReadingsInput = z.infer<typeof recordReadingsInput>;
+export const recordReadingsAnswer = z.object({
+  /** Safe: the phone may delete these from its queue. */
+  accepted: z.array(id),
+  /** Not understood: the phone keeps them and shows them. */
+  parked: z.array(z.object({ id: z.string(), message: z.string() })),
+});
+export type RecordReadingsAnswer = z.infer<typeof recordReadingsAnswer>;
+/** One reading is parsed alone, so that a bad one does not hold up the rest. */
+export const parseReading = (value: unknown) => reading.safeParse(value);
+
+export const submitRoomInput = z.object({ roomId: id });
+
+export const saveRunsInput = z.object({ roomId: id, runs: z.array(run).max(20) });
+export type SaveRunsInput = z.infer<typeof saveRunsInput>;
+
+export const roomIdInput = z.object({ roomId: id });
+
+/** Everything a phone needs to measure one room. */
+export type WallBookView = {
+  jobId: string;
+  jobTitle: string;
+  customerName: string;
+  wallBook: WallBook;
+  runs: Run[];
+  rules: FitRules;
+  missing: MissingReading[];
+  tools: Tool[];
+  submittedAt: string | null;
+};
+
+export type FitView = {
+  jobId: string;
+  jobTitle: string;
+  customerName: string;
+  street: string;
+  wallBook: WallBook;
+  runs: Run[];
+  rules: FitRules;
+  fit: Fit;
+  missing: MissingReading[];
+  /** Who took which reading when, for "how it came about". */
+  takenBy: Record<string, string>;
+  releases: ReleaseRow[];
+  /** What would change against the newest revision, in words; null where there is none. */
+  changesSinceRelease: string[] | null;
+};
+
+export type ReleaseRow = {
+  id: string;
+  revision: string;
+  releasedAtWords: string;
+  releasedBy: string;
+  changes: string[];
+  takenUpWords: string | null;
+  isSuperseded: boolean;
+};
+
+export const releaseSheetInput = z.object({
+  roomId: id,
+  /** Why it is released though something is missing or over; required then. */
+  overrideReason: z.string().trim().max(400).default(''),
+  /** Readings and runs that the releaser saw; a change meanwhile is refused. */
+  seenReadingIds: z.array(id),
+});
+export type ReleaseSheetInput = z.infer<typeof releaseSheetInput>;
+
+/** A released sheet, as frozen. */
+export type SheetView = {
+  release: ReleaseRow;
+  overrideReason: string;
+  jobId: string;
+  jobNumber: number;
+  jobTitle: string;
+  customerName: string;
+  street: string;
+  shopName: string;
+  roomName: string;
+  wallBook: WallBook;
+  runs: Run[];
+  rules: FitRules;
+  fit: Fit;
+  engineVersion: string;
+  /** The newest revision, when it is not this one. */
+  newerRevision: string | null;
+  /** Readings that came after the release, or runs that changed. */
+  supersededBy: string[];
+};
+
+export const takeUpSheetInput = z.object({ releaseId: id });
+
+/** What the bench has to build, first need first. */
+export type BenchRow = {
+  releaseId: string;
+  jobId: string;
+  roomId: string;
+  jobNumber: number;
+  jobTitle: string;
+  customerName: string;
+  roomName: string;
+  revision: string;
+  releasedAtWords: string;
+  takenUpWords: string | null;
+  isSuperseded: boolean;
+  installWords: string | null;
+  readyOn: string | null;
+};

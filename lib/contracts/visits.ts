@@ -1,0 +1,187 @@
+/** The diary on the wire: visits, the waiting list, bookings and what is told from site. */
+import { z } from 'zod';
+import { visitKind } from '@/lib/schedule/visit-kind';
+
+const id = z.uuid();
+/** A local day and time in the shop's zone; the server makes the instant of it. */
+const localDate = z.iso.date();
+const localTime = z.string().regex(/^([01]\d|2[0-3]):[0-5]\d$/, 'Write the time as 07:30.');
+
+export const visitStatus = z.enum([
+  'held',
+  'booked',
+  'confirmed',
+  'on-the-way',
+  'on-site',
+  'done',
+  'missed',
+  'called-off',
+]);
+export type VisitStatus = z.infer<typeof visitStatus>;
+
+export const crewView = z.object({
+  id,
+  name: z.string(),
+  does: z.enum(['measure', 'fit']),
+  colour: z.enum(['1', '2', '3', '4', '5', '6']),
+  people: z.array(z.object({ id, name: z.string() })),
+});
+export type CrewView = z.infer<typeof crewView>;
+
+/** One crew's busy time on one day, as the diary draws it. */
+export const pieceView = z.object({
+  id,
+  startsAt: z.iso.datetime(),
+  endsAt: z.iso.datetime(),
+});
+
+export const visitView = z.object({
+  id,
+  version: z.number().int(),
+  kind: visitKind,
+  status: visitStatus,
+  jobId: id,
+  jobNumber: z.number().int(),
+  jobTitle: z.string(),
+  customerName: z.string(),
+  phone: z.string(),
+  street: z.string(),
+  town: z.string(),
+  wayIn: z.string(),
+  crewId: id,
+  crewName: z.string(),
+  startsAt: z.iso.datetime(),
+  endsAt: z.iso.datetime(),
+  windowStartsAt: z.iso.datetime(),
+  windowEndsAt: z.iso.datetime(),
+  /** Ready to be read, in the shop's zone: "Thu 10 Dec", "07:30–08:30". */
+  dayWords: z.string(),
+  windowWords: z.string(),
+  workMinutes: z.number().int(),
+  customerSays: z.string(),
+  confirmedAt: z.iso.datetime().nullable(),
+  arrivedAt: z.iso.datetime().nullable(),
+  leftAt: z.iso.datetime().nullable(),
+  pieces: z.array(pieceView),
+});
+export type VisitView = z.infer<typeof visitView>;
+
+export const listVisitsInput = z.object({
+  /** [from, to) as local dates in the shop's zone. */
+  from: localDate,
+  to: localDate,
+});
+export type ListVisitsInput = z.infer<typeof listVisitsInput>;
+
+/** A job and a kind of visit that it needs next: from when, or why not yet. */
+export const waitingItem = z.object({
+  jobId: id,
+  jobNumber: z.number().int(),
+  kind: visitKind,
+  customerName: z.string(),
+  street: z.string(),
+  town: z.string(),
+  jobTitle: z.string(),
+  workMinutes: z.number().int(),
+  /** now: can be booked today; from: on or after `from`; blocked: not yet. */
+  state: z.enum(['now', 'from', 'blocked']),
+  from: localDate.nullable(),
+  /** "cabinets ready Mon 14 Dec, floor down" or "not yet: no revision released". */
+  why: z.string(),
+  /** Gates that are not passed; booking before `from` needs a reason for each. */
+  openGates: z.array(z.object({ gate: z.string(), words: z.string() })),
+  /** What the customer wished for or said. */
+  wish: z.string(),
+});
+export type WaitingItem = z.infer<typeof waitingItem>;
+
+export const bookVisitInput = z.object({
+  /** Made in the browser: sent twice, it books once and gets the same answer. */
+  idempotencyKey: z.uuid(),
+  jobId: id,
+  kind: visitKind,
+  crewId: id,
+  date: localDate,
+  time: localTime,
+  /** Work on site; over a day it is split into daily pieces. Left out: the estimate. */
+  workMinutes: z.number().int().min(10).max(60_000).optional(),
+  /** Why a gate that is not passed is overridden; without it such a booking is refused. */
+  overrideReason: z.string().trim().max(400).default(''),
+});
+export type BookVisitInput = z.infer<typeof bookVisitInput>;
+
+export const moveVisitInput = z.object({
+  visitId: id,
+  /** The version that the mover saw. */
+  version: z.number().int(),
+  crewId: id,
+  date: localDate,
+  time: localTime,
+  workMinutes: z.number().int().min(10).max(60_000).optional(),
+  overrideReason: z.string().trim().max(400).default(''),
+});
+export type MoveVisitInput = z.infer<typeof moveVisitInput>;
+
+export const callOffVisitInput = z.object({
+  visitId: id,
+  version: z.number().int(),
+  reason: z.string().trim().min(1, 'Say why.').max(400),
+});
+export type CallOffVisitInput = z.infer<typeof callOffVisitInput>;
+
+/** One tap on site. */
+export const reportVisitInput = z.object({
+  visitId: id,
+  what: z.enum(['on-the-way', 'arrived', 'done', 'nobody-home']),
+  /** When it was tapped, by the phone's clock. */
+  at: z.iso.datetime(),
+});
+export type ReportVisitInput = z.infer<typeof reportVisitInput>;
+
+/** Measurer's or crew's list for a local day. */
+export const todayInput = z.object({ date: localDate.optional() });
+export const todayView = z.object({
+  date: localDate,
+  dayWords: z.string(),
+  visits: z.array(
+    visitView.extend({ rooms: z.array(z.object({ id, name: z.string() })), notes: z.string() }),
+  ),
+});
+export type TodayView = z.infer<typeof todayView>;
+
+/** What the customer's page shows; only this visit, nothing else of the shop. */
+export const customerVisitView = z.object({
+  language: z.enum(['en', 'es']),
+  shopName: z.string(),
+  shopPhone: z.string(),
+  kind: visitKind,
+  status: visitStatus,
+  /** "Thursday" / "10 December", in the visit's language and the site's zone. */
+  weekdayWords: z.string(),
+  dateWords: z.string(),
+  windowWords: z.string(),
+  /** "until about 3:30, today and Friday" or ''. */
+  untilWords: z.string(),
+  whoComes: z.array(z.string()),
+  street: z.string(),
+  town: z.string(),
+  customerSays: z.string(),
+  isOldHouse: z.boolean(),
+});
+export type CustomerVisitView = z.infer<typeof customerVisitView>;
+
+export const customerAnswerInput = z.object({
+  token: z.string().min(10).max(60),
+  answer: z.enum(['confirm', 'another-time', 'not-ready']),
+  /** Another time: when would suit. Not ready: what is missing. */
+  words: z.string().trim().max(400).default(''),
+});
+export type CustomerAnswerInput = z.infer<typeof customerAnswerInput>;
+
+export const createCrewInput = z.object({
+  name: z.string().trim().min(1, 'Give the crew a name.').max(40),
+  does: z.enum(['measure', 'fit']),
+  colour: z.enum(['1', '2', '3', '4', '5', '6']),
+  personIds: z.array(id).max(12),
+});
+export type CreateCrewInput = z.infer<typeof createCrewInput>;

@@ -1,0 +1,43 @@
+import type { Database } from '@/db/database';
+import type { ShopRules } from '@/lib/contracts/shop-rules';
+import type { Permission, Role } from '@/lib/permissions';
+import { may } from '@/lib/permissions';
+import type { Log } from './log';
+import { refused } from './problem-response';
+
+export type Shop = {
+  id: string;
+  name: string;
+  phone: string;
+  email: string;
+  region: 'US' | 'UK' | 'AU' | 'EU';
+  zone: string;
+  rules: ShopRules;
+};
+
+export type PersonActor = {
+  kind: 'person';
+  personId: string;
+  userId: string;
+  name: string;
+  role: Role;
+};
+export type CustomerActor = { kind: 'customer'; name: string; customerId: string; visitId: string };
+export type SystemActor = { kind: 'system'; name: string };
+export type Actor = PersonActor | CustomerActor | SystemActor;
+
+/** What every verb is given first: for which shop, by whom, on what, when. */
+export type Context<A extends Actor = Actor> = {
+  shop: Shop;
+  actor: A;
+  db: Database;
+  now: Date;
+  log: Log;
+};
+export type PersonContext = Context<PersonActor>;
+export type CustomerContext = Context<CustomerActor>;
+
+/** The first line of every verb that a person calls. */
+export function mustBeAllowed(ctx: PersonContext, permission: Permission): void {
+  if (!may(ctx.actor.role, permission)) throw refused();
+}

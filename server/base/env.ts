@@ -1,0 +1,54 @@
+import path from 'node:path';
+import { z } from 'zod';
+
+/** The one place that reads the environment. */
+const schema = z.object({
+  DATABASE_URL: z.string().optional(),
+  SETWELL_DATA: z.string().default('.data'),
+  SETWELL_DEMO: z.enum(['0', '1']).default('0'),
+  PUBLIC_URL: z.url().default('http://localhost:3000'),
+  BETTER_AUTH_SECRET: z.string().min(16).optional(),
+  SMS_ACCOUNT_SID: z.string().optional(),
+  SMS_AUTH_TOKEN: z.string().optional(),
+  SMS_FROM: z.string().optional(),
+  SMTP_URL: z.string().optional(),
+  EMAIL_FROM: z.string().default('Setwell <no-reply@setwell.example>'),
+  NODE_ENV: z.enum(['development', 'test', 'production']).default('development'),
+  NEXT_PHASE: z.string().optional(),
+});
+
+export type Env = {
+  databaseUrl: string | null;
+  dataDirectory: string;
+  demo: boolean;
+  publicUrl: string;
+  authSecret: string | null;
+  sms: { accountSid: string; authToken: string; from: string } | null;
+  smtpUrl: string | null;
+  emailFrom: string;
+  production: boolean;
+  building: boolean;
+};
+
+export function env(): Env {
+  const read = schema.parse(process.env);
+  const sms = read.SMS_ACCOUNT_SID && read.SMS_AUTH_TOKEN && read.SMS_FROM;
+  return {
+    databaseUrl: read.DATABASE_URL || null,
+    dataDirectory: path.resolve(/*turbopackIgnore: true*/ process.cwd(), read.SETWELL_DATA),
+    demo: read.SETWELL_DEMO === '1',
+    publicUrl: read.PUBLIC_URL.replace(/\/$/, ''),
+    authSecret: read.BETTER_AUTH_SECRET ?? null,
+    sms: sms
+      ? {
+          accountSid: read.SMS_ACCOUNT_SID as string,
+          authToken: read.SMS_AUTH_TOKEN as string,
+          from: read.SMS_FROM as string,
+        }
+      : null,
+    smtpUrl: read.SMTP_URL || null,
+    emailFrom: read.EMAIL_FROM,
+    production: read.NODE_ENV === 'production',
+    building: read.NEXT_PHASE === 'phase-production-build',
+  };
+}

@@ -1,0 +1,55 @@
+/** Refusals that the outside may read: RFC 9457 problem details. Anything else is a bug and says little. */
+
+export type RefusalDetail = {
+  status: 400 | 401 | 403 | 404 | 409 | 410 | 422 | 429 | 503;
+  /** Stable, kebab-case. */
+  code: string;
+  /** What happened, what was kept, what to do. */
+  message: string;
+  /** Per field of the form: path → words. */
+  errors?: Record<string, string>;
+  /** What the caller needs to go on, such as the current visit. */
+  current?: unknown;
+};
+
+export class Refusal extends Error {
+  constructor(readonly refusal: RefusalDetail) {
+    super(refusal.message);
+    this.name = 'Refusal';
+  }
+}
+
+export function notFound(what: string): Refusal {
+  return new Refusal({
+    status: 404,
+    code: 'not-found',
+    message: `There is no such ${what} in this shop.`,
+  });
+}
+
+export function refused(): Refusal {
+  return new Refusal({
+    status: 403,
+    code: 'not-your-role',
+    message: 'Your role in this shop does not include this. The owner can change roles.',
+  });
+}
+
+export function problemResponse(refusal: RefusalDetail): Response {
+  const { status, code, message, errors, current } = refusal;
+  return Response.json(
+    {
+      type: `urn:setwell:problem:${code}`,
+      title: message,
+      status,
+      code,
+      detail: message,
+      errors,
+      current,
+    },
+    {
+      status,
+      headers: { 'content-type': 'application/problem+json', 'cache-control': 'no-store' },
+    },
+  );
+}
