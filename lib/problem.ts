@@ -12,3 +12,16 @@ export type Problem = {
 
 /** A value with the problems found on the way; the value is null when an error forbids one. */
 export type Outcome<T> = { value: T | null; problems: Problem[] };
+
+export function problem(code: string, message: string, about: string[] = []): Problem {
+  return { code, message, about, severity: 'error' };
+}
+
+export function warning(code: string, message: string, about: string[] = []): Problem {
+  return { code, message, about, severity: 'warning' };
+}
+
+/** No value, for this one reason; assignable to any `Outcome`. */
+export function refused(...problems: Problem[]): { value: null; problems: Problem[] } {
+  return { value: null, problems };
+}
