@@ -1,14 +1,17 @@
 /** How the server says that something went wrong: RFC 9457 problem details, with one text per field. */
 export type ProblemDetails = {
-  /** A stable name: "crew-already-booked", "invalid-input". */
   type: string;
   /** What happened, in a few words. */
   title: string;
   status: number;
-  /** What was kept and what to do. */
+  /** What happened, what was kept, what to do. */
   detail?: string;
+  /** Stable, kebab-case, to act on: "crew-already-booked". */
+  code?: string;
   /** By the path of the field: "email", "units.3.widthMm". */
   errors?: Record<string, string>;
+  /** What the caller needs to go on, such as the visit as it is now. */
+  current?: unknown;
 };
 
 /**
@@ -17,14 +20,16 @@ export type ProblemDetails = {
  */
 export function readProblemDetails(body: unknown): ProblemDetails | null {
   if (typeof body !== 'object' || body === null) return null;
-  const { type, title, status, detail, errors } = body as Record<string, unknown>;
+  const { type, title, status, detail, code, errors, current } = body as Record<string, unknown>;
   if (typeof title !== 'string' || typeof status !== 'number') return null;
   return {
     type: typeof type === 'string' ? type : 'about:blank',
     title,
     status,
-    ...(typeof detail === 'string' ? { detail } : {}),
+    ...(typeof detail === 'string' && detail !== title ? { detail } : {}),
+    ...(typeof code === 'string' ? { code } : {}),
     ...(isTextRecord(errors) ? { errors } : {}),
+    ...(current === undefined ? {} : { current }),
   };
 }
 

@@ -9,9 +9,9 @@ export function SkeletonTable({ what, rows = 8 }: { what: string; rows?: number 
       <div className="border-b border-ink pb-2">
         <Skeleton className="h-7 w-48" />
       </div>
-      {Array.from({ length: rows }, (_, row) => (
-        <div key={row} className="grid grid-cols-4 gap-6 border-b border-rule py-2.5">
-          {widths.slice(0, 4).map((_width, column) => (
+      {Array.from({ length: rows }, (_, row) => row).map((row) => (
+        <div key={`row ${row}`} className="grid grid-cols-4 gap-6 border-b border-rule py-2.5">
+          {[0, 1, 2, 3].map((column) => (
             <Skeleton key={column} className={`h-4 ${widths[(row + column) % widths.length]}`} />
           ))}
         </div>

@@ -7,13 +7,13 @@ const byWords = new Intl.Collator('en', { numeric: true, sensitivity: 'base' });
 /** A new list; rows that compare equal keep the order in which they came. */
 export function sortRows<Row>(
   rows: readonly Row[],
-  valueOf: (row: Row) => SortValue,
+  read: (row: Row) => SortValue,
   isDescending: boolean,
 ): Row[] {
   const direction = isDescending ? -1 : 1;
   return [...rows].sort((left, right) => {
-    const a = valueOf(left);
-    const b = valueOf(right);
+    const a = read(left);
+    const b = read(right);
     if (a == null || b == null) return Number(a == null) - Number(b == null);
     return direction * compare(a, b);
   });

@@ -1,6 +1,6 @@
 'use client';
 
-import { useEffect, useState, useSyncExternalStore } from 'react';
+import { useEffect, useRef, useSyncExternalStore } from 'react';
 import { Button } from './button';
 import {
   closeToast,
@@ -28,20 +28,22 @@ export function Toaster() {
 }
 
 function ToastLine({ toast }: { toast: Toast }) {
-  const [isHeld, setIsHeld] = useState(false);
+  const ref = useRef<HTMLDivElement>(null);
 
   useEffect(() => {
-    if (isHeld || toast.isProblem) return;
-    const timer = setTimeout(() => closeToast(toast.id), toastSeconds * 1000);
+    if (toast.isProblem) return;
+    let timer = setTimeout(leave, toastSeconds * 1000);
+    // A hand on it holds it: whoever is about to press Undo gets the time to.
+    function leave() {
+      if (!ref.current?.matches(':hover, :focus-within')) return closeToast(toast.id);
+      timer = setTimeout(leave, 1000);
+    }
     return () => clearTimeout(timer);
-  }, [isHeld, toast.id, toast.isProblem]);
+  }, [toast.id, toast.isProblem]);
 
   return (
     <div
-      onPointerEnter={() => setIsHeld(true)}
-      onPointerLeave={() => setIsHeld(false)}
-      onFocus={() => setIsHeld(true)}
-      onBlur={() => setIsHeld(false)}
+      ref={ref}
       className={`flex items-center justify-between gap-4 rounded border border-l-4 bg-sheet py-1.5 pr-1.5 pl-3 ${
         toast.isProblem ? 'border-chalk' : 'border-ink'
       }`}

@@ -17,6 +17,17 @@ describe('readProblemDetails', () => {
     expect(readProblemDetails({ title: 'Not found', status: 404 })?.type).toBe('about:blank');
   });
 
+  it('says once what title and detail say alike, and keeps what is needed to go on', () => {
+    const problem = {
+      type: 'urn:x',
+      title: 'Moved',
+      status: 409,
+      code: 'stale',
+      current: { v: 2 },
+    };
+    expect(readProblemDetails({ ...problem, detail: 'Moved' })).toEqual(problem);
+  });
+
   it('leaves out errors that are not texts', () => {
     const problem = readProblemDetails({ title: 'Not saved', status: 422, errors: { email: 3 } });
     expect(problem).toEqual({ type: 'about:blank', title: 'Not saved', status: 422 });

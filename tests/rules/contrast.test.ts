@@ -68,15 +68,15 @@ function colours(block: string): Record<string, string> {
 }
 
 function contrast(one: string | undefined, other: string | undefined): number {
-  const [high, low] = [luminance(one), luminance(other)].sort((a, b) => b - a);
-  return (high! + 0.05) / (low! + 0.05);
+  const [high, low] = [luminance(one), luminance(other)];
+  return (Math.max(high, low) + 0.05) / (Math.min(high, low) + 0.05);
 }
 
 function luminance(hex: string | undefined): number {
   if (!hex) throw new Error('a colour is missing from globals.css');
-  const [r, g, b] = [1, 3, 5].map((at) => {
+  const linear = (at: number) => {
     const channel = Number.parseInt(hex.slice(at, at + 2), 16) / 255;
     return channel <= 0.04045 ? channel / 12.92 : ((channel + 0.055) / 1.055) ** 2.4;
-  });
-  return 0.2126 * r! + 0.7152 * g! + 0.0722 * b!;
+  };
+  return 0.2126 * linear(1) + 0.7152 * linear(3) + 0.0722 * linear(5);
 }

@@ -1,0 +1,44 @@
+import { askServer, RequestProblem } from '@/components/shell/ask-server';
+import type { CreateShopInput, JoinShopInput } from '@/lib/contracts/people';
+import { apiPaths } from '@/lib/paths';
+
+/** Every request of the door. The answers carry the session's cookie; nothing in them is read. */
+
+export async function signIn(input: { email: string; password: string }): Promise<void> {
+  try {
+    await askServer(apiPaths.signIn(), { body: input });
+  } catch (caught) {
+    throw signInProblem(caught);
+  }
+}
+
+export async function signUpShop(input: CreateShopInput): Promise<void> {
+  await askServer(apiPaths.shops(), { body: input });
+}
+
+export async function joinShop(input: JoinShopInput): Promise<void> {
+  await askServer(apiPaths.joinShop(), { body: input });
+}
+
+export async function signOut(): Promise<void> {
+  await askServer(apiPaths.signOut(), { body: {} });
+}
+
+export async function switchShop(shopId: string): Promise<void> {
+  await askServer(apiPaths.switchShop(), { body: { shopId } });
+}
+
+/** The sign-in library says only a status; which of the two was wrong is nobody's business. */
+function signInProblem(caught: unknown): unknown {
+  if (!(caught instanceof RequestProblem)) return caught;
+  const { status } = caught.problem;
+  const says = (title: string, detail: string) =>
+    new RequestProblem({ type: 'urn:setwell:problem:sign-in', title, status, detail });
+  if (status === 400 || status === 401 || status === 403) {
+    return says('This e-mail and password do not go together.', 'Check both and try again.');
+  }
+  if (status === 429) {
+    return says('Too many tries in a short time.', 'Wait a minute, then try again.');
+  }
+  return caught;
+}

@@ -1,0 +1,39 @@
+'use client';
+
+import Link from 'next/link';
+import { usePathname } from 'next/navigation';
+import { currentOfficePage, type OfficePage } from './office-pages';
+
+export type OfficeCounts = Partial<Record<OfficePage['name'], { count: number; words: string }>>;
+
+/** The office's pages, the current one marked by weight and by a stroke on the margin line. */
+export function OfficeLinks({ pages, counts }: { pages: OfficePage[]; counts: OfficeCounts }) {
+  const current = currentOfficePage(usePathname());
+  return (
+    <ul>
+      {pages.map((page) => {
+        const isCurrent = page.name === current?.name;
+        const badge = counts[page.name];
+        return (
+          <li key={page.name}>
+            <Link
+              href={page.path}
+              aria-current={isCurrent ? 'page' : undefined}
+              className={`flex min-h-9 items-center justify-between border-r-4 pr-3 hover:text-ink hover:underline max-md:min-h-thumb max-md:border-r-0 max-md:border-l-4 max-md:pl-3 ${
+                isCurrent ? 'border-pine font-bold text-ink' : 'border-transparent text-graphite'
+              }`}
+            >
+              {page.word}
+              {badge && badge.count > 0 ? (
+                <span className="font-bold text-chalk">
+                  {badge.count}
+                  <span className="sr-only"> {badge.words}</span>
+                </span>
+              ) : null}
+            </Link>
+          </li>
+        );
+      })}
+    </ul>
+  );
+}
