@@ -3,8 +3,8 @@ import { defineConfig } from 'vitest/config';
 
 const resolve = {
   alias: {
-    '@': path.resolve(__dirname),
-    'server-only': path.resolve(__dirname, 'tests/setup/server-only.ts'),
+    '@': path.resolve(import.meta.dirname),
+    'server-only': path.resolve(import.meta.dirname, 'tests/setup/server-only.ts'),
   },
 };
 
@@ -16,7 +16,9 @@ export default defineConfig({
         resolve,
         test: {
           name: 'unit',
-          include: ['lib', 'reference', 'rules', 'components'].map((part) => `tests/${part}/**/*.test.ts`),
+          include: ['lib', 'reference', 'rules', 'components'].map(
+            (part) => `tests/${part}/**/*.test.ts`,
+          ),
         },
       },
       {

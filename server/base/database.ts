@@ -12,7 +12,7 @@ export function database(): Promise<OpenDatabase> {
 }
 
 /** Tests put their own in. */
-export function useDatabase(open: OpenDatabase) {
+export function setDatabase(open: OpenDatabase) {
   (globalThis as Held).__setwellDatabase = Promise.resolve(open);
 }
 

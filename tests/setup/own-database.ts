@@ -6,7 +6,7 @@ import { afterAll, inject } from 'vitest';
 import type { OpenDatabase } from '@/db/database';
 import { openInMemory } from '@/db/open-embedded';
 import { openServer } from '@/db/open-server';
-import { useDatabase } from '@/server/base/database';
+import { setDatabase } from '@/server/base/database';
 
 const dataFolder = mkdtempSync(path.join(os.tmpdir(), 'setwell-test-'));
 process.env.SETWELL_DATA = dataFolder;
@@ -16,7 +16,7 @@ process.env.BETTER_AUTH_SECRET = 'only-for-tests-only-for-tests';
 const serverUrl = inject('serverUrl');
 const name = `setwell_test_${process.pid}_${Math.floor(performance.now() * 1000)}`;
 const open = serverUrl ? await openOwnOnServer(serverUrl) : await openOwnEmbedded();
-useDatabase(open);
+setDatabase(open);
 
 afterAll(async () => {
   await open.close();

@@ -1,0 +1,27 @@
+import { seedDemo } from '@/db/seed/seed-demo';
+import { database } from '@/server/base/database';
+import { env } from '@/server/base/env';
+import { log } from '@/server/base/log';
+import { startWorker } from '@/server/messages/worker';
+import { hashPassword } from '@/server/people/sign-in';
+import { getPorts } from '@/server/ports/choose-ports';
+
+/** Once a process, before the first request is answered. */
+export async function startUp(): Promise<void> {
+  const { building, demo } = env();
+  if (building) return;
+  const open = await database();
+  await getPorts();
+  if (demo) await seedDemo(open.db, { now: new Date(), hashPassword });
+  const stopWorker = startWorker();
+  log('started', { database: open.kind, demo });
+
+  for (const signal of ['SIGTERM', 'SIGINT'] as const) {
+    process.once(signal, async () => {
+      await stopWorker();
+      await open.close();
+      log('stopped');
+      process.exit(0);
+    });
+  }
+}

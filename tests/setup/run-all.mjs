@@ -1,0 +1,39 @@
+/** `npm test`: everything, in order of how soon it tells. */
+import { spawnSync } from 'node:child_process';
+import { ensureInstalled } from '../../server/start/ensure-installed.mjs';
+
+const began = Date.now();
+const say = (words) => console.log(`\n· ${words}`);
+ensureInstalled(say);
+const { ensureBuilt } = await import('../../server/start/ensure-built.mjs');
+const { findChromium } = await import('./find-chromium.mjs');
+const { runVitest } = await import('./run-vitest.mjs');
+
+const total = { passed: 0, failed: 0 };
+const count = ({ passed, failed }) => {
+  total.passed += passed;
+  total.failed += failed;
+};
+const step = (words, command, args) => {
+  say(words);
+  const failed = spawnSync(command, args, { stdio: 'inherit' }).status !== 0;
+  count(failed ? { passed: 0, failed: 1 } : { passed: 1, failed: 0 });
+};
+
+step('format and lint', process.execPath, ['node_modules/@biomejs/biome/bin/biome', 'check', '.']);
+step('types', process.execPath, ['node_modules/typescript/lib/tsc.js', '--noEmit']);
+say('unit tests, published references, rules');
+count(runVitest('unit'));
+say('database and API tests, on the embedded database');
+count(runVitest('database'));
+say('browser tests');
+const chromium = findChromium();
+if (chromium) {
+  ensureBuilt(say);
+  count(runVitest('browser', { CHROMIUM: chromium }));
+} else {
+  count({ passed: 0, failed: 1 });
+}
+console.log(`\n${Math.round((Date.now() - began) / 1000)} s`);
+console.log(`${total.passed} passed, ${total.failed} failed`);
+process.exit(total.failed === 0 ? 0 : 1);
