@@ -66,8 +66,13 @@ export const apiPaths = {
   messages: () => '/api/messages',
 
   customerVisit: (token: string) => `/api/v/${part(token)}`,
+  /** Where the texting provider posts texts from customers and reports on ours. */
+  smsWebhook: () => '/api/webhooks/sms',
   health: () => '/api/health',
 } as const;
+
+/** What an address may be written with (RFC 3986, 2). */
+const addressShape = /^\/(?!\/)[\w\-.~:/?#[\]@!$&'()*+,;=%]*$/;
 
 /**
  * An address on this site, or the fallback. Anything else ("https://…", "//…", "/\…") could lead a
@@ -75,6 +80,5 @@ export const apiPaths = {
  * Example: `safeNext('//evil.example', '/diary')` is `/diary`.
  */
 export function safeNext(next: string | null | undefined, fallback: string): string {
-  if (!next || !/^\/(?![/\\])/.test(next) || /[\u0000-\u001f\\]/.test(next)) return fallback;
-  return next;
+  return next && addressShape.test(next) ? next : fallback;
 }
