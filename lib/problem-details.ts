@@ -29,6 +29,8 @@ export function readProblemDetails(body: unknown): ProblemDetails | null {
     ...(typeof detail === 'string' && detail !== title ? { detail } : {}),
     ...(typeof code === 'string' ? { code } : {}),
     ...(isTextRecord(errors) ? { errors } : {}),
+    ...(typeof code === 'string' ? { code } : {}),
+    ...(current === undefined ? {} : { current }),
     ...(current === undefined ? {} : { current }),
   };
 }

@@ -37,19 +37,18 @@ export function refused(): Refusal {
 
 export function problemResponse(refusal: RefusalDetail): Response {
   const { status, code, message, errors, current } = refusal;
+  const [title, detail] = firstSentence(message);
   return Response.json(
-    {
-      type: `urn:setwell:problem:${code}`,
-      title: message,
-      status,
-      code,
-      detail: message,
-      errors,
-      current,
-    },
+    { type: `urn:setwell:problem:${code}`, title, status, code, detail, errors, current },
     {
       status,
       headers: { 'content-type': 'application/problem+json', 'cache-control': 'no-store' },
     },
   );
+}
+
+/** What happened is the title; what was kept and what to do is the detail. */
+function firstSentence(message: string): [string, string | undefined] {
+  const end = message.search(/\.\s/);
+  return end < 0 ? [message, undefined] : [message.slice(0, end), message.slice(end + 2)];
 }

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import type { z } from 'zod';
 import { Refusal } from './problem-response';
 
 /** Enough for a day's readings from one phone. */

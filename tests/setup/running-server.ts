@@ -18,7 +18,7 @@ export default async function setup(project: TestProject) {
   const { ensureBuilt } = await import('../../server/start/ensure-built.mjs');
   const { findChromium } = await import('./find-chromium.mjs');
   const { serve } = await import('../../server/start/serve.mjs');
-  const chromium: string | null = findChromium();
+  const chromium = findChromium() ?? null;
   if (!chromium) throw new Error('The browser tests need Chromium.');
   ensureBuilt((words: string) => console.log(`· ${words}`));
   const dataDirectory = mkdtempSync(path.join(os.tmpdir(), 'setwell-browser-'));
