@@ -58,6 +58,8 @@ export const apiPaths = {
 
   visits: () => '/api/visits',
   visit: (visitId: string) => `/api/visits/${part(visitId)}`,
+  callOffVisit: (visitId: string) => `/api/visits/${part(visitId)}/call-off`,
+  reportVisit: (visitId: string) => `/api/visits/${part(visitId)}/report`,
   openings: () => '/api/openings',
   waiting: () => '/api/waiting',
   crews: () => '/api/crews',
