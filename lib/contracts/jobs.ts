@@ -61,6 +61,8 @@ export type ChangeJobInput = z.infer<typeof changeJobInput>;
 export const sayReadyInput = z.object({ jobId: id, readyOn: z.iso.date().nullable() });
 export type SayReadyInput = z.infer<typeof sayReadyInput>;
 
+export const jobIdInput = z.object({ jobId: id });
+
 export const listJobsInput = z.object({
   /** Name, street, phone, job number or title; empty: all. */
   search: z.string().trim().max(120).default(''),
