@@ -1,0 +1,29 @@
+import type { Metadata } from 'next';
+import { DiaryScreen } from '@/components/diary/diary-screen';
+import { may } from '@/lib/permissions';
+import { isLocalDate } from '@/lib/time/civil';
+import { localDate } from '@/lib/time/local-moment';
+import { pageContext } from '@/server/base/page-context';
+import { listCrews } from '@/server/shops/list-crews';
+
+export const metadata: Metadata = { title: 'Diary' };
+
+export default async function DiaryPage({
+  searchParams,
+}: {
+  searchParams: Promise<{ on?: string }>;
+}) {
+  const ctx = await pageContext('visits:read');
+  const { on } = await searchParams;
+  const { zone, rules } = ctx.shop;
+  const { dayStart, dayEnd, workdays } = rules.booking;
+  return (
+    <DiaryScreen
+      zone={zone}
+      startOn={on && isLocalDate(on) ? on : localDate(ctx.now, zone)}
+      hours={{ dayStart, dayEnd, workdays }}
+      crews={await listCrews(ctx)}
+      mayBook={may(ctx.actor.role, 'visits:book')}
+    />
+  );
+}

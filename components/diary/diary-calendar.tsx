@@ -1,0 +1,122 @@
+'use client';
+
+import type { DatesSetArg, EventClickArg, EventDropArg } from '@fullcalendar/core';
+import dayGridPlugin from '@fullcalendar/daygrid';
+import interactionPlugin, {
+  type DropArg,
+  type EventResizeDoneArg,
+} from '@fullcalendar/interaction';
+import momentTimezonePlugin from '@fullcalendar/moment-timezone';
+import FullCalendar from '@fullcalendar/react';
+import timeGridPlugin from '@fullcalendar/timegrid';
+import { type RefObject, useMemo } from 'react';
+import type { CrewView, VisitView } from '@/lib/contracts/visits';
+import './diary-calendar.css';
+import { diaryEvents, type EventDetail } from './diary-events';
+import { VisitEvent } from './visit-event';
+
+export type DiaryView = 'dayGridMonth' | 'timeGridWeek' | 'timeGridDay';
+
+type DiaryCalendarProps = {
+  calendarRef: RefObject<FullCalendar | null>;
+  zone: string;
+  view: DiaryView;
+  startOn: string;
+  hours: { dayStart: string; dayEnd: string; workdays: number[] };
+  visits: readonly VisitView[];
+  crews: readonly CrewView[];
+  shownCrewIds: ReadonlySet<string>;
+  mayBook: boolean;
+  onRange: (range: { from: string; to: string; title: string; view: DiaryView }) => void;
+  onOpen: (visit: VisitView) => void;
+  /** Dropped from the waiting list: local date, and time where the view has hours. */
+  onDrop: (waitingKey: string, date: string, time: string | null) => void;
+  onMove: (visit: VisitView, date: string, time: string, takeBack: () => void) => void;
+  onStretch: (visit: VisitView, workMinutes: number, takeBack: () => void) => void;
+};
+
+export function DiaryCalendar(props: DiaryCalendarProps) {
+  const { visits, crews, shownCrewIds, mayBook, hours } = props;
+  // A new array at each render would snap a dragged visit back.
+  const events = useMemo(
+    () => diaryEvents(visits, crews, shownCrewIds, mayBook),
+    [visits, crews, shownCrewIds, mayBook],
+  );
+  const businessHours = useMemo(
+    () => ({
+      daysOfWeek: hours.workdays.map((day) => day % 7),
+      startTime: hours.dayStart,
+      endTime: hours.dayEnd,
+    }),
+    [hours],
+  );
+
+  return (
+    <FullCalendar
+      ref={props.calendarRef}
+      plugins={[dayGridPlugin, timeGridPlugin, interactionPlugin, momentTimezonePlugin]}
+      timeZone={props.zone}
+      initialView={props.view}
+      initialDate={props.startOn}
+      headerToolbar={false}
+      height="100%"
+      firstDay={1}
+      allDaySlot={false}
+      nowIndicator
+      slotDuration="00:30:00"
+      snapDuration="00:15:00"
+      slotMinTime={hoursAround(hours.dayStart, -1)}
+      slotMaxTime={hoursAround(hours.dayEnd, 3)}
+      slotLabelFormat={{ hour: '2-digit', minute: '2-digit', hour12: false }}
+      dayHeaderFormat={{ weekday: 'short', day: 'numeric' }}
+      businessHours={businessHours}
+      hiddenDays={hiddenDays(hours.workdays)}
+      eventTimeFormat={{ hour: '2-digit', minute: '2-digit', hour12: false }}
+      dayMaxEvents={5}
+      droppable={mayBook}
+      events={events}
+      eventContent={({ event, view }) => (
+        <VisitEvent
+          detail={event.extendedProps as EventDetail}
+          isCompact={view.type === 'dayGridMonth'}
+        />
+      )}
+      eventClick={({ event, jsEvent }: EventClickArg) => {
+        jsEvent.preventDefault();
+        props.onOpen((event.extendedProps as EventDetail).visit);
+      }}
+      drop={({ draggedEl, dateStr, allDay }: DropArg) => {
+        const key = draggedEl.getAttribute('data-waiting');
+        if (key) props.onDrop(key, dateStr.slice(0, 10), allDay ? null : dateStr.slice(11, 16));
+      }}
+      eventDrop={({ event, revert }: EventDropArg) => {
+        const { visit } = event.extendedProps as EventDetail;
+        props.onMove(visit, event.startStr.slice(0, 10), event.startStr.slice(11, 16), revert);
+      }}
+      eventResize={({ event, revert }: EventResizeDoneArg) => {
+        const { visit } = event.extendedProps as EventDetail;
+        const minutes = (Number(event.end) - Number(event.start)) / 60_000;
+        props.onStretch(visit, minutes, revert);
+      }}
+      datesSet={({ startStr, endStr, view }: DatesSetArg) =>
+        props.onRange({
+          from: startStr.slice(0, 10),
+          to: endStr.slice(0, 10),
+          title: view.title,
+          view: view.type as DiaryView,
+        })
+      }
+    />
+  );
+}
+
+/** Weekends are folded away where the shop never works them. */
+function hiddenDays(workdays: number[]): number[] {
+  return [6, 7].filter((day) => !workdays.includes(day)).map((day) => day % 7);
+}
+
+/** Whole hours before or after a local time, within the day: ("07:30", −1) is "06:00". */
+function hoursAround(time: string, hours: number): string {
+  const hour = Math.min(24, Math.max(0, Number(time.slice(0, 2)) + hours));
+  return `${String(hour).padStart(2, '0')}:00:00`;
+}
