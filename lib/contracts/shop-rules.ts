@@ -91,3 +91,54 @@ export type BookingRules = z.infer<typeof bookingRules>;
 
 export const shopRules = z.object({ fit: fitRules, booking: bookingRules });
 export type ShopRules = z.infer<typeof shopRules>;
+
+/** What the shop is called, where it is, and all of its rules. */
+export const shopSettings = shopRules.extend({
+  name: z.string(),
+  phone: z.string(),
+  email: z.string(),
+  region: z.enum(['US', 'UK', 'AU', 'EU']),
+  zone: z.string(),
+});
+export type ShopSettings = z.infer<typeof shopSettings>;
+
+const orderedFit = fitRules.superRefine((fit, ctx) => {
+  const mustNotFall = (lesser: keyof FitRules, greater: keyof FitRules, message: string) => {
+    if (Number(fit[lesser]) > Number(fit[greater])) {
+      ctx.addIssue({ code: 'custom', path: [greater], message });
+    }
+  };
+  mustNotFall('fillerLeastMm', 'fillerAimMm', 'The aim is less than the least filler.');
+  mustNotFall('fillerAimMm', 'fillerMostMm', 'The most is less than the aim.');
+  mustNotFall('legMinMm', 'legMaxMm', 'The longest leg is shorter than the shortest.');
+  mustNotFall('plumbFlagMm', 'plumbSeriousMm', 'Serious comes before the flag.');
+  mustNotFall('piecesAskMm', 'piecesRefuseMm', 'Refusing comes before asking.');
+});
+
+const clock = /^([01]\d|2[0-3]):[0-5]\d$/;
+
+const orderedBooking = bookingRules.superRefine((booking, ctx) => {
+  for (const field of ['dayStart', 'dayEnd', 'quietFrom', 'quietUntil'] as const) {
+    if (!clock.test(booking[field])) {
+      ctx.addIssue({ code: 'custom', path: [field], message: 'Write the time as 07:30.' });
+    }
+  }
+  if (booking.dayStart >= booking.dayEnd) {
+    ctx.addIssue({ code: 'custom', path: ['dayEnd'], message: 'The day ends before it starts.' });
+  }
+  if (booking.workdays.length === 0) {
+    ctx.addIssue({ code: 'custom', path: ['workdays'], message: 'Name a day that is worked.' });
+  }
+});
+
+/** Only what is given is changed; each set of rules is given whole. */
+export const changeShopRulesInput = z.object({
+  name: z.string().trim().min(1, 'Give the shop a name.').max(80).optional(),
+  /** As typed; kept as E.164. */
+  phone: z.string().trim().max(40).optional(),
+  email: z.union([z.literal(''), z.email('That is no e-mail address.').max(200)]).optional(),
+  zone: z.string().min(1).max(60).optional(),
+  fit: orderedFit.optional(),
+  booking: orderedBooking.optional(),
+});
+export type ChangeShopRulesInput = z.infer<typeof changeShopRulesInput>;

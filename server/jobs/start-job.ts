@@ -4,12 +4,12 @@ import { consents, customers, jobs, shops, sites } from '@/db/schema';
 import type { StartJobInput } from '@/lib/contracts/jobs';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
-import { phoneOf } from './phone-of';
+import { phoneOf } from '@/server/shops/phone-of';
 
 /** The call that starts it all: customer, site and job, with what the customer agreed to, or nothing. */
 export async function startJob(ctx: PersonContext, input: StartJobInput) {
   mustBeAllowed(ctx, 'jobs:change');
-  const phone = phoneOf(ctx.shop, input.customer.phone);
+  const phone = phoneOf(ctx.shop, input.customer.phone, 'customer.phone');
   return ctx.db.transaction(async (tx) => {
     const shopId = ctx.shop.id;
     const { mayText, mayEmail, ...customer } = input.customer;
@@ -22,7 +22,7 @@ export async function startJob(ctx: PersonContext, input: StartJobInput) {
     await writeConsents(tx, ctx, {
       customerId,
       sms: mayText && phone !== '',
-      email: mayEmail && customer.email !== '',
+      email: customer.email === '' ? null : mayEmail,
     });
     const siteId = await written(
       tx
@@ -71,22 +71,28 @@ async function nextNumber(tx: Transaction, shopId: string): Promise<number> {
   return taken.next - 1;
 }
 
+/**
+ * A text needs a yes, so no row is written where nobody asked; an e-mail about one's own visit needs
+ * only that it was not refused, so a no is written down as well.
+ */
 async function writeConsents(
   tx: Transaction,
   ctx: PersonContext,
-  given: { customerId: string; sms: boolean; email: boolean },
+  customer: { customerId: string; sms: boolean; email: boolean | null },
 ): Promise<void> {
-  const rows = (['sms', 'email'] as const)
-    .filter((channel) => given[channel])
-    .map((channel) => ({
-      shopId: ctx.shop.id,
-      customerId: given.customerId,
-      channel,
-      given: true,
-      how: 'asked when the job was taken',
-      byPersonId: ctx.actor.personId,
-      at: ctx.now,
-    }));
+  const row = (channel: 'sms' | 'email', given: boolean) => ({
+    shopId: ctx.shop.id,
+    customerId: customer.customerId,
+    channel,
+    given,
+    how: given ? 'agreed when the job was taken' : 'not agreed when the job was taken',
+    byPersonId: ctx.actor.personId,
+    at: ctx.now,
+  });
+  const rows = [
+    ...(customer.sms ? [row('sms', true)] : []),
+    ...(customer.email === null ? [] : [row('email', customer.email)]),
+  ];
   if (rows.length > 0) await tx.insert(consents).values(rows);
 }
 

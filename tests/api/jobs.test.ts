@@ -65,7 +65,7 @@ describe('jobs', () => {
     expect(given).toEqual([
       {
         channel: 'sms',
-        how: 'asked when the job was taken',
+        how: 'agreed when the job was taken',
         by: shop.people.scheduler.personId,
       },
     ]);
