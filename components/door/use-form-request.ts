@@ -30,7 +30,10 @@ export function useFormRequest(
     event.preventDefault();
     if (!isBusy) run(readFields(event.currentTarget));
   };
-  return { isBusy, problem, run, submit, errorOf: (field: string) => problem?.errors?.[field] };
+  const errorOf = (field: string) => problem?.errors?.[field];
+  /** For a form that stays on the screen after its success. */
+  const rest = () => setIsBusy(false);
+  return { isBusy, problem, run, submit, errorOf, rest };
 }
 
 function readFields(form: HTMLFormElement): Record<string, string> {

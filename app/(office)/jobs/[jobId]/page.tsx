@@ -1,0 +1,64 @@
+import type { Metadata } from 'next';
+import { JobFacts } from '@/components/jobs/job-facts';
+import { JobStory } from '@/components/jobs/job-story';
+import { RoomList } from '@/components/jobs/room-list';
+import { SiteForm } from '@/components/jobs/site-form';
+import { LinkButton } from '@/components/ui/link-button';
+import { TitleBlock } from '@/components/ui/title-block';
+import { paths } from '@/lib/paths';
+import { may } from '@/lib/permissions';
+import { stageWords } from '@/lib/schedule/stages';
+import { found } from '@/server/base/found';
+import { pageContext } from '@/server/base/page-context';
+import { getJob } from '@/server/jobs/get-job';
+import { listRooms } from '@/server/walls/list-rooms';
+
+export const metadata: Metadata = { title: 'Job' };
+
+export default async function JobPage({ params }: { params: Promise<{ jobId: string }> }) {
+  const ctx = await pageContext('jobs:read');
+  const { jobId } = await params;
+  const job = await found(getJob(ctx, { jobId }));
+  const rooms = await listRooms(ctx, { jobId });
+  return (
+    <>
+      <TitleBlock
+        level={1}
+        title={`${job.customerName} · ${job.title}`}
+        meta={`job ${job.number} · ${stageWords[job.stage]}`}
+      />
+      <div className="mt-4 grid gap-x-10 gap-y-6 xl:grid-cols-[minmax(0,1fr)_minmax(0,1fr)]">
+        <section>
+          <TitleBlock
+            title="Who and where"
+            meta={
+              may(ctx.actor.role, 'visits:book') ? (
+                <LinkButton look="plain" href={paths.diary()}>
+                  Book in the diary
+                </LinkButton>
+              ) : null
+            }
+          />
+          <JobFacts job={job} />
+        </section>
+        <section>
+          <TitleBlock title="Rooms" meta={`${rooms.length} of ${job.roomCount}`} />
+          <RoomList jobId={job.id} rooms={rooms} />
+        </section>
+        {may(ctx.actor.role, 'jobs:change') ? (
+          <section>
+            <TitleBlock title="State of the site" />
+            <SiteForm
+              job={job}
+              key={JSON.stringify([job.notReady, job.floorAgreed, job.wallsReady])}
+            />
+          </section>
+        ) : null}
+        <section>
+          <TitleBlock title="What happened" />
+          <JobStory story={job.story} />
+        </section>
+      </div>
+    </>
+  );
+}

@@ -1,0 +1,21 @@
+import type { ReactNode } from 'react';
+import { Providers } from '@/app/providers';
+import { OfficeShell } from '@/components/shell/office-shell';
+import { pageContext } from '@/server/base/page-context';
+import { listMyShops } from '@/server/people/switch-shop';
+
+export default async function OfficeLayout({ children }: { children: ReactNode }) {
+  const ctx = await pageContext('shop:read');
+  const { shop, actor } = ctx;
+  return (
+    <Providers>
+      <OfficeShell
+        shop={{ id: shop.id, name: shop.name }}
+        shops={await listMyShops(ctx)}
+        person={{ name: actor.name, role: actor.role }}
+      >
+        {children}
+      </OfficeShell>
+    </Providers>
+  );
+}

@@ -1,0 +1,89 @@
+'use client';
+
+import { useRouter } from 'next/navigation';
+import { type FormEvent, useState } from 'react';
+import { askServer, problemOf } from '@/components/shell/ask-server';
+import { Button } from '@/components/ui/button';
+import { CheckField } from '@/components/ui/check-field';
+import { FormError } from '@/components/ui/form-error';
+import { SelectField } from '@/components/ui/select-field';
+import { TextField } from '@/components/ui/text-field';
+import type { PersonView } from '@/lib/contracts/people';
+import type { CreateCrewInput } from '@/lib/contracts/visits';
+import { apiPaths } from '@/lib/paths';
+import type { ProblemDetails } from '@/lib/problem-details';
+
+const colours: { value: CreateCrewInput['colour']; label: string }[] = [
+  { value: '1', label: 'pine' },
+  { value: '2', label: 'ochre' },
+  { value: '3', label: 'blueprint' },
+  { value: '4', label: 'plum' },
+  { value: '5', label: 'olive' },
+  { value: '6', label: 'brick' },
+];
+
+/** Who goes out together. A measurer alone is a crew of one. */
+export function CrewForm({ people }: { people: PersonView[] }) {
+  const router = useRouter();
+  const [problem, setProblem] = useState<ProblemDetails | null>(null);
+  const [isBusy, setIsBusy] = useState(false);
+
+  async function submit(event: FormEvent<HTMLFormElement>) {
+    event.preventDefault();
+    const form = event.currentTarget;
+    const fields = new FormData(form);
+    setIsBusy(true);
+    setProblem(null);
+    try {
+      await askServer(apiPaths.crews(), {
+        body: {
+          name: fields.get('name'),
+          does: fields.get('does'),
+          colour: fields.get('colour'),
+          personIds: fields.getAll('person'),
+        },
+      });
+      form.reset();
+      router.refresh();
+    } catch (caught) {
+      setProblem(problemOf(caught));
+    } finally {
+      setIsBusy(false);
+    }
+  }
+
+  return (
+    <form onSubmit={submit} className="flex max-w-form flex-col gap-3 py-3">
+      <TextField
+        label="Name"
+        name="name"
+        placeholder="Crew North"
+        required
+        error={problem?.errors?.name}
+      />
+      <div className="grid grid-cols-2 gap-3">
+        <SelectField
+          label="Does"
+          name="does"
+          options={[
+            { value: 'fit', label: 'installs' },
+            { value: 'measure', label: 'measures' },
+          ]}
+        />
+        <SelectField label="Colour in the diary" name="colour" options={colours} />
+      </div>
+      <fieldset>
+        <legend className="font-medium">People</legend>
+        {people.map((person) => (
+          <CheckField key={person.id} label={person.name} name="person" value={person.id} />
+        ))}
+      </fieldset>
+      <FormError problem={problem} shownFields={['name']} />
+      <div>
+        <Button type="submit" busyText={isBusy ? 'Saving…' : undefined}>
+          Add the crew
+        </Button>
+      </div>
+    </form>
+  );
+}

@@ -1,0 +1,53 @@
+'use client';
+
+import { useState } from 'react';
+import { useFormRequest } from '@/components/door/use-form-request';
+import { askServer } from '@/components/shell/ask-server';
+import { Button } from '@/components/ui/button';
+import { FormError } from '@/components/ui/form-error';
+import { SelectField } from '@/components/ui/select-field';
+import { TextField } from '@/components/ui/text-field';
+import { apiPaths } from '@/lib/paths';
+import { roles, roleWords } from '@/lib/permissions';
+
+type Invited = { link: string; emailed: boolean; email: string };
+
+/** Invites by e-mail, and shows the link for the day when the e-mail does not arrive. */
+export function InviteForm() {
+  const [invited, setInvited] = useState<Invited | null>(null);
+  const form = useFormRequest(
+    async ({ email = '', role = '' }) => {
+      const answer = await askServer<{ link: string; emailed: boolean }>(apiPaths.invitations(), {
+        body: { email, role },
+      });
+      setInvited({ ...answer, email });
+    },
+    () => form.rest(),
+  );
+  return (
+    <form onSubmit={form.submit} className="flex max-w-form flex-col gap-3 py-3">
+      <TextField label="E-mail" name="email" type="email" required error={form.errorOf('email')} />
+      <SelectField
+        label="Role"
+        name="role"
+        defaultValue="crew"
+        options={roles.map((role) => ({ value: role, label: roleWords[role] }))}
+      />
+      <FormError problem={form.problem} shownFields={['email']} />
+      <div>
+        <Button type="submit" look="line" busyText={form.isBusy ? 'Inviting…' : undefined}>
+          Invite
+        </Button>
+      </div>
+      {invited ? (
+        <p role="status">
+          {invited.emailed
+            ? `${invited.email} has an e-mail with the link.`
+            : 'The e-mail could not be sent.'}{' '}
+          You can also hand it over yourself:{' '}
+          <code className="text-note break-all">{invited.link}</code>
+        </p>
+      ) : null}
+    </form>
+  );
+}

@@ -1,0 +1,102 @@
+'use client';
+
+import Link from 'next/link';
+import { useRouter } from 'next/navigation';
+import { usePageKeys } from '@/components/shell/page-keys';
+import { type Column, DataTable } from '@/components/ui/data-table';
+import { EmptyState } from '@/components/ui/empty-state';
+import { KeyHint } from '@/components/ui/key-hint';
+import { LinkButton } from '@/components/ui/link-button';
+import type { JobRow } from '@/lib/contracts/jobs';
+import { paths } from '@/lib/paths';
+import { stages, stageWords } from '@/lib/schedule/stages';
+
+const columns: Column<JobRow>[] = [
+  {
+    key: 'number',
+    header: 'No.',
+    isNumber: true,
+    cell: (job) => job.number,
+    sortValue: (job) => job.number,
+    text: (job) => String(job.number),
+  },
+  {
+    key: 'customer',
+    header: 'Customer',
+    cell: (job) => (
+      <Link href={paths.job(job.id)} className="font-bold hover:underline">
+        {job.customerName}
+      </Link>
+    ),
+    sortValue: (job) => job.customerName,
+    text: (job) => `${job.customerName} ${job.phone}`,
+  },
+  {
+    key: 'site',
+    header: 'Site',
+    cell: (job) => [job.street, job.town].filter(Boolean).join(', '),
+    sortValue: (job) => `${job.town} ${job.street}`,
+    text: (job) => `${job.street} ${job.town}`,
+  },
+  {
+    key: 'title',
+    header: 'Job',
+    cell: (job) => job.title,
+    text: (job) => job.title,
+  },
+  {
+    key: 'stage',
+    header: 'Stage',
+    cell: (job) => stageWords[job.stage],
+    sortValue: (job) => stages.indexOf(job.stage),
+    choice: (job) => stageWords[job.stage],
+  },
+  {
+    key: 'next',
+    header: 'Next visit',
+    cell: (job) => job.nextVisit ?? <span className="text-graphite">none booked</span>,
+  },
+  {
+    key: 'units',
+    header: 'Units',
+    isNumber: true,
+    cell: (job) => job.unitCount || '',
+    sortValue: (job) => job.unitCount,
+  },
+];
+
+export function JobsTable({ jobs, mayStart }: { jobs: JobRow[]; mayStart: boolean }) {
+  const router = useRouter();
+  usePageKeys(
+    'Jobs',
+    mayStart ? [{ keys: 'n', words: 'New job', run: () => router.push(paths.newJob()) }] : [],
+  );
+  return (
+    <DataTable
+      name="jobs"
+      caption={`Jobs, ${jobs.length}`}
+      rows={jobs}
+      columns={columns}
+      rowKey={(job) => job.id}
+      order={{ column: 'number', isDescending: true }}
+      filterLabel="Name, street, phone or number"
+      tools={
+        mayStart ? (
+          <LinkButton href={paths.newJob()}>
+            New job <KeyHint keys="N" isOnFill />
+          </LinkButton>
+        ) : null
+      }
+      empty={
+        <EmptyState
+          title="No jobs yet"
+          action={
+            mayStart ? <LinkButton href={paths.newJob()}>Start the first job</LinkButton> : null
+          }
+        >
+          A job begins with a call: who it is, where, and what they want made.
+        </EmptyState>
+      }
+    />
+  );
+}

@@ -1,0 +1,88 @@
+'use client';
+
+import Link from 'next/link';
+import { type Column, DataTable } from '@/components/ui/data-table';
+import { EmptyState } from '@/components/ui/empty-state';
+import { Verdict, type VerdictKind } from '@/components/ui/verdict';
+import type { MessageView } from '@/lib/contracts/messages';
+import { paths } from '@/lib/paths';
+
+const states: Record<MessageView['state'], { words: string; kind: VerdictKind }> = {
+  waiting: { words: 'waits for its time', kind: 'waiting' },
+  sending: { words: 'being sent', kind: 'waiting' },
+  sent: { words: 'sent', kind: 'confirmed' },
+  delivered: { words: 'delivered', kind: 'confirmed' },
+  refused: { words: 'not delivered: call them', kind: 'problem' },
+  withdrawn: { words: 'withdrawn', kind: 'off' },
+  received: { words: 'from the customer', kind: 'waiting' },
+};
+
+const columns: Column<MessageView>[] = [
+  {
+    key: 'customer',
+    header: 'Customer',
+    cell: (message) =>
+      message.jobId ? (
+        <Link href={paths.job(message.jobId)} className="font-bold hover:underline">
+          {message.customerName}
+        </Link>
+      ) : (
+        message.customerName
+      ),
+    sortValue: (message) => message.customerName,
+    text: (message) => message.customerName,
+  },
+  {
+    key: 'occasion',
+    header: 'Occasion',
+    cell: (message) => message.occasion,
+    choice: (message) => message.occasion,
+  },
+  {
+    key: 'channel',
+    header: 'By',
+    cell: (message) => (message.channel === 'sms' ? 'text' : 'e-mail'),
+    choice: (message) => (message.channel === 'sms' ? 'text' : 'e-mail'),
+  },
+  { key: 'due', header: 'When', cell: (message) => message.dueAtWords },
+  {
+    key: 'state',
+    header: 'Stands',
+    cell: (message) => {
+      const { words, kind } = states[message.state];
+      return (
+        <>
+          <Verdict kind={kind}>{words}</Verdict>
+          {message.reason ? (
+            <span className="block text-note text-graphite">{message.reason}</span>
+          ) : null}
+        </>
+      );
+    },
+    choice: (message) => states[message.state].words,
+  },
+  {
+    key: 'body',
+    header: 'Text',
+    cell: (message) => <span className="line-clamp-2 max-w-prose text-note">{message.body}</span>,
+    text: (message) => message.body,
+  },
+];
+
+export function MessagesTable({ messages }: { messages: MessageView[] }) {
+  return (
+    <DataTable
+      name="messages"
+      caption={`Messages, ${messages.length}`}
+      rows={messages}
+      columns={columns}
+      rowKey={(message) => message.id}
+      filterLabel="Customer or words of the text"
+      empty={
+        <EmptyState title="Nothing told yet">
+          Book a visit in the diary: the customer is told by text and e-mail, and it shows here.
+        </EmptyState>
+      }
+    />
+  );
+}
