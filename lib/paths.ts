@@ -33,8 +33,17 @@ export const paths = {
   /** The customer's page; the token is the whole of the permission. */
   customerVisit: (token: string) => `/v/${part(token)}`,
 
+  /** Where the customer's answer is posted, as a plain form. */
+  customerAnswer: (token: string) => `/v/${part(token)}/answer`,
+  customerCalendar: (token: string) => `/v/${part(token)}/calendar`,
+
   demo: () => '/demo',
   demoPhone: () => '/demo/phone',
+  demoPhoneOf: (to: { number: string } | { address: string }) =>
+    'number' in to
+      ? `/demo/phone?number=${part(to.number)}`
+      : `/demo/phone?address=${part(to.address)}`,
+  demoReply: () => '/demo/phone/reply',
 } as const;
 
 /** Addresses that answer requests. */
@@ -53,8 +62,12 @@ export const apiPaths = {
   rooms: () => '/api/rooms',
   room: (roomId: string) => `/api/rooms/${part(roomId)}`,
   readings: () => '/api/readings',
-  fit: (roomId: string) => `/api/fits?room=${part(roomId)}`,
+  submitRoom: (roomId: string) => `/api/rooms/${part(roomId)}/submit`,
+  runs: (roomId: string) => `/api/rooms/${part(roomId)}/runs`,
+  fit: (roomId: string) => `/api/fits?roomId=${part(roomId)}`,
   sheets: () => '/api/sheets',
+  takeUpSheet: (releaseId: string) => `/api/sheets/${part(releaseId)}/take-up`,
+  bench: () => '/api/bench',
 
   visits: () => '/api/visits',
   visit: (visitId: string) => `/api/visits/${part(visitId)}`,
