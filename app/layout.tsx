@@ -8,7 +8,6 @@ export const metadata: Metadata = {
   description:
     'Books site measures and installs for cabinet shops, proves the walls on site, and works out the scribes and fillers.',
   applicationName: 'Setwell',
-  icons: { apple: '/apple-touch-icon.png' },
   formatDetection: { telephone: false, date: false, address: false, email: false },
 };
 

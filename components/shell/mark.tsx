@@ -9,8 +9,13 @@ export function Mark({ className }: { className?: string }) {
       className={className}
     >
       <path d="M5 2v17h17" fill="none" stroke="currentColor" strokeWidth="3" />
-      <path d="M5 5.5 18.5 19" className="stroke-pine" strokeWidth="1.8" />
-      <path d="m8.4 4.8-2.8 4.4M18.4 14.6l-3.4 4.2" className="stroke-pine" strokeWidth="1.8" />
+      <path d="M8.5 6 18 15.5" className="stroke-pine" strokeWidth="1.7" />
+      <path
+        d="M8.5 6h.01M18 15.5h.01"
+        className="stroke-pine"
+        strokeWidth="4.6"
+        strokeLinecap="round"
+      />
     </svg>
   );
 }

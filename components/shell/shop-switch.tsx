@@ -8,10 +8,9 @@ import { problemOf } from './ask-server';
 
 export type ShopChoice = { id: string; name: string };
 
-/** The shop's name; a list to choose from for a person who belongs to more than one. */
+/** The shop's name, and the way to the others of a person who belongs to more than one. */
 export function ShopSwitch({ shop, shops }: { shop: ShopChoice; shops: ShopChoice[] }) {
   const [isSwitching, setIsSwitching] = useState(false);
-  if (shops.length < 2) return <p className="font-medium text-balance">{shop.name}</p>;
 
   const goTo = async (shopId: string) => {
     setIsSwitching(true);
@@ -25,18 +24,21 @@ export function ShopSwitch({ shop, shops }: { shop: ShopChoice; shops: ShopChoic
     }
   };
   return (
-    <select
-      aria-label="Shop"
-      value={shop.id}
-      disabled={isSwitching}
-      onChange={(event) => goTo(event.target.value)}
-      className="min-h-9 w-full rounded border border-rule bg-sheet px-1 font-medium"
-    >
-      {shops.map(({ id, name }) => (
-        <option key={id} value={id}>
-          {name}
-        </option>
-      ))}
-    </select>
+    <div>
+      <p className="font-medium text-balance">{shop.name}</p>
+      {shops
+        .filter(({ id }) => id !== shop.id)
+        .map(({ id, name }) => (
+          <button
+            key={id}
+            type="button"
+            disabled={isSwitching}
+            onClick={() => goTo(id)}
+            className="link min-h-7 text-left text-note max-md:min-h-key"
+          >
+            to {name}
+          </button>
+        ))}
+    </div>
   );
 }

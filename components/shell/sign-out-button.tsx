@@ -23,7 +23,7 @@ export function SignOutButton() {
   return (
     <Button
       look="plain"
-      className="-ml-3.5 text-note!"
+      className="-ml-3.5 self-start text-note!"
       onClick={leave}
       busyText={isLeaving ? 'Signing out…' : undefined}
     >

@@ -3,7 +3,7 @@
 import { useSyncExternalStore } from 'react';
 import { keepTheme, keptTheme, subscribeToTheme, themes } from './theme';
 
-const words = { system: 'as this device', light: 'light', dark: 'dark' };
+const words = { system: 'system', light: 'light', dark: 'dark' };
 
 export function ThemeSwitch() {
   const theme = useSyncExternalStore(subscribeToTheme, keptTheme, () => 'system' as const);

@@ -14,12 +14,17 @@ export function DataTableHead<Row>({ columns, order, onOrder }: DataTableHeadPro
         {columns.map((column) => {
           const isSorted = order?.column === column.key;
           const isDescending = isSorted && order.isDescending;
+          const arrow = isSorted ? (
+            <span aria-hidden="true" className="px-1">
+              {isDescending ? '↓' : '↑'}
+            </span>
+          ) : null;
           return (
             <th
               key={column.key}
               scope="col"
               aria-sort={isSorted ? (isDescending ? 'descending' : 'ascending') : undefined}
-              className={`px-2 py-1 align-bottom text-note font-normal text-graphite first:pl-0 last:pr-0 ${
+              className={`h-8 px-2 align-middle text-note font-normal text-graphite first:pl-0 last:pr-0 ${
                 column.isNumber ? 'text-right' : 'text-left'
               }`}
             >
@@ -31,10 +36,9 @@ export function DataTableHead<Row>({ columns, order, onOrder }: DataTableHeadPro
                     onOrder({ column: column.key, isDescending: isSorted && !isDescending })
                   }
                 >
+                  {column.isNumber ? arrow : null}
                   {column.header}
-                  <span aria-hidden="true" className="inline-block w-3.5">
-                    {isSorted ? (isDescending ? '↓' : '↑') : ''}
-                  </span>
+                  {column.isNumber ? null : arrow}
                 </button>
               ) : (
                 column.header

@@ -57,7 +57,7 @@ export function DataTable<Row>({
 
   if (rows.length === 0 && empty) return empty;
   return (
-    <div>
+    <div className="min-w-0">
       <DataTableFilters {...{ rows, columns, view, changeView, filterLabel, tools }} />
       <div className="overflow-x-auto">
         <table className="w-full border-collapse">

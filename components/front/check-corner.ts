@@ -1,0 +1,89 @@
+import { cornerAngle, cornerOffset } from '@/lib/measure/corner';
+import type { Figure } from '@/lib/measure/figure';
+import { defaultShopRules } from '@/lib/measure/rules/default-rules';
+import { lengthUncertainty } from '@/lib/measure/uncertainty';
+import type { Problem } from '@/lib/problem';
+import type { LengthUnit } from '@/lib/units/brands';
+import type { LengthKind } from '@/lib/units/length-limits';
+import { parseLength } from '@/lib/units/parse-length';
+import { checkTape } from './check-tools';
+
+export const cornerFields = ['legLeft', 'legRight', 'diagonal', 'depth'] as const;
+export type CornerField = (typeof cornerFields)[number];
+/** As typed. */
+export type CornerText = Record<CornerField, string>;
+
+export type CornerCheck = {
+  errors: Partial<Record<CornerField, string>>;
+  /** What else is wrong with the three together, or to be taken with care. */
+  notes: string[];
+  result: CornerResult | null;
+};
+
+export type CornerResult = {
+  mm: Record<CornerField, number>;
+  theta: Figure;
+  /** Positive: the left wall is in the way at the front. Null where the corner is no square one. */
+  offset: Figure | null;
+  share: 'within' | 'close' | 'over';
+  limitMm: number;
+};
+
+/** Past this the corner is a bay or a splay and was never meant to be square. */
+const squareWithinDeg = 30;
+
+const kinds: Record<CornerField, LengthKind> = {
+  legLeft: 'leg',
+  legRight: 'leg',
+  diagonal: 'corner-diagonal',
+  depth: 'depth',
+};
+
+/** Four lengths as typed → the corner, how sure, and what it does over the depth of a base. */
+export function checkCorner(text: CornerText, unit: LengthUnit): CornerCheck {
+  const errors: CornerCheck['errors'] = {};
+  const mm = { legLeft: 0, legRight: 0, diagonal: 0, depth: 0 };
+  for (const field of cornerFields) {
+    const { value, problems } = parseLength(text[field], { unit, kind: kinds[field] });
+    if (value === null) errors[field] = problems[0]?.message;
+    else mm[field] = value;
+  }
+  if (Object.keys(errors).length > 0) return { errors, notes: [], result: null };
+
+  const tape = checkTape(unit);
+  const read = (field: CornerField, boundedEnds: 0 | 1) => ({
+    id: field,
+    value: mm[field],
+    u: lengthUncertainty(tape, mm[field], boundedEnds),
+  });
+  const angle = cornerAngle({
+    method: 'legs',
+    legLeft: read('legLeft', 1),
+    legRight: read('legRight', 1),
+    diagonal: read('diagonal', 0),
+    carriedPast: false,
+    uOfLength: (lengthMm) => lengthUncertainty(tape, lengthMm, 1),
+  });
+  const notes = angle.problems.map(({ message }: Problem) => message);
+  if (!angle.value) return { errors, notes, result: null };
+
+  const theta = angle.value;
+  const isSquare = Math.abs(theta.value - 90) <= squareWithinDeg;
+  const offset = isSquare ? cornerOffset(theta, mm.depth).value : null;
+  const limitMm = limitOver(mm.depth, unit);
+  return { errors, notes, result: { mm, theta, offset, share: shareOf(offset, limitMm), limitMm } };
+}
+
+/** The shop's starting rule, which is for one depth, carried to another in proportion. */
+function limitOver(depthMm: number, unit: LengthUnit): number {
+  const { cornerFlagMm, cornerFlagOverMm } = defaultShopRules(unit === 'in' ? 'US' : 'UK').fit;
+  return (cornerFlagMm * depthMm) / cornerFlagOverMm;
+}
+
+/** Over: past the limit. Close: four fifths of it, or past it with U. */
+function shareOf(offset: Figure | null, limitMm: number): CornerResult['share'] {
+  const sizeMm = Math.abs(offset?.value ?? 0);
+  if (sizeMm > limitMm) return 'over';
+  const isClose = sizeMm >= 0.8 * limitMm || sizeMm + (offset?.U ?? 0) > limitMm;
+  return isClose ? 'close' : 'within';
+}

@@ -1,0 +1,17 @@
+import type { Tool } from '@/lib/contracts/wall-book';
+import type { LengthUnit } from '@/lib/units/brands';
+import { MM_PER_INCH } from '@/lib/units/fraction-parts';
+
+/** What the open checks reckon with, because nobody has said what is in the van. Accuracy: common practice. */
+export function checkTape(unit: LengthUnit): Tool {
+  return {
+    id: '00000000-0000-4000-8000-000000000001',
+    name: 'Tape, class II',
+    spec: { kind: 'tape', accuracyClass: 'II', stepMm: readStepMm(unit), repeatabilityMm: 0.3 },
+  };
+}
+
+/** The mark to which a tape is read and a size is shown. */
+export function readStepMm(unit: LengthUnit): number {
+  return unit === 'in' ? MM_PER_INCH / 16 : 1;
+}
