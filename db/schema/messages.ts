@@ -1,4 +1,14 @@
-import { foreignKey, index, integer, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import {
+  foreignKey,
+  index,
+  integer,
+  jsonb,
+  pgTable,
+  text,
+  unique,
+  uuid,
+} from 'drizzle-orm/pg-core';
+import type { MessageCause } from '@/lib/contracts/messages';
 import { createdAt, instant, shopColumns } from './columns';
 import { customers, jobs } from './jobs';
 import { visits } from './visits';
@@ -29,8 +39,12 @@ export const messages = pgTable(
     dueAt: instant('due_at').notNull(),
     /** Past this it is of no use and is withdrawn. */
     notAfter: instant('not_after'),
+    /** What the visit no longer says when the message is sent: the time before a move, why it is called off. */
+    cause: jsonb('cause').$type<MessageCause>().notNull().default({}),
     attempts: integer('attempts').notNull().default(0),
     claimedAt: instant('claimed_at'),
+    /** Of the first try: since then the provider may have it. */
+    firstTriedAt: instant('first_tried_at'),
     providerId: text('provider_id'),
     sentAt: instant('sent_at'),
     deliveredAt: instant('delivered_at'),

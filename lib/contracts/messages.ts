@@ -2,6 +2,15 @@ import { z } from 'zod';
 
 const id = z.uuid();
 
+/** What a message must say that its visit no longer tells. Instants as ISO text. */
+export type MessageCause = {
+  /** Moved or called off: the arrival that the customer was told last. */
+  toldFrom?: string;
+  toldUntil?: string;
+  /** Called off: why. */
+  reason?: string;
+};
+
 export const messageView = z.object({
   id,
   jobId: id.nullable(),
