@@ -6,6 +6,13 @@
 import { z } from 'zod';
 
 const id = z.uuid();
+/** Text that the database can keep: no NUL and no half of a surrogate pair. */
+const text = (most: number) =>
+  z
+    .string()
+    .max(most)
+    .refine((words) => !words.includes('\0') && words.isWellFormed(), 'Type it again, in letters.');
+const someText = (most: number) => text(most).min(1);
 const lengthMm = z.number().finite().min(0).max(100_000);
 const offsetMm = z.number().finite().min(-5_000).max(100_000);
 const heightMm = z.number().finite().min(-2_000).max(12_000);
@@ -30,7 +37,7 @@ const common = {
   /** Instant, ISO 8601 in UTC, by the phone's clock. */
   takenAt: z.iso.datetime(),
   /** The text as typed, for the record: "95 1/16", "900 / 1200 / 1502". */
-  typed: z.string().max(80),
+  typed: text(80),
   unit: z.enum(['in', 'mm']),
   touches: touches.default('board'),
   /** The reading this one corrects; that one stays, marked. */
@@ -156,7 +163,7 @@ export const featureReading = z.object({
   projectionMm: z.number().finite().min(-500).max(2_000).default(0),
   /** Which way a door or casement opens, seen from inside; none for the rest. */
   swing: z.enum(['none', 'in-left', 'in-right', 'out-left', 'out-right']).default('none'),
-  note: z.string().max(200).default(''),
+  note: text(200).default(''),
 });
 
 export const studReading = z.object({
@@ -170,7 +177,7 @@ export const studReading = z.object({
 export const doorwayReading = z.object({
   ...common,
   kind: z.literal('doorway'),
-  name: z.string().max(60),
+  name: text(60),
   /** Clear width past the leaf and the stop. */
   clearWidthMm: lengthMm,
   clearHeightMm: lengthMm,
@@ -183,7 +190,7 @@ export const withdrawal = z.object({
   ...common,
   kind: z.literal('withdrawal'),
   readingId: id,
-  reason: z.string().min(1).max(200),
+  reason: someText(200),
 });
 
 /** A reading that was asked for and could not be taken, with the reason. */
@@ -191,8 +198,8 @@ export const skip = z.object({
   ...common,
   kind: z.literal('skip'),
   /** The key of the reading asked for, as `whatIsMissing` names it. */
-  slot: z.string().max(120),
-  reason: z.string().min(1).max(200),
+  slot: text(120),
+  reason: someText(200),
 });
 
 export const reading = z.discriminatedUnion('kind', [
@@ -215,7 +222,7 @@ export type ReadingOf<K extends ReadingKind> = Extract<Reading, { kind: K }>;
 
 export const tool = z.object({
   id,
-  name: z.string().min(1).max(60),
+  name: someText(60),
   /** Maximum permissible error; see MEASURE "Tools and uncertainty" in DEVELOPERS.md. */
   spec: z.discriminatedUnion('kind', [
     z.object({
@@ -227,18 +234,24 @@ export const tool = z.object({
     z.object({
       kind: z.literal('laser'),
       mpeMm: z.number().positive(),
+      /** The maker states the error at 95 % (k = 2), not as a limit: u is then half of it. */
+      statedAt95: z.boolean().optional(),
       stepMm: z.number().positive(),
       repeatabilityMm: z.number().min(0),
     }),
     z.object({
       kind: z.literal('angle-finder'),
       mpeDeg: z.number().positive(),
+      /** The maker states the error at 95 % (k = 2), not as a limit: u is then half of it. */
+      statedAt95: z.boolean().optional(),
       stepDeg: z.number().positive(),
       repeatabilityDeg: z.number().min(0),
     }),
     z.object({
       kind: z.literal('level'),
       mpeMmPerM: z.number().positive(),
+      /** The maker states the error at 95 % (k = 2), not as a limit: u is then half of it. */
+      statedAt95: z.boolean().optional(),
       stepMm: z.number().positive(),
       repeatabilityMm: z.number().min(0),
     }),
@@ -249,7 +262,7 @@ export type Tool = z.infer<typeof tool>;
 export const wall = z.object({
   id,
   /** "A", "B" … in walking order. */
-  name: z.string().min(1).max(12),
+  name: someText(12),
   /** As drawn, before it is read. */
   nominalLengthMm: lengthMm,
   /** Nominal interior angle of the corner at this wall's left end; null where a chain begins in the open. */
@@ -259,7 +272,7 @@ export type Wall = z.infer<typeof wall>;
 
 export const room = z.object({
   id,
-  name: z.string().min(1).max(60),
+  name: someText(60),
   /** Walls clockwise. A closed room is one closed chain; an L is one open chain; a galley is two. */
   chains: z
     .array(z.object({ closed: z.boolean(), walls: z.array(wall).min(1).max(40) }))
@@ -308,7 +321,7 @@ export type UnitKind = z.infer<typeof unitKind>;
 
 export const unit = z.object({
   id,
-  name: z.string().max(40).default(''),
+  name: text(40).default(''),
   kind: unitKind,
   widthMm: z.number().positive().max(5_000),
   /** Null: fixed. Else it may be built between min and max in steps from its present width, or to stock widths. */
@@ -327,7 +340,7 @@ export type Unit = z.infer<typeof unit>;
 export const run = z.object({
   id,
   wallId: id,
-  name: z.string().min(1).max(40),
+  name: someText(40),
   level: z.enum(['base', 'wall', 'tall']),
   left: runEnd,
   right: runEnd,
@@ -349,7 +362,7 @@ export const run = z.object({
     ])
     .default({ how: 'equal' }),
   /** Runs that share a counter (and so one datum) carry the same mark; null stands alone. */
-  counterGroup: z.string().max(20).nullable().default(null),
+  counterGroup: text(20).nullable().default(null),
 });
 export type Run = z.infer<typeof run>;
 
