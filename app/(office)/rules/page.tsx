@@ -1,0 +1,28 @@
+import type { Metadata } from 'next';
+import { RulesForm } from '@/components/rules/rules-form';
+import { TitleBlock } from '@/components/ui/title-block';
+import { may } from '@/lib/permissions';
+import { pageContext } from '@/server/base/page-context';
+import { getShopRules } from '@/server/shops/get-shop-rules';
+
+export const metadata: Metadata = { title: 'Shop rules' };
+
+export default async function RulesPage() {
+  const ctx = await pageContext('shop:read');
+  const settings = await getShopRules(ctx);
+  return (
+    <>
+      <TitleBlock
+        level={1}
+        title="Shop rules"
+        meta="a change never reaches a sheet that is released"
+        className="mb-4"
+      />
+      <RulesForm
+        key={JSON.stringify(settings)}
+        settings={settings}
+        mayChange={may(ctx.actor.role, 'shop:change')}
+      />
+    </>
+  );
+}
