@@ -30,10 +30,16 @@ export const parseReading = (value: unknown) => reading.safeParse(value);
 
 export const submitRoomInput = z.object({ roomId: id });
 
-export const saveRunsInput = z.object({ roomId: id, runs: z.array(run).max(20) });
+export const saveRunsInput = z.object({
+  roomId: id,
+  runs: z.array(run).max(20),
+  /** `FitView.runsMark` as it was shown; runs that somebody changed meanwhile are then not written over. */
+  seenRunsMark: z.string().max(40).optional(),
+});
 export type SaveRunsInput = z.infer<typeof saveRunsInput>;
 
 export const roomIdInput = z.object({ roomId: id });
+export const sheetInput = z.object({ roomId: id, revision: z.string().regex(/^[A-Z]{1,4}$/) });
 
 /** Everything a phone needs to measure one room. */
 export type WallBookView = {
@@ -55,6 +61,8 @@ export type FitView = {
   street: string;
   wallBook: WallBook;
   runs: Run[];
+  /** Names these runs; sent back with a change of them and with a release. */
+  runsMark: string;
   rules: FitRules;
   fit: Fit;
   missing: MissingReading[];
@@ -80,7 +88,8 @@ export const releaseSheetInput = z.object({
   /** Why it is released though something is missing or over; required then. */
   overrideReason: z.string().trim().max(400).default(''),
   /** Readings and runs that the releaser saw; a change meanwhile is refused. */
-  seenReadingIds: z.array(id),
+  seenReadingIds: z.array(id).max(10_000),
+  seenRunsMark: z.string().max(40),
 });
 export type ReleaseSheetInput = z.infer<typeof releaseSheetInput>;
 
