@@ -1,4 +1,4 @@
-/** A reading still needed, with everything the phone must know to offer it as a one-question screen. */
+/** A reading to take, with everything the phone must know to offer it as a one-question screen. */
 
 /** The fixed fields of the reading asked for; what is left out is what the measurer reads. */
 export type AskedReading =
@@ -34,10 +34,11 @@ export type AskedReading =
     }
   | { kind: 'diagonal'; fromCornerWallId: string; toCornerWallId: string; zMm: number }
   | { kind: 'width'; wallId: string; xMm: number; toWallId: string; zMm: number }
-  | { kind: 'stud'; wallId: string }
+  | { kind: 'stud'; wallId: string; nth: number }
+  | { kind: 'feature'; wallId: string; feature: 'water' | 'waste' }
   | { kind: 'doorway' };
 
-export type MissingReading = {
+export type PlannedReading = {
   /** Stable key; a `skip` reading names it: "length:<wallId>:910". */
   slot: string;
   /** "Wall B, length at the counter". */
@@ -47,6 +48,11 @@ export type MissingReading = {
   /** must: a cut size hangs on it; should: it makes a figure surer or checks another. */
   need: 'must' | 'should';
   ask: AskedReading;
-  /** Asked for, not taken, with the reason given; null where still open. */
+  /** Readings that answer it; empty while it is open. */
+  takenBy: string[];
+  /** Asked for, not taken, with the reason given; null where nobody said so. */
   skipped: { readingId: string; reason: string } | null;
 };
+
+/** Still open. One that was skipped stays here, with its reason. */
+export type MissingReading = PlannedReading;
