@@ -1,5 +1,6 @@
 import { cornerAngle, cornerOffset } from '@/lib/measure/corner';
 import type { Figure } from '@/lib/measure/figure';
+import type { Share } from '@/lib/measure/fit-figure';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { lengthUncertainty } from '@/lib/measure/uncertainty';
 import type { Problem } from '@/lib/problem';
@@ -7,6 +8,7 @@ import type { LengthUnit } from '@/lib/units/brands';
 import type { LengthKind } from '@/lib/units/length-limits';
 import { parseLength } from '@/lib/units/parse-length';
 import { checkTape } from './check-tools';
+import { shareOf } from './share-of';
 
 export const cornerFields = ['legLeft', 'legRight', 'diagonal', 'depth'] as const;
 export type CornerField = (typeof cornerFields)[number];
@@ -25,7 +27,7 @@ export type CornerResult = {
   theta: Figure;
   /** Positive: the left wall is in the way at the front. Null where the corner is no square one. */
   offset: Figure | null;
-  share: 'within' | 'close' | 'over';
+  share: Share;
   limitMm: number;
 };
 
@@ -71,19 +73,15 @@ export function checkCorner(text: CornerText, unit: LengthUnit): CornerCheck {
   const isSquare = Math.abs(theta.value - 90) <= squareWithinDeg;
   const offset = isSquare ? cornerOffset(theta, mm.depth).value : null;
   const limitMm = limitOver(mm.depth, unit);
-  return { errors, notes, result: { mm, theta, offset, share: shareOf(offset, limitMm), limitMm } };
+  return {
+    errors,
+    notes,
+    result: { mm, theta, offset, share: offset ? shareOf(offset, limitMm) : 'within', limitMm },
+  };
 }
 
 /** The shop's starting rule, which is for one depth, carried to another in proportion. */
 function limitOver(depthMm: number, unit: LengthUnit): number {
   const { cornerFlagMm, cornerFlagOverMm } = defaultShopRules(unit === 'in' ? 'US' : 'UK').fit;
   return (cornerFlagMm * depthMm) / cornerFlagOverMm;
-}
-
-/** Over: past the limit. Close: four fifths of it, or past it with U. */
-function shareOf(offset: Figure | null, limitMm: number): CornerResult['share'] {
-  const sizeMm = Math.abs(offset?.value ?? 0);
-  if (sizeMm > limitMm) return 'over';
-  const isClose = sizeMm >= 0.8 * limitMm || sizeMm + (offset?.U ?? 0) > limitMm;
-  return isClose ? 'close' : 'within';
 }

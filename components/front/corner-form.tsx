@@ -2,12 +2,11 @@
 
 import { useState } from 'react';
 import { TextField } from '@/components/ui/text-field';
-import { TitleBlock } from '@/components/ui/title-block';
 import type { LengthUnit } from '@/lib/units/brands';
 import { type CornerField, type CornerText, checkCorner } from './check-corner';
+import { CheckLayout } from './check-layout';
 import { CornerDrawing } from './corner-drawing';
 import { CornerWords } from './corner-words';
-import { UnitChoice } from './unit-choice';
 
 /** A corner that is out, so that the first sight of the tool says what it finds. */
 const examples: Record<LengthUnit, CornerText> = {
@@ -23,54 +22,38 @@ const labels: Record<CornerField, string> = {
 };
 
 /** Check a corner: answers as it is typed, keeps the last answer while a length is half typed. */
-export function CornerForm({ startUnit = 'in' }: { startUnit?: LengthUnit }) {
-  const [unit, setUnit] = useState(startUnit);
-  const [text, setText] = useState(examples[startUnit]);
-  const [last, setLast] = useState(() => checkCorner(examples[startUnit], startUnit).result);
+export function CornerForm() {
+  const [unit, setUnit] = useState<LengthUnit>('in');
+  const [text, setText] = useState(examples.in);
   const check = checkCorner(text, unit);
+  const [last, setLast] = useState(check.result);
 
-  const type = (field: CornerField, value: string) => {
-    const next = { ...text, [field]: value };
+  const change = (next: CornerText, nextUnit: LengthUnit) => {
+    setUnit(nextUnit);
     setText(next);
-    setLast(checkCorner(next, unit).result ?? last);
+    setLast(checkCorner(next, nextUnit).result ?? last);
   };
-  const changeUnit = (next: LengthUnit) => {
-    setUnit(next);
-    setText(examples[next]);
-    setLast(checkCorner(examples[next], next).result);
-  };
+  const shown = check.result ?? last;
   return (
-    <section id="corner">
-      <TitleBlock
-        title="Check a corner"
-        meta={<UnitChoice unit={unit} onUnit={changeUnit} name="corner-unit" />}
-      />
-      <div className="grid items-start gap-x-8 gap-y-5 pt-4 md:grid-cols-[11rem_minmax(0,1fr)] lg:grid-cols-[11rem_minmax(0,1fr)_19rem]">
-        <div className="grid grid-cols-2 items-end gap-x-4 gap-y-3 md:grid-cols-1">
-          {(Object.keys(labels) as CornerField[]).map((field) => (
-            <TextField
-              key={field}
-              label={labels[field]}
-              value={text[field]}
-              onChange={(event) => type(field, event.target.value)}
-              error={check.errors[field]}
-              autoComplete="off"
-              inputMode="text"
-            />
-          ))}
-        </div>
-        <div className={check.result ? '' : 'opacity-60'}>
-          {last ? <CornerDrawing result={check.result ?? last} unit={unit} /> : null}
-        </div>
-        <div className="md:col-span-2 lg:col-span-1" aria-live="polite">
-          {check.result ? <CornerWords result={check.result} unit={unit} /> : null}
-          {check.notes.map((note) => (
-            <p key={note} className="pt-2 text-ochre">
-              {note}
-            </p>
-          ))}
-        </div>
-      </div>
-    </section>
+    <CheckLayout
+      id="corner"
+      title="Check a corner"
+      unit={unit}
+      onUnit={(next) => change(examples[next], next)}
+      fields={(Object.keys(labels) as CornerField[]).map((field) => (
+        <TextField
+          key={field}
+          label={labels[field]}
+          value={text[field]}
+          onChange={(event) => change({ ...text, [field]: event.target.value }, unit)}
+          error={check.errors[field]}
+          autoComplete="off"
+        />
+      ))}
+      drawing={shown ? <CornerDrawing result={shown} unit={unit} /> : null}
+      isStale={!check.result}
+      words={check.result ? <CornerWords result={check.result} unit={unit} /> : null}
+      notes={check.notes}
+    />
   );
 }

@@ -51,7 +51,6 @@ export function CommandList({ pages, onClose }: { pages: OfficePage[]; onClose: 
         aria-controls={listId}
         aria-activedescendant={commands[chosen] ? `${listId}-${chosen}` : undefined}
         autoComplete="off"
-        autoFocus
         value={typed}
         onChange={(event) => {
           setTyped(event.target.value);

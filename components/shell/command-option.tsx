@@ -29,7 +29,7 @@ export function CommandOption({ id, command, isChosen, onChoose }: CommandOption
       href={command.path}
       prefetch={false}
       onClick={onChoose}
-      className={`flex min-h-11 items-baseline justify-between gap-4 border-l-4 px-3 py-2 hover:bg-tint ${
+      className={`flex min-h-11 items-center justify-between gap-4 border-l-4 px-3 py-2 hover:bg-tint ${
         isChosen ? 'border-pine bg-tint' : 'border-transparent'
       }`}
     >

@@ -22,9 +22,17 @@ export function Dialog({ isOpen, onClose, title, children, footer, className }: 
 
   useEffect(() => {
     const dialog = ref.current;
-    if (!dialog) return;
-    if (isOpen && !dialog.open) dialog.showModal();
-    if (!isOpen && dialog.open) dialog.close();
+    if (!dialog || !isOpen) return;
+    const focusedBefore = document.activeElement;
+    dialog.showModal();
+    dialog.querySelector<HTMLElement>('input, select, textarea, footer button')?.focus();
+    return () => {
+      dialog.close();
+      // A dialog that is taken away whole does not give the focus back by itself.
+      if (document.activeElement === document.body && focusedBefore instanceof HTMLElement) {
+        focusedBefore.focus();
+      }
+    };
   }, [isOpen]);
 
   const closeOnBackdrop = (event: MouseEvent<HTMLDialogElement>) => {
