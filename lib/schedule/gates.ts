@@ -16,7 +16,9 @@ export type Readiness = {
   state: 'now' | 'from' | 'blocked';
   /** The first day it may take place; null while blocked. */
   from: LocalDate | null;
-  /** "from Tue, May 12: cabinets ready", or what blocks it. */
+  /** "cabinets ready", or what blocks it. */
+  because: string;
+  /** The same with its date: "from Tue, May 12: cabinets ready", "now: …", "not yet: …". */
   words: string;
   gates: Gate[];
 };
@@ -65,16 +67,21 @@ export function readinessFor(input: GateInput): Readiness {
   const gates = gatesFor(input);
   const blocked = gates.filter((gate) => gate.state === 'blocked');
   if (blocked.length > 0) {
-    return { state: 'blocked', from: null, words: wordsOf(blocked), gates };
+    const because = wordsOf(blocked);
+    return { state: 'blocked', from: null, because, words: `not yet: ${because}`, gates };
   }
   const waits = gates.flatMap((gate) => (gate.state === 'from' ? [gate] : []));
   if (waits.length === 0) {
-    const told = gates.filter((gate) => !toldOnlyWhenBlocked.has(gate.key));
-    return { state: 'now', from: input.today, words: `now: ${wordsOf(told)}`, gates };
+    const because = wordsOf(gates.filter((gate) => !toldOnlyWhenBlocked.has(gate.key)));
+    return { state: 'now', from: input.today, because, words: `now: ${because}`, gates };
   }
-  const from = waits.map((gate) => gate.from).reduce((a, b) => (a > b ? a : b));
-  const deciding = wordsOf(waits.filter((gate) => gate.from === from));
-  return { state: 'from', from, words: `from ${day(from, input)}: ${deciding}`, gates };
+  const from =
+    waits
+      .map((gate) => gate.from)
+      .toSorted()
+      .at(-1) ?? input.today;
+  const because = wordsOf(waits.filter((gate) => gate.from === from));
+  return { state: 'from', from, because, words: `from ${day(from, input)}: ${because}`, gates };
 }
 
 /**

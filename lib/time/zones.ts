@@ -27,5 +27,6 @@ export function zonesOf(country: string): Zone[] {
 export function offsetMinutesAt(instantMs: number, zone: Zone): number {
   const data = moment.tz.zone(zone);
   if (!data) throw new RangeError(`Not a zone: ${JSON.stringify(zone)}`);
-  return -data.utcOffset(instantMs);
+  // Taken from zero, so that UTC is 0 and never -0.
+  return 0 - data.utcOffset(instantMs);
 }

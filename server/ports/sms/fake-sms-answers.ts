@@ -1,4 +1,5 @@
 /** The provider's JSON: a message, a page of messages, an error. */
+import { countSegments } from '@/lib/messages/segments';
 import type { FakeText } from './fake-sms-store';
 
 export type FakeAnswer = { status: number; body: Record<string, unknown> };
@@ -84,7 +85,7 @@ function messageResource(accountSid: string, text: FakeText): Record<string, unk
     from: text.from,
     messaging_service_sid: null,
     num_media: '0',
-    num_segments: '1',
+    num_segments: String(countSegments(text.body).segments),
     price: null,
     price_unit: 'USD',
     sid: text.sid,

@@ -1,6 +1,7 @@
 /** What the fake provider posts to us: signed forms, as the provider sends them. */
 import { randomBytes } from 'node:crypto';
 import twilio from 'twilio';
+import { countSegments } from '@/lib/messages/segments';
 import type { FakeText } from './fake-sms-store';
 
 const POST_TIMEOUT_MS = 10_000;
@@ -79,7 +80,7 @@ export function inboundParams(
     SmsSid: text.sid,
     SmsStatus: 'received',
     NumMedia: '0',
-    NumSegments: '1',
+    NumSegments: String(countSegments(text.body).segments),
     ...(optOutType ? { OptOutType: optOutType } : {}),
   };
 }

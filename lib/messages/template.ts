@@ -1,0 +1,82 @@
+/** Message templates: plain text with named fields in braces, checked when saved and filled when sent. */
+import type { Outcome, Problem } from '@/lib/problem';
+import { type Field, fieldWords, type Occasion } from './occasions';
+
+/** One occasion's wording. The HTML of the e-mail is made from its text. */
+export type Wording = { sms: string; subject: string; email: string };
+export type WordingPart = keyof Wording;
+export type OccasionTemplates = Record<Occasion, Wording>;
+
+export type FieldValues = Readonly<Partial<Record<Field, string>>>;
+
+type Part = { text: string } | { field: string };
+
+/**
+ * Fills a template. A field that is unknown, or has no value here, gives no text at all rather than a hole.
+ * Values are taken as they are: braces in them mean nothing. Spaces left over by an empty value go.
+ * Example: "{shop}: we come {day}." with shop "Juniper Bend" and day "Tue, May 12" is
+ * "Juniper Bend: we come Tue, May 12.".
+ * Problems: template-brace, field-unknown, field-without-value (errors).
+ */
+export function renderTemplate(template: string, values: FieldValues): Outcome<string> {
+  const { parts, problems } = readTemplate(template);
+  const texts: string[] = [];
+  for (const part of parts) {
+    if ('text' in part) texts.push(part.text);
+    else if (!isField(part.field)) problems.push(unknownField(part.field));
+    else {
+      const value = values[part.field];
+      if (value === undefined) problems.push(withoutValue(part.field));
+      else texts.push(value);
+    }
+  }
+  if (problems.length > 0) return { value: null, problems };
+  const value = texts
+    .join('')
+    .replace(/[ \t]+$/gm, '')
+    .replace(/\n{3,}/g, '\n\n')
+    .trim();
+  return { value, problems: [] };
+}
+
+/** The text and the fields of a template, in order; a lone brace is a problem and stands as text. */
+export function readTemplate(template: string): { parts: Part[]; problems: Problem[] } {
+  const pieces = template.split(/(\{[A-Za-z]+\})/);
+  const parts = pieces
+    .filter((piece) => piece !== '')
+    .map((piece): Part => {
+      const field = /^\{([A-Za-z]+)\}$/.exec(piece)?.[1];
+      return field === undefined ? { text: piece } : { field };
+    });
+  const hasLoneBrace = parts.some((part) => 'text' in part && /[{}]/.test(part.text));
+  return { parts, problems: hasLoneBrace ? [loneBrace] : [] };
+}
+
+export function isField(name: string): name is Field {
+  return Object.hasOwn(fieldWords, name);
+}
+
+export function unknownField(name: string): Problem {
+  return {
+    code: 'field-unknown',
+    message: `There is no field {${name}}. Known are ${Object.keys(fieldWords).join(', ')}.`,
+    about: [name],
+    severity: 'error',
+  };
+}
+
+function withoutValue(field: Field): Problem {
+  return {
+    code: 'field-without-value',
+    message: `{${field}} (${fieldWords[field]}) has no value here.`,
+    about: [field],
+    severity: 'error',
+  };
+}
+
+const loneBrace: Problem = {
+  code: 'template-brace',
+  message: 'A brace stands alone. Fields are written {day}, with both braces and letters only.',
+  about: [],
+  severity: 'error',
+};

@@ -1,0 +1,112 @@
+/**
+ * What a new shop says in Spanish. The texts keep to letters that SMS carries cheaply (é, ñ and ¿ are among
+ * them, á and ó are not). Recalled, not read in sources: to be checked by a native speaker.
+ */
+import type { OccasionTemplates } from './template';
+
+export const templatesEs: OccasionTemplates = {
+  booked: {
+    sms: '{shop}: su {visit} queda para el {day}. Llegamos {window}. Detalles y cambios: {link}',
+    subject: 'Su {visit} con {shop}: {day}',
+    email: `Hola, {customer}:
+
+Su {visit} en {address} queda para el {day}. Llegamos {window}.
+
+Quién va: {crew}.
+
+Vea qué conviene despejar, añada la cita a su calendario o pida otra hora:
+{link}
+
+{shop}
+{shopPhone}`,
+  },
+  'please-confirm': {
+    sms: '{shop}: ¿podemos ir el {day}, {window}, para su {visit}? Responda SI, o CAMBIO para otra hora. {link}',
+    subject: 'Confirme, por favor: {visit} el {day}',
+    email: `Hola, {customer}:
+
+Pensamos ir el {day}, {window}, para su {visit} en {address}.
+
+Díganos con un toque si la hora le conviene, o pida otra:
+{link}
+
+{shop}
+{shopPhone}`,
+  },
+  'day-before': {
+    sms: '{shop}: le recordamos que vamos el {day}, {window}, para su {visit}. Qué despejar: {link}',
+    subject: 'Recordatorio: {visit} el {day}',
+    email: `Hola, {customer}:
+
+Le recordamos que vamos el {day}, {window}, para su {visit} en {address}.
+
+Qué conviene despejar y cómo comunicarse con nosotros:
+{link}
+
+{shop}
+{shopPhone}`,
+  },
+  'on-my-way': {
+    sms: '{shop}: vamos en camino y llegamos {window}. Preguntas: {shopPhone}',
+    subject: 'En camino: {visit} hoy',
+    email: `Hola, {customer}:
+
+Vamos en camino para su {visit} en {address} y llegamos {window}.
+
+Quién va: {crew}.
+
+{link}
+
+{shop}
+{shopPhone}`,
+  },
+  'running-late': {
+    sms: '{shop}: disculpe, vamos unos {minutesLate} minutos tarde. Ahora llegamos {window}. Preguntas: {shopPhone}',
+    subject: 'Vamos con retraso',
+    email: `Hola, {customer}:
+
+Disculpe: vamos unos {minutesLate} minutos tarde para su {visit}. Ahora llegamos {window}.
+
+{link}
+
+{shop}
+{shopPhone}`,
+  },
+  moved: {
+    sms: '{shop}: su {visit} pasa del {oldDay} al {day}, {window}. Si no le conviene: {link}',
+    subject: 'Nueva fecha: su {visit} es el {day}',
+    email: `Hola, {customer}:
+
+Su {visit} en {address} pasa del {oldDay}, {oldWindow}, al {day}. Llegamos {window}.
+
+Si no le conviene, pida otra hora:
+{link}
+
+{shop}
+{shopPhone}`,
+  },
+  'called-off': {
+    sms: '{shop}: su {visit} del {day} queda suspendida. Le hablaremos de una nueva fecha. Preguntas: {shopPhone}',
+    subject: 'Suspendida: {visit} del {day}',
+    email: `Hola, {customer}:
+
+Su {visit} del {day} en {address} queda suspendida. {reason}
+
+Le hablaremos de una nueva fecha. Nuestro teléfono es {shopPhone}.
+
+{shop}`,
+  },
+  done: {
+    sms: '{shop}: su {visit} queda terminada. Gracias. Su copia: {link}',
+    subject: 'Terminada: su {visit}',
+    email: `Hola, {customer}:
+
+Su {visit} en {address} queda terminada. Gracias.
+
+Su copia y lo que aún esté pendiente:
+{link}
+
+{shop}
+{shopPhone}`,
+  },
+};
