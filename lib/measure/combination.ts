@@ -1,44 +1,41 @@
 import { type Figure, figure } from './figure';
 
+/** One independent error: its u, and the readings it belongs to (none for what a set-up shares). */
+export type ErrorSource = { ids: string[]; u: number };
+
 /**
- * A value that depends on readings linearly (or linearised): each part is one independent error, how
- * much it weighs and whose reading it is. What two values share is seen by its key, so it cancels or
- * adds as it does in life (JCGM 100:2008, 5.2.2: correlation by a common input).
+ * A value that depends on readings linearly (or linearised), and how much each error weighs in it. What
+ * two values share is seen by the source being the same object, so it cancels or adds as it does in life
+ * (JCGM 100:2008, 5.2.2: correlation by a common input).
  */
 export type Combination = { value: number; parts: Part[] };
-export type Part = {
-  /** One independent error. Two parts with the same key are the same error. */
-  key: string;
-  /** Ids of readings this error belongs to; none for what a whole set-up shares. */
-  ids: string[];
-  u: number;
-  weight: number;
-};
+export type Part = { source: ErrorSource; weight: number };
 
 /** A weight below this names nobody: a contact that carries nothing does not govern. */
 const NO_WEIGHT = 1e-9;
 
+/** A reading as a combination of itself; make it once, or its error counts twice. */
 export function readCombination(id: string, value: number, u: number): Combination {
-  return { value, parts: [{ key: `reading:${id}`, ids: [id], u, weight: 1 }] };
+  return { value, parts: [{ source: { ids: [id], u }, weight: 1 }] };
 }
 
-export function figureCombination(key: string, known: Figure): Combination {
-  return { value: known.value, parts: [{ key, ids: known.from, u: known.u, weight: 1 }] };
+export function figureCombination(known: Figure): Combination {
+  return { value: known.value, parts: [{ source: { ids: known.from, u: known.u }, weight: 1 }] };
 }
 
 /** Σ weight · term. */
 export function combine(terms: [weight: number, term: Combination][]): Combination {
   let value = 0;
-  const parts = new Map<string, Part>();
+  const parts: Part[] = [];
   for (const [weight, term] of terms) {
     value += weight * term.value;
-    for (const part of term.parts) {
-      const known = parts.get(part.key);
-      if (known) known.weight += weight * part.weight;
-      else parts.set(part.key, { ...part, weight: weight * part.weight });
+    for (const { source, weight: inner } of term.parts) {
+      const known = parts.find((part) => part.source === source);
+      if (known) known.weight += weight * inner;
+      else parts.push({ source, weight: weight * inner });
     }
   }
-  return { value, parts: [...parts.values()] };
+  return { value, parts };
 }
 
 /**
@@ -48,7 +45,12 @@ export function combine(terms: [weight: number, term: Combination][]): Combinati
  * Source: JCGM 100:2008, 5.1.2 equation (10).
  */
 export function combinationFigure({ value, parts }: Combination): Figure {
-  const governing = parts.filter((part) => Math.abs(part.weight) > NO_WEIGHT);
-  const from = new Set(governing.flatMap((part) => part.ids));
-  return figure(value, Math.hypot(...governing.map((part) => part.weight * part.u)), [...from]);
+  const from: string[] = [];
+  let square = 0;
+  for (const { source, weight } of parts) {
+    if (Math.abs(weight) <= NO_WEIGHT) continue;
+    square += (weight * source.u) ** 2;
+    for (const id of source.ids) if (!from.includes(id)) from.push(id);
+  }
+  return figure(value, Math.sqrt(square), from);
 }

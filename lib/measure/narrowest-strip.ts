@@ -1,0 +1,78 @@
+import { type Combination, combine, readCombination } from './combination';
+import { hullEdgeAt, lowerHull, upperHull } from './hull';
+import type { ProfilePoint } from './profile';
+
+/** A place of a profile with what it was made of (a reading, or a value between two). */
+export type StripPoint = { at: number; s: number; c: Combination };
+
+export type Strip = {
+  /** Width along s: proud edge less the far one. */
+  width: Combination;
+  /** Directions the strip may take; one and the same but where vertex faces vertex. */
+  slopeLeast: number;
+  slopeMost: number;
+};
+
+export function stripPoint({ id, atMm, sMm, u }: ProfilePoint): StripPoint {
+  return { at: atMm, s: sMm, c: readCombination(id, sMm, u) };
+}
+
+/**
+ * The narrowest strip of two parallel lines that holds all points, its width taken along s. The hull's
+ * upper and lower boundaries are concave and convex, so the width is their greatest distance apart,
+ * and that is at a vertex of one of them: exact, no search.
+ * Edge rule: points at one place only → the width is their spread and every direction will do.
+ * Source: minimum zone, ISO 1101 / ISO 12780 (2-1 contact); the argument is elementary.
+ */
+export function narrowestStrip(points: StripPoint[]): Strip | null {
+  const upper = upperHull(points);
+  const lower = lowerHull(points);
+  let atMm: number | null = null;
+  let width = -Infinity;
+  for (const { at } of [...upper, ...lower]) {
+    const apart = heightAt(upper, at) - heightAt(lower, at);
+    if (apart > width) [width, atMm] = [apart, at];
+  }
+  if (atMm === null) return null;
+  const [above, below] = [slopesAt(upper, atMm), slopesAt(lower, atMm)];
+  return {
+    width: combine([
+      [1, placeAt(upper, atMm)],
+      [-1, placeAt(lower, atMm)],
+    ]),
+    slopeLeast: Math.max(above.right ?? -Infinity, below.left ?? -Infinity),
+    slopeMost: Math.min(above.left ?? Infinity, below.right ?? Infinity),
+  };
+}
+
+function heightAt(hull: StripPoint[], at: number): number {
+  const edge = hullEdgeAt(hull, at);
+  if (edge === null) return Number.NaN;
+  const { from, to } = edge;
+  return from === to ? to.s : from.s + ((at - from.at) / (to.at - from.at)) * (to.s - from.s);
+}
+
+function placeAt(hull: StripPoint[], at: number): Combination {
+  const edge = hullEdgeAt(hull, at);
+  if (edge === null) return { value: Number.NaN, parts: [] };
+  const { from, to } = edge;
+  if (from === to) return to.c;
+  const share = (at - from.at) / (to.at - from.at);
+  return combine([
+    [1 - share, from.c],
+    [share, to.c],
+  ]);
+}
+
+/** Slopes of the boundary just left and right of a place; none past its ends. */
+function slopesAt(hull: StripPoint[], at: number): { left: number | null; right: number | null } {
+  let left: number | null = null;
+  for (const [index, to] of hull.entries()) {
+    const from = hull[index - 1];
+    if (!from) continue;
+    const slope = (to.s - from.s) / (to.at - from.at);
+    if (to.at >= at && from.at < at) left = slope;
+    if (from.at <= at && to.at > at) return { left, right: slope };
+  }
+  return { left, right: null };
+}

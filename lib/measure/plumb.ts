@@ -1,0 +1,74 @@
+import { type Outcome, problem, refused } from '@/lib/problem';
+import { type Combination, combinationFigure, combine } from './combination';
+import type { Figure } from './figure';
+import { leastSquaresLine } from './least-squares-line';
+import { stripPoint } from './narrowest-strip';
+import type { ProfilePoint } from './profile';
+import { unreadable } from './reading-problems';
+
+export type Plumb = {
+  /** mm per mm: positive leans into the room upward. */
+  lean: Figure;
+  /** The same in mm per metre. */
+  perMetre: Figure;
+  /** The same over `overMm`. */
+  over: Figure;
+  overMm: number;
+  leans: 'in' | 'out' | 'plumb';
+  /** Greatest less least residual about the line. */
+  outOfStraight: Figure;
+};
+export type PlumbInput = {
+  /** `atMm` is z. */
+  points: ProfilePoint[];
+  /** Standard u of the plumb reference itself, mm per mm (`slopeUncertainty`). */
+  uReference: number;
+  /** Height over which the lean is wanted. */
+  overMm: number;
+};
+
+/**
+ * Lean of one column of face readings: the slope of the least-squares line, weighed by 1/u².
+ * Edge rule: smaller than its own U it is plumb. Two readings give a lean, three show its straightness.
+ * Units and signs: mm; z up, s positive into the room; lean positive into the room as z grows; one set-up.
+ * Example: s 0, 2, 4 at z 100, 1100, 2100 → lean 0.002, 2 mm/m, 4.8 mm over 2400, leans in.
+ * Problems: too-few-heights, reading-not-a-number, uncertainty-not-known.
+ * Source: least squares, JCGM 100:2008 annex H.3; mm per metre: common practice.
+ */
+export function plumbOf({ points, uReference, overMm }: PlumbInput): Outcome<Plumb> {
+  const bad = unreadable(points.map(({ id, atMm, sMm, u }) => ({ id, values: [atMm, sMm], u })));
+  if (bad.length > 0) return refused(...bad);
+  const surest = points.every(({ u }) => u > 0);
+  const weights = points.map(({ u }) => (surest ? 1 / (u * u) : 1));
+  const fit = leastSquaresLine(points.map(stripPoint), weights);
+  if (fit === null) {
+    const words = 'A lean needs readings at two heights. Read the same place higher or lower.';
+    return refused(
+      problem(
+        'too-few-heights',
+        words,
+        points.map(({ id }) => id),
+      ),
+    );
+  }
+  const reference = { source: { ids: [], u: uReference }, weight: 1 };
+  const slope = combine([
+    [1, fit.slope],
+    [1, { value: 0, parts: [reference] }],
+  ]);
+  const lean = combinationFigure(slope);
+  const leans = Math.abs(lean.value) <= lean.U ? 'plumb' : lean.value > 0 ? 'in' : 'out';
+  const value: Plumb = {
+    lean,
+    perMetre: times(1000, slope),
+    over: times(overMm, slope),
+    overMm,
+    leans,
+    outOfStraight: combinationFigure(fit.spread),
+  };
+  return { value, problems: [] };
+}
+
+function times(factor: number, slope: Combination): Figure {
+  return combinationFigure(combine([[factor, slope]]));
+}

@@ -1,0 +1,134 @@
+import { type Outcome, problem, refused } from '@/lib/problem';
+import { type Combination, combinationFigure, combine } from './combination';
+import type { Figure } from './figure';
+import { narrowestStrip, type StripPoint, stripPoint } from './narrowest-strip';
+import type { ProfilePoint } from './profile';
+import { unreadable } from './reading-problems';
+
+export type StraightedgeGap = {
+  gap: Figure;
+  /** Where it lies when it shows most. */
+  fromMm: number;
+  toMm: number;
+  /** The row is shorter than the straightedge and was taken whole. */
+  wholeRow: boolean;
+};
+
+/**
+ * Greatest gap under a straightedge of one length laid anywhere on a row and rocked so that its largest
+ * gap is least; the profile is straight between readings.
+ * Edge rule: a row shorter than the straightedge is taken whole; the greatest gap may show between two
+ * readings' places (the straightedge's ends move along straight pieces, so it is sought there too).
+ * Units and signs: mm; s positive into the room; readings of one set-up only.
+ * Example: s 0, 0, 4, 0, 0 at 0, 500 … 2000 under 1000 mm → 4 mm, from 500 to 1500.
+ * Problems: too-few-readings (under 3 places), edge-not-positive, reading-not-a-number, uncertainty-not-known.
+ * Source: straightedge test of DIN 18202 and BS 8204; rocking: common practice; the search is ours.
+ */
+export function straightedgeGap(
+  points: ProfilePoint[],
+  edgeLengthMm: number,
+): Outcome<StraightedgeGap> {
+  const bad = unreadable(points.map(({ id, atMm, sMm, u }) => ({ id, values: [atMm, sMm], u })));
+  if (bad.length > 0) return refused(...bad);
+  if (!(edgeLengthMm > 0)) {
+    return refused(problem('edge-not-positive', 'A straightedge is longer than 0.'));
+  }
+  const profile = profileOf(points);
+  const [first, last] = [profile[0], profile.at(-1)];
+  if (!first || !last || profile.length < 3) {
+    const words = 'A straightedge needs readings at three places or more along the line.';
+    return refused(
+      problem(
+        'too-few-readings',
+        words,
+        points.map(({ id }) => id),
+      ),
+    );
+  }
+  const wholeRow = last.at - first.at <= edgeLengthMm;
+  const length = wholeRow ? last.at - first.at : edgeLengthMm;
+  let best: { width: Combination; from: number } | null = null;
+  for (const from of placesToLay(profile, length)) {
+    const width = narrowestStrip(windowOf(profile, from, length))?.width;
+    if (width && (best === null || width.value > best.width.value + 1e-12)) best = { width, from };
+  }
+  const fromMm = best?.from ?? first.at;
+  const gap = combinationFigure(best?.width ?? { value: 0, parts: [] });
+  return { value: { gap, fromMm, toMm: fromMm + length, wholeRow }, problems: [] };
+}
+
+/** In order along the row; readings at one place count as their mean. */
+function profileOf(points: ProfilePoint[]): StripPoint[] {
+  const places = new Map<number, StripPoint[]>();
+  for (const point of points) {
+    places.set(point.atMm, [...(places.get(point.atMm) ?? []), stripPoint(point)]);
+  }
+  return [...places.entries()]
+    .sort(([a], [b]) => a - b)
+    .map(([at, here]) => {
+      const c = combine(here.map((point) => [1 / here.length, point.c]));
+      return { at, s: c.value, c };
+    });
+}
+
+/**
+ * Left ends at which the gap can be greatest: an end of the straightedge at a reading, or, between
+ * those, where the chord from end to end is furthest from a reading (both ends on straight pieces: a
+ * parabola in the place, its top where the derivative is 0).
+ */
+function placesToLay(profile: StripPoint[], length: number): number[] {
+  const first = profile[0]?.at ?? 0;
+  const last = (profile.at(-1)?.at ?? 0) - length;
+  const ends = profile.flatMap(({ at }) => [at, at - length]);
+  const marks = [...new Set(ends)].filter((at) => at >= first && at <= last).sort((a, b) => a - b);
+  const tops: number[] = [];
+  for (const [index, to] of marks.entries()) {
+    const from = marks[index - 1];
+    if (from === undefined) continue;
+    const [left, right] = [
+      pieceAt(profile, (from + to) / 2),
+      pieceAt(profile, (from + to) / 2 + length),
+    ];
+    for (const inside of profile) {
+      if (inside.at < to || inside.at > from + length) continue;
+      const curve = 2 * (right.slope - left.slope);
+      if (curve === 0) continue;
+      const chordAtZero = right.at0 + right.slope * length - left.at0;
+      const top =
+        (left.slope * length + (right.slope - left.slope) * inside.at - chordAtZero) / curve;
+      if (top > from && top < to) tops.push(top);
+    }
+  }
+  return [...marks, ...tops];
+}
+
+/** The straight piece of the profile over a place: s = at0 + slope · at. */
+function pieceAt(profile: StripPoint[], at: number): { slope: number; at0: number } {
+  const index = Math.max(
+    1,
+    profile.findIndex((point) => point.at >= at),
+  );
+  const [from, to] = [profile[index - 1], profile[index]];
+  if (!from || !to) return { slope: 0, at0: 0 };
+  const slope = (to.s - from.s) / (to.at - from.at);
+  return { slope, at0: from.s - slope * from.at };
+}
+
+function windowOf(profile: StripPoint[], from: number, length: number): StripPoint[] {
+  const inside = profile.filter(({ at }) => at > from && at < from + length);
+  return [valueAt(profile, from), ...inside, valueAt(profile, from + length)];
+}
+
+function valueAt(profile: StripPoint[], at: number): StripPoint {
+  const index = profile.findIndex((point) => point.at >= at);
+  const to = profile[index === -1 ? profile.length - 1 : index];
+  const from = profile[index - 1];
+  if (!to || to.at === at || !from)
+    return { at, s: to?.s ?? 0, c: to?.c ?? { value: 0, parts: [] } };
+  const share = (at - from.at) / (to.at - from.at);
+  const c = combine([
+    [1 - share, from.c],
+    [share, to.c],
+  ]);
+  return { at, s: c.value, c };
+}
