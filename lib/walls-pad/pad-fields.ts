@@ -1,0 +1,48 @@
+import type { AskedReading } from '@/lib/measure/missing-reading';
+import type { EntryKind } from './entry-value';
+
+/** One value that the pad asks for; most questions have one, a corner by legs has three. */
+export type PadField = { name: string; label: string; kind: EntryKind; isOptional?: boolean };
+
+/** The questions that the pad asks; a feature has a screen of its own. */
+export type PadAsk = Exclude<AskedReading, { kind: 'feature' }>;
+
+/** How a corner is taken. */
+export type CornerMethod = 'legs' | 'angle';
+
+/**
+ * The values of a question, in the order in which they are taken.
+ *
+ * Example: a corner by legs asks for the left leg, the right leg, the diagonal.
+ */
+export function padFields(ask: PadAsk, cornerMethod: CornerMethod = 'legs'): PadField[] {
+  switch (ask.kind) {
+    case 'length':
+      return [{ name: 'value', label: 'length', kind: 'length' }];
+    case 'corner':
+      if (cornerMethod === 'angle') return [{ name: 'angle', label: 'angle', kind: 'angle' }];
+      return [
+        { name: 'legLeft', label: 'left leg', kind: 'leg' },
+        { name: 'legRight', label: 'right leg', kind: 'leg' },
+        { name: 'diagonal', label: 'mark to mark', kind: 'corner-diagonal' },
+      ];
+    case 'face':
+      return [{ name: 'gap', label: 'gap', kind: 'gap' }];
+    case 'floor':
+      return [{ name: 'drop', label: 'down to the floor', kind: 'drop' }];
+    case 'ceiling':
+      return [{ name: 'rise', label: 'up to the ceiling', kind: 'rise' }];
+    case 'diagonal':
+      return [{ name: 'value', label: 'diagonal', kind: 'diagonal' }];
+    case 'width':
+      return [{ name: 'value', label: 'width', kind: 'width' }];
+    case 'stud':
+      return [{ name: 'x', label: 'from the left corner', kind: 'position' }];
+    case 'doorway':
+      return [
+        { name: 'clearWidth', label: 'clear width', kind: 'doorway' },
+        { name: 'clearHeight', label: 'clear height', kind: 'doorway' },
+        { name: 'passageWidth', label: 'passage behind', kind: 'doorway', isOptional: true },
+      ];
+  }
+}

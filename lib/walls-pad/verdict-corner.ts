@@ -1,0 +1,74 @@
+import type { ReadingOf, Run, Tool } from '@/lib/contracts/wall-book';
+import { cornerAngle } from '@/lib/measure/corner';
+import { cornerDeviation } from '@/lib/measure/corner-deviation';
+import type { Figure } from '@/lib/measure/figure';
+import { walkRoom } from '@/lib/measure/room-walk';
+import { angleUncertainty, lengthUncertainty } from '@/lib/measure/uncertainty';
+import type { Outcome } from '@/lib/problem';
+import { type JudgeInput, judged, type PadVerdict } from './pad-verdict';
+import { sayDifference, sayLength, sayPlusMinus } from './say-length';
+
+const DEGREES = 180 / Math.PI;
+
+/** The angle of a corner reading with what its tool is sure to; what cannot be is a problem in words. */
+export function angleOfReading({ id, by }: ReadingOf<'corner'>, tool: Tool): Outcome<Figure> {
+  if (by.method === 'angle') {
+    const u = angleUncertainty(tool);
+    return cornerAngle({ method: 'angle', angle: { id, value: by.angleDeg, u } });
+  }
+  const uOfLength = (lengthMm: number) => lengthUncertainty(tool, lengthMm, 0);
+  const read = (value: number) => ({ id, value, u: uOfLength(value) });
+  return cornerAngle({
+    method: 'legs',
+    legLeft: read(by.legLeftMm),
+    legRight: read(by.legRightMm),
+    diagonal: read(by.diagonalMm),
+    carriedPast: by.carriedPast,
+    uOfLength,
+  });
+}
+
+/**
+ * A corner against the angle it was drawn with, as what it takes over the depth of the cabinet there.
+ *
+ * Edge: smaller than its U it is "true within the reading". The shop's flag holds over its own depth and is
+ * carried to the cabinet's in proportion.
+ * Example: 89.4° ± 0.2° over 24": closed, 1/4" in the way at the front.
+ * Problems of `cornerAngle` come as `over` with their words. Source: the shop's corner flag.
+ */
+export function verdictOfCorner(input: JudgeInput<ReadingOf<'corner'>>): PadVerdict {
+  const { reading, tool, book, runs, rules } = input;
+  const { value: angle, problems } = angleOfReading(reading, tool);
+  if (!angle) return { kind: 'over', words: problems[0]?.message ?? 'This cannot be a corner.' };
+  const placed = walkRoom(book.room).byId.get(reading.cornerWallId);
+  const nominal = placed?.leftCornerDeg ?? 90;
+  const said = `${angle.value.toFixed(1)}° ± ${plusDegrees(angle.U)}°`;
+  const { deviation, lies } = cornerDeviation(angle, nominal);
+  const depthMm =
+    depthAt(runs, [reading.cornerWallId, placed?.before?.id]) ?? rules.cornerFlagOverMm;
+  const limitMm = (rules.cornerFlagMm * depthMm) / rules.cornerFlagOverMm;
+  const outMm = depthMm * Math.tan(deviation.value / DEGREES);
+  const expandedMm = (depthMm * deviation.U) / DEGREES / Math.cos(deviation.value / DEGREES) ** 2;
+  const kind = judged(Math.abs(outMm), expandedMm, limitMm);
+  const over = `over ${sayLength(depthMm, rules)}`;
+  if (lies === 'true-within-the-reading') {
+    const sure = `${sayPlusMinus(expandedMm, rules)} ${over}`;
+    return { kind, words: `True within the reading: ${said}, ${sure}.` };
+  }
+  const size = sayDifference(outMm, rules);
+  const effect = lies === 'closed' ? `Closed: takes ${size}` : `Open: gives ${size}`;
+  return { kind, words: `${effect} ${sayPlusMinus(expandedMm, rules)} ${over}. ${said}.` };
+}
+
+/** The deepest cabinet on the walls of the corner, to its door fronts. */
+function depthAt(runs: Run[], wallIds: (string | undefined)[]): number | null {
+  const depths = runs
+    .filter(({ wallId }) => wallIds.includes(wallId))
+    .map(({ carcassDepthMm, bumperMm, doorMm }) => carcassDepthMm + bumperMm + doorMm);
+  return depths.length > 0 ? Math.max(...depths) : null;
+}
+
+/** Up to a tenth of a degree: how sure is never said too small. */
+function plusDegrees(expandedDeg: number): string {
+  return (Math.ceil(expandedDeg * 10 - 1e-9) / 10).toFixed(1);
+}

@@ -1,0 +1,62 @@
+import type { ReadingOf } from '@/lib/contracts/wall-book';
+import { lengthOwnPart } from '@/lib/measure/uncertainty';
+import { type JudgeInput, judged, type PadVerdict } from './pad-verdict';
+import { sayDifference, sayLength, sayPlusMinus } from './say-length';
+
+/** A ceiling reading stands over a floor reading that is this near on the plan. */
+const OVER_EACH_OTHER_MM = 60;
+
+/**
+ * A drop with the others of its set-up: the high point so far, and the fall from it.
+ *
+ * Example: drops 1200 and 1212: 1/2" below the high point, close to a 1/2" flag.
+ * Source: floor fall flag and decision of the shop's rules.
+ */
+export function verdictOfFloor(input: JudgeInput<ReadingOf<'floor'>>): PadVerdict {
+  const { reading, others, tool, rules } = input;
+  const drops = others
+    .filter((other): other is ReadingOf<'floor'> => other.kind === 'floor')
+    .filter(({ setUpId }) => setUpId === reading.setUpId)
+    .map(({ dropMm }) => dropMm);
+  if (drops.length === 0) return { kind: 'note', words: 'First of this set-up.' };
+  const least = Math.min(...drops);
+  const fallMm = Math.max(...drops, reading.dropMm) - Math.min(least, reading.dropMm);
+  const expandedMm = 2 * Math.SQRT2 * lengthOwnPart(tool);
+  const kind = judged(fallMm, expandedMm, rules.floorFallFlagMm);
+  const decision = fallMm > rules.floorFallDecisionMm ? ' The office must decide; tell them.' : '';
+  const fall = `the floor falls ${sayDifference(fallMm, rules)} ${sayPlusMinus(expandedMm, rules)} so far.`;
+  if (reading.dropMm <= least) return { kind, words: `High point so far; ${fall}${decision}` };
+  const below = sayDifference(reading.dropMm - least, rules);
+  return { kind, words: `${below} below the high point; ${fall}${decision}` };
+}
+
+/**
+ * A rise with the drop under it: the clear height there, else how it compares with the other rises.
+ *
+ * Example: drop 1200, rise 1232: clear height 2432 mm.
+ * Source: MEASURE "Frames and signs": clear height = drop + rise.
+ */
+export function verdictOfCeiling(input: JudgeInput<ReadingOf<'ceiling'>>): PadVerdict {
+  const { reading, others, tool, rules } = input;
+  const expanded = sayPlusMinus(2 * Math.SQRT2 * lengthOwnPart(tool), rules);
+  const under = others.find(
+    (other): other is ReadingOf<'floor'> =>
+      other.kind === 'floor' &&
+      other.setUpId === reading.setUpId &&
+      other.wallId === reading.wallId &&
+      Math.hypot(other.xMm - reading.xMm, other.yMm - reading.yMm) <= OVER_EACH_OTHER_MM,
+  );
+  if (under) {
+    const clear = sayLength(under.dropMm + reading.riseMm, rules);
+    return { kind: 'note', words: `Clear height ${clear} ${expanded} here.` };
+  }
+  const rises = others
+    .filter((other): other is ReadingOf<'ceiling'> => other.kind === 'ceiling')
+    .filter(({ setUpId }) => setUpId === reading.setUpId)
+    .map(({ riseMm }) => riseMm);
+  if (rises.length === 0) return { kind: 'note', words: 'First of the ceiling.' };
+  const highest = Math.max(...rises);
+  if (reading.riseMm >= highest) return { kind: 'note', words: 'Highest of the ceiling so far.' };
+  const lower = sayDifference(highest - reading.riseMm, rules);
+  return { kind: 'note', words: `${lower} lower than the highest so far.` };
+}

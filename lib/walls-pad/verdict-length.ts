@@ -1,0 +1,88 @@
+import type { ReadingOf } from '@/lib/contracts/wall-book';
+import { walkRoom } from '@/lib/measure/room-walk';
+import { lengthOwnPart, lengthUncertainty } from '@/lib/measure/uncertainty';
+import { type JudgeInput, judged, type PadVerdict } from './pad-verdict';
+import { sayDifference, sayLength, sayPlusMinus } from './say-length';
+
+/** Further from the sketch than both of these is worth a word: rough lengths are rough. */
+const SKETCH_SHARE = 0.08;
+const SKETCH_MM = 100;
+const SAME_PLACE_MM = 1;
+
+/**
+ * A wall's length beside what is known of it: a repeat of the same height, else the nearest other height,
+ * else the sketch.
+ *
+ * Edge: a difference smaller than its U is "the same within the reading".
+ * Example: 2414.6 at the counter, 2411.4 at the floor: 1/8" longer, within a 1/4" rule.
+ * Source: agreement of repeats, plumb flag: the shop's rules.
+ */
+export function verdictOfLength(input: JudgeInput<ReadingOf<'length'>>): PadVerdict {
+  const { reading, others } = input;
+  const onWall = others.filter(
+    (other): other is ReadingOf<'length'> =>
+      other.kind === 'length' && other.wallId === reading.wallId && isNear(other.yMm, reading.yMm),
+  );
+  const repeats = onWall.filter((other) => isNear(other.zMm, reading.zMm));
+  if (repeats.length > 0) return besideRepeats(input, repeats);
+  const nearest = [...onWall].sort(
+    (a, b) => Math.abs(a.zMm - reading.zMm) - Math.abs(b.zMm - reading.zMm),
+  )[0];
+  return nearest ? besideHeight(input, nearest) : besideSketch(input);
+}
+
+function besideRepeats(
+  { reading, tool, rules }: JudgeInput<ReadingOf<'length'>>,
+  repeats: ReadingOf<'length'>[],
+): PadVerdict {
+  const mean = repeats.reduce((sum, { valueMm }) => sum + valueMm, 0) / repeats.length;
+  const apart = Math.abs(reading.valueMm - mean);
+  const allowed = Math.max(rules.repeatAgreementMm, differenceU(tool));
+  const before = `${repeats.length > 1 ? 'the mean before' : 'the reading before'}, ${sayLength(mean, rules)}`;
+  if (apart <= allowed) {
+    return { kind: 'within', words: `Agrees with ${before}, to ${sayDifference(apart, rules)}.` };
+  }
+  return {
+    kind: 'over',
+    words: `${sayDifference(apart, rules)} from ${before}; the shop allows ${sayLength(allowed, rules)}. Read it once more.`,
+  };
+}
+
+function besideHeight(
+  { reading, tool, rules }: JudgeInput<ReadingOf<'length'>>,
+  other: ReadingOf<'length'>,
+): PadVerdict {
+  const difference = reading.valueMm - other.valueMm;
+  const there = `at ${sayLength(other.zMm, rules)} up`;
+  const expanded = differenceU(tool);
+  if (Math.abs(difference) <= expanded) {
+    return { kind: 'within', words: `The same as ${there}, within the reading.` };
+  }
+  const isApartUpward = difference > 0 === reading.zMm > other.zMm;
+  const way = isApartUpward ? 'lean apart going up' : 'lean together going up';
+  const size = `${sayDifference(difference, rules)} ${difference > 0 ? 'longer' : 'shorter'} than ${there}`;
+  return {
+    kind: judged(Math.abs(difference), expanded, rules.plumbFlagMm),
+    words: `${size} ${sayPlusMinus(expanded, rules)}: the ends ${way}.`,
+  };
+}
+
+function besideSketch({ reading, tool, book, rules }: JudgeInput<ReadingOf<'length'>>): PadVerdict {
+  const expanded = 2 * lengthUncertainty(tool, reading.valueMm, 2);
+  const first = `First on this wall, ${sayPlusMinus(expanded, rules)}.`;
+  const drawn = walkRoom(book.room).byId.get(reading.wallId)?.wall.nominalLengthMm ?? 0;
+  const difference = reading.valueMm - drawn;
+  const isNearSketch = Math.abs(difference) <= Math.max(SKETCH_MM, SKETCH_SHARE * drawn);
+  if (drawn === 0 || isNearSketch) return { kind: 'note', words: first };
+  const off = `${sayLength(Math.abs(difference), rules)} ${difference > 0 ? 'longer' : 'shorter'}`;
+  return { kind: 'note', words: `${first} ${off} than the sketch.` };
+}
+
+/** U of the difference of two readings by one tool: its own error cancels. */
+function differenceU(tool: JudgeInput<ReadingOf<'length'>>['tool']): number {
+  return 2 * Math.SQRT2 * lengthOwnPart(tool);
+}
+
+function isNear(a: number, b: number): boolean {
+  return Math.abs(a - b) <= SAME_PLACE_MM;
+}
