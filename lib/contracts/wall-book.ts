@@ -299,7 +299,18 @@ export const runEnd = z.discriminatedUnion('kind', [
   /** A door or window casing at xMm. */
   z.object({ kind: z.literal('casing'), xMm: lengthMm }),
   /** A cabinet set in an earlier phase, its end face at xMm. */
-  z.object({ kind: z.literal('existing'), xMm: lengthMm }),
+  z.object({
+    kind: z.literal('existing'),
+    xMm: lengthMm,
+    /** Its back from the wall's straight line, at xMm: the new run takes it up as its set line. */
+    standOffMm: offsetMm.optional(),
+    /** Its front against that line, positive further out at the right. */
+    turnDeg: z.number().min(-10).max(10).optional(),
+    /** Drop from the level line to the underside of its box: its kick line is the datum. */
+    undersideDropMm: lengthMm.optional(),
+    /** Drops from the level line to its counter, at the end that meets this run and at its far end. */
+    counterDropsMm: z.tuple([lengthMm, lengthMm]).optional(),
+  }),
 ]);
 export type RunEnd = z.infer<typeof runEnd>;
 
@@ -334,6 +345,10 @@ export const unit = z.object({
     })
     .nullable()
     .default(null),
+  /** A corner unit's arm along the other wall; left out: as its width. */
+  armMm: z.number().positive().max(5_000).optional(),
+  /** Clear height an appliance needs under the counter, from the maker's sheet. */
+  needHeightMm: z.number().positive().max(3_000).optional(),
 });
 export type Unit = z.infer<typeof unit>;
 
@@ -363,6 +378,8 @@ export const run = z.object({
     .default({ how: 'equal' }),
   /** Runs that share a counter (and so one datum) carry the same mark; null stands alone. */
   counterGroup: text(20).nullable().default(null),
+  /** A finished end that shows: the set line leaves the least gap there first. */
+  leastGapAt: z.enum(['left', 'right']).optional(),
 });
 export type Run = z.infer<typeof run>;
 
