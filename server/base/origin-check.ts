@@ -9,9 +9,15 @@ export function checkOrigin(request: Request): void {
     if (request.headers.get('sec-fetch-site') === 'cross-site') throw stranger();
     return;
   }
+  // A page that sends no referrer says "null"; then the browser's own word on the site decides.
+  if (origin === 'null' && request.headers.get('sec-fetch-site') === 'same-origin') return;
   const host = request.headers.get('host');
-  const ours = origin === env().publicUrl || (host !== null && new URL(origin).host === host);
+  const ours = origin === env().publicUrl || (host !== null && hostOf(origin) === host);
   if (!ours) throw stranger();
+}
+
+function hostOf(origin: string): string | null {
+  return URL.canParse(origin) ? new URL(origin).host : null;
 }
 
 function stranger(): Refusal {

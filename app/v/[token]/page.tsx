@@ -1,0 +1,18 @@
+import type { Metadata } from 'next';
+import { headers } from 'next/headers';
+import { notFound } from 'next/navigation';
+import { VisitPage } from '@/components/customer/visit-page';
+import { callerAddress } from '@/server/base/caller-address';
+import { getCustomerVisit } from '@/server/visits/get-customer-visit';
+
+export const metadata: Metadata = { title: 'Your visit', robots: { index: false } };
+
+type Props = { params: Promise<{ token: string }> };
+
+/** Reading it changes nothing: link previews and mail scanners come here too. */
+export default async function CustomerVisitPage({ params }: Props) {
+  const { token } = await params;
+  const visit = await getCustomerVisit(token, callerAddress({ headers: await headers() }));
+  if (!visit) notFound();
+  return <VisitPage visit={visit} token={token} />;
+}
