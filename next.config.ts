@@ -11,7 +11,7 @@ const contentSecurityPolicy = [
   `script-src 'self' 'unsafe-inline'${isDevelopment ? " 'unsafe-eval'" : ''}`,
   "style-src 'self' 'unsafe-inline'",
   "img-src 'self' data: blob:",
-  "font-src 'self'",
+  "font-src 'self' data:",
   `connect-src 'self'${isDevelopment ? ' ws:' : ''}`,
   "worker-src 'self'",
   "manifest-src 'self'",
@@ -55,11 +55,12 @@ const nextConfig: NextConfig = {
   async headers() {
     return [
       { source: '/:path*', headers: securityHeaders },
-      // The token in a customer's address is the permission itself: it leaves with no referrer.
+      // The token in a customer's address is the permission itself: it goes to no other site. Within this
+      // one it may: with no referrer at all, browsers hide the origin of the form that answers.
       {
         source: '/v/:path*',
         headers: [
-          { key: 'Referrer-Policy', value: 'no-referrer' },
+          { key: 'Referrer-Policy', value: 'same-origin' },
           { key: 'X-Robots-Tag', value: 'noindex' },
         ],
       },

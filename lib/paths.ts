@@ -59,6 +59,8 @@ export const apiPaths = {
   jobs: () => '/api/jobs',
   jobSearch: (search: string) => `/api/jobs?search=${part(search)}`,
   job: (jobId: string) => `/api/jobs/${part(jobId)}`,
+  /** The bench says that the cabinets are ready. */
+  jobReady: (jobId: string) => `/api/jobs/${part(jobId)}/ready`,
   rooms: () => '/api/rooms',
   room: (roomId: string) => `/api/rooms/${part(roomId)}`,
   readings: () => '/api/readings',
@@ -73,6 +75,7 @@ export const apiPaths = {
   visit: (visitId: string) => `/api/visits/${part(visitId)}`,
   callOffVisit: (visitId: string) => `/api/visits/${part(visitId)}/call-off`,
   reportVisit: (visitId: string) => `/api/visits/${part(visitId)}/report`,
+  today: () => '/api/days/today',
   openings: () => '/api/openings',
   waiting: () => '/api/waiting',
   crews: () => '/api/crews',
@@ -83,6 +86,7 @@ export const apiPaths = {
   customerVisit: (token: string) => `/api/v/${part(token)}`,
   /** Where the texting provider posts texts from customers and reports on ours. */
   smsWebhook: () => '/api/webhooks/sms',
+  smsStatusWebhook: () => '/api/webhooks/sms/status',
   health: () => '/api/health',
 } as const;
 

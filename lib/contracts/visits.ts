@@ -66,6 +66,12 @@ export const visitView = z.object({
 });
 export type VisitView = z.infer<typeof visitView>;
 
+/** What booking and moving answer: the visit, and what is unusual about it, done as asked. */
+export const bookedVisit = visitView.extend({ warnings: z.array(z.string()) });
+export type BookedVisit = z.infer<typeof bookedVisit>;
+
+export const visitIdInput = z.object({ visitId: id });
+
 export const listVisitsInput = z.object({
   /** [from, to) as local dates in the shop's zone. */
   from: localDate,
@@ -140,12 +146,18 @@ export type ReportVisitInput = z.infer<typeof reportVisitInput>;
 
 /** Measurer's or crew's list for a local day. */
 export const todayInput = z.object({ date: localDate.optional() });
+export type TodayInput = z.infer<typeof todayInput>;
+
+export const todayVisit = visitView.extend({
+  rooms: z.array(z.object({ id, name: z.string() })),
+  notes: z.string(),
+});
+export type TodayVisit = z.infer<typeof todayVisit>;
+
 export const todayView = z.object({
   date: localDate,
   dayWords: z.string(),
-  visits: z.array(
-    visitView.extend({ rooms: z.array(z.object({ id, name: z.string() })), notes: z.string() }),
-  ),
+  visits: z.array(todayVisit),
 });
 export type TodayView = z.infer<typeof todayView>;
 

@@ -56,7 +56,7 @@ export async function startJob(ctx: PersonContext, input: StartJobInput) {
       jobId,
       summary: `Job ${number} started: ${title}`,
     });
-    return { jobId, number };
+    return { id: jobId, number };
   });
 }
 

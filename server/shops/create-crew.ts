@@ -41,7 +41,7 @@ export async function createCrew(ctx: PersonContext, input: CreateCrewInput) {
       return made.id;
     }),
   );
-  return { crewId };
+  return { id: crewId };
 }
 
 function nameTaken(name: string) {

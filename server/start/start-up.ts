@@ -5,6 +5,7 @@ import { log } from '@/server/base/log';
 import { startWorker } from '@/server/messages/worker';
 import { hashPassword } from '@/server/people/sign-in';
 import { getPorts } from '@/server/ports/choose-ports';
+import { composeVisitMessage } from '@/server/visits/compose-message';
 
 /** Once a process, before the first request is answered. */
 export async function startUp(): Promise<void> {
@@ -13,7 +14,7 @@ export async function startUp(): Promise<void> {
   const open = await database();
   await getPorts();
   if (demo) await seedDemo(open.db, { now: new Date(), hashPassword });
-  const stopWorker = startWorker();
+  const stopWorker = startWorker(composeVisitMessage);
   log('started', { database: open.kind, demo });
 
   for (const signal of ['SIGTERM', 'SIGINT'] as const) {

@@ -43,8 +43,8 @@ describe('jobs', () => {
   it('starts a job with customer, site, number, phone as E.164 and the consent that was given', async () => {
     const answer = await callRoute(startJobRoute, { cookie: cookies.scheduler, body: newJob });
     expect(answer.status).toBe(200);
-    const { jobId, number } = answer.body as { jobId: string; number: number };
-    const view = (await get(jobId)).body as JobView;
+    const { id, number } = answer.body as { id: string; number: number };
+    const view = (await get(id)).body as JobView;
     expect(view).toMatchObject({
       number,
       stage: 'enquiry',

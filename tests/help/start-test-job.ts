@@ -26,5 +26,6 @@ export async function startTestJob(shop: TestShop, given: Given = {}, now?: Date
     },
     site: { street: '12 Alder Row', town: 'Fernhollow', wayIn: 'Side door', ...site },
   });
-  return startJob(await contextOf(shop, 'scheduler', now), input);
+  const { id, number } = await startJob(await contextOf(shop, 'scheduler', now), input);
+  return { jobId: id, number };
 }

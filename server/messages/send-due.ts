@@ -1,0 +1,88 @@
+import type { Database } from '@/db/database';
+import { apiPaths } from '@/lib/paths';
+import { env } from '@/server/base/env';
+import { logBug } from '@/server/base/log';
+import { shopContext } from '@/server/base/shop-context';
+import type { Ports } from '@/server/ports/choose-ports';
+import { type Claimed, claimDue } from './claim-due';
+import type { Compose, Composed } from './compose';
+import { type Prepared, prepare } from './prepare';
+import { writeRefusal, writeSent, writeWhileHeld } from './write-outcome';
+
+export type Sending = {
+  db: Database;
+  ports: Pick<Ports, 'sms' | 'email'>;
+  compose: Compose;
+  /** The clock, asked anew for each batch. */
+  now: () => Date;
+};
+
+/** Sends all that is due; gives how many messages it took. Any number of workers may run at once. */
+export async function sendDue(sending: Sending): Promise<number> {
+  let taken = 0;
+  for (;;) {
+    const batch = await claimDue(sending.db, sending.now());
+    if (batch.length === 0) return taken;
+    taken += batch.length;
+    await Promise.all(batch.map((message) => sendOne(sending, message)));
+  }
+}
+
+/** A bug over one message keeps neither the others nor the next try; its lease lapses and it is settled. */
+async function sendOne(sending: Sending, message: Claimed): Promise<void> {
+  try {
+    const { db } = sending;
+    const now = sending.now();
+    const ctx = await shopContext(db, {
+      shopId: message.shopId,
+      actor: { kind: 'system', name: 'Setwell' },
+      now,
+    });
+    const prepared = await prepare(ctx, message, sending.compose);
+    if (prepared.is === 'ready') await carry(sending, message, prepared);
+    else await putAside(db, message, prepared);
+  } catch (error) {
+    logBug('messages/send-due', error);
+  }
+}
+
+async function putAside(
+  db: Database,
+  message: Claimed,
+  prepared: Exclude<Prepared, { is: 'ready' }>,
+): Promise<void> {
+  if (prepared.is === 'later') {
+    // Waiting for the morning is no failed try.
+    const attempts = message.attempts - 1;
+    await writeWhileHeld(db, message, { state: 'waiting', dueAt: prepared.dueAt, attempts });
+  } else {
+    await writeWhileHeld(db, message, { state: prepared.is, reason: prepared.reason });
+  }
+}
+
+/** What goes out is written down first, so that after a crash the provider can be asked for it. */
+async function carry(
+  sending: Sending,
+  message: Claimed,
+  { to, composed }: Extract<Prepared, { is: 'ready' }>,
+): Promise<void> {
+  const { db } = sending;
+  const body = composed.is === 'sms' ? composed.body : composed.email.text;
+  if (!(await writeWhileHeld(db, message, { toAddress: to, body }))) return;
+  const result = await send(sending.ports, message.id, to, composed);
+  const now = sending.now();
+  if (!result.ok) return writeRefusal(db, message, result.refusal, now);
+  const { providerId } = result;
+  await writeSent(db, message, { providerId, state: 'sent', at: now });
+}
+
+function send(
+  ports: Sending['ports'],
+  idempotencyKey: string,
+  to: string,
+  composed: Extract<Composed, { is: 'sms' | 'email' }>,
+) {
+  if (composed.is === 'email') return ports.email.send({ to, idempotencyKey, ...composed.email });
+  const statusCallback = `${env().publicUrl}${apiPaths.smsStatusWebhook()}`;
+  return ports.sms.send({ to, body: composed.body, statusCallback, idempotencyKey });
+}

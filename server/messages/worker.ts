@@ -1,0 +1,61 @@
+import { database } from '@/server/base/database';
+import { logBug } from '@/server/base/log';
+import { getPorts } from '@/server/ports/choose-ports';
+import type { Compose } from './compose';
+import { sendDue } from './send-due';
+import { settle } from './settle';
+
+const tickMs = 2_000;
+
+type Worker = { kick: () => void; stop: () => Promise<void> };
+/** Held for the process: the bundler makes several copies of this module. */
+const held = globalThis as typeof globalThis & { __setwellWorker?: Worker };
+
+/** Sends what is due, every two seconds and when kicked; gives what stops it after the round under way. */
+export function startWorker(compose: Compose): () => Promise<void> {
+  held.__setwellWorker ??= makeWorker(async () => {
+    const { db } = await database();
+    const sending = { db, ports: await getPorts(), compose, now: () => new Date() };
+    await settle(sending);
+    await sendDue(sending);
+  });
+  return held.__setwellWorker.stop;
+}
+
+/** Something was put into the outbox and committed: no need to wait for the next round. */
+export function kickWorker(): void {
+  held.__setwellWorker?.kick();
+}
+
+function makeWorker(round: () => Promise<void>): Worker {
+  let isStopped = false;
+  let isKicked = false;
+  let timer: NodeJS.Timeout | undefined;
+  let underWay: Promise<void> | null = null;
+
+  function run(): void {
+    if (isStopped || underWay) return;
+    clearTimeout(timer);
+    isKicked = false;
+    underWay = round()
+      .catch((error) => logBug('messages/worker', error))
+      .finally(() => {
+        underWay = null;
+        if (!isStopped) timer = setTimeout(run, isKicked ? 0 : tickMs);
+      });
+  }
+
+  timer = setTimeout(run, 0);
+  return {
+    kick() {
+      isKicked = true;
+      run();
+    },
+    async stop() {
+      isStopped = true;
+      clearTimeout(timer);
+      await underWay;
+      held.__setwellWorker = undefined;
+    },
+  };
+}

@@ -1,0 +1,95 @@
+import { and, eq } from 'drizzle-orm';
+import type { Database } from '@/db/database';
+import { messages } from '@/db/schema';
+import type { EmailRefusal } from '@/server/ports/email/email-port';
+import type { SmsRefusal, SmsState } from '@/server/ports/sms/sms-port';
+import { changeConsent } from './change-consent';
+import type { Claimed } from './claim-due';
+
+type Change = Partial<typeof messages.$inferInsert>;
+
+/** Changes a message that this worker still holds; false when a report or another worker was faster. */
+export async function writeWhileHeld(
+  db: Database,
+  message: Claimed,
+  change: Change,
+): Promise<boolean> {
+  const held = await db
+    .update(messages)
+    .set(change)
+    .where(
+      and(
+        eq(messages.shopId, message.shopId),
+        eq(messages.id, message.id),
+        eq(messages.state, 'sending'),
+        message.claimedAt ? eq(messages.claimedAt, message.claimedAt) : undefined,
+      ),
+    )
+    .returning({ id: messages.id });
+  return held.length > 0;
+}
+
+export async function writeSent(
+  db: Database,
+  message: Claimed,
+  sent: { providerId: string; state: SmsState; at: Date },
+): Promise<void> {
+  const isDelivered = sent.state === 'delivered';
+  await writeWhileHeld(db, message, {
+    state: isDelivered ? 'delivered' : 'sent',
+    providerId: sent.providerId,
+    sentAt: sent.at,
+    deliveredAt: isDelivered ? sent.at : null,
+    reason: '',
+  });
+}
+
+export const mostAttempts = 8;
+const firstPauseMs = 30_000;
+const longestPauseMs = 3_600_000;
+/** A lost answer is looked up after the provider has had time to write its books. */
+const askAfterMs = 15_000;
+
+export async function writeRefusal(
+  db: Database,
+  message: Claimed,
+  refusal: SmsRefusal | EmailRefusal,
+  now: Date,
+): Promise<void> {
+  const after = (ms: number) => new Date(now.getTime() + ms);
+  if (refusal.retry === 'ask-first') {
+    await writeWhileHeld(db, message, { dueAt: after(askAfterMs), reason: refusal.message });
+    return;
+  }
+  if (refusal.retry === 'later' && message.attempts < mostAttempts) {
+    const pauseMs = Math.min(firstPauseMs * 2 ** (message.attempts - 1), longestPauseMs);
+    const again = { dueAt: after(pauseMs), reason: refusal.message };
+    await writeWhileHeld(db, message, { state: 'waiting', ...again });
+    return;
+  }
+  await writeWhileHeld(db, message, { state: 'refused', reason: callThem(refusal.message) });
+  if (refusal.code === 'opted-out') await writeOptOut(db, message, now);
+}
+
+export function callThem(why: string): string {
+  return `Not delivered: call them. ${why}`;
+}
+
+/** The provider knows of a STOP that we have not heard. */
+export async function writeOptOut(
+  db: Database,
+  message: { shopId: string; customerId: string },
+  now: Date,
+): Promise<void> {
+  const { shopId, customerId } = message;
+  await db.transaction((tx) =>
+    changeConsent(tx, {
+      shopId,
+      customerId,
+      channel: 'sms',
+      given: false,
+      how: 'said STOP, by the texting provider',
+      at: now,
+    }),
+  );
+}

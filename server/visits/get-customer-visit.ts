@@ -1,0 +1,80 @@
+import type { CustomerVisitView } from '@/lib/contracts/visits';
+import { formatAtLocalTime } from '@/lib/time/format-civil';
+import { formatDay, formatTime, formatWindow } from '@/lib/time/format-instant';
+import { toLocal } from '@/lib/time/local-moment';
+import type { TextLocale } from '@/lib/time/text-locale';
+import type { CustomerContext } from '@/server/base/context';
+import { Refusal } from '@/server/base/problem-response';
+import { customerContext } from './customer-context';
+import { type CustomerVisit, readCustomerVisit } from './read-customer-visit';
+import { shopPhoneWords } from './shop-phone';
+import { whoComes } from './visit-people';
+
+/** The customer's page; null for a link that opens nothing, whatever the reason. Reading changes nothing. */
+export async function getCustomerVisit(
+  token: string,
+  from: string,
+): Promise<CustomerVisitView | null> {
+  const ctx = await openLink(token, from);
+  if (!ctx) return null;
+  const visit = await readCustomerVisit(ctx.db, ctx, ctx.actor.visitId);
+  const { shop } = ctx;
+  const { language, zone, kind, status, street, town, customerSays } = visit;
+  const locale: TextLocale = { language, region: shop.region };
+  const { weekdayWords, dateWords } = dayParts(visit, locale);
+  return {
+    language,
+    shopName: shop.name,
+    shopPhone: shopPhoneWords(shop),
+    kind,
+    status,
+    weekdayWords,
+    dateWords,
+    windowWords: formatWindow(
+      { from: visit.windowStartsAt, until: visit.windowEndsAt },
+      zone,
+      locale,
+    ),
+    untilWords: untilWords(visit, locale),
+    whoComes: await whoComes(ctx.db, ctx, visit.id),
+    street,
+    town,
+    customerSays,
+    isOldHouse: visit.yearBuilt === null || visit.yearBuilt < oldBefore[shop.region],
+  };
+}
+
+/** Lead paint in the US before 1978; asbestos in the UK before 2000, and alike elsewhere: C06–C10 of the cautions. */
+const oldBefore = { US: 1978, UK: 2000, AU: 2000, EU: 2000 } as const;
+
+/** Past the limit of tries the answer is that of any link that opens nothing. */
+async function openLink(token: string, from: string): Promise<CustomerContext | null> {
+  try {
+    return await customerContext(token, from);
+  } catch (error) {
+    if (error instanceof Refusal) return null;
+    throw error;
+  }
+}
+
+/** "Thursday" and "December 10": the page sets them on two lines. */
+function dayParts({ windowStartsAt, zone }: CustomerVisit, locale: TextLocale) {
+  const words = formatDay(windowStartsAt, zone, locale);
+  const [weekdayWords = words, ...rest] = words.split(/,? /);
+  return { weekdayWords, dateWords: rest.join(' ') };
+}
+
+/** Until when they work: the time of the same day, or the last day; measures are short and say nothing. */
+function untilWords(visit: CustomerVisit, locale: TextLocale): string {
+  const { startsAt, endsAt, zone, kind } = visit;
+  if (kind === 'site-measure' || kind === 'check-measure') return '';
+  const time = formatTime(endsAt, zone, locale);
+  const isOneDay = toLocal(startsAt, zone).date === toLocal(endsAt, zone).date;
+  const day = formatDay(endsAt, zone, locale);
+  if (locale.language === 'es') {
+    // "las 3:30 p.m.", but "la 1:00 p.m."
+    const hour = formatAtLocalTime(toLocal(endsAt, zone).time, locale).replace(/^a /, '');
+    return isOneDay ? `hasta cerca de ${hour}` : `hasta el ${day}, cerca de ${hour}`;
+  }
+  return isOneDay ? `until about ${time}` : `until ${day}, about ${time}`;
+}

@@ -1,0 +1,138 @@
+import { and, asc, eq, gte, ne } from 'drizzle-orm';
+import type { Transaction } from '@/db/database';
+import { crewPeople, visitPiecePeople, visitPieces } from '@/db/schema';
+import type { ReportVisitInput, VisitStatus, VisitView } from '@/lib/contracts/visits';
+import { visitKindWords } from '@/lib/schedule/visit-kind-words';
+import { writeAudit } from '@/server/base/audit';
+import { mustBeAllowed, type PersonContext } from '@/server/base/context';
+import { notFound, Refusal } from '@/server/base/problem-response';
+import { moveStage } from '@/server/jobs/move-stage';
+import { kickWorker } from '@/server/messages/worker';
+import { changeVisit, type LockedVisit, lockVisit } from './lock-visit';
+import { readVisit } from './read-visits';
+import { tellOnMyWay } from './tell-customer';
+
+type What = ReportVisitInput['what'];
+
+const statusAfter: Record<What, VisitStatus> = {
+  'on-the-way': 'on-the-way',
+  arrived: 'on-site',
+  done: 'done',
+  'nobody-home': 'missed',
+};
+const words: Record<What, string> = {
+  'on-the-way': 'on the way',
+  arrived: 'arrived',
+  done: 'done',
+  'nobody-home': 'nobody home',
+};
+/** What is told later than something that comes after it changes nothing. */
+const rank: Record<VisitStatus, number> = {
+  held: 0,
+  booked: 0,
+  confirmed: 0,
+  'on-the-way': 1,
+  'on-site': 2,
+  done: 3,
+  missed: 3,
+  'called-off': 4,
+};
+/** A tap that reaches us later than this is no news to the customer. */
+const freshMinutes = 15;
+
+/** One tap on site. Sent twice, or late from a phone without signal, it does no harm. */
+export async function reportVisit(ctx: PersonContext, input: ReportVisitInput): Promise<VisitView> {
+  mustBeAllowed(ctx, 'visits:report');
+  const view = await ctx.db.transaction(async (tx) => {
+    const before = await lockVisit(tx, ctx, input.visitId);
+    await mustBeOwnVisit(tx, ctx, before);
+    if (before.status === 'called-off') throw calledOff(await readVisit(tx, ctx, before.id));
+    const status = statusAfter[input.what];
+    if (rank[status] <= rank[before.status]) return readVisit(tx, ctx, before.id);
+
+    // A phone's clock may be ahead of ours.
+    const at = new Date(Math.min(new Date(input.at).getTime(), ctx.now.getTime()));
+    const after = await changeVisit(tx, ctx, before, {
+      status,
+      ...(input.what === 'arrived' ? { arrivedAt: at } : {}),
+      ...(rank[status] === 3 ? { leftAt: at } : {}),
+    });
+    if (rank[status] === 3) await freeTimeAfter(tx, ctx, after.id, at);
+    if (input.what === 'arrived' && after.kind === 'install') {
+      await moveStage(tx, ctx, { jobId: after.jobId, event: 'arrived-for-install' });
+    }
+    const isFresh = ctx.now.getTime() - at.getTime() < freshMinutes * 60_000;
+    if (input.what === 'on-the-way' && isFresh) await tellOnMyWay(tx, ctx, after);
+    await writeAudit(tx, ctx, {
+      verb: 'report-visit',
+      subjectKind: 'visit',
+      subjectId: after.id,
+      jobId: after.jobId,
+      summary: `${visitKindWords[after.kind]}: ${words[input.what]}`,
+      detail: { what: input.what, at },
+    });
+    return readVisit(tx, ctx, after.id);
+  });
+  kickWorker();
+  return view;
+}
+
+/** Fitters and measurers see the visits of their own crews; the office sees all. */
+async function mustBeOwnVisit(
+  tx: Transaction,
+  ctx: PersonContext,
+  visit: LockedVisit,
+): Promise<void> {
+  const { role, personId } = ctx.actor;
+  if (role === 'owner' || role === 'scheduler') return;
+  const [own] = await tx
+    .select({ crewId: crewPeople.crewId })
+    .from(crewPeople)
+    .where(
+      and(
+        eq(crewPeople.shopId, ctx.shop.id),
+        eq(crewPeople.crewId, visit.crewId),
+        eq(crewPeople.personId, personId),
+      ),
+    );
+  if (!own) throw notFound('visit');
+}
+
+/** Who leaves early can be booked elsewhere: the days not begun are given back, and the rest of this one. */
+async function freeTimeAfter(
+  tx: Transaction,
+  ctx: PersonContext,
+  visitId: string,
+  at: Date,
+): Promise<void> {
+  const ofVisit = and(eq(visitPieces.shopId, ctx.shop.id), eq(visitPieces.visitId, visitId));
+  const pieces = await tx
+    .select({ id: visitPieces.id, startsAt: visitPieces.startsAt, endsAt: visitPieces.endsAt })
+    .from(visitPieces)
+    .where(ofVisit)
+    .orderBy(asc(visitPieces.startsAt));
+  const [first] = pieces;
+  if (!first) return;
+  await tx
+    .delete(visitPieces)
+    .where(and(ofVisit, ne(visitPieces.id, first.id), gte(visitPieces.startsAt, at)));
+  const begun = pieces.find(({ startsAt, endsAt }) => startsAt < at && at < endsAt);
+  if (!begun) return;
+  await tx
+    .update(visitPieces)
+    .set({ endsAt: at })
+    .where(and(ofVisit, eq(visitPieces.id, begun.id)));
+  await tx
+    .update(visitPiecePeople)
+    .set({ endsAt: at })
+    .where(and(eq(visitPiecePeople.shopId, ctx.shop.id), eq(visitPiecePeople.pieceId, begun.id)));
+}
+
+function calledOff(current: VisitView): Refusal {
+  return new Refusal({
+    status: 409,
+    code: 'visit-called-off',
+    message: 'This visit was called off. Ring the office before you go on.',
+    current,
+  });
+}
