@@ -1,3 +1,4 @@
+import { bracket } from './bracket';
 import { type Combination, combine, type ErrorSource, readCombination } from './combination';
 
 /**
@@ -51,13 +52,9 @@ export function placeBetween(
   along: 'xMm' | 'zMm',
   atMm: number,
 ): FacePlace | null {
-  for (const [index, to] of line.entries()) {
-    if (to[along] < atMm) continue;
-    if (to[along] === atMm) return to;
-    const from = line[index - 1];
-    return from ? mixed(from, to, (atMm - from[along]) / (to[along] - from[along])) : null;
-  }
-  return null;
+  const found = bracket(line, (place) => place[along], atMm);
+  if (found === null) return null;
+  return found.share === 0 ? found.from : mixed(found.from, found.to, found.share);
 }
 
 function mixed(from: FacePlace, to: FacePlace, share: number): FacePlace {

@@ -28,14 +28,3 @@ function turnsDown(a: HullPoint | undefined, b: HullPoint | undefined, c: HullPo
   if (!a || !b) return true;
   return (b.s - a.s) * (c.at - a.at) > (c.s - a.s) * (b.at - a.at);
 }
-
-/** The two neighbours of a hull between which a place lies; one and the same at a vertex. */
-export function hullEdgeAt<P extends HullPoint>(hull: P[], at: number): { from: P; to: P } | null {
-  for (const [index, to] of hull.entries()) {
-    if (to.at < at) continue;
-    const from = hull[index - 1];
-    if (to.at === at) return { from: to, to };
-    return from ? { from, to } : null;
-  }
-  return null;
-}

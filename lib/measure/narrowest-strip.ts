@@ -1,5 +1,6 @@
+import { type Bracket, bracket } from './bracket';
 import { type Combination, combine, readCombination } from './combination';
-import { hullEdgeAt, lowerHull, upperHull } from './hull';
+import { lowerHull, upperHull } from './hull';
 import type { ProfilePoint } from './profile';
 
 /** A place of a profile with what it was made of (a reading, or a value between two). */
@@ -46,21 +47,25 @@ export function narrowestStrip(points: StripPoint[]): Strip | null {
 }
 
 function heightAt(hull: StripPoint[], at: number): number {
-  const edge = hullEdgeAt(hull, at);
-  if (edge === null) return Number.NaN;
-  const { from, to } = edge;
-  return from === to ? to.s : from.s + ((at - from.at) / (to.at - from.at)) * (to.s - from.s);
+  const edge = bracket(hull, positionOf, at);
+  return edge === null ? Number.NaN : edge.from.s + edge.share * (edge.to.s - edge.from.s);
 }
 
 function placeAt(hull: StripPoint[], at: number): Combination {
-  const edge = hullEdgeAt(hull, at);
+  return placeOn(bracket(hull, positionOf, at));
+}
+
+function positionOf({ at }: StripPoint): number {
+  return at;
+}
+
+/** The value between two neighbours. */
+export function placeOn(edge: Bracket<{ c: Combination }> | null): Combination {
   if (edge === null) return { value: Number.NaN, parts: [] };
-  const { from, to } = edge;
-  if (from === to) return to.c;
-  const share = (at - from.at) / (to.at - from.at);
+  if (edge.share === 0) return edge.from.c;
   return combine([
-    [1 - share, from.c],
-    [share, to.c],
+    [1 - edge.share, edge.from.c],
+    [edge.share, edge.to.c],
   ]);
 }
 

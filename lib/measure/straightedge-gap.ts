@@ -1,7 +1,8 @@
 import { type Outcome, problem, refused } from '@/lib/problem';
+import { bracket } from './bracket';
 import { type Combination, combinationFigure, combine } from './combination';
 import type { Figure } from './figure';
-import { narrowestStrip, type StripPoint, stripPoint } from './narrowest-strip';
+import { narrowestStrip, placeOn, type StripPoint, stripPoint } from './narrowest-strip';
 import type { ProfilePoint } from './profile';
 import { unreadable } from './reading-problems';
 
@@ -120,15 +121,8 @@ function windowOf(profile: StripPoint[], from: number, length: number): StripPoi
 }
 
 function valueAt(profile: StripPoint[], at: number): StripPoint {
-  const index = profile.findIndex((point) => point.at >= at);
-  const to = profile[index === -1 ? profile.length - 1 : index];
-  const from = profile[index - 1];
-  if (!to || to.at === at || !from)
-    return { at, s: to?.s ?? 0, c: to?.c ?? { value: 0, parts: [] } };
-  const share = (at - from.at) / (to.at - from.at);
-  const c = combine([
-    [1 - share, from.c],
-    [share, to.c],
-  ]);
+  // The right end may miss the last reading by rounding.
+  const reach = Math.min(at, profile.at(-1)?.at ?? at);
+  const c = placeOn(bracket(profile, (point) => point.at, reach));
   return { at, s: c.value, c };
 }
