@@ -50,7 +50,13 @@ export async function joinShop(input: JoinShopInput, from: string): Promise<{ em
     const [taken] = await tx
       .update(invitations)
       .set({ acceptedAt: now })
-      .where(and(eq(invitations.id, invitation.id), isNull(invitations.acceptedAt)))
+      .where(
+        and(
+          eq(invitations.shopId, shop.id),
+          eq(invitations.id, invitation.id),
+          isNull(invitations.acceptedAt),
+        ),
+      )
       .returning({ id: invitations.id });
     if (!taken) throw invitationOver();
     const userId =

@@ -22,7 +22,14 @@ export function ensureBuilt(say) {
   say('building (about a minute, once)');
   const build = spawnSync('npx', ['next', 'build'], {
     stdio: ['ignore', 'pipe', 'pipe'],
-    env: { ...process.env, NEXT_TELEMETRY_DISABLED: '1', NODE_ENV: 'production' },
+    env: {
+      ...process.env,
+      NEXT_TELEMETRY_DISABLED: '1',
+      NODE_ENV: 'production',
+      // Where nothing can be opened: a build that wanted a database would fail here, and not on a shop's data.
+      DATABASE_URL: 'postgres://nowhere.invalid/none',
+      SETWELL_DATA: '/dev/null/none',
+    },
     encoding: 'utf8',
   });
   if (build.status !== 0) {
