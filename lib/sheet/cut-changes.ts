@@ -1,8 +1,9 @@
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Fit } from '@/lib/measure/fit';
+import type { FitFigure } from '@/lib/measure/fit-figure';
 import type { RunFit } from '@/lib/measure/run-fit';
 import { formatLength } from '@/lib/units/format-length';
-import { roundBlankUp } from '@/lib/units/round';
+import { roundedMm } from './figure-text';
 
 /**
  * The cut sizes of two fits that differ after rounding, and the runs whose verdict turned, in words.
@@ -39,11 +40,11 @@ export function cutChanges(before: Fit, after: Fit, rules: FitRules): string[] {
 
 function blanksOf(run: RunFit, stepMm: number): Map<string, number> {
   const blanks = new Map<string, number>();
-  const add = (piece: string, mm: number | undefined) => {
-    if (mm !== undefined) blanks.set(piece, roundBlankUp(mm, stepMm));
+  const add = (piece: string, blank: FitFigure | undefined) => {
+    if (blank) blanks.set(piece, roundedMm(blank, stepMm));
   };
-  add('filler left', run.left.filler?.blank.value);
-  add('filler right', run.right.filler?.blank.value);
-  add('kick face', run.kicks?.faceBlank?.blank.value);
+  add('filler left', run.left.filler?.blank);
+  add('filler right', run.right.filler?.blank);
+  add('kick face', run.kicks?.faceBlank?.blank);
   return blanks;
 }
