@@ -30,10 +30,10 @@ export function faceBehind(
 
 /** The rows that cross a band, up to and with its upper and lower edge, in order along the wall. */
 export function rowsBehind(places: FacePlace[], band: Band): FacePlace[][] {
-  const inside = faceRows([...places, ...crossings(places, band)]).filter((row) =>
-    row.some(({ zMm }) => within(zMm, band.z0Mm, band.z1Mm)),
-  );
-  return inside.length > 0 ? inside : nearestLine(faceRows(places), 'zMm', band.z0Mm, band.z1Mm);
+  const rows = faceRows(places);
+  const read = rows.filter((row) => row.some(({ zMm }) => within(zMm, band.z0Mm, band.z1Mm)));
+  const inside = [...read, ...faceRows(crossings(places, band))];
+  return inside.length > 0 ? inside : nearestLine(rows, 'zMm', band.z0Mm, band.z1Mm);
 }
 
 function behindBand(

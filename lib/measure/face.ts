@@ -23,8 +23,8 @@ export type FacePlace = {
   id: string | null;
 };
 
-/** Heights or places nearer than this were meant to be the same. */
-const SAME_LINE_MM = 5;
+/** Readings this near in height are one row, this near along the wall one column; from memory. */
+const SAME_LINE_MM = 60;
 
 /** The reading as a place; the set-up's own plumb error grows with z and is shared by all its readings. */
 export function facePlace({ id, xMm, zMm, sMm, u }: FacePoint, plumb: ErrorSource): FacePlace {
