@@ -54,6 +54,7 @@ export function checkFiller(text: FillerText, unit: LengthUnit): FillerCheck {
   const { value: scribe, problems } = scribeAllowance({
     places,
     uShared: 0,
+    held: 'by-size',
     rules: { marginMm: fit.scribeMarginMm, leastMm: fit.scribeLeastMm, stepMm: fit.scribeStepMm },
   });
   const notes = problems.map(({ message }) => message);

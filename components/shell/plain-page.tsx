@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { RoomSketch } from './room-sketch';
 import { Wordmark } from './wordmark';
 
 type PlainPageProps = {
@@ -16,9 +17,16 @@ export function PlainPage({ aside, width = 'page', children }: PlainPageProps) {
         <Wordmark />
         {aside}
       </header>
-      <main className={`flex-1 py-6 md:py-10 ${width === 'form' ? 'w-full max-w-form' : ''}`}>
-        {children}
-      </main>
+      {width === 'form' ? (
+        <div className="grid flex-1 grid-cols-[minmax(0,1fr)] gap-16 py-6 md:py-10 lg:grid-cols-[26rem_minmax(0,1fr)]">
+          <main className="max-w-form">{children}</main>
+          <div className="max-w-xl max-lg:hidden">
+            <RoomSketch />
+          </div>
+        </div>
+      ) : (
+        <main className="flex-1 py-6 md:py-10">{children}</main>
+      )}
     </div>
   );
 }

@@ -1,6 +1,13 @@
 'use client';
 
-import { type MouseEvent, type ReactNode, useEffect, useId, useRef } from 'react';
+import {
+  type MouseEvent,
+  type ReactNode,
+  type SyntheticEvent,
+  useEffect,
+  useId,
+  useRef,
+} from 'react';
 import { Button } from './button';
 import { classNames } from './class-names';
 import { TitleBlock } from './title-block';
@@ -35,6 +42,10 @@ export function Dialog({ isOpen, onClose, title, children, footer, className }: 
     };
   }, [isOpen]);
 
+  // The event comes late: an effect that ran twice may have opened the dialog again by then.
+  const closeUnlessOpenedAgain = (event: SyntheticEvent<HTMLDialogElement>) => {
+    if (!event.currentTarget.open) onClose();
+  };
   const closeOnBackdrop = (event: MouseEvent<HTMLDialogElement>) => {
     if (event.target === event.currentTarget) onClose();
   };
@@ -43,7 +54,7 @@ export function Dialog({ isOpen, onClose, title, children, footer, className }: 
     <dialog
       ref={ref}
       aria-labelledby={titleId}
-      onClose={onClose}
+      onClose={closeUnlessOpenedAgain}
       onMouseDown={closeOnBackdrop}
       className={classNames(
         'm-auto max-h-[90dvh] w-[calc(100%-2rem)] max-w-xl rounded border border-ink bg-sheet p-0 text-ink',

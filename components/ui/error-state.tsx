@@ -17,7 +17,7 @@ export function ErrorState({ title, children, action }: ErrorStateProps) {
       className="flex max-w-prose flex-col items-start gap-3 border border-l-4 border-chalk px-5 py-5"
     >
       <p className="text-lead font-bold text-chalk">
-        <Glyph name="problem" className="mr-1" />
+        <Glyph name="problem" className="-ml-[0.3em] mr-[0.1em]" />
         {title}
       </p>
       <div>{children}</div>

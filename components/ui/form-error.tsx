@@ -19,7 +19,7 @@ export function FormError({
   return (
     <div role="alert" className="border-l-4 border-chalk bg-tint px-3 py-2">
       <p className="font-bold text-chalk">
-        <Glyph name="problem" className="mr-1" />
+        <Glyph name="problem" className="-ml-[0.3em] mr-[0.1em]" />
         {problem.title}
       </p>
       {problem.detail ? <p>{problem.detail}</p> : null}
