@@ -368,6 +368,7 @@ CREATE TABLE "rooms" (
 	"position" integer DEFAULT 0 NOT NULL,
 	"wall_thickness_to_come_mm" double precision DEFAULT 0 NOT NULL,
 	"floor_to_come_mm" double precision DEFAULT 0 NOT NULL,
+	"cabinets_stand_on" text,
 	"submitted_at" timestamp with time zone,
 	"created_at" timestamp with time zone DEFAULT now() NOT NULL,
 	CONSTRAINT "rooms_shop_id" UNIQUE("shop_id","id")
@@ -394,6 +395,8 @@ CREATE TABLE "units" (
 	"kind" text NOT NULL,
 	"width_mm" double precision NOT NULL,
 	"alterable" jsonb,
+	"arm_mm" double precision,
+	"need_height_mm" double precision,
 	CONSTRAINT "units_shop_id" UNIQUE("shop_id","id")
 );
 --> statement-breakpoint

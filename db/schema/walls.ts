@@ -25,6 +25,7 @@ export const rooms = pgTable(
     position: integer('position').notNull().default(0),
     wallThicknessToComeMm: doublePrecision('wall_thickness_to_come_mm').notNull().default(0),
     floorToComeMm: doublePrecision('floor_to_come_mm').notNull().default(0),
+    cabinetsStandOn: text('cabinets_stand_on', { enum: ['finished-floor', 'rough-floor'] }),
     /** The measurer says that the book is full. */
     submittedAt: instant('submitted_at'),
     createdAt: createdAt(),
@@ -132,6 +133,8 @@ export const units = pgTable(
     kind: text('kind').$type<Unit['kind']>().notNull(),
     widthMm: doublePrecision('width_mm').notNull(),
     alterable: jsonb('alterable').$type<Unit['alterable']>(),
+    armMm: doublePrecision('arm_mm'),
+    needHeightMm: doublePrecision('need_height_mm'),
   },
   (table) => [
     unique('units_shop_id').on(table.shopId, table.id),

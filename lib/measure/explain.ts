@@ -149,6 +149,20 @@ export const figureWords: Record<FigureKind, FigureWords> = {
     measure: 'length',
     rounding: 'nearest',
   },
+  'free-room': {
+    name: 'Free room at an open end',
+    formula: 'From the finished end to the limit that was set for it.',
+    surer: moreHeights,
+    measure: 'length',
+    rounding: 'down',
+  },
+  'wall-to-cut': {
+    name: 'Wall to cut back',
+    formula: 'How far the wall stands proud of a plane that something already set holds fast.',
+    surer: 'A face reading at this place.',
+    measure: 'length',
+    rounding: 'up',
+  },
   'set-line-gap': {
     name: 'Largest gap behind a run',
     formula:
@@ -163,6 +177,20 @@ export const figureWords: Record<FigureKind, FigureWords> = {
     surer: 'A face reading at this place.',
     measure: 'length',
     rounding: 'up',
+  },
+  'wall-to-cut': {
+    name: 'Wall to cut',
+    formula: 'Where the wall stands proud of a set line that cabinets already set have fixed.',
+    surer: 'A face reading at this place.',
+    measure: 'length',
+    rounding: 'up',
+  },
+  'free-room': {
+    name: 'Room left at an open end',
+    formula: 'From the last unit to the limit of the open end, the closed end at its least filler.',
+    surer: moreHeights,
+    measure: 'length',
+    rounding: 'down',
   },
   'filler-width': {
     name: 'Face width of a filler',

@@ -46,6 +46,10 @@ function roomChanges(was: Room, now: Room, unit: 'in' | 'mm'): string[] {
   };
   told('Board still to come on the walls', was.wallThicknessToComeMm, now.wallThicknessToComeMm);
   told('Floor still to come', was.floorToComeMm, now.floorToComeMm);
+  if (was.cabinetsStandOn !== now.cabinetsStandOn) {
+    const floor = now.cabinetsStandOn === 'rough-floor' ? 'rough' : 'finished';
+    changes.push(`The cabinets now stand on the ${floor} floor`);
+  }
   return changes;
 }
 

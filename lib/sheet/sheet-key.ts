@@ -12,9 +12,9 @@ export function sheetKey(state: {
   runs: readonly Run[];
   standingIds: readonly string[];
 }) {
-  const { chains, wallThicknessToComeMm, floorToComeMm } = state.room;
+  const { chains, wallThicknessToComeMm, floorToComeMm, cabinetsStandOn } = state.room;
   return sortedJson({
-    room: { chains, wallThicknessToComeMm, floorToComeMm },
+    room: { chains, wallThicknessToComeMm, floorToComeMm, cabinetsStandOn },
     runs: state.runs.map(cutRelevant).sort((one, other) => (one.id < other.id ? -1 : 1)),
     readings: [...state.standingIds].sort(),
   });

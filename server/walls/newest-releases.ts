@@ -58,6 +58,7 @@ async function keysNow(
       name: rooms.name,
       wallThicknessToComeMm: rooms.wallThicknessToComeMm,
       floorToComeMm: rooms.floorToComeMm,
+      cabinetsStandOn: rooms.cabinetsStandOn,
     })
     .from(rooms)
     .where(and(eq(rooms.shopId, ctx.shop.id), inArray(rooms.id, roomIds)));
@@ -65,10 +66,14 @@ async function keysNow(
   const chains = await readChains(db, ctx, roomIds);
   const runs = await readRuns(db, ctx, roomIds);
   return new Map(
-    rows.map((row) => [
+    rows.map(({ cabinetsStandOn, ...row }) => [
       row.id,
       sheetKey({
-        room: { ...row, chains: chains.get(row.id) ?? [] },
+        room: {
+          ...row,
+          chains: chains.get(row.id) ?? [],
+          ...(cabinetsStandOn ? { cabinetsStandOn } : {}),
+        },
         runs: runs.get(row.id) ?? [],
         standingIds: standingReadings(lines.get(row.id) ?? []).map(({ id }) => id),
       }),

@@ -30,14 +30,21 @@ export async function readRuns(
       kind: units.kind,
       widthMm: units.widthMm,
       alterable: units.alterable,
+      armMm: units.armMm,
+      needHeightMm: units.needHeightMm,
     })
     .from(units)
     .innerJoin(runs, eq(runs.id, units.runId))
     .where(ofRooms)
     .orderBy(asc(units.position));
   const ofRun = new Map<string, Run['units']>();
-  for (const { runId, ...unit } of unitRows) {
-    ofRun.set(runId, [...(ofRun.get(runId) ?? []), unit]);
+  for (const { runId, armMm, needHeightMm, ...unit } of unitRows) {
+    const whole = {
+      ...unit,
+      ...(armMm === null ? {} : { armMm }),
+      ...(needHeightMm === null ? {} : { needHeightMm }),
+    };
+    ofRun.set(runId, [...(ofRun.get(runId) ?? []), whole]);
   }
   const ofRoom = new Map<string, Run[]>();
   for (const { roomId, body, ...run } of runRows) {

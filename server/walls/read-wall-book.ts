@@ -37,6 +37,7 @@ export async function readWallBook(
       name: rooms.name,
       wallThicknessToComeMm: rooms.wallThicknessToComeMm,
       floorToComeMm: rooms.floorToComeMm,
+      cabinetsStandOn: rooms.cabinetsStandOn,
       submittedAt: rooms.submittedAt,
     })
     .from(rooms)
@@ -45,13 +46,20 @@ export async function readWallBook(
     .innerJoin(sites, eq(sites.id, jobs.siteId))
     .where(and(eq(rooms.shopId, ctx.shop.id), eq(rooms.id, roomId)));
   if (!found) throw notFound('room');
-  const { name, wallThicknessToComeMm, floorToComeMm, ...around } = found;
+  const { name, wallThicknessToComeMm, floorToComeMm, cabinetsStandOn, ...around } = found;
   const chains = (await readChains(db, ctx, [roomId])).get(roomId) ?? [];
   const lines = await readLines(db, ctx, roomId);
   return {
     ...around,
     wallBook: {
-      room: { id: roomId, name, chains, wallThicknessToComeMm, floorToComeMm },
+      room: {
+        id: roomId,
+        name,
+        chains,
+        wallThicknessToComeMm,
+        floorToComeMm,
+        ...(cabinetsStandOn ? { cabinetsStandOn } : {}),
+      },
       readings: lines.map(({ body }) => body),
       tools: await readTools(db, ctx),
     },

@@ -43,8 +43,8 @@ async function writeRoom(
   ctx: PersonContext,
   { jobId, room }: SaveRoomInput,
 ): Promise<boolean> {
-  const { id, name, wallThicknessToComeMm, floorToComeMm } = room;
-  const change = { name, wallThicknessToComeMm, floorToComeMm };
+  const { id, name, wallThicknessToComeMm, floorToComeMm, cabinetsStandOn = null } = room;
+  const change = { name, wallThicknessToComeMm, floorToComeMm, cabinetsStandOn };
   const ofJob = and(eq(rooms.shopId, ctx.shop.id), eq(rooms.jobId, jobId));
   const [changed] = await tx
     .update(rooms)

@@ -38,7 +38,7 @@ export function kitchenRuns(wallIds: string[], newId: () => string): Run[] {
       units: [
         unit('drawers', 21, '', true),
         unit('sink', 36, '', true),
-        unit('dishwasher', 24),
+        { ...unit('dishwasher', 24), needHeightMm: 34 * inch },
         unit('base', 30, '', true),
         unit('base', 27, '', true),
       ],

@@ -100,6 +100,11 @@ const changes: [string, State, string[]][] = [
     ['Bar: a new run on wall A'],
   ],
   ['a floor to come', withRoom({ floorToComeMm: 19.05 }), ['Floor still to come: 0" is now 3/4"']],
+  [
+    'cabinets on another floor',
+    withRoom({ cabinetsStandOn: 'rough-floor' }),
+    ['The cabinets now stand on the rough floor'],
+  ],
   ['walls drawn anew', withRoom({ chains: [] }), ['The walls were drawn anew']],
 ];
 
