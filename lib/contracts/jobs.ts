@@ -3,9 +3,16 @@ import { z } from 'zod';
 import { stages } from '@/lib/schedule/stages';
 
 const id = z.uuid();
+/** Names and addresses stand in headers, calendars and sheets: no line ends, no control characters. */
+const oneLine = (most: number) =>
+  z
+    .string()
+    .trim()
+    .max(most)
+    .regex(/^\P{Cc}*$/u, 'Write it in one line.');
 
 export const customerInput = z.object({
-  name: z.string().trim().min(1, 'Give the customer a name.').max(120),
+  name: oneLine(120).min(1, 'Give the customer a name.'),
   /** As typed; kept as E.164. Empty: none. */
   phone: z.string().trim().max(40).default(''),
   email: z.union([z.literal(''), z.email('That is no e-mail address.').max(200)]).default(''),
@@ -16,9 +23,9 @@ export const customerInput = z.object({
 });
 
 export const siteInput = z.object({
-  street: z.string().trim().min(1, 'Give the street and number.').max(160),
-  town: z.string().trim().max(80).default(''),
-  postcode: z.string().trim().max(20).default(''),
+  street: oneLine(160).min(1, 'Give the street and number.'),
+  town: oneLine(80).default(''),
+  postcode: oneLine(20).default(''),
   latitude: z.number().min(-90).max(90).nullable().default(null),
   longitude: z.number().min(-180).max(180).nullable().default(null),
   /** How to get in; no codes here. */
@@ -32,7 +39,7 @@ export const siteInput = z.object({
 export const startJobInput = z.object({
   customer: customerInput,
   site: siteInput,
-  title: z.string().trim().min(1, 'Say what it is: "Kitchen, L, 11 units".').max(120),
+  title: oneLine(120).min(1, 'Say what it is: "Kitchen, L, 11 units".'),
   roomCount: z.number().int().min(1).max(30).default(1),
   unitCount: z.number().int().min(0).max(300).default(0),
   wallsReady: z.enum(['not-yet', 'bare-studs', 'closed']).default('not-yet'),
@@ -44,7 +51,7 @@ export type StartJobInput = z.infer<typeof startJobInput>;
 /** What the office learns about a job later; only what is given is changed. */
 export const changeJobInput = z.object({
   jobId: id,
-  title: z.string().trim().min(1).max(120).optional(),
+  title: oneLine(120).min(1).optional(),
   wallsReady: z.enum(['not-yet', 'bare-studs', 'closed']).optional(),
   siteReadyOn: z.iso.date().nullable().optional(),
   floorAgreed: z.boolean().optional(),
