@@ -63,7 +63,7 @@ function waitingItem(ctx: PersonContext, job: JobRecord, kind: VisitKind): Waiti
     workMinutes: estimateMinutes(ctx, job, { kind }),
     state: readiness.state,
     from: readiness.from,
-    why: readiness.state === 'blocked' ? `not yet: ${readiness.words}` : readiness.words,
+    why: readiness.words,
     openGates: readiness.gates
       .filter(({ state }) => state !== 'passed')
       .map(({ key, words }) => ({ gate: key, words })),

@@ -24,7 +24,7 @@ function tokenOf(linkId: string): string {
 
 export async function makeVisitLink(
   tx: Transaction,
-  ctx: Context,
+  ctx: { shop: Pick<Context['shop'], 'id'> },
   visit: { visitId: string; endsAt: Date },
 ): Promise<void> {
   const id = randomUUID();

@@ -1,0 +1,33 @@
+import AxeBuilder from '@axe-core/playwright';
+import type { Page } from 'playwright-core';
+import { expect } from 'vitest';
+
+/** No fault that axe calls serious or critical, and nothing that makes the page scroll sideways. */
+export async function expectNoSeriousFault(page: Page): Promise<void> {
+  const { violations } = await new AxeBuilder({ page }).analyze();
+  const serious = violations
+    .filter(({ impact }) => impact === 'serious' || impact === 'critical')
+    .flatMap(({ id, help, nodes }) =>
+      nodes.map(({ target, failureSummary }) => ({
+        page: page.url(),
+        fault: `${id}: ${help}`,
+        where: target.join(' '),
+        why: failureSummary?.split('\n').slice(1).join(' ').trim(),
+      })),
+    );
+  expect(serious).toEqual([]);
+  await expectNoSidewaysScroll(page);
+}
+
+export async function expectNoSidewaysScroll(page: Page): Promise<void> {
+  const wide = await page.evaluate(() => {
+    const { scrollWidth, clientWidth } = document.documentElement;
+    if (scrollWidth <= clientWidth) return [];
+    // The outermost things that stick out, named so that they can be found.
+    return [...document.querySelectorAll('body *')]
+      .filter((element) => element.getBoundingClientRect().right > clientWidth + 1)
+      .slice(0, 5)
+      .map((element) => `${element.tagName} ${element.className}`.slice(0, 120));
+  });
+  expect(wide).toEqual([]);
+}
