@@ -281,6 +281,8 @@ export const room = z.object({
   /** Faces still to come: thickness to be added to bare studs, floor build-up to be laid. */
   wallThicknessToComeMm: z.number().min(0).max(100).default(0),
   floorToComeMm: z.number().min(0).max(200).default(0),
+  /** What the cabinets are set on where a floor is still to come; the finished floor unless said. */
+  cabinetsStandOn: z.enum(['finished-floor', 'rough-floor']).optional(),
 });
 export type Room = z.infer<typeof room>;
 

@@ -81,7 +81,7 @@ export function endProblems(frame: RunFrame): Problem[] {
     numbers.push(face.meets === 'plane' ? face.x.value : face.angle.value);
     if (face.meets === 'wall') {
       numbers.push(face.lean.value, face.bow.value);
-      for (const point of face.points) numbers.push(point.yMm, point.zMm, point.bMm, point.uMm);
+      for (const point of face.points) numbers.push(point.yMm, point.zMm, point.proudMm, point.uMm);
     }
     if (face.meets === 'run') numbers.push(face.frontMm, face.otherTurnDeg);
   }

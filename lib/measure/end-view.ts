@@ -108,7 +108,11 @@ function viewWall(
     const inside = Math.min(1, Math.max(0, t));
     return 4 * inside * (1 - inside);
   };
-  const surface = faceSurface(face.points, face.usualBowMm, shape);
+  const surface = faceSurface(face.points, {
+    bowShape: shape,
+    zRefMm: frame.zRefMm,
+    usualBowMm: face.usualBowMm,
+  });
   return {
     end,
     meets: 'wall',
@@ -116,14 +120,14 @@ function viewWall(
     surface,
     at: (yMm, zMm) => {
       const here = surface.at(yMm, zMm);
-      const upMm = zMm - frame.zRefMm;
-      const proud = face.lean.value * upMm + face.bow.value * here.bowShare + here.bMm;
+      const leaning = face.lean.value * here.leanShareMm;
+      const proud = here.proudMm + leaning + face.bow.value * here.bowShare;
       return {
         end,
         yMm,
         zMm,
         xMm: lens.xOf(yMm, proud),
-        slope: lens.slopeOf(yMm, proud, upMm, here.bowShare),
+        slope: lens.slopeOf(yMm, proud, here.leanShareMm, here.bowShare),
         ownU: here.uMm / lens.sine,
         faceFrom: here.from,
         readingId: here.readingId,
@@ -138,7 +142,7 @@ type Lens = {
   /** Out of the set line → out of the wall's own corner. */
   yFromCorner: (yMm: number) => number;
   xOf: (yMm: number, proudMm: number) => number;
-  slopeOf: (yMm: number, proudMm: number, upMm: number, bowShare: number) => number[];
+  slopeOf: (yMm: number, proudMm: number, leanShareMm: number, bowShare: number) => number[];
 };
 
 /** x = corner ± (y/tan θ′ + proud/sin θ′) and its derivatives, seen along the set line. */
@@ -160,12 +164,12 @@ function lensOf(frame: RunFrame, end: 'left' | 'right'): Lens {
     sine,
     yFromCorner: (yMm) => yMm - cornerY,
     xOf: (yMm, proudMm) => cornerX + into * ((yMm - cornerY) * cot + proudMm / sine),
-    slopeOf: (yMm, proudMm, upMm, bowShare) => {
+    slopeOf: (yMm, proudMm, leanShareMm, bowShare) => {
       const slope = [...NO_SLOPE];
       // A longer wall moves its right corner along it; how far behind the set line it lies stays as read.
       if (end === 'right') slope[PARAMETER.length] = cos;
       slope[at.angle] = (-into * DEG * (yMm - cornerY + proudMm * cosine)) / (sine * sine);
-      slope[at.lean] = (into * upMm) / sine;
+      slope[at.lean] = (into * leanShareMm) / sine;
       slope[at.bow] = (into * bowShare) / sine;
       return slope;
     },

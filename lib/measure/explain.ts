@@ -178,20 +178,6 @@ export const figureWords: Record<FigureKind, FigureWords> = {
     measure: 'length',
     rounding: 'up',
   },
-  'wall-to-cut': {
-    name: 'Wall to cut',
-    formula: 'Where the wall stands proud of a set line that cabinets already set have fixed.',
-    surer: 'A face reading at this place.',
-    measure: 'length',
-    rounding: 'up',
-  },
-  'free-room': {
-    name: 'Room left at an open end',
-    formula: 'From the last unit to the limit of the open end, the closed end at its least filler.',
-    surer: moreHeights,
-    measure: 'length',
-    rounding: 'down',
-  },
   'filler-width': {
     name: 'Face width of a filler',
     formula: 'From the last box to the end wall in the plane of the filler’s face, at this height.',

@@ -5,21 +5,24 @@ export type EndFacePoint = {
   /** Out from the set line, square to it. */
   yMm: number;
   zMm: number;
-  /** Square to the end wall, positive into the room, less the lean; from the straight line corner to corner. */
-  bMm: number;
+  /** Square to the end wall, positive into the room, from the plumb plane through the corners at zRef. */
+  proudMm: number;
   uMm: number;
   /**
-   * How much of the wall's unread bow moves this reading: 0 where a row places it from the chord,
-   * f(y) where only plumb was read (f: 1 at the middle of the wall, 0 at its ends).
+   * ∂(proud)/∂(lean): 0 where the reading was taken from a plumb reference that also shows zRef; the
+   * height over zRef where only a straightedge was laid.
    */
+  leanShareMm: number;
+  /** ∂(proud)/∂(bow): 0 where a row places it from corner to corner, f(y) where only plumb was read. */
   bowShare: number;
   readingId: string;
 };
 
 export type FaceValue = {
-  bMm: number;
+  /** Without what lean and bow add by their shares. */
+  proudMm: number;
   uMm: number;
-  /** ∂(face)/∂(bow of the wall): what a bow nobody read would move here. */
+  leanShareMm: number;
   bowShare: number;
   /** The reading that lies exactly here; null between readings. */
   readingId: string | null;
@@ -35,7 +38,8 @@ export type FaceSurface = {
   at: (yMm: number, zMm: number) => FaceValue;
 };
 
-type Node = Omit<FaceValue, 'readingId'> & { readingId: string | null };
+/** What nobody read: the wall's shape at y for a bow of 1, and the height its lean is counted from. */
+export type UnreadFace = { bowShape: (yMm: number) => number; zRefMm: number; usualBowMm: number };
 
 const SAME_PLACE_MM = 1e-6;
 /** Height over which a wall's usual bow is spread where it must be carried on up or down; from memory. */
@@ -43,34 +47,38 @@ const WALL_HEIGHT_MM = 2_400;
 
 /**
  * Surface through the face readings, bilinear between the lines of their places.
- * Edge rule: outside the readings the last value is carried on and marked; u grows upward and downward.
- * Units and frame: millimetres; y out of the set line, z up, b square to the end wall into the room.
+ * Edge rule: outside the readings the last value is carried on along lean and bow, and marked.
+ * Units and frame: millimetres; y out of the set line, z up, proud square to the end wall into the room.
  * Example: readings 2 at y 0 and 4 at y 600 give 3 at y 300. Problems: none. Source: common practice.
  */
-export function faceSurface(
-  points: EndFacePoint[],
-  usualBowMm: number,
-  bowShape: (yMm: number) => number,
-): FaceSurface {
+export function faceSurface(points: EndFacePoint[], unread: UnreadFace): FaceSurface {
   const yMm = distinct(points.map((point) => point.yMm));
   const zMm = distinct(points.map((point) => point.zMm));
-  if (points.length === 0) return { yMm, zMm, at: (y) => unread(bowShape(y)) };
+  if (points.length === 0) return { yMm, zMm, at: (y, z) => nobodyRead(y, z, unread) };
   const read = yMm.map((y) => zMm.map((z) => exactly(points, y, z)));
   const nodes = yMm.map((_, i) =>
-    zMm.map((_z, j) => read[i]?.[j] ?? fillNode(read, yMm, zMm, i, j, usualBowMm, bowShape)),
+    zMm.map((_z, j) => read[i]?.[j] ?? fillNode(read, yMm, zMm, i, j, unread)),
   );
   const at = (y: number, z: number): FaceValue => {
     const alongY = bracket(yMm, y);
     const alongZ = bracket(zMm, z);
     const column = (i: number) =>
-      acrossZ(nodes[i]?.[alongZ.low], nodes[i]?.[alongZ.high], alongZ, usualBowMm);
-    return acrossY(column(alongY.low), column(alongY.high), yMm, alongY, y, bowShape);
+      acrossZ(nodes[i]?.[alongZ.low], nodes[i]?.[alongZ.high], zMm, alongZ, z, unread);
+    return acrossY(column(alongY.low), column(alongY.high), yMm, alongY, y, unread);
   };
   return { yMm, zMm, at };
 }
 
-function unread(bowShare: number): FaceValue {
-  return { bMm: 0, uMm: 0, bowShare, readingId: null, from: [], extrapolated: true };
+function nobodyRead(yMm: number, zMm: number, unread: UnreadFace): FaceValue {
+  return {
+    proudMm: 0,
+    uMm: 0,
+    leanShareMm: zMm - unread.zRefMm,
+    bowShare: unread.bowShape(yMm),
+    readingId: null,
+    from: [],
+    extrapolated: true,
+  };
 }
 
 function distinct(values: number[]): number[] {
@@ -79,7 +87,7 @@ function distinct(values: number[]): number[] {
 }
 
 /** Mean of the readings at exactly one place; null where there is none. */
-function exactly(points: EndFacePoint[], yMm: number, zMm: number): Node | null {
+function exactly(points: EndFacePoint[], yMm: number, zMm: number): FaceValue | null {
   const here = points.filter(
     (point) =>
       Math.abs(point.yMm - yMm) <= SAME_PLACE_MM && Math.abs(point.zMm - zMm) <= SAME_PLACE_MM,
@@ -89,8 +97,9 @@ function exactly(points: EndFacePoint[], yMm: number, zMm: number): Node | null 
   const mean = (of: (point: EndFacePoint) => number) =>
     here.reduce((sum, point) => sum + of(point), 0) / here.length;
   return {
-    bMm: mean((point) => point.bMm),
+    proudMm: mean((point) => point.proudMm),
     uMm: Math.min(...here.map((point) => point.uMm)),
+    leanShareMm: mean((point) => point.leanShareMm),
     bowShare: mean((point) => point.bowShare),
     readingId: first.readingId,
     from: here.map((point) => point.readingId),
@@ -113,49 +122,54 @@ function bracket(places: number[], value: number): Bracket {
   return { low, high: low + 1, t: (value - from) / spanMm, spanMm, beyondMm: 0 };
 }
 
-function mixed(a: Node, b: Node, t: number, uSag: number): Node {
+function mixed(a: FaceValue, b: FaceValue, t: number, uSag: number): FaceValue {
   if (t === 0) return a;
+  const between = (one: number, other: number) => one + (other - one) * t;
   return {
-    bMm: a.bMm + (b.bMm - a.bMm) * t,
-    uMm: Math.hypot(a.uMm + (b.uMm - a.uMm) * t, uSag),
-    bowShare: a.bowShare + (b.bowShare - a.bowShare) * t,
+    proudMm: between(a.proudMm, b.proudMm),
+    uMm: Math.hypot(between(a.uMm, b.uMm), uSag),
+    leanShareMm: between(a.leanShareMm, b.leanShareMm),
+    bowShare: between(a.bowShare, b.bowShare),
     readingId: null,
-    from: a === b ? a.from : [...new Set([...a.from, ...b.from])],
+    from: a.from === b.from ? a.from : [...new Set([...a.from, ...b.from])],
     extrapolated: a.extrapolated || b.extrapolated,
   };
 }
 
-/** Up and down: a bow of β over the wall's height sags β(d/H)² over a part d nobody read. */
+/** Up and down: between readings a bow of β over the height sags; beyond them the wall leans on. */
 function acrossZ(
-  low: Node | undefined,
-  high: Node | undefined,
+  low: FaceValue | undefined,
+  high: FaceValue | undefined,
+  places: number[],
   place: Bracket,
-  usualBowMm: number,
-): Node {
-  const a = low ?? unread(0);
+  zMm: number,
+  unread: UnreadFace,
+): FaceValue {
+  const a = low ?? nobodyRead(0, zMm, unread);
   if (place.beyondMm > SAME_PLACE_MM) {
-    const grown = Math.min(1, (4 * place.beyondMm) / WALL_HEIGHT_MM) * usualBowMm;
+    const grown = Math.min(1, (4 * place.beyondMm) / WALL_HEIGHT_MM) * unread.usualBowMm;
     return {
       ...a,
       uMm: Math.hypot(a.uMm, grown / Math.sqrt(3)),
+      leanShareMm: a.leanShareMm + zMm - (places[place.low] ?? zMm),
       readingId: null,
       extrapolated: true,
     };
   }
   const part = Math.min(1, place.spanMm / WALL_HEIGHT_MM);
-  const sag = 4 * usualBowMm * part * part * place.t * (1 - place.t);
+  const sag = 4 * unread.usualBowMm * part * part * place.t * (1 - place.t);
   return mixed(a, high ?? a, place.t, sag / Math.sqrt(3));
 }
 
 /** Along the wall the unread bow is a parameter of the run, shared with the corner's angle. */
 function acrossY(
-  low: Node,
-  high: Node,
+  low: FaceValue,
+  high: FaceValue,
   places: number[],
   place: Bracket,
   yMm: number,
-  bowShape: (yMm: number) => number,
-): Node {
+  { bowShape }: UnreadFace,
+): FaceValue {
   const here = mixed(low, high, place.t, 0);
   const lowShape = bowShape(places[place.low] ?? 0);
   const highShape = bowShape(places[place.high] ?? 0);
@@ -167,34 +181,34 @@ function acrossY(
 
 /** A place of the grid without a reading: between its neighbours in the row and in the column. */
 function fillNode(
-  read: (Node | null)[][],
+  read: (FaceValue | null)[][],
   yMm: number[],
   zMm: number[],
   i: number,
   j: number,
-  usualBowMm: number,
-  bowShape: (yMm: number) => number,
-): Node {
+  unread: UnreadFace,
+): FaceValue {
   const rowLine = read.map((column) => column[j] ?? null);
   const row = neighbours(rowLine, yMm, i);
   const column = neighbours(read[i] ?? [], zMm, j);
-  const found: { node: Node; weight: number }[] = [];
+  const found: { node: FaceValue; weight: number }[] = [];
   if (row) {
-    const node = acrossY(row.low, row.high, row.places, row.place, yMm[i] ?? 0, bowShape);
+    const node = acrossY(row.low, row.high, row.places, row.place, yMm[i] ?? 0, unread);
     found.push({ node, weight: 1 / row.distanceMm });
   }
   if (column) {
-    const node = acrossZ(column.low, column.high, column.place, usualBowMm);
+    const node = acrossZ(column.low, column.high, column.places, column.place, zMm[j] ?? 0, unread);
     found.push({ node, weight: 1 / column.distanceMm });
   }
   const inside = found.filter(({ node }) => !node.extrapolated);
   const used = inside.length > 0 ? inside : found;
   const total = used.reduce((sum, { weight }) => sum + weight, 0);
-  const mean = (of: (node: Node) => number) =>
+  const mean = (of: (node: FaceValue) => number) =>
     used.reduce((sum, { node, weight }) => sum + of(node) * weight, 0) / total;
   return {
-    bMm: mean((node) => node.bMm),
+    proudMm: mean((node) => node.proudMm),
     uMm: Math.max(...used.map(({ node }) => node.uMm)),
+    leanShareMm: mean((node) => node.leanShareMm),
     bowShare: mean((node) => node.bowShare),
     readingId: null,
     from: [...new Set(used.flatMap(({ node }) => node.from))],
@@ -202,9 +216,19 @@ function fillNode(
   };
 }
 
-type Neighbours = { low: Node; high: Node; places: number[]; place: Bracket; distanceMm: number };
+type Neighbours = {
+  low: FaceValue;
+  high: FaceValue;
+  places: number[];
+  place: Bracket;
+  distanceMm: number;
+};
 
-function neighbours(line: (Node | null)[], places: number[], index: number): Neighbours | null {
+function neighbours(
+  line: (FaceValue | null)[],
+  places: number[],
+  index: number,
+): Neighbours | null {
   const here = places[index] ?? 0;
   let before = index - 1;
   while (before >= 0 && !line[before]) before--;

@@ -21,6 +21,8 @@ export type FigureKind =
   | 'run-slack'
   | 'set-line-gap'
   | 'back-gap'
+  | 'wall-to-cut'
+  | 'free-room'
   | 'filler-width'
   | 'filler-taper'
   | 'filler-blank'
@@ -65,3 +67,8 @@ export type Verdict = {
   /** What the shop does about it. */
   action: string;
 };
+
+/** Names a figure, so that a screen can say how it came about. */
+export function fitFigure(kind: FigureKind, { value, u, U, from }: Figure): FitFigure {
+  return { value, u, U, from, kind };
+}

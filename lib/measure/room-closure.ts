@@ -48,7 +48,7 @@ export type CheckedReading = {
   readingIds: string[];
   /** "Wall B, length at 910 mm". */
   words: string;
-  unit: 'mm' | 'deg';
+  unit: 'mm' | 'deg' | 'mm/m';
   read: number;
   adjusted: number;
   /** adjusted − read. */
@@ -67,9 +67,9 @@ export type Suspect = {
   readings: {
     readingIds: string[];
     words: string;
-    /** Likely slip in mm or degrees; positive: read too long. */
+    /** Likely slip, positive: read too long (mm), too open (deg) or leaning in too much (mm/m). */
     slip: number;
-    unit: 'mm' | 'deg';
+    unit: 'mm' | 'deg' | 'mm/m';
     /** "1 in", "100 mm", "digits swapped"; null where none matches. */
     known: string | null;
   }[];
@@ -77,7 +77,7 @@ export type Suspect = {
 };
 
 export type SettleStep = {
-  /** As `MissingReading.slot`, so that the phone can offer it. */
+  /** As `MissingReading.slot`; "again:<readingId>" for the same reading again. */
   slot: string;
   words: string;
   /** The least redundancy before and with it. */

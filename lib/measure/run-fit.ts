@@ -171,11 +171,16 @@ export type RunKicks = {
   /** Height of the kick base over the finished floor's high point. */
   datumMm: number;
   sharedWithRunIds: string[];
-  highPoint: { xMm: number; yMm: number; readingId: string };
+  /** Null where what is already set fixes the datum, or it lies under another run of the group. */
+  highPoint: { xMm: number; yMm: number; readingId: string } | null;
   corners: KickCorner[];
   faceBlank: { blank: FitFigure; scribe: EdgeScribe } | null;
+  /** Kick faces that show at an open end. */
+  returns: { side: 'left' | 'right'; blank: FitFigure; scribe: EdgeScribe }[];
   least: FitFigure;
   greatest: FitFigure;
+  /** "Stands on the finished floor." */
+  words: string;
 };
 export type KickCorner = {
   unitId: string;
@@ -185,6 +190,8 @@ export type KickCorner = {
   height: FitFigure;
   extrapolated: boolean;
   legs: 'within' | 'too-low' | 'too-high';
+  /** Its U reaches past an end of the legs' range. */
+  inDoubt: boolean;
 };
 
 export type RunCeiling = {
@@ -192,6 +199,8 @@ export type RunCeiling = {
   left: FitFigure;
   right: FitFigure;
   least: FitFigure;
+  /** Crown or filler to scribe: least gap + allowance, rounded up once. */
+  blank: FitFigure | null;
   scribe: EdgeScribe | null;
   words: string;
 };

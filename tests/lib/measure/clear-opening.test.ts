@@ -151,8 +151,9 @@ function facePoints(rows: number[][]): EndFacePoint[] {
   return rows.map(([yMm = 0, zMm = 0, bMm = 0], i) => ({
     yMm,
     zMm,
-    bMm,
+    proudMm: bMm,
     uMm: 0.5,
+    leanShareMm: 0,
     bowShare: 0,
     readingId: `face-${i}`,
   }));
@@ -182,7 +183,7 @@ function bruteForce(frame: RunFrame, steps: number): number {
           end === 'left'
             ? [direction[1], -(direction[0] ?? 0)]
             : [-(direction[1] ?? 0), direction[0]];
-        const proud = face.lean.value * (z - frame.zRefMm) + bilinear(face.points, y, z);
+        const proud = bilinear(face.points, y, z);
         const q = [
           (corner[0] ?? 0) + proud * (intoRoom[0] ?? 0),
           (corner[1] ?? 0) + proud * (intoRoom[1] ?? 0),
@@ -201,7 +202,7 @@ function bruteForce(frame: RunFrame, steps: number): number {
 }
 
 function bilinear(points: EndFacePoint[], y: number, z: number): number {
-  const at = (i: number, j: number) => points[i * 3 + j]?.bMm ?? 0;
+  const at = (i: number, j: number) => points[i * 3 + j]?.proudMm ?? 0;
   const place = (value: number, places: number[]) => {
     const inside = Math.min(Math.max(value, places[0] ?? 0), places[2] ?? 0);
     const i = inside >= (places[1] ?? 0) ? 1 : 0;

@@ -91,9 +91,9 @@ describe('sharing', () => {
 describe('two limits at each end, kept apart', () => {
   test('a belly behind the face pushes the gable, not the filler', () => {
     const points = [
-      { yMm: 0, zMm: 400, bMm: 0, uMm: 0, bowShare: 0, readingId: 'back' },
-      { yMm: 300, zMm: 400, bMm: 40, uMm: 0, bowShare: 0, readingId: 'belly' },
-      { yMm: 581, zMm: 400, bMm: 0, uMm: 0, bowShare: 0, readingId: 'front' },
+      { yMm: 0, zMm: 400, proudMm: 0, uMm: 0, leanShareMm: 0, bowShare: 0, readingId: 'back' },
+      { yMm: 300, zMm: 400, proudMm: 40, uMm: 0, leanShareMm: 0, bowShare: 0, readingId: 'belly' },
+      { yMm: 581, zMm: 400, proudMm: 0, uMm: 0, leanShareMm: 0, bowShare: 0, readingId: 'front' },
     ];
     const run = filled({ frame: runFrame({ left: wallEnd({ points }) }) });
     // 40 + 3 at the gable is more than 0 + 25 in the filler's plane.

@@ -218,11 +218,13 @@ function cornerReading(
   room: TrueRoom,
   index: number,
   wallId: string,
-  legMm: number,
+  longestLegMm: number,
   common: Common,
   noise: () => number,
 ): Reading {
   const count = room.walls.length;
+  const arms = [room.walls[index], room.walls[(index + count - 1) % count]];
+  const legMm = Math.min(longestLegMm, ...arms.map((wall) => 0.8 * (wall?.lengthMm ?? 1_000)));
   const corners = cornersAt(room, room.zRefMm);
   const corner = corners[index] ?? { x: 0, y: 0 };
   const before = room.walls[(index + count - 1) % count];

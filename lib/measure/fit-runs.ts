@@ -1,0 +1,181 @@
+/** Every run of a fit, from its set line to its cut sizes. */
+import type { Run } from '@/lib/contracts/wall-book';
+import { type ClearOpening, clearOpening, placeWords } from '@/lib/measure/clear-opening';
+import type { FacePlace } from '@/lib/measure/end-view';
+import { type FilledRun, type FillRunInput, fillRun } from '@/lib/measure/fill-run';
+import type { FitContext } from '@/lib/measure/fit-context';
+import { fitFigure } from '@/lib/measure/fit-figure';
+import { fillInput, fitFill } from '@/lib/measure/fit-fill';
+import { fitFiller } from '@/lib/measure/fit-filler';
+import { backGaps, finishedEndScribes, runSetLine } from '@/lib/measure/fit-run-gaps';
+import { firstBand, fitSetLines, type RunPlane } from '@/lib/measure/fit-set-lines';
+import { frontDepth } from '@/lib/measure/room-walk';
+import { type FramedRun, frameRun } from '@/lib/measure/run-ends';
+import type { OpeningPlace, RunEndFit, RunFit, RunOpening } from '@/lib/measure/run-fit';
+import type { Problem } from '@/lib/problem';
+import { roundOpeningDown } from '@/lib/units/round';
+
+/** A run on its way through the fit. */
+export type WorkedRun = {
+  run: Run;
+  plane: RunPlane | null;
+  framed: FramedRun | null;
+  input: FillRunInput | null;
+  opening: ClearOpening | null;
+  filled: FilledRun | null;
+  /** Where its boxes stand along the wall, as far as known. */
+  bandMm: readonly [number, number];
+  problems: Problem[];
+};
+
+/** Sets the lines twice: over the whole room for the run, then behind the boxes as they will stand. */
+export function workRuns(context: FitContext): { runs: WorkedRun[]; problems: Problem[] } {
+  const requests = context.runs
+    .filter(({ wallId }) => context.frames.has(wallId))
+    .map((run) => ({ run, bandMm: firstBand(context, run), edgesMm: [] as number[] }));
+  const first = fitSetLines(context, requests);
+  const placed = requests.map((request) => {
+    const filled = workRun(context, request.run, first.planes, request.bandMm).filled;
+    const units = filled?.placed ?? [];
+    const [left, right] = [units[0], units[units.length - 1]];
+    if (!left || !right) return request;
+    return {
+      run: request.run,
+      bandMm: [left.leftMm, right.rightMm] as const,
+      edgesMm: [...units.map(({ leftMm }) => leftMm), ...units.map(({ rightMm }) => rightMm)],
+    };
+  });
+  const second = fitSetLines(context, placed);
+  const bands = new Map(placed.map(({ run, bandMm }) => [run.id, bandMm]));
+  const runs = context.runs.map((run) =>
+    workRun(context, run, second.planes, bands.get(run.id) ?? [0, 0]),
+  );
+  return { runs, problems: [...second.problems, ...runs.flatMap(({ problems }) => problems)] };
+}
+
+function workRun(
+  context: FitContext,
+  run: Run,
+  planes: ReadonlyMap<string, RunPlane>,
+  bandMm: readonly [number, number],
+): WorkedRun {
+  const plane = planes.get(run.id) ?? null;
+  const framed = frameRun(context, run, planes);
+  if (!framed.value) {
+    return {
+      run,
+      plane,
+      framed: null,
+      input: null,
+      opening: null,
+      filled: null,
+      bandMm,
+      problems: framed.problems,
+    };
+  }
+  const input = fillInput(context, run, framed.value);
+  const opening = clearOpening({
+    frame: framed.value.frame,
+    depthMm: frontDepth(run),
+    z0Mm: run.z0Mm,
+    z1Mm: run.z1Mm,
+  });
+  const filled = opening.value ? fillRun(input) : { value: null, problems: [] };
+  return {
+    run,
+    plane,
+    framed: framed.value,
+    input,
+    opening: opening.value,
+    filled: filled.value,
+    bandMm,
+    problems: [...framed.problems, ...opening.problems, ...filled.problems],
+  };
+}
+
+/** What the set line, opening and fill of a run come to; kicks, ceiling, studs and verdicts are added later. */
+export function describeRun(
+  context: FitContext,
+  worked: WorkedRun,
+): { runFit: RunFit; problems: Problem[] } {
+  const { run, plane, framed, input, opening, filled } = worked;
+  const left = endFit(context, worked, 'left');
+  const right = endFit(context, worked, 'right');
+  const scribes = finishedEndScribes(context, worked);
+  const gapAt = (xMm: number) => {
+    const edge = plane?.line?.edges.find((one) => Math.abs(one.xMm - xMm) < 5);
+    return edge ? fitFigure('back-gap', edge.greatest.gap) : null;
+  };
+  const runFit: RunFit = {
+    runId: run.id,
+    wallId: run.wallId,
+    name: run.name,
+    level: run.level,
+    setLine: plane ? runSetLine(context, plane) : null,
+    backGaps: backGaps(context, worked),
+    clearOpening: opening && framed ? runOpening(context, run, opening) : null,
+    left: left.endFit,
+    right: right.endFit,
+    fill: filled && input ? fitFill(context, run, input, filled) : null,
+    units: (filled?.placed ?? []).map(({ id, leftMm, rightMm }) => {
+      const unit = run.units.find((one) => one.id === id);
+      return {
+        unitId: id,
+        name: unit?.name ?? '',
+        kind: unit?.kind ?? '',
+        leftMm,
+        rightMm,
+        backGapLeft: gapAt(leftMm),
+        backGapRight: gapAt(rightMm),
+        studs: null,
+        tilt: null,
+        applianceHeight: null,
+      };
+    }),
+    scribes: scribes.scribes,
+    kicks: null,
+    ceiling: null,
+    verdicts: [],
+  };
+  return { runFit, problems: [...left.problems, ...right.problems, ...scribes.problems] };
+}
+
+function runOpening(context: FitContext, run: Run, opening: ClearOpening): RunOpening {
+  const band = { depthMm: frontDepth(run), z0Mm: run.z0Mm, z1Mm: run.z1Mm };
+  const place = (at: FacePlace): OpeningPlace => ({
+    end: at.end,
+    yMm: at.yMm,
+    zMm: at.zMm,
+    xMm: at.xMm,
+    words: placeWords(at, band, context.words),
+    readingId: at.readingId,
+    extrapolated: at.extrapolated,
+  });
+  return {
+    opening: fitFigure('clear-opening', opening.opening),
+    governing: { left: place(opening.left), right: place(opening.right) },
+    safeMm: opening.safeMm,
+    safeRoundedDownMm: roundOpeningDown(opening.safeMm, context.rules.stepMm),
+  };
+}
+
+function endFit(
+  context: FitContext,
+  { run, framed, filled }: WorkedRun,
+  end: 'left' | 'right',
+): { endFit: RunEndFit; problems: Problem[] } {
+  const meets = framed?.[end].meets ?? run[end].kind;
+  const base = { end, meets, words: framed?.[end].words ?? '' };
+  const side = filled?.[end];
+  if (!side) {
+    const rule = framed?.[end].rule;
+    const limits = { leastMm: rule?.leastMm ?? 0, mostMm: rule?.mostMm ?? 0 };
+    return { endFit: { ...base, ...limits, filler: null, freeRoom: null }, problems: [] };
+  }
+  const { filler, problems } = fitFiller(context, end, side);
+  const freeRoom = side.isOpen ? fitFigure('free-room', side.face) : null;
+  return {
+    endFit: { ...base, leastMm: side.leastMm, mostMm: side.mostMm, filler, freeRoom },
+    problems,
+  };
+}
