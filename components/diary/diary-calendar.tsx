@@ -68,7 +68,8 @@ export function DiaryCalendar(props: DiaryCalendarProps) {
       slotMinTime={hoursAround(hours.dayStart, -1)}
       slotMaxTime={hoursAround(hours.dayEnd, 3)}
       slotLabelFormat={{ hour: '2-digit', minute: '2-digit', hour12: false }}
-      dayHeaderFormat={{ weekday: 'short', day: 'numeric' }}
+      views={{ dayGridMonth: { dayHeaderFormat: { weekday: 'short' } } }}
+      dayHeaderFormat={dayHead}
       businessHours={businessHours}
       hiddenDays={hiddenDays(hours.workdays)}
       eventTimeFormat={{ hour: '2-digit', minute: '2-digit', hour12: false }}
@@ -108,6 +109,15 @@ export function DiaryCalendar(props: DiaryCalendarProps) {
       }
     />
   );
+}
+
+/** "Mon 30" for one day of the head; the month's head names weekdays only. */
+function dayHead({ date }: { date: { year: number; month: number; day: number } }): string {
+  const weekday = new Date(Date.UTC(date.year, date.month, date.day)).toLocaleDateString('en', {
+    weekday: 'short',
+    timeZone: 'UTC',
+  });
+  return `${weekday} ${date.day}`;
 }
 
 /** Weekends are folded away where the shop never works them. */

@@ -6,6 +6,7 @@ import { startWorker } from '@/server/messages/worker';
 import { hashPassword } from '@/server/people/sign-in';
 import { getPorts } from '@/server/ports/choose-ports';
 import { composeVisitMessage } from '@/server/visits/compose-message';
+import { makeVisitLink } from '@/server/visits/visit-link';
 
 /** Once a process, before the first request is answered. */
 export async function startUp(): Promise<void> {
@@ -13,7 +14,13 @@ export async function startUp(): Promise<void> {
   if (building) return;
   const open = await database();
   await getPorts();
-  if (demo) await seedDemo(open.db, { now: new Date(), hashPassword });
+  if (demo) {
+    await seedDemo(open.db, {
+      now: new Date(),
+      hashPassword,
+      linkVisit: (tx, { shopId, ...visit }) => makeVisitLink(tx, { shop: { id: shopId } }, visit),
+    });
+  }
   const stopWorker = startWorker(composeVisitMessage);
   log('started', { database: open.kind, demo });
 

@@ -1,0 +1,160 @@
+import { randomUUID } from 'node:crypto';
+import { sql } from 'drizzle-orm';
+import type { Database, Transaction } from '@/db/database';
+import { crewPeople, crews, people, shops, tools } from '@/db/schema';
+import type { Tool } from '@/lib/contracts/wall-book';
+import { defaultShopRules } from '@/lib/measure/rules/default-rules';
+import { demoJobs } from './demo-jobs';
+import { addressPlace, towns } from './island';
+import { seedJob } from './seed-job';
+import { seedSignIn } from './seed-sign-in';
+import { seededRandom } from './seeded-random';
+import { type CrewKey, crewsOfTheShop, juniperBend, type StaffKey, staff } from './staff';
+
+export type SeedOptions = {
+  now: Date;
+  /** The sign-in library's own, so that the demo's password opens the door. */
+  hashPassword: (password: string) => Promise<string>;
+  /** The customer's link of a visit: its token needs the signing secret. */
+  linkVisit: LinkVisit;
+};
+
+type LinkVisit = (
+  tx: Transaction,
+  visit: { shopId: string; visitId: string; endsAt: Date },
+) => Promise<void>;
+
+/** Makes the invented shop, and a second one to prove the walls between them; does nothing where a shop is. */
+export async function seedDemo(db: Database, options: SeedOptions): Promise<void> {
+  const { now, hashPassword } = options;
+  const [kept] = await db.select({ count: sql<number>`count(*)::int` }).from(shops);
+  if (kept && kept.count > 0) return;
+  const passwordHash = await hashPassword('setwell-demo');
+  await db.transaction(async (tx) => {
+    await seedJuniperBend(tx, options, passwordHash);
+    await seedSecondShop(tx, now, passwordHash);
+  });
+}
+
+/** What a job of the demo needs to know of its shop. */
+export type SeedShop = {
+  id: string;
+  zone: string;
+  rules: ReturnType<typeof defaultShopRules>;
+  staff: Record<StaffKey, string>;
+  crews: Record<CrewKey, { id: string; personIds: string[] }>;
+  tools: { tape: Tool; level: Tool };
+  now: Date;
+  linkVisit: LinkVisit;
+  random: () => number;
+};
+
+async function seedJuniperBend(
+  tx: Transaction,
+  { now, linkVisit }: SeedOptions,
+  passwordHash: string,
+) {
+  const id = randomUUID();
+  const rules = defaultShopRules('US');
+  const { name, phone, email, zone } = juniperBend;
+  const nextJobNumber = 2401 + demoJobs.length;
+  await tx
+    .insert(shops)
+    .values({ id, name, phone, email, zone, region: 'US', rules, nextJobNumber });
+  const shop: SeedShop = {
+    id,
+    zone,
+    rules,
+    now,
+    linkVisit,
+    random: seededRandom(20_26),
+    staff: await seedStaff(tx, id, passwordHash),
+    crews: {} as SeedShop['crews'],
+    tools: await seedTools(tx, id, rules.fit.stepMm),
+  };
+  shop.crews = await seedCrews(tx, shop);
+  for (const [index, job] of demoJobs.entries()) {
+    await seedJob(tx, shop, {
+      job,
+      number: 2401 + index,
+      place: addressPlace(job.street, job.house),
+    });
+  }
+}
+
+async function seedStaff(tx: Transaction, shopId: string, passwordHash: string) {
+  const ids: Partial<Record<StaffKey, string>> = {};
+  for (const [key, { name, role, email }] of Object.entries(staff)) {
+    const userId = email ? await seedSignIn(tx, { name, email, passwordHash }) : null;
+    const id = randomUUID();
+    await tx.insert(people).values({ id, shopId, userId, name, role });
+    ids[key as StaffKey] = id;
+  }
+  return ids as Record<StaffKey, string>;
+}
+
+async function seedCrews(tx: Transaction, shop: SeedShop): Promise<SeedShop['crews']> {
+  const made: Partial<SeedShop['crews']> = {};
+  const base = towns['Juniper Bend'];
+  for (const { key, name, does, colour, people: members } of crewsOfTheShop) {
+    const id = randomUUID();
+    const personIds = members.map((member) => shop.staff[member]);
+    await tx.insert(crews).values({
+      id,
+      shopId: shop.id,
+      name,
+      does,
+      colour,
+      baseLatitude: base.latitude,
+      baseLongitude: base.longitude,
+    });
+    await tx
+      .insert(crewPeople)
+      .values(personIds.map((personId) => ({ shopId: shop.id, crewId: id, personId })));
+    made[key] = { id, personIds };
+  }
+  return made as SeedShop['crews'];
+}
+
+async function seedTools(tx: Transaction, shopId: string, stepMm: number) {
+  const tape: Tool = {
+    id: randomUUID(),
+    name: 'Tape, class II',
+    spec: { kind: 'tape', accuracyClass: 'II', stepMm, repeatabilityMm: 0.3 },
+  };
+  const level: Tool = {
+    id: randomUUID(),
+    name: 'Laser line and rule',
+    spec: { kind: 'level', mpeMmPerM: 0.3, stepMm: 0.5, repeatabilityMm: 0.3 },
+  };
+  const laser: Tool = {
+    id: randomUUID(),
+    name: 'Laser meter',
+    spec: { kind: 'laser', mpeMm: 1.5, stepMm: 1, repeatabilityMm: 0.3 },
+  };
+  await tx.insert(tools).values([tape, level, laser].map((tool) => ({ shopId, ...tool })));
+  return { tape, level };
+}
+
+/** A small shop across the water: nobody of Juniper Bend may ever see it. */
+async function seedSecondShop(tx: Transaction, now: Date, passwordHash: string) {
+  const id = randomUUID();
+  const rules = defaultShopRules('UK');
+  await tx.insert(shops).values({
+    id,
+    name: 'Far Shore Joinery',
+    phone: '+442079460142',
+    email: 'office@farshore.example',
+    zone: 'Europe/London',
+    region: 'UK',
+    rules,
+    createdAt: now,
+  });
+  const userId = await seedSignIn(tx, {
+    name: 'Alder Firth',
+    email: 'owner@farshore.example',
+    passwordHash,
+  });
+  await tx.insert(people).values({ shopId: id, userId, name: 'Alder Firth', role: 'owner' });
+  await seedTools(tx, id, rules.fit.stepMm);
+}

@@ -1,0 +1,56 @@
+import { randomUUID } from 'node:crypto';
+import type { Transaction } from '@/db/database';
+import { visitPiecePeople, visitPieces, visits } from '@/db/schema';
+import { splitIntoPieces } from '@/lib/schedule';
+import type { DemoVisit } from './demo-jobs';
+import type { SeedShop } from './seed-demo';
+import { workday } from './workday';
+
+/** A visit with its daily pieces; done when it is past, under way when it is now. */
+export async function seedVisit(
+  tx: Transaction,
+  shop: SeedShop,
+  { jobId, visit }: { jobId: string; visit: DemoVisit },
+) {
+  const startsAt = workday(shop, visit.day, visit.time);
+  const { zone, rules, now, id: shopId } = shop;
+  const { value: pieces } = splitIntoPieces({
+    workMinutes: visit.workMinutes,
+    startsAt,
+    pattern: rules.booking,
+    zone,
+  });
+  const last = pieces?.at(-1);
+  if (!pieces || !last) throw new Error(`the demo's visit does not fit: ${JSON.stringify(visit)}`);
+  const crew = shop.crews[visit.crew];
+  const isDone = last.endsAt <= now && visit.day < 0;
+  const hasBegun = visit.day < 0;
+  const visitId = randomUUID();
+  await tx.insert(visits).values({
+    id: visitId,
+    shopId,
+    jobId,
+    kind: visit.kind,
+    crewId: crew.id,
+    status: isDone ? 'done' : hasBegun ? 'on-site' : visit.isConfirmed ? 'confirmed' : 'booked',
+    startsAt,
+    endsAt: last.endsAt,
+    windowStartsAt: startsAt,
+    windowEndsAt: new Date(startsAt.getTime() + rules.booking.windowMinutes * 60_000),
+    workMinutes: visit.workMinutes,
+    customerSays: visit.customerSays ?? '',
+    confirmedAt: visit.isConfirmed ? new Date(startsAt.getTime() - 3 * 86_400_000) : null,
+    arrivedAt: hasBegun ? startsAt : null,
+    leftAt: isDone ? last.endsAt : null,
+  });
+  await shop.linkVisit(tx, { shopId, visitId, endsAt: last.endsAt });
+  for (const piece of pieces) {
+    const pieceId = randomUUID();
+    await tx
+      .insert(visitPieces)
+      .values({ id: pieceId, shopId, visitId, crewId: crew.id, ...piece });
+    await tx
+      .insert(visitPiecePeople)
+      .values(crew.personIds.map((personId) => ({ shopId, pieceId, personId, ...piece })));
+  }
+}
