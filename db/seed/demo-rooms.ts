@@ -197,6 +197,7 @@ function baseUnits(spaceMm: number): Unit[] {
     { kind: 'base', widthIn: 30 },
     { kind: 'base', widthIn: 24 },
     { kind: 'drawers', widthIn: 30 },
+    { kind: 'base', widthIn: 36 },
   ]);
 }
 
@@ -207,6 +208,7 @@ function upperUnits(spaceMm: number): Unit[] {
     { kind: 'wall', widthIn: 30 },
     { kind: 'wall', widthIn: 24 },
     { kind: 'wall', widthIn: 30 },
+    { kind: 'wall', widthIn: 36 },
   ]);
 }
 
