@@ -2,11 +2,12 @@ import { and, eq } from 'drizzle-orm';
 import type { Transaction } from '@/db/database';
 import { gateOverrides, jobs, visits } from '@/db/schema';
 import type { BookedVisit, BookVisitInput } from '@/lib/contracts/visits';
+import { stageWords } from '@/lib/schedule';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { onlyOnce } from '@/server/base/only-once';
-import { notFound } from '@/server/base/problem-response';
+import { notFound, Refusal } from '@/server/base/problem-response';
 import { moveStage } from '@/server/jobs/move-stage';
 import { kickWorker } from '@/server/messages/worker';
 import { readJobRecords } from './job-records';
@@ -86,6 +87,13 @@ async function lockJob(tx: Transaction, ctx: PersonContext, jobId: string) {
     .for('update');
   const [job] = await readJobRecords(tx, ctx, eq(jobs.id, jobId));
   if (!job) throw notFound('job');
+  if (job.stage === 'on-hold' || job.stage === 'called-off') {
+    throw new Refusal({
+      status: 409,
+      code: 'job-not-open',
+      message: `Not booked: the job is ${stageWords[job.stage].toLowerCase()}. Take it up first.`,
+    });
+  }
   return job;
 }
 

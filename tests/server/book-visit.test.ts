@@ -4,6 +4,8 @@ import { beforeAll, describe, expect, it } from 'vitest';
 import { gateOverrides, jobs, messages, visitPiecePeople, visitPieces, visits } from '@/db/schema';
 import { database } from '@/server/base/database';
 import { Refusal } from '@/server/base/problem-response';
+import { changeJob } from '@/server/jobs/change-job';
+import { getJob } from '@/server/jobs/get-job';
 import { bookVisit } from '@/server/visits/book-visit';
 import { bookingOf, bookTestVisit } from '../help/book-test-visit';
 import { makeCrew } from '../help/make-crew';
@@ -56,7 +58,9 @@ describe('booking a visit', () => {
     ]);
   });
 
-  it('lets one of fifty bookings of the same hour win, and tells the others who has it', async () => {
+  it('lets one of fifty bookings of the same hour win, and tells the others who has it', {
+    timeout: 120_000,
+  }, async () => {
     const { crewId, name } = await makeCrew(shop, 'measure', []);
     const started = [];
     for (let count = 0; count < 50; count += 1) started.push(await startTestJob(shop));
@@ -190,6 +194,18 @@ describe('booking a visit', () => {
     expect(late).toMatchObject({ status: 422, errors: { time: expect.any(String) } });
   });
 
+  it('books nothing for a job on hold, which goes on where its history left it', async () => {
+    const { jobId } = await startTestJob(shop);
+    const { crewId } = await makeCrew(shop, 'measure', []);
+    await bookTestVisit(shop, { jobId, crewId });
+    const ctx = await contextOf(shop, 'scheduler');
+    await changeJob(ctx, { jobId, onHold: true });
+    const again = bookTestVisit(shop, { jobId, crewId, date: '2026-12-11' });
+    expect(await refusalOf(again)).toMatchObject({ status: 409, code: 'job-not-open' });
+    expect(await changeJob(ctx, { jobId, onHold: false })).toMatchObject({ stage: 'to-measure' });
+    await bookTestVisit(shop, { jobId, crewId, date: '2026-12-11' });
+  });
+
   it('tells nobody who agreed to nothing, and says so in the story', async () => {
     const { jobId } = await startTestJob(shop, {
       customer: { mayText: false, mayEmail: false },
@@ -198,5 +214,7 @@ describe('booking a visit', () => {
     await bookTestVisit(shop, { jobId, crewId });
     const { db } = await database();
     expect(await db.$count(messages, eq(messages.jobId, jobId))).toBe(0);
+    const { story } = await getJob(await contextOf(shop, 'bench'), { jobId });
+    expect(story[0]?.summary).toContain('the customer is not told: call them');
   });
 });

@@ -170,7 +170,7 @@ describe('sending what is due', () => {
     expect(mails()[2]?.text).toContain('The floor is not down.');
   });
 
-  it('sends two hundred messages with two workers, each once', async () => {
+  it('sends two hundred messages with two workers, each once', { timeout: 120_000 }, async () => {
     const { visit, texts, mails } = await booked();
     const { db } = await database();
     await db.delete(messages);
