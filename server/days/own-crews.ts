@@ -1,4 +1,4 @@
-import { eq, inArray, type SQL } from 'drizzle-orm';
+import { and, eq, inArray, type SQL } from 'drizzle-orm';
 import { crewPeople, visits } from '@/db/schema';
 import type { PersonContext } from '@/server/base/context';
 
@@ -9,6 +9,6 @@ export function ofOwnCrews(ctx: PersonContext): SQL | undefined {
   const own = ctx.db
     .select({ crewId: crewPeople.crewId })
     .from(crewPeople)
-    .where(eq(crewPeople.personId, personId));
+    .where(and(eq(crewPeople.shopId, ctx.shop.id), eq(crewPeople.personId, personId)));
   return inArray(visits.crewId, own);
 }

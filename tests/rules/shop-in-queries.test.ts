@@ -11,7 +11,7 @@ const ofNoShop: Record<string, string> = {
   'server/messages/claim-due.ts':
     'the worker sends for every shop; each row it takes names its own',
   'server/messages/hear-report.ts': 'the provider names the message, not the shop',
-  'server/visits/hear-sms.ts':
+  'server/visits/sms-sender.ts':
     'a text tells its number, not the shop; the newest told visit decides',
 };
 
