@@ -31,7 +31,7 @@ const DEGREES = 180 / Math.PI;
  * Edge rule: an outside corner's left leg is carried past it and θ = 180 + acos(…). The angle belongs to
  * the lines from the corner to the marks (`chordAngle` carries it to the straight wall). Each reading's
  * u counts for itself: an error the tape makes in all three mostly cancels, so U is on the safe side.
- * Units: mm in, degrees out, 0 < θ < 360.
+ * Units: mm in, degrees out, 1 ≤ θ < 360.
  * Example: 900, 1200, 1500 → 90.000°; u 0.5 mm each → u = 0.0563°.
  * Problems: reading-not-a-number, uncertainty-not-known, leg-not-positive, diagonal-too-long,
  * diagonal-too-short, too-flat, too-sharp, angle-out-of-range; warning short-legs.
@@ -42,9 +42,9 @@ export function cornerAngle(input: CornerLegs | CornerAngleRead): Outcome<Figure
   const { id, value, u } = input.angle;
   const bad = unreadable([{ id, values: [value], u }]);
   if (bad.length > 0) return refused(...bad);
-  if (value <= 0 || value >= 360) {
+  if (value < 1 || value >= 360) {
     return refused(
-      problem('angle-out-of-range', 'A corner is between 0° and 360°. Read it again.', [id]),
+      problem('angle-out-of-range', 'A corner is between 1° and 360°. Read it again.', [id]),
     );
   }
   return { value: figure(value, u, [id]), problems: [] };
@@ -55,14 +55,19 @@ export function cornerAngle(input: CornerLegs | CornerAngleRead): Outcome<Figure
  * Edge rule: positive where it is in the way at the front (θ < 90); from 180° on the end is open.
  * Units: degrees and mm in, mm out.
  * Example: 89.5° over 600 mm → 5.236 mm; u(θ) = 0.1° → u = 600/sin²θ · 0.001745 = 1.047 mm.
- * Problems: end-open, angle-out-of-range, depth-not-positive. Source: elementary geometry.
+ * Problems: end-open, angle-out-of-range, depth-not-positive, reading-not-a-number,
+ * uncertainty-not-known. Source: elementary geometry.
  */
 export function cornerOffset(theta: Figure, depthMm: number): Outcome<Figure> {
-  if (!(depthMm >= 0 && Number.isFinite(depthMm))) {
+  const bad = unreadable([{ id: null, values: [depthMm], u: theta.u }]);
+  if (bad.length > 0) return refused(...bad);
+  if (depthMm < 0) {
     return refused(problem('depth-not-positive', 'The depth is a length from 0 up.', theta.from));
   }
-  if (!(theta.value > 0 && theta.value < 360)) {
-    return refused(problem('angle-out-of-range', 'A corner is between 0° and 360°.', theta.from));
+  if (!(theta.value >= 1 && theta.value < 360)) {
+    return refused(
+      problem('angle-out-of-range', 'A corner is between 1° and 360°. Read it again.', theta.from),
+    );
   }
   if (theta.value >= 180) {
     const open = 'This end is open: the wall turns away, and nothing is in the way.';

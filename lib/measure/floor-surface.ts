@@ -13,7 +13,7 @@ export type LevelPoint = {
 };
 
 /** A reading of the floor or ceiling with what it was made of. */
-export type LevelPlace = { id: string; xMm: number; yMm: number; c: Combination };
+type LevelPlace = { xMm: number; yMm: number; c: Combination };
 
 /** The level line's own tilt along and across a wall; its error grows with the distance. */
 export type LevelTilt = { alongX: ErrorSource; alongY: ErrorSource };
@@ -31,15 +31,6 @@ export function levelTilt(uLevel: number): LevelTilt {
   return { alongX: { ids: [], u: uLevel }, alongY: { ids: [], u: uLevel } };
 }
 
-export function levelPlaces(points: LevelPoint[]): LevelPlace[] {
-  return points.map(({ id, xMm, yMm, valueMm, u }) => ({
-    id,
-    xMm,
-    yMm,
-    c: readCombination(id, valueMm, u),
-  }));
-}
-
 /** A value with the tilt of the level line over the distance from the wall's corner. */
 export function tilted(c: Combination, xMm: number, yMm: number, tilt: LevelTilt): Combination {
   return {
@@ -51,27 +42,35 @@ export function tilted(c: Combination, xMm: number, yMm: number, tilt: LevelTilt
 /**
  * The floor or ceiling between readings: straight along each line of readings, straight from line to line.
  * Edge rule: a line that does not reach a place is left out while another does; past all of them the
- * nearest reading is carried on and the value says so. Null without readings.
+ * nearest reading is carried on and the value says so. Without readings every value is 0, carried on.
  * Units and frame: mm; x along the wall, y out of it.
  * Example: drops 1000 and 1004 at x 0 and 600 → 1001 at x 150.
  * Source: common practice (a floor is straight between readings).
  */
-export function surfaceAt(places: LevelPlace[], xMm: number, yMm: number): SurfaceValue | null {
-  if (places.length === 0) return null;
-  const lines = linesOf(places);
-  const crossed = lines.flatMap((line) => {
-    const found = bracket(line, (place) => place.xMm, xMm);
-    return found === null ? [] : [{ c: placeOn(found), yMm: lineY(line) }];
-  });
-  if (crossed.length === 0) {
-    const ends = lines.flatMap((line) => {
+export function levelSurface(points: LevelPoint[]): (xMm: number, yMm: number) => SurfaceValue {
+  const places = points.map(({ id, xMm, yMm, valueMm, u }) => ({
+    xMm,
+    yMm,
+    c: readCombination(id, valueMm, u),
+  }));
+  const lines = linesOf(places).map((line) => ({ line, yMm: lineY(line) }));
+  return (xMm, yMm) => {
+    const crossed = lines.flatMap(({ line, yMm: y }) => {
+      const found = bracket(line, xOf, xMm);
+      return found === null ? [] : [{ c: placeOn(found), yMm: y }];
+    });
+    if (crossed.length > 0) return acrossLines(crossed, yMm);
+    const ends = lines.flatMap(({ line, yMm: y }) => {
       const [first, last] = [line[0], line.at(-1)];
       const end = first && xMm < first.xMm ? first : last;
-      return end ? [{ c: end.c, yMm: lineY(line) }] : [];
+      return end ? [{ c: end.c, yMm: y }] : [];
     });
     return { c: acrossLines(ends, yMm).c, extrapolated: true };
-  }
-  return acrossLines(crossed, yMm);
+  };
+}
+
+function xOf({ xMm }: LevelPlace): number {
+  return xMm;
 }
 
 /** Runs of readings along the wall, nearest the wall first, each from left to right. */

@@ -2,9 +2,9 @@ import { type Outcome, type Problem, problem, refused, warning } from '@/lib/pro
 import { bothUnits } from '@/lib/units/both-units';
 import { type Combination, combinationFigure, combine, figureCombination } from './combination';
 import type { Figure } from './figure';
-import { type LevelPoint, levelPlaces, levelTilt, surfaceAt, tilted } from './floor-surface';
+import { type LevelPoint, levelSurface, levelTilt, tilted } from './floor-surface';
 import { describeKick, type KickRun, placesUnder, type RunKick } from './kick-run';
-import { unreadable } from './reading-problems';
+import { givenFigure, unreadable } from './reading-problems';
 import { refuseScribeRules, type ScribeRules } from './scribe';
 
 export type KickInput = {
@@ -58,15 +58,15 @@ export function kickHeights(input: KickInput): Outcome<KickHeights> {
     from: [],
   });
   const runs = input.runs.map((run) => {
-    const places = levelPlaces(run.drops);
+    const dropAt = levelSurface(run.drops);
     const tilt = levelTilt(input.uLevel);
     const finishedDrop = (xMm: number, yMm: number) => {
-      const found = surfaceAt(places, xMm, yMm);
+      const found = dropAt(xMm, yMm);
       const c = combine([
-        [1, found?.c ?? { value: 0, parts: [] }],
+        [1, found.c],
         [-1, toCome],
       ]);
-      return { c: tilted(c, xMm, yMm, tilt), extrapolated: found?.extrapolated ?? true };
+      return { c: tilted(c, xMm, yMm, tilt), extrapolated: found.extrapolated };
     };
     return { run, finishedDrop };
   });
@@ -140,13 +140,20 @@ function refuseKicks({
   floorToCome,
   uLevel,
   fixedDatumDrop,
+  legs,
 }: KickInput): Problem[] {
   const drops: LevelPoint[] = runs.flatMap((run) => run.drops);
   const bad = unreadable([
     ...drops.map(({ id, xMm, yMm, valueMm, u }) => ({ id, values: [xMm, yMm, valueMm], u })),
-    ...runs.map(({ runId, footprint }) => ({ id: runId, values: Object.values(footprint), u: 0 })),
-    { id: 'floor-to-come', values: [floorToCome.valueMm, nominalKickMm], u: floorToCome.u },
-    { id: 'level', values: [fixedDatumDrop?.value ?? 0], u: uLevel },
+    ...runs.map(({ runId, footprint, faces, units }) => {
+      const corners = [footprint, ...units.map((unit) => unit.footprint)].flatMap(
+        Object.values<number>,
+      );
+      return { id: runId, values: [...corners, ...faces.map(({ atMm }) => atMm)], u: 0 };
+    }),
+    { id: null, values: [floorToCome.valueMm, nominalKickMm], u: floorToCome.u },
+    { id: null, values: [legs.minMm, legs.maxMm], u: uLevel },
+    givenFigure(fixedDatumDrop),
   ]);
   if (bad.length > 0) return bad;
   const unread = runs.filter((run) => run.drops.length === 0).map(({ runId }) => runId);

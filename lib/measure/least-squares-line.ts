@@ -8,6 +8,9 @@ export type FittedLine = {
   spread: Combination;
 };
 
+/** Nearer than this two places are one. */
+const ONE_PLACE = 1e-6;
+
 /**
  * Least-squares line s = atZero + slope · at; every result is a combination of the readings.
  * Edge rule: null where all points are at one place. `weights` left out: all the same.
@@ -16,10 +19,11 @@ export type FittedLine = {
  */
 export function leastSquaresLine(points: StripPoint[], weights?: number[]): FittedLine | null {
   const weight = (index: number) => weights?.[index] ?? 1;
+  const places = points.map(({ at }) => at);
+  if (!(Math.max(...places) - Math.min(...places) > ONE_PLACE)) return null;
   const total = points.reduce((sum, _, index) => sum + weight(index), 0);
   const middle = points.reduce((sum, { at }, index) => sum + weight(index) * at, 0) / total;
   const moment = points.reduce((sum, { at }, index) => sum + weight(index) * (at - middle) ** 2, 0);
-  if (!(moment > 0)) return null;
   const slope = combine(
     points.map(({ at, c }, index) => [(weight(index) * (at - middle)) / moment, c]),
   );

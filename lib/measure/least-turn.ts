@@ -6,6 +6,9 @@ export type TurnEnd = { t: number; c: Combination };
 /** Every turn from `least` to `most` leaves the same greatest gap; null: no end on that side. */
 export type LeastTurn = { least: TurnEnd | null; most: TurnEnd | null };
 
+/** Places along the wall nearer than this are one: no turn changes the gap between them. */
+const ONE_PLACE_MM = 1e-6;
+
 /**
  * The turns that leave the greatest of some gaps least: a minimax in one variable, exact. Two lines that
  * slope against each other are exchanged for the one that stands highest over their crossing until none
@@ -15,11 +18,11 @@ export type LeastTurn = { least: TurnEnd | null; most: TurnEnd | null };
  * Source: elementary (convex, piecewise straight).
  */
 export function leastTurn(lines: TurnLine[]): LeastTurn {
-  const falling = lines.filter(({ d }) => d > 0);
-  const rising = lines.filter(({ d }) => d < 0);
+  const falling = lines.filter(({ d }) => d > ONE_PLACE_MM);
+  const rising = lines.filter(({ d }) => d < -ONE_PLACE_MM);
   const crossing = lowestCrossing(falling, rising);
   const level = highest(
-    lines.filter(({ d }) => d === 0),
+    lines.filter(({ d }) => Math.abs(d) <= ONE_PLACE_MM),
     0,
   );
   if (crossing !== null && (level === null || crossing.value > gapAt(level, 0))) {

@@ -56,10 +56,12 @@ function meanOfOneTool(readings: Repeat[]): { value: number; u: number } {
   return { value: own.value, u: Math.hypot(own.u, common) };
 }
 
-/** Independent values weighed by 1/u²; where one has no u, all weigh the same. */
+/** No reading is surer than a nanometre, so that its weight stays a number. */
+const LEAST_U = 1e-6;
+
+/** Independent values weighed by 1/u². */
 function weighed(values: { value: number; u: number }[]): { value: number; u: number } {
-  const surest = values.every(({ u }) => u > 0);
-  const weights = values.map(({ u }) => (surest ? 1 / (u * u) : 1));
+  const weights = values.map(({ u }) => 1 / Math.max(u, LEAST_U) ** 2);
   const total = weights.reduce((sum, weight) => sum + weight, 0);
   const shares = weights.map((weight) => weight / total);
   return {

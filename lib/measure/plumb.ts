@@ -27,6 +27,9 @@ export type PlumbInput = {
   overMm: number;
 };
 
+/** No reading is surer than a nanometre, so that its weight stays a number. */
+const LEAST_U = 1e-6;
+
 /**
  * Lean of one column of face readings: the slope of the least-squares line, weighed by 1/u².
  * Edge rule: smaller than its own U it is plumb. Two readings give a lean, three show its straightness.
@@ -36,10 +39,12 @@ export type PlumbInput = {
  * Source: least squares, JCGM 100:2008 annex H.3; mm per metre: common practice.
  */
 export function plumbOf({ points, uReference, overMm }: PlumbInput): Outcome<Plumb> {
-  const bad = unreadable(points.map(({ id, atMm, sMm, u }) => ({ id, values: [atMm, sMm], u })));
+  const bad = unreadable([
+    ...points.map(({ id, atMm, sMm, u }) => ({ id, values: [atMm, sMm], u })),
+    { id: null, values: [overMm], u: uReference },
+  ]);
   if (bad.length > 0) return refused(...bad);
-  const surest = points.every(({ u }) => u > 0);
-  const weights = points.map(({ u }) => (surest ? 1 / (u * u) : 1));
+  const weights = points.map(({ u }) => 1 / Math.max(u, LEAST_U) ** 2);
   const fit = leastSquaresLine(points.map(stripPoint), weights);
   if (fit === null) {
     const words = 'A lean needs readings at two heights. Read the same place higher or lower.';

@@ -44,7 +44,7 @@ export function scribeAllowance(input: ScribeInput): Outcome<ScribeAllowance> {
   const { places, uShared, held, rules } = input;
   const bad = unreadable([
     ...places.map(({ id, atMm, gapMm, u }) => ({ id, values: [atMm, gapMm], u })),
-    { id: 'shared', values: [], u: uShared },
+    { id: null, values: [], u: uShared },
   ]);
   if (bad.length > 0) return refused(...bad);
   const wrong = refuseScribeRules(rules);

@@ -1,6 +1,6 @@
 import { type Combination, combinationFigure, combine } from './combination';
 import { type FacePlace, placeBetween } from './face';
-import { type Band, rowsBehind } from './face-behind';
+import type { Band, FaceBehind } from './face-behind';
 import type { Figure } from './figure';
 
 export type GapAt = { xMm: number; zMm: number; gap: Figure };
@@ -30,10 +30,7 @@ export type SetLine = {
 
 type Placed = {
   plane: { id: string; bands: Band[]; edgesMm: number[]; finishedEndMm: number | null };
-  /** The whole wall. */
-  all: FacePlace[];
-  /** The face behind the cabinets. */
-  places: FacePlace[];
+  behind: FaceBehind;
   /** s of the plane at x = 0. */
   offset: Combination;
   turn: Combination;
@@ -46,8 +43,8 @@ const ONE_PLACE_MM = 1;
 
 /** What a set line leaves behind every reading, unit edge and finished end. */
 export function describeSetLine(placed: Placed): SetLine {
-  const { plane, places } = placed;
-  const gaps = places.map((place) => ({ place, c: gapOf(placed, place) }));
+  const { plane, behind } = placed;
+  const gaps = behind.places.map((place) => ({ place, c: gapOf(placed, place) }));
   const touching = gaps.filter(({ c }) => Math.abs(c.value) <= TOUCHES_MM);
   const proud = gaps.filter(({ c }) => c.value < -TOUCHES_MM);
   const largest = gaps.reduce(
@@ -108,11 +105,8 @@ function shown({ xMm, zMm }: { xMm: number; zMm: number }, c: Combination): GapA
 
 /** Least and greatest gap along the height of an edge: at each row, as the face runs between readings. */
 function edgeGap(placed: Placed, xMm: number): EdgeGap | null {
-  const band = placed.plane.bands.find(
-    ({ x0Mm, x1Mm }) => xMm >= x0Mm - ONE_PLACE_MM && xMm <= x1Mm + ONE_PLACE_MM,
-  );
-  if (!band) return null;
-  const heights = rowsBehind(placed.all, band).flatMap((row) => {
+  const heights = placed.behind.rows.flatMap(({ band, row }) => {
+    if (xMm < band.x0Mm - ONE_PLACE_MM || xMm > band.x1Mm + ONE_PLACE_MM) return [];
     const between = placeBetween(row, 'xMm', xMm);
     const place = between ?? nearestOf(row, xMm);
     if (place === null) return [];

@@ -11,7 +11,10 @@ import {
 } from './least-turn';
 
 /** A plane whose turn is sought, and the face behind it. */
-export type SeenPlane = { plane: { finishedEndMm: number | null }; places: FacePlace[] };
+export type SeenPlane = {
+  plane: { finishedEndMm: number | null };
+  behind: { places: FacePlace[] };
+};
 
 /**
  * The turn that planes share when nothing fixes it: least gap at finished ends that show, then the
@@ -21,9 +24,9 @@ export type SeenPlane = { plane: { finishedEndMm: number | null }; places: FaceP
 export function turnOfPlanes(planes: SeenPlane[]): TurnEnd | null {
   const preferred = sharedLeastSquares(planes);
   if (preferred === null) return null;
-  const everywhere = leastTurn(planes.flatMap(({ places }) => gapLines(places)));
-  const atEnds = planes.flatMap(({ plane, places }) =>
-    plane.finishedEndMm === null ? [] : endLines(places, plane.finishedEndMm),
+  const everywhere = leastTurn(planes.flatMap(({ behind }) => gapLines(behind.places)));
+  const atEnds = planes.flatMap(({ plane, behind }) =>
+    plane.finishedEndMm === null ? [] : endLines(behind.places, plane.finishedEndMm),
   );
   const range: LeastTurn =
     atEnds.length > 0 ? turnWithin(leastTurn(atEnds), everywhere) : everywhere;
@@ -59,7 +62,7 @@ function endLines(places: FacePlace[], endMm: number): TurnLine[] {
 }
 
 function sharedLeastSquares(planes: SeenPlane[]): TurnEnd | null {
-  const centred = planes.flatMap(({ places }) => {
+  const centred = planes.flatMap(({ behind: { places } }) => {
     const middle = places.reduce((sum, { xMm }) => sum + xMm, 0) / places.length;
     return places.map((place) => ({ c: place.c, arm: place.xMm - middle }));
   });

@@ -3,7 +3,7 @@ import { type Combination, combinationFigure, combine, figureCombination } from 
 import { type FacePlace, type FacePoint, facePlace } from './face';
 import { type Band, faceBehind } from './face-behind';
 import { type Figure, figure } from './figure';
-import { unreadable } from './reading-problems';
+import { givenFigure, unreadable } from './reading-problems';
 import { describeSetLine, type SetLine } from './set-line-gaps';
 import { turnOfPlanes } from './set-line-turn';
 
@@ -56,25 +56,31 @@ const DEGREES = 180 / Math.PI;
  * reading-not-a-number, uncertainty-not-known; warnings turn-not-read, face-carried-on.
  * Source: common practice; the minimax is exact by linear programming duality.
  */
-export function setLine({ planes, turn, uReference }: SetLineInput): Outcome<SetLines> {
-  const wrong = planes.flatMap((plane) => refusePlane(plane, turn));
+export function setLine(input: SetLineInput): Outcome<SetLines> {
+  const { planes, turn, uReference } = input;
+  const wrong = planes.flatMap((plane) => refusePlane(plane, input));
   if (wrong.length > 0 || planes.length === 0) {
     const none = problem('face-not-read', 'There is no wall to set the cabinets against.');
     return refused(...(wrong.length > 0 ? wrong : [none]));
   }
   const seen = planes.map((plane) => {
     const plumb = { ids: [], u: uReference };
-    const all = plane.points.map((point) => facePlace(point, plumb));
-    return { plane, all, ...faceBehind(all, plane.bands) };
+    const wall = plane.points.map((point) => facePlace(point, plumb));
+    return { plane, behind: faceBehind(wall, plane.bands) };
   });
   const turned = turn === null ? (turnOfPlanes(seen)?.c ?? null) : figureCombination(turn);
   const slope = turned ?? { value: 0, parts: [] };
-  const lines = seen.map(({ plane, all, places }) =>
-    describeSetLine({ plane, all, places, offset: offsetOf(plane, places, slope), turn: slope }),
+  const lines = seen.map(({ plane, behind }) =>
+    describeSetLine({
+      plane,
+      behind,
+      offset: offsetOf(plane, behind.places, slope),
+      turn: slope,
+    }),
   );
   const problems = [
     ...(turned === null ? [notTurned(planes)] : []),
-    ...seen.flatMap(({ plane, extrapolated }) => (extrapolated ? [carriedOn(plane)] : [])),
+    ...seen.flatMap(({ plane, behind }) => (behind.extrapolated ? [carriedOn(plane)] : [])),
   ];
   const shown = combinationFigure(slope);
   const turnDeg = figure(
@@ -105,12 +111,21 @@ function offsetOf(plane: SetLinePlane, places: FacePlace[], turn: Combination): 
   ]);
 }
 
-function refusePlane(plane: SetLinePlane, turn: Figure | null) {
-  const bad = unreadable(
-    plane.points.map(({ id, xMm, zMm, sMm, u }) => ({ id, values: [xMm, zMm, sMm], u })),
-  );
+function refusePlane(plane: SetLinePlane, { turn, uReference }: SetLineInput) {
+  const { id, bands, edgesMm, finishedEndMm, fixed } = plane;
+  const places = [...bands.flatMap(Object.values<number>), ...edgesMm, finishedEndMm ?? 0];
+  const bad = unreadable([
+    ...plane.points.map((point) => ({
+      id: point.id,
+      values: [point.xMm, point.zMm, point.sMm],
+      u: point.u,
+    })),
+    { id, values: [...places, fixed?.atMm ?? 0], u: uReference },
+    givenFigure(fixed?.s ?? null),
+    givenFigure(turn),
+  ]);
   if (bad.length > 0) return bad;
-  if (plane.points.length === 0) {
+  if (plane.points.length === 0 || bands.length === 0) {
     return [problem('face-not-read', 'Nobody has read how flat this wall is.', [plane.id])];
   }
   if (new Set(plane.points.map(({ setUpId }) => setUpId)).size > 1) {

@@ -2,8 +2,8 @@ import { type Outcome, problem, refused, warning } from '@/lib/problem';
 import { roundBlankUp } from '@/lib/units/round';
 import { type Combination, combinationFigure, combine, figureCombination } from './combination';
 import type { Figure } from './figure';
-import { type LevelPoint, levelPlaces, levelTilt, surfaceAt, tilted } from './floor-surface';
-import { unreadable } from './reading-problems';
+import { type LevelPoint, levelSurface, levelTilt, tilted } from './floor-surface';
+import { givenFigure, unreadable } from './reading-problems';
 import { type ScribeAllowance, type ScribeRules, scribeAllowance } from './scribe';
 
 /** The top of some cabinets along the line where it meets the ceiling: the front of the boxes. */
@@ -47,6 +47,7 @@ export function topGap(input: TopGapInput): Outcome<TopGap> {
   const bad = unreadable([
     ...rises.map(({ id, xMm, yMm: y, valueMm, u }) => ({ id, values: [xMm, y, valueMm], u })),
     { id: runId, values: [x0Mm, x1Mm, yMm, topMm], u: input.uLevel },
+    givenFigure(input.datumDrop),
   ]);
   if (bad.length > 0) return refused(...bad);
   if (rises.length === 0) {
@@ -90,19 +91,18 @@ export function topGap(input: TopGapInput): Outcome<TopGap> {
 
 function gapsAlong(input: TopGapInput): { xMm: number; c: Combination; extrapolated: boolean }[] {
   const { rises, x0Mm, x1Mm, yMm, topMm, datumDrop, uLevel } = input;
-  const places = levelPlaces(rises);
+  const riseAt = levelSurface(rises);
   const tilt = levelTilt(uLevel);
   const datum = figureCombination(datumDrop);
   const inside = rises.map(({ xMm }) => xMm).filter((xMm) => xMm > x0Mm && xMm < x1Mm);
   const along = [...new Set([x0Mm, ...inside, x1Mm])].sort((a, b) => a - b);
-  return along.flatMap((xMm) => {
-    const rise = surfaceAt(places, xMm, yMm);
-    if (rise === null) return [];
+  return along.map((xMm) => {
+    const rise = riseAt(xMm, yMm);
     const c = combine([
       [1, tilted(rise.c, xMm, yMm, tilt)],
       [1, datum],
     ]);
-    return [{ xMm, c: { ...c, value: c.value - topMm }, extrapolated: rise.extrapolated }];
+    return { xMm, c: { ...c, value: c.value - topMm }, extrapolated: rise.extrapolated };
   });
 }
 

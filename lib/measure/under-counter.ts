@@ -1,10 +1,10 @@
 import { type Outcome, problem, refused, warning } from '@/lib/problem';
 import { combinationFigure, combine, figureCombination } from './combination';
 import type { Figure } from './figure';
-import { type LevelPoint, levelPlaces, levelTilt, surfaceAt, tilted } from './floor-surface';
+import { type LevelPoint, levelSurface, levelTilt, tilted } from './floor-surface';
 import { type HeightCheck, heightCheck } from './height-check';
 import { placesUnder, type Rectangle } from './kick-run';
-import { unreadable } from './reading-problems';
+import { givenFigure, unreadable } from './reading-problems';
 
 /** Where one appliance stands under a counter. */
 export type UnderCounterInput = {
@@ -41,7 +41,8 @@ export function underCounterHeight(input: UnderCounterInput): Outcome<HeightChec
       values: [...Object.values(footprint), input.undersideMm, input.needMm],
       u: input.uLevel,
     },
-    { id: 'floor-to-come', values: [floorToCome.valueMm], u: floorToCome.u },
+    { id: null, values: [floorToCome.valueMm], u: floorToCome.u },
+    givenFigure(datumDrop),
   ]);
   if (bad.length > 0) return refused(...bad);
   if (drops.length === 0) {
@@ -51,7 +52,7 @@ export function underCounterHeight(input: UnderCounterInput): Outcome<HeightChec
     const words = 'These drops are from another level line than the datum. Tie them to one first.';
     return refused(problem('set-ups-mixed', words, [unitId]));
   }
-  const places = levelPlaces(drops);
+  const dropAt = levelSurface(drops);
   const tilt = levelTilt(input.uLevel);
   const datum = figureCombination(datumDrop);
   const toCome = figureCombination({
@@ -61,15 +62,14 @@ export function underCounterHeight(input: UnderCounterInput): Outcome<HeightChec
     from: [],
   });
   const under = placesUnder({ runId: unitId, drops, footprint, faces: [], units: [] });
-  const heights = under.flatMap(({ xMm, yMm }) => {
-    const drop = surfaceAt(places, xMm, yMm);
-    if (drop === null) return [];
+  const heights = under.map(({ xMm, yMm }) => {
+    const drop = dropAt(xMm, yMm);
     const c = combine([
       [1, tilted(drop.c, xMm, yMm, tilt)],
       [-1, toCome],
       [-1, datum],
     ]);
-    return [{ c: { ...c, value: c.value + input.undersideMm }, extrapolated: drop.extrapolated }];
+    return { c: { ...c, value: c.value + input.undersideMm }, extrapolated: drop.extrapolated };
   });
   const least = heights.reduce((best, place) => (place.c.value < best.c.value ? place : best));
   const words = 'Part of the floor here has not been read; the nearest readings are carried on.';

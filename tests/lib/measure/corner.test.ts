@@ -54,25 +54,32 @@ describe('cornerAngle', () => {
         },
       ),
     );
-  });
+  }, 30_000);
 
   it('takes an outside corner with the leg carried past it', () => {
     const { value } = cornerAngle(legs(900, 1200, 1500, { carriedPast: true }));
     expect(value?.value).toBeCloseTo(270, 9);
   });
 
-  it.each([60, 90, 135])('states at %d° the spread that Monte Carlo finds', (deg) => {
-    const random = seeded(deg);
-    const [a, b] = [900, 1100];
-    const c = diagonalOf(a, b, deg);
-    const drawn = () =>
-      legs(a + 0.7 * random.normal(), b + 0.7 * random.normal(), c + 0.7 * random.normal());
-    const { mean, sd } = monteCarlo(20_000, () => cornerAngle(drawn()).value?.value ?? Number.NaN);
-    const stated = cornerAngle(legs(a, b, c, {}, 0.7)).value?.u ?? 0;
-    expect(mean).toBeCloseTo(deg, 2);
-    expect(sd / stated).toBeGreaterThan(0.97);
-    expect(sd / stated).toBeLessThan(1.03);
-  });
+  it.each([60, 90, 135])(
+    'states at %d° the spread that Monte Carlo finds',
+    (deg) => {
+      const random = seeded(deg);
+      const [a, b] = [900, 1100];
+      const c = diagonalOf(a, b, deg);
+      const drawn = () =>
+        legs(a + 0.7 * random.normal(), b + 0.7 * random.normal(), c + 0.7 * random.normal());
+      const { mean, sd } = monteCarlo(
+        20_000,
+        () => cornerAngle(drawn()).value?.value ?? Number.NaN,
+      );
+      const stated = cornerAngle(legs(a, b, c, {}, 0.7)).value?.u ?? 0;
+      expect(mean).toBeCloseTo(deg, 2);
+      expect(sd / stated).toBeGreaterThan(0.97);
+      expect(sd / stated).toBeLessThan(1.03);
+    },
+    30_000,
+  );
 
   it('is on the safe side of an error the tape makes in all three readings', () => {
     const random = seeded(7);
@@ -82,7 +89,7 @@ describe('cornerAngle', () => {
     };
     const { sd } = monteCarlo(5_000, () => cornerAngle(drawn()).value?.value ?? Number.NaN);
     expect(sd).toBeLessThan(cornerAngle(legs(900, 1200, 1500)).value?.u ?? 0);
-  });
+  }, 30_000);
 
   it('warns on short legs and says which longer ones would halve U', () => {
     const { value, problems } = cornerAngle(legs(300, 400, 500));
@@ -161,7 +168,7 @@ describe('cornerAngle', () => {
       }),
       { numRuns: 20_000 },
     );
-  });
+  }, 30_000);
 });
 
 describe('cornerOffset', () => {
@@ -195,7 +202,7 @@ describe('cornerOffset', () => {
     );
     const stated = cornerOffset(figure(88, 0.2, []), 600).value?.u ?? 0;
     expect(Math.abs(sd / stated - 1)).toBeLessThan(0.03);
-  });
+  }, 30_000);
 });
 
 describe('cornerDeviation and cornerTwist', () => {

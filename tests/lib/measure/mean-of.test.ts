@@ -43,7 +43,7 @@ describe('meanOf', () => {
     expect(mean).toBeCloseTo(1000, 1);
     expect(sd / stated).toBeGreaterThan(0.97);
     expect(sd / stated).toBeLessThan(1.03);
-  });
+  }, 30_000);
 
   it('reports readings that disagree, names the two, and is no surer for their number', () => {
     const readings = [repeat('a', 2414), repeat('b', 2414.5), repeat('slip', 2439.4)];
@@ -77,7 +77,7 @@ describe('meanOf', () => {
         expect(after).toBeLessThanOrEqual(before + 1e-12);
       }),
     );
-  });
+  }, 30_000);
 
   it('refuses nothing and a reading that is no number', () => {
     expect(meanOf([], 2).problems[0]?.code).toBe('nothing-read');

@@ -97,7 +97,7 @@ describe('planeOf', () => {
       { numRuns: 25 },
     );
     expect(seen).toBeGreaterThan(20);
-  });
+  }, 30_000);
 
   it('does not mind tilt, turn, mirror or order, on a floor of 200 readings', () => {
     const random = seeded(5);
@@ -152,27 +152,23 @@ describe('planeOf', () => {
     const random = seeded(6);
     const shape: [number, number, number][] = [
       [0, 0, 0],
-      [2400, 0, 0],
-      [0, 2000, 0],
+      [2400, 0, 4],
+      [0, 2000, 4],
       [2400, 2000, 0],
-      [1000, 900, 8],
+      [900, 800, 12],
     ];
     const drawn = () =>
       planeOf(surface(shape.map(([x, y, s]) => [x, y, s + 0.3 * random.normal()]))).value;
-    const stated = planeOf(
-      surface([
-        [0, 0, 0],
-        [2400, 0, 0.9],
-        [0, 2000, 0.9],
-        [2400, 2000, 0],
-        [1000, 900, 8],
-      ]),
-    ).value;
-    const width = monteCarlo(2_000, () => drawn()?.minimumZone.value ?? Number.NaN);
-    expect(Math.abs(width.sd / (stated?.minimumZone.u ?? 0) - 1)).toBeLessThan(0.25);
-    const slope = monteCarlo(2_000, () => drawn()?.slopeX.value ?? Number.NaN);
-    expect(Math.abs(slope.sd / (stated?.slopeX.u ?? 0) - 1)).toBeLessThan(0.05);
-  });
+    const stated = planeOf(surface(shape)).value;
+    for (const of of [
+      (value: typeof stated) => value?.minimumZone,
+      (value: typeof stated) => value?.slopeX,
+      (value: typeof stated) => value?.leastSquares,
+    ]) {
+      const { sd } = monteCarlo(1_000, () => of(drawn())?.value ?? Number.NaN);
+      expect(Math.abs(sd / (of(stated)?.u ?? 0) - 1)).toBeLessThan(0.08);
+    }
+  }, 30_000);
 
   it('refuses three readings, readings in line, and readings that are none', () => {
     const code = (points: SurfacePoint[]) => planeOf(points).problems[0]?.code;

@@ -50,7 +50,7 @@ describe('plumbOf', () => {
     const { sd, mean } = monteCarlo(10_000, () => drawn()?.over.value ?? Number.NaN);
     expect(mean).toBeCloseTo(4.8, 1);
     expect(Math.abs(sd / (drawn()?.over.u ?? 0) - 1)).toBeLessThan(0.04);
-  });
+  }, 30_000);
 
   it('needs two heights', () => {
     expect(

@@ -36,7 +36,7 @@ describe('scribeAllowance', () => {
         },
       ),
     );
-  });
+  }, 30_000);
 
   it('never goes under the least scribe', () => {
     const { value } = scribe(edge([40, 40, 40], 0.1));
@@ -52,7 +52,7 @@ describe('scribeAllowance', () => {
       scribe(edge([0 + 0.5 * random.normal(), 4 + 0.5 * random.normal()])).value?.outOfTrue.value ??
       Number.NaN;
     expect(monteCarlo(5_000, drawn).sd / (value?.outOfTrue.u ?? 0)).toBeCloseTo(1, 1);
-  });
+  }, 30_000);
 
   it('covers the true greatest gap in at least 97 of 100 edges, margin aside', () => {
     const random = seeded(12);

@@ -191,7 +191,7 @@ describe('setLine', () => {
       }),
       { numRuns: 150 },
     );
-  });
+  }, 30_000);
 
   it('equals a linear program for two walls that share one turn', () => {
     fc.assert(
@@ -206,7 +206,7 @@ describe('setLine', () => {
       }),
       { numRuns: 60 },
     );
-  });
+  }, 30_000);
 
   it('is mirrored with its wall, tilts with its reference, and does not mind order', () => {
     fc.assert(
@@ -229,7 +229,7 @@ describe('setLine', () => {
       }),
       { numRuns: 100 },
     );
-  });
+  }, 30_000);
 
   it('takes the turn nearest least squares where several leave the same gap', () => {
     // Proudest and hollowest at one place: the gap of 4 there is the same for many turns.
@@ -392,10 +392,10 @@ describe('setLine', () => {
       (value: typeof stated) => value?.turnDeg,
       (value: typeof stated) => value?.lines[0]?.atRight.s,
     ]) {
-      const { sd } = monteCarlo(1_500, () => of(drawn())?.value ?? Number.NaN);
-      expect(Math.abs(sd / (of(stated)?.u ?? 0) - 1)).toBeLessThan(0.08);
+      const { sd } = monteCarlo(700, () => of(drawn())?.value ?? Number.NaN);
+      expect(Math.abs(sd / (of(stated)?.u ?? 0) - 1)).toBeLessThan(0.1);
     }
-  });
+  }, 30_000);
 
   it('refuses mixed set-ups, no readings, and readings that are none', () => {
     const mixed = plane([], {

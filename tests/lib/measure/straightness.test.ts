@@ -86,7 +86,7 @@ describe('straightness', () => {
       }),
       { numRuns: 120 },
     );
-  });
+  }, 30_000);
 
   it('states the spread that Monte Carlo finds', () => {
     const random = seeded(3);
@@ -101,7 +101,7 @@ describe('straightness', () => {
           .value ?? Number.NaN,
     );
     expect(squares / (straightness(row(s)).value?.leastSquares.u ?? 0)).toBeLessThan(1.05);
-  });
+  }, 30_000);
 
   it('does not change what it is given', () => {
     const points = row([0, 3, 1, 2]).reverse();
@@ -179,7 +179,16 @@ describe('straightedgeGap', () => {
       }),
       { numRuns: 30 },
     );
-  });
+  }, 30_000);
+
+  it('states the spread that Monte Carlo finds, with both ends between readings', () => {
+    const random = seeded(14);
+    const s = [0, 1, 7, 2, 0, 1];
+    const drawn = () => gapOf(row(s.map((value) => value + 0.3 * random.normal())), 1300);
+    const stated = straightedgeGap(row(s), 1300).value;
+    const { sd } = monteCarlo(3_000, drawn);
+    expect(Math.abs(sd / (stated?.gap.u ?? 0) - 1)).toBeLessThan(0.06);
+  }, 30_000);
 
   it('refuses a straightedge of no length', () => {
     expect(straightedgeGap(row([0, 3, 0]), 0).problems[0]?.code).toBe('edge-not-positive');
