@@ -63,6 +63,8 @@ export function DiaryCalendar(props: DiaryCalendarProps) {
       firstDay={1}
       allDaySlot={false}
       nowIndicator
+      slotEventOverlap={false}
+      eventOrder="crewOrder,start"
       slotDuration="00:30:00"
       snapDuration="00:15:00"
       slotMinTime={hoursAround(hours.dayStart, -1)}

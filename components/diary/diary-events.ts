@@ -12,6 +12,7 @@ export function diaryEvents(
   mayMove: boolean,
 ): EventInput[] {
   const colours = new Map(crews.map((crew) => [crew.id, crewColour(crew.colour)]));
+  const crewOrder = new Map(crews.map((crew, index) => [crew.id, index]));
   return visits
     .filter((visit) => shownCrewIds.has(visit.crewId) && visit.status !== 'called-off')
     .flatMap((visit) =>
@@ -20,7 +21,10 @@ export function diaryEvents(
         start: piece.startsAt,
         end: piece.endsAt,
         title: `${visit.customerName}, ${visit.street}`,
-        color: colours.get(visit.crewId),
+        borderColor: colours.get(visit.crewId),
+        backgroundColor: isOpen(visit) ? 'var(--paper)' : 'var(--sheet)',
+        textColor: 'var(--ink)',
+        crewOrder: crewOrder.get(visit.crewId),
         startEditable: mayMove && index === 0 && canMove(visit),
         durationEditable: mayMove && visit.pieces.length === 1 && canMove(visit),
         classNames: ['visit', isOpen(visit) ? 'visit-open' : 'visit-firm'],

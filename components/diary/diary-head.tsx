@@ -29,11 +29,15 @@ export function DiaryHead({
       title={title || 'Diary'}
       meta={
         <div className="flex flex-wrap items-center gap-1">
-          <Button look="plain" onClick={onEarlier} keyName="←" aria-label="Earlier" />
+          <Button look="plain" onClick={onEarlier} aria-label="Earlier" className="no-underline">
+            ←
+          </Button>
           <Button look="plain" onClick={onToday} keyName="T">
             today
           </Button>
-          <Button look="plain" onClick={onLater} keyName="→" aria-label="Later" />
+          <Button look="plain" onClick={onLater} aria-label="Later" className="no-underline">
+            →
+          </Button>
           <fieldset className="ml-3 flex gap-1">
             <legend className="sr-only">View</legend>
             {views.map(({ view: each, word, key }) => (

@@ -29,13 +29,16 @@ export function VisitEvent({
         <KindMark kind={visit.kind} /> {part}
       </span>
       <b>
-        {visit.customerName}, {visit.street}
+        {visit.customerName}
+        <span className="visit-street">, {visit.street}</span>
       </b>
       <em>{visit.jobTitle}</em>
       {pieceNumber === 1 ? (
         <>
           <em>in: {visit.windowWords}</em>
-          <Verdict kind={verdict}>{words}</Verdict>
+          <span className="visit-status">
+            <Verdict kind={verdict}>{words}</Verdict>
+          </span>
           {visit.customerSays ? <em className="text-ochre">“{visit.customerSays}”</em> : null}
         </>
       ) : null}

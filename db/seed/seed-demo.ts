@@ -56,6 +56,7 @@ async function seedJuniperBend(
 ) {
   const id = randomUUID();
   const rules = defaultShopRules('US');
+  rules.booking = { ...rules.booking, dayStart: '07:30' };
   const { name, phone, email, zone } = juniperBend;
   const nextJobNumber = 2401 + demoJobs.length;
   await tx
