@@ -1,0 +1,333 @@
+/** The observation equations of a room: what each reading should be, and how it moves with the unknowns. */
+import { FIXED, type LaidOutWall, pointAt, type RoomLayout } from './room-layout';
+import type { CornerEnd, RoomObservation } from './room-observations';
+
+/** Corners within this of straight do not move along their walls when these lean. */
+const NEARLY_STRAIGHT_SINE = 0.17;
+
+export type RoomState = {
+  layout: RoomLayout;
+  zRefMm: number;
+  x: Float64Array;
+  y: Float64Array;
+  /** Leans (mm/mm), bows (mm) and tool errors (in units of their own uncertainty), by column. */
+  nuisance: Float64Array;
+};
+
+/** One linearised equation; `predicted` in mm, radians or mm/mm. */
+export type Equation = { columns: number[]; partials: number[]; predicted: number };
+
+/**
+ * The equation of one observation at a state, or null when it names a wall the room has not got.
+ *
+ * Frames: x east, y south seen from above; the room lies to the right of each wall's direction.
+ * Leans move a corner by what the two walls' lines move at that height (MEASURE "Does the room close?").
+ */
+export function equationOf(state: RoomState, observation: RoomObservation): Equation | null {
+  const equation = bareEquation(state, observation);
+  if (equation && observation.tool) {
+    const column = state.layout.toolColumns.get(observation.tool.toolId) ?? FIXED;
+    const share =
+      observation.kind === 'corner' ? radians(observation.tool.uCommon) : observation.tool.uCommon;
+    equation.predicted += share * (state.nuisance[column] ?? 0);
+    add(equation, column, share);
+  }
+  return equation;
+}
+
+function bareEquation(state: RoomState, observation: RoomObservation): Equation | null {
+  const { layout } = state;
+  switch (observation.kind) {
+    case 'length': {
+      const wall = wallOf(layout, observation.wallId);
+      if (!wall) return null;
+      const equation = distance(state, wall.left, wall.right, observation.zMm - state.zRefMm);
+      if (observation.yMm > 0) moveToFront(state, equation, wall, observation.yMm);
+      return equation;
+    }
+    case 'diagonal': {
+      const from = pointAt(layout, observation.from);
+      const to = pointAt(layout, observation.to);
+      if (from === null || to === null || from === to) return null;
+      return distance(state, from, to, observation.zMm - state.zRefMm);
+    }
+    case 'corner': {
+      const wall = wallOf(layout, observation.cornerWallId);
+      const before = wall && wall.wallBefore !== null ? layout.walls[wall.wallBefore] : undefined;
+      if (!wall || !before) return null;
+      const equation = cornerAngleEquation(state, before, wall, 1);
+      if (!observation.proudLeft) addBow(state, equation, before, observation.armLeftMm);
+      if (!observation.proudRight) addBow(state, equation, wall, observation.armRightMm);
+      return equation;
+    }
+    case 'width': {
+      const wall = wallOf(layout, observation.wallId);
+      const facing = wallOf(layout, observation.toWallId);
+      if (!wall || !facing || wall === facing) return null;
+      return width(state, wall, facing, observation.xMm, observation.zMm - state.zRefMm);
+    }
+    case 'plumb': {
+      const wall = wallOf(layout, observation.wallId);
+      if (!wall) return null;
+      return {
+        columns: [wall.leanColumn],
+        partials: [1],
+        predicted: state.nuisance[wall.leanColumn] ?? 0,
+      };
+    }
+  }
+}
+
+/** What was read, in the equation's own unit, carried to the chords where the face was read. */
+export function observedValue(observation: RoomObservation): { value: number; sigma: number } {
+  switch (observation.kind) {
+    case 'plumb':
+      return { value: observation.leanMmPerMm, sigma: observation.u };
+    case 'corner': {
+      let value = radians(observation.angleDeg);
+      let variance = radians(observation.uDeg) ** 2;
+      for (const [proud, arm] of [
+        [observation.proudLeft, observation.armLeftMm],
+        [observation.proudRight, observation.armRightMm],
+      ] as const) {
+        if (!proud) continue;
+        value += proud.valueMm / arm;
+        variance += (proud.uMm / arm) ** 2;
+      }
+      return { value, sigma: Math.sqrt(variance) };
+    }
+    default:
+      return { value: observation.valueMm, sigma: observation.uMm };
+  }
+}
+
+export const radians = (degrees: number) => (degrees * Math.PI) / 180;
+export const degrees = (radiansValue: number) => (radiansValue * 180) / Math.PI;
+
+export function wallOf(layout: RoomLayout, wallId: string): LaidOutWall | undefined {
+  return layout.walls[layout.wallById.get(wallId) ?? -1];
+}
+
+export function headingOf(state: RoomState, wall: LaidOutWall): number {
+  return Math.atan2(
+    (state.y[wall.right] ?? 0) - (state.y[wall.left] ?? 0),
+    (state.x[wall.right] ?? 0) - (state.x[wall.left] ?? 0),
+  );
+}
+
+export function lengthOf(state: RoomState, wall: LaidOutWall): number {
+  return Math.hypot(
+    (state.x[wall.right] ?? 0) - (state.x[wall.left] ?? 0),
+    (state.y[wall.right] ?? 0) - (state.y[wall.left] ?? 0),
+  );
+}
+
+function add(equation: Equation, column: number, partial: number): void {
+  if (column === FIXED) return;
+  const known = equation.columns.indexOf(column);
+  if (known < 0) {
+    equation.columns.push(column);
+    equation.partials.push(partial);
+  } else equation.partials[known] = (equation.partials[known] ?? 0) + partial;
+}
+
+function addPoint(equation: Equation, state: RoomState, point: number, byX: number, byY: number) {
+  const place = state.layout.points[point];
+  if (!place) return;
+  add(equation, place.xColumn, byX);
+  add(equation, place.yColumn, byY);
+}
+
+/** How a corner moves in plan for each unit of lean of the walls that meet there, per mm of height. */
+function cornerShift(state: RoomState, point: number): { column: number; x: number; y: number }[] {
+  const place = state.layout.points[point];
+  const before =
+    place?.wallBefore === null ? undefined : state.layout.walls[place?.wallBefore ?? -1];
+  const after = place?.wallAfter === null ? undefined : state.layout.walls[place?.wallAfter ?? -1];
+  if (!before || !after) {
+    const only = before ?? after;
+    if (!only) return [];
+    const heading = headingOf(state, only);
+    return [{ column: only.leanColumn, x: -Math.sin(heading), y: Math.cos(heading) }];
+  }
+  const headingBefore = headingOf(state, before);
+  const headingAfter = headingOf(state, after);
+  const sine = Math.sin(headingAfter - headingBefore);
+  if (Math.abs(sine) < NEARLY_STRAIGHT_SINE) {
+    return [before, after].map((wall) => ({
+      column: wall.leanColumn,
+      x: -Math.sin(headingAfter) / 2,
+      y: Math.cos(headingAfter) / 2,
+    }));
+  }
+  return [
+    {
+      column: before.leanColumn,
+      x: Math.cos(headingAfter) / sine,
+      y: Math.sin(headingAfter) / sine,
+    },
+    {
+      column: after.leanColumn,
+      x: -Math.cos(headingBefore) / sine,
+      y: -Math.sin(headingBefore) / sine,
+    },
+  ];
+}
+
+function distance(state: RoomState, from: number, to: number, aboveMm: number): Equation {
+  const shiftFrom = aboveMm === 0 ? [] : cornerShift(state, from);
+  const shiftTo = aboveMm === 0 ? [] : cornerShift(state, to);
+  let dx = (state.x[to] ?? 0) - (state.x[from] ?? 0);
+  let dy = (state.y[to] ?? 0) - (state.y[from] ?? 0);
+  for (const [shifts, sign] of [
+    [shiftTo, 1],
+    [shiftFrom, -1],
+  ] as const) {
+    for (const shift of shifts) {
+      const lean = (state.nuisance[shift.column] ?? 0) * aboveMm * sign;
+      dx += shift.x * lean;
+      dy += shift.y * lean;
+    }
+  }
+  const length = Math.hypot(dx, dy);
+  const [ux, uy] = length === 0 ? [1, 0] : [dx / length, dy / length];
+  const equation: Equation = { columns: [], partials: [], predicted: length };
+  addPoint(equation, state, to, ux, uy);
+  addPoint(equation, state, from, -ux, -uy);
+  for (const shift of shiftTo) add(equation, shift.column, aboveMm * (ux * shift.x + uy * shift.y));
+  for (const shift of shiftFrom)
+    add(equation, shift.column, -aboveMm * (ux * shift.x + uy * shift.y));
+  return equation;
+}
+
+/** Adds `scale` times the interior angle between two walls that meet, to an equation. */
+function addAngle(
+  equation: Equation,
+  state: RoomState,
+  before: LaidOutWall,
+  after: LaidOutWall,
+  scale: number,
+): void {
+  for (const [wall, sign] of [
+    [before, scale],
+    [after, -scale],
+  ] as const) {
+    const length = lengthOf(state, wall) || 1;
+    const heading = headingOf(state, wall);
+    const byX = (-Math.sin(heading) / length) * sign;
+    const byY = (Math.cos(heading) / length) * sign;
+    addPoint(equation, state, wall.right, byX, byY);
+    addPoint(equation, state, wall.left, -byX, -byY);
+  }
+}
+
+function interiorAngle(state: RoomState, before: LaidOutWall, after: LaidOutWall): number {
+  const turn = headingOf(state, after) - headingOf(state, before);
+  const full = 2 * Math.PI;
+  return (((Math.PI - turn) % full) + full) % full;
+}
+
+function cornerAngleEquation(
+  state: RoomState,
+  before: LaidOutWall,
+  after: LaidOutWall,
+  scale: number,
+): Equation {
+  const equation: Equation = {
+    columns: [],
+    partials: [],
+    predicted: scale * interiorAngle(state, before, after),
+  };
+  addAngle(equation, state, before, after, scale);
+  return equation;
+}
+
+/** The mark on a bowed wall stands proud by a parabola's height; the angle read is smaller by p/a. */
+function addBow(state: RoomState, equation: Equation, wall: LaidOutWall, armMm: number): void {
+  const length = lengthOf(state, wall) || 1;
+  const perBow = -(4 / length) * Math.max(0, 1 - armMm / length);
+  equation.predicted += perBow * (state.nuisance[wall.bowColumn] ?? 0);
+  add(equation, wall.bowColumn, perBow);
+}
+
+/** A length read out in the room loses y/tan θ at each end, and what the end walls bow there. */
+function moveToFront(state: RoomState, equation: Equation, wall: LaidOutWall, yMm: number): void {
+  const { walls } = state.layout;
+  for (const neighbour of [wall.wallBefore, wall.wallAfter]) {
+    const end = walls[neighbour ?? -1];
+    if (!end) continue;
+    const [before, after] = neighbour === wall.wallBefore ? [end, wall] : [wall, end];
+    const angle = interiorAngle(state, before, after);
+    const sine = Math.sin(angle);
+    if (angle >= Math.PI || Math.abs(sine) < NEARLY_STRAIGHT_SINE) continue;
+    equation.predicted -= yMm / Math.tan(angle);
+    addAngle(equation, state, before, after, yMm / (sine * sine));
+    const length = lengthOf(state, end) || 1;
+    const perBow = (-4 * (yMm / length) * Math.max(0, 1 - yMm / length)) / sine;
+    equation.predicted += perBow * (state.nuisance[end.bowColumn] ?? 0);
+    add(equation, end.bowColumn, perBow);
+  }
+}
+
+function width(
+  state: RoomState,
+  wall: LaidOutWall,
+  facing: LaidOutWall,
+  xMm: number,
+  aboveMm: number,
+): Equation {
+  const heading = headingOf(state, wall);
+  const facingHeading = headingOf(state, facing);
+  const length = lengthOf(state, wall) || 1;
+  const facingLength = lengthOf(state, facing) || 1;
+  const [nx, ny] = [-Math.sin(facingHeading), Math.cos(facingHeading)];
+  const px = (state.x[wall.left] ?? 0) + xMm * Math.cos(heading) - (state.x[facing.left] ?? 0);
+  const py = (state.y[wall.left] ?? 0) + xMm * Math.sin(heading) - (state.y[facing.left] ?? 0);
+  const along = px * Math.cos(facingHeading) + py * Math.sin(facingHeading);
+  const facingCosine = -nx * Math.sin(heading) + ny * Math.cos(heading);
+  const leanHere = aboveMm * facingCosine;
+  const equation: Equation = {
+    columns: [],
+    partials: [],
+    predicted:
+      nx * px +
+      ny * py +
+      leanHere * (state.nuisance[wall.leanColumn] ?? 0) -
+      aboveMm * (state.nuisance[facing.leanColumn] ?? 0),
+  };
+  addPoint(equation, state, wall.left, nx, ny);
+  addPoint(equation, state, facing.left, -nx, -ny);
+  // The wall's own turn moves the place by x; the facing wall's turn swings its line by the run along it.
+  const byTurn = (xMm * facingCosine) / length;
+  addPoint(equation, state, wall.right, -Math.sin(heading) * byTurn, Math.cos(heading) * byTurn);
+  addPoint(equation, state, wall.left, Math.sin(heading) * byTurn, -Math.cos(heading) * byTurn);
+  const bySwing = -along / facingLength;
+  addPoint(equation, state, facing.right, nx * bySwing, ny * bySwing);
+  addPoint(equation, state, facing.left, -nx * bySwing, -ny * bySwing);
+  add(equation, wall.leanColumn, leanHere);
+  add(equation, facing.leanColumn, -aboveMm);
+  return equation;
+}
+
+/** Distance between two ends of walls as it would be read, for weighing a further diagonal. */
+export function diagonalEquation(
+  state: RoomState,
+  from: CornerEnd,
+  to: CornerEnd,
+  zMm: number,
+): Equation | null {
+  const fromPoint = pointAt(state.layout, from);
+  const toPoint = pointAt(state.layout, to);
+  if (fromPoint === null || toPoint === null || fromPoint === toPoint) return null;
+  return distance(state, fromPoint, toPoint, zMm - state.zRefMm);
+}
+
+/** Distance between two points at the plan's own height. */
+export function planDistance(state: RoomState, from: number, to: number): Equation {
+  return distance(state, from, to, 0);
+}
+
+/** Interior angle between two walls that meet, in radians. */
+export function planAngle(state: RoomState, before: LaidOutWall, after: LaidOutWall): Equation {
+  return cornerAngleEquation(state, before, after, 1);
+}

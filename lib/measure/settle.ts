@@ -1,0 +1,115 @@
+/** Which one further reading would tell most: a diagonal, or the same reading again. */
+import type { AdjustedRoom, FurtherReading, SparseRow } from './adjusted-room';
+import { furtherReadings, isTaped } from './further-readings';
+import { type Reliability, redundancyFrom, reliabilityOf, tieBetween } from './reliability';
+import { project, spread } from './row-products';
+
+/** Steps that gain at least this share of the best are as good; the cheapest of them comes first. */
+const AS_GOOD = 0.9;
+/** Work for the measurer: one reading, or one reading with two ends to hold. */
+const COST = { again: 1, diagonal: 2 };
+
+export type SettleOptions = {
+  /** Observations under suspicion (`findBlunder`); then the step that tells them apart is sought. */
+  suspects?: number[];
+  /** Which readings may be asked for; left out: all. */
+  kinds?: FurtherReading['kind'][];
+  /** Standard uncertainty of a diagonal of this length; left out: the greatest of the lengths read. */
+  uOfLengthMm?: (lengthMm: number) => number;
+  /** How many steps to return. */
+  most?: number;
+};
+
+export type SettleStep = {
+  reading: FurtherReading;
+  /** Least redundancy over the readings weighed, before and with the step. */
+  leastRedundancy: number;
+  leastRedundancyAfter: number;
+};
+
+/**
+ * Ranks the further readings by how much they raise the least redundancy (over all lengths, corners,
+ * diagonals and widths; with suspects, over these, less what cannot be told from another suspect).
+ *
+ * Edge: an observation without a reading behind it is not weighed; only diagonals that run free through the room are offered; a step that raises nothing is not;
+ * steps within a tenth of the best gain count as equal and the cheapest comes first.
+ * Example: a square room read at one height without diagonals: the first step is a diagonal, for a
+ * second look at one wall leaves the other three unchecked.
+ * Problems: none; an empty list when nothing would help. Source: Baarda's internal reliability (1968),
+ * recalled; the ranking is ours.
+ */
+export function settle(room: AdjustedRoom, options: SettleOptions = {}): SettleStep[] {
+  const { rows, cofactor, observations } = room.system;
+  const reliability = reliabilityOf(rows, observations.length, cofactor);
+  const weighed = observations.flatMap((o, i) =>
+    isTaped(o) && (!options.suspects || options.suspects.includes(i)) ? [i] : [],
+  );
+  const tellApart = options.suspects ? weighed : [];
+  const before = worthOf(reliability, weighed, tellApart);
+  const steps = furtherReadings(room, options).map(({ reading, row }) => {
+    const after = worthOf(withReading(reliability, rows, cofactor, row), weighed, tellApart);
+    return { reading, before, after };
+  });
+  const helping = steps.filter(({ after }) => after.least > before.least + 1e-6);
+  const ranked =
+    helping.length > 0 ? helping : steps.filter((s) => s.after.sum > before.sum + 1e-6);
+  const by = helping.length > 0 ? 'least' : 'sum';
+  const best = ranked.reduce((most, { after }) => Math.max(most, after[by] - before[by]), 0);
+  return ranked
+    .map((step, order) => ({ ...step, order, gain: step.after[by] - before[by] }))
+    .sort(
+      (one, other) =>
+        Number(other.gain >= AS_GOOD * best) - Number(one.gain >= AS_GOOD * best) ||
+        (one.gain >= AS_GOOD * best ? COST[one.reading.kind] - COST[other.reading.kind] : 0) ||
+        other.gain - one.gain ||
+        one.order - other.order,
+    )
+    .slice(0, options.most ?? 5)
+    .map(({ reading, after }) => ({
+      reading,
+      leastRedundancy: before.leastRedundancy,
+      leastRedundancyAfter: after.leastRedundancy,
+    }));
+}
+
+type Worth = { least: number; sum: number; leastRedundancy: number };
+
+/** Worth of a set of readings: the least redundancy (clear of the other suspects), and their sum. */
+function worthOf(reliability: Reliability, weighed: number[], tellApart: number[]): Worth {
+  const worth = { least: 1, sum: 0, leastRedundancy: 1 };
+  for (const i of weighed) {
+    const redundancy = reliability.redundancies[i] ?? 0;
+    const tie = tellApart.reduce(
+      (most, j) => (j === i ? most : Math.max(most, Math.abs(tieBetween(reliability, i, j)))),
+      0,
+    );
+    const clear = redundancy * Math.max(0, 1 - tie * tie);
+    worth.least = Math.min(worth.least, clear);
+    worth.leastRedundancy = Math.min(worth.leastRedundancy, redundancy);
+    worth.sum += clear;
+  }
+  return worth;
+}
+
+/** Reliability with one more reading: a rank-one change of the cofactor matrix. */
+function withReading(
+  { sigmas, shared }: Reliability,
+  rows: SparseRow[],
+  cofactor: Float64Array[],
+  row: SparseRow,
+): Reliability {
+  const spreadRow = spread(cofactor, row);
+  const total = row.sigma ** 2 + project(row, spreadRow);
+  const pull = sigmas.map((_, i) => {
+    const own = rows[i];
+    return own ? project(own, spreadRow) : 0;
+  });
+  const after = shared.map((line, i) =>
+    line.map((value, j) => value - ((pull[i] ?? 0) * (pull[j] ?? 0)) / total),
+  );
+  return {
+    sigmas,
+    shared: after,
+    redundancies: after.map((line, i) => redundancyFrom(line[i] ?? 0, sigmas[i] ?? 1)),
+  };
+}
