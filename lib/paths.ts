@@ -29,6 +29,8 @@ export const paths = {
   today: () => '/today',
   todayVisit: (visitId: string) => `/today/${part(visitId)}`,
   walls: (roomId: string) => `/walls/${part(roomId)}`,
+  /** A room that is yet to be drawn; the phone makes its id. */
+  newWalls: (roomId: string, jobId: string) => `/walls/${part(roomId)}?job=${part(jobId)}`,
 
   /** The customer's page; the token is the whole of the permission. */
   customerVisit: (token: string) => `/v/${part(token)}`,

@@ -39,6 +39,9 @@ export const saveRunsInput = z.object({
 export type SaveRunsInput = z.infer<typeof saveRunsInput>;
 
 export const roomIdInput = z.object({ roomId: id });
+/** With the job, a room that is not drawn yet is begun. */
+export const openWallBookInput = z.object({ roomId: id, jobId: id.optional() });
+export type OpenWallBookInput = z.infer<typeof openWallBookInput>;
 export const sheetInput = z.object({ roomId: id, revision: z.string().regex(/^[A-Z]{1,4}$/) });
 
 /** Everything a phone needs to measure one room. */

@@ -1,4 +1,5 @@
 import type { Room } from '@/lib/contracts/wall-book';
+import type { AskedReading } from '@/lib/measure/missing-reading';
 import { walkRoom } from '@/lib/measure/room-walk';
 import type { CornerMethod, PadAsk } from './pad-fields';
 import { type LengthSpeech, sayLength } from './say-length';
@@ -53,6 +54,22 @@ export function wallsOfAsk(ask: PadAsk, room: Room): string[] {
       return [];
     case 'width':
       return [ask.wallId, ask.toWallId];
+    default:
+      return [ask.wallId];
+  }
+}
+
+/** The walls under which a question is listed: one for most, two for what goes across the room. */
+export function wallsOfPlanned(ask: AskedReading): string[] {
+  switch (ask.kind) {
+    case 'corner':
+      return [ask.cornerWallId];
+    case 'diagonal':
+      return [ask.fromCornerWallId, ask.toCornerWallId];
+    case 'width':
+      return [ask.wallId, ask.toWallId];
+    case 'doorway':
+      return [];
     default:
       return [ask.wallId];
   }

@@ -9,6 +9,7 @@ export type PlanWall = {
   to: PlanPoint;
   /** Null until it is read. */
   readMm: number | null;
+  drawnMm: number;
 };
 export type PlanCorner = {
   /** The corner is at this wall's left end. */
@@ -82,7 +83,14 @@ function addChain(
     const [from, to] = [points[at], points[at + 1]];
     if (!from || !to) return;
     const readMm = read.lengthMm.get(wall.id)?.value ?? null;
-    plan.walls.push({ wallId: wall.id, name: wall.name, from, to, readMm });
+    plan.walls.push({
+      wallId: wall.id,
+      name: wall.name,
+      from,
+      to,
+      readMm,
+      drawnMm: wall.nominalLengthMm,
+    });
     if (wall.leftCornerDeg === null || (at === 0 && !chain.closed)) return;
     plan.corners.push({
       cornerWallId: wall.id,

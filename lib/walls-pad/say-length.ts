@@ -1,9 +1,20 @@
 import type { FitRules } from '@/lib/contracts/shop-rules';
+import type { LengthUnit } from '@/lib/units/brands';
 import { formatLength } from '@/lib/units/format-length';
+import { MM_PER_INCH } from '@/lib/units/fraction-parts';
 import { roundBlankUp, roundNearest } from '@/lib/units/round';
 
 /** How the shop reads and writes lengths. */
 export type LengthSpeech = Pick<FitRules, 'unit' | 'stepMm'>;
+
+/**
+ * Speech in the unit that the measurer reads in: the shop's step in the shop's own unit, else the plain one.
+ * Example: an inch shop read in millimetres: to 1 mm.
+ */
+export function speechIn(rules: LengthSpeech, unit: LengthUnit): LengthSpeech {
+  if (unit === rules.unit) return { unit, stepMm: rules.stepMm };
+  return { unit, stepMm: unit === 'in' ? MM_PER_INCH / 16 : 1 };
+}
 
 /** A place or a whole reading: `36"`, `914 mm`. */
 export function sayLength(mm: number, { unit, stepMm }: LengthSpeech): string {

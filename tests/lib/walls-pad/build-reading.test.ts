@@ -7,6 +7,7 @@ import {
   type ReadingChoices,
   type ReadingCommon,
 } from '@/lib/walls-pad/build-reading';
+import { buildFeature } from '@/lib/walls-pad/feature-fields';
 import { emptyEntry, entryOfLength } from '@/lib/walls-pad/pad-entry';
 import { type PadAsk, padFields } from '@/lib/walls-pad/pad-fields';
 import { placeFields } from '@/lib/walls-pad/place-fields';
@@ -157,5 +158,40 @@ describe('refusalOf', () => {
   it('lets a corner pass that can be', () => {
     const { reading } = build(asks[1] as PadAsk, (name) => (name === 'diagonal' ? 1_273 : 900));
     expect(reading && refusalOf(reading, input)).toBeNull();
+  });
+});
+
+describe('buildFeature', () => {
+  const entries = {
+    x0: entryOfLength(1_000, 'mm'),
+    width: entryOfLength(1_200, 'mm'),
+    z0: entryOfLength(1_050, 'mm'),
+    height: entryOfLength(1_000, 'mm'),
+  };
+  const own = { ...common, wallId: wallIds.A, feature: 'window', swing: 'in-left' } as const;
+
+  it('places a window on its wall', () => {
+    const { reading } = buildFeature({ entries, common: own });
+    expect(readingSchema.parse(reading)).toEqual(reading);
+    expect(reading).toMatchObject({
+      x0Mm: 1_000,
+      x1Mm: 2_200,
+      z0Mm: 1_050,
+      z1Mm: 2_050,
+      projectionMm: 0,
+      swing: 'in-left',
+      typed: '1000 / 1200 / 1050 / 1000',
+    });
+  });
+
+  it('takes a niche as standing out by less than nothing', () => {
+    const projection = { ...entryOfLength(80, 'mm'), isNegative: true };
+    const { reading } = buildFeature({ entries: { ...entries, projection }, common: own });
+    expect(reading).toMatchObject({ projectionMm: -80 });
+  });
+
+  it('names the field that is missing', () => {
+    const { problem } = buildFeature({ entries: { ...entries, z0: undefined }, common: own });
+    expect(problem).toMatchObject({ field: 'z0', code: 'nothing-typed' });
   });
 });

@@ -1,0 +1,20 @@
+'use client';
+
+import { useRouter } from 'next/navigation';
+import { Button } from '@/components/ui/button';
+import { paths } from '@/lib/paths';
+import { newId } from './new-id';
+
+/** Begins a room of the job: its id is made here, so that it can be drawn before the office knows it. */
+export function AddRoom({ jobId, isFirst }: { jobId: string; isFirst: boolean }) {
+  const router = useRouter();
+  return (
+    <Button
+      size="thumb"
+      look={isFirst ? 'fill' : 'plain'}
+      onClick={() => router.push(paths.newWalls(newId(), jobId))}
+    >
+      {isFirst ? 'Draw the first room' : 'Add a room'}
+    </Button>
+  );
+}

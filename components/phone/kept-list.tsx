@@ -1,0 +1,62 @@
+'use client';
+
+import { useState } from 'react';
+import { Button } from '@/components/ui/button';
+import { TitleBlock } from '@/components/ui/title-block';
+import type { Queued } from '@/lib/sync/queued';
+import { usePersonId } from './phone-person';
+import { readQueue, tryParkedAgain } from './queue-store';
+import { useLive } from './use-live';
+
+/** What the office would not take: it stays on the phone, with the office's words, until it does. */
+export function KeptList() {
+  const personId = usePersonId();
+  const live = useLive('queue', readQueue);
+  const [isTrying, setIsTrying] = useState(false);
+  const parked =
+    live.state === 'here'
+      ? live.value.filter((item) => item.personId === personId && item.parked !== null)
+      : [];
+  if (parked.length === 0) return null;
+  const tryAgain = async () => {
+    setIsTrying(true);
+    await tryParkedAgain(personId).finally(() => setIsTrying(false));
+  };
+  return (
+    <section id="kept" className="scroll-mt-14 px-3.5 py-4">
+      <TitleBlock title="Not taken by the office" meta={`${parked.length} kept here`} />
+      <ul className="divide-y divide-rule">
+        {parked.map((item) => (
+          <li key={item.id} className="py-2">
+            <p className="font-medium">{workWords(item)}</p>
+            <p className="text-note text-chalk">{item.parked}</p>
+          </li>
+        ))}
+      </ul>
+      <p className="py-2 text-note text-graphite">
+        Nothing is lost: it stays on this phone. Once the cause is gone, try again.
+      </p>
+      <Button
+        look="line"
+        size="thumb"
+        onClick={tryAgain}
+        busyText={isTrying ? 'Trying…' : undefined}
+      >
+        Try again
+      </Button>
+    </section>
+  );
+}
+
+function workWords({ work }: Queued): string {
+  switch (work.kind) {
+    case 'room':
+      return `Drawing of ${work.room.name}`;
+    case 'submit':
+      return 'A wall book handed in';
+    case 'report':
+      return `Tap on a visit: ${work.report.what.replaceAll('-', ' ')}`;
+    case 'reading':
+      return `A reading: ${work.reading.kind}, ${work.reading.typed || 'no figure'}`;
+  }
+}

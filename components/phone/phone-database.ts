@@ -1,0 +1,33 @@
+import Dexie, { type EntityTable, type Table } from 'dexie';
+import type { WallBookView } from '@/lib/contracts/rooms';
+import type { Queued } from '@/lib/sync/queued';
+
+type PhoneTables = {
+  /** What the office has not yet said that it has. */
+  queue: Table<Queued, number, Omit<Queued, 'order'>>;
+  /** The office's last word on each room opened here, with what it has taken since. */
+  rooms: EntityTable<{ roomId: string; view: WallBookView }, 'roomId'>;
+  /** Half-typed values, choices and sketches, by a name of their own. */
+  drafts: EntityTable<{ key: string; value: unknown }, 'key'>;
+};
+export type PhoneDatabase = Dexie & PhoneTables;
+
+let opened: PhoneDatabase | null = null;
+
+/**
+ * The phone's own store. It is migrated by adding a version below, never deleted. Strict durability: the
+ * promise of a write holds only when it is on the disk, not when it is on its way.
+ */
+export function phoneDatabase(): PhoneDatabase {
+  if (opened) return opened;
+  const database = new Dexie('setwell', {
+    chromeTransactionDurability: 'strict',
+  }) as PhoneDatabase;
+  database.version(1).stores({
+    queue: '++order, &id, roomId',
+    rooms: 'roomId',
+    drafts: 'key',
+  });
+  opened = database;
+  return database;
+}

@@ -1,0 +1,63 @@
+import { withSent } from '@/lib/sync/book-on-phone';
+import type { Batch } from '@/lib/sync/next-batch';
+import { type Queued, type QueuedWork, roomIdOf } from '@/lib/sync/queued';
+import type { Settled } from '@/lib/sync/settle-batch';
+import { newId } from './new-id';
+import { phoneDatabase } from './phone-database';
+
+/** Puts work on the phone's disk. When it has resolved, the work cannot be lost but with the phone. */
+export async function keepWork(personId: string, works: readonly QueuedWork[]): Promise<void> {
+  await phoneDatabase().queue.bulkAdd(
+    works.map((work) => ({
+      id: work.kind === 'reading' ? work.reading.id : newId(),
+      personId,
+      roomId: roomIdOf(work),
+      work,
+      parked: null,
+    })),
+  );
+}
+
+export function readQueue(): Promise<Queued[]> {
+  return phoneDatabase().queue.orderBy('order').toArray();
+}
+
+export function readQueueOfRoom(roomId: string): Promise<Queued[]> {
+  return phoneDatabase().queue.where('roomId').equals(roomId).sortBy('order');
+}
+
+/** One transaction: what the office has taken moves from the queue to the room's last known state. */
+export async function settleQueue({ items }: Batch, settled: Settled): Promise<void> {
+  const database = phoneDatabase();
+  const sentIds = new Set(settled.sentIds);
+  const sent = items.filter(({ id }) => sentIds.has(id));
+  await database.transaction('rw', database.queue, database.rooms, async () => {
+    await rememberSent(sent);
+    await database.queue.bulkDelete(sent.map(({ order }) => order));
+    for (const { id, message } of settled.parked) {
+      await database.queue.where('id').equals(id).modify({ parked: message });
+    }
+  });
+}
+
+/** Sends parked things once more: after a sign-in as somebody who may, or a mended room. */
+export async function tryParkedAgain(personId: string): Promise<void> {
+  await phoneDatabase()
+    .queue.filter((item) => item.personId === personId && item.parked !== null)
+    .modify({ parked: null });
+}
+
+async function rememberSent(sent: Queued[]): Promise<void> {
+  const { rooms } = phoneDatabase();
+  for (const roomId of new Set(sent.map((item) => item.roomId))) {
+    const kept = roomId === null ? undefined : await rooms.get(roomId);
+    if (!kept) continue;
+    const works = sent.filter((item) => item.roomId === roomId).map(({ work }) => work);
+    const readings = works.flatMap((work) => (work.kind === 'reading' ? [work.reading] : []));
+    const drawn = works.flatMap((work) => (work.kind === 'room' ? [work.room] : []));
+    const view = withSent(kept.view, readings, drawn.at(-1) ?? null);
+    const isSubmitted = works.some(({ kind }) => kind === 'submit');
+    const submittedAt = isSubmitted ? new Date().toISOString() : view.submittedAt;
+    await rooms.put({ ...kept, view: { ...view, submittedAt } });
+  }
+}

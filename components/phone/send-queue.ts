@@ -1,0 +1,102 @@
+import { liveQuery } from 'dexie';
+import { backOffMs } from '@/lib/sync/back-off';
+import { nextBatch } from '@/lib/sync/next-batch';
+import { settleBatch } from '@/lib/sync/settle-batch';
+import { postBatch } from './post-batch';
+import { readQueue, settleQueue } from './queue-store';
+import { changeSendingState } from './sending-state';
+
+/**
+ * Sends what is kept, in order, until the returned function is called. It wakes when something is kept,
+ * when the signal is back, when the page is looked at again, and after each pause.
+ */
+export function startSending(personId: string): () => void {
+  let failures = 0;
+  let isStopped = false;
+  let isRunning = false;
+  let isWanted = false;
+  let timer: ReturnType<typeof setTimeout> | undefined;
+
+  const wake = () => {
+    clearTimeout(timer);
+    if (isStopped) return;
+    isWanted = true;
+    if (!isRunning) void run();
+  };
+
+  const run = async () => {
+    isRunning = true;
+    while (isWanted && !isStopped) {
+      isWanted = false;
+      try {
+        await alone(() => sendAll());
+      } catch (cause) {
+        // The store itself failed: nothing has left it, so it is tried again like a lost answer.
+        console.warn('setwell: could not send', cause);
+        pause();
+      }
+    }
+    isRunning = false;
+  };
+
+  const sendAll = async () => {
+    while (!isStopped) {
+      const batch = nextBatch(await readQueue(), personId);
+      if (!batch) return;
+      const settled = settleBatch(batch, await postBatch(batch));
+      await settleQueue(batch, settled);
+      changeSendingState({
+        isSignedOut: settled.next === 'sign-in',
+        isOffline: settled.next === 'wait',
+      });
+      if (settled.next === 'sign-in') return;
+      if (settled.next === 'wait') return pause();
+      failures = 0;
+    }
+  };
+
+  const pause = () => {
+    failures += 1;
+    clearTimeout(timer);
+    timer = setTimeout(wake, backOffMs(failures, Math.random()));
+  };
+
+  const wakeAfresh = () => {
+    failures = 0;
+    wake();
+  };
+  const wakeWhenSeen = () => {
+    if (document.visibilityState === 'visible') wakeAfresh();
+  };
+
+  const kept = liveQuery(readWaiting).subscribe({ next: wakeIfMore(wake), error: () => {} });
+  window.addEventListener('online', wakeAfresh);
+  document.addEventListener('visibilitychange', wakeWhenSeen);
+  return () => {
+    isStopped = true;
+    clearTimeout(timer);
+    kept.unsubscribe();
+    window.removeEventListener('online', wakeAfresh);
+    document.removeEventListener('visibilitychange', wakeWhenSeen);
+  };
+}
+
+async function readWaiting(): Promise<number> {
+  const queue = await readQueue();
+  return queue.filter(({ parked }) => parked === null).length;
+}
+
+/** Fewer things waiting is our own doing; more is a reason to go. */
+function wakeIfMore(wake: () => void): (waiting: number) => void {
+  let before = 0;
+  return (waiting) => {
+    if (waiting > before) wake();
+    before = waiting;
+  };
+}
+
+/** One tab at a time. Where the browser has no locks, two may send the same: the office takes it once. */
+async function alone(work: () => Promise<void>): Promise<void> {
+  if (!navigator.locks) return work();
+  await navigator.locks.request('setwell.send', work);
+}

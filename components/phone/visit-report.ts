@@ -1,0 +1,47 @@
+import type { ReportVisitInput, TodayVisit, VisitStatus } from '@/lib/contracts/visits';
+import type { Queued } from '@/lib/sync/queued';
+
+export type VisitTap = ReportVisitInput['what'];
+
+const statusAfter: Record<VisitTap, VisitStatus> = {
+  'on-the-way': 'on-the-way',
+  arrived: 'on-site',
+  done: 'done',
+  'nobody-home': 'missed',
+};
+
+/** How a visit stands with the taps that are still on this phone. */
+export function statusOnPhone(visit: TodayVisit, queue: readonly Queued[]): VisitStatus {
+  const taps = queue.flatMap(({ work, parked }) =>
+    parked === null && work.kind === 'report' && work.report.visitId === visit.id
+      ? [work.report.what]
+      : [],
+  );
+  const last = taps.at(-1);
+  return last ? statusAfter[last] : visit.status;
+}
+
+export const tapWords: Record<VisitTap, string> = {
+  'on-the-way': 'On my way',
+  arrived: 'Arrived',
+  done: 'Done',
+  'nobody-home': 'Nobody home',
+};
+
+/** What can be tapped next, the likeliest first. */
+export function tapsFrom(status: VisitStatus): VisitTap[] {
+  switch (status) {
+    case 'held':
+    case 'booked':
+    case 'confirmed':
+      return ['on-the-way', 'arrived'];
+    case 'on-the-way':
+      return ['arrived', 'nobody-home'];
+    case 'on-site':
+      return ['done', 'nobody-home'];
+    case 'done':
+    case 'missed':
+    case 'called-off':
+      return [];
+  }
+}

@@ -1,0 +1,77 @@
+import { LinkButton } from '@/components/ui/link-button';
+import { TitleBlock } from '@/components/ui/title-block';
+import type { TodayVisit } from '@/lib/contracts/visits';
+import { paths } from '@/lib/paths';
+import { visitKindWords } from '@/lib/schedule/visit-kind-words';
+import { AddRoom } from './add-room';
+import { DirectionsLink } from './directions-link';
+import { VisitState } from './visit-state';
+import { VisitTaps } from './visit-taps';
+
+type VisitScreenProps = { visit: TodayVisit; mayReport: boolean; mayMeasure: boolean };
+
+/** One stop: when, where, how to get in, what to do there. */
+export function VisitScreen({ visit, mayReport, mayMeasure }: VisitScreenProps) {
+  return (
+    <div className="flex flex-col gap-5 px-3.5 py-4">
+      <section className="flex flex-col gap-3">
+        <TitleBlock
+          level={1}
+          title={visit.customerName}
+          meta={`${visitKindWords[visit.kind]} · job ${visit.jobNumber}`}
+        />
+        <p className="flex items-baseline justify-between gap-3">
+          <span className="text-lead font-bold">
+            {visit.dayWords}, {visit.windowWords}
+          </span>
+          <VisitState visit={visit} />
+        </p>
+        {mayReport ? <VisitTaps visit={visit} /> : null}
+      </section>
+
+      <section>
+        <TitleBlock title="The way" />
+        <p className="pt-2 text-lead">
+          {visit.street}
+          {visit.town ? `, ${visit.town}` : ''}
+        </p>
+        <div className="grid grid-cols-2 gap-2 py-2">
+          <DirectionsLink street={visit.street} town={visit.town} />
+          {visit.phone ? (
+            <a
+              href={`tel:${visit.phone.replace(/[^+\d]/g, '')}`}
+              className="flex min-h-thumb items-center justify-center rounded border border-pine font-bold text-pine active:bg-tint"
+            >
+              Ring {visit.phone}
+            </a>
+          ) : null}
+        </div>
+        <Words label="Way in" text={visit.wayIn} />
+        <Words label="The customer says" text={visit.customerSays} />
+        <Words label="Notes" text={visit.notes} />
+      </section>
+
+      {mayMeasure ? (
+        <section className="flex flex-col gap-2">
+          <TitleBlock title="Rooms" meta={visit.jobTitle} />
+          {visit.rooms.map((room) => (
+            <LinkButton key={room.id} size="thumb" look="line" href={paths.walls(room.id)}>
+              Measure {room.name}
+            </LinkButton>
+          ))}
+          <AddRoom jobId={visit.jobId} isFirst={visit.rooms.length === 0} />
+        </section>
+      ) : null}
+    </div>
+  );
+}
+
+function Words({ label, text }: { label: string; text: string }) {
+  if (text === '') return null;
+  return (
+    <div className="border-t border-rule py-2">
+      <p className="text-note text-graphite">{label}</p>
+      <p className="whitespace-pre-line">{text}</p>
+    </div>
+  );
+}

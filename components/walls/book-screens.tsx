@@ -1,0 +1,221 @@
+'use client';
+
+import { lazy, Suspense, useState } from 'react';
+import { keepDraft } from '@/components/phone/draft-store';
+import type { RoomOnPhone } from '@/components/phone/room-store';
+import { EmptyState } from '@/components/ui/empty-state';
+import { LinkButton } from '@/components/ui/link-button';
+import { Skeleton, SkeletonScreen } from '@/components/ui/skeleton';
+import { walkRoom } from '@/lib/measure/room-walk';
+import { nextAsk, toGoWords } from '@/lib/walls-pad/next-ask';
+import { speechIn } from '@/lib/walls-pad/say-length';
+import { type BookPlace, goTo, placeHref, useBookPlace } from './book-place';
+import { FeaturePad } from './feature-pad';
+import { afterKey, type KeptOnPhone } from './kept-on-phone';
+import { useHabits } from './pad-habits';
+import {
+  freeKinds,
+  freeQuestion,
+  type PadQuestion,
+  questionAgain,
+  questionOfPlan,
+  questionOfReading,
+} from './pad-question';
+import { QuestionPicture, WallPicture } from './question-picture';
+import { ReadingDetail } from './reading-detail';
+import { ReadingPad } from './reading-pad';
+import { SketchScreen } from './sketch-screen';
+import { usePlan } from './use-plan';
+import { WallList } from './wall-list';
+import { WallsOverview } from './walls-overview';
+
+const LeaveScreen = lazy(() => import('./leave-screen'));
+
+/** Which screen of the book is shown, by the address. */
+export function BookScreens({ room, kept }: { room: RoomOnPhone; kept: KeptOnPhone }) {
+  const { view, queue } = room;
+  const place = useBookPlace();
+  const plan = usePlan(view);
+  const [habits, changeHabits] = useHabits(kept.habits);
+  const [afterSlot, setAfterSlot] = useState(kept.afterSlot);
+  const [lastKeptId, setLastKeptId] = useState<string | null>(null);
+
+  const roomId = view.wallBook.room.id;
+  const speech = speechIn(view.rules, habits.unit);
+  const isDrawn = view.wallBook.room.chains.length > 0;
+  if (!isDrawn || place.at === 'sketch') {
+    return (
+      <SketchScreen
+        view={view}
+        keptSketch={kept.sketch}
+        wallId={place.at === 'sketch' ? (place.wallId ?? null) : null}
+        habits={habits}
+        onHabits={changeHabits}
+      />
+    );
+  }
+  if (plan === null) return <Waiting />;
+
+  const goOn = (slot: string | null) => {
+    if (slot === null) return;
+    setAfterSlot(slot);
+    keepDraft(afterKey(roomId), slot);
+  };
+  const pad = (question: PadQuestion, { onward, back }: { onward: BookPlace; back: BookPlace }) => (
+    <ReadingPad
+      key={question.key}
+      question={question}
+      view={view}
+      habits={habits}
+      keptDraft={kept.draft}
+      picture={<QuestionPicture {...{ question, view, speech }} />}
+      toGo={toGoWords(plan)}
+      onHabits={changeHabits}
+      onKept={(reading, isAgain) => {
+        setLastKeptId(reading.id);
+        if (isAgain) return;
+        goOn(question.slot);
+        goTo(onward);
+      }}
+      onSkipped={() => {
+        goOn(question.slot);
+        goTo(onward);
+      }}
+      onBack={() => goTo(back)}
+    />
+  );
+  const feature = (
+    wallId: string,
+    options: { askedSlot?: string; askedKind?: 'water' | 'waste'; readingId?: string },
+  ) => {
+    const corrects = view.wallBook.readings.find(({ id }) => id === options.readingId);
+    return (
+      <FeaturePad
+        key={`${wallId}/${options.askedSlot ?? ''}/${options.readingId ?? ''}`}
+        wallId={wallId}
+        wallName={walkRoom(view.wallBook.room).byId.get(wallId)?.wall.name ?? '?'}
+        askedKind={options.askedKind ?? null}
+        corrects={corrects?.kind === 'feature' ? corrects : null}
+        keptDraft={kept.draft}
+        view={view}
+        habits={habits}
+        onHabits={changeHabits}
+        onKept={() => {
+          goOn(options.askedSlot ?? null);
+          goTo(options.askedSlot ? { at: 'next' } : { at: 'wall', wallId });
+        }}
+        onBack={() => goTo({ at: 'wall', wallId })}
+      />
+    );
+  };
+
+  const beforeThis: BookPlace =
+    lastKeptId === null ? { at: 'list' } : { at: 'correct', readingId: lastKeptId };
+  const next: BookPlace = { at: 'next' };
+  switch (place.at) {
+    case 'next':
+    case 'ask': {
+      const planned =
+        place.at === 'ask'
+          ? plan.find(({ slot }) => slot === place.slot)
+          : nextAsk(plan, afterSlot);
+      if (!planned) return <AllRead />;
+      const { ask, slot } = planned;
+      if (ask.kind === 'feature') {
+        return feature(ask.wallId, { askedSlot: slot, askedKind: ask.feature });
+      }
+      const question = questionOfPlan(planned);
+      return question ? pad(question, { onward: next, back: beforeThis }) : null;
+    }
+    case 'add': {
+      const { kind, wallId } = place;
+      const known = freeKinds.find((each) => each === kind);
+      const options = { counterMm: view.rules.counterTopMm, speech };
+      const question = known && freeQuestion(known, wallId, view.wallBook.room, options);
+      if (!question) return <AllRead />;
+      const back: BookPlace = wallId === '' ? { at: 'list' } : { at: 'wall', wallId };
+      return pad(question, { onward: back, back });
+    }
+    case 'again':
+    case 'correct':
+    case 'reading': {
+      const reading = view.wallBook.readings.find(({ id }) => id === place.readingId);
+      if (!reading) return <AllRead />;
+      if (place.at === 'again') {
+        const again = questionAgain(reading, view.wallBook.room, speech);
+        return again ? pad(again, { onward: { at: 'leave' }, back: { at: 'leave' } }) : <AllRead />;
+      }
+      const question = questionOfReading(reading, view.wallBook.room, speech);
+      if (place.at === 'correct' && question) {
+        return pad(question, { onward: next, back: { at: 'list' } });
+      }
+      return (
+        <ReadingDetail
+          key={reading.id}
+          {...{ reading, view, habits, speech }}
+          isHere={queue.some(({ id }) => id === reading.id)}
+          picture={question ? <QuestionPicture {...{ question, view, speech }} /> : null}
+          onBack={() => window.history.back()}
+        />
+      );
+    }
+    case 'wall':
+      return (
+        <WallList
+          {...{ view, plan, speech }}
+          wallId={place.wallId}
+          hereIds={new Set(queue.map(({ id }) => id))}
+          picture={<WallPicture {...{ view, speech }} wallId={place.wallId} />}
+        />
+      );
+    case 'feature':
+      return feature(place.wallId, { readingId: place.readingId });
+    case 'list':
+      return (
+        <WallsOverview
+          {...{ view, plan, speech }}
+          picture={<WallPicture {...{ view, speech }} wallId={null} />}
+        />
+      );
+    case 'leave':
+      return (
+        <Suspense fallback={<Waiting />}>
+          <LeaveScreen {...{ view, plan, queue }} />
+        </Suspense>
+      );
+  }
+}
+
+function Waiting() {
+  return (
+    <SkeletonScreen what="what is to be read">
+      <div className="flex flex-col gap-3 p-3.5">
+        <Skeleton className="h-44 w-full" />
+        <Skeleton className="h-6 w-3/4" />
+        <Skeleton className="h-12 w-1/2" />
+      </div>
+    </SkeletonScreen>
+  );
+}
+
+function AllRead() {
+  return (
+    <div className="p-3.5">
+      <EmptyState
+        title="Nothing more is asked for"
+        action={
+          <div className="flex w-full flex-col gap-2">
+            <LinkButton size="thumb" href={placeHref({ at: 'leave' })}>
+              Before you leave
+            </LinkButton>
+            <LinkButton size="thumb" look="line" href={placeHref({ at: 'list' })}>
+              The whole room
+            </LinkButton>
+          </div>
+        }
+      >
+        Look once at what holds together and what does not, then hand the book in.
+      </EmptyState>
+    </div>
+  );
+}

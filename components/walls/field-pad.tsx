@@ -1,0 +1,186 @@
+'use client';
+
+import type { ReactNode } from 'react';
+import type { LengthUnit } from '@/lib/units/brands';
+import type { PadDraft } from '@/lib/walls-pad/pad-draft';
+import { emptyEntry, type PadEntry, pressKey, pressTick } from '@/lib/walls-pad/pad-entry';
+import type { PadField } from '@/lib/walls-pad/pad-fields';
+import { nudged, tapeTicks } from '@/lib/walls-pad/tape-ticks';
+import { FractionWords } from './fraction-words';
+import { PadKeys } from './pad-keys';
+import { type PadSays, PadSaysBox } from './pad-says';
+import { PadValue } from './pad-value';
+import { TapeStrip } from './tape-strip';
+
+export type FieldPadProps = {
+  /** Fills what the keys leave. */
+  picture: ReactNode;
+  title: string;
+  detail: string;
+  fields: readonly PadField[];
+  draft: PadDraft;
+  onDraft: (draft: PadDraft) => void;
+  unit: LengthUnit;
+  onUnit: () => void;
+  stepMm: number;
+  says: PadSays;
+  /** Beside the chips: another way to take the same thing. */
+  otherWay?: { words: string; onPress: () => void };
+  /** Tool, what it touches, can't reach it … */
+  actions: PadAction[];
+  nextWords: string;
+  onNext: () => void;
+  isBusy: boolean;
+  onAgain: (() => void) | null;
+};
+export type PadAction = { key: string; label: string; value?: string; onPress: () => void };
+
+/** One question: the picture, what is asked, the figure, what it means, and the keys under the thumb. */
+export function FieldPad(props: FieldPadProps) {
+  const { draft, onDraft, fields, unit, stepMm } = props;
+  const field = fields.find(({ name }) => name === draft.active);
+  const entry = draft.entries[draft.active] ?? emptyEntry(unit);
+  const put = (next: PadEntry) =>
+    onDraft({ ...draft, entries: { ...draft.entries, [draft.active]: next } });
+  const cornerKey = field?.kind === 'projection' ? 'sign' : entry.unit === 'in' ? 'ft' : 'point';
+  const { nudge } = tapeTicks(stepMm);
+  return (
+    <div className="flex flex-1 flex-col">
+      <div className="relative min-h-24 flex-[2]">{props.picture}</div>
+      <div className="px-3.5">
+        <h1 className="text-lead leading-tight font-bold">{props.title}</h1>
+        <p className="text-note leading-snug text-graphite">
+          <FractionWords>{props.detail}</FractionWords>
+        </p>
+      </div>
+      {fields.length > 1 || props.otherWay ? <FieldChips {...props} /> : null}
+      <div className="flex min-h-14 items-center justify-between gap-2 px-3.5">
+        <output
+          aria-label={field?.label ?? 'value'}
+          className="text-reading font-bold tracking-tight"
+        >
+          <PadValue entry={entry} />
+        </output>
+        <span className="flex items-center gap-2">
+          {nudge !== null && entry.unit === 'in' ? (
+            <Nudges
+              nudge={nudge}
+              onNudge={(by) => put(pressTick(entry, nudged(entry.sixtyFourths, by)))}
+            />
+          ) : null}
+          <UnitButton entry={entry} onUnit={props.onUnit} />
+        </span>
+      </div>
+      <PadSaysBox says={props.says} />
+      <ActionRow actions={props.actions} />
+      {entry.unit === 'in' ? (
+        <TapeStrip
+          stepMm={stepMm}
+          sixtyFourths={entry.sixtyFourths}
+          onTick={(tick) => put(pressTick(entry, tick))}
+        />
+      ) : (
+        <div className="border-t border-ink" />
+      )}
+      <PadKeys
+        cornerKey={cornerKey}
+        onKey={(key) => put(pressKey(entry, key))}
+        nextWords={props.nextWords}
+        onNext={props.onNext}
+        isBusy={props.isBusy}
+        onAgain={props.onAgain}
+      />
+    </div>
+  );
+}
+
+function FieldChips({ fields, draft, onDraft, unit, otherWay }: FieldPadProps) {
+  return (
+    <div className="mx-3.5 mt-1 flex border border-rule">
+      {fields.length > 1
+        ? fields.map(({ name, label }) => {
+            const isActive = name === draft.active;
+            return (
+              <button
+                key={name}
+                type="button"
+                aria-pressed={isActive}
+                onClick={() => onDraft({ ...draft, active: name })}
+                className={`min-h-11 flex-1 touch-manipulation border-r border-b-4 border-r-rule px-1.5 text-left text-note leading-tight ${
+                  isActive ? 'border-b-pine bg-tint' : 'border-b-transparent'
+                }`}
+              >
+                <span className="block text-graphite">{label}</span>
+                <span className="font-bold">
+                  <PadValue entry={draft.entries[name] ?? emptyEntry(unit)} />
+                </span>
+              </button>
+            );
+          })
+        : null}
+      {otherWay ? (
+        <button
+          type="button"
+          onClick={otherWay.onPress}
+          className="min-h-11 touch-manipulation px-2.5 text-note text-pine underline underline-offset-4"
+        >
+          {otherWay.words}
+        </button>
+      ) : null}
+    </div>
+  );
+}
+
+function Nudges({ nudge, onNudge }: { nudge: number; onNudge: (by: number) => void }) {
+  const words = `1/${64 / nudge}`;
+  const look = 'min-h-12 min-w-12 touch-manipulation border border-rule px-2 text-note';
+  return (
+    <>
+      <button type="button" className={look} onClick={() => onNudge(-nudge)}>
+        −{words}
+      </button>
+      <button type="button" className={look} onClick={() => onNudge(nudge)}>
+        +{words}
+      </button>
+    </>
+  );
+}
+
+function UnitButton({ entry, onUnit }: { entry: PadEntry; onUnit: () => void }) {
+  if (entry.unit === 'deg') return null;
+  const other = entry.unit === 'in' ? 'millimetres' : 'inches';
+  return (
+    <button
+      type="button"
+      aria-label={`${entry.unit}; change to ${other}`}
+      onClick={onUnit}
+      className="min-h-12 min-w-12 touch-manipulation text-lead text-graphite underline decoration-dotted underline-offset-4"
+    >
+      {entry.unit}
+    </button>
+  );
+}
+
+function ActionRow({ actions }: { actions: PadAction[] }) {
+  return (
+    <div className="mt-1 flex divide-x divide-rule border-t border-rule">
+      {actions.map(({ key, label, value, onPress }) => (
+        <button
+          key={key}
+          type="button"
+          onClick={onPress}
+          className="min-h-12 min-w-0 flex-1 touch-manipulation truncate px-1 text-note leading-tight active:bg-tint"
+        >
+          {value === undefined ? (
+            label
+          ) : (
+            <>
+              <span className="block text-graphite">{label}</span>
+              <span className="block truncate font-medium">{value}</span>
+            </>
+          )}
+        </button>
+      ))}
+    </div>
+  );
+}

@@ -1,0 +1,46 @@
+import { useState } from 'react';
+import { keepDraft } from '@/components/phone/draft-store';
+import type { ReadingOf, Touches } from '@/lib/contracts/wall-book';
+import type { LengthUnit } from '@/lib/units/brands';
+import type { CornerMethod } from '@/lib/walls-pad/pad-fields';
+import type { ToolUse } from '@/lib/walls-pad/pad-tools';
+
+export type SetUp = { setUpId: string; setUpKind: ReadingOf<'face'>['setUpKind'] };
+
+/** What the measurer chose last, so that it need not be chosen again; kept on this phone. */
+export type PadHabits = {
+  unit: LengthUnit;
+  touches: Touches;
+  toolIds: Partial<Record<ToolUse, string>>;
+  cornerMethod: CornerMethod;
+  studAt: ReadingOf<'stud'>['at'];
+  doorwayName: string;
+  /** Set-ups begun on this phone, by room and group. */
+  setUps: Record<string, SetUp>;
+};
+
+export const habitsKey = 'habits';
+
+export function freshHabits(unit: LengthUnit): PadHabits {
+  return {
+    unit,
+    touches: 'board',
+    toolIds: {},
+    cornerMethod: 'legs',
+    studAt: 'centre',
+    doorwayName: 'Front door',
+    setUps: {},
+  };
+}
+
+export function useHabits(kept: PadHabits): [PadHabits, (change: Partial<PadHabits>) => void] {
+  const [habits, setHabits] = useState(kept);
+  const change = (part: Partial<PadHabits>) => {
+    const next = { ...habits, ...part };
+    setHabits(next);
+    keepDraft(habitsKey, next);
+  };
+  return [habits, change];
+}
+
+export const setUpKey = (roomId: string, group: string): string => `${roomId}/${group}`;

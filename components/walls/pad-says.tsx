@@ -1,0 +1,47 @@
+import type { ReactNode } from 'react';
+import { Verdict, type VerdictKind } from '@/components/ui/verdict';
+import type { PadVerdict } from '@/lib/walls-pad/pad-verdict';
+import { FractionWords } from './fraction-words';
+
+export type PadSays =
+  /** It cannot be: what to do. */
+  | { kind: 'refused'; words: string }
+  | PadVerdict
+  /** Nothing typed yet: why it is asked for. */
+  | { kind: 'why'; words: string };
+
+const edges: Record<PadSays['kind'], string> = {
+  refused: 'border-chalk',
+  over: 'border-chalk',
+  close: 'border-ochre',
+  within: 'border-moss',
+  note: 'border-rule',
+  why: 'border-rule',
+};
+const marks: Partial<Record<PadSays['kind'], { kind: VerdictKind; word?: string }>> = {
+  refused: { kind: 'problem', word: 'not kept' },
+  over: { kind: 'over' },
+  close: { kind: 'close' },
+  within: { kind: 'within' },
+};
+
+/** What the value means, at once, in a place that keeps its height so that no key moves under the thumb. */
+export function PadSaysBox({ says, children }: { says: PadSays; children?: ReactNode }) {
+  const mark = marks[says.kind];
+  return (
+    <div
+      role="status"
+      className={`mx-3.5 mt-1 flex min-h-[3.7rem] items-center border-l-4 bg-tint px-2.5 py-1 text-note leading-[1.3] ${edges[says.kind]}`}
+    >
+      <p>
+        {mark ? (
+          <Verdict kind={mark.kind} className="mr-1.5 font-bold">
+            {mark.word}
+          </Verdict>
+        ) : null}
+        <FractionWords>{says.words}</FractionWords>
+        {children}
+      </p>
+    </div>
+  );
+}

@@ -1,0 +1,57 @@
+import type { ReadingOf, Touches } from '@/lib/contracts/wall-book';
+import type { Choice } from './choice-sheet';
+
+export const touchesChoices: Choice<Touches>[] = [
+  { value: 'board', words: 'Board' },
+  { value: 'plaster', words: 'Plaster' },
+  { value: 'tile', words: 'Tile' },
+  { value: 'bare-stud', words: 'Bare stud', hint: 'the board to come is added' },
+  { value: 'skirting', words: 'Skirting' },
+  { value: 'casing', words: 'Casing' },
+  { value: 'existing-cabinet', words: 'A cabinet that stands already' },
+];
+
+export const touchesWord = (touches: Touches): string =>
+  touchesChoices.find(({ value }) => value === touches)?.words.replace(/ that.*/, '') ?? touches;
+
+export const skipReasons: Choice<string>[] = [
+  'Something stands in the way',
+  'Not built yet',
+  'No safe way to reach it',
+  'The customer asked us not to',
+  'The tool for it is not here',
+  'Not needed: no cabinet comes here',
+].map((words) => ({ value: words, words }));
+
+export const withdrawReasons: Choice<string>[] = [
+  'Misread',
+  'Wrong wall or place',
+  'Typed wrong',
+  'The tool slipped or was knocked',
+  'Taken twice by mistake',
+].map((words) => ({ value: words, words }));
+
+type SetUpKind = ReadingOf<'face'>['setUpKind'];
+export const faceSetUps: Choice<SetUpKind>[] = [
+  { value: 'plumb-level', words: 'Level held plumb', hint: 'straight and plumb' },
+  { value: 'laser-plane', words: 'Upright laser line', hint: 'straight and plumb, the whole wall' },
+  { value: 'straightedge', words: 'Straightedge', hint: 'straight only, not plumb' },
+];
+
+export const setUpWord = (kind: SetUpKind): string =>
+  faceSetUps.find(({ value }) => value === kind)?.words ?? kind;
+
+export const studSides: Choice<ReadingOf<'stud'>['at']>[] = [
+  { value: 'centre', words: 'Its centre' },
+  { value: 'left-edge', words: 'Its left edge' },
+  { value: 'right-edge', words: 'Its right edge' },
+];
+
+export const doorwayNames: Choice<string>[] = [
+  'Front door',
+  'Back door',
+  'Hall',
+  'Door of the room',
+  'Stairs',
+  'Lift',
+].map((words) => ({ value: words, words }));

@@ -1,0 +1,40 @@
+import type { Room } from '@/lib/contracts/wall-book';
+import { closeSketch } from '@/lib/walls-pad/close-sketch';
+import { namedWalls } from '@/lib/walls-pad/name-walls';
+import type { Chains } from '@/lib/walls-pad/room-shapes';
+
+/** A room half drawn; plain JSON, kept at every touch. */
+export type SketchDraft = {
+  step: 'shape' | 'walls' | 'site';
+  chains: Chains;
+  /** Walls whose length was typed: the others give way when a closed room must close. */
+  typedWallIds: string[];
+  name: string;
+  wallThicknessToComeMm: number;
+  floorToComeMm: number;
+};
+
+export const sketchKey = (roomId: string): string => `sketch:${roomId}`;
+
+export function startSketch(room: Room): SketchDraft {
+  const { chains, name, wallThicknessToComeMm, floorToComeMm } = room;
+  const walls = chains.flatMap((chain) => chain.walls);
+  return {
+    step: walls.length > 0 ? 'walls' : 'shape',
+    chains,
+    typedWallIds: walls.map(({ id }) => id),
+    name: name || 'Kitchen',
+    wallThicknessToComeMm,
+    floorToComeMm,
+  };
+}
+
+/** Names and closes what was changed; walls with readings keep their names. */
+export function withChains(
+  draft: SketchDraft,
+  chains: Chains,
+  keptWallIds: ReadonlySet<string>,
+): SketchDraft {
+  const closed = closeSketch(chains, new Set([...draft.typedWallIds, ...keptWallIds]));
+  return { ...draft, chains: namedWalls(closed, keptWallIds) };
+}

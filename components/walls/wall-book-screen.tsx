@@ -1,0 +1,59 @@
+'use client';
+
+import { useEffect, useState } from 'react';
+import { readRoom, rememberRoom } from '@/components/phone/room-store';
+import { useLive } from '@/components/phone/use-live';
+import { ErrorState } from '@/components/ui/error-state';
+import { Skeleton, SkeletonScreen } from '@/components/ui/skeleton';
+import type { WallBookView } from '@/lib/contracts/rooms';
+import { BookScreens } from './book-screens';
+import { type KeptOnPhone, readKept } from './kept-on-phone';
+
+/** The wall book on the phone: the office's last word, and over it everything that is kept here. */
+export function WallBookScreen({ view }: { view: WallBookView }) {
+  const roomId = view.wallBook.room.id;
+  const [kept, setKept] = useState<KeptOnPhone | null>(null);
+  const [isBroken, setIsBroken] = useState(false);
+  const live = useLive(`room:${roomId}`, () => readRoom(roomId));
+
+  useEffect(() => {
+    let isShown = true;
+    Promise.all([readKept(view), rememberRoom(view)])
+      .then(([read]) => isShown && setKept(read))
+      .catch(() => isShown && setIsBroken(true));
+    return () => {
+      isShown = false;
+    };
+  }, [view]);
+
+  if (isBroken || live.state === 'failed') return <NothingKept />;
+  if (live.state === 'reading' || live.value === null || kept === null) return <Opening />;
+  return <BookScreens key={roomId} room={live.value} kept={kept} />;
+}
+
+function Opening() {
+  return (
+    <SkeletonScreen what="the wall book">
+      <div className="flex flex-col gap-3 p-3.5">
+        <Skeleton className="h-44 w-full" />
+        <Skeleton className="h-6 w-3/4" />
+        <Skeleton className="h-12 w-1/2" />
+        <Skeleton className="h-64 w-full" />
+      </div>
+    </SkeletonScreen>
+  );
+}
+
+/** Without a store a reading would live in the page alone, and be lost with it: so none is taken. */
+function NothingKept() {
+  return (
+    <div className="p-3.5">
+      <ErrorState title="This browser keeps nothing">
+        <p>
+          Readings would be lost when the page is closed, so none are taken here. Leave the private
+          window, free some space, or use another browser.
+        </p>
+      </ErrorState>
+    </div>
+  );
+}
