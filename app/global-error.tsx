@@ -1,12 +1,11 @@
 'use client';
 
-import './globals.css';
+import type { PageErrorProps } from '@/components/shell/page-error';
 import ErrorPage from './error';
-
-type GlobalErrorProps = { error: Error & { digest?: string }; reset: () => void };
+import './globals.css';
 
 /** Stands in for the whole document when even its frame failed. */
-export default function GlobalError(props: GlobalErrorProps) {
+export default function GlobalError(props: PageErrorProps) {
   return (
     <html lang="en">
       <body>

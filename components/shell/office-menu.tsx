@@ -8,15 +8,17 @@ import { currentOfficePage } from './office-pages';
 export function OfficeMenu({ children }: { children: ReactNode }) {
   const pathname = usePathname();
   return (
-    <details key={pathname} className="group border-b border-ink bg-paper md:hidden print:hidden">
-      <summary className="flex min-h-thumb list-none items-center justify-between px-4 font-bold [&::-webkit-details-marker]:hidden">
-        {currentOfficePage(pathname)?.word ?? 'Setwell'}
-        <span className="font-medium text-pine">
-          <span className="group-open:hidden">Menu</span>
-          <span className="hidden group-open:inline">Close</span>
-        </span>
-      </summary>
-      <div className="border-t border-rule px-4 py-3">{children}</div>
-    </details>
+    <header className="border-b border-ink bg-paper md:hidden print:hidden">
+      <details key={pathname} className="group">
+        <summary className="flex min-h-thumb list-none items-center justify-between px-4 font-bold [&::-webkit-details-marker]:hidden">
+          {currentOfficePage(pathname)?.word ?? 'Setwell'}
+          <span className="font-medium text-pine">
+            <span className="group-open:hidden">Menu</span>
+            <span className="hidden group-open:inline">Close</span>
+          </span>
+        </summary>
+        <div className="border-t border-rule px-4 py-3">{children}</div>
+      </details>
+    </header>
   );
 }

@@ -44,7 +44,7 @@ export function OfficeShell({ shop, shops = [], person, counts = {}, children }:
         <nav aria-label="Pages">{links}</nav>
         <div className="mt-4 border-t border-rule pt-3">{foot}</div>
       </OfficeMenu>
-      <div className="sticky top-0 flex h-dvh flex-col gap-6 overflow-y-auto border-r border-rule py-5 pl-5 max-md:hidden print:hidden">
+      <header className="sticky top-0 flex h-dvh flex-col gap-6 overflow-y-auto border-r border-rule py-5 pl-5 max-md:hidden print:hidden">
         <Wordmark />
         <nav aria-label="Pages" className="-mr-px">
           {links}
@@ -53,7 +53,7 @@ export function OfficeShell({ shop, shops = [], person, counts = {}, children }:
           <ListButtons />
         </div>
         <div className="mt-auto">{foot}</div>
-      </div>
+      </header>
       <main id="main" tabIndex={-1} className="min-w-0 px-4 py-4 outline-none md:px-6">
         {children}
       </main>

@@ -16,9 +16,9 @@ type PhoneShellProps = {
 export function PhoneShell({ where, status, tabs, children }: PhoneShellProps) {
   return (
     <div className="in-sun mx-auto flex min-h-dvh max-w-phone flex-col bg-sheet text-body">
-      <div className="sticky top-0 z-10 pt-[env(safe-area-inset-top)]">
+      <header className="sticky top-0 z-10 pt-[env(safe-area-inset-top)]">
         <Strip status={status}>{where}</Strip>
-      </div>
+      </header>
       <main className="flex flex-1 flex-col">{children}</main>
       {tabs ? <PhoneTabs tabs={tabs} /> : null}
     </div>
