@@ -60,26 +60,26 @@ export function kickHeights(input: KickInput): Outcome<KickHeights> {
   const runs = input.runs.map((run) => {
     const dropAt = levelSurface(run.drops);
     const tilt = levelTilt(input.uLevel);
-    const finishedDrop = (xMm: number, yMm: number) => {
+    const finishedDrop = oncePerPlace((xMm, yMm) => {
       const found = dropAt(xMm, yMm);
       const c = combine([
         [1, found.c],
         [-1, toCome],
       ]);
       return { c: tilted(c, xMm, yMm, tilt), extrapolated: found.extrapolated };
-    };
-    return { run, finishedDrop };
+    });
+    return { run, finishedDrop, under: placesUnder(run) };
   });
-  const under = runs.flatMap(({ run, finishedDrop }) =>
-    placesUnder(run).map(({ xMm, yMm }) => ({
+  const drops = runs.flatMap(({ run, finishedDrop, under }) =>
+    under.map(({ xMm, yMm }) => ({
       runId: run.runId,
       xMm,
       yMm,
       c: finishedDrop(xMm, yMm).c,
     })),
   );
-  const high = under.reduce((best, place) => (place.c.value < best.c.value ? place : best));
-  const low = under.reduce((best, place) => (place.c.value > best.c.value ? place : best));
+  const high = drops.reduce((best, place) => (place.c.value < best.c.value ? place : best));
+  const low = drops.reduce((best, place) => (place.c.value > best.c.value ? place : best));
   const datum = input.fixedDatumDrop === null ? high.c : figureCombination(input.fixedDatumDrop);
   const kickAt = ({ c }: { c: Combination }) => {
     const drop = combine([
@@ -89,11 +89,17 @@ export function kickHeights(input: KickInput): Outcome<KickHeights> {
     ]);
     return { ...drop, value: drop.value + nominalKickMm };
   };
-  const kicks = runs.map(({ run, finishedDrop }) =>
-    describeKick(run, input, (xMm, yMm) => {
-      const drop = finishedDrop(xMm, yMm);
-      return { xMm, yMm, height: combinationFigure(kickAt(drop)), extrapolated: drop.extrapolated };
-    }),
+  const kicks = runs.map(({ run, finishedDrop, under }) =>
+    describeKick(
+      run,
+      under,
+      input,
+      oncePerPlace((xMm, yMm) => {
+        const drop = finishedDrop(xMm, yMm);
+        const height = combinationFigure(kickAt(drop));
+        return { xMm, yMm, height, extrapolated: drop.extrapolated };
+      }),
+    ),
   );
   const fall = combinationFigure(
     combine([
@@ -112,6 +118,18 @@ export function kickHeights(input: KickInput): Outcome<KickHeights> {
     words: standingWords(input),
   };
   return { value, problems: kicks.flatMap(kickWarnings) };
+}
+
+/** Neighbouring units share corners, and every figure asks for the same places again. */
+function oncePerPlace<T>(of: (xMm: number, yMm: number) => T): (xMm: number, yMm: number) => T {
+  const known = new Map<number, Map<number, T>>();
+  return (xMm, yMm) => {
+    const column = known.get(xMm) ?? new Map<number, T>();
+    known.set(xMm, column);
+    const value = column.get(yMm) ?? of(xMm, yMm);
+    column.set(yMm, value);
+    return value;
+  };
 }
 
 function standingWords({ floorToCome, standsOn }: KickInput): string {

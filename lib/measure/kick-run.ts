@@ -48,26 +48,28 @@ export type RunKick = {
   faces: KickFace[];
 };
 
+export type Place = { xMm: number; yMm: number };
+
 /** A reading this far outside a footprint still says how the floor is under it. */
 const BESIDE_MM = 50;
 
-type Place = { xMm: number; yMm: number };
 type KickAt = (xMm: number, yMm: number) => KickPlace;
 
 /** Where the floor under a run can be highest or lowest: its readings, its corners, its units' corners. */
 export function placesUnder({ drops, footprint, units }: KickRun): Place[] {
   const readings = drops.filter(({ xMm, yMm }) => isUnder(footprint, xMm, yMm));
   const corners = [footprint, ...units.map((unit) => unit.footprint)].flatMap(cornersOf);
-  return [...readings, ...corners];
+  return [...readings, ...corners].map(({ xMm, yMm }) => ({ xMm, yMm }));
 }
 
-/** Kick heights of one run, from the height at any place. */
+/** Kick heights of one run, from the height at any place; `under`: its `placesUnder`. */
 export function describeKick(
   run: KickRun,
+  under: Place[],
   rules: { legs: { minMm: number; maxMm: number }; scribe: ScribeRules },
   kickAt: KickAt,
 ): RunKick {
-  const kicks = placesUnder(run).map(({ xMm, yMm }) => kickAt(xMm, yMm));
+  const kicks = under.map(({ xMm, yMm }) => kickAt(xMm, yMm));
   const corners = run.units.flatMap(({ unitId, footprint }) =>
     cornersOf(footprint).map(({ corner, xMm, yMm }) => {
       const kick = kickAt(xMm, yMm);
@@ -79,12 +81,13 @@ export function describeKick(
     least: kicks.reduce((best, kick) => (kick.height.value < best.height.value ? kick : best)),
     greatest: kicks.reduce((best, kick) => (kick.height.value > best.height.value ? kick : best)),
     corners,
-    faces: run.faces.flatMap((face) => faceOf(run, face, rules.scribe, kickAt) ?? []),
+    faces: run.faces.flatMap((face) => faceOf(run, under, face, rules.scribe, kickAt) ?? []),
   };
 }
 
 function faceOf(
   run: KickRun,
+  under: Place[],
   { side, atMm }: { side: FaceSide; atMm: number },
   scribe: ScribeRules,
   kickAt: KickAt,
@@ -93,9 +96,7 @@ function faceOf(
   const { x0Mm, x1Mm, y0Mm, y1Mm } = run.footprint;
   const [from, to] = alongX ? [x0Mm, x1Mm] : [y0Mm, y1Mm];
   const along = ({ xMm, yMm }: Place) => (alongX ? xMm : yMm);
-  const inside = placesUnder(run)
-    .map(along)
-    .filter((at) => at > from && at < to);
+  const inside = under.map(along).filter((at) => at > from && at < to);
   const places = [...new Set([from, ...inside, to])].sort((a, b) => a - b);
   const kicks = places.map((at) => (alongX ? kickAt(at, atMm) : kickAt(atMm, at)));
   const { value } = scribeAllowance({
