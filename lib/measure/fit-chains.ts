@@ -1,55 +1,56 @@
 /** Each chain of walls walked as read: the picture of how it closes, before any adjustment. */
-import { type Figure, figure } from '@/lib/measure/figure';
+import { chordAngle } from '@/lib/measure/chord-angle';
+import { closeTraverse, type TraverseLeg } from '@/lib/measure/close-traverse';
+import { type CombinedCorner, cornerArms } from '@/lib/measure/combined-readings';
+import type { Figure } from '@/lib/measure/figure';
 import type { FitContext } from '@/lib/measure/fit-context';
 import { fitFigure } from '@/lib/measure/fit-figure';
 import { planHeight } from '@/lib/measure/plan-context';
+import type { Read } from '@/lib/measure/read';
 import type { ChainClosure } from '@/lib/measure/room-closure';
 import type { WalkedWall } from '@/lib/measure/room-walk';
-
-type Side = { wallId: string; length: Figure | null; lengthMm: number };
-type Turn = { angle: Figure | null; angleDeg: number };
+import { proudAt, type WallFaces } from '@/lib/measure/wall-faces';
 
 export function fitChains(context: FitContext): ChainClosure[] {
-  return context.book.room.chains.map((_, index) => {
-    const walls = context.walk.walls.filter(({ chain }) => chain === index);
-    return fitChain(context, walls);
-  });
+  return context.book.room.chains.map((_, index) =>
+    fitChain(
+      context,
+      context.walk.walls.filter(({ chain }) => chain === index),
+    ),
+  );
 }
 
+/** What is not read is walked as drawn, for the picture; then nothing is said of how it closes. */
 function fitChain(context: FitContext, walls: WalkedWall[]): ChainClosure {
-  const closed = walls[0]?.closed ?? false;
-  const sides = walls.map(({ wall }): Side => {
-    const length = lengthAtPlan(context, wall.id);
-    return { wallId: wall.id, length, lengthMm: length?.value ?? wall.nominalLengthMm };
+  const closed = walls.length > 2 && (walls[0]?.closed ?? false);
+  const legs = walls.map((walled): TraverseLeg & { isRead: boolean } => {
+    const length = lengthAtPlan(context, walled.wall.id);
+    const angle = angleAtPlan(context, walled);
+    const drawn = { value: Math.max(1, walled.wall.nominalLengthMm), u: 0, from: [] };
+    const drawnAngle = { value: walled.leftCornerDeg ?? 90, u: 0, from: [] };
+    return {
+      length: length ?? drawn,
+      leftAngle: walled.before ? (angle ?? drawnAngle) : null,
+      isRead: length !== null && (angle !== null || !walled.before),
+    };
   });
-  const turns = walls.map(({ wall, leftCornerDeg }): Turn => {
-    const angle = context.corners.find(({ cornerWallId }) => cornerWallId === wall.id)?.angle;
-    return { angle: angle ?? null, angleDeg: angle?.value ?? leftCornerDeg ?? 90 };
-  });
-  const base = {
+  const traverse = closeTraverse({ closed, legs }).value;
+  const isRead = legs.every((leg) => leg.isRead);
+  const anglesRead = walls.every((walled) => !walled.before || angleAtPlan(context, walled));
+  return {
     wallIds: walls.map(({ wall }) => wall.id),
     closed,
-    walk: walkSides(sides, turns, 0),
-  };
-  const allTurned = turns.every(({ angle }) => angle !== null);
-  const allRead = sides.every(({ length }) => length !== null);
-  if (!closed || !allTurned) {
-    return { ...base, angle: null, linear: null, relativePrecision: null, areaMm2: null };
-  }
-  const angle = angleMisclosure(turns);
-  if (!allRead) {
-    const misclosure = fitFigure('room-angle-misclosure', angle);
-    return { ...base, angle: misclosure, linear: null, relativePrecision: null, areaMm2: null };
-  }
-  const balanced = walkSides(sides, turns, angle.value / turns.length);
-  const linear = linearMisclosure(sides, turns, balanced);
-  const roundMm = sides.reduce((sum, { lengthMm }) => sum + lengthMm, 0);
-  return {
-    ...base,
-    angle: fitFigure('room-angle-misclosure', angle),
-    linear: fitFigure('room-linear-misclosure', linear),
-    relativePrecision: linear.value > 1e-6 ? roundMm / linear.value : null,
-    areaMm2: areaOf(balanced),
+    angle:
+      anglesRead && traverse?.angleMisclosure
+        ? fitFigure('room-angle-misclosure', traverse.angleMisclosure)
+        : null,
+    linear:
+      isRead && traverse?.linearMisclosure
+        ? fitFigure('room-linear-misclosure', traverse.linearMisclosure)
+        : null,
+    relativePrecision: isRead ? (traverse?.relativePrecision ?? null) : null,
+    areaMm2: isRead && traverse?.areaMm2 ? Math.abs(traverse.areaMm2) : null,
+    walk: traverse?.walk ?? [],
   };
 }
 
@@ -61,63 +62,38 @@ function lengthAtPlan(context: FitContext, wallId: string): Figure | null {
   return sorted[0]?.length ?? null;
 }
 
-/** Corners of the walk and its end; each angle is lessened by its share of the misclosure. */
-function walkSides(sides: Side[], turns: Turn[], shareDeg: number): { xMm: number; yMm: number }[] {
-  const walk = [{ xMm: 0, yMm: 0 }];
-  let heading = 0;
-  sides.forEach(({ lengthMm }, i) => {
-    if (i > 0) heading += ((180 - ((turns[i]?.angleDeg ?? 90) - shareDeg)) * Math.PI) / 180;
-    const last = walk[walk.length - 1] ?? { xMm: 0, yMm: 0 };
-    walk.push({
-      xMm: last.xMm + lengthMm * Math.cos(heading),
-      yMm: last.yMm + lengthMm * Math.sin(heading),
-    });
-  });
-  return walk;
+/** The first height read, carried from the leg marks to the straight walls. */
+function angleAtPlan(context: FitContext, { wall, before }: WalkedWall): Figure | null {
+  const corner = context.corners.find(({ cornerWallId }) => cornerWallId === wall.id);
+  return corner && before ? chordAngleOf(context, corner, before.id) : null;
 }
 
-function angleMisclosure(turns: Turn[]): Figure {
-  const sum = turns.reduce((total, { angleDeg }) => total + angleDeg, 0);
-  const u = Math.hypot(...turns.map(({ angle }) => angle?.u ?? 0));
-  const from = turns.flatMap(({ angle }) => angle?.from ?? []);
-  return figure(sum - (turns.length - 2) * 180, u, from);
-}
-
-/** How far the balanced walk ends from where it began; u along the gap, by the partial derivatives. */
-function linearMisclosure(
-  sides: Side[],
-  turns: Turn[],
-  walk: { xMm: number; yMm: number }[],
+/** A corner as read, carried to the straight lines corner to corner. */
+export function chordAngleOf(
+  context: FitContext,
+  corner: CombinedCorner,
+  beforeWallId: string,
 ): Figure {
-  const end = walk[walk.length - 1] ?? { xMm: 0, yMm: 0 };
-  const gapMm = Math.hypot(end.xMm, end.yMm);
-  const [ux, uy] = gapMm > 0 ? [end.xMm / gapMm, end.yMm / gapMm] : [1, 0];
-  const n = turns.length;
-  // An angle turns everything after it; balancing takes its nth part off every angle.
-  const swing = walk.map((corner) => -ux * (end.yMm - corner.yMm) + uy * (end.xMm - corner.xMm));
-  const swings = turns.map((_, i) => (i > 0 ? (swing[i] ?? 0) : 0));
-  const mean = swings.reduce((sum, value) => sum + value, 0) / n;
-  const parts = sides.map(({ length }, i) => {
-    const from = walk[i] ?? { xMm: 0, yMm: 0 };
-    const to = walk[i + 1] ?? from;
-    const along = Math.hypot(to.xMm - from.xMm, to.yMm - from.yMm) || 1;
-    return (((to.xMm - from.xMm) * ux + (to.yMm - from.yMm) * uy) / along) * (length?.u ?? 0);
+  const reading = corner.repeats[0]?.reading;
+  const left = context.faces.get(beforeWallId);
+  const right = context.faces.get(corner.cornerWallId);
+  if (!reading || !left || !right) return corner.angle;
+  const arms = cornerArms(reading);
+  const { usualBowMm } = context.rules;
+  const isCarried = reading.by.method === 'legs' && reading.by.carriedPast;
+  const arm = (faces: WallFaces, armMm: number, proud: Read | null) => ({
+    armMm,
+    proud,
+    wallLengthMm: faces.lengthMm,
+    usualBowMm,
   });
-  const bent = turns.map(
-    ({ angle }, i) => ((swings[i] ?? 0) - mean) * ((angle?.u ?? 0) * (Math.PI / 180)),
-  );
-  const ids = [
-    ...sides.flatMap(({ length }) => length?.from ?? []),
-    ...turns.flatMap(({ angle }) => angle?.from ?? []),
-  ];
-  return figure(gapMm, Math.hypot(...parts, ...bent), [...new Set(ids)]);
+  return chordAngle(corner.angle, {
+    left: arm(left, arms.leftMm, isCarried ? null : proudRead(left, left.lengthMm - arms.leftMm)),
+    right: arm(right, arms.rightMm, proudRead(right, arms.rightMm)),
+  });
 }
 
-function areaOf(walk: { xMm: number; yMm: number }[]): number {
-  const corners = walk.slice(0, -1);
-  const twice = corners.reduce((sum, here, i) => {
-    const next = corners[(i + 1) % corners.length] ?? here;
-    return sum + here.xMm * next.yMm - next.xMm * here.yMm;
-  }, 0);
-  return Math.abs(twice) / 2;
+function proudRead(faces: WallFaces, xMm: number): Read | null {
+  const proud = proudAt(faces, xMm);
+  return proud && { id: proud.id, value: proud.valueMm, u: proud.uMm };
 }

@@ -3,10 +3,12 @@
 import type { CombinedCorner } from '@/lib/measure/combined-readings';
 import { cornerOffset } from '@/lib/measure/corner';
 import { cornerDeviation, cornerTwist } from '@/lib/measure/corner-deviation';
-import { type Figure, figure } from '@/lib/measure/figure';
+import type { Figure } from '@/lib/measure/figure';
 import type { CornerFit } from '@/lib/measure/fit';
+import { chordAngleOf } from '@/lib/measure/fit-chains';
 import { type FitContext, SURE_ANGLE_U_DEG } from '@/lib/measure/fit-context';
 import { fitFigure } from '@/lib/measure/fit-figure';
+import { halfMitre } from '@/lib/measure/mitre';
 import { cornerName, frontDepth, type WalkedWall } from '@/lib/measure/room-walk';
 
 export function fitCorners(context: FitContext): CornerFit[] {
@@ -18,9 +20,11 @@ function fitCorner(context: FitContext, walked: WalkedWall): CornerFit | null {
   if (!before || leftCornerDeg === null) return null;
   const read = context.corners.filter(({ cornerWallId }) => cornerWallId === wall.id);
   const adjusted = context.frames.get(wall.id)?.left?.angle ?? null;
-  const angle = adjusted && adjusted.u <= SURE_ANGLE_U_DEG ? adjusted : readAngle(read);
+  const angle =
+    adjusted && adjusted.u <= SURE_ANGLE_U_DEG ? adjusted : readAngle(context, read, before.id);
   const deviation = angle ? cornerDeviation(angle, leftCornerDeg) : null;
   const twist = cornerTwist(read.map((corner) => corner.angle));
+  const mitre = angle ? halfMitre(angle).value : null;
   const depthMm = deepestAt(context, walked);
   const offset = angle ? cornerOffset(angle, depthMm).value : null;
   return {
@@ -37,19 +41,19 @@ function fitCorner(context: FitContext, walked: WalkedWall): CornerFit | null {
     trueWithinReading: deviation?.lies === 'true-within-the-reading',
     twist: twist && fitFigure('corner-twist', twist),
     offset: offset && { depthMm, figure: fitFigure('corner-offset', offset) },
-    saw: angle && fitFigure('saw-angle', sawAngle(angle)),
+    saw: mitre && fitFigure('saw-angle', mitre.saw),
     verdicts: [],
   };
 }
 
-/** Only read, while the room cannot be laid out yet: the first height. */
-function readAngle(read: CombinedCorner[]): Figure | null {
-  return read[0]?.angle ?? null;
-}
-
-/** Each piece of a kick or panel is cut at θ/2; a saw's scale counts from square. */
-function sawAngle(angle: Figure): Figure {
-  return figure(Math.abs(90 - angle.value / 2), angle.u / 2, angle.from);
+/** Only read, while the room cannot be laid out yet: the first height, carried to the straight walls. */
+function readAngle(
+  context: FitContext,
+  read: CombinedCorner[],
+  beforeWallId: string,
+): Figure | null {
+  const first = read[0];
+  return first ? chordAngleOf(context, first, beforeWallId) : null;
 }
 
 /** The deepest run that stands at the corner, or the depth the shop judges corners over. */

@@ -55,6 +55,8 @@ export type Verdict = {
   verdict: Share;
   /** The figure's own U spans the limit. */
   inDoubt: boolean;
+  /** Past the rule's second level as well. */
+  serious: boolean;
   value: FitFigure;
   limitMm: number;
   /** The length over which the limit holds; 0 where it holds for any. */
@@ -64,6 +66,8 @@ export type Verdict = {
   source: string;
   edition: string;
   clause: string;
+  /** Where the source was read; empty for common practice. */
+  address: string;
   /** What the shop does about it. */
   action: string;
 };

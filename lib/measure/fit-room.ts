@@ -1,19 +1,35 @@
 /** The whole fit of a room for its runs. */
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Run, WallBook } from '@/lib/contracts/wall-book';
+import { ruleFor } from '@/lib/measure/check-rule';
 import { ENGINE_VERSION } from '@/lib/measure/engine-version';
-import type { Fit } from '@/lib/measure/fit';
-import { fitCeiling } from '@/lib/measure/fit-ceiling';
+import { finishRun } from '@/lib/measure/finish-run';
+import type { CornerFit, Fit, FloorFit } from '@/lib/measure/fit';
+import { fitAisles } from '@/lib/measure/fit-aisles';
 import { fitClosure } from '@/lib/measure/fit-closure';
-import { fitContext } from '@/lib/measure/fit-context';
+import { type FitContext, fitContext } from '@/lib/measure/fit-context';
 import { fitCorners } from '@/lib/measure/fit-corners';
 import { fitFloor } from '@/lib/measure/fit-floor';
 import { fitKicks, type StandingRun } from '@/lib/measure/fit-kicks';
-import { describeRun, type WorkedRun, workRuns } from '@/lib/measure/fit-runs';
+import { type WorkedRun, workRuns } from '@/lib/measure/fit-runs';
+import { fitCollisions } from '@/lib/measure/fit-studs';
+import {
+  cornerVerdicts,
+  floorVerdicts,
+  type Judge,
+  judgeBy,
+  straightedgeOf,
+  wallVerdicts,
+  worstFirst,
+} from '@/lib/measure/fit-verdicts';
 import { fitWalls } from '@/lib/measure/fit-walls';
+import { fitWayIn } from '@/lib/measure/fit-way-in';
 import { extraInstallMinutes } from '@/lib/measure/install-minutes';
 import { oneLevelLine } from '@/lib/measure/level-line';
+import { planPlace } from '@/lib/measure/plan-place';
 import { roundFit } from '@/lib/measure/round-fit';
+import type { RuleSet } from '@/lib/measure/rules/rule-set';
+import { ruleSetsOf } from '@/lib/measure/rules/rule-sets';
 import type { Problem } from '@/lib/problem';
 
 /**
@@ -28,43 +44,71 @@ import type { Problem } from '@/lib/problem';
  */
 export function fitRoom(wallBook: WallBook, runs: Run[], rules: FitRules): Fit {
   const context = fitContext(wallBook, runs, rules);
-  const corners = fitCorners(context);
-  const { walls, problems: wallProblems } = fitWalls(context);
+  const ruleSets = ruleSetsOf(rules);
+  const judge = judgeBy(context, ruleSets);
   const level = oneLevelLine(context.book);
+  const corners = judgedCorners(context, judge);
+  const walls = judgedWalls(context, judge, ruleSets);
+  const floor = judgedFloor(context, judge, fitFloor(level));
   const worked = workRuns(context);
   const kicks = fitKicks(context, level, worked.runs.flatMap(standing));
-  const described = worked.runs.map((work) => {
-    const { runFit, problems } = describeRun(context, work);
-    const ceiling = fitCeiling(context, level, work, kicks.datumOf(work.run));
-    return {
-      runFit: { ...runFit, kicks: kicks.kicks.get(work.run.id) ?? null, ceiling: ceiling.ceiling },
-      problems: [...problems, ...ceiling.problems],
-    };
-  });
-  const runFits = described.map(({ runFit }) => runFit);
+  const aisles = fitAisles(context, worked.runs);
+  const fitted = worked.runs.map((work) =>
+    finishRun({ context, level, kicks, aisles, floor, judge }, work),
+  );
+  const runFits = fitted.map(({ runFit }) => runFit);
   const fit: Fit = {
     engineVersion: ENGINE_VERSION,
     roomId: wallBook.room.id,
     corners,
-    walls,
-    floor: fitFloor(level),
+    walls: walls.walls,
+    floor,
     runs: runFits,
-    collisions: [],
-    wayIn: [],
+    collisions: worked.runs.flatMap((work) => fitCollisions(context, work)),
+    wayIn: fitWayIn(context),
     closure: fitClosure(context),
-    verdicts: [],
+    verdicts: worstFirst(
+      [...corners, ...walls.walls, ...(floor ? [floor] : []), ...runFits].flatMap(
+        ({ verdicts }) => verdicts,
+      ),
+    ),
     problems: onceEach([
       ...context.problems,
-      ...wallProblems,
+      ...walls.problems,
       ...level.problems,
       ...worked.problems,
       ...kicks.problems,
-      ...described.flatMap(({ problems }) => problems),
+      ...fitted.flatMap(({ problems }) => problems),
     ]),
     readingIds: context.book.readings.map(({ id }) => id),
-    extraInstallMinutes: extraInstallMinutes(runFits, walls),
+    extraInstallMinutes: extraInstallMinutes(runFits, walls.walls),
   };
   return roundFit(fit);
+}
+
+function judgedCorners(context: FitContext, judge: Judge): CornerFit[] {
+  return fitCorners(context).map((corner) => {
+    const depthMm = corner.offset?.depthMm ?? context.rules.cornerFlagOverMm;
+    return { ...corner, verdicts: cornerVerdicts(judge, corner, depthMm) };
+  });
+}
+
+function judgedWalls(context: FitContext, judge: Judge, ruleSets: readonly RuleSet[]) {
+  const { walls, problems } = fitWalls(context, straightedgeOf(ruleSets));
+  const isOverEdge = ruleFor(ruleSets, 'wall-straightness')?.rule.overMm !== null;
+  const judged = walls.map((wall) => ({
+    ...wall,
+    verdicts: wallVerdicts(judge, wall, isOverEdge),
+  }));
+  return { walls: judged, problems };
+}
+
+function judgedFloor(context: FitContext, judge: Judge, floor: FloorFit | null): FloorFit | null {
+  if (!floor) return null;
+  const places = [floor.highPoint, floor.lowPoint].map((point) => planPlace(context, point));
+  const [high, low] = places;
+  const spanMm = high && low ? Math.hypot(high.xMm - low.xMm, high.yMm - low.yMm) : 0;
+  return { ...floor, verdicts: floorVerdicts(judge, floor, spanMm) };
 }
 
 function standing({ run, plane, bandMm, filled }: WorkedRun): StandingRun[] {

@@ -135,6 +135,8 @@ export function describeRun(
     scribes: scribes.scribes,
     kicks: null,
     ceiling: null,
+    upperGap: null,
+    aisle: null,
     verdicts: [],
   };
   return { runFit, problems: [...left.problems, ...right.problems, ...scribes.problems] };

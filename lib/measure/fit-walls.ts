@@ -10,18 +10,26 @@ import type { FaceRow, WallFaces } from '@/lib/measure/wall-faces';
 import type { PlumbColumn } from '@/lib/measure/wall-lean';
 import type { Problem } from '@/lib/problem';
 
-/** The straightedge common rule sets lay on a wall. */
-const STRAIGHTEDGE_MM = 2_000;
 /** A plane is laid through three readings; a fourth shows whether it is flat. */
 const FEWEST_FOR_FLATNESS = 4;
 
-export function fitWalls(context: FitContext): { walls: WallFit[]; problems: Problem[] } {
+export function fitWalls(
+  context: FitContext,
+  straightedgeMm: number,
+): { walls: WallFit[]; problems: Problem[] } {
   const problems: Problem[] = [];
-  const walls = context.walk.walls.map((walked) => fitWall(context, walked, problems));
+  const walls = context.walk.walls.map((walked) =>
+    fitWall(context, walked, straightedgeMm, problems),
+  );
   return { walls, problems };
 }
 
-function fitWall(context: FitContext, { wall }: WalkedWall, problems: Problem[]): WallFit {
+function fitWall(
+  context: FitContext,
+  { wall }: WalkedWall,
+  straightedgeMm: number,
+  problems: Problem[],
+): WallFit {
   const faces = context.faces.get(wall.id);
   const frame = context.frames.get(wall.id);
   const isSure = frame !== undefined && frame.length.u <= SURE_LENGTH_U_MM;
@@ -38,19 +46,19 @@ function fitWall(context: FitContext, { wall }: WalkedWall, problems: Problem[])
       })),
     length: isSure ? fitFigure('wall-length', frame.length) : null,
     zRefMm: frame?.zRefMm ?? 0,
-    rows: rows.flatMap((row) => fitRow(row, problems) ?? []),
+    rows: rows.flatMap((row) => fitRow(row, straightedgeMm, problems) ?? []),
     columns: (context.columns.get(wall.id) ?? []).map(fitColumn),
     flatness: faces ? flatness(faces, problems) : null,
     verdicts: [],
   };
 }
 
-function fitRow(row: FaceRow, problems: Problem[]): WallRow | null {
+function fitRow(row: FaceRow, straightedgeMm: number, problems: Problem[]): WallRow | null {
   if (row.points.length < 3) return null;
   const straight = straightness(row.points);
   problems.push(...straight.problems);
   if (!straight.value) return null;
-  const under = straightedgeGap(row.points, STRAIGHTEDGE_MM).value;
+  const under = straightedgeGap(row.points, straightedgeMm).value;
   return {
     zMm: row.zMm,
     setUpId: row.setUpId,

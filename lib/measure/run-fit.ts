@@ -20,6 +20,10 @@ export type RunFit = {
   scribes: EdgeScribe[];
   kicks: RunKicks | null;
   ceiling: RunCeiling | null;
+  /** Of hung runs: from the counter below to the underside. */
+  upperGap: FitFigure | null;
+  /** Walking width to what stands opposite; the least of them. */
+  aisle: { toRunId: string; figure: FitFigure } | null;
   verdicts: Verdict[];
 };
 
