@@ -10,6 +10,8 @@ type CheckLayoutProps = {
   onUnit: (unit: LengthUnit) => void;
   /** What is typed. */
   fields: ReactNode;
+  /** More to type, over the drawing to which it belongs. */
+  fieldsOver?: ReactNode;
   /** What it looks like; faded while something is half typed. */
   drawing: ReactNode;
   isStale: boolean;
@@ -26,6 +28,7 @@ export function CheckLayout({
   unit,
   onUnit,
   fields,
+  fieldsOver,
   drawing,
   isStale,
   words,
@@ -39,7 +42,10 @@ export function CheckLayout({
       />
       <div className="grid items-start gap-x-8 gap-y-5 pt-4 md:grid-cols-[11rem_minmax(0,1fr)] lg:grid-cols-[11rem_minmax(0,1fr)_19rem]">
         <div className="grid grid-cols-2 items-end gap-x-4 gap-y-3 md:grid-cols-1">{fields}</div>
-        <div className={`min-w-0 ${isStale ? 'opacity-60' : ''}`}>{drawing}</div>
+        <div className="min-w-0">
+          {fieldsOver}
+          <div className={isStale ? 'opacity-60' : ''}>{drawing}</div>
+        </div>
         <div className="md:col-span-2 lg:col-span-1" aria-live="polite">
           {words}
           {notes.map((note) => (

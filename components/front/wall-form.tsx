@@ -59,12 +59,8 @@ export function WallForm() {
           />
         </>
       }
-      drawing={
-        <>
-          <GapFields text={text} errors={check.gapErrors} onGap={typeGap} />
-          {shown ? <WallDrawing result={shown} way={text.way} unit={unit} /> : null}
-        </>
-      }
+      fieldsOver={<GapFields text={text} errors={check.gapErrors} onGap={typeGap} />}
+      drawing={shown ? <WallDrawing result={shown} way={text.way} unit={unit} /> : null}
       isStale={!check.result}
       words={check.result ? <WallWords result={check.result} unit={unit} /> : null}
       notes={check.notes}
