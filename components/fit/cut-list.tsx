@@ -1,0 +1,83 @@
+import { Fragment } from 'react';
+import { Glyph } from '@/components/ui/glyph';
+import type { CutRow } from '@/lib/sheet/cut-list';
+import { Figure } from './figure';
+import { Surely } from './surely';
+
+/** What the bench cuts, run by run: face at top and bottom, the blank, how sure. Every figure opens. */
+export function CutList({ rows }: { rows: CutRow[] }) {
+  if (rows.length === 0) {
+    return <p className="py-2 text-graphite">Nothing to cut yet: lay out a run first.</p>;
+  }
+  const runNames = [...new Set(rows.map(({ runName }) => runName))];
+  return (
+    <table className="w-full border-collapse">
+      <caption className="sr-only">Cut list</caption>
+      <thead>
+        <tr className="border-b border-ink text-note text-graphite">
+          <th scope="col" className="py-1 text-left font-normal">
+            piece
+          </th>
+          <th scope="col" className="px-2 py-1 text-right font-normal">
+            top, left
+          </th>
+          <th scope="col" className="px-2 py-1 text-right font-normal">
+            bottom, right
+          </th>
+          <th scope="col" className="px-2 py-1 text-right font-normal">
+            cut
+          </th>
+          <th scope="col" className="py-1 text-right font-normal">
+            <abbr title="give or take, k = 2" className="no-underline">
+              ±
+            </abbr>
+          </th>
+        </tr>
+      </thead>
+      <tbody>
+        {runNames.map((runName) => (
+          <Fragment key={runName}>
+            <tr>
+              <th scope="rowgroup" colSpan={5} className="pt-2.5 text-left font-bold">
+                {runName}
+              </th>
+            </tr>
+            {rows
+              .filter((row) => row.runName === runName)
+              .map((row) => (
+                <CutLine key={row.key} row={row} />
+              ))}
+          </Fragment>
+        ))}
+      </tbody>
+    </table>
+  );
+}
+
+function CutLine({ row }: { row: CutRow }) {
+  const of = `${row.piece}, ${row.runName}`;
+  return (
+    <tr className="border-b border-rule align-baseline">
+      <th scope="row" className="py-1.5 pr-2 text-left font-normal">
+        {row.piece}
+        <span className={`block text-note ${row.isWrong ? 'text-chalk' : 'text-graphite'}`}>
+          {row.isWrong ? <Glyph name="over" className="mr-1" /> : null}
+          {row.note}
+        </span>
+      </th>
+      <td className="px-2 text-right">
+        {row.first ? <Figure figure={row.first} of={`${of}, top or left`} /> : null}
+      </td>
+      <td className="px-2 text-right">
+        {row.last ? <Figure figure={row.last} of={`${of}, bottom or right`} /> : null}
+      </td>
+      <td className="px-2 text-right whitespace-nowrap">
+        {row.how === 'leave long' ? <span className="text-note text-graphite">leave </span> : null}
+        <Figure figure={row.cut} of={of} isStrong />
+      </td>
+      <td className="text-right">
+        <Surely figure={row.cut} />
+      </td>
+    </tr>
+  );
+}

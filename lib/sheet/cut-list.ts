@@ -1,0 +1,128 @@
+import type { Run } from '@/lib/contracts/wall-book';
+import type { Fit } from '@/lib/measure/fit';
+import type { FitFigure } from '@/lib/measure/fit-figure';
+import type { RunFit } from '@/lib/measure/run-fit';
+import { unitWords } from './unit-words';
+
+/** One piece that the bench cuts or leaves long. */
+export type CutRow = {
+  key: string;
+  runId: string | null;
+  runName: string;
+  wallId: string | null;
+  /** "Filler, left". */
+  piece: string;
+  /** Face at the top and bottom of a filler; at the left and right of a kick face. */
+  first: FitFigure | null;
+  last: FitFigure | null;
+  /** What to cut: a blank, an allowance to leave, an angle at the saw. */
+  cut: FitFigure;
+  /** "blank", "leave long", "saw". */
+  how: 'blank' | 'leave long' | 'saw';
+  /** What it is scribed to, or what it lacks. */
+  note: string;
+  isWrong: boolean;
+};
+
+/**
+ * The cut list of a fit: fillers and kick faces with their blanks, edges to be left long, mitres.
+ *
+ * Edge: a run that cannot be filled has no fillers here; its verdict says so. Corners are listed only where
+ * runs meet at them.
+ * Example: a filler of 46 to 54 mm with an allowance of 17 mm is "Filler, left", 54, 46, blank 63.5 mm.
+ */
+export function cutList(fit: Fit, runs: readonly Run[]): CutRow[] {
+  return [...fit.runs.flatMap((run) => rowsOf(run, runs)), ...mitres(fit, runs)];
+}
+
+function rowsOf(run: RunFit, runs: readonly Run[]): CutRow[] {
+  const laidOut = runs.find(({ id }) => id === run.runId);
+  const unitName = (unitId: string | null) => {
+    const unit = laidOut?.units.find(({ id }) => id === unitId);
+    return unit ? unitWords(unit).toLowerCase() : run.name;
+  };
+  const common = { runId: run.runId, runName: run.name, wallId: run.wallId };
+  const rows: CutRow[] = [];
+  for (const side of ['left', 'right'] as const) {
+    const { filler } = run[side];
+    if (!filler) continue;
+    rows.push({
+      ...common,
+      key: `${run.runId} filler ${side}`,
+      piece: `Filler, ${side}`,
+      first: filler.widths[0]?.width ?? filler.greatest,
+      last: filler.widths.at(-1)?.width ?? filler.least,
+      cut: filler.blank,
+      how: 'blank',
+      note: filler.verdict === 'fits' ? run[side].words : filler.words,
+      isWrong: filler.verdict === 'short' || filler.verdict === 'loose',
+    });
+  }
+  for (const scribe of run.scribes) {
+    rows.push({
+      ...common,
+      key: `${run.runId} ${scribe.edge} ${scribe.unitId ?? ''}`,
+      piece: `${scribeWords[scribe.edge]}, ${unitName(scribe.unitId)}`,
+      first: null,
+      last: null,
+      cut: scribe.allowance,
+      how: 'leave long',
+      note: scribe.words,
+      isWrong: false,
+    });
+  }
+  const { kicks } = run;
+  if (kicks?.faceBlank) {
+    const [firstUnit, lastUnit] = [run.units[0]?.unitId, run.units.at(-1)?.unitId];
+    const corner = (unitId: string | undefined, at: 'front-left' | 'front-right') =>
+      kicks.corners.find((one) => one.unitId === unitId && one.corner === at)?.height ?? null;
+    rows.push({
+      ...common,
+      key: `${run.runId} kick`,
+      piece: 'Kick face',
+      first: corner(firstUnit, 'front-left'),
+      last: corner(lastUnit, 'front-right'),
+      cut: kicks.faceBlank.blank,
+      how: 'blank',
+      note: kicks.faceBlank.scribe.words,
+      isWrong: kicks.corners.some(({ legs }) => legs !== 'within'),
+    });
+  }
+  return rows;
+}
+
+function mitres(fit: Fit, runs: readonly Run[]): CutRow[] {
+  const meet = new Set(
+    runs.flatMap((run) => [
+      ...(run.left.kind === 'run' ? [`left ${run.wallId}`] : []),
+      ...(run.right.kind === 'run' ? [`right ${run.wallId}`] : []),
+    ]),
+  );
+  return fit.corners.flatMap((corner) => {
+    const isMet = meet.has(`left ${corner.cornerWallId}`) || meet.has(`right ${corner.leftWallId}`);
+    if (!corner.saw || !isMet) return [];
+    return [
+      {
+        key: `${corner.cornerWallId} saw`,
+        runId: null,
+        runName: `Corner ${corner.name}`,
+        wallId: corner.cornerWallId,
+        piece: 'Kick mitre, each piece',
+        first: null,
+        last: null,
+        cut: corner.saw,
+        how: 'saw',
+        note: 'half the corner as it is',
+        isWrong: false,
+      } satisfies CutRow,
+    ];
+  });
+}
+
+const scribeWords = {
+  'filler-left': 'Filler left',
+  'filler-right': 'Filler right',
+  'finished-end': 'Finished end',
+  ceiling: 'To the ceiling',
+  kick: 'Kick',
+} as const;

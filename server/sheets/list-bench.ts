@@ -1,0 +1,102 @@
+import { and, asc, eq, inArray } from 'drizzle-orm';
+import type { Database } from '@/db/database';
+import { customers, jobs, releaseReceipts, releases, rooms, visits } from '@/db/schema';
+import type { BenchRow } from '@/lib/contracts/rooms';
+import { formatDayShort } from '@/lib/time/format-instant';
+import { mustBeAllowed, type PersonContext } from '@/server/base/context';
+import { momentWords } from '@/server/walls/moment-words';
+import { newestReleases } from '@/server/walls/newest-releases';
+
+/** What the bench has to build: the newest sheet of each room, first install first. */
+export async function listBench(ctx: PersonContext): Promise<BenchRow[]> {
+  mustBeAllowed(ctx, 'sheets:read');
+  const roomRows = await ctx.db
+    .select({ roomId: rooms.id })
+    .from(rooms)
+    .innerJoin(jobs, eq(jobs.id, rooms.jobId))
+    .where(
+      and(eq(rooms.shopId, ctx.shop.id), inArray(jobs.stage, ['released', 'in-build', 'ready'])),
+    );
+  const newest = await newestReleases(
+    ctx.db,
+    ctx,
+    roomRows.map(({ roomId }) => roomId),
+  );
+  const rows = await readSheets(
+    ctx,
+    [...newest.values()].map(({ releaseId }) => releaseId),
+  );
+  const installs = await firstInstalls(
+    ctx.db,
+    ctx,
+    rows.map(({ jobId }) => jobId),
+  );
+  const needOf = (row: (typeof rows)[number]) =>
+    installs.get(row.jobId)?.getTime() ?? Number.POSITIVE_INFINITY;
+  return rows
+    .sort(
+      (one, other) =>
+        compare(needOf(one), needOf(other)) ||
+        compare(one.releasedAt.getTime(), other.releasedAt.getTime()) ||
+        one.jobNumber - other.jobNumber,
+    )
+    .map(({ releasedAt, takenUpAt, ...row }) => ({
+      ...row,
+      releasedAtWords: momentWords(ctx, releasedAt),
+      takenUpWords: takenUpAt ? momentWords(ctx, takenUpAt) : null,
+      isSuperseded: newest.get(row.roomId)?.isSuperseded ?? false,
+      installWords: dayWords(ctx, installs.get(row.jobId)),
+    }));
+}
+
+function readSheets(ctx: PersonContext, releaseIds: string[]) {
+  return ctx.db
+    .select({
+      releaseId: releases.id,
+      jobId: jobs.id,
+      roomId: rooms.id,
+      jobNumber: jobs.number,
+      jobTitle: jobs.title,
+      customerName: customers.name,
+      roomName: rooms.name,
+      revision: releases.revision,
+      releasedAt: releases.releasedAt,
+      takenUpAt: releaseReceipts.takenUpAt,
+      readyOn: jobs.readyOn,
+    })
+    .from(releases)
+    .innerJoin(rooms, eq(rooms.id, releases.roomId))
+    .innerJoin(jobs, eq(jobs.id, rooms.jobId))
+    .innerJoin(customers, eq(customers.id, jobs.customerId))
+    .leftJoin(releaseReceipts, eq(releaseReceipts.releaseId, releases.id))
+    .where(and(eq(releases.shopId, ctx.shop.id), inArray(releases.id, releaseIds)));
+}
+
+/** The first install of each job that still stands in the diary. */
+async function firstInstalls(
+  db: Database,
+  ctx: PersonContext,
+  jobIds: string[],
+): Promise<Map<string, Date>> {
+  const found = await db
+    .selectDistinctOn([visits.jobId], { jobId: visits.jobId, startsAt: visits.startsAt })
+    .from(visits)
+    .where(
+      and(
+        eq(visits.shopId, ctx.shop.id),
+        inArray(visits.jobId, jobIds),
+        eq(visits.kind, 'install'),
+        inArray(visits.status, ['held', 'booked', 'confirmed', 'on-the-way', 'on-site']),
+      ),
+    )
+    .orderBy(asc(visits.jobId), asc(visits.startsAt));
+  return new Map(found.map(({ jobId, startsAt }) => [jobId, startsAt]));
+}
+
+function dayWords(ctx: PersonContext, startsAt: Date | undefined): string | null {
+  const locale = { language: 'en', region: ctx.shop.region } as const;
+  return startsAt ? formatDayShort(startsAt, ctx.shop.zone, locale) : null;
+}
+
+/** Infinity less Infinity is no number; two jobs without an install are as needed as each other. */
+const compare = (one: number, other: number) => (one < other ? -1 : one > other ? 1 : 0);
