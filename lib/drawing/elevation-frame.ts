@@ -34,6 +34,8 @@ export type ElevationSheet = ElevationSource & {
   at: (place: WallPlace) => Point;
 };
 
+/** A wall is drawn this wide unless asked otherwise. */
+const wallWidthPx = 760;
 /** Above the tallest box where no ceiling was read. */
 const openTopMm = 250;
 /** Of the least width of a filler, what its taper may take when it is drawn larger. */
@@ -41,7 +43,10 @@ const taperShare = 0.6;
 const floorRoomMm = 95;
 const ceilingRoomMm = 90;
 
-export function elevationFrame(source: ElevationSource, widthPx: number): ElevationSheet | null {
+export function elevationFrame(
+  source: ElevationSource,
+  look: { widthPx?: number } | { pxPerMm: number },
+): ElevationSheet | null {
   const { wallBook, fit, runs, wallId } = source;
   const wall = wallsOf(wallBook.room).find((one) => one.wall.id === wallId)?.wall;
   if (!wall) return null;
@@ -67,7 +72,8 @@ export function elevationFrame(source: ElevationSource, widthPx: number): Elevat
       : ofWall.map(({ run }) => run.z1Mm + openTopMm)),
     source.rules.counterTopMm + openTopMm,
   );
-  const pxPerMm = widthPx / Math.max(lengthMm, 1);
+  const pxPerMm =
+    'pxPerMm' in look ? look.pxPerMm : (look.widthPx ?? wallWidthPx) / Math.max(lengthMm, 1);
   const level = (end: 'left' | 'right') =>
     drawnEdge(ends[end], { plainMm: end === 'left' ? 0 : lengthMm, topMm, exaggeration });
   const edges = { left: level('left'), right: level('right') };

@@ -23,8 +23,12 @@ import { boundsOf, type Drawing, type Shape } from './shape';
  *
  * Edge: a wall that the room has not gives null; before anything is read, the wall as it was drawn.
  */
-export function drawElevation(source: ElevationSource, { widthPx = 760 } = {}): Drawing | null {
-  const sheet = elevationFrame(source, widthPx);
+export function drawElevation(
+  source: ElevationSource,
+  /** The wall as wide as this, or to a scale of its own. */
+  look: { widthPx?: number } | { pxPerMm: number } = {},
+): Drawing | null {
+  const sheet = elevationFrame(source, look);
   if (!sheet) return null;
   const hung = sheet.ofWall.filter(({ run }) => run.level === 'wall');
   const standing = sheet.ofWall.filter(({ run }) => run.level !== 'wall');
@@ -50,7 +54,8 @@ export function drawElevation(source: ElevationSource, { widthPx = 760 } = {}): 
     ...elevationDimensions(sheet),
     ...elevationTrouble(sheet),
   ];
-  return { shapes, bounds: boundsOf(shapes, 12), exaggeration: sheet.exaggeration };
+  const { exaggeration, pxPerMm } = sheet;
+  return { shapes, bounds: boundsOf(shapes, 12), exaggeration, pxPerMm };
 }
 
 /** The top over a base run: to the wall where the run meets it, over the last box where it ends free. */

@@ -23,6 +23,7 @@ export type PlanSheet = PlanSource & {
   pxPerMm: number;
 };
 
+const planWidthPx = 900;
 /** Room on the drawing for a bow, and for a corner's turn. */
 const bowRoomMm = 130;
 const cornerRoomDeg = 24;
@@ -33,7 +34,11 @@ const cornerRoomDeg = 24;
  *
  * Edge: before anything is read, the room as it was drawn.
  */
-export function drawPlan(source: PlanSource, { widthPx = 900 } = {}): Drawing {
+export function drawPlan(
+  source: PlanSource,
+  /** As wide as this, or to a scale of its own. */
+  look: { widthPx?: number } | { pxPerMm: number } = {},
+): Drawing {
   const walls = roomPlan(source.wallBook.room, source.fit);
   const faces = new Map(
     source.fit.walls.map((wall) => [wall.wallId, faceProfile(wall, source.rules.counterTopMm)]),
@@ -54,7 +59,8 @@ export function drawPlan(source: PlanSource, { widthPx = 900 } = {}): Drawing {
   const bottom = Math.max(...points.map(([, y]) => y), Number.NEGATIVE_INFINITY);
   const marginPx = 84;
   const spanMm = Math.max(right - left, (bottom - top) * 1.15, 1);
-  const pxPerMm = (widthPx - 2 * marginPx) / spanMm;
+  const pxPerMm =
+    'pxPerMm' in look ? look.pxPerMm : ((look.widthPx ?? planWidthPx) - 2 * marginPx) / spanMm;
   const sheet: PlanSheet = {
     ...source,
     walls,
@@ -70,5 +76,5 @@ export function drawPlan(source: PlanSource, { widthPx = 900 } = {}): Drawing {
     ...planCorners(sheet),
     ...planSuspects(sheet),
   ];
-  return { shapes, bounds: boundsOf(shapes, 12), exaggeration };
+  return { shapes, bounds: boundsOf(shapes, 12), exaggeration, pxPerMm };
 }

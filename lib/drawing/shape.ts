@@ -68,6 +68,8 @@ export type Drawing = {
   bounds: Bounds;
   /** How much deviations are drawn larger than they are; 1 where nothing is. */
   exaggeration: number;
+  /** Drawing units to one mm of the room, for paper and files that are to a scale. */
+  pxPerMm: number;
 };
 export type Bounds = { left: number; top: number; width: number; height: number };
 
