@@ -50,6 +50,7 @@ export function estimateMinutes(
     rooms: Array.from({ length: roomCount }, () => 'kitchen' as const),
     units,
     unitsNotLaidOut: job.units.length > 0 ? 0 : job.unitCount,
+    fitExtraMinutes: sum(job.rooms.map(({ release }) => release?.extraInstallMinutes ?? 0)),
     stairFloors: job.hasLift ? 0 : Math.abs(job.floorsUp),
     ownMinutes: {
       measureKitchen: measureMinutesPerRoom,
@@ -86,3 +87,5 @@ function latest(instants: (Date | null)[]): Date | null {
   if (instants.includes(null)) return null;
   return instants.toSorted((a, b) => Number(a) - Number(b)).at(-1) ?? null;
 }
+
+const sum = (numbers: number[]): number => numbers.reduce((total, number) => total + number, 0);

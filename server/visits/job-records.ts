@@ -1,17 +1,8 @@
-import { and, asc, count, desc, eq, inArray, notInArray, type SQL, sql } from 'drizzle-orm';
+import { and, asc, count, eq, inArray, notInArray, type SQL } from 'drizzle-orm';
 import type { Database } from '@/db/database';
-import {
-  customers,
-  jobs,
-  readings,
-  releases,
-  rooms,
-  runs,
-  sites,
-  units,
-  visits,
-} from '@/db/schema';
+import { customers, jobs, rooms, runs, sites, units, visits } from '@/db/schema';
 import type { Context } from '@/server/base/context';
+import { newestReleases } from '@/server/walls/newest-releases';
 
 /** Jobs whose next visit the office may have to book. */
 export const openJobs = notInArray(jobs.stage, ['signed-off', 'called-off', 'on-hold']);
@@ -89,26 +80,17 @@ async function readRoomRecords(db: Database, ctx: Context, jobIds: string[]) {
     .from(runs)
     .innerJoin(rooms, eq(rooms.id, runs.roomId))
     .where(ofJobs);
-  const newest = await db
-    .selectDistinctOn([releases.roomId], {
-      roomId: releases.roomId,
-      revision: releases.revision,
-      releasedAt: releases.releasedAt,
-      isSuperseded: sql<boolean>`exists (
-        select 1 from ${readings} where ${readings.roomId} = ${releases.roomId}
-        and not (${readings.id} = any (${releases.readingIds})))`,
-    })
-    .from(releases)
-    .innerJoin(rooms, eq(rooms.id, releases.roomId))
-    .where(ofJobs)
-    .orderBy(releases.roomId, desc(releases.releasedAt));
+  const newest = await newestReleases(
+    db,
+    ctx,
+    all.map(({ id }) => id),
+  );
   const hasRuns = new Set(withRuns.map(({ roomId }) => roomId));
-  const releaseOf = new Map(newest.map((release) => [release.roomId, release]));
   return groupByJob(
     all.map((room) => ({
       ...room,
       hasRuns: hasRuns.has(room.id),
-      release: releaseOf.get(room.id) ?? null,
+      release: newest.get(room.id) ?? null,
     })),
   );
 }

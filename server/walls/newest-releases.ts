@@ -4,13 +4,16 @@ import { readings, releases, rooms } from '@/db/schema';
 import type { Room } from '@/lib/contracts/wall-book';
 import { type BookLine, standingReadings } from '@/lib/measure/standing-readings';
 import { sheetKey } from '@/lib/sheet/sheet-key';
-import type { PersonContext } from '@/server/base/context';
+import type { Context } from '@/server/base/context';
 import { readChains } from './read-chains';
 import { readRuns } from './read-runs';
 
 export type NewestRelease = {
   releaseId: string;
   revision: string;
+  releasedAt: Date;
+  /** What out-of-true walls add to the install, by its fit; minutes of one person. */
+  extraInstallMinutes: number;
   /** Readings, walls or runs changed after it. */
   isSuperseded: boolean;
 };
@@ -18,7 +21,7 @@ export type NewestRelease = {
 /** The newest revision of each of these rooms, and whether it still holds; in a few queries for all. */
 export async function newestReleases(
   db: Database,
-  ctx: PersonContext,
+  ctx: Context,
   roomIds: string[],
 ): Promise<Map<string, NewestRelease>> {
   const frozen = await db
@@ -26,6 +29,8 @@ export async function newestReleases(
       roomId: releases.roomId,
       releaseId: releases.id,
       revision: releases.revision,
+      releasedAt: releases.releasedAt,
+      extraInstallMinutes: sql<number>`coalesce((${releases.fit} -> 'extraInstallMinutes' ->> 'minutes')::float8, 0)`,
       standingIds: releases.readingIds,
       runs: releases.runs,
       room: sql<Room>`${releases.wallBook} -> 'room'`,
@@ -39,16 +44,19 @@ export async function newestReleases(
     frozen.map(({ roomId }) => roomId),
   );
   return new Map(
-    frozen.map(({ roomId, releaseId, revision, ...state }) => [
+    frozen.map(({ roomId, standingIds, runs, room, ...release }) => [
       roomId,
-      { releaseId, revision, isSuperseded: sheetKey(state) !== keys.get(roomId) },
+      {
+        ...release,
+        isSuperseded: sheetKey({ standingIds, runs, room }) !== keys.get(roomId),
+      },
     ]),
   );
 }
 
 async function keysNow(
   db: Database,
-  ctx: PersonContext,
+  ctx: Context,
   roomIds: string[],
 ): Promise<Map<string, string>> {
   if (roomIds.length === 0) return new Map();
@@ -83,7 +91,7 @@ async function keysNow(
 
 async function readLines(
   db: Database,
-  ctx: PersonContext,
+  ctx: Context,
   roomIds: string[],
 ): Promise<Map<string, BookLine[]>> {
   const rows = await db

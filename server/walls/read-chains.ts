@@ -2,12 +2,12 @@ import { and, asc, eq, inArray } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { walls } from '@/db/schema';
 import type { Room } from '@/lib/contracts/wall-book';
-import type { PersonContext } from '@/server/base/context';
+import type { Context } from '@/server/base/context';
 
 /** The walls of these rooms in walking order, chain by chain. */
 export async function readChains(
   db: Database,
-  ctx: PersonContext,
+  ctx: Context,
   roomIds: string[],
 ): Promise<Map<string, Room['chains']>> {
   const rows = await db

@@ -2,12 +2,12 @@ import { and, asc, eq, inArray } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { runs, units } from '@/db/schema';
 import type { Run } from '@/lib/contracts/wall-book';
-import type { PersonContext } from '@/server/base/context';
+import type { Context } from '@/server/base/context';
 
 /** The runs of these rooms with their units, left to right; a room without any is not in the answer. */
 export async function readRuns(
   db: Database,
-  ctx: PersonContext,
+  ctx: Context,
   roomIds: string[],
 ): Promise<Map<string, Run[]>> {
   const ofRooms = and(eq(runs.shopId, ctx.shop.id), inArray(runs.roomId, roomIds));

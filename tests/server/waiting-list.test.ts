@@ -1,13 +1,20 @@
+import { randomUUID } from 'node:crypto';
 import { eq } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
-import { jobs, readings, releases, rooms, runs, visits, walls } from '@/db/schema';
+import { jobs, visits } from '@/db/schema';
 import type { WaitingItem } from '@/lib/contracts/visits';
+import { estimateVisit } from '@/lib/schedule';
 import { database } from '@/server/base/database';
 import { sayReady } from '@/server/jobs/say-ready';
+import { getFit } from '@/server/sheets/get-fit';
+import { releaseSheet } from '@/server/sheets/release-sheet';
 import { getWaitingList } from '@/server/visits/get-waiting-list';
+import { recordReadings } from '@/server/walls/record-readings';
+import { submitRoom } from '@/server/walls/submit-room';
 import { bookTestVisit } from '../help/book-test-visit';
 import { makeCrew } from '../help/make-crew';
 import { contextOf, makeShop, type TestShop } from '../help/make-shop';
+import { putKitchen } from '../help/put-kitchen';
 import { startTestJob } from '../help/start-test-job';
 
 describe('the waiting list', () => {
@@ -20,54 +27,22 @@ describe('the waiting list', () => {
     getWaitingList(await contextOf(of, 'scheduler'));
   const itemOf = async (jobId: string) => (await list()).find((item) => item.jobId === jobId);
 
-  /** A room with one wall, one run and a released revision A, released on 2026-11-02. */
-  async function released(floorAgreed = true): Promise<{ jobId: string; roomId: string }> {
-    const { jobId } = await startTestJob(shop);
+  /** A measured kitchen whose revision A was released on 2026-11-02. */
+  async function released(of = shop, floorAgreed = true) {
+    const kitchen = await putKitchen(of);
+    const { jobId, roomId } = kitchen;
+    const ctx = await contextOf(of, 'measurer', new Date('2026-11-02T15:00:00Z'));
+    await submitRoom(ctx, { roomId });
+    const { fit, runsMark } = await getFit(ctx, { roomId });
+    await releaseSheet(ctx, {
+      roomId,
+      seenReadingIds: fit.readingIds,
+      seenRunsMark: runsMark,
+      overrideReason: 'a test',
+    });
     const { db } = await database();
-    const shopId = shop.shop.id;
-    const takenBy = shop.people.measurer.personId;
-    await db.update(jobs).set({ stage: 'released', floorAgreed }).where(eq(jobs.id, jobId));
-    const [room] = await db
-      .insert(rooms)
-      .values({ shopId, jobId, name: 'Kitchen', submittedAt: new Date('2026-10-20T15:00:00Z') })
-      .returning({ id: rooms.id });
-    if (!room) throw new Error('the room was not made');
-    const roomId = room.id;
-    const [wall] = await db
-      .insert(walls)
-      .values({
-        shopId,
-        roomId,
-        chain: 0,
-        chainClosed: false,
-        position: 0,
-        name: 'A',
-        nominalLengthMm: 3000,
-      })
-      .returning({ id: walls.id });
-    if (!wall) throw new Error('the wall was not made');
-    await db.insert(runs).values({
-      shopId,
-      roomId,
-      wallId: wall.id,
-      name: 'Run A',
-      body: {} as (typeof runs.$inferInsert)['body'],
-    });
-    await db.insert(releases).values({
-      shopId,
-      roomId,
-      revision: 'A',
-      engineVersion: '1',
-      readingIds: [],
-      wallBook: {} as (typeof releases.$inferInsert)['wallBook'],
-      runs: [],
-      rules: {} as (typeof releases.$inferInsert)['rules'],
-      fit: {} as (typeof releases.$inferInsert)['fit'],
-      changes: [],
-      releasedAt: new Date('2026-11-02T15:00:00Z'),
-      releasedBy: takenBy,
-    });
-    return { jobId, roomId };
+    await db.update(jobs).set({ floorAgreed }).where(eq(jobs.id, jobId));
+    return kitchen;
   }
 
   it('offers a measure now, and says why not where the walls are open', async () => {
@@ -125,20 +100,16 @@ describe('the waiting list', () => {
   });
 
   it('waits with the install for the floor, and for a revision that knows the newest readings', async () => {
-    const { jobId } = await released(false);
+    const { jobId } = await released(shop, false);
     expect(await itemOf(jobId)).toMatchObject({
       state: 'blocked',
       openGates: expect.arrayContaining([expect.objectContaining({ gate: 'floor-agreed' })]),
     });
     const later = await released();
-    const { db } = await database();
-    await db.insert(readings).values({
-      shopId: shop.shop.id,
+    const [again] = later.wallBook.readings;
+    await recordReadings(await contextOf(shop, 'measurer', new Date()), {
       roomId: later.roomId,
-      kind: 'length',
-      body: {} as (typeof readings.$inferInsert)['body'],
-      takenAt: new Date('2026-11-20T15:00:00Z'),
-      takenBy: shop.people.measurer.personId,
+      readings: [{ ...again, id: randomUUID() }],
     });
     expect(await itemOf(later.jobId)).toMatchObject({
       state: 'blocked',
@@ -146,14 +117,24 @@ describe('the waiting list', () => {
     });
   });
 
-  it('leaves jobs on hold and called off alone, and counts units and crew into the time', async () => {
+  it('leaves jobs on hold and called off alone, and counts units, crew and crooked walls into the time', async () => {
     const held = await startTestJob(shop);
     const { db } = await database();
     await db.update(jobs).set({ stage: 'on-hold' }).where(eq(jobs.id, held.jobId));
     expect(await itemOf(held.jobId)).toBeUndefined();
-    const { jobId } = await released();
-    // (120 + 11 × 60 + 90) person-minutes for two, in quarters of an hour.
-    expect(await itemOf(jobId)).toMatchObject({ workMinutes: 435 });
+    const { jobId, roomId } = await released();
+    const { fit, runs } = await getFit(await contextOf(shop, 'measurer'), { roomId });
+    const units: Record<string, number> = {};
+    for (const { kind } of runs.flatMap((run) => run.units)) units[kind] = (units[kind] ?? 0) + 1;
+    const { value } = estimateVisit({
+      kind: 'install',
+      crewSize: 2,
+      units,
+      ownMinutes: { anyUnit: 60, base: 60, wall: 60 },
+      fitExtraMinutes: fit.extraInstallMinutes.minutes,
+    });
+    expect(fit.extraInstallMinutes.minutes).toBeGreaterThan(0);
+    expect(await itemOf(jobId)).toMatchObject({ workMinutes: value?.minutes });
   });
 
   it('asks the database as often for many jobs as for one', async () => {
@@ -170,7 +151,7 @@ describe('the waiting list', () => {
       return queries;
     };
     const small = await makeShop();
-    await startTestJob(small);
+    await released(small);
     expect((await list()).length).toBeGreaterThan(5);
     expect(await count(shop)).toBe(await count(small));
   });
