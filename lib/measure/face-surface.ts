@@ -42,6 +42,9 @@ export type FaceSurface = {
 export type UnreadFace = { bowShape: (yMm: number) => number; zRefMm: number; usualBowMm: number };
 
 const SAME_PLACE_MM = 1e-6;
+/** This near to a reading a place counts as read, as `whatIsMissing` asks for no more. */
+const NEAR_ALONG_MM = 250;
+const NEAR_HEIGHT_MM = 150;
 /** Height over which a wall's usual bow is spread where it must be carried on up or down; from memory. */
 const WALL_HEIGHT_MM = 2_400;
 
@@ -153,7 +156,7 @@ function acrossZ(
       uMm: Math.hypot(a.uMm, grown / Math.sqrt(3)),
       leanShareMm: a.leanShareMm + zMm - (places[place.low] ?? zMm),
       readingId: null,
-      extrapolated: true,
+      extrapolated: a.extrapolated || place.beyondMm > NEAR_HEIGHT_MM,
     };
   }
   const part = Math.min(1, place.spanMm / WALL_HEIGHT_MM);
@@ -176,7 +179,8 @@ function acrossY(
   const atNodes = lowShape + (highShape - lowShape) * place.t;
   const bowShare = here.bowShare + bowShape(yMm) - atNodes;
   if (place.beyondMm <= SAME_PLACE_MM) return { ...here, bowShare };
-  return { ...here, bowShare, readingId: null, extrapolated: true };
+  const extrapolated = here.extrapolated || place.beyondMm > NEAR_ALONG_MM;
+  return { ...here, bowShare, readingId: null, extrapolated };
 }
 
 /** A place of the grid without a reading: between its neighbours in the row and in the column. */

@@ -78,7 +78,7 @@ function closureWords(room: AdjustedRoom, suspect: Suspect | null): string {
   if (unread.length > 0) return 'The room is not read through yet: parts are only drawn.';
   const weakest = room.checks.filter(isRead).filter(({ hardlyChecked }) => hardlyChecked);
   if (weakest.length > 0) {
-    return `Nothing speaks against the readings, but hardly anything checks ${weakest.length} of them: take a diagonal.`;
+    return `Nothing speaks against the readings, but hardly anything checks ${weakest.length} of them. One more reading would.`;
   }
   return 'The readings hold together.';
 }

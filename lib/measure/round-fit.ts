@@ -9,7 +9,8 @@ export function roundFit<T>(value: T): T {
 
 function rounded(value: unknown): unknown {
   if (typeof value === 'number') return roundNumber(value);
-  if (Array.isArray(value)) return value.map(rounded);
+  // Lists of reading ids make up most of a fit and hold nothing to round.
+  if (Array.isArray(value)) return typeof value[0] === 'string' ? value : value.map(rounded);
   if (value === null || typeof value !== 'object') return value;
   const copy: Record<string, unknown> = {};
   for (const key of Object.keys(value)) copy[key] = rounded(value[key as keyof typeof value]);

@@ -47,7 +47,8 @@ export function settle(room: AdjustedRoom, options: SettleOptions = {}): SettleS
   const tellApart = options.suspects ? weighed : [];
   const before = worthOf(reliability, weighed, tellApart);
   const steps = furtherReadings(room, options).map(({ reading, row }) => {
-    const after = worthOf(withReading(reliability, rows, cofactor, row), weighed, tellApart);
+    const having = withReading(reliability, rows, cofactor, row, tellApart);
+    const after = worthOf(having, weighed, tellApart);
     return { reading, before, after };
   });
   const helping = steps.filter(({ after }) => after.least > before.least + 1e-6);
@@ -91,12 +92,16 @@ function worthOf(reliability: Reliability, weighed: number[], tellApart: number[
   return worth;
 }
 
-/** Reliability with one more reading: a rank-one change of the cofactor matrix. */
+/**
+ * Reliability with one more reading: a rank-one change of the cofactor matrix. Only the readings to be
+ * told apart get their whole line, for that is all that is asked of it.
+ */
 function withReading(
   { sigmas, shared }: Reliability,
   rows: SparseRow[],
   cofactor: Float64Array[],
   row: SparseRow,
+  tellApart: number[],
 ): Reliability {
   const spreadRow = spread(cofactor, row);
   const total = row.sigma ** 2 + project(row, spreadRow);
@@ -104,12 +109,13 @@ function withReading(
     const own = rows[i];
     return own ? project(own, spreadRow) : 0;
   });
-  const after = shared.map((line, i) =>
-    line.map((value, j) => value - ((pull[i] ?? 0) * (pull[j] ?? 0)) / total),
-  );
+  const lessened = (i: number, j: number) =>
+    (shared[i]?.[j] ?? 0) - ((pull[i] ?? 0) * (pull[j] ?? 0)) / total;
   return {
     sigmas,
-    shared: after,
-    redundancies: after.map((line, i) => redundancyFrom(line[i] ?? 0, sigmas[i] ?? 1)),
+    shared: shared.map((line, i) =>
+      tellApart.includes(i) ? line.map((_, j) => lessened(i, j)) : line,
+    ),
+    redundancies: sigmas.map((sigma, i) => redundancyFrom(lessened(i, i), sigma)),
   };
 }
