@@ -1,5 +1,6 @@
 /** A made-up room that is known exactly, and the readings a measurer would take in it. */
 import type { Reading, Tool, WallBook } from '@/lib/contracts/wall-book';
+import { seeded } from './seeded';
 
 export type TrueWall = {
   name: string;
@@ -128,7 +129,7 @@ export type BookOptions = {
 /** The wall book of a room, as it would be read. */
 export function bookOf(room: TrueRoom, options: BookOptions = {}): WallBook {
   const { heightsMm = [100, 910, 1_450], legMm = 900, faces = true, floors = true } = options;
-  const gauss = seededGauss(options.seed ?? 1);
+  const gauss = seeded(options.seed ?? 1).normal;
   const noise = () => (options.noiseMm ? options.noiseMm * gauss() : 0);
   const readings: Reading[] = [];
   const roomId = countedId(1);
@@ -296,13 +297,4 @@ function levelReadings(
       }),
     ),
   );
-}
-
-export function seededGauss(seed: number): () => number {
-  let state = seed >>> 0;
-  const uniform = () => {
-    state = (Math.imul(state, 1_664_525) + 1_013_904_223) >>> 0;
-    return (state + 0.5) / 4_294_967_296;
-  };
-  return () => Math.sqrt(-2 * Math.log(uniform())) * Math.cos(2 * Math.PI * uniform());
 }
