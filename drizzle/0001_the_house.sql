@@ -80,6 +80,26 @@ CREATE TABLE "verifications" (
 	"updated_at" timestamp with time zone DEFAULT now() NOT NULL
 );
 --> statement-breakpoint
+CREATE TABLE "files" (
+	"shop_id" text NOT NULL,
+	"id" uuid PRIMARY KEY DEFAULT gen_random_uuid() NOT NULL,
+	"job_id" uuid NOT NULL,
+	"room_id" uuid,
+	"wall_id" uuid,
+	"name" text NOT NULL,
+	"caption" text DEFAULT '' NOT NULL,
+	"media_type" text NOT NULL,
+	"bytes" integer NOT NULL,
+	"width_px" integer,
+	"height_px" integer,
+	"sha256" text NOT NULL,
+	"storage_key" text NOT NULL,
+	"taken_at" timestamp with time zone NOT NULL,
+	"added_by" uuid NOT NULL,
+	"created_at" timestamp with time zone DEFAULT now() NOT NULL,
+	CONSTRAINT "files_shop_id" UNIQUE("shop_id","id")
+);
+--> statement-breakpoint
 CREATE TABLE "consents" (
 	"shop_id" text NOT NULL,
 	"id" uuid PRIMARY KEY DEFAULT gen_random_uuid() NOT NULL,
@@ -101,19 +121,6 @@ CREATE TABLE "customers" (
 	"language" text DEFAULT 'en' NOT NULL,
 	"created_at" timestamp with time zone DEFAULT now() NOT NULL,
 	CONSTRAINT "customers_shop_id" UNIQUE("shop_id","id")
-);
---> statement-breakpoint
-CREATE TABLE "files" (
-	"shop_id" text NOT NULL,
-	"id" uuid PRIMARY KEY DEFAULT gen_random_uuid() NOT NULL,
-	"job_id" uuid NOT NULL,
-	"name" text NOT NULL,
-	"media_type" text NOT NULL,
-	"bytes" integer NOT NULL,
-	"storage_key" text NOT NULL,
-	"added_by" uuid,
-	"created_at" timestamp with time zone DEFAULT now() NOT NULL,
-	CONSTRAINT "files_shop_id" UNIQUE("shop_id","id")
 );
 --> statement-breakpoint
 CREATE TABLE "jobs" (
@@ -418,13 +425,14 @@ ALTER TABLE "audit" ADD CONSTRAINT "audit_shop_id_shops_id_fk" FOREIGN KEY ("sho
 ALTER TABLE "idempotency_keys" ADD CONSTRAINT "idempotency_keys_shop_id_shops_id_fk" FOREIGN KEY ("shop_id") REFERENCES "public"."shops"("id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "accounts" ADD CONSTRAINT "accounts_user_id_users_id_fk" FOREIGN KEY ("user_id") REFERENCES "public"."users"("id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "sessions" ADD CONSTRAINT "sessions_user_id_users_id_fk" FOREIGN KEY ("user_id") REFERENCES "public"."users"("id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
+ALTER TABLE "files" ADD CONSTRAINT "files_shop_id_shops_id_fk" FOREIGN KEY ("shop_id") REFERENCES "public"."shops"("id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
+ALTER TABLE "files" ADD CONSTRAINT "files_job" FOREIGN KEY ("shop_id","job_id") REFERENCES "public"."jobs"("shop_id","id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
+ALTER TABLE "files" ADD CONSTRAINT "files_room" FOREIGN KEY ("shop_id","room_id") REFERENCES "public"."rooms"("shop_id","id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
+ALTER TABLE "files" ADD CONSTRAINT "files_person" FOREIGN KEY ("shop_id","added_by") REFERENCES "public"."people"("shop_id","id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "consents" ADD CONSTRAINT "consents_shop_id_shops_id_fk" FOREIGN KEY ("shop_id") REFERENCES "public"."shops"("id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "consents" ADD CONSTRAINT "consents_customer" FOREIGN KEY ("shop_id","customer_id") REFERENCES "public"."customers"("shop_id","id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "consents" ADD CONSTRAINT "consents_person" FOREIGN KEY ("shop_id","by_person_id") REFERENCES "public"."people"("shop_id","id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "customers" ADD CONSTRAINT "customers_shop_id_shops_id_fk" FOREIGN KEY ("shop_id") REFERENCES "public"."shops"("id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
-ALTER TABLE "files" ADD CONSTRAINT "files_shop_id_shops_id_fk" FOREIGN KEY ("shop_id") REFERENCES "public"."shops"("id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
-ALTER TABLE "files" ADD CONSTRAINT "files_job" FOREIGN KEY ("shop_id","job_id") REFERENCES "public"."jobs"("shop_id","id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
-ALTER TABLE "files" ADD CONSTRAINT "files_person" FOREIGN KEY ("shop_id","added_by") REFERENCES "public"."people"("shop_id","id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "jobs" ADD CONSTRAINT "jobs_shop_id_shops_id_fk" FOREIGN KEY ("shop_id") REFERENCES "public"."shops"("id") ON DELETE cascade ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "jobs" ADD CONSTRAINT "jobs_customer" FOREIGN KEY ("shop_id","customer_id") REFERENCES "public"."customers"("shop_id","id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE "jobs" ADD CONSTRAINT "jobs_site" FOREIGN KEY ("shop_id","site_id") REFERENCES "public"."sites"("shop_id","id") ON DELETE no action ON UPDATE no action;--> statement-breakpoint
@@ -478,9 +486,10 @@ CREATE INDEX "audit_by_job" ON "audit" USING btree ("shop_id","job_id","sequence
 CREATE INDEX "accounts_by_user" ON "accounts" USING btree ("user_id");--> statement-breakpoint
 CREATE INDEX "sessions_by_user" ON "sessions" USING btree ("user_id");--> statement-breakpoint
 CREATE INDEX "verifications_by_identifier" ON "verifications" USING btree ("identifier");--> statement-breakpoint
+CREATE INDEX "files_by_job" ON "files" USING btree ("shop_id","job_id");--> statement-breakpoint
+CREATE INDEX "files_by_room" ON "files" USING btree ("shop_id","room_id","taken_at");--> statement-breakpoint
 CREATE INDEX "consents_newest" ON "consents" USING btree ("customer_id","channel","sequence");--> statement-breakpoint
 CREATE INDEX "customers_phone" ON "customers" USING btree ("shop_id","phone");--> statement-breakpoint
-CREATE INDEX "files_by_job" ON "files" USING btree ("shop_id","job_id");--> statement-breakpoint
 CREATE INDEX "jobs_by_stage" ON "jobs" USING btree ("shop_id","stage");--> statement-breakpoint
 CREATE INDEX "sites_by_customer" ON "sites" USING btree ("shop_id","customer_id");--> statement-breakpoint
 CREATE INDEX "messages_due" ON "messages" USING btree ("state","due_at");--> statement-breakpoint

@@ -1,5 +1,6 @@
 export * from './audit';
 export * from './auth';
+export * from './files';
 export * from './jobs';
 export * from './messages';
 export * from './sheets';

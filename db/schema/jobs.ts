@@ -147,32 +147,3 @@ export const jobs = pgTable(
     index('jobs_by_stage').on(table.shopId, table.stage),
   ],
 );
-
-export const files = pgTable(
-  'files',
-  {
-    ...shopColumns(),
-    jobId: uuid('job_id').notNull(),
-    name: text('name').notNull(),
-    mediaType: text('media_type').notNull(),
-    bytes: integer('bytes').notNull(),
-    /** Where the file port keeps it. */
-    storageKey: text('storage_key').notNull(),
-    addedBy: uuid('added_by'),
-    createdAt: createdAt(),
-  },
-  (table) => [
-    unique('files_shop_id').on(table.shopId, table.id),
-    foreignKey({
-      name: 'files_job',
-      columns: [table.shopId, table.jobId],
-      foreignColumns: [jobs.shopId, jobs.id],
-    }).onDelete('cascade'),
-    foreignKey({
-      name: 'files_person',
-      columns: [table.shopId, table.addedBy],
-      foreignColumns: [people.shopId, people.id],
-    }),
-    index('files_by_job').on(table.shopId, table.jobId),
-  ],
-);

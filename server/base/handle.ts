@@ -15,15 +15,19 @@ export function handle<S extends z.ZodType, O>(
   verb: (ctx: PersonContext, input: z.output<S>) => Promise<O>,
 ): RouteHandler {
   return answering(async (request, params) => {
-    const ctx = await personContext(request.headers);
-    if (!ctx) {
-      throw new Refusal({
-        status: 401,
-        code: 'not-signed-in',
-        message: 'Sign in again. What you entered is kept.',
-      });
-    }
+    const ctx = await signedIn(request);
     return json(await verb(ctx, await readInput(input, request, params)));
+  });
+}
+
+/** Who asks; a request that nobody is signed in for goes no further. */
+export async function signedIn(request: Request): Promise<PersonContext> {
+  const ctx = await personContext(request.headers);
+  if (ctx) return ctx;
+  throw new Refusal({
+    status: 401,
+    code: 'not-signed-in',
+    message: 'Sign in again. What you entered is kept.',
   });
 }
 
@@ -63,6 +67,6 @@ export function answering(
   };
 }
 
-function json(value: unknown): Response {
+export function json(value: unknown): Response {
   return Response.json(value ?? null, { headers: { 'cache-control': 'no-store' } });
 }

@@ -1,7 +1,7 @@
 /** Refusals that the outside may read: RFC 9457 problem details. Anything else is a bug and says little. */
 
 export type RefusalDetail = {
-  status: 400 | 401 | 403 | 404 | 409 | 410 | 422 | 429 | 503;
+  status: 400 | 401 | 403 | 404 | 409 | 410 | 413 | 415 | 422 | 429 | 503;
   /** Stable, kebab-case. */
   code: string;
   /** What happened, what was kept, what to do. */

@@ -12,7 +12,12 @@ export async function readInput<S extends z.ZodType>(
 ): Promise<z.output<S>> {
   const query = Object.fromEntries(new URL(request.url).searchParams);
   const body = request.method === 'GET' ? {} : await readBody(request);
-  const parsed = schema.safeParse({ ...query, ...body, ...params });
+  return understood(schema, { ...query, ...body, ...params });
+}
+
+/** What a schema makes of it; a refusal names each field that is not as it should be. */
+export function understood<S extends z.ZodType>(schema: S, value: unknown): z.output<S> {
+  const parsed = schema.safeParse(value);
   if (parsed.success) return parsed.data;
   const errors: Record<string, string> = {};
   for (const issue of parsed.error.issues) errors[issue.path.join('.')] ??= issue.message;

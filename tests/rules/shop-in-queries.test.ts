@@ -1,7 +1,17 @@
 import { describe, expect, it } from 'vitest';
 import { sourceFiles, withoutComments } from '../help/source-files';
 
-const folders = ['people', 'shops', 'jobs', 'walls', 'sheets', 'messages', 'visits', 'days'];
+const folders = [
+  'people',
+  'shops',
+  'jobs',
+  'walls',
+  'sheets',
+  'messages',
+  'visits',
+  'days',
+  'files',
+];
 
 /** Queries that belong to no one shop, by the start of their file's name; each with the reason. */
 const ofNoShop: Record<string, string> = {

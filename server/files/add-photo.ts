@@ -1,0 +1,120 @@
+import { createHash } from 'node:crypto';
+import { and, eq } from 'drizzle-orm';
+import { files, rooms } from '@/db/schema';
+import type { AddPhotoAnswer, AddPhotoInput } from '@/lib/contracts/files';
+import { cleanJpeg } from '@/lib/files/clean-jpeg';
+import { pictureKind } from '@/lib/files/picture-kind';
+import { writeAudit } from '@/server/base/audit';
+import { mustBeAllowed, type PersonContext } from '@/server/base/context';
+import { countTry } from '@/server/base/limits';
+import { notFound, Refusal } from '@/server/base/problem-response';
+import { filesPort } from '@/server/ports/files/choose-files';
+
+/** A long day with both hands full of photos stays far below. */
+const limit = { most: 300, windowSeconds: 3_600 };
+
+/**
+ * Keeps a photo of a room, stripped of everything but the picture. Sent twice it is kept once. The bytes
+ * are safe before the row says that they are there.
+ */
+export async function addPhoto(
+  ctx: PersonContext,
+  input: AddPhotoInput & { bytes: Uint8Array },
+): Promise<AddPhotoAnswer> {
+  mustBeAllowed(ctx, 'walls:measure');
+  const { fileId, roomId, wallId = null } = input;
+  await countTry(ctx.db, `photo:${ctx.actor.personId}`, limit, ctx.now);
+  const room = await findRoom(ctx, roomId);
+  const { bytes, widthPx, heightPx } = cleaned(input.bytes);
+  const sha256 = createHash('sha256').update(bytes).digest('hex');
+  const storageKey = `${ctx.shop.id}/${fileId}-${sha256.slice(0, 16)}.jpg`;
+  await filesPort().put(storageKey, bytes);
+  return ctx.db.transaction(async (tx) => {
+    const [added] = await tx
+      .insert(files)
+      .values({
+        shopId: ctx.shop.id,
+        id: fileId,
+        jobId: room.jobId,
+        roomId,
+        wallId,
+        name: `photo-${fileId.slice(0, 8)}.jpg`,
+        caption: input.caption,
+        mediaType: 'image/jpeg',
+        bytes: bytes.length,
+        widthPx,
+        heightPx,
+        sha256,
+        storageKey,
+        takenAt: new Date(input.takenAt),
+        addedBy: ctx.actor.personId,
+      })
+      .onConflictDoNothing({ target: files.id })
+      .returning({ id: files.id });
+    if (added) {
+      await writeAudit(tx, ctx, {
+        verb: 'add-photo',
+        subjectKind: 'room',
+        subjectId: roomId,
+        jobId: room.jobId,
+        summary: `Took a photo in ${room.name}`,
+      });
+      return { fileId };
+    }
+    const [kept] = await tx
+      .select({ sha256: files.sha256 })
+      .from(files)
+      .where(and(eq(files.shopId, ctx.shop.id), eq(files.id, fileId), eq(files.roomId, roomId)));
+    if (kept?.sha256 !== sha256) throw idTaken();
+    return { fileId };
+  });
+}
+
+async function findRoom(ctx: PersonContext, roomId: string) {
+  const [room] = await ctx.db
+    .select({ jobId: rooms.jobId, name: rooms.name })
+    .from(rooms)
+    .where(and(eq(rooms.shopId, ctx.shop.id), eq(rooms.id, roomId)));
+  if (!room) throw notFound('room');
+  return room;
+}
+
+function cleaned(bytes: Uint8Array) {
+  const kind = pictureKind(bytes);
+  if (kind !== 'jpeg') throw notJpeg(bytes.length === 0 ? 'nothing at all' : kindWords[kind]);
+  const { value, problems } = cleanJpeg(bytes);
+  if (value) return value;
+  const [first] = problems;
+  throw new Refusal({
+    status: 422,
+    code: first?.code ?? 'photo-broken',
+    message: `${first?.message ?? 'This photo is damaged.'} Nothing was kept.`,
+  });
+}
+
+const kindWords: Record<Exclude<ReturnType<typeof pictureKind>, 'jpeg'>, string> = {
+  png: 'a PNG picture',
+  gif: 'a GIF picture',
+  webp: 'a WebP picture',
+  heic: 'a HEIC picture',
+  svg: 'an SVG drawing, which can carry programs',
+  pdf: 'a PDF',
+  zip: 'a packed archive',
+  unknown: 'no picture',
+};
+
+function notJpeg(words: string): Refusal {
+  return new Refusal({
+    status: 415,
+    code: 'not-a-photo',
+    message: `Photos are kept as JPEG, and this is ${words}. Nothing was kept.`,
+  });
+}
+
+function idTaken(): Refusal {
+  return new Refusal({
+    status: 409,
+    code: 'id-taken',
+    message: 'Another file has this id already. It was not changed; take the photo again.',
+  });
+}
