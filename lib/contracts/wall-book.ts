@@ -382,6 +382,19 @@ export const run = z.object({
   counterGroup: text(20).nullable().default(null),
   /** A finished end that shows: the set line leaves the least gap there first. */
   leastGapAt: z.enum(['left', 'right']).optional(),
+  /** Stands free in the room, parallel to a set line: its two ends are open, and its back. */
+  island: z
+    .object({
+      /** The run whose set line it is parallel to; left out: the straight line of its wall. */
+      setLineRunId: id.optional(),
+      /** From that line to its back, into the room. */
+      offsetMm: lengthMm,
+      /** From the wall's left corner to its left end, along that line. */
+      alongMm: lengthMm,
+      /** A peninsula: the side that is built on to something. */
+      joined: z.enum(['back', 'right', 'front', 'left']).optional(),
+    })
+    .optional(),
 });
 export type Run = z.infer<typeof run>;
 

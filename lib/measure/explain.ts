@@ -284,6 +284,13 @@ export const figureWords: Record<FigureKind, FigureWords> = {
     measure: 'length',
     rounding: 'down',
   },
+  'pipe-offset': {
+    name: 'From the middle of the sink to a pipe',
+    formula: 'Where the pipe comes up, less where the middle of the sink will stand.',
+    surer: 'The pipe read again from two walls.',
+    measure: 'length',
+    rounding: 'nearest',
+  },
   'room-angle-misclosure': {
     name: 'Angles of the room',
     formula: 'The sum of all angles less (corners − 2) × 180°; nought in a room that closes.',

@@ -37,6 +37,7 @@ export type FigureKind =
   | 'tilt-height'
   | 'way-in-margin'
   | 'aisle'
+  | 'pipe-offset'
   | 'room-angle-misclosure'
   | 'room-linear-misclosure'
   | 'saw-angle';

@@ -134,15 +134,15 @@ function datumAlreadySet(group: StandingRun[], nominalKickMm: number): Figure | 
 function kickRun(context: FitContext, level: LevelLine, standing: StandingRun): KickRun {
   const { run, x0Mm, x1Mm, backMm, units } = standing;
   const y1Mm = backMm + Math.max(0, run.carcassDepthMm - context.rules.kickDepthMm);
-  const ends = (['left', 'right'] as const).filter((end) => run[end].kind === 'open');
+  const sides = (['left', 'right', 'back'] as const).filter((side) =>
+    run.island ? run.island.joined !== side : side !== 'back' && run[side].kind === 'open',
+  );
+  const placeOf = { left: x0Mm, right: x1Mm, back: backMm };
   return {
     runId: run.id,
     drops: level.drops.filter(({ wallId }) => wallId === run.wallId),
     footprint: { x0Mm, x1Mm, y0Mm: backMm, y1Mm },
-    faces: [
-      { side: 'front', atMm: y1Mm },
-      ...ends.map((side) => ({ side, atMm: side === 'left' ? x0Mm : x1Mm })),
-    ],
+    faces: [{ side: 'front', atMm: y1Mm }, ...sides.map((side) => ({ side, atMm: placeOf[side] }))],
     units: units.map(({ unitId, leftMm, rightMm }) => ({
       unitId,
       footprint: { x0Mm: leftMm, x1Mm: rightMm, y0Mm: backMm, y1Mm },
@@ -181,9 +181,7 @@ function describe(
     ),
     faceBlank: front ? faceBlank(front) : null,
     returns: kick.faces.flatMap((face) =>
-      face.side === 'left' || face.side === 'right'
-        ? [{ side: face.side, ...faceBlank(face) }]
-        : [],
+      face.side === 'front' ? [] : [{ side: face.side, ...faceBlank(face) }],
     ),
     least: fitFigure('kick-height', kick.least.height),
     greatest: fitFigure('kick-height', kick.greatest.height),

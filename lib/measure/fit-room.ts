@@ -10,6 +10,7 @@ import { fitClosure } from '@/lib/measure/fit-closure';
 import { type FitContext, fitContext } from '@/lib/measure/fit-context';
 import { fitCorners } from '@/lib/measure/fit-corners';
 import { fitFloor } from '@/lib/measure/fit-floor';
+import { fitIslands, standingIslands } from '@/lib/measure/fit-islands';
 import { fitKicks, type StandingRun } from '@/lib/measure/fit-kicks';
 import { type WorkedRun, workRuns } from '@/lib/measure/fit-runs';
 import { fitCollisions } from '@/lib/measure/fit-studs';
@@ -18,6 +19,7 @@ import {
   floorVerdicts,
   type Judge,
   judgeBy,
+  runVerdicts,
   straightedgeOf,
   wallVerdicts,
   worstFirst,
@@ -30,6 +32,7 @@ import { planPlace } from '@/lib/measure/plan-place';
 import { roundFit } from '@/lib/measure/round-fit';
 import type { RuleSet } from '@/lib/measure/rules/rule-set';
 import { ruleSetsOf } from '@/lib/measure/rules/rule-sets';
+import type { RunFit } from '@/lib/measure/run-fit';
 import type { Problem } from '@/lib/problem';
 
 /**
@@ -51,12 +54,19 @@ export function fitRoom(wallBook: WallBook, runs: Run[], rules: FitRules): Fit {
   const walls = judgedWalls(context, judge, ruleSets);
   const floor = judgedFloor(context, judge, fitFloor(level));
   const worked = workRuns(context);
-  const kicks = fitKicks(context, level, worked.runs.flatMap(standing));
+  const kicks = fitKicks(context, level, [
+    ...worked.runs.flatMap(standing),
+    ...standingIslands(context, worked.runs),
+  ]);
   const aisles = fitAisles(context, worked.runs);
   const fitted = worked.runs.map((work) =>
     finishRun({ context, level, kicks, aisles, floor, judge }, work),
   );
-  const runFits = fitted.map(({ runFit }) => runFit);
+  const islands = fitIslands(context, level, worked.runs, kicks);
+  const runFits = inOrder(context, [
+    ...fitted.map(({ runFit }) => runFit),
+    ...islands.runFits.map((run) => ({ ...run, verdicts: runVerdicts(judge, run) })),
+  ]);
   const fit: Fit = {
     engineVersion: ENGINE_VERSION,
     roomId: wallBook.room.id,
@@ -79,6 +89,7 @@ export function fitRoom(wallBook: WallBook, runs: Run[], rules: FitRules): Fit {
       ...worked.problems,
       ...kicks.problems,
       ...fitted.flatMap(({ problems }) => problems),
+      ...islands.problems,
     ]),
     readingIds: context.book.readings.map(({ id }) => id),
     extraInstallMinutes: extraInstallMinutes(runFits, walls.walls),
@@ -121,6 +132,11 @@ function standing({ run, plane, bandMm, filled }: WorkedRun): StandingRun[] {
   const middle = (bandMm[0] + bandMm[1]) / 2;
   const backMm = plane.standOffMm + plane.slope * middle;
   return [{ run, x0Mm: bandMm[0], x1Mm: bandMm[1], backMm, units }];
+}
+
+/** Runs in the order the shop gave them. */
+function inOrder(context: FitContext, runFits: RunFit[]): RunFit[] {
+  return context.runs.flatMap((run) => runFits.filter(({ runId }) => runId === run.id));
 }
 
 /** The same words about the same things, said by two parts, are one problem. */

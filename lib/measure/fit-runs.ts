@@ -30,7 +30,8 @@ export type WorkedRun = {
 
 /** Sets the lines twice: over the whole room for the run, then behind the boxes as they will stand. */
 export function workRuns(context: FitContext): { runs: WorkedRun[]; problems: Problem[] } {
-  const requests = context.runs
+  const againstWalls = context.runs.filter(({ island }) => !island);
+  const requests = againstWalls
     .filter(({ wallId }) => context.frames.has(wallId))
     .map((run) => ({ run, bandMm: firstBand(context, run), edgesMm: [] as number[] }));
   const first = fitSetLines(context, requests);
@@ -47,7 +48,7 @@ export function workRuns(context: FitContext): { runs: WorkedRun[]; problems: Pr
   });
   const second = fitSetLines(context, placed);
   const bands = new Map(placed.map(({ run, bandMm }) => [run.id, bandMm]));
-  const runs = context.runs.map((run) =>
+  const runs = againstWalls.map((run) =>
     workRun(context, run, second.planes, bands.get(run.id) ?? [0, 0]),
   );
   return { runs, problems: [...second.problems, ...runs.flatMap(({ problems }) => problems)] };
@@ -137,6 +138,7 @@ export function describeRun(
     ceiling: null,
     upperGap: null,
     aisle: null,
+    island: null,
     verdicts: [],
   };
   return { runFit, problems: [...left.problems, ...right.problems, ...scribes.problems] };

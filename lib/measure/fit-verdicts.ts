@@ -80,8 +80,8 @@ export function cornerVerdicts(judge: Judge, corner: CornerFit, depthMm: number)
 
 /** The floor under the run as a whole, and the ceiling over it. */
 export function runVerdicts(judge: Judge, run: RunFit): Verdict[] {
-  const { setLine, kicks, ceiling } = run;
-  const lengthMm = setLine ? setLine.xRightMm - setLine.xLeftMm : 0;
+  const { kicks, ceiling } = run;
+  const lengthMm = lengthOf(run);
   const verdicts: Verdict[] = [];
   if (kicks) {
     const { least, greatest } = kicks;
@@ -101,6 +101,12 @@ export function runVerdicts(judge: Judge, run: RunFit): Verdict[] {
     verdicts.push(...judge('aisle', `Aisle in front of ${run.name}`, run.aisle.figure, 0));
   }
   return verdicts;
+}
+
+function lengthOf({ setLine, units }: RunFit): number {
+  const [first, last] = [units[0], units[units.length - 1]];
+  if (first && last) return last.rightMm - first.leftMm;
+  return setLine ? setLine.xRightMm - setLine.xLeftMm : 0;
 }
 
 /** The floor of the whole room, over the distance from its high to its low point. */

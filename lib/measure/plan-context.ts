@@ -11,7 +11,10 @@ export type AskedSlot = Omit<PlannedReading, 'takenBy' | 'skipped'>;
 
 export type PlanContext = {
   walk: RoomWalk;
+  /** Runs that stand against their wall. */
   runs: Run[];
+  /** Runs that stand free in the room. */
+  islands: Run[];
   rules: FitRules;
   readings: Reading[];
   byKind: <K extends Reading['kind']>(kind: K) => ReadingOf<K>[];
@@ -33,7 +36,8 @@ export function planContext(wallBook: WallBook, runs: Run[], rules: FitRules): P
   );
   return {
     walk,
-    runs: runs.filter((run) => walk.byId.has(run.wallId)),
+    runs: runs.filter((run) => walk.byId.has(run.wallId) && !run.island),
+    islands: runs.filter((run) => walk.byId.has(run.wallId) && run.island),
     rules,
     readings,
     byKind: <K extends Reading['kind']>(kind: K) => (kinds.get(kind) ?? []) as ReadingOf<K>[],

@@ -27,6 +27,9 @@ export function planLevels(context: PlanContext): AskedSlot[] {
   const setUpId = last && 'setUpId' in last ? last.setUpId : null;
   return context.walk.walls.flatMap((walked) => [
     ...planFloor(context, walked, setUpId),
+    ...context.islands
+      .filter(({ wallId }) => wallId === walked.wall.id)
+      .flatMap((island) => planIsland(context, island, setUpId)),
     ...planCeiling(context, walked, setUpId),
   ]);
 }
@@ -62,6 +65,34 @@ function planFloor(context: PlanContext, walked: WalkedWall, setUpId: string | n
         setUpId,
       },
     })),
+  );
+}
+
+/** Its own floor: four corners, and the middle of its long sides. */
+function planIsland(context: PlanContext, run: Run, setUpId: string | null): AskedSlot[] {
+  const { island } = run;
+  if (!island) return [];
+  const lengthMm = run.units.reduce((sum, { widthMm }) => sum + widthMm, 0);
+  const sides = [
+    { key: 'back', yMm: island.offsetMm },
+    { key: 'front', yMm: island.offsetMm + run.carcassDepthMm },
+  ];
+  return spreadPlaces(island.alongMm, island.alongMm + lengthMm, Math.max(lengthMm / 2, 1)).flatMap(
+    (place, i, places) =>
+      sides.map(({ key, yMm }) => ({
+        slot: `floor:${run.id}:x${i + 1}:${key}`,
+        words: `Floor under ${run.name}, ${key}, ${placeWords(context, place)} of wall ${context.walk.byId.get(run.wallId)?.wall.name}, ${lengthWords(yMm, context.rules)} out`,
+        why: `Gives the kick of ${run.name} all round.`,
+        need: i === 0 || i === places.length - 1 ? ('must' as const) : ('should' as const),
+        ask: {
+          kind: 'floor' as const,
+          wallId: run.wallId,
+          xMm: Math.round(place),
+          yMm,
+          setUpGroup: SET_UP_GROUP,
+          setUpId,
+        },
+      })),
   );
 }
 

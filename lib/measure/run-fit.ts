@@ -22,8 +22,10 @@ export type RunFit = {
   ceiling: RunCeiling | null;
   /** Of hung runs: from the counter below to the underside. */
   upperGap: FitFigure | null;
-  /** Walking width to what stands opposite; the least of them. */
+  /** Walking width to the run or wall opposite, nothing open; the least of them. */
   aisle: { toRunId: string; figure: FitFigure } | null;
+  /** Of a run that stands free in the room. */
+  island: IslandFit | null;
   verdicts: Verdict[];
 };
 
@@ -179,8 +181,8 @@ export type RunKicks = {
   highPoint: { xMm: number; yMm: number; readingId: string } | null;
   corners: KickCorner[];
   faceBlank: { blank: FitFigure; scribe: EdgeScribe } | null;
-  /** Kick faces that show at an open end. */
-  returns: { side: 'left' | 'right'; blank: FitFigure; scribe: EdgeScribe }[];
+  /** Kick faces that show at an open end, and at the back of an island. */
+  returns: { side: 'left' | 'right' | 'back'; blank: FitFigure; scribe: EdgeScribe }[];
   least: FitFigure;
   greatest: FitFigure;
   /** "Stands on the finished floor." */
@@ -207,4 +209,22 @@ export type RunCeiling = {
   blank: FitFigure | null;
   scribe: EdgeScribe | null;
   words: string;
+};
+
+export type IslandFit = {
+  /** Clockwise from the back left, in the plan of the closure picture. */
+  corners: { xMm: number; yMm: number }[];
+  /** Exposed corners of the kick, each piece cut so. */
+  saw: FitFigure;
+  exposedCorners: number;
+  aisles: {
+    toId: string;
+    side: 'back' | 'right' | 'front' | 'left';
+    clear: FitFigure;
+    /** Doors of both sides open. */
+    clearOpen: FitFigure;
+    words: string;
+  }[];
+  /** From the sink's middle to each pipe. */
+  services: { readingId: string; kind: 'water' | 'waste'; along: FitFigure; across: FitFigure }[];
 };

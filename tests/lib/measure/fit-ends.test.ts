@@ -324,3 +324,60 @@ describe('what hangs and what is on the wall', () => {
     expect(fit.verdicts.some(({ check }) => check === 'aisle')).toBe(true);
   });
 });
+
+describe('islands', () => {
+  const island = sampleRun(2, 0, {
+    left: { kind: 'open', limitMm: 0 },
+    right: { kind: 'open', limitMm: 0 },
+    units: [sampleUnit(1, { kind: 'sink', widthMm: 900 }), sampleUnit(2, { widthMm: 600 })],
+    island: { setLineRunId: id(1), offsetMm: 1_600, alongMm: 750 },
+  });
+  const behind = sampleRun(1, 0, { units: units(900, 900, 900) });
+
+  test('stands parallel to the set line it names, with room to walk on every side', () => {
+    const { run } = fitted([behind, island], 2);
+    expect(run.island?.corners[0]?.xMm).toBeCloseTo(750, 0);
+    expect(run.island?.corners[0]?.yMm).toBeCloseTo(1_600, 0);
+    const front = run.island?.aisles.find(({ side }) => side === 'front');
+    // 2400 to the wall opposite, less 1600 and the island's own 581.
+    expect(front?.clear.value).toBeCloseTo(219, 0);
+    const back = run.island?.aisles.find(({ side }) => side === 'back');
+    expect(back?.toId).toBe(id(1));
+    expect(back?.clear.value).toBeCloseTo(1_600 - 581, 0);
+    expect(run.verdicts.find(({ check }) => check === 'aisle')?.verdict).toBe('over');
+  });
+
+  test('has kick faces all round, and its own high point', () => {
+    const { run } = fitted([behind, island], 2);
+    expect(run.kicks?.returns.map(({ side }) => side)).toEqual(['left', 'right', 'back']);
+    expect(run.kicks?.corners).toHaveLength(8);
+    expect(run.island?.saw.value).toBeCloseTo(45, 6);
+  });
+
+  test('a peninsula is closed where it is built on', () => {
+    const joined = { ...island, island: { offsetMm: 1_600, alongMm: 0, joined: 'left' as const } };
+    const { run } = fitted([joined], 2);
+    expect(run.island?.exposedCorners).toBe(2);
+    expect(run.kicks?.returns.map(({ side }) => side)).toEqual(['right', 'back']);
+  });
+
+  test('says how far its sink stands from the pipes', () => {
+    const waste: Reading = {
+      ...common,
+      id: countedId(64_000),
+      kind: 'feature',
+      wallId: countedId(100),
+      feature: 'waste',
+      x0Mm: 1_250,
+      x1Mm: 1_290,
+      z0Mm: 0,
+      z1Mm: 0,
+      projectionMm: 1_900,
+      swing: 'none',
+      note: '',
+    };
+    const { run } = fitted([behind, island], 2, { ...book, readings: [...book.readings, waste] });
+    expect(run.island?.services[0]?.along.value).toBeCloseTo(70, 6);
+    expect(run.island?.services[0]?.across.value).toBeCloseTo(20, 6);
+  });
+});

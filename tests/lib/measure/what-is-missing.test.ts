@@ -190,6 +190,22 @@ describe('other rooms', () => {
     expect(kinds).toContain('doorway');
   });
 
+  test('an island asks for its own floor, and for no wall behind it', () => {
+    const island = sampleRun(1, 1, {
+      name: 'Island',
+      left: { kind: 'open', limitMm: 0 },
+      right: { kind: 'open', limitMm: 0 },
+      island: { offsetMm: 1_200, alongMm: 600 },
+    });
+    const missing = whatIsMissing(empty(bookOf(square)), [island], metric);
+    expect(missing.some(({ ask }) => ask.kind === 'face')).toBe(false);
+    const floor = missing.filter(({ ask }) => ask.kind === 'floor');
+    expect(floor.filter(({ need }) => need === 'must')).toHaveLength(4);
+    expect(floor[0]?.words).toBe(
+      'Floor under Island, back, 600 mm from the left of wall B, 1200 mm out',
+    );
+  });
+
   test('an outside corner is taken past the corner', () => {
     const breast: TrueRoom = {
       closed: false,
