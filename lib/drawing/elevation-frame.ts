@@ -5,6 +5,7 @@ import type { RunFit } from '@/lib/measure/run-fit';
 import { wallsOf } from '@/lib/sheet/room-names';
 import { ceilingLine } from './ceiling-line';
 import { exaggerationFor } from './exaggeration';
+import { floorLine } from './floor-line';
 import type { Point } from './shape';
 
 export type ElevationSource = {
@@ -57,7 +58,7 @@ export function elevationFrame(
     return run && runFit.wallId === wallId ? [{ run, runFit }] : [];
   });
   const ends = { left: endPlaces(ofWall, 'left'), right: endPlaces(ofWall, 'right') };
-  const floorRead = floorPlaces(fit, wallId);
+  const floorRead = floorLine(fit, wallId);
   const ceilingRead = ceilingLine(wallBook, fit, wallId);
   const exaggeration = exaggerationFor([
     ...ofWall.flatMap(({ runFit }) => fillerDeviations(runFit, ends)),
@@ -146,16 +147,6 @@ function drawnEdge(
     ...drawn.filter(({ zMm }) => zMm > 0 && zMm < topMm),
     { zMm: topMm, xMm: highest.xMm + slope * (topMm - highest.zMm) },
   ];
-}
-
-/** Nearest the wall, left to right. */
-function floorPlaces(fit: Fit, wallId: string): WallPlace[] {
-  const points = (fit.floor?.points ?? []).filter((point) => point.wallId === wallId);
-  const nearest = Math.min(...points.map(({ yMm }) => yMm));
-  return points
-    .filter(({ yMm }) => yMm <= nearest + 60)
-    .map(({ xMm, heightMm }) => ({ xMm, zMm: heightMm }))
-    .sort((one, other) => one.xMm - other.xMm);
 }
 
 function across(
