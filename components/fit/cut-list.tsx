@@ -2,6 +2,7 @@ import { Fragment } from 'react';
 import { Glyph } from '@/components/ui/glyph';
 import type { CutRow } from '@/lib/sheet/cut-list';
 import { Figure } from './figure';
+import { InFractions } from './in-fractions';
 import { Surely } from './surely';
 
 /** What the bench cuts, run by run: face at top and bottom, the blank, how sure. Every figure opens. */
@@ -57,12 +58,12 @@ export function CutList({ rows }: { rows: CutRow[] }) {
 function CutLine({ row }: { row: CutRow }) {
   const of = `${row.piece}, ${row.runName}`;
   return (
-    <tr className="border-b border-rule align-baseline">
-      <th scope="row" className="py-1.5 pr-2 text-left font-normal">
+    <tr className="border-b border-rule align-top *:py-1.5 print:*:py-0.5">
+      <th scope="row" className="pr-2 text-left font-normal">
         {row.piece}
         <span className={`block text-note ${row.isWrong ? 'text-chalk' : 'text-graphite'}`}>
           {row.isWrong ? <Glyph name="over" className="mr-1" /> : null}
-          {row.note}
+          <InFractions words={row.note} />
         </span>
       </th>
       <td className="px-2 text-right">

@@ -30,6 +30,8 @@ export function FigureValue({
 
 /** How sure it is: ± U, rounded up. */
 export function SurelyValue({ figure, rules }: { figure: FitFigure; rules: Steps }) {
+  // An end that the shop sets, such as the least filler beside an open end, is what it is set to.
+  if (figure.U === 0) return <span className="whitespace-nowrap text-graphite">as set</span>;
   if (figureWords[figure.kind].measure !== 'length') {
     return (
       <span className="whitespace-nowrap text-graphite">± {figureText(figure, rules).surely}</span>

@@ -23,7 +23,7 @@ export function Figure({ figure, of, showsSurely = false, isStrong = false }: Fi
       type="button"
       onClick={() => open({ figure, of })}
       aria-label={`${of}: ${value}, give or take ${surely}. How it came about`}
-      className={`rounded decoration-blueprint decoration-dotted underline-offset-4 hover:bg-tint hover:underline print:no-underline ${
+      className={`rounded whitespace-nowrap decoration-blueprint decoration-dotted underline-offset-4 hover:bg-tint hover:underline print:no-underline ${
         isStrong ? 'font-bold' : ''
       }`}
     >

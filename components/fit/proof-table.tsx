@@ -12,48 +12,67 @@ export function ProofTable({ rows }: { rows: ProofRow[] }) {
       </p>
     );
   }
+  const rules = [...new Set(rows.map(({ rule }) => rule))];
   return (
     <table className="w-full border-collapse">
       <caption className="sr-only">Proved on site</caption>
       <thead>
         <tr className="border-b border-ink text-note text-graphite">
-          {['check', 'read', 'rule', ''].map((header, index) => (
+          {['check', 'read', 'limit', ''].map((header, index) => (
             <th
               key={header}
               scope="col"
-              className={`py-1 font-normal ${index === 0 ? 'text-left' : 'pl-2 text-right'}`}
+              className={`py-1 font-normal ${index === 0 ? 'text-left' : 'pl-2 text-right last:text-left'}`}
             >
               {header || <span className="sr-only">verdict</span>}
             </th>
           ))}
         </tr>
       </thead>
-      <tbody>
-        {rows.map((row) => (
-          <tr key={row.key} className="border-b border-rule align-baseline">
-            <th scope="row" className="py-1.5 text-left font-normal">
-              {row.check}
-              <span className="block text-note text-graphite">{row.rule}</span>
+      {rules.map((rule) => (
+        <tbody key={rule}>
+          <tr>
+            <th
+              scope="rowgroup"
+              colSpan={4}
+              className="pt-2.5 text-left text-note print:pt-1 font-normal text-graphite"
+            >
+              {rule}
             </th>
-            <td className="pl-2 text-right">
-              {row.read ? <Figure figure={row.read} of={row.check} /> : null}
-              {row.readWords ? (
-                <span className="block text-note text-graphite">{row.readWords}</span>
-              ) : null}
-            </td>
-            <td className="pl-2 text-right">
-              <InFractions words={row.limitWords} />
-            </td>
-            <td className="pl-2 text-right whitespace-nowrap">
-              <Verdict kind={row.verdict}>
-                {closureWord(row)}
-                {row.inDoubt ? ' (in doubt)' : ''}
-              </Verdict>
-            </td>
           </tr>
-        ))}
-      </tbody>
+          {rows
+            .filter((row) => row.rule === rule)
+            .map((row) => (
+              <ProofLine key={row.key} row={row} />
+            ))}
+        </tbody>
+      ))}
     </table>
+  );
+}
+
+function ProofLine({ row }: { row: ProofRow }) {
+  return (
+    <tr className="border-b border-rule align-top *:py-1 print:*:py-px">
+      <th scope="row" className="text-left font-normal">
+        {row.check}
+      </th>
+      <td className="pl-2 text-right">
+        {row.read ? <Figure figure={row.read} of={row.check} showsSurely /> : null}
+        {row.readWords ? (
+          <span className="block text-note text-graphite">{row.readWords}</span>
+        ) : null}
+      </td>
+      <td className="pl-2 text-right">
+        <InFractions words={row.limitWords} />
+      </td>
+      <td className="w-0 pl-4 whitespace-nowrap">
+        <Verdict kind={row.verdict}>
+          {closureWord(row)}
+          {row.inDoubt ? ', in doubt' : ''}
+        </Verdict>
+      </td>
+    </tr>
   );
 }
 

@@ -1,9 +1,9 @@
+import { Verdict } from '@/components/ui/verdict';
 import { VerdictNote } from '@/components/ui/verdict-note';
 import type { Fit } from '@/lib/measure/fit';
-import { ruleWords } from '@/lib/sheet/proof-rows';
 import { InFractions } from './in-fractions';
 
-/** What the fit says about the room, worst first; what is within its rule is counted. */
+/** What the fit says about the room, worst first; whose rule it is stands under "Proved on site". */
 export function VerdictList({ fit }: { fit: Fit }) {
   const loud = fit.verdicts.filter(({ verdict }) => verdict !== 'within');
   const quiet = fit.verdicts.length - loud.length;
@@ -29,19 +29,23 @@ export function VerdictList({ fit }: { fit: Fit }) {
           <InFractions words={message} />
         </VerdictNote>
       ))}
-      {loud.map((verdict) => (
-        <VerdictNote
-          key={`${verdict.check} ${verdict.words}`}
-          kind={verdict.verdict}
-          word={verdict.inDoubt ? `${verdict.verdict}, in doubt` : undefined}
-        >
-          <InFractions words={verdict.words} />
-          <span className="block text-note text-graphite">
-            {verdict.action ? `${verdict.action} ` : ''}
-            {ruleWords(verdict)}
-          </span>
-        </VerdictNote>
-      ))}
+      <ul>
+        {loud.map((verdict) => (
+          <li
+            key={`${verdict.check} ${verdict.words}`}
+            className="grid grid-cols-[5.5rem_minmax(0,1fr)] gap-x-2 border-b border-rule py-1.5"
+          >
+            <Verdict kind={verdict.verdict} className="self-start">
+              {verdict.inDoubt ? `${verdict.verdict}?` : verdict.verdict}
+            </Verdict>
+            <span>
+              <InFractions words={verdict.words} />
+              {verdict.inDoubt ? ' Its ± spans the limit.' : ''}
+              <span className="block text-note text-graphite">{verdict.action}</span>
+            </span>
+          </li>
+        ))}
+      </ul>
       {warnings.length > 0 ? (
         <details>
           <summary className="text-graphite">

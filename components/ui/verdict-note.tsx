@@ -18,7 +18,7 @@ type VerdictNoteProps = { kind: VerdictKind; word?: ReactNode; children: ReactNo
 /** A verdict with what it means, marked by a coloured edge: under a reading, beside a drawing. */
 export function VerdictNote({ kind, word, children }: VerdictNoteProps) {
   return (
-    <div className={classNames('border-l-4 bg-tint px-3 py-2', edges[kind])}>
+    <div className={classNames('border-l-4 bg-tint px-3 py-2 print:py-0.5', edges[kind])}>
       <Verdict kind={kind} className="mr-2 font-bold">
         {word}
       </Verdict>

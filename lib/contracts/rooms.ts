@@ -112,6 +112,10 @@ export type SheetView = {
   rules: FitRules;
   fit: Fit;
   engineVersion: string;
+  /** "Ines Brand, Tue, Dec 1; Tape, class II, Laser meter": who read what the sheet stands on, when, with what. */
+  measuredWords: string;
+  /** The house may hold lead paint or asbestos. */
+  isOldHouse: boolean;
   /** The newest revision, when it is not this one. */
   newerRevision: string | null;
   /** Readings that came after the release, or runs that changed. */

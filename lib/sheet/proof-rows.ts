@@ -1,6 +1,7 @@
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { CornerFit, Fit } from '@/lib/measure/fit';
 import type { FitFigure, Share, Verdict } from '@/lib/measure/fit-figure';
+import { COMMON_PRACTICE } from '@/lib/measure/rules/rule-set';
 import { formatLength } from '@/lib/units/format-length';
 
 /** One check of the room against a rule: what was read, what the rule allows, and whose rule it is. */
@@ -78,8 +79,8 @@ function limitWords({ limitMm, spanMm }: Verdict, { unit, stepMm }: FitRules): s
 
 /** Whose rule it is: name, edition, clause; or that it has no source. */
 export function ruleWords({ rule, source, edition, clause }: Verdict): string {
-  const named = [...new Set([rule, source, edition, clause].filter(Boolean))];
-  return named.join(', ');
+  if (source === COMMON_PRACTICE) return `${rule}: ${source}`;
+  return [...new Set([rule, source, edition, clause].filter(Boolean))].join(', ');
 }
 
 const subjects: [pattern: RegExp, words: string][] = [

@@ -1,10 +1,12 @@
 import { and, eq } from 'drizzle-orm';
 import { releases } from '@/db/schema';
 import type { SheetView } from '@/lib/contracts/rooms';
+import { isOldHouse } from '@/lib/measure/rules/old-house';
 import { supersededBy } from '@/lib/sheet/sheet-changes';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { notFound } from '@/server/base/problem-response';
 import { readWallBook } from '@/server/walls/read-wall-book';
+import { measuredWords } from './measured-words';
 import { readReleases } from './read-releases';
 
 /** A released sheet as it was frozen, and what has happened in the room since. */
@@ -34,7 +36,7 @@ export async function getSheet(
       ),
     );
   if (!release || !frozen) throw notFound('sheet');
-  const { jobId, jobNumber, jobTitle, customerName, street } = now;
+  const { jobId, jobNumber, jobTitle, customerName, street, yearBuilt } = now;
   const newest = all[0]?.revision ?? revision;
   return {
     ...frozen,
@@ -46,6 +48,8 @@ export async function getSheet(
     street,
     shopName: ctx.shop.name,
     roomName: frozen.wallBook.room.name,
+    measuredWords: measuredWords(ctx, now, frozen.fit.readingIds),
+    isOldHouse: isOldHouse(yearBuilt, ctx.shop.region),
     newerRevision: newest === revision ? null : newest,
     supersededBy: supersededBy(frozen, now, frozen.rules.unit),
   };

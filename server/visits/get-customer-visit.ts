@@ -1,4 +1,5 @@
 import type { CustomerVisitView } from '@/lib/contracts/visits';
+import { isOldHouse } from '@/lib/measure/rules/old-house';
 import { formatAtLocalTime } from '@/lib/time/format-civil';
 import { formatDay, formatTime, formatWindow } from '@/lib/time/format-instant';
 import { toLocal } from '@/lib/time/local-moment';
@@ -40,12 +41,9 @@ export async function getCustomerVisit(
     street,
     town,
     customerSays,
-    isOldHouse: visit.yearBuilt === null || visit.yearBuilt < oldBefore[shop.region],
+    isOldHouse: isOldHouse(visit.yearBuilt, shop.region),
   };
 }
-
-/** Lead paint in the US before 1978; asbestos in the UK before 2000, and alike elsewhere: C06–C10 of the cautions. */
-const oldBefore = { US: 1978, UK: 2000, AU: 2000, EU: 2000 } as const;
 
 /** Past the limit of tries the answer is that of any link that opens nothing. */
 async function openLink(token: string, from: string): Promise<CustomerContext | null> {

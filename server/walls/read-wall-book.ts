@@ -14,6 +14,7 @@ export type BookOnFile = {
   jobTitle: string;
   customerName: string;
   street: string;
+  yearBuilt: number | null;
   submittedAt: Date | null;
   wallBook: WallBook;
   runs: Run[];
@@ -34,6 +35,7 @@ export async function readWallBook(
       jobTitle: jobs.title,
       customerName: customers.name,
       street: sites.street,
+      yearBuilt: sites.yearBuilt,
       name: rooms.name,
       wallThicknessToComeMm: rooms.wallThicknessToComeMm,
       floorToComeMm: rooms.floorToComeMm,
