@@ -1,14 +1,15 @@
 /** Which reading is most likely wrong, by how much, and by which slip of the hand. */
 import type { AdjustedRoom } from './adjusted-room';
-import { EQUAL_FIT } from './check-observations';
+import { checkObservations, EQUAL_FIT } from './check-observations';
 import { type KnownSlip, knownSlips } from './known-slips';
 import { type LeftOut, leaveOut } from './leave-out';
-import { UNCHECKED } from './reliability';
+import type { RoomState } from './room-equations';
+import { linearSolution } from './solve-room';
 
-/** Readings whose linear w² is this share of the largest are left out and the room adjusted again. */
-const WORTH_LEAVING_OUT = 0.6;
-/** Beyond this the slip has bent the room so far that w says little: every reading is left out in turn. */
-const GROSS_W = 100;
+/** Readings whose w² is this share of the largest are left out in turn and the room adjusted again. */
+const WORTH_LEAVING_OUT = 0.8;
+/** Times the room is looked at again from where the strongest suspect's leaving out puts it. */
+const MOST_LOOKS = 4;
 /** Share of slips that are none of the known ones, and how large those are: a judgement. */
 const UNKNOWN_SHARE = 0.2;
 const UNKNOWN_SLIP_MM = 150;
@@ -52,10 +53,7 @@ export function findBlunder(room: AdjustedRoom): Blunder | null {
   const byResidual = largest > room.alarmW;
   const byChiSquare = !room.chiSquare.passes;
   if (!byResidual && !byChiSquare) return null;
-  const enough = largest > GROSS_W ? 0 : WORTH_LEAVING_OUT * largest ** 2 - EQUAL_FIT;
-  const weighed = room.checks
-    .flatMap((check, i) => (check.redundancy > UNCHECKED && check.w ** 2 >= enough ? [i] : []))
-    .flatMap((i) => weigh(room, i) ?? []);
+  const weighed = worthLeavingOut(room).flatMap((i) => weigh(room, i) ?? []);
   const best = Math.max(...weighed.map(({ gain }) => gain));
   const suspects = weighed.filter(({ gain }) => gain >= best - EQUAL_FIT);
   suspects.sort(
@@ -65,6 +63,34 @@ export function findBlunder(room: AdjustedRoom): Blunder | null {
     alarm: byResidual && byChiSquare ? 'both' : byResidual ? 'residual' : 'chi-square',
     suspects: suspects.map(({ evidence: _evidence, gain: _gain, ...suspect }) => suspect),
   };
+}
+
+/**
+ * Candidates by their tests. A gross slip bends the room until w points elsewhere, so the room is looked at
+ * from where it stands without the strongest suspect, until that stays the same.
+ */
+function worthLeavingOut(room: AdjustedRoom): number[] {
+  let squares = room.checks.map(({ w }) => w * w);
+  let strongest = strongestOf(squares);
+  for (let look = 0; look < MOST_LOOKS; look++) {
+    const without = leaveOut(room, strongest);
+    const seen = without && testsFrom(room, without.state);
+    if (!seen) break;
+    squares = seen;
+    const next = strongestOf(squares);
+    if (next === strongest) break;
+    strongest = next;
+  }
+  const enough = WORTH_LEAVING_OUT * (squares[strongest] ?? 0) - EQUAL_FIT;
+  return squares.flatMap((square, i) => (square > 0 && square >= enough ? [i] : []));
+}
+
+const strongestOf = (squares: number[]) => squares.indexOf(Math.max(...squares));
+
+function testsFrom(room: AdjustedRoom, state: RoomState): number[] | null {
+  const { observations, options } = room.system;
+  const seen = linearSolution(state, observations, options);
+  return seen && checkObservations(observations, seen).checks.map(({ w }) => w * w);
 }
 
 type Weighed = BlunderSuspect & { gain: number; evidence: number };
@@ -101,6 +127,7 @@ function asTheResidualSays(room: AdjustedRoom, observation: number): LeftOut | n
   const check = room.checks[observation];
   if (!check) return null;
   return {
+    state: room.system.state,
     chiSquare: room.chiSquare.value - check.w ** 2,
     slip: -check.residual / check.redundancy,
     uSlip: check.u / Math.sqrt(check.redundancy),

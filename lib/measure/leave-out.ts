@@ -1,11 +1,13 @@
 /** The room adjusted again without one reading: what the others say that reading should have been. */
 import type { AdjustedRoom } from './adjusted-room';
-import { degrees, equationOf, observedValue } from './room-equations';
+import { degrees, equationOf, observedValue, type RoomState } from './room-equations';
 import { startingPoints } from './room-start';
 import { varianceOf } from './row-products';
 import { solveRoom, weightedSquares } from './solve-room';
 
 export type LeftOut = {
+  /** The room as the other readings have it. */
+  state: RoomState;
   chiSquare: number;
   /** Read less what the others say, in mm, degrees or mm/mm. */
   slip: number;
@@ -30,6 +32,7 @@ export function leaveOut(room: AdjustedRoom, observation: number): LeftOut | nul
   const turns = left.kind === 'corner' ? turnsBetween(read.value, equation.predicted) : 0;
   const scale = left.kind === 'corner' ? degrees(1) : 1;
   return {
+    state: solution.state,
     chiSquare: weightedSquares(solution),
     slip: (read.value - equation.predicted - turns) * scale,
     uSlip: Math.sqrt(read.sigma ** 2 + varianceOf(solution.cofactor, equation)) * scale,

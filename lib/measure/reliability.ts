@@ -23,7 +23,9 @@ export function reliabilityOf(
   const sigmas = own.map((row) => row.sigma);
   const shared = own.map((row) => {
     const spreadRow = spread(cofactor, row);
-    return Float64Array.from(own, (other) => project(other, spreadRow));
+    const line = new Float64Array(count);
+    for (let j = 0; j < count; j++) line[j] = project(own[j] ?? row, spreadRow);
+    return line;
   });
   const redundancies = shared.map((line, i) => redundancyFrom(line[i] ?? 0, sigmas[i] ?? 1));
   return { sigmas, shared, redundancies };
@@ -33,17 +35,6 @@ export function redundancyFrom(variance: number, sigma: number): number {
   return Math.min(1, Math.max(0, 1 - variance / (sigma * sigma)));
 }
 
-/** Correlation of the tests w of two different observations; 0 where either is unchecked. */
-export function tieBetween(
-  { sigmas, shared, redundancies }: Reliability,
-  i: number,
-  j: number,
-): number {
-  const [one, other] = [redundancies[i] ?? 0, redundancies[j] ?? 0];
-  if (one <= UNCHECKED || other <= UNCHECKED) return 0;
-  return -(shared[i]?.[j] ?? 0) / ((sigmas[i] ?? 1) * (sigmas[j] ?? 1) * Math.sqrt(one * other));
-}
-
 export type Ties = {
   /** Greatest |correlation| of each observation's test with another's. */
   closest: number[];
@@ -51,17 +42,22 @@ export type Ties = {
   independentTests: number;
 };
 
-export function tiesOf(reliability: Reliability): Ties {
-  const count = reliability.redundancies.length;
+export function tiesOf({ sigmas, shared, redundancies }: Reliability): Ties {
+  const count = redundancies.length;
   const closest = new Array<number>(count).fill(0);
-  const together: number[] = reliability.redundancies.map((r) => (r > UNCHECKED ? 1 : 0));
+  const together: number[] = redundancies.map((r) => (r > UNCHECKED ? 1 : 0));
+  // 1 / (σ √r), or 0 for what is unchecked: a tie is then a product of three numbers.
+  const scale = redundancies.map((r, i) =>
+    r > UNCHECKED ? 1 / ((sigmas[i] ?? 1) * Math.sqrt(r)) : 0,
+  );
   for (let i = 0; i < count; i++) {
+    const line = shared[i];
     for (let j = i + 1; j < count; j++) {
-      const tie = Math.abs(tieBetween(reliability, i, j));
+      const tie = Math.abs((line?.[j] ?? 0) * (scale[i] ?? 0) * (scale[j] ?? 0));
       if (tie > (closest[i] ?? 0)) closest[i] = tie;
       if (tie > (closest[j] ?? 0)) closest[j] = tie;
-      together[i] = (together[i] ?? 0) + tie ** 2;
-      together[j] = (together[j] ?? 0) + tie ** 2;
+      together[i] = (together[i] ?? 0) + tie * tie;
+      together[j] = (together[j] ?? 0) + tie * tie;
     }
   }
   const independentTests = together.reduce((sum, n) => (n >= 1 ? sum + 1 / n : sum), 0);

@@ -1,7 +1,7 @@
 /** Which one further reading would tell most: a diagonal, or the same reading again. */
 import type { AdjustedRoom, FurtherReading, SparseRow } from './adjusted-room';
 import { furtherReadings, isTaped } from './further-readings';
-import { type Reliability, redundancyFrom, reliabilityOf, tieBetween } from './reliability';
+import { type Reliability, redundancyFrom, reliabilityOf, UNCHECKED } from './reliability';
 import { project, spread } from './row-products';
 
 /** Steps that gain at least this share of the best are as good; the cheapest of them comes first. */
@@ -31,8 +31,9 @@ export type SettleStep = {
  * Ranks the further readings by how much they raise the least redundancy (over all lengths, corners,
  * diagonals and widths; with suspects, over these, less what cannot be told from another suspect).
  *
- * Edge: an observation without a reading behind it is not weighed; only diagonals that run free through the room are offered; a step that raises nothing is not;
- * steps within a tenth of the best gain count as equal and the cheapest comes first.
+ * Edge: an observation without a reading behind it is not weighed; only diagonals that run free through
+ * the room are offered; a step that raises nothing is not; steps within a tenth of the best gain count
+ * as equal and the cheapest comes first.
  * Example: a square room read at one height without diagonals: the first step is a diagonal, for a
  * second look at one wall leaves the other three unchecked.
  * Problems: none; an empty list when nothing would help. Source: Baarda's internal reliability (1968),
@@ -45,10 +46,9 @@ export function settle(room: AdjustedRoom, options: SettleOptions = {}): SettleS
     isTaped(o) && (!options.suspects || options.suspects.includes(i)) ? [i] : [],
   );
   const tellApart = options.suspects ? weighed : [];
-  const before = worthOf(reliability, weighed, tellApart);
+  const before = worthOf(reliability, weighed, tellApart, null);
   const steps = furtherReadings(room, options).map(({ reading, row }) => {
-    const having = withReading(reliability, rows, cofactor, row, tellApart);
-    const after = worthOf(having, weighed, tellApart);
+    const after = worthOf(reliability, weighed, tellApart, changeBy(room, row));
     return { reading, before, after };
   });
   const helping = steps.filter(({ after }) => after.least > before.least + 1e-6);
@@ -74,48 +74,43 @@ export function settle(room: AdjustedRoom, options: SettleOptions = {}): SettleS
 }
 
 type Worth = { least: number; sum: number; leastRedundancy: number };
+/** What one more reading takes from aᵢQaⱼ: pullᵢ·pullⱼ/total, a rank-one change of the cofactor matrix. */
+type Change = { pull: Float64Array; total: number };
+
+function changeBy(room: AdjustedRoom, row: SparseRow): Change {
+  const { rows, cofactor, observations } = room.system;
+  const spreadRow = spread(cofactor, row);
+  const pull = new Float64Array(observations.length);
+  for (let i = 0; i < pull.length; i++) pull[i] = project(rows[i] ?? row, spreadRow);
+  return { pull, total: row.sigma ** 2 + project(row, spreadRow) };
+}
 
 /** Worth of a set of readings: the least redundancy (clear of the other suspects), and their sum. */
-function worthOf(reliability: Reliability, weighed: number[], tellApart: number[]): Worth {
+function worthOf(
+  { sigmas, shared }: Reliability,
+  weighed: number[],
+  tellApart: number[],
+  change: Change | null,
+): Worth {
+  const sharedBy = (i: number, j: number) => {
+    const now = shared[i]?.[j] ?? 0;
+    return change ? now - ((change.pull[i] ?? 0) * (change.pull[j] ?? 0)) / change.total : now;
+  };
+  const redundancies = sigmas.map((sigma, i) => redundancyFrom(sharedBy(i, i), sigma));
   const worth = { least: 1, sum: 0, leastRedundancy: 1 };
   for (const i of weighed) {
-    const redundancy = reliability.redundancies[i] ?? 0;
-    const tie = tellApart.reduce(
-      (most, j) => (j === i ? most : Math.max(most, Math.abs(tieBetween(reliability, i, j)))),
-      0,
-    );
-    const clear = redundancy * Math.max(0, 1 - tie * tie);
+    const redundancy = redundancies[i] ?? 0;
+    let tied = 0;
+    for (const j of tellApart) {
+      const other = redundancies[j] ?? 0;
+      if (j === i || redundancy <= UNCHECKED || other <= UNCHECKED) continue;
+      const scale = (sigmas[i] ?? 1) * (sigmas[j] ?? 1);
+      tied = Math.max(tied, (sharedBy(i, j) / scale) ** 2 / (redundancy * other));
+    }
+    const clear = redundancy * Math.max(0, 1 - tied);
     worth.least = Math.min(worth.least, clear);
     worth.leastRedundancy = Math.min(worth.leastRedundancy, redundancy);
     worth.sum += clear;
   }
   return worth;
-}
-
-/**
- * Reliability with one more reading: a rank-one change of the cofactor matrix. Only the readings to be
- * told apart get their whole line, for that is all that is asked of it.
- */
-function withReading(
-  { sigmas, shared }: Reliability,
-  rows: SparseRow[],
-  cofactor: Float64Array[],
-  row: SparseRow,
-  tellApart: number[],
-): Reliability {
-  const spreadRow = spread(cofactor, row);
-  const total = row.sigma ** 2 + project(row, spreadRow);
-  const pull = sigmas.map((_, i) => {
-    const own = rows[i];
-    return own ? project(own, spreadRow) : 0;
-  });
-  const lessened = (i: number, j: number) =>
-    (shared[i]?.[j] ?? 0) - ((pull[i] ?? 0) * (pull[j] ?? 0)) / total;
-  return {
-    sigmas,
-    shared: shared.map((line, i) =>
-      tellApart.includes(i) ? line.map((_, j) => lessened(i, j)) : line,
-    ),
-    redundancies: sigmas.map((sigma, i) => redundancyFrom(lessened(i, i), sigma)),
-  };
 }

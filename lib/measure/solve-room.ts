@@ -1,9 +1,10 @@
 /** Gauss–Newton on the observation equations of a room, with the priors that keep weak unknowns honest. */
-import { CholeskyDecomposition, Matrix } from 'ml-matrix';
 import type { SparseRow } from './adjusted-room';
+import { choleskyOf, invertCholesky, solveCholesky } from './cholesky';
 import { type Equation, equationOf, observedValue, type RoomState } from './room-equations';
 import { FIXED, type RoomLayout } from './room-layout';
 import type { AdjustOptions, RoomObservation } from './room-observations';
+import { project } from './row-products';
 
 /** Standard uncertainty of an unread wall's lean: 6 mm/m, a wall at the edge of what warranties allow. */
 export const USUAL_LEAN = 0.006;
@@ -56,6 +57,26 @@ export function solveRoom(
     if (step === MOST_STEPS) return null;
   }
   return null;
+}
+
+/**
+ * The residuals of the adjustment as they would be if the equations were straight, seen from a state.
+ * Seen from a sound state a gross slip does not bend the room, and the tests keep their meaning.
+ */
+export function linearSolution(
+  state: RoomState,
+  observations: RoomObservation[],
+  options: AdjustOptions,
+): Solution | null {
+  const priors = priorsOf(state, observations, options);
+  const linear = linearise(state, observations, observations.map(observedValue), priors);
+  const normal = linear && factorise(linear.rows, linear.residuals, state.layout.unknownCount);
+  if (!linear || !normal) return null;
+  const change = normal.change();
+  const residuals = linear.residuals.map(
+    (residual, i) => residual + project(linear.rows[i] ?? emptyRow, change),
+  );
+  return { state, rows: linear.rows, residuals, cofactor: normal.inverse() };
 }
 
 const solved = (state: RoomState, linear: Linear, cofactor: Float64Array[]): Solution => ({
@@ -165,46 +186,44 @@ function difference(equation: Equation, read: number, isAngle: boolean): number 
 
 /** Normal equations scaled to a unit diagonal and decomposed; null when they determine nothing. */
 function factorise(rows: SparseRow[], residuals: Float64Array, count: number) {
-  const matrix = Matrix.zeros(count, count);
+  const matrix = new Float64Array(count * count);
   const right = new Float64Array(count);
-  for (const [r, row] of rows.entries()) {
-    const weight = 1 / (row.sigma * row.sigma);
-    for (const [i, column] of row.columns.entries()) {
-      const weighted = (row.partials[i] ?? 0) * weight;
+  // Plain loops: this and the product below are most of the time of a fit.
+  for (let r = 0; r < rows.length; r++) {
+    const { columns, partials, sigma } = rows[r] ?? emptyRow;
+    const weight = 1 / (sigma * sigma);
+    for (let i = 0; i < columns.length; i++) {
+      const column = columns[i] ?? 0;
+      const weighted = (partials[i] ?? 0) * weight;
       right[column] = (right[column] ?? 0) - weighted * (residuals[r] ?? 0);
-      for (const [j, other] of row.columns.entries()) {
-        if (other > column) continue;
-        matrix.set(column, other, matrix.get(column, other) + weighted * (row.partials[j] ?? 0));
+      for (let j = 0; j < columns.length; j++) {
+        const place = column * count + (columns[j] ?? 0);
+        matrix[place] = (matrix[place] ?? 0) + weighted * (partials[j] ?? 0);
       }
     }
   }
-  const scale = matrix.diagonal().map((value) => 1 / Math.sqrt(value));
+  const scale = new Float64Array(count);
+  for (let i = 0; i < count; i++) scale[i] = 1 / Math.sqrt(matrix[i * count + i] ?? 0);
   if (!scale.every(Number.isFinite)) return null;
   for (let i = 0; i < count; i++) {
+    right[i] = (right[i] ?? 0) * (scale[i] ?? 0);
     for (let j = 0; j <= i; j++) {
-      const value = matrix.get(i, j) * (scale[i] ?? 0) * (scale[j] ?? 0);
-      matrix.set(i, j, value);
-      matrix.set(j, i, value);
+      const place = i * count + j;
+      matrix[place] = (matrix[place] ?? 0) * (scale[i] ?? 0) * (scale[j] ?? 0);
     }
   }
-  const cholesky = new CholeskyDecomposition(matrix);
-  if (!cholesky.isPositiveDefinite()) return null;
-  if (!cholesky.lowerTriangularMatrix.diagonal().every((pivot) => pivot > LEAST_PIVOT)) return null;
-  const scaledRight = Matrix.columnVector(Array.from(right, (value, i) => value * (scale[i] ?? 0)));
+  const lower = choleskyOf(matrix, count, LEAST_PIVOT);
+  if (!lower) return null;
   return {
-    change: () =>
-      Float64Array.from(
-        cholesky.solve(scaledRight).to1DArray(),
-        (value, i) => value * (scale[i] ?? 0),
+    change: () => solveCholesky(lower, count, right).map((value, i) => value * (scale[i] ?? 0)),
+    inverse: () =>
+      invertCholesky(lower, count).map((row, i) =>
+        row.map((value, j) => value * (scale[i] ?? 0) * (scale[j] ?? 0)),
       ),
-    inverse: () => {
-      const inverse = cholesky.solve(Matrix.eye(count));
-      return scale.map((scaleI, i) =>
-        Float64Array.from(scale, (scaleJ, j) => inverse.get(i, j) * scaleI * scaleJ),
-      );
-    },
   };
 }
+
+const emptyRow: SparseRow = { columns: [], partials: [], sigma: 1 };
 
 function moveState(state: RoomState, change: Float64Array, share: number): void {
   const by = (column: number) => share * (change[column] ?? 0);

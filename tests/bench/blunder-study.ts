@@ -1,0 +1,88 @@
+/**
+ * How often one wrong reading is noticed and rightly named, over random rooms.
+ * Run: npx tsx tests/bench/blunder-study.ts [--rooms 2000] [--seed 1] [--only loose,crooked-1,crooked-3]
+ */
+import { pathToFileURL } from 'node:url';
+import { CROOKED, STRAIGHT } from '../lib/measure/random-room';
+import { type Condition, type StudyRow, studyCondition } from './blunder-trials';
+
+/** The setting of MEASURE.md §12: straight walls, one height, each reading errs for itself, u(corner) 0.12°. */
+const LOOSE: Condition = {
+  name: 'loose',
+  title: 'straight walls, one height, loose tape class II, angle finder 0.12°',
+  out: STRAIGHT,
+  heightsMm: [910],
+  corners: 'finder',
+  usualBowMm: 0,
+  slipIn: ['length', 'diagonal'],
+};
+const CROOKED_1: Condition = {
+  name: 'crooked-1',
+  title:
+    'walls leaning 3 mm/m (sd) and bowed ±3 mm, one height, one tape class II, corners by legs',
+  out: CROOKED,
+  heightsMm: [910],
+  corners: 'legs',
+  usualBowMm: 3,
+  slipIn: ['length', 'diagonal'],
+};
+const CROOKED_3: Condition = {
+  ...CROOKED_1,
+  name: 'crooked-3',
+  title: 'the same, lengths and corners at three heights',
+  heightsMm: [100, 910, 1_450],
+};
+const CORNERS_1: Condition = {
+  ...CROOKED_1,
+  name: 'corners-1',
+  title: 'one height, the slip in a leg’s diagonal of a corner',
+  slipIn: ['corner'],
+};
+const CORNERS_3: Condition = {
+  ...CROOKED_3,
+  name: 'corners-3',
+  title: 'three heights, the slip in a leg’s diagonal of a corner',
+  slipIn: ['corner'],
+};
+export const CONDITIONS = [LOOSE, CROOKED_1, CROOKED_3, CORNERS_1, CORNERS_3];
+
+export const MOST_DIAGONALS = 5;
+
+function printTable(condition: Condition, rows: StudyRow[]): void {
+  console.log(`\n${condition.name}: ${condition.title}`);
+  console.log(
+    'cells: alarmed / named first / named among equals / wrongly named / named after the one reading asked for, %',
+  );
+  const head = Array.from({ length: MOST_DIAGONALS + 1 }, (_, n) => `${n} diagonals`.padEnd(36));
+  console.log(`${'slip'.padEnd(15)}${head.join('')}`);
+  for (const slip of new Set(rows.map((row) => row.slip))) {
+    const cells = rows
+      .filter((row) => row.slip === slip)
+      .map((row) => {
+        const share = (count: number) => ((100 * count) / row.trials).toFixed(1);
+        const { alarmed, first, among, wrong, settled } = row;
+        return [alarmed, first, among, wrong, settled].map(share).join(' / ').padEnd(36);
+      });
+    console.log(`${slip.padEnd(15)}${cells.join('')}`);
+  }
+}
+
+function argument(name: string, otherwise: string): string {
+  const at = process.argv.indexOf(`--${name}`);
+  return at < 0 ? otherwise : (process.argv[at + 1] ?? otherwise);
+}
+
+function main(): void {
+  const rooms = Number(argument('rooms', '2000'));
+  const seed = Number(argument('seed', '1'));
+  const only = argument('only', '').split(',').filter(Boolean);
+  for (const condition of CONDITIONS) {
+    if (only.length > 0 && !only.includes(condition.name)) continue;
+    const began = performance.now();
+    const rows = studyCondition(condition, { rooms, seed, mostDiagonals: MOST_DIAGONALS });
+    printTable(condition, rows);
+    console.log(`${rooms} rooms in ${((performance.now() - began) / 1000).toFixed(0)} s`);
+  }
+}
+
+if (import.meta.url === pathToFileURL(process.argv[1] ?? '').href) main();
