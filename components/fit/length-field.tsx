@@ -48,7 +48,7 @@ export function LengthField({ label, mm, unit, kind, onMm, isBare, error }: Leng
           setTyped((text) =>
             text !== null && parseLength(text, { unit, kind }).value === null ? text : null,
           )
-        } // prettier-ignore
+        }
       />
       {words ? (
         <p id={`${id}-error`} className="text-note font-medium text-chalk">

@@ -184,4 +184,4 @@ const shownErrors = (place: number) =>
     'share.unitId',
     'left.runId',
     'right.runId',
-  ].map((field) => `runs.${place}.${field}`); // prettier-ignore
+  ].map((field) => `runs.${place}.${field}`);

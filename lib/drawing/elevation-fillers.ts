@@ -89,7 +89,7 @@ function figures(
       words: length(top?.width.value ?? filler.greatest.value),
       tone: 'plain',
       drop: 12,
-    }, // prettier-ignore
+    },
     {
       zMm: (foot.zMm + head.zMm) / 2,
       words: `blank ${length(roundedMm(filler.blank, stepMm))}`,
@@ -101,7 +101,7 @@ function figures(
       words: length(bottom?.width.value ?? filler.least.value),
       tone: 'plain',
       drop: -5,
-    }, // prettier-ignore
+    },
   ];
   const away = side === 'left' ? -9 : 9;
   return lines.map(({ zMm, words, tone: lineTone, drop }) => {

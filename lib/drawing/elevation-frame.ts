@@ -139,7 +139,7 @@ function drawnEdge(
     return [
       { xMm: plainMm, zMm: 0 },
       { xMm: plainMm, zMm: topMm },
-    ]; // prettier-ignore
+    ];
   const rise = highest.zMm - lowest.zMm;
   const slope = rise > 0 ? (highest.xMm - lowest.xMm) / rise : 0;
   return [

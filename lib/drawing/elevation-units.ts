@@ -69,7 +69,7 @@ function front(sheet: ElevationSheet, run: Run, unit: PlacedUnit): Shape[] {
         .slice(1)
         .map((high, index) =>
           frame(left, right, (parts[index] ?? foot) + (index > 0 ? 16 : 0), high),
-        ); // prettier-ignore
+        );
     }
     case 'sink': {
       const rail = head - (head - foot) * 0.2;

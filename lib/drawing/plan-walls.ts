@@ -70,7 +70,7 @@ function openings(sheet: PlanSheet, wall: PlanWall): Shape[] {
         0,
         wall.inward,
         px,
-      ); // prettier-ignore
+      );
     const { x0Mm, x1Mm } = feature;
     const hole: Shape = {
       kind: 'area',

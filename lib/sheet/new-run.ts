@@ -1,7 +1,6 @@
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Run, Unit, UnitKind } from '@/lib/contracts/wall-book';
-
-const inch = 25.4;
+import { exactInches as inches } from '@/lib/measure/rules/exact-inches';
 
 /**
  * A run to begin with: the usual depth and heights of its level under the shop's rules, no units yet.
@@ -18,10 +17,14 @@ export function newRun(
   const wallFootMm = rules.counterTopMm + rules.counterToWallUnitMm;
   const heights = {
     base: [rules.kickHeightMm, rules.baseTopMm],
-    wall: [wallFootMm, wallFootMm + (isInches ? 30 * inch : 720)],
-    tall: [rules.kickHeightMm, isInches ? 84 * inch : 2_100],
+    wall: [wallFootMm, wallFootMm + (isInches ? inches(30) : 720)],
+    tall: [rules.kickHeightMm, isInches ? inches(84) : 2_100],
   } as const;
-  const depth = { base: [24 * inch, 560], wall: [12 * inch, 300], tall: [24 * inch, 560] } as const;
+  const depth = {
+    base: [inches(24), 560],
+    wall: [inches(12), 300],
+    tall: [inches(24), 560],
+  } as const;
   const [z0Mm, z1Mm] = heights[run.level];
   return {
     ...run,
@@ -39,24 +42,24 @@ export function newRun(
 }
 
 /** The width that a unit is most often built to, and whether it can be built to another. */
-const usual: Record<UnitKind, { inches: number; mm: number; isFixed: boolean }> = {
-  base: { inches: 24, mm: 600, isFixed: false },
-  drawers: { inches: 24, mm: 600, isFixed: false },
-  sink: { inches: 36, mm: 800, isFixed: false },
-  corner: { inches: 36, mm: 900, isFixed: true },
-  wall: { inches: 24, mm: 600, isFixed: false },
-  tall: { inches: 24, mm: 600, isFixed: false },
-  panel: { inches: 0.75, mm: 18, isFixed: true },
-  dishwasher: { inches: 24, mm: 600, isFixed: true },
-  range: { inches: 30, mm: 600, isFixed: true },
-  refrigerator: { inches: 36, mm: 900, isFixed: true },
-  hood: { inches: 30, mm: 600, isFixed: true },
-  open: { inches: 12, mm: 300, isFixed: false },
+const usual: Record<UnitKind, { inInches: number; mm: number; isFixed: boolean }> = {
+  base: { inInches: 24, mm: 600, isFixed: false },
+  drawers: { inInches: 24, mm: 600, isFixed: false },
+  sink: { inInches: 36, mm: 800, isFixed: false },
+  corner: { inInches: 36, mm: 900, isFixed: true },
+  wall: { inInches: 24, mm: 600, isFixed: false },
+  tall: { inInches: 24, mm: 600, isFixed: false },
+  panel: { inInches: 0.75, mm: 18, isFixed: true },
+  dishwasher: { inInches: 24, mm: 600, isFixed: true },
+  range: { inInches: 30, mm: 600, isFixed: true },
+  refrigerator: { inInches: 36, mm: 900, isFixed: true },
+  hood: { inInches: 30, mm: 600, isFixed: true },
+  open: { inInches: 12, mm: 300, isFixed: false },
 };
 
 export function newUnit(rules: FitRules, unit: { id: string; kind: UnitKind }): Unit {
-  const { inches, mm, isFixed } = usual[unit.kind];
-  const widthMm = rules.unit === 'in' ? inches * inch : mm;
+  const { inInches, mm, isFixed } = usual[unit.kind];
+  const widthMm = rules.unit === 'in' ? inches(inInches) : mm;
   return {
     ...unit,
     name: '',
@@ -67,6 +70,6 @@ export function newUnit(rules: FitRules, unit: { id: string; kind: UnitKind }): 
 
 /** Six inches (150 mm) either way in steps of three (50 mm); never under six inches (150 mm). */
 export function alterableAbout(widthMm: number, rules: FitRules): NonNullable<Unit['alterable']> {
-  const [reachMm, stepMm] = rules.unit === 'in' ? [6 * inch, 3 * inch] : [150, 50];
+  const [reachMm, stepMm] = rules.unit === 'in' ? [inches(6), inches(3)] : [150, 50];
   return { minMm: Math.max(reachMm, widthMm - reachMm), maxMm: widthMm + reachMm, stepMm };
 }

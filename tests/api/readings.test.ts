@@ -98,7 +98,7 @@ describe('readings', () => {
     const answer = await send(
       [bad[0], good[0], ...bad.slice(1, 4), good[1], ...bad.slice(4), good[2]],
       own.roomId,
-    ); // prettier-ignore
+    );
     expect(answer.status).toBe(200);
     expect(answer.accepted).toEqual(good.map(({ id }) => id));
     expect(answer.parked).toHaveLength(bad.length);

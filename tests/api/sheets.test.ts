@@ -92,7 +92,7 @@ describe('sheets', () => {
     if (!sinkWall) throw new Error('the kitchen has no run');
     const units = sinkWall.units.map((unit) =>
       unit.kind === 'sink' ? { ...unit, widthMm: 838.2 } : unit,
-    ); // prettier-ignore
+    );
     await saveRuns(await contextOf(shop, 'bench'), {
       roomId: own.roomId,
       runs: [{ ...sinkWall, units }, ...others],
@@ -127,7 +127,7 @@ describe('sheets', () => {
     const [rules] = await db
       .select({ rules: shops.rules })
       .from(shops)
-      .where(eq(shops.id, shop.shop.id)); // prettier-ignore
+      .where(eq(shops.id, shop.shop.id));
     if (!rules) throw new Error('the shop has no rules');
     const changed = { ...rules.rules, fit: { ...rules.rules.fit, scribeMarginMm: 25 } };
     await db.update(shops).set({ rules: changed }).where(eq(shops.id, shop.shop.id));
@@ -148,7 +148,7 @@ describe('sheets', () => {
       .update(releases)
       .set({ revision: 'Z' })
       .where(row)
-      .then(() => null, refusedConstraint); // prettier-ignore
+      .then(() => null, refusedConstraint);
     const removal = await db
       .delete(releases)
       .where(row)
@@ -177,7 +177,7 @@ describe('sheets', () => {
     const tooMuch = {
       ...sinkWall,
       units: sinkWall.units.map((unit) => ({ ...unit, widthMm: unit.widthMm + 25.4 })),
-    }; // prettier-ignore
+    };
     await saveRuns(await contextOf(shop, 'bench'), {
       roomId: own.roomId,
       runs: [tooMuch, ...others],
@@ -212,7 +212,7 @@ describe('sheets', () => {
       release(own.roomId),
       release(own.roomId),
       release(own.roomId),
-    ]); // prettier-ignore
+    ]);
     const won = answers.filter(({ status }) => status === 200);
     expect(won).toHaveLength(1);
     expect(answers.filter(({ status }) => status === 409)).toHaveLength(2);
@@ -252,7 +252,7 @@ describe('sheets', () => {
       expect(job.stage).toBe('in-build');
       expect(
         job.story.filter(({ summary }) => summary.startsWith('The bench took up')),
-      ).toHaveLength(1); // prettier-ignore
+      ).toHaveLength(1);
     });
 
     it('does not take up a sheet that a newer one has replaced', async () => {

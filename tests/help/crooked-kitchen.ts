@@ -41,7 +41,7 @@ export function crookedKitchen({
     [3600, 0],
     [3600, 2880],
     [0, 2880],
-  ]; // prettier-ignore
+  ];
   const corners = walls.map(({ from }, index): [number, number] => {
     const [x, y] = square[index] ?? [0, 0];
     return [x + (from[0] - x) * crookedness, y + (from[1] - y) * crookedness];
@@ -127,7 +127,6 @@ export function crookedKitchen({
     [0, 2],
     [1, 3],
   ] as const) {
-    // prettier-ignore
     const [one, other] = [at(corners, from), at(corners, to)];
     const valueMm = onStep(Math.hypot(other[0] - one[0], other[1] - one[1]));
     book.push({

@@ -1,0 +1,65 @@
+import { describe, expect, it } from 'vitest';
+import { fitRoom } from '@/lib/measure/fit-room';
+import { defaultShopRules } from '@/lib/measure/rules/default-rules';
+import { cutList } from '@/lib/sheet/cut-list';
+import { crookedKitchen } from '../../help/crooked-kitchen';
+
+const rules = defaultShopRules('US').fit;
+const { wallBook, runs } = crookedKitchen();
+const fit = fitRoom(wallBook, runs, rules);
+const rows = cutList(fit, runs);
+
+describe('cutList', () => {
+  it('lists fillers, kick faces and finished ends run by run, each once', () => {
+    expect(rows.map(({ runName, piece }) => `${runName}: ${piece}`)).toEqual([
+      'Sink wall: Filler, left',
+      'Sink wall: Filler, right',
+      'Sink wall: Kick face',
+      'Uppers left: Filler, left',
+      'Uppers left: Filler, right',
+      'Uppers right: Filler, left',
+      'Uppers right: Filler, right',
+      'Tall wall: Filler, right',
+      'Tall wall: Finished end, end panel',
+      'Tall wall: Kick face',
+    ]);
+    expect(new Set(rows.map(({ key }) => key)).size).toBe(rows.length);
+  });
+
+  it('never cuts a blank narrower than the widest face that it must cover', () => {
+    for (const { piece, first, last, cut } of rows.filter(({ how }) => how === 'blank')) {
+      const widest = Math.max(first?.value ?? 0, last?.value ?? 0);
+      expect(cut.value, piece).toBeGreaterThan(widest);
+    }
+  });
+
+  it('lists the mitre of a corner only where runs meet at it', () => {
+    expect(rows.some(({ how }) => how === 'saw')).toBe(false);
+    const [sink, , , tall] = runs;
+    if (!sink || !tall) throw new Error('the kitchen is not whole');
+    const [, wallB] = wallBook.room.chains[0]?.walls ?? [];
+    const side = {
+      ...tall,
+      wallId: wallB?.id ?? '',
+      left: { kind: 'run', runId: sink.id, through: 'other' } as const,
+    };
+    const meeting = [
+      { ...sink, right: { kind: 'run', runId: side.id, through: 'this' } as const },
+      side,
+    ];
+    const saws = cutList(fitRoom(wallBook, meeting, rules), meeting).filter(
+      ({ how }) => how === 'saw',
+    );
+    expect(saws.map(({ runName }) => runName)).toEqual(['Corner A–B']);
+    expect(saws[0]?.cut.value).toBeCloseTo(Math.abs(90 - 91.18 / 2), 1);
+  });
+
+  it('marks the filler of a run that is too long', () => {
+    const wide = runs.map((run) => ({
+      ...run,
+      units: run.units.map((unit) => ({ ...unit, widthMm: unit.widthMm + 20 })),
+    }));
+    const wrong = cutList(fitRoom(wallBook, wide, rules), wide).filter(({ isWrong }) => isWrong);
+    expect(wrong.map(({ runName }) => runName)).toContain('Sink wall');
+  });
+});
