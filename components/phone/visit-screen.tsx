@@ -20,12 +20,10 @@ export function VisitScreen({ visit, mayReport, mayMeasure }: VisitScreenProps) 
           title={visit.customerName}
           meta={`${visitKindWords[visit.kind]} · job ${visit.jobNumber}`}
         />
-        <p className="flex items-baseline justify-between gap-3">
-          <span className="text-lead font-bold">
-            {visit.dayWords}, {visit.windowWords}
-          </span>
-          <VisitState visit={visit} />
+        <p className="text-lead font-bold">
+          {visit.dayWords}, {visit.windowWords}
         </p>
+        <VisitState visit={visit} />
         {mayReport ? <VisitTaps visit={visit} /> : null}
       </section>
 
@@ -40,9 +38,12 @@ export function VisitScreen({ visit, mayReport, mayMeasure }: VisitScreenProps) 
           {visit.phone ? (
             <a
               href={`tel:${visit.phone.replace(/[^+\d]/g, '')}`}
-              className="flex min-h-thumb items-center justify-center rounded border border-pine font-bold text-pine active:bg-tint"
+              className="flex min-h-thumb items-center justify-center rounded border border-pine text-center leading-tight font-bold text-pine active:bg-tint"
             >
-              Ring {visit.phone}
+              <span>
+                Ring
+                <span className="block text-note font-normal">{visit.phone}</span>
+              </span>
             </a>
           ) : null}
         </div>

@@ -1,10 +1,9 @@
 'use client';
 
-import { lazy, Suspense, useState } from 'react';
+import { lazy, Suspense, useEffect, useRef, useState } from 'react';
 import { keepDraft } from '@/components/phone/draft-store';
 import type { RoomOnPhone } from '@/components/phone/room-store';
 import { EmptyState } from '@/components/ui/empty-state';
-import { LinkButton } from '@/components/ui/link-button';
 import { Skeleton, SkeletonScreen } from '@/components/ui/skeleton';
 import { walkRoom } from '@/lib/measure/room-walk';
 import { nextAsk, toGoWords } from '@/lib/walls-pad/next-ask';
@@ -21,6 +20,7 @@ import {
   questionOfPlan,
   questionOfReading,
 } from './pad-question';
+import { PlaceButton } from './place-button';
 import { QuestionPicture, WallPicture } from './question-picture';
 import { ReadingDetail } from './reading-detail';
 import { ReadingPad } from './reading-pad';
@@ -40,6 +40,7 @@ export function BookScreens({ room, kept }: { room: RoomOnPhone; kept: KeptOnPho
   const [afterSlot, setAfterSlot] = useState(kept.afterSlot);
   const [lastKeptId, setLastKeptId] = useState<string | null>(null);
 
+  useScrollUp(placeHref(place));
   const roomId = view.wallBook.room.id;
   const speech = speechIn(view.rules, habits.unit);
   const isDrawn = view.wallBook.room.chains.length > 0;
@@ -186,6 +187,16 @@ export function BookScreens({ room, kept }: { room: RoomOnPhone; kept: KeptOnPho
   }
 }
 
+/** Another place of the book is another page: it begins at its top. */
+function useScrollUp(href: string): void {
+  const shown = useRef(href);
+  useEffect(() => {
+    if (shown.current === href) return;
+    shown.current = href;
+    window.scrollTo(0, 0);
+  }, [href]);
+}
+
 function Waiting() {
   return (
     <SkeletonScreen what="what is to be read">
@@ -205,12 +216,10 @@ function AllRead() {
         title="Nothing more is asked for"
         action={
           <div className="flex w-full flex-col gap-2">
-            <LinkButton size="thumb" href={placeHref({ at: 'leave' })}>
-              Before you leave
-            </LinkButton>
-            <LinkButton size="thumb" look="line" href={placeHref({ at: 'list' })}>
+            <PlaceButton place={{ at: 'leave' }}>Before you leave</PlaceButton>
+            <PlaceButton look="line" place={{ at: 'list' }}>
               The whole room
-            </LinkButton>
+            </PlaceButton>
           </div>
         }
       >

@@ -147,7 +147,8 @@ export function FeaturePad(props: FeaturePadProps) {
         />
       }
       title={`${featureWord(kind)} on wall ${props.wallName}`}
-      detail="from the left corner, and up from the finished floor"
+      detail="from the left corner · up from the floor · out of the wall"
+      toGo=""
       fields={featureFields}
       draft={draft}
       onDraft={change}

@@ -17,6 +17,8 @@ export type FieldPadProps = {
   picture: ReactNode;
   title: string;
   detail: string;
+  /** "5 of 23 to go". */
+  toGo: string;
   fields: readonly PadField[];
   draft: PadDraft;
   onDraft: (draft: PadDraft) => void;
@@ -46,9 +48,14 @@ export function FieldPad(props: FieldPadProps) {
   const { nudge } = tapeTicks(stepMm);
   return (
     <div className="flex flex-1 flex-col">
-      <div className="relative min-h-24 flex-[2]">{props.picture}</div>
+      <div className="relative min-h-16 flex-1">{props.picture}</div>
       <div className="px-3.5">
-        <h1 className="text-lead leading-tight font-bold">{props.title}</h1>
+        <div className="flex items-baseline justify-between gap-3">
+          <h1 className="text-lead leading-tight font-bold">
+            <FractionWords>{props.title}</FractionWords>
+          </h1>
+          <span className="shrink-0 text-note text-graphite">{props.toGo}</span>
+        </div>
         <p className="text-note leading-snug text-graphite">
           <FractionWords>{props.detail}</FractionWords>
         </p>
@@ -59,7 +66,10 @@ export function FieldPad(props: FieldPadProps) {
           aria-label={field?.label ?? 'value'}
           className="text-reading font-bold tracking-tight"
         >
-          <PadValue entry={entry} />
+          <PadValue
+            entry={entry}
+            emptyText={<span className="inline-block h-10 w-0.5 bg-pine" />}
+          />
         </output>
         <span className="flex items-center gap-2">
           {nudge !== null && entry.unit === 'in' ? (
@@ -169,7 +179,7 @@ function ActionRow({ actions }: { actions: PadAction[] }) {
           key={key}
           type="button"
           onClick={onPress}
-          className="min-h-12 min-w-0 flex-1 touch-manipulation truncate px-1 text-note leading-tight active:bg-tint"
+          className="min-h-12 min-w-0 flex-1 touch-manipulation px-1.5 text-note leading-tight active:bg-tint"
         >
           {value === undefined ? (
             label

@@ -1,7 +1,6 @@
 'use client';
 
 import { useMemo } from 'react';
-import { LinkButton } from '@/components/ui/link-button';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { WallBookView } from '@/lib/contracts/rooms';
 import { fitRoom } from '@/lib/measure/fit-room';
@@ -12,6 +11,7 @@ import { placeHref } from './book-place';
 import { FractionWords } from './fraction-words';
 import { HandIn } from './hand-in';
 import { LineLink } from './line-link';
+import { PlaceButton } from './place-button';
 import { RoomFrame } from './room-frame';
 import { RoomProof } from './room-proof';
 
@@ -56,9 +56,9 @@ export default function LeaveScreen({ view, plan, queue }: LeaveScreenProps) {
         </section>
       ) : null}
       <HandIn view={view} mustCount={must.length} queue={queue} />
-      <LinkButton size="thumb" look="plain" href={placeHref({ at: 'list' })}>
+      <PlaceButton look="plain" place={{ at: 'list' }}>
         The whole room
-      </LinkButton>
+      </PlaceButton>
     </RoomFrame>
   );
 }

@@ -26,7 +26,7 @@ export function PadKeys({ cornerKey, onKey, nextWords, onNext, isBusy, onAgain }
     </Key>
   );
   return (
-    <div className="grid min-h-[224px] flex-[3] grid-cols-4 grid-rows-[repeat(4,minmax(3.5rem,1fr))] gap-px border-b border-rule bg-rule pb-[env(safe-area-inset-bottom)]">
+    <div className="grid max-h-76 min-h-56 flex-1 grid-cols-4 grid-rows-[repeat(4,minmax(3.5rem,1fr))] gap-px border-b border-rule bg-rule pb-[env(safe-area-inset-bottom)]">
       {(['7', '8', '9'] as const).map(digit)}
       <Key onPress={() => onKey('back')} label="take the last back">
         ⌫
@@ -45,15 +45,18 @@ export function PadKeys({ cornerKey, onKey, nextWords, onNext, isBusy, onAgain }
       <Key onPress={() => onKey(cornerKey)} label={cornerSpoken[cornerKey]} className="text-lead">
         {cornerWords[cornerKey]}
       </Key>
-      {digit('0')}
+      <Key
+        onPress={() => onKey('0')}
+        className={`text-title font-medium ${onAgain ? '' : 'col-span-2'}`}
+      >
+        0
+      </Key>
       {onAgain ? (
         <Key onPress={onAgain} className="leading-tight">
           again
           <span className="block text-note">2nd reading</span>
         </Key>
-      ) : (
-        <span className="bg-sheet" />
-      )}
+      ) : null}
     </div>
   );
 }

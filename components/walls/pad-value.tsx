@@ -1,9 +1,10 @@
+import type { ReactNode } from 'react';
 import { FractionText } from '@/components/ui/fraction-text';
 import { fractionParts } from '@/lib/units/fraction-parts';
 import { entryText, isEmptyEntry, type PadEntry } from '@/lib/walls-pad/pad-entry';
 
 /** An entry set like a dimension, large or in a chip; a screen reader hears the plain text. */
-export function PadValue({ entry, emptyText = '–' }: { entry: PadEntry; emptyText?: string }) {
+export function PadValue({ entry, emptyText = '–' }: { entry: PadEntry; emptyText?: ReactNode }) {
   if (isEmptyEntry(entry) && !entry.isNegative) {
     return <span className="text-graphite">{emptyText}</span>;
   }

@@ -110,9 +110,24 @@ function WallLine({
         className={`text-[12px] ${isCurrent ? 'fill-pine font-bold' : 'fill-graphite'}`}
       >
         <tspan className="font-bold">{wall.name}</tspan>
-        {isRead && hasRoom ? ` ${read}` : ''}
+        {isRead && hasRoom ? <PlanLength text={read} /> : null}
       </text>
     </a>
+  );
+}
+
+/** A length on the plan, its fraction set as one. */
+function PlanLength({ text }: { text: string }) {
+  const [, whole = '', fraction = ''] = /^(\d*)(?: ?(\d+\/\d+))?$/.exec(text) ?? ['', text];
+  return (
+    <>
+      <tspan dx="3">{whole}</tspan>
+      {fraction ? (
+        <tspan dx="2" className="diagonal-fractions">
+          {fraction.replace('/', '⁄')}
+        </tspan>
+      ) : null}
+    </>
   );
 }
 
@@ -123,7 +138,7 @@ function CornerMark({
   isCurrent,
 }: InFrame & { corner: PlanCorner; walls: PlanWall[]; isCurrent: boolean }) {
   const at = place(corner.at);
-  const label = insideCorner(corner, walls, place, 20);
+  const label = insideCorner(corner, walls, place, 27);
   return (
     <g>
       {isCurrent ? (

@@ -3,19 +3,18 @@
 import { type ReactNode, useState } from 'react';
 import { usePersonId } from '@/components/phone/phone-person';
 import { Button } from '@/components/ui/button';
-import { LinkButton } from '@/components/ui/link-button';
 import { TitleStamp } from '@/components/ui/title-stamp';
 import type { WallBookView } from '@/lib/contracts/rooms';
 import type { Reading } from '@/lib/contracts/wall-book';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { readingWords } from '@/lib/walls-pad/reading-words';
 import type { LengthSpeech } from '@/lib/walls-pad/say-length';
-import { placeHref } from './book-place';
 import { ChoiceSheet } from './choice-sheet';
 import { FractionWords } from './fraction-words';
 import { keepWithdrawal } from './keep-note';
 import type { PadHabits } from './pad-habits';
 import { touchesWord, withdrawReasons } from './pad-words';
+import { PlaceButton } from './place-button';
 import { RoomFrame } from './room-frame';
 
 type ReadingDetailProps = {
@@ -55,7 +54,7 @@ export function ReadingDetail(props: ReadingDetailProps) {
   const tool = view.tools.find(({ id }) => id === reading.toolId)?.name ?? 'unknown';
   return (
     <RoomFrame picture={props.picture} title={<FractionWords>{what}</FractionWords>}>
-      <p className="text-reading font-bold">
+      <p className="text-title font-bold">
         <FractionWords>{value}</FractionWords>
       </p>
       {stands ? null : (
@@ -77,16 +76,15 @@ export function ReadingDetail(props: ReadingDetailProps) {
       />
       {stands ? (
         <div className="flex flex-col gap-2">
-          <LinkButton
-            size="thumb"
-            href={
+          <PlaceButton
+            place={
               reading.kind === 'feature'
-                ? placeHref({ at: 'feature', wallId: reading.wallId, readingId: reading.id })
-                : placeHref({ at: 'correct', readingId: reading.id })
+                ? { at: 'feature', wallId: reading.wallId, readingId: reading.id }
+                : { at: 'correct', readingId: reading.id }
             }
           >
             Correct it
-          </LinkButton>
+          </PlaceButton>
           <Button size="thumb" look="chalk" onClick={() => setIsWithdrawing(true)}>
             Take it back
           </Button>

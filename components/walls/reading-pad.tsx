@@ -82,7 +82,8 @@ export function ReadingPad(props: ReadingPadProps) {
     <FieldPad
       picture={props.picture}
       title={question.title}
-      detail={isFree ? props.toGo : `${howTo} · ${props.toGo}`}
+      detail={isFree ? question.why : howTo}
+      toGo={props.toGo}
       fields={pad.fields}
       draft={pad.draft}
       onDraft={pad.change}

@@ -19,7 +19,8 @@ export function RoomProof({ fit, view, plan }: RoomProofProps) {
     const place = placeOfSlot(step.slot, known);
     return place ? [{ ...step, place }] : [];
   });
-  const kind = suspect || disagreeing.length > 0 ? 'problem' : adjustment ? 'within' : 'waiting';
+  const isProved = adjustment?.observations.every(({ smallestSlip }) => smallestSlip !== null);
+  const kind = suspect || disagreeing.length > 0 ? 'problem' : isProved ? 'within' : 'waiting';
   const word = { problem: 'look again', within: 'holds together', waiting: 'not proved yet' }[kind];
   return (
     <section>

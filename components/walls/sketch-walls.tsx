@@ -162,8 +162,11 @@ function SketchWall(props: SketchWallsProps & { wall: Wall; walls: Wall[] }) {
       detail={
         isAngle
           ? 'the angle inside the room, in degrees'
-          : `${at + 1} of ${walls.length} walls · to the nearest few inches will do`
+          : unit === 'in'
+            ? 'to the nearest few inches will do'
+            : 'to the nearest 100 mm will do'
       }
+      toGo={`${at + 1} of ${walls.length} walls`}
       fields={[isAngle ? angleField : lengthField]}
       draft={pad}
       onDraft={(next) => {

@@ -1,5 +1,4 @@
 import type { ReactNode } from 'react';
-import { LinkButton } from '@/components/ui/link-button';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { WallBookView } from '@/lib/contracts/rooms';
 import type { Reading } from '@/lib/contracts/wall-book';
@@ -14,6 +13,7 @@ import type { LengthSpeech } from '@/lib/walls-pad/say-length';
 import { type BookPlace, placeHref } from './book-place';
 import { FractionWords } from './fraction-words';
 import { LineLink } from './line-link';
+import { PlaceButton } from './place-button';
 import { RoomFrame } from './room-frame';
 
 type WallListProps = {
@@ -75,9 +75,9 @@ export function WallList({ wallId, view, plan, hereIds, speech, picture }: WallL
           ))}
         </ul>
       </section>
-      <LinkButton size="thumb" look="plain" href={placeHref({ at: 'list' })}>
+      <PlaceButton look="plain" place={{ at: 'list' }}>
         The whole room
-      </LinkButton>
+      </PlaceButton>
     </RoomFrame>
   );
 }

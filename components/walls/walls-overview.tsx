@@ -12,6 +12,7 @@ import type { LengthSpeech } from '@/lib/walls-pad/say-length';
 import { placeHref } from './book-place';
 import { FractionWords } from './fraction-words';
 import { LineLink } from './line-link';
+import { PlaceButton } from './place-button';
 import { RoomFrame } from './room-frame';
 
 type WallsOverviewProps = {
@@ -31,9 +32,9 @@ export function WallsOverview({ view, plan, speech, picture }: WallsOverviewProp
   );
   return (
     <RoomFrame picture={picture} title={room.name} meta={toGoWords(plan)}>
-      <LinkButton size="thumb" href={placeHref({ at: 'next' })}>
+      <PlaceButton place={{ at: 'next' }}>
         {plan.some(isOpen) ? 'Go on measuring' : 'Back to the pad'}
-      </LinkButton>
+      </PlaceButton>
       <section>
         <TitleBlock title="Walls" />
         <ul className="divide-y divide-rule">
@@ -80,12 +81,12 @@ export function WallsOverview({ view, plan, speech, picture }: WallsOverviewProp
         </ul>
       </section>
       <div className="flex flex-col gap-2">
-        <LinkButton size="thumb" look="line" href={placeHref({ at: 'leave' })}>
+        <PlaceButton look="line" place={{ at: 'leave' }}>
           Before you leave
-        </LinkButton>
-        <LinkButton size="thumb" look="plain" href={placeHref({ at: 'sketch' })}>
+        </PlaceButton>
+        <PlaceButton look="plain" place={{ at: 'sketch' }}>
           Change the drawing
-        </LinkButton>
+        </PlaceButton>
         <LinkButton size="thumb" look="plain" href={paths.today()}>
           Today
         </LinkButton>

@@ -16,7 +16,7 @@ export type StripState = {
 /**
  * What the strip says, always: what is safe on the phone, what waits, what the office would not take.
  *
- * Example: three waiting, no signal: "saved here · 3 to send, no signal".
+ * Example: three waiting, no signal: "saved here · 3, no signal".
  */
 export function stripState({ queue, personId, isSignedOut, isOffline }: QueueState): StripState {
   const own = queue.filter((item) => item.personId === personId);
@@ -32,6 +32,6 @@ export function stripState({ queue, personId, isSignedOut, isOffline }: QueueSta
   if (isSignedOut) return { kind: 'sign-in', words: `saved here · sign in to send ${waiting}` };
   return {
     kind: 'waiting',
-    words: `saved here · ${waiting} to send${isOffline ? ', no signal' : ''}${ofOthers}`,
+    words: `saved here · ${waiting}${isOffline ? ', no signal' : ' to send'}${ofOthers}`,
   };
 }

@@ -23,8 +23,8 @@ export function howToWords(
       const walls = walkRoom(room).byId.get(ask.cornerWallId);
       const [left, right] = [walls?.before?.name ?? '?', walls?.wall.name ?? '?'];
       return ask.carriedPast
-        ? `${say(ask.zMm)} up · straightedge along ${left}, carried past the corner · mark it, and ${right}`
-        : `${say(ask.zMm)} up · mark ${left} and ${right} from the corner, then measure mark to mark`;
+        ? `${say(ask.zMm)} up · straightedge along ${left} past the corner: mark it, mark ${right}`
+        : `${say(ask.zMm)} up · mark ${left} and ${right}, then measure mark to mark`;
     }
     case 'face':
       return `${say(ask.xMm)} from the left corner · ${say(ask.zMm)} up · from the line to the wall`;

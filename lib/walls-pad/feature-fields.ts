@@ -6,11 +6,11 @@ import type { PadField } from './pad-fields';
 
 /** Places on the wall: from the left corner, and up from the finished floor. */
 export const featureFields: PadField[] = [
-  { name: 'x0', label: 'from left', kind: 'position' },
+  { name: 'x0', label: 'left', kind: 'position' },
   { name: 'width', label: 'width', kind: 'unit-width' },
-  { name: 'z0', label: 'from floor', kind: 'height' },
+  { name: 'z0', label: 'up', kind: 'height' },
   { name: 'height', label: 'height', kind: 'unit-width' },
-  { name: 'projection', label: 'stands out', kind: 'projection', isOptional: true },
+  { name: 'projection', label: 'out', kind: 'projection', isOptional: true },
 ];
 
 /** What opens, and so needs to be told which way. */

@@ -24,5 +24,5 @@ export function nextAsk(
 /** "5 of 23 to go"; must and should count alike, skipped ones are done with. */
 export function toGoWords(plan: readonly PlannedReading[]): string {
   const open = plan.filter(isOpen).length;
-  return open === 0 ? 'nothing to go' : `${open} of ${plan.length} to go`;
+  return open === 0 ? 'all read' : `${open} of ${plan.length} to go`;
 }

@@ -24,7 +24,7 @@ export function padFields(ask: PadAsk, cornerMethod: CornerMethod = 'legs'): Pad
       return [
         { name: 'legLeft', label: 'left leg', kind: 'leg' },
         { name: 'legRight', label: 'right leg', kind: 'leg' },
-        { name: 'diagonal', label: 'mark to mark', kind: 'corner-diagonal' },
+        { name: 'diagonal', label: 'diagonal', kind: 'corner-diagonal' },
       ];
     case 'face':
       return [{ name: 'gap', label: 'gap', kind: 'gap' }];

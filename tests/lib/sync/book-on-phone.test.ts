@@ -80,7 +80,7 @@ describe('stripState', () => {
   it.each([
     [{}, 'sent', 'all sent'],
     [{ queue: [item] }, 'waiting', 'saved here · 1 to send'],
-    [{ queue: [item], isOffline: true }, 'waiting', 'saved here · 1 to send, no signal'],
+    [{ queue: [item], isOffline: true }, 'waiting', 'saved here · 1, no signal'],
     [{ queue: [item], isSignedOut: true }, 'sign-in', 'saved here · sign in to send 1'],
     [{ queue: [{ ...item, parked: 'no' }] }, 'parked', 'saved here · 1 not taken'],
     [{ queue: [{ ...item, personId: 'ben' }] }, 'sent', 'all sent · 1 of another person'],

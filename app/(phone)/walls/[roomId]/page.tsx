@@ -2,6 +2,7 @@ import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
 import { QueueStatus } from '@/components/phone/queue-status';
 import { PhoneShell } from '@/components/shell/phone-shell';
+import { RoomWhere } from '@/components/walls/room-where';
 import { WallBookScreen } from '@/components/walls/wall-book-screen';
 import { openWallBookInput } from '@/lib/contracts/rooms';
 import { found } from '@/server/base/found';
@@ -23,16 +24,8 @@ export default async function WallsPage({
   const asked = openWallBookInput.safeParse({ roomId, jobId: job });
   if (!asked.success) notFound();
   const view = await found(openWallBook(ctx, asked.data));
-  const { room } = view.wallBook;
   return (
-    <PhoneShell
-      where={
-        <a href="#list">
-          <b>{view.customerName}</b> · {room.name || 'new room'}
-        </a>
-      }
-      status={<QueueStatus />}
-    >
+    <PhoneShell where={<RoomWhere view={view} />} status={<QueueStatus />}>
       <WallBookScreen view={view} />
     </PhoneShell>
   );
