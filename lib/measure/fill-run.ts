@@ -130,6 +130,18 @@ export function fillRun(input: FillRunInput): Outcome<FilledRun> {
   };
 }
 
+/** Where the units of a run would stand, and nothing more; none where the ends are impossible. */
+export function layOut(input: FillRunInput): FilledRun['placed'] {
+  if (endProblems(input.frame).length > 0) return [];
+  const covariance = frameCovariance(input.frame);
+  const sides = {
+    left: lookAtEnd(input, 'left', covariance),
+    right: lookAtEnd(input, 'right', covariance),
+  };
+  const shared = shareSlack(shareLimits(input, sides), widthSums(input));
+  return placeUnits(input, sides.left.plane.xMm + shared.leftFaceMm);
+}
+
 type Sides = { left: FillSide; right: FillSide };
 
 /** Room between the governing places, each clear of its end. */

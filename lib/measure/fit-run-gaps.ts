@@ -37,6 +37,20 @@ export function runSetLine(context: FitContext, plane: RunPlane): RunSetLine {
   };
 }
 
+/** The set line turns the boxes a little after their edges were laid out on the straight wall. */
+const SAME_EDGE_MM = 20;
+
+/** The one that stands nearest to a place, if near enough to be the same edge. */
+export function sameEdge<T>(things: T[], placeOf: (thing: T) => number, xMm: number): T | null {
+  let found: T | null = null;
+  for (const thing of things) {
+    const apartMm = Math.abs(placeOf(thing) - xMm);
+    if (apartMm >= SAME_EDGE_MM) continue;
+    if (found === null || apartMm < Math.abs(placeOf(found) - xMm)) found = thing;
+  }
+  return found;
+}
+
 /** Nobody read the face: nothing, as sure as the usual bow. */
 function unreadGap(context: FitContext) {
   return figure(0, context.rules.usualBowMm / Math.sqrt(3), []);
@@ -60,7 +74,7 @@ export function backGaps(context: FitContext, { run, plane, filled }: WorkedRun)
     );
   const units = filled?.placed ?? [];
   const atEdges = line.edges.flatMap((edge): BackGap[] => {
-    const unit = units.find(({ leftMm }) => Math.abs(leftMm - edge.xMm) < 5) ?? units.at(-1);
+    const unit = sameEdge(units, ({ leftMm }) => leftMm, edge.xMm) ?? units.at(-1);
     const finished = finishedEndAt(run, edge, units);
     if (!unit) return [];
     return [
@@ -82,7 +96,8 @@ function finishedEndAt(
   edge: EdgeGap,
   units: { leftMm: number; rightMm: number }[],
 ): 'left' | 'right' | null {
-  const near = (xMm: number | undefined) => xMm !== undefined && Math.abs(xMm - edge.xMm) < 5;
+  const near = (xMm: number | undefined) =>
+    xMm !== undefined && Math.abs(xMm - edge.xMm) < SAME_EDGE_MM / 2;
   if (run.left.kind === 'open' && near(units[0]?.leftMm)) return 'left';
   if (run.right.kind === 'open' && near(units.at(-1)?.rightMm)) return 'right';
   return null;

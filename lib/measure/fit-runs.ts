@@ -2,13 +2,18 @@
 import type { Run } from '@/lib/contracts/wall-book';
 import { type ClearOpening, clearOpening, placeWords } from '@/lib/measure/clear-opening';
 import type { FacePlace } from '@/lib/measure/end-view';
-import { type FilledRun, type FillRunInput, fillRun } from '@/lib/measure/fill-run';
+import { type FilledRun, type FillRunInput, fillRun, layOut } from '@/lib/measure/fill-run';
 import type { FitContext } from '@/lib/measure/fit-context';
 import { fitFigure } from '@/lib/measure/fit-figure';
 import { fillInput, fitFill } from '@/lib/measure/fit-fill';
 import { fitFiller } from '@/lib/measure/fit-filler';
-import { backGaps, finishedEndScribes, runSetLine } from '@/lib/measure/fit-run-gaps';
-import { firstBand, fitSetLines, type RunPlane } from '@/lib/measure/fit-set-lines';
+import { backGaps, finishedEndScribes, runSetLine, sameEdge } from '@/lib/measure/fit-run-gaps';
+import {
+  assumedSetLines,
+  firstBand,
+  fitSetLines,
+  type RunPlane,
+} from '@/lib/measure/fit-set-lines';
 import { frontDepth } from '@/lib/measure/room-walk';
 import { type FramedRun, frameRun } from '@/lib/measure/run-ends';
 import type { OpeningPlace, RunEndFit, RunFit, RunOpening } from '@/lib/measure/run-fit';
@@ -28,16 +33,16 @@ export type WorkedRun = {
   problems: Problem[];
 };
 
-/** Sets the lines twice: over the whole room for the run, then behind the boxes as they will stand. */
+/** Lays the boxes out on the straight walls first, so that the set line is sought behind them alone. */
 export function workRuns(context: FitContext): { runs: WorkedRun[]; problems: Problem[] } {
   const againstWalls = context.runs.filter(({ island }) => !island);
   const requests = againstWalls
     .filter(({ wallId }) => context.frames.has(wallId))
     .map((run) => ({ run, bandMm: firstBand(context, run), edgesMm: [] as number[] }));
-  const first = fitSetLines(context, requests);
+  const straight = assumedSetLines(context, requests);
   const placed = requests.map((request) => {
-    const filled = workRun(context, request.run, first.planes, request.bandMm).filled;
-    const units = filled?.placed ?? [];
+    const framed = frameRun(context, request.run, straight).value;
+    const units = framed ? layOut(fillInput(context, request.run, framed)) : [];
     const [left, right] = [units[0], units[units.length - 1]];
     if (!left || !right) return request;
     return {
@@ -46,12 +51,12 @@ export function workRuns(context: FitContext): { runs: WorkedRun[]; problems: Pr
       edgesMm: [...units.map(({ leftMm }) => leftMm), ...units.map(({ rightMm }) => rightMm)],
     };
   });
-  const second = fitSetLines(context, placed);
+  const lines = fitSetLines(context, placed);
   const bands = new Map(placed.map(({ run, bandMm }) => [run.id, bandMm]));
   const runs = againstWalls.map((run) =>
-    workRun(context, run, second.planes, bands.get(run.id) ?? [0, 0]),
+    workRun(context, run, lines.planes, bands.get(run.id) ?? [0, 0]),
   );
-  return { runs, problems: [...second.problems, ...runs.flatMap(({ problems }) => problems)] };
+  return { runs, problems: [...lines.problems, ...runs.flatMap(({ problems }) => problems)] };
 }
 
 function workRun(
@@ -104,7 +109,7 @@ export function describeRun(
   const right = endFit(context, worked, 'right');
   const scribes = finishedEndScribes(context, worked);
   const gapAt = (xMm: number) => {
-    const edge = plane?.line?.edges.find((one) => Math.abs(one.xMm - xMm) < 5);
+    const edge = sameEdge(plane?.line?.edges ?? [], (one) => one.xMm, xMm);
     return edge ? fitFigure('back-gap', edge.greatest.gap) : null;
   };
   const runFit: RunFit = {

@@ -57,13 +57,40 @@ export function fitSetLines(
   return { planes, problems };
 }
 
+/** The straight lines corner to corner, or what is already set: near enough to lay the boxes out on. */
+export function assumedSetLines(
+  context: FitContext,
+  requests: SetLineRequest[],
+): Map<string, RunPlane> {
+  const planes = new Map<string, RunPlane>();
+  for (const group of groupRuns(context, requests)) {
+    const turn = fixedTurn(group) ?? 0;
+    for (const plane of group.planes) {
+      const slope = turn + plane.shear;
+      const turnDeg = (Math.atan(slope) * 180) / Math.PI;
+      const placed = assumedPlane(context, plane, slope);
+      for (const { run } of plane.runs) {
+        planes.set(run.id, { ...placed, turnDeg, line: null, turnFixedBy: [] });
+      }
+    }
+  }
+  return planes;
+}
+
+/** The turn that a cabinet already set fixes for its whole group, less the shear of its own plane. */
+function fixedTurn(group: Group): number | null {
+  for (const plane of group.planes) {
+    const fixed = existingOf(plane);
+    if (fixed) return Math.tan((fixed.turnDeg * Math.PI) / 180) - fixed.shear;
+  }
+  return null;
+}
+
 function solveGroup(context: FitContext, group: Group, found: Map<string, RunPlane>): Problem[] {
   const read = group.planes.map((plane) => planeInput(context, plane));
   const withFaces = read.flatMap((plane) => (plane.points.length > 0 ? [plane] : []));
-  const fixed = group.planes.map(existingOf).find((existing) => existing !== null) ?? null;
-  const turn = fixed
-    ? figure(Math.tan((fixed.turnDeg * Math.PI) / 180) - fixed.shear, 0, [])
-    : null;
+  const fixed = fixedTurn(group);
+  const turn = fixed === null ? null : figure(fixed, 0, []);
   const solved = withFaces.length > 0 ? setLine({ planes: withFaces, turn, uReference: 0 }) : null;
   const sharedTurn = solved?.value?.turn.value ?? turn?.value ?? 0;
   const runIds = group.planes.flatMap(({ runs }) => runs.map(({ run }) => run.id));

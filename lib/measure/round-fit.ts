@@ -2,19 +2,26 @@
 
 const GRAIN = 1e4;
 
-/** To 1e-4, ties away from zero, no −0; everything else as it is. */
-export function roundFit<T>(value: T): T {
-  return rounded(value) as T;
+/**
+ * To 1e-4, ties away from zero, no −0, in place: the value has just been made, and copying it costs more
+ * than reckoning it. Everything but numbers stays as it is.
+ */
+export function roundFit<T extends object>(value: T): T {
+  roundWithin(value as Record<string, unknown>);
+  return value;
 }
 
-function rounded(value: unknown): unknown {
-  if (typeof value === 'number') return roundNumber(value);
+function roundWithin(value: Record<string, unknown> | unknown[]): void {
   // Lists of reading ids make up most of a fit and hold nothing to round.
-  if (Array.isArray(value)) return typeof value[0] === 'string' ? value : value.map(rounded);
-  if (value === null || typeof value !== 'object') return value;
-  const copy: Record<string, unknown> = {};
-  for (const key of Object.keys(value)) copy[key] = rounded(value[key as keyof typeof value]);
-  return copy;
+  if (Array.isArray(value) && typeof value[0] === 'string') return;
+  const fields = value as Record<string, unknown>;
+  for (const key in fields) {
+    const field = fields[key];
+    if (typeof field === 'number') fields[key] = roundNumber(field);
+    else if (field !== null && typeof field === 'object') {
+      roundWithin(field as Record<string, unknown>);
+    }
+  }
 }
 
 function roundNumber(value: number): number {
