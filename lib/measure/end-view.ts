@@ -1,5 +1,10 @@
 /** One end of a run as seen from its set line: where its face stands at any place, and how sure. */
-import { type FaceSurface, faceSurface } from '@/lib/measure/face-surface';
+import {
+  type FaceSurface,
+  type FaceValue,
+  faceSurface,
+  readingsBehind,
+} from '@/lib/measure/face-surface';
 import {
   angleToSetLine,
   type OtherRunEnd,
@@ -21,7 +26,8 @@ export type FacePlace = {
   slope: readonly number[];
   /** What the parameters do not hold: the face reading itself, a limit's own u. */
   ownU: number;
-  faceFrom: readonly string[];
+  /** Face readings behind it; see `readingsBehind`. */
+  madeOf: FaceValue['madeOf'];
   readingId: string | null;
   extrapolated: boolean;
 };
@@ -63,7 +69,7 @@ function viewPlane(frame: RunFrame, end: 'left' | 'right', face: PlaneEnd): EndV
       xMm,
       slope: NO_SLOPE,
       ownU: face.x.u,
-      faceFrom: [],
+      madeOf: [],
       readingId: null,
       extrapolated: false,
     }),
@@ -89,7 +95,7 @@ function viewOtherRun(
       xMm: lens.xOf(yMm, face.frontMm),
       slope: lens.slopeOf(yMm, face.frontMm, 0, 0),
       ownU: face.frontUMm / lens.sine,
-      faceFrom: [],
+      madeOf: [],
       readingId: null,
       extrapolated: false,
     }),
@@ -129,7 +135,7 @@ function viewWall(
         xMm: lens.xOf(yMm, proud),
         slope: lens.slopeOf(yMm, proud, here.leanShareMm, here.bowShare),
         ownU: here.uMm / lens.sine,
-        faceFrom: here.from,
+        madeOf: here.madeOf,
         readingId: here.readingId,
         extrapolated: here.extrapolated,
       };
@@ -203,7 +209,7 @@ export function inward(place: FacePlace): number {
 
 /** Readings behind one place. */
 export function placeFrom(view: EndView, place: FacePlace): string[] {
-  return unique([...view.baseFrom, ...place.faceFrom]);
+  return unique([...view.baseFrom, ...readingsBehind(place)]);
 }
 
 /** A term of a sum of places; the sign may be any weight. */

@@ -26,7 +26,8 @@ export type FaceValue = {
   bowShare: number;
   /** The reading that lies exactly here; null between readings. */
   readingId: string | null;
-  from: string[];
+  /** What it was made of: readings, or values that were; see `readingsBehind`. */
+  madeOf: readonly (string | FaceValue)[];
   /** Outside the readings: carried on along the angle and the lean. */
   extrapolated: boolean;
 };
@@ -72,6 +73,14 @@ export function faceSurface(points: EndFacePoint[], unread: UnreadFace): FaceSur
   return { yMm, zMm, at };
 }
 
+/** Ids of the readings behind a value; sought only where it governs, for there are many values. */
+export function readingsBehind(value: Pick<FaceValue, 'madeOf'>): string[] {
+  const ids = value.madeOf.flatMap((part) =>
+    typeof part === 'string' ? [part] : readingsBehind(part),
+  );
+  return [...new Set(ids)];
+}
+
 function nobodyRead(yMm: number, zMm: number, unread: UnreadFace): FaceValue {
   return {
     proudMm: 0,
@@ -79,7 +88,7 @@ function nobodyRead(yMm: number, zMm: number, unread: UnreadFace): FaceValue {
     leanShareMm: zMm - unread.zRefMm,
     bowShare: unread.bowShape(yMm),
     readingId: null,
-    from: [],
+    madeOf: [],
     extrapolated: true,
   };
 }
@@ -105,7 +114,7 @@ function exactly(points: EndFacePoint[], yMm: number, zMm: number): FaceValue | 
     leanShareMm: mean((point) => point.leanShareMm),
     bowShare: mean((point) => point.bowShare),
     readingId: first.readingId,
-    from: here.map((point) => point.readingId),
+    madeOf: here.map((point) => point.readingId),
     extrapolated: false,
   };
 }
@@ -134,7 +143,7 @@ function mixed(a: FaceValue, b: FaceValue, t: number, uSag: number): FaceValue {
     leanShareMm: between(a.leanShareMm, b.leanShareMm),
     bowShare: between(a.bowShare, b.bowShare),
     readingId: null,
-    from: a.from === b.from ? a.from : [...new Set([...a.from, ...b.from])],
+    madeOf: [a, b],
     extrapolated: a.extrapolated || b.extrapolated,
   };
 }
@@ -215,7 +224,7 @@ function fillNode(
     leanShareMm: mean((node) => node.leanShareMm),
     bowShare: mean((node) => node.bowShare),
     readingId: null,
-    from: [...new Set(used.flatMap(({ node }) => node.from))],
+    madeOf: used.map(({ node }) => node),
     extrapolated: inside.length === 0,
   };
 }

@@ -87,23 +87,26 @@ function wallsOf(reading: Reading): string[] {
 }
 
 function hasOnlyNumbers(reading: Reading): boolean {
-  const values = Object.values(reading.kind === 'corner' ? reading.by : reading);
-  return values.every((value) => typeof value !== 'number' || Number.isFinite(value));
+  const fields: Record<string, unknown> = reading.kind === 'corner' ? reading.by : reading;
+  for (const key in fields) {
+    const field = fields[key];
+    if (typeof field === 'number' && !Number.isFinite(field)) return false;
+  }
+  return true;
 }
 
 /** Groups of things no further apart than `withinMm` from the first of the group, lowest first. */
 export function cluster<T>(things: T[], at: (thing: T) => number, withinMm: number): T[][] {
   const groups: T[][] = [];
-  const sorted = things
-    .map((thing, order) => ({ thing, order, at: at(thing) }))
-    .sort((a, b) => a.at - b.at || a.order - b.order);
+  // The sort keeps equals in the order given.
+  const sorted = things.length > 1 ? [...things].sort((a, b) => at(a) - at(b)) : things;
   let startedAt = Number.NEGATIVE_INFINITY;
-  for (const { thing, at: here } of sorted) {
+  for (const thing of sorted) {
     const last = groups[groups.length - 1];
-    if (last && here - startedAt <= withinMm) last.push(thing);
+    if (last && at(thing) - startedAt <= withinMm) last.push(thing);
     else {
       groups.push([thing]);
-      startedAt = here;
+      startedAt = at(thing);
     }
   }
   return groups;

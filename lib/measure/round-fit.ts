@@ -7,20 +7,26 @@ const GRAIN = 1e4;
  * than reckoning it. Everything but numbers stays as it is.
  */
 export function roundFit<T extends object>(value: T): T {
-  roundWithin(value as Record<string, unknown>);
+  if (Array.isArray(value)) roundList(value);
+  else roundFields(value as Record<string, unknown>);
   return value;
 }
 
-function roundWithin(value: Record<string, unknown> | unknown[]): void {
-  // Lists of reading ids make up most of a fit and hold nothing to round.
-  if (Array.isArray(value) && typeof value[0] === 'string') return;
-  const fields = value as Record<string, unknown>;
+function roundFields(fields: Record<string, unknown>): void {
   for (const key in fields) {
     const field = fields[key];
     if (typeof field === 'number') fields[key] = roundNumber(field);
-    else if (field !== null && typeof field === 'object') {
-      roundWithin(field as Record<string, unknown>);
-    }
+    else if (typeof field === 'object' && field !== null) roundFit(field);
+  }
+}
+
+function roundList(list: unknown[]): void {
+  // Lists of reading ids make up most of a fit and hold nothing to round.
+  if (typeof list[0] === 'string') return;
+  for (let i = 0; i < list.length; i++) {
+    const item = list[i];
+    if (typeof item === 'number') list[i] = roundNumber(item);
+    else if (typeof item === 'object' && item !== null) roundFit(item);
   }
 }
 
