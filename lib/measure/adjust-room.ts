@@ -34,8 +34,8 @@ const MOST_NAMED = 4;
  * tool whose readings share one. x along the first wall, y into the room (x east, y south from above).
  * Edge: a chain that stands alone keeps its own frame; a chain tied by widths alone may slide along its
  * walls, and its ellipses say so.
- * Example: four walls 3000, 2000, 3000, 2003 (u 0.6) and four corners of 90° (u 0.12°): the corners give
- * way, 89.97° and 90.03°, and the lengths hardly: 2000.01 and 2002.99.
+ * Example: four straight walls 3000, 2000, 3000, 2003 (u 0.6) and four corners of 90° (u 0.12°): the
+ * corners give way, 89.97° and 90.03°, and the lengths hardly: 2000.03 and 2002.97.
  * Problems: `reading-impossible` (named), `unknown-wall`, `room-not-determined` (no value).
  * Source: least squares by observation equations, Gauss–Newton; reliability after Baarda (1968),
  * recalled; the bow term is ours (MEASURE "Does the room close?").

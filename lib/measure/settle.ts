@@ -6,6 +6,10 @@ import { project, spread } from './row-products';
 
 /** Steps that gain at least this share of the best are as good; the cheapest of them comes first. */
 const AS_GOOD = 0.9;
+/** Suspects whose χ² would differ by this much are told apart for certain (five standard uncertainties). */
+const TOLD_APART = 25;
+/** Less than this is rounding, not help. */
+const LEAST_GAIN = 1e-6;
 /** Work for the measurer: one reading, or one reading with two ends to hold. */
 const COST = { again: 1, diagonal: 2 };
 
@@ -28,8 +32,9 @@ export type SettleStep = {
 };
 
 /**
- * Ranks the further readings by how much they raise the least redundancy (over all lengths, corners,
- * diagonals and widths; with suspects, over these, less what cannot be told from another suspect).
+ * Ranks the further readings by how much they raise the least redundancy over all lengths, corners,
+ * diagonals and widths. With suspects: by how surely a slip of the size found in each of them could then
+ * be told from one in another, the least sure of them counting.
  *
  * Edge: an observation without a reading behind it is not weighed; only diagonals that run free through
  * the room are offered; a step that raises nothing is not; steps within a tenth of the best gain count
@@ -45,32 +50,51 @@ export function settle(room: AdjustedRoom, options: SettleOptions = {}): SettleS
   const weighed = observations.flatMap((o, i) =>
     isTaped(o) && (!options.suspects || options.suspects.includes(i)) ? [i] : [],
   );
-  const tellApart = options.suspects ? weighed : [];
-  const before = worthOf(reliability, weighed, tellApart, null);
-  const steps = furtherReadings(room, options).map(({ reading, row }) => {
-    const after = worthOf(reliability, weighed, tellApart, changeBy(room, row));
-    return { reading, before, after };
-  });
-  const helping = steps.filter(({ after }) => after.least > before.least + 1e-6);
-  const ranked =
-    helping.length > 0 ? helping : steps.filter((s) => s.after.sum > before.sum + 1e-6);
-  const by = helping.length > 0 ? 'least' : 'sum';
-  const best = ranked.reduce((most, { after }) => Math.max(most, after[by] - before[by]), 0);
-  return ranked
-    .map((step, order) => ({ ...step, order, gain: step.after[by] - before[by] }))
-    .sort(
-      (one, other) =>
-        Number(other.gain >= AS_GOOD * best) - Number(one.gain >= AS_GOOD * best) ||
-        (one.gain >= AS_GOOD * best ? COST[one.reading.kind] - COST[other.reading.kind] : 0) ||
-        other.gain - one.gain ||
-        one.order - other.order,
-    )
-    .slice(0, options.most ?? 5)
-    .map(({ reading, after }) => ({
-      reading,
-      leastRedundancy: before.leastRedundancy,
-      leastRedundancyAfter: after.leastRedundancy,
-    }));
+  const slips = room.checks.map(({ residual, redundancy, u }) =>
+    redundancy > UNCHECKED ? (residual / redundancy / u) ** 2 : 0,
+  );
+  const ask: Ask = { weighed, slips: options.suspects ? slips : null };
+  const before = worthOf(reliability, ask, null);
+  const steps = furtherReadings(room, options).map(({ reading, row }) => ({
+    reading,
+    after: worthOf(reliability, ask, changeBy(room, row)),
+  }));
+  return inOrder(steps, before, options).map(({ reading, after }) => ({
+    reading,
+    leastRedundancy: before.leastRedundancy,
+    leastRedundancyAfter: after.leastRedundancy,
+  }));
+}
+
+type Weighed = { reading: FurtherReading; after: Worth };
+
+/** Steps that help, the cheapest of the best first; where all suspects stand clear, the first again. */
+function inOrder(
+  steps: Weighed[],
+  before: Worth,
+  { suspects, most = 5 }: SettleOptions,
+): Weighed[] {
+  const raising = (by: 'least' | 'sum') =>
+    steps
+      .map((step, order) => ({ ...step, order, gain: step.after[by] - before[by] }))
+      .filter(({ gain }) => gain > LEAST_GAIN);
+  const least = raising('least');
+  const helping = least.length > 0 ? least : raising('sum');
+  if (helping.length === 0) {
+    return steps.filter(
+      ({ reading }) => reading.kind === 'again' && reading.observation === suspects?.[0],
+    );
+  }
+  const enough = AS_GOOD * Math.max(...helping.map(({ gain }) => gain));
+  const costOf = ({ reading, gain }: (typeof helping)[number]) =>
+    gain >= enough ? COST[reading.kind] : Number.POSITIVE_INFINITY;
+  return helping
+    .sort((one, other) => {
+      const [cost, otherCost] = [costOf(one), costOf(other)];
+      if (cost !== otherCost) return cost < otherCost ? -1 : 1;
+      return other.gain - one.gain || one.order - other.order;
+    })
+    .slice(0, most);
 }
 
 type Worth = { least: number; sum: number; leastRedundancy: number };
@@ -85,13 +109,12 @@ function changeBy(room: AdjustedRoom, row: SparseRow): Change {
   return { pull, total: row.sigma ** 2 + project(row, spreadRow) };
 }
 
-/** Worth of a set of readings: the least redundancy (clear of the other suspects), and their sum. */
-function worthOf(
-  { sigmas, shared }: Reliability,
-  weighed: number[],
-  tellApart: number[],
-  change: Change | null,
-): Worth {
+/** The readings weighed; among suspects also the slip found in each, squared and in units of its u. */
+type Ask = { weighed: number[]; slips: number[] | null };
+
+/** The least redundancy and the sum of them; among suspects, how surely each is told from the others. */
+function worthOf({ sigmas, shared }: Reliability, ask: Ask, change: Change | null): Worth {
+  const { weighed, slips } = ask;
   const sharedBy = (i: number, j: number) => {
     const now = shared[i]?.[j] ?? 0;
     return change ? now - ((change.pull[i] ?? 0) * (change.pull[j] ?? 0)) / change.total : now;
@@ -100,14 +123,17 @@ function worthOf(
   const worth = { least: 1, sum: 0, leastRedundancy: 1 };
   for (const i of weighed) {
     const redundancy = redundancies[i] ?? 0;
-    let tied = 0;
-    for (const j of tellApart) {
-      const other = redundancies[j] ?? 0;
-      if (j === i || redundancy <= UNCHECKED || other <= UNCHECKED) continue;
-      const scale = (sigmas[i] ?? 1) * (sigmas[j] ?? 1);
-      tied = Math.max(tied, (sharedBy(i, j) / scale) ** 2 / (redundancy * other));
+    let clear = redundancy;
+    if (slips) {
+      let tied = 0;
+      for (const j of weighed) {
+        const other = redundancies[j] ?? 0;
+        if (j === i || redundancy <= UNCHECKED || other <= UNCHECKED) continue;
+        const scale = (sigmas[i] ?? 1) * (sigmas[j] ?? 1);
+        tied = Math.max(tied, (sharedBy(i, j) / scale) ** 2 / (redundancy * other));
+      }
+      clear = Math.min(1, ((slips[i] ?? 0) * redundancy * Math.max(0, 1 - tied)) / TOLD_APART);
     }
-    const clear = redundancy * Math.max(0, 1 - tied);
     worth.least = Math.min(worth.least, clear);
     worth.leastRedundancy = Math.min(worth.leastRedundancy, redundancy);
     worth.sum += clear;
