@@ -82,8 +82,8 @@ export function BenchTable({ rows, mayTakeUp, maySayReady }: BenchTableProps) {
     {
       key: 'ready',
       header: 'Cabinets ready',
-      cell: ({ jobId, readyOn }) =>
-        maySayReady ? <ReadyField jobId={jobId} readyOn={readyOn} /> : (readyOn ?? ''),
+      cell: ({ jobId, readyOn, readyWords }) =>
+        maySayReady ? <ReadyField jobId={jobId} readyOn={readyOn} /> : (readyWords ?? ''),
       sortValue: ({ readyOn }) => readyOn,
     },
   ];

@@ -7,21 +7,17 @@ import { FormError } from '@/components/ui/form-error';
 import { LinkButton } from '@/components/ui/link-button';
 import { Verdict } from '@/components/ui/verdict';
 import type { SheetView } from '@/lib/contracts/rooms';
-import { paths } from '@/lib/paths';
 import { useTakeUp } from './use-take-up';
 
 /** Over the sheet on screen, never on paper: back to the fit, print, take it up. */
 export function SheetBar({
-  sheet,
+  release,
+  newerRevision,
+  fitHref,
   mayTakeUp,
-}: {
-  sheet: Pick<SheetView, 'release' | 'jobId' | 'wallBook' | 'newerRevision'>;
-  mayTakeUp: boolean;
-}) {
+}: Pick<SheetView, 'release' | 'newerRevision'> & { fitHref: string; mayTakeUp: boolean }) {
   const router = useRouter();
-  const { release, jobId, wallBook, newerRevision } = sheet;
   const { takeUp, isBusy, problem } = useTakeUp();
-  const fitHref = paths.room(jobId, wallBook.room.id);
   usePageKeys('This sheet', [
     { keys: 'p', words: 'print it', run: () => window.print() },
     { keys: 'f', words: 'back to the fit', run: () => router.push(fitHref) },

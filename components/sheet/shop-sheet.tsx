@@ -8,6 +8,7 @@ import { TitleBlock } from '@/components/ui/title-block';
 import type { SheetView } from '@/lib/contracts/rooms';
 import { drawElevation } from '@/lib/drawing/elevation';
 import { drawPlan } from '@/lib/drawing/plan';
+import { paths } from '@/lib/paths';
 import { cautionsFor } from '@/lib/sheet/cautions';
 import { cutList } from '@/lib/sheet/cut-list';
 import { proofRows } from '@/lib/sheet/proof-rows';
@@ -30,7 +31,12 @@ export function ShopSheet({ sheet, mayTakeUp }: ShopSheetProps) {
   const plan = drawPlan({ wallBook, runs, fit, rules });
   return (
     <Figures readings={readingLines(wallBook, {}, rules.unit)} rules={rules}>
-      <SheetBar sheet={sheet} mayTakeUp={mayTakeUp} />
+      <SheetBar
+        release={sheet.release}
+        newerRevision={sheet.newerRevision}
+        fitHref={paths.room(sheet.jobId, wallBook.room.id)}
+        mayTakeUp={mayTakeUp}
+      />
       <article
         aria-label={`Shop sheet, ${sheet.roomName}, revision ${sheet.release.revision}`}
         className={`shop-sheet text-note ${rules.region === 'US' ? 'on-letter' : 'on-a4'}`}

@@ -42,6 +42,8 @@ export const roomIdInput = z.object({ roomId: id });
 /** With the job, a room that is not drawn yet is begun. */
 export const openWallBookInput = z.object({ roomId: id, jobId: id.optional() });
 export type OpenWallBookInput = z.infer<typeof openWallBookInput>;
+/** A book with no walls yet, for a room of this job that a phone may begin later without a signal. */
+export const blankBookInput = z.object({ jobId: id, roomId: id });
 export const sheetInput = z.object({ roomId: id, revision: z.string().regex(/^[A-Z]{1,4}$/) });
 
 /** Everything a phone needs to measure one room. */
@@ -55,7 +57,11 @@ export type WallBookView = {
   missing: MissingReading[];
   tools: Tool[];
   submittedAt: string | null;
+  readers: Reader[];
 };
+
+/** One person who took readings of a room, and which. */
+export type Reader = { personId: string; name: string; readingIds: string[] };
 
 export type FitView = {
   jobId: string;
@@ -139,4 +145,5 @@ export type BenchRow = {
   isSuperseded: boolean;
   installWords: string | null;
   readyOn: string | null;
+  readyWords: string | null;
 };

@@ -58,7 +58,7 @@ export function figureAlong(
 ): DrawnText {
   const [x, y] = direction(from, to);
   const deg = (Math.atan2(y, x) * 180) / Math.PI;
-  const turnDeg = deg > 89.999 || deg < -90.001 ? deg + 180 : deg;
+  const turnDeg = deg > 80 || deg < -100 ? deg + 180 : deg;
   const up: Point = [Math.sin((turnDeg * Math.PI) / 180), -Math.cos((turnDeg * Math.PI) / 180)];
   const middle = between(from, to, 0.5);
   const risePx = isUnder ? -sizePx - 2 : 4;

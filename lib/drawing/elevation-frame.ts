@@ -36,7 +36,7 @@ export type ElevationSheet = ElevationSource & {
 };
 
 /** A wall is drawn this wide unless asked otherwise. */
-const wallWidthPx = 760;
+const wallWidthPx = 580;
 /** Above the tallest box where no ceiling was read. */
 const openTopMm = 250;
 /** Of the least width of a filler, what its taper may take when it is drawn larger. */

@@ -1,6 +1,6 @@
 import type { Run } from '@/lib/contracts/wall-book';
 import type { PlacedUnit, RunFit } from '@/lib/measure/run-fit';
-import { unitWords } from '@/lib/sheet/unit-words';
+import { unitKindWords } from '@/lib/sheet/unit-words';
 import { formatLength } from '@/lib/units/format-length';
 import { type ElevationSheet, heightAt, type WallPlace } from './elevation-frame';
 import { bare } from './figure-spans';
@@ -101,8 +101,9 @@ function label(sheet: ElevationSheet, run: Run, unit: PlacedUnit): Shape[] {
   const widthMm = unit.rightMm - unit.leftMm;
   const width = bare(formatLength(widthMm, { unit: lengthUnit, stepMm }));
   const placed = run.units.find(({ id }) => id === unit.unitId);
-  const isPlain = !placed?.name && ['base', 'wall'].includes(unit.kind);
-  const name = isPlain || !placed ? '' : unitWords(placed).toLowerCase();
+  const isPlain = !placed || placed.kind === 'base' || placed.kind === 'wall';
+  const kind = isPlain ? '' : unitKindWords[placed.kind].toLowerCase();
+  const names = [[placed?.name, kind].filter(Boolean).join(' '), kind, placed?.name ?? ''];
   const roomPx = widthMm * sheet.pxPerMm - 4;
   const fits = (words: string, size: number) =>
     textWidthPx([{ words, tone: 'plain' }], size) <= roomPx;
@@ -112,10 +113,10 @@ function label(sheet: ElevationSheet, run: Run, unit: PlacedUnit): Shape[] {
     zMm: run.z0Mm + (run.z1Mm - run.z0Mm) * (run.level === 'base' ? 0.24 : 0.5),
   });
   if (!fits(width, smallTextSizePx)) return [];
-  const shows = name !== '' && fits(name, smallTextSizePx);
+  const name = names.find((words) => words !== '' && fits(words, smallTextSizePx));
   return [
-    text([x, y + (shows ? -2 : 5)], width),
-    ...(shows ? [text([x, y + 14], name, { sizePx: smallTextSizePx, tone: 'quiet' })] : []),
+    text([x, y + (name ? -2 : 5)], width),
+    ...(name ? [text([x, y + 14], name, { sizePx: smallTextSizePx, tone: 'quiet' })] : []),
   ];
 }
 

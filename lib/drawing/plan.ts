@@ -23,7 +23,7 @@ export type PlanSheet = PlanSource & {
   pxPerMm: number;
 };
 
-const planWidthPx = 900;
+const planWidthPx = 740;
 /** Room on the drawing for a bow, and for a corner's turn. */
 const bowRoomMm = 130;
 const cornerRoomDeg = 24;

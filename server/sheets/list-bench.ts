@@ -2,7 +2,9 @@ import { and, asc, eq, inArray } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { customers, jobs, releaseReceipts, releases, rooms, visits } from '@/db/schema';
 import type { BenchRow } from '@/lib/contracts/rooms';
+import { formatLocalDayShort } from '@/lib/time/format-civil';
 import { formatDayShort } from '@/lib/time/format-instant';
+import type { TextLocale } from '@/lib/time/text-locale';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { momentWords } from '@/server/walls/moment-words';
 import { newestReleases } from '@/server/walls/newest-releases';
@@ -46,6 +48,7 @@ export async function listBench(ctx: PersonContext): Promise<BenchRow[]> {
       takenUpWords: takenUpAt ? momentWords(ctx, takenUpAt) : null,
       isSuperseded: newest.get(row.roomId)?.isSuperseded ?? false,
       installWords: dayWords(ctx, installs.get(row.jobId)),
+      readyWords: row.readyOn ? formatLocalDayShort(row.readyOn, localeOf(ctx)) : null,
     }));
 }
 
@@ -94,9 +97,10 @@ async function firstInstalls(
 }
 
 function dayWords(ctx: PersonContext, startsAt: Date | undefined): string | null {
-  const locale = { language: 'en', region: ctx.shop.region } as const;
-  return startsAt ? formatDayShort(startsAt, ctx.shop.zone, locale) : null;
+  return startsAt ? formatDayShort(startsAt, ctx.shop.zone, localeOf(ctx)) : null;
 }
+
+const localeOf = (ctx: PersonContext): TextLocale => ({ language: 'en', region: ctx.shop.region });
 
 /** Infinity less Infinity is no number; two jobs without an install are as needed as each other. */
 const compare = (one: number, other: number) => (one < other ? -1 : one > other ? 1 : 0);
