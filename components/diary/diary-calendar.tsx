@@ -1,6 +1,6 @@
 'use client';
 
-import type { DatesSetArg, EventClickArg, EventDropArg } from '@fullcalendar/core';
+import type { DatesSetArg, EventClickArg, EventContentArg, EventDropArg } from '@fullcalendar/core';
 import dayGridPlugin from '@fullcalendar/daygrid';
 import interactionPlugin, {
   type DropArg,
@@ -35,6 +35,18 @@ type DiaryCalendarProps = {
   onStretch: (visit: VisitView, workMinutes: number, takeBack: () => void) => void;
 };
 
+// The calendar takes a new array, object or function for a changed option, and a changed option for a new
+// range, which it tells the page, which renders it anew: all that never changes stands out here.
+const plugins = [dayGridPlugin, timeGridPlugin, interactionPlugin, momentTimezonePlugin];
+const clock = { hour: '2-digit', minute: '2-digit', hour12: false } as const;
+const views = { dayGridMonth: { dayHeaderFormat: { weekday: 'short' } } } as const;
+const drawVisit = ({ event, view }: EventContentArg) => (
+  <VisitEvent
+    detail={event.extendedProps as EventDetail}
+    isCompact={view.type === 'dayGridMonth'}
+  />
+);
+
 export function DiaryCalendar(props: DiaryCalendarProps) {
   const { visits, crews, shownCrewIds, mayBook, hours } = props;
   // A new array at each render would snap a dragged visit back.
@@ -50,11 +62,12 @@ export function DiaryCalendar(props: DiaryCalendarProps) {
     }),
     [hours],
   );
+  const daysOff = useMemo(() => hiddenDays(hours.workdays), [hours]);
 
   return (
     <FullCalendar
       ref={props.calendarRef}
-      plugins={[dayGridPlugin, timeGridPlugin, interactionPlugin, momentTimezonePlugin]}
+      plugins={plugins}
       timeZone={props.zone}
       initialView={props.view}
       initialDate={props.startOn}
@@ -69,21 +82,16 @@ export function DiaryCalendar(props: DiaryCalendarProps) {
       snapDuration="00:15:00"
       slotMinTime={hoursAround(hours.dayStart, -1)}
       slotMaxTime={hoursAround(hours.dayEnd, 3)}
-      slotLabelFormat={{ hour: '2-digit', minute: '2-digit', hour12: false }}
-      views={{ dayGridMonth: { dayHeaderFormat: { weekday: 'short' } } }}
+      slotLabelFormat={clock}
+      views={views}
       dayHeaderFormat={dayHead}
       businessHours={businessHours}
-      hiddenDays={hiddenDays(hours.workdays)}
-      eventTimeFormat={{ hour: '2-digit', minute: '2-digit', hour12: false }}
+      hiddenDays={daysOff}
+      eventTimeFormat={clock}
       dayMaxEvents={5}
       droppable={mayBook}
       events={events}
-      eventContent={({ event, view }) => (
-        <VisitEvent
-          detail={event.extendedProps as EventDetail}
-          isCompact={view.type === 'dayGridMonth'}
-        />
-      )}
+      eventContent={drawVisit}
       eventClick={({ event, jsEvent }: EventClickArg) => {
         jsEvent.preventDefault();
         props.onOpen((event.extendedProps as EventDetail).visit);

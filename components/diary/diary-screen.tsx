@@ -97,7 +97,11 @@ export function DiaryScreen({ zone, startOn, hours, crews, mayBook }: DiaryScree
             {...{ calendarRef, zone, view, startOn, hours, visits, crews, shownCrewIds, mayBook }}
             onRange={({ from, to, title, view: shown }) =>
               queueMicrotask(() => {
-                setRange({ from, to, title });
+                setRange((shownNow) =>
+                  shownNow.from === from && shownNow.to === to && shownNow.title === title
+                    ? shownNow
+                    : { from, to, title },
+                );
                 setView(shown);
               })
             }
