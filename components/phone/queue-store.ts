@@ -52,7 +52,9 @@ async function rememberSent(sent: Queued[]): Promise<void> {
   for (const roomId of new Set(sent.map((item) => item.roomId))) {
     const kept = roomId === null ? undefined : await rooms.get(roomId);
     if (!kept) continue;
-    const works = sent.filter((item) => item.roomId === roomId).map(({ work }) => work);
+    const works = sent
+      .filter((item) => item.roomId === roomId && item.personId === kept.personId)
+      .map(({ work }) => work);
     const readings = works.flatMap((work) => (work.kind === 'reading' ? [work.reading] : []));
     const drawn = works.flatMap((work) => (work.kind === 'room' ? [work.room] : []));
     const view = withSent(kept.view, readings, drawn.at(-1) ?? null);

@@ -1,8 +1,9 @@
+import { sketchKey } from '@/components/walls/draft-keys';
 import type { WallBookView } from '@/lib/contracts/rooms';
 import { bookOnPhone, newerView } from '@/lib/sync/book-on-phone';
 import type { Queued } from '@/lib/sync/queued';
 import { phoneDatabase } from './phone-database';
-import { readQueueOfRoom } from './queue-store';
+import { readQueue, readQueueOfRoom } from './queue-store';
 
 export type RoomOnPhone = {
   /** With everything read here, sent or not. */
@@ -11,20 +12,42 @@ export type RoomOnPhone = {
   queue: Queued[];
 };
 
-/** Keeps what the office has just shown of a room; nothing read here goes missing by it. */
-export async function rememberRoom(view: WallBookView): Promise<void> {
+/** Keeps what the office has just shown this person of a room; nothing read here goes missing by it. */
+export async function rememberRoom(view: WallBookView, personId: string): Promise<void> {
   const { rooms } = phoneDatabase();
   const roomId = view.wallBook.room.id;
   await phoneDatabase().transaction('rw', rooms, async () => {
     const kept = await rooms.get(roomId);
-    await rooms.put({ roomId, view: newerView(kept?.view ?? null, view) });
+    const before = kept?.personId === personId ? kept.view : null;
+    await rooms.put({ roomId, personId, view: newerView(before, view) });
   });
 }
 
-/** The room as this phone knows it; null when it was never opened here. */
-export async function readRoom(roomId: string): Promise<RoomOnPhone | null> {
+/** The room as this phone knows it; null when this person never opened it here. */
+export async function readRoom(roomId: string, personId: string): Promise<RoomOnPhone | null> {
   const kept = await phoneDatabase().rooms.get(roomId);
-  if (!kept) return null;
+  if (kept?.personId !== personId) return null;
   const queue = await readQueueOfRoom(roomId);
   return { view: bookOnPhone(kept.view, queue), queue };
+}
+
+/** The rooms of a job that this phone has drawn or begun to draw, sent or not. */
+export async function readRoomsOfJob(
+  jobId: string,
+  personId: string,
+): Promise<{ id: string; name: string }[]> {
+  const { rooms, drafts } = phoneDatabase();
+  const kept = await rooms
+    .filter((row) => row.personId === personId && row.view.jobId === jobId)
+    .toArray();
+  const found = new Map<string, string>();
+  for (const { roomId, view } of kept) {
+    const { room } = bookOnPhone(view, await readQueueOfRoom(roomId)).wallBook;
+    if (room.chains.length > 0) found.set(roomId, room.name);
+    else if (await drafts.get(sketchKey(roomId))) found.set(roomId, 'the room half drawn');
+  }
+  for (const { work } of await readQueue()) {
+    if (work.kind === 'room' && work.jobId === jobId) found.set(work.room.id, work.room.name);
+  }
+  return [...found].map(([id, name]) => ({ id, name }));
 }

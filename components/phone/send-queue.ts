@@ -1,7 +1,9 @@
 import { liveQuery } from 'dexie';
+import { isWaiting } from '@/lib/photos/kept-photo';
 import { backOffMs } from '@/lib/sync/back-off';
 import { nextBatch } from '@/lib/sync/next-batch';
-import { settleBatch } from '@/lib/sync/settle-batch';
+import { type Settled, settleBatch } from '@/lib/sync/settle-batch';
+import { phoneDatabase } from './phone-database';
 import { postBatch } from './post-batch';
 import { readQueue, settleQueue } from './queue-store';
 import { changeSendingState } from './sending-state';
@@ -41,16 +43,11 @@ export function startSending(personId: string): () => void {
 
   const sendAll = async () => {
     while (!isStopped) {
-      const batch = nextBatch(await readQueue(), personId);
-      if (!batch) return;
-      const settled = settleBatch(batch, await postBatch(batch));
-      await settleQueue(batch, settled);
-      changeSendingState({
-        isSignedOut: settled.next === 'sign-in',
-        isOffline: settled.next === 'wait',
-      });
-      if (settled.next === 'sign-in') return;
-      if (settled.next === 'wait') return pause();
+      const next = await sendNext(personId);
+      if (next === 'nothing') return;
+      changeSendingState({ isSignedOut: next === 'sign-in', isOffline: next === 'wait' });
+      if (next === 'sign-in') return;
+      if (next === 'wait') return pause();
       failures = 0;
     }
   };
@@ -81,9 +78,25 @@ export function startSending(personId: string): () => void {
   };
 }
 
+/** Readings first, in their order; a photo only when none of them waits. */
+async function sendNext(personId: string): Promise<Settled['next'] | 'nothing'> {
+  const batch = nextBatch(await readQueue(), personId);
+  if (batch) {
+    const settled = settleBatch(batch, await postBatch(batch));
+    await settleQueue(batch, settled);
+    return settled.next;
+  }
+  if ((await phoneDatabase().photos.count()) === 0) return 'nothing';
+  const { sendOnePhoto } = await import('@/components/photos/send-photos');
+  return sendOnePhoto(personId);
+}
+
 async function readWaiting(): Promise<number> {
   const queue = await readQueue();
-  return queue.filter(({ parked }) => parked === null).length;
+  const photos = await phoneDatabase()
+    .photos.filter((photo) => isWaiting(photo) && photo.isDone)
+    .count();
+  return queue.filter(({ parked }) => parked === null).length + photos;
 }
 
 /** Fewer things waiting is our own doing; more is a reason to go. */

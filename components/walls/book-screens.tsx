@@ -1,6 +1,6 @@
 'use client';
 
-import { lazy, Suspense, useEffect, useRef, useState } from 'react';
+import { Suspense, useEffect, useRef, useState } from 'react';
 import { keepDraft } from '@/components/phone/draft-store';
 import type { RoomOnPhone } from '@/components/phone/room-store';
 import { EmptyState } from '@/components/ui/empty-state';
@@ -9,8 +9,17 @@ import { walkRoom } from '@/lib/measure/room-walk';
 import { nextAsk, toGoWords } from '@/lib/walls-pad/next-ask';
 import { speechIn } from '@/lib/walls-pad/say-length';
 import { type BookPlace, goTo, placeHref, useBookPlace } from './book-place';
-import { FeaturePad } from './feature-pad';
-import { afterKey, type KeptOnPhone } from './kept-on-phone';
+import { afterKey } from './draft-keys';
+import type { KeptOnPhone } from './kept-on-phone';
+import {
+  FeaturePad,
+  fetchScreens,
+  LeaveScreen,
+  ReadingDetail,
+  SketchScreen,
+  WallList,
+  WallsOverview,
+} from './lazy-screens';
 import { useHabits } from './pad-habits';
 import {
   freeKinds,
@@ -22,17 +31,24 @@ import {
 } from './pad-question';
 import { PlaceButton } from './place-button';
 import { QuestionPicture, WallPicture } from './question-picture';
-import { ReadingDetail } from './reading-detail';
 import { ReadingPad } from './reading-pad';
-import { SketchScreen } from './sketch-screen';
 import { usePlan } from './use-plan';
-import { WallList } from './wall-list';
-import { WallsOverview } from './walls-overview';
 
-const LeaveScreen = lazy(() => import('./leave-screen'));
+type BookScreensProps = { room: RoomOnPhone; kept: KeptOnPhone };
 
 /** Which screen of the book is shown, by the address. */
-export function BookScreens({ room, kept }: { room: RoomOnPhone; kept: KeptOnPhone }) {
+export function BookScreens(props: BookScreensProps) {
+  useEffect(() => {
+    void fetchScreens();
+  }, []);
+  return (
+    <Suspense fallback={<Waiting />}>
+      <BookScreen {...props} />
+    </Suspense>
+  );
+}
+
+function BookScreen({ room, kept }: BookScreensProps) {
   const { view, queue } = room;
   const place = useBookPlace();
   const plan = usePlan(view);
@@ -179,11 +195,7 @@ export function BookScreens({ room, kept }: { room: RoomOnPhone; kept: KeptOnPho
         />
       );
     case 'leave':
-      return (
-        <Suspense fallback={<Waiting />}>
-          <LeaveScreen {...{ view, plan, queue }} />
-        </Suspense>
-      );
+      return <LeaveScreen {...{ view, plan, queue }} />;
   }
 }
 

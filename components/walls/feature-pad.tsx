@@ -16,11 +16,11 @@ import { featureWord } from '@/lib/walls-pad/reading-words';
 import { speechIn } from '@/lib/walls-pad/say-length';
 import { refusalOf } from '@/lib/walls-pad/verdict-of';
 import { ChoiceSheet } from './choice-sheet';
+import { draftKey } from './draft-keys';
 import { featureChoices, swingChoices } from './feature-words';
 import { FieldPad } from './field-pad';
 import type { PadHabits } from './pad-habits';
 import { PadSheets } from './pad-sheets';
-import { draftKey } from './use-reading-pad';
 import { WallElevation } from './wall-elevation';
 
 type FeaturePadProps = {

@@ -1,9 +1,9 @@
 import { readDraft } from '@/components/phone/draft-store';
 import type { WallBookView } from '@/lib/contracts/rooms';
 import type { PadDraft } from '@/lib/walls-pad/pad-draft';
-import { freshHabits, habitsKey, type PadHabits } from './pad-habits';
-import { type SketchDraft, sketchKey } from './sketch-draft';
-import { draftKey } from './use-reading-pad';
+import { afterKey, draftKey, habitsKey, sketchKey } from './draft-keys';
+import { freshHabits, type PadHabits } from './pad-habits';
+import type { SketchDraft } from './sketch-draft';
 
 /** What was left half done on this phone. */
 export type KeptOnPhone = {
@@ -13,8 +13,6 @@ export type KeptOnPhone = {
   /** The question answered last: the next follows it. */
   afterSlot: string | null;
 };
-
-export const afterKey = (roomId: string): string => `after:${roomId}`;
 
 export async function readKept({ rules, wallBook }: WallBookView): Promise<KeptOnPhone> {
   const roomId = wallBook.room.id;

@@ -18,7 +18,7 @@ import { RoomProof } from './room-proof';
 type LeaveScreenProps = { view: WallBookView; plan: PlannedReading[]; queue: Queued[] };
 
 /** Before the van leaves: what is missing and why, what disagrees, and handing the book in. */
-export default function LeaveScreen({ view, plan, queue }: LeaveScreenProps) {
+export function LeaveScreen({ view, plan, queue }: LeaveScreenProps) {
   const { wallBook, runs, rules } = view;
   const fit = useMemo(() => fitRoom(wallBook, runs, rules), [wallBook, runs, rules]);
   const must = plan.filter((each) => isOpen(each) && each.need === 'must');

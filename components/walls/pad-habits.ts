@@ -4,6 +4,7 @@ import type { ReadingOf, Touches } from '@/lib/contracts/wall-book';
 import type { LengthUnit } from '@/lib/units/brands';
 import type { CornerMethod } from '@/lib/walls-pad/pad-fields';
 import type { ToolUse } from '@/lib/walls-pad/pad-tools';
+import { habitsKey } from './draft-keys';
 
 export type SetUp = { setUpId: string; setUpKind: ReadingOf<'face'>['setUpKind'] };
 
@@ -18,8 +19,6 @@ export type PadHabits = {
   /** Set-ups begun on this phone, by room and group. */
   setUps: Record<string, SetUp>;
 };
-
-export const habitsKey = 'habits';
 
 export function freshHabits(unit: LengthUnit): PadHabits {
   return {

@@ -36,7 +36,7 @@ export function questionOfReading(
   const { what, value } = readingWords(reading, room, speech);
   return {
     key: `correct:${reading.id}`,
-    title: `${what}: correct it`,
+    title: what,
     why: `It reads ${value}. The first stays in the book, marked as corrected.`,
     ask,
     isFree: false,
@@ -88,7 +88,7 @@ export function freeQuestion(
   const name = walked?.wall.name ?? '';
   const base = {
     key: `free:${kind}:${wallId}`,
-    why: 'Nobody asked for it; it joins the book all the same.',
+    why: 'Along from the left corner, up from the floor.',
     isFree: true,
     slot: null,
     corrects: null,

@@ -7,10 +7,10 @@ import { padFields } from '@/lib/walls-pad/pad-fields';
 import { placeFields } from '@/lib/walls-pad/place-fields';
 import { FieldPad } from './field-pad';
 import { keepSkip } from './keep-note';
+import { PadSheets, SetUpSheet } from './lazy-screens';
 import { padActions } from './pad-actions';
 import type { PadHabits } from './pad-habits';
-import { type PadSheet, PadSheets } from './pad-sheets';
-import { SetUpSheet } from './set-up-sheet';
+import type { PadSheet } from './pad-sheets';
 import { type ReadingPadInput, useReadingPad } from './use-reading-pad';
 
 type ReadingPadProps = ReadingPadInput & {
@@ -83,7 +83,7 @@ export function ReadingPad(props: ReadingPadProps) {
       picture={props.picture}
       title={question.title}
       detail={isFree ? question.why : howTo}
-      toGo={props.toGo}
+      toGo={corrects ? 'correcting' : props.toGo}
       fields={pad.fields}
       draft={pad.draft}
       onDraft={pad.change}

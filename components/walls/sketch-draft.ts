@@ -14,8 +14,6 @@ export type SketchDraft = {
   floorToComeMm: number;
 };
 
-export const sketchKey = (roomId: string): string => `sketch:${roomId}`;
-
 export function startSketch(room: Room): SketchDraft {
   const { chains, name, wallThicknessToComeMm, floorToComeMm } = room;
   const walls = chains.flatMap((chain) => chain.walls);

@@ -10,10 +10,11 @@ import { standingReadings } from '@/lib/measure/standing-readings';
 import { wallIdsOf } from '@/lib/measure/wall-ids';
 import { chainsOfShape } from '@/lib/walls-pad/room-shapes';
 import { goTo } from './book-place';
+import { sketchKey } from './draft-keys';
 import type { PadHabits } from './pad-habits';
 import { ShapePick } from './shape-pick';
 import { SiteState } from './site-state';
-import { type SketchDraft, sketchKey, startSketch, withChains } from './sketch-draft';
+import { type SketchDraft, startSketch, withChains } from './sketch-draft';
 import { SketchWalls } from './sketch-walls';
 
 type SketchScreenProps = {

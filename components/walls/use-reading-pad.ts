@@ -14,11 +14,10 @@ import { type ToolUse, toolInHand } from '@/lib/walls-pad/pad-tools';
 import { placeFields } from '@/lib/walls-pad/place-fields';
 import { speechIn } from '@/lib/walls-pad/say-length';
 import { refusalOf, verdictOf } from '@/lib/walls-pad/verdict-of';
+import { draftKey } from './draft-keys';
 import { type PadHabits, setUpKey } from './pad-habits';
 import type { PadQuestion } from './pad-question';
 import type { PadSays } from './pad-says';
-
-export const draftKey = (roomId: string): string => `pad:${roomId}`;
 
 export type ReadingPadInput = {
   question: PadQuestion;

@@ -1,13 +1,16 @@
 'use client';
 
-import { useEffect, useState } from 'react';
+import { lazy, Suspense, useEffect, useState } from 'react';
 import { readRoom, rememberRoom } from '@/components/phone/room-store';
 import { useLive } from '@/components/phone/use-live';
 import { ErrorState } from '@/components/ui/error-state';
 import { Skeleton, SkeletonScreen } from '@/components/ui/skeleton';
 import type { WallBookView } from '@/lib/contracts/rooms';
-import { BookScreens } from './book-screens';
 import { type KeptOnPhone, readKept } from './kept-on-phone';
+
+/** Begun at once, beside the reading of the store: the strip sends before the pad is here. */
+const fetchBook = () => import('./book-screens').then((m) => ({ default: m.BookScreens }));
+const BookScreens = lazy(fetchBook);
 
 /** The wall book on the phone: the office's last word, and over it everything that is kept here. */
 export function WallBookScreen({ view }: { view: WallBookView }) {
@@ -18,6 +21,7 @@ export function WallBookScreen({ view }: { view: WallBookView }) {
 
   useEffect(() => {
     let isShown = true;
+    fetchBook().catch(() => null);
     Promise.all([readKept(view), rememberRoom(view)])
       .then(([read]) => isShown && setKept(read))
       .catch(() => isShown && setIsBroken(true));
@@ -28,7 +32,11 @@ export function WallBookScreen({ view }: { view: WallBookView }) {
 
   if (isBroken || live.state === 'failed') return <NothingKept />;
   if (live.state === 'reading' || live.value === null || kept === null) return <Opening />;
-  return <BookScreens key={roomId} room={live.value} kept={kept} />;
+  return (
+    <Suspense fallback={<Opening />}>
+      <BookScreens key={roomId} room={live.value} kept={kept} />
+    </Suspense>
+  );
 }
 
 function Opening() {

@@ -30,8 +30,8 @@ export function settleBatch({ items }: Batch, answer: Answer): Settled {
   const { status, json } = answer;
   if (status === 401) return { ...nothing, next: 'sign-in' };
   if (status >= 200 && status < 300) return settleTaken(items, json);
-  if (status >= 400 && status < 500 && !PASSING.has(status)) {
-    const message = problemWords(json, status);
+  if (status >= 400 && status < 500 && !isPassing(status)) {
+    const message = refusalWords(json, status);
     return { sentIds: [], parked: items.map(({ id }) => ({ id, message })), next: 'go-on' };
   }
   return { ...nothing, next: 'wait' };
@@ -60,7 +60,12 @@ function parkedList(parked: unknown): { id: string; message: string }[] {
   });
 }
 
-function problemWords(json: unknown, status: number): string {
+export function isPassing(status: number): boolean {
+  return PASSING.has(status);
+}
+
+/** Why the office would not take it, in its own words. */
+export function refusalWords(json: unknown, status: number): string {
   const problem = readProblemDetails(json);
   return problem?.detail ?? problem?.title ?? `The office refused it (${status}).`;
 }

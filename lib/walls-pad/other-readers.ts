@@ -1,3 +1,4 @@
+import type { Reader } from '@/lib/contracts/rooms';
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Reading, WallBook } from '@/lib/contracts/wall-book';
 import { standingReadings } from '@/lib/measure/standing-readings';
@@ -23,10 +24,10 @@ const CORNER_AGREEMENT_DEG = 0.2;
 
 export type ReadersInput = {
   book: WallBook;
-  /** Reading id → who took it; a reading that is not in it was taken on this phone. */
-  takenBy: Readonly<Record<string, string>>;
+  /** Who took which; a reading that nobody is named for was taken on this phone. */
+  readers: readonly Reader[];
   /** Whose phone this is. */
-  ownName: string;
+  ownPersonId: string;
   rules: Pick<FitRules, 'repeatAgreementMm'>;
   speech: LengthSpeech;
 };
@@ -38,11 +39,14 @@ export type ReadersInput = {
  * Example: mine 95 1/16", Ann Field's 95 3/16": `1/8" more`, apart where the shop allows 1/16".
  */
 export function otherReaders(reading: Reading, input: ReadersInput): OtherReader[] {
-  const { book, takenBy, ownName, rules, speech } = input;
-  const nameOf = ({ id }: Reading) => takenBy[id] ?? ownName;
+  const { book, readers, ownPersonId, rules, speech } = input;
+  const readerOf = new Map(
+    readers.flatMap((reader) => reader.readingIds.map((id) => [id, reader] as const)),
+  );
+  const personOf = ({ id }: Reading) => readerOf.get(id)?.personId ?? ownPersonId;
   const own = sizesOf(reading, book);
   return standingReadings(book.readings)
-    .filter((other) => other.id !== reading.id && nameOf(other) !== nameOf(reading))
+    .filter((other) => other.id !== reading.id && personOf(other) !== personOf(reading))
     .filter((other) => isSameThing(reading, other))
     .flatMap((other) => {
       const worst = worstOf(own, sizesOf(other, book));
@@ -52,7 +56,7 @@ export function otherReaders(reading: Reading, input: ReadersInput): OtherReader
       const way = by > 0 ? 'more' : 'less';
       return {
         readingId: other.id,
-        name: nameOf(other),
+        name: readerOf.get(other.id)?.name ?? 'You',
         value: readingWords(other, book.room, speech).value,
         difference: by === 0 ? 'the same' : `${said} ${way}`,
         isApart: Math.abs(by) > (unit === 'deg' ? CORNER_AGREEMENT_DEG : rules.repeatAgreementMm),

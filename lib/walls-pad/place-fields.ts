@@ -1,8 +1,8 @@
 import type { PadAsk, PadField } from './pad-fields';
 
-const x: PadField = { name: 'placeX', label: 'from the left corner', kind: 'position' };
-const y: PadField = { name: 'placeY', label: 'out from the wall', kind: 'position' };
-const z: PadField = { name: 'placeZ', label: 'height', kind: 'height' };
+const x: PadField = { name: 'placeX', label: 'along', kind: 'position' };
+const y: PadField = { name: 'placeY', label: 'out', kind: 'position' };
+const z: PadField = { name: 'placeZ', label: 'up', kind: 'height' };
 
 /** Where a reading is taken that nobody asked for: the places come before the value. */
 export function placeFields(ask: PadAsk): PadField[] {

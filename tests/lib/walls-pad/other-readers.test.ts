@@ -13,11 +13,17 @@ import {
 const speech = { unit: 'mm' as const, stepMm: 1 };
 const mine = exampleLength(1, { valueMm: 4_000, zMm: 900 });
 
-function others(reading: Reading, theirs: Reading[], names?: Record<string, string>) {
+const ann = (...readings: Reading[]) => ({
+  personId: 'ann',
+  name: 'Ann Field',
+  readingIds: readings.map((each) => each.id),
+});
+
+function others(reading: Reading, theirs: Reading[], readers = [ann(...theirs)]) {
   return otherReaders(reading, {
     book: exampleBook([reading, ...theirs]),
-    takenBy: names ?? Object.fromEntries(theirs.map((each) => [each.id, 'Ann Field'])),
-    ownName: 'Bo Marsh',
+    readers,
+    ownPersonId: 'bo',
     rules: metricRules,
     speech,
   });
@@ -52,9 +58,12 @@ describe('a second person’s reading of the same thing', () => {
         isApart: true,
       },
     ]);
-    expect(others(theirs, [mine], { [theirs.id]: 'Ann Field', [mine.id]: 'Bo Marsh' })).toEqual([
-      expect.objectContaining({ name: 'Bo Marsh', difference: '5 mm less' }),
+    // Looked at from theirs, a reading that the office has not named anybody for is one's own.
+    expect(others(theirs, [mine], [ann(theirs)])).toEqual([
+      expect.objectContaining({ name: 'You', difference: '5 mm less' }),
     ]);
+    const bo = { personId: 'bo', name: 'Bo Marsh', readingIds: [mine.id] };
+    expect(others(theirs, [mine], [ann(theirs), bo])[0]?.name).toBe('Bo Marsh');
   });
 
   it('agrees when it is no further off than the shop allows', () => {
@@ -66,7 +75,7 @@ describe('a second person’s reading of the same thing', () => {
 
   it('is not one’s own repeat, nor one at another height, nor one that was taken back', () => {
     const again = exampleLength(2, { valueMm: 4_002, zMm: 900 });
-    expect(others(mine, [again], {})).toEqual([]);
+    expect(others(mine, [again], [])).toEqual([]);
     expect(others(mine, [exampleLength(3, { valueMm: 4_005, zMm: 1_450 })])).toEqual([]);
     const theirs = exampleLength(4, { valueMm: 4_005, zMm: 900 });
     const back: Reading = {

@@ -1,0 +1,76 @@
+import type { WallBookView } from '@/lib/contracts/rooms';
+import type { TodayView } from '@/lib/contracts/visits';
+import type { Holder } from '@/lib/sync/holder';
+import { phoneDatabase } from './phone-database';
+
+/** When the day was last fetched whole, and which day that was. */
+export type Fetched = { at: string; date: string };
+
+const holderKey = 'holder';
+const fetchedKey = 'fetched';
+const dayKey = (date: string): string => `day:${date}`;
+const blankKey = (jobId: string): string => `blank:${jobId}`;
+
+/** Who holds the phone from now on. What the office showed somebody else is gone first; nothing unsent is. */
+export async function keepHolder(holder: Holder): Promise<void> {
+  const { kept, rooms } = phoneDatabase();
+  await phoneDatabase().transaction('rw', kept, rooms, async () => {
+    const before = await read<Holder>(holderKey);
+    if (before?.personId !== holder.personId) await kept.clear();
+    await rooms.filter(({ personId }) => personId !== holder.personId).delete();
+    await kept.put({ key: holderKey, value: holder });
+  });
+}
+
+export function readHolder(): Promise<Holder | null> {
+  return read<Holder>(holderKey);
+}
+
+export type DayFetched = {
+  personId: string;
+  days: TodayView[];
+  blanks: WallBookView[];
+  at: string;
+};
+
+/** The day as the office showed it, in place of the one before; nothing when somebody else holds the phone by now. */
+export async function keepDays({ personId, days, blanks, at }: DayFetched): Promise<void> {
+  const { kept } = phoneDatabase();
+  await phoneDatabase().transaction('rw', kept, async () => {
+    const holder = await read<Holder>(holderKey);
+    const [today] = days;
+    if (holder?.personId !== personId || !today) return;
+    await kept.clear();
+    await kept.bulkPut([
+      { key: holderKey, value: holder },
+      { key: fetchedKey, value: { at, date: today.date } satisfies Fetched },
+      ...days.map((day) => ({ key: dayKey(day.date), value: day })),
+      ...blanks.map((blank) => ({ key: blankKey(blank.jobId), value: blank })),
+    ]);
+  });
+}
+
+export function readFetched(): Promise<Fetched | null> {
+  return read<Fetched>(fetchedKey);
+}
+
+export function readDay(date: string): Promise<TodayView | null> {
+  return read<TodayView>(dayKey(date));
+}
+
+/** Every day that is kept, in order. */
+export async function readDays(): Promise<TodayView[]> {
+  const rows = await phoneDatabase().kept.where('key').startsWith(dayKey('')).toArray();
+  return rows.map(({ value }) => value as TodayView);
+}
+
+/** An empty book for a room of this job that nobody has drawn yet. */
+export function readBlank(jobId: string): Promise<WallBookView | null> {
+  return read<WallBookView>(blankKey(jobId));
+}
+
+/** The writer of each key knows its shape, and the store is cleared when the program's shapes change. */
+async function read<Value>(key: string): Promise<Value | null> {
+  const row = await phoneDatabase().kept.get(key);
+  return (row?.value as Value | undefined) ?? null;
+}

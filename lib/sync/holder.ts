@@ -1,0 +1,8 @@
+/** Whose phone this is, and what the screens let that person do; only the server decides. */
+export type Holder = {
+  personId: string;
+  personName: string;
+  shopName: string;
+  mayReport: boolean;
+  mayMeasure: boolean;
+};

@@ -1,0 +1,76 @@
+import { describe, expect, it } from 'vitest';
+import { directionsHref } from '@/components/phone/directions';
+import { statusOnPhone, tapsFrom } from '@/components/phone/visit-report';
+import { type BookPlace, placeHref, placeOf } from '@/components/walls/book-place';
+import type { TodayVisit } from '@/lib/contracts/visits';
+import { id, queuedExample } from '@/tests/help/wall-book-examples';
+
+describe('places of the wall book', () => {
+  it.each<BookPlace>([
+    { at: 'next' },
+    { at: 'list' },
+    { at: 'leave' },
+    { at: 'sketch' },
+    { at: 'sketch', wallId: id(1) },
+    { at: 'wall', wallId: id(1) },
+    { at: 'reading', readingId: id(2) },
+    { at: 'correct', readingId: id(2) },
+    { at: 'again', readingId: id(2) },
+    { at: 'feature', wallId: id(1) },
+    { at: 'feature', wallId: id(1), readingId: id(2) },
+    { at: 'add', kind: 'doorway', wallId: '' },
+    { at: 'ask', slot: `length:${id(1)}:910` },
+    { at: 'ask', slot: 'a slot/with 100 % of "signs"' },
+  ])('finds the way back to %j', (place) => {
+    expect(placeOf(placeHref(place))).toEqual(place);
+  });
+
+  it.each(['', '#', '#nowhere', '#wall', '#reading/', '#ask', '#%E0%A4%A'])(
+    'takes "%s" for the next question',
+    (hash) => {
+      expect(placeOf(hash)).toEqual({ at: 'next' });
+    },
+  );
+});
+
+describe('a visit on the phone', () => {
+  const visit = { id: id(7), status: 'confirmed' } as TodayVisit;
+  const tap = (order: number, what: 'on-the-way' | 'arrived' | 'nobody-home', visitId = id(7)) =>
+    queuedExample(order, {
+      kind: 'report',
+      report: { visitId, what, at: '2026-12-01T09:00:00.000Z' },
+    });
+
+  it('stands as it was tapped, before the office has heard', () => {
+    expect(statusOnPhone(visit, [tap(1, 'on-the-way'), tap(2, 'arrived')])).toBe('on-site');
+  });
+
+  it('stands as the office has it when nothing was tapped, or another visit was', () => {
+    expect(statusOnPhone(visit, [tap(1, 'arrived', id(8))])).toBe('confirmed');
+  });
+
+  it('does not count a tap that the office refused', () => {
+    expect(statusOnPhone(visit, [{ ...tap(1, 'arrived'), parked: 'called off' }])).toBe(
+      'confirmed',
+    );
+  });
+
+  it.each([
+    ['booked', ['on-the-way', 'arrived']],
+    ['on-the-way', ['arrived', 'nobody-home']],
+    ['on-site', ['done', 'nobody-home']],
+    ['done', []],
+    ['called-off', []],
+  ] as const)('offers from %s: %j', (status, taps) => {
+    expect(tapsFrom(status)).toEqual(taps);
+  });
+});
+
+describe('directionsHref', () => {
+  it.each([
+    ['Mozilla/5.0 (Linux; Android 15)', 'geo:0,0?q=4%20Orchard%20End%2C%20Upper%20Fold'],
+    ['Mozilla/5.0 (iPhone; CPU iPhone OS 18_0)', 'maps:?daddr=4%20Orchard%20End%2C%20Upper%20Fold'],
+  ])('for %s is %s', (agent, href) => {
+    expect(directionsHref('4 Orchard End', 'Upper Fold', agent)).toBe(href);
+  });
+});
