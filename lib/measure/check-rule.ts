@@ -25,6 +25,8 @@ export type RuleVerdict = {
 
 /** From here a value is close to a limit it has not passed. */
 const CLOSE_SHARE = 0.8;
+/** A value this near a limit lies on it (MEASURE "The fit of a job": ties within 1e-6). */
+const ON_LIMIT_MM = 1e-6;
 
 /**
  * Judges the size of a figure over a span by the first of the rule sets that limits the check.
@@ -91,10 +93,11 @@ export function ruleFor(
 }
 
 const isOver = (size: number, limit: number, sense: Rule['sense']) =>
-  sense === 'most' ? size > limit : size < limit;
+  sense === 'most' ? size > limit + ON_LIMIT_MM : size < limit - ON_LIMIT_MM;
 
 function verdictOf(size: number, U: number, limit: number, sense: Rule['sense']) {
   if (isOver(size, limit, sense)) return 'over';
-  if (sense === 'least') return size - U < limit ? 'close' : 'within';
-  return size >= CLOSE_SHARE * limit || size + U > limit ? 'close' : 'within';
+  if (sense === 'least') return size - U < limit - ON_LIMIT_MM ? 'close' : 'within';
+  const isClose = size >= CLOSE_SHARE * limit - ON_LIMIT_MM || size + U > limit + ON_LIMIT_MM;
+  return isClose ? 'close' : 'within';
 }

@@ -102,18 +102,10 @@ export function turnsCorner(
     const over = clearHeight
       ? { value: clearHeight.value - box[upright], u: clearHeight.u }
       : { value: Infinity, u: 0 };
-    return [
-      {
-        how: 'turning' as const,
-        upright,
-        ...lesser(turning(length, thickness, widthIn, widthOut), over),
-      },
-      {
-        how: 'sliding' as const,
-        upright,
-        ...lesser(sliding(length, thickness, widthIn, widthOut), over),
-      },
-    ];
+    return (['sliding', 'turning'] as const).map((how) => {
+      const way = how === 'sliding' ? sliding : turning;
+      return { how, upright, ...lesser(way(length, thickness, widthIn, widthOut), over) };
+    });
   });
   const best = ways.reduce((most, way) =>
     way.value - 2 * way.u > most.value - 2 * most.u ? way : most,
@@ -135,14 +127,15 @@ type Margin = { value: number; u: number };
 const lesser = (one: Margin, other: Margin) => (other.value < one.value ? other : one);
 
 function turning(length: number, thickness: number, p: Measured, q: Measured): Margin {
-  const beside = Math.min(p.value, q.value) - thickness;
-  if (beside < 0) return { value: beside, u: p.value < q.value ? p.u : q.u };
+  const narrow = p.value < q.value ? p : q;
+  const beside = { value: narrow.value - thickness, u: narrow.u };
+  if (beside.value < 0) return beside;
   const reach = (angle: number) =>
     (p.value * Math.sin(angle) + q.value * Math.cos(angle) - thickness) /
     (Math.sin(angle) * Math.cos(angle));
   const angle = leastAt(reach);
   const u = Math.hypot(p.u / Math.cos(angle), q.u / Math.sin(angle));
-  return { value: reach(angle) - length, u };
+  return lesser({ value: reach(angle) - length, u }, beside);
 }
 
 function sliding(length: number, thickness: number, p: Measured, q: Measured): Margin {
