@@ -3,12 +3,11 @@
 import { Suspense, useEffect, useRef, useState } from 'react';
 import { keepDraft } from '@/components/phone/draft-store';
 import type { RoomOnPhone } from '@/components/phone/room-store';
-import { EmptyState } from '@/components/ui/empty-state';
-import { Skeleton, SkeletonScreen } from '@/components/ui/skeleton';
 import { walkRoom } from '@/lib/measure/room-walk';
 import { nextAsk, toGoWords } from '@/lib/walls-pad/next-ask';
 import { speechIn } from '@/lib/walls-pad/say-length';
 import { type BookPlace, goTo, placeHref, useBookPlace } from './book-place';
+import { AllRead, Waiting } from './book-states';
 import { afterKey } from './draft-keys';
 import type { KeptOnPhone } from './kept-on-phone';
 import {
@@ -29,7 +28,6 @@ import {
   questionOfPlan,
   questionOfReading,
 } from './pad-question';
-import { PlaceButton } from './place-button';
 import { QuestionPicture, WallPicture } from './question-picture';
 import { ReadingPad } from './reading-pad';
 import { usePlan } from './use-plan';
@@ -207,36 +205,4 @@ function useScrollUp(href: string): void {
     shown.current = href;
     window.scrollTo(0, 0);
   }, [href]);
-}
-
-function Waiting() {
-  return (
-    <SkeletonScreen what="what is to be read">
-      <div className="flex flex-col gap-3 p-3.5">
-        <Skeleton className="h-44 w-full" />
-        <Skeleton className="h-6 w-3/4" />
-        <Skeleton className="h-12 w-1/2" />
-      </div>
-    </SkeletonScreen>
-  );
-}
-
-function AllRead() {
-  return (
-    <div className="p-3.5">
-      <EmptyState
-        title="Nothing more is asked for"
-        action={
-          <div className="flex w-full flex-col gap-2">
-            <PlaceButton place={{ at: 'leave' }}>Before you leave</PlaceButton>
-            <PlaceButton look="line" place={{ at: 'list' }}>
-              The whole room
-            </PlaceButton>
-          </div>
-        }
-      >
-        Look once at what holds together and what does not, then hand the book in.
-      </EmptyState>
-    </div>
-  );
 }
