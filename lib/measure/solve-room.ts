@@ -14,7 +14,8 @@ const MOST_STEPS = 40;
 /** A slip of a metre bends the room so far that the last steps creep: after these, near is enough. */
 const PATIENCE = 8;
 const SLOW_GAIN = 1e-3;
-const SMALL_STEP = 1e-7;
+/** After a step this small (mm) the next would be lost in the rounding of the outputs. */
+const SMALL_STEP = 1e-4;
 /** Pivot of the scaled normal matrix below which an unknown hangs on rounding alone. */
 const LEAST_PIVOT = 1e-6;
 
@@ -43,13 +44,13 @@ export function solveRoom(
     const change = normal.change();
     const largest = change.reduce((most, value) => Math.max(most, Math.abs(value)), 0);
     if (!Number.isFinite(largest)) return null;
-    if (largest < SMALL_STEP) return solved(state, linear, normal.inverse());
     const next = descend(state, change, misfit, () =>
       linearise(state, observations, observed, priors),
     );
     if (!next) return null;
     const gained = misfit - next.misfit;
     ({ linear, misfit } = next);
+    if (largest < SMALL_STEP) return solved(state, linear, normal.inverse());
     if (step >= PATIENCE && gained < SLOW_GAIN * misfit) {
       const last = factorise(linear.rows, linear.residuals, state.layout.unknownCount);
       return last ? solved(state, linear, last.inverse()) : null;
