@@ -15,7 +15,7 @@ import {
   type RunPlane,
 } from '@/lib/measure/fit-set-lines';
 import { frontDepth } from '@/lib/measure/room-walk';
-import { type FramedRun, frameRun } from '@/lib/measure/run-ends';
+import { type FramedRun, frameRun, unitAt } from '@/lib/measure/run-ends';
 import type { OpeningPlace, RunEndFit, RunFit, RunOpening } from '@/lib/measure/run-fit';
 import type { Problem } from '@/lib/problem';
 import { roundOpeningDown } from '@/lib/units/round';
@@ -47,7 +47,7 @@ export function workRuns(context: FitContext): { runs: WorkedRun[]; problems: Pr
     if (!left || !right) return request;
     return {
       run: request.run,
-      bandMm: [left.leftMm, right.rightMm] as const,
+      bandMm: toCornerUnits(context, request.run, [left.leftMm, right.rightMm]),
       edgesMm: [...units.map(({ leftMm }) => leftMm), ...units.map(({ rightMm }) => rightMm)],
     };
   });
@@ -57,6 +57,21 @@ export function workRuns(context: FitContext): { runs: WorkedRun[]; problems: Pr
     workRun(context, run, lines.planes, bands.get(run.id) ?? [0, 0]),
   );
   return { runs, problems: [...lines.problems, ...runs.flatMap(({ problems }) => problems)] };
+}
+
+/** Behind the arm of a corner unit that the run on the next wall holds, this wall's face counts too. */
+function toCornerUnits(
+  context: FitContext,
+  run: Run,
+  [x0Mm, x1Mm]: readonly [number, number],
+): readonly [number, number] {
+  const holdsNone = (end: 'left' | 'right') => {
+    const meets = run[end];
+    const isJoined = meets.kind === 'run' && meets.through === 'corner-unit';
+    return isJoined && unitAt(run, end)?.kind !== 'corner';
+  };
+  const lengthMm = context.frames.get(run.wallId)?.length.value ?? x1Mm;
+  return [holdsNone('left') ? 0 : x0Mm, holdsNone('right') ? Math.max(x1Mm, lengthMm) : x1Mm];
 }
 
 function workRun(

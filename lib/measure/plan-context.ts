@@ -5,6 +5,7 @@ import type { PlannedReading } from '@/lib/measure/missing-reading';
 import { type RoomWalk, type WalkedWall, walkRoom } from '@/lib/measure/room-walk';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { formatLength } from '@/lib/units/format-length';
+import { lengthLimits } from '@/lib/units/length-limits';
 
 /** A reading asked for, before it is looked up whether it was taken. */
 export type AskedSlot = Omit<PlannedReading, 'takenBy' | 'skipped'>;
@@ -45,10 +46,15 @@ export function planContext(wallBook: WallBook, runs: Run[], rules: FitRules): P
   };
 }
 
-/** As read if it was, else as drawn: where places along the wall are asked for. */
+/** As read if it can be, else as drawn: where places along the wall are asked for. */
 export function lengthSoFar(context: PlanContext, walked: WalkedWall): number {
-  const read = context.byKind('length').find(({ wallId }) => wallId === walked.wall.id);
-  return read?.valueMm ?? walked.wall.nominalLengthMm;
+  const longestMm = lengthLimits.length.mostMm;
+  const read = context
+    .byKind('length')
+    .find(
+      ({ wallId, valueMm }) => wallId === walked.wall.id && valueMm > 0 && valueMm <= longestMm,
+    );
+  return read?.valueMm ?? Math.min(walked.wall.nominalLengthMm, longestMm);
 }
 
 export function runsOn(context: PlanContext, walked: WalkedWall): Run[] {
@@ -83,7 +89,8 @@ export function extentOf(run: Run, lengthMm: number): readonly [number, number] 
   const left = 'xMm' in run.left ? run.left.xMm : 'limitMm' in run.left ? run.left.limitMm : 0;
   const right =
     'xMm' in run.right ? run.right.xMm : 'limitMm' in run.right ? run.right.limitMm : lengthMm;
-  return [Math.min(left, right), Math.max(left, right)];
+  const onWall = (xMm: number) => Math.min(Math.max(xMm, 0), lengthMm);
+  return [onWall(Math.min(left, right)), onWall(Math.max(left, right))];
 }
 
 const NEAR_FLOOR_MM = 160;
