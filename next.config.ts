@@ -51,6 +51,7 @@ const nextConfig: NextConfig = {
     'moment',
     'moment-timezone',
     'date-holidays',
+    'pdfkit',
   ],
   async headers() {
     return [

@@ -1,4 +1,5 @@
 /** Every address of the product, in one place: links and requests are made from these and from nothing else. */
+import type { SheetFileKind } from '@/lib/contracts/sheet-files';
 
 const part = encodeURIComponent;
 
@@ -74,6 +75,9 @@ export const apiPaths = {
   fit: (roomId: string) => `/api/fits?roomId=${part(roomId)}`,
   sheets: () => '/api/sheets',
   takeUpSheet: (releaseId: string) => `/api/sheets/${part(releaseId)}/take-up`,
+  /** A released sheet to take away: "sheet.pdf", "cut-list.csv" … */
+  sheetFile: (releaseId: string, kind: SheetFileKind) =>
+    `/api/sheets/${part(releaseId)}/files/${part(kind)}`,
   bench: () => '/api/bench',
 
   visits: () => '/api/visits',

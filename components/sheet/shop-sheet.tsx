@@ -16,6 +16,7 @@ import { readingLines } from '@/lib/sheet/reading-lines';
 import { wallsOf } from '@/lib/sheet/room-names';
 import { SheetBar } from './sheet-bar';
 import { SheetChanges } from './sheet-changes';
+import { SheetFiles } from './sheet-files';
 import { SheetLeaf } from './sheet-leaf';
 
 type ShopSheetProps = { sheet: SheetView; mayTakeUp: boolean };
@@ -37,6 +38,7 @@ export function ShopSheet({ sheet, mayTakeUp }: ShopSheetProps) {
         fitHref={paths.room(sheet.jobId, wallBook.room.id)}
         mayTakeUp={mayTakeUp}
       />
+      <SheetFiles releaseId={sheet.release.id} />
       <article
         aria-label={`Shop sheet, ${sheet.roomName}, revision ${sheet.release.revision}`}
         className={`shop-sheet text-note ${rules.region === 'US' ? 'on-letter' : 'on-a4'}`}

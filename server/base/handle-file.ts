@@ -1,4 +1,5 @@
 import type { z } from 'zod';
+import { contentDisposition } from './content-disposition';
 import type { PersonContext } from './context';
 import { answering, type RouteHandler, signedIn } from './handle';
 import { readInput } from './read-input';
@@ -11,6 +12,8 @@ export type FileAnswer = {
   name: string;
   /** Changes when the bytes do. */
   mark: string;
+  /** Saved under its name; shown where it is not said. */
+  isSaved?: boolean;
 };
 
 /**
@@ -39,7 +42,10 @@ export function handleFile<S extends z.ZodType>(
         ...headers,
         'content-type': file.mediaType,
         'content-length': String(file.bytes),
-        'content-disposition': `inline; filename="${file.name}"`,
+        'content-disposition': contentDisposition(
+          file.isSaved ? 'attachment' : 'inline',
+          file.name,
+        ),
       },
     });
   });

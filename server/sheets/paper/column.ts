@@ -7,15 +7,20 @@ import { heightOf, linesOf, putParagraph, putWords, type WordLook } from './word
 
 /** A heading and what stands under it, as one column of a page. */
 export type Section = { title: string; meta?: string; paragraphs: Paragraph[] };
-export type Paragraph = { words: string; look?: Partial<WordLook>; mark?: Share; isListed?: boolean };
+export type Paragraph = {
+  words: string;
+  look?: Partial<WordLook>;
+  mark?: Share;
+  isListed?: boolean;
+};
 
 type Doc = PDFKit.PDFDocument;
 
-const bodyLook: WordLook = { sizePt: 8 };
+const bodyLook: WordLook = { sizePt: 7.8 };
 const titleLook: WordLook = { sizePt: 9.5, weight: 600 };
 const markPt = 19;
 const bulletPt = 9;
-const betweenPt = 3;
+const betweenPt = 2.4;
 
 /** Sections one under another; what no longer goes in goes on in the area that `nextArea` gives. */
 export function putSections(
@@ -31,12 +36,13 @@ export function putSections(
     if (first && 22 + heightIn(doc, first, free.width) > free.height) free = nextArea();
     free = putTitle(doc, { title, meta }, free);
     for (const paragraph of paragraphs) {
-      const height = heightIn(doc, paragraph, free.width) + betweenPt;
-      if (height > free.height) free = putTitle(doc, { title: `${title}, continued` }, nextArea());
+      if (heightIn(doc, paragraph, free.width) > free.height) {
+        free = putTitle(doc, { title: `${title}, continued` }, nextArea());
+      }
       put(doc, paragraph, free);
-      free = below(free, height);
+      free = below(free, heightIn(doc, paragraph, free.width) + betweenPt);
     }
-    free = below(free, 8);
+    free = below(free, 5);
   }
   return free;
 }
@@ -48,7 +54,12 @@ function putTitle(doc: Doc, { title, meta }: { title: string; meta?: string }, a
     putWords(doc, meta, look, { x: area.x + area.width, y: area.y + 10, anchor: 'end' });
   }
   const y = area.y + 14;
-  doc.moveTo(area.x, y).lineTo(area.x + area.width, y).lineWidth(0.6).undash().stroke(inks.ink);
+  doc
+    .moveTo(area.x, y)
+    .lineTo(area.x + area.width, y)
+    .lineWidth(0.6)
+    .undash()
+    .stroke(inks.ink);
   return below(area, 18);
 }
 

@@ -1,5 +1,5 @@
-import { inks } from '@/lib/export/layer-style';
 import type { SheetView } from '@/lib/contracts/rooms';
+import { inks } from '@/lib/export/layer-style';
 import { supersededWords } from '@/lib/export/sheet-stamp';
 import { putWords } from './words';
 
@@ -24,28 +24,31 @@ export const stampPt = 50;
 /** Landscape, as drawings are: points, width by height. */
 const sizes = { letter: [792, 612], A4: [841.89, 595.28] } as const;
 
-/** A new page with its heading, and the red band where the sheet no longer holds; gives what is free. */
-export function newLeaf({ doc, sheet, size }: Paper, heading: { title: string; meta: string }): Area {
+/** What is free on every page of a print, under its heading and over its title block. */
+export function areaOf({ sheet, size }: Paper): Area {
   const [pageWidth, pageHeight] = sizes[size];
-  doc.addPage({ size: [pageWidth, pageHeight], margin: 0 });
-  const width = pageWidth - 2 * marginPt;
+  const y = marginPt + (supersededWords(sheet) ? bandPt + 8 : 0) + headPt;
+  const foot = pageHeight - marginPt - stampPt - 10;
+  return { x: marginPt, y, width: pageWidth - 2 * marginPt, height: foot - y };
+}
+
+/** A new page with its heading, and the red band where the sheet no longer holds; gives what is free. */
+export function newLeaf(paper: Paper, heading: { title: string; meta: string }): Area {
+  const { doc, sheet, size } = paper;
+  const area = areaOf(paper);
+  doc.addPage({ size: [...sizes[size]], margin: 0 });
   const stamp = supersededWords(sheet);
-  let y: number = marginPt;
   if (stamp) {
-    putBand(doc, stamp, { x: marginPt, y, width }, sheet.release.revision);
-    y += bandPt + 8;
+    putBand(doc, stamp, { x: marginPt, y: marginPt, width: area.width }, sheet.release.revision);
   }
-  putWords(doc, heading.title, { sizePt: 14, weight: 600 }, { x: marginPt, y: y + 14 });
-  putWords(
-    doc,
-    heading.meta,
-    { sizePt: 8, colour: inks.graphite },
-    { x: marginPt + width, y: y + 14, anchor: 'end' },
-  );
-  const line = y + 20;
-  doc.moveTo(marginPt, line).lineTo(marginPt + width, line).lineWidth(1).undash().stroke(inks.ink);
-  const top = y + headPt;
-  return { x: marginPt, y: top, width, height: pageHeight - marginPt - stampPt - 10 - top };
+  const foot = area.y - 16;
+  putWords(doc, heading.title, { sizePt: 14, weight: 600 }, { x: area.x, y: foot });
+  const metaLook = { sizePt: 8, colour: inks.graphite };
+  putWords(doc, heading.meta, metaLook, { x: area.x + area.width, y: foot, anchor: 'end' });
+  const line = area.y - 10;
+  doc.moveTo(area.x, line).lineTo(area.x + area.width, line);
+  doc.lineWidth(1).undash().stroke(inks.ink);
+  return area;
 }
 
 function putBand(

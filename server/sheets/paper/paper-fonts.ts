@@ -1,5 +1,6 @@
 import { readFileSync } from 'node:fs';
 import path from 'node:path';
+import { woffToSfnt } from './woff-to-sfnt';
 
 export type Weight = 400 | 500 | 600;
 /** The font comes in parts, each with the letters of some alphabets. */
@@ -35,11 +36,16 @@ export function partOf(letter: string): Part | null {
   return letters.vietnamese.test(letter) ? 'vietnamese' : null;
 }
 
-/** Words in letters that can be printed: a sign in words, a letter of another alphabet as a question mark. */
+/**
+ * Words in letters that can be printed: a sign in words, a letter of another alphabet as a question mark,
+ * and a minus where a hyphen stands for one.
+ */
 export function printable(words: string): string {
-  return [...words.normalize('NFC').replace(/\p{Cf}|[^\P{Cc}\t\n]/gu, '')]
-    .map((letter) => (partOf(letter) ? letter : (inWords[letter] ?? '?')))
-    .join('');
+  const clean = words
+    .normalize('NFC')
+    .replace(/\p{Cf}|[^\P{Cc}\t\n]/gu, '')
+    .replace(/(^|\s)-(?=\d)/g, '$1−');
+  return [...clean].map((letter) => (partOf(letter) ? letter : (inWords[letter] ?? '?'))).join('');
 }
 
 export const fontName = (part: Part, weight: Weight) => `Work Sans ${part} ${weight}`;
@@ -60,7 +66,7 @@ function fontFile(part: Part, weight: Weight): Buffer {
   const known = files.get(name);
   if (known) return known;
   const folder = path.join(process.cwd(), 'node_modules/@fontsource/work-sans/files');
-  const file = readFileSync(path.join(/*turbopackIgnore: true*/ folder, name));
+  const file = woffToSfnt(readFileSync(path.join(/*turbopackIgnore: true*/ folder, name)));
   files.set(name, file);
   return file;
 }

@@ -1,32 +1,108 @@
 import { drawPlan } from '@/lib/drawing/plan';
 import { inks } from '@/lib/export/layer-style';
-import { drawnToScale } from '@/lib/export/paper-scale';
-import { outOfTrueWords } from '@/lib/export/sheet-drawings';
-import { supersededWords } from '@/lib/export/sheet-stamp';
+import { shareOfRun } from '@/lib/export/run-facts';
+import { troubleOf } from '@/lib/export/trouble';
 import type { Share } from '@/lib/measure/fit-figure';
-import type { RunVerdict } from '@/lib/measure/run-fit';
 import { cautionsFor } from '@/lib/sheet/cautions';
-import { type Paragraph, putSections, type Section } from './column';
-import { type Area, newLeaf, type Paper } from './leaf';
-import { putDrawing } from './put-drawing';
-
-/** Letters of 14 units come out at about 8 pt. */
-export const ptPerPx = 0.56;
-export const sidePt = 232;
-const betweenPt = 22;
+import { proofRows } from '@/lib/sheet/proof-rows';
+import type { Paragraph, Section } from './column';
+import type { Paper } from './leaf';
+import { putBeside } from './put-beside';
 
 /** The first page: the room seen from above, and what the bench must know before anything else. */
 export function putPlanLeaf(paper: Paper): void {
-  const { doc, sheet } = paper;
-  const { unit } = sheet.rules;
-  const title = `${sheet.roomName}: plan`;
-  const drawingArea = { width: widthBeside(paper), height: heightOn(paper) };
-  const drawn = drawnToScale((look) => drawPlan(sheet, look), { unit, ptPerPx, ...drawingArea });
-  const meta = metaWords('seen from above', drawn, unit);
-  const area = newLeaf(paper, { title, meta });
-  putDrawing(doc, drawn.drawing, { x: area.x, y: area.y, ptPerPx: drawn.ptPerPx });
-  const side = sideOf(area);
-  putSections(doc, sections(paper), side, () =>
-    newLeaf(paper, { title: `${title}, continued`, meta }),
-  );
+  const { sheet } = paper;
+  putBeside(paper, {
+    title: `${sheet.roomName}: plan`,
+    view: 'seen from above',
+    draw: (look) => drawPlan(sheet, look),
+    sections: [
+      sinceThen(paper),
+      changes(paper),
+      pointsOpen(paper),
+      runs(paper),
+      proved(paper),
+      trouble(paper),
+      cautions(paper),
+    ],
+  });
 }
+
+const listed = (words: string, look?: Paragraph['look']): Paragraph => ({
+  words,
+  look,
+  isListed: true,
+});
+
+/** Why the sheet no longer holds. */
+function sinceThen({ sheet }: Paper): Section {
+  const look = { colour: inks.chalk, weight: 500 } as const;
+  return {
+    title: `Since revision ${sheet.release.revision}`,
+    paragraphs: sheet.supersededBy.map((words) => listed(words, look)),
+  };
+}
+
+function changes({ sheet }: Paper): Section {
+  const { release } = sheet;
+  return {
+    title: 'Changed since the revision before',
+    paragraphs:
+      release.revision === 'A'
+        ? [{ words: 'This is the first release of this room.', look: { colour: inks.graphite } }]
+        : release.changes.map((words) => listed(words)),
+  };
+}
+
+function pointsOpen({ sheet }: Paper): Section {
+  return {
+    title: 'Released with points open',
+    paragraphs: sheet.overrideReason ? [{ words: sheet.overrideReason, mark: 'close' }] : [],
+  };
+}
+
+function runs({ sheet }: Paper): Section {
+  return {
+    title: 'Runs',
+    paragraphs: sheet.fit.runs.map(({ name, fill }): Paragraph => {
+      if (!fill) return { words: `${name}: not filled, too little is read.`, mark: 'over' };
+      return { words: `${name}: ${lower(fill.words)}`, mark: shareOfRun[fill.verdict] };
+    }),
+  };
+}
+
+/** How many checks came out how; each stands on the last page. */
+function proved({ sheet }: Paper): Section {
+  const rows = proofRows(sheet.fit, sheet.rules);
+  const count = (share: Share) => rows.filter(({ verdict }) => verdict === share).length;
+  const worst = (['over', 'close', 'within'] as const).find((share) => count(share) > 0);
+  const words = `${count('over')} checks over, ${count('close')} close, ${count('within')} within: see the last leaf.`;
+  return { title: 'Proved on site', paragraphs: worst ? [{ words, mark: worst }] : [] };
+}
+
+function trouble({ sheet }: Paper): Section {
+  const { suspect } = sheet.fit.closure;
+  const words = [
+    ...(suspect ? [suspect.words] : []),
+    ...troubleOf(
+      sheet.fit,
+      sheet.runs.map(({ id }) => id),
+    ),
+  ];
+  return {
+    title: 'In the way',
+    paragraphs: words.map((one): Paragraph => ({ words: one, mark: 'over' })),
+  };
+}
+
+function cautions({ sheet }: Paper): Section {
+  const { runs: laidOut, wallBook, isOldHouse } = sheet;
+  return {
+    title: 'Cautions',
+    paragraphs: cautionsFor({ runs: laidOut, readings: wallBook.readings, isOldHouse }).map(
+      (words) => listed(words),
+    ),
+  };
+}
+
+const lower = (words: string) => words.charAt(0).toLowerCase() + words.slice(1);

@@ -8,12 +8,7 @@ type Place = { x: number; y: number; ptPerPx: number };
 /** A drawing on the page, the upper left corner of its bounds at a place. */
 export function putDrawing(doc: Doc, drawing: Drawing, { x, y, ptPerPx }: Place): void {
   const { left, top } = drawing.bounds;
-  doc
-    .save()
-    .translate(x, y)
-    .scale(ptPerPx)
-    .translate(-left, -top)
-    .lineJoin('round');
+  doc.save().translate(x, y).scale(ptPerPx).translate(-left, -top).lineJoin('round');
   putShapes(doc, drawing.shapes);
   doc.restore();
 }
@@ -28,7 +23,8 @@ function putShapes(doc: Doc, shapes: readonly Shape[]): void {
         putPath(doc, shape.points, shape.layer, true);
         break;
       case 'circle':
-        paint(doc.circle(shape.centre[0], shape.centre[1], shape.radius), shape.layer);
+        doc.circle(...shape.centre, shape.radius);
+        paint(doc, shape.layer);
         break;
       case 'text':
         putText(doc, shape);
@@ -51,7 +47,7 @@ function putPath(doc: Doc, points: readonly Point[], layer: Layer, isClosed: boo
 function paint(doc: Doc, layer: Layer): void {
   const { fill, stroke, width, dash } = layerStyle[layer];
   doc.lineWidth(width);
-  if (dash.length > 0) doc.dash([...dash]);
+  if (dash.length > 0) doc.dash(dash, {});
   else doc.undash();
   if (fill && stroke) doc.fillAndStroke(fill, stroke);
   else if (fill) doc.fill(fill);

@@ -1,5 +1,5 @@
-import type { Share } from '@/lib/measure/fit-figure';
 import { inks } from '@/lib/export/layer-style';
+import type { Share } from '@/lib/measure/fit-figure';
 
 /** A level's vial on 26 × 14, its bubble between the lines, on a line, or past it: it reads without colour. */
 const vial =
@@ -25,7 +25,12 @@ export function putMark(
   const scale = heightPt / 14;
   const { x: bubbleX, width, height } = bubbles[share];
   const ink = shareInk[share];
-  doc.save().translate(x, y - heightPt).scale(scale).lineWidth(1.3).undash();
+  doc
+    .save()
+    .translate(x, y - heightPt)
+    .scale(scale)
+    .lineWidth(1.3)
+    .undash();
   doc.path(vial).stroke(ink);
   doc.ellipse(bubbleX, 7, width, height);
   if (share === 'within') doc.stroke(ink);

@@ -23,7 +23,7 @@ function putStamp(paper: Paper, leaf: { number: number; count: number }): void {
   const { doc, sheet } = paper;
   const y = doc.page.height - marginPt - stampPt;
   const width = doc.page.width - 2 * marginPt;
-  const cells = cellsOf(paper, leaf);
+  const cells = cellsOf(paper);
   const revisionPt = 96;
   const total = cells.reduce((sum, { share }) => sum + share, 0);
   doc.rect(marginPt, y, width, stampPt).lineWidth(1).undash().stroke(inks.ink);
@@ -32,7 +32,11 @@ function putStamp(paper: Paper, leaf: { number: number; count: number }): void {
     const cellPt = ((width - revisionPt) * share) / total;
     putCell(doc, { label, value }, { x, y, width: cellPt });
     x += cellPt;
-    doc.moveTo(x, y).lineTo(x, y + stampPt).lineWidth(0.6).stroke(inks.rule);
+    doc
+      .moveTo(x, y)
+      .lineTo(x, y + stampPt)
+      .lineWidth(0.6)
+      .stroke(inks.rule);
   }
   const isOut = supersededWords(sheet) !== null;
   putWords(doc, 'revision', labelLook, { x: x + 7, y: y + 10 });
@@ -66,7 +70,7 @@ function putCell(
   });
 }
 
-function cellsOf({ sheet, releasedOn, printedAt }: Paper, _leaf: object): Cell[] {
+function cellsOf({ sheet, releasedOn, printedAt }: Paper): Cell[] {
   const { release, rules } = sheet;
   const unit = rules.unit === 'in' ? 'inches' : 'millimetres';
   return [
@@ -81,7 +85,7 @@ function cellsOf({ sheet, releasedOn, printedAt }: Paper, _leaf: object): Cell[]
     { label: 'released', value: `${release.releasedBy}, ${releasedOn}`, share: 1.15 },
     {
       label: 'printed',
-      value: `${printedAt}; ${unit}, ± is k = 2; engine ${sheet.engineVersion}`,
+      value: `${printedAt}; ${unit}, ± is k = 2; engine ${sheet.engineVersion}`,
       share: 1.5,
     },
   ];

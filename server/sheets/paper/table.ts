@@ -6,7 +6,12 @@ import { heightOf, linesOf, putWords, type WordLook } from './words';
 
 export type Column = { title: string; share: number; align?: 'start' | 'end' };
 /** Words of a cell, each line with its look; a mark before the first where it is a verdict. */
-export type Cell = { lines: { words: string; look?: Partial<WordLook> }[]; mark?: Share };
+export type Cell = {
+  lines: { words: string; look?: Partial<WordLook> }[];
+  mark?: Share;
+  /** To be ticked with a pencil. */
+  box?: true;
+};
 export type TableRow = { kind: 'group'; words: string } | { kind: 'row'; cells: Cell[] };
 
 type Doc = PDFKit.PDFDocument;
@@ -16,13 +21,16 @@ const bodyLook: WordLook = { sizePt: 8.5 };
 const titleLook: WordLook = { sizePt: 7, colour: inks.graphite };
 const groupLook: WordLook = { sizePt: 9, weight: 600 };
 const padPt = 3.2;
-const gapPt = 8;
+const gapPt = 13;
 const titlePt = 14;
 const groupPt = 19;
 const markPt = 20;
+const boxPt = 10;
 
 /** Plain words in a cell. */
-export const cell = (words: string, look?: Partial<WordLook>): Cell => ({ lines: [{ words, look }] });
+export const cell = (words: string, look?: Partial<WordLook>): Cell => ({
+  lines: [{ words, look }],
+});
 
 /**
  * A ruled table from the top of an area down; where a row no longer goes, `nextArea` turns the page and
@@ -35,13 +43,20 @@ export function putTable(doc: Doc, table: Table, area: Area, nextArea: () => Are
     const next = table.rows[index + 1];
     // A group keeps with its first row.
     const together =
-      row.kind === 'group' && next ? height + rowHeight(doc, table.columns, next, free.width) : height;
+      row.kind === 'group' && next
+        ? height + rowHeight(doc, table.columns, next, free.width)
+        : height;
     if (together > free.height) free = putTitles(doc, table.columns, nextArea());
     if (row.kind === 'group') putWords(doc, row.words, groupLook, { x: free.x, y: free.y + 14 });
     else putRow(doc, table.columns, row.cells, { ...free, height });
     free = below(free, height);
   });
   return free;
+}
+
+/** How high a table comes out on one page. */
+export function tableHeight(doc: Doc, { columns, rows }: Table, widthPt: number): number {
+  return rows.reduce((sum, row) => sum + rowHeight(doc, columns, row, widthPt), titlePt);
 }
 
 export function below(area: Area, usedPt: number): Area {
@@ -58,7 +73,12 @@ function putTitles(doc: Doc, columns: readonly Column[], area: Area): Area {
     });
   }
   const y = area.y + titlePt - 2;
-  doc.moveTo(area.x, y).lineTo(area.x + area.width, y).lineWidth(0.8).undash().stroke(inks.ink);
+  doc
+    .moveTo(area.x, y)
+    .lineTo(area.x + area.width, y)
+    .lineWidth(0.8)
+    .undash()
+    .stroke(inks.ink);
   return below(area, titlePt);
 }
 
@@ -68,6 +88,10 @@ function putRow(doc: Doc, columns: readonly Column[], cells: readonly Cell[], ar
     if (!one) return;
     let y = area.y + padPt;
     let left = x;
+    if (one.box) {
+      doc.rect(x + width - boxPt, y + 0.5, boxPt, boxPt);
+      doc.lineWidth(0.8).undash().stroke(inks.ink);
+    }
     if (one.mark) {
       putMark(doc, one.mark, { x, y: y + bodyLook.sizePt + 0.5, heightPt: 8 });
       left += markPt;
@@ -87,7 +111,12 @@ function putRow(doc: Doc, columns: readonly Column[], cells: readonly Cell[], ar
     }
   });
   const foot = area.y + area.height - 0.4;
-  doc.moveTo(area.x, foot).lineTo(area.x + area.width, foot).lineWidth(0.4).undash().stroke(inks.rule);
+  doc
+    .moveTo(area.x, foot)
+    .lineTo(area.x + area.width, foot)
+    .lineWidth(0.4)
+    .undash()
+    .stroke(inks.rule);
 }
 
 function rowHeight(doc: Doc, columns: readonly Column[], row: TableRow, widthPt: number): number {

@@ -25,26 +25,30 @@ export function putWords(
   const back = anchor === 'start' ? 0 : widthOf(doc, words, look) * (anchor === 'end' ? 1 : 0.5);
   let x = at.x - back;
   for (const run of runsOf(words, look)) {
-    const width = runWidth(doc, run, look);
-    doc.fillColor(look.colour ?? inks.ink).text(run.words, x, at.y, {
-      lineBreak: false,
-      baseline: 'alphabetic',
-      features: run.features,
-    });
-    x += width;
+    const { words: letters, font, features } = run;
+    doc
+      .font(font)
+      .fontSize(look.sizePt)
+      .fillColor(look.colour ?? inks.ink);
+    doc.text(letters, x, at.y, { lineBreak: false, baseline: 'alphabetic', features });
+    x += runWidth(doc, run, look);
   }
 }
 
 /** Words broken into lines that keep to a width; a word wider than that stands alone. */
 export function linesOf(doc: Doc, words: string, look: WordLook, widthPt: number): string[] {
+  const spacePt = widthOf(doc, ' ', look);
   const lines: string[] = [];
   let line = '';
+  let linePt = 0;
   for (const word of unbroken(words)) {
-    const longer = line === '' ? word : `${line} ${word}`;
-    if (line !== '' && widthOf(doc, longer, look) > widthPt) {
+    const wordPt = widthOf(doc, word, look);
+    if (line !== '' && linePt + spacePt + wordPt > widthPt) {
       lines.push(line);
-      line = word;
-    } else line = longer;
+      line = '';
+    }
+    linePt = line === '' ? wordPt : linePt + spacePt + wordPt;
+    line = line === '' ? word : `${line} ${word}`;
   }
   return line === '' ? lines : [...lines, line];
 }
@@ -67,10 +71,12 @@ export function heightOf(lineCount: number, { sizePt }: WordLook): number {
   return lineCount === 0 ? 0 : sizePt * (1 + leading * (lineCount - 1)) + sizePt * 0.3;
 }
 
-/** A whole number and its fraction are one word: no line ends between them. */
+/** A figure is one word, with its fraction, its unit and its ±: no line ends within it. */
 function unbroken(words: string): string[] {
   return words
     .replace(/(\d) (\d+\/\d+)/g, '$1\u00A0$2')
+    .replace(/(\d) (mm\b)/g, '$1\u00A0$2')
+    .replace(/ ± (?=\d)/g, ' ±\u00A0')
     .split(/[ \n]+/)
     .filter((word) => word !== '');
 }
@@ -90,11 +96,20 @@ function byFont(words: string, weight: Weight): Run[] {
     const font = fontName(partOf(letter) ?? 'latin', weight);
     const last = runs.at(-1);
     if (last?.font === font) last.words += letter;
-    else runs.push({ words: letter, font, features: ['tnum'] });
+    else runs.push({ words: letter, font, features: [] });
   }
-  return runs;
+  // Only figures are asked to be of one width: asking is what takes the time.
+  return runs.map((run) => (/\d/.test(run.words) ? { ...run, features: ['tnum'] } : run));
 }
 
+/** Widths at one point, by font and words: one word is measured once for a whole print. */
+const widths = new WeakMap<Doc, Map<string, number>>();
+
 function runWidth(doc: Doc, { words, font, features }: Run, { sizePt }: WordLook): number {
-  return doc.font(font).fontSize(sizePt).widthOfString(words, { features });
+  const known = widths.get(doc) ?? new Map<string, number>();
+  widths.set(doc, known);
+  const key = `${font} ${words}`;
+  const width = known.get(key) ?? doc.font(font).fontSize(1).widthOfString(words, { features });
+  known.set(key, width);
+  return width * sizePt;
 }
