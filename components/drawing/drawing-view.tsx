@@ -11,16 +11,19 @@ type DrawingViewProps = {
 /** A drawing on its sheet, as wide as there is room; parts that lead somewhere are links. */
 export function DrawingView({ drawing, title, hrefOf }: DrawingViewProps) {
   const { left, top, width, height } = drawing.bounds;
+  // On a phone the drawing keeps a size at which it can be read, and is pushed sideways.
   return (
-    <svg
-      viewBox={[left, top, width, height].map((value) => Math.round(value)).join(' ')}
-      role={hrefOf ? 'group' : 'img'}
-      aria-label={title}
-      className="block h-auto w-full"
-      style={{ maxWidth: `${Math.round(width * 1.15)}px` }}
-    >
-      <DrawnShapes shapes={drawing.shapes} hrefOf={hrefOf} />
-    </svg>
+    <div className="overflow-x-auto">
+      <svg
+        viewBox={[left, top, width, height].map((value) => Math.round(value)).join(' ')}
+        role={hrefOf ? 'group' : 'img'}
+        aria-label={title}
+        className="block h-auto w-full min-w-152 print:min-w-0"
+        style={{ maxWidth: `${Math.round(width * 1.15)}px` }}
+      >
+        <DrawnShapes shapes={drawing.shapes} hrefOf={hrefOf} />
+      </svg>
+    </div>
   );
 }
 

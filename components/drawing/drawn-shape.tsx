@@ -45,6 +45,7 @@ function Part({ part, hrefOf }: { part: DrawnPart; hrefOf?: HrefOf }) {
       aria-label={part.label}
       className="outline-offset-4 [&:focus-visible_.stroke-ink]:stroke-blueprint [&:hover_.stroke-ink]:stroke-blueprint"
     >
+      {part.touch ? <polygon points={pointList(part.touch)} className="fill-transparent" /> : null}
       {shapes}
     </Link>
   );

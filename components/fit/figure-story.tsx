@@ -3,6 +3,7 @@ import type { FitFigure } from '@/lib/measure/fit-figure';
 import type { ReadingLine } from '@/lib/sheet/reading-lines';
 import { FigureValue, SurelyValue } from './figure-value';
 import type { Steps } from './figures';
+import { InFractions } from './in-fractions';
 
 /** How a figure came about: its formula in words, the readings that govern it, what would make it surer. */
 export function FigureStory({
@@ -48,15 +49,17 @@ export function FigureStory({
             {behind.map((line) => (
               <li key={line.id} className="flex justify-between gap-4 border-b border-rule py-1.5">
                 <span>
-                  {line.what}
+                  <InFractions words={line.what} />
                   <span className="block text-note text-graphite">
                     {[line.tool, line.taken].filter(Boolean).join(', ')}
                   </span>
                 </span>
                 <span className="text-right whitespace-nowrap">
-                  {line.came}
+                  <InFractions words={line.came} />
                   {line.typed ? (
-                    <span className="block text-note text-graphite">typed {line.typed}</span>
+                    <span className="block text-note text-graphite">
+                      typed <InFractions words={line.typed} />
+                    </span>
                   ) : null}
                 </span>
               </li>

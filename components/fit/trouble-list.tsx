@@ -10,13 +10,17 @@ export function TroubleList({ fit, runs }: { fit: Fit; runs: readonly RunFit[] }
     runIds.has(collision.runId) ? [{ ...collision, number: index + 1 }] : [],
   );
   const units = runs.flatMap((run) =>
-    run.units.map((unit, index) => ({ ...unit, place: `${run.name}, unit ${index + 1}` })),
+    run.units.map((unit, index) => ({ ...unit, run: run.name, number: index + 1 })),
   );
-  const loose = units.flatMap(({ unitId, place, studs }) =>
-    studs && !studs.enough ? [{ unitId, place, words: studs.words }] : [],
+  const loose = alike(
+    units.flatMap(({ run, number, studs }) =>
+      studs && !studs.enough ? [{ run, number, words: studs.words }] : [],
+    ),
   );
-  const stuck = units.flatMap(({ unitId, place, tilt }) =>
-    tilt && !tilt.standsUp ? [{ unitId, place, words: tilt.words }] : [],
+  const stuck = alike(
+    units.flatMap(({ run, number, tilt }) =>
+      tilt && !tilt.standsUp ? [{ run, number, words: tilt.words }] : [],
+    ),
   );
   const blocked = fit.wayIn.filter(({ runId, passes }) => runIds.has(runId) && !passes);
   if (collisions.length + loose.length + stuck.length + blocked.length === 0) return null;
@@ -31,14 +35,14 @@ export function TroubleList({ fit, runs }: { fit: Fit; runs: readonly RunFit[] }
           <InFractions words={words} />
         </VerdictNote>
       ))}
-      {loose.map(({ unitId, place, words }) => (
-        <VerdictNote key={unitId} kind="over" word="studs">
+      {loose.map(({ place, words }) => (
+        <VerdictNote key={place} kind="over" word="studs">
           {place}: <InFractions words={words} /> Wall units are fixed to studs or backing, never to
           board alone.
         </VerdictNote>
       ))}
-      {stuck.map(({ unitId, place, words }) => (
-        <VerdictNote key={unitId} kind="over" word="does not stand up">
+      {stuck.map(({ place, words }) => (
+        <VerdictNote key={place} kind="over" word="does not stand up">
           {place}: <InFractions words={words} />
         </VerdictNote>
       ))}
@@ -49,4 +53,24 @@ export function TroubleList({ fit, runs }: { fit: Fit; runs: readonly RunFit[] }
       ))}
     </div>
   );
+}
+
+type OfUnit = { run: string; number: number; words: string };
+
+/** Units of one run of which the same is to be said are named together: "Uppers, units 2, 3 and 5". */
+function alike(list: readonly OfUnit[]): { place: string; words: string }[] {
+  const groups = new Map<string, OfUnit[]>();
+  for (const one of list) {
+    const key = `${one.run}\n${one.words}`;
+    groups.set(key, [...(groups.get(key) ?? []), one]);
+  }
+  return [...groups.values()].map((group) => {
+    const [first] = group;
+    const numbers = group.map(({ number }) => String(number));
+    const named = [numbers.slice(0, -1).join(', '), numbers.at(-1)].filter(Boolean).join(' and ');
+    return {
+      place: `${first?.run}, unit${numbers.length === 1 ? '' : 's'} ${named}`,
+      words: first?.words ?? '',
+    };
+  });
 }

@@ -62,7 +62,8 @@ export function elevationFrame(
   const ceilingRead = ceilingLine(wallBook, fit, wallId);
   const exaggeration = exaggerationFor([
     ...ofWall.flatMap(({ runFit }) => fillerDeviations(runFit, ends)),
-    { size: spread(floorRead), room: floorRoomMm },
+    // The floor is drawn larger from the high point, which may be at another wall.
+    { size: Math.max(0, ...floorRead.map(({ zMm }) => -zMm)), room: floorRoomMm },
     { size: spread(ceilingRead), room: ceilingRoomMm },
   ]);
   const drawnFloor = stretched(floorRead, 0, exaggeration);

@@ -1,5 +1,6 @@
 import type { Run } from '@/lib/contracts/wall-book';
 import { elevationDimensions } from './elevation-dimensions';
+import { elevationFeatures } from './elevation-features';
 import { elevationFillers, fillerFigures } from './elevation-fillers';
 import {
   type ElevationSheet,
@@ -7,14 +8,10 @@ import {
   edgeAt,
   elevationFrame,
 } from './elevation-frame';
-import {
-  elevationFeatures,
-  elevationLevels,
-  elevationStuds,
-  elevationWall,
-} from './elevation-site';
+import { elevationLevels } from './elevation-levels';
 import { elevationTrouble } from './elevation-trouble';
 import { elevationUnits } from './elevation-units';
+import { elevationStuds, elevationWall } from './elevation-wall';
 import { boundsOf, type Drawing, type Shape } from './shape';
 
 /**

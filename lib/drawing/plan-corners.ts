@@ -1,7 +1,15 @@
 import type { CornerFit } from '@/lib/measure/fit';
 import type { PlanSheet } from './plan';
 import type { PlanWall } from './room-plan';
-import { type Point, type Shape, smallTextSizePx, type Tone, text } from './shape';
+import {
+  type Bounds,
+  boundsOf,
+  type Point,
+  type Shape,
+  smallTextSizePx,
+  type Tone,
+  text,
+} from './shape';
 import { direction, moved, turned } from './vector';
 import { worstTone } from './worst-tone';
 
@@ -19,6 +27,7 @@ export function planCorners(sheet: PlanSheet): Shape[] {
         kind: 'part',
         part: { kind: 'corner', id: corner.cornerWallId },
         label: `Corner ${corner.name}, ${angle}, ${saysOut.join(' ')}`,
+        touch: cornersOf(boundsOf(label(sheet, { corner, wall, before }), 6)),
         shapes: [
           ...squareLine(sheet, { corner, wall, before }),
           ...label(sheet, { corner, wall, before }),
@@ -76,6 +85,15 @@ function label(sheet: PlanSheet, { corner, wall, before }: Corner): Shape[] {
       sizePx: index === 0 ? undefined : smallTextSizePx,
     }),
   );
+}
+
+function cornersOf({ left, top, width, height }: Bounds): Point[] {
+  return [
+    [left, top],
+    [left + width, top],
+    [left + width, top + height],
+    [left, top + height],
+  ];
 }
 
 /** How a corner is told: its angle, and under it how far out it is. */

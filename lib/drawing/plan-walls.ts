@@ -17,6 +17,7 @@ export function planWalls(sheet: PlanSheet): Shape[] {
     kind: 'part',
     part: { kind: 'wall', id: wall.wallId },
     label: `Wall ${wall.name}, ${spokenLength(sheet, wall)}`,
+    touch: band(sheet, wall),
     shapes: [
       ...body(sheet, wall),
       ...openings(sheet, wall),
@@ -27,6 +28,19 @@ export function planWalls(sheet: PlanSheet): Shape[] {
       ...nameTag(sheet, wall),
     ],
   }));
+}
+
+/** From a little inside the room out past the dimension. */
+function band(sheet: PlanSheet, wall: PlanWall): Point[] {
+  const place = (point: Point, px: number) =>
+    moved(sheet.at(point), wall.along, 0, wall.inward, px);
+  const [inside, outside] = [14, -(wallDimensionPx + 18)];
+  return [
+    place(wall.from, inside),
+    place(wall.to, inside),
+    place(wall.to, outside),
+    place(wall.from, outside),
+  ];
 }
 
 /** A place on the exaggerated face of a wall, in drawing units. */

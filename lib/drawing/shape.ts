@@ -60,6 +60,8 @@ export type DrawnPart = {
   part: { kind: 'wall' | 'run' | 'corner'; id: string };
   /** "Wall B, 113 3/8, over". */
   label: string;
+  /** Where a thumb may touch it, past its thin lines; left out: its areas are large enough. */
+  touch?: readonly Point[];
   shapes: readonly Shape[];
 };
 
@@ -91,18 +93,18 @@ export function textWidthPx(spans: DrawnText['spans'], sizePx: number): number {
   return signs * sizePx * 0.56;
 }
 
-/** The smallest upright box that holds all shapes, with a margin. */
+/** The smallest upright box that holds all shapes, with a margin; about the origin where there are none. */
 export function boundsOf(shapes: readonly Shape[], marginPx: number): Bounds {
   const points = shapes.flatMap(pointsOf);
-  const xs = points.map(([x]) => x);
-  const ys = points.map(([, y]) => y);
-  const left = Math.min(0, ...xs) - marginPx;
-  const top = Math.min(0, ...ys) - marginPx;
+  const xs = points.length > 0 ? points.map(([x]) => x) : [0];
+  const ys = points.length > 0 ? points.map(([, y]) => y) : [0];
+  const left = Math.min(...xs) - marginPx;
+  const top = Math.min(...ys) - marginPx;
   return {
     left,
     top,
-    width: Math.max(0, ...xs) - left + marginPx,
-    height: Math.max(0, ...ys) - top + marginPx,
+    width: Math.max(...xs) - left + marginPx,
+    height: Math.max(...ys) - top + marginPx,
   };
 }
 
