@@ -252,6 +252,7 @@ export type WeighedPlace = {
   covarianceSlope: number[];
 };
 
+/** Places with what must be kept clear of each, their variances reckoned once for many pairings. */
 export function weigh(
   covariance: number[][],
   places: { place: FacePlace; clearMm: number }[],

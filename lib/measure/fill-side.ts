@@ -44,6 +44,11 @@ type SideInput = {
   right: FillEnd;
 };
 
+/**
+ * The two limits at one end: the gable over the carcass, the filler in its plane, and which of them governs.
+ * Edge: of equals within 1e-6 mm the first place governs; an open end keeps nothing clear.
+ * Example: a belly of 40 behind the face and a gable clearance of 3 ask for 43 where the filler asks 25.
+ */
 export function lookAtEnd(
   input: SideInput,
   end: 'left' | 'right',

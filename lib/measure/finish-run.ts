@@ -21,6 +21,7 @@ export type RoomAround = {
   judge: Judge;
 };
 
+/** Adds kicks, ceiling, studs, heights and verdicts to a run; each is null where its readings are missing. */
 export function finishRun(
   around: RoomAround,
   work: WorkedRun,

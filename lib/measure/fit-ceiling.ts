@@ -16,6 +16,11 @@ import type { Problem } from '@/lib/problem';
 /** Boxes that end further below the ceiling than this are left open above; from memory. */
 const CLOSED_TO_CEILING_MM = 400;
 
+/**
+ * The gap over tall and hung boxes, and the piece that closes it.
+ * Edge: null for base runs, without rises, or without a datum; boxes that end more than 400 below the
+ * ceiling are left open above. Example: rises 1440 and 1447, datum drop 1000, top 2400: 40 and 47.
+ */
 export function fitCeiling(
   context: FitContext,
   level: LevelLine,

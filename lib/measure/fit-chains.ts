@@ -11,6 +11,10 @@ import type { ChainClosure } from '@/lib/measure/room-closure';
 import type { WalkedWall } from '@/lib/measure/room-walk';
 import { proudAt, type WallFaces } from '@/lib/measure/wall-faces';
 
+/**
+ * Misclosures and the walk of every chain, angles carried to the straight walls.
+ * Edge: what is not read is walked as drawn, and then nothing is said of how the chain closes.
+ */
 export function fitChains(context: FitContext): ChainClosure[] {
   return context.book.room.chains.map((_, index) =>
     fitChain(

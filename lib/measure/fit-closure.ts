@@ -18,6 +18,10 @@ import type { RoomObservation } from '@/lib/measure/room-observations';
 import { settle } from '@/lib/measure/settle';
 import { lengthUncertainty } from '@/lib/measure/uncertainty';
 
+/**
+ * Chains, adjustment, suspect and the readings that would settle it, in words.
+ * Edge: what is only drawn takes part in the adjustment and is never shown as a reading or a suspect.
+ */
 export function fitClosure(context: FitContext): RoomClosure {
   const { room } = context;
   const chains = fitChains(context);

@@ -47,6 +47,10 @@ export const SURE_LENGTH_U_MM = 20;
 /** A corner less sure than this was not read. */
 export const SURE_ANGLE_U_DEG = 1;
 
+/**
+ * Opens the book, brings repeats together, places the faces and adjusts the room.
+ * Edge: runs on walls that the room has not got are left out, and said.
+ */
 export function fitContext(wallBook: WallBook, runs: Run[], rules: FitRules): FitContext {
   const book = openBook(wallBook, rules);
   const { walk } = book;

@@ -11,6 +11,10 @@ import { fitFigure } from '@/lib/measure/fit-figure';
 import { halfMitre } from '@/lib/measure/mitre';
 import { cornerName, frontDepth, type WalkedWall } from '@/lib/measure/room-walk';
 
+/**
+ * Every corner that has two walls: angle, deviation, offset over the depth that stands there, saw angle.
+ * Edge: an angle is null until it is surer than 1°, by its own reading or by the rest of the room.
+ */
 export function fitCorners(context: FitContext): CornerFit[] {
   return context.walk.walls.flatMap((walked) => fitCorner(context, walked) ?? []);
 }

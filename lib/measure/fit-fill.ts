@@ -28,6 +28,7 @@ export function fillInput(context: FitContext, run: Run, framed: FramedRun): Fil
   };
 }
 
+/** The fill of a run in words, with the smallest change of widths that makes it fit where it does not. */
 export function fitFill(
   context: FitContext,
   run: Run,

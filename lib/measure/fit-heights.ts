@@ -22,6 +22,7 @@ const DISHWASHER_NEED_MM = { US: 869.95, UK: 820, AU: 820, EU: 820 };
 /** A new top beside an old one may step this much and still be felt as one; from memory. */
 const COUNTER_STEP_MM = 1.6;
 
+/** Whether a unit of a tall run stands up under the least clear height read; null for others. */
 export function tiltOf(
   context: FitContext,
   { run }: WorkedRun,
@@ -60,6 +61,10 @@ export function tiltOf(
   };
 }
 
+/**
+ * Clear height under the counter where an appliance stands, against the maker’s need.
+ * Edge: null where nobody gave a need (dishwashers have a usual one) or the floor is not read.
+ */
 export function applianceHeight(
   context: FitContext,
   level: LevelLine,

@@ -53,6 +53,7 @@ function placeUnits(context: FitContext, run: Run, x0Mm: number): StandingRun['u
   });
 }
 
+/** Every island as the fit shows it; without an adjusted room only its units and kicks. */
 export function fitIslands(
   context: FitContext,
   level: LevelLine,

@@ -37,6 +37,10 @@ export type FittedKicks = {
 /** A floor still to be laid comes out this much thicker or thinner than stated, ±mm; from memory. */
 const FLOOR_TO_COME_LIMIT_MM = 1;
 
+/**
+ * Kick heights of all runs on the floor, by counter group, and the datum that what hangs goes by.
+ * Edge: a run without a group stands alone; a group on an unread floor has no kicks.
+ */
 export function fitKicks(
   context: FitContext,
   level: LevelLine,
@@ -90,11 +94,13 @@ function floorDatum(context: FitContext, level: LevelLine): FitDatum | null {
   return { drop, setUpId: level.setUpId };
 }
 
+/** The floor still to be laid, ±1 mm; nothing where it is down. */
 export function floorToCome(context: FitContext): { valueMm: number; u: number } {
   const valueMm = context.book.room.floorToComeMm;
   return { valueMm, u: valueMm > 0 ? FLOOR_TO_COME_LIMIT_MM / Math.sqrt(3) : 0 };
 }
 
+/** The underside of the boxes over the datum; the shop’s kick height where a run begins at the floor. */
 export function nominalKick(context: FitContext, run: Run): number {
   return run.z0Mm > 0 ? run.z0Mm : context.rules.kickHeightMm;
 }

@@ -11,6 +11,7 @@ import { scribeAllowance } from '@/lib/measure/scribe';
 import type { EdgeGap } from '@/lib/measure/set-line-gaps';
 import type { Problem } from '@/lib/problem';
 
+/** The set line of a run as the fit shows it; where nobody read the face its gap is 0 ± the usual bow. */
 export function runSetLine(context: FitContext, plane: RunPlane): RunSetLine {
   const { line } = plane;
   const offsetAt = (xMm: number) => plane.standOffMm + plane.slope * xMm;
@@ -56,6 +57,7 @@ function unreadGap(context: FitContext) {
   return figure(0, context.rules.usualBowMm / Math.sqrt(3), []);
 }
 
+/** The gap behind every reading, unit edge and finished end of a run; none where the face is not read. */
 export function backGaps(context: FitContext, { run, plane, filled }: WorkedRun): BackGap[] {
   const line = plane?.line;
   if (!line) return [];

@@ -3,6 +3,7 @@ import { fitFigure } from '@/lib/measure/fit-figure';
 import type { EdgeScribe } from '@/lib/measure/run-fit';
 import type { ScribeAllowance } from '@/lib/measure/scribe';
 
+/** Names the edge and its figures. */
 export function edgeScribe(
   edge: EdgeScribe['edge'],
   words: string,

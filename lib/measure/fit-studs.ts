@@ -18,6 +18,7 @@ const GABLE_MM = 18;
 /** Appliances and open spaces have no gables. */
 const WITHOUT_GABLES = ['dishwasher', 'range', 'refrigerator', 'open', 'hood', 'panel'];
 
+/** The studs behind each hung unit; nothing for base runs or where no stud was found. */
 export function fitStuds(
   context: FitContext,
   { run, filled }: WorkedRun,
@@ -53,6 +54,7 @@ function featuresOf(context: FitContext, wallId: string): ReadingOf<'feature'>[]
   return context.book.ofKind('feature').filter((feature) => feature.wallId === wallId);
 }
 
+/** What on the wall meets the boxes and fillers of a run. */
 export function fitCollisions(context: FitContext, { run, filled }: WorkedRun): Collision[] {
   const features = featuresOf(context, run.wallId).map(
     ({ id, feature, x0Mm, x1Mm, z0Mm, z1Mm, projectionMm, swing }): WallFeature => ({

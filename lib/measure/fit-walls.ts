@@ -13,6 +13,10 @@ import type { Problem } from '@/lib/problem';
 /** A plane is laid through three readings; a fourth shows whether it is flat. */
 const FEWEST_FOR_FLATNESS = 4;
 
+/**
+ * Lengths, rows, columns and flatness of every wall.
+ * Edge: a length is null until it is surer than 20 mm; a row needs three readings, a flatness four.
+ */
 export function fitWalls(
   context: FitContext,
   straightedgeMm: number,

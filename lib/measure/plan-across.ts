@@ -13,10 +13,12 @@ import { seesAcross } from '@/lib/measure/sight-lines';
 /** The three longest find nine slips of 1 in out of ten; more add little (MEASURE 12). */
 const DIAGONALS = 3;
 
+/** Diagonals and widths, after the walls. */
 export function planAcross(context: PlanContext): AskedSlot[] {
   return [...planDiagonals(context), ...planWidths(context)];
 }
 
+/** The three longest diagonals of each chain that run free through the room as drawn. */
 export function planDiagonals(context: PlanContext): AskedSlot[] {
   const { walk, rules } = context;
   const chains = groupByChain(context);

@@ -22,6 +22,7 @@ export type PlanContext = {
   skips: ReadonlyMap<string, ReadingOf<'skip'>>;
 };
 
+/** Opens a book for planning; withdrawn skips count as never made. */
 export function planContext(wallBook: WallBook, runs: Run[], rules: FitRules): PlanContext {
   const walk = walkRoom(wallBook.room);
   const readings = standingReadings(wallBook.readings);
@@ -57,6 +58,7 @@ export function lengthSoFar(context: PlanContext, walked: WalkedWall): number {
   return read?.valueMm ?? Math.min(walked.wall.nominalLengthMm, longestMm);
 }
 
+/** Runs that stand against a wall. */
 export function runsOn(context: PlanContext, walked: WalkedWall): Run[] {
   return context.runs.filter((run) => run.wallId === walked.wall.id);
 }
@@ -105,6 +107,7 @@ export function heightWords(zMm: number, rules: FitRules): string {
   return `at ${lengthWords(zMm, rules)}`;
 }
 
+/** A length in the shop’s unit and step. */
 export function lengthWords(mm: number, rules: FitRules): string {
   return formatLength(mm, { unit: rules.unit, stepMm: rules.stepMm });
 }

@@ -20,6 +20,7 @@ const OFF_THE_WALL_MM = 30;
 const NEAR_CEILING_MM = 2_000;
 const SET_UP_GROUP = 'level';
 
+/** Floor and ceiling wall by wall, all from one level line. */
 export function planLevels(context: PlanContext): AskedSlot[] {
   const last = context.readings.findLast(
     (reading) => reading.kind === 'floor' || reading.kind === 'ceiling',
@@ -127,6 +128,7 @@ function planCeiling(
   }));
 }
 
+/** A run that holds a tall unit, whatever its level. */
 export function hasTallUnit(run: Run): boolean {
   return run.units.some(({ kind }) => kind === 'tall');
 }

@@ -23,6 +23,7 @@ const OUT_OF_CORNER_MM = 100;
 /** Two places nearer than this are one. */
 const SAME_PLACE_MM = 250;
 
+/** All that is read at one wall, from its left corner on. */
 export function planWall(context: PlanContext, walked: WalkedWall): AskedSlot[] {
   const own = runsOn(context, walked);
   const against = runsAgainst(context, walked);

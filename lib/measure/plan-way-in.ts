@@ -5,6 +5,7 @@ import { hasTallUnit } from '@/lib/measure/plan-levels';
 /** A unit wider than this is turned or leaned through a common door; from memory. */
 const LARGE_UNIT_MM = 900;
 
+/** One doorway, where a unit is tall or wide; nothing else. */
 export function planWayIn(context: PlanContext): AskedSlot[] {
   const isLarge = context.runs.some(
     (run) =>

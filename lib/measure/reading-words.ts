@@ -4,6 +4,7 @@ import { heightWords, lengthWords } from '@/lib/measure/plan-context';
 import type { RoomObservation } from '@/lib/measure/room-observations';
 import { cornerName, type RoomWalk } from '@/lib/measure/room-walk';
 
+/** "Wall B, length at the counter"; a wall that is gone is named "?". */
 export function observationWords(
   walk: RoomWalk,
   rules: FitRules,

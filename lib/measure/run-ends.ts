@@ -232,6 +232,7 @@ function armAt(run: Run, other: Run, end: 'left' | 'right'): number {
   return corner?.kind === 'corner' ? (corner.armMm ?? corner.widthMm) : frontDepth(other);
 }
 
+/** The unit that stands at an end. */
 export function unitAt(run: Run, end: 'left' | 'right'): Unit | undefined {
   return end === 'left' ? run.units[0] : run.units[run.units.length - 1];
 }

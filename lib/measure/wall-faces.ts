@@ -40,6 +40,11 @@ const REACHES_MM = 300;
 /** A self-levelling laser where its sheet is not known: ±0.3 mm/m; from memory. */
 export const LASER_PLANE_U = 0.0003 / Math.sqrt(3);
 
+/**
+ * Sorts the face readings of a wall into set-ups, rows and columns, and finds the row from corner to corner.
+ * Edge: a plumb level at one place has no rows, a straightedge no columns; of rows that reach both corners
+ * the fullest leads, then the one nearest to zRef.
+ */
 export function wallFaces(
   book: RoomBook,
   wallId: string,
@@ -164,6 +169,7 @@ export function proudAt(
   };
 }
 
+/** The straight line from corner to corner in the row’s own set-up. */
 export function chordAt(row: ChordRow, lengthMm: number, xMm: number): number {
   return row.atLeftMm + ((row.atRightMm - row.atLeftMm) * xMm) / Math.max(lengthMm, 1);
 }

@@ -76,7 +76,7 @@ test('readings of any numbers give problems, never a throw or a number that is n
       }
       check({ ...book, readings });
     }),
-    { seed: 8, numRuns: 60, endOnFailure: true },
+    { seed: 8, numRuns: 40, endOnFailure: true },
   );
 }, 60_000);
 
@@ -102,7 +102,7 @@ test('walls of any length and corner, drawn in any number, give problems', () =>
       const readings = keepReadings ? book.readings : [];
       check({ ...book, room: { ...book.room, chains: [chain] }, readings });
     }),
-    { seed: 9, numRuns: 60, endOnFailure: true },
+    { seed: 9, numRuns: 40, endOnFailure: true },
   );
 }, 60_000);
 
@@ -159,7 +159,7 @@ test('runs that cannot be give problems', () => {
     fc.property(run, run, (one, other) => {
       check(book, [one, { ...other, id: countedId(1_002) }]);
     }),
-    { seed: 10, numRuns: 80, endOnFailure: true },
+    { seed: 10, numRuns: 50, endOnFailure: true },
   );
 }, 60_000);
 

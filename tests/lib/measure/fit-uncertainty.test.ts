@@ -78,7 +78,7 @@ test('what is stated as u is how far figures of rooms read with that error lie f
   const truth = figuresOf(fitRoom(exact, runs, rules));
   const gauss = seeded(21).normal;
   const squares: Record<string, number> = {};
-  const rooms = 70;
+  const rooms = 50;
   for (let i = 0; i < rooms; i++) {
     const found = figuresOf(fitRoom(withErrors(exact, gauss), runs, rules));
     for (const [name, figure] of Object.entries(found)) {
