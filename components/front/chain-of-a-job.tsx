@@ -1,7 +1,8 @@
 const steps = [
   {
     title: 'Book the measure',
-    words: 'Times that work, no crew booked twice. The customer says yes with one tap.',
+    words:
+      'A waiting list that says from when and why; no crew booked twice. The customer says yes with one tap.',
   },
   {
     title: 'Prove the walls',
@@ -21,8 +22,9 @@ const steps = [
     words: 'When the cabinets are ready, the floor is down and the customer has said yes.',
   },
   {
-    title: 'Set, and sign off',
-    words: 'Way in, high point and studs on the phone; snags with photos; the signature.',
+    title: 'Set the cabinets',
+    words:
+      'The day on the phone: the stops, the way in, on my way, arrived, done; the customer and the office see it.',
   },
 ];
 
