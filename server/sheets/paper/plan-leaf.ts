@@ -45,12 +45,12 @@ function sinceThen({ sheet }: Paper): Section {
 
 function changes({ sheet }: Paper): Section {
   const { release } = sheet;
+  if (release.revision === 'A') {
+    return { title: 'First release', paragraphs: [{ words: 'No sheet of this room is older.' }] };
+  }
   return {
     title: 'Changed since the revision before',
-    paragraphs:
-      release.revision === 'A'
-        ? [{ words: 'This is the first release of this room.', look: { colour: inks.graphite } }]
-        : release.changes.map((words) => listed(words)),
+    paragraphs: release.changes.map((words) => listed(words)),
   };
 }
 
@@ -90,7 +90,7 @@ function trouble({ sheet }: Paper): Section {
     ),
   ];
   return {
-    title: 'In the way',
+    title: 'To watch',
     paragraphs: words.map((one): Paragraph => ({ words: one, mark: 'over' })),
   };
 }

@@ -39,5 +39,5 @@ function trouble({ sheet }: Paper, runs: readonly RunFit[]): Section {
     sheet.fit,
     runs.map(({ runId }) => runId),
   );
-  return { title: 'In the way', paragraphs: words.map((one) => ({ words: one, mark: 'over' })) };
+  return { title: 'To watch', paragraphs: words.map((one) => ({ words: one, mark: 'over' })) };
 }
