@@ -1,10 +1,8 @@
 /** Walks a chain of walls round by its lengths and angles: does it come back to where it began? */
 import { type Outcome, problem, refused } from '@/lib/problem';
 import { type Figure, figure } from './figure';
+import { isMeasured, isSize, type Measured } from './measured';
 import { traverseErrors } from './traverse-errors';
-
-/** A length or an angle with its standard uncertainty and the readings it comes from. */
-export type Measured = Pick<Figure, 'value' | 'u' | 'from'>;
 
 export type TraverseLeg = {
   length: Measured;
@@ -99,7 +97,7 @@ function refuse({ closed, legs }: TraverseInput) {
       return problem('angle-missing', 'A corner of this chain has not been read.', leg.length.from);
     }
     const { length, leftAngle } = leg;
-    const isLength = length.value > 0 && Number.isFinite(length.value) && length.u >= 0;
+    const isLength = isMeasured(length) && isSize(length.value);
     if (!isLength) {
       return problem(
         'reading-impossible',
@@ -107,7 +105,7 @@ function refuse({ closed, legs }: TraverseInput) {
         length.from,
       );
     }
-    if (leftAngle && !(leftAngle.value > 0 && leftAngle.value < 360 && leftAngle.u >= 0)) {
+    if (leftAngle && !(isMeasured(leftAngle) && leftAngle.value > 0 && leftAngle.value < 360)) {
       return problem(
         'reading-impossible',
         'This angle cannot be true. Take it again.',

@@ -1,9 +1,9 @@
 /** Kick heights of an island over its own floor readings. */
 import { type Outcome, problem, refused } from '@/lib/problem';
-import type { Measured } from './close-traverse';
 import { combinationFigure, combine, figureCombination } from './combination';
 import { type Figure, figure } from './figure';
 import { type LevelPoint, levelSurface, levelTilt, tilted } from './floor-surface';
+import { isMeasured, type Measured } from './measured';
 
 export type KickPlace = LevelPoint;
 type Footprint = { leftMm: number; rightMm: number; backMm: number; frontMm: number };
@@ -29,6 +29,19 @@ export function kickAtPlaces(
   { leftMm, rightMm, backMm, frontMm }: Footprint,
   { nominalKickMm, datumDrop, legs, uLevel }: KickRules,
 ): Outcome<IslandKick[]> {
+  const bad = floor.filter(({ id, xMm, yMm, valueMm, u }) =>
+    [xMm, yMm, valueMm].some((value) => !isMeasured({ value, u, from: [id] })),
+  );
+  if (bad.length > 0) {
+    const message = 'A floor reading of the island cannot be true. Take it again.';
+    return refused(
+      problem(
+        'reading-impossible',
+        message,
+        bad.map(({ id }) => id),
+      ),
+    );
+  }
   if (floor.length === 0) {
     return refused(problem('floor-not-read', 'Read the floor at the four corners of the island.'));
   }

@@ -1,8 +1,8 @@
 /** Islands and peninsulas: where they stand, on what floor, with what room to walk, over which pipes. */
 import { type Outcome, problem, refused, warning } from '@/lib/problem';
-import type { Measured } from './close-traverse';
 import { type Figure, figure } from './figure';
 import { type KickPlace, kickAtPlaces } from './island-kicks';
+import { isMeasured, isOfARoom, isSize, type Measured } from './measured';
 import { type HalfMitre, halfMitre } from './mitre';
 import { edgeDistance, type PlanEdge, type PlanPoint } from './plan-shapes';
 
@@ -85,9 +85,14 @@ const SIDES: readonly IslandSide[] = ['back', 'right', 'front', 'left'];
  * Source: geometry; common practice, no source.
  */
 export function islandPlacement(input: IslandInput): Outcome<IslandPlacement> {
-  const sizes = [input.lengthMm, input.depthMm];
-  const places = [input.offset.value, input.along.value, input.setLine.headingDeg];
-  if (!sizes.every((size) => size > 0 && Number.isFinite(size)) || !places.every(Number.isFinite)) {
+  const places = [
+    input.offset,
+    input.along,
+    ...input.services.map(({ id, xMm, u }) => ({ value: xMm, u, from: [id] })),
+    ...input.services.map(({ id, yMm, u }) => ({ value: yMm, u, from: [id] })),
+  ];
+  const isPlaced = places.every(isMeasured) && isOfARoom(input.setLine.headingDeg);
+  if (!isSize(input.lengthMm) || !isSize(input.depthMm) || !isPlaced) {
     const about = [...input.offset.from, ...input.along.from];
     return refused(problem('size-impossible', 'A size of the island cannot be true.', about));
   }

@@ -1,7 +1,7 @@
 /** Saw angles for the corners as they are. */
 import { type Outcome, problem, refused } from '@/lib/problem';
-import type { Measured } from './close-traverse';
 import { type Figure, figure } from './figure';
+import { isMeasured, type Measured } from './measured';
 
 export type HalfMitre = {
   /** Angle of each piece at the corner, θ/2, degrees. */
@@ -19,7 +19,7 @@ export type HalfMitre = {
  * Problems: `angle-impossible`. Source: geometry; common practice.
  */
 export function halfMitre(corner: Measured): Outcome<HalfMitre> {
-  if (!isAngle(corner.value)) return refused(impossible(corner));
+  if (!isAngle(corner)) return refused(impossible(corner));
   return {
     value: {
       piece: figure(corner.value / 2, corner.u / 2, corner.from),
@@ -48,8 +48,8 @@ export type CrownMitre = {
  * three saw manuals and Corwin's table for 38° (tests/reference).
  */
 export function crownMitre(spring: Measured, corner: Measured): Outcome<CrownMitre> {
-  if (!isAngle(corner.value)) return refused(impossible(corner));
-  if (!(spring.value > 0 && spring.value < 90)) return refused(impossible(spring));
+  if (!isAngle(corner)) return refused(impossible(corner));
+  if (!isAngle(spring) || spring.value >= 90) return refused(impossible(spring));
   const springRad = (spring.value * Math.PI) / 180;
   const half = (corner.value * Math.PI) / 360;
   const [sinS, cosS] = [Math.sin(springRad), Math.cos(springRad)];
@@ -72,6 +72,6 @@ export function crownMitre(spring: Measured, corner: Measured): Outcome<CrownMit
 }
 
 const degrees = (radians: number) => (radians * 180) / Math.PI;
-const isAngle = (value: number) => value > 0 && value < 360;
+const isAngle = (angle: Measured) => isMeasured(angle) && angle.value > 0 && angle.value < 360;
 const impossible = (angle: Measured) =>
   problem('angle-impossible', 'This angle cannot be true. Take it again.', angle.from);

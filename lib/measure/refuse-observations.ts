@@ -1,5 +1,6 @@
 /** Readings that no room can have, found before the adjustment begins. */
 import type { Problem } from '@/lib/problem';
+import { isOfARoom } from './measured';
 import type { RoomObservation, RoomShape } from './room-observations';
 
 /** Problems of the readings and the room as given; none lets the adjustment go on. */
@@ -42,7 +43,7 @@ function refuseOne(
   if (named.length === 2 && isSamePlace(observation)) {
     return refusal('reading-impossible', 'goes from a place to the same place', observation);
   }
-  if (!numbersOf(observation).every(Number.isFinite) || !isPossible(observation)) {
+  if (!numbersOf(observation).every(isOfARoom) || !isPossible(observation)) {
     return refusal('reading-impossible', 'cannot be true', observation);
   }
   return null;

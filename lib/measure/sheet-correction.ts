@@ -1,7 +1,7 @@
 /** Nominal is not actual: what n stacked thicknesses of a sheet really come to. */
 import { type Outcome, problem, refused, warning } from '@/lib/problem';
-import type { Measured } from './close-traverse';
 import { type Figure, figure } from './figure';
+import { isMeasured, isSize, type Measured } from './measured';
 import { type SheetLimits, sheetLimits } from './rules/sheet-limits';
 
 export type SheetCorrection = {
@@ -29,12 +29,8 @@ export function sheetCorrection(input: {
   standard?: 'PS 1' | 'EN 315';
 }): Outcome<SheetCorrection> {
   const { nominalMm, actual, thicknesses } = input;
-  if (
-    !(nominalMm > 0) ||
-    !(actual.value > 0) ||
-    !Number.isInteger(thicknesses) ||
-    thicknesses < 0
-  ) {
+  const isSheet = isSize(nominalMm) && isMeasured(actual) && isSize(actual.value);
+  if (!isSheet || !Number.isInteger(thicknesses) || thicknesses < 0) {
     const message = 'A sheet’s thickness cannot be true. Take it again.';
     return refused(problem('size-impossible', message, actual.from));
   }

@@ -1,7 +1,7 @@
 /** Doors and drawers beside a wall or casing: have they room to open? */
 import type { Unit } from '@/lib/contracts/wall-book';
 import { bothUnits } from '@/lib/units/both-units';
-import type { Measured } from './close-traverse';
+import type { Measured } from './measured';
 import { exactInches as inches } from './rules/exact-inches';
 
 type Clearance = { leastMm: number; overCasingMm: number; source: string };

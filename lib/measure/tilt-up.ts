@@ -1,8 +1,8 @@
 /** Can a tall unit be stood up where it is to stand? */
 import { type Outcome, problem, refused } from '@/lib/problem';
 import { bothUnits } from '@/lib/units/both-units';
-import type { Measured } from './close-traverse';
 import { type Figure, figure } from './figure';
+import { isMeasured, isSize, type Measured } from './measured';
 
 export type TallUnit = {
   /** Of the box, without a kick base that comes off. */
@@ -49,7 +49,13 @@ export function tiltUp(input: TiltUpInput): Outcome<TiltUp> {
   const { unit, clearWhereTilted, clearWhereItStands, marginMm, liftMm } = input;
   const sizes = [unit.heightMm, unit.widthMm, unit.depthMm];
   const clears = [clearWhereTilted, clearWhereItStands];
-  if (!sizes.every(isSize) || !clears.every(({ value }) => isSize(value)) || !(unit.kickMm >= 0)) {
+  const isClear = (clear: Measured) => isMeasured(clear) && isSize(clear.value);
+  const extras = [unit.kickMm, marginMm, liftMm];
+  if (
+    !sizes.every(isSize) ||
+    !clears.every(isClear) ||
+    !extras.every((mm) => mm === 0 || isSize(mm))
+  ) {
     const from = clears.flatMap((clear) => clear.from);
     return refused(problem('size-impossible', 'A size or a clear height cannot be true.', from));
   }
@@ -107,4 +113,3 @@ function helpsOf(input: TiltUpInput, tilts: boolean, stands: boolean): string[] 
 
 const spare = (clear: Measured, takesMm: number) =>
   figure(clear.value - takesMm, clear.u, clear.from);
-const isSize = (value: number) => Number.isFinite(value) && value > 0;

@@ -1,8 +1,8 @@
 /** Does the box come through the doorway, and round the corner of the passage behind it? */
 import { type Outcome, problem, refused } from '@/lib/problem';
 import { bothUnits } from '@/lib/units/both-units';
-import type { Measured } from './close-traverse';
 import { type Figure, figure } from './figure';
+import { isMeasured, isSize, type Measured } from './measured';
 
 export type Box = { widthMm: number; depthMm: number; heightMm: number };
 
@@ -31,7 +31,7 @@ export function passesDoor(
   const { clearWidth, clearHeight } = doorway;
   const sides = [box.widthMm, box.depthMm, box.heightMm].sort((a, b) => a - b);
   const [thin = 0, middle = 0] = sides;
-  if (!sides.every(isSize) || !isSize(clearWidth.value) || !isSize(clearHeight.value)) {
+  if (!sides.every(isSize) || ![clearWidth, clearHeight].every(isClear)) {
     return refused(impossible([...clearWidth.from, ...clearHeight.from]));
   }
   const straight = Math.max(
@@ -92,8 +92,9 @@ export function turnsCorner(
 ): Outcome<Turns> {
   const { widthIn, widthOut, clearHeight } = passage;
   const from = [...widthIn.from, ...widthOut.from, ...(clearHeight?.from ?? [])];
-  const sizes = [box.widthMm, box.depthMm, box.heightMm, widthIn.value, widthOut.value];
-  if (!sizes.every(isSize)) return refused(impossible(from));
+  const sizes = [box.widthMm, box.depthMm, box.heightMm];
+  const clears = clearHeight ? [widthIn, widthOut, clearHeight] : [widthIn, widthOut];
+  if (!sizes.every(isSize) || !clears.every(isClear)) return refused(impossible(from));
   const ways = (['heightMm', 'widthMm', 'depthMm'] as const).flatMap((upright) => {
     const lying = (['widthMm', 'depthMm', 'heightMm'] as const).filter((side) => side !== upright);
     const [one = 0, other = 0] = lying.map((side) => box[side]);
@@ -169,6 +170,6 @@ function leastAt(of: (angle: number) => number): number {
   return (low + high) / 2;
 }
 
-const isSize = (value: number) => Number.isFinite(value) && value > 0;
+const isClear = (clear: Measured) => isMeasured(clear) && isSize(clear.value);
 const impossible = (about: string[]) =>
   problem('size-impossible', 'A size of the box or of the way in cannot be true.', about);

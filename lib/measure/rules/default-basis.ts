@@ -1,7 +1,7 @@
 /**
  * Where each default rule comes from, field by field, for the Shop rules screen.
- * `sources` are the practice records of the project's research (M measuring, F dimensions and fillers,
- * S setting, T times, C cautions); an empty list is our own judgement.
+ * `sources` are keys of `PRACTICE_SOURCES` (M measuring, F dimensions and fillers, S setting, T times); an
+ * empty list is our own judgement, or a law named in the note.
  */
 import type { BookingRules, FitRules } from '@/lib/contracts/shop-rules';
 

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { closeTraverse, type Measured, type TraverseLeg } from '@/lib/measure/close-traverse';
+import { closeTraverse, type TraverseLeg } from '@/lib/measure/close-traverse';
+import type { Measured } from '@/lib/measure/measured';
 import { monteCarlo, seeded } from './seeded';
 
 const read = (value: number, u: number, id: string): Measured => ({ value, u, from: [id] });

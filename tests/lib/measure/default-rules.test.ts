@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { bookingRules, fitRules, shopRules } from '@/lib/contracts/shop-rules';
 import { bookingRuleBasis, fitRuleBasis } from '@/lib/measure/rules/default-basis';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
+import { PRACTICE_SOURCES } from '@/lib/measure/rules/practice-sources';
 
 const regions = ['US', 'UK', 'AU', 'EU'] as const;
 
@@ -40,7 +41,7 @@ describe('default shop rules', () => {
     expect(Object.keys(bookingRuleBasis).sort()).toEqual(Object.keys(bookingRules.shape).sort());
     for (const basis of Object.values(fitRuleBasis)) {
       if (basis.sources.length === 0) expect(basis.note).toMatch(/no source/);
-      else for (const source of basis.sources) expect(source).toMatch(/^[A-Z]\d\d$/);
+      else for (const source of basis.sources) expect(PRACTICE_SOURCES[source]?.title).toBeTruthy();
     }
   });
 });
