@@ -2,12 +2,16 @@
 import { type Outcome, problem, refused } from '@/lib/problem';
 import { type Figure, figure } from './figure';
 import { isMeasured, isSize, type Measured } from './measured';
-import { traverseErrors } from './traverse-errors';
+import type { ToolShare } from './room-observations';
+import { ErrorSum, traverseErrors } from './traverse-errors';
+
+/** u is the whole of it; the part that all readings of one tool share may be named. */
+export type TraverseReading = Measured & { tool?: ToolShare | null };
 
 export type TraverseLeg = {
-  length: Measured;
+  length: TraverseReading;
   /** Interior angle at the leg's left end, degrees; null at the start of an open chain. */
-  leftAngle: Measured | null;
+  leftAngle: TraverseReading | null;
 };
 export type TraverseInput = {
   closed: boolean;
@@ -44,7 +48,8 @@ export type Traverse = {
  *
  * Frame: x east, y south, headings clockwise from x as seen from above: heading[i] = heading[i − 1] +
  * 180 − angle[i]. A surveyor's bearing from north is this heading with x north and y east.
- * Edge: the first leg's heading is given, so the angle at its left end only takes part in the balance.
+ * u: each reading's own part, and the part that one tool shares n-fold; balancing takes a shared error of
+ * the angles out of the walk again. Edge: the first leg's heading is given, so the angle at its left end only takes part in the balance.
  * An open chain is laid out as read: it does not close and says so by nulls.
  * Example: legs of 3000, 2000, 3000, 2003 with four angles of 90°: angles close, the walk ends 3 mm off
  * along y, 1:3334, area 6.0045 m².
@@ -116,16 +121,18 @@ function refuse({ closed, legs }: TraverseInput) {
   return null;
 }
 
-function angleMisclosure(angles: (Measured | null)[]): Figure {
+/** One tool's own error adds n-fold in a sum of n angles (JCGM 100:2008, 5.2.2 note 1). */
+function angleMisclosure(angles: (TraverseReading | null)[]): Figure {
+  const errors = new ErrorSum();
   let sum = -(angles.length - 2) * 180;
-  let variance = 0;
   for (const angle of angles) {
-    sum += angle?.value ?? 0;
-    variance += (angle?.u ?? 0) ** 2;
+    if (!angle) continue;
+    sum += angle.value;
+    errors.add(angle, 1, 0);
   }
   return figure(
     sum,
-    Math.sqrt(variance),
+    errors.along(1, 0),
     angles.flatMap((angle) => angle?.from ?? []),
   );
 }

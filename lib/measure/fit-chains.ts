@@ -1,10 +1,15 @@
 /** Each chain of walls walked as read: the picture of how it closes, before any adjustment. */
 import { chordAngle } from '@/lib/measure/chord-angle';
-import { closeTraverse, type TraverseLeg } from '@/lib/measure/close-traverse';
+import {
+  closeTraverse,
+  type TraverseLeg,
+  type TraverseReading,
+} from '@/lib/measure/close-traverse';
 import { type CombinedCorner, cornerArms } from '@/lib/measure/combined-readings';
 import type { Figure } from '@/lib/measure/figure';
 import type { FitContext } from '@/lib/measure/fit-context';
 import { fitFigure } from '@/lib/measure/fit-figure';
+import { shareOf } from '@/lib/measure/observe-room';
 import { planHeight } from '@/lib/measure/plan-context';
 import type { Read } from '@/lib/measure/read';
 import type { ChainClosure } from '@/lib/measure/room-closure';
@@ -67,9 +72,10 @@ function lengthAtPlan(context: FitContext, wallId: string): Figure | null {
 }
 
 /** The first height read, carried from the leg marks to the straight walls. */
-function angleAtPlan(context: FitContext, { wall, before }: WalkedWall): Figure | null {
+function angleAtPlan(context: FitContext, { wall, before }: WalkedWall): TraverseReading | null {
   const corner = context.corners.find(({ cornerWallId }) => cornerWallId === wall.id);
-  return corner && before ? chordAngleOf(context, corner, before.id) : null;
+  if (!corner || !before) return null;
+  return { ...chordAngleOf(context, corner, before.id), tool: shareOf(corner.repeats).tool };
 }
 
 /** A corner as read, carried to the straight lines corner to corner. */

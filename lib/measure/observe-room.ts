@@ -68,7 +68,8 @@ function roomShape(book: RoomBook): RoomShape {
   };
 }
 
-function shareOf(repeats: Repeat[]): { own: (u: number) => number; tool: ToolShare | null } {
+/** What repeats by one tool share of their u, and what is left to each. */
+export function shareOf(repeats: Repeat[]): { own: (u: number) => number; tool: ToolShare | null } {
   const tools = new Set(repeats.map(({ toolId }) => toolId));
   const uCommon = Math.max(...repeats.map((repeat) => repeat.uCommon));
   const [toolId] = tools;

@@ -115,6 +115,24 @@ describe('adjusting a room', () => {
     }
   });
 
+  it('lifts redundancy to about two thirds at the middle of three heights, a half at the ends', () => {
+    const plan = planOf(12, 4);
+    const { checks } = adjusted(
+      drawnShape(plan),
+      readAll(plan, exactTape, quiet, [100, 910, 1_720]),
+    );
+    const at = (zMm: number) =>
+      checks.filter(({ observation: o }) => o.kind === 'length' && o.zMm === zMm);
+    for (const { redundancy } of at(910)) {
+      expect(redundancy).toBeGreaterThan(0.6);
+      expect(redundancy).toBeLessThan(0.72);
+    }
+    for (const { redundancy } of [...at(100), ...at(1_720)]) {
+      expect(redundancy).toBeGreaterThan(0.4);
+      expect(redundancy).toBeLessThan(0.6);
+    }
+  });
+
   it('states the u that its lengths show over many readings of one room', () => {
     const plan = planOf(7, 6);
     const random = seeded(11);

@@ -67,6 +67,21 @@ describe('walking a room round', () => {
     expect(start?.angleMisclosure?.u).toBeCloseTo(0.12 * Math.sqrt(6), 9);
   });
 
+  it('adds one angle finder’s own error n-fold to the sum, and takes it out by balancing', () => {
+    const tool = { toolId: 'finder', uCommon: 0.1 };
+    const shared = (uOwn: number) =>
+      room([3_000, 2_000, 3_010, 2_000], [90, 90, 90, 90]).map((leg) => ({
+        ...leg,
+        leftAngle: leg.leftAngle && { ...leg.leftAngle, u: Math.hypot(uOwn, 0.1), tool },
+      }));
+    const only = closeTraverse({ closed: true, legs: shared(0) }).value;
+    expect(only?.angleMisclosure?.u).toBeCloseTo(0.4, 9);
+    expect(only?.linearMisclosure?.u).toBeCloseTo(0, 6);
+    const both = closeTraverse({ closed: true, legs: shared(0.05) }).value;
+    expect(both?.angleMisclosure?.u).toBeCloseTo(Math.hypot(0.4, 0.1), 9);
+    expect(both?.linearMisclosure?.u).toBeGreaterThan(1);
+  });
+
   it('gives the same misclosure and area wherever the walk begins', () => {
     const lengths = [3_000, 2_000, 3_010, 2_003];
     const angles = [90.2, 89.9, 90, 89.8];
