@@ -1,3 +1,4 @@
+import { withSerwist } from '@serwist/turbopack';
 import type { NextConfig } from 'next';
 
 const isDevelopment = process.env.NODE_ENV === 'development';
@@ -56,6 +57,8 @@ const nextConfig: NextConfig = {
   async headers() {
     return [
       { source: '/:path*', headers: securityHeaders },
+      // A newer worker is found the next time anybody asks, whatever stands between.
+      { source: '/serwist/:path*', headers: [{ key: 'Cache-Control', value: 'no-cache' }] },
       // The token in a customer's address is the permission itself: it goes to no other site. Within this
       // one it may: with no referrer at all, browsers hide the origin of the form that answers.
       {
@@ -69,4 +72,4 @@ const nextConfig: NextConfig = {
   },
 };
 
-export default nextConfig;
+export default withSerwist(nextConfig);

@@ -66,6 +66,9 @@ export const apiPaths = {
   jobReady: (jobId: string) => `/api/jobs/${part(jobId)}/ready`,
   rooms: () => '/api/rooms',
   room: (roomId: string) => `/api/rooms/${part(roomId)}`,
+  /** What a phone needs to begin a room of this job without a signal. */
+  blankBook: (jobId: string, roomId: string) =>
+    `/api/rooms/blank?jobId=${part(jobId)}&roomId=${part(roomId)}`,
   readings: () => '/api/readings',
   submitRoom: (roomId: string) => `/api/rooms/${part(roomId)}/submit`,
   runs: (roomId: string) => `/api/rooms/${part(roomId)}/runs`,
@@ -84,7 +87,7 @@ export const apiPaths = {
   visit: (visitId: string) => `/api/visits/${part(visitId)}`,
   callOffVisit: (visitId: string) => `/api/visits/${part(visitId)}/call-off`,
   reportVisit: (visitId: string) => `/api/visits/${part(visitId)}/report`,
-  today: () => '/api/days/today',
+  today: (date?: string) => (date ? `/api/days/today?date=${part(date)}` : '/api/days/today'),
   openings: () => '/api/openings',
   waiting: () => '/api/waiting',
   crews: () => '/api/crews',

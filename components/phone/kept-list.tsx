@@ -1,6 +1,7 @@
 'use client';
 
 import { useState } from 'react';
+import { readPhotos, tryParkedPhotosAgain } from '@/components/photos/photo-store';
 import { Button } from '@/components/ui/button';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { Queued } from '@/lib/sync/queued';
@@ -11,16 +12,15 @@ import { useLive } from './use-live';
 /** What the office would not take: it stays on the phone, with the office's words, until it does. */
 export function KeptList() {
   const personId = usePersonId();
-  const live = useLive('queue', readQueue);
+  const live = useLive('parked', () => readParked(personId));
   const [isTrying, setIsTrying] = useState(false);
-  const parked =
-    live.state === 'here'
-      ? live.value.filter((item) => item.personId === personId && item.parked !== null)
-      : [];
+  const parked = live.state === 'here' ? live.value : [];
   if (parked.length === 0) return null;
   const tryAgain = async () => {
     setIsTrying(true);
-    await tryParkedAgain(personId).finally(() => setIsTrying(false));
+    await Promise.all([tryParkedAgain(personId), tryParkedPhotosAgain(personId)]).finally(() =>
+      setIsTrying(false),
+    );
   };
   return (
     <section id="kept" className="scroll-mt-14 px-3.5 py-4">
@@ -28,8 +28,8 @@ export function KeptList() {
       <ul className="divide-y divide-rule">
         {parked.map((item) => (
           <li key={item.id} className="py-2">
-            <p className="font-medium">{workWords(item)}</p>
-            <p className="text-note text-chalk">{item.parked}</p>
+            <p className="font-medium">{item.what}</p>
+            <p className="text-note text-chalk">{item.why}</p>
           </li>
         ))}
       </ul>
@@ -45,6 +45,16 @@ export function KeptList() {
         Try again
       </Button>
     </section>
+  );
+}
+
+type Parked = { id: string; what: string; why: string };
+
+async function readParked(personId: string): Promise<Parked[]> {
+  const items = (await readQueue()).map((item) => ({ ...item, what: workWords(item) }));
+  const photos = (await readPhotos()).map((photo) => ({ ...photo, what: `Photo: ${photo.place}` }));
+  return [...items, ...photos].flatMap(({ id, what, parked, personId: owner }) =>
+    owner === personId && parked !== null ? [{ id, what, why: parked }] : [],
   );
 }
 

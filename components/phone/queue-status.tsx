@@ -6,9 +6,11 @@ import { Verdict, type VerdictKind } from '@/components/ui/verdict';
 import { paths } from '@/lib/paths';
 import { type StripState, stripState } from '@/lib/sync/strip-words';
 import { usePersonId } from './phone-person';
-import { readQueue } from './queue-store';
+import { readReadiness } from './read-readiness';
+import { readUnsent } from './read-unsent';
 import { currentSendingState, type SendingState, subscribeToSending } from './sending-state';
 import { useLive } from './use-live';
+import { hasWorker, subscribeToWorker } from './worker';
 
 const before: SendingState = { isSignedOut: false, isOffline: false };
 const marks: Record<StripState['kind'], VerdictKind> = {
@@ -21,11 +23,14 @@ const marks: Record<StripState['kind'], VerdictKind> = {
 /** Right on the strip of every phone page: what is safe here, and what the office has. */
 export function QueueStatus() {
   const personId = usePersonId();
-  const live = useLive('queue', readQueue);
+  const live = useLive('unsent', readUnsent);
+  const isProgramKept = useSyncExternalStore(subscribeToWorker, hasWorker, () => false);
+  const ready = useLive(`ready:${isProgramKept}`, () => readReadiness(personId, isProgramKept));
   const sending = useSyncExternalStore(subscribeToSending, currentSendingState, () => before);
   if (live.state === 'reading') return null;
   if (live.state === 'failed') return <Verdict kind="problem">nothing can be kept here</Verdict>;
-  const { kind, words } = stripState({ queue: live.value, personId, ...sending });
+  const isReady = ready.state === 'here' && ready.value.isReady;
+  const { kind, words } = stripState({ unsent: live.value, personId, isReady, ...sending });
   const mark = <Verdict kind={marks[kind]}>{words}</Verdict>;
   if (kind === 'parked') return <Link href={`${paths.today()}#kept`}>{mark}</Link>;
   if (kind === 'sign-in') return <a href={paths.signIn(window.location.pathname)}>{mark}</a>;

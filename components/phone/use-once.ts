@@ -1,6 +1,9 @@
 import { useEffect, useEffectEvent, useState } from 'react';
 
-export type Once<Value> = { state: 'reading' } | { state: 'here'; value: Value } | { state: 'failed' };
+export type Once<Value> =
+  | { state: 'reading' }
+  | { state: 'here'; value: Value }
+  | { state: 'failed' };
 
 /** What the phone's store holds when it is asked, and no later: for what a screen then changes itself. */
 export function useOnce<Value>(key: string, read: () => Promise<Value>): Once<Value> {

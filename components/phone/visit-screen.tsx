@@ -1,10 +1,8 @@
-import { LinkButton } from '@/components/ui/link-button';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { TodayVisit } from '@/lib/contracts/visits';
-import { paths } from '@/lib/paths';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
-import { AddRoom } from './add-room';
 import { DirectionsLink } from './directions-link';
+import { RoomsOfVisit } from './rooms-of-visit';
 import { VisitState } from './visit-state';
 import { VisitTaps } from './visit-taps';
 
@@ -52,17 +50,7 @@ export function VisitScreen({ visit, mayReport, mayMeasure }: VisitScreenProps) 
         <Words label="Notes" text={visit.notes} />
       </section>
 
-      {mayMeasure ? (
-        <section className="flex flex-col gap-2">
-          <TitleBlock title="Rooms" meta={visit.jobTitle} />
-          {visit.rooms.map((room) => (
-            <LinkButton key={room.id} size="thumb" look="line" href={paths.walls(room.id)}>
-              Measure {room.name}
-            </LinkButton>
-          ))}
-          <AddRoom jobId={visit.jobId} isFirst={visit.rooms.length === 0} />
-        </section>
-      ) : null}
+      {mayMeasure ? <RoomsOfVisit visit={visit} /> : null}
     </div>
   );
 }

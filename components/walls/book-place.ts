@@ -13,6 +13,7 @@ export type BookPlace =
   | { at: 'add'; kind: string; wallId: string }
   | { at: 'feature'; wallId: string; readingId?: string }
   | { at: 'list' }
+  | { at: 'photo'; photoId: string; wallId: string }
   | { at: 'sketch'; wallId?: string }
   | { at: 'leave' };
 
@@ -35,6 +36,7 @@ export function placeOf(hash: string): BookPlace {
     return { at, readingId: first };
   }
   if (at === 'add' && first) return { at, kind: first, wallId: second };
+  if (at === 'photo' && first) return { at, photoId: first, wallId: second };
   if (at === 'sketch') return { at, ...(first ? { wallId: first } : {}) };
   if (at === 'list' || at === 'leave') return { at };
   return { at: 'next' };

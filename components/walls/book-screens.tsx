@@ -5,6 +5,7 @@ import { keepDraft } from '@/components/phone/draft-store';
 import type { RoomOnPhone } from '@/components/phone/room-store';
 import { walkRoom } from '@/lib/measure/room-walk';
 import { nextAsk, toGoWords } from '@/lib/walls-pad/next-ask';
+import { photoFigures } from '@/lib/walls-pad/photo-figures';
 import { speechIn } from '@/lib/walls-pad/say-length';
 import { type BookPlace, goTo, placeHref, useBookPlace } from './book-place';
 import { AllRead, Waiting } from './book-states';
@@ -14,6 +15,7 @@ import {
   FeaturePad,
   fetchScreens,
   LeaveScreen,
+  PhotoScreen,
   ReadingDetail,
   SketchScreen,
   WallList,
@@ -183,6 +185,18 @@ function BookScreen({ room, kept }: BookScreensProps) {
           picture={<WallPicture {...{ view, speech }} wallId={place.wallId} />}
         />
       );
+    case 'photo': {
+      const { photoId, wallId } = place;
+      const back: BookPlace = wallId === '' ? { at: 'list' } : { at: 'wall', wallId };
+      return (
+        <PhotoScreen
+          key={photoId}
+          photoId={photoId}
+          figures={photoFigures(view.wallBook, wallId, speech)}
+          onDone={() => goTo(back)}
+        />
+      );
+    }
     case 'feature':
       return feature(place.wallId, { readingId: place.readingId });
     case 'list':

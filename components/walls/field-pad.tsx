@@ -1,6 +1,7 @@
 'use client';
 
-import type { ReactNode } from 'react';
+import { type ReactNode, useState } from 'react';
+import { useTyping } from '@/components/phone/use-typing';
 import type { LengthUnit } from '@/lib/units/brands';
 import type { PadDraft } from '@/lib/walls-pad/pad-draft';
 import { emptyEntry, type PadEntry, pressKey, pressTick } from '@/lib/walls-pad/pad-entry';
@@ -40,6 +41,8 @@ export type PadAction = { key: string; label: string; value?: string; onPress: (
 /** One question: the picture, what is asked, the figure, what it means, and the keys under the thumb. */
 export function FieldPad(props: FieldPadProps) {
   const { draft, onDraft, fields, unit, stepMm } = props;
+  const [begun] = useState(draft);
+  useTyping(draft !== begun);
   const field = fields.find(({ name }) => name === draft.active);
   const entry = draft.entries[draft.active] ?? emptyEntry(unit);
   const put = (next: PadEntry) =>

@@ -10,6 +10,8 @@ const feature = () => import('./feature-pad').then((m) => ({ default: m.FeatureP
 const list = () => import('./wall-list').then((m) => ({ default: m.WallList }));
 const overview = () => import('./walls-overview').then((m) => ({ default: m.WallsOverview }));
 const detail = () => import('./reading-detail').then((m) => ({ default: m.ReadingDetail }));
+const photo = () =>
+  import('@/components/photos/photo-screen').then((m) => ({ default: m.PhotoScreen }));
 const sheets = () => import('./pad-sheets').then((m) => ({ default: m.PadSheets }));
 const setUp = () => import('./set-up-sheet').then((m) => ({ default: m.SetUpSheet }));
 
@@ -19,12 +21,13 @@ export const FeaturePad = lazy(feature);
 export const WallList = lazy(list);
 export const WallsOverview = lazy(overview);
 export const ReadingDetail = lazy(detail);
+export const PhotoScreen = lazy(photo);
 export const PadSheets = lazy(sheets);
 export const SetUpSheet = lazy(setUp);
 
 /** Fetches what may be opened next, the likeliest first; a miss is tried again when it is opened. */
 export async function fetchScreens(): Promise<void> {
-  for (const fetchOne of [sheets, setUp, overview, list, detail, feature, leave, sketch]) {
+  for (const fetchOne of [sheets, setUp, overview, list, detail, feature, leave, photo, sketch]) {
     await fetchOne().catch(() => null);
   }
 }

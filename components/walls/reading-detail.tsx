@@ -12,10 +12,12 @@ import type { LengthSpeech } from '@/lib/walls-pad/say-length';
 import { ChoiceSheet } from './choice-sheet';
 import { FractionWords } from './fraction-words';
 import { keepWithdrawal } from './keep-note';
+import { OtherReaderWords } from './other-reader-words';
 import type { PadHabits } from './pad-habits';
 import { touchesWord, withdrawReasons } from './pad-words';
 import { PlaceButton } from './place-button';
 import { RoomFrame } from './room-frame';
+import { useOtherReaders } from './use-other-readers';
 
 type ReadingDetailProps = {
   reading: Reading;
@@ -31,6 +33,7 @@ type ReadingDetailProps = {
 export function ReadingDetail(props: ReadingDetailProps) {
   const { reading, view, habits, speech } = props;
   const personId = usePersonId();
+  const othersOf = useOtherReaders(view, speech);
   const [isWithdrawing, setIsWithdrawing] = useState(false);
   const { room, readings } = view.wallBook;
   const { what, value } = readingWords(reading, room, speech);
@@ -51,6 +54,8 @@ export function ReadingDetail(props: ReadingDetailProps) {
       </ChoiceSheet>
     );
   }
+  const others = stands ? othersOf(reading) : [];
+  const by = view.readers.find(({ readingIds }) => readingIds.includes(reading.id))?.name;
   const tool = view.tools.find(({ id }) => id === reading.toolId)?.name ?? 'unknown';
   return (
     <RoomFrame picture={props.picture} title={<FractionWords>{what}</FractionWords>}>
@@ -62,12 +67,19 @@ export function ReadingDetail(props: ReadingDetailProps) {
           Corrected or taken back. It stays in the book and counts no more.
         </p>
       )}
+      {others.length > 0 ? (
+        <p className="border-l-4 border-blueprint bg-tint px-3 py-2">
+          <OtherReaderWords others={others} />
+          <span className="block text-note text-graphite">Both stay in the book.</span>
+        </p>
+      ) : null}
       <TitleStamp
         cells={[
           { label: 'typed', value: reading.typed || '–' },
           { label: 'tool', value: tool },
           { label: 'against', value: touchesWord(reading.touches) },
           { label: 'taken', value: timeWords(reading.takenAt) },
+          { label: 'by', value: by ?? 'you' },
           {
             label: 'where it is',
             value: props.isHere ? 'saved here, not sent yet' : 'with the office',

@@ -75,7 +75,12 @@ function bothReadings(ids: string[], view: WallBookView): string {
   const { room, readings } = view.wallBook;
   const named = ids.flatMap((id) => {
     const reading = readings.find((each) => each.id === id);
-    return reading ? [readingWords(reading, room, view.rules)] : [];
+    const by = view.readers.find(({ readingIds }) => readingIds.includes(id))?.name;
+    return reading ? [{ ...readingWords(reading, room, view.rules), by }] : [];
   });
-  return `${named[0]?.what ?? 'Two readings'}: ${named.map(({ value }) => value).join(' and ')}`;
+  // Names tell two people's readings apart, and say nothing where one took both.
+  const isOfTwo = new Set(named.map(({ by }) => by)).size > 1;
+  return `${named[0]?.what ?? 'Two readings'}: ${named
+    .map(({ value, by }) => (isOfTwo ? `${value} (${by ?? 'you'})` : value))
+    .join(' and ')}`;
 }

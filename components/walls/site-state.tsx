@@ -52,6 +52,17 @@ export function SiteState({ draft, unit, refusal, onDraft, onDone, onBack }: Sit
         chosen={draft.floorToComeMm}
         onPick={(floorToComeMm) => onDraft({ ...draft, floorToComeMm })}
       />
+      {draft.floorToComeMm > 0 ? (
+        <Pick
+          legend="The cabinets will stand on"
+          choices={[
+            { value: 'finished-floor', words: 'the finished floor' },
+            { value: 'rough-floor', words: 'the rough floor' },
+          ]}
+          chosen={draft.cabinetsStandOn}
+          onPick={(cabinetsStandOn) => onDraft({ ...draft, cabinetsStandOn })}
+        />
+      ) : null}
       {refusal ? (
         <p role="alert" className="border-l-4 border-chalk bg-tint px-3 py-2">
           {refusal}

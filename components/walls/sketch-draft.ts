@@ -12,10 +12,12 @@ export type SketchDraft = {
   name: string;
   wallThicknessToComeMm: number;
   floorToComeMm: number;
+  /** Asked where a floor is still to come. */
+  cabinetsStandOn: 'finished-floor' | 'rough-floor';
 };
 
 export function startSketch(room: Room): SketchDraft {
-  const { chains, name, wallThicknessToComeMm, floorToComeMm } = room;
+  const { chains, name, wallThicknessToComeMm, floorToComeMm, cabinetsStandOn } = room;
   const walls = chains.flatMap((chain) => chain.walls);
   return {
     step: walls.length > 0 ? 'walls' : 'shape',
@@ -24,7 +26,15 @@ export function startSketch(room: Room): SketchDraft {
     name: name || 'Kitchen',
     wallThicknessToComeMm,
     floorToComeMm,
+    cabinetsStandOn: cabinetsStandOn ?? 'finished-floor',
   };
+}
+
+/** The room as it is kept. A sketch begun by an older program does not say what the cabinets stand on. */
+export function roomOfSketch(roomId: string, draft: SketchDraft): Room {
+  const { name, chains, wallThicknessToComeMm, floorToComeMm, cabinetsStandOn } = draft;
+  const room = { id: roomId, name, chains, wallThicknessToComeMm, floorToComeMm };
+  return floorToComeMm > 0 && cabinetsStandOn ? { ...room, cabinetsStandOn } : room;
 }
 
 /** Names and closes what was changed; walls with readings keep their names. */

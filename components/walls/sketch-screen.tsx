@@ -5,6 +5,7 @@ import { dropDraft, keepDraft } from '@/components/phone/draft-store';
 import { newId } from '@/components/phone/new-id';
 import { usePersonId } from '@/components/phone/phone-person';
 import { keepWork } from '@/components/phone/queue-store';
+import { useTyping } from '@/components/phone/use-typing';
 import type { WallBookView } from '@/lib/contracts/rooms';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { wallIdsOf } from '@/lib/measure/wall-ids';
@@ -14,7 +15,7 @@ import { sketchKey } from './draft-keys';
 import type { PadHabits } from './pad-habits';
 import { ShapePick } from './shape-pick';
 import { SiteState } from './site-state';
-import { type SketchDraft, startSketch, withChains } from './sketch-draft';
+import { roomOfSketch, type SketchDraft, startSketch, withChains } from './sketch-draft';
 import { SketchWalls } from './sketch-walls';
 
 type SketchScreenProps = {
@@ -31,6 +32,7 @@ export function SketchScreen({ view, keptSketch, wallId, habits, onHabits }: Ske
   const { room, readings } = view.wallBook;
   const personId = usePersonId();
   const [draft, setDraft] = useState(keptSketch ?? startSketch(room));
+  useTyping(true);
   const [refusal, setRefusal] = useState<string | null>(null);
   const keptWallIds = new Set(standingReadings(readings).flatMap(wallIdsOf));
   const change = (next: SketchDraft) => {
@@ -63,8 +65,7 @@ export function SketchScreen({ view, keptSketch, wallId, habits, onHabits }: Ske
     );
   }
   const finish = async () => {
-    const { name, chains, wallThicknessToComeMm, floorToComeMm } = draft;
-    const drawn = { id: room.id, name, chains, wallThicknessToComeMm, floorToComeMm };
+    const drawn = roomOfSketch(room.id, draft);
     try {
       await keepWork(personId, [{ kind: 'room', jobId: view.jobId, room: drawn }]);
     } catch {

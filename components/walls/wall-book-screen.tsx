@@ -1,6 +1,8 @@
 'use client';
 
 import { lazy, Suspense, useEffect, useState } from 'react';
+import { usePersonId } from '@/components/phone/phone-person';
+import { startRefreshing } from '@/components/phone/refresh-room';
 import { readRoom, rememberRoom } from '@/components/phone/room-store';
 import { useLive } from '@/components/phone/use-live';
 import { ErrorState } from '@/components/ui/error-state';
@@ -12,23 +14,32 @@ import { type KeptOnPhone, readKept } from './kept-on-phone';
 const fetchBook = () => import('./book-screens').then((m) => ({ default: m.BookScreens }));
 const BookScreens = lazy(fetchBook);
 
+type WallBookScreenProps = {
+  view: WallBookView;
+  /** Shown from the phone's store, without the office. */
+  isStale?: boolean;
+};
+
 /** The wall book on the phone: the office's last word, and over it everything that is kept here. */
-export function WallBookScreen({ view }: { view: WallBookView }) {
+export function WallBookScreen({ view, isStale = false }: WallBookScreenProps) {
+  const personId = usePersonId();
   const roomId = view.wallBook.room.id;
   const [kept, setKept] = useState<KeptOnPhone | null>(null);
   const [isBroken, setIsBroken] = useState(false);
-  const live = useLive(`room:${roomId}`, () => readRoom(roomId));
+  const live = useLive(`room:${roomId}`, () => readRoom(roomId, personId));
 
   useEffect(() => {
     let isShown = true;
     fetchBook().catch(() => null);
-    Promise.all([readKept(view), rememberRoom(view)])
+    Promise.all([readKept(view), rememberRoom(view, personId)])
       .then(([read]) => isShown && setKept(read))
       .catch(() => isShown && setIsBroken(true));
     return () => {
       isShown = false;
     };
-  }, [view]);
+  }, [view, personId]);
+
+  useEffect(() => startRefreshing({ roomId, personId, isStale }), [roomId, personId, isStale]);
 
   if (isBroken || live.state === 'failed') return <NothingKept />;
   if (live.state === 'reading' || live.value === null || kept === null) return <Opening />;

@@ -8,13 +8,17 @@ import { standingReadings } from '@/lib/measure/standing-readings';
 import { wallIdsOf } from '@/lib/measure/wall-ids';
 import { wallsOfPlanned } from '@/lib/walls-pad/ask-words';
 import { isOpen } from '@/lib/walls-pad/next-ask';
+import type { OtherReader } from '@/lib/walls-pad/other-readers';
 import { readingWords } from '@/lib/walls-pad/reading-words';
 import type { LengthSpeech } from '@/lib/walls-pad/say-length';
 import { type BookPlace, placeHref } from './book-place';
 import { FractionWords } from './fraction-words';
 import { LineLink } from './line-link';
+import { OtherReaderWords } from './other-reader-words';
 import { PlaceButton } from './place-button';
 import { RoomFrame } from './room-frame';
+import { useOtherReaders } from './use-other-readers';
+import { WallPhotos } from './wall-photos';
 
 type WallListProps = {
   wallId: string;
@@ -28,6 +32,7 @@ type WallListProps = {
 
 /** One wall: what it still needs, what was read, and what may be added that nobody asked for. */
 export function WallList({ wallId, view, plan, hereIds, speech, picture }: WallListProps) {
+  const othersOf = useOtherReaders(view, speech);
   const { room, readings } = view.wallBook;
   const walked = walkRoom(room).byId.get(wallId);
   if (!walked) return null;
@@ -58,7 +63,11 @@ export function WallList({ wallId, view, plan, hereIds, speech, picture }: WallL
           <TitleBlock title="Read" meta="touch one to correct it or take it back" />
           <ul className="divide-y divide-rule">
             {read.map((reading) => (
-              <ReadLine key={reading.id} {...{ reading, view, speech, hereIds }} />
+              <ReadLine
+                key={reading.id}
+                {...{ reading, view, speech, hereIds }}
+                others={othersOf(reading)}
+              />
             ))}
           </ul>
         </section>
@@ -75,6 +84,7 @@ export function WallList({ wallId, view, plan, hereIds, speech, picture }: WallL
           ))}
         </ul>
       </section>
+      <WallPhotos roomId={room.id} wallId={wallId} place={`Wall ${walked.wall.name}`} />
       <PlaceButton look="plain" place={{ at: 'list' }}>
         The whole room
       </PlaceButton>
@@ -87,7 +97,11 @@ function ReadLine({
   view,
   speech,
   hereIds,
-}: Pick<WallListProps, 'view' | 'speech' | 'hereIds'> & { reading: Reading }) {
+  others,
+}: Pick<WallListProps, 'view' | 'speech' | 'hereIds'> & {
+  reading: Reading;
+  others: OtherReader[];
+}) {
   const { what, value } = readingWords(reading, view.wallBook.room, speech);
   return (
     <li>
@@ -97,6 +111,7 @@ function ReadLine({
         note={hereIds.has(reading.id) ? 'saved here, not sent yet' : undefined}
       >
         <FractionWords>{what}</FractionWords>
+        <OtherReaderWords others={others} />
       </LineLink>
     </li>
   );

@@ -12,8 +12,11 @@ import type { LengthSpeech } from '@/lib/walls-pad/say-length';
 import { placeHref } from './book-place';
 import { FractionWords } from './fraction-words';
 import { LineLink } from './line-link';
+import { OtherReaderWords } from './other-reader-words';
 import { PlaceButton } from './place-button';
 import { RoomFrame } from './room-frame';
+import { useOtherReaders } from './use-other-readers';
+import { WallPhotos } from './wall-photos';
 
 type WallsOverviewProps = {
   view: WallBookView;
@@ -24,6 +27,7 @@ type WallsOverviewProps = {
 
 /** The whole room: each wall with what it still needs, what lies across, and the ways on. */
 export function WallsOverview({ view, plan, speech, picture }: WallsOverviewProps) {
+  const othersOf = useOtherReaders(view, speech);
   const { room, readings } = view.wallBook;
   const walls = room.chains.flatMap((chain) => chain.walls);
   const acrossPlan = plan.filter(({ ask }) => wallsOfPlanned(ask).length !== 1);
@@ -69,6 +73,7 @@ export function WallsOverview({ view, plan, speech, picture }: WallsOverviewProp
                   value={<FractionWords>{value}</FractionWords>}
                 >
                   {what}
+                  <OtherReaderWords others={othersOf(reading)} />
                 </LineLink>
               </li>
             );
@@ -80,6 +85,7 @@ export function WallsOverview({ view, plan, speech, picture }: WallsOverviewProp
           </li>
         </ul>
       </section>
+      <WallPhotos roomId={room.id} wallId={null} place={room.name} />
       <div className="flex flex-col gap-2">
         <PlaceButton look="line" place={{ at: 'leave' }}>
           Before you leave

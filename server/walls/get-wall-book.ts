@@ -9,11 +9,8 @@ export async function getWallBook(
   { roomId }: { roomId: string },
 ): Promise<WallBookView> {
   mustBeAllowed(ctx, 'walls:read');
-  const { jobId, jobTitle, customerName, wallBook, runs, submittedAt } = await readWallBook(
-    ctx.db,
-    ctx,
-    roomId,
-  );
+  const book = await readWallBook(ctx.db, ctx, roomId);
+  const { jobId, jobTitle, customerName, wallBook, runs, submittedAt, readers } = book;
   const rules = ctx.shop.rules.fit;
   return {
     jobId,
@@ -25,5 +22,6 @@ export async function getWallBook(
     missing: whatIsMissing(wallBook, runs, rules),
     tools: wallBook.tools,
     submittedAt: submittedAt?.toISOString() ?? null,
+    readers,
   };
 }

@@ -1,6 +1,7 @@
 import { and, asc, eq } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { customers, jobs, people, readings, rooms, sites, tools } from '@/db/schema';
+import type { Reader } from '@/lib/contracts/rooms';
 import type { Run, WallBook } from '@/lib/contracts/wall-book';
 import type { PersonContext } from '@/server/base/context';
 import { notFound } from '@/server/base/problem-response';
@@ -20,6 +21,8 @@ export type BookOnFile = {
   runs: Run[];
   /** Who took each reading: reading id → name. */
   takenBy: Map<string, string>;
+  /** The same by person, in the order in which they first read something. */
+  readers: Reader[];
 };
 
 /** Reads the whole book of one room of this shop; inside a transaction where it is given one. */
@@ -67,17 +70,28 @@ export async function readWallBook(
     },
     runs: (await readRuns(db, ctx, [roomId])).get(roomId) ?? [],
     takenBy: new Map(lines.map(({ body, takenBy }) => [body.id, takenBy])),
+    readers: readersOf(lines),
   };
 }
 
 /** In the order in which the office got them. */
 function readLines(db: Database, ctx: PersonContext, roomId: string) {
   return db
-    .select({ body: readings.body, takenBy: people.name })
+    .select({ body: readings.body, personId: people.id, takenBy: people.name })
     .from(readings)
     .innerJoin(people, eq(people.id, readings.takenBy))
     .where(and(eq(readings.shopId, ctx.shop.id), eq(readings.roomId, roomId)))
     .orderBy(asc(readings.sequence));
+}
+
+function readersOf(lines: Awaited<ReturnType<typeof readLines>>): Reader[] {
+  const readers = new Map<string, Reader>();
+  for (const { body, personId, takenBy } of lines) {
+    const reader = readers.get(personId) ?? { personId, name: takenBy, readingIds: [] };
+    reader.readingIds.push(body.id);
+    readers.set(personId, reader);
+  }
+  return [...readers.values()];
 }
 
 function readTools(db: Database, ctx: PersonContext) {

@@ -32,5 +32,6 @@ export async function startWallBook(
     missing: [],
     tools: shopTools,
     submittedAt: null,
+    readers: [],
   };
 }

@@ -56,6 +56,7 @@ export function exampleView(readings: Reading[] = []): WallBookView {
     missing: [],
     tools: wallBook.tools,
     submittedAt: null,
+    readers: [],
   };
 }
 

@@ -1,8 +1,5 @@
 import type { Metadata } from 'next';
-import { KeptList } from '@/components/phone/kept-list';
-import { QueueStatus } from '@/components/phone/queue-status';
-import { TodayList } from '@/components/phone/today-list';
-import { PhoneShell } from '@/components/shell/phone-shell';
+import { TodayScreen } from '@/components/phone/today-screen';
 import { isLocalDate } from '@/lib/time/civil';
 import { pageContext } from '@/server/base/page-context';
 import { getToday } from '@/server/days/get-today';
@@ -18,9 +15,6 @@ export default async function TodayPage({
   const { on } = await searchParams;
   const view = await getToday(ctx, on && isLocalDate(on) ? { date: on } : {});
   return (
-    <PhoneShell where={<b>{ctx.shop.name}</b>} status={<QueueStatus />}>
-      <TodayList view={view} personName={ctx.actor.name} />
-      <KeptList />
-    </PhoneShell>
+    <TodayScreen view={view} holder={{ shopName: ctx.shop.name, personName: ctx.actor.name }} />
   );
 }

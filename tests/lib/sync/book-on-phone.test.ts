@@ -75,15 +75,22 @@ describe('newerView', () => {
 
 describe('stripState', () => {
   const item = queuedExample(1, { kind: 'reading', reading: one });
-  const base = { queue: [], personId: 'ann', isSignedOut: false, isOffline: false };
+  const base = {
+    unsent: [],
+    personId: 'ann',
+    isSignedOut: false,
+    isOffline: false,
+    isReady: false,
+  };
 
   it.each([
     [{}, 'sent', 'all sent'],
-    [{ queue: [item] }, 'waiting', 'saved here · 1 to send'],
-    [{ queue: [item], isOffline: true }, 'waiting', 'saved here · 1, no signal'],
-    [{ queue: [item], isSignedOut: true }, 'sign-in', 'saved here · sign in to send 1'],
-    [{ queue: [{ ...item, parked: 'no' }] }, 'parked', 'saved here · 1 not taken'],
-    [{ queue: [{ ...item, personId: 'ben' }] }, 'sent', 'all sent · 1 of another person'],
+    [{ isReady: true }, 'sent', 'all sent · ready for no signal'],
+    [{ unsent: [item] }, 'waiting', 'saved here · 1 to send'],
+    [{ unsent: [item], isOffline: true }, 'waiting', 'saved here · 1, no signal'],
+    [{ unsent: [item], isSignedOut: true }, 'sign-in', 'saved here · sign in to send 1'],
+    [{ unsent: [{ ...item, parked: 'no' }] }, 'parked', 'saved here · 1 not taken'],
+    [{ unsent: [{ ...item, personId: 'ben' }] }, 'sent', 'all sent · 1 of another person'],
   ] as const)('says of %j: %s, "%s"', (change, kind, words) => {
     expect(stripState({ ...base, ...change })).toEqual({ kind, words });
   });

@@ -1,9 +1,5 @@
 import type { Metadata } from 'next';
-import Link from 'next/link';
-import { QueueStatus } from '@/components/phone/queue-status';
-import { VisitScreen } from '@/components/phone/visit-screen';
-import { PhoneShell } from '@/components/shell/phone-shell';
-import { paths } from '@/lib/paths';
+import { StopScreen } from '@/components/phone/stop-screen';
 import { may } from '@/lib/permissions';
 import { found } from '@/server/base/found';
 import { pageContext } from '@/server/base/page-context';
@@ -17,12 +13,9 @@ export default async function TodayVisitPage({ params }: { params: Promise<{ vis
   const visit = await found(getTodayVisit(ctx, { visitId }));
   const { role } = ctx.actor;
   return (
-    <PhoneShell where={<Link href={paths.today()}>‹ Today</Link>} status={<QueueStatus />}>
-      <VisitScreen
-        visit={visit}
-        mayReport={may(role, 'visits:report')}
-        mayMeasure={may(role, 'walls:measure')}
-      />
-    </PhoneShell>
+    <StopScreen
+      visit={visit}
+      holder={{ mayReport: may(role, 'visits:report'), mayMeasure: may(role, 'walls:measure') }}
+    />
   );
 }

@@ -1,9 +1,6 @@
 import type { Metadata } from 'next';
 import { notFound } from 'next/navigation';
-import { QueueStatus } from '@/components/phone/queue-status';
-import { PhoneShell } from '@/components/shell/phone-shell';
-import { RoomWhere } from '@/components/walls/room-where';
-import { WallBookScreen } from '@/components/walls/wall-book-screen';
+import { RoomScreen } from '@/components/walls/room-screen';
 import { openWallBookInput } from '@/lib/contracts/rooms';
 import { found } from '@/server/base/found';
 import { pageContext } from '@/server/base/page-context';
@@ -24,9 +21,5 @@ export default async function WallsPage({
   const asked = openWallBookInput.safeParse({ roomId, jobId: job });
   if (!asked.success) notFound();
   const view = await found(openWallBook(ctx, asked.data));
-  return (
-    <PhoneShell where={<RoomWhere view={view} />} status={<QueueStatus />}>
-      <WallBookScreen view={view} />
-    </PhoneShell>
-  );
+  return <RoomScreen view={view} />;
 }

@@ -1,0 +1,146 @@
+'use client';
+
+import { useEffect, useState, useSyncExternalStore } from 'react';
+import { PhoneShell } from '@/components/shell/phone-shell';
+import { EmptyState } from '@/components/ui/empty-state';
+import { LinkButton } from '@/components/ui/link-button';
+import { Skeleton, SkeletonScreen } from '@/components/ui/skeleton';
+import { RoomScreen } from '@/components/walls/room-screen';
+import { paths } from '@/lib/paths';
+import type { Holder } from '@/lib/sync/holder';
+import { type PhonePlace, phonePlaceOf } from '@/lib/sync/phone-pages';
+import { readDay, readDays, readHolder } from './kept-store';
+import { PhonePerson } from './phone-person';
+import { readBook } from './read-book';
+import { readUnsent } from './read-unsent';
+import { StopScreen } from './stop-screen';
+import { TodayScreen } from './today-screen';
+import { useLive } from './use-live';
+import { useOnce } from './use-once';
+
+const never = () => () => {};
+
+/**
+ * Stands in for every phone page where there is no signal: shows what the phone keeps for the address that
+ * was asked for, to the person that it keeps it for.
+ */
+export function KeptPage() {
+  const address = useSyncExternalStore(
+    never,
+    () => window.location.pathname + window.location.search,
+    () => null,
+  );
+  const live = useOnce('holder', readHolder);
+  if (address === null || live.state === 'reading') return <Opening />;
+  if (live.state === 'failed' || live.value === null) return <NobodyHere />;
+  const [pathname = '', search = ''] = address.split('?');
+  return (
+    <PhonePerson holder={live.value}>
+      <KeptPlace place={phonePlaceOf(pathname, search)} holder={live.value} />
+    </PhonePerson>
+  );
+}
+
+const titles: Record<PhonePlace['page'], string> = {
+  today: 'Today',
+  visit: 'Visit',
+  walls: 'Wall book',
+  unknown: 'No signal',
+};
+
+function KeptPlace({ place, holder }: { place: PhonePlace; holder: Holder }) {
+  useEffect(() => {
+    document.title = `${titles[place.page]} · Setwell`;
+  }, [place.page]);
+  switch (place.page) {
+    case 'today':
+      return <KeptDay date={place.date} holder={holder} />;
+    case 'visit':
+      return <KeptVisit visitId={place.visitId} holder={holder} />;
+    case 'walls':
+      return <KeptBook roomId={place.roomId} jobId={place.jobId} holder={holder} />;
+    case 'unknown':
+      return <NotKept what="This page" />;
+  }
+}
+
+function KeptDay({ date, holder }: { date: string | null; holder: Holder }) {
+  const [today] = useState(() => localDateOf(new Date()));
+  const wanted = date ?? today;
+  const live = useLive(`day:${wanted}`, () => readDay(wanted));
+  if (live.state === 'reading') return <Opening />;
+  if (live.state === 'failed' || !live.value) return <NotKept what="This day" />;
+  return <TodayScreen view={live.value} holder={holder} />;
+}
+
+function KeptVisit({ visitId, holder }: { visitId: string; holder: Holder }) {
+  const live = useLive('days', readDays);
+  if (live.state === 'reading') return <Opening />;
+  const days = live.state === 'here' ? live.value : [];
+  const visit = days.flatMap((day) => day.visits).find(({ id }) => id === visitId);
+  return visit ? <StopScreen visit={visit} holder={holder} /> : <NotKept what="This visit" />;
+}
+
+function KeptBook(asked: { roomId: string; jobId: string | null; holder: Holder }) {
+  const { roomId, jobId, holder } = asked;
+  // Once: the screen writes the book that it was given, and then follows the store by itself.
+  const once = useOnce(`book:${roomId}`, () => readBook(roomId, jobId, holder.personId));
+  if (once.state === 'reading') return <Opening />;
+  if (once.state === 'failed' || !once.value) return <NotKept what="This room" />;
+  return <RoomScreen view={once.value} isStale />;
+}
+
+/** The phone's own day: the visits of the day are in the shop's zone, and so is its measurer. */
+function localDateOf(now: Date): string {
+  const two = (part: number) => String(part).padStart(2, '0');
+  return `${now.getFullYear()}-${two(now.getMonth() + 1)}-${two(now.getDate())}`;
+}
+
+function NotKept({ what }: { what: string }) {
+  return (
+    <PhoneShell where={<b>No signal</b>}>
+      <div className="p-3.5">
+        <EmptyState
+          title={`${what} is not on this phone`}
+          action={
+            <LinkButton size="thumb" href={paths.today()}>
+              Today
+            </LinkButton>
+          }
+        >
+          There is no signal, and it was not opened here while there was one. What you measured is
+          kept; try again where there is a signal.
+        </EmptyState>
+      </div>
+    </PhoneShell>
+  );
+}
+
+function NobodyHere() {
+  const live = useLive('unsent', readUnsent);
+  const unsent = live.state === 'here' ? live.value.length : 0;
+  return (
+    <PhoneShell where={<b>No signal</b>}>
+      <div className="p-3.5">
+        <EmptyState title="Nobody is signed in on this phone">
+          Signing in wants a signal.
+          {unsent > 0
+            ? ` What was measured here is kept: ${unsent} to send when its reader signs in again.`
+            : ''}
+        </EmptyState>
+      </div>
+    </PhoneShell>
+  );
+}
+
+function Opening() {
+  return (
+    <SkeletonScreen what="what this phone keeps">
+      <div className="mx-auto flex max-w-phone flex-col gap-3 p-3.5">
+        <Skeleton className="h-8 w-2/3" />
+        <Skeleton className="h-16 w-full" />
+        <Skeleton className="h-16 w-full" />
+      </div>
+    </SkeletonScreen>
+  );
+}
