@@ -31,6 +31,14 @@ export function RunSummary({ runFit, editHref }: RunSummaryProps) {
       ) : (
         <p className="text-graphite">Cannot be filled yet: its wall or a corner is not read.</p>
       )}
+      {fill?.suggestion ? (
+        <p>
+          <span className="font-medium">
+            {fill.suggestion.possible ? 'A way out: ' : 'No way out: '}
+          </span>
+          <InFractions words={fill.suggestion.words} />
+        </p>
+      ) : null}
       <dl className="mt-1 flex print:mt-0 flex-wrap gap-x-6 gap-y-0.5 text-note">
         {clearOpening ? (
           <Fact name="largest plumb block">

@@ -106,14 +106,18 @@ export function cornerWords(corner: CornerFit): { angle: string; saysOut: string
     return { angle: degrees(angle.value), saysOut: ['true within', 'the reading'], tone };
   }
   const side = deviation.value > 0 ? 'open' : 'closed';
+  // A tenth of a degree would say 0.0 of a corner that is proved to be out.
+  const places = Math.abs(deviation.value) < 0.1 ? 2 : 1;
+  const out = Math.abs(deviation.value).toFixed(places);
   return {
     angle: degrees(angle.value),
-    saysOut: [`${side} ${degrees(Math.abs(deviation.value))}`, `± ${upDegrees(deviation.U)}`],
+    saysOut: [`${side} ${out}°`, `± ${upDegrees(deviation.U, places)}`],
     tone,
   };
 }
 
 /** U is never shown smaller than it is. */
-function upDegrees(U: number): string {
-  return `${(Math.ceil(U * 10 - 1e-9) / 10).toFixed(1)}°`;
+function upDegrees(U: number, places: number): string {
+  const marks = 10 ** places;
+  return `${(Math.ceil(U * marks - 1e-9) / marks).toFixed(places)}°`;
 }

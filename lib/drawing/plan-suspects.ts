@@ -1,4 +1,5 @@
 import type { Reading } from '@/lib/contracts/wall-book';
+import type { Suspect } from '@/lib/measure/room-closure';
 import { formatLength } from '@/lib/units/format-length';
 import { figureAlong } from './dimension';
 import type { PlanSheet } from './plan';
@@ -13,11 +14,11 @@ const radiusPx = 30;
 export function planSuspects(sheet: PlanSheet): Shape[] {
   const suspects = sheet.fit.closure.suspect?.readings ?? [];
   const byId = new Map(sheet.wallBook.readings.map((reading) => [reading.id, reading]));
-  return suspects.flatMap(({ readingIds, slip, unit }) => {
+  return suspects.flatMap(({ readingIds, slip, unit, known }) => {
     const reading = readingIds.map((id) => byId.get(id)).find((found) => found !== undefined);
     const centre = reading ? placeOf(sheet, reading) : null;
     if (!centre) return [];
-    const words = slipWords(slip, unit, sheet.rules);
+    const words = slipWords({ slip, unit, known }, sheet.rules);
     const under: Point = [centre[0], centre[1] + radiusPx + 14];
     return [
       { kind: 'circle', layer: 'suspect', centre, radius: radiusPx } satisfies Shape,
@@ -26,12 +27,15 @@ export function planSuspects(sheet: PlanSheet): Shape[] {
   });
 }
 
-function slipWords(slip: number, unit: 'mm' | 'deg' | 'mm/m', rules: PlanSheet['rules']): string {
+type Slip = Pick<Suspect['readings'][number], 'slip' | 'unit' | 'known'>;
+
+/** "100 mm too long?": as it is known from slips of the hand, else as it was found. */
+function slipWords({ slip, unit, known }: Slip, rules: PlanSheet['rules']): string {
   if (unit === 'deg') return `${Math.abs(slip).toFixed(1)}° too ${slip > 0 ? 'wide' : 'narrow'}?`;
   if (unit === 'mm/m') {
     return `leans ${Math.abs(slip).toFixed(1)} mm/m too far ${slip > 0 ? 'in' : 'out'}?`;
   }
-  return `${formatLength(Math.abs(slip), rules)} too ${slip > 0 ? 'long' : 'short'}?`;
+  return `${known ?? formatLength(Math.abs(slip), rules)} too ${slip > 0 ? 'long' : 'short'}?`;
 }
 
 function placeOf(sheet: PlanSheet, reading: Reading): Point | null {
