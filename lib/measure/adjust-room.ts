@@ -29,8 +29,8 @@ const MOST_NAMED = 4;
 /**
  * Finds the plan that fits all lengths, corner angles, diagonals, widths and plumb readings best.
  *
- * Unknowns: corner coordinates (first corner at 0,0 and first wall along x), a lean for each wall read
- * off the plan's height, a bow for each wall an angle leans on without a face row, one error for each
+ * Unknowns: corner coordinates (first corner at 0,0 and first wall along x), a lean and a twist for
+ * each wall read off the plan's height, a bow for each wall an angle leans on without a face row, one error for each
  * tool whose readings share one. x along the first wall, y into the room (x east, y south from above).
  * Edge: a chain that stands alone keeps its own frame; a chain tied by widths alone may slide along its
  * walls, and its ellipses say so.
@@ -51,7 +51,11 @@ export function adjustRoom(
   const layout = layOutRoom(room, observations, zRefMm);
   const start = startingPoints(room, layout, observations);
   const nuisance = new Float64Array(layout.unknownCount);
-  const solution = solveRoom({ layout, zRefMm, ...start, nuisance }, observations, options);
+  const solution = solveRoom(
+    { layout, zRefMm, usualBowMm: options.usualBowMm, ...start, nuisance },
+    observations,
+    options,
+  );
   if (!solution || leastSure(solution) > NOT_DETERMINED_MM) {
     return { value: null, problems: [notDetermined(room, observations)] };
   }

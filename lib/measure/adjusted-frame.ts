@@ -4,14 +4,15 @@ import { type Figure, figure } from '@/lib/measure/figure';
 import {
   degrees,
   type Equation,
+  leanAtEnd,
   planAngle,
   planDistance,
   type RoomState,
 } from '@/lib/measure/room-equations';
-import { FIXED } from '@/lib/measure/room-layout';
+import { FIXED, type LaidOutWall } from '@/lib/measure/room-layout';
 import { project, spread } from '@/lib/measure/row-products';
 import { PARAMETER, PARAMETER_COUNT } from '@/lib/measure/run-frame';
-import { USUAL_LEAN } from '@/lib/measure/solve-room';
+import { USUAL_LEAN, USUAL_TWIST } from '@/lib/measure/solve-room';
 
 export type AdjustedEnd = {
   wallId: string;
@@ -59,7 +60,8 @@ export function adjustedFrame(
     const angle =
       end === 'left' ? planAngle(state, neighbour, wall) : planAngle(state, wall, neighbour);
     parameters[PARAMETER[end].angle] = { row: inDegrees(angle), variance: 0 };
-    parameters[PARAMETER[end].lean] = unknown(state, neighbour.leanColumn, USUAL_LEAN);
+    // λ is taken at the corner: the right end of the wall before, the left end of the wall after.
+    parameters[PARAMETER[end].lean] = leanAtCorner(state, neighbour, end);
     parameters[PARAMETER[end].bow] = unknown(state, neighbour.bowColumn, usualBowMm / Math.sqrt(3));
   }
   const covariance = covarianceOf(parameters, cofactor);
@@ -91,6 +93,14 @@ export function adjustedFrame(
     left: adjustedEnd('left'),
     right: adjustedEnd('right'),
     covariance,
+  };
+}
+
+function leanAtCorner(state: RoomState, neighbour: LaidOutWall, end: 'left' | 'right'): Parameter {
+  const free = (column: number, u: number) => (column === FIXED ? u * u : 0);
+  return {
+    row: leanAtEnd(state, neighbour, end === 'left' ? 'right' : 'left'),
+    variance: free(neighbour.leanColumn, USUAL_LEAN) + free(neighbour.twistColumn, USUAL_TWIST / 2),
   };
 }
 

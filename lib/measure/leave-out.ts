@@ -35,7 +35,10 @@ export function leaveOut(room: AdjustedRoom, observation: number): LeftOut | nul
     state: solution.state,
     chiSquare: weightedSquares(solution),
     slip: (read.value - equation.predicted - turns) * scale,
-    uSlip: Math.sqrt(read.sigma ** 2 + varianceOf(solution.cofactor, equation)) * scale,
+    uSlip:
+      Math.sqrt(
+        read.sigma ** 2 + (equation.leftOut ?? 0) + varianceOf(solution.cofactor, equation),
+      ) * scale,
   };
 }
 

@@ -8,14 +8,24 @@ const NEARLY_STRAIGHT_SINE = 0.17;
 export type RoomState = {
   layout: RoomLayout;
   zRefMm: number;
+  usualBowMm: number;
   x: Float64Array;
   y: Float64Array;
-  /** Leans (mm/mm), bows (mm) and tool errors (in units of their own uncertainty), by column. */
+  /** Leans and twists (mm/mm), bows (mm) and tool errors (in units of their own uncertainty), by column. */
   nuisance: Float64Array;
 };
 
 /** One linearised equation; `predicted` in mm, radians or mm/mm. */
-export type Equation = { columns: number[]; partials: number[]; predicted: number };
+export type Equation = {
+  columns: number[];
+  partials: number[];
+  predicted: number;
+  /** What the equation leaves out, as a variance: the bow of a wall is another at another height. */
+  leftOut?: number;
+};
+
+/** A bow changes by this share of the usual one in each metre of height; our judgement. */
+const BOW_GROWTH_PER_MM = 0.6 / 1_000;
 
 /**
  * The equation of one observation at a state, or null when it names a wall the room has not got.
@@ -29,8 +39,7 @@ export function equationOf(state: RoomState, observation: RoomObservation): Equa
     const column = state.layout.toolColumns.get(observation.tool.toolId) ?? FIXED;
     const share =
       observation.kind === 'corner' ? radians(observation.tool.uCommon) : observation.tool.uCommon;
-    equation.predicted += share * (state.nuisance[column] ?? 0);
-    add(equation, column, share);
+    addNuisance(state, equation, column, share);
   }
   return equation;
 }
@@ -55,9 +64,11 @@ function bareEquation(state: RoomState, observation: RoomObservation): Equation 
       const wall = wallOf(layout, observation.cornerWallId);
       const before = wall && wall.wallBefore !== null ? layout.walls[wall.wallBefore] : undefined;
       if (!wall || !before) return null;
+      const aboveMm = observation.zMm - state.zRefMm;
       const equation = cornerAngleEquation(state, before, wall, 1);
-      if (!observation.proudLeft) addBow(state, equation, before, observation.armLeftMm);
-      if (!observation.proudRight) addBow(state, equation, wall, observation.armRightMm);
+      addTwist(state, equation, before, wall, aboveMm);
+      if (!observation.proudLeft) addBow(state, equation, before, observation.armLeftMm, aboveMm);
+      if (!observation.proudRight) addBow(state, equation, wall, observation.armRightMm, aboveMm);
       return equation;
     }
     case 'width': {
@@ -138,40 +149,67 @@ function addPoint(equation: Equation, state: RoomState, point: number, byX: numb
   add(equation, place.yColumn, byY);
 }
 
-/** How a corner moves in plan for each unit of lean of the walls that meet there, per mm of height. */
-function cornerShift(state: RoomState, point: number): { column: number; x: number; y: number }[] {
+type Shift = { column: number; x: number; y: number };
+
+/**
+ * How a corner moves in plan for each unit of lean and twist of the walls that meet there, per mm of height:
+ * a wall leans by λ + t/2 at its right end and by λ − t/2 at its left.
+ */
+function cornerShift(state: RoomState, point: number): Shift[] {
+  const { walls } = state.layout;
   const place = state.layout.points[point];
-  const before =
-    place?.wallBefore === null ? undefined : state.layout.walls[place?.wallBefore ?? -1];
-  const after = place?.wallAfter === null ? undefined : state.layout.walls[place?.wallAfter ?? -1];
+  const before = walls[place?.wallBefore ?? -1];
+  const after = walls[place?.wallAfter ?? -1];
   if (!before || !after) {
     const only = before ?? after;
     if (!only) return [];
     const heading = headingOf(state, only);
-    return [{ column: only.leanColumn, x: -Math.sin(heading), y: Math.cos(heading) }];
+    return leaning(only, before ? 0.5 : -0.5, -Math.sin(heading), Math.cos(heading));
   }
   const headingBefore = headingOf(state, before);
   const headingAfter = headingOf(state, after);
   const sine = Math.sin(headingAfter - headingBefore);
   if (Math.abs(sine) < NEARLY_STRAIGHT_SINE) {
-    return [before, after].map((wall) => ({
-      column: wall.leanColumn,
-      x: -Math.sin(headingAfter) / 2,
-      y: Math.cos(headingAfter) / 2,
-    }));
+    const [x, y] = [-Math.sin(headingAfter) / 2, Math.cos(headingAfter) / 2];
+    return [...leaning(before, 0.5, x, y), ...leaning(after, -0.5, x, y)];
   }
   return [
-    {
-      column: before.leanColumn,
-      x: Math.cos(headingAfter) / sine,
-      y: Math.sin(headingAfter) / sine,
-    },
-    {
-      column: after.leanColumn,
-      x: -Math.cos(headingBefore) / sine,
-      y: -Math.sin(headingBefore) / sine,
-    },
+    ...leaning(before, 0.5, Math.cos(headingAfter) / sine, Math.sin(headingAfter) / sine),
+    ...leaning(after, -0.5, -Math.cos(headingBefore) / sine, -Math.sin(headingBefore) / sine),
   ];
+}
+
+function leaning(wall: LaidOutWall, twistShare: number, x: number, y: number): Shift[] {
+  return [
+    { column: wall.leanColumn, x, y },
+    { column: wall.twistColumn, x: twistShare * x, y: twistShare * y },
+  ];
+}
+
+/** The lean of a wall at one of its ends, λ ± t/2, mm/mm. */
+export function leanAtEnd(state: RoomState, wall: LaidOutWall, end: 'left' | 'right'): Equation {
+  const equation: Equation = { columns: [], partials: [], predicted: 0 };
+  addNuisance(state, equation, wall.leanColumn, 1);
+  addNuisance(state, equation, wall.twistColumn, end === 'right' ? 0.5 : -0.5);
+  return equation;
+}
+
+function addNuisance(state: RoomState, equation: Equation, column: number, partial: number): void {
+  equation.predicted += partial * (state.nuisance[column] ?? 0);
+  add(equation, column, partial);
+}
+
+/** A twisted wall's line turns in plan by t/L for each mm of height, and the corner with it. */
+function addTwist(
+  state: RoomState,
+  equation: Equation,
+  before: LaidOutWall,
+  after: LaidOutWall,
+  aboveMm: number,
+): void {
+  if (aboveMm === 0) return;
+  addNuisance(state, equation, before.twistColumn, aboveMm / (lengthOf(state, before) || 1));
+  addNuisance(state, equation, after.twistColumn, -aboveMm / (lengthOf(state, after) || 1));
 }
 
 function distance(state: RoomState, from: number, to: number, aboveMm: number): Equation {
@@ -243,11 +281,18 @@ function cornerAngleEquation(
 }
 
 /** The mark on a bowed wall stands proud by a parabola's height; the angle read is smaller by p/a. */
-function addBow(state: RoomState, equation: Equation, wall: LaidOutWall, armMm: number): void {
+function addBow(
+  state: RoomState,
+  equation: Equation,
+  wall: LaidOutWall,
+  armMm: number,
+  aboveMm: number,
+): void {
   const length = lengthOf(state, wall) || 1;
   const perBow = -(4 / length) * Math.max(0, 1 - armMm / length);
-  equation.predicted += perBow * (state.nuisance[wall.bowColumn] ?? 0);
-  add(equation, wall.bowColumn, perBow);
+  addNuisance(state, equation, wall.bowColumn, perBow);
+  const growth = (BOW_GROWTH_PER_MM * aboveMm * state.usualBowMm) / Math.sqrt(3);
+  equation.leftOut = (equation.leftOut ?? 0) + (perBow * growth) ** 2;
 }
 
 /** A length read out in the room loses y/tan θ at each end, and what the end walls bow there. */
@@ -264,8 +309,7 @@ function moveToFront(state: RoomState, equation: Equation, wall: LaidOutWall, yM
     addAngle(equation, state, before, after, yMm / (sine * sine));
     const length = lengthOf(state, end) || 1;
     const perBow = (-4 * (yMm / length) * Math.max(0, 1 - yMm / length)) / sine;
-    equation.predicted += perBow * (state.nuisance[end.bowColumn] ?? 0);
-    add(equation, end.bowColumn, perBow);
+    addNuisance(state, equation, end.bowColumn, perBow);
   }
 }
 
@@ -289,11 +333,7 @@ function width(
   const equation: Equation = {
     columns: [],
     partials: [],
-    predicted:
-      nx * px +
-      ny * py +
-      leanHere * (state.nuisance[wall.leanColumn] ?? 0) -
-      aboveMm * (state.nuisance[facing.leanColumn] ?? 0),
+    predicted: nx * px + ny * py,
   };
   addPoint(equation, state, wall.left, nx, ny);
   addPoint(equation, state, facing.left, -nx, -ny);
@@ -304,8 +344,10 @@ function width(
   const bySwing = -along / facingLength;
   addPoint(equation, state, facing.right, nx * bySwing, ny * bySwing);
   addPoint(equation, state, facing.left, -nx * bySwing, -ny * bySwing);
-  add(equation, wall.leanColumn, leanHere);
-  add(equation, facing.leanColumn, -aboveMm);
+  addNuisance(state, equation, wall.leanColumn, leanHere);
+  addNuisance(state, equation, wall.twistColumn, leanHere * (xMm / length - 0.5));
+  addNuisance(state, equation, facing.leanColumn, -aboveMm);
+  addNuisance(state, equation, facing.twistColumn, -aboveMm * (along / facingLength - 0.5));
   return equation;
 }
 

@@ -1,4 +1,4 @@
-/** Which unknown stands in which column: corner coordinates, then leans, bows and tool errors. */
+/** Which unknown stands in which column: corners, then leans, twists, bows and tool errors. */
 import type { CornerEnd, RoomObservation, RoomShape } from './room-observations';
 
 /** A column below zero is not an unknown: the value is fixed. */
@@ -15,6 +15,8 @@ export type LaidOutWall = {
   wallBefore: number | null;
   wallAfter: number | null;
   leanColumn: number;
+  /** How much more it leans at its right end than at its left. */
+  twistColumn: number;
   bowColumn: number;
 };
 export type LaidOutPoint = {
@@ -40,8 +42,9 @@ export type RoomLayout = {
 /**
  * Numbers walls, corners and unknowns; fixes the first corner and heading of every chain that stands alone.
  *
- * Edge: a wall has a lean only if something was read off the plan's height on it or beside it, and a bow
- * only if an angle or a front-depth length leans on its unread face: an unknown nothing touches is left out.
+ * Edge: a wall has a lean and a twist only if something was read off the plan's height on it or beside it,
+ * and a bow only if an angle or a front-depth length leans on its unread face: an unknown nothing touches
+ * is left out.
  */
 export function layOutRoom(
   room: RoomShape,
@@ -96,6 +99,7 @@ function placeWalls(layout: RoomLayout, room: RoomShape): void {
         wallBefore: hasBefore ? firstWall + ((i + count - 1) % count) : null,
         wallAfter: hasAfter ? firstWall + ((i + 1) % count) : null,
         leanColumn: FIXED,
+        twistColumn: FIXED,
         bowColumn: FIXED,
       });
     });
@@ -154,6 +158,7 @@ function numberNuisances(
   zRefMm: number,
 ): void {
   const leaning = new Set<number>();
+  const plumbed = new Set<number>();
   const bowed = new Set<number>();
   const add = (set: Set<number>, ...walls: (number | null | undefined)[]) => {
     for (const wall of walls) if (wall !== null && wall !== undefined && wall >= 0) set.add(wall);
@@ -174,6 +179,7 @@ function numberNuisances(
         const index = layout.wallById.get(observation.cornerWallId);
         if (!observation.proudLeft) add(bowed, layout.walls[index ?? -1]?.wallBefore);
         if (!observation.proudRight) add(bowed, index);
+        if (offPlan) add(leaning, index, layout.walls[index ?? -1]?.wallBefore);
         break;
       }
       case 'diagonal':
@@ -189,11 +195,14 @@ function numberNuisances(
         add(leaning, layout.wallById.get(observation.toWallId));
         break;
       case 'plumb':
-        add(leaning, layout.wallById.get(observation.wallId));
+        add(plumbed, layout.wallById.get(observation.wallId));
     }
   }
   layout.walls.forEach((wall, i) => {
-    if (leaning.has(i)) wall.leanColumn = layout.unknownCount++;
+    if (leaning.has(i) || plumbed.has(i)) wall.leanColumn = layout.unknownCount++;
+  });
+  layout.walls.forEach((wall, i) => {
+    if (leaning.has(i)) wall.twistColumn = layout.unknownCount++;
   });
   layout.walls.forEach((wall, i) => {
     if (bowed.has(i)) wall.bowColumn = layout.unknownCount++;

@@ -32,7 +32,7 @@ function adjusted(room: RoomShape, observations: RoomObservation[], usualBowMm =
 }
 
 const planOf = (seed: number, walls: number): TruePlan => ({
-  ...randomPlan(seeded(seed), walls, { ...CROOKED, bowMm: 0 }),
+  ...randomPlan(seeded(seed), walls, { ...CROOKED, bowMm: 0, bowGrowthSd: 0, twistSd: 0 }),
   zRefMm: 910,
 });
 
@@ -115,7 +115,7 @@ describe('adjusting a room', () => {
     }
   });
 
-  it('lifts redundancy to about two thirds at the middle of three heights, a half at the ends', () => {
+  it('checks lengths at three heights by one another, the middle one best', () => {
     const plan = planOf(12, 4);
     const { checks } = adjusted(
       drawnShape(plan),
@@ -127,9 +127,9 @@ describe('adjusting a room', () => {
       expect(redundancy).toBeGreaterThan(0.6);
       expect(redundancy).toBeLessThan(0.72);
     }
-    for (const { redundancy } of [...at(100), ...at(1_720)]) {
-      expect(redundancy).toBeGreaterThan(0.4);
-      expect(redundancy).toBeLessThan(0.6);
+    for (const { redundancy, hardlyChecked } of [...at(100), ...at(1_720)]) {
+      expect(redundancy).toBeGreaterThan(0.22);
+      expect(hardlyChecked).toBe(false);
     }
   });
 
@@ -178,7 +178,7 @@ describe('adjusting a room', () => {
     for (const { wallId: id, lengthMm } of one.walls) {
       const match = other.walls.find((wall) => wall.wallId === id);
       expect(match?.lengthMm.value).toBeCloseTo(lengthMm.value, 4);
-      expect(match?.lengthMm.u).toBeCloseTo(lengthMm.u, 6);
+      expect(match?.lengthMm.u).toBeCloseTo(lengthMm.u, 4);
     }
     expect(other.chiSquare.value).toBeCloseTo(one.chiSquare.value, 4);
   });

@@ -86,6 +86,15 @@ describe('the search for a wrong reading', () => {
     expect(blunder?.suspects[0]?.readingIds).toEqual(['diagonal-0-2']);
   });
 
+  it('raises no more than two false alarms in a hundred true rooms, crooked as they are', () => {
+    let alarms = 0;
+    for (let seed = 0; seed < 100; seed++) {
+      const { observations, adjust } = readRoom(9_000 + seed, 4 + (seed % 7), [100, 910, 1_450]);
+      if (findBlunder(adjust(observations))) alarms++;
+    }
+    expect(alarms).toBeLessThanOrEqual(2);
+  });
+
   it('reaches the promised shares on a small sample of rooms', { timeout: 20_000 }, () => {
     const rows = studyCondition(
       {
@@ -106,7 +115,6 @@ describe('the search for a wrong reading', () => {
     };
     expect(share(['1 in', '100 mm', '1 ft'], 'first')).toBeGreaterThanOrEqual(0.97);
     expect(share(['1/2 in'], 'first')).toBeGreaterThanOrEqual(0.9);
-    expect(share(['none'], 'alarmed')).toBeLessThanOrEqual(0.04);
   });
 });
 

@@ -81,7 +81,7 @@ export function findAngle(
   uDeg: number,
 ): CornerObservation {
   const [armLeftMm, armRightMm] = armsAt(plan, i, 900);
-  const angleDeg = angleBetweenMarks(plan, i, armLeftMm, armRightMm) + random.normal() * uDeg;
+  const angleDeg = angleBetweenMarks(plan, i, armLeftMm, armRightMm, zMm) + random.normal() * uDeg;
   return corner(i, zMm, { angleDeg, uDeg, armLeftMm, armRightMm, legs: null });
 }
 
@@ -95,7 +95,7 @@ export function readLegs(
 ): CornerObservation {
   const [leftMm, rightMm] = armsAt(plan, i, 1_200).map((arm) => Math.floor(arm / 50) * 50);
   if (!leftMm || !rightMm) return findAngle(plan, random, i, zMm, 0.3);
-  const angle = angleBetweenMarks(plan, i, leftMm, rightMm);
+  const angle = angleBetweenMarks(plan, i, leftMm, rightMm, zMm);
   const carriedPast = angle > 180;
   const inside = ((carriedPast ? angle - 180 : angle) * Math.PI) / 180;
   const mark = () => random.normal() * LEG_U_MM;

@@ -10,15 +10,38 @@ export type TruePlan = {
   corners: Place[];
   /** mm per mm, positive into the room upward. */
   leans: number[];
+  /** How much more each wall leans at its right end than at its left, mm per mm. */
+  twists: number[];
   /** Middle of each wall proud of its chord, mm; a parabola between. */
   bows: number[];
+  /** How much the bow grows with height, mm per mm. */
+  bowGrowths: number[];
   /** Height of the plan. */
   zRefMm: number;
 };
 
-export type OutOfTrue = { leanSd: number; bowMm: number; cornerSdMm: number };
-export const STRAIGHT: OutOfTrue = { leanSd: 0, bowMm: 0, cornerSdMm: 5 };
-export const CROOKED: OutOfTrue = { leanSd: 0.003, bowMm: 3, cornerSdMm: 5 };
+export type OutOfTrue = {
+  leanSd: number;
+  twistSd: number;
+  bowMm: number;
+  bowGrowthSd: number;
+  cornerSdMm: number;
+};
+export const STRAIGHT: OutOfTrue = {
+  leanSd: 0,
+  twistSd: 0,
+  bowMm: 0,
+  bowGrowthSd: 0,
+  cornerSdMm: 5,
+};
+/** Leaning 3 mm/m, twisted 1 mm/m from end to end, bowed up to 3 mm and by 1 mm/m more or less higher up. */
+export const CROOKED: OutOfTrue = {
+  leanSd: 0.003,
+  twistSd: 0.001,
+  bowMm: 3,
+  bowGrowthSd: 0.001,
+  cornerSdMm: 5,
+};
 
 /**
  * A room of `walls` walls (4 to 10): a rectangle with corners cut square (re-entrant) or at 45° (two
@@ -54,7 +77,9 @@ export function randomPlan(random: Random, walls: number, out: OutOfTrue): TrueP
   return {
     corners: corners.map(({ x, y }) => ({ x: x + push(), y: y + push() })),
     leans: corners.map(() => random.normal() * out.leanSd),
+    twists: corners.map(() => random.normal() * out.twistSd),
     bows: corners.map(() => random.between(-out.bowMm, out.bowMm)),
+    bowGrowths: corners.map(() => random.normal() * out.bowGrowthSd),
     zRefMm: 0,
   };
 }
@@ -138,13 +163,20 @@ function headingOf(plan: TruePlan, wall: number): number {
   return Math.atan2(to.y - from.y, to.x - from.x);
 }
 
+function headingAt(plan: TruePlan, wall: number, zMm: number): number {
+  const [from, to] = [cornerAt(plan, wall, zMm), cornerAt(plan, wall + 1, zMm)];
+  return Math.atan2(to.y - from.y, to.x - from.x);
+}
+
 /** A corner at a height: where the two walls' lines meet, each moved in by its lean. */
-export function cornerAt(plan: TruePlan, i: number, zMm: number): Place {
+export function cornerAt(plan: TruePlan, at: number, zMm: number): Place {
   const count = plan.corners.length;
+  const i = ((at % count) + count) % count;
   const before = (i - 1 + count) % count;
-  const moved = [before, i % count].map((wall) => {
+  const moved = [before, i % count].map((wall, end) => {
     const heading = headingOf(plan, wall);
-    const by = (plan.leans[wall] ?? 0) * (zMm - plan.zRefMm);
+    const twist = ((plan.twists[wall] ?? 0) / 2) * (end === 0 ? 1 : -1);
+    const by = ((plan.leans[wall] ?? 0) + twist) * (zMm - plan.zRefMm);
     return { nx: -Math.sin(heading), ny: Math.cos(heading), by };
   });
   const [one, other] = moved;
@@ -166,8 +198,8 @@ export function lengthAt(plan: TruePlan, wall: number, zMm: number): number {
 }
 
 /** Interior angle between the chords at a corner, degrees. */
-export function angleAt(plan: TruePlan, i: number): number {
-  const turn = headingOf(plan, i) - headingOf(plan, i - 1);
+export function angleAt(plan: TruePlan, i: number, zMm = plan.zRefMm): number {
+  const turn = headingAt(plan, i, zMm) - headingAt(plan, i - 1, zMm);
   return (((180 - (turn * 180) / Math.PI) % 360) + 360) % 360;
 }
 
@@ -177,12 +209,14 @@ export function angleBetweenMarks(
   i: number,
   armLeft: number,
   armRight: number,
+  zMm: number,
 ): number {
   const count = plan.corners.length;
   const lost = (wall: number, arm: number) => {
     const length = lengthAt(plan, wall, plan.zRefMm);
-    return ((4 * (plan.bows[wall] ?? 0)) / length) * (1 - arm / length);
+    const bow = (plan.bows[wall] ?? 0) + (plan.bowGrowths[wall] ?? 0) * (zMm - plan.zRefMm);
+    return ((4 * bow) / length) * (1 - arm / length);
   };
   const both = lost((i - 1 + count) % count, armLeft) + lost(i % count, armRight);
-  return angleAt(plan, i) - (both * 180) / Math.PI;
+  return angleAt(plan, i, zMm) - (both * 180) / Math.PI;
 }

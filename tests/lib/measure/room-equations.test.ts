@@ -36,12 +36,13 @@ const observations: RoomObservation[] = [
 function stateAt(): RoomState {
   const layout = layOutRoom(drawnShape(plan), observations, 910);
   const nuisance = Float64Array.from({ length: layout.unknownCount }, (_, i) => {
-    const isLean = layout.walls.some((wall) => wall.leanColumn === i);
+    const isLean = layout.walls.some((w) => w.leanColumn === i || w.twistColumn === i);
     return (isLean ? 0.003 : 1) * random.between(-1, 1);
   });
   return {
     layout,
     zRefMm: 910,
+    usualBowMm: 3,
     x: Float64Array.from(plan.corners, ({ x }) => x),
     y: Float64Array.from(plan.corners, ({ y }) => y),
     nuisance,
@@ -72,7 +73,9 @@ describe('observation equations', () => {
       const equation = equationOf(state, observation);
       expect(equation).not.toBeNull();
       for (let column = 0; column < state.layout.unknownCount; column++) {
-        const isLean = state.layout.walls.some((wall) => wall.leanColumn === column);
+        const isLean = state.layout.walls.some(
+          (wall) => wall.leanColumn === column || wall.twistColumn === column,
+        );
         const step = isLean ? 1e-5 : 1e-2;
         const above = equationOf(moved(state, column, step), observation)?.predicted ?? Number.NaN;
         const below = equationOf(moved(state, column, -step), observation)?.predicted ?? Number.NaN;
@@ -95,6 +98,7 @@ describe('observation equations', () => {
     };
     layout.walls.forEach((wall, i) => {
       state.nuisance[wall.leanColumn] = plan.leans[i] ?? 0;
+      state.nuisance[wall.twistColumn] = plan.twists[i] ?? 0;
     });
     for (const observation of observations) {
       if (observation.kind !== 'length' || observation.yMm > 0) continue;
