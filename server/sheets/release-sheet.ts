@@ -13,6 +13,7 @@ import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { translateRefusals } from '@/server/base/database-refusal';
 import { Refusal, type RefusalDetail } from '@/server/base/problem-response';
 import { moveStage } from '@/server/jobs/move-stage';
+import { lockRoom } from '@/server/walls/lock-room';
 import { type BookOnFile, readWallBook } from '@/server/walls/read-wall-book';
 import { runsMark } from '@/server/walls/runs-mark';
 import { readNewestFrozen } from './read-releases';
@@ -27,6 +28,7 @@ export async function releaseSheet(
   mustBeAllowed(ctx, 'sheets:release');
   return translateRefusals({ releases_revision: releasedMeanwhile }, () =>
     ctx.db.transaction(async (tx) => {
+      await lockRoom(tx, ctx, input.roomId);
       const book = await readWallBook(tx, ctx, input.roomId);
       const rules = ctx.shop.rules.fit;
       const { wallBook, runs } = book;

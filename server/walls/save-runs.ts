@@ -5,6 +5,7 @@ import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { translateRefusals } from '@/server/base/database-refusal';
 import { Refusal, type RefusalDetail } from '@/server/base/problem-response';
+import { lockRoom } from './lock-room';
 import { readWallBook } from './read-wall-book';
 import { runsMark } from './runs-mark';
 import { runsProblem } from './runs-problem';
@@ -17,6 +18,7 @@ export async function saveRuns(
   mustBeAllowed(ctx, 'runs:change');
   return translateRefusals({ runs_pkey: idTaken, units_pkey: idTaken }, () =>
     ctx.db.transaction(async (tx) => {
+      await lockRoom(tx, ctx, input.roomId);
       const before = await readWallBook(tx, ctx, input.roomId);
       const problem = runsProblem(before.wallBook.room, input.runs);
       if (problem) throw new Refusal(problem);

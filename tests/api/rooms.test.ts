@@ -3,6 +3,7 @@ import { beforeAll, describe, expect, it } from 'vitest';
 import { GET as bookRoute } from '@/app/api/rooms/[roomId]/route';
 import { POST as runsRoute } from '@/app/api/rooms/[roomId]/runs/route';
 import { POST as submitRoute } from '@/app/api/rooms/[roomId]/submit/route';
+import { GET as blankRoute } from '@/app/api/rooms/blank/route';
 import { GET as listRoute, POST as saveRoute } from '@/app/api/rooms/route';
 import type { RoomRow } from '@/lib/contracts/jobs';
 import type { WallBookView } from '@/lib/contracts/rooms';
@@ -46,6 +47,44 @@ describe('rooms', () => {
     expect(view.runs).toEqual(kitchen.runs);
     expect(view).toMatchObject({ jobId: kitchen.jobId, submittedAt: null });
     expect(view.rules).toEqual(shop.shop.rules.fit);
+  });
+
+  it('says who read what, so that two phones in one room can be told apart', async () => {
+    const own = await putDrawnKitchen(shop);
+    const [first, second] = [lengthOn(own, 0), lengthOn(own, 0, { valueMm: 3603 })];
+    const by = (role: Role) => contextOf(shop, role, new Date());
+    await recordReadings(await by('measurer'), { roomId: own.roomId, readings: [first] });
+    await recordReadings(await by('crew'), { roomId: own.roomId, readings: [second] });
+    const view = (await book(own.roomId)).body as WallBookView;
+    expect(view.readers).toEqual([
+      {
+        personId: shop.people.measurer.personId,
+        name: 'Measurer Test',
+        readingIds: [first.id],
+      },
+      { personId: shop.people.crew.personId, name: 'Crew Test', readingIds: [second.id] },
+    ]);
+  });
+
+  it('gives an empty book for a room that a phone may begin later, and writes nothing', async () => {
+    const { jobId } = await startTestJob(shop);
+    const roomId = randomUUID();
+    const blank = (cookie = cookies.measurer) =>
+      callRoute(blankRoute, {
+        method: 'GET',
+        url: `/api/rooms/blank?jobId=${jobId}&roomId=${roomId}`,
+        cookie,
+      });
+    const { status, body } = await blank();
+    expect(status).toBe(200);
+    expect(body as WallBookView).toMatchObject({
+      jobId,
+      wallBook: { room: { id: roomId, chains: [] }, readings: [] },
+      readers: [],
+    });
+    expect((await book(roomId)).status).toBe(404);
+    expect((await blank(cookies.bench)).status).toBe(403);
+    expect((await blank(otherCookie)).status).toBe(404);
   });
 
   it('lists the rooms of a job with what is read and laid out', async () => {
@@ -186,6 +225,22 @@ describe('rooms', () => {
       expect(late.status).toBe(409);
       expect(late.body).toMatchObject({ code: 'runs-changed-meanwhile' });
       expect(((await book(roomId)).body as WallBookView).runs).toEqual(runs.slice(0, 1));
+    });
+
+    it('keeps one whole set of runs when two people save at the same moment', async () => {
+      const { roomId, runs } = await putKitchen(shop);
+      const other = runs.map((run) => ({
+        ...run,
+        id: randomUUID(),
+        units: run.units.map((unit) => ({ ...unit, id: randomUUID() })),
+      }));
+      const answers = await Promise.all([
+        saveRuns(roomId, { runs }),
+        saveRuns(roomId, { runs: other }),
+      ]);
+      expect(answers.map(({ status }) => status)).toEqual([200, 200]);
+      const kept = ((await book(roomId)).body as WallBookView).runs;
+      expect([runs, other]).toContainEqual(kept);
     });
 
     it('says which field does not hold together and changes nothing', async () => {
