@@ -3,6 +3,7 @@ import { JobFacts } from '@/components/jobs/job-facts';
 import { JobStory } from '@/components/jobs/job-story';
 import { RoomList } from '@/components/jobs/room-list';
 import { SiteForm } from '@/components/jobs/site-form';
+import { JobPhotos } from '@/components/photos/job-photos';
 import { LinkButton } from '@/components/ui/link-button';
 import { TitleBlock } from '@/components/ui/title-block';
 import { paths } from '@/lib/paths';
@@ -10,6 +11,7 @@ import { may } from '@/lib/permissions';
 import { stageWords } from '@/lib/schedule/stages';
 import { found } from '@/server/base/found';
 import { pageContext } from '@/server/base/page-context';
+import { listPhotos } from '@/server/files/list-photos';
 import { getJob } from '@/server/jobs/get-job';
 import { listRooms } from '@/server/walls/list-rooms';
 
@@ -20,6 +22,7 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
   const { jobId } = await params;
   const job = await found(getJob(ctx, { jobId }));
   const rooms = await listRooms(ctx, { jobId });
+  const photos = await listPhotos(ctx, { jobId });
   return (
     <>
       <TitleBlock
@@ -45,6 +48,12 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
           <TitleBlock title="Rooms" meta={`${rooms.length} of ${job.roomCount}`} />
           <RoomList jobId={job.id} rooms={rooms} />
         </section>
+        {photos.length > 0 ? (
+          <section>
+            <TitleBlock title="Photos" meta={photos.length} />
+            <JobPhotos photos={photos} rooms={rooms} />
+          </section>
+        ) : null}
         {may(ctx.actor.role, 'jobs:change') ? (
           <section>
             <TitleBlock title="State of the site" />
