@@ -13,6 +13,8 @@ export type StudGrid = {
 
 /** A regular row is believed from this many studs on. */
 const LEAST_ON_GRID = 3;
+/** Closer than this nobody frames a wall. */
+const LEAST_SPACING_MM = 100;
 /** A stud stands on a grid within two of its standard uncertainties (GUM, k = 2). */
 const WITHIN_U = 2;
 
@@ -26,7 +28,7 @@ const WITHIN_U = 2;
  */
 export function studGrid(studs: FoundStud[], spacingsMm: readonly number[]): StudGrid | null {
   const fits = spacingsMm
-    .filter((spacing) => spacing > 0)
+    .filter((spacing) => spacing >= LEAST_SPACING_MM)
     .flatMap((spacing) => gridOf(studs, spacing) ?? [])
     .filter(({ onGrid }) => onGrid.length >= LEAST_ON_GRID && 2 * onGrid.length > studs.length);
   const most = fits.reduce((best, { onGrid }) => Math.max(best, onGrid.length), 0);

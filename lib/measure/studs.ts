@@ -1,6 +1,6 @@
 /** Studs behind the hung units: found ones, and those a regular spacing puts between them. */
 import { type Outcome, problem, refused, warning } from '@/lib/problem';
-import { type StudGrid, studGrid } from './stud-spacing';
+import { type FoundStud, type StudGrid, studGrid } from './stud-spacing';
 
 export type StudRead = {
   id: string;
@@ -70,7 +70,7 @@ export function studCatch(input: StudInput): Outcome<StudCatch> {
   const grid = studGrid(found, input.spacingsMm);
   const studs: Stud[] = [
     ...found.map(({ id, centreMm, u }) => ({ xMm: centreMm, u, predicted: false, from: [id] })),
-    ...(grid ? predicted(grid, input) : []),
+    ...(grid ? predicted(grid, found, input) : []),
   ].sort((one, other) => one.xMm - other.xMm);
   const units = input.units.map((unit) => catchOf(unit, studs, input));
   return {
@@ -87,7 +87,8 @@ function centreOf(xMm: number, at: StudRead['at'], studWidthMm: number): number 
   return xMm;
 }
 
-function predicted(grid: StudGrid, input: StudInput): Stud[] {
+/** Where the row goes on; never beside a stud that was found there, even one that stands off the row. */
+function predicted(grid: StudGrid, found: FoundStud[], input: StudInput): Stud[] {
   const { spacingMm, phaseMm, onGrid } = grid;
   const stretch = onGrid.flatMap((stud) => freeStretch(stud.centreMm, input) ?? []);
   const first = Math.ceil(-phaseMm / spacingMm);
@@ -96,7 +97,7 @@ function predicted(grid: StudGrid, input: StudInput): Stud[] {
   for (let k = first; k <= last; k++) {
     const xMm = phaseMm + k * spacingMm;
     const isFree = stretch.some(({ x0Mm, x1Mm }) => xMm > x0Mm && xMm < x1Mm);
-    const isFound = onGrid.some((stud) => Math.abs(stud.centreMm - xMm) < spacingMm / 4);
+    const isFound = found.some((stud) => Math.abs(stud.centreMm - xMm) < spacingMm / 4);
     if (!isFree || isFound) continue;
     // One stud may stand as far off the row as those found do; the row's own place is surer than that.
     const u = Math.hypot(grid.uPhase, Math.max(...onGrid.map((stud) => stud.u)));

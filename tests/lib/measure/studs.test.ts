@@ -69,6 +69,12 @@ describe('studs behind hung units', () => {
     expect(value?.studs.map(({ xMm }) => xMm)).toEqual([119, 519]);
   });
 
+  it('predicts no second stud beside one that stands off the row', () => {
+    const { value } = studCatch(input({ studs: at([102, 508, 914, 1_321, 1_750]) }));
+    expect(value?.spacingMm).toBe(406.4);
+    expect(value?.studs.filter(({ xMm }) => xMm > 1_600 && xMm < 1_900)).toHaveLength(1);
+  });
+
   it('finds the spacing of most made-up walls and never a wrong one', () => {
     let found = 0;
     for (let seed = 0; seed < 200; seed++) {
