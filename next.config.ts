@@ -51,7 +51,6 @@ const nextConfig: NextConfig = {
     'mailparser',
     'moment',
     'moment-timezone',
-    'date-holidays',
     'pdfkit',
   ],
   async headers() {
