@@ -6,17 +6,11 @@ import { chiSquareLimit } from './chi-square';
 import { errorEllipse } from './error-ellipse';
 import { type Figure, figure } from './figure';
 import { refuseObservations } from './refuse-observations';
-import {
-  degrees,
-  type Equation,
-  headingOf,
-  lengthOf,
-  planAngle,
-  planDistance,
-} from './room-equations';
+import { planAngle, planDistance } from './room-equations';
 import { FIXED, layOutRoom } from './room-layout';
 import type { AdjustOptions, RoomObservation, RoomShape } from './room-observations';
 import { startingPoints } from './room-start';
+import { degrees, type Equation, headingOf, lengthOf } from './room-state';
 import { project, spread } from './row-products';
 import { type Solution, solveRoom, weightedSquares } from './solve-room';
 

@@ -1,15 +1,10 @@
 /** What a run needs of the adjusted room: its wall's length, both corners, and how they hang together. */
 import type { AdjustedRoom } from '@/lib/measure/adjusted-room';
+import { leanAtEnd } from '@/lib/measure/corner-shift';
 import { type Figure, figure } from '@/lib/measure/figure';
-import {
-  degrees,
-  type Equation,
-  leanAtEnd,
-  planAngle,
-  planDistance,
-  type RoomState,
-} from '@/lib/measure/room-equations';
+import { planAngle, planDistance } from '@/lib/measure/room-equations';
 import { FIXED, type LaidOutWall } from '@/lib/measure/room-layout';
+import { degrees, type Equation, type RoomState } from '@/lib/measure/room-state';
 import { project, spread } from '@/lib/measure/row-products';
 import { PARAMETER, PARAMETER_COUNT } from '@/lib/measure/run-frame';
 import { USUAL_LEAN, USUAL_TWIST } from '@/lib/measure/solve-room';

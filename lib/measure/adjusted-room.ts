@@ -1,7 +1,7 @@
 /** What the room adjustment gives, and what the blunder search and `settle` work on. */
 import type { Figure } from './figure';
-import type { RoomState } from './room-equations';
 import type { AdjustOptions, CornerEnd, RoomObservation, RoomShape } from './room-observations';
+import type { RoomState } from './room-state';
 
 export type AdjustedRoom = {
   zRefMm: number;

@@ -2,8 +2,8 @@
 import type { ObservationCheck } from './adjusted-room';
 import { chiSquareLimit } from './chi-square';
 import { reliabilityOf, tiesOf, UNCHECKED } from './reliability';
-import { degrees } from './room-equations';
 import type { RoomObservation } from './room-observations';
+import { degrees } from './room-state';
 import type { Solution } from './solve-room';
 
 /** Non-centrality √17.07 for a test of 1 in 1000 with a power of 80 % (Baarda 1968, recalled). */

@@ -3,7 +3,7 @@ import type { AdjustedRoom } from './adjusted-room';
 import { checkObservations, EQUAL_FIT } from './check-observations';
 import { type KnownSlip, knownSlips } from './known-slips';
 import { type LeftOut, leaveOut } from './leave-out';
-import type { RoomState } from './room-equations';
+import type { RoomState } from './room-state';
 import { linearSolution } from './solve-room';
 
 /** Readings whose w² is this share of the largest are left out in turn and the room adjusted again. */

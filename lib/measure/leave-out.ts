@@ -1,7 +1,8 @@
 /** The room adjusted again without one reading: what the others say that reading should have been. */
 import type { AdjustedRoom } from './adjusted-room';
-import { degrees, equationOf, observedValue, type RoomState } from './room-equations';
+import { equationOf, observedValue } from './room-equations';
 import { startingPoints } from './room-start';
+import { degrees, type RoomState } from './room-state';
 import { varianceOf } from './row-products';
 import { solveRoom, weightedSquares } from './solve-room';
 

@@ -1,28 +1,20 @@
 /** The observation equations of a room: what each reading should be, and how it moves with the unknowns. */
-import { FIXED, type LaidOutWall, pointAt, type RoomLayout } from './room-layout';
+import { cornerShift, NEARLY_STRAIGHT_SINE } from './corner-shift';
+import { FIXED, type LaidOutWall, pointAt } from './room-layout';
 import type { CornerEnd, RoomObservation } from './room-observations';
-
-/** Corners within this of straight do not move along their walls when these lean. */
-const NEARLY_STRAIGHT_SINE = 0.17;
-
-export type RoomState = {
-  layout: RoomLayout;
-  zRefMm: number;
-  usualBowMm: number;
-  x: Float64Array;
-  y: Float64Array;
-  /** Leans and twists (mm/mm), bows (mm) and tool errors (in units of their own uncertainty), by column. */
-  nuisance: Float64Array;
-};
-
-/** One linearised equation; `predicted` in mm, radians or mm/mm. */
-export type Equation = {
-  columns: number[];
-  partials: number[];
-  predicted: number;
-  /** What the equation leaves out, as a variance: the bow of a wall is another at another height. */
-  leftOut?: number;
-};
+import {
+  add,
+  addHeading,
+  addLength,
+  addNuisance,
+  addPoint,
+  type Equation,
+  headingOf,
+  lengthOf,
+  type RoomState,
+  radians,
+  wallOf,
+} from './room-state';
 
 /** A bow changes by this share of the usual one in each metre of height; our judgement. */
 const BOW_GROWTH_PER_MM = 0.6 / 1_000;
@@ -112,93 +104,6 @@ export function observedValue(observation: RoomObservation): { value: number; si
   }
 }
 
-export const radians = (degrees: number) => (degrees * Math.PI) / 180;
-export const degrees = (radiansValue: number) => (radiansValue * 180) / Math.PI;
-
-export function wallOf(layout: RoomLayout, wallId: string): LaidOutWall | undefined {
-  return layout.walls[layout.wallById.get(wallId) ?? -1];
-}
-
-export function headingOf(state: RoomState, wall: LaidOutWall): number {
-  return Math.atan2(
-    (state.y[wall.right] ?? 0) - (state.y[wall.left] ?? 0),
-    (state.x[wall.right] ?? 0) - (state.x[wall.left] ?? 0),
-  );
-}
-
-export function lengthOf(state: RoomState, wall: LaidOutWall): number {
-  return Math.hypot(
-    (state.x[wall.right] ?? 0) - (state.x[wall.left] ?? 0),
-    (state.y[wall.right] ?? 0) - (state.y[wall.left] ?? 0),
-  );
-}
-
-function add(equation: Equation, column: number, partial: number): void {
-  if (column === FIXED) return;
-  const known = equation.columns.indexOf(column);
-  if (known < 0) {
-    equation.columns.push(column);
-    equation.partials.push(partial);
-  } else equation.partials[known] = (equation.partials[known] ?? 0) + partial;
-}
-
-function addPoint(equation: Equation, state: RoomState, point: number, byX: number, byY: number) {
-  const place = state.layout.points[point];
-  if (!place) return;
-  add(equation, place.xColumn, byX);
-  add(equation, place.yColumn, byY);
-}
-
-type Shift = { column: number; x: number; y: number };
-
-/**
- * How a corner moves in plan for each unit of lean and twist of the walls that meet there, per mm of height:
- * a wall leans by λ + t/2 at its right end and by λ − t/2 at its left.
- */
-function cornerShift(state: RoomState, point: number): Shift[] {
-  const { walls } = state.layout;
-  const place = state.layout.points[point];
-  const before = walls[place?.wallBefore ?? -1];
-  const after = walls[place?.wallAfter ?? -1];
-  if (!before || !after) {
-    const only = before ?? after;
-    if (!only) return [];
-    const heading = headingOf(state, only);
-    return leaning(only, before ? 0.5 : -0.5, -Math.sin(heading), Math.cos(heading));
-  }
-  const headingBefore = headingOf(state, before);
-  const headingAfter = headingOf(state, after);
-  const sine = Math.sin(headingAfter - headingBefore);
-  if (Math.abs(sine) < NEARLY_STRAIGHT_SINE) {
-    const [x, y] = [-Math.sin(headingAfter) / 2, Math.cos(headingAfter) / 2];
-    return [...leaning(before, 0.5, x, y), ...leaning(after, -0.5, x, y)];
-  }
-  return [
-    ...leaning(before, 0.5, Math.cos(headingAfter) / sine, Math.sin(headingAfter) / sine),
-    ...leaning(after, -0.5, -Math.cos(headingBefore) / sine, -Math.sin(headingBefore) / sine),
-  ];
-}
-
-function leaning(wall: LaidOutWall, twistShare: number, x: number, y: number): Shift[] {
-  return [
-    { column: wall.leanColumn, x, y },
-    { column: wall.twistColumn, x: twistShare * x, y: twistShare * y },
-  ];
-}
-
-/** The lean of a wall at one of its ends, λ ± t/2, mm/mm. */
-export function leanAtEnd(state: RoomState, wall: LaidOutWall, end: 'left' | 'right'): Equation {
-  const equation: Equation = { columns: [], partials: [], predicted: 0 };
-  addNuisance(state, equation, wall.leanColumn, 1);
-  addNuisance(state, equation, wall.twistColumn, end === 'right' ? 0.5 : -0.5);
-  return equation;
-}
-
-function addNuisance(state: RoomState, equation: Equation, column: number, partial: number): void {
-  equation.predicted += partial * (state.nuisance[column] ?? 0);
-  add(equation, column, partial);
-}
-
 /** A twisted wall's line turns in plan by t/L for each mm of height, and the corner with it. */
 function addTwist(
   state: RoomState,
@@ -213,32 +118,28 @@ function addTwist(
 }
 
 function distance(state: RoomState, from: number, to: number, aboveMm: number): Equation {
-  const shiftFrom = aboveMm === 0 ? [] : cornerShift(state, from);
-  const shiftTo = aboveMm === 0 ? [] : cornerShift(state, to);
-  let dx = (state.x[to] ?? 0) - (state.x[from] ?? 0);
-  let dy = (state.y[to] ?? 0) - (state.y[from] ?? 0);
-  for (const [shifts, sign] of [
-    [shiftTo, 1],
-    [shiftFrom, -1],
-  ] as const) {
-    for (const shift of shifts) {
-      const lean = (state.nuisance[shift.column] ?? 0) * aboveMm * sign;
-      dx += shift.x * lean;
-      dy += shift.y * lean;
-    }
-  }
+  const shiftFrom = cornerShift(state, from, aboveMm);
+  const shiftTo = cornerShift(state, to, aboveMm);
+  const dx = (state.x[to] ?? 0) + shiftTo.x - (state.x[from] ?? 0) - shiftFrom.x;
+  const dy = (state.y[to] ?? 0) + shiftTo.y - (state.y[from] ?? 0) - shiftFrom.y;
   const length = Math.hypot(dx, dy);
   const [ux, uy] = length === 0 ? [1, 0] : [dx / length, dy / length];
   const equation: Equation = { columns: [], partials: [], predicted: length };
   addPoint(equation, state, to, ux, uy);
   addPoint(equation, state, from, -ux, -uy);
-  for (const shift of shiftTo) add(equation, shift.column, aboveMm * (ux * shift.x + uy * shift.y));
-  for (const shift of shiftFrom)
-    add(equation, shift.column, -aboveMm * (ux * shift.x + uy * shift.y));
+  for (const [shift, sign] of [
+    [shiftTo, 1],
+    [shiftFrom, -1],
+  ] as const) {
+    for (const { column, x, y } of shift.by) add(equation, column, sign * (ux * x + uy * y));
+    for (const { wall, x, y } of shift.turning) {
+      addHeading(equation, state, wall, sign * (ux * x + uy * y));
+    }
+  }
   return equation;
 }
 
-/** Adds `scale` times the interior angle between two walls that meet, to an equation. */
+/** Adds `scale` times the interior angle between two walls that meet, to the partials. */
 function addAngle(
   equation: Equation,
   state: RoomState,
@@ -246,17 +147,8 @@ function addAngle(
   after: LaidOutWall,
   scale: number,
 ): void {
-  for (const [wall, sign] of [
-    [before, scale],
-    [after, -scale],
-  ] as const) {
-    const length = lengthOf(state, wall) || 1;
-    const heading = headingOf(state, wall);
-    const byX = (-Math.sin(heading) / length) * sign;
-    const byY = (Math.cos(heading) / length) * sign;
-    addPoint(equation, state, wall.right, byX, byY);
-    addPoint(equation, state, wall.left, -byX, -byY);
-  }
+  addHeading(equation, state, before, scale);
+  addHeading(equation, state, after, -scale);
 }
 
 function interiorAngle(state: RoomState, before: LaidOutWall, after: LaidOutWall): number {
@@ -289,8 +181,12 @@ function addBow(
   aboveMm: number,
 ): void {
   const length = lengthOf(state, wall) || 1;
-  const perBow = -(4 / length) * Math.max(0, 1 - armMm / length);
+  const past = Math.max(0, 1 - armMm / length);
+  const perBow = (-4 / length) * past;
   addNuisance(state, equation, wall.bowColumn, perBow);
+  const bow = state.nuisance[wall.bowColumn] ?? 0;
+  if (past > 0)
+    addLength(equation, state, wall, (4 * bow * (1 - (2 * armMm) / length)) / length ** 2);
   const growth = (BOW_GROWTH_PER_MM * aboveMm * state.usualBowMm) / Math.sqrt(3);
   equation.leftOut = (equation.leftOut ?? 0) + (perBow * growth) ** 2;
 }

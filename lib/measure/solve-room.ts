@@ -1,9 +1,10 @@
 /** Gauss–Newton on the observation equations of a room, with the priors that keep weak unknowns honest. */
 import type { SparseRow } from './adjusted-room';
 import { choleskyOf, invertCholesky, solveCholesky } from './cholesky';
-import { type Equation, equationOf, observedValue, type RoomState } from './room-equations';
+import { equationOf, observedValue } from './room-equations';
 import { FIXED, type RoomLayout } from './room-layout';
 import type { AdjustOptions, RoomObservation } from './room-observations';
+import type { Equation, RoomState } from './room-state';
 import { project } from './row-products';
 
 /** Standard uncertainty of an unread wall's lean: 6 mm/m, a wall at the edge of what warranties allow. */
