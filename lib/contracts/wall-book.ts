@@ -118,6 +118,9 @@ export const diagonalReading = z.object({
   kind: z.literal('diagonal'),
   fromCornerWallId: id,
   toCornerWallId: id,
+  /** Left out: the wall's left corner. 'right' names the far end of an open chain, where no wall begins. */
+  fromEnd: z.enum(['left', 'right']).optional(),
+  toEnd: z.enum(['left', 'right']).optional(),
   zMm: heightMm,
   valueMm: lengthMm,
 });

@@ -166,8 +166,8 @@ function diagonalObservations(book: RoomBook): RoomObservation[] {
     const repeat = lengthRepeat(book, reading, reading.valueMm, 2);
     return {
       kind: 'diagonal',
-      from: { wallId: reading.fromCornerWallId, end: 'left' },
-      to: { wallId: reading.toCornerWallId, end: 'left' },
+      from: { wallId: reading.fromCornerWallId, end: reading.fromEnd ?? 'left' },
+      to: { wallId: reading.toCornerWallId, end: reading.toEnd ?? 'left' },
       zMm: reading.zMm,
       valueMm: reading.valueMm,
       uMm: repeat.uOwn,

@@ -7,10 +7,12 @@ export type WallLine = { left: number; right: number; closed: boolean };
 const FREE_OF_CORNER_MM = 20;
 
 /**
- * True when the straight line between two points of the plan meets no wall and no other corner, and runs
- * inside the room where the walls close it.
+ * True when the straight line between two points of the plan meets no wall and no other corner, leaves both
+ * into the room, and runs inside the room where the walls close it.
  *
- * Edge: along a wall is not across the room; a line that merely touches a corner is not free.
+ * Frame: x east, y south; the room lies to the right of each wall's direction. Edge: along a wall is not
+ * across the room; a line that merely touches a corner is not free; round an outside corner of an open
+ * chain there is no line through what stands behind it.
  */
 export function seesAcross(plan: Plan, walls: WallLine[], from: number, to: number): boolean {
   if (from === to) return false;
@@ -18,6 +20,8 @@ export function seesAcross(plan: Plan, walls: WallLine[], from: number, to: numb
   const [tx, ty] = [plan.x[to] ?? 0, plan.y[to] ?? 0];
   const length = Math.hypot(tx - fx, ty - fy);
   if (length === 0) return false;
+  if (!leavesIntoRoom(plan, walls, from, tx - fx, ty - fy)) return false;
+  if (!leavesIntoRoom(plan, walls, to, fx - tx, fy - ty)) return false;
   for (const wall of walls) {
     const ends = [wall.left, wall.right];
     if (ends.includes(from) && ends.includes(to)) return false;
@@ -33,6 +37,30 @@ export function seesAcross(plan: Plan, walls: WallLine[], from: number, to: numb
     }
   }
   return isInside(plan, walls, (fx + tx) / 2, (fy + ty) / 2);
+}
+
+/** A direction from a corner lies on the room's side of its walls: of both, or of either past 180°. */
+function leavesIntoRoom(
+  plan: Plan,
+  walls: WallLine[],
+  at: number,
+  dx: number,
+  dy: number,
+): boolean {
+  const direction = (wall: WallLine | undefined) =>
+    wall && {
+      x: (plan.x[wall.right] ?? 0) - (plan.x[wall.left] ?? 0),
+      y: (plan.y[wall.right] ?? 0) - (plan.y[wall.left] ?? 0),
+    };
+  const before = direction(walls.find((wall) => wall.right === at));
+  const after = direction(walls.find((wall) => wall.left === at));
+  const isRight = (wall: { x: number; y: number }) => wall.x * dy - wall.y * dx > 0;
+  if (!before || !after) {
+    const only = before ?? after;
+    return only === undefined || isRight(only);
+  }
+  const isOutside = before.x * after.y - before.y * after.x < 0;
+  return isOutside ? isRight(before) || isRight(after) : isRight(before) && isRight(after);
 }
 
 function crosses(plan: Plan, wall: WallLine, [fx, fy, tx, ty]: [number, number, number, number]) {

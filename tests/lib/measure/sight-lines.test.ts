@@ -26,10 +26,20 @@ describe('which corners see each other', () => {
     for (let i = 0; i < 6; i++) for (let j = 0; j < 6; j++) expect(sees(i, j)).toBe(sees(j, i));
   });
 
-  it('lets an open chain be seen across from outside', () => {
-    const open = { x: [0, 3_000, 3_000], y: [0, 0, 2_000] };
+  it('sees across an open chain, but not through what stands behind an outside corner', () => {
     const walls = [0, 1].map((i) => ({ left: i, right: i + 1, closed: false }));
-    expect(seesAcross(open, walls, 0, 2)).toBe(true);
+    const inside = { x: [0, 3_000, 3_000], y: [0, 0, 2_000] };
+    expect(seesAcross(inside, walls, 0, 2)).toBe(true);
+    const outside = { x: [0, 3_000, 3_000], y: [0, 0, -2_000] };
+    expect(seesAcross(outside, walls, 0, 2)).toBe(false);
+  });
+
+  it('sees from wall to wall of a galley', () => {
+    const galley = { x: [0, 3_000, 3_000, 0], y: [0, 0, 2_400, 2_400] };
+    const walls = [0, 2].map((i) => ({ left: i, right: i + 1, closed: false }));
+    expect(seesAcross(galley, walls, 0, 2)).toBe(true);
+    expect(seesAcross(galley, walls, 1, 2)).toBe(true);
+    expect(seesAcross(galley, walls, 0, 1)).toBe(false);
   });
 });
 
