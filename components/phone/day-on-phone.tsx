@@ -20,7 +20,7 @@ export function DayOnPhone() {
   return (
     <section className="px-3.5 py-4">
       <TitleBlock
-        title={isReady ? 'Ready for no signal' : 'Being made ready for no signal'}
+        title={isReady ? 'Ready for no signal' : 'Kept here so far'}
         meta={asOf ? `as of ${timeWords(asOf)}` : undefined}
       />
       <ul className="py-1">

@@ -6,10 +6,11 @@ import { EmptyState } from '@/components/ui/empty-state';
 import { LinkButton } from '@/components/ui/link-button';
 import { Skeleton, SkeletonScreen } from '@/components/ui/skeleton';
 import { RoomScreen } from '@/components/walls/room-screen';
+import type { TodayView } from '@/lib/contracts/visits';
 import { paths } from '@/lib/paths';
 import type { Holder } from '@/lib/sync/holder';
 import { type PhonePlace, phonePlaceOf } from '@/lib/sync/phone-pages';
-import { readDay, readDays, readHolder } from './kept-store';
+import { readDay, readDays, readFetched, readHolder } from './kept-store';
 import { PhonePerson } from './phone-person';
 import { readBook } from './read-book';
 import { readUnsent } from './read-unsent';
@@ -66,8 +67,7 @@ function KeptPlace({ place, holder }: { place: PhonePlace; holder: Holder }) {
 
 function KeptDay({ date, holder }: { date: string | null; holder: Holder }) {
   const [today] = useState(() => localDateOf(new Date()));
-  const wanted = date ?? today;
-  const live = useLive(`day:${wanted}`, () => readDay(wanted));
+  const live = useLive(`day:${date ?? today}`, () => readDayOf(date, today));
   if (live.state === 'reading') return <Opening />;
   if (live.state === 'failed' || !live.value) return <NotKept what="This day" />;
   return <TodayScreen view={live.value} holder={holder} />;
@@ -90,7 +90,14 @@ function KeptBook(asked: { roomId: string; jobId: string | null; holder: Holder 
   return <RoomScreen view={once.value} isStale />;
 }
 
-/** The phone's own day: the visits of the day are in the shop's zone, and so is its measurer. */
+/** The day that was asked for; else today's, or the one that was fetched last: its heading says which. */
+async function readDayOf(date: string | null, today: string): Promise<TodayView | null> {
+  if (date !== null) return readDay(date);
+  const fetched = await readFetched();
+  return (await readDay(today)) ?? (fetched ? readDay(fetched.date) : null);
+}
+
+/** The phone's own day: the shop's, unless the phone is set to another part of the world. */
 function localDateOf(now: Date): string {
   const two = (part: number) => String(part).padStart(2, '0');
   return `${now.getFullYear()}-${two(now.getMonth() + 1)}-${two(now.getDate())}`;

@@ -7,11 +7,14 @@ let typing = 0;
 /** Until the returned function is called, something is half typed here. */
 export function holdTyping(): () => void {
   typing += 1;
-  const letGo = holdForOtherTabs();
+  const { letGo, gone } = holdForOtherTabs();
   return () => {
     typing -= 1;
     letGo();
-    if (typing === 0) for (const listener of listeners) listener();
+    // Told once the other tabs can see it too.
+    void gone.then(() => {
+      if (typing === 0) for (const listener of listeners) listener();
+    });
   };
 }
 
@@ -36,13 +39,13 @@ export async function ifAtRest(work: () => void): Promise<boolean> {
   });
 }
 
-function holdForOtherTabs(): () => void {
-  if (!navigator.locks) return () => {};
+function holdForOtherTabs(): { letGo: () => void; gone: Promise<void> } {
+  if (!navigator.locks) return { letGo: () => {}, gone: Promise.resolve() };
   let letGo = () => {};
   const held = new Promise<void>((resolve) => {
     letGo = resolve;
   });
   // A page that is thrown away lets go of its locks by itself.
-  navigator.locks.request(lockName, { mode: 'shared' }, () => held).catch(() => {});
-  return letGo;
+  const gone = navigator.locks.request(lockName, { mode: 'shared' }, () => held).catch(() => {});
+  return { letGo, gone };
 }

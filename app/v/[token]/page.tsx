@@ -5,7 +5,8 @@ import { VisitPage } from '@/components/customer/visit-page';
 import { callerAddress } from '@/server/base/caller-address';
 import { getCustomerVisit } from '@/server/visits/get-customer-visit';
 
-export const metadata: Metadata = { title: 'Your visit', robots: { index: false } };
+/** No manifest: a customer has nothing to put on a home screen. */
+export const metadata: Metadata = { title: 'Your visit', robots: { index: false }, manifest: null };
 
 type Props = { params: Promise<{ token: string }> };
 
