@@ -8,6 +8,7 @@ import { CheckField } from '@/components/ui/check-field';
 import { FormError } from '@/components/ui/form-error';
 import { SelectField } from '@/components/ui/select-field';
 import { TextField } from '@/components/ui/text-field';
+import { TitleBlock } from '@/components/ui/title-block';
 import type { PersonView } from '@/lib/contracts/people';
 import type { CreateCrewInput } from '@/lib/contracts/visits';
 import { apiPaths } from '@/lib/paths';
@@ -53,7 +54,8 @@ export function CrewForm({ people }: { people: PersonView[] }) {
   }
 
   return (
-    <form onSubmit={submit} className="flex max-w-form flex-col gap-3 py-3">
+    <form onSubmit={submit} className="mt-6 flex max-w-form flex-col gap-3">
+      <TitleBlock title="One more crew" level={3} />
       <TextField
         label="Name"
         name="name"

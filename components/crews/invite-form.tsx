@@ -7,6 +7,7 @@ import { Button } from '@/components/ui/button';
 import { FormError } from '@/components/ui/form-error';
 import { SelectField } from '@/components/ui/select-field';
 import { TextField } from '@/components/ui/text-field';
+import { TitleBlock } from '@/components/ui/title-block';
 import { apiPaths } from '@/lib/paths';
 import { roles, roleWords } from '@/lib/permissions';
 
@@ -25,7 +26,8 @@ export function InviteForm() {
     () => form.rest(),
   );
   return (
-    <form onSubmit={form.submit} className="flex max-w-form flex-col gap-3 py-3">
+    <form onSubmit={form.submit} className="mt-6 flex max-w-form flex-col gap-3">
+      <TitleBlock title="Invite somebody" level={3} />
       <TextField label="E-mail" name="email" type="email" required error={form.errorOf('email')} />
       <SelectField
         label="Role"

@@ -58,7 +58,7 @@ export function VisitDialog({ visit, start, crews, mayBook, onClose }: VisitDial
           <>
             <dt className="text-graphite">Phone</dt>
             <dd>
-              <a href={`tel:${visit.phone}`} className="underline">
+              <a href={`tel:${visit.phone.replace(/[^+\d]/g, '')}`} className="underline">
                 {visit.phone}
               </a>
             </dd>

@@ -1,8 +1,10 @@
 import { Verdict } from '@/components/ui/verdict';
 import type { JobView } from '@/lib/contracts/jobs';
+import { phoneWords } from '@/lib/messages/phone-number';
+import type { Region } from '@/lib/time/text-locale';
 
 /** Who and where, as one reads it out on the phone. */
-export function JobFacts({ job }: { job: JobView }) {
+export function JobFacts({ job, region }: { job: JobView; region: Region }) {
   const place = [job.street, job.town, job.postcode].filter(Boolean).join(', ');
   const told = [job.mayText ? 'text' : null, job.mayEmail ? 'e-mail' : null].filter(Boolean);
   return (
@@ -14,7 +16,7 @@ export function JobFacts({ job }: { job: JobView }) {
           <dt className="text-graphite">Phone</dt>
           <dd>
             <a className="underline" href={`tel:${job.phone}`}>
-              {job.phone}
+              {phoneWords(job.phone, region)}
             </a>
           </dd>
         </>

@@ -15,6 +15,7 @@ const columns: Column<JobRow>[] = [
   {
     key: 'number',
     header: 'No.',
+    isForDesk: true,
     isNumber: true,
     cell: (job) => job.number,
     sortValue: (job) => job.number,
@@ -41,6 +42,7 @@ const columns: Column<JobRow>[] = [
   {
     key: 'title',
     header: 'Job',
+    isForDesk: true,
     cell: (job) => job.title,
     text: (job) => job.title,
   },
@@ -59,6 +61,7 @@ const columns: Column<JobRow>[] = [
   {
     key: 'units',
     header: 'Units',
+    isForDesk: true,
     isNumber: true,
     cell: (job) => job.unitCount || '',
     sortValue: (job) => job.unitCount,

@@ -68,7 +68,6 @@ export function SiteForm({ job }: { job: JobView }) {
         name="notReady"
         hint="Holds the install until it is empty again."
         defaultValue={job.notReady}
-        isOptional
         error={form.errorOf('notReady')}
       />
       <TextareaField label="Way in" name="wayIn" defaultValue={job.wayIn} />

@@ -41,6 +41,7 @@ const columns: Column<MessageView>[] = [
   {
     key: 'channel',
     header: 'By',
+    isForDesk: true,
     cell: (message) => (message.channel === 'sms' ? 'text' : 'e-mail'),
     choice: (message) => (message.channel === 'sms' ? 'text' : 'e-mail'),
   },
@@ -64,6 +65,7 @@ const columns: Column<MessageView>[] = [
   {
     key: 'body',
     header: 'Text',
+    isForDesk: true,
     cell: (message) => <span className="line-clamp-2 max-w-prose text-note">{message.body}</span>,
     text: (message) => message.body,
   },

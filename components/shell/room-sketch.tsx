@@ -5,7 +5,7 @@ import { MM_PER_INCH } from '@/lib/units/fraction-parts';
 export function RoomSketch() {
   return (
     <svg
-      viewBox="0 0 490 345"
+      viewBox="0 0 508 345"
       aria-hidden="true"
       className="w-full fill-graphite text-[12px]"
       strokeWidth="1"

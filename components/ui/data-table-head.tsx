@@ -26,7 +26,7 @@ export function DataTableHead<Row>({ columns, order, onOrder }: DataTableHeadPro
               aria-sort={isSorted ? (isDescending ? 'descending' : 'ascending') : undefined}
               className={`h-8 px-2 align-middle text-note font-normal text-graphite first:pl-0 last:pr-0 ${
                 column.isNumber ? 'text-right' : 'text-left'
-              }`}
+              } ${column.isForDesk ? 'max-md:hidden' : ''}`}
             >
               {column.sortValue ? (
                 <button

@@ -19,6 +19,8 @@ export type Column<Row> = {
   choice?: (row: Row) => string;
   /** Readings stand right, so that their digits line up. */
   isNumber?: boolean;
+  /** Left out on a phone, where it would push what matters off the side. */
+  isForDesk?: boolean;
   className?: string;
 };
 
@@ -77,7 +79,7 @@ export function DataTable<Row>({
                     key={column.key}
                     className={`px-2 py-1.5 align-baseline first:pl-0 last:pr-0 ${
                       column.isNumber ? 'text-right whitespace-nowrap' : ''
-                    } ${column.className ?? ''}`}
+                    } ${column.isForDesk ? 'max-md:hidden' : ''} ${column.className ?? ''}`}
                   >
                     {column.cell(row)}
                   </td>

@@ -17,7 +17,7 @@ export function FieldFrame({ id, label, hint, error, isOptional, children }: Fie
     <div className="flex flex-col gap-1">
       <label htmlFor={id} className="font-medium">
         {label}
-        {isOptional ? <span className="font-normal text-graphite"> (if there is one)</span> : null}
+        {isOptional ? <span className="font-normal text-graphite"> (if any)</span> : null}
       </label>
       {children}
       {hint ? (

@@ -44,6 +44,7 @@ export const visitView = z.object({
   jobNumber: z.number().int(),
   jobTitle: z.string(),
   customerName: z.string(),
+  /** As people of the shop's country write it. */
   phone: z.string(),
   street: z.string(),
   town: z.string(),

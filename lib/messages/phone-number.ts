@@ -52,6 +52,17 @@ export function toE164(text: string, region: Region): Outcome<PhoneNumber> {
   };
 }
 
+/**
+ * A kept number as people of the shop's country write it; as it is kept where it cannot be read.
+ * Example: "+12025550123" in the US is "(202) 555-0123"; in the UK it is "+1 202 555 0123".
+ */
+export function phoneWords(e164: string, region: Region): string {
+  const { value } = toE164(e164, region);
+  if (!value) return e164;
+  const home = toE164(value.national, region).value?.e164;
+  return home === value.e164 ? value.national : value.international;
+}
+
 function notReadable(region: Region): Problem {
   const country = region === 'EU' ? ' Write it with its country code, +34 or +353 and so on.' : '';
   const message = `This is not a phone number.${country}`;

@@ -2,6 +2,7 @@ import { and, asc, eq, inArray, type SQL } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { crews, customers, jobs, sites, visitPieces, visits } from '@/db/schema';
 import type { VisitView } from '@/lib/contracts/visits';
+import { phoneWords } from '@/lib/messages/phone-number';
 import { formatDayShort, formatWindowShort } from '@/lib/time/format-instant';
 import type { Context } from '@/server/base/context';
 import { notFound } from '@/server/base/problem-response';
@@ -54,6 +55,7 @@ export async function readVisits(
   const locale = { language: 'en', region } as const;
   return rows.map((row) => ({
     ...row,
+    phone: phoneWords(row.phone, region),
     startsAt: row.startsAt.toISOString(),
     endsAt: row.endsAt.toISOString(),
     windowStartsAt: row.windowStartsAt.toISOString(),

@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { toE164 } from '@/lib/messages/phone-number';
+import { phoneWords, toE164 } from '@/lib/messages/phone-number';
 
 describe('toE164', () => {
   test.each([
@@ -80,5 +80,18 @@ describe('toE164', () => {
         expect(value !== null || problems.length > 0).toBe(true);
       }),
     );
+  });
+});
+
+describe('phoneWords', () => {
+  test.each([
+    ['+12025550123', 'US', '(202) 555-0123'],
+    ['+447700900123', 'UK', '07700 900123'],
+    ['+12025550123', 'UK', '+1 202 555 0123'],
+    ['+12025550123', 'EU', '+1 202 555 0123'],
+    ['', 'US', ''],
+    ['not a number', 'US', 'not a number'],
+  ] as const)('writes %s in the %s as %s', (kept, region, words) => {
+    expect(phoneWords(kept, region)).toBe(words);
   });
 });

@@ -1,10 +1,10 @@
 import type { Metadata } from 'next';
+import Link from 'next/link';
 import { JobFacts } from '@/components/jobs/job-facts';
 import { JobStory } from '@/components/jobs/job-story';
 import { RoomList } from '@/components/jobs/room-list';
 import { SiteForm } from '@/components/jobs/site-form';
 import { JobPhotos } from '@/components/photos/job-photos';
-import { LinkButton } from '@/components/ui/link-button';
 import { TitleBlock } from '@/components/ui/title-block';
 import { paths } from '@/lib/paths';
 import { may } from '@/lib/permissions';
@@ -36,13 +36,13 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
             title="Who and where"
             meta={
               may(ctx.actor.role, 'visits:book') ? (
-                <LinkButton look="plain" href={paths.diary()}>
+                <Link href={paths.diary()} className="link">
                   Book in the diary
-                </LinkButton>
+                </Link>
               ) : null
             }
           />
-          <JobFacts job={job} />
+          <JobFacts job={job} region={ctx.shop.region} />
         </section>
         <section>
           <TitleBlock title="Rooms" meta={`${rooms.length} of ${job.roomCount}`} />
