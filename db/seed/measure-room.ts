@@ -145,7 +145,7 @@ function take(ask: AskedReading, input: MeasureInput, setUps: Map<string, string
       return { ...common, ...ask, valueMm, typed: words(valueMm) };
     }
     case 'stud': {
-      const xMm = read(truth.studSpacingMm);
+      const xMm = read(truth.studSpacingMm * ask.nth);
       const { wallId } = ask;
       return { ...common, kind: ask.kind, wallId, xMm, at: 'centre' as const, typed: words(xMm) };
     }
