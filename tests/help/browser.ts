@@ -16,7 +16,7 @@ type Opening = {
   mayLog?: RegExp[];
 };
 
-const flags = [
+export const flags = [
   '--no-sandbox',
   '--disable-gpu',
   '--disable-quic',
@@ -26,7 +26,7 @@ const flags = [
   '--disable-sync',
 ];
 
-const sizes = {
+export const sizes = {
   desk: { viewport: { width: 1440, height: 900 } },
   phone: {
     viewport: { width: 390, height: 844 },
