@@ -1,6 +1,5 @@
 'use client';
 
-import Link from 'next/link';
 import { useSyncExternalStore } from 'react';
 import { Verdict, type VerdictKind } from '@/components/ui/verdict';
 import { paths } from '@/lib/paths';
@@ -21,7 +20,7 @@ const marks: Record<StripState['kind'], VerdictKind> = {
 };
 
 /** Right on the strip of every phone page: what is safe here, and what the office has. */
-export function QueueStatus() {
+export function QueueStatus({ isInRoom = false }: { isInRoom?: boolean }) {
   const personId = usePersonId();
   const live = useLive('unsent', readUnsent);
   const isProgramKept = useSyncExternalStore(subscribeToWorker, hasWorker, () => false);
@@ -29,10 +28,11 @@ export function QueueStatus() {
   const sending = useSyncExternalStore(subscribeToSending, currentSendingState, () => before);
   if (live.state === 'reading') return null;
   if (live.state === 'failed') return <Verdict kind="problem">nothing can be kept here</Verdict>;
-  const isReady = ready.state === 'here' && ready.value.isReady;
+  // In a room the strip's other half says where one is, and needs the place.
+  const isReady = !isInRoom && ready.state === 'here' && ready.value.isReady;
   const { kind, words } = stripState({ unsent: live.value, personId, isReady, ...sending });
   const mark = <Verdict kind={marks[kind]}>{words}</Verdict>;
-  if (kind === 'parked') return <Link href={`${paths.today()}#kept`}>{mark}</Link>;
+  if (kind === 'parked') return <a href={`${paths.today()}#kept`}>{mark}</a>;
   if (kind === 'sign-in') return <a href={paths.signIn(window.location.pathname)}>{mark}</a>;
   return mark;
 }

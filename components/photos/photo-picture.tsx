@@ -33,6 +33,7 @@ export function PhotoPicture({ url, size, caption, marks, onMark }: PhotoPicture
   };
   return (
     <svg
+      role="img"
       viewBox={`0 0 ${widthPx} ${heightPx}`}
       style={{ aspectRatio: `${widthPx} / ${heightPx}` }}
       className={`mx-auto block max-h-[58dvh] max-w-full font-sans ${onMark ? 'touch-none select-none' : ''}`}

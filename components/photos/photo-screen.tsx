@@ -50,6 +50,7 @@ function Marking({
   const url = useBlobUrl(photo.clean ?? photo.marked);
   const [tool, setTool] = useState<MarkTool>({ kind: 'circle' });
   const [isChoosing, setIsChoosing] = useState(false);
+  const [isBusy, setIsBusy] = useState(false);
   useTyping(!isSent && !photo.isDone);
 
   if (isChoosing) {
@@ -80,6 +81,7 @@ function Marking({
     void keepMarks(id, [...marks, { ...mark, id: newId() }]);
   };
   const finish = async () => {
+    setIsBusy(true);
     // What cannot be drawn now is drawn when it is sent, or shown as not taken.
     await finishPhoto(id, await markedPhoto(photo));
     onDone();
@@ -121,7 +123,7 @@ function Marking({
             </ToolButton>
           </div>
           <div className="mt-auto flex flex-col gap-2">
-            <Button size="thumb" onClick={finish}>
+            <Button size="thumb" onClick={finish} busyText={isBusy ? 'Drawing it in…' : undefined}>
               Done
             </Button>
             <div className="grid grid-cols-2 gap-2">

@@ -7,7 +7,7 @@ import { WallBookScreen } from './wall-book-screen';
 /** One room's wall book, under the strip. */
 export function RoomScreen({ view, isStale }: { view: WallBookView; isStale?: boolean }) {
   return (
-    <PhoneShell where={<RoomWhere view={view} />} status={<QueueStatus />}>
+    <PhoneShell where={<RoomWhere view={view} />} status={<QueueStatus isInRoom />}>
       <WallBookScreen view={view} isStale={isStale} />
     </PhoneShell>
   );

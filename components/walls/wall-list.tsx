@@ -58,6 +58,7 @@ export function WallList({ wallId, view, plan, hereIds, speech, picture }: WallL
           </ul>
         </section>
       ) : null}
+      <WallPhotos roomId={room.id} wallId={wallId} place={`Wall ${walked.wall.name}`} />
       {read.length > 0 ? (
         <section>
           <TitleBlock title="Read" meta="touch one to correct it or take it back" />
@@ -84,7 +85,6 @@ export function WallList({ wallId, view, plan, hereIds, speech, picture }: WallL
           ))}
         </ul>
       </section>
-      <WallPhotos roomId={room.id} wallId={wallId} place={`Wall ${walked.wall.name}`} />
       <PlaceButton look="plain" place={{ at: 'list' }}>
         The whole room
       </PlaceButton>

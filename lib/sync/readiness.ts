@@ -29,7 +29,10 @@ export function readinessOf(kept: KeptHere): Readiness {
       isKept: fetchedAt !== null,
     },
     {
-      words: `Wall books: ${books} of ${roomIds.length}`,
+      words:
+        roomIds.length === 0
+          ? 'Wall books: no room is drawn yet'
+          : `Wall books: ${books} of ${roomIds.length}`,
       isKept: fetchedAt !== null && books === roomIds.length,
     },
   ];
