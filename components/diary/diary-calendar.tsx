@@ -40,12 +40,13 @@ type DiaryCalendarProps = {
 const plugins = [dayGridPlugin, timeGridPlugin, interactionPlugin, momentTimezonePlugin];
 const clock = { hour: '2-digit', minute: '2-digit', hour12: false } as const;
 const views = { dayGridMonth: { dayHeaderFormat: { weekday: 'short' } } } as const;
-const drawVisit = ({ event, view }: EventContentArg) => (
-  <VisitEvent
-    detail={event.extendedProps as EventDetail}
-    isCompact={view.type === 'dayGridMonth'}
-  />
-);
+const drawVisit = ({ event, view }: EventContentArg) => {
+  const { visit, pieceNumber = 1 } = event.extendedProps as Partial<EventDetail>;
+  // On its way from the waiting list it is no visit yet.
+  if (!visit) return <div className="visit-box">{event.title}</div>;
+  const isCompact = view.type === 'dayGridMonth';
+  return <VisitEvent detail={{ visit, pieceNumber }} isCompact={isCompact} />;
+};
 
 export function DiaryCalendar(props: DiaryCalendarProps) {
   const { visits, crews, shownCrewIds, mayBook, hours } = props;
