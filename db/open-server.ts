@@ -8,13 +8,21 @@ import * as schema from './schema';
 /** Two starters migrate one after the other: the second finds nothing to do. */
 const migrationLock = 7_305_551;
 
-export async function openServer(databaseUrl: string): Promise<OpenDatabase> {
+/**
+ * A connection that waits in the pool may be cut by the server at any time (a restart, a fail-over): the
+ * pool opens another for the next query, so it is `whenCut` that is told, and nothing stops.
+ */
+export async function openServer(
+  databaseUrl: string,
+  whenCut: (error: Error) => void = () => {},
+): Promise<OpenDatabase> {
   await migrateOnce(databaseUrl);
   const pool = new Pool({ connectionString: databaseUrl, max: 10 });
+  pool.on('error', whenCut);
   return {
     db: drizzle(pool, { schema }),
     kind: 'server',
-    listen: (channel, hear) => listen(databaseUrl, channel, hear),
+    listen: (channel, hear) => listen(databaseUrl, channel, hear, whenCut),
     dump: () => {
       throw new Error('A PostgreSQL server is backed up with its own tools (pg_dump).');
     },
@@ -33,8 +41,14 @@ async function migrateOnce(databaseUrl: string) {
   }
 }
 
-async function listen(databaseUrl: string, channel: string, hear: (payload: string) => void) {
+async function listen(
+  databaseUrl: string,
+  channel: string,
+  hear: (payload: string) => void,
+  whenCut: (error: Error) => void,
+) {
   const client = new Client({ connectionString: databaseUrl });
+  client.on('error', whenCut);
   await client.connect();
   client.on('notification', (message) => hear(message.payload ?? ''));
   await client.query(`LISTEN "${channel.replaceAll('"', '')}"`);

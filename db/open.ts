@@ -4,7 +4,10 @@ import type { OpenDatabase } from './database';
 export async function openDatabase(where: {
   databaseUrl: string | null;
   dataDirectory: string;
+  whenCut: (error: Error) => void;
 }): Promise<OpenDatabase> {
-  if (where.databaseUrl) return (await import('./open-server')).openServer(where.databaseUrl);
+  if (where.databaseUrl) {
+    return (await import('./open-server')).openServer(where.databaseUrl, where.whenCut);
+  }
   return (await import('./open-embedded')).openEmbedded(where.dataDirectory);
 }

@@ -1,6 +1,7 @@
 import type { OpenDatabase } from '@/db/database';
 import { openDatabase } from '@/db/open';
 import { env } from './env';
+import { logBug } from './log';
 
 type Held = { __setwellDatabase?: Promise<OpenDatabase> };
 
@@ -19,5 +20,9 @@ export function setDatabase(open: OpenDatabase) {
 async function open(): Promise<OpenDatabase> {
   const { building, databaseUrl, dataDirectory } = env();
   if (building) throw new Error('The build must not open the database.');
-  return openDatabase({ databaseUrl, dataDirectory });
+  return openDatabase({
+    databaseUrl,
+    dataDirectory,
+    whenCut: (error) => logBug('a connection to the database was cut', error),
+  });
 }
