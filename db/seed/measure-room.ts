@@ -48,7 +48,33 @@ export function measureRoom(input: MeasureInput): Reading[] {
     }
     if (taken.length === before) break;
   }
-  return taken;
+  return [...taken, ...moreStuds(input, taken)];
+}
+
+/** Two studs are asked for; who hangs boxes finds the rest of them behind. */
+function moreStuds({ truth, room, runs, rules, tools }: MeasureInput, taken: Reading[]): Reading[] {
+  const last = taken.at(-1);
+  const hung = new Set(runs.filter(({ level }) => level === 'wall').map(({ wallId }) => wallId));
+  const walls = room.chains.flatMap((chain) => chain.walls);
+  return walls.flatMap((wall, index) => {
+    if (!last || !hung.has(wall.id)) return [];
+    const count = Math.floor(lengthOf(truth, index) / truth.studSpacingMm);
+    return Array.from({ length: Math.max(0, count - 2) }, (_, place) => {
+      const xMm = Math.round((truth.studSpacingMm * (place + 3)) / rules.stepMm) * rules.stepMm;
+      return reading.parse({
+        id: randomUUID(),
+        roomId: room.id,
+        toolId: tools.tape.id,
+        unit: rules.unit,
+        takenAt: new Date(Date.parse(last.takenAt) + (place + 1) * 15_000).toISOString(),
+        kind: 'stud',
+        wallId: wall.id,
+        xMm,
+        at: 'centre',
+        typed: formatLength(xMm, { unit: rules.unit, stepMm: rules.stepMm }),
+      });
+    });
+  });
 }
 
 function take(ask: AskedReading, input: MeasureInput, setUps: Map<string, string>) {

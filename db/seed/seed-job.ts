@@ -1,10 +1,11 @@
 import { randomUUID } from 'node:crypto';
 import type { Transaction } from '@/db/database';
-import { audit, consents, customers, jobs, sites } from '@/db/schema';
+import { consents, customers, jobs, sites } from '@/db/schema';
 import type { DemoJob } from './demo-jobs';
 import { fictionPhone } from './phones';
 import type { SeedShop } from './seed-demo';
 import { seedRoom } from './seed-room';
+import { type StoryLine, seedStory } from './seed-story';
 import { seedVisit } from './seed-visit';
 import { workday } from './workday';
 
@@ -70,19 +71,22 @@ export async function seedJob(tx: Transaction, shop: SeedShop, { job, number, pl
     unitCount: job.units,
     createdAt: startedAt,
   });
-  await tx.insert(audit).values({
-    shopId: shop.id,
-    at: startedAt,
-    actorKind: 'person',
-    actorName: 'Petra Lowe',
-    verb: 'start-job',
-    subjectKind: 'job',
-    subjectId: jobId,
-    jobId,
-    summary: `Job ${number} started from a call`,
-  });
-  for (const visit of job.visits ?? []) await seedVisit(tx, shop, { jobId, visit });
-  if (job.room) await seedRoom(tx, shop, { jobId, job, plan: job.room });
+  const story: StoryLine[] = [
+    {
+      at: startedAt,
+      by: 'scheduler',
+      verb: 'start-job',
+      subjectKind: 'job',
+      subjectId: jobId,
+      summary: `Job ${number} started from a call`,
+    },
+  ];
+  const { customer } = job;
+  for (const visit of job.visits ?? []) {
+    story.push(...(await seedVisit(tx, shop, { jobId, customer, visit })));
+  }
+  if (job.room) story.push(...(await seedRoom(tx, shop, { jobId, job, plan: job.room })));
+  await seedStory(tx, { shopId: shop.id, jobId, now: shop.now }, story);
 }
 
 const earliestDay = (job: DemoJob) => Math.min(0, ...(job.visits ?? []).map(({ day }) => day));

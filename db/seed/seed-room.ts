@@ -7,14 +7,16 @@ import type { DemoJob } from './demo-jobs';
 import { type PlannedRoom, planRoom, type RoomPlan } from './demo-rooms';
 import { measureRoom } from './measure-room';
 import type { SeedShop } from './seed-demo';
-import { workday } from './workday';
+import type { StoryLine } from './seed-story';
+import type { StaffKey } from './staff';
+import { workday, workdayAfter } from './workday';
 
 /** A room drawn, measured to the last reading, and released where the job has come that far. */
 export async function seedRoom(
   tx: Transaction,
   shop: SeedShop,
   { jobId, job, plan }: { jobId: string; job: DemoJob; plan: RoomPlan },
-) {
+): Promise<StoryLine[]> {
   const planned = planRoom(plan, shop.rules.fit, shop.random);
   const measuredAt = workday(shop, Math.min(-1, job.visits?.[0]?.day ?? -1), '09:20');
   const taken = measureRoom({
@@ -24,18 +26,23 @@ export async function seedRoom(
     random: shop.random,
     startedAt: measuredAt,
   });
-  const takenBy = job.visits?.[0]?.crew === 'tor' ? shop.staff.tor : shop.staff.measurer;
+  const measurer = job.visits?.[0]?.crew === 'tor' ? 'tor' : 'measurer';
+  const takenBy = shop.staff[measurer];
   await writeRoom(tx, shop, { jobId, planned, measuredAt });
   await writeReadings(tx, shop, taken, takenBy);
   await writeRuns(tx, shop, planned);
-  if (job.stage === 'measured') return;
+  const handedIn: StoryLine = {
+    at: new Date(measuredAt.getTime() + 3_600_000),
+    by: measurer,
+    verb: 'submit-room',
+    subjectKind: 'room',
+    subjectId: planned.room.id,
+    summary: `Handed in the wall book of ${planned.room.name}`,
+  };
+  if (job.stage === 'measured') return [handedIn];
   const book = { room: planned.room, readings: taken, tools: Object.values(shop.tools) };
-  await release(tx, shop, {
-    planned,
-    book,
-    releasedBy: takenBy,
-    isTakenUp: job.stage !== 'released',
-  });
+  const isTakenUp = job.stage !== 'released';
+  return [handedIn, ...(await release(tx, shop, { planned, book, measurer, isTakenUp }))];
 }
 
 async function writeRoom(
@@ -103,9 +110,9 @@ async function writeRuns(
 async function release(
   tx: Transaction,
   shop: SeedShop,
-  made: { planned: PlannedRoom; book: WallBook; releasedBy: string; isTakenUp: boolean },
-) {
-  const { planned, book, releasedBy, isTakenUp } = made;
+  made: { planned: PlannedRoom; book: WallBook; measurer: StaffKey; isTakenUp: boolean },
+): Promise<StoryLine[]> {
+  const { planned, book, measurer, isTakenUp } = made;
   const rules = shop.rules.fit;
   const fit = fitRoom(book, planned.runs, rules);
   const id = randomUUID();
@@ -124,13 +131,28 @@ async function release(
     fit,
     changes: [],
     releasedAt,
-    releasedBy,
+    releasedBy: shop.staff[measurer],
   });
-  if (!isTakenUp) return;
+  const line = (at: Date, by: StaffKey, verb: string, summary: string): StoryLine => ({
+    at,
+    by,
+    verb,
+    subjectKind: 'release',
+    subjectId: id,
+    summary,
+  });
+  const { name } = planned.room;
+  const released = line(releasedAt, measurer, 'release-sheet', `Released ${name}, revision A`);
+  if (!isTakenUp) return [released];
+  const takenUpAt = workdayAfter(shop, releasedAt);
   await tx.insert(releaseReceipts).values({
     shopId: shop.id,
     releaseId: id,
-    takenUpAt: new Date(releasedAt.getTime() + 86_400_000),
+    takenUpAt,
     takenUpBy: shop.staff.bench,
   });
+  return [
+    released,
+    line(takenUpAt, 'bench', 'take-up-sheet', `The bench took up ${name}, revision A`),
+  ];
 }

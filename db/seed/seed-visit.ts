@@ -2,16 +2,20 @@ import { randomUUID } from 'node:crypto';
 import type { Transaction } from '@/db/database';
 import { visitPiecePeople, visitPieces, visits } from '@/db/schema';
 import { splitIntoPieces } from '@/lib/schedule';
+import { visitKindWords } from '@/lib/schedule/visit-kind-words';
+import { formatDayShort } from '@/lib/time/format-instant';
 import type { DemoVisit } from './demo-jobs';
 import type { SeedShop } from './seed-demo';
+import type { StoryLine } from './seed-story';
+import { crewsOfTheShop } from './staff';
 import { workday } from './workday';
 
 /** A visit with its daily pieces; done when it is past, under way when it is now. */
 export async function seedVisit(
   tx: Transaction,
   shop: SeedShop,
-  { jobId, visit }: { jobId: string; visit: DemoVisit },
-) {
+  { jobId, customer, visit }: { jobId: string; customer: string; visit: DemoVisit },
+): Promise<StoryLine[]> {
   const startsAt = workday(shop, visit.day, visit.time);
   const { zone, rules, now, id: shopId } = shop;
   const { value: pieces } = splitIntoPieces({
@@ -53,4 +57,50 @@ export async function seedVisit(
       .insert(visitPiecePeople)
       .values(crew.personIds.map((personId) => ({ shopId, pieceId, personId, ...piece })));
   }
+  return storyOf(shop, { visitId, customer, visit, startsAt, endsAt: last.endsAt });
+}
+
+function storyOf(
+  shop: SeedShop,
+  of: { visitId: string; customer: string; visit: DemoVisit; startsAt: Date; endsAt: Date },
+): StoryLine[] {
+  const { visit, startsAt, endsAt } = of;
+  const day = Math.min(visit.day, 0);
+  const line = (
+    at: Date,
+    by: StoryLine['by'],
+    verb: StoryLine['verb'],
+    what: string,
+  ): StoryLine => ({
+    at,
+    by,
+    verb,
+    subjectKind: 'visit',
+    subjectId: of.visitId,
+    summary: `${visitKindWords[visit.kind]}${what}`,
+  });
+  const dayWords = formatDayShort(startsAt, shop.zone, { language: 'en', region: 'US' });
+  const crew = crewsOfTheShop.find(({ key }) => key === visit.crew);
+  const booked = ` booked for ${dayWords}, with ${crew?.name ?? visit.crew}; the customer is told by text and e-mail`;
+  const first = crew?.people[0] ?? 'crew';
+  const isPast = visit.day < 0;
+  return [
+    line(workday(shop, day - 5, '10:20'), 'scheduler', 'book-visit', booked),
+    ...(visit.isConfirmed
+      ? [
+          line(
+            workday(shop, day - 3, '12:10'),
+            { customer: of.customer },
+            'answer-visit',
+            ': the customer says yes',
+          ),
+        ]
+      : []),
+    ...(isPast
+      ? [
+          line(startsAt, first, 'report-visit', ': arrived'),
+          line(endsAt, first, 'report-visit', ': done'),
+        ]
+      : []),
+  ];
 }
