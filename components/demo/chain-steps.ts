@@ -27,6 +27,7 @@ export const chainSteps: ChainStep[] = [
     title: 'The customer says yes',
     does: [
       'The text has arrived. Tap its link, then “Yes, that works”; or text YES back.',
+      'Between 9 in the evening and 8 in the morning at the site only the e-mail has: texts wait.',
       'Nobody needs an account, and the page works without scripts.',
     ],
     role: null,

@@ -37,6 +37,11 @@ export function CustomerPhone({ phone }: { phone: DemoPhone }) {
           );
         })}
       </nav>
+      {phone.numbers.length === 0 ? (
+        <p className="border-l-4 border-ochre bg-tint px-3 py-2">
+          No text yet: it is night at the site, and texts wait for the morning. The e-mail is here.
+        </p>
+      ) : null}
       {phone.number ? <Texts phone={phone} number={phone.number} /> : <Mails phone={phone} />}
     </div>
   );

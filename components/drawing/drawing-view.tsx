@@ -13,7 +13,8 @@ export function DrawingView({ drawing, title, hrefOf }: DrawingViewProps) {
   const { left, top, width, height } = drawing.bounds;
   // On a phone the drawing keeps a size at which it can be read, and is pushed sideways.
   return (
-    <div className="overflow-x-auto">
+    // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be reached by key (WCAG 2.1.1)
+    <section aria-label={`${title}, to push sideways`} tabIndex={0} className="overflow-x-auto">
       <svg
         viewBox={[left, top, width, height].map((value) => Math.round(value)).join(' ')}
         role={hrefOf ? 'group' : 'img'}
@@ -23,7 +24,7 @@ export function DrawingView({ drawing, title, hrefOf }: DrawingViewProps) {
       >
         <DrawnShapes shapes={drawing.shapes} hrefOf={hrefOf} />
       </svg>
-    </div>
+    </section>
   );
 }
 

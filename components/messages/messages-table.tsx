@@ -5,6 +5,7 @@ import { type Column, DataTable } from '@/components/ui/data-table';
 import { EmptyState } from '@/components/ui/empty-state';
 import { Verdict, type VerdictKind } from '@/components/ui/verdict';
 import type { MessageView } from '@/lib/contracts/messages';
+import { occasionWords } from '@/lib/messages/occasions';
 import { paths } from '@/lib/paths';
 
 const states: Record<MessageView['state'], { words: string; kind: VerdictKind }> = {
@@ -16,6 +17,9 @@ const states: Record<MessageView['state'], { words: string; kind: VerdictKind }>
   withdrawn: { words: 'withdrawn', kind: 'off' },
   received: { words: 'from the customer', kind: 'waiting' },
 };
+
+const words: Record<string, string> = { ...occasionWords, reply: 'Reply' };
+const occasionOf = ({ occasion }: MessageView) => words[occasion] ?? occasion;
 
 const columns: Column<MessageView>[] = [
   {
@@ -35,8 +39,8 @@ const columns: Column<MessageView>[] = [
   {
     key: 'occasion',
     header: 'Occasion',
-    cell: (message) => message.occasion,
-    choice: (message) => message.occasion,
+    cell: occasionOf,
+    choice: occasionOf,
   },
   {
     key: 'channel',

@@ -22,6 +22,7 @@ export function BenchTable({ rows, mayTakeUp, maySayReady }: BenchTableProps) {
     {
       key: 'install',
       header: 'Install',
+      isForDesk: true,
       cell: ({ installWords }) => installWords ?? <span className="text-graphite">not booked</span>,
       sortValue: ({ order }) => order,
     },
@@ -62,6 +63,7 @@ export function BenchTable({ rows, mayTakeUp, maySayReady }: BenchTableProps) {
     {
       key: 'released',
       header: 'Released',
+      isForDesk: true,
       cell: ({ releasedAtWords }) => releasedAtWords,
     },
     {

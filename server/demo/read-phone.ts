@@ -7,7 +7,8 @@ export async function readPhone(chosen: { number?: string; address?: string }): 
   const numbers = sms?.numbers() ?? [];
   const addresses = email?.addresses() ?? [];
   const number = chosen.number ?? (chosen.address ? undefined : numbers[0]);
-  const address = chosen.address;
+  // At night there is an e-mail only: the text waits for the morning.
+  const address = chosen.address ?? (number ? undefined : addresses[0]);
   return {
     numbers,
     addresses,

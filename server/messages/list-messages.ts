@@ -33,7 +33,7 @@ export async function listMessages(
         input.jobId ? eq(messages.jobId, input.jobId) : undefined,
       ),
     )
-    .orderBy(desc(messages.createdAt), desc(messages.id))
+    .orderBy(desc(messages.createdAt), desc(messages.dueAt), desc(messages.id))
     .limit(mostRows);
   const { zone, region } = ctx.shop;
   const locale = { language: 'en', region } as const;
