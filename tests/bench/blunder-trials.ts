@@ -200,7 +200,12 @@ function slipped(
   const isTriangle =
     diagonalMm < legs.leftMm + legs.rightMm && diagonalMm > Math.abs(legs.leftMm - legs.rightMm);
   if (!isTriangle) return null;
-  return cornerByLegs(cornerIndex(cornerWallId), zMm, { ...legs, diagonalMm }, CORNER_U_MM);
+  const wrong = { ...legs, diagonalMm };
+  const { tool = null } = observation;
+  return {
+    ...cornerByLegs(cornerIndex(cornerWallId), zMm, wrong, { uMm: CORNER_U_MM, tool }),
+    tool,
+  };
 }
 
 function slippedLength(valueMm: number, slip: string, random: Random): number {

@@ -102,7 +102,7 @@ export function readLegs(
   const [a, b] = [leftMm + mark(), rightMm + mark()];
   const read = tape.read(Math.sqrt(a * a + b * b - 2 * a * b * Math.cos(inside)));
   const legs = { leftMm, rightMm, diagonalMm: read.valueMm, carriedPast };
-  return cornerByLegs(i, zMm, legs, read.uMm);
+  return cornerByLegs(i, zMm, legs, read);
 }
 
 const LEG_U_MM = 0.5;
@@ -112,26 +112,30 @@ export function cornerByLegs(
   i: number,
   zMm: number,
   legs: NonNullable<CornerObservation['legs']>,
-  uDiagonalMm: number,
+  diagonal: { uMm: number; tool: ToolShare | null },
 ): CornerObservation {
   const { leftMm: a, rightMm: b, diagonalMm: c, carriedPast } = legs;
   const cosine = Math.min(0.9999, Math.max(-0.9999, (a * a + b * b - c * c) / (2 * a * b)));
   const inside = Math.acos(cosine);
   const sine = Math.sin(inside);
   const byLeg = (one: number, other: number) => (other * cosine - one) / (one * other * sine);
-  const u = Math.hypot(
-    (c * uDiagonalMm) / (a * b * sine),
-    byLeg(a, b) * LEG_U_MM,
-    byLeg(b, a) * LEG_U_MM,
-  );
+  const byDiagonal = c / (a * b * sine);
+  const u = Math.hypot(byDiagonal * diagonal.uMm, byLeg(a, b) * LEG_U_MM, byLeg(b, a) * LEG_U_MM);
   const angleDeg = (inside * 180) / Math.PI + (carriedPast ? 180 : 0);
-  return corner(i, zMm, { angleDeg, uDeg: (u * 180) / Math.PI, armLeftMm: a, armRightMm: b, legs });
+  const degrees = (radians: number) => (radians * 180) / Math.PI;
+  // The tape's own error goes into every corner of the room alike.
+  const tool = diagonal.tool && {
+    toolId: diagonal.tool.toolId,
+    uCommon: degrees(byDiagonal * diagonal.tool.uCommon),
+  };
+  const read = { angleDeg, uDeg: degrees(u), armLeftMm: a, armRightMm: b, legs, tool };
+  return corner(i, zMm, read);
 }
 
 function corner(
   i: number,
   zMm: number,
-  read: Pick<CornerObservation, 'angleDeg' | 'uDeg' | 'armLeftMm' | 'armRightMm' | 'legs'>,
+  read: Pick<CornerObservation, 'angleDeg' | 'uDeg' | 'armLeftMm' | 'armRightMm' | 'legs' | 'tool'>,
 ): CornerObservation {
   return {
     kind: 'corner',
