@@ -1,4 +1,7 @@
 import { type PrecacheEntry, Serwist } from 'serwist';
+import { readHolder } from '@/components/phone/kept-store';
+import { sendLaterTag } from '@/components/phone/send-later';
+import { alone, sendNext } from '@/components/phone/send-next';
 import { pagePatienceMs } from '@/lib/sync/page-patience';
 import { isPhonePage } from '@/lib/sync/phone-pages';
 
@@ -36,6 +39,12 @@ const worker = new Serwist({
 
 worker.addEventListeners();
 
+/** There is a signal, and perhaps no page any more: what is kept goes out all the same. */
+self.addEventListener('sync', (event) => {
+  const sync = event as ExtendableEvent & { tag: string };
+  if (sync.tag === sendLaterTag) sync.waitUntil(alone(sendAllKept));
+});
+
 /** The office's answer, or null when it does not come in time or cannot be given. */
 async function fromOffice(request: Request): Promise<Response | null> {
   const giveUp = new AbortController();
@@ -55,4 +64,15 @@ async function fromOffice(request: Request): Promise<Response | null> {
 
 async function keptStandIn(): Promise<Response> {
   return (await worker.matchPrecache(standIn)) ?? Response.error();
+}
+
+async function sendAllKept(): Promise<void> {
+  const holder = await readHolder();
+  if (!holder) return;
+  for (;;) {
+    const next = await sendNext(holder.personId);
+    if (next === 'nothing' || next === 'sign-in') return;
+    // The browser tries again later by itself.
+    if (next === 'wait') throw new Error('the office did not answer');
+  }
 }

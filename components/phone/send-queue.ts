@@ -1,11 +1,10 @@
 import { liveQuery } from 'dexie';
 import { isWaiting } from '@/lib/photos/kept-photo';
 import { backOffMs } from '@/lib/sync/back-off';
-import { nextBatch } from '@/lib/sync/next-batch';
-import { type Settled, settleBatch } from '@/lib/sync/settle-batch';
 import { phoneDatabase } from './phone-database';
-import { postBatch } from './post-batch';
-import { readQueue, settleQueue } from './queue-store';
+import { readQueue } from './queue-store';
+import { askToSendLater } from './send-later';
+import { alone, sendNext } from './send-next';
 import { changeSendingState } from './sending-state';
 
 /**
@@ -47,7 +46,10 @@ export function startSending(personId: string): () => void {
       if (next === 'nothing') return;
       changeSendingState({ isSignedOut: next === 'sign-in', isOffline: next === 'wait' });
       if (next === 'sign-in') return;
-      if (next === 'wait') return pause();
+      if (next === 'wait') {
+        void askToSendLater();
+        return pause();
+      }
       failures = 0;
     }
   };
@@ -78,19 +80,6 @@ export function startSending(personId: string): () => void {
   };
 }
 
-/** Readings first, in their order; a photo only when none of them waits. */
-async function sendNext(personId: string): Promise<Settled['next'] | 'nothing'> {
-  const batch = nextBatch(await readQueue(), personId);
-  if (batch) {
-    const settled = settleBatch(batch, await postBatch(batch));
-    await settleQueue(batch, settled);
-    return settled.next;
-  }
-  if ((await phoneDatabase().photos.count()) === 0) return 'nothing';
-  const { sendOnePhoto } = await import('@/components/photos/send-photos');
-  return sendOnePhoto(personId);
-}
-
 async function readWaiting(): Promise<number> {
   const queue = await readQueue();
   const photos = await phoneDatabase()
@@ -106,10 +95,4 @@ function wakeIfMore(wake: () => void): (waiting: number) => void {
     if (waiting > before) wake();
     before = waiting;
   };
-}
-
-/** One tab at a time. Where the browser has no locks, two may send the same: the office takes it once. */
-async function alone(work: () => Promise<void>): Promise<void> {
-  if (!navigator.locks) return work();
-  await navigator.locks.request('setwell.send', work);
 }

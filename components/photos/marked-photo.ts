@@ -1,6 +1,6 @@
 import type { KeptPhoto } from '@/lib/photos/kept-photo';
 import { markPath, markSizes, type PhotoMark } from '@/lib/photos/photo-marks';
-import { drawnJpeg, openPicture } from './open-picture';
+import { type DrawingContext, drawnJpeg, openPicture } from './open-picture';
 
 /** Readable on a white wall and in a dark cupboard: each line lies on a wider one of the other. */
 export const markColours = { line: '#c8102e', under: '#ffffff' };
@@ -20,7 +20,7 @@ export async function markedPhoto(photo: KeptPhoto): Promise<Blob | null> {
 }
 
 function drawMark(
-  context: CanvasRenderingContext2D,
+  context: DrawingContext,
   mark: PhotoMark,
   size: { widthPx: number; heightPx: number },
 ): void {
