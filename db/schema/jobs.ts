@@ -25,6 +25,8 @@ export const customers = pgTable(
     language: text('language', { enum: ['en', 'es'] })
       .notNull()
       .default('en'),
+    /** The number that the provider said takes no texts; another number may be tried again. */
+    untextablePhone: text('untextable_phone').notNull().default(''),
     createdAt: createdAt(),
   },
   (table) => [
@@ -43,6 +45,8 @@ export const consents = pgTable(
     given: boolean('given').notNull(),
     /** "asked on the phone", "texted STOP", "provider says opted out" … */
     how: text('how').notNull(),
+    /** Their words, or where it is written down. */
+    proof: text('proof').notNull().default(''),
     byPersonId: uuid('by_person_id'),
     at: instant('at').notNull().defaultNow(),
     /** Two rows of one instant are told apart by this. */

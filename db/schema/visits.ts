@@ -52,6 +52,8 @@ export const visits = pgTable(
     customerSays: text('customer_says').notNull().default(''),
     holdEndsAt: instant('hold_ends_at'),
     confirmedAt: instant('confirmed_at'),
+    /** When the crew running late now expects to be there. */
+    expectedAt: instant('expected_at'),
     arrivedAt: instant('arrived_at'),
     leftAt: instant('left_at'),
     /** Rises with every change; a stale one is refused. */
