@@ -80,6 +80,10 @@ export const sites = pgTable(
     /** IANA zone of the site; messages keep to its hours. */
     zone: text('zone').notNull(),
     wayIn: text('way_in').notNull().default(''),
+    parking: text('parking').notNull().default(''),
+    /** AES-256-GCM under a key that the database does not hold; null where there is none. */
+    accessCodeSealed: text('access_code_sealed'),
+    accessCodeSetAt: instant('access_code_set_at'),
     floorsUp: integer('floors_up').notNull().default(0),
     hasLift: boolean('has_lift').notNull().default(false),
     yearBuilt: integer('year_built'),
@@ -128,6 +132,11 @@ export const jobs = pgTable(
     /** The bench says the cabinets are ready, or when they will be. */
     readyOn: date('ready_on', { mode: 'string' }),
     readySaidAt: instant('ready_said_at'),
+    /** Where they stand, once they do; why they are late or short, until they do. */
+    readyWhere: text('ready_where').notNull().default(''),
+    readyWhy: text('ready_why').notNull().default(''),
+    /** What the cabinets are made and finished in, for the crew's filler stock. */
+    finish: text('finish').notNull().default(''),
     /** What the customer says is not ready; empty when nothing is. */
     notReady: text('not_ready').notNull().default(''),
     roomCount: integer('room_count').notNull().default(1),
