@@ -25,6 +25,7 @@ export const paths = {
   bench: () => '/bench',
   crews: () => '/crews',
   messages: () => '/messages',
+  snags: () => '/snags',
   rules: () => '/rules',
 
   today: () => '/today',
@@ -38,6 +39,8 @@ export const paths = {
 
   /** Where the customer's answer is posted, as a plain form. */
   customerAnswer: (token: string) => `/v/${part(token)}/answer`,
+  /** What the customer signed, as a PDF. */
+  customerSignOff: (token: string) => `/v/${part(token)}/sign-off`,
   customerCalendar: (token: string) => `/v/${part(token)}/calendar`,
 
   demo: () => '/demo',
@@ -87,6 +90,19 @@ export const apiPaths = {
   visit: (visitId: string) => `/api/visits/${part(visitId)}`,
   callOffVisit: (visitId: string) => `/api/visits/${part(visitId)}/call-off`,
   reportVisit: (visitId: string) => `/api/visits/${part(visitId)}/report`,
+  /** What a crew tells from site, many taps in one request. */
+  dayEvents: () => '/api/days/events',
+  /** What a crew needs at one stop. */
+  stop: (visitId: string) => `/api/days/stops/${part(visitId)}`,
+  accessCode: (visitId: string) => `/api/days/stops/${part(visitId)}/code`,
+  forCrew: (jobId: string) => `/api/jobs/${part(jobId)}/for-crew`,
+  snags: () => '/api/snags',
+  snagsOfJob: (jobId: string) => `/api/snags?jobId=${part(jobId)}`,
+  snag: (snagId: string) => `/api/snags/${part(snagId)}`,
+  closeSnag: (snagId: string) => `/api/snags/${part(snagId)}/close`,
+  answerSnag: (snagId: string) => `/api/snags/${part(snagId)}/answer`,
+  /** What the customer signed, as a PDF. */
+  signOffCopy: (signOffId: string) => `/api/sign-offs/${part(signOffId)}/copy`,
   today: (date?: string) => (date ? `/api/days/today?date=${part(date)}` : '/api/days/today'),
   openings: () => '/api/openings',
   waiting: () => '/api/waiting',

@@ -23,6 +23,7 @@ export const permissions = [
   'sheets:release',
   'sheets:take-up',
   'sheets:say-ready',
+  'snags:change',
   'messages:read',
   'messages:send',
 ] as const;
@@ -49,6 +50,7 @@ const allowed: Record<Role, ReadonlySet<Permission>> = {
     'messages:read',
     'messages:send',
     'sheets:say-ready',
+    'snags:change',
   ]),
   measurer: new Set<Permission>([
     ...everyone,
@@ -56,9 +58,10 @@ const allowed: Record<Role, ReadonlySet<Permission>> = {
     'walls:measure',
     'runs:change',
     'sheets:release',
+    'snags:change',
   ]),
   bench: new Set<Permission>([...everyone, 'runs:change', 'sheets:take-up', 'sheets:say-ready']),
-  crew: new Set<Permission>([...everyone, 'visits:report', 'walls:measure']),
+  crew: new Set<Permission>([...everyone, 'visits:report', 'walls:measure', 'snags:change']),
 };
 
 export function may(role: Role, permission: Permission): boolean {

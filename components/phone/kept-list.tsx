@@ -4,6 +4,7 @@ import { useState } from 'react';
 import { readPhotos, tryParkedPhotosAgain } from '@/components/photos/photo-store';
 import { Button } from '@/components/ui/button';
 import { TitleBlock } from '@/components/ui/title-block';
+import type { DayEvent } from '@/lib/contracts/day-events';
 import type { Queued } from '@/lib/sync/queued';
 import { usePersonId } from './phone-person';
 import { readQueue, tryParkedAgain } from './queue-store';
@@ -66,7 +67,20 @@ function workWords({ work }: Queued): string {
       return 'A wall book handed in';
     case 'report':
       return `Tap on a visit: ${work.report.what.replaceAll('-', ' ')}`;
+    case 'event':
+      return eventWords[work.event.what];
     case 'reading':
       return `A reading: ${work.reading.kind}, ${work.reading.typed || 'no figure'}`;
   }
 }
+
+const eventWords: Record<DayEvent['what'], string> = {
+  pause: 'A pause on site',
+  'go-on': 'Work gone on with',
+  check: 'A line of the checklist',
+  snag: 'A snag',
+  'close-snag': 'A snag closed',
+  'as-found': 'Readings as found',
+  'sign-off': 'The customer’s signature',
+  'code-seen': 'The access code was looked at',
+};

@@ -1,6 +1,6 @@
 import { withSent } from '@/lib/sync/book-on-phone';
 import type { Batch } from '@/lib/sync/next-batch';
-import { type Queued, type QueuedWork, roomIdOf } from '@/lib/sync/queued';
+import { ownIdOf, type Queued, type QueuedWork, roomIdOf } from '@/lib/sync/queued';
 import type { Settled } from '@/lib/sync/settle-batch';
 import { newId } from './new-id';
 import { phoneDatabase } from './phone-database';
@@ -9,7 +9,7 @@ import { phoneDatabase } from './phone-database';
 export async function keepWork(personId: string, works: readonly QueuedWork[]): Promise<void> {
   await phoneDatabase().queue.bulkAdd(
     works.map((work) => ({
-      id: work.kind === 'reading' ? work.reading.id : newId(),
+      id: ownIdOf(work) ?? newId(),
       personId,
       roomId: roomIdOf(work),
       work,

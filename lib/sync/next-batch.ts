@@ -6,10 +6,12 @@ export type Batch = { items: [Queued, ...Queued[]]; path: string; body: unknown 
 
 /** A few seconds of a weak signal carry this many; a lost answer costs no more than this again. */
 export const MOST_READINGS = 50;
+/** Taps of a crew's day; a signature among them weighs as much as many. */
+export const MOST_EVENTS = 20;
 
 /**
- * What to send next, strictly in the order in which it was kept: a run of readings of one room, or one
- * other thing; null when nothing waits.
+ * What to send next, strictly in the order in which it was kept: a run of readings of one room, a run of
+ * the day's events, or one other thing; null when nothing waits.
  *
  * Edge: parked things are passed over, and so is the handing in of a room while a reading of it is parked.
  * Things that another person took wait for that person.
@@ -42,7 +44,17 @@ export function nextBatch(queue: readonly Queued[], personId: string): Batch | n
       };
     case 'reading':
       return readingsBatch(first, waiting);
+    case 'event':
+      return eventsBatch(first, waiting);
   }
+}
+
+function eventsBatch(first: Queued, waiting: Queued[]): Batch {
+  const end = waiting.findIndex(({ work }) => work.kind !== 'event');
+  const run = waiting.slice(1, end < 0 ? undefined : end).slice(0, MOST_EVENTS - 1);
+  const items: Batch['items'] = [first, ...run];
+  const events = items.map(({ work }) => (work.kind === 'event' ? work.event : null));
+  return { items, path: apiPaths.dayEvents(), body: { events } };
 }
 
 function readingsBatch(first: Queued, waiting: Queued[]): Batch {

@@ -1,3 +1,4 @@
+import type { DayEvent } from '@/lib/contracts/day-events';
 import type { ReportVisitInput } from '@/lib/contracts/visits';
 import type { Reading, Room } from '@/lib/contracts/wall-book';
 
@@ -6,13 +7,14 @@ export type QueuedWork =
   | { kind: 'room'; jobId: string; room: Room }
   | { kind: 'reading'; reading: Reading }
   | { kind: 'submit'; roomId: string }
-  | { kind: 'report'; report: ReportVisitInput };
+  | { kind: 'report'; report: ReportVisitInput }
+  | { kind: 'event'; event: DayEvent };
 
 /** One thing in the phone's queue; it leaves only when the office has said that it has it. */
 export type Queued = {
   /** Grows by one with each thing kept; things are sent in this order. */
   order: number;
-  /** The reading's own id, or one made for the thing. */
+  /** The reading's or the event's own id, or one made for the thing. */
   id: string;
   /** Who took it. Another person's sign-in does not send it. */
   personId: string;
@@ -32,6 +34,13 @@ export function roomIdOf(work: QueuedWork): string | null {
     case 'submit':
       return work.roomId;
     case 'report':
+    case 'event':
       return null;
   }
+}
+
+/** The id under which the office names it, where it has one of its own. */
+export function ownIdOf(work: QueuedWork): string | null {
+  if (work.kind === 'reading') return work.reading.id;
+  return work.kind === 'event' ? work.event.id : null;
 }

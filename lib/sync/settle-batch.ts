@@ -39,7 +39,8 @@ export function settleBatch({ items }: Batch, answer: Answer): Settled {
 
 function settleTaken(items: Batch['items'], json: unknown): Settled {
   if (typeof json !== 'object' || json === null) return { sentIds: [], parked: [], next: 'wait' };
-  if (items[0].work.kind !== 'reading') {
+  const { kind } = items[0].work;
+  if (kind !== 'reading' && kind !== 'event') {
     return { sentIds: [items[0].id], parked: [], next: 'go-on' };
   }
   const { accepted, parked } = json as { accepted?: unknown; parked?: unknown };
