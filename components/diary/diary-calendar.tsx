@@ -13,6 +13,7 @@ import { type RefObject, useMemo } from 'react';
 import type { CrewView, VisitView } from '@/lib/contracts/visits';
 import './diary-calendar.css';
 import { diaryEvents, type EventDetail } from './diary-events';
+import { reachByKey } from './reach-by-key';
 import { VisitEvent } from './visit-event';
 
 export type DiaryView = 'dayGridMonth' | 'timeGridWeek' | 'timeGridDay';
@@ -92,6 +93,7 @@ export function DiaryCalendar(props: DiaryCalendarProps) {
       dayMaxEvents={5}
       droppable={mayBook}
       events={events}
+      viewDidMount={reachByKey}
       eventContent={drawVisit}
       eventClick={({ event, jsEvent }: EventClickArg) => {
         jsEvent.preventDefault();
