@@ -68,6 +68,11 @@ export const fitRules = z.object({
     ]),
   /** Least distance of a fixing screw from the end of a box's rail. */
   screwEdgeMm: mmValue.default(19),
+  /** What sheet goods are called, and what they came to when read; null: not read, sizes stay as drawn. */
+  sheetNominalMm: z.number().min(3).max(60).default(18),
+  sheetActualMm: z.number().min(2).max(65).nullable().default(null),
+  /** Between the back of a crown moulding and the wall. */
+  crownSpringDeg: z.number().gt(0).lt(90).default(38),
   /** Which published rule set gives the verdicts; `shop` for the shop's own. */
   ruleSet: z.string().max(40),
 });
@@ -102,6 +107,9 @@ export const shopSettings = shopRules.extend({
 });
 export type ShopSettings = z.infer<typeof shopSettings>;
 
+/** The widest published limits (PS 1 at 1 1/4 in) lie 1.6 mm off the name: further off is another sheet. */
+const SHEET_OFF_MM = 2.5;
+
 const orderedFit = fitRules.superRefine((fit, ctx) => {
   const mustNotFall = (lesser: keyof FitRules, greater: keyof FitRules, message: string) => {
     if (Number(fit[lesser]) > Number(fit[greater])) {
@@ -113,6 +121,11 @@ const orderedFit = fitRules.superRefine((fit, ctx) => {
   mustNotFall('legMinMm', 'legMaxMm', 'The longest leg is shorter than the shortest.');
   mustNotFall('plumbFlagMm', 'plumbSeriousMm', 'Serious comes before the flag.');
   mustNotFall('piecesAskMm', 'piecesRefuseMm', 'Refusing comes before asking.');
+  const { sheetActualMm: actual, sheetNominalMm: nominal } = fit;
+  if (actual !== null && Math.abs(actual - nominal) > SHEET_OFF_MM) {
+    const message = 'That sheet is too far from its name. Read it again, or name another sheet.';
+    ctx.addIssue({ code: 'custom', path: ['sheetActualMm'], message });
+  }
 });
 
 const clock = /^([01]\d|2[0-3]):[0-5]\d$/;

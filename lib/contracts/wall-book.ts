@@ -352,6 +352,8 @@ export const unit = z.object({
     .default(null),
   /** A corner unit's arm along the other wall; left out: as its width. */
   armMm: z.number().positive().max(5_000).optional(),
+  /** Nominal sheet thicknesses that its width stacks (an applied panel is one); left out: built to its width. */
+  sheets: z.number().int().min(1).max(6).optional(),
   /** Clear height an appliance needs under the counter, from the maker's sheet. */
   needHeightMm: z.number().positive().max(3_000).optional(),
 });
@@ -383,6 +385,8 @@ export const run = z.object({
     .default({ how: 'equal' }),
   /** Runs that share a counter (and so one datum) carry the same mark; null stands alone. */
   counterGroup: text(20).nullable().default(null),
+  /** What closes the gap over the boxes; left out: a filler, where they end near the ceiling. */
+  overBoxes: z.enum(['open', 'filler', 'crown']).optional(),
   /** A finished end that shows: the set line leaves the least gap there first. */
   leastGapAt: z.enum(['left', 'right']).optional(),
   /** Stands free in the room, parallel to a set line: its two ends are open, and its back. */

@@ -1,6 +1,7 @@
 /** Everything the parts of a fit look things up in; built once from the wall book. */
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Run, WallBook } from '@/lib/contracts/wall-book';
+import { actualWidths } from '@/lib/measure/actual-widths';
 import { adjustBook } from '@/lib/measure/adjust-book';
 import { type AdjustedFrame, adjustedFrame } from '@/lib/measure/adjusted-frame';
 import type { AdjustedRoom } from '@/lib/measure/adjusted-room';
@@ -78,12 +79,13 @@ export function fitContext(wallBook: WallBook, runs: Run[], rules: FitRules): Fi
     if (frame) frames.set(wall.id, pushedFrame(frame, wall.id, toCome.faces));
   }
   const known = runs.filter((run) => walk.byId.has(run.wallId));
+  const actual = actualWidths(known, rules);
   return {
     book,
     walk,
     rules,
-    runs: known,
-    runById: new Map(known.map((run) => [run.id, run])),
+    runs: actual.runs,
+    runById: new Map(actual.runs.map((run) => [run.id, run])),
     lengths,
     corners,
     faces,
@@ -102,6 +104,7 @@ export function fitContext(wallBook: WallBook, runs: Run[], rules: FitRules): Fi
       ...roomProblems,
       ...toCome.problems,
       ...strandedRuns(runs, known),
+      ...actual.problems,
     ],
   };
 }

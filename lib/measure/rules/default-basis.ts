@@ -79,6 +79,9 @@ export const fitRuleBasis: Record<keyof FitRules, RuleBasis> = {
     'To 18 in one, 21 to 39 two, 42 to 48 three; top and bottom.',
   ),
   screwEdgeMm: practice('Keeps a screw out of the end grain of the rail.'),
+  sheetNominalMm: practice('3/4 in and 18 mm are what boxes are mostly made of.'),
+  sheetActualMm: practice('Nominal is not actual: read a sheet of each delivery.'),
+  crownSpringDeg: practice('38° against the wall (52° against the ceiling) is the usual crown.'),
   ruleSet: practice('The limits above, until the shop picks a published set.'),
 };
 

@@ -83,6 +83,9 @@ function inchRules(): FitRules {
       { toWidthMm: inches(48), studs: 3 },
     ],
     screwEdgeMm: inches(3 / 4),
+    sheetNominalMm: inches(3 / 4),
+    sheetActualMm: null,
+    crownSpringDeg: 38,
     ruleSet: 'shop',
   };
 }
@@ -136,6 +139,9 @@ function metricRules(region: Exclude<Region, 'US'>): FitRules {
       { toWidthMm: 1_220, studs: 3 },
     ],
     screwEdgeMm: 19,
+    sheetNominalMm: 18,
+    sheetActualMm: null,
+    crownSpringDeg: 38,
     ruleSet: 'shop',
   };
 }
