@@ -40,10 +40,10 @@ export async function sendOnePhoto(personId: string): Promise<Settled['next'] | 
 }
 
 async function post(photo: KeptPhoto, picture: Blob): Promise<Answer> {
-  const { id: fileId, roomId, wallId, takenAt, place, marks } = photo;
+  const { id: fileId, roomId, jobId = '', wallId, takenAt, place, marks } = photo;
   const said: AddPhotoInput = {
     fileId,
-    roomId,
+    ...(roomId === null ? { jobId } : { roomId }),
     takenAt,
     caption: captionOf(place, marks),
     ...(wallId === null ? {} : { wallId }),

@@ -8,7 +8,9 @@ import { keepPhoto } from './photo-store';
 import { scaledPhoto } from './scaled-photo';
 
 type TakePhotoProps = {
-  roomId: string;
+  roomId: string | null;
+  /** Needed where no room is drawn. */
+  jobId?: string;
   wallId: string | null;
   /** Where it is taken: "Wall B". */
   place: string;
@@ -17,7 +19,7 @@ type TakePhotoProps = {
 };
 
 /** Takes a photo with the phone's own camera, or one that was taken before, and keeps it at once. */
-export function TakePhoto({ roomId, wallId, place, onKept }: TakePhotoProps) {
+export function TakePhoto({ roomId, jobId, wallId, place, onKept }: TakePhotoProps) {
   const personId = usePersonId();
   const [isBusy, setIsBusy] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
@@ -37,6 +39,7 @@ export function TakePhoto({ roomId, wallId, place, onKept }: TakePhotoProps) {
         id,
         personId,
         roomId,
+        ...(jobId === undefined ? {} : { jobId }),
         wallId,
         place,
         takenAt: new Date().toISOString(),

@@ -8,7 +8,9 @@ export type KeptPhoto = PhotoSize & {
   /** Made on the phone; the office keeps it under the same. */
   id: string;
   personId: string;
-  roomId: string;
+  /** Null where no room is drawn: then the job is named. */
+  roomId: string | null;
+  jobId?: string;
   wallId: string | null;
   takenAt: string;
   /** Where it was taken, "Wall B". */

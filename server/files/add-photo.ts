@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import { and, eq } from 'drizzle-orm';
-import { files, rooms } from '@/db/schema';
+import { files, jobs, rooms } from '@/db/schema';
 import type { AddPhotoAnswer, AddPhotoInput } from '@/lib/contracts/files';
 import { cleanJpeg } from '@/lib/files/clean-jpeg';
 import { pictureKind } from '@/lib/files/picture-kind';
@@ -14,7 +14,7 @@ import { filesPort } from '@/server/ports/files/choose-files';
 const limit = { most: 300, windowSeconds: 3_600 };
 
 /**
- * Keeps a photo of a room, stripped of everything but the picture. Sent twice it is kept once. The bytes
+ * Keeps a photo of a room or a job, stripped of everything but the picture. Sent twice it is kept once. The bytes
  * are safe before the row says that they are there.
  */
 export async function addPhoto(
@@ -22,9 +22,9 @@ export async function addPhoto(
   input: AddPhotoInput & { bytes: Uint8Array },
 ): Promise<AddPhotoAnswer> {
   mustBeAllowed(ctx, 'walls:measure');
-  const { fileId, roomId, wallId = null } = input;
+  const { fileId, wallId = null } = input;
   await countTry(ctx.db, `photo:${ctx.actor.personId}`, limit, ctx.now);
-  const room = await findRoom(ctx, roomId);
+  const { jobId, roomId, placeWords } = await findPlace(ctx, input);
   const { bytes, widthPx, heightPx } = cleaned(input.bytes);
   const sha256 = createHash('sha256').update(bytes).digest('hex');
   const storageKey = `${ctx.shop.id}/${fileId}-${sha256.slice(0, 16)}.jpg`;
@@ -35,7 +35,7 @@ export async function addPhoto(
       .values({
         shopId: ctx.shop.id,
         id: fileId,
-        jobId: room.jobId,
+        jobId,
         roomId,
         wallId,
         name: `photo-${fileId.slice(0, 8)}.jpg`,
@@ -54,29 +54,41 @@ export async function addPhoto(
     if (added) {
       await writeAudit(tx, ctx, {
         verb: 'add-photo',
-        subjectKind: 'room',
-        subjectId: roomId,
-        jobId: room.jobId,
-        summary: `Took a photo in ${room.name}`,
+        subjectKind: roomId ? 'room' : 'job',
+        subjectId: roomId ?? jobId,
+        jobId,
+        summary: `Took a photo${placeWords}`,
       });
       return { fileId };
     }
     const [kept] = await tx
       .select({ sha256: files.sha256 })
       .from(files)
-      .where(and(eq(files.shopId, ctx.shop.id), eq(files.id, fileId), eq(files.roomId, roomId)));
+      .where(and(eq(files.shopId, ctx.shop.id), eq(files.id, fileId), eq(files.jobId, jobId)));
     if (kept?.sha256 !== sha256) throw idTaken();
     return { fileId };
   });
 }
 
-async function findRoom(ctx: PersonContext, roomId: string) {
+type Place = { jobId: string; roomId: string | null; placeWords: string };
+
+async function findPlace(ctx: PersonContext, { roomId, jobId }: AddPhotoInput): Promise<Place> {
+  if (roomId === undefined) return findJob(ctx, jobId ?? '');
   const [room] = await ctx.db
     .select({ jobId: rooms.jobId, name: rooms.name })
     .from(rooms)
     .where(and(eq(rooms.shopId, ctx.shop.id), eq(rooms.id, roomId)));
   if (!room) throw notFound('room');
-  return room;
+  return { jobId: room.jobId, roomId, placeWords: ` in ${room.name}` };
+}
+
+async function findJob(ctx: PersonContext, jobId: string): Promise<Place> {
+  const [job] = await ctx.db
+    .select({ id: jobs.id })
+    .from(jobs)
+    .where(and(eq(jobs.shopId, ctx.shop.id), eq(jobs.id, jobId)));
+  if (!job) throw notFound('job');
+  return { jobId, roomId: null, placeWords: '' };
 }
 
 function cleaned(bytes: Uint8Array) {

@@ -9,6 +9,7 @@ const folders = [
   'sheets',
   'messages',
   'visits',
+  'snags',
   'days',
   'files',
 ];

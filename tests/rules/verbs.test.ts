@@ -21,7 +21,7 @@ const guardedOtherwise: Record<string, string> = {
   replyAsCustomer: 'not there outside the demo',
 };
 
-const rooms = 'people|shops|jobs|walls|sheets|messages|visits|days|files|numbers|demo';
+const rooms = 'people|shops|jobs|walls|sheets|messages|visits|snags|days|files|numbers|demo';
 
 type Verb = { name: string; file: string };
 
