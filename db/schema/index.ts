@@ -8,5 +8,6 @@ export * from './sheets';
 export * from './shop';
 export * from './shops';
 export * from './snags';
+export * from './travel';
 export * from './visits';
 export * from './walls';
