@@ -1,6 +1,7 @@
 import { auth } from '@/server/base/auth';
+import { answering } from '@/server/base/handle';
 
-const pass = async (request: Request) => (await auth()).handler(request);
+const pass = answering(async (request) => (await auth()).handler(request));
 
 export const GET = pass;
 export const POST = pass;
