@@ -5,6 +5,7 @@ import { z } from 'zod';
 const schema = z.object({
   DATABASE_URL: z.string().optional(),
   SETWELL_DATA: z.string().default('.data'),
+  SETWELL_BACK_UPS: z.string().optional(),
   SETWELL_DEMO: z.enum(['0', '1']).default('0'),
   PUBLIC_URL: z.url().default('http://localhost:3000'),
   BETTER_AUTH_SECRET: z.string().min(16).optional(),
@@ -20,6 +21,7 @@ const schema = z.object({
 export type Env = {
   databaseUrl: string | null;
   dataDirectory: string;
+  backUpDirectory: string;
   demo: boolean;
   publicUrl: string;
   authSecret: string | null;
@@ -33,9 +35,12 @@ export type Env = {
 export function env(): Env {
   const read = schema.parse(process.env);
   const sms = read.SMS_ACCOUNT_SID && read.SMS_AUTH_TOKEN && read.SMS_FROM;
+  const fromHere = (folder: string) =>
+    path.resolve(/*turbopackIgnore: true*/ process.cwd(), folder);
   return {
     databaseUrl: read.DATABASE_URL || null,
-    dataDirectory: path.resolve(/*turbopackIgnore: true*/ process.cwd(), read.SETWELL_DATA),
+    dataDirectory: fromHere(read.SETWELL_DATA),
+    backUpDirectory: fromHere(read.SETWELL_BACK_UPS ?? path.join(read.SETWELL_DATA, 'back-ups')),
     demo: read.SETWELL_DEMO === '1',
     publicUrl: read.PUBLIC_URL.replace(/\/$/, ''),
     authSecret: read.BETTER_AUTH_SECRET ?? null,

@@ -1,4 +1,5 @@
 import { seedDemo } from '@/db/seed/seed-demo';
+import { startBackUps } from '@/server/base/back-ups/start-back-ups';
 import { database } from '@/server/base/database';
 import { env } from '@/server/base/env';
 import { log } from '@/server/base/log';
@@ -10,7 +11,7 @@ import { makeVisitLink } from '@/server/visits/visit-link';
 
 /** Once a process, before the first request is answered. */
 export async function startUp(): Promise<void> {
-  const { building, demo } = env();
+  const { building, demo, dataDirectory, backUpDirectory } = env();
   if (building) return;
   const open = await database();
   await getPorts();
@@ -22,11 +23,12 @@ export async function startUp(): Promise<void> {
     });
   }
   const stopWorker = startWorker(composeVisitMessage);
+  const stopBackUps = startBackUps(open, { dataDirectory, backUpDirectory });
   log('started', { database: open.kind, demo });
 
   for (const signal of ['SIGTERM', 'SIGINT'] as const) {
     process.once(signal, async () => {
-      await stopWorker();
+      await Promise.all([stopWorker(), stopBackUps()]);
       await open.close();
       log('stopped');
       process.exit(0);
