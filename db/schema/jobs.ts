@@ -27,6 +27,8 @@ export const customers = pgTable(
       .default('en'),
     /** The number that the provider said takes no texts; another number may be tried again. */
     untextablePhone: text('untextable_phone').notNull().default(''),
+    /** The row stays for the numbers; who it was is gone. */
+    erasedAt: instant('erased_at'),
     createdAt: createdAt(),
   },
   (table) => [
@@ -65,6 +67,18 @@ export const consents = pgTable(
     }),
     index('consents_newest').on(table.customerId, table.channel, table.sequence),
   ],
+);
+
+/** A refusal that outlives its customer: the address is kept only as a keyed hash, to be known again. */
+export const keptRefusals = pgTable(
+  'kept_refusals',
+  {
+    ...shopColumns(),
+    channel: text('channel', { enum: ['sms', 'email'] }).notNull(),
+    addressHash: text('address_hash').notNull(),
+    at: instant('at').notNull(),
+  },
+  (table) => [unique('kept_refusals_once').on(table.shopId, table.channel, table.addressHash)],
 );
 
 export const sites = pgTable(
