@@ -89,6 +89,7 @@ export const apiPaths = {
   visits: () => '/api/visits',
   visit: (visitId: string) => `/api/visits/${part(visitId)}`,
   callOffVisit: (visitId: string) => `/api/visits/${part(visitId)}/call-off`,
+  undoVisitChange: (visitId: string) => `/api/visits/${part(visitId)}/undo`,
   reportVisit: (visitId: string) => `/api/visits/${part(visitId)}/report`,
   /** What a crew tells from site, many taps in one request. */
   dayEvents: () => '/api/days/events',
@@ -105,9 +106,23 @@ export const apiPaths = {
   signOffCopy: (signOffId: string) => `/api/sign-offs/${part(signOffId)}/copy`,
   today: (date?: string) => (date ? `/api/days/today?date=${part(date)}` : '/api/days/today'),
   openings: () => '/api/openings',
+  /** Keeps an opening for fifteen minutes; a held time is taken or let go. */
+  holdOpening: () => '/api/openings/hold',
+  takeHeldTime: () => '/api/openings/take',
+  letGoHeldTime: () => '/api/openings/let-go',
+  /** A better order of a day's stops: asked for, and accepted. */
+  planDay: () => '/api/days/plan',
+  acceptDayPlan: () => '/api/days/plan/accept',
+  /** The shop is late: what it moves, and all of it accepted at once. */
+  slipPreview: () => '/api/slips/preview',
+  acceptSlip: () => '/api/slips/accept',
   waiting: () => '/api/waiting',
   crews: () => '/api/crews',
   crew: (crewId: string) => `/api/crews/${part(crewId)}`,
+  /** The line of a day's drive. */
+  travel: () => '/api/travel',
+  /** Where a typed address is. */
+  geocode: () => '/api/geocode',
   rules: () => '/api/rules',
   messages: () => '/api/messages',
 
