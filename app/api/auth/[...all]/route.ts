@@ -1,7 +1,8 @@
 import { auth } from '@/server/base/auth';
 import { answering } from '@/server/base/handle';
 
-const pass = answering(async (request) => (await auth()).handler(request));
+const answer = answering(async (request) => (await auth()).handler(request));
+const pass = (request: Request) => answer(request);
 
 export const GET = pass;
 export const POST = pass;
