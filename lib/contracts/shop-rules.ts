@@ -92,6 +92,8 @@ export const bookingRules = z.object({
   quietFrom: z.string().regex(/^\d\d:\d\d$/),
   quietUntil: z.string().regex(/^\d\d:\d\d$/),
 });
+  /** The speed of drives that no road service answered for. */
+  driveKmPerHour: z.number().min(5).max(130).default(45),
 export type BookingRules = z.infer<typeof bookingRules>;
 
 export const shopRules = z.object({ fit: fitRules, booking: bookingRules });

@@ -14,6 +14,8 @@ const schema = z.object({
   SMS_FROM: z.string().optional(),
   SMTP_URL: z.string().optional(),
   EMAIL_FROM: z.string().default('Setwell <no-reply@setwell.example>'),
+  TRAVEL_URL: z.url().optional(),
+  GEOCODE_URL: z.url().optional(),
   NODE_ENV: z.enum(['development', 'test', 'production']).default('development'),
   NEXT_PHASE: z.string().optional(),
 });
@@ -31,6 +33,8 @@ export type Env = {
   production: boolean;
   building: boolean;
 };
+  travelUrl: string | null;
+  geocodeUrl: string | null;
 
 export function env(): Env {
   const read = schema.parse(process.env);
@@ -57,3 +61,5 @@ export function env(): Env {
     building: read.NEXT_PHASE === 'phase-production-build',
   };
 }
+    travelUrl: read.TRAVEL_URL ?? null,
+    geocodeUrl: read.GEOCODE_URL ?? null,

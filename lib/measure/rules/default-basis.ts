@@ -97,4 +97,5 @@ export const bookingRuleBasis: Record<keyof BookingRules, RuleBasis> = {
   installMinutesPerUnit: basis('T01 T03', 'medium', 'One box, one hour.'),
   quietFrom: basis('', 'strong', '47 CFR 64.1200(c)(1): no messages after 21:00 local time.'),
   quietUntil: basis('', 'strong', '47 CFR 64.1200(c)(1): no messages before 08:00 local time.'),
+  driveKmPerHour: practice('Towns, lanes and main roads of a working day together.'),
 };

@@ -158,5 +158,6 @@ function bookingRules(): BookingRules {
     installMinutesPerUnit: 60,
     quietFrom: '21:00',
     quietUntil: '08:00',
+    driveKmPerHour: 45,
   };
 }
