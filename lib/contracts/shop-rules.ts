@@ -91,12 +91,17 @@ export const bookingRules = z.object({
   installMinutesPerUnit: z.number().int().min(10).max(480),
   quietFrom: z.string().regex(/^\d\d:\d\d$/),
   quietUntil: z.string().regex(/^\d\d:\d\d$/),
-});
   /** The speed of drives that no road service answered for. */
   driveKmPerHour: z.number().min(5).max(130).default(45),
+});
 export type BookingRules = z.infer<typeof bookingRules>;
 
-export const shopRules = z.object({ fit: fitRules, booking: bookingRules });
+export const shopRules = z.object({
+  fit: fitRules,
+  booking: bookingRules,
+  /** Left out: the usual lists. */
+  checklists: checklistRules.optional(),
+});
 export type ShopRules = z.infer<typeof shopRules>;
 
 /** What the shop is called, where it is, and all of its rules. */

@@ -13,9 +13,9 @@ const schema = z.object({
   SMS_AUTH_TOKEN: z.string().optional(),
   SMS_FROM: z.string().optional(),
   SMTP_URL: z.string().optional(),
-  EMAIL_FROM: z.string().default('Setwell <no-reply@setwell.example>'),
   TRAVEL_URL: z.url().optional(),
   GEOCODE_URL: z.url().optional(),
+  EMAIL_FROM: z.string().default('Setwell <no-reply@setwell.example>'),
   NODE_ENV: z.enum(['development', 'test', 'production']).default('development'),
   NEXT_PHASE: z.string().optional(),
 });
@@ -30,11 +30,11 @@ export type Env = {
   sms: { accountSid: string; authToken: string; from: string } | null;
   smtpUrl: string | null;
   emailFrom: string;
+  travelUrl: string | null;
+  geocodeUrl: string | null;
   production: boolean;
   building: boolean;
 };
-  travelUrl: string | null;
-  geocodeUrl: string | null;
 
 export function env(): Env {
   const read = schema.parse(process.env);
@@ -57,9 +57,9 @@ export function env(): Env {
       : null,
     smtpUrl: read.SMTP_URL || null,
     emailFrom: read.EMAIL_FROM,
+    travelUrl: read.TRAVEL_URL ?? null,
+    geocodeUrl: read.GEOCODE_URL ?? null,
     production: read.NODE_ENV === 'production',
     building: read.NEXT_PHASE === 'phase-production-build',
   };
 }
-    travelUrl: read.TRAVEL_URL ?? null,
-    geocodeUrl: read.GEOCODE_URL ?? null,
