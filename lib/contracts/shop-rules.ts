@@ -96,12 +96,7 @@ export const bookingRules = z.object({
 });
 export type BookingRules = z.infer<typeof bookingRules>;
 
-export const shopRules = z.object({
-  fit: fitRules,
-  booking: bookingRules,
-  /** Left out: the usual lists. */
-  checklists: checklistRules.optional(),
-});
+export const shopRules = z.object({ fit: fitRules, booking: bookingRules });
 export type ShopRules = z.infer<typeof shopRules>;
 
 /** What the shop is called, where it is, and all of its rules. */
