@@ -63,6 +63,7 @@ function describe(
   solution: Solution,
 ): AdjustedRoom {
   const { state, rows, cofactor } = solution;
+  const { checks, alarmW, reliability } = checkObservations(observations, solution);
   const value = weightedSquares(solution);
   const degreesOfFreedom = rows.length - state.layout.unknownCount;
   const limit = chiSquareLimit(degreesOfFreedom, ALPHA);
@@ -72,8 +73,9 @@ function describe(
     walls: adjustedWalls(solution, observations),
     angles: adjustedAngles(solution, observations),
     chiSquare: { value, degreesOfFreedom, limit, passes: degreesOfFreedom <= 0 || value <= limit },
-    ...checkObservations(observations, solution),
-    system: { room, observations, options, rows, cofactor, state },
+    checks,
+    alarmW,
+    system: { room, observations, options, rows, cofactor, state, reliability },
   };
 }
 

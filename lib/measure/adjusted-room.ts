@@ -1,5 +1,6 @@
 /** What the room adjustment gives, and what the blunder search and `settle` work on. */
 import type { Figure } from './figure';
+import type { Reliability } from './reliability';
 import type { AdjustOptions, CornerEnd, RoomObservation, RoomShape } from './room-observations';
 import type { RoomState } from './room-state';
 
@@ -69,6 +70,8 @@ export type SolvedSystem = {
   /** Inverse of the normal matrix. */
   cofactor: Float64Array[];
   state: RoomState;
+  /** Of the observations, without the priors. */
+  reliability: Reliability;
 };
 export type SparseRow = {
   columns: number[];

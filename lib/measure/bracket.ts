@@ -11,7 +11,9 @@ export function bracket<P>(
   positionOf: (point: P) => number,
   at: number,
 ): Bracket<P> | null {
-  for (const [index, to] of line.entries()) {
+  for (let index = 0; index < line.length; index++) {
+    const to = line[index];
+    if (to === undefined) return null;
     const position = positionOf(to);
     if (position < at) continue;
     if (position === at) return { from: to, to, share: 0 };

@@ -1,7 +1,7 @@
 /** Beside every reading: its residual, how well the others check it, and the least slip they would show. */
 import type { ObservationCheck } from './adjusted-room';
 import { chiSquareLimit } from './chi-square';
-import { reliabilityOf, tiesOf, UNCHECKED } from './reliability';
+import { type Reliability, reliabilityOf, tiesOf, UNCHECKED } from './reliability';
 import type { RoomObservation } from './room-observations';
 import { degrees } from './room-state';
 import type { Solution } from './solve-room';
@@ -15,11 +15,11 @@ export const HARDLY_CHECKED = 0.1;
 /** Chance that all the tests w of a sound room together raise an alarm. */
 const FALSE_ALARM = 0.005;
 
-/** Checks in the order of the observations, and the |w| that raises an alarm in this room. */
+/** Checks in the order of the observations, the |w| that raises an alarm in this room, and what both rest on. */
 export function checkObservations(
   observations: RoomObservation[],
   { rows, residuals, cofactor }: Pick<Solution, 'rows' | 'residuals' | 'cofactor'>,
-): { checks: ObservationCheck[]; alarmW: number } {
+): { checks: ObservationCheck[]; alarmW: number; reliability: Reliability } {
   const reliability = reliabilityOf(rows, observations.length, cofactor);
   const { closest, independentTests } = tiesOf(reliability);
   const checks = observations.map((observation, i) => {
@@ -43,7 +43,7 @@ export function checkObservations(
       tellable: checked && SEEN_WITH_POWER ** 2 * (1 - (closest[i] ?? 0) ** 2) > EQUAL_FIT,
     };
   });
-  return { checks, alarmW: alarmLevel(independentTests) };
+  return { checks, alarmW: alarmLevel(independentTests), reliability };
 }
 
 /**

@@ -27,15 +27,28 @@ export function figureCombination(known: Figure): Combination {
 export function combine(terms: [weight: number, term: Combination][]): Combination {
   let value = 0;
   const parts: Part[] = [];
-  for (const [weight, term] of terms) {
+  for (let t = 0; t < terms.length; t++) {
+    const [weight, term] = terms[t] ?? NOTHING;
     value += weight * term.value;
-    for (const { source, weight: inner } of term.parts) {
-      const known = parts.find((part) => part.source === source);
-      if (known) known.weight += weight * inner;
-      else parts.push({ source, weight: weight * inner });
+    for (let p = 0; p < term.parts.length; p++) {
+      const part = term.parts[p];
+      if (part) addPart(parts, part.source, weight * part.weight);
     }
   }
   return { value, parts };
+}
+
+const NOTHING: [number, Combination] = [0, { value: 0, parts: [] }];
+
+/** A plain loop: combinations are made by the thousand in a fit, of a few parts each. */
+function addPart(parts: Part[], source: ErrorSource, weight: number): void {
+  for (let p = 0; p < parts.length; p++) {
+    const known = parts[p];
+    if (known?.source !== source) continue;
+    known.weight += weight;
+    return;
+  }
+  parts.push({ source, weight });
 }
 
 /**

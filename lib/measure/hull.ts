@@ -8,23 +8,29 @@ export type HullPoint = { at: number; s: number };
  * Source: monotone chain (Andrew 1979).
  */
 export function upperHull<P extends HullPoint>(points: P[]): P[] {
-  const sorted = [...points].sort((a, b) => a.at - b.at || b.s - a.s);
+  return boundary(points, 1);
+}
+
+/** Lower boundary: the mirror image of `upperHull`. */
+export function lowerHull<P extends HullPoint>(points: P[]): P[] {
+  return boundary(points, -1);
+}
+
+/** `up`: 1 for the upper boundary, −1 for the lower. */
+function boundary<P extends HullPoint>(points: P[], up: 1 | -1): P[] {
+  const sorted = [...points].sort((a, b) => a.at - b.at || up * (b.s - a.s));
   const hull: P[] = [];
   for (const point of sorted) {
-    if (hull.length > 0 && hull.at(-1)?.at === point.at) continue;
-    while (hull.length >= 2 && !turnsDown(hull.at(-2), hull.at(-1), point)) hull.pop();
+    if (hull[hull.length - 1]?.at === point.at) continue;
+    while (hull.length >= 2 && !turnsIn(hull, point, up)) hull.pop();
     hull.push(point);
   }
   return hull;
 }
 
-/** Lower boundary: the mirror image of `upperHull`. */
-export function lowerHull<P extends HullPoint>(points: P[]): P[] {
-  const mirrored = points.map((point) => ({ at: point.at, s: -point.s, point }));
-  return upperHull(mirrored).map(({ point }) => point);
-}
-
-function turnsDown(a: HullPoint | undefined, b: HullPoint | undefined, c: HullPoint): boolean {
+/** Whether the last point stands out from the straight line between the one before it and the next. */
+function turnsIn(hull: HullPoint[], c: HullPoint, up: 1 | -1): boolean {
+  const [a, b] = [hull[hull.length - 2], hull[hull.length - 1]];
   if (!a || !b) return true;
-  return (b.s - a.s) * (c.at - a.at) > (c.s - a.s) * (b.at - a.at);
+  return up * (b.s - a.s) * (c.at - a.at) > up * (c.s - a.s) * (b.at - a.at);
 }

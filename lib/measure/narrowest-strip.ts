@@ -1,6 +1,6 @@
 import { type Bracket, bracket } from './bracket';
 import { type Combination, combine, readCombination } from './combination';
-import { lowerHull, upperHull } from './hull';
+import { type HullPoint, lowerHull, upperHull } from './hull';
 import type { ProfilePoint } from './profile';
 
 /** A place of a profile with what it was made of (a reading, or a value between two). */
@@ -26,14 +26,7 @@ export function stripPoint({ id, atMm, sMm, u }: ProfilePoint): StripPoint {
  * Source: minimum zone, ISO 1101 / ISO 12780 (2-1 contact); the argument is elementary.
  */
 export function narrowestStrip(points: StripPoint[]): Strip | null {
-  const upper = upperHull(points);
-  const lower = lowerHull(points);
-  let atMm: number | null = null;
-  let width = -Infinity;
-  for (const { at } of [...upper, ...lower]) {
-    const apart = heightAt(upper, at) - heightAt(lower, at);
-    if (apart > width) [width, atMm] = [apart, at];
-  }
+  const { upper, lower, atMm } = widestOf(points);
   if (atMm === null) return null;
   const [above, below] = [slopesAt(upper, atMm), slopesAt(lower, atMm)];
   return {
@@ -46,7 +39,26 @@ export function narrowestStrip(points: StripPoint[]): Strip | null {
   };
 }
 
-function heightAt(hull: StripPoint[], at: number): number {
+/** The width alone, for choosing among many strips; −∞ without points. */
+export function stripWidth(points: HullPoint[]): number {
+  return widestOf(points).width;
+}
+
+function widestOf<P extends HullPoint>(points: P[]) {
+  const upper = upperHull(points);
+  const lower = lowerHull(points);
+  let atMm: number | null = null;
+  let width = -Infinity;
+  for (const hull of [upper, lower]) {
+    for (const { at } of hull) {
+      const apart = heightAt(upper, at) - heightAt(lower, at);
+      if (apart > width) [width, atMm] = [apart, at];
+    }
+  }
+  return { upper, lower, atMm, width };
+}
+
+function heightAt(hull: HullPoint[], at: number): number {
   const edge = bracket(hull, positionOf, at);
   return edge === null ? Number.NaN : edge.from.s + edge.share * (edge.to.s - edge.from.s);
 }
@@ -55,7 +67,7 @@ function placeAt(hull: StripPoint[], at: number): Combination {
   return placeOn(bracket(hull, positionOf, at));
 }
 
-function positionOf({ at }: StripPoint): number {
+function positionOf({ at }: HullPoint): number {
   return at;
 }
 
@@ -72,9 +84,9 @@ export function placeOn(edge: Bracket<{ c: Combination }> | null): Combination {
 /** Slopes of the boundary just left and right of a place; none past its ends. */
 function slopesAt(hull: StripPoint[], at: number): { left: number | null; right: number | null } {
   let left: number | null = null;
-  for (const [index, to] of hull.entries()) {
-    const from = hull[index - 1];
-    if (!from) continue;
+  for (let index = 1; index < hull.length; index++) {
+    const [from, to] = [hull[index - 1], hull[index]];
+    if (!from || !to) continue;
     const slope = (to.s - from.s) / (to.at - from.at);
     if (to.at >= at && from.at < at) left = slope;
     if (from.at <= at && to.at > at) return { left, right: slope };

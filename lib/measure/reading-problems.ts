@@ -13,19 +13,29 @@ export function givenFigure(known: Figure | null): Given {
 
 /** Readings no engine can work with: not a number, past any room, or an uncertainty below 0. */
 export function unreadable(given: Given[]): Problem[] {
-  return given.flatMap(({ id, values, u }) => {
-    const about = id === null ? [] : [id];
-    if (!values.every(Number.isFinite)) {
-      return [
-        problem('reading-not-a-number', 'This reading is not a number. Take it again.', about),
-      ];
-    }
-    if (values.some((value) => Math.abs(value) > PAST_ANY_ROOM)) {
-      const words = 'This reading is past the size of any room. Take it again.';
-      return [problem('reading-out-of-range', words, about)];
-    }
-    if (u >= 0 && u <= PAST_ANY_ROOM) return [];
-    const words = 'How sure this reading is cannot be told. Check its tool.';
-    return [problem('uncertainty-not-known', words, about)];
-  });
+  const problems: Problem[] = [];
+  for (const one of given) {
+    if (!isReadable(one)) problems.push(problemOf(one));
+  }
+  return problems;
+}
+
+function isReadable({ values, u }: Given): boolean {
+  for (let i = 0; i < values.length; i++) {
+    if (!(Math.abs(values[i] ?? 0) <= PAST_ANY_ROOM)) return false;
+  }
+  return u >= 0 && u <= PAST_ANY_ROOM;
+}
+
+function problemOf({ id, values }: Given): Problem {
+  const about = id === null ? [] : [id];
+  if (!values.every(Number.isFinite)) {
+    return problem('reading-not-a-number', 'This reading is not a number. Take it again.', about);
+  }
+  if (values.some((value) => Math.abs(value) > PAST_ANY_ROOM)) {
+    const words = 'This reading is past the size of any room. Take it again.';
+    return problem('reading-out-of-range', words, about);
+  }
+  const words = 'How sure this reading is cannot be told. Check its tool.';
+  return problem('uncertainty-not-known', words, about);
 }

@@ -1,16 +1,16 @@
 /** How readings check each other: redundancy numbers and the correlation of their tests. */
 import type { SparseRow } from './adjusted-room';
-import { project, spread } from './row-products';
+import { project, spreadInto } from './row-products';
 
 /** Below this a redundancy is rounding: nothing checks the reading at all. */
 export const UNCHECKED = 1e-9;
 
 export type Reliability = {
-  sigmas: number[];
+  sigmas: Float64Array;
   /** aᵢ·Q·aⱼᵀ for the observations i, j. */
   shared: Float64Array[];
   /** 0: nothing checks it; 1: fully checked by the others. */
-  redundancies: number[];
+  redundancies: Float64Array;
 };
 
 /** Reliability of the first `count` rows of a solved system (the rest are priors). */
@@ -19,15 +19,25 @@ export function reliabilityOf(
   count: number,
   cofactor: Float64Array[],
 ): Reliability {
-  const own = rows.slice(0, count);
-  const sigmas = own.map((row) => row.sigma);
-  const shared = own.map((row) => {
-    const spreadRow = spread(cofactor, row);
-    const line = new Float64Array(count);
-    for (let j = 0; j < count; j++) line[j] = project(own[j] ?? row, spreadRow);
-    return line;
-  });
-  const redundancies = shared.map((line, i) => redundancyFrom(line[i] ?? 0, sigmas[i] ?? 1));
+  const sigmas = new Float64Array(count);
+  const redundancies = new Float64Array(count);
+  const shared: Float64Array[] = [];
+  for (let i = 0; i < count; i++) shared.push(new Float64Array(count));
+  const spreadRow = new Float64Array(cofactor.length);
+  for (let i = 0; i < count; i++) {
+    const [row, line] = [rows[i], shared[i]];
+    if (!row || !line) continue;
+    spreadInto(spreadRow, cofactor, row);
+    // Both halves are one: the cofactor matrix is symmetric.
+    for (let j = i; j < count; j++) {
+      const value = project(rows[j] ?? row, spreadRow);
+      const other = shared[j];
+      line[j] = value;
+      if (other) other[i] = value;
+    }
+    sigmas[i] = row.sigma;
+    redundancies[i] = redundancyFrom(line[i] ?? 0, row.sigma);
+  }
   return { sigmas, shared, redundancies };
 }
 
@@ -37,19 +47,23 @@ export function redundancyFrom(variance: number, sigma: number): number {
 
 export type Ties = {
   /** Greatest |correlation| of each observation's test with another's. */
-  closest: number[];
+  closest: Float64Array;
   /** As many independent tests would raise as many false alarms: tests that move together count once. */
   independentTests: number;
 };
 
 export function tiesOf({ sigmas, shared, redundancies }: Reliability): Ties {
   const count = redundancies.length;
-  const closest = new Array<number>(count).fill(0);
-  const together: number[] = redundancies.map((r) => (r > UNCHECKED ? 1 : 0));
+  const closest = new Float64Array(count);
+  const together = new Float64Array(count);
   // 1 / (σ √r), or 0 for what is unchecked: a tie is then a product of three numbers.
-  const scale = redundancies.map((r, i) =>
-    r > UNCHECKED ? 1 / ((sigmas[i] ?? 1) * Math.sqrt(r)) : 0,
-  );
+  const scale = new Float64Array(count);
+  for (let i = 0; i < count; i++) {
+    const r = redundancies[i] ?? 0;
+    if (r <= UNCHECKED) continue;
+    together[i] = 1;
+    scale[i] = 1 / ((sigmas[i] ?? 1) * Math.sqrt(r));
+  }
   for (let i = 0; i < count; i++) {
     const line = shared[i];
     for (let j = i + 1; j < count; j++) {
@@ -60,6 +74,7 @@ export function tiesOf({ sigmas, shared, redundancies }: Reliability): Ties {
       together[j] = (together[j] ?? 0) + tie * tie;
     }
   }
-  const independentTests = together.reduce((sum, n) => (n >= 1 ? sum + 1 / n : sum), 0);
+  let independentTests = 0;
+  for (const n of together) if (n >= 1) independentTests += 1 / n;
   return { closest, independentTests };
 }

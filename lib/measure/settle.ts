@@ -1,7 +1,7 @@
 /** Which one further reading would tell most: a diagonal, or the same reading again. */
-import type { AdjustedRoom, FurtherReading, SparseRow } from './adjusted-room';
-import { furtherReadings, isTaped } from './further-readings';
-import { type Reliability, redundancyFrom, reliabilityOf, UNCHECKED } from './reliability';
+import type { AdjustedRoom, FurtherReading } from './adjusted-room';
+import { type FurtherRow, furtherReadings, isTaped } from './further-readings';
+import { type Reliability, redundancyFrom, UNCHECKED } from './reliability';
 import { project, spread } from './row-products';
 
 /** Steps that gain at least this share of the best are as good; the cheapest of them comes first. */
@@ -45,8 +45,7 @@ export type SettleStep = {
  * recalled; the ranking is ours.
  */
 export function settle(room: AdjustedRoom, options: SettleOptions = {}): SettleStep[] {
-  const { rows, cofactor, observations } = room.system;
-  const reliability = reliabilityOf(rows, observations.length, cofactor);
+  const { observations, reliability } = room.system;
   const weighed = observations.flatMap((o, i) =>
     isTaped(o) && (!options.suspects || options.suspects.includes(i)) ? [i] : [],
   );
@@ -55,9 +54,9 @@ export function settle(room: AdjustedRoom, options: SettleOptions = {}): SettleS
   );
   const ask: Ask = { weighed, slips: options.suspects ? slips : null };
   const before = worthOf(reliability, ask, null);
-  const steps = furtherReadings(room, options).map(({ reading, row }) => ({
-    reading,
-    after: worthOf(reliability, ask, changeBy(room, row)),
+  const steps = furtherReadings(room, options).map((further) => ({
+    reading: further.reading,
+    after: worthOf(reliability, ask, changeBy(room, further)),
   }));
   return inOrder(steps, before, options).map(({ reading, after }) => ({
     reading,
@@ -101,8 +100,12 @@ type Worth = { least: number; sum: number; leastRedundancy: number };
 /** What one more reading takes from aᵢQaⱼ: pullᵢ·pullⱼ/total, a rank-one change of the cofactor matrix. */
 type Change = { pull: Float64Array; total: number };
 
-function changeBy(room: AdjustedRoom, row: SparseRow): Change {
-  const { rows, cofactor, observations } = room.system;
+function changeBy(room: AdjustedRoom, { reading, row }: FurtherRow): Change {
+  const { rows, cofactor, observations, reliability } = room.system;
+  if (reading.kind === 'again') {
+    const pull = reliability.shared[reading.observation] ?? new Float64Array(observations.length);
+    return { pull, total: row.sigma ** 2 + (pull[reading.observation] ?? 0) };
+  }
   const spreadRow = spread(cofactor, row);
   const pull = new Float64Array(observations.length);
   for (let i = 0; i < pull.length; i++) pull[i] = project(rows[i] ?? row, spreadRow);
@@ -119,15 +122,15 @@ function worthOf({ sigmas, shared }: Reliability, ask: Ask, change: Change | nul
     const now = shared[i]?.[j] ?? 0;
     return change ? now - ((change.pull[i] ?? 0) * (change.pull[j] ?? 0)) / change.total : now;
   };
-  const redundancies = sigmas.map((sigma, i) => redundancyFrom(sharedBy(i, i), sigma));
+  const redundancyOf = (i: number) => redundancyFrom(sharedBy(i, i), sigmas[i] ?? 1);
   const worth = { least: 1, sum: 0, leastRedundancy: 1 };
   for (const i of weighed) {
-    const redundancy = redundancies[i] ?? 0;
+    const redundancy = redundancyOf(i);
     let clear = redundancy;
     if (slips) {
       let tied = 0;
       for (const j of weighed) {
-        const other = redundancies[j] ?? 0;
+        const other = redundancyOf(j);
         if (j === i || redundancy <= UNCHECKED || other <= UNCHECKED) continue;
         const scale = (sigmas[i] ?? 1) * (sigmas[j] ?? 1);
         tied = Math.max(tied, (sharedBy(i, j) / scale) ** 2 / (redundancy * other));

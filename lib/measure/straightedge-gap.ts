@@ -1,8 +1,15 @@
 import { type Outcome, problem, refused } from '@/lib/problem';
-import { bracket } from './bracket';
-import { type Combination, combinationFigure, combine } from './combination';
+import { type Bracket, bracket } from './bracket';
+import { combinationFigure, combine } from './combination';
 import type { Figure } from './figure';
-import { narrowestStrip, placeOn, type StripPoint, stripPoint } from './narrowest-strip';
+import type { HullPoint } from './hull';
+import {
+  narrowestStrip,
+  placeOn,
+  type StripPoint,
+  stripPoint,
+  stripWidth,
+} from './narrowest-strip';
 import type { ProfilePoint } from './profile';
 import { unreadable } from './reading-problems';
 
@@ -14,6 +21,9 @@ export type StraightedgeGap = {
   /** The row is shorter than the straightedge and was taken whole. */
   wholeRow: boolean;
 };
+
+/** Gaps within this are one, and the first place shows it: phone and server choose alike. */
+const SAME_GAP_MM = 1e-6;
 
 /**
  * Greatest gap under a straightedge of one length laid anywhere on a row and rocked so that its largest
@@ -48,13 +58,14 @@ export function straightedgeGap(
   }
   const wholeRow = last.at - first.at <= edgeLengthMm;
   const length = wholeRow ? last.at - first.at : edgeLengthMm;
-  let best: { width: Combination; from: number } | null = null;
+  let best = { width: Number.NEGATIVE_INFINITY, from: first.at };
   for (const from of placesToLay(profile, length)) {
-    const width = narrowestStrip(windowOf(profile, from, length))?.width;
-    if (width && (best === null || width.value > best.width.value + 1e-12)) best = { width, from };
+    const width = stripWidth(levelsIn(profile, from, length));
+    if (width > best.width + SAME_GAP_MM) best = { width, from };
   }
-  const fromMm = best?.from ?? first.at;
-  const gap = combinationFigure(best?.width ?? { value: 0, parts: [] });
+  const { from: fromMm } = best;
+  const strip = narrowestStrip(windowOf(profile, fromMm, length));
+  const gap = combinationFigure(strip?.width ?? { value: 0, parts: [] });
   return { value: { gap, fromMm, toMm: fromMm + length, wholeRow }, problems: [] };
 }
 
@@ -115,14 +126,36 @@ function pieceAt(profile: StripPoint[], at: number): { slope: number; at0: numbe
   return { slope, at0: from.s - slope * from.at };
 }
 
+/** The window's places without what they were made of: there are many windows, and one that counts. */
+function levelsIn(profile: StripPoint[], from: number, length: number): HullPoint[] {
+  const inside: HullPoint[] = [levelAt(profile, from)];
+  for (const point of profile) {
+    if (point.at > from && point.at < from + length) inside.push(point);
+  }
+  inside.push(levelAt(profile, from + length));
+  return inside;
+}
+
+function levelAt(profile: StripPoint[], at: number): HullPoint {
+  const edge = edgeAt(profile, at);
+  return { at, s: edge ? (1 - edge.share) * edge.from.s + edge.share * edge.to.s : Number.NaN };
+}
+
 function windowOf(profile: StripPoint[], from: number, length: number): StripPoint[] {
   const inside = profile.filter(({ at }) => at > from && at < from + length);
   return [valueAt(profile, from), ...inside, valueAt(profile, from + length)];
 }
 
 function valueAt(profile: StripPoint[], at: number): StripPoint {
-  // The right end may miss the last reading by rounding.
-  const reach = Math.min(at, profile.at(-1)?.at ?? at);
-  const c = placeOn(bracket(profile, (point) => point.at, reach));
+  const c = placeOn(edgeAt(profile, at));
   return { at, s: c.value, c };
+}
+
+/** The right end may miss the last reading by rounding. */
+function edgeAt(profile: StripPoint[], at: number): Bracket<StripPoint> | null {
+  return bracket(profile, placeAlong, Math.min(at, profile.at(-1)?.at ?? at));
+}
+
+function placeAlong({ at }: StripPoint): number {
+  return at;
 }

@@ -134,6 +134,20 @@ describe('straightedgeGap', () => {
     expect(value?.gap.u).toBeCloseTo(0.3674, 4);
   });
 
+  it('takes a shorter row whole wherever its readings lie along the wall', () => {
+    for (let shift = 0; shift < 700; shift += 13.37) {
+      const points = [0, 450.1, 900.7].map((at, i) => ({
+        id: `r${i}`,
+        atMm: shift + at,
+        sMm: i === 1 ? 1.5 : 0,
+        u: 0.3,
+      }));
+      const { value } = straightedgeGap(points, 2_000);
+      expect(value?.wholeRow).toBe(true);
+      expect(value?.gap.value).toBeCloseTo(1.5, 9);
+    }
+  });
+
   it('takes a shorter row whole', () => {
     expect(straightedgeGap(row([0, 3, 0]), 3000).value).toMatchObject({
       fromMm: 0,
