@@ -1,5 +1,6 @@
 /** Shop rules: what the shop decides. Each default's basis is in `lib/measure/rules`. */
 import { z } from 'zod';
+import { checklistRules } from './checklists';
 
 const mmValue = z.number().finite().min(0).max(5_000);
 
@@ -96,7 +97,12 @@ export const bookingRules = z.object({
 });
 export type BookingRules = z.infer<typeof bookingRules>;
 
-export const shopRules = z.object({ fit: fitRules, booking: bookingRules });
+export const shopRules = z.object({
+  fit: fitRules,
+  booking: bookingRules,
+  /** Left out: the usual lists. */
+  checklists: checklistRules.optional(),
+});
 export type ShopRules = z.infer<typeof shopRules>;
 
 /** What the shop is called, where it is, and all of its rules. */
@@ -155,5 +161,7 @@ export const changeShopRulesInput = z.object({
   zone: z.string().min(1).max(60).optional(),
   fit: orderedFit.optional(),
   booking: orderedBooking.optional(),
+  /** A kind that is left out goes back to the usual list. */
+  checklists: checklistRules.optional(),
 });
 export type ChangeShopRulesInput = z.infer<typeof changeShopRulesInput>;

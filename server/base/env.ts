@@ -9,6 +9,7 @@ const schema = z.object({
   SETWELL_DEMO: z.enum(['0', '1']).default('0'),
   PUBLIC_URL: z.url().default('http://localhost:3000'),
   BETTER_AUTH_SECRET: z.string().min(16).optional(),
+  SETWELL_SEALING_KEY: z.string().min(16).optional(),
   SMS_ACCOUNT_SID: z.string().optional(),
   SMS_AUTH_TOKEN: z.string().optional(),
   SMS_FROM: z.string().optional(),
@@ -27,6 +28,8 @@ export type Env = {
   demo: boolean;
   publicUrl: string;
   authSecret: string | null;
+  /** For access codes and signatures; without it they hang on the signing secret. */
+  sealingKey: string | null;
   sms: { accountSid: string; authToken: string; from: string } | null;
   smtpUrl: string | null;
   emailFrom: string;
@@ -48,6 +51,7 @@ export function env(): Env {
     demo: read.SETWELL_DEMO === '1',
     publicUrl: read.PUBLIC_URL.replace(/\/$/, ''),
     authSecret: read.BETTER_AUTH_SECRET ?? null,
+    sealingKey: read.SETWELL_SEALING_KEY || null,
     sms: sms
       ? {
           accountSid: read.SMS_ACCOUNT_SID as string,

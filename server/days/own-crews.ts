@@ -1,4 +1,5 @@
 import { and, eq, inArray, type SQL } from 'drizzle-orm';
+import type { Database } from '@/db/database';
 import { crewPeople, visits } from '@/db/schema';
 import type { PersonContext } from '@/server/base/context';
 
@@ -11,4 +12,23 @@ export function ofOwnCrews(ctx: PersonContext): SQL | undefined {
     .from(crewPeople)
     .where(and(eq(crewPeople.shopId, ctx.shop.id), eq(crewPeople.personId, personId)));
   return inArray(visits.crewId, own);
+}
+
+/** Whether this person is of that crew, whatever the role. */
+export async function isOfOwnCrew(
+  db: Database,
+  ctx: PersonContext,
+  crewId: string,
+): Promise<boolean> {
+  const [own] = await db
+    .select({ crewId: crewPeople.crewId })
+    .from(crewPeople)
+    .where(
+      and(
+        eq(crewPeople.shopId, ctx.shop.id),
+        eq(crewPeople.crewId, crewId),
+        eq(crewPeople.personId, ctx.actor.personId),
+      ),
+    );
+  return own !== undefined;
 }

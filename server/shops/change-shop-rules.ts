@@ -23,8 +23,12 @@ export async function changeShopRules(
       .where(isThisShop)
       .for('update');
     if (!before) throw new Error('the shop is gone');
-    const { fit, booking } = input;
-    const rules = { fit: fit ?? before.rules.fit, booking: booking ?? before.rules.booking };
+    const { fit, booking, checklists } = input;
+    const rules = {
+      fit: fit ?? before.rules.fit,
+      booking: booking ?? before.rules.booking,
+      checklists: checklists ?? before.rules.checklists,
+    };
     const [after] = await tx
       .update(shops)
       .set({ name: input.name, phone, email: input.email, zone: input.zone, rules })

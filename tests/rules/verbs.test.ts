@@ -13,6 +13,7 @@ const guardedOtherwise: Record<string, string> = {
   switchShop: 'one’s own shops only',
   getCustomerVisit: 'the link is the permission',
   getCustomerCalendar: 'the link is the permission',
+  getCustomerCopy: 'the link is the permission',
   answerByForm: 'the link is the permission',
   handleSmsWebhook: 'the provider’s signature',
   hearSms: 'called behind handleSmsWebhook',
