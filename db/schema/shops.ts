@@ -1,6 +1,10 @@
+import { sql } from 'drizzle-orm';
 import {
+  check,
+  date,
   doublePrecision,
   foreignKey,
+  index,
   jsonb,
   pgTable,
   primaryKey,
@@ -10,6 +14,8 @@ import {
 } from 'drizzle-orm/pg-core';
 import type { Tool } from '@/lib/contracts/wall-book';
 import { roles } from '@/lib/permissions';
+import type { VisitKind } from '@/lib/schedule/visit-kind';
+import type { CrewPattern } from '@/lib/schedule/working-pattern';
 import { user } from './auth';
 import { createdAt, instant, shopColumns } from './columns';
 
@@ -64,6 +70,12 @@ export const crews = pgTable(
     does: text('does', { enum: ['measure', 'fit'] }).notNull(),
     /** One of the crew colours of the look, by number. */
     colour: text('colour', { enum: ['1', '2', '3', '4', '5', '6'] }).notNull(),
+    /** Kinds of visit that it goes out for; empty: all that its `does` includes. */
+    kinds: jsonb('kinds').$type<VisitKind[]>().notNull().default([]),
+    /** Its own days and hours; null: the shop's. */
+    pattern: jsonb('pattern').$type<CrewPattern>(),
+    /** Where its day begins and ends. */
+    baseAddress: text('base_address').notNull().default(''),
     baseLatitude: doublePrecision('base_latitude'),
     baseLongitude: doublePrecision('base_longitude'),
     createdAt: createdAt(),
@@ -80,6 +92,8 @@ export const crewPeople = pgTable(
     shopId: text('shop_id').notNull(),
     crewId: uuid('crew_id').notNull(),
     personId: uuid('person_id').notNull(),
+    /** ISO weekdays on which they go with this crew; null: every day. */
+    weekdays: jsonb('weekdays').$type<number[]>(),
   },
   (table) => [
     primaryKey({ columns: [table.crewId, table.personId] }),
@@ -93,6 +107,64 @@ export const crewPeople = pgTable(
       columns: [table.shopId, table.personId],
       foreignColumns: [people.shopId, people.id],
     }).onDelete('cascade'),
+  ],
+);
+
+/** Days on which a person does not work: first and last, both off. */
+export const daysOff = pgTable(
+  'days_off',
+  {
+    ...shopColumns(),
+    personId: uuid('person_id').notNull(),
+    firstDay: date('first_day', { mode: 'string' }).notNull(),
+    lastDay: date('last_day', { mode: 'string' }).notNull(),
+    /** In the office's words; nobody outside it reads them. */
+    reason: text('reason').notNull().default(''),
+    createdAt: createdAt(),
+  },
+  (table) => [
+    check('days_off_in_order', sql`${table.lastDay} >= ${table.firstDay}`),
+    foreignKey({
+      name: 'days_off_person',
+      columns: [table.shopId, table.personId],
+      foreignColumns: [people.shopId, people.id],
+    }).onDelete('cascade'),
+    index('days_off_by_person').on(table.shopId, table.personId, table.lastDay),
+  ],
+);
+
+/** A calendar that others' programs fetch by its address: of a crew or of a person. Only the token's hash is kept. */
+export const calendarFeeds = pgTable(
+  'calendar_feeds',
+  {
+    ...shopColumns(),
+    crewId: uuid('crew_id'),
+    personId: uuid('person_id'),
+    tokenHash: text('token_hash').notNull(),
+    madeBy: uuid('made_by').notNull(),
+    createdAt: createdAt(),
+    revokedAt: instant('revoked_at'),
+    lastReadAt: instant('last_read_at'),
+  },
+  (table) => [
+    unique('calendar_feeds_token').on(table.tokenHash),
+    check('calendar_feeds_of_one', sql`num_nonnulls(${table.crewId}, ${table.personId}) = 1`),
+    foreignKey({
+      name: 'calendar_feeds_crew',
+      columns: [table.shopId, table.crewId],
+      foreignColumns: [crews.shopId, crews.id],
+    }).onDelete('cascade'),
+    foreignKey({
+      name: 'calendar_feeds_person',
+      columns: [table.shopId, table.personId],
+      foreignColumns: [people.shopId, people.id],
+    }).onDelete('cascade'),
+    foreignKey({
+      name: 'calendar_feeds_made_by',
+      columns: [table.shopId, table.madeBy],
+      foreignColumns: [people.shopId, people.id],
+    }),
+    index('calendar_feeds_by_shop').on(table.shopId),
   ],
 );
 

@@ -58,6 +58,8 @@ export const visits = pgTable(
     leftAt: instant('left_at'),
     /** Rises with every change; a stale one is refused. */
     version: integer('version').notNull().default(1),
+    /** Set by the database with each change (see drizzle/, `visits_changed_at`). */
+    changedAt: instant('changed_at').notNull().defaultNow(),
     createdAt: createdAt(),
   },
   (table) => [
