@@ -17,7 +17,7 @@ type BookDialogProps = {
   item: WaitingItem;
   crews: readonly CrewView[];
   /** Where it was dropped, or the first day it may take place. */
-  start: { date: string; time: string };
+  start: { date: string; time: string; crewId?: string };
   onClose: () => void;
   onBooked: (date: string) => void;
 };
@@ -26,7 +26,7 @@ type BookDialogProps = {
 export function BookDialog({ item, crews, start, onClose, onBooked }: BookDialogProps) {
   const able = crews.filter((crew) => crew.does === doesKind[item.kind]);
   const [placing, setPlacing] = useState<Placing>({
-    crewId: able[0]?.id ?? '',
+    crewId: able.find(({ id }) => id === start.crewId)?.id ?? able[0]?.id ?? '',
     date: start.date,
     time: start.time,
     workMinutes: item.workMinutes,

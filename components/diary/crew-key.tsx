@@ -1,35 +1,57 @@
+import { Button } from '@/components/ui/button';
 import type { CrewView } from '@/lib/contracts/visits';
+import { visitKinds } from '@/lib/schedule/visit-kind';
+import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { crewColour } from './crew-colour';
+import type { DiaryFilter } from './diary-filter';
 import { KindMark } from './kind-mark';
 
-/** The key above the calendar, which is also its filter: a crew's box ticked is a crew shown. */
-export function CrewKey({
-  crews,
-  shownCrewIds,
-  onToggle,
-}: {
-  crews: readonly CrewView[];
-  shownCrewIds: ReadonlySet<string>;
-  onToggle: (crewId: string) => void;
-}) {
+/** The key above the diary, which is also its filter: what is ticked is shown. */
+export function CrewKey({ crews, filter }: { crews: readonly CrewView[]; filter: DiaryFilter }) {
   return (
-    <div className="flex flex-wrap items-center gap-x-4 gap-y-1 py-2 text-note">
+    <div className="flex flex-wrap items-center gap-x-4 gap-y-1 py-2 text-note print:hidden">
       {crews.map((crew) => (
-        <label key={crew.id} className="inline-flex cursor-pointer items-center gap-1.5">
+        <label key={crew.id} className="inline-flex min-h-6 cursor-pointer items-center gap-1.5">
           <input
             type="checkbox"
             className="size-3.5 accent-current"
             style={{ color: crewColour(crew.colour), accentColor: crewColour(crew.colour) }}
-            checked={shownCrewIds.has(crew.id)}
-            onChange={() => onToggle(crew.id)}
+            checked={filter.showsCrew(crew.id)}
+            onChange={() => filter.toggleCrew(crew.id)}
           />
           {crew.name}
         </label>
       ))}
-      <span className="text-graphite">
-        dashed: no answer yet · <KindMark kind="site-measure" isNamed /> measure ·{' '}
-        <KindMark kind="install" isNamed /> install · <KindMark kind="return" isNamed /> return
-      </span>
+      <details className="relative">
+        <summary className="min-h-6 cursor-pointer text-graphite hover:text-ink">Kinds</summary>
+        <div className="absolute left-0 z-20 mt-1 w-48 rounded border border-ink bg-sheet p-2">
+          {visitKinds.map((kind) => (
+            <label key={kind} className="flex min-h-7 cursor-pointer items-center gap-2">
+              <input
+                type="checkbox"
+                className="size-3.5 accent-pine"
+                checked={filter.showsKind(kind)}
+                onChange={() => filter.toggleKind(kind)}
+              />
+              <KindMark kind={kind} isNamed /> {visitKindWords[kind]}
+            </label>
+          ))}
+        </div>
+      </details>
+      <label className="inline-flex min-h-6 cursor-pointer items-center gap-1.5">
+        <input
+          type="checkbox"
+          className="size-3.5 accent-ochre"
+          checked={filter.onlyOpen}
+          onChange={filter.toggleOnlyOpen}
+        />
+        <span className="border border-dashed border-graphite px-1">no answer yet</span> only
+      </label>
+      {filter.isAnythingHidden ? (
+        <Button look="plain" className="min-h-6 px-1 py-0 text-note" onClick={filter.showAll}>
+          Some are hidden: show all
+        </Button>
+      ) : null}
     </div>
   );
 }

@@ -1,6 +1,12 @@
 'use client';
 
-import type { DatesSetArg, EventClickArg, EventContentArg, EventDropArg } from '@fullcalendar/core';
+import type {
+  DatesSetArg,
+  EventClickArg,
+  EventContentArg,
+  EventDropArg,
+  EventMountArg,
+} from '@fullcalendar/core';
 import dayGridPlugin from '@fullcalendar/daygrid';
 import interactionPlugin, {
   type DropArg,
@@ -11,24 +17,28 @@ import FullCalendar from '@fullcalendar/react';
 import timeGridPlugin from '@fullcalendar/timegrid';
 import { type RefObject, useMemo } from 'react';
 import type { CrewView, VisitView } from '@/lib/contracts/visits';
+import type { WorkingPattern } from '@/lib/time/workdays';
 import './diary-calendar.css';
 import { diaryEvents, type EventDetail } from './diary-events';
 import { reachByKey } from './reach-by-key';
 import { VisitEvent } from './visit-event';
 
-export type DiaryView = 'dayGridMonth' | 'timeGridWeek' | 'timeGridDay';
+export type CalendarView = 'dayGridMonth' | 'timeGridWeek' | 'timeGridDay';
+
+export type CalendarRange = { from: string; to: string; title: string; on: string };
 
 type DiaryCalendarProps = {
   calendarRef: RefObject<FullCalendar | null>;
   zone: string;
-  view: DiaryView;
+  view: CalendarView;
   startOn: string;
-  hours: { dayStart: string; dayEnd: string; workdays: number[] };
+  hours: WorkingPattern;
   visits: readonly VisitView[];
   crews: readonly CrewView[];
-  shownCrewIds: ReadonlySet<string>;
+  /** What is only thought of: an opening that is looked at. */
+  ghost: VisitView | null;
   mayBook: boolean;
-  onRange: (range: { from: string; to: string; title: string; view: DiaryView }) => void;
+  onRange: (range: CalendarRange) => void;
   onOpen: (visit: VisitView) => void;
   /** Dropped from the waiting list: local date, and time where the view has hours. */
   onDrop: (waitingKey: string, date: string, time: string | null) => void;
@@ -42,19 +52,29 @@ const plugins = [dayGridPlugin, timeGridPlugin, interactionPlugin, momentTimezon
 const clock = { hour: '2-digit', minute: '2-digit', hour12: false } as const;
 const views = { dayGridMonth: { dayHeaderFormat: { weekday: 'short' } } } as const;
 const drawVisit = ({ event, view }: EventContentArg) => {
-  const { visit, pieceNumber = 1 } = event.extendedProps as Partial<EventDetail>;
+  const { visit, pieceNumber = 1, isGhost = false } = event.extendedProps as Partial<EventDetail>;
   // On its way from the waiting list it is no visit yet.
   if (!visit) return <div className="visit-box">{event.title}</div>;
   const isCompact = view.type === 'dayGridMonth';
-  return <VisitEvent detail={{ visit, pieceNumber }} isCompact={isCompact} />;
+  return <VisitEvent detail={{ visit, pieceNumber, isGhost }} isCompact={isCompact} />;
+};
+
+/** Keys find the visit that has the focus by this. */
+const nameVisit = ({ el, event }: EventMountArg) => {
+  const { visit, isGhost } = event.extendedProps as Partial<EventDetail>;
+  if (visit && !isGhost) el.dataset.visitId = visit.id;
 };
 
 export function DiaryCalendar(props: DiaryCalendarProps) {
-  const { visits, crews, shownCrewIds, mayBook, hours } = props;
+  const { visits, crews, ghost, mayBook, hours } = props;
   // A new array at each render would snap a dragged visit back.
   const events = useMemo(
-    () => diaryEvents(visits, crews, shownCrewIds, mayBook),
-    [visits, crews, shownCrewIds, mayBook],
+    () =>
+      diaryEvents(ghost ? [...visits, ghost] : visits, crews, {
+        mayMove: mayBook,
+        ghostId: ghost?.id ?? null,
+      }),
+    [visits, crews, ghost, mayBook],
   );
   const businessHours = useMemo(
     () => ({
@@ -93,11 +113,13 @@ export function DiaryCalendar(props: DiaryCalendarProps) {
       dayMaxEvents={5}
       droppable={mayBook}
       events={events}
+      eventInteractive
       viewDidMount={reachByKey}
       eventContent={drawVisit}
       eventClick={({ event, jsEvent }: EventClickArg) => {
         jsEvent.preventDefault();
-        props.onOpen((event.extendedProps as EventDetail).visit);
+        const { visit, isGhost } = event.extendedProps as EventDetail;
+        if (!isGhost) props.onOpen(visit);
       }}
       drop={({ draggedEl, dateStr, allDay }: DropArg) => {
         const key = draggedEl.getAttribute('data-waiting');
@@ -112,12 +134,13 @@ export function DiaryCalendar(props: DiaryCalendarProps) {
         const minutes = (Number(event.end) - Number(event.start)) / 60_000;
         props.onStretch(visit, minutes, revert);
       }}
+      eventDidMount={nameVisit}
       datesSet={({ startStr, endStr, view }: DatesSetArg) =>
         props.onRange({
           from: startStr.slice(0, 10),
           to: endStr.slice(0, 10),
           title: view.title,
-          view: view.type as DiaryView,
+          on: view.calendar.formatIso(view.calendar.getDate()).slice(0, 10),
         })
       }
     />
@@ -134,7 +157,7 @@ function dayHead({ date }: { date: { year: number; month: number; day: number } 
 }
 
 /** Weekends are folded away where the shop never works them. */
-function hiddenDays(workdays: number[]): number[] {
+function hiddenDays(workdays: readonly number[]): number[] {
   return [6, 7].filter((day) => !workdays.includes(day)).map((day) => day % 7);
 }
 

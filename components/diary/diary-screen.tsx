@@ -1,18 +1,21 @@
 'use client';
 
-import type FullCalendar from '@fullcalendar/react';
 import { useQueryClient } from '@tanstack/react-query';
-import { useEffect, useRef, useState } from 'react';
-import { usePageKeys } from '@/components/shell/page-keys';
+import { useMemo, useState } from 'react';
 import { ErrorState } from '@/components/ui/error-state';
 import type { CrewView, VisitView, WaitingItem } from '@/lib/contracts/visits';
+import type { WorkingPattern } from '@/lib/time/workdays';
 import { BookDialog } from './book-dialog';
 import { CrewKey } from './crew-key';
-import { DiaryCalendar, type DiaryView } from './diary-calendar';
+import { useDiaryFilter } from './diary-filter';
 import { DiaryHead } from './diary-head';
-import { localStart } from './local-start';
-import { useMovedByHand } from './use-moved-by-hand';
-import { useShownCrews } from './use-shown-crews';
+import { DiarySheet } from './diary-sheet';
+import { useDiaryView } from './diary-view';
+import { placeOf } from './place';
+import { RefusedMoveDialog } from './refused-move-dialog';
+import { useDiaryKeys } from './use-diary-keys';
+import { useDiaryRange } from './use-diary-range';
+import { useMover } from './use-mover';
 import { VisitDialog } from './visit-dialog';
 import { useVisits } from './visits-query';
 import { WaitingList } from './waiting-list';
@@ -20,107 +23,99 @@ import { waitingQuery } from './waiting-query';
 
 export type DiaryScreenProps = {
   zone: string;
+  today: string;
   /** Local date to open on, today unless the address says otherwise. */
   startOn: string;
-  hours: { dayStart: string; dayEnd: string; workdays: number[] };
+  pattern: WorkingPattern;
   crews: CrewView[];
   mayBook: boolean;
 };
 
-type Booking = { item: WaitingItem; date: string; time: string };
+type Booking = { item: WaitingItem; date: string; time: string; crewId?: string };
 
 /** The diary beside its waiting list: the scheduler's whole screen. */
-export function DiaryScreen({ zone, startOn, hours, crews, mayBook }: DiaryScreenProps) {
-  const calendarRef = useRef<FullCalendar>(null);
-  const [range, setRange] = useState({ from: startOn, to: startOn, title: '' });
-  const [view, setView] = useState<DiaryView>('timeGridWeek');
-  const [opened, setOpened] = useState<VisitView | null>(null);
+export function DiaryScreen(props: DiaryScreenProps) {
+  const { zone, today, startOn, pattern, crews, mayBook } = props;
+  const [shown, show] = useDiaryView();
+  const range = useDiaryRange(startOn, shown);
+  const filter = useDiaryFilter(crews);
+  const mover = useMover({ zone, pattern, crews });
+  const { data, error } = useVisits(range);
+  const visits = useMemo(
+    () => mover.draw((data ?? []).filter(filter.shows)),
+    [data, filter.shows, mover.draw],
+  );
+  const [openedId, setOpenedId] = useState<string | null>(null);
   const [booking, setBooking] = useState<Booking | null>(null);
-  const { shownCrewIds, toggle } = useShownCrews(crews);
-  const { data: visits = [], error } = useVisits(range);
+  const opened = data?.find(({ id }) => id === openedId) ?? null;
   const client = useQueryClient();
-  const startOf = (visit: VisitView) => localStart(visit.startsAt, zone);
-  const moveByHand = useMovedByHand(startOf);
 
-  const calendar = () => calendarRef.current?.getApi();
-  const show = (next: DiaryView) => calendar()?.changeView(next);
   const waiting = () => client.getQueryData(waitingQuery.queryKey) ?? [];
-  const openBooking = (item: WaitingItem, date?: string, time?: string | null) =>
+  const openBooking = (item: WaitingItem, at: Partial<Booking> = {}) =>
     setBooking({
       item,
-      date: date ?? (item.from && item.from > startOn ? item.from : startOn),
-      time: time ?? hours.dayStart,
+      date: at.date ?? (item.from && item.from > today ? item.from : today),
+      time: at.time ?? pattern.dayStart,
+      ...(at.crewId ? { crewId: at.crewId } : {}),
     });
+  const dropWaiting = (key: string, at: Partial<Booking>) => {
+    const item = waiting().find(({ jobId, kind }) => `${jobId}/${kind}` === key);
+    if (item) openBooking(item, at);
+  };
+  const original = (visit: VisitView) => data?.find(({ id }) => id === visit.id) ?? visit;
 
-  usePageKeys('Diary', [
-    { keys: 'ArrowLeft', words: 'Earlier', run: () => calendar()?.prev() },
-    { keys: 'ArrowRight', words: 'Later', run: () => calendar()?.next() },
-    { keys: 't', words: 'Today', run: () => calendar()?.gotoDate(startOn) },
-    { keys: 'm', words: 'Month', run: () => show('dayGridMonth') },
-    { keys: 'w', words: 'Week', run: () => show('timeGridWeek') },
-    { keys: 'd', words: 'Day', run: () => show('timeGridDay') },
-    ...[1, 2, 3, 4, 5, 6, 7, 8, 9].map((digit) => ({
-      keys: String(digit),
-      words: `Book number ${digit} of the waiting list`,
-      run: () => {
-        const item = waiting()[digit - 1];
-        if (item && mayBook) openBooking(item);
-      },
-    })),
-  ]);
-
-  // A phone has room for one day.
-  useEffect(() => {
-    if (window.innerWidth < 768)
-      queueMicrotask(() => calendarRef.current?.getApi().changeView('timeGridDay'));
-  }, []);
+  const onVisitKey = useDiaryKeys({
+    today,
+    range,
+    show,
+    shop: { pattern, crews },
+    visitOf: (id) => data?.find((visit) => visit.id === id),
+    nudge: mayBook ? mover.nudge : null,
+    openWaiting: (index) => {
+      const item = waiting()[index];
+      if (item && mayBook) openBooking(item);
+    },
+  });
 
   return (
-    <div className="grid gap-6 lg:h-[calc(100dvh-2rem)] lg:grid-cols-[minmax(0,1fr)_20rem]">
+    <div className="diary-sheet grid gap-6 lg:h-[calc(100dvh-2rem)] lg:grid-cols-[minmax(0,1fr)_20rem] print:block print:h-auto">
       <section aria-label="Diary" className="flex min-h-[70dvh] min-w-0 flex-col lg:min-h-0">
         <DiaryHead
           title={range.title}
-          view={view}
-          onView={show}
-          onEarlier={() => calendar()?.prev()}
-          onToday={() => calendar()?.gotoDate(startOn)}
-          onLater={() => calendar()?.next()}
+          shown={shown}
+          onShow={show}
+          onEarlier={() => range.step(-1)}
+          onToday={() => range.goTo(today)}
+          onLater={() => range.step(1)}
         />
-        <CrewKey crews={crews} shownCrewIds={shownCrewIds} onToggle={toggle} />
+        <CrewKey crews={crews} filter={filter} />
         {error ? (
           <ErrorState title="The diary could not be fetched">
             What is shown may be old. It is tried again by itself.
           </ErrorState>
         ) : null}
-        <div className="min-h-0 flex-1">
-          <DiaryCalendar
-            {...{ calendarRef, zone, view, startOn, hours, visits, crews, shownCrewIds, mayBook }}
-            onRange={({ from, to, title, view: shown }) =>
-              queueMicrotask(() => {
-                setRange((shownNow) =>
-                  shownNow.from === from && shownNow.to === to && shownNow.title === title
-                    ? shownNow
-                    : { from, to, title },
-                );
-                setView(shown);
-              })
-            }
-            onOpen={setOpened}
-            onDrop={(key, date, time) => {
-              const item = waiting().find(({ jobId, kind }) => `${jobId}/${kind}` === key);
-              if (item) openBooking(item, date, time);
-            }}
-            onMove={(visit, date, time, takeBack) =>
-              void moveByHand(visit, { date, time, workMinutes: visit.workMinutes }, takeBack)
-            }
-            onStretch={(visit, workMinutes, takeBack) =>
-              void moveByHand(visit, { ...startOf(visit), workMinutes }, takeBack)
-            }
-          />
-        </div>
+        <DiarySheet
+          {...{ zone, today, pattern, shown, range, visits, mayBook, onVisitKey }}
+          crews={crews}
+          shownCrews={filter.shownCrews}
+          ghost={null}
+          onOpen={({ id }) => setOpenedId(id)}
+          onDay={(date) => {
+            range.goTo(date);
+            show({ view: 'day' });
+          }}
+          onMove={(visit, change) =>
+            mover.send(original(visit), { ...placeOf(original(visit), zone), ...change })
+          }
+          onDropWaiting={dropWaiting}
+        />
       </section>
-      <aside className="flex min-h-0 flex-col border-rule lg:border-l lg:pl-5">
-        <WaitingList mayBook={mayBook} onBook={openBooking} />
+      <aside className="flex min-h-0 flex-col border-rule lg:border-l lg:pl-5 print:hidden">
+        <WaitingList
+          mayBook={mayBook}
+          isCalendarShown={shown.view !== 'crews'}
+          onBook={openBooking}
+        />
       </aside>
       {booking ? (
         <BookDialog
@@ -130,17 +125,28 @@ export function DiaryScreen({ zone, startOn, hours, crews, mayBook }: DiaryScree
           onClose={() => setBooking(null)}
           onBooked={(date) => {
             setBooking(null);
-            calendar()?.gotoDate(date);
+            range.goTo(date);
           }}
         />
       ) : null}
       {opened ? (
         <VisitDialog
           visit={opened}
-          start={startOf(opened)}
+          start={placeOf(opened, zone)}
           crews={crews}
           mayBook={mayBook}
-          onClose={() => setOpened(null)}
+          onClose={() => setOpenedId(null)}
+        />
+      ) : null}
+      {mover.refused ? (
+        <RefusedMoveDialog
+          refused={mover.refused}
+          crews={crews}
+          onClose={mover.forgetRefused}
+          onAgain={(visit, place, reason) => {
+            mover.forgetRefused();
+            void mover.send(visit, place, reason);
+          }}
         />
       ) : null}
     </div>

@@ -5,7 +5,7 @@ import { statusWords } from './visit-words';
 
 /** A visit as it stands in the diary: whom, where, what, and whether they said yes. */
 export function VisitEvent({
-  detail: { visit, pieceNumber },
+  detail: { visit, pieceNumber, isGhost },
   isCompact,
 }: {
   detail: EventDetail;
@@ -37,7 +37,7 @@ export function VisitEvent({
         <>
           <em>in: {visit.windowWords}</em>
           <span className="visit-status">
-            <Verdict kind={verdict}>{words}</Verdict>
+            {isGhost ? 'would be here' : <Verdict kind={verdict}>{words}</Verdict>}
           </span>
           {visit.customerSays ? <em className="text-ochre">“{visit.customerSays}”</em> : null}
         </>

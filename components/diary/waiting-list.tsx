@@ -13,9 +13,12 @@ import { useWaiting } from './waiting-query';
 /** Jobs that need a visit booked, each with from when or why not yet. Dragged into the diary, or opened. */
 export function WaitingList({
   mayBook,
+  isCalendarShown,
   onBook,
 }: {
   mayBook: boolean;
+  /** The calendar takes what is dragged by its own means; the crews' board has its own. */
+  isCalendarShown: boolean;
   onBook: (item: WaitingItem) => void;
 }) {
   const { data: items, error, isPending } = useWaiting();
@@ -23,7 +26,7 @@ export function WaitingList({
   const hasItems = Boolean(items?.length);
 
   useEffect(() => {
-    if (!listRef.current || !mayBook || !hasItems) return;
+    if (!listRef.current || !mayBook || !hasItems || !isCalendarShown) return;
     const draggable = new Draggable(listRef.current, {
       itemSelector: '[data-waiting]',
       eventData: (element) => ({
@@ -33,7 +36,7 @@ export function WaitingList({
       }),
     });
     return () => draggable.destroy();
-  }, [mayBook, hasItems]);
+  }, [mayBook, hasItems, isCalendarShown]);
 
   return (
     <section aria-labelledby="waiting-title" className="flex min-h-0 flex-col">

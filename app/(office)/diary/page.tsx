@@ -16,12 +16,14 @@ export default async function DiaryPage({
   const ctx = await pageContext('visits:read');
   const { on } = await searchParams;
   const { zone, rules } = ctx.shop;
-  const { dayStart, dayEnd, workdays } = rules.booking;
+  const { dayStart, dayEnd, workdays, closedDays } = rules.booking;
+  const today = localDate(ctx.now, zone);
   return (
     <DiaryScreen
       zone={zone}
-      startOn={on && isLocalDate(on) ? on : localDate(ctx.now, zone)}
-      hours={{ dayStart, dayEnd, workdays }}
+      today={today}
+      startOn={on && isLocalDate(on) ? on : today}
+      pattern={{ dayStart, dayEnd, workdays, closedDays }}
       crews={await listCrews(ctx)}
       mayBook={may(ctx.actor.role, 'visits:book')}
     />

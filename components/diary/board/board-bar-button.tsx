@@ -1,0 +1,79 @@
+import { KindMark } from '@/components/diary/kind-mark';
+import { localStart } from '@/components/diary/local-start';
+import { canChange, isOpen } from '@/components/diary/place';
+import { minutesWords, statusWords } from '@/components/diary/visit-words';
+import { Glyph } from '@/components/ui/glyph';
+import type { VisitView } from '@/lib/contracts/visits';
+import { visitKindWords } from '@/lib/schedule/visit-kind-words';
+import type { Zone } from '@/lib/time/zones';
+import type { BoardBar } from './board-bars';
+
+/** A visit on the board. Its right edge stretches it; keys do both as well. */
+export function BoardBarButton({
+  bar,
+  zone,
+  isGhost,
+  isShort,
+  mayMove,
+  onOpen,
+}: {
+  bar: BoardBar;
+  zone: Zone;
+  isGhost: boolean;
+  isShort: boolean;
+  mayMove: boolean;
+  onOpen: (visit: VisitView) => void;
+}) {
+  const { visit, firstColumn, lastColumn, lane, restColumns } = bar;
+  const { words, verdict } = statusWords[visit.status];
+  const { time } = localStart(visit.startsAt, zone);
+  const isMovable = mayMove && canChange(visit) && !isGhost;
+  const columns = lastColumn - firstColumn + 1;
+  return (
+    <button
+      type="button"
+      className="board-bar"
+      style={{ gridColumn: `${firstColumn + 2} / ${lastColumn + 3}`, gridRow: lane + 2 }}
+      data-visit-id={isGhost ? undefined : visit.id}
+      data-movable={isMovable || undefined}
+      data-open={isOpen(visit) || undefined}
+      data-ghost={isGhost || undefined}
+      data-cut-before={bar.isCutBefore || undefined}
+      data-cut-after={bar.isCutAfter || undefined}
+      aria-label={`${visitKindWords[visit.kind]}: ${visit.customerName}, ${visit.street}, ${visit.dayWords} ${time}, ${minutesWords(visit.workMinutes)}, ${visit.crewName}, ${words}`}
+      onClick={isGhost ? undefined : () => onOpen(visit)}
+    >
+      {restColumns.map((column) => (
+        <span
+          key={column}
+          aria-hidden="true"
+          className="board-rest"
+          style={{
+            left: `${((column - firstColumn) / columns) * 100}%`,
+            width: `${100 / columns}%`,
+          }}
+        />
+      ))}
+      <span className="board-bar-line">
+        <KindMark kind={visit.kind} isNamed />
+        <Glyph name={verdict} className="board-status" />
+        <b>{visit.customerName}</b>
+        <span className="board-more">, {visit.street}</span>
+      </span>
+      {isShort ? null : (
+        <span className="board-bar-line board-detail">
+          {time} · {isGhost ? 'would be here' : minutesWords(visit.workMinutes)}
+          <span className="board-more"> · {visit.jobTitle}</span>
+        </span>
+      )}
+      {visit.customerSays && !isShort ? (
+        <span className="board-bar-line board-says">“{visit.customerSays}”</span>
+      ) : null}
+      <span className="board-print">
+        {visit.windowWords} · {words}
+        {visit.phone ? ` · ${visit.phone}` : ''}
+      </span>
+      {isMovable && !bar.isCutAfter ? <span className="board-stretch" aria-hidden="true" /> : null}
+    </button>
+  );
+}

@@ -1,0 +1,35 @@
+import { formatLocalDay } from '@/lib/time/format-civil';
+import type { BoardDay } from './board-days';
+import { dayHeadWords } from './day-head-words';
+
+/** The days across the top; each opens that day. */
+export function BoardHead({
+  days,
+  today,
+  onDay,
+}: {
+  days: readonly BoardDay[];
+  today: string;
+  onDay: (date: string) => void;
+}) {
+  return (
+    <div className="board-line board-head">
+      <span className="board-name" />
+      {days.map((day) => (
+        <button
+          key={day.date}
+          type="button"
+          className="board-day-name"
+          data-today={day.date === today || undefined}
+          data-week-start={day.isWeekStart || undefined}
+          aria-label={`Open ${formatLocalDay(day.date, { language: 'en', region: 'UK' })}`}
+          onClick={() => onDay(day.date)}
+        >
+          <b>{dayHeadWords(day.date)}</b>
+          {day.date === today ? <em>today</em> : null}
+          {day.isWorked ? null : <em>closed</em>}
+        </button>
+      ))}
+    </div>
+  );
+}

@@ -1,0 +1,71 @@
+import { crewColour } from '@/components/diary/crew-colour';
+import type { CrewView, VisitView } from '@/lib/contracts/visits';
+import { localDate } from '@/lib/time/local-moment';
+import type { WorkingPattern } from '@/lib/time/workdays';
+import type { Zone } from '@/lib/time/zones';
+import { BoardBarButton } from './board-bar-button';
+import { boardBars } from './board-bars';
+import type { BoardDay } from './board-days';
+import { crewDay } from './crew-day';
+import { CrewDayCell } from './crew-day-cell';
+
+type BoardRowProps = {
+  crew: CrewView;
+  days: readonly BoardDay[];
+  zone: Zone;
+  pattern: WorkingPattern;
+  today: string;
+  weeks: number;
+  visits: readonly VisitView[];
+  ghostId: string | null;
+  mayMove: boolean;
+  onOpen: (visit: VisitView) => void;
+};
+
+/** One crew: its days with what is free of each, and its visits as bars under them. */
+export function BoardRow({ crew, days, zone, pattern, visits, ...rest }: BoardRowProps) {
+  const bars = boardBars(visits, days, zone);
+  const lanes = Math.max(1, ...bars.map(({ lane }) => lane + 1));
+  const pieces = visits
+    .filter(({ id }) => id !== rest.ghostId)
+    .flatMap((visit) => visit.pieces)
+    .map((piece) => ({ ...piece, date: localDate(new Date(piece.startsAt), zone) }));
+  return (
+    <section
+      aria-label={crew.name}
+      className="board-line board-row"
+      style={{ '--lanes': lanes, '--crew': crewColour(crew.colour) } as React.CSSProperties}
+    >
+      <h2 className="board-name">
+        {crew.name}
+        <span>{crew.people.map(({ name }) => name.split(' ')[0]).join(', ')}</span>
+      </h2>
+      {days.map((day, column) => (
+        <CrewDayCell
+          key={day.date}
+          day={day}
+          column={column}
+          crewId={crew.id}
+          isToday={day.date === rest.today}
+          crewDay={crewDay(
+            day.date,
+            pieces.filter(({ date }) => date === day.date),
+            pattern,
+            zone,
+          )}
+        />
+      ))}
+      {bars.map((bar) => (
+        <BoardBarButton
+          key={bar.visit.id}
+          bar={bar}
+          zone={zone}
+          isGhost={bar.visit.id === rest.ghostId}
+          isShort={rest.weeks > 2}
+          mayMove={rest.mayMove}
+          onOpen={rest.onOpen}
+        />
+      ))}
+    </section>
+  );
+}

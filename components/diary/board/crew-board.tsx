@@ -1,0 +1,65 @@
+'use client';
+
+import { useMemo, useRef } from 'react';
+import type { Place } from '@/components/diary/place';
+import type { CrewView, VisitView } from '@/lib/contracts/visits';
+import type { WorkingPattern } from '@/lib/time/workdays';
+import type { Zone } from '@/lib/time/zones';
+import { pieceDates } from './board-bars';
+import { boardDays } from './board-days';
+import { BoardHead } from './board-head';
+import { BoardRow } from './board-row';
+import './crew-board.css';
+import { useBoardDrag } from './use-board-drag';
+
+type CrewBoardProps = {
+  zone: Zone;
+  today: string;
+  /** A Monday. */
+  from: string;
+  weeks: number;
+  pattern: WorkingPattern;
+  crews: readonly CrewView[];
+  visits: readonly VisitView[];
+  /** What is only thought of: an opening that is looked at. */
+  ghost?: VisitView | null;
+  mayBook: boolean;
+  onOpen: (visit: VisitView) => void;
+  onDay: (date: string) => void;
+  onMove: (visit: VisitView, change: Partial<Place>) => void;
+  onDropWaiting: (waitingKey: string, date: string, crewId: string) => void;
+};
+
+/** Crews down, days across: who is where, and how much of each crew's day is free. */
+export function CrewBoard(props: CrewBoardProps) {
+  const { zone, from, weeks, pattern, crews, visits, ghost, today } = props;
+  const boardRef = useRef<HTMLElement>(null);
+  const shown = useMemo(() => (ghost ? [...visits, ghost] : [...visits]), [visits, ghost]);
+  const days = useMemo(() => {
+    const dates = new Set(shown.flatMap((visit) => pieceDates(visit, zone)));
+    return boardDays({ from, weeks }, pattern, dates);
+  }, [shown, zone, from, weeks, pattern]);
+  useBoardDrag(boardRef, { ...props, days });
+
+  return (
+    <section
+      ref={boardRef}
+      aria-label="Crews by day"
+      className="crew-board"
+      data-weeks={weeks}
+      style={{ '--days': days.length } as React.CSSProperties}
+    >
+      <BoardHead days={days} today={today} onDay={props.onDay} />
+      {crews.map((crew) => (
+        <BoardRow
+          key={crew.id}
+          {...{ crew, days, zone, pattern, today, weeks }}
+          ghostId={ghost?.id ?? null}
+          visits={shown.filter(({ crewId }) => crewId === crew.id)}
+          mayMove={props.mayBook}
+          onOpen={props.onOpen}
+        />
+      ))}
+    </section>
+  );
+}

@@ -1,0 +1,55 @@
+import { minutesWords } from '@/components/diary/visit-words';
+import type { BoardDay } from './board-days';
+import type { CrewDay } from './crew-day';
+import { dayHeadWords } from './day-head-words';
+
+/** What of a crew's day is taken, as a strip of its hours, and how much is free in words. */
+export function CrewDayCell({
+  day,
+  column,
+  crewId,
+  isToday,
+  crewDay,
+}: {
+  day: BoardDay;
+  column: number;
+  crewId: string;
+  isToday: boolean;
+  crewDay: CrewDay;
+}) {
+  const { isWorked, freeMinutes, workedMinutes, taken } = crewDay;
+  return (
+    <div
+      className="board-cell"
+      style={{ gridColumn: column + 2 }}
+      data-board-date={day.date}
+      data-board-crew={crewId}
+      data-closed={!isWorked || undefined}
+      data-today={isToday || undefined}
+      data-week-start={day.isWeekStart || undefined}
+    >
+      {isWorked ? (
+        <>
+          <span className="board-hours" aria-hidden="true">
+            {taken.map(({ from, until }) => (
+              <span
+                key={from}
+                style={{ left: `${from * 100}%`, width: `${(until - from) * 100}%` }}
+              />
+            ))}
+          </span>
+          <span className="board-free">
+            <span className="sr-only">{dayHeadWords(day.date)}: </span>
+            {freeMinutes === 0
+              ? 'full'
+              : freeMinutes === workedMinutes
+                ? 'free'
+                : `${minutesWords(freeMinutes)} free`}
+          </span>
+        </>
+      ) : (
+        <span className="sr-only">{dayHeadWords(day.date)}: not worked</span>
+      )}
+    </div>
+  );
+}

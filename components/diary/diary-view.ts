@@ -1,0 +1,39 @@
+'use client';
+
+import { useCallback, useEffect, useState } from 'react';
+
+export const diaryViews = ['crews', 'month', 'week', 'day'] as const;
+export type DiaryView = (typeof diaryViews)[number];
+export type ShownView = { view: DiaryView; weeks: 1 | 2 | 3 | 4 };
+
+const storageKey = 'setwell-diary-view';
+
+/**
+ * How the diary was left on this device. It always opens on today, and on a phone on the day: there is no
+ * room for more.
+ */
+export function useDiaryView(): [ShownView, (change: Partial<ShownView>) => void] {
+  const [shown, setShown] = useState<ShownView>({ view: 'week', weeks: 1 });
+
+  useEffect(() => {
+    if (window.innerWidth < 768) return setShown({ view: 'day', weeks: 1 });
+    const kept = readView(localStorage.getItem(storageKey));
+    if (kept) setShown(kept);
+  }, []);
+
+  const show = useCallback((change: Partial<ShownView>) => {
+    setShown((now) => {
+      const next = { ...now, ...change };
+      localStorage.setItem(storageKey, `${next.view} ${next.weeks}`);
+      return next;
+    });
+  }, []);
+  return [shown, show];
+}
+
+function readView(text: string | null): ShownView | null {
+  const [word, number] = (text ?? '').split(' ');
+  const view = diaryViews.find((known) => known === word);
+  const weeks = ([1, 2, 3, 4] as const).find((known) => known === Number(number));
+  return view && weeks ? { view, weeks } : null;
+}

@@ -1,0 +1,94 @@
+'use client';
+
+import { useQueryClient } from '@tanstack/react-query';
+import { useCallback, useMemo, useRef, useState } from 'react';
+import { problemOf } from '@/components/shell/ask-server';
+import { showToast } from '@/components/ui/toast-store';
+import type { CrewView, VisitView } from '@/lib/contracts/visits';
+import type { ProblemDetails } from '@/lib/problem-details';
+import type { WorkingPattern } from '@/lib/time/workdays';
+import type { Zone } from '@/lib/time/zones';
+import { useMoveVisit } from './change-visit-query';
+import { isSamePlace, type Place, placeOf, visitAt } from './place';
+import { useTakeBack } from './use-take-back';
+import { visitsKey } from './visits-query';
+
+/** A move that was refused and may be tried again: on the newer visit, or with a reason. */
+export type RefusedMove = { visit: VisitView; place: Place; problem: ProblemDetails };
+
+type Shop = { zone: Zone; pattern: WorkingPattern; crews: readonly CrewView[] };
+
+/** Presses of a key are gathered for so long, so that three steps are one move and one message. */
+const gatherMs = 700;
+
+/** Moves by hand and by key: drawn at once, ten seconds to undo, put back where the server refuses. */
+export function useMover({ zone, pattern, crews }: Shop) {
+  const [places, setPlaces] = useState<ReadonlyMap<string, Place>>(new Map());
+  const [refused, setRefused] = useState<RefusedMove | null>(null);
+  const gathering = useRef(new Map<string, ReturnType<typeof setTimeout>>());
+  const move = useMoveVisit();
+  const takeBack = useTakeBack();
+  const client = useQueryClient();
+
+  const put = useCallback((visitId: string, place: Place | null) => {
+    setPlaces((now) => {
+      const next = new Map(now);
+      if (place) next.set(visitId, place);
+      else next.delete(visitId);
+      return next;
+    });
+  }, []);
+
+  async function send(visit: VisitView, place: Place, overrideReason = ''): Promise<boolean> {
+    if (isSamePlace(place, placeOf(visit, zone))) {
+      put(visit.id, null);
+      return true;
+    }
+    put(visit.id, place);
+    try {
+      const { id: visitId, version } = visit;
+      const moved = await move.mutateAsync({ visitId, version, ...place, overrideReason });
+      showToast({
+        text: `${moved.customerName}: ${moved.dayWords}, ${moved.windowWords}`,
+        undo: () => void takeBack(moved),
+      });
+      return true;
+    } catch (caught) {
+      const problem = problemOf(caught);
+      if (isWorthAsking(problem)) setRefused({ visit, place, problem });
+      else showToast({ text: saidOf(problem), isProblem: true });
+      return false;
+    } finally {
+      await client.invalidateQueries({ queryKey: visitsKey });
+      put(visit.id, null);
+    }
+  }
+
+  /** One step more: it is sent when the hand has come to rest. */
+  function nudge(visit: VisitView, change: (place: Place) => Place) {
+    const place = change(places.get(visit.id) ?? placeOf(visit, zone));
+    put(visit.id, place);
+    clearTimeout(gathering.current.get(visit.id));
+    gathering.current.set(
+      visit.id,
+      setTimeout(() => void send(visit, place), gatherMs),
+    );
+  }
+
+  const draw = useMemo(
+    () => (visits: readonly VisitView[]) =>
+      visits.map((visit) => {
+        const place = places.get(visit.id);
+        return place ? visitAt(visit, place, { pattern, zone, crews }) : visit;
+      }),
+    [places, pattern, zone, crews],
+  );
+
+  return { draw, send, nudge, refused, forgetRefused: () => setRefused(null) };
+}
+
+const isWorthAsking = ({ type }: ProblemDetails) =>
+  type.endsWith('visit-changed') || type.endsWith('gate-not-passed');
+
+export const saidOf = ({ title, detail }: ProblemDetails): string =>
+  detail ? `${title}. ${detail}` : title;

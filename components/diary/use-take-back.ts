@@ -1,0 +1,37 @@
+'use client';
+
+import { useMutation, useQueryClient } from '@tanstack/react-query';
+import { askServer, problemOf } from '@/components/shell/ask-server';
+import { showToast } from '@/components/ui/toast-store';
+import type { VisitView } from '@/lib/contracts/visits';
+import { apiPaths } from '@/lib/paths';
+import { visitsKey } from './visits-query';
+import { waitingKey } from './waiting-query';
+
+/** Takes the last change of a visit back: the server knows what was before, and what was not told yet. */
+export function useTakeBack() {
+  const client = useQueryClient();
+  const undo = useMutation({
+    mutationFn: ({ id, version }: Pick<VisitView, 'id' | 'version'>) =>
+      askServer<VisitView>(apiPaths.undoVisitChange(id), { body: { version } }),
+    onSettled: () =>
+      Promise.all([
+        client.invalidateQueries({ queryKey: visitsKey }),
+        client.invalidateQueries({ queryKey: waitingKey }),
+      ]),
+  });
+
+  return async (visit: Pick<VisitView, 'id' | 'version'>) => {
+    try {
+      const { status, customerName, dayWords, windowWords } = await undo.mutateAsync(visit);
+      const words =
+        status === 'called-off'
+          ? `${customerName} waits to be booked again`
+          : `${customerName} is back on ${dayWords}, ${windowWords}`;
+      showToast({ text: `Taken back: ${words}` });
+    } catch (caught) {
+      const { title, detail } = problemOf(caught);
+      showToast({ text: detail ? `${title}. ${detail}` : title, isProblem: true });
+    }
+  };
+}
