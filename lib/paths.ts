@@ -67,6 +67,9 @@ export const apiPaths = {
   job: (jobId: string) => `/api/jobs/${part(jobId)}`,
   /** The bench says that the cabinets are ready. */
   jobReady: (jobId: string) => `/api/jobs/${part(jobId)}/ready`,
+  /** Everything of one customer, to save. */
+  customerExport: (customerId: string) => `/api/customers/${part(customerId)}/export`,
+  customerErasure: (customerId: string) => `/api/customers/${part(customerId)}/erasure`,
   rooms: () => '/api/rooms',
   room: (roomId: string) => `/api/rooms/${part(roomId)}`,
   /** What a phone needs to begin a room of this job without a signal. */

@@ -12,6 +12,9 @@ export const permissions = [
   'crews:change',
   'jobs:read',
   'jobs:change',
+  /** Everything that is known of one customer, given out or taken away. */
+  'customers:export',
+  'customers:erase',
   'visits:read',
   'visits:book',
   'visits:override-gate',

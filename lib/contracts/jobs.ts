@@ -119,6 +119,8 @@ export type RoomRow = z.infer<typeof roomRow>;
 
 export const jobView = jobRow.extend({
   customerId: id,
+  /** Who it was is gone; sizes and times stayed. */
+  isErased: z.boolean(),
   email: z.string(),
   language: z.enum(['en', 'es']),
   mayText: z.boolean(),

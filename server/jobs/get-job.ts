@@ -1,4 +1,4 @@
-import { and, eq } from 'drizzle-orm';
+import { and, eq, sql } from 'drizzle-orm';
 import { customers, jobs, sites } from '@/db/schema';
 import type { JobView } from '@/lib/contracts/jobs';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
@@ -15,6 +15,7 @@ export async function getJob(ctx: PersonContext, input: { jobId: string }): Prom
     .select({
       ...jobRowFields,
       customerId: customers.id,
+      isErased: sql<boolean>`${customers.erasedAt} is not null`,
       email: customers.email,
       language: customers.language,
       siteId: sites.id,

@@ -5,6 +5,7 @@ import type { StartJobInput } from '@/lib/contracts/jobs';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { phoneOf } from '@/server/shops/phone-of';
+import { refusedBefore } from './kept-refusals';
 
 /** The call that starts it all: customer, site and job, with what the customer agreed to, or nothing. */
 export async function startJob(ctx: PersonContext, input: StartJobInput) {
@@ -19,11 +20,13 @@ export async function startJob(ctx: PersonContext, input: StartJobInput) {
         .values({ shopId, ...customer, phone })
         .returning({ id: customers.id }),
     );
+    const refused = await refusedBefore(tx, shopId, { phone, email: customer.email });
     await writeConsents(tx, ctx, {
       customerId,
       sms: mayText && phone !== '',
       email: customer.email === '' ? null : mayEmail,
     });
+    await writeKeptRefusals(tx, ctx, customerId, refused);
     const siteId = await written(
       tx
         .insert(sites)
@@ -93,6 +96,25 @@ async function writeConsents(
     ...(customer.sms ? [row('sms', true)] : []),
     ...(customer.email === null ? [] : [row('email', customer.email)]),
   ];
+  if (rows.length > 0) await tx.insert(consents).values(rows);
+}
+
+/** Who said stop before is not told because somebody ticked a box: they have to say so themselves. */
+async function writeKeptRefusals(
+  tx: Transaction,
+  ctx: PersonContext,
+  customerId: string,
+  refused: ReadonlySet<'sms' | 'email'>,
+): Promise<void> {
+  const rows = [...refused].map((channel) => ({
+    shopId: ctx.shop.id,
+    customerId,
+    channel,
+    given: false,
+    how:
+      channel === 'sms' ? 'said stop before, from this number' : 'refused before, at this address',
+    at: ctx.now,
+  }));
   if (rows.length > 0) await tx.insert(consents).values(rows);
 }
 

@@ -31,6 +31,7 @@ const violations: [string, string][] = [
   ['server/visits/planted.ts', '@/server/snags/open-snag'],
   ['server/snags/planted.ts', '@/server/days/get-today'],
   ['server/files/planted.ts', '@/server/snags/open-snag'],
+  ['server/visits/planted.ts', '@/server/keeping/erase-customer'],
   ['server/visits/planted.ts', '@/server/jobs/internal'],
   ['server/visits/planted.ts', '../jobs/get-job'],
 ];
@@ -45,6 +46,7 @@ const allowed: [string, string][] = [
   ['server/days/planted.ts', '@/server/snags/open-snag'],
   ['server/days/planted.ts', '@/server/sheets/get-sheet'],
   ['server/numbers/planted.ts', '@/server/visits/book-visit'],
+  ['server/keeping/planted.ts', '@/server/files/get-file'],
   ['components/ui/planted.tsx', '@/lib/paths'],
   ['app/(office)/jobs/planted.tsx', '@/server/jobs/get-job'],
   ['db/planted.ts', 'drizzle-orm'],

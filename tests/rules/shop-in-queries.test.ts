@@ -12,6 +12,7 @@ const folders = [
   'snags',
   'days',
   'files',
+  'keeping',
 ];
 
 /** Queries that belong to no one shop, by the start of their file's name; each with the reason. */
@@ -30,6 +31,9 @@ type Query = { file: string; words: string };
 
 const namesShop = /shopId|shop\.id/;
 
+/** A setting of this transaction's connection: no rows. */
+const setsTheConnection = /^\.execute\(sql`select set_config\(/;
+
 /**
  * Each statement that reads, changes or deletes rows, from its verb to its end. What is inserted names its
  * shop by its type: the column may not be empty.
@@ -39,7 +43,8 @@ function queries(file: string, text: string): Query[] {
   const starts = /\.(?:select|selectDistinct|update|delete)\(|\.execute\(/g;
   return [...code.matchAll(starts)]
     .filter(({ index }) => /(?:db|tx)\s*$/.test(code.slice(Math.max(0, index - 40), index)))
-    .map(({ index }) => ({ file, words: code.slice(index, endOf(code, index)) }));
+    .map(({ index }) => ({ file, words: code.slice(index, endOf(code, index)) }))
+    .filter(({ words }) => !setsTheConnection.test(words));
 }
 
 /** Where the statement ends that goes on here: its semicolon, outside all brackets. */

@@ -32,6 +32,9 @@ export function localFiles(folder: string): FilesPort {
         throw error;
       }
     },
+    async remove(key) {
+      await rm(placeOf(key), { force: true });
+    },
     async read(key) {
       try {
         const file = await open(placeOf(key), constants.O_RDONLY);

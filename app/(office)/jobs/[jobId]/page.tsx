@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
+import { CustomerData } from '@/components/jobs/customer-data';
 import { JobFacts } from '@/components/jobs/job-facts';
 import { JobStory } from '@/components/jobs/job-story';
 import { RoomList } from '@/components/jobs/room-list';
@@ -67,6 +68,12 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
           <TitleBlock title="What happened" />
           <JobStory story={job.story} />
         </section>
+        {may(ctx.actor.role, 'customers:erase') && !job.isErased ? (
+          <section>
+            <TitleBlock title="The customer’s data" />
+            <CustomerData customerId={job.customerId} />
+          </section>
+        ) : null}
       </div>
     </>
   );
