@@ -12,9 +12,9 @@ const workMinutes = z.number().int().min(10).max(60_000);
 export const openingWishes = z.object({
   /** ISO weekdays, 1 Monday … 7 Sunday; none: any day. */
   weekdays: z.array(z.number().int().min(1).max(7)).max(7).default([]),
-  /** The crew arrives at this time or later, on each day. */
+  /** The crew arrives at this time or later, on the first day. */
   notBefore: localTime.optional(),
-  /** The crew arrives at this time or earlier. */
+  /** The crew arrives at this time or earlier, on the first day. */
   notAfter: localTime.optional(),
   /** The crew is gone by then, on each day. */
   doneBy: localTime.optional(),

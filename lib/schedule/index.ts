@@ -9,7 +9,22 @@ export {
   type JobFacts,
 } from './gate-input';
 export { type Gate, gateProblems, gatesFor, type Readiness, readinessFor } from './gates';
-export { type Piece, type PiecesInput, splitIntoPieces } from './pieces';
+export { findOpenings, variedOpenings } from './openings/find-openings';
+export type {
+  BusyPiece,
+  FoundOpening,
+  OpeningCrew,
+  OpeningsInput,
+  PlaceIndex,
+} from './openings/opening-input';
+export { durationWords, missedWords, openingWhy } from './openings/opening-words';
+export { type Piece, type PiecesInput, splitIntoPieces, splitOverCalendar } from './pieces';
+export {
+  driveWhenUnknownMinutes,
+  type OpeningWeights,
+  openingWeights,
+  usualOpeningWeights,
+} from './planning-rules';
 export {
   type Stage,
   type StageEvent,
@@ -19,3 +34,11 @@ export {
   stageWords,
 } from './stages';
 export { type VisitKind, visitKind, visitKinds } from './visit-kind';
+export { crewCalendar, type DaysAway, shopCalendar, type WorkCalendar } from './work-calendar';
+export {
+  type CrewPattern,
+  hoursOn,
+  patternOfShop,
+  patternProblems,
+  type WorkedHours,
+} from './working-pattern';

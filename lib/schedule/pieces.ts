@@ -2,23 +2,31 @@
 import type { Outcome, Problem } from '@/lib/problem';
 import { addDays, type LocalDate } from '@/lib/time/civil';
 import { fromLocal, toLocal } from '@/lib/time/local-moment';
-import { isWorkday, type WorkingPattern, workdayOnOrAfter } from '@/lib/time/workdays';
+import type { WorkingPattern } from '@/lib/time/workdays';
 import type { Zone } from '@/lib/time/zones';
+import { shopCalendar, type WorkCalendar, workedDayFrom } from './work-calendar';
+import type { WorkedHours } from './working-pattern';
 
 /** [startsAt, endsAt), both on one civil day. */
 export type Piece = { startsAt: Date; endsAt: Date };
 
-export type PiecesInput = {
+type Work = {
   /** Working time on site, by the clock: already divided by the people who share it. */
   workMinutes: number;
   startsAt: Date;
-  pattern: WorkingPattern;
   zone: Zone;
 };
+export type PiecesInput = Work & { pattern: WorkingPattern };
+export type CalendarPiecesInput = Work & { calendar: WorkCalendar };
 
 const MINUTE_MS = 60_000;
 /** A visit longer than a working year is a slip of the keyboard. */
 const MOST_WORK_MINUTES = 260 * 24 * 60;
+
+/** The same as `splitOverCalendar`, for a crew that works the shop's own days and hours. */
+export function splitIntoPieces({ pattern, ...work }: PiecesInput): Outcome<Piece[]> {
+  return splitOverCalendar({ ...work, calendar: shopCalendar(pattern) });
+}
 
 /**
  * Splits work into one piece a worked day: the first from the asked start to the day's end, the next from
@@ -29,24 +37,28 @@ const MOST_WORK_MINUTES = 260 * 24 * 60;
  * Problems: work-minutes-out-of-range, no-working-hours, starts-after-day-end (errors);
  * starts-before-day-start, starts-on-day-off (warnings).
  */
-export function splitIntoPieces(input: PiecesInput): Outcome<Piece[]> {
-  const { workMinutes, startsAt, pattern, zone } = input;
-  const problem = whatForbids(input);
-  if (problem) return { value: null, problems: [problem] };
+export function splitOverCalendar(input: CalendarPiecesInput): Outcome<Piece[]> {
+  const { workMinutes, startsAt, calendar, zone } = input;
+  const { date, time } = toLocal(startsAt, zone);
+  const firstHours = calendar.hoursOn(date) ?? calendar.usualHours;
+  const problem = whatForbids(workMinutes, time, firstHours);
+  if (problem || !firstHours) return { value: null, problems: [problem ?? noWorkingHours] };
 
   const pieces: Piece[] = [];
   let leftMs = Math.round(workMinutes * MINUTE_MS);
-  let day: LocalDate | null = toLocal(startsAt, zone).date;
+  let day: { date: LocalDate; hours: WorkedHours } | null = { date, hours: firstHours };
   let pieceStart = startsAt;
   while (day !== null) {
-    const dayEnd = fromLocal(day, pattern.dayEnd, zone);
+    const dayEnd = fromLocal(day.date, day.hours.end, zone);
     const usedMs = Math.min(leftMs, dayEnd.getTime() - pieceStart.getTime());
     if (usedMs > 0)
       pieces.push({ startsAt: pieceStart, endsAt: new Date(pieceStart.getTime() + usedMs) });
     leftMs -= Math.max(0, usedMs);
-    if (leftMs <= 0) return { value: pieces, problems: unusualStart(input) };
-    day = workdayOnOrAfter(addDays(day, 1), pattern);
-    if (day !== null) pieceStart = fromLocal(day, pattern.dayStart, zone);
+    if (leftMs <= 0) {
+      return { value: pieces, problems: unusualStart({ date, time }, firstHours, calendar) };
+    }
+    day = workedDayFrom(calendar, addDays(day.date, 1));
+    if (day !== null) pieceStart = fromLocal(day.date, day.hours.start, zone);
   }
   return { value: null, problems: [noWorkingHours] };
 }
@@ -58,7 +70,11 @@ const noWorkingHours: Problem = {
   severity: 'error',
 };
 
-function whatForbids({ workMinutes, startsAt, pattern, zone }: PiecesInput): Problem | null {
+function whatForbids(
+  workMinutes: number,
+  startTime: string,
+  hours: WorkedHours | null,
+): Problem | null {
   if (!(workMinutes > 0 && workMinutes <= MOST_WORK_MINUTES)) {
     return {
       code: 'work-minutes-out-of-range',
@@ -67,11 +83,11 @@ function whatForbids({ workMinutes, startsAt, pattern, zone }: PiecesInput): Pro
       severity: 'error',
     };
   }
-  if (pattern.dayStart >= pattern.dayEnd) return noWorkingHours;
-  if (toLocal(startsAt, zone).time >= pattern.dayEnd) {
+  if (!hours || hours.start >= hours.end) return noWorkingHours;
+  if (startTime >= hours.end) {
     return {
       code: 'starts-after-day-end',
-      message: `The crew's day ends at ${pattern.dayEnd}. Start earlier, or on the next working day.`,
+      message: `The crew's day ends at ${hours.end}. Start earlier, or on the next working day.`,
       about: [],
       severity: 'error',
     };
@@ -79,18 +95,22 @@ function whatForbids({ workMinutes, startsAt, pattern, zone }: PiecesInput): Pro
   return null;
 }
 
-function unusualStart({ startsAt, pattern, zone }: PiecesInput): Problem[] {
-  const { date, time } = toLocal(startsAt, zone);
+function unusualStart(
+  start: { date: LocalDate; time: string },
+  hours: WorkedHours,
+  calendar: WorkCalendar,
+): Problem[] {
+  const { date, time } = start;
   const problems: Problem[] = [];
-  if (time < pattern.dayStart) {
+  if (time < hours.start) {
     problems.push({
       code: 'starts-before-day-start',
-      message: `The crew's day starts at ${pattern.dayStart}; this starts at ${time}.`,
+      message: `The crew's day starts at ${hours.start}; this starts at ${time}.`,
       about: [],
       severity: 'warning',
     });
   }
-  if (!isWorkday(date, pattern)) {
+  if (!calendar.hoursOn(date)) {
     problems.push({
       code: 'starts-on-day-off',
       message: `${date} is not a working day of this crew.`,

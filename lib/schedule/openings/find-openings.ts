@@ -1,0 +1,232 @@
+/** Times that work: every stretch of every crew's days into which a visit fits, with the best start in it. */
+import {
+  leastFirstDayMinutes,
+  leastUsefulMinutes,
+  startStepMinutes,
+} from '@/lib/schedule/planning-rules';
+import { addDays, daysBetween, type LocalDate } from '@/lib/time/civil';
+import { type CrewDay, type CrewDays, crewDays, type Gap, instantCache } from './crew-days';
+import { missedWishes } from './missed-wishes';
+import type { FoundOpening, OpeningCrew, OpeningsInput, PlaceIndex } from './opening-input';
+
+const MINUTE_MS = 60_000;
+const STEP_MS = startStepMinutes * MINUTE_MS;
+/** Days off in a row, in the middle of a visit, past which it is no longer one visit. */
+const MOST_DAYS_OFF = 30;
+
+type Piece = { startMs: number; endMs: number; day: CrewDay };
+type Candidate = { pieces: Piece[]; driveAddedMinutes: number; score: number; gap: Gap };
+type Search = {
+  input: OpeningsInput;
+  crew: OpeningCrew;
+  days: CrewDays;
+  workMs: number;
+  drive: (from: PlaceIndex, to: PlaceIndex) => number;
+};
+
+/**
+ * All openings, best first: for each crew and each free stretch of its days, the start with the least trouble in it.
+ *
+ * A start is tried each quarter of an hour from the crew's day start. It works when the drive from the stop
+ * before and to the stop after fit between; the drive out from the base and home lie outside the hours. A visit
+ * that fits into one of the crew's days is never split; a longer one begins at the end of a day, with two hours
+ * or more, and goes on each worked day from its start, as `splitOverCalendar` does.
+ *
+ * Trouble, in minutes: driveMinute × drive added (before→site + site→after − before→after, over all its days)
+ * + dayWaited × days after `from` + scrapMinute × leftovers beside it from a quarter to an hour + missedWish × wishes missed.
+ * Example: an empty day, 20 minutes from the base, on the first day: 40 minutes driven, nothing else: 40.
+ * Complete: a start that works lies in a stretch that is found (checked against brute force).
+ */
+export function findOpenings(input: OpeningsInput): FoundOpening[] {
+  const instantMs = instantCache(input.zone);
+  const dates = datesBetween(input.from, input.until);
+  const found = input.crews.flatMap((crew) => {
+    const days = crewDays({ ...crew, zone: input.zone, instantMs });
+    const workMs = crew.workMinutes * MINUTE_MS;
+    const search: Search = { input, crew, days, workMs, drive: driveOf(input) };
+    const isOneDay = dates.some((date) => {
+      const day = days.on(date);
+      return day !== null && day.endMs - day.startMs >= workMs;
+    });
+    return dates.flatMap((date) => openingsOn(search, date, isOneDay));
+  });
+  return found.sort((a, b) => a.score - b.score || a.startsAt.getTime() - b.startsAt.getTime());
+}
+
+/** The best few, but not all on one day: somebody on the phone wants a choice. */
+export function variedOpenings(found: readonly FoundOpening[], limit: number): FoundOpening[] {
+  const mostADay = Math.ceil(limit / 3);
+  const taken = new Map<number, number>();
+  const isFirstOfDay = (opening: FoundOpening) => {
+    const day = Math.floor(opening.startsAt.getTime() / 86_400_000);
+    const count = taken.get(day) ?? 0;
+    taken.set(day, count + 1);
+    return count < mostADay;
+  };
+  const first = found.filter(isFirstOfDay).slice(0, limit);
+  const chosen = new Set(first);
+  const rest = found.filter((opening) => !chosen.has(opening)).slice(0, limit - first.length);
+  return [...first, ...rest].sort((a, b) => a.score - b.score);
+}
+
+function openingsOn(search: Search, date: LocalDate, isOneDay: boolean): FoundOpening[] {
+  const day = search.days.on(date);
+  if (!day) return [];
+  const gaps = isOneDay ? day.gaps : day.gaps.filter(({ before }) => before === null);
+  return gaps.flatMap((gap) => {
+    const best = isOneDay ? bestInGap(search, day, gap) : bestOverDays(search, day, gap);
+    return best ? [opening(search, best)] : [];
+  });
+}
+
+/** The stretch of a gap in which the crew can be on site, after the drive there and before the drive on. */
+function stretchOf({ drive, input }: Search, gap: Gap): { fromMs: number; untilMs: number } {
+  const { after, before } = gap;
+  const thereMs = after
+    ? after.endMs + drive(after.piece.place, input.site) * MINUTE_MS
+    : gap.startMs;
+  const onMs = before
+    ? before.startMs - drive(input.site, before.piece.place) * MINUTE_MS
+    : gap.endMs;
+  return { fromMs: Math.max(gap.startMs, thereMs), untilMs: Math.min(gap.endMs, onMs) };
+}
+
+function bestInGap(search: Search, day: CrewDay, gap: Gap): Candidate | null {
+  const { fromMs, untilMs } = stretchOf(search, gap);
+  let best: Candidate | null = null;
+  const driveAddedMinutes = driveAdded(search, gap);
+  const first = firstStart(search, day, fromMs);
+  for (let startMs = first; startMs + search.workMs <= untilMs; startMs += STEP_MS) {
+    const pieces = [{ startMs, endMs: startMs + search.workMs, day }];
+    const scrapMs = scrap(startMs - fromMs) + scrap(untilMs - startMs - search.workMs);
+    best = better(best, { search, gap, pieces, driveAddedMinutes, scrapMs });
+  }
+  return best;
+}
+
+function bestOverDays(search: Search, day: CrewDay, gap: Gap): Candidate | null {
+  const { fromMs } = stretchOf(search, gap);
+  let best: Candidate | null = null;
+  const lastStart = day.endMs - leastFirstDayMinutes * MINUTE_MS;
+  for (let startMs = firstStart(search, day, fromMs); startMs <= lastStart; startMs += STEP_MS) {
+    const more = followingPieces(search, day, search.workMs - (day.endMs - startMs));
+    if (!more) continue;
+    const pieces = [{ startMs, endMs: day.endMs, day }, ...more.pieces];
+    const scrapMs = scrap(startMs - fromMs) + more.scrapMs;
+    const driveAddedMinutes = driveAdded(search, gap) + more.driveAddedMinutes;
+    best = better(best, { search, gap, pieces, driveAddedMinutes, scrapMs });
+  }
+  return best;
+}
+
+/** The days after the first, each from its start; null where one of them is taken. */
+function followingPieces(search: Search, firstDay: CrewDay, workMs: number) {
+  const pieces: Piece[] = [];
+  let driveAddedMinutes = 0;
+  let leftMs = workMs;
+  let daysOff = 0;
+  for (let date = addDays(firstDay.date, 1); leftMs > 0; date = addDays(date, 1)) {
+    const day = search.days.on(date);
+    if (!day) {
+      daysOff += 1;
+      if (daysOff > MOST_DAYS_OFF) return null;
+      continue;
+    }
+    daysOff = 0;
+    const gap = day.gaps[0];
+    if (!gap) return null;
+    const { fromMs, untilMs } = stretchOf(search, gap);
+    if (fromMs > day.startMs) return null;
+    const endMs = day.startMs + Math.min(leftMs, day.endMs - day.startMs);
+    if (endMs > untilMs) return null;
+    leftMs -= endMs - day.startMs;
+    driveAddedMinutes += driveAdded(search, gap);
+    pieces.push({ startMs: day.startMs, endMs, day });
+    if (leftMs <= 0) return { pieces, driveAddedMinutes, scrapMs: scrap(untilMs - endMs) };
+  }
+  return { pieces, driveAddedMinutes, scrapMs: 0 };
+}
+
+/** On the steps from the day's start, not before the stretch and not before now. */
+function firstStart({ input }: Search, day: CrewDay, fromMs: number): number {
+  const earliest = Math.max(fromMs, input.now.getTime());
+  return day.startMs + Math.max(0, Math.ceil((earliest - day.startMs) / STEP_MS)) * STEP_MS;
+}
+
+function better(
+  best: Candidate | null,
+  next: {
+    search: Search;
+    gap: Gap;
+    pieces: Piece[];
+    driveAddedMinutes: number;
+    scrapMs: number;
+  },
+): Candidate {
+  const { search, gap, pieces, driveAddedMinutes, scrapMs } = next;
+  const { weights, wishes, windowMinutes, from } = search.input;
+  const waited = daysBetween(from, pieces[0]?.day.date ?? from);
+  const missed = missedWishes(pieces, { wishes, windowMinutes }).length;
+  const score =
+    weights.driveMinute * driveAddedMinutes +
+    weights.dayWaited * waited +
+    weights.scrapMinute * (scrapMs / MINUTE_MS) +
+    weights.missedWish * missed;
+  return best && best.score <= score ? best : { pieces, driveAddedMinutes, score, gap };
+}
+
+function driveAdded({ drive, crew, input }: Search, gap: Gap): number {
+  const from = gap.after ? gap.after.piece.place : crew.base;
+  const to = gap.before ? gap.before.piece.place : crew.base;
+  // Base to base is a day at home, not a drive.
+  const without = gap.after === null && gap.before === null ? 0 : drive(from, to);
+  return drive(from, input.site) + drive(input.site, to) - without;
+}
+
+function opening({ crew, input }: Search, best: Candidate): FoundOpening {
+  const { pieces, gap } = best;
+  const { wishes, windowMinutes } = input;
+  const startMs = pieces[0]?.startMs ?? 0;
+  return {
+    crewId: crew.id,
+    pieces: pieces.map((piece) => ({
+      startsAt: new Date(piece.startMs),
+      endsAt: new Date(piece.endMs),
+    })),
+    startsAt: new Date(startMs),
+    workMinutes: crew.workMinutes,
+    driveAddedMinutes: best.driveAddedMinutes,
+    leavesFreeMinutes: pieces.reduce((sum, piece) => sum + freeAfter(piece), 0) / MINUTE_MS,
+    missedWishes: missedWishes(pieces, { wishes, windowMinutes }),
+    score: best.score,
+    after: gap.after?.piece.label ?? null,
+    before: gap.before?.piece.label ?? null,
+  };
+}
+
+/** What of the day is still of use once the piece is in it; drives to come are not counted. */
+function freeAfter({ startMs, endMs, day }: Piece): number {
+  const parts = day.gaps.flatMap((gap) =>
+    gap.startMs <= startMs && endMs <= gap.endMs
+      ? [startMs - gap.startMs, gap.endMs - endMs]
+      : [gap.endMs - gap.startMs],
+  );
+  return parts.reduce((sum, part) => sum + (part >= leastUsefulMinutes * MINUTE_MS ? part : 0), 0);
+}
+
+/** Waiting for the next quarter is no loss; an hour and more takes another visit. */
+const scrap = (ms: number): number =>
+  ms >= STEP_MS && ms < leastUsefulMinutes * MINUTE_MS ? ms : 0;
+
+function driveOf(input: OpeningsInput) {
+  return (from: PlaceIndex, to: PlaceIndex): number => {
+    const minutes = from === null || to === null ? undefined : input.driveMinutes[from]?.[to];
+    return Math.ceil(minutes ?? input.driveWhenUnknownMinutes);
+  };
+}
+
+function datesBetween(from: LocalDate, until: LocalDate): LocalDate[] {
+  return Array.from({ length: Math.max(0, daysBetween(from, until) + 1) }, (_, ahead) =>
+    addDays(from, ahead),
+  );
+}
