@@ -51,6 +51,8 @@ export const visits = pgTable(
     /** What the customer asked for, or what they say is not ready. */
     customerSays: text('customer_says').notNull().default(''),
     holdEndsAt: instant('hold_ends_at'),
+    /** The booked visit that may move to this held time. */
+    heldForVisitId: uuid('held_for_visit_id'),
     confirmedAt: instant('confirmed_at'),
     /** When the crew running late now expects to be there. */
     expectedAt: instant('expected_at'),
@@ -76,7 +78,14 @@ export const visits = pgTable(
       columns: [table.shopId, table.crewId],
       foreignColumns: [crews.shopId, crews.id],
     }),
+    foreignKey({
+      name: 'visits_held_for',
+      columns: [table.shopId, table.heldForVisitId],
+      foreignColumns: [table.shopId, table.id],
+    }).onDelete('cascade'),
+    check('visits_hold_ends', sql`(${table.status} = 'held') = (${table.holdEndsAt} is not null)`),
     index('visits_by_time').on(table.shopId, table.startsAt),
+    index('visits_held').on(table.holdEndsAt).where(sql`${table.status} = 'held'`),
     index('visits_by_job').on(table.shopId, table.jobId),
   ],
 );
