@@ -26,6 +26,13 @@ export const layerLook: Record<Layer, string> = {
   feature: 'fill-none stroke-blueprint [stroke-width:1.2]',
   diagonal: 'fill-none stroke-graphite [stroke-width:0.8] [stroke-dasharray:10_5]',
   dimension: 'fill-none stroke-graphite [stroke-width:0.9]',
+  'diagonal-asked': 'fill-none stroke-blueprint [stroke-width:2] [stroke-dasharray:9_4_2_4]',
+  'walk-as-read': 'fill-none stroke-graphite [stroke-width:1.4] [stroke-dasharray:5_3]',
+  'walk-gap': 'fill-chalk stroke-chalk [stroke-width:3]',
+  'error-ellipse': 'fill-none stroke-pine [stroke-width:1.4]',
+  'held-corner': 'fill-pine stroke-none',
+  'suspect-line': 'fill-none stroke-chalk [stroke-width:5]',
+  'suspect-ring': 'fill-sheet stroke-chalk [stroke-width:2]',
   suspect: 'fill-none stroke-chalk [stroke-width:2.4]',
   collision: 'fill-none stroke-chalk [stroke-width:2] [stroke-dasharray:4_3]',
 };

@@ -10,6 +10,7 @@ import { openPoints } from '@/lib/sheet/open-points';
 import { proofRows } from '@/lib/sheet/proof-rows';
 import { readingLines } from '@/lib/sheet/reading-lines';
 import { wallsOf } from '@/lib/sheet/room-names';
+import { ClosurePanel } from './closure-panel';
 import { CutList } from './cut-list';
 import { Figures } from './figures';
 import { type FitChoice, fitHref } from './fit-links';
@@ -85,7 +86,11 @@ export function FitScreen({ view, choice, mayLayOut, mayRelease }: FitScreenProp
         <div className="flex min-w-0 flex-col gap-6">
           <section>
             <TitleBlock title="What the room says" meta={revisionWords(view)} />
-            <VerdictList fit={fit} />
+            <VerdictList fit={fit} room={room} rules={rules} />
+          </section>
+          <section>
+            <TitleBlock title="Does it close?" meta={fit.closure.suspect ? 'look again' : null} />
+            <ClosurePanel view={view} />
           </section>
           <section>
             <TitleBlock title="Cut list" meta={rules.unit === 'in' ? 'inches' : 'millimetres'} />

@@ -1,10 +1,15 @@
 import { Verdict } from '@/components/ui/verdict';
 import { VerdictNote } from '@/components/ui/verdict-note';
+import type { FitRules } from '@/lib/contracts/shop-rules';
+import type { Room } from '@/lib/contracts/wall-book';
+import { suspectAdvice } from '@/lib/drawing/closure-words';
 import type { Fit } from '@/lib/measure/fit';
 import { InFractions } from './in-fractions';
 
+type VerdictListProps = { fit: Fit; room: Room; rules: FitRules };
+
 /** What the fit says about the room, worst first; whose rule it is stands under "Proved on site". */
-export function VerdictList({ fit }: { fit: Fit }) {
+export function VerdictList({ fit, room, rules }: VerdictListProps) {
   const loud = fit.verdicts.filter(({ verdict }) => verdict !== 'within');
   const quiet = fit.verdicts.length - loud.length;
   const errors = fit.problems.filter(({ severity }) => severity === 'error');
@@ -14,14 +19,7 @@ export function VerdictList({ fit }: { fit: Fit }) {
     <div className="flex flex-col gap-2 py-3">
       {suspect ? (
         <VerdictNote kind="problem" word="suspect">
-          <InFractions words={suspect.words} />
-          <ul className="mt-1">
-            {fit.closure.settle.slice(0, 2).map((step) => (
-              <li key={step.slot}>
-                To settle it: <InFractions words={step.words} />
-              </li>
-            ))}
-          </ul>
+          <InFractions words={suspectAdvice(fit, room, rules) ?? suspect.words} />
         </VerdictNote>
       ) : null}
       {errors.map(({ code, message, about }) => (

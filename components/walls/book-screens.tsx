@@ -27,6 +27,7 @@ import {
   freeQuestion,
   type PadQuestion,
   questionAgain,
+  questionOfDiagonal,
   questionOfPlan,
   questionOfReading,
 } from './pad-question';
@@ -136,7 +137,12 @@ function BookScreen({ room, kept }: BookScreensProps) {
         place.at === 'ask'
           ? plan.find(({ slot }) => slot === place.slot)
           : nextAsk(plan, afterSlot);
-      if (!planned) return <AllRead />;
+      if (!planned) {
+        const settling =
+          place.at === 'ask' ? questionOfDiagonal(place.slot, view.wallBook.room) : null;
+        const leave: BookPlace = { at: 'leave' };
+        return settling ? pad(settling, { onward: leave, back: leave }) : <AllRead />;
+      }
       const { ask, slot } = planned;
       if (ask.kind === 'feature') {
         return feature(ask.wallId, { askedSlot: slot, askedKind: ask.feature });

@@ -1,6 +1,6 @@
 import type { Reading, Room } from '@/lib/contracts/wall-book';
 import type { PlannedReading } from '@/lib/measure/missing-reading';
-import { walkRoom } from '@/lib/measure/room-walk';
+import { cornerName, walkRoom } from '@/lib/measure/room-walk';
 import { askOfReading } from '@/lib/walls-pad/ask-of-reading';
 import type { PadAsk } from '@/lib/walls-pad/pad-fields';
 import { readingWords } from '@/lib/walls-pad/reading-words';
@@ -42,6 +42,25 @@ export function questionOfReading(
     isFree: false,
     slot: null,
     corrects: reading,
+  };
+}
+
+const diagonalSlot = /^diagonal:([^:]+):([^:]+):(\d+(?:\.\d+)?)$/;
+
+/** A diagonal that would settle the room though the plan does not ask for it, by its slot. */
+export function questionOfDiagonal(slot: string, room: Room): PadQuestion | null {
+  const [, fromCornerWallId = '', toCornerWallId = '', zMm] = diagonalSlot.exec(slot) ?? [];
+  const walls = walkRoom(room).byId;
+  const [from, to] = [walls.get(fromCornerWallId), walls.get(toCornerWallId)];
+  if (!from?.before || !to?.before) return null;
+  return {
+    key: slot,
+    title: `Diagonal, ${cornerName(from)} to ${cornerName(to)}`,
+    why: 'It settles which of the readings is wrong.',
+    ask: { kind: 'diagonal', fromCornerWallId, toCornerWallId, zMm: Number(zMm) },
+    isFree: false,
+    slot: null,
+    corrects: null,
   };
 }
 

@@ -1,22 +1,29 @@
+import { ClosureFigure } from '@/components/drawing/closure-figure';
 import { TitleBlock } from '@/components/ui/title-block';
 import { Verdict } from '@/components/ui/verdict';
 import type { WallBookView } from '@/lib/contracts/rooms';
+import { drawClosure } from '@/lib/drawing/closure-picture';
+import { closureSays, suspectAdvice } from '@/lib/drawing/closure-words';
 import type { Fit } from '@/lib/measure/fit';
 import type { PlannedReading } from '@/lib/measure/missing-reading';
 import { readingWords } from '@/lib/walls-pad/reading-words';
 import { type BookPlace, placeHref } from './book-place';
 import { FractionWords } from './fraction-words';
 import { LineLink } from './line-link';
+import { questionOfDiagonal } from './pad-question';
 
 type RoomProofProps = { fit: Fit; view: WallBookView; plan: PlannedReading[] };
 
 /** Whether the readings hold together; if not, which one is likely wrong, and what would settle it. */
 export function RoomProof({ fit, view, plan }: RoomProofProps) {
   const { suspect, words, settle, adjustment } = fit.closure;
+  const drawing = drawClosure({ wallBook: view.wallBook, fit, rules: view.rules });
   const disagreeing = fit.problems.filter(({ code }) => code === 'repeats-disagree');
   const known = new Set(plan.map(({ slot }) => slot));
+  const { room } = view.wallBook;
+  const canAsk = (slot: string) => known.has(slot) || questionOfDiagonal(slot, room) !== null;
   const steps = settle.flatMap((step) => {
-    const place = placeOfSlot(step.slot, known);
+    const place = placeOfSlot(step.slot, canAsk);
     return place ? [{ ...step, place }] : [];
   });
   const isProved = adjustment?.observations.every(({ smallestSlip }) => smallestSlip !== null);
@@ -26,8 +33,19 @@ export function RoomProof({ fit, view, plan }: RoomProofProps) {
     <section>
       <TitleBlock title="Does it hold together?" meta={<Verdict kind={kind}>{word}</Verdict>} />
       <p className="py-2">
-        <FractionWords>{words}</FractionWords>
+        <FractionWords>{suspectAdvice(fit, room, view.rules) ?? words}</FractionWords>
       </p>
+      {drawing ? <ClosureFigure drawing={drawing} title="Does the room close?" /> : null}
+      {drawing ? (
+        <details>
+          <summary className="min-h-11 py-2.5 text-note">What the picture says</summary>
+          {closureSays(fit, drawing, view.rules).map((line) => (
+            <p key={line} className="pb-2 text-note">
+              <FractionWords>{line}</FractionWords>
+            </p>
+          ))}
+        </details>
+      ) : null}
       <ul className="divide-y divide-rule">
         {(suspect?.readings ?? []).flatMap(({ readingIds, words: named }) =>
           readingIds.slice(0, 1).map((readingId) => (
@@ -65,10 +83,10 @@ export function RoomProof({ fit, view, plan }: RoomProofProps) {
   );
 }
 
-/** A settling step is a planned reading, or one taken before, again. */
-function placeOfSlot(slot: string, known: ReadonlySet<string>): BookPlace | null {
+/** A settling step is a reading planned, a diagonal besides, or one taken before, again. */
+function placeOfSlot(slot: string, canAsk: (slot: string) => boolean): BookPlace | null {
   if (slot.startsWith('again:')) return { at: 'again', readingId: slot.slice('again:'.length) };
-  return known.has(slot) ? { at: 'ask', slot } : null;
+  return canAsk(slot) ? { at: 'ask', slot } : null;
 }
 
 function bothReadings(ids: string[], view: WallBookView): string {

@@ -1,5 +1,6 @@
 import { type ElevationSheet, edgeAt, type WallPlace } from './elevation-frame';
 import { type Point, type Shape, text } from './shape';
+import { suspectMarks } from './suspects';
 
 const suspectPx = 20;
 const collisionPx = 15;
@@ -10,23 +11,27 @@ export function elevationTrouble(sheet: ElevationSheet): Shape[] {
 }
 
 function suspects(sheet: ElevationSheet): Shape[] {
-  const ids = new Set(
-    (sheet.fit.closure.suspect?.readings ?? []).flatMap(({ readingIds }) => readingIds),
-  );
-  return sheet.wallBook.readings.flatMap((reading) => {
-    if (!ids.has(reading.id) || !('wallId' in reading) || reading.wallId !== sheet.wallId) {
-      return [];
-    }
-    const place: WallPlace | null =
-      reading.kind === 'length'
-        ? { xMm: edgeAt(sheet.edges.right, reading.zMm), zMm: reading.zMm }
-        : 'zMm' in reading && 'xMm' in reading
-          ? { xMm: reading.xMm, zMm: reading.zMm }
-          : null;
-    return place
-      ? [{ kind: 'circle', layer: 'suspect', centre: sheet.at(place), radius: suspectPx } as const]
-      : [];
+  return suspectMarks(sheet, { byHeight: true }).flatMap(({ place, words }) => {
+    if (!('wallId' in place) || place.wallId !== sheet.wallId) return [];
+    if (place.kind === 'spot') return [ring(sheet, { xMm: place.xMm, zMm: place.zMm })];
+    // A height over the drawn wall would put the ring in the air above it.
+    const zMm = Math.min(Math.max(place.zMm ?? 0, 0), sheet.topMm);
+    const ends = [edgeAt(sheet.edges.left, zMm), edgeAt(sheet.edges.right, zMm)] as const;
+    const [from, to] = ends.map((xMm) => sheet.at({ xMm, zMm }));
+    if (!from || !to) return [];
+    const middle: Point = [(from[0] + to[0]) / 2, from[1] - 6];
+    return [
+      { kind: 'line', layer: 'suspect', points: [from, to] } satisfies Shape,
+      ring(sheet, { xMm: ends[1], zMm }),
+      text(middle, words, { tone: 'over' }),
+    ];
   });
+}
+
+function ring(sheet: ElevationSheet, place: WallPlace): Shape {
+  const zMm = Math.min(Math.max(place.zMm, 0), sheet.topMm);
+  const centre = sheet.at({ ...place, zMm });
+  return { kind: 'circle', layer: 'suspect', centre, radius: suspectPx };
 }
 
 function collisions(sheet: ElevationSheet): Shape[] {

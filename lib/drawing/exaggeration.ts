@@ -12,3 +12,16 @@ export function exaggerationFor(deviations: readonly { size: number; room: numbe
     steps.find((step) => deviations.every(({ size, room }) => Math.abs(size) * step <= room)) ?? 1
   );
 }
+
+const largeSteps = [500, 200, 100, 50, ...steps] as const;
+
+/**
+ * The greatest of 500, 200, 100 … 1 at which one size keeps inside its room.
+ *
+ * Edge: nothing to enlarge, or what does not fit even as it is, gives 1.
+ * Example: an ellipse of 2.4 mm with room for 260 mm is drawn ×100.
+ */
+export function largestWithin(size: number, room: number): number {
+  if (!(size > 0)) return 1;
+  return largeSteps.find((step) => size * step <= room) ?? 1;
+}

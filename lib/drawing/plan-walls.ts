@@ -9,7 +9,7 @@ import { type DrawnText, type Point, type Shape, text } from './shape';
 import { moved } from './vector';
 
 const bodyPx = 15;
-export const wallDimensionPx = 44;
+const wallDimensionPx = 44;
 
 /** Each wall: its body, its face drawn larger than life, its openings, its name and its length. */
 export function planWalls(sheet: PlanSheet): Shape[] {
@@ -140,8 +140,8 @@ function spokenLength(sheet: PlanSheet, wall: PlanWall): string {
     .join('');
 }
 
-/** The wall's letter in a box on its body, beside what opens there. */
-function nameTag(sheet: PlanSheet, wall: PlanWall): Shape[] {
+/** Where a wall's letter stands: on its body, beside what opens there. */
+export function nameTagPlace(sheet: PlanSheet, wall: PlanWall): Point {
   const holes = openingsOf(sheet, wall);
   const tagMm = 10 / sheet.pxPerMm;
   const part = [0.5, 0.35, 0.65, 0.2, 0.8].find((candidate) => {
@@ -149,7 +149,11 @@ function nameTag(sheet: PlanSheet, wall: PlanWall): Shape[] {
     return holes.every(({ x0Mm, x1Mm }) => xMm + tagMm < x0Mm || xMm - tagMm > x1Mm);
   });
   const middle = moved(wall.from, wall.along, wall.lengthMm * (part ?? 0.5), wall.inward, 0);
-  const [x, y] = moved(sheet.at(middle), wall.along, 0, wall.inward, -bodyPx / 2);
+  return moved(sheet.at(middle), wall.along, 0, wall.inward, -bodyPx / 2);
+}
+
+function nameTag(sheet: PlanSheet, wall: PlanWall): Shape[] {
+  const [x, y] = nameTagPlace(sheet, wall);
   const half = 10;
   return [
     {

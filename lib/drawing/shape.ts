@@ -30,7 +30,14 @@ export type Layer =
   | 'feature'
   | 'diagonal'
   | 'dimension'
+  | 'diagonal-asked'
+  | 'walk-as-read'
+  | 'walk-gap'
+  | 'error-ellipse'
+  | 'held-corner'
   | 'suspect'
+  | 'suspect-line'
+  | 'suspect-ring'
   | 'collision';
 
 /** How a text speaks: plain; strong; by the way; or in the colour of a verdict. */

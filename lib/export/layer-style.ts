@@ -61,6 +61,13 @@ export const layerStyle: Record<Layer, LayerStyle> = {
   feature: line(inks.blueprint, 1.2),
   diagonal: line(inks.graphite, 0.8, [10, 5]),
   dimension: line(inks.graphite, 0.9),
+  'diagonal-asked': line(inks.blueprint, 2, [9, 4, 2, 4]),
+  'walk-as-read': line(inks.graphite, 1.4, [5, 3]),
+  'walk-gap': area(inks.chalk, inks.chalk, 3),
+  'error-ellipse': line(inks.pine, 1.4),
+  'held-corner': area(inks.pine),
+  'suspect-line': line(inks.chalk, 5),
+  'suspect-ring': area(inks.sheet, inks.chalk, 2),
   suspect: line(inks.chalk, 2.4),
   collision: line(inks.chalk, 2, [4, 3]),
 };

@@ -75,6 +75,26 @@ describe('drawPlan', () => {
     expect(words(misread).some((line) => line.endsWith('too long?'))).toBe(true);
   });
 
+  it('stands the ring on the wall it doubts, not in the air beside it', () => {
+    const source = sourceOf(crookedKitchen({ misreadMm: 25.4 }));
+    const misread = drawPlan(source);
+    const [ring] = onLayer(misread, 'suspect');
+    const wallC = source.wallBook.room.chains[0]?.walls[2];
+    const part = misread.shapes.find(
+      (shape): shape is DrawnPart => shape.kind === 'part' && shape.part.id === wallC?.id,
+    );
+    const body = flat(part?.shapes ?? []).find(
+      (shape) => shape.kind === 'area' && shape.layer === 'wall-body',
+    );
+    if (ring?.kind !== 'circle' || body?.kind !== 'area') throw new Error('no ring, or no wall');
+    const [x, y] = ring.centre;
+    const [xs, ys] = [body.points.map(([px]) => px), body.points.map(([, py]) => py)];
+    expect(x).toBeGreaterThan(Math.min(...xs));
+    expect(x).toBeLessThan(Math.max(...xs));
+    expect(y).toBeGreaterThanOrEqual(Math.min(...ys));
+    expect(y).toBeLessThanOrEqual(Math.max(...ys));
+  });
+
   it('draws boxes, hung boxes, diagonals and the high point', () => {
     expect(onLayer(plan, 'unit')).toHaveLength(8);
     expect(onLayer(plan, 'unit-upper')).toHaveLength(4);
@@ -121,6 +141,24 @@ describe('drawElevation', () => {
     expect(words(elevation)).toEqual(
       expect.arrayContaining(['outlet', 'water', 'waste', 'high point', 'datum', '21', 'drawers']),
     );
+  });
+
+  it('keeps the ring of a height over the drawn wall at the wall’s top', () => {
+    const kitchen = crookedKitchen({ misreadMm: 25.4 });
+    const wallC = kitchen.wallBook.room.chains[0]?.walls[2];
+    const readings = kitchen.wallBook.readings.filter(({ kind }) => kind !== 'ceiling');
+    const source = sourceOf({ ...kitchen, wallBook: { ...kitchen.wallBook, readings } });
+    const suspect = source.fit.closure.suspect?.readings[0]?.readingIds[0];
+    const lifted = readings.map((reading) =>
+      reading.id === suspect && reading.kind === 'length' ? { ...reading, zMm: 6_000 } : reading,
+    );
+    const wallBook = { ...source.wallBook, readings: lifted };
+    const drawn = drawElevation({ ...source, wallBook, wallId: wallC?.id ?? '' });
+    const rings = drawn ? onLayer(drawn, 'suspect') : [];
+    expect(rings.length).toBeGreaterThan(0);
+    for (const shape of rings) {
+      if (shape.kind === 'circle') expect(shape.centre[1]).toBeGreaterThanOrEqual(0);
+    }
   });
 
   it('never draws a filler’s taper across the box beside it', () => {
