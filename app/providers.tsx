@@ -3,11 +3,17 @@
 import { QueryClient, QueryClientProvider } from '@tanstack/react-query';
 import { type ReactNode, useState } from 'react';
 import { RequestProblem } from '@/components/shell/ask-server';
+import { LiveQueries } from '@/components/shell/live/live-queries';
 
 /** For the office screens only: the front, the phone and the customer's page do without it. */
 export function Providers({ children }: { children: ReactNode }) {
   const [client] = useState(makeClient);
-  return <QueryClientProvider client={client}>{children}</QueryClientProvider>;
+  return (
+    <QueryClientProvider client={client}>
+      <LiveQueries />
+      {children}
+    </QueryClientProvider>
+  );
 }
 
 function makeClient() {

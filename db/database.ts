@@ -9,7 +9,7 @@ export type Transaction = Parameters<Parameters<Database['transaction']>[0]>[0];
 export type OpenDatabase = {
   db: Database;
   kind: 'embedded' | 'server';
-  /** Hears `NOTIFY channel`; gives a function that stops it. */
+  /** Hears `NOTIFY channel`, and an empty payload when something may have been missed; gives what stops it. */
   listen(channel: string, hear: (payload: string) => void): Promise<() => Promise<void>>;
   /** A copy of everything, for the embedded database; a server has its own ways. */
   dump(): Promise<Blob>;

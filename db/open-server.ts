@@ -1,3 +1,4 @@
+import { setTimeout as wait } from 'node:timers/promises';
 import { drizzle } from 'drizzle-orm/node-postgres';
 import { migrate } from 'drizzle-orm/node-postgres/migrator';
 import { Client, Pool } from 'pg';
@@ -7,6 +8,7 @@ import * as schema from './schema';
 
 /** Two starters migrate one after the other: the second finds nothing to do. */
 const migrationLock = 7_305_551;
+const listenAgainMs = 1_000;
 
 /**
  * A connection that waits in the pool may be cut by the server at any time (a restart, a fail-over): the
@@ -41,16 +43,44 @@ async function migrateOnce(databaseUrl: string) {
   }
 }
 
+/**
+ * Listens on a connection of its own. When that is cut it is opened again, and an empty payload says that
+ * something may have been missed meanwhile.
+ */
 async function listen(
   databaseUrl: string,
   channel: string,
   hear: (payload: string) => void,
   whenCut: (error: Error) => void,
 ) {
-  const client = new Client({ connectionString: databaseUrl });
-  client.on('error', whenCut);
-  await client.connect();
-  client.on('notification', (message) => hear(message.payload ?? ''));
-  await client.query(`LISTEN "${channel.replaceAll('"', '')}"`);
-  return () => client.end();
+  let isOver = false;
+  let client = await openListener();
+
+  async function openListener(): Promise<Client> {
+    const opened = new Client({ connectionString: databaseUrl });
+    opened.on('error', whenCut);
+    opened.on('notification', (message) => hear(message.payload ?? ''));
+    await opened.connect();
+    await opened.query(`LISTEN "${channel.replaceAll('"', '')}"`);
+    opened.on('end', () => void openAgain());
+    return opened;
+  }
+
+  async function openAgain(): Promise<void> {
+    while (!isOver) {
+      await wait(listenAgainMs);
+      try {
+        client = await openListener();
+        hear('');
+        return;
+      } catch (error) {
+        whenCut(error as Error);
+      }
+    }
+  }
+
+  return async () => {
+    isOver = true;
+    await client.end();
+  };
 }

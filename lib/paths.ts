@@ -122,6 +122,8 @@ export const apiPaths = {
   waiting: () => '/api/waiting',
   crews: () => '/api/crews',
   crew: (crewId: string) => `/api/crews/${part(crewId)}`,
+  /** The stream of what changes in the shop. */
+  live: () => '/api/live',
   /** The line of a day's drive. */
   travel: () => '/api/travel',
   /** Where a typed address is. */

@@ -1,0 +1,3 @@
+import { handleLive } from '@/server/base/handle-live';
+
+export const GET = handleLive();

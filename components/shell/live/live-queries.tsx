@@ -1,0 +1,33 @@
+'use client';
+
+import { useQueryClient } from '@tanstack/react-query';
+import { useEffect } from 'react';
+import type { LiveTopic } from '@/lib/contracts/live';
+import { hearLive } from './live-source';
+
+/** By topic, the first parts of the query keys that hold something of it. */
+const keysOf: Record<LiveTopic, readonly string[]> = {
+  visits: ['visits', 'visit', 'waiting', 'days', 'openings', 'jobs'],
+  readings: ['rooms', 'fits'],
+  messages: ['messages'],
+  releases: ['sheets', 'fits', 'waiting', 'bench'],
+  jobs: ['jobs', 'waiting', 'bench'],
+  crews: ['crews', 'openings', 'days'],
+};
+
+/** What another person changed is fetched again at once, where it is on the screen. */
+export function LiveQueries() {
+  const client = useQueryClient();
+  useEffect(
+    () =>
+      hearLive((news) => {
+        if (news === 'all') {
+          void client.invalidateQueries();
+          return;
+        }
+        for (const key of keysOf[news]) void client.invalidateQueries({ queryKey: [key] });
+      }),
+    [client],
+  );
+  return null;
+}
