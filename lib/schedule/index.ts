@@ -34,7 +34,14 @@ export {
   stageWords,
 } from './stages';
 export { type VisitKind, visitKind, visitKinds } from './visit-kind';
-export { crewCalendar, type DaysAway, shopCalendar, type WorkCalendar } from './work-calendar';
+export {
+  type CrewMember,
+  crewCalendar,
+  type DaysAway,
+  goesOn,
+  shopCalendar,
+  type WorkCalendar,
+} from './work-calendar';
 export {
   type CrewPattern,
   hoursOn,

@@ -1,5 +1,5 @@
 /** The days and hours on which one crew can be sent out: its pattern, less closed days, holidays and days off. */
-import { addDays, type LocalDate } from '@/lib/time/civil';
+import { addDays, type LocalDate, weekdayOf } from '@/lib/time/civil';
 import type { WorkingPattern } from '@/lib/time/workdays';
 import { type CrewPattern, hoursOn, patternOfShop, type WorkedHours } from './working-pattern';
 
@@ -16,8 +16,21 @@ export type DaysAway = { from: LocalDate; until: LocalDate };
 /** A pattern with no worked day within this span is taken as having none at all. */
 const SEARCH_DAYS = 400;
 
+/** Who goes out in a crew. */
+export type CrewMember = {
+  /** ISO weekdays on which they go with this crew; null: every day. */
+  weekdays: readonly number[] | null;
+  daysAway: readonly DaysAway[];
+};
+
+/** Whether somebody goes with the crew on a date, away or not. */
+export function goesOn(member: Pick<CrewMember, 'weekdays'>, date: LocalDate): boolean {
+  return member.weekdays === null || member.weekdays.includes(weekdayOf(date));
+}
+
 /**
- * A crew goes out whole or not at all: a day off of one of its people is the crew's day off.
+ * A crew goes out whole or not at all: a day off of one who goes that weekday is the crew's day off, and so is a
+ * weekday on which nobody goes.
  * Example: Monday to Friday with Tuesday 2026-05-12 closed and one fitter away from 13 to 14: worked are
  * Monday 11 and Friday 15.
  */
@@ -25,17 +38,21 @@ export function crewCalendar(crew: {
   pattern: CrewPattern;
   /** Shop's closed days and the holidays that it keeps. */
   closedDays: Iterable<LocalDate>;
-  daysAway?: readonly DaysAway[];
+  /** Left out: nobody named yet, and so nobody away. */
+  members?: readonly CrewMember[];
 }): WorkCalendar {
-  const { pattern, daysAway = [] } = crew;
+  const { pattern, members = [] } = crew;
   const closed = new Set(crew.closedDays);
   const first = pattern.weeks.flat()[0];
   return {
     usualHours: first ? { start: first.start, end: first.end } : null,
     hoursOn(date) {
       if (closed.has(date)) return null;
-      if (daysAway.some(({ from, until }) => from <= date && date <= until)) return null;
-      return hoursOn(pattern, date);
+      const going = members.filter((member) => goesOn(member, date));
+      if (members.length > 0 && going.length === 0) return null;
+      const isAway = ({ daysAway }: CrewMember) =>
+        daysAway.some(({ from, until }) => from <= date && date <= until);
+      return going.some(isAway) ? null : hoursOn(pattern, date);
     },
   };
 }

@@ -14,8 +14,8 @@ const STEP_MS = startStepMinutes * MINUTE_MS;
 /** Days off in a row, in the middle of a visit, past which it is no longer one visit. */
 const MOST_DAYS_OFF = 30;
 
-type Piece = { startMs: number; endMs: number; day: CrewDay };
-type Candidate = { pieces: Piece[]; driveAddedMinutes: number; score: number; gap: Gap };
+type Piece = { startMs: number; endMs: number; day: CrewDay; gap: Gap };
+type Candidate = { pieces: Piece[]; driveAddedMinutes: number; score: number };
 type Search = {
   input: OpeningsInput;
   crew: OpeningCrew;
@@ -97,9 +97,9 @@ function bestInGap(search: Search, day: CrewDay, gap: Gap): Candidate | null {
   const driveAddedMinutes = driveAdded(search, gap);
   const first = firstStart(search, day, fromMs);
   for (let startMs = first; startMs + search.workMs <= untilMs; startMs += STEP_MS) {
-    const pieces = [{ startMs, endMs: startMs + search.workMs, day }];
+    const pieces = [{ startMs, endMs: startMs + search.workMs, day, gap }];
     const scrapMs = scrap(startMs - fromMs) + scrap(untilMs - startMs - search.workMs);
-    best = better(best, { search, gap, pieces, driveAddedMinutes, scrapMs });
+    best = better(best, { search, pieces, driveAddedMinutes, scrapMs });
   }
   return best;
 }
@@ -111,10 +111,10 @@ function bestOverDays(search: Search, day: CrewDay, gap: Gap): Candidate | null 
   for (let startMs = firstStart(search, day, fromMs); startMs <= lastStart; startMs += STEP_MS) {
     const more = followingPieces(search, day, search.workMs - (day.endMs - startMs));
     if (!more) continue;
-    const pieces = [{ startMs, endMs: day.endMs, day }, ...more.pieces];
+    const pieces = [{ startMs, endMs: day.endMs, day, gap }, ...more.pieces];
     const scrapMs = scrap(startMs - fromMs) + more.scrapMs;
     const driveAddedMinutes = driveAdded(search, gap) + more.driveAddedMinutes;
-    best = better(best, { search, gap, pieces, driveAddedMinutes, scrapMs });
+    best = better(best, { search, pieces, driveAddedMinutes, scrapMs });
   }
   return best;
 }
@@ -141,7 +141,7 @@ function followingPieces(search: Search, firstDay: CrewDay, workMs: number) {
     if (endMs > untilMs) return null;
     leftMs -= endMs - day.startMs;
     driveAddedMinutes += driveAdded(search, gap);
-    pieces.push({ startMs: day.startMs, endMs, day });
+    pieces.push({ startMs: day.startMs, endMs, day, gap });
     if (leftMs <= 0) return { pieces, driveAddedMinutes, scrapMs: scrap(untilMs - endMs) };
   }
   return { pieces, driveAddedMinutes, scrapMs: 0 };
@@ -157,13 +157,12 @@ function better(
   best: Candidate | null,
   next: {
     search: Search;
-    gap: Gap;
     pieces: Piece[];
     driveAddedMinutes: number;
     scrapMs: number;
   },
 ): Candidate {
-  const { search, gap, pieces, driveAddedMinutes, scrapMs } = next;
+  const { search, pieces, driveAddedMinutes, scrapMs } = next;
   const { weights, wishes, windowMinutes, from } = search.input;
   const waited = daysBetween(from, pieces[0]?.day.date ?? from);
   const missed = missedWishes(pieces, { wishes, windowMinutes }).length;
@@ -172,21 +171,26 @@ function better(
     weights.dayWaited * waited +
     weights.scrapMinute * (scrapMs / MINUTE_MS) +
     weights.missedWish * missed;
-  return best && best.score <= score ? best : { pieces, driveAddedMinutes, score, gap };
+  return best && best.score <= score ? best : { pieces, driveAddedMinutes, score };
 }
 
 function driveAdded({ drive, crew, input }: Search, gap: Gap): number {
-  const from = gap.after ? gap.after.piece.place : crew.base;
-  const to = gap.before ? gap.before.piece.place : crew.base;
+  const [from, to] = ends(gap, crew);
   // Base to base is a day at home, not a drive.
   const without = gap.after === null && gap.before === null ? 0 : drive(from, to);
   return drive(from, input.site) + drive(input.site, to) - without;
 }
 
+/** Where the crew comes from and drives on to. */
+function ends({ after, before }: Gap, { base }: OpeningCrew): [PlaceIndex, PlaceIndex] {
+  return [after ? after.piece.place : base, before ? before.piece.place : base];
+}
+
 function opening({ crew, input }: Search, best: Candidate): FoundOpening {
-  const { pieces, gap } = best;
+  const { pieces } = best;
   const { wishes, windowMinutes } = input;
   const startMs = pieces[0]?.startMs ?? 0;
+  const gap = pieces[0]?.gap;
   return {
     crewId: crew.id,
     pieces: pieces.map((piece) => ({
@@ -199,8 +203,9 @@ function opening({ crew, input }: Search, best: Candidate): FoundOpening {
     leavesFreeMinutes: pieces.reduce((sum, piece) => sum + freeAfter(piece), 0) / MINUTE_MS,
     missedWishes: missedWishes(pieces, { wishes, windowMinutes }),
     score: best.score,
-    after: gap.after?.piece.label ?? null,
-    before: gap.before?.piece.label ?? null,
+    places: [...new Set(pieces.flatMap((piece) => ends(piece.gap, crew)))],
+    after: gap?.after?.piece.label ?? null,
+    before: gap?.before?.piece.label ?? null,
   };
 }
 
@@ -220,8 +225,8 @@ const scrap = (ms: number): number =>
 
 function driveOf(input: OpeningsInput) {
   return (from: PlaceIndex, to: PlaceIndex): number => {
-    const minutes = from === null || to === null ? undefined : input.driveMinutes[from]?.[to];
-    return Math.ceil(minutes ?? input.driveWhenUnknownMinutes);
+    if (from === null || to === null) return input.driveWhenUnknownMinutes;
+    return Math.ceil(input.driveMinutes(from, to));
   };
 }
 

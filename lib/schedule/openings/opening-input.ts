@@ -5,7 +5,7 @@ import type { WorkCalendar } from '@/lib/schedule/work-calendar';
 import type { LocalDate } from '@/lib/time/civil';
 import type { Zone } from '@/lib/time/zones';
 
-/** Row and column of the drive matrix; null where a place is not on the map. */
+/** By which the drive is asked for; null where a place is not on the map. */
 export type PlaceIndex = number | null;
 
 /** Time that is taken: [startsAt, endsAt), on one day. */
@@ -32,8 +32,8 @@ export type OpeningsInput = {
   crews: readonly OpeningCrew[];
   /** Where the visit is. */
   site: PlaceIndex;
-  /** Minutes from row to column. */
-  driveMinutes: readonly (readonly number[])[];
+  /** Between two places on the map; asked only for drives that matter. */
+  driveMinutes: (from: number, to: number) => number;
   /** Between two places of which one is not on the map. */
   driveWhenUnknownMinutes: number;
   /** First day that the gates allow, and the last day on which the visit may begin. */
@@ -61,6 +61,8 @@ export type FoundOpening = {
   missedWishes: MissedWish[];
   /** Minutes of trouble: the weighted sum, the least is the best. */
   score: number;
+  /** All places that the added driving is reckoned from. */
+  places: PlaceIndex[];
   /** The stops before and after on the first day; null for the crew's base. */
   after: string | null;
   before: string | null;

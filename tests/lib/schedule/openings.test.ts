@@ -27,11 +27,12 @@ const busy = (date: string, start: string, end: string, place = 1): BusyPiece =>
   label: `stop ${place}`,
 });
 /** The base is place 0, the site 2; a stop at place 1. */
-const driveMinutes = [
+const drives = [
   [0, 20, 25],
   [20, 0, 10],
   [25, 10, 0],
 ];
+const driveMinutes = (from: number, to: number) => drives[from]?.[to] ?? Number.NaN;
 const crewOf = (given: Partial<OpeningCrew> = {}): OpeningCrew => ({
   id: 'north',
   name: 'North crew',
@@ -253,7 +254,7 @@ function scoreOf(input: OpeningsInput, crew: OpeningCrew, startsAt: Date): numbe
   // A visit of several days begins at the end of a day, so that nothing comes between its days.
   if (isLong && toLocal(first.endsAt, zone).time !== '16:00') return null;
   const drive = (from: number | null, to: number | null) =>
-    from === null || to === null ? 20 : (driveMinutes[from]?.[to] ?? 20);
+    from === null || to === null ? 20 : (drives[from]?.[to] ?? 20);
   let added = 0;
   let scrap = 0;
   const { weekdays: days, notBefore, notAfter, doneBy, away } = input.wishes;
