@@ -2,10 +2,10 @@
 import type { WallColumn, WallFit, WallRow } from '@/lib/measure/fit';
 import { type FitContext, SURE_LENGTH_U_MM } from '@/lib/measure/fit-context';
 import { fitFigure } from '@/lib/measure/fit-figure';
-import { planeOf } from '@/lib/measure/minimum-zone-plane';
+import { flatZone } from '@/lib/measure/minimum-zone-plane';
 import type { WalkedWall } from '@/lib/measure/room-walk';
 import { straightedgeGap } from '@/lib/measure/straightedge-gap';
-import { straightness } from '@/lib/measure/straightness';
+import { straightZone } from '@/lib/measure/straightness';
 import type { FaceRow, WallFaces } from '@/lib/measure/wall-faces';
 import type { PlumbColumn } from '@/lib/measure/wall-lean';
 import type { Problem } from '@/lib/problem';
@@ -59,7 +59,7 @@ function fitWall(
 
 function fitRow(row: FaceRow, straightedgeMm: number, problems: Problem[]): WallRow | null {
   if (row.points.length < 3) return null;
-  const straight = straightness(row.points);
+  const straight = straightZone(row.points);
   problems.push(...straight.problems);
   if (!straight.value) return null;
   const under = straightedgeGap(row.points, straightedgeMm).value;
@@ -98,7 +98,7 @@ function flatness(faces: WallFaces, problems: Problem[]) {
       null,
     );
   if (!fullest || fullest.points.length < FEWEST_FOR_FLATNESS) return null;
-  const plane = planeOf(
+  const plane = flatZone(
     fullest.points.map(({ id, xMm, zMm, sMm, u }) => ({ id, xMm, yMm: zMm, sMm, u })),
   );
   problems.push(...plane.problems);

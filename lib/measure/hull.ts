@@ -18,7 +18,9 @@ export function lowerHull<P extends HullPoint>(points: P[]): P[] {
 
 /** `up`: 1 for the upper boundary, −1 for the lower. */
 function boundary<P extends HullPoint>(points: P[], up: 1 | -1): P[] {
-  const sorted = [...points].sort((a, b) => a.at - b.at || up * (b.s - a.s));
+  const sorted = isInOrder(points)
+    ? points
+    : [...points].sort((a, b) => a.at - b.at || up * (b.s - a.s));
   const hull: P[] = [];
   for (const point of sorted) {
     if (hull[hull.length - 1]?.at === point.at) continue;
@@ -26,6 +28,14 @@ function boundary<P extends HullPoint>(points: P[], up: 1 | -1): P[] {
     hull.push(point);
   }
   return hull;
+}
+
+/** Each place after the one before it: most rows come so. */
+function isInOrder(points: HullPoint[]): boolean {
+  for (let i = 1; i < points.length; i++) {
+    if (!((points[i]?.at ?? 0) > (points[i - 1]?.at ?? 0))) return false;
+  }
+  return true;
 }
 
 /** Whether the last point stands out from the straight line between the one before it and the next. */

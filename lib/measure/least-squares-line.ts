@@ -4,12 +4,37 @@ import type { StripPoint } from './narrowest-strip';
 export type FittedLine = {
   slope: Combination;
   atZero: Combination;
-  /** Greatest less least residual. */
-  spread: Combination;
+  /** Greatest less least residual; reckoned when asked for. */
+  spread: () => Combination;
 };
 
 /** Nearer than this two places are one. */
 const ONE_PLACE = 1e-6;
+
+/** Each point's weight in the slope and in the mean; null where all points are at one place. */
+function sharesOf(points: { at: number }[], weights?: number[]) {
+  let [least, greatest, total, middle, moment] = [Infinity, -Infinity, 0, 0, 0];
+  for (let i = 0; i < points.length; i++) {
+    const at = points[i]?.at ?? 0;
+    least = Math.min(least, at);
+    greatest = Math.max(greatest, at);
+    total += weights?.[i] ?? 1;
+    middle += (weights?.[i] ?? 1) * at;
+  }
+  if (!(greatest - least > ONE_PLACE)) return null;
+  middle /= total;
+  points.forEach(({ at }, i) => {
+    moment += (weights?.[i] ?? 1) * (at - middle) ** 2;
+  });
+  const inSlope = points.map(({ at }, i) => ((weights?.[i] ?? 1) * (at - middle)) / moment);
+  return { inSlope, inMean: points.map((_, i) => (weights?.[i] ?? 1) / total), middle };
+}
+
+/** The slope of the least-squares line alone; null where all points are at one place. */
+export function leastSquaresSlope(points: StripPoint[]): number | null {
+  const shares = sharesOf(points);
+  return shares && points.reduce((sum, { s }, i) => sum + (shares.inSlope[i] ?? 0) * s, 0);
+}
 
 /**
  * Least-squares line s = atZero + slope · at; every result is a combination of the readings.
@@ -18,31 +43,27 @@ const ONE_PLACE = 1e-6;
  * Source: Gauss; JCGM 100:2008 annex H.3.
  */
 export function leastSquaresLine(points: StripPoint[], weights?: number[]): FittedLine | null {
-  const weight = (index: number) => weights?.[index] ?? 1;
-  const places = points.map(({ at }) => at);
-  if (!(Math.max(...places) - Math.min(...places) > ONE_PLACE)) return null;
-  const total = points.reduce((sum, _, index) => sum + weight(index), 0);
-  const middle = points.reduce((sum, { at }, index) => sum + weight(index) * at, 0) / total;
-  const moment = points.reduce((sum, { at }, index) => sum + weight(index) * (at - middle) ** 2, 0);
-  const slope = combine(
-    points.map(({ at, c }, index) => [(weight(index) * (at - middle)) / moment, c]),
-  );
-  const mean = combine(points.map(({ c }, index) => [weight(index) / total, c]));
+  const shares = sharesOf(points, weights);
+  if (shares === null) return null;
+  const { inSlope, inMean, middle } = shares;
+  const slope = combine(points.map(({ c }, i) => [inSlope[i] ?? 0, c]));
+  const mean = combine(points.map(({ c }, i) => [inMean[i] ?? 0, c]));
   const atZero = combine([
     [1, mean],
     [-middle, slope],
   ]);
-  const spread = spreadOf(
-    points.map(({ at, s }) => s - atZero.value - at * slope.value),
-    (index) => {
-      const { at, c } = points[index] ?? { at: 0, c: atZero };
-      return combine([
-        [1, c],
-        [-1, atZero],
-        [-at, slope],
-      ]);
-    },
-  );
+  const spread = () =>
+    spreadOf(
+      points.map(({ at, s }) => s - atZero.value - at * slope.value),
+      (index) => {
+        const { at, c } = points[index] ?? { at: 0, c: atZero };
+        return combine([
+          [1, c],
+          [-1, atZero],
+          [-at, slope],
+        ]);
+      },
+    );
   return { slope, atZero, spread };
 }
 

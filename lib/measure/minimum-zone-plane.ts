@@ -1,7 +1,12 @@
-import { type Outcome, problem, refused } from '@/lib/problem';
+import { type Outcome, type Problem, problem, refused } from '@/lib/problem';
 import { combinationFigure, combine, readCombination } from './combination';
 import type { Figure } from './figure';
-import { type FittedPlane, leastSquaresPlane } from './least-squares-plane';
+import {
+  leastSquaresPlane,
+  type PlaneNumbers,
+  type PlanePoint,
+  planeNumbers,
+} from './least-squares-plane';
 import { unreadable } from './reading-problems';
 import { type Contact, widestAcross } from './widest-across';
 
@@ -34,35 +39,15 @@ export type Flatness = {
  * Source: minimum zone and least squares as in ISO 12781.
  */
 export function planeOf(points: SurfacePoint[]): Outcome<Flatness> {
-  const bad = unreadable(
-    points.map(({ id, xMm, yMm, sMm, u }) => ({ id, values: [xMm, yMm, sMm], u })),
-  );
-  if (bad.length > 0) return refused(...bad);
-  const ids = points.map(({ id }) => id);
-  if (points.length < 4) {
-    return refused(problem('too-few-readings', 'Flatness needs four readings or more.', ids));
-  }
-  const reads = points.map(({ id, xMm, yMm, sMm, u }) => ({
-    x: xMm,
-    y: yMm,
-    c: readCombination(id, sMm, u),
-  }));
+  const zone = flatZone(points);
+  if (!zone.value) return { value: null, problems: zone.problems };
+  const { minimumZone, plane, contacts, reads } = zone.value;
   const fit = leastSquaresPlane(reads);
-  const zone = fit === null ? null : narrowestSlab(points, fit);
-  if (fit === null || zone === null) {
-    const words = 'These readings lie on one line. Take some beside it to see how flat it is.';
-    return refused(problem('places-in-line', words, ids));
-  }
-  const width = combine(
-    zone.contacts.map(({ index, proud, weight }) => [
-      proud ? weight : -weight,
-      reads[index]?.c ?? { value: 0, parts: [] },
-    ]),
-  );
+  if (fit === null) return refused(inLine(points));
   const value: Flatness = {
-    minimumZone: combinationFigure(width),
+    minimumZone,
     leastSquares: combinationFigure(fit.spread),
-    zonePlane: zone.plane,
+    zonePlane: plane,
     leastSquaresPlane: {
       slopeX: fit.slopeX.value,
       slopeY: fit.slopeY.value,
@@ -70,15 +55,58 @@ export function planeOf(points: SurfacePoint[]): Outcome<Flatness> {
     },
     slopeX: combinationFigure(fit.slopeX),
     slopeY: combinationFigure(fit.slopeY),
-    contact: contactOf(zone.contacts),
+    contact: contactOf(contacts),
   };
   return { value, problems: [] };
+}
+
+type FlatZone = {
+  minimumZone: Figure;
+  plane: Plane;
+  contacts: Contact[];
+  reads: PlanePoint[];
+};
+
+/** The narrowest slab, without the least-squares figures that a fit has no use for. */
+export function flatZone(points: SurfacePoint[]): Outcome<FlatZone> {
+  const bad = unreadable(
+    points.map(({ id, xMm, yMm, sMm, u }) => ({ id, values: [xMm, yMm, sMm], u })),
+  );
+  if (bad.length > 0) return refused(...bad);
+  if (points.length < 4) {
+    const ids = points.map(({ id }) => id);
+    return refused(problem('too-few-readings', 'Flatness needs four readings or more.', ids));
+  }
+  const reads = points.map(({ id, xMm, yMm, sMm, u }) => ({
+    x: xMm,
+    y: yMm,
+    c: readCombination(id, sMm, u),
+  }));
+  const numbers = planeNumbers(reads);
+  const zone = numbers && narrowestSlab(points, numbers);
+  if (!zone) return refused(inLine(points));
+  const width = combine(
+    zone.contacts.map(({ index, proud, weight }) => [
+      proud ? weight : -weight,
+      reads[index]?.c ?? { value: 0, parts: [] },
+    ]),
+  );
+  return { value: { minimumZone: combinationFigure(width), ...zone, reads }, problems: [] };
+}
+
+function inLine(points: SurfacePoint[]): Problem {
+  const words = 'These readings lie on one line. Take some beside it to see how flat it is.';
+  return problem(
+    'places-in-line',
+    words,
+    points.map(({ id }) => id),
+  );
 }
 
 /** Worked on what the least-squares plane leaves, scaled to 1, so that a steep or huge plane costs no digits. */
 function narrowestSlab(
   points: SurfacePoint[],
-  fit: FittedPlane,
+  fit: PlaneNumbers,
 ): { contacts: Contact[]; plane: Plane } | null {
   const centreX = points.reduce((sum, { xMm }) => sum + xMm, 0) / points.length;
   const centreY = points.reduce((sum, { yMm }) => sum + yMm, 0) / points.length;
@@ -93,8 +121,8 @@ function narrowestSlab(
   }));
   const widest = widestAcross(scaled);
   if (widest === null) return null;
-  const slopeX = fit.slopeX.value + (widest.slopeX * height) / reach;
-  const slopeY = fit.slopeY.value + (widest.slopeY * height) / reach;
+  const slopeX = fit.slopeX + (widest.slopeX * height) / reach;
+  const slopeY = fit.slopeY + (widest.slopeY * height) / reach;
   const levels = points.map(({ xMm, yMm, sMm }) => sMm - slopeX * xMm - slopeY * yMm);
   const atZeroMm = (Math.max(...levels) + Math.min(...levels)) / 2;
   return { contacts: widest.contacts, plane: { slopeX, slopeY, atZeroMm } };

@@ -1,6 +1,6 @@
 import { type Outcome, problem, refused } from '@/lib/problem';
 import { type Combination, combinationFigure, combine } from './combination';
-import type { Figure } from './figure';
+import { type Figure, figure } from './figure';
 import { leastSquaresLine } from './least-squares-line';
 import { stripPoint } from './narrowest-strip';
 import type { ProfilePoint } from './profile';
@@ -38,7 +38,17 @@ const LEAST_U = 1e-6;
  * Problems: too-few-heights, reading-not-a-number, uncertainty-not-known.
  * Source: least squares, JCGM 100:2008 annex H.3; mm per metre: common practice.
  */
-export function plumbOf({ points, uReference, overMm }: PlumbInput): Outcome<Plumb> {
+export function plumbOf(input: PlumbInput): Outcome<Plumb> {
+  const leaning = leanOfColumn(input);
+  if (!leaning.value) return { value: null, problems: leaning.problems };
+  const { spread, ...lean } = leaning.value;
+  return { value: { ...lean, outOfStraight: combinationFigure(spread()) }, problems: [] };
+}
+
+export type ColumnLean = Omit<Plumb, 'outOfStraight'> & { spread: () => Combination };
+
+/** As `plumbOf`, the column's own straightness only when asked for. */
+export function leanOfColumn({ points, uReference, overMm }: PlumbInput): Outcome<ColumnLean> {
   const bad = unreadable([
     ...points.map(({ id, atMm, sMm, u }) => ({ id, values: [atMm, sMm], u })),
     { id: null, values: [overMm], u: uReference },
@@ -63,17 +73,17 @@ export function plumbOf({ points, uReference, overMm }: PlumbInput): Outcome<Plu
   ]);
   const lean = combinationFigure(slope);
   const leans = Math.abs(lean.value) <= lean.U ? 'plumb' : lean.value > 0 ? 'in' : 'out';
-  const value: Plumb = {
+  const value: ColumnLean = {
     lean,
-    perMetre: times(1000, slope),
-    over: times(overMm, slope),
+    perMetre: times(1000, lean),
+    over: times(overMm, lean),
     overMm,
     leans,
-    outOfStraight: combinationFigure(fit.spread),
+    spread: fit.spread,
   };
   return { value, problems: [] };
 }
 
-function times(factor: number, slope: Combination): Figure {
-  return combinationFigure(combine([[factor, slope]]));
+function times(factor: number, { value, u, from }: Figure): Figure {
+  return figure(factor * value, Math.abs(factor) * u, from);
 }

@@ -71,16 +71,19 @@ export function straightedgeGap(
 
 /** In order along the row; readings at one place count as their mean. */
 function profileOf(points: ProfilePoint[]): StripPoint[] {
-  const places = new Map<number, StripPoint[]>();
-  for (const point of points) {
-    places.set(point.atMm, [...(places.get(point.atMm) ?? []), stripPoint(point)]);
+  const sorted = points.map(stripPoint).sort((a, b) => a.at - b.at);
+  const places: StripPoint[][] = [];
+  for (const point of sorted) {
+    const last = places[places.length - 1];
+    if (last?.[0]?.at === point.at) last.push(point);
+    else places.push([point]);
   }
-  return [...places.entries()]
-    .sort(([a], [b]) => a - b)
-    .map(([at, here]) => {
-      const c = combine(here.map((point) => [1 / here.length, point.c]));
-      return { at, s: c.value, c };
-    });
+  return places.flatMap((here) => {
+    const [first] = here;
+    if (!first || here.length === 1) return here;
+    const c = combine(here.map((point) => [1 / here.length, point.c]));
+    return [{ at: first.at, s: c.value, c }];
+  });
 }
 
 /**

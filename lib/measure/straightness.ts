@@ -1,7 +1,7 @@
-import { type Outcome, problem, refused } from '@/lib/problem';
+import { type Outcome, type Problem, problem, refused } from '@/lib/problem';
 import { combinationFigure } from './combination';
 import type { Figure } from './figure';
-import { leastSquaresLine } from './least-squares-line';
+import { leastSquaresLine, leastSquaresSlope } from './least-squares-line';
 import { narrowestStrip, type StripPoint, stripPoint } from './narrowest-strip';
 import type { ProfilePoint } from './profile';
 import { unreadable } from './reading-problems';
@@ -31,32 +31,51 @@ export type Straightness = {
  * Source: minimum zone and least squares as in ISO 12780; shape: common practice.
  */
 export function straightness(points: ProfilePoint[]): Outcome<Straightness> {
+  const zone = straightZone(points);
+  if (!zone.value) return { value: null, problems: zone.problems };
+  const { minimumZone, shape, slope, strip } = zone.value;
+  const fit = leastSquaresLine(strip);
+  if (fit === null) return refused(tooFew(points));
+  const value = {
+    minimumZone,
+    leastSquares: combinationFigure(fit.spread()),
+    zoneLine: { slope, atZeroMm: Math.max(...strip.map(({ at, s }) => s - slope * at)) },
+    leastSquaresLine: { slope: fit.slope.value, atZeroMm: fit.atZero.value },
+    shape,
+  };
+  return { value, problems: [] };
+}
+
+type StraightZone = Pick<Straightness, 'minimumZone' | 'shape'> & {
+  slope: number;
+  strip: StripPoint[];
+};
+
+/** The narrowest strip and the shape, without the least-squares line that a fit has no use for. */
+export function straightZone(points: ProfilePoint[]): Outcome<StraightZone> {
   const bad = unreadable(points.map(({ id, atMm, sMm, u }) => ({ id, values: [atMm, sMm], u })));
   if (bad.length > 0) return refused(...bad);
   const strip = points.map(stripPoint);
-  const fit = leastSquaresLine(strip);
+  const fitted = leastSquaresSlope(strip);
   const zone = narrowestStrip(strip);
-  if (new Set(points.map(({ atMm }) => atMm)).size < 3 || fit === null || zone === null) {
-    const words = 'Straightness needs readings at three places or more along the line.';
-    return refused(
-      problem(
-        'too-few-readings',
-        words,
-        points.map(({ id }) => id),
-      ),
-    );
+  if (new Set(points.map(({ atMm }) => atMm)).size < 3 || fitted === null || zone === null) {
+    return refused(tooFew(points));
   }
-  const slope = Math.min(zone.slopeMost, Math.max(zone.slopeLeast, fit.slope.value));
-  const atZeroMm = Math.max(...strip.map(({ at, s }) => s - slope * at));
+  const slope = Math.min(zone.slopeMost, Math.max(zone.slopeLeast, fitted));
   const minimumZone = combinationFigure(zone.width);
-  const value = {
-    minimumZone,
-    leastSquares: combinationFigure(fit.spread),
-    zoneLine: { slope, atZeroMm },
-    leastSquaresLine: { slope: fit.slope.value, atZeroMm: fit.atZero.value },
-    shape: shapeOf(strip, slope, minimumZone),
+  return {
+    value: { minimumZone, shape: shapeOf(strip, slope, minimumZone), slope, strip },
+    problems: [],
   };
-  return { value, problems: [] };
+}
+
+function tooFew(points: ProfilePoint[]): Problem {
+  const words = 'Straightness needs readings at three places or more along the line.';
+  return problem(
+    'too-few-readings',
+    words,
+    points.map(({ id }) => id),
+  );
 }
 
 /**

@@ -1,9 +1,9 @@
 /** The lean of a wall from its columns of face readings. */
 import { type Figure, figure } from '@/lib/measure/figure';
-import { type Plumb, plumbOf } from '@/lib/measure/plumb';
+import { type ColumnLean, leanOfColumn } from '@/lib/measure/plumb';
 import type { FaceColumn, WallFaces } from '@/lib/measure/wall-faces';
 
-export type PlumbColumn = { column: FaceColumn; plumb: Plumb };
+export type PlumbColumn = { column: FaceColumn; plumb: ColumnLean };
 
 /** A wall leans a little otherwise elsewhere than where it was read: 1 mm/m; from memory. */
 const USUAL_TWIST = 0.001;
@@ -15,7 +15,7 @@ export function plumbColumns(faces: WallFaces): PlumbColumn[] {
       const first = column.points[0];
       const last = column.points[column.points.length - 1];
       const overMm = (last?.atMm ?? 0) - (first?.atMm ?? 0);
-      const plumb = plumbOf({ points: column.points, uReference: setUp.uPlumb, overMm });
+      const plumb = leanOfColumn({ points: column.points, uReference: setUp.uPlumb, overMm });
       return plumb.value ? [{ column, plumb: plumb.value }] : [];
     }),
   );
