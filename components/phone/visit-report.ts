@@ -3,7 +3,8 @@ import type { Queued } from '@/lib/sync/queued';
 
 export type VisitTap = ReportVisitInput['what'];
 
-const statusAfter: Record<VisitTap, VisitStatus> = {
+/** Running late leaves the visit where it stands. */
+const statusAfter: Partial<Record<VisitTap, VisitStatus>> = {
   'on-the-way': 'on-the-way',
   arrived: 'on-site',
   done: 'done',
@@ -14,15 +15,15 @@ const statusAfter: Record<VisitTap, VisitStatus> = {
 export function statusOnPhone(visit: TodayVisit, queue: readonly Queued[]): VisitStatus {
   const taps = queue.flatMap(({ work, parked }) =>
     parked === null && work.kind === 'report' && work.report.visitId === visit.id
-      ? [work.report.what]
+      ? [statusAfter[work.report.what] ?? []].flat()
       : [],
   );
-  const last = taps.at(-1);
-  return last ? statusAfter[last] : visit.status;
+  return taps.at(-1) ?? visit.status;
 }
 
 export const tapWords: Record<VisitTap, string> = {
   'on-the-way': 'On my way',
+  'running-late': 'Running late',
   arrived: 'Arrived',
   done: 'Done',
   'nobody-home': 'Nobody home',
@@ -34,9 +35,9 @@ export function tapsFrom(status: VisitStatus): VisitTap[] {
     case 'held':
     case 'booked':
     case 'confirmed':
-      return ['on-the-way', 'arrived'];
+      return ['on-the-way', 'arrived', 'running-late'];
     case 'on-the-way':
-      return ['arrived', 'nobody-home'];
+      return ['arrived', 'running-late', 'nobody-home'];
     case 'on-site':
       return ['done', 'nobody-home'];
     case 'done':

@@ -3,6 +3,7 @@
 import { useState } from 'react';
 import { Button } from '@/components/ui/button';
 import type { TodayVisit } from '@/lib/contracts/visits';
+import { HowLate } from './how-late';
 import { usePersonId } from './phone-person';
 import { keepWork, readQueue } from './queue-store';
 import { useLive } from './use-live';
@@ -14,16 +15,28 @@ export function VisitTaps({ visit }: { visit: TodayVisit }) {
   const live = useLive('queue', readQueue);
   const [problem, setProblem] = useState<string | null>(null);
   const status = statusOnPhone(visit, live.state === 'here' ? live.value : []);
-  const tap = async (what: VisitTap) => {
+  const [asksHowLate, setAsksHowLate] = useState(false);
+  const tap = async (what: VisitTap, lateMinutes?: number) => {
+    if (what === 'running-late' && lateMinutes === undefined) return setAsksHowLate(true);
+    setAsksHowLate(false);
     try {
       const at = new Date().toISOString();
-      await keepWork(personId, [{ kind: 'report', report: { visitId: visit.id, what, at } }]);
+      const report = { visitId: visit.id, what, at, lateMinutes };
+      await keepWork(personId, [{ kind: 'report', report }]);
       setProblem(null);
     } catch {
       setProblem('This phone could not keep it. Ring the office instead.');
     }
   };
   const taps = tapsFrom(status);
+  if (asksHowLate) {
+    return (
+      <HowLate
+        onSay={(minutes) => tap('running-late', minutes)}
+        onLeave={() => setAsksHowLate(false)}
+      />
+    );
+  }
   if (taps.length === 0) return null;
   return (
     <div className="flex flex-col gap-2">

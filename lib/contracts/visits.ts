@@ -1,5 +1,6 @@
 /** The diary on the wire: visits, the waiting list, bookings and what is told from site. */
 import { z } from 'zod';
+import { missingThings } from '@/lib/messages/missing-words';
 import { visitKind } from '@/lib/schedule/visit-kind';
 
 const id = z.uuid();
@@ -61,6 +62,8 @@ export const visitView = z.object({
   workMinutes: z.number().int(),
   customerSays: z.string(),
   confirmedAt: z.iso.datetime().nullable(),
+  /** When a crew that runs late now expects to be there. */
+  expectedAt: z.iso.datetime().nullable(),
   arrivedAt: z.iso.datetime().nullable(),
   leftAt: z.iso.datetime().nullable(),
   pieces: z.array(pieceView),
@@ -137,12 +140,19 @@ export const callOffVisitInput = z.object({
 export type CallOffVisitInput = z.infer<typeof callOffVisitInput>;
 
 /** One tap on site. */
-export const reportVisitInput = z.object({
-  visitId: id,
-  what: z.enum(['on-the-way', 'arrived', 'done', 'nobody-home']),
-  /** When it was tapped, by the phone's clock. */
-  at: z.iso.datetime(),
-});
+export const reportVisitInput = z
+  .object({
+    visitId: id,
+    what: z.enum(['on-the-way', 'running-late', 'arrived', 'done', 'nobody-home']),
+    /** When it was tapped, by the phone's clock. */
+    at: z.iso.datetime(),
+    /** Running late: how long after the end of the promised window they will be there. */
+    lateMinutes: z.number().int().min(5).max(600).optional(),
+  })
+  .refine(({ what, lateMinutes }) => what !== 'running-late' || lateMinutes !== undefined, {
+    path: ['lateMinutes'],
+    message: 'Say how many minutes late.',
+  });
 export type ReportVisitInput = z.infer<typeof reportVisitInput>;
 
 /** Measurer's or crew's list for a local day. */
@@ -183,12 +193,24 @@ export const customerVisitView = z.object({
 });
 export type CustomerVisitView = z.infer<typeof customerVisitView>;
 
-export const customerAnswerInput = z.object({
-  token: z.string().min(10).max(60),
-  answer: z.enum(['confirm', 'another-time', 'not-ready']),
-  /** Another time: when would suit. Not ready: what is missing. */
-  words: z.string().trim().max(400).default(''),
-});
+/** A box of a plain form: there as "yes", or not there. */
+const ticked = z.preprocess((value) => value === 'yes', z.boolean());
+
+export const customerAnswerInput = z
+  .object({
+    token: z.string().min(10).max(60),
+    answer: z.enum(['confirm', 'another-time', 'call-me', 'not-ready', 'ready-now']),
+    /** Another time, call me: when would suit. Not ready: what is missing, in their own words. */
+    words: z.string().trim().max(400).default(''),
+    floor: ticked,
+    power: ticked,
+    parking: ticked,
+    away: ticked,
+  })
+  .transform(({ floor, power, parking, away, ...answer }) => {
+    const boxes = { floor, power, parking, away };
+    return { ...answer, missing: missingThings.filter((thing) => boxes[thing]) };
+  });
 export type CustomerAnswerInput = z.infer<typeof customerAnswerInput>;
 
 export const createCrewInput = z.object({

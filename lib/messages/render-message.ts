@@ -18,7 +18,7 @@ export type RenderInput = {
 
 export type RenderedEmail = { subject: string; text: string; html: string };
 
-const buttonWords: Record<Language, string> = { en: 'Open your visit', es: 'Ver su visita' };
+export const buttonWords: Record<Language, string> = { en: 'Open your visit', es: 'Ver su visita' };
 
 /** What a new shop says on an occasion. */
 export function usualWording(occasion: Occasion, language: Language): Wording {

@@ -20,7 +20,11 @@ export const sampleValues: Record<Language, Record<Field, string>> = {
     window: 'between 11:00 AM and 1:00 PM',
     oldDay: 'Wednesday, September 16',
     oldWindow: 'between 11:00 AM and 1:00 PM',
+    arrival: 'about 11:45 AM',
     reason: 'The floor is not down yet.',
+    missing: 'the floor; the power',
+    choices:
+      '1 for the site measure on Wed, Sep 16, or 2 for the countertop template on Wed, Sep 23',
   },
   es: {
     ...common,
@@ -30,6 +34,10 @@ export const sampleValues: Record<Language, Record<Field, string>> = {
     window: 'entre las 11:00 a.m. y la 1:00 p.m.',
     oldDay: 'miércoles 16 de septiembre',
     oldWindow: 'entre las 11:00 a.m. y la 1:00 p.m.',
+    arrival: 'cerca de las 11:45 a.m.',
     reason: 'El piso aún no está puesto.',
+    missing: 'el piso; la electricidad',
+    choices:
+      '1 para la toma de medidas del mié 16 sep, o 2 para la plantilla de la cubierta del mié 23 sep',
   },
 };

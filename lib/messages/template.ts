@@ -5,6 +5,7 @@ import { type Field, fieldWords, type Occasion } from './occasions';
 /** One occasion's wording. The HTML of the e-mail is made from its text. */
 export type Wording = { sms: string; subject: string; email: string };
 export type WordingPart = keyof Wording;
+export const wordingParts = ['sms', 'subject', 'email'] as const satisfies WordingPart[];
 export type OccasionTemplates = Record<Occasion, Wording>;
 
 export type FieldValues = Readonly<Partial<Record<Field, string>>>;

@@ -30,6 +30,19 @@ Please tell us with one tap that the time suits, or ask for another one:
 {shop}
 {shopPhone}`,
   },
+  'asked-again': {
+    sms: '{shop}: we have not heard from you. May we come {day}, {window}, for your {visit}? Reply YES, or CHANGE for another time. {link}',
+    subject: 'Does this suit? {visit} on {day}',
+    email: `Hello {customer},
+
+We have not heard from you yet. We plan to come {day}, {window}, for your {visit} at {address}.
+
+Please tell us with one tap that the time suits, or ask for another one:
+{link}
+
+{shop}
+{shopPhone}`,
+  },
   'day-before': {
     sms: '{shop}: a reminder that we come {day}, {window}, for your {visit}. What to clear: {link}',
     subject: 'A reminder: {visit} on {day}',
@@ -58,11 +71,11 @@ Who comes: {crew}.
 {shopPhone}`,
   },
   'running-late': {
-    sms: '{shop}: sorry, we are about {minutesLate} minutes late. We now arrive {window}. Questions: {shopPhone}',
+    sms: '{shop}: sorry, we are about {minutesLate} minutes late and now arrive {arrival}. Questions: {shopPhone}',
     subject: 'We are running late',
     email: `Hello {customer},
 
-We are sorry: we are about {minutesLate} minutes late for your {visit}. We now arrive {window}.
+We are sorry: we are about {minutesLate} minutes late for your {visit} and now arrive {arrival}.
 
 {link}
 
@@ -93,17 +106,56 @@ We will talk to you about a new time. You reach us at {shopPhone}.
 
 {shop}`,
   },
+  missed: {
+    sms: '{shop}: we came for your {visit} and found nobody home. Please ring {shopPhone}, and we find another time.',
+    subject: 'We missed you: {visit} on {day}',
+    email: `Hello {customer},
+
+We came to {address} on {day} for your {visit} and found nobody home.
+
+Please ring us, and we find another time: {shopPhone}.
+
+{shop}`,
+  },
+  'not-ready': {
+    sms: '{shop}: noted, not ready yet: {missing}. We talk to you before {day}. Questions: {shopPhone}',
+    subject: 'Noted: not ready yet for your {visit}',
+    email: `Hello {customer},
+
+We have noted what is not ready yet for your {visit} at {address}: {missing}.
+
+We talk to you before {day}. When it is ready, tell us here or by phone:
+{link}
+
+{shop}
+{shopPhone}`,
+  },
   done: {
-    sms: '{shop}: your {visit} is done. Thank you. Your copy: {link}',
+    sms: '{shop}: your {visit} is done. Thank you. How it stands: {link}',
     subject: 'Done: your {visit}',
     email: `Hello {customer},
 
 Your {visit} at {address} is done. Thank you.
 
-Your copy, and anything that is still open:
+How it stands, and anything that is still open:
 {link}
 
 {shop}
 {shopPhone}`,
+  },
+  'other-time': {
+    sms: '{shop}: choose another time for your {visit} here: {link} Or ring {shopPhone}.',
+    subject: '',
+    email: '',
+  },
+  'which-visit': {
+    sms: '{shop}: which visit do you mean? Reply {choices}. Or ring {shopPhone}.',
+    subject: '',
+    email: '',
+  },
+  help: {
+    sms: '{shop}: we text you about your visits only. Ring us at {shopPhone}.',
+    subject: '',
+    email: '',
   },
 };

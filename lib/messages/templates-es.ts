@@ -33,6 +33,19 @@ Díganos con un toque si la hora le conviene, o pida otra:
 {shop}
 {shopPhone}`,
   },
+  'asked-again': {
+    sms: '{shop}: no hemos recibido su respuesta. ¿Podemos ir el {day}, {window}, para su {visit}? Responda SI, o CAMBIO para otra hora. {link}',
+    subject: '¿Le conviene? {visit} el {day}',
+    email: `Hola, {customer}:
+
+Todavía no hemos recibido su respuesta. Pensamos ir el {day}, {window}, para su {visit} en {address}.
+
+Díganos con un toque si la hora le conviene, o pida otra:
+{link}
+
+{shop}
+{shopPhone}`,
+  },
   'day-before': {
     sms: '{shop}: le recordamos que vamos el {day}, {window}, para su {visit}. Qué despejar: {link}',
     subject: 'Recordatorio: {visit} el {day}',
@@ -61,11 +74,11 @@ Quién va: {crew}.
 {shopPhone}`,
   },
   'running-late': {
-    sms: '{shop}: disculpe, vamos unos {minutesLate} minutos tarde. Ahora llegamos {window}. Preguntas: {shopPhone}',
+    sms: '{shop}: disculpe, vamos unos {minutesLate} minutos tarde y ahora llegamos {arrival}. Preguntas: {shopPhone}',
     subject: 'Vamos con retraso',
     email: `Hola, {customer}:
 
-Disculpe: vamos unos {minutesLate} minutos tarde para su {visit}. Ahora llegamos {window}.
+Disculpe: vamos unos {minutesLate} minutos tarde para su {visit} y ahora llegamos {arrival}.
 
 {link}
 
@@ -96,17 +109,56 @@ Le hablaremos de una nueva fecha. Nuestro teléfono es {shopPhone}.
 
 {shop}`,
   },
+  missed: {
+    sms: '{shop}: fuimos para su {visit} y no encontramos a nadie en casa. Llame al {shopPhone} y buscamos otra hora.',
+    subject: 'No le encontramos: {visit} del {day}',
+    email: `Hola, {customer}:
+
+Fuimos a {address} el {day} para su {visit} y no había nadie en casa.
+
+Llámenos y buscamos otra hora: {shopPhone}.
+
+{shop}`,
+  },
+  'not-ready': {
+    sms: '{shop}: anotado, falta: {missing}. Le hablamos antes del {day}. Preguntas: {shopPhone}',
+    subject: 'Anotado: falta algo para su {visit}',
+    email: `Hola, {customer}:
+
+Anotamos lo que falta todavía para su {visit} en {address}: {missing}.
+
+Le hablamos antes del {day}. Cuando esté listo, avísenos aquí o por teléfono:
+{link}
+
+{shop}
+{shopPhone}`,
+  },
   done: {
-    sms: '{shop}: su {visit} queda terminada. Gracias. Su copia: {link}',
+    sms: '{shop}: su {visit} queda terminada. Gracias. Vea el estado: {link}',
     subject: 'Terminada: su {visit}',
     email: `Hola, {customer}:
 
 Su {visit} en {address} queda terminada. Gracias.
 
-Su copia y lo que aún esté pendiente:
+Cómo queda, y lo que aún esté pendiente:
 {link}
 
 {shop}
 {shopPhone}`,
+  },
+  'other-time': {
+    sms: '{shop}: elija otra hora para su {visit}: {link} O llame al {shopPhone}.',
+    subject: '',
+    email: '',
+  },
+  'which-visit': {
+    sms: '{shop}: ¿a qué visita se refiere? Responda {choices}. O llame al {shopPhone}.',
+    subject: '',
+    email: '',
+  },
+  help: {
+    sms: '{shop}: le escribimos solo sobre sus visitas. Llame al {shopPhone}.',
+    subject: '',
+    email: '',
   },
 };

@@ -14,6 +14,8 @@ export async function changeConsent(
     how: string;
     at: Date;
     byPersonId?: string;
+    /** Their words, or where it is written down. */
+    proof?: string;
   },
 ): Promise<void> {
   await tx.insert(consents).values(said);

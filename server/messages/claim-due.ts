@@ -67,6 +67,7 @@ const claimedFields = {
   id: messages.id,
   shopId: messages.shopId,
   customerId: messages.customerId,
+  jobId: messages.jobId,
   visitId: messages.visitId,
   occasion: messages.occasion,
   channel: messages.channel,

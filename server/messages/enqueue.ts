@@ -5,6 +5,7 @@ import type { Channel } from '@/lib/messages/consent';
 import type { Occasion } from '@/lib/messages/occasions';
 import { nextAllowedTime } from '@/lib/messages/quiet-hours';
 import type { Context } from '@/server/base/context';
+import { readMessageSettings } from './message-settings';
 import type { Recipient } from './recipient';
 
 export type Note = {
@@ -14,13 +15,16 @@ export type Note = {
   /** Past this instant it is of no use. */
   notAfter: Date;
   cause?: MessageCause;
+  /** What makes it one, instead of the visit's version: a later change of the visit tells it no second time. */
+  once?: string;
 };
 
 export type Told = { jobId: string; visitId: string; version: number; zone: string };
 
 /**
  * Puts notes into the outbox, in the transaction of their cause. A channel that the customer does not
- * allow, and a text that could only go at night or too late, is left out; a note of the same visit,
+ * allow, an occasion that the shop keeps silent on, and a text that could only go at night or too late, are
+ * left out; a note of the same visit,
  * version, occasion and channel is there already and stays one. Gives the channels that will be used.
  */
 export async function enqueue(
@@ -30,8 +34,10 @@ export async function enqueue(
   notes: Note[],
 ): Promise<Channel[]> {
   const { recipient, about } = to;
+  const { silentOn } = await readMessageSettings(tx, ctx.shop.id);
   const rows = notes
     .filter(({ channel }) => recipient.decision.channels.includes(channel))
+    .filter(({ occasion }) => !silentOn.includes(occasion))
     .flatMap((note) => {
       const dueAt = dueTime(ctx, about, note);
       return dueAt ? [rowOf(ctx, to, { ...note, dueAt })] : [];
@@ -54,7 +60,7 @@ function dueTime(ctx: Context, { zone }: Told, { channel, dueAt, notAfter }: Not
 
 function rowOf(ctx: Context, { recipient, about }: { recipient: Recipient; about: Told }, n: Note) {
   const { jobId, visitId, version } = about;
-  const { occasion, channel, dueAt, notAfter, cause } = n;
+  const { occasion, channel, dueAt, notAfter, cause, once = version } = n;
   return {
     shopId: ctx.shop.id,
     customerId: recipient.customerId,
@@ -62,7 +68,7 @@ function rowOf(ctx: Context, { recipient, about }: { recipient: Recipient; about
     visitId,
     occasion,
     channel,
-    key: `${visitId}:${version}:${occasion}:${channel}`,
+    key: `${visitId}:${once}:${occasion}:${channel}`,
     dueAt,
     notAfter,
     cause: cause ?? {},

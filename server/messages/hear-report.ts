@@ -2,7 +2,8 @@ import { and, eq, inArray, or } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { messages } from '@/db/schema';
 import type { SmsReport } from '@/server/ports/sms/sms-port';
-import { callThem, writeOptOut } from './write-outcome';
+import { giveUp } from './give-up';
+import { nextAskAt } from './next-ask-at';
 
 /**
  * A delivery report, whose signature was checked. It may come late, twice, out of order, or before the
@@ -13,30 +14,26 @@ export async function hearReport(
   report: SmsReport,
   heard: { messageId: string | null; now: Date },
 ): Promise<void> {
+  const { providerId } = report;
+  const { now } = heard;
   const which = or(
-    eq(messages.providerId, report.providerId),
+    eq(messages.providerId, providerId),
     heard.messageId ? eq(messages.id, heard.messageId) : undefined,
   );
-  const isOpen = inArray(messages.state, ['sending', 'sent']);
-  const { providerId } = report;
+  const isOpen = and(which, inArray(messages.state, ['sending', 'sent']));
   if (report.state === 'delivered') {
     await db
       .update(messages)
-      .set({ state: 'delivered', providerId, deliveredAt: heard.now, reason: '' })
-      .where(and(which, isOpen));
+      .set({ state: 'delivered', providerId, deliveredAt: now, askAt: null, reason: '' })
+      .where(isOpen);
   } else if (report.state === 'sent') {
     await db
       .update(messages)
-      .set({ state: 'sent', providerId, sentAt: heard.now, reason: '' })
+      .set({ state: 'sent', providerId, sentAt: now, askAt: nextAskAt(now, now), reason: '' })
       .where(and(which, eq(messages.state, 'sending')));
   } else if (report.state === 'not-delivered') {
-    const why = report.refusal?.message ?? 'No reason was given.';
-    const refused = await db
-      .update(messages)
-      .set({ state: 'refused', providerId, reason: callThem(why) })
-      .where(and(which, isOpen))
-      .returning({ shopId: messages.shopId, customerId: messages.customerId });
-    if (report.refusal?.code !== 'opted-out') return;
-    for (const message of refused) await writeOptOut(db, message, heard.now);
+    const message = report.refusal?.message ?? 'No reason was given.';
+    const code = report.refusal?.code ?? null;
+    await giveUp(db, isOpen, { message, code, providerId }, now);
   }
 }

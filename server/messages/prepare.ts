@@ -1,11 +1,13 @@
 /** Everything that may have changed since a message was put into the outbox, looked at once more before it goes. */
 import { and, eq, gt, inArray } from 'drizzle-orm';
-import { jobs, messages, sites, visits } from '@/db/schema';
+import { messages } from '@/db/schema';
 import { nextAllowedTime } from '@/lib/messages/quiet-hours';
 import type { Context, SystemActor } from '@/server/base/context';
 import type { Claimed } from './claim-due';
 import type { Compose, Composed } from './compose';
-import { readRecipient } from './recipient';
+import { byHand, composeByHand } from './compose-by-hand';
+import { type Recipient, readRecipient } from './recipient';
+import { zoneOfJob } from './zone-of-job';
 
 export type Prepared =
   | { is: 'ready'; to: string; composed: Extract<Composed, { is: 'sms' | 'email' }> }
@@ -17,40 +19,45 @@ export async function prepare(
   message: Claimed,
   compose: Compose,
 ): Promise<Prepared> {
-  const { visitId, channel, notAfter } = message;
-  if (!visitId) return withdrawn('It is about no visit.');
+  const { channel, notAfter } = message;
   if (notAfter && notAfter < ctx.now) return withdrawn('Too late to be of use.');
   const recipient = await readRecipient(ctx.db, ctx.shop.id, message.customerId);
   const leftOut = recipient.decision.leftOut.find((entry) => entry.channel === channel);
   if (leftOut) return withdrawn(`The customer: ${leftOut.because}.`);
   if (channel === 'sms') {
-    const dueAt = await allowedAt(ctx, visitId, notAfter);
+    const dueAt = await allowedAt(ctx, message);
     if (!dueAt) return withdrawn('It could only have been sent at night or too late.');
     if (dueAt > ctx.now) return { is: 'later', dueAt };
   }
-  if (await isOvertaken(ctx, message)) return withdrawn('The visit has changed since.');
-  const composed = await compose(ctx, { ...message, visitId }, recipient);
+  const composed = await writeOut(ctx, message, { compose, recipient });
   if (composed.is === 'withdrawn' || composed.is === 'refused') return composed;
   return { is: 'ready', to: channel === 'sms' ? recipient.phone : recipient.email, composed };
+}
+
+/** By hand: as it was written. About a visit: from the visit as it is now. */
+async function writeOut(
+  ctx: Context<SystemActor>,
+  message: Claimed,
+  { compose, recipient }: { compose: Compose; recipient: Recipient },
+): Promise<Composed> {
+  if (message.occasion === byHand) return composeByHand(ctx, message, recipient);
+  const { visitId } = message;
+  if (!visitId) return { is: 'withdrawn', reason: 'It is about no visit.' };
+  if (await isOvertaken(ctx, message)) {
+    return { is: 'withdrawn', reason: 'The visit has changed since.' };
+  }
+  return compose(ctx, { ...message, visitId }, recipient);
 }
 
 function withdrawn(reason: string): Prepared {
   return { is: 'withdrawn', reason };
 }
 
-async function allowedAt(
-  ctx: Context,
-  visitId: string,
-  notAfter: Date | null,
-): Promise<Date | null> {
-  const [site] = await ctx.db
-    .select({ zone: sites.zone })
-    .from(visits)
-    .innerJoin(jobs, eq(jobs.id, visits.jobId))
-    .innerJoin(sites, eq(sites.id, jobs.siteId))
-    .where(and(eq(visits.shopId, ctx.shop.id), eq(visits.id, visitId)));
+/** In the hours of the site, or of the shop where it is about no job. */
+async function allowedAt(ctx: Context, message: Claimed): Promise<Date | null> {
+  const zone = await zoneOfJob(ctx, message.jobId);
   const { quietFrom, quietUntil } = ctx.shop.rules.booking;
-  const zone = site?.zone ?? ctx.shop.zone;
+  const { notAfter } = message;
   return nextAllowedTime({ dueAt: ctx.now, zone, quietFrom, quietUntil, notAfter });
 }
 

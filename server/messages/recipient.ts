@@ -25,6 +25,7 @@ export async function readRecipient(
       phone: customers.phone,
       email: customers.email,
       language: customers.language,
+      untextablePhone: customers.untextablePhone,
     })
     .from(customers)
     .where(and(eq(customers.shopId, shopId), eq(customers.id, customerId)));
@@ -39,14 +40,15 @@ export async function readRecipient(
     .from(consents)
     .where(and(eq(consents.shopId, shopId), eq(consents.customerId, customerId)))
     .orderBy(asc(consents.sequence));
-  const { phone, email } = customer;
+  const { untextablePhone, ...known } = customer;
+  const { phone, email } = known;
   const decision = channelsFor({
     consents: said,
     phone,
     email,
-    phoneTakesTexts: takesTexts(phone),
+    phoneTakesTexts: takesTexts(phone) && phone !== untextablePhone,
   });
-  return { customerId, ...customer, decision };
+  return { customerId, ...known, decision };
 }
 
 /** What is kept is E.164, so the region does not matter; only a number known for a landline does not. */

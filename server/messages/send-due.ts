@@ -1,4 +1,5 @@
 import type { Database } from '@/db/database';
+import { countSegments } from '@/lib/messages/segments';
 import { apiPaths } from '@/lib/paths';
 import { env } from '@/server/base/env';
 import { logBug } from '@/server/base/log';
@@ -7,7 +8,7 @@ import type { Ports } from '@/server/ports/choose-ports';
 import { type Claimed, claimDue } from './claim-due';
 import type { Compose, Composed } from './compose';
 import { type Prepared, prepare } from './prepare';
-import { writeRefusal, writeSent, writeWhileHeld } from './write-outcome';
+import { giveUpWhileHeld, writeRefusal, writeSent, writeWhileHeld } from './write-outcome';
 
 export type Sending = {
   db: Database;
@@ -40,7 +41,7 @@ async function sendOne(sending: Sending, message: Claimed): Promise<void> {
     });
     const prepared = await prepare(ctx, message, sending.compose);
     if (prepared.is === 'ready') await carry(sending, message, prepared);
-    else await putAside(db, message, prepared);
+    else await putAside(db, message, prepared, now);
   } catch (error) {
     logBug('messages/send-due', error);
   }
@@ -50,13 +51,16 @@ async function putAside(
   db: Database,
   message: Claimed,
   prepared: Exclude<Prepared, { is: 'ready' }>,
+  now: Date,
 ): Promise<void> {
   if (prepared.is === 'later') {
     // Waiting for the morning is no failed try.
     const attempts = message.attempts - 1;
     await writeWhileHeld(db, message, { state: 'waiting', dueAt: prepared.dueAt, attempts });
+  } else if (prepared.is === 'refused') {
+    await giveUpWhileHeld(db, message, { message: prepared.reason, code: null }, now);
   } else {
-    await writeWhileHeld(db, message, { state: prepared.is, reason: prepared.reason });
+    await writeWhileHeld(db, message, { state: 'withdrawn', reason: prepared.reason });
   }
 }
 
@@ -68,7 +72,8 @@ async function carry(
 ): Promise<void> {
   const { db } = sending;
   const body = composed.is === 'sms' ? composed.body : composed.email.text;
-  if (!(await writeWhileHeld(db, message, { toAddress: to, body }))) return;
+  const segments = composed.is === 'sms' ? countSegments(body).segments : 0;
+  if (!(await writeWhileHeld(db, message, { toAddress: to, body, segments }))) return;
   const result = await send(sending.ports, message.id, to, composed);
   const now = sending.now();
   if (!result.ok) return writeRefusal(db, message, result.refusal, now);

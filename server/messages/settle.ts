@@ -1,7 +1,16 @@
+import { and, eq, gte, isNotNull } from 'drizzle-orm';
+import type { Database } from '@/db/database';
+import { messages } from '@/db/schema';
 import { logBug } from '@/server/base/log';
 import { type Claimed, claimUnsettled } from './claim-due';
 import type { Sending } from './send-due';
-import { callThem, mostAttempts, writeRefusal, writeSent, writeWhileHeld } from './write-outcome';
+import {
+  giveUpWhileHeld,
+  mostAttempts,
+  writeRefusal,
+  writeSent,
+  writeWhileHeld,
+} from './write-outcome';
 
 /** The provider's clock may be a little behind ours. */
 const clockSlackMs = 120_000;
@@ -13,46 +22,65 @@ const clockSlackMs = 120_000;
  */
 export async function settle(sending: Omit<Sending, 'compose'>): Promise<number> {
   const unsettled = await claimUnsettled(sending.db, sending.now());
-  await Promise.all(unsettled.map((message) => settleOne(sending, message)));
+  // One after the other: two of the same words to one number must not both find the same text.
+  for (const message of unsettled) await settleOne(sending, message);
   return unsettled.length;
 }
 
-async function settleOne(
-  { db, ports, now }: Omit<Sending, 'compose'>,
-  message: Claimed,
-): Promise<void> {
+async function settleOne(sending: Omit<Sending, 'compose'>, message: Claimed): Promise<void> {
+  const { db, ports, now } = sending;
   try {
-    const again = () =>
-      writeWhileHeld(
-        db,
-        message,
-        message.attempts < mostAttempts
-          ? { state: 'waiting', dueAt: now() }
-          : { state: 'refused', reason: callThem('It was tried many times.') },
-      );
     // Nothing was written down yet, so nothing was sent.
     if (message.channel === 'email' || message.body === '' || !message.firstTriedAt) {
-      await again();
+      await tryAgain(sending, message);
       return;
     }
-    const lookup = await ports.sms.findSent({
-      to: message.toAddress,
-      body: message.body,
-      since: new Date(message.firstTriedAt.getTime() - clockSlackMs),
-    });
+    const since = new Date(message.firstTriedAt.getTime() - clockSlackMs);
+    const { toAddress: to, body } = message;
+    const except = await sidsOfOthers(db, message, since);
+    const lookup = await ports.sms.findSent({ to, body, since, except });
     if (!lookup.ok) {
       await writeRefusal(db, message, { ...lookup.refusal, retry: 'ask-first' }, now());
       return;
     }
     const { found } = lookup;
-    if (!found) await again();
+    if (!found) await tryAgain(sending, message);
     else if (found.state === 'not-delivered') {
-      const reason = callThem(found.refusal?.message ?? 'The text did not arrive.');
-      await writeWhileHeld(db, message, { state: 'refused', providerId: found.providerId, reason });
+      const why = {
+        message: found.refusal?.message ?? 'The text did not arrive.',
+        code: found.refusal?.code ?? null,
+        providerId: found.providerId,
+      };
+      await giveUpWhileHeld(db, message, why, now());
     } else {
       await writeSent(db, message, { ...found, at: now() });
     }
   } catch (error) {
     logBug('messages/settle', error);
   }
+}
+
+async function tryAgain({ db, now }: Omit<Sending, 'compose'>, message: Claimed): Promise<void> {
+  if (message.attempts < mostAttempts) {
+    await writeWhileHeld(db, message, { state: 'waiting', dueAt: now() });
+  } else {
+    const why = { message: 'It was tried many times.', code: null };
+    await giveUpWhileHeld(db, message, why, now());
+  }
+}
+
+/** Texts to this number that are known to be other messages of ours. */
+async function sidsOfOthers(db: Database, message: Claimed, since: Date): Promise<Set<string>> {
+  const others = await db
+    .select({ providerId: messages.providerId })
+    .from(messages)
+    .where(
+      and(
+        eq(messages.shopId, message.shopId),
+        eq(messages.toAddress, message.toAddress),
+        isNotNull(messages.providerId),
+        gte(messages.sentAt, since),
+      ),
+    );
+  return new Set(others.flatMap(({ providerId }) => providerId ?? []));
 }

@@ -1,13 +1,17 @@
-import { and, eq } from 'drizzle-orm';
+import { and, eq, inArray } from 'drizzle-orm';
 import type { Transaction } from '@/db/database';
 import { messages } from '@/db/schema';
+import type { Occasion } from '@/lib/messages/occasions';
 import type { Context } from '@/server/base/context';
 
-/** Takes back what still waits about a visit, in the transaction of its cause, and says what that was. */
+/**
+ * Takes back what still waits about a visit (all of it, or some occasions), in the transaction of its
+ * cause, and says what that was.
+ */
 export async function withdrawWaiting(
   tx: Transaction,
   ctx: Context,
-  of: { visitId: string; reason: string },
+  of: { visitId: string; occasions?: Occasion[]; reason: string },
 ) {
   return tx
     .update(messages)
@@ -17,6 +21,7 @@ export async function withdrawWaiting(
         eq(messages.shopId, ctx.shop.id),
         eq(messages.visitId, of.visitId),
         eq(messages.state, 'waiting'),
+        of.occasions ? inArray(messages.occasion, of.occasions) : undefined,
       ),
     )
     .returning({

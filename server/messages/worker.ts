@@ -1,6 +1,7 @@
 import { database } from '@/server/base/database';
 import { logBug } from '@/server/base/log';
 import { getPorts } from '@/server/ports/choose-ports';
+import { askLate } from './ask-late';
 import type { Compose } from './compose';
 import { sendDue } from './send-due';
 import { settle } from './settle';
@@ -18,6 +19,7 @@ export function startWorker(compose: Compose): () => Promise<void> {
     const sending = { db, ports: await getPorts(), compose, now: () => new Date() };
     await settle(sending);
     await sendDue(sending);
+    await askLate(sending);
   });
   return held.__setwellWorker.stop;
 }

@@ -3,8 +3,9 @@ import type { Database } from '@/db/database';
 import { messages } from '@/db/schema';
 import type { EmailRefusal } from '@/server/ports/email/email-port';
 import type { SmsRefusal, SmsState } from '@/server/ports/sms/sms-port';
-import { changeConsent } from './change-consent';
 import type { Claimed } from './claim-due';
+import { giveUp, type WhyGivenUp } from './give-up';
+import { nextAskAt } from './next-ask-at';
 
 type Change = Partial<typeof messages.$inferInsert>;
 
@@ -14,19 +15,30 @@ export async function writeWhileHeld(
   message: Claimed,
   change: Change,
 ): Promise<boolean> {
-  const held = await db
+  const changed = await db
     .update(messages)
     .set(change)
-    .where(
-      and(
-        eq(messages.shopId, message.shopId),
-        eq(messages.id, message.id),
-        eq(messages.state, 'sending'),
-        message.claimedAt ? eq(messages.claimedAt, message.claimedAt) : undefined,
-      ),
-    )
+    .where(stillHeld(message))
     .returning({ id: messages.id });
-  return held.length > 0;
+  return changed.length > 0;
+}
+
+export function giveUpWhileHeld(
+  db: Database,
+  message: Claimed,
+  why: WhyGivenUp,
+  now: Date,
+): Promise<void> {
+  return giveUp(db, stillHeld(message), why, now);
+}
+
+function stillHeld(message: Claimed) {
+  return and(
+    eq(messages.shopId, message.shopId),
+    eq(messages.id, message.id),
+    eq(messages.state, 'sending'),
+    message.claimedAt ? eq(messages.claimedAt, message.claimedAt) : undefined,
+  );
 }
 
 export async function writeSent(
@@ -35,11 +47,13 @@ export async function writeSent(
   sent: { providerId: string; state: SmsState; at: Date },
 ): Promise<void> {
   const isDelivered = sent.state === 'delivered';
+  const awaitsReport = message.channel === 'sms' && !isDelivered;
   await writeWhileHeld(db, message, {
     state: isDelivered ? 'delivered' : 'sent',
     providerId: sent.providerId,
     sentAt: sent.at,
     deliveredAt: isDelivered ? sent.at : null,
+    askAt: awaitsReport ? nextAskAt(sent.at, sent.at) : null,
     reason: '',
   });
 }
@@ -67,29 +81,5 @@ export async function writeRefusal(
     await writeWhileHeld(db, message, { state: 'waiting', ...again });
     return;
   }
-  await writeWhileHeld(db, message, { state: 'refused', reason: callThem(refusal.message) });
-  if (refusal.code === 'opted-out') await writeOptOut(db, message, now);
-}
-
-export function callThem(why: string): string {
-  return `Not delivered: call them. ${why}`;
-}
-
-/** The provider knows of a STOP that we have not heard. */
-export async function writeOptOut(
-  db: Database,
-  message: { shopId: string; customerId: string },
-  now: Date,
-): Promise<void> {
-  const { shopId, customerId } = message;
-  await db.transaction((tx) =>
-    changeConsent(tx, {
-      shopId,
-      customerId,
-      channel: 'sms',
-      given: false,
-      how: 'said STOP, by the texting provider',
-      at: now,
-    }),
-  );
+  await giveUpWhileHeld(db, message, refusal, now);
 }

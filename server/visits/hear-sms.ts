@@ -1,122 +1,93 @@
-import type { Database, Transaction } from '@/db/database';
-import { messages } from '@/db/schema';
+import type { Database } from '@/db/database';
+import { chosenNumber } from '@/lib/messages/chosen-number';
 import { type Reply, understandReply } from '@/lib/messages/replies';
-import { Refusal } from '@/server/base/problem-response';
-import { shopContext } from '@/server/base/shop-context';
 import { changeConsent } from '@/server/messages/change-consent';
+import { putItem } from '@/server/messages/scheduler-items';
 import type { InboundSms } from '@/server/ports/sms/webhooks';
-import { type Answer, applyAnswer } from './apply-answer';
-import { findLastTold, findMeantVisit, findSenders } from './sms-sender';
+import type { Answer } from './apply-answer';
+import { hearAnswer, hearHelp, hearWhich } from './hear-answer';
+import { type Heard, itemOf, keepText } from './heard-text';
+import { findLastTold, findMeantVisits, findSenders, findVisitOf } from './sms-sender';
 
 /**
  * A text from a customer, whose signature was checked. The provider's number is one for all shops, so the
- * sender's number is looked for in every shop; each text is kept in one, once, whatever it means.
+ * sender's number is looked for in every shop; each text is kept in one, once, whatever it means. What is
+ * not clear goes to the scheduler's list: nothing is confirmed or called off by a guess.
  */
 export async function hearSms(db: Database, sms: InboundSms, now: Date): Promise<void> {
   const senders = await findSenders(db, sms.from);
-  if (senders.length === 0) return;
   const lastTold = await findLastTold(db, sms.from);
   const sender =
     senders.find(({ customerId }) => customerId === lastTold?.customerId) ?? senders[0];
   if (!sender) return;
+  const heard: Heard = { db, sms, now, senders, sender, lastTold };
   const reply = understandReply(sms.body);
-  const asked = answerOf(reply, sms.body);
-  const about = asked ? await findMeantVisit(db, sms.from, { asked, lastTold, now }) : null;
-  const keptBeside = about ?? {
-    ...sender,
-    visitId: lastTold?.visitId ?? null,
-    jobId: lastTold?.jobId,
-  };
+  if (reply.meaning === 'stop' || reply.meaning === 'start') return hearConsent(heard, reply);
 
-  const keep = (reason: string, act: (tx: Transaction) => Promise<void>) =>
-    db.transaction(async (tx) => {
-      const kept = await keepText(tx, sms, { ...keptBeside, reason, now });
-      if (kept) await act(tx);
-    });
-  if (reply.meaning === 'stop' || reply.meaning === 'start') {
-    const given = reply.meaning === 'start';
-    const how = given ? 'texted START' : 'texted STOP';
-    await keep(consentWords(reply), async (tx) => {
-      for (const { shopId, customerId } of senders) {
-        await changeConsent(tx, { shopId, customerId, channel: 'sms', given, how, at: now });
-      }
-    });
-  } else if (about && asked) {
-    const ctx = await shopContext(db, {
-      shopId: about.shopId,
-      actor: { kind: 'customer', ...about },
-      now,
-    });
-    try {
-      await keep(
-        asked.answer === 'confirm' ? 'Confirmed by this text.' : 'Asks for another time.',
-        (tx) => applyAnswer(tx, ctx, asked),
-      );
-    } catch (error) {
-      if (!(error instanceof Refusal)) throw error;
-      await keep(`Read it: ${error.message}`, nothing);
-    }
-  } else {
-    await keep(unclearWords(reply), nothing);
+  const chosen = choiceOf(heard);
+  if (chosen) {
+    const meant = await findVisitOf(db, sms.from, chosen.visitId);
+    return meant ? hearAnswer(heard, meant, chosen.asked) : hearUnclear(heard, reply);
   }
+  const asked = answerOf(reply, sms.body);
+  if (!asked) {
+    return reply.meaning === 'help' ? hearHelp(heard) : hearUnclear(heard, reply);
+  }
+  const { meant, open } = await findMeantVisits(db, sms.from, { asked, lastTold, now });
+  if (meant) return hearAnswer(heard, meant, asked);
+  const isOneShop = open.every(({ shopId }) => shopId === open[0]?.shopId);
+  if (open.length > 1 && isOneShop) return hearWhich(heard, open, asked);
+  return hearUnclear(heard, reply);
 }
 
-const nothing = async () => {};
+/** Texts end, or go on, in every shop that has the number. */
+async function hearConsent(heard: Heard, reply: Reply): Promise<void> {
+  const { db, senders, now } = heard;
+  const given = reply.meaning === 'start';
+  const how = given ? 'texted START' : 'texted STOP';
+  const reason = given
+    ? 'May be texted again.'
+    : reply.mayCallOffVisit
+      ? 'No more texts to this number. They may mean the visit as well: call them.'
+      : 'No more texts to this number.';
+  await db.transaction(async (tx) => {
+    const kept = await keepText(tx, heard, { reason });
+    if (!kept) return;
+    for (const { shopId, customerId } of senders) {
+      await changeConsent(tx, { shopId, customerId, channel: 'sms', given, how, at: now });
+    }
+    if (reply.mayCallOffVisit) await putItem(tx, itemOf(heard, 'said-stop', reason));
+  });
+}
+
+async function hearUnclear(heard: Heard, reply: Reply): Promise<void> {
+  const reason = unclearWords(reply);
+  await heard.db.transaction(async (tx) => {
+    const kept = await keepText(tx, heard, { reason });
+    if (kept) await putItem(tx, itemOf(heard, 'unclear-reply', `${reason} “${heard.sms.body}”`));
+  });
+}
+
+/** A number, while the last thing on their phone is our question which visit they mean. */
+function choiceOf({ sms, lastTold }: Heard): { visitId: string; asked: Answer } | null {
+  if (lastTold?.occasion !== 'which-visit') return null;
+  const { choices = [], answered = 'confirm', reason = '' } = lastTold.cause;
+  const number = chosenNumber(sms.body, choices.length);
+  const visitId = number === null ? undefined : choices[number - 1];
+  if (!visitId) return null;
+  return { visitId, asked: { answer: answered, words: reason, missing: [] } };
+}
 
 function answerOf({ meaning }: Reply, body: string): Answer | null {
-  if (meaning === 'yes') return { answer: 'confirm', words: '' };
+  if (meaning === 'yes') return { answer: 'confirm', words: '', missing: [] };
   if (meaning === 'no' || meaning === 'change') {
-    return { answer: 'another-time', words: body.trim().slice(0, 400) };
+    return { answer: 'another-time', words: body.trim().slice(0, 400), missing: [] };
   }
   return null;
 }
 
-/** False when the provider posts a text for the second time. */
-async function keepText(
-  tx: Transaction,
-  sms: InboundSms,
-  about: {
-    shopId: string;
-    customerId: string;
-    visitId: string | null;
-    jobId?: string | null;
-    reason: string;
-    now: Date;
-  },
-): Promise<boolean> {
-  const { shopId, customerId, visitId, jobId, reason, now } = about;
-  const kept = await tx
-    .insert(messages)
-    .values({
-      shopId,
-      customerId,
-      visitId,
-      jobId,
-      occasion: 'reply',
-      channel: 'sms',
-      key: `in:${sms.providerId}`,
-      state: 'received',
-      dueAt: now,
-      createdAt: now,
-      providerId: sms.providerId,
-      body: sms.body,
-      reason,
-    })
-    .onConflictDoNothing({ target: [messages.shopId, messages.key] })
-    .returning({ id: messages.id });
-  return kept.length > 0;
-}
-
-function consentWords({ meaning, mayCallOffVisit }: Reply): string {
-  if (meaning === 'start') return 'May be texted again.';
-  return mayCallOffVisit
-    ? 'No more texts to this number. They may mean the visit as well: call them.'
-    : 'No more texts to this number.';
-}
-
 function unclearWords({ meaning, mayCallOffVisit }: Reply): string {
   if (mayCallOffVisit) return 'They may mean to call the visit off: call them.';
-  if (meaning === 'help') return 'Asks who you are: call them.';
   if (meaning === 'unclear') return 'Read it: it is not clear what is meant.';
   return 'Read it: it is not clear which visit is meant.';
 }

@@ -1,4 +1,4 @@
-import { and, eq, sql } from 'drizzle-orm';
+import { and, eq, gt, ne, or, sql } from 'drizzle-orm';
 import type { Transaction } from '@/db/database';
 import { customers, jobs, sites, visits } from '@/db/schema';
 import type { Context } from '@/server/base/context';
@@ -17,13 +17,17 @@ const fields = {
   windowEndsAt: visits.windowEndsAt,
   workMinutes: visits.workMinutes,
   version: visits.version,
+  customerSays: visits.customerSays,
+  expectedAt: visits.expectedAt,
   arrivedAt: visits.arrivedAt,
+  holdEndsAt: visits.holdEndsAt,
+  heldForVisitId: visits.heldForVisitId,
   customerId: customers.id,
   customerName: customers.name,
   zone: sites.zone,
 };
 
-/** A visit as it is, with what telling its customer needs. */
+/** A visit as it is, a hold that is over being no visit any more, with what telling its customer needs. */
 export async function lockVisit(tx: Transaction, ctx: Context, visitId: string) {
   const [visit] = await tx
     .select(fields)
@@ -31,7 +35,13 @@ export async function lockVisit(tx: Transaction, ctx: Context, visitId: string) 
     .innerJoin(jobs, eq(jobs.id, visits.jobId))
     .innerJoin(customers, eq(customers.id, jobs.customerId))
     .innerJoin(sites, eq(sites.id, jobs.siteId))
-    .where(and(eq(visits.shopId, ctx.shop.id), eq(visits.id, visitId)))
+    .where(
+      and(
+        eq(visits.shopId, ctx.shop.id),
+        eq(visits.id, visitId),
+        or(ne(visits.status, 'held'), gt(visits.holdEndsAt, ctx.now)),
+      ),
+    )
     .for('update', { of: visits });
   if (!visit) throw notFound('visit');
   return visit;

@@ -63,7 +63,7 @@ async function write(
     windowStartsAt,
     windowEndsAt,
     workMinutes,
-    ...(isNews ? { status: 'booked', confirmedAt: null, customerSays: '' } : {}),
+    ...(isNews ? { status: 'booked', confirmedAt: null, expectedAt: null, customerSays: '' } : {}),
   });
   const personIds = crew.people.map(({ id }) => id);
   onPlanned({ visitId: after.id, crewId: crew.id, personIds, pieces: plan.pieces });

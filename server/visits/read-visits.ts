@@ -36,6 +36,7 @@ export async function readVisits(
       workMinutes: visits.workMinutes,
       customerSays: visits.customerSays,
       confirmedAt: visits.confirmedAt,
+      expectedAt: visits.expectedAt,
       arrivedAt: visits.arrivedAt,
       leftAt: visits.leftAt,
     })
@@ -61,6 +62,7 @@ export async function readVisits(
     windowStartsAt: row.windowStartsAt.toISOString(),
     windowEndsAt: row.windowEndsAt.toISOString(),
     confirmedAt: row.confirmedAt?.toISOString() ?? null,
+    expectedAt: row.expectedAt?.toISOString() ?? null,
     arrivedAt: row.arrivedAt?.toISOString() ?? null,
     leftAt: row.leftAt?.toISOString() ?? null,
     dayWords: formatDayShort(row.windowStartsAt, zone, locale),

@@ -10,17 +10,18 @@ import { moveStage } from '@/server/jobs/move-stage';
 import { kickWorker } from '@/server/messages/worker';
 import { changeVisit, type LockedVisit, lockVisit } from './lock-visit';
 import { readVisit } from './read-visits';
-import { tellOnMyWay } from './tell-customer';
+import { runLate } from './run-late';
+import { tellTap } from './tell-tap';
 
 type What = ReportVisitInput['what'];
 
-const statusAfter: Record<What, VisitStatus> = {
+const statusAfter: Record<Exclude<What, 'running-late'>, VisitStatus> = {
   'on-the-way': 'on-the-way',
   arrived: 'on-site',
   done: 'done',
   'nobody-home': 'missed',
 };
-const words: Record<What, string> = {
+const words: Record<Exclude<What, 'running-late'>, string> = {
   'on-the-way': 'on the way',
   arrived: 'arrived',
   done: 'done',
@@ -37,8 +38,6 @@ const rank: Record<VisitStatus, number> = {
   missed: 3,
   'called-off': 4,
 };
-/** A tap that reaches us later than this is no news to the customer. */
-const freshMinutes = 15;
 
 /** One tap on site. Sent twice, or late from a phone without signal, it does no harm. */
 export async function reportVisit(ctx: PersonContext, input: ReportVisitInput): Promise<VisitView> {
@@ -47,34 +46,45 @@ export async function reportVisit(ctx: PersonContext, input: ReportVisitInput): 
     const before = await lockVisit(tx, ctx, input.visitId);
     await mustBeOwnVisit(tx, ctx, before);
     if (before.status === 'called-off') throw calledOff(await readVisit(tx, ctx, before.id));
-    const status = statusAfter[input.what];
-    if (rank[status] <= rank[before.status]) return readVisit(tx, ctx, before.id);
-
-    // A phone's clock may be ahead of ours.
-    const at = new Date(Math.min(new Date(input.at).getTime(), ctx.now.getTime()));
-    const after = await changeVisit(tx, ctx, before, {
-      status,
-      ...(input.what === 'arrived' ? { arrivedAt: at } : {}),
-      ...(rank[status] === 3 ? { leftAt: at } : {}),
-    });
-    if (rank[status] === 3) await freeTimeAfter(tx, ctx, after.id, at);
-    if (input.what === 'arrived' && after.kind === 'install') {
-      await moveStage(tx, ctx, { jobId: after.jobId, event: 'arrived-for-install' });
-    }
-    const isFresh = ctx.now.getTime() - at.getTime() < freshMinutes * 60_000;
-    if (input.what === 'on-the-way' && isFresh) await tellOnMyWay(tx, ctx, after);
-    await writeAudit(tx, ctx, {
-      verb: 'report-visit',
-      subjectKind: 'visit',
-      subjectId: after.id,
-      jobId: after.jobId,
-      summary: `${visitKindWords[after.kind]}: ${words[input.what]}`,
-      detail: { what: input.what, at },
-    });
-    return readVisit(tx, ctx, after.id);
+    if (input.what === 'running-late') await runLate(tx, ctx, before, input.lateMinutes ?? 0);
+    else await goOn(tx, ctx, before, { what: input.what, at: tappedAt(ctx, input) });
+    return readVisit(tx, ctx, before.id);
   });
   kickWorker();
   return view;
+}
+
+/** A phone's clock may be ahead of ours. */
+function tappedAt(ctx: PersonContext, { at }: ReportVisitInput): Date {
+  return new Date(Math.min(new Date(at).getTime(), ctx.now.getTime()));
+}
+
+async function goOn(
+  tx: Transaction,
+  ctx: PersonContext,
+  before: LockedVisit,
+  { what, at }: { what: Exclude<What, 'running-late'>; at: Date },
+): Promise<void> {
+  const status = statusAfter[what];
+  if (rank[status] <= rank[before.status]) return;
+  const after = await changeVisit(tx, ctx, before, {
+    status,
+    ...(what === 'arrived' ? { arrivedAt: at } : {}),
+    ...(rank[status] === 3 ? { leftAt: at } : {}),
+  });
+  if (rank[status] === 3) await freeTimeAfter(tx, ctx, after.id, at);
+  if (what === 'arrived' && after.kind === 'install') {
+    await moveStage(tx, ctx, { jobId: after.jobId, event: 'arrived-for-install' });
+  }
+  await tellTap(tx, ctx, after, { what, at });
+  await writeAudit(tx, ctx, {
+    verb: 'report-visit',
+    subjectKind: 'visit',
+    subjectId: after.id,
+    jobId: after.jobId,
+    summary: `${visitKindWords[after.kind]}: ${words[what]}`,
+    detail: { what, at },
+  });
 }
 
 /** Fitters and measurers see the visits of their own crews; the office sees all. */

@@ -1,17 +1,19 @@
-import { and, asc, desc, eq, exists, gt, inArray } from 'drizzle-orm';
+import { and, asc, desc, eq, exists, gt, inArray, type SQL } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { customers, jobs, messages, visits } from '@/db/schema';
+import type { MessageCause } from '@/lib/contracts/messages';
 import type { Answer } from './apply-answer';
 
 /** Whose number it is: the provider's own is one for all shops, so every shop is looked through. */
-type Sender = { shopId: string; customerId: string; name: string };
-type LastTold = {
+export type Sender = { shopId: string; customerId: string; name: string };
+export type LastTold = {
   customerId: string;
   visitId: string | null;
   jobId: string | null;
   occasion: string;
+  cause: MessageCause;
 };
-type Meant = Sender & { visitId: string; jobId: string };
+export type Meant = Sender & { visitId: string; jobId: string };
 
 export function findSenders(db: Database, phone: string): Promise<Sender[]> {
   return db
@@ -29,6 +31,7 @@ export async function findLastTold(db: Database, phone: string): Promise<LastTol
       visitId: messages.visitId,
       jobId: messages.jobId,
       occasion: messages.occasion,
+      cause: messages.cause,
     })
     .from(messages)
     .where(
@@ -43,14 +46,17 @@ export async function findLastTold(db: Database, phone: string): Promise<LastTol
   return last;
 }
 
-/** The one visit that the answer can be about; null when none or several are, and no text asked about one. */
-export async function findMeantVisit(
+/**
+ * The visits that the answer can be about, soonest first, and the one that is meant: the only one, or the
+ * one that the last text asked about; null when it could be any of several.
+ */
+export async function findMeantVisits(
   db: Database,
   phone: string,
   known: { asked: Answer; lastTold: LastTold | undefined; now: Date },
-): Promise<Meant | null> {
+): Promise<{ meant: Meant | null; open: Meant[] }> {
   const { asked, lastTold, now } = known;
-  const open =
+  const statuses =
     asked.answer === 'confirm' ? ['booked' as const] : ['booked' as const, 'confirmed' as const];
   const wasTold = db
     .select({ id: messages.id })
@@ -63,7 +69,29 @@ export async function findMeantVisit(
         inArray(messages.state, ['sent', 'delivered']),
       ),
     );
-  const found = await db
+  const open = await readVisitsOf(
+    db,
+    phone,
+    and(inArray(visits.status, statuses), gt(visits.startsAt, now), exists(wasTold)),
+  );
+  if (open.length === 1) return { meant: open[0] ?? null, open };
+  const wasAsked = ['please-confirm', 'asked-again'].includes(lastTold?.occasion ?? '');
+  const asking = wasAsked ? open.find(({ visitId }) => visitId === lastTold?.visitId) : undefined;
+  return { meant: asking ?? null, open };
+}
+
+/** One visit, if it is of somebody with this number. */
+export async function findVisitOf(
+  db: Database,
+  phone: string,
+  visitId: string,
+): Promise<Meant | undefined> {
+  const [found] = await readVisitsOf(db, phone, eq(visits.id, visitId));
+  return found;
+}
+
+function readVisitsOf(db: Database, phone: string, which: SQL | undefined): Promise<Meant[]> {
+  return db
     .select({
       shopId: visits.shopId,
       customerId: customers.id,
@@ -74,16 +102,6 @@ export async function findMeantVisit(
     .from(visits)
     .innerJoin(jobs, eq(jobs.id, visits.jobId))
     .innerJoin(customers, eq(customers.id, jobs.customerId))
-    .where(
-      and(
-        eq(customers.phone, phone),
-        inArray(visits.status, open),
-        gt(visits.startsAt, now),
-        exists(wasTold),
-      ),
-    )
+    .where(and(eq(customers.phone, phone), which))
     .orderBy(asc(visits.startsAt));
-  if (found.length === 1) return found[0] ?? null;
-  if (lastTold?.occasion !== 'please-confirm') return null;
-  return found.find(({ visitId }) => visitId === lastTold.visitId) ?? null;
 }

@@ -7,33 +7,27 @@ import type { VisitKind } from '@/lib/schedule';
 import { addDays } from '@/lib/time/civil';
 import { fromLocal, localDate } from '@/lib/time/local-moment';
 import type { Context } from '@/server/base/context';
-import { enqueue, type Note } from '@/server/messages/enqueue';
-import { readRecipient } from '@/server/messages/recipient';
+import type { Note } from '@/server/messages/enqueue';
+import { settleItems } from '@/server/messages/scheduler-items';
 import { withdrawWaiting } from '@/server/messages/withdraw';
+import { onEachChannel, putNotes, type ToldVisit } from './visit-notes';
 
-export type ToldVisit = {
-  id: string;
-  jobId: string;
-  kind: VisitKind;
-  version: number;
-  customerId: string;
-  /** Of the site. */
-  zone: string;
-  endsAt: Date;
-  windowStartsAt: Date;
-  windowEndsAt: Date;
-};
+export { toldWords } from './visit-notes';
+
+/** Office hands may take a booking, a move or a calling off back for so long before anybody is told. */
+export const undoMs = 12_000;
 
 export async function tellBooked(tx: Transaction, ctx: Context, visit: ToldVisit) {
-  return put(tx, ctx, visit, [
-    ...channels.map((channel) => at(ctx, visit, 'booked', channel)),
+  return putNotes(tx, ctx, visit, [
+    ...channels.map((channel) => news(ctx, visit, 'booked', channel)),
     ...reminders(ctx, visit),
   ]);
 }
 
 /**
  * What still waits for the old time is taken back. Where the booking itself had not been told yet, the new
- * time is simply booked; where a move had not, the customer still counts from the time before it.
+ * time is simply booked; where a move had not, the customer still counts from the time before it, and hears
+ * nothing when the visit is back there.
  */
 export async function tellMoved(
   tx: Transaction,
@@ -42,17 +36,38 @@ export async function tellMoved(
   before: { windowStartsAt: Date; windowEndsAt: Date },
 ) {
   const untold = await takeBack(tx, ctx, visit.id, 'The visit was moved.');
-  const cause = {
-    toldFrom: before.windowStartsAt.toISOString(),
-    toldUntil: before.windowEndsAt.toISOString(),
-  };
-  return put(tx, ctx, visit, [
-    ...channels.map((channel) => {
-      if (untold.booked.has(channel)) return at(ctx, visit, 'booked', channel);
-      return at(ctx, visit, 'moved', channel, untold.moved.get(channel) ?? cause);
+  await settleItems(tx, ctx, { visitId: visit.id, settledBy: 'The visit was moved.' });
+  const cause = toldTimes(before);
+  return putNotes(tx, ctx, visit, [
+    ...channels.flatMap((channel) => {
+      if (untold.booked.has(channel)) return [news(ctx, visit, 'booked', channel)];
+      return movedFrom(ctx, visit, channel, untold.moved.get(channel) ?? cause);
     }),
     ...reminders(ctx, visit),
   ]);
+}
+
+/**
+ * A calling off is taken back. Who has not heard of it hears nothing, unless the time is another than they
+ * know; who has, is told that the visit is booked.
+ */
+export async function tellStandsAgain(tx: Transaction, ctx: Context, visit: ToldVisit) {
+  const untold = await takeBack(tx, ctx, visit.id, 'The visit stands again.');
+  return putNotes(tx, ctx, visit, [
+    ...channels.flatMap((channel) => {
+      const told = untold.calledOff.get(channel);
+      if (!told) return [news(ctx, visit, 'booked', channel)];
+      return movedFrom(ctx, visit, channel, told);
+    }),
+    ...reminders(ctx, visit),
+  ]);
+}
+
+/** Nothing, when the visit is where the customer knows it. */
+function movedFrom(ctx: Context, visit: ToldVisit, channel: Channel, told: MessageCause): Note[] {
+  const now = toldTimes(visit);
+  const isKnown = told.toldFrom === now.toldFrom && told.toldUntil === now.toldUntil;
+  return isKnown ? [] : [news(ctx, visit, 'moved', channel, told)];
 }
 
 /** A visit that a channel never told of needs no calling off there. */
@@ -63,55 +78,48 @@ export async function tellCalledOff(
   reason: string,
 ) {
   const untold = await takeBack(tx, ctx, visit.id, 'The visit was called off.');
-  const cause = {
-    toldFrom: visit.windowStartsAt.toISOString(),
-    toldUntil: visit.windowEndsAt.toISOString(),
-  };
+  await settleItems(tx, ctx, { visitId: visit.id, settledBy: 'The visit was called off.' });
   const notes = channels
     .filter((channel) => !untold.booked.has(channel))
     .map((channel) => {
-      const told = untold.moved.get(channel) ?? cause;
-      return at(ctx, visit, 'called-off', channel, { ...told, reason });
+      const told = untold.moved.get(channel) ?? toldTimes(visit);
+      return news(ctx, visit, 'called-off', channel, { ...told, reason });
     });
-  return put(tx, ctx, visit, notes);
+  return putNotes(tx, ctx, visit, notes);
 }
 
-/** Tapped in the van: of use only until they are there. */
-export async function tellOnMyWay(tx: Transaction, ctx: Context, visit: ToldVisit) {
-  return put(
-    tx,
-    ctx,
-    visit,
-    channels.map((channel) => ({
-      ...at(ctx, visit, 'on-my-way', channel),
-      notAfter: new Date(ctx.now.getTime() + onMyWayMinutes * 60_000),
-    })),
-  );
-}
+type ReminderOccasion = 'please-confirm' | 'asked-again' | 'day-before';
 
-const onMyWayMinutes = 60;
-/** Asked for a yes so many days before, at this local time; told again the day before. */
+/** Asked for a yes so many days before, asked again if silent, at this local time; told again the day before. */
 const askDaysBefore = (kind: VisitKind) => (kind === 'install' ? 7 : 2);
+const askAgainDaysBefore = (kind: VisitKind) => (kind === 'install' ? 4 : 1);
 const askTime = '10:00';
 const reminderTime = '16:00';
 /** A reminder sooner after the booking than this would be the same thing twice. */
-const leastHoursBetween = { 'please-confirm': 24, 'day-before': 3 } as const;
+const leastHoursBetween: Record<ReminderOccasion, number> = {
+  'please-confirm': 24,
+  'asked-again': 40,
+  'day-before': 3,
+};
 
 function reminders(ctx: Context, visit: ToldVisit): Note[] {
   const day = localDate(visit.windowStartsAt, visit.zone);
-  const dueTimes = {
-    'please-confirm': fromLocal(addDays(day, -askDaysBefore(visit.kind)), askTime, visit.zone),
-    'day-before': fromLocal(addDays(day, -1), reminderTime, visit.zone),
+  const on = (daysBefore: number, time: string) =>
+    fromLocal(addDays(day, -daysBefore), time, visit.zone);
+  const dueTimes: Record<ReminderOccasion, Date> = {
+    'please-confirm': on(askDaysBefore(visit.kind), askTime),
+    'asked-again': on(askAgainDaysBefore(visit.kind), askTime),
+    'day-before': on(1, reminderTime),
   };
-  return (['please-confirm', 'day-before'] as const).flatMap((occasion) => {
+  return (['please-confirm', 'asked-again', 'day-before'] as const).flatMap((occasion) => {
     const dueAt = dueTimes[occasion];
     const soonest = ctx.now.getTime() + leastHoursBetween[occasion] * 3_600_000;
     if (dueAt.getTime() < soonest) return [];
-    return channels.map((channel) => ({ ...at(ctx, visit, occasion, channel), dueAt }));
+    return onEachChannel(occasion, { dueAt, notAfter: visit.windowEndsAt });
   });
 }
 
-function at(
+function news(
   ctx: Context,
   visit: ToldVisit,
   occasion: Occasion,
@@ -120,7 +128,16 @@ function at(
 ): Note {
   // An hour ahead of nothing is no use; a visit called off is told until it would have ended.
   const notAfter = occasion === 'called-off' ? visit.endsAt : visit.windowEndsAt;
-  return { occasion, channel, dueAt: ctx.now, notAfter, cause };
+  const mayBeUndone = ctx.actor.kind === 'person';
+  const dueAt = new Date(ctx.now.getTime() + (mayBeUndone ? undoMs : 0));
+  return { occasion, channel, dueAt, notAfter, cause };
+}
+
+function toldTimes(visit: { windowStartsAt: Date; windowEndsAt: Date }): MessageCause {
+  return {
+    toldFrom: visit.windowStartsAt.toISOString(),
+    toldUntil: visit.windowEndsAt.toISOString(),
+  };
 }
 
 async function takeBack(tx: Transaction, ctx: Context, visitId: string, reason: string) {
@@ -129,23 +146,6 @@ async function takeBack(tx: Transaction, ctx: Context, visitId: string, reason: 
   return {
     booked: new Set(of('booked').map(({ channel }) => channel)),
     moved: new Map(of('moved').map(({ channel, cause }) => [channel, cause])),
+    calledOff: new Map(of('called-off').map(({ channel, cause }) => [channel, cause])),
   };
-}
-
-async function put(
-  tx: Transaction,
-  ctx: Context,
-  visit: ToldVisit,
-  notes: Note[],
-): Promise<Channel[]> {
-  const recipient = await readRecipient(tx, ctx.shop.id, visit.customerId);
-  const { id: visitId, jobId, version, zone } = visit;
-  return enqueue(tx, ctx, { recipient, about: { visitId, jobId, version, zone } }, notes);
-}
-
-/** For the job's story. */
-export function toldWords(told: Channel[]): string {
-  if (told.length === 0) return 'the customer is not told: call them';
-  const words = { sms: 'text', email: 'e-mail' } as const;
-  return `the customer is told by ${told.map((channel) => words[channel]).join(' and ')}`;
 }

@@ -1,10 +1,11 @@
 import { randomBytes } from 'node:crypto';
-import { and, eq } from 'drizzle-orm';
+import { and, eq, inArray } from 'drizzle-orm';
 import twilio from 'twilio';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { POST as inboundRoute } from '@/app/api/webhooks/sms/route';
 import { POST as statusRoute } from '@/app/api/webhooks/sms/status/route';
-import { consents, customers, jobs, messages, visits } from '@/db/schema';
+import { consents, customers, jobs, messages, schedulerItems, visits } from '@/db/schema';
+import { textAnswers } from '@/lib/messages/occasions';
 import { database } from '@/server/base/database';
 import type { RouteHandler } from '@/server/base/handle';
 import { getPorts } from '@/server/ports/choose-ports';
@@ -107,6 +108,27 @@ describe('what the texting provider posts', () => {
       .from(messages)
       .where(and(eq(messages.jobId, jobId), eq(messages.state, 'received')));
   }
+  /** Our newest text on an occasion is on their phone now. */
+  async function arrivesOnPhone(phone: string, occasion: string) {
+    const { db } = await database();
+    const sentAt = new Date(Date.now() + 1_000);
+    await db
+      .update(messages)
+      .set({ state: 'sent', toAddress: phone, sentAt })
+      .where(and(eq(messages.occasion, occasion), eq(messages.state, 'waiting')));
+  }
+  async function answersTo(visitId: string) {
+    const { db } = await database();
+    const rows = await db
+      .select({ occasion: messages.occasion })
+      .from(messages)
+      .where(and(eq(messages.visitId, visitId), inArray(messages.occasion, [...textAnswers])));
+    return rows.map(({ occasion }) => occasion);
+  }
+  async function itemsOf(visitId: string) {
+    const { db } = await database();
+    return db.select().from(schedulerItems).where(eq(schedulerItems.visitId, visitId));
+  }
   async function mayText(jobId: string) {
     const { db } = await database();
     const rows = await db
@@ -140,14 +162,37 @@ describe('what the texting provider posts', () => {
     });
   });
 
-  it('guesses nothing when two visits wait for an answer', async () => {
+  it('guesses nothing when two visits wait for an answer: it asks which, and takes a number', async () => {
     const first = await told();
     const second = await told(first.phone);
     await text(first.phone, 'Yes');
     expect(await statusOf(first.visit.id)).toMatchObject({ status: 'booked' });
     expect(await statusOf(second.visit.id)).toMatchObject({ status: 'booked' });
     expect(await receivedFrom(second.visit.jobId)).toEqual([
-      { body: 'Yes', reason: 'Read it: it is not clear which visit is meant.' },
+      { body: 'Yes', reason: 'Two visits wait for an answer: asked which is meant.' },
+    ]);
+    await arrivesOnPhone(first.phone, 'which-visit');
+    await text(first.phone, 'the second one, please');
+    expect(await statusOf(first.visit.id)).toMatchObject({ status: 'booked' });
+    expect(await statusOf(second.visit.id)).toMatchObject({ status: 'confirmed' });
+  });
+
+  it('answers HELP with who texts, and not for ever', async () => {
+    const { phone, visit } = await told();
+    for (let count = 0; count < 5; count += 1) await text(phone, 'HELP');
+    expect(await answersTo(visit.id)).toEqual(['help', 'help', 'help']);
+    expect(await itemsOf(visit.id)).toMatchObject([
+      { kind: 'unclear-reply' },
+      { kind: 'unclear-reply' },
+    ]);
+  });
+
+  it('sends the link to other times to who asks for one', async () => {
+    const { phone, visit } = await told();
+    await text(phone, 'Can we do another day?');
+    expect(await answersTo(visit.id)).toEqual(['other-time']);
+    expect(await itemsOf(visit.id)).toMatchObject([
+      { kind: 'asks-other-time', words: 'Measure: Can we do another day?' },
     ]);
   });
 

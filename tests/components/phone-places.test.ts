@@ -56,8 +56,8 @@ describe('a visit on the phone', () => {
   });
 
   it.each([
-    ['booked', ['on-the-way', 'arrived']],
-    ['on-the-way', ['arrived', 'nobody-home']],
+    ['booked', ['on-the-way', 'arrived', 'running-late']],
+    ['on-the-way', ['arrived', 'running-late', 'nobody-home']],
     ['on-site', ['done', 'nobody-home']],
     ['done', []],
     ['called-off', []],

@@ -1,4 +1,4 @@
-import { and, eq } from 'drizzle-orm';
+import { and, eq, ne } from 'drizzle-orm';
 import ICAL from 'ical.js';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
 import { consents, customers, jobs, messages, shops, visits } from '@/db/schema';
@@ -12,6 +12,7 @@ import { settle } from '@/server/messages/settle';
 import { callOffVisit } from '@/server/visits/call-off-visit';
 import { composeVisitMessage } from '@/server/visits/compose-message';
 import { moveVisit } from '@/server/visits/move-visit';
+import { undoMs } from '@/server/visits/tell-customer';
 import { bookTestVisit } from '../help/book-test-visit';
 import { tokenOfVisit } from '../help/link-of';
 import { makeCrew } from '../help/make-crew';
@@ -62,6 +63,7 @@ describe('sending what is due', () => {
     const time = `${String(8 + (person % 4) * 2).padStart(2, '0')}:00`;
     const date = new Date(Date.parse(day) + 86_400_000 * 7 * person).toISOString().slice(0, 10);
     const visit = await bookTestVisit(of, { jobId, crewId: crew, date, time }, clock);
+    pass(undoMs);
     return {
       visit,
       phone,
@@ -99,16 +101,10 @@ describe('sending what is due', () => {
     pass(60_000);
     const ctx = await contextOf(shop, 'scheduler', clock);
     const date = new Date(Date.parse(visit.startsAt) + 86_400_000).toISOString().slice(0, 10);
-    return moveVisit(
-      ctx,
-      moveVisitInput.parse({
-        visitId: visit.id,
-        version: visit.version,
-        crewId,
-        date,
-        time: '14:00',
-      }),
-    );
+    const to = { visitId: visit.id, version: visit.version, crewId, date, time: '14:00' };
+    const moved = await moveVisit(ctx, moveVisitInput.parse(to));
+    pass(undoMs);
+    return moved;
   }
 
   function eventOf(mail: { attachments: { contentType: string; text: string | null }[] }) {
@@ -156,7 +152,7 @@ describe('sending what is due', () => {
       version: moved.version,
       reason: 'The floor is not down.',
     });
-    pass(1_000);
+    pass(undoMs);
     await send();
     const entries = mails().map(eventOf);
     expect(entries.map(({ method }) => method)).toEqual(['REQUEST', 'REQUEST', 'CANCEL']);
@@ -215,8 +211,7 @@ describe('sending what is due', () => {
     const { db } = await database();
     // As if it had been due by day, and the worker only came to it at night.
     await db.update(messages).set({ dueAt: clock }).where(eq(messages.visitId, visit.id));
-    await db.delete(messages).where(eq(messages.occasion, 'please-confirm'));
-    await db.delete(messages).where(eq(messages.occasion, 'day-before'));
+    await db.delete(messages).where(ne(messages.occasion, 'booked'));
     await send();
     expect([texts().length, mails().length]).toEqual([0, 1]);
     expect(await row(visit, 'booked', 'sms')).toMatchObject({

@@ -1,5 +1,7 @@
 /** E-mailing a customer or a person of the shop: what the business asks of whoever carries it. */
 
+export type Attachment = { filename: string; contentType: string; content: Uint8Array };
+
 export type OutgoingEmail = {
   to: string;
   subject: string;
@@ -7,6 +9,7 @@ export type OutgoingEmail = {
   html?: string;
   /** A calendar object, with the METHOD that it carries (RFC 5546). */
   ics?: { content: string; method: 'REQUEST' | 'CANCEL' | 'PUBLISH' };
+  attachments?: Attachment[];
   replyTo?: string;
   /** Makes the Message-ID, so that the same message sent twice is one to the reader's program. */
   idempotencyKey?: string;
@@ -31,6 +34,8 @@ export type EmailRefusal = {
   providerCode: number | null;
   /** In words for the scheduler. */
   message: string;
+  /** What the server said, word for word, for who sets the program up. */
+  detail: string;
 };
 
 export type EmailSendResult =

@@ -40,7 +40,7 @@ export function smtpEmail({
 }
 
 function messageOf(email: OutgoingEmail, domain: string) {
-  const { to, subject, text, html, ics, replyTo, idempotencyKey } = email;
+  const { to, subject, text, html, ics, attachments, replyTo, idempotencyKey } = email;
   return {
     // As an object it is one address, whatever commas or line ends somebody typed into it.
     to: { name: '', address: to },
@@ -49,6 +49,14 @@ function messageOf(email: OutgoingEmail, domain: string) {
     ...(html ? { html } : {}),
     ...(replyTo ? { replyTo: { name: '', address: replyTo } } : {}),
     ...(idempotencyKey ? { messageId: messageIdOf(idempotencyKey, domain) } : {}),
+    ...(attachments
+      ? {
+          attachments: attachments.map(({ content, ...file }) => ({
+            ...file,
+            content: Buffer.from(content),
+          })),
+        }
+      : {}),
     ...(ics
       ? { icalEvent: { method: ics.method, filename: 'visit.ics', content: ics.content } }
       : {}),
@@ -72,9 +80,10 @@ function refusalFrom(error: unknown): EmailRefusal {
   if (!(error instanceof Error) || typeof (error as SmtpError).code !== 'string') throw error;
   const { code, responseCode, syscall } = error as SmtpError;
   const providerCode = typeof responseCode === 'number' ? responseCode : null;
-  const refusal = (rest: Omit<EmailRefusal, 'providerCode'>): EmailRefusal => ({
+  const refusal = (rest: Omit<EmailRefusal, 'providerCode' | 'detail'>): EmailRefusal => ({
     ...rest,
     providerCode,
+    detail: error.message,
   });
   if (code === 'EAUTH') {
     const message = "The e-mail server does not accept the shop's sign-in.";

@@ -48,20 +48,18 @@ const meanings: Record<number, Meaning> = {
  * What a provider's code means; an unknown one is taken by its HTTP status: 5xx may pass, 4xx will not.
  * Example: 21610 is 'opted-out', never to be tried again.
  */
-export function refusalOf(providerCode: number | null, httpStatus = 400): SmsRefusal {
+export function refusalOf(providerCode: number | null, httpStatus = 400, detail = ''): SmsRefusal {
+  return { ...meaningOf(providerCode, httpStatus), providerCode, detail };
+}
+
+function meaningOf(providerCode: number | null, httpStatus: number): Meaning {
   const known = providerCode === null ? undefined : meanings[providerCode];
-  if (known) return { ...known, providerCode };
-  if (httpStatus === 429) return { ...(meanings[20429] as Meaning), providerCode };
-  if (httpStatus === 401 || httpStatus === 403) return { ...accountFault, providerCode };
+  if (known) return known;
+  if (httpStatus === 429) return meanings[20429] as Meaning;
+  if (httpStatus === 401 || httpStatus === 403) return accountFault;
   if (httpStatus >= 500) {
-    const message = 'The provider has a fault of its own.';
-    return { code: 'no-answer', retry: 'ask-first', providerCode, message };
+    return meaning('no-answer', 'ask-first', 'The provider has a fault of its own.');
   }
   const named = providerCode === null ? '' : ` (${providerCode})`;
-  return {
-    code: 'blocked',
-    retry: 'never',
-    providerCode,
-    message: `The provider refused this text${named}.`,
-  };
+  return meaning('blocked', 'never', `The provider refused this text${named}.`);
 }

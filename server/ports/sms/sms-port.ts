@@ -35,6 +35,8 @@ export type SmsRefusal = {
   providerCode: number | null;
   /** In words for the scheduler. */
   message: string;
+  /** What the provider said, word for word, for who sets the program up. */
+  detail: string;
 };
 
 export type SmsState = 'waiting' | 'sent' | 'delivered' | 'not-delivered';
@@ -57,8 +59,16 @@ export type SmsLookup<T> = { ok: true; found: T | null } | { ok: false; refusal:
 export type SmsPort = {
   send(sms: OutgoingSms): Promise<SmsSendResult>;
   find(providerId: string): Promise<SmsLookup<SmsReport>>;
-  /** Settles a message whose answer was lost: the same text to the same number since then. */
-  findSent(sms: { to: string; body: string; since: Date }): Promise<SmsLookup<SmsReport>>;
+  /**
+   * Settles a message whose answer was lost: the same text to the same number since then, that is not
+   * known for another message.
+   */
+  findSent(sms: {
+    to: string;
+    body: string;
+    since: Date;
+    except?: ReadonlySet<string>;
+  }): Promise<SmsLookup<SmsReport>>;
   /** Whether a webhook came from the provider. `url` is the public one, with its query. */
   isGenuine(webhook: { url: string; params: Record<string, string>; signature: string }): boolean;
 };

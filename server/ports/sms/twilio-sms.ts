@@ -42,11 +42,14 @@ export function twilioSms(settings: TwilioSettings): SmsPort {
       });
     },
 
-    findSent({ to, body, since }) {
+    findSent({ to, body, since, except }) {
       return look(async () => {
         const newest = await client.messages.list({ to, from, limit: MOST_TO_LOOK_THROUGH });
         const same = newest.find(
-          (message) => message.body === body && message.dateCreated >= startOfSecond(since),
+          (message) =>
+            message.body === body &&
+            message.dateCreated >= startOfSecond(since) &&
+            !except?.has(message.sid),
         );
         return same ? reportOf(same.sid, same.status, same.errorCode) : null;
       });
@@ -112,13 +115,15 @@ const neverLeft = new Set([
 
 function refusalFrom(error: unknown): SmsRefusal {
   if (!(error instanceof Error)) throw error;
-  const { code, status } = error as Error & { code?: unknown; status?: unknown };
-  if (typeof status === 'number') return refusalOf(typeof code === 'number' ? code : null, status);
+  const { code, status, message: detail } = error as Error & { code?: unknown; status?: unknown };
+  if (typeof status === 'number') {
+    return refusalOf(typeof code === 'number' ? code : null, status, detail);
+  }
   if (typeof code === 'string' && neverLeft.has(code)) {
     const message = 'The texting service cannot be reached.';
-    return { code: 'unreachable', retry: 'later', providerCode: null, message };
+    return { code: 'unreachable', retry: 'later', providerCode: null, message, detail };
   }
   if (typeof code !== 'string') throw error;
   const message = 'The texting service did not answer; the text may have been sent.';
-  return { code: 'no-answer', retry: 'ask-first', providerCode: null, message };
+  return { code: 'no-answer', retry: 'ask-first', providerCode: null, message, detail };
 }

@@ -1,12 +1,12 @@
 import { describe, expect, test } from 'vitest';
 import { checkTemplate, type TemplateUse } from '@/lib/messages/check-template';
-import { fieldsOf, fieldWords, occasions } from '@/lib/messages/occasions';
+import { fieldsOf, fieldWords, isTextAnswer, occasions } from '@/lib/messages/occasions';
 import { plainSms } from '@/lib/messages/plain-sms';
 import { renderEmail, renderSms, usualWording } from '@/lib/messages/render-message';
 import { understandReply } from '@/lib/messages/replies';
 import { sampleValues } from '@/lib/messages/sample-values';
 import { countSegments } from '@/lib/messages/segments';
-import { readTemplate, renderTemplate } from '@/lib/messages/template';
+import { readTemplate, renderTemplate, wordingParts } from '@/lib/messages/template';
 import { visitInWords } from '@/lib/messages/visit-words';
 import { visitKinds } from '@/lib/schedule';
 import { languages } from '@/lib/time/text-locale';
@@ -96,7 +96,8 @@ describe('what a new shop says', () => {
 
   test.each(all)('$occasion in $language passes its own check', ({ language, occasion }) => {
     const wording = usualWording(occasion, language);
-    for (const part of ['sms', 'subject', 'email'] as const) {
+    const parts = isTextAnswer(occasion) ? (['sms'] as const) : wordingParts;
+    for (const part of parts) {
       expect(checkTemplate(wording[part], { occasion, part, language }), part).toEqual([]);
     }
   });
@@ -121,6 +122,8 @@ describe('what a new shop says', () => {
       const values = Object.fromEntries(fieldsOf[occasion].map((field) => [field, 'x']));
       expect(renderSms({ occasion, language, values }).problems).toEqual([]);
       expect(renderEmail({ occasion, language, values }).problems).toEqual([]);
+      const hasEmail = renderEmail({ occasion, language, values }).value?.text !== '';
+      expect(hasEmail).toBe(!isTextAnswer(occasion));
     },
   );
 
