@@ -1,0 +1,173 @@
+/** What a crew's phone says, in the language that its holder chose. Spanish is recalled, not sourced: see DEVELOPERS.md. */
+import type { CautionKind, SiteCaution } from '@/lib/cautions/site-cautions';
+import type { ChecklistItem } from '@/lib/contracts/checklists';
+import type { CheckAnswer, PauseReason } from '@/lib/contracts/day-events';
+import type { SnagKind, SnagMender } from '@/lib/contracts/snags';
+import type { ReportVisitInput, VisitStatus } from '@/lib/contracts/visits';
+import type { SettingStep, StartReason } from '@/lib/days/setting-order';
+import type { BringItem } from '@/lib/days/what-to-bring';
+import type { VisitKind } from '@/lib/schedule/visit-kind';
+import { crewEn } from './crew-en';
+import { crewEs } from './crew-es';
+
+export type CrewLanguage = 'en' | 'es';
+type Region = 'US' | 'UK' | 'AU' | 'EU';
+type Count = (count: number) => string;
+type One = (text: string) => string;
+
+export type CrewWords = {
+  languageName: string;
+  today: string;
+  stops: Count;
+  nothingToday: string;
+  nothingTodayMore: string;
+  drive: (minutes: number, isEstimated: boolean) => string;
+  fromBase: string;
+  kinds: Record<VisitKind, string>;
+  statuses: Record<VisitStatus, string>;
+  taps: Record<ReportVisitInput['what'], string>;
+  howLate: string;
+  lateMinutes: Count;
+  pause: string;
+  goOn: string;
+  pauseWhy: string;
+  pauses: Record<PauseReason, string>;
+  onSite: (hours: number, minutes: number) => string;
+  paused: string;
+  theWay: string;
+  directions: string;
+  ring: string;
+  wayIn: string;
+  parking: string;
+  accessCode: string;
+  showCode: string;
+  hideCode: string;
+  codeOnDay: string;
+  codeNotHere: string;
+  customerSays: string;
+  notes: string;
+  work: string;
+  bring: string;
+  setting: string;
+  revision: One;
+  noSheet: string;
+  superseded: string;
+  asFound: string;
+  checklist: string;
+  checked: (done: number, all: number) => string;
+  snags: string;
+  open: Count;
+  partShort: string;
+  signOff: string;
+  signed: string;
+  back: string;
+  save: string;
+  keepFailed: string;
+  notKept: string;
+  finish: string;
+  bringItems: {
+    filler: (count: number, length: string, widest: string) => string;
+    kick: (length: string, tallest: string) => string;
+    crown: One;
+    legs: (count: number, least: string, most: string) => string;
+    shims: One;
+    backing: One;
+  } & Record<
+    Exclude<BringItem['what'], 'filler' | 'kick' | 'crown' | 'legs' | 'shims' | 'backing'>,
+    string
+  >;
+  highPoint: (wall: string, along: string) => string;
+  datum: (name: string, height: string) => string;
+  order: string;
+  orderNote: string;
+  steps: Record<SettingStep['step'], string>;
+  startAt: (unit: string, why: string) => string;
+  startWhy: Record<StartReason, string>;
+  fillersToCut: string;
+  filler: (side: string, top: string, bottom: string) => string;
+  blank: One;
+  sides: Record<'left' | 'right', string>;
+  kickHeights: string;
+  kickRange: (least: string, most: string) => string;
+  mitres: string;
+  mitre: (corner: string, angle: string, saw: string) => string;
+  leftLong: string;
+  studsHere: string;
+  studsAt: (wall: string, list: string) => string;
+  predicted: string;
+  drawnAs: string;
+  cautions: string;
+  sourceIs: One;
+  cautionWords: Record<CautionKind, (caution: SiteCaution) => string>;
+  asFoundLead: string;
+  diagonalAsk: (corner: string, legs: string) => string;
+  angleAsk: One;
+  dropAsk: (at: 'high' | 'low', wall: string, along: string) => string;
+  was: One;
+  compare: string;
+  agrees: string;
+  differs: string;
+  changes: string;
+  ringBeforeCutting: string;
+  typeOne: string;
+  notRead: One;
+  when: Record<ChecklistItem['when'], string>;
+  answers: Record<CheckAnswer, string>;
+  whyNo: string;
+  newSnag: string;
+  noSnags: string;
+  noSnagsMore: string;
+  snagKinds: Record<SnagKind, string>;
+  what: string;
+  where: string;
+  noRoom: string;
+  place: string;
+  words: string;
+  mender: string;
+  menders: Record<SnagMender, string>;
+  due: string;
+  photos: string;
+  photosOf: Count;
+  closeIt: string;
+  closeHow: string;
+  closeNeeds: string;
+  closed: string;
+  afterSignOff: string;
+  benchSays: One;
+  dueOn: One;
+  signTitle: string;
+  signStatement: One;
+  signDelivery: One;
+  openHere: Count;
+  signerName: string;
+  signHere: string;
+  clear: string;
+  signNow: string;
+  signFirst: string;
+  nameFirst: string;
+  signedBy: (name: string, when: string) => string;
+  signedSafe: string;
+  copy: string;
+};
+
+export const crewWords: Record<CrewLanguage, CrewWords> = { en: crewEn, es: crewEs };
+
+/** Glossary V35 and the makers' usage: the same thing under its name in each region. */
+const tradeWords: Record<Region, { kick: string; drywall: string }> = {
+  US: { kick: 'toe kick', drywall: 'drywall' },
+  UK: { kick: 'plinth', drywall: 'plasterboard' },
+  AU: { kick: 'kickboard', drywall: 'plasterboard' },
+  EU: { kick: 'plinth', drywall: 'plasterboard' },
+};
+
+/**
+ * Fills the names of things as the shop's region calls them; a capital in the braces keeps a capital.
+ * Edge: words without braces come back as they are. Example: "{Kick} face" in the UK is "Plinth face".
+ */
+export function inRegion(words: string, region: Region): string {
+  const { kick, drywall } = tradeWords[region];
+  return words
+    .replaceAll('{kick}', kick)
+    .replaceAll('{Kick}', kick.charAt(0).toUpperCase() + kick.slice(1))
+    .replaceAll('{drywall}', drywall);
+}
