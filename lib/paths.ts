@@ -15,6 +15,10 @@ export const paths = {
   diary: () => '/diary',
   /** The diary opened at a civil date, "2026-05-12". */
   diaryOn: (date: string) => `/diary?on=${part(date)}`,
+  /** The shop is late: what it moves. */
+  slip: () => '/diary/late',
+  days: () => '/days',
+  day: (date: string) => `/days/${part(date)}`,
   jobs: () => '/jobs',
   newJob: () => '/jobs/new',
   job: (jobId: string) => `/jobs/${part(jobId)}`,
@@ -26,6 +30,9 @@ export const paths = {
   crews: () => '/crews',
   messages: () => '/messages',
   snags: () => '/snags',
+  numbers: () => '/numbers',
+  /** One figure of the last so many days, with the jobs behind it. */
+  numbersOf: (figure: string, days: number) => `/numbers?figure=${part(figure)}&days=${days}`,
   rules: () => '/rules',
 
   today: () => '/today',
@@ -89,6 +96,8 @@ export const apiPaths = {
     `/api/sheets/${part(releaseId)}/files/${part(kind)}`,
   bench: () => '/api/bench',
 
+  /** The jobs behind a figure, as CSV. */
+  numbersFile: (figure: string, days: number) => `/api/numbers/${part(figure)}?days=${days}`,
   visits: () => '/api/visits',
   visit: (visitId: string) => `/api/visits/${part(visitId)}`,
   callOffVisit: (visitId: string) => `/api/visits/${part(visitId)}/call-off`,
@@ -116,6 +125,8 @@ export const apiPaths = {
   /** A better order of a day's stops: asked for, and accepted. */
   planDay: () => '/api/days/plan',
   acceptDayPlan: () => '/api/days/plan/accept',
+  /** For the map, which puts the numbers in. */
+  tiles: () => '/api/tiles/{z}/{x}/{y}',
   /** The shop is late: what it moves, and all of it accepted at once. */
   slipPreview: () => '/api/slips/preview',
   acceptSlip: () => '/api/slips/accept',

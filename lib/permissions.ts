@@ -29,6 +29,7 @@ export const permissions = [
   'snags:change',
   'messages:read',
   'messages:send',
+  'numbers:read',
 ] as const;
 export type Permission = (typeof permissions)[number];
 

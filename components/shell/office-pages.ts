@@ -4,6 +4,7 @@ import { may, type Permission, type Role } from '@/lib/permissions';
 /** The office's pages in the order of the day, the letter that goes there after G, and who may see each. */
 export const officePages = [
   { name: 'diary', word: 'Diary', path: paths.diary(), letter: 'D', permission: 'visits:read' },
+  { name: 'days', word: 'Days', path: paths.days(), letter: 'Y', permission: 'visits:read' },
   { name: 'jobs', word: 'Jobs', path: paths.jobs(), letter: 'J', permission: 'jobs:read' },
   { name: 'bench', word: 'Bench', path: paths.bench(), letter: 'B', permission: 'sheets:read' },
   {
@@ -19,6 +20,13 @@ export const officePages = [
     path: paths.crews(),
     letter: 'C',
     permission: 'people:read',
+  },
+  {
+    name: 'numbers',
+    word: 'Numbers',
+    path: paths.numbers(),
+    letter: 'N',
+    permission: 'numbers:read',
   },
   { name: 'rules', word: 'Shop rules', path: paths.rules(), letter: 'R', permission: 'shop:read' },
   { name: 'today', word: 'Today', path: paths.today(), letter: 'T', permission: 'visits:report' },

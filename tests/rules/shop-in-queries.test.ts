@@ -13,6 +13,7 @@ const folders = [
   'days',
   'files',
   'keeping',
+  'numbers',
 ];
 
 /** Queries that belong to no one shop, by the start of their file's name; each with the reason. */
