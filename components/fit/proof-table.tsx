@@ -2,6 +2,7 @@ import { Verdict } from '@/components/ui/verdict';
 import type { ProofRow } from '@/lib/sheet/proof-rows';
 import { Figure } from './figure';
 import { InFractions } from './in-fractions';
+import { RuleLine } from './rule-line';
 
 /** "Proved on site": each check with what was read, what its rule allows, and whose rule that is. */
 export function ProofTable({ rows }: { rows: ProofRow[] }) {
@@ -31,7 +32,7 @@ export function ProofTable({ rows }: { rows: ProofRow[] }) {
       </thead>
       {rules.map((rule) => (
         <tbody key={rule}>
-          <tr>
+          <tr className="hidden print:table-row">
             <th
               scope="rowgroup"
               colSpan={4}
@@ -56,6 +57,13 @@ function ProofLine({ row }: { row: ProofRow }) {
     <tr className="border-b border-rule align-top *:py-1 print:*:py-px">
       <th scope="row" className="text-left font-normal">
         {row.check}
+        {row.by ? (
+          <div className="print:hidden">
+            <RuleLine by={row.by} />
+          </div>
+        ) : (
+          <span className="block text-note text-graphite print:hidden">{row.rule}</span>
+        )}
       </th>
       <td className="pl-2 text-right">
         {row.read ? <Figure figure={row.read} of={row.check} showsSurely /> : null}

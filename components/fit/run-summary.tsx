@@ -1,17 +1,21 @@
 import Link from 'next/link';
+import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { OpeningPlace, RunFit } from '@/lib/measure/run-fit';
+import { fillRuleBehind } from '@/lib/sheet/rule-behind';
 import { Figure } from './figure';
 import { InFractions } from './in-fractions';
+import { RuleLine } from './rule-line';
 import { RunVerdict } from './run-verdict';
 
 type RunSummaryProps = {
   runFit: RunFit;
+  rules: FitRules;
   /** Where the run is laid out; absent where the person may not. */
   editHref?: string;
 };
 
 /** What the room leaves a run: the largest plumb block and what governs it, slack, gap behind, verdict. */
-export function RunSummary({ runFit, editHref }: RunSummaryProps) {
+export function RunSummary({ runFit, rules, editHref }: RunSummaryProps) {
   const { clearOpening, fill, setLine, kicks } = runFit;
   return (
     <section className="border-b border-rule py-2.5 print:py-1">
@@ -31,6 +35,11 @@ export function RunSummary({ runFit, editHref }: RunSummaryProps) {
       ) : (
         <p className="text-graphite">Cannot be filled yet: its wall or a corner is not read.</p>
       )}
+      {fill ? (
+        <div className="print:hidden">
+          <RuleLine by={fillRuleBehind(runFit, rules)} />
+        </div>
+      ) : null}
       {fill?.suggestion ? (
         <p>
           <span className="font-medium">

@@ -4,11 +4,13 @@ import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Room } from '@/lib/contracts/wall-book';
 import { suspectAdvice } from '@/lib/drawing/closure-words';
 import type { Fit } from '@/lib/measure/fit';
+import { ruleBehind } from '@/lib/sheet/rule-behind';
 import { InFractions } from './in-fractions';
+import { RuleLine } from './rule-line';
 
 type VerdictListProps = { fit: Fit; room: Room; rules: FitRules };
 
-/** What the fit says about the room, worst first; whose rule it is stands under "Proved on site". */
+/** What the fit says about the room, worst first, each with the rule that says so. */
 export function VerdictList({ fit, room, rules }: VerdictListProps) {
   const loud = fit.verdicts.filter(({ verdict }) => verdict !== 'within');
   const quiet = fit.verdicts.length - loud.length;
@@ -36,11 +38,12 @@ export function VerdictList({ fit, room, rules }: VerdictListProps) {
             <Verdict kind={verdict.verdict} className="self-start">
               {verdict.inDoubt ? `${verdict.verdict}?` : verdict.verdict}
             </Verdict>
-            <span>
+            <div>
               <InFractions words={verdict.words} />
               {verdict.inDoubt ? ' Its ± spans the limit.' : ''}
               <span className="block text-note text-graphite">{verdict.action}</span>
-            </span>
+              <RuleLine by={ruleBehind(verdict, rules)} />
+            </div>
           </li>
         ))}
       </ul>

@@ -51,6 +51,7 @@ export function WallPanel({ view, wall, lines, mayLayOut }: WallPanelProps) {
         <RunSummary
           key={runFit.runId}
           runFit={runFit}
+          rules={rules}
           editHref={
             mayLayOut ? fitHref(jobId, roomId, { wall: wall.id, lay: runFit.runId }) : undefined
           }

@@ -79,7 +79,7 @@ export function ShopSheet({ sheet, mayTakeUp }: ShopSheetProps) {
                     <DrawingView drawing={drawing} title={`Wall ${wall.name}, seen square on`} />
                   ) : null}
                   {ofWall.map((runFit) => (
-                    <RunSummary key={runFit.runId} runFit={runFit} />
+                    <RunSummary key={runFit.runId} runFit={runFit} rules={rules} />
                   ))}
                   <TroubleList fit={fit} runs={ofWall} />
                 </>

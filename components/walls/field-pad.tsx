@@ -27,6 +27,8 @@ export type FieldPadProps = {
   onUnit: () => void;
   stepMm: number;
   says: PadSays;
+  /** Opens the rule behind what is said. */
+  onRule?: () => void;
   /** Beside the chips: another way to take the same thing. */
   otherWay?: { words: string; onPress: () => void };
   /** Tool, what it touches, can't reach it … */
@@ -84,7 +86,7 @@ export function FieldPad(props: FieldPadProps) {
           <UnitButton entry={entry} onUnit={props.onUnit} />
         </span>
       </div>
-      <PadSaysBox says={props.says} />
+      <PadSaysBox says={props.says} onRule={props.onRule} />
       <ActionRow actions={props.actions} />
       {entry.unit === 'in' ? (
         <TapeStrip

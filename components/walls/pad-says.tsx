@@ -25,13 +25,21 @@ const marks: Partial<Record<PadSays['kind'], { kind: VerdictKind; word?: string 
   within: { kind: 'within' },
 };
 
+type PadSaysBoxProps = {
+  says: PadSays;
+  /** Opens the rule that judged it. */
+  onRule?: () => void;
+  children?: ReactNode;
+};
+
 /** What the value means, at once, in a place that keeps its height so that no key moves under the thumb. */
-export function PadSaysBox({ says, children }: { says: PadSays; children?: ReactNode }) {
+export function PadSaysBox({ says, onRule, children }: PadSaysBoxProps) {
   const mark = marks[says.kind];
+  const by = 'by' in says ? says.by : undefined;
   return (
     <div
       role="status"
-      className={`mx-3.5 mt-1 flex min-h-[3.7rem] items-center border-l-4 bg-tint px-2.5 py-1 text-note leading-[1.3] ${edges[says.kind]}`}
+      className={`mx-3.5 mt-1 flex min-h-[5.2rem] flex-col justify-center border-l-4 bg-tint px-2.5 py-1 text-note leading-[1.3] ${edges[says.kind]}`}
     >
       <p>
         {mark ? (
@@ -42,6 +50,15 @@ export function PadSaysBox({ says, children }: { says: PadSays; children?: React
         <FractionWords>{says.words}</FractionWords>
         {children}
       </p>
+      {by ? (
+        <button
+          type="button"
+          onClick={onRule}
+          className="min-h-6 touch-manipulation self-start text-left text-graphite underline decoration-dotted underline-offset-2"
+        >
+          <FractionWords>{by.short}</FractionWords>
+        </button>
+      ) : null}
     </div>
   );
 }

@@ -7,10 +7,10 @@ import { ChoiceSheet } from './choice-sheet';
 import type { PadHabits } from './pad-habits';
 import { doorwayNames, skipReasons, studSides, touchesChoices } from './pad-words';
 
-export type PadSheet = 'tool' | 'touches' | 'skip' | 'set-up' | 'stud' | 'doorway';
+export type PadSheet = 'tool' | 'touches' | 'skip' | 'set-up' | 'stud' | 'doorway' | 'rule';
 
 type PadSheetsProps = {
-  sheet: Exclude<PadSheet, 'set-up'>;
+  sheet: Exclude<PadSheet, 'set-up' | 'rule'>;
   tools: readonly Tool[];
   toolId: string | undefined;
   use: ToolUse;

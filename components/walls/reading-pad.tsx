@@ -11,6 +11,7 @@ import { PadSheets, SetUpSheet } from './lazy-screens';
 import { padActions } from './pad-actions';
 import type { PadHabits } from './pad-habits';
 import type { PadSheet } from './pad-sheets';
+import { RuleSheet } from './rule-sheet';
 import { type ReadingPadInput, useReadingPad } from './use-reading-pad';
 
 type ReadingPadProps = ReadingPadInput & {
@@ -45,7 +46,10 @@ export function ReadingPad(props: ReadingPadProps) {
       />
     );
   }
-  if (sheet !== null && sheet !== 'set-up') {
+  if (sheet === 'rule' && 'by' in pad.says && pad.says.by) {
+    return <RuleSheet by={pad.says.by} onBack={close} />;
+  }
+  if (sheet !== null && sheet !== 'set-up' && sheet !== 'rule') {
     return (
       <PadSheets
         {...{ sheet, habits, onHabits }}
@@ -91,6 +95,7 @@ export function ReadingPad(props: ReadingPadProps) {
       onUnit={changeUnit}
       stepMm={pad.speech.stepMm}
       says={pad.says}
+      onRule={() => setSheet('rule')}
       otherWay={
         ask.kind === 'corner'
           ? {

@@ -3,6 +3,7 @@ import type { CornerFit, Fit } from '@/lib/measure/fit';
 import type { FitFigure, Share, Verdict } from '@/lib/measure/fit-figure';
 import { COMMON_PRACTICE } from '@/lib/measure/rules/rule-set';
 import { formatLength } from '@/lib/units/format-length';
+import { type RuleBehind, ruleBehind } from './rule-behind';
 
 /** One check of the room against a rule: what was read, what the rule allows, and whose rule it is. */
 export type ProofRow = {
@@ -17,6 +18,8 @@ export type ProofRow = {
   inDoubt: boolean;
   /** "DIN 18202:2019-07, table 2", or "common practice, no source". */
   rule: string;
+  /** The same as one line that opens; null where no rule judged. */
+  by: RuleBehind | null;
   action: string;
 };
 
@@ -53,6 +56,7 @@ function cornerRows(corner: CornerFit, rules: FitRules): ProofRow[] {
       verdict: 'within',
       inDoubt: false,
       rule: 'no rule of this shop judges it',
+      by: null,
       action: '',
     },
   ];
@@ -68,6 +72,7 @@ function rowsOf(verdicts: readonly Verdict[], subject: string, rules: FitRules):
     verdict: verdict.verdict,
     inDoubt: verdict.inDoubt,
     rule: ruleWords(verdict),
+    by: ruleBehind(verdict, rules),
     action: verdict.action,
   }));
 }
@@ -115,6 +120,21 @@ function closureRow({ closure }: Fit): ProofRow[] {
       verdict: passes && !closure.suspect ? 'within' : 'over',
       inDoubt: false,
       rule: 'least squares, global test at 1 %',
+      by: {
+        short: `Least squares, χ² test at 1 %: at most ${limit.toFixed(1)}`,
+        details: [
+          {
+            label: 'Limit',
+            words: `χ² of ${limit.toFixed(1)}: a true room passes it 1 time in 100`,
+          },
+          {
+            label: 'Source',
+            words: 'Global test of a least-squares adjustment, Baarda (1968), recalled',
+          },
+          { label: 'What to do', words: closure.words },
+        ],
+        address: '',
+      },
       action: closure.words,
     },
   ];

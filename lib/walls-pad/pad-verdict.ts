@@ -1,9 +1,18 @@
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Reading, Run, Tool, WallBook } from '@/lib/contracts/wall-book';
+import { checkRule } from '@/lib/measure/check-rule';
+import type { CheckKind } from '@/lib/measure/rules/rule-set';
+import { ruleSetsOf } from '@/lib/measure/rules/rule-sets';
 import { standingReadings } from '@/lib/measure/standing-readings';
+import { type RuleBehind, ruleBehind } from '@/lib/sheet/rule-behind';
 
 /** What the pad says of a value at once. note: nothing to judge it by yet. */
-export type PadVerdict = { kind: 'within' | 'close' | 'over' | 'note'; words: string };
+export type PadVerdict = {
+  kind: 'within' | 'close' | 'over' | 'note';
+  words: string;
+  /** The rule that judged it; absent where nothing but the readings themselves is compared. */
+  by?: RuleBehind;
+};
 
 /** What a value is judged by. */
 export type VerdictInput = { book: WallBook; runs: Run[]; rules: FitRules };
@@ -15,18 +24,22 @@ export type JudgeInput<R extends Reading> = VerdictInput & {
   others: Reading[];
 };
 
-/** `close` from this share of the limit on (MEASURE "Rules" in DEVELOPERS.md). */
-const CLOSE_FROM = 0.8;
-
 /**
- * A size against a limit: over past it, close from 80 % of it or where its U reaches past it.
+ * A size judged by the rule set that the shop has picked, else by the shop's own, as the fit judges it.
  *
- * Example: 5 mm ± 0.5 against 6 mm is close; 4 ± 0.5 is within; 6.1 ± 0.5 is over.
- * Source: MEASURE "Rules"; common practice.
+ * Example: 7 mm ± 0.5 out of plumb over 2400 by NHBC 2020: close to 8 mm, "NHBC Standards 2020, 9.1.3 …".
+ * Source: the rule's own; see `checkRule`.
  */
-export function judged(sizeMm: number, expandedMm: number, limitMm: number): PadVerdict['kind'] {
-  if (sizeMm > limitMm) return 'over';
-  return sizeMm >= CLOSE_FROM * limitMm || sizeMm + expandedMm > limitMm ? 'close' : 'within';
+export function judgedBy(
+  rules: FitRules,
+  check: CheckKind,
+  { value, U }: { value: number; U: number },
+  spanMm: number,
+): { kind: PadVerdict['kind']; by?: RuleBehind; serious: boolean } {
+  const judged = checkRule(ruleSetsOf(rules), check, { value, U, from: [] }, spanMm).value;
+  if (!judged) return { kind: 'note', serious: false };
+  const { verdict, serious } = judged;
+  return { kind: verdict, by: ruleBehind(judged, rules), serious };
 }
 
 const ranks: PadVerdict['kind'][] = ['note', 'within', 'close', 'over'];
@@ -39,7 +52,7 @@ export function worstOf(verdicts: PadVerdict[]): PadVerdict | null {
     ranks.indexOf(other.kind) > ranks.indexOf(one.kind) ? other : one,
   );
   const words = [worst, ...verdicts.filter((each) => each !== worst)].map((each) => each.words);
-  return { kind: worst.kind, words: words.join(' ') };
+  return { kind: worst.kind, words: words.join(' '), ...(worst.by ? { by: worst.by } : {}) };
 }
 
 /** What stands in the book besides this reading and the one it corrects. */

@@ -56,6 +56,19 @@ export function roomPlan(book: WallBook): RoomPlan {
   return plan;
 }
 
+/** Along a wall from its left corner and out of it into the room, as a place of the plan. */
+export function placeBy(
+  { from, to }: PlanWall,
+  { xMm, yMm }: { xMm: number; yMm: number },
+): PlanPoint {
+  const length = Math.hypot(to.xMm - from.xMm, to.yMm - from.yMm) || 1;
+  const [alongX, alongY] = [(to.xMm - from.xMm) / length, (to.yMm - from.yMm) / length];
+  return {
+    xMm: from.xMm + alongX * xMm - alongY * yMm,
+    yMm: from.yMm + alongY * xMm + alongX * yMm,
+  };
+}
+
 function chainPoints(chain: Room['chains'][number], read: AsRead, headingDeg: number): PlanPoint[] {
   const points = walk(
     chain.walls.map((wall) => ({

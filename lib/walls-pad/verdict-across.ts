@@ -1,5 +1,6 @@
 import type { ReadingOf } from '@/lib/contracts/wall-book';
 import { lengthOwnPart, lengthUncertainty } from '@/lib/measure/uncertainty';
+import type { RuleBehind } from '@/lib/sheet/rule-behind';
 import { expectedDiagonal } from './expected-diagonal';
 import type { JudgeInput, PadVerdict } from './pad-verdict';
 import { sayDifference, sayLength, sayPlusMinus } from './say-length';
@@ -23,14 +24,26 @@ export function verdictOfDiagonal(input: JudgeInput<ReadingOf<'diagonal'>>): Pad
   const doubt = 2 * Math.hypot(expected.u, lengthUncertainty(tool, reading.valueMm, 2));
   const said = `${sayLength(expected.value, rules)} ${sayPlusMinus(2 * expected.u, rules)}`;
   if (Math.abs(difference) <= doubt) {
-    return { kind: 'within', words: `Agrees: walls and corners give ${said}.` };
+    return { kind: 'within', by: closureRule, words: `Agrees: walls and corners give ${said}.` };
   }
   const off = `${sayDifference(difference, rules)} ${difference > 0 ? 'more' : 'less'}`;
   return {
     kind: 'over',
+    by: closureRule,
     words: `${off} than walls and corners give, ${said}. One of them is misread: take it again.`,
   };
 }
+
+/** No limit of anybody's: what the readings themselves are sure to. */
+const closureRule: RuleBehind = {
+  short: 'JCGM 100 (GUM), 5.1.2 and 6.2: within both U together',
+  details: [
+    { label: 'Limit', words: 'what walls, corners and diagonal are sure to together, k = 2' },
+    { label: 'Source', words: 'JCGM 100:2008, 5.1.2 (combined uncertainty) and 6.2 (k = 2)' },
+    { label: 'What to do', words: 'Take the diagonal again, then the walls and corners between.' },
+  ],
+  address: 'https://www.bipm.org/en/committees/jc/jcgm/publications',
+};
 
 /** A width across the room beside the nearest other one: whether the two sides run parallel. */
 export function verdictOfWidth(input: JudgeInput<ReadingOf<'width'>>): PadVerdict {

@@ -5,7 +5,7 @@ import type { Figure } from '@/lib/measure/figure';
 import { walkRoom } from '@/lib/measure/room-walk';
 import { angleUncertainty, lengthUncertainty } from '@/lib/measure/uncertainty';
 import type { Outcome } from '@/lib/problem';
-import { type JudgeInput, judged, type PadVerdict } from './pad-verdict';
+import { type JudgeInput, judgedBy, type PadVerdict } from './pad-verdict';
 import { sayDifference, sayLength, sayPlusMinus } from './say-length';
 
 const DEGREES = 180 / Math.PI;
@@ -31,10 +31,10 @@ export function angleOfReading({ id, by }: ReadingOf<'corner'>, tool: Tool): Out
 /**
  * A corner against the angle it was drawn with, as what it takes over the depth of the cabinet there.
  *
- * Edge: smaller than its U it is "true within the reading". The shop's flag holds over its own depth and is
- * carried to the cabinet's in proportion.
+ * Edge: smaller than its U it is "true within the reading". Judged over the depth of the cabinet by the rule
+ * set that the shop has picked.
  * Example: 89.4° ± 0.2° over 24": closed, 1/4" in the way at the front.
- * Problems of `cornerAngle` come as `over` with their words. Source: the shop's corner flag.
+ * Problems of `cornerAngle` come as `over` with their words. Source: the rule's own.
  */
 export function verdictOfCorner(input: JudgeInput<ReadingOf<'corner'>>): PadVerdict {
   const { reading, tool, book, runs, rules } = input;
@@ -46,18 +46,17 @@ export function verdictOfCorner(input: JudgeInput<ReadingOf<'corner'>>): PadVerd
   const { deviation, lies } = cornerDeviation(angle, nominal);
   const depthMm =
     depthAt(runs, [reading.cornerWallId, placed?.before?.id]) ?? rules.cornerFlagOverMm;
-  const limitMm = (rules.cornerFlagMm * depthMm) / rules.cornerFlagOverMm;
   const outMm = depthMm * Math.tan(deviation.value / DEGREES);
   const expandedMm = (depthMm * deviation.U) / DEGREES / Math.cos(deviation.value / DEGREES) ** 2;
-  const kind = judged(Math.abs(outMm), expandedMm, limitMm);
+  const { kind, by } = judgedBy(rules, 'corner-square', { value: outMm, U: expandedMm }, depthMm);
   const over = `over ${sayLength(depthMm, rules)}`;
   if (lies === 'true-within-the-reading') {
     const sure = `${sayPlusMinus(expandedMm, rules)} ${over}`;
-    return { kind, words: `True within the reading: ${said}, ${sure}.` };
+    return { kind, by, words: `True within the reading: ${said}, ${sure}.` };
   }
   const size = sayDifference(outMm, rules);
   const effect = lies === 'closed' ? `Closed: takes ${size}` : `Open: gives ${size}`;
-  return { kind, words: `${effect} ${sayPlusMinus(expandedMm, rules)} ${over}. ${said}.` };
+  return { kind, by, words: `${effect} ${sayPlusMinus(expandedMm, rules)} ${over}. ${said}.` };
 }
 
 /** The deepest cabinet on the walls of the corner, to its door fronts. */

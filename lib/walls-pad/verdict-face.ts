@@ -1,9 +1,14 @@
+import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { ReadingOf, Tool } from '@/lib/contracts/wall-book';
+import { ruleFor } from '@/lib/measure/check-rule';
+import type { Figure } from '@/lib/measure/figure';
 import { plumbOf } from '@/lib/measure/plumb';
 import type { ProfilePoint } from '@/lib/measure/profile';
+import { ruleSetsOf } from '@/lib/measure/rules/rule-sets';
+import { straightedgeGap } from '@/lib/measure/straightedge-gap';
 import { straightness } from '@/lib/measure/straightness';
 import { lengthOwnPart, slopeUncertainty } from '@/lib/measure/uncertainty';
-import { type JudgeInput, judged, type PadVerdict, worstOf } from './pad-verdict';
+import { type JudgeInput, judgedBy, type PadVerdict, worstOf } from './pad-verdict';
 import { sayDifference, sayLength, sayPlusMinus } from './say-length';
 
 type Face = ReadingOf<'face'>;
@@ -14,7 +19,7 @@ const SAME_PLACE_MM = 1;
  *
  * Edge: a straightedge says nothing of plumb; one gap alone says nothing.
  * Example: gaps 3, 0, 3 at one height: a bulge of 1/8".
- * Source: plumb and bow flags of the shop's rules.
+ * Source: the rule set that the shop has picked, else its own.
  */
 export function verdictOfFace(input: JudgeInput<Face>): PadVerdict {
   const { reading, others } = input;
@@ -39,14 +44,24 @@ export function verdictOfFace(input: JudgeInput<Face>): PadVerdict {
 
 function rowVerdict({ reading, tool, rules }: JudgeInput<Face>, faces: Face[]): PadVerdict | null {
   const row = faces.filter(({ zMm }) => Math.abs(zMm - reading.zMm) <= SAME_PLACE_MM);
-  const { value } = straightness(row.map((face) => pointOf(face, face.xMm, tool)));
+  const points = row.map((face) => pointOf(face, face.xMm, tool));
+  const { value } = straightness(points);
   if (!value) return null;
   const { minimumZone, shape } = value;
-  const kind = judged(minimumZone.value, minimumZone.U, rules.plumbFlagMm);
-  if (shape === 'straight') return { kind, words: 'Straight within the reading.' };
+  const { kind, by } = judgedRow(points, minimumZone, rules);
+  if (shape === 'straight') return { kind, by, words: 'Straight within the reading.' };
   const seen = { hollow: 'Hollow by', bulge: 'Bulges', wavy: 'Wavy by' }[shape];
   const size = `${sayDifference(minimumZone.value, rules)} ${sayPlusMinus(minimumZone.U, rules)}`;
-  return { kind, words: `${seen} ${size} along this row.` };
+  return { kind, by, words: `${seen} ${size} along this row.` };
+}
+
+/** By the gap under the straightedge that the rule lays on the wall, or by the row as a whole. */
+function judgedRow(points: ProfilePoint[], wholeRow: Figure, rules: FitRules) {
+  const edgeMm = ruleFor(ruleSetsOf(rules), 'wall-straightness')?.rule.overMm ?? null;
+  const under = edgeMm === null ? null : straightedgeGap(points, edgeMm).value;
+  const places = points.map(({ atMm }) => atMm);
+  const spanMm = Math.max(...places) - Math.min(...places);
+  return judgedBy(rules, 'wall-straightness', under?.gap ?? wholeRow, spanMm);
 }
 
 function columnVerdict(
@@ -63,13 +78,12 @@ function columnVerdict(
   const { value } = plumbOf({ points, uReference, overMm });
   if (!value) return null;
   const { over, leans } = value;
-  const kind = judged(Math.abs(over.value), over.U, rules.plumbFlagMm);
+  const { kind, by, serious } = judgedBy(rules, 'wall-plumb', over, overMm);
   const span = `over ${sayLength(overMm, rules)}`;
-  if (leans === 'plumb') return { kind, words: `Plumb within the reading ${span}.` };
-  const isSerious = Math.abs(over.value) > rules.plumbSeriousMm;
+  if (leans === 'plumb') return { kind, by, words: `Plumb within the reading ${span}.` };
   const size = `${sayDifference(over.value, rules)} ${sayPlusMinus(over.U, rules)}`;
   const way = leans === 'in' ? 'Leans into the room' : 'Leans away';
-  return { kind, words: `${way} ${size} ${span}${isSerious ? ': serious' : ''}.` };
+  return { kind, by, words: `${way} ${size} ${span}${serious ? ': serious' : ''}.` };
 }
 
 /** A face falls back where its gap is large. */

@@ -1,7 +1,9 @@
+import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { ReadingOf } from '@/lib/contracts/wall-book';
 import { walkRoom } from '@/lib/measure/room-walk';
 import { lengthOwnPart, lengthUncertainty } from '@/lib/measure/uncertainty';
-import { type JudgeInput, judged, type PadVerdict } from './pad-verdict';
+import type { RuleBehind } from '@/lib/sheet/rule-behind';
+import { type JudgeInput, judgedBy, type PadVerdict } from './pad-verdict';
 import { sayDifference, sayLength, sayPlusMinus } from './say-length';
 
 /** Further from the sketch than both of these is worth a word: rough lengths are rough. */
@@ -15,7 +17,7 @@ const SAME_PLACE_MM = 1;
  *
  * Edge: a difference smaller than its U is "the same within the reading".
  * Example: 2414.6 at the counter, 2411.4 at the floor: 1/8" longer, within a 1/4" rule.
- * Source: agreement of repeats, plumb flag: the shop's rules.
+ * Source: agreement of repeats, the shop's; plumb, the rule set that the shop has picked.
  */
 export function verdictOfLength(input: JudgeInput<ReadingOf<'length'>>): PadVerdict {
   const { reading, others } = input;
@@ -38,13 +40,35 @@ function besideRepeats(
   const mean = repeats.reduce((sum, { valueMm }) => sum + valueMm, 0) / repeats.length;
   const apart = Math.abs(reading.valueMm - mean);
   const allowed = Math.max(rules.repeatAgreementMm, differenceU(tool));
+  const by = repeatRule(allowed, allowed > rules.repeatAgreementMm, rules);
   const before = `${repeats.length > 1 ? 'the mean before' : 'the reading before'}, ${sayLength(mean, rules)}`;
   if (apart <= allowed) {
-    return { kind: 'within', words: `Agrees with ${before}, to ${sayDifference(apart, rules)}.` };
+    const words = `Agrees with ${before}, to ${sayDifference(apart, rules)}.`;
+    return { kind: 'within', by, words };
   }
   return {
     kind: 'over',
+    by,
     words: `${sayDifference(apart, rules)} from ${before}; the shop allows ${sayLength(allowed, rules)}. Read it once more.`,
+  };
+}
+
+/** The shop's own: nobody publishes how near two readings of one thing must come. */
+function repeatRule(allowedMm: number, isByTool: boolean, rules: FitRules): RuleBehind {
+  const allowed = sayLength(allowedMm, rules);
+  return {
+    short: `The shop’s own, tape tolerance: repeats within ${allowed}`,
+    details: [
+      { label: 'Limit', words: `two readings of one thing agree within ${allowed}` },
+      {
+        label: 'Source',
+        words: isByTool
+          ? 'What this tool can tell apart (k = 2), which is more than the shop asks for.'
+          : 'Tape tolerance, 1/16 in up to 30 ft; set in Shop rules.',
+      },
+      { label: 'What to do', words: 'Read it once more.' },
+    ],
+    address: '',
   };
 }
 
@@ -58,11 +82,14 @@ function besideHeight(
   if (Math.abs(difference) <= expanded) {
     return { kind: 'within', words: `The same as ${there}, within the reading.` };
   }
+  const spanMm = Math.abs(reading.zMm - other.zMm);
+  const { kind, by } = judgedBy(rules, 'wall-plumb', { value: difference, U: expanded }, spanMm);
   const isApartUpward = difference > 0 === reading.zMm > other.zMm;
   const way = isApartUpward ? 'lean apart going up' : 'lean together going up';
   const size = `${sayDifference(difference, rules)} ${difference > 0 ? 'longer' : 'shorter'} than ${there}`;
   return {
-    kind: judged(Math.abs(difference), expanded, rules.plumbFlagMm),
+    kind,
+    by,
     words: `${size} ${sayPlusMinus(expanded, rules)}: the ends ${way}.`,
   };
 }

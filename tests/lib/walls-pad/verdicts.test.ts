@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { Reading } from '@/lib/contracts/wall-book';
-import { judged, worstOf } from '@/lib/walls-pad/pad-verdict';
+import { judgedBy, worstOf } from '@/lib/walls-pad/pad-verdict';
 import { verdictOf } from '@/lib/walls-pad/verdict-of';
 import {
   exampleBook,
@@ -54,7 +54,38 @@ const drop = (number: number, dropMm: number): Reading => ({
   setUpId: id(600),
 });
 
-describe('judged', () => {
+describe('every verdict of the pad', () => {
+  it('names the rule that judged it, whatever was read', () => {
+    const judgedReadings: [Reading, Reading[]][] = [
+      [corner(1_502), []],
+      [gap(3, 2_000, 910, 12), [gap(1, 0, 910, 3), gap(2, 1_000, 910, 0)]],
+      [gap(2, 0, 2_000, 9), [gap(1, 0, 100, 0)]],
+      [drop(2, 1_212), [drop(1, 1_200)]],
+      [{ ...exampleLength(2), valueMm: 2_000, zMm: 910 }, [{ ...exampleLength(1), zMm: 910 }]],
+      [{ ...exampleLength(2), valueMm: 2_000, zMm: 100 }, [{ ...exampleLength(1), zMm: 910 }]],
+    ];
+    for (const ruleSet of ['shop', 'din-18202', 'nhbc-2020', 'us-residential', 'awi-0620-custom']) {
+      for (const [reading, before] of judgedReadings) {
+        const verdict = say(reading, before, { ...metricRules, ruleSet });
+        expect(verdict?.kind).not.toBe('note');
+        expect(verdict?.by?.short).toMatch(/: (at most|repeats within) .*\d/);
+        expect(verdict?.by?.details.map(({ label }) => label)).toEqual(
+          expect.arrayContaining(['Limit', 'Source', 'What to do']),
+        );
+      }
+    }
+  });
+
+  it('judges a wall by the straightedge that its rule lays on it, as the fit does', () => {
+    const row = [gap(1, 0, 910, 4), gap(2, 1_000, 910, 0), gap(3, 2_000, 910, 4)];
+    const long = gap(4, 6_000, 910, 4);
+    const words = (ruleSet: string) => say(long, row, { ...metricRules, ruleSet })?.by?.short;
+    expect(words('nhbc-2020')).toContain('at most 3 mm over 2000 mm');
+    expect(words('din-18202')).toContain('table 3, row 6');
+  });
+});
+
+describe('judgedBy', () => {
   it.each([
     [4, 0.5, 'within'],
     [5, 0.5, 'close'],
@@ -62,7 +93,25 @@ describe('judged', () => {
     [6, 0, 'close'],
     [6.1, 0.5, 'over'],
   ])('says of %f ± %f against 6: %s', (size, expanded, kind) => {
-    expect(judged(size, expanded, 6)).toBe(kind);
+    const own = { ...metricRules, plumbFlagMm: 6 };
+    expect(judgedBy(own, 'wall-plumb', { value: size, U: expanded }, 2_400).kind).toBe(kind);
+  });
+
+  it('asks the published rule set that the shop has picked, and names it', () => {
+    const nhbc = { ...metricRules, ruleSet: 'nhbc-2020' };
+    const judged = judgedBy(nhbc, 'wall-plumb', { value: 7, U: 0.5 }, 2_400);
+    expect(judged.kind).toBe('close');
+    expect(judged.by?.short).toBe('NHBC Standards 2020, 9.1.3: at most 8 mm over 2400 mm');
+    const din = judgedBy(
+      { ...metricRules, ruleSet: 'din-18202' },
+      'wall-plumb',
+      { value: 9, U: 1 },
+      2_400,
+    );
+    expect(din).toMatchObject({
+      kind: 'over',
+      by: { short: 'DIN 18202, table 2: at most 8 mm over 2400 mm' },
+    });
   });
 
   it('lets the worst of several verdicts rule and says all', () => {
@@ -111,7 +160,7 @@ describe('the verdict on a length', () => {
 
   it('says how the ends lean from the height below', () => {
     const floor = exampleLength(1, { zMm: 100, valueMm: 3_995 });
-    expect(say(exampleLength(2), [floor])).toEqual({
+    expect(say(exampleLength(2), [floor])).toMatchObject({
       kind: 'close',
       words: '5 mm longer than at 100 mm up ± 2 mm: the ends lean apart going up.',
     });
