@@ -114,7 +114,7 @@ export function DiaryCalendar(props: DiaryCalendarProps) {
       droppable={mayBook}
       events={events}
       eventInteractive
-      viewDidMount={reachByKey}
+      dayCellDidMount={reachByKey}
       eventContent={drawVisit}
       eventClick={({ event, jsEvent }: EventClickArg) => {
         jsEvent.preventDefault();

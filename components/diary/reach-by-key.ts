@@ -1,8 +1,7 @@
-/** A week without visits has nothing in it to move to, so its hours themselves take the keys that scroll. */
+/**
+ * A week without visits has nothing in it to move to, so its first day itself takes the keys that scroll
+ * the hours: a cell of the calendar's grid, which may be reached where the grid's scroller may not.
+ */
 export function reachByKey({ el }: { el: HTMLElement }): void {
-  for (const hours of el.querySelectorAll<HTMLElement>('.fc-scroller-liquid-absolute')) {
-    hours.tabIndex = 0;
-    hours.setAttribute('role', 'group');
-    hours.setAttribute('aria-label', 'Hours of the days');
-  }
+  if (el.previousElementSibling?.classList.contains('fc-timegrid-axis')) el.tabIndex = 0;
 }
