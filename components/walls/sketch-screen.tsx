@@ -57,7 +57,7 @@ export function SketchScreen({ view, keptSketch, wallId, habits, onHabits }: Ske
         {...{ draft, habits, onHabits, keptWallIds, view }}
         pickedId={wallId}
         onDraft={change}
-        onChains={(chains, more) => change({ ...withChains(draft, chains, keptWallIds), ...more })}
+        onChains={(chains, more) => change(withChains({ ...draft, ...more }, chains, keptWallIds))}
         onStartOver={
           keptWallIds.size > 0 ? null : () => change({ ...startSketch({ ...room, chains: [] }) })
         }

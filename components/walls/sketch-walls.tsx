@@ -15,7 +15,7 @@ import {
 import { cornerSumWords } from '@/lib/walls-pad/close-sketch';
 import { entryValue } from '@/lib/walls-pad/entry-value';
 import { draftInUnit, type PadDraft } from '@/lib/walls-pad/pad-draft';
-import { emptyEntry, entryOfAngle, entryOfLength } from '@/lib/walls-pad/pad-entry';
+import { emptyEntry, entryOfAngle, entryOfLength, isEmptyEntry } from '@/lib/walls-pad/pad-entry';
 import type { PadField } from '@/lib/walls-pad/pad-fields';
 import { type Chains, GUESSED_MM } from '@/lib/walls-pad/room-shapes';
 import { speechIn } from '@/lib/walls-pad/say-length';
@@ -68,6 +68,16 @@ function SketchWall(props: SketchWallsProps & { wall: Wall; walls: Wall[] }) {
   }));
   const speech = speechIn(props.view.rules, unit);
   const close = () => setSheet(null);
+  const lengthEntry = pad.entries.value ?? emptyEntry(unit);
+  const typedMm = isEmptyEntry(lengthEntry) ? null : entryValue(lengthEntry, 'length').value;
+  /** The walls with what stands typed, so that a wall put in beside it costs nobody a second typing. */
+  const typed =
+    typedMm === null
+      ? { chains: draft.chains, typedWallIds: draft.typedWallIds }
+      : {
+          chains: setLength(draft.chains, wall.id, typedMm),
+          typedWallIds: [...new Set([...draft.typedWallIds, wall.id])],
+        };
 
   if (sheet === 'corner') {
     return (
@@ -92,7 +102,7 @@ function SketchWall(props: SketchWallsProps & { wall: Wall; walls: Wall[] }) {
   }
   if (sheet === 'change') {
     const pick = (chains: Chains, wallId = wall.id) => {
-      onChains(chains);
+      onChains(chains, { typedWallIds: typed.typedWallIds });
       close();
       goTo({ at: 'sketch', wallId });
     };
@@ -105,14 +115,14 @@ function SketchWall(props: SketchWallsProps & { wall: Wall; walls: Wall[] }) {
         onAdd={(cornerDeg) => {
           const id = newId();
           pick(
-            addWallAfter(draft.chains, wall.id, { id, cornerDeg, lengthMm: GUESSED_MM.across }),
+            addWallAfter(typed.chains, wall.id, { id, cornerDeg, lengthMm: GUESSED_MM.across }),
             id,
           );
         }}
-        onBreast={() => pick(insertBreast(draft.chains, wall.id, newId))}
-        onBay={() => pick(insertBay(draft.chains, wall.id, newId))}
+        onBreast={() => pick(insertBreast(typed.chains, wall.id, newId))}
+        onBay={() => pick(insertBay(typed.chains, wall.id, newId))}
         onRemove={() =>
-          pick(removeWall(draft.chains, wall.id), walls.find(({ id }) => id !== wall.id)?.id)
+          pick(removeWall(typed.chains, wall.id), walls.find(({ id }) => id !== wall.id)?.id)
         }
       />
     );
