@@ -53,7 +53,8 @@ export function findBlunder(room: AdjustedRoom): Blunder | null {
   const byResidual = largest > room.alarmW;
   const byChiSquare = !room.chiSquare.passes;
   if (!byResidual && !byChiSquare) return null;
-  const weighed = worthLeavingOut(room).flatMap((i) => weigh(room, i) ?? []);
+  const { candidates, sound } = worthLeavingOut(room);
+  const weighed = candidates.flatMap((i) => weigh(room, i, sound) ?? []);
   const best = Math.max(...weighed.map(({ gain }) => gain));
   const suspects = weighed.filter(({ gain }) => gain >= best - EQUAL_FIT);
   suspects.sort(
@@ -69,20 +70,23 @@ export function findBlunder(room: AdjustedRoom): Blunder | null {
  * Candidates by their tests. A gross slip bends the room until w points elsewhere, so the room is looked at
  * from where it stands without the strongest suspect, until that stays the same.
  */
-function worthLeavingOut(room: AdjustedRoom): number[] {
+function worthLeavingOut(room: AdjustedRoom): { candidates: number[]; sound: RoomState | null } {
   let squares = room.checks.map(({ w }) => w * w);
   let strongest = strongestOf(squares);
+  let sound: RoomState | null = null;
   for (let look = 0; look < MOST_LOOKS; look++) {
-    const without = leaveOut(room, strongest);
+    const without = leaveOut(room, strongest, sound);
     const seen = without && testsFrom(room, without.state);
     if (!seen) break;
     squares = seen;
+    sound = without.state;
     const next = strongestOf(squares);
     if (next === strongest) break;
     strongest = next;
   }
   const enough = WORTH_LEAVING_OUT * (squares[strongest] ?? 0) - EQUAL_FIT;
-  return squares.flatMap((square, i) => (square > 0 && square >= enough ? [i] : []));
+  const candidates = squares.flatMap((square, i) => (square > 0 && square >= enough ? [i] : []));
+  return { candidates, sound };
 }
 
 const strongestOf = (squares: number[]) => squares.indexOf(Math.max(...squares));
@@ -95,9 +99,12 @@ function testsFrom(room: AdjustedRoom, state: RoomState): number[] | null {
 
 type Weighed = BlunderSuspect & { gain: number; evidence: number };
 
-function weigh(room: AdjustedRoom, observation: number): Weighed | null {
+function weigh(room: AdjustedRoom, observation: number, sound: RoomState | null): Weighed | null {
   const check = room.checks[observation];
-  const without = leaveOut(room, observation) ?? asTheResidualSays(room, observation);
+  const without =
+    leaveOut(room, observation, sound) ??
+    leaveOut(room, observation) ??
+    asTheResidualSays(room, observation);
   if (!check || !without) return null;
   const gain = room.chiSquare.value - without.chiSquare;
   const slips = knownSlips(check.observation);

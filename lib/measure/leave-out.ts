@@ -16,17 +16,25 @@ export type LeftOut = {
 };
 
 /**
- * Null when the room cannot be laid out without the reading. Begins from the readings that remain, not
- * from the room as the slip bent it.
+ * Null when the room cannot be laid out without the reading. Begins from a room near by that the slip did
+ * not bend, where one is known (`near`), else from the readings that remain.
  */
-export function leaveOut(room: AdjustedRoom, observation: number): LeftOut | null {
+export function leaveOut(
+  room: AdjustedRoom,
+  observation: number,
+  near: RoomState | null = null,
+): LeftOut | null {
   const { observations, options, state } = room.system;
   const left = observations[observation];
   if (!left) return null;
   const others = observations.filter((_, i) => i !== observation);
-  const start = startingPoints(room.system.room, state.layout, others);
-  const nuisance = new Float64Array(state.layout.unknownCount);
-  const solution = solveRoom({ ...state, ...start, nuisance }, others, options);
+  const start = near
+    ? { x: near.x.slice(), y: near.y.slice(), nuisance: near.nuisance.slice() }
+    : {
+        ...startingPoints(room.system.room, state.layout, others),
+        nuisance: new Float64Array(state.layout.unknownCount),
+      };
+  const solution = solveRoom({ ...state, ...start }, others, options);
   const equation = solution && equationOf(solution.state, left);
   if (!equation) return null;
   const read = observedValue(left);

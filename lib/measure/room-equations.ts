@@ -1,9 +1,8 @@
 /** The observation equations of a room: what each reading should be, and how it moves with the unknowns. */
-import { cornerShift, NEARLY_STRAIGHT_SINE } from './corner-shift';
+import { addShift, cornerShift, NEARLY_STRAIGHT_SINE } from './corner-shift';
 import { FIXED, type LaidOutWall, pointAt } from './room-layout';
 import type { CornerEnd, RoomObservation } from './room-observations';
 import {
-  add,
   addHeading,
   addLength,
   addNuisance,
@@ -122,20 +121,14 @@ function distance(state: RoomState, from: number, to: number, aboveMm: number): 
   const shiftTo = cornerShift(state, to, aboveMm);
   const dx = (state.x[to] ?? 0) + shiftTo.x - (state.x[from] ?? 0) - shiftFrom.x;
   const dy = (state.y[to] ?? 0) + shiftTo.y - (state.y[from] ?? 0) - shiftFrom.y;
-  const length = Math.hypot(dx, dy);
-  const [ux, uy] = length === 0 ? [1, 0] : [dx / length, dy / length];
+  const length = Math.sqrt(dx * dx + dy * dy);
+  const ux = length === 0 ? 1 : dx / length;
+  const uy = length === 0 ? 0 : dy / length;
   const equation: Equation = { columns: [], partials: [], predicted: length };
   addPoint(equation, state, to, ux, uy);
   addPoint(equation, state, from, -ux, -uy);
-  for (const [shift, sign] of [
-    [shiftTo, 1],
-    [shiftFrom, -1],
-  ] as const) {
-    for (const { column, x, y } of shift.by) add(equation, column, sign * (ux * x + uy * y));
-    for (const { wall, x, y } of shift.turning) {
-      addHeading(equation, state, wall, sign * (ux * x + uy * y));
-    }
-  }
+  addShift(equation, state, shiftTo, ux, uy);
+  addShift(equation, state, shiftFrom, -ux, -uy);
   return equation;
 }
 

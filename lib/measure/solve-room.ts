@@ -205,8 +205,11 @@ function factorise(rows: SparseRow[], residuals: Float64Array, count: number) {
       const column = columns[i] ?? 0;
       const weighted = (partials[i] ?? 0) * weight;
       right[column] = (right[column] ?? 0) - weighted * (residuals[r] ?? 0);
+      // The decomposition reads the lower half alone.
       for (let j = 0; j < columns.length; j++) {
-        const place = column * count + (columns[j] ?? 0);
+        const other = columns[j] ?? 0;
+        if (other > column) continue;
+        const place = column * count + other;
         matrix[place] = (matrix[place] ?? 0) + weighted * (partials[j] ?? 0);
       }
     }
@@ -225,10 +228,13 @@ function factorise(rows: SparseRow[], residuals: Float64Array, count: number) {
   if (!lower) return null;
   return {
     change: () => solveCholesky(lower, count, right).map((value, i) => value * (scale[i] ?? 0)),
-    inverse: () =>
-      invertCholesky(lower, count).map((row, i) =>
-        row.map((value, j) => value * (scale[i] ?? 0) * (scale[j] ?? 0)),
-      ),
+    inverse: () => {
+      const inverse = invertCholesky(lower, count);
+      inverse.forEach((row, i) => {
+        for (let j = 0; j < count; j++) row[j] = (row[j] ?? 0) * (scale[i] ?? 0) * (scale[j] ?? 0);
+      });
+      return inverse;
+    },
   };
 }
 

@@ -91,6 +91,7 @@ export const bookingRuleBasis: Record<keyof BookingRules, RuleBasis> = {
   dayEnd: practice('A working day of eight hours.'),
   workdays: practice('Monday to Friday.'),
   closedDays: practice('The shop’s own.'),
+  holidays: practice('The shop’s own: which public holidays it keeps.'),
   windowMinutes: basis('T14 T18', 'medium', 'Two hours; four is the outer bound.'),
   leadWorkdays: basis('T15 T16', 'medium', 'Approved to ready: 6 to 12 weeks, 8 to begin with.'),
   measureMinutesPerRoom: basis('M30', 'weak', '90 minutes for a kitchen.'),

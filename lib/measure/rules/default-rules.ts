@@ -152,6 +152,7 @@ function bookingRules(): BookingRules {
     dayEnd: '16:00',
     workdays: [1, 2, 3, 4, 5],
     closedDays: [],
+    holidays: null,
     windowMinutes: 120,
     leadWorkdays: 40,
     measureMinutesPerRoom: 90,
