@@ -86,6 +86,18 @@ export const bookingRules = z.object({
   /** ISO weekdays worked, 1 Monday … 7 Sunday. */
   workdays: z.array(z.number().int().min(1).max(7)),
   closedDays: z.array(z.iso.date()),
+  /** Public holidays that the shop keeps; null: none. */
+  holidays: z
+    .object({
+      /** ISO 3166-1, two letters. */
+      country: z.string().regex(/^[A-Z]{2}$/, 'Two capital letters.'),
+      /** State, province or land (ISO 3166-2 without the country); empty: the country's own days. */
+      part: z.string().max(10).default(''),
+      /** Those on which it works all the same. */
+      worked: z.array(z.iso.date()).max(200).default([]),
+    })
+    .nullable()
+    .default(null),
   windowMinutes: z.number().int().min(15).max(480),
   leadWorkdays: z.number().int().min(0).max(260),
   measureMinutesPerRoom: z.number().int().min(10).max(480),

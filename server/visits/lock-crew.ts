@@ -3,13 +3,9 @@ import type { Transaction } from '@/db/database';
 import { crewPeople, crews, people } from '@/db/schema';
 import type { Context } from '@/server/base/context';
 import { notFound } from '@/server/base/problem-response';
+import { type CrewPlan, readCrewPlans } from '@/server/shops/crew-plans';
 
-export type Crew = {
-  id: string;
-  name: string;
-  does: 'measure' | 'fit';
-  people: { id: string; name: string }[];
-};
+export type Crew = CrewPlan;
 
 /**
  * The crew and its people, locked in one order until the transaction ends. Two bookings at once then wait
@@ -17,14 +13,13 @@ export type Crew = {
  * database ends such a knot by failing one of them after a second.
  */
 export async function lockCrew(tx: Transaction, ctx: Context, crewId: string): Promise<Crew> {
-  const [crew] = await tx
-    .select({ id: crews.id, name: crews.name, does: crews.does })
+  await tx
+    .select({ id: crews.id })
     .from(crews)
     .where(and(eq(crews.shopId, ctx.shop.id), eq(crews.id, crewId)))
     .for('no key update');
-  if (!crew) throw notFound('crew');
-  const members = await tx
-    .select({ id: people.id, name: people.name })
+  await tx
+    .select({ id: people.id })
     .from(people)
     .innerJoin(crewPeople, eq(crewPeople.personId, people.id))
     .where(
@@ -32,5 +27,7 @@ export async function lockCrew(tx: Transaction, ctx: Context, crewId: string): P
     )
     .orderBy(asc(people.id))
     .for('no key update', { of: people });
-  return { ...crew, people: members };
+  const [crew] = await readCrewPlans(tx, ctx, [crewId]);
+  if (!crew) throw notFound('crew');
+  return crew;
 }

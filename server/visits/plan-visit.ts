@@ -1,10 +1,14 @@
 /** What a booking or a move would be: its pieces, its window, and the gates that stand against it. */
-import { gateProblems, type Piece, splitIntoPieces, type VisitKind } from '@/lib/schedule';
-import { doesKind } from '@/lib/schedule/visit-kind-words';
+import { gateProblems, type Piece, type VisitKind } from '@/lib/schedule';
+import { goesOutFor } from '@/lib/schedule/crew-kinds';
+import { splitOverCalendar } from '@/lib/schedule/pieces';
+import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { isLocalDate, type LocalDate } from '@/lib/time/civil';
 import { fromLocal, localDate } from '@/lib/time/local-moment';
-import type { PersonContext } from '@/server/base/context';
+import type { Context } from '@/server/base/context';
 import { Refusal } from '@/server/base/problem-response';
+import { bookingDays } from '@/server/shops/booking-days';
+import { isAway, whoGoes } from '@/server/shops/crew-plans';
 import { estimateMinutes, factsOf } from './job-facts';
 import type { JobRecord } from './job-records';
 import type { Crew } from './lock-crew';
@@ -30,18 +34,20 @@ export type Plan = {
   warnings: string[];
 };
 
-export function planVisit(ctx: PersonContext, job: JobRecord, crew: Crew, asked: Asked): Plan {
+export function planVisit(ctx: Context, job: JobRecord, crew: Crew, asked: Asked): Plan {
   const { booking } = ctx.shop.rules;
   const { zone } = ctx.shop;
   if (!isLocalDate(asked.date)) throw cannotBe('date', 'That day does not exist.');
   const startsAt = fromLocal(asked.date, asked.time, zone);
-  const crewSize = crew.people.length;
+  const going = whoGoes(crew, asked.date);
+  // Nobody of the crew is in that day: as long as it takes them all, with the warning beside it.
+  const crewSize = going.length || crew.people.length;
   const workMinutes =
     asked.workMinutes ?? estimateMinutes(ctx, job, { kind: asked.kind, crewSize });
-  const { value: pieces, problems } = splitIntoPieces({
+  const { value: pieces, problems } = splitOverCalendar({
     workMinutes,
     startsAt,
-    pattern: booking,
+    calendar: crew.calendar,
     zone,
   });
   const last = pieces?.at(-1);
@@ -57,7 +63,7 @@ export function planVisit(ctx: PersonContext, job: JobRecord, crew: Crew, asked:
     windowEndsAt: new Date(startsAt.getTime() + booking.windowMinutes * 60_000),
     workMinutes,
     openGates: openGates(ctx, job, crew, asked),
-    warnings: problems.map(({ message }) => message),
+    warnings: [...problems.map(({ message }) => message), ...awayWords(crew, asked.date)],
   };
 }
 
@@ -73,12 +79,12 @@ export function mustPassGates(openGates: OpenGate[], overrideReason: string): vo
   });
 }
 
-function openGates(ctx: PersonContext, job: JobRecord, crew: Crew, asked: Asked): OpenGate[] {
+function openGates(ctx: Context, job: JobRecord, crew: Crew, asked: Asked): OpenGate[] {
   const problems = gateProblems(
     {
       kind: asked.kind,
       facts: factsOf(ctx, job),
-      rules: ctx.shop.rules.booking,
+      rules: bookingDays(ctx),
       today: localDate(ctx.now, ctx.shop.zone),
       locale: { language: 'en', region: ctx.shop.region },
     },
@@ -92,10 +98,16 @@ function openGates(ctx: PersonContext, job: JobRecord, crew: Crew, asked: Asked)
 }
 
 function skillGate(crew: Crew, kind: VisitKind): OpenGate[] {
-  const needed = doesKind[kind];
-  if (needed === crew.does) return [];
-  const words = needed === 'fit' ? `${crew.name} does not fit.` : `${crew.name} does not measure.`;
+  if (goesOutFor(crew, kind)) return [];
+  const words = `${crew.name} does not go out for this: ${visitKindWords[kind].toLowerCase()}.`;
   return [{ gate: 'crew-skill', words }];
+}
+
+/** Said, and booked all the same: the scheduler may know better. */
+function awayWords(crew: Crew, date: LocalDate): string[] {
+  return crew.people
+    .filter((person) => isAway(person, date))
+    .map(({ name }) => `${name} is off on that day.`);
 }
 
 function cannotBe(field: string, message: string): Refusal {

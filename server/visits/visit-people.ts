@@ -1,16 +1,16 @@
-import { and, asc, eq, isNull } from 'drizzle-orm';
+import { and, asc, eq } from 'drizzle-orm';
 import type { Database } from '@/db/database';
-import { crewPeople, people, visits } from '@/db/schema';
+import { people, visitPiecePeople, visitPieces } from '@/db/schema';
 import type { Context } from '@/server/base/context';
 
 /** First names of who comes: enough at the door, and no more of theirs than that. */
 export async function whoComes(db: Database, ctx: Context, visitId: string): Promise<string[]> {
   const found = await db
-    .select({ name: people.name })
-    .from(visits)
-    .innerJoin(crewPeople, eq(crewPeople.crewId, visits.crewId))
-    .innerJoin(people, and(eq(people.id, crewPeople.personId), isNull(people.leftAt)))
-    .where(and(eq(visits.shopId, ctx.shop.id), eq(visits.id, visitId)))
+    .selectDistinct({ id: people.id, name: people.name })
+    .from(visitPieces)
+    .innerJoin(visitPiecePeople, eq(visitPiecePeople.pieceId, visitPieces.id))
+    .innerJoin(people, eq(people.id, visitPiecePeople.personId))
+    .where(and(eq(visitPieces.shopId, ctx.shop.id), eq(visitPieces.visitId, visitId)))
     .orderBy(asc(people.name), asc(people.id));
   return found.map(({ name }) => name.split(' ')[0] ?? name);
 }

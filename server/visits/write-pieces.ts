@@ -2,10 +2,16 @@ import { and, eq } from 'drizzle-orm';
 import type { Transaction } from '@/db/database';
 import { visitPiecePeople, visitPieces } from '@/db/schema';
 import type { Piece } from '@/lib/schedule';
+import { localDate } from '@/lib/time/local-moment';
 import type { Context } from '@/server/base/context';
+import { whoGoes } from '@/server/shops/crew-plans';
+import { lapseHolds } from './lapse-holds';
 import type { Crew } from './lock-crew';
 
-/** The busy time of a visit, for the crew and for each of its people; the database refuses overlaps. */
+/**
+ * The busy time of a visit, for the crew and for each of its people; the database refuses overlaps. Holds that
+ * are over stand in nobody's way.
+ */
 export async function writePieces(
   tx: Transaction,
   ctx: Context,
@@ -13,6 +19,7 @@ export async function writePieces(
 ): Promise<void> {
   const shopId = ctx.shop.id;
   const { visitId, crew } = visit;
+  await lapseHolds(tx, ctx);
   await removePieces(tx, ctx, visitId);
   const written = await tx
     .insert(visitPieces)
@@ -22,8 +29,23 @@ export async function writePieces(
       startsAt: visitPieces.startsAt,
       endsAt: visitPieces.endsAt,
     });
-  const busy = written.flatMap((piece) =>
-    crew.people.map(({ id }) => ({ shopId, personId: id, ...piece })),
+  await writePiecePeople(tx, ctx, crew, written);
+}
+
+/** Who goes is settled for each day: a person may go with another crew on the next. */
+export async function writePiecePeople(
+  tx: Transaction,
+  ctx: Context,
+  crew: Crew,
+  pieces: (Piece & { pieceId: string })[],
+): Promise<void> {
+  const { id: shopId, zone } = ctx.shop;
+  const busy = pieces.flatMap((piece) =>
+    whoGoes(crew, localDate(piece.startsAt, zone)).map(({ id }) => ({
+      shopId,
+      personId: id,
+      ...piece,
+    })),
   );
   if (busy.length > 0) await tx.insert(visitPiecePeople).values(busy);
 }
