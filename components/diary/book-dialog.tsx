@@ -12,6 +12,7 @@ import type { ProblemDetails } from '@/lib/problem-details';
 import { doesKind, visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { useBookVisit } from './change-visit-query';
 import { type Placing, PlacingFields } from './placing-fields';
+import { useTakeBack } from './use-take-back';
 
 type BookDialogProps = {
   item: WaitingItem;
@@ -36,6 +37,7 @@ export function BookDialog({ item, crews, start, onClose, onBooked }: BookDialog
   const [idempotencyKey] = useState(() => crypto.randomUUID());
   const [problem, setProblem] = useState<ProblemDetails | null>(null);
   const book = useBookVisit();
+  const takeBack = useTakeBack();
   const openGates =
     item.state === 'now' || (item.from !== null && placing.date >= item.from) ? [] : item.openGates;
 
@@ -46,7 +48,10 @@ export function BookDialog({ item, crews, start, onClose, onBooked }: BookDialog
     const input: BookVisitInput = { idempotencyKey, jobId, kind, ...placing, overrideReason };
     try {
       const visit = await book.mutateAsync(input);
-      showToast({ text: `Booked: ${visit.customerName}, ${visit.dayWords}, ${visit.windowWords}` });
+      showToast({
+        text: `Booked: ${visit.customerName}, ${visit.dayWords}, ${visit.windowWords}`,
+        undo: () => void takeBack(visit),
+      });
       onBooked(placing.date);
     } catch (caught) {
       setProblem(problemOf(caught));

@@ -1,8 +1,8 @@
 'use client';
 
-import { useQueryClient } from '@tanstack/react-query';
 import { useMemo, useState } from 'react';
 import { ErrorState } from '@/components/ui/error-state';
+import type { Opening } from '@/lib/contracts/openings';
 import type { CrewView, VisitView, WaitingItem } from '@/lib/contracts/visits';
 import type { WorkingPattern } from '@/lib/time/workdays';
 import { BookDialog } from './book-dialog';
@@ -13,13 +13,16 @@ import { DiarySheet } from './diary-sheet';
 import { useDiaryView } from './diary-view';
 import { placeOf } from './place';
 import { RefusedMoveDialog } from './refused-move-dialog';
+import { ghostVisit } from './times/ghost-visit';
+import { TimesPanel } from './times/times-panel';
+import { subjectOfItem, subjectOfVisit, type TimesSubject } from './times/times-subject';
 import { useDiaryKeys } from './use-diary-keys';
 import { useDiaryRange } from './use-diary-range';
 import { useMover } from './use-mover';
 import { VisitDialog } from './visit-dialog';
 import { useVisits } from './visits-query';
 import { WaitingList } from './waiting-list';
-import { waitingQuery } from './waiting-query';
+import { useWaiting } from './waiting-query';
 
 export type DiaryScreenProps = {
   zone: string;
@@ -48,9 +51,19 @@ export function DiaryScreen(props: DiaryScreenProps) {
   const [openedId, setOpenedId] = useState<string | null>(null);
   const [booking, setBooking] = useState<Booking | null>(null);
   const opened = data?.find(({ id }) => id === openedId) ?? null;
-  const client = useQueryClient();
+  const [subject, setSubject] = useState<TimesSubject | null>(null);
+  const [looked, setLooked] = useState<Opening | null>(null);
+  const ghost = useMemo(
+    () => (subject && looked ? ghostVisit(subject, looked) : null),
+    [subject, looked],
+  );
+  const waiting = useWaiting();
 
-  const waiting = () => client.getQueryData(waitingQuery.queryKey) ?? [];
+  const itemOf = (of: Pick<TimesSubject, 'jobId' | 'kind'>) =>
+    waiting.all?.find(({ jobId, kind }) => jobId === of.jobId && kind === of.kind);
+  const openTimes = (item: WaitingItem) => {
+    if (mayBook) setSubject(subjectOfItem(item));
+  };
   const openBooking = (item: WaitingItem, at: Partial<Booking> = {}) =>
     setBooking({
       item,
@@ -59,7 +72,7 @@ export function DiaryScreen(props: DiaryScreenProps) {
       ...(at.crewId ? { crewId: at.crewId } : {}),
     });
   const dropWaiting = (key: string, at: Partial<Booking>) => {
-    const item = waiting().find(({ jobId, kind }) => `${jobId}/${kind}` === key);
+    const item = waiting.all?.find(({ jobId, kind }) => `${jobId}/${kind}` === key);
     if (item) openBooking(item, at);
   };
   const original = (visit: VisitView) => data?.find(({ id }) => id === visit.id) ?? visit;
@@ -72,8 +85,8 @@ export function DiaryScreen(props: DiaryScreenProps) {
     visitOf: (id) => data?.find((visit) => visit.id === id),
     nudge: mayBook ? mover.nudge : null,
     openWaiting: (index) => {
-      const item = waiting()[index];
-      if (item && mayBook) openBooking(item);
+      const item = waiting.shown[index];
+      if (item) openTimes(item);
     },
   });
 
@@ -98,7 +111,7 @@ export function DiaryScreen(props: DiaryScreenProps) {
           {...{ zone, today, pattern, shown, range, visits, mayBook, onVisitKey }}
           crews={crews}
           shownCrews={filter.shownCrews}
-          ghost={null}
+          ghost={ghost}
           onOpen={({ id }) => setOpenedId(id)}
           onDay={(date) => {
             range.goTo(date);
@@ -111,11 +124,37 @@ export function DiaryScreen(props: DiaryScreenProps) {
         />
       </section>
       <aside className="flex min-h-0 flex-col border-rule lg:border-l lg:pl-5 print:hidden">
-        <WaitingList
-          mayBook={mayBook}
-          isCalendarShown={shown.view !== 'crews'}
-          onBook={openBooking}
-        />
+        {subject ? (
+          <TimesPanel
+            key={`${subject.jobId}/${subject.kind}/${subject.visit?.id ?? ''}`}
+            subject={subject}
+            crews={crews}
+            workdays={pattern.workdays}
+            onLook={(opening) => {
+              setLooked(opening);
+              if (opening) range.goTo(opening.date);
+            }}
+            onByHand={() => {
+              const item = itemOf(subject);
+              setSubject(null);
+              if (subject.visit) setOpenedId(subject.visit.id);
+              else if (item) openBooking(item, looked ?? {});
+            }}
+            onBooked={(date) => {
+              setSubject(null);
+              range.goTo(date);
+            }}
+            onClose={() => setSubject(null)}
+          />
+        ) : (
+          <WaitingList
+            waiting={waiting}
+            mayBook={mayBook}
+            isCalendarShown={shown.view !== 'crews'}
+            onTimes={openTimes}
+            onByHand={openBooking}
+          />
+        )}
       </aside>
       {booking ? (
         <BookDialog
@@ -135,6 +174,10 @@ export function DiaryScreen(props: DiaryScreenProps) {
           start={placeOf(opened, zone)}
           crews={crews}
           mayBook={mayBook}
+          onAnotherTime={() => {
+            setOpenedId(null);
+            setSubject(subjectOfVisit(opened));
+          }}
           onClose={() => setOpenedId(null)}
         />
       ) : null}

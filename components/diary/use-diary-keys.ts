@@ -32,6 +32,7 @@ export function useDiaryKeys(diary: DiaryKeys) {
     { keys: 'm', words: 'Month', run: () => show({ view: 'month' }) },
     { keys: 'w', words: 'Week', run: () => show({ view: 'week' }) },
     { keys: 'd', words: 'Day', run: () => show({ view: 'day' }) },
+    { keys: 'f', words: 'Find in the waiting list; Enter looks for times', run: focusSearch },
     { keys: 'v', words: 'To the visits: arrows go from one to the next', run: focusFirstVisit },
     ...visitKeyWords.map(({ keys, words }) => ({ keys, words, run: focusFirstVisit })),
     ...[1, 2, 3, 4, 5, 6, 7, 8, 9].map((digit) => ({
@@ -57,6 +58,10 @@ export function useDiaryKeys(diary: DiaryKeys) {
     diary.nudge(visit, (place) => step(visit, place));
     keepFocusOn(visit.id);
   };
+}
+
+function focusSearch() {
+  document.getElementById('waiting-search')?.focus();
 }
 
 function focusFirstVisit() {

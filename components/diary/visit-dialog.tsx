@@ -15,6 +15,7 @@ import type { ProblemDetails } from '@/lib/problem-details';
 import { doesKind, visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { useCallOffVisit, useMoveVisit } from './change-visit-query';
 import { type Placing, PlacingFields } from './placing-fields';
+import { useTakeBack } from './use-take-back';
 import { minutesWords, statusWords } from './visit-words';
 
 type VisitDialogProps = {
@@ -23,11 +24,20 @@ type VisitDialogProps = {
   start: { date: string; time: string };
   crews: readonly CrewView[];
   mayBook: boolean;
+  /** Looks for times that work in place of this one. */
+  onAnotherTime: () => void;
   onClose: () => void;
 };
 
 /** One visit opened: who and where, how it stands, and the two things that can be done with it. */
-export function VisitDialog({ visit, start, crews, mayBook, onClose }: VisitDialogProps) {
+export function VisitDialog({
+  visit,
+  start,
+  crews,
+  mayBook,
+  onAnotherTime,
+  onClose,
+}: VisitDialogProps) {
   const { words, verdict } = statusWords[visit.status];
   const canChange = mayBook && ['held', 'booked', 'confirmed'].includes(visit.status);
   return (
@@ -71,13 +81,23 @@ export function VisitDialog({ visit, start, crews, mayBook, onClose }: VisitDial
           </Link>
         </dd>
       </dl>
+      {canChange ? (
+        <div>
+          <Button onClick={onAnotherTime}>Times that work instead</Button>
+        </div>
+      ) : null}
       {canChange ? <MoveForm {...{ visit, start, crews, onClose }} /> : null}
       {canChange ? <CallOffForm {...{ visit, onClose }} /> : null}
     </Dialog>
   );
 }
 
-function MoveForm({ visit, start, crews, onClose }: Omit<VisitDialogProps, 'mayBook'>) {
+function MoveForm({
+  visit,
+  start,
+  crews,
+  onClose,
+}: Omit<VisitDialogProps, 'mayBook' | 'onAnotherTime'>) {
   const [placing, setPlacing] = useState<Placing>({
     crewId: visit.crewId,
     ...start,
@@ -85,6 +105,7 @@ function MoveForm({ visit, start, crews, onClose }: Omit<VisitDialogProps, 'mayB
   });
   const [problem, setProblem] = useState<ProblemDetails | null>(null);
   const move = useMoveVisit();
+  const takeBack = useTakeBack();
   const able = crews.filter((crew) => crew.does === doesKind[visit.kind]);
 
   async function submit(event: FormEvent) {
@@ -100,6 +121,7 @@ function MoveForm({ visit, start, crews, onClose }: Omit<VisitDialogProps, 'mayB
       });
       showToast({
         text: `Moved to ${moved.dayWords}, ${moved.windowWords}. The customer is told.`,
+        undo: () => void takeBack(moved),
       });
       onClose();
     } catch (caught) {
@@ -112,7 +134,7 @@ function MoveForm({ visit, start, crews, onClose }: Omit<VisitDialogProps, 'mayB
       <PlacingFields crews={able} placing={placing} onChange={setPlacing} problem={problem} />
       <FormError problem={problem} shownFields={['crewId', 'date', 'time', 'workMinutes']} />
       <div>
-        <Button type="submit" busyText={move.isPending ? 'Moving…' : undefined}>
+        <Button look="line" type="submit" busyText={move.isPending ? 'Moving…' : undefined}>
           Move it
         </Button>
       </div>
@@ -124,13 +146,17 @@ function CallOffForm({ visit, onClose }: { visit: VisitView; onClose: () => void
   const [reason, setReason] = useState('');
   const [problem, setProblem] = useState<ProblemDetails | null>(null);
   const callOff = useCallOffVisit();
+  const takeBack = useTakeBack();
 
   async function submit(event: FormEvent) {
     event.preventDefault();
     try {
       const { id, version } = visit;
-      await callOff.mutateAsync({ visitId: id, version, reason });
-      showToast({ text: `Called off: ${visit.customerName}, ${visit.dayWords}` });
+      const off = await callOff.mutateAsync({ visitId: id, version, reason });
+      showToast({
+        text: `Called off: ${visit.customerName}, ${visit.dayWords}`,
+        undo: () => void takeBack(off),
+      });
       onClose();
     } catch (caught) {
       setProblem(problemOf(caught));

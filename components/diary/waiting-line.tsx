@@ -13,13 +13,15 @@ export function WaitingLine({
   item,
   number,
   mayBook,
-  onBook,
+  onTimes,
+  onByHand,
 }: {
   item: WaitingItem;
   /** The digit key that opens it; the first nine have one. */
   number: number | null;
   mayBook: boolean;
-  onBook: () => void;
+  onTimes: () => void;
+  onByHand: () => void;
 }) {
   const title = `${visitKindWords[item.kind]} · ${item.customerName}, ${item.street}`;
   return (
@@ -42,9 +44,24 @@ export function WaitingLine({
           {item.jobTitle} · {minutesWords(item.workMinutes)}
         </span>
         {mayBook ? (
-          <Button look="plain" onClick={onBook} aria-label={`Book: ${title}`}>
-            Book
-          </Button>
+          <span className="flex shrink-0 max-lg:gap-2">
+            <Button
+              look="plain"
+              className="px-1.5 max-lg:min-h-key"
+              onClick={onByHand}
+              aria-label={`Book by hand: ${title}`}
+            >
+              By hand
+            </Button>
+            <Button
+              look="plain"
+              className="px-1.5 max-lg:min-h-key"
+              onClick={onTimes}
+              aria-label={`Times that work: ${title}`}
+            >
+              Times
+            </Button>
+          </span>
         ) : null}
       </div>
     </li>

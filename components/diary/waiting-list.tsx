@@ -4,26 +4,31 @@ import { Draggable } from '@fullcalendar/interaction';
 import { useEffect, useRef } from 'react';
 import { EmptyState } from '@/components/ui/empty-state';
 import { ErrorState } from '@/components/ui/error-state';
+import { controlLook } from '@/components/ui/field-frame';
 import { Skeleton, SkeletonScreen } from '@/components/ui/skeleton';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { WaitingItem } from '@/lib/contracts/visits';
 import { WaitingLine } from './waiting-line';
-import { useWaiting } from './waiting-query';
+import type { Waiting } from './waiting-query';
 
 /** Jobs that need a visit booked, each with from when or why not yet. Dragged into the diary, or opened. */
 export function WaitingList({
+  waiting,
   mayBook,
   isCalendarShown,
-  onBook,
+  onTimes,
+  onByHand,
 }: {
+  waiting: Waiting;
   mayBook: boolean;
   /** The calendar takes what is dragged by its own means; the crews' board has its own. */
   isCalendarShown: boolean;
-  onBook: (item: WaitingItem) => void;
+  onTimes: (item: WaitingItem) => void;
+  onByHand: (item: WaitingItem) => void;
 }) {
-  const { data: items, error, isPending } = useWaiting();
+  const { all, shown, typed, setTyped, error, isPending } = waiting;
   const listRef = useRef<HTMLUListElement>(null);
-  const hasItems = Boolean(items?.length);
+  const hasItems = shown.length > 0;
 
   useEffect(() => {
     if (!listRef.current || !mayBook || !hasItems || !isCalendarShown) return;
@@ -39,8 +44,8 @@ export function WaitingList({
   }, [mayBook, hasItems, isCalendarShown]);
 
   return (
-    <section aria-labelledby="waiting-title" className="flex min-h-0 flex-col">
-      <TitleBlock id="waiting-title" title="Waiting to be booked" meta={items?.length} />
+    <section aria-labelledby="waiting-title" className="flex min-h-0 flex-1 flex-col">
+      <TitleBlock id="waiting-title" title="Waiting to be booked" meta={all?.length} />
       {error ? (
         <ErrorState title="The waiting list could not be fetched">
           The diary is still here. It is tried again by itself.
@@ -53,19 +58,41 @@ export function WaitingList({
           ))}
         </SkeletonScreen>
       ) : null}
-      {items?.length === 0 ? (
+      {all?.length === 0 ? (
         <EmptyState title="Nothing waits">
           Every job has its next visit. A new call begins with <kbd>N</kbd> on Jobs.
         </EmptyState>
       ) : null}
+      {all && all.length > 0 ? (
+        <input
+          type="search"
+          id="waiting-search"
+          aria-label="Find in the waiting list"
+          placeholder="Find in the list  (F)"
+          value={typed}
+          onChange={(event) => setTyped(event.target.value)}
+          onKeyDown={(event) => {
+            const first = shown[0];
+            if (event.key !== 'Enter' || !first || !mayBook) return;
+            event.preventDefault();
+            event.currentTarget.blur();
+            onTimes(first);
+          }}
+          className={`${controlLook} mt-2`}
+        />
+      ) : null}
+      {hasItems || !all?.length ? null : (
+        <p className="py-3 text-graphite">Nobody on the list fits “{typed}”.</p>
+      )}
       <ul ref={listRef} className="min-h-0 overflow-y-auto">
-        {items?.map((item, index) => (
+        {shown.map((item, index) => (
           <WaitingLine
             key={`${item.jobId}-${item.kind}`}
             item={item}
             number={index < 9 ? index + 1 : null}
             mayBook={mayBook}
-            onBook={() => onBook(item)}
+            onTimes={() => onTimes(item)}
+            onByHand={() => onByHand(item)}
           />
         ))}
       </ul>

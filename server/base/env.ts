@@ -16,6 +16,11 @@ const schema = z.object({
   SMTP_URL: z.string().optional(),
   TRAVEL_URL: z.url().optional(),
   GEOCODE_URL: z.url().optional(),
+  TILES_URL: z
+    .string()
+    .refine((text) => ['{z}', '{x}', '{y}'].every((part) => text.includes(part)))
+    .optional(),
+  TILES_ATTRIBUTION: z.string().default(''),
   EMAIL_FROM: z.string().default('Setwell <no-reply@setwell.example>'),
   NODE_ENV: z.enum(['development', 'test', 'production']).default('development'),
   NEXT_PHASE: z.string().optional(),
@@ -35,6 +40,8 @@ export type Env = {
   emailFrom: string;
   travelUrl: string | null;
   geocodeUrl: string | null;
+  /** Of the map: an address with {z}, {x} and {y}, and who is to be named for it. */
+  tiles: { url: string; attribution: string } | null;
   production: boolean;
   building: boolean;
 };
@@ -62,6 +69,7 @@ export function env(): Env {
     smtpUrl: read.SMTP_URL || null,
     emailFrom: read.EMAIL_FROM,
     travelUrl: read.TRAVEL_URL ?? null,
+    tiles: read.TILES_URL ? { url: read.TILES_URL, attribution: read.TILES_ATTRIBUTION } : null,
     geocodeUrl: read.GEOCODE_URL ?? null,
     production: read.NODE_ENV === 'production',
     building: read.NEXT_PHASE === 'phase-production-build',

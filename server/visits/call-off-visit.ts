@@ -7,6 +7,7 @@ import { kickWorker } from '@/server/messages/worker';
 import { changeVisit, lockVisit, mustBeCurrent } from './lock-visit';
 import { readVisit } from './read-visits';
 import { tellCalledOff, toldWords } from './tell-customer';
+import { readStanding } from './visit-standing';
 import { removePieces } from './write-pieces';
 
 /** The crew's time is free again; the visit stays in the story, and its customer is told. */
@@ -19,6 +20,7 @@ export async function callOffVisit(
     const before = await lockVisit(tx, ctx, input.visitId);
     await mustBeCurrent(tx, ctx, before, input.version);
     if (['done', 'missed', 'called-off'].includes(before.status)) throw over();
+    const stood = await readStanding(tx, ctx, before.id);
     const after = await changeVisit(tx, ctx, before, { status: 'called-off', confirmedAt: null });
     await removePieces(tx, ctx, after.id);
     const told = await tellCalledOff(tx, ctx, after, input.reason);
@@ -29,7 +31,7 @@ export async function callOffVisit(
       subjectId: after.id,
       jobId: after.jobId,
       summary: `${visitKindWords[after.kind]} of ${visit.dayWords} called off: ${input.reason}; ${toldWords(told)}`,
-      detail: { told, reason: input.reason },
+      detail: { before: stood, told, reason: input.reason },
     });
     return visit;
   });

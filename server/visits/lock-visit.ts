@@ -1,8 +1,10 @@
 import { and, eq, gt, ne, or, sql } from 'drizzle-orm';
 import type { Transaction } from '@/db/database';
 import { customers, jobs, sites, visits } from '@/db/schema';
+import type { StaleVisit } from '@/lib/contracts/visit-changes';
 import type { Context } from '@/server/base/context';
 import { notFound, Refusal } from '@/server/base/problem-response';
+import { lastChangeWords } from './last-change';
 import { readVisit } from './read-visits';
 
 const fields = {
@@ -73,7 +75,10 @@ export async function mustBeCurrent(
   version: number,
 ): Promise<void> {
   if (visit.version === version) return;
-  const current = await readVisit(tx, ctx, visit.id);
+  const current: StaleVisit = {
+    ...(await readVisit(tx, ctx, visit.id)),
+    lastChange: await lastChangeWords(tx, ctx, visit.id),
+  };
   throw new Refusal({
     status: 409,
     code: 'visit-changed',

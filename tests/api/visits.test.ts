@@ -6,6 +6,7 @@ import { GET as messagesRoute } from '@/app/api/messages/route';
 import { POST as callOffRoute } from '@/app/api/visits/[visitId]/call-off/route';
 import { POST as reportRoute } from '@/app/api/visits/[visitId]/report/route';
 import { PATCH as moveRoute, GET as visitRoute } from '@/app/api/visits/[visitId]/route';
+import { POST as undoRoute } from '@/app/api/visits/[visitId]/undo/route';
 import { POST as bookRoute, GET as visitsRoute } from '@/app/api/visits/route';
 import { GET as waitingRoute } from '@/app/api/waiting/route';
 import { jobs } from '@/db/schema';
@@ -118,6 +119,7 @@ describe('visits by HTTP', () => {
       expect(moved.status, role).toBe(403);
       const off = { params, cookie, body: { version: 1, reason: 'No' } };
       expect((await callRoute(callOffRoute, off)).status, role).toBe(403);
+      expect((await callRoute(undoRoute, off)).status, role).toBe(403);
       expect((await get(waitingRoute, cookie)).status, role).toBe(403);
       expect((await get(messagesRoute, cookie)).status, role).toBe(403);
     }
@@ -140,6 +142,7 @@ describe('visits by HTTP', () => {
     expect(moved.status).toBe(404);
     const off = { params, cookie, body: { version: 1, reason: 'No' } };
     expect((await callRoute(callOffRoute, off)).status).toBe(404);
+    expect((await callRoute(undoRoute, off)).status).toBe(404);
     const tap = { what: 'arrived', at: new Date().toISOString() };
     expect((await callRoute(reportRoute, { params, cookie, body: tap })).status).toBe(404);
     expect((await book(cookie)).status).toBe(404);
@@ -158,7 +161,7 @@ describe('visits by HTTP', () => {
     for (const route of [visitsRoute, waitingRoute, messagesRoute, todayRoute]) {
       expect((await get(route, undefined)).status).toBe(401);
     }
-    for (const route of [bookRoute, callOffRoute, reportRoute, moveRoute]) {
+    for (const route of [bookRoute, callOffRoute, undoRoute, reportRoute, moveRoute]) {
       expect((await callRoute(route, { params, body: {} })).status).toBe(401);
     }
   });

@@ -1,0 +1,143 @@
+'use client';
+
+import { useEffect, useRef, useState } from 'react';
+import { Button } from '@/components/ui/button';
+import { FormError } from '@/components/ui/form-error';
+import { TextareaField } from '@/components/ui/textarea-field';
+import { TitleBlock } from '@/components/ui/title-block';
+import type { Opening } from '@/lib/contracts/openings';
+import type { CrewView } from '@/lib/contracts/visits';
+import { OpeningsList } from './openings-list';
+import { useOpenings } from './openings-query';
+import { subjectTitle, type TimesSubject } from './times-subject';
+import { useBookOpening } from './use-book-opening';
+import { useTimesKeys } from './use-times-keys';
+import { anyTime, askedWishes } from './wishes';
+import { WishesBar } from './wishes-bar';
+
+type TimesPanelProps = {
+  subject: TimesSubject;
+  crews: readonly CrewView[];
+  workdays: readonly number[];
+  /** The opening that is looked at, to be drawn in the diary. */
+  onLook: (opening: Opening | null) => void;
+  onByHand: () => void;
+  onBooked: (date: string) => void;
+  onClose: () => void;
+};
+
+/** Times that work for one visit, best first: chosen by digit, booked by Enter, drawn in the diary meanwhile. */
+export function TimesPanel(props: TimesPanelProps) {
+  const { subject, crews, onLook, onClose } = props;
+  const [wishes, setWishes] = useState(anyTime);
+  const [isOverridden, setIsOverridden] = useState(false);
+  const [reason, setReason] = useState('');
+  const [chosen, setChosen] = useState(0);
+  const panelRef = useRef<HTMLElement>(null);
+  const { data, error, isPending } = useOpenings({
+    jobId: subject.jobId,
+    kind: subject.kind,
+    wishes: askedWishes(wishes),
+    isGateOverridden: isOverridden,
+    limit: 9,
+    ...(subject.visit ? { visitId: subject.visit.id } : {}),
+    ...(wishes.from ? { from: wishes.from } : {}),
+  });
+  const openings = data?.openings ?? [];
+  const opening = openings[Math.min(chosen, openings.length - 1)];
+  const booking = useBookOpening(subject, props.onBooked);
+
+  const openingKey = opening ? `${opening.crewId} ${opening.startsAt} ${opening.endsAt}` : '';
+  useLook(openingKey, opening ?? null, onLook);
+
+  useEffect(() => panelRef.current?.focus(), []);
+
+  const needsReason = isOverridden && reason.trim() === '';
+  const book = (which = opening) => {
+    if (!which || booking.isPending) return;
+    if (needsReason) return panelRef.current?.querySelector('textarea')?.focus();
+    void booking.bookOpening(which, isOverridden ? reason : '');
+  };
+  useTimesKeys({
+    count: openings.length,
+    chosen,
+    choose: setChosen,
+    book: () => book(),
+    byHand: props.onByHand,
+    close: onClose,
+  });
+
+  return (
+    <section
+      ref={panelRef}
+      tabIndex={-1}
+      aria-labelledby="times-title"
+      className="flex min-h-0 flex-col outline-none max-lg:fixed max-lg:inset-0 max-lg:z-30 max-lg:overflow-y-auto max-lg:bg-paper max-lg:p-4"
+    >
+      <TitleBlock
+        id="times-title"
+        title={subject.visit ? 'Another time' : 'Times that work'}
+        meta={
+          <Button look="plain" onClick={onClose} className="-mr-3" keyName="Esc">
+            Close
+          </Button>
+        }
+      />
+      <p className="pt-2 font-bold">{subjectTitle(subject)}</p>
+      <p className="text-note text-graphite">
+        {subject.jobTitle}
+        {data?.gateWords ? ` · ${data.gateWords}` : ''}
+      </p>
+      {subject.says ? <p className="text-note text-ochre">“{subject.says}”</p> : null}
+      <WishesBar
+        wishes={wishes}
+        workdays={props.workdays}
+        onChange={(next) => {
+          setWishes(next);
+          setChosen(0);
+        }}
+      />
+      <OpeningsList
+        {...{ data, error, isPending, crews, chosen }}
+        onChoose={setChosen}
+        onBook={book}
+        onOverride={isOverridden ? null : () => setIsOverridden(true)}
+      />
+      {isOverridden ? (
+        <TextareaField
+          label="Why it is booked all the same"
+          value={reason}
+          onChange={(event) => setReason(event.target.value)}
+          rows={2}
+          required
+        />
+      ) : null}
+      <FormError problem={booking.problem} shownFields={[]} />
+      <footer className="flex flex-wrap gap-2 border-t border-rule pt-2 max-lg:sticky max-lg:bottom-0 max-lg:bg-paper">
+        <Button
+          onClick={() => book()}
+          disabled={!opening}
+          keyName="Enter"
+          busyText={booking.isPending ? 'Booking…' : undefined}
+        >
+          {subject.visit ? 'Move it there' : 'Book it'}
+        </Button>
+        <Button look="line" onClick={props.onByHand} keyName="B">
+          By hand
+        </Button>
+      </footer>
+    </section>
+  );
+}
+
+/** Tells what is looked at, once for each other opening, and nothing any more when the panel goes. */
+function useLook(key: string, opening: Opening | null, onLook: (opening: Opening | null) => void) {
+  const latest = useRef({ opening, onLook });
+  useEffect(() => {
+    latest.current = { opening, onLook };
+  });
+  useEffect(() => {
+    latest.current.onLook(key ? latest.current.opening : null);
+  }, [key]);
+  useEffect(() => () => latest.current.onLook(null), []);
+}

@@ -1,0 +1,105 @@
+import { controlLook } from '@/components/ui/field-frame';
+import { weekdayWords } from '@/lib/time/text-locale';
+import type { Wishes } from './wishes';
+
+/** What the customer wishes, one press each while they are on the phone. */
+export function WishesBar({
+  wishes,
+  workdays,
+  onChange,
+}: {
+  wishes: Wishes;
+  /** ISO weekdays that the shop works. */
+  workdays: readonly number[];
+  onChange: (wishes: Wishes) => void;
+}) {
+  const change = (part: Partial<Wishes>) => onChange({ ...wishes, ...part });
+  const toggleHalf = (half: NonNullable<Wishes['half']>) =>
+    change({ half: wishes.half === half ? null : half });
+  const toggleDay = (day: number) =>
+    change({
+      weekdays: wishes.weekdays.includes(day)
+        ? wishes.weekdays.filter((other) => other !== day)
+        : [...wishes.weekdays, day].sort(),
+    });
+  return (
+    <fieldset className="flex flex-col gap-2 border-b border-rule py-2">
+      <legend className="sr-only">What the customer wishes</legend>
+      <div className="flex flex-wrap gap-1">
+        {workdays.map((day) => (
+          <Toggle
+            key={day}
+            isOn={wishes.weekdays.includes(day)}
+            onPress={() => toggleDay(day)}
+            words={weekdayWords.en[day - 1] ?? ''}
+          >
+            {weekdayWords.en[day - 1]?.slice(0, 3)}
+          </Toggle>
+        ))}
+      </div>
+      <div className="flex flex-wrap gap-1">
+        <Toggle isOn={wishes.half === 'morning'} onPress={() => toggleHalf('morning')}>
+          mornings
+        </Toggle>
+        <Toggle isOn={wishes.half === 'afternoon'} onPress={() => toggleHalf('afternoon')}>
+          afternoons
+        </Toggle>
+        <Toggle
+          isOn={wishes.isSchoolRun}
+          onPress={() => change({ isSchoolRun: !wishes.isSchoolRun })}
+        >
+          not at the school run
+        </Toggle>
+      </div>
+      <div className="grid grid-cols-2 gap-2 text-note">
+        <label className="flex flex-col">
+          From day
+          <input
+            type="date"
+            className={controlLook}
+            value={wishes.from}
+            onChange={(event) => change({ from: event.target.value })}
+          />
+        </label>
+        <label className="flex flex-col">
+          Not before
+          <input
+            type="time"
+            step={900}
+            className={controlLook}
+            value={wishes.notBefore}
+            onChange={(event) => change({ notBefore: event.target.value })}
+          />
+        </label>
+      </div>
+    </fieldset>
+  );
+}
+
+function Toggle({
+  isOn,
+  words,
+  onPress,
+  children,
+}: {
+  isOn: boolean;
+  words?: string;
+  onPress: () => void;
+  children: React.ReactNode;
+}) {
+  return (
+    <button
+      type="button"
+      aria-pressed={isOn}
+      aria-label={words}
+      onClick={onPress}
+      className={`min-h-8 rounded border px-2 text-note max-lg:min-h-key max-lg:px-3 ${
+        isOn
+          ? 'border-pine bg-pine font-bold text-on-fill'
+          : 'border-rule bg-sheet hover:border-ink'
+      }`}
+    >
+      {children}
+    </button>
+  );
+}
