@@ -29,6 +29,10 @@ export const paths = {
   bench: () => '/bench',
   crews: () => '/crews',
   messages: () => '/messages',
+  /** What was said with one customer, both ways. */
+  thread: (customerId: string) => `/messages/${part(customerId)}`,
+  /** The shop's own words for each occasion. */
+  wordings: () => '/messages/wording',
   snags: () => '/snags',
   numbers: () => '/numbers',
   /** One figure of the last so many days, with the jobs behind it. */
@@ -141,6 +145,12 @@ export const apiPaths = {
   geocode: () => '/api/geocode',
   rules: () => '/api/rules',
   messages: () => '/api/messages',
+  schedulerItem: (itemId: string) => `/api/messages/items/${part(itemId)}`,
+  wordings: () => '/api/messages/wordings',
+  messageSettings: () => '/api/messages/settings',
+  messageTest: () => '/api/messages/test',
+  customerConsent: (customerId: string) => `/api/customers/${part(customerId)}/consent`,
+  customerLanguage: (customerId: string) => `/api/customers/${part(customerId)}/language`,
 
   customerVisit: (token: string) => `/api/v/${part(token)}`,
   /** Where the texting provider posts texts from customers and reports on ours. */

@@ -3,36 +3,20 @@
 import Link from 'next/link';
 import { type Column, DataTable } from '@/components/ui/data-table';
 import { EmptyState } from '@/components/ui/empty-state';
-import { Verdict, type VerdictKind } from '@/components/ui/verdict';
+import { Verdict } from '@/components/ui/verdict';
 import type { MessageView } from '@/lib/contracts/messages';
-import { occasionWords } from '@/lib/messages/occasions';
 import { paths } from '@/lib/paths';
-
-const states: Record<MessageView['state'], { words: string; kind: VerdictKind }> = {
-  waiting: { words: 'waits for its time', kind: 'waiting' },
-  sending: { words: 'being sent', kind: 'waiting' },
-  sent: { words: 'sent', kind: 'confirmed' },
-  delivered: { words: 'delivered', kind: 'confirmed' },
-  refused: { words: 'not delivered: call them', kind: 'problem' },
-  withdrawn: { words: 'withdrawn', kind: 'off' },
-  received: { words: 'from the customer', kind: 'waiting' },
-};
-
-const words: Record<string, string> = { ...occasionWords, reply: 'Reply' };
-const occasionOf = ({ occasion }: MessageView) => words[occasion] ?? occasion;
+import { messageStates, occasionOf } from './message-state';
 
 const columns: Column<MessageView>[] = [
   {
     key: 'customer',
     header: 'Customer',
-    cell: (message) =>
-      message.jobId ? (
-        <Link href={paths.job(message.jobId)} className="font-bold hover:underline">
-          {message.customerName}
-        </Link>
-      ) : (
-        message.customerName
-      ),
+    cell: (message) => (
+      <Link href={paths.thread(message.customerId)} className="font-bold hover:underline">
+        {message.customerName}
+      </Link>
+    ),
     sortValue: (message) => message.customerName,
     text: (message) => message.customerName,
   },
@@ -54,7 +38,7 @@ const columns: Column<MessageView>[] = [
     key: 'state',
     header: 'Stands',
     cell: (message) => {
-      const { words, kind } = states[message.state];
+      const { words, kind } = messageStates[message.state];
       return (
         <>
           <Verdict kind={kind}>{words}</Verdict>
@@ -64,7 +48,7 @@ const columns: Column<MessageView>[] = [
         </>
       );
     },
-    choice: (message) => states[message.state].words,
+    choice: (message) => messageStates[message.state].words,
   },
   {
     key: 'body',

@@ -1,5 +1,7 @@
-import { listMessagesInput } from '@/lib/contracts/messages';
+import { listMessagesInput, writeByHandInput } from '@/lib/contracts/messages';
 import { handle } from '@/server/base/handle';
 import { listMessages } from '@/server/messages/list-messages';
+import { writeByHand } from '@/server/messages/write-by-hand';
 
 export const GET = handle(listMessagesInput, listMessages);
+export const POST = handle(writeByHandInput, writeByHand);
