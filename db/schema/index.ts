@@ -4,6 +4,7 @@ export * from './days';
 export * from './files';
 export * from './jobs';
 export * from './messages';
+export * from './programs';
 export * from './sheets';
 export * from './shop';
 export * from './shops';
