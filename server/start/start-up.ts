@@ -6,7 +6,10 @@ import { log } from '@/server/base/log';
 import { startWorker } from '@/server/messages/worker';
 import { hashPassword } from '@/server/people/sign-in';
 import { getPorts } from '@/server/ports/choose-ports';
-import { composeVisitMessage } from '@/server/visits/compose-message';
+import { signedCopyOf } from '@/server/snags/tell-signed';
+import { composeWithCopy } from '@/server/visits/compose-message';
+import { noticeSilence } from '@/server/visits/notice-silence';
+import { startLapsing } from '@/server/visits/start-lapsing';
 import { makeVisitLink } from '@/server/visits/visit-link';
 
 /** Once a process, before the first request is answered. */
@@ -22,13 +25,14 @@ export async function startUp(): Promise<void> {
       linkVisit: (tx, { shopId, ...visit }) => makeVisitLink(tx, { shop: { id: shopId } }, visit),
     });
   }
-  const stopWorker = startWorker(composeVisitMessage);
+  const stopWorker = startWorker(composeWithCopy(signedCopyOf), [noticeSilence]);
+  const stopLapsing = startLapsing();
   const stopBackUps = startBackUps(open, { dataDirectory, backUpDirectory });
   log('started', { database: open.kind, demo });
 
   for (const signal of ['SIGTERM', 'SIGINT'] as const) {
     process.once(signal, async () => {
-      await Promise.all([stopWorker(), stopBackUps()]);
+      await Promise.all([stopWorker(), stopLapsing(), stopBackUps()]);
       await open.close();
       log('stopped');
       process.exit(0);

@@ -5,7 +5,7 @@ import type { BookedVisit, BookVisitInput } from '@/lib/contracts/visits';
 import { stageWords } from '@/lib/schedule';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { writeAudit } from '@/server/base/audit';
-import { mustBeAllowed, type PersonContext } from '@/server/base/context';
+import { type Context, mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { onlyOnce } from '@/server/base/only-once';
 import { notFound, Refusal } from '@/server/base/problem-response';
 import { moveStage } from '@/server/jobs/move-stage';
@@ -79,7 +79,7 @@ async function write(
 }
 
 /** Two bookings of one job see each other's visits. */
-async function lockJob(tx: Transaction, ctx: PersonContext, jobId: string) {
+export async function lockJob(tx: Transaction, ctx: Context, jobId: string) {
   await tx
     .select({ id: jobs.id })
     .from(jobs)

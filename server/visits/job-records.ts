@@ -1,4 +1,4 @@
-import { and, asc, count, eq, inArray, notInArray, type SQL } from 'drizzle-orm';
+import { and, asc, count, eq, gt, inArray, ne, notInArray, or, type SQL } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { customers, jobs, rooms, runs, sites, units, visits } from '@/db/schema';
 import type { Context } from '@/server/base/context';
@@ -30,6 +30,8 @@ export async function readJobRecords(db: Database, ctx: Context, which: SQL) {
       street: sites.street,
       town: sites.town,
       zone: sites.zone,
+      latitude: sites.latitude,
+      longitude: sites.longitude,
       wayIn: sites.wayIn,
       floorsUp: sites.floorsUp,
       hasLift: sites.hasLift,
@@ -64,7 +66,13 @@ async function readVisitRecords(db: Database, ctx: Context, jobIds: string[]) {
       customerSays: visits.customerSays,
     })
     .from(visits)
-    .where(and(eq(visits.shopId, ctx.shop.id), inArray(visits.jobId, jobIds)))
+    .where(
+      and(
+        eq(visits.shopId, ctx.shop.id),
+        inArray(visits.jobId, jobIds),
+        or(ne(visits.status, 'held'), gt(visits.holdEndsAt, ctx.now)),
+      ),
+    )
     .orderBy(asc(visits.endsAt), asc(visits.id));
   return groupByJob(rows);
 }

@@ -3,7 +3,7 @@ import { crews, customers, jobs, people, visitPiecePeople, visitPieces, visits }
 import type { Piece, VisitKind } from '@/lib/schedule';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { formatDayShort, formatWindowShort } from '@/lib/time/format-instant';
-import type { PersonContext } from '@/server/base/context';
+import type { Context } from '@/server/base/context';
 import { translateRefusals } from '@/server/base/database-refusal';
 import type { RefusalDetail } from '@/server/base/problem-response';
 
@@ -12,7 +12,7 @@ export type Attempt = { visitId: string; crewId: string; personIds: string[]; pi
 
 /** Runs a booking; when the database refuses an overlap, says who is taken, when, and by which visit. */
 export function translateTakenTime<T>(
-  ctx: PersonContext,
+  ctx: Context,
   attempt: () => Attempt | null,
   write: () => Promise<T>,
 ): Promise<T> {
@@ -40,7 +40,7 @@ type Taken = {
   endsAt: Date;
 };
 
-async function findTakenCrew(ctx: PersonContext, attempt: Attempt): Promise<Taken | undefined> {
+async function findTakenCrew(ctx: Context, attempt: Attempt): Promise<Taken | undefined> {
   const [found] = await ctx.db
     .select({ who: crews.name, ...takenFields(visitPieces) })
     .from(visitPieces)
@@ -61,7 +61,7 @@ async function findTakenCrew(ctx: PersonContext, attempt: Attempt): Promise<Take
   return found;
 }
 
-async function findTakenPerson(ctx: PersonContext, attempt: Attempt): Promise<Taken | undefined> {
+async function findTakenPerson(ctx: Context, attempt: Attempt): Promise<Taken | undefined> {
   const [found] = await ctx.db
     .select({ who: people.name, ...takenFields(visitPiecePeople) })
     .from(visitPiecePeople)
@@ -106,7 +106,7 @@ function overlapping(busy: Busy, pieces: Piece[]) {
   );
 }
 
-function takenRefusal(ctx: PersonContext, taken: Taken | null | undefined): RefusalDetail {
+function takenRefusal(ctx: Context, taken: Taken | null | undefined): RefusalDetail {
   const refusal = { status: 409, code: 'crew-already-booked' } as const;
   if (!taken) {
     const message =
@@ -129,7 +129,7 @@ function takenRefusal(ctx: PersonContext, taken: Taken | null | undefined): Refu
   };
 }
 
-function timeWords(ctx: PersonContext, from: Date, until: Date): string {
+function timeWords(ctx: Context, from: Date, until: Date): string {
   const { zone, region } = ctx.shop;
   const locale = { language: 'en', region } as const;
   const times = formatWindowShort({ from, until }, zone, locale);
