@@ -3,8 +3,8 @@
 import { useMemo } from 'react';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { WallBookView } from '@/lib/contracts/rooms';
-import { fitRoom } from '@/lib/measure/fit-room';
 import type { PlannedReading } from '@/lib/measure/missing-reading';
+import { proveRoom } from '@/lib/measure/prove-room';
 import type { Queued } from '@/lib/sync/queued';
 import { isOpen } from '@/lib/walls-pad/next-ask';
 import { placeHref } from './book-place';
@@ -20,7 +20,7 @@ type LeaveScreenProps = { view: WallBookView; plan: PlannedReading[]; queue: Que
 /** Before the van leaves: what is missing and why, what disagrees, and handing the book in. */
 export function LeaveScreen({ view, plan, queue }: LeaveScreenProps) {
   const { wallBook, runs, rules } = view;
-  const fit = useMemo(() => fitRoom(wallBook, runs, rules), [wallBook, runs, rules]);
+  const fit = useMemo(() => proveRoom(wallBook, runs, rules), [wallBook, runs, rules]);
   const must = plan.filter((each) => isOpen(each) && each.need === 'must');
   const should = plan.filter((each) => isOpen(each) && each.need === 'should');
   const skipped = plan.filter(({ takenBy, skipped }) => takenBy.length === 0 && skipped);

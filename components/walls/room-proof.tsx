@@ -4,15 +4,15 @@ import { Verdict } from '@/components/ui/verdict';
 import type { WallBookView } from '@/lib/contracts/rooms';
 import { drawClosure } from '@/lib/drawing/closure-picture';
 import { closureSays, suspectAdvice } from '@/lib/drawing/closure-words';
-import type { Fit } from '@/lib/measure/fit';
 import type { PlannedReading } from '@/lib/measure/missing-reading';
+import type { ProvedRoom } from '@/lib/measure/prove-room';
 import { readingWords } from '@/lib/walls-pad/reading-words';
 import { type BookPlace, placeHref } from './book-place';
 import { FractionWords } from './fraction-words';
 import { LineLink } from './line-link';
 import { questionOfDiagonal } from './pad-question';
 
-type RoomProofProps = { fit: Fit; view: WallBookView; plan: PlannedReading[] };
+type RoomProofProps = { fit: ProvedRoom; view: WallBookView; plan: PlannedReading[] };
 
 /** Whether the readings hold together; if not, which one is likely wrong, and what would settle it. */
 export function RoomProof({ fit, view, plan }: RoomProofProps) {

@@ -1,11 +1,11 @@
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { WallBook } from '@/lib/contracts/wall-book';
-import type { Fit } from '@/lib/measure/fit';
+import type { ProvedRoom } from '@/lib/measure/prove-room';
 import { type PlanWall, roomPlan } from './room-plan';
 import type { Point } from './shape';
 import { turned } from './vector';
 
-export type ClosureSource = { wallBook: WallBook; fit: Fit; rules: FitRules };
+export type ClosureSource = { wallBook: WallBook; fit: ProvedRoom; rules: FitRules };
 
 /** A corner that others are seen from, with the ellipse in which it lies 95 times of 100. */
 export type SureCorner = {

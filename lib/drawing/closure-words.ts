@@ -1,6 +1,6 @@
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Room } from '@/lib/contracts/wall-book';
-import type { Fit } from '@/lib/measure/fit';
+import type { ProvedRoom } from '@/lib/measure/prove-room';
 import { figureText } from '@/lib/sheet/figure-text';
 import { cornerName } from '@/lib/sheet/room-names';
 import { formatLength } from '@/lib/units/format-length';
@@ -19,7 +19,7 @@ type Steps = Pick<FitRules, 'unit' | 'stepMm'>;
  * Example: "Wall C, length at the counter: 100 mm too long? Measure it again, or take the diagonal from corner
  * D–A to corner C–D to settle it."
  */
-export function suspectAdvice(fit: Fit, room: Room, rules: Steps): string | null {
+export function suspectAdvice(fit: ProvedRoom, room: Room, rules: Steps): string | null {
   const readings = fit.closure.suspect?.readings ?? [];
   const [first] = readings;
   if (!first) return null;
@@ -43,11 +43,11 @@ export function suspectAdvice(fit: Fit, room: Room, rules: Steps): string | null
  * Edge: an open chain has no walk to close, and says so. U is rounded up.
  * Example: "Walked round as read, the room fails to meet its start by 9/16″ ± 3/8″ (1 in 919), drawn ×20."
  */
-export function closureSays(fit: Fit, drawing: ClosureDrawing, rules: Steps): string[] {
+export function closureSays(fit: ProvedRoom, drawing: ClosureDrawing, rules: Steps): string[] {
   return [walkWords(fit, drawing, rules), ellipseWords(fit, drawing, rules)];
 }
 
-function walkWords({ closure }: Fit, { walkFactor }: ClosureDrawing, rules: Steps): string {
+function walkWords({ closure }: ProvedRoom, { walkFactor }: ClosureDrawing, rules: Steps): string {
   const closed = closure.chains.find(({ linear }) => linear !== null);
   if (!closed?.linear) {
     return closure.chains.some(({ closed: isClosed }) => isClosed)
@@ -62,7 +62,7 @@ function walkWords({ closure }: Fit, { walkFactor }: ClosureDrawing, rules: Step
 }
 
 function ellipseWords(
-  { closure }: Fit,
+  { closure }: ProvedRoom,
   { ellipseFactor }: ClosureDrawing,
   { unit, stepMm }: Steps,
 ): string {

@@ -1,6 +1,6 @@
 import type { Room } from '@/lib/contracts/wall-book';
-import type { Fit } from '@/lib/measure/fit';
 import { nominalPlan } from '@/lib/measure/nominal-plan';
+import type { ProvedRoom } from '@/lib/measure/prove-room';
 import { wallsOf } from '@/lib/sheet/room-names';
 import type { Point } from './shape';
 import { clockwise, direction } from './vector';
@@ -30,7 +30,7 @@ const apartMm = 2_400;
  * Edge: a second chain that nothing ties to the first faces it, as in a galley.
  * Example: a room of four walls read true gives corners 0,0 3000,0 3000,2000 0,2000.
  */
-export function roomPlan(room: Room, fit: Fit): PlanWall[] {
+export function roomPlan(room: Room, fit: ProvedRoom): PlanWall[] {
   const places = fit.closure.adjustment ? adjustedPlaces(fit) : null;
   const drawn = drawnPlaces(room, fit);
   return wallsOf(room).map(({ wall, before }) => {
@@ -53,7 +53,7 @@ export function roomPlan(room: Room, fit: Fit): PlanWall[] {
 type Places = Map<string, readonly [Point, Point]>;
 const nowhere: Point = [0, 0];
 
-function adjustedPlaces(fit: Fit): Places {
+function adjustedPlaces(fit: ProvedRoom): Places {
   const corners = fit.closure.adjustment?.corners ?? [];
   const ends = new Map(corners.map((corner) => [corner.afterWallId, corner]));
   const places: Places = new Map();
@@ -68,7 +68,7 @@ function adjustedPlaces(fit: Fit): Places {
   return places;
 }
 
-function drawnPlaces(room: Room, fit: Fit): Places {
+function drawnPlaces(room: Room, fit: ProvedRoom): Places {
   const lengthOf = (wallId: string) => {
     const wall = fit.walls.find((one) => one.wallId === wallId);
     const read = wall?.length ?? wall?.readAt[0]?.length;

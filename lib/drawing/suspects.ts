@@ -1,6 +1,6 @@
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Reading, WallBook } from '@/lib/contracts/wall-book';
-import type { Fit } from '@/lib/measure/fit';
+import type { ProvedRoom } from '@/lib/measure/prove-room';
 import type { Suspect } from '@/lib/measure/room-closure';
 import { formatLength } from '@/lib/units/format-length';
 
@@ -24,7 +24,7 @@ type Steps = Pick<FitRules, 'unit' | 'stepMm'>;
  * Example: wall C read 100 mm too long at the counter: the wall C, "100 mm too long?".
  */
 export function suspectMarks(
-  { wallBook, fit, rules }: { wallBook: WallBook; fit: Fit; rules: Steps },
+  { wallBook, fit, rules }: { wallBook: WallBook; fit: ProvedRoom; rules: Steps },
   /** Heights of one wall are told apart in its elevation only. */
   { byHeight = false }: { byHeight?: boolean } = {},
 ): SuspectMark[] {

@@ -94,7 +94,18 @@ console.table([
 
 const bundles = {
   'fitRoom and whatIsMissing': ['fit-room', 'what-is-missing'],
-  'verdict at once: corner, plumb, straightness': ['corner', 'plumb', 'straightness'],
+  'what the phone loads: proof, plan, verdicts': [
+    'prove-room',
+    'reading-plan',
+    'corner',
+    'corner-deviation',
+    'plumb',
+    'straightness',
+    'straightedge-gap',
+    'scribe',
+    'check-rule',
+    'rules/rule-sets',
+  ],
 };
 const sizes = await Promise.all(
   Object.entries(bundles).map(async ([name, modules]) => {
