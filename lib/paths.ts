@@ -137,6 +137,10 @@ export const apiPaths = {
   waiting: () => '/api/waiting',
   crews: () => '/api/crews',
   crew: (crewId: string) => `/api/crews/${part(crewId)}`,
+  crewSettings: () => '/api/crews/settings',
+  daysOff: () => '/api/days-off',
+  dayOff: (daysOffId: string) => `/api/days-off/${part(daysOffId)}`,
+  closedDays: () => '/api/closed-days',
   /** The stream of what changes in the shop. */
   live: () => '/api/live',
   /** The line of a day's drive. */

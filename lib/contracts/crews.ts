@@ -146,6 +146,14 @@ export const crewsView = z.object({
   publicHolidays: z.array(
     z.object({ date: localDate, name: z.string(), words: z.string(), isWorked: z.boolean() }),
   ),
+  /** Whose holidays can be kept: the countries of the shop's region. */
+  holidayPlaces: z.array(
+    z.object({
+      country: z.string(),
+      name: z.string(),
+      parts: z.array(z.object({ part: z.string(), name: z.string() })),
+    }),
+  ),
   outside: z.array(visitOutside),
   today: localDate,
 });

@@ -32,3 +32,28 @@ export function publicHolidays(region: HolidayRegion, year: number): Holiday[] {
     .map(([date, name]) => ({ date, name }))
     .sort((a, b) => (a.date < b.date ? -1 : 1));
 }
+
+export type HolidayPlace = {
+  country: string;
+  name: string;
+  parts: { part: string; name: string }[];
+};
+
+/**
+ * The named countries of which holidays are known, with their parts, by English name.
+ * Example: "GB" is United Kingdom with England, Scotland and others.
+ */
+export function holidayPlaces(countries: readonly string[]): HolidayPlace[] {
+  const library = new Holidays();
+  const names = library.getCountries('en');
+  return countries
+    .flatMap((country) => {
+      const name = names[country];
+      if (!name) return [];
+      const parts = Object.entries(library.getStates(country, 'en') ?? {})
+        .map(([part, partName]) => ({ part, name: partName }))
+        .sort((a, b) => (a.name < b.name ? -1 : 1));
+      return [{ country, name, parts }];
+    })
+    .sort((a, b) => (a.name < b.name ? -1 : 1));
+}
