@@ -2,8 +2,10 @@
 
 import { useMemo, useState } from 'react';
 import { ErrorState } from '@/components/ui/error-state';
+import { LinkButton } from '@/components/ui/link-button';
 import type { Opening } from '@/lib/contracts/openings';
 import type { CrewView, VisitView, WaitingItem } from '@/lib/contracts/visits';
+import { paths } from '@/lib/paths';
 import type { WorkingPattern } from '@/lib/time/workdays';
 import { BookDialog } from './book-dialog';
 import { CrewKey } from './crew-key';
@@ -152,9 +154,13 @@ export function DiaryScreen(props: DiaryScreenProps) {
             mayBook={mayBook}
             isCalendarShown={shown.view !== 'crews'}
             onTimes={openTimes}
-            onByHand={openBooking}
           />
         )}
+        {mayBook && !subject ? (
+          <LinkButton look="line" href={paths.slip()} className="mt-2 self-start">
+            The shop is late…
+          </LinkButton>
+        ) : null}
       </aside>
       {booking ? (
         <BookDialog

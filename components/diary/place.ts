@@ -72,8 +72,9 @@ export function timeBeside(time: LocalTime, minutes: number): LocalTime {
   return `${String(Math.floor(total / 60)).padStart(2, '0')}:${String(total % 60).padStart(2, '0')}`;
 }
 
+/** A held time is taken or let go, never moved. */
 export const canChange = ({ status }: VisitView): boolean =>
-  status === 'held' || status === 'booked' || status === 'confirmed';
+  status === 'booked' || status === 'confirmed';
 
 /** No answer yet from the customer. */
 export const isOpen = ({ status }: VisitView): boolean => status === 'held' || status === 'booked';

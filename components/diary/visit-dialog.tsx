@@ -14,7 +14,9 @@ import { paths } from '@/lib/paths';
 import type { ProblemDetails } from '@/lib/problem-details';
 import { doesKind, visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { useCallOffVisit, useMoveVisit } from './change-visit-query';
+import { canChange } from './place';
 import { type Placing, PlacingFields } from './placing-fields';
+import { HeldActions } from './times/held-actions';
 import { useTakeBack } from './use-take-back';
 import { minutesWords, statusWords } from './visit-words';
 
@@ -39,7 +41,7 @@ export function VisitDialog({
   onClose,
 }: VisitDialogProps) {
   const { words, verdict } = statusWords[visit.status];
-  const canChange = mayBook && ['held', 'booked', 'confirmed'].includes(visit.status);
+  const isChangeable = mayBook && canChange(visit);
   return (
     <Dialog
       isOpen
@@ -81,13 +83,16 @@ export function VisitDialog({
           </Link>
         </dd>
       </dl>
-      {canChange ? (
+      {isChangeable ? (
         <div>
           <Button onClick={onAnotherTime}>Times that work instead</Button>
         </div>
       ) : null}
-      {canChange ? <MoveForm {...{ visit, start, crews, onClose }} /> : null}
-      {canChange ? <CallOffForm {...{ visit, onClose }} /> : null}
+      {mayBook && visit.status === 'held' ? (
+        <HeldActions visitId={visit.id} onDone={onClose} />
+      ) : null}
+      {isChangeable ? <MoveForm {...{ visit, start, crews, onClose }} /> : null}
+      {isChangeable ? <CallOffForm {...{ visit, onClose }} /> : null}
     </Dialog>
   );
 }

@@ -14,14 +14,12 @@ export function WaitingLine({
   number,
   mayBook,
   onTimes,
-  onByHand,
 }: {
   item: WaitingItem;
   /** The digit key that opens it; the first nine have one. */
   number: number | null;
   mayBook: boolean;
   onTimes: () => void;
-  onByHand: () => void;
 }) {
   const title = `${visitKindWords[item.kind]} · ${item.customerName}, ${item.street}`;
   return (
@@ -44,24 +42,14 @@ export function WaitingLine({
           {item.jobTitle} · {minutesWords(item.workMinutes)}
         </span>
         {mayBook ? (
-          <span className="flex shrink-0 max-lg:gap-2">
-            <Button
-              look="plain"
-              className="px-1.5 max-lg:min-h-key"
-              onClick={onByHand}
-              aria-label={`Book by hand: ${title}`}
-            >
-              By hand
-            </Button>
-            <Button
-              look="plain"
-              className="px-1.5 max-lg:min-h-key"
-              onClick={onTimes}
-              aria-label={`Times that work: ${title}`}
-            >
-              Times
-            </Button>
-          </span>
+          <Button
+            look="plain"
+            className="shrink-0 max-lg:min-h-key"
+            onClick={onTimes}
+            aria-label={`Times that work: ${title}`}
+          >
+            Times
+          </Button>
         ) : null}
       </div>
     </li>

@@ -17,14 +17,12 @@ export function WaitingList({
   mayBook,
   isCalendarShown,
   onTimes,
-  onByHand,
 }: {
   waiting: Waiting;
   mayBook: boolean;
   /** The calendar takes what is dragged by its own means; the crews' board has its own. */
   isCalendarShown: boolean;
   onTimes: (item: WaitingItem) => void;
-  onByHand: (item: WaitingItem) => void;
 }) {
   const { all, shown, typed, setTyped, error, isPending } = waiting;
   const listRef = useRef<HTMLUListElement>(null);
@@ -92,7 +90,6 @@ export function WaitingList({
             number={index < 9 ? index + 1 : null}
             mayBook={mayBook}
             onTimes={() => onTimes(item)}
-            onByHand={() => onByHand(item)}
           />
         ))}
       </ul>

@@ -36,6 +36,7 @@ export function BoardBarButton({
       style={{ gridColumn: `${firstColumn + 2} / ${lastColumn + 3}`, gridRow: lane + 2 }}
       data-visit-id={isGhost ? undefined : visit.id}
       data-movable={isMovable || undefined}
+      data-short={isShort || undefined}
       data-open={isOpen(visit) || undefined}
       data-ghost={isGhost || undefined}
       data-cut-before={bar.isCutBefore || undefined}
@@ -55,8 +56,8 @@ export function BoardBarButton({
         />
       ))}
       <span className="board-bar-line">
-        <KindMark kind={visit.kind} isNamed />
-        <Glyph name={verdict} className="board-status" />
+        <KindMark kind={visit.kind} isNamed />{' '}
+        {isGhost ? null : <Glyph name={verdict} className="board-status" />}
         <b>{visit.customerName}</b>
         <span className="board-more">, {visit.street}</span>
       </span>

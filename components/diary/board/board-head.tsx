@@ -1,6 +1,6 @@
 import { formatLocalDay } from '@/lib/time/format-civil';
 import type { BoardDay } from './board-days';
-import { dayHeadWords } from './day-head-words';
+import { weekdayShort } from './day-head-words';
 
 /** The days across the top; each opens that day. */
 export function BoardHead({
@@ -25,7 +25,10 @@ export function BoardHead({
           aria-label={`Open ${formatLocalDay(day.date, { language: 'en', region: 'UK' })}`}
           onClick={() => onDay(day.date)}
         >
-          <b>{dayHeadWords(day.date)}</b>
+          <b>
+            <span className="board-weekday">{weekdayShort(day.date)}</span>{' '}
+            {Number(day.date.slice(8))}
+          </b>
           {day.date === today ? <em>today</em> : null}
           {day.isWorked ? null : <em>closed</em>}
         </button>

@@ -7,6 +7,7 @@ import { TextareaField } from '@/components/ui/textarea-field';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { Opening } from '@/lib/contracts/openings';
 import type { CrewView } from '@/lib/contracts/visits';
+import { HoldTime } from './hold-time';
 import { OpeningsList } from './openings-list';
 import { useOpenings } from './openings-query';
 import { subjectTitle, type TimesSubject } from './times-subject';
@@ -58,11 +59,16 @@ export function TimesPanel(props: TimesPanelProps) {
     if (needsReason) return panelRef.current?.querySelector('textarea')?.focus();
     void booking.bookOpening(which, isOverridden ? reason : '');
   };
+  const hold = () => {
+    if (!opening || booking.isPending) return;
+    void booking.holdOpening(opening, isOverridden ? reason : '');
+  };
   useTimesKeys({
     count: openings.length,
     chosen,
     choose: setChosen,
     book: () => book(),
+    hold,
     byHand: props.onByHand,
     close: onClose,
   });
@@ -89,6 +95,7 @@ export function TimesPanel(props: TimesPanelProps) {
         {data?.gateWords ? ` · ${data.gateWords}` : ''}
       </p>
       {subject.says ? <p className="text-note text-ochre">“{subject.says}”</p> : null}
+      {booking.held ? <HoldTime held={booking.held} onDone={onClose} /> : null}
       <WishesBar
         wishes={wishes}
         workdays={props.workdays}
@@ -121,6 +128,9 @@ export function TimesPanel(props: TimesPanelProps) {
           busyText={booking.isPending ? 'Booking…' : undefined}
         >
           {subject.visit ? 'Move it there' : 'Book it'}
+        </Button>
+        <Button look="line" onClick={hold} disabled={!opening} keyName="H">
+          Keep 15 min
         </Button>
         <Button look="line" onClick={props.onByHand} keyName="B">
           By hand

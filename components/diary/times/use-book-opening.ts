@@ -6,8 +6,9 @@ import { useBookVisit, useMoveVisit } from '@/components/diary/change-visit-quer
 import { useTakeBack } from '@/components/diary/use-take-back';
 import { problemOf } from '@/components/shell/ask-server';
 import { showToast } from '@/components/ui/toast-store';
-import type { Opening } from '@/lib/contracts/openings';
+import type { HeldVisit, Opening } from '@/lib/contracts/openings';
 import type { ProblemDetails } from '@/lib/problem-details';
+import { useHoldOpening } from './hold-query';
 import { openingsKey } from './openings-query';
 import type { TimesSubject } from './times-subject';
 
@@ -18,6 +19,8 @@ export function useBookOpening(subject: TimesSubject, onBooked: (date: string) =
   const [keys] = useState(() => new Map<string, string>());
   const book = useBookVisit();
   const move = useMoveVisit();
+  const [held, setHeld] = useState<HeldVisit | null>(null);
+  const hold = useHoldOpening();
   const takeBack = useTakeBack();
   const client = useQueryClient();
 
@@ -46,7 +49,32 @@ export function useBookOpening(subject: TimesSubject, onBooked: (date: string) =
     }
   }
 
-  return { bookOpening, problem, isPending: book.isPending || move.isPending };
+  async function holdOpening(opening: Opening, overrideReason: string) {
+    const { crewId, date, time, workMinutes } = opening;
+    setProblem(null);
+    try {
+      const { jobId, kind, visit } = subject;
+      setHeld(
+        await hold.mutateAsync({
+          idempotencyKey: crypto.randomUUID(),
+          jobId,
+          kind,
+          ...(visit ? { forVisitId: visit.id } : {}),
+          ...{ crewId, date, time, workMinutes, overrideReason },
+        }),
+      );
+    } catch (caught) {
+      setProblem(problemOf(caught));
+    }
+  }
+
+  return {
+    bookOpening,
+    holdOpening,
+    held,
+    problem,
+    isPending: book.isPending || move.isPending || hold.isPending,
+  };
 }
 
 function keyFor(keys: Map<string, string>, place: string): string {

@@ -7,12 +7,21 @@ type TimesKeys = {
   chosen: number;
   choose: (index: number) => void;
   book: () => void;
+  hold: () => void;
   byHand: () => void;
   close: () => void;
 };
 
 /** The panel's keys; while it is open they stand before those of the diary. */
-export function useTimesKeys({ count, chosen, choose, book, byHand, close }: TimesKeys): void {
+export function useTimesKeys({
+  count,
+  chosen,
+  choose,
+  book,
+  hold,
+  byHand,
+  close,
+}: TimesKeys): void {
   const last = Math.max(0, count - 1);
   usePageKeys('Times that work', [
     ...[1, 2, 3, 4, 5, 6, 7, 8, 9].map((digit) => ({
@@ -25,6 +34,7 @@ export function useTimesKeys({ count, chosen, choose, book, byHand, close }: Tim
     { keys: 'ArrowDown', words: 'The next time', run: () => choose(Math.min(last, chosen + 1)) },
     { keys: 'ArrowUp', words: 'The time before', run: () => choose(Math.max(0, chosen - 1)) },
     { keys: 'Enter', words: 'Book the time that is looked at', run: () => pressOr(book) },
+    { keys: 'h', words: 'Keep it a quarter of an hour for the customer', run: hold },
     { keys: 'b', words: 'Book by hand, at any time', run: byHand },
     { keys: 'Escape', words: 'Close', run: close },
   ]);

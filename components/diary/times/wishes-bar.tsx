@@ -36,8 +36,6 @@ export function WishesBar({
             {weekdayWords.en[day - 1]?.slice(0, 3)}
           </Toggle>
         ))}
-      </div>
-      <div className="flex flex-wrap gap-1">
         <Toggle isOn={wishes.half === 'morning'} onPress={() => toggleHalf('morning')}>
           mornings
         </Toggle>
@@ -48,25 +46,25 @@ export function WishesBar({
           isOn={wishes.isSchoolRun}
           onPress={() => change({ isSchoolRun: !wishes.isSchoolRun })}
         >
-          not at the school run
+          not school run
         </Toggle>
       </div>
       <div className="grid grid-cols-2 gap-2 text-note">
-        <label className="flex flex-col">
+        <label className="flex flex-col text-graphite">
           From day
           <input
             type="date"
-            className={controlLook}
+            className={`${controlLook} text-ink`}
             value={wishes.from}
             onChange={(event) => change({ from: event.target.value })}
           />
         </label>
-        <label className="flex flex-col">
+        <label className="flex flex-col text-graphite">
           Not before
           <input
             type="time"
             step={900}
-            className={controlLook}
+            className={`${controlLook} text-ink`}
             value={wishes.notBefore}
             onChange={(event) => change({ notBefore: event.target.value })}
           />
