@@ -38,6 +38,7 @@ export const paths = {
   /** One figure of the last so many days, with the jobs behind it. */
   numbersOf: (figure: string, days: number) => `/numbers?figure=${part(figure)}&days=${days}`,
   rules: () => '/rules',
+  programs: () => '/rules/programs',
 
   today: () => '/today',
   todayVisit: (visitId: string) => `/today/${part(visitId)}`,
@@ -50,6 +51,10 @@ export const paths = {
 
   /** Where the customer's answer is posted, as a plain form. */
   customerAnswer: (token: string) => `/v/${part(token)}/answer`,
+  /** Other times for their visit; where one is held, and where it is taken. */
+  customerTimes: (token: string) => `/v/${part(token)}/times`,
+  customerHold: (token: string) => `/v/${part(token)}/hold`,
+  customerTake: (token: string) => `/v/${part(token)}/take`,
   /** What the customer signed, as a PDF. */
   customerSignOff: (token: string) => `/v/${part(token)}/sign-off`,
   customerCalendar: (token: string) => `/v/${part(token)}/calendar`,
@@ -102,6 +107,11 @@ export const apiPaths = {
 
   /** The jobs behind a figure, as CSV. */
   numbersFile: (figure: string, days: number) => `/api/numbers/${part(figure)}?days=${days}`,
+  openInterface: () => '/api/openapi.json',
+  programKeys: () => '/api/programs/keys',
+  programKey: (keyId: string) => `/api/programs/keys/${part(keyId)}`,
+  webhooks: () => '/api/programs/webhooks',
+  webhook: (webhookId: string) => `/api/programs/webhooks/${part(webhookId)}`,
   visits: () => '/api/visits',
   visit: (visitId: string) => `/api/visits/${part(visitId)}`,
   callOffVisit: (visitId: string) => `/api/visits/${part(visitId)}/call-off`,
@@ -137,10 +147,14 @@ export const apiPaths = {
   waiting: () => '/api/waiting',
   crews: () => '/api/crews',
   crew: (crewId: string) => `/api/crews/${part(crewId)}`,
+  crewHours: (from: string, to: string) => `/api/crews/hours?from=${part(from)}&to=${part(to)}`,
   crewSettings: () => '/api/crews/settings',
   daysOff: () => '/api/days-off',
   dayOff: (daysOffId: string) => `/api/days-off/${part(daysOffId)}`,
   closedDays: () => '/api/closed-days',
+  feeds: () => '/api/feeds',
+  /** A calendar that others' programs read; the token is the whole of the permission. */
+  feed: (token: string) => `/api/feeds/${part(token)}.ics`,
   /** The stream of what changes in the shop. */
   live: () => '/api/live',
   /** The line of a day's drive. */

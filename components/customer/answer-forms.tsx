@@ -1,6 +1,9 @@
 import { Button } from '@/components/ui/button';
+import { buttonLook } from '@/components/ui/button-look';
+import { CheckField } from '@/components/ui/check-field';
 import { TextareaField } from '@/components/ui/textarea-field';
 import type { CustomerVisitView } from '@/lib/contracts/visits';
+import { missingThings } from '@/lib/messages/missing-words';
 import { paths } from '@/lib/paths';
 import { customerWords } from './customer-words';
 
@@ -11,56 +14,53 @@ export function AnswerForms({ visit, token }: { visit: CustomerVisitView; token:
   return (
     <div className="mt-4 flex flex-col gap-3">
       {visit.status === 'confirmed' ? null : (
-        <form method="post" action={action}>
-          <input type="hidden" name="answer" value="confirm" />
-          <Button type="submit" size="thumb">
-            {words.yes}
+        <OneTap action={action} answer="confirm" look="fill" text={words.yes} />
+      )}
+      {visit.saysNotReady ? (
+        <OneTap action={action} answer="ready-now" look="line" text={words.readyNow} />
+      ) : null}
+      <a href={paths.customerTimes(token)} className={buttonLook('line', 'thumb')}>
+        {words.another}
+      </a>
+      <details className="rounded border border-pine">
+        <summary className="flex min-h-thumb cursor-pointer items-center justify-center px-4 text-lead font-bold text-pine">
+          {words.notReady}
+        </summary>
+        <form method="post" action={action} className="flex flex-col gap-3 px-4 pb-4">
+          <input type="hidden" name="answer" value="not-ready" />
+          <fieldset>
+            <legend className="font-medium">{words.notReadyLegend}</legend>
+            {missingThings.map((thing) => (
+              <CheckField key={thing} name={thing} value="yes" label={words.missing[thing]} />
+            ))}
+          </fieldset>
+          <TextareaField id="not-ready" label={words.more} name="words" maxLength={300} />
+          <Button type="submit" size="thumb" look="line">
+            {words.send}
           </Button>
         </form>
-      )}
-      <OpenedForm
-        action={action}
-        answer="another-time"
-        title={words.another}
-        hint={words.anotherHint}
-        send={words.send}
-      />
-      <OpenedForm
-        action={action}
-        answer="not-ready"
-        title={words.notReady}
-        hint={words.notReadyHint}
-        send={words.send}
-      />
+      </details>
     </div>
   );
 }
 
-function OpenedForm({
+function OneTap({
   action,
   answer,
-  title,
-  hint,
-  send,
+  look,
+  text,
 }: {
   action: string;
-  answer: 'another-time' | 'not-ready';
-  title: string;
-  hint: string;
-  send: string;
+  answer: 'confirm' | 'ready-now';
+  look: 'fill' | 'line';
+  text: string;
 }) {
   return (
-    <details className="rounded border border-pine">
-      <summary className="flex min-h-thumb cursor-pointer items-center justify-center px-4 text-lead font-bold text-pine">
-        {title}
-      </summary>
-      <form method="post" action={action} className="flex flex-col gap-3 px-4 pb-4">
-        <input type="hidden" name="answer" value={answer} />
-        <TextareaField id={answer} label={hint} name="words" required maxLength={400} />
-        <Button type="submit" size="thumb" look="line">
-          {send}
-        </Button>
-      </form>
-    </details>
+    <form method="post" action={action}>
+      <input type="hidden" name="answer" value={answer} />
+      <Button type="submit" size="thumb" look={look}>
+        {text}
+      </Button>
+    </form>
   );
 }

@@ -162,6 +162,8 @@ export type TodayInput = z.infer<typeof todayInput>;
 export const todayVisit = visitView.extend({
   rooms: z.array(z.object({ id, name: z.string() })),
   notes: z.string(),
+  /** From the stop before, or from the crew's base; null where a place is not known. */
+  drive: z.object({ minutes: z.number().int(), isEstimated: z.boolean() }).nullable(),
 });
 export type TodayVisit = z.infer<typeof todayVisit>;
 
@@ -175,6 +177,7 @@ export type TodayView = z.infer<typeof todayView>;
 /** What the customer's page shows; only this visit, nothing else of the shop. */
 export const customerVisitView = z.object({
   language: z.enum(['en', 'es']),
+  region: z.enum(['US', 'UK', 'AU', 'EU']),
   shopName: z.string(),
   shopPhone: z.string(),
   kind: visitKind,
@@ -189,9 +192,42 @@ export const customerVisitView = z.object({
   street: z.string(),
   town: z.string(),
   customerSays: z.string(),
+  /** They said that something is not ready, and not yet that it is. */
+  saysNotReady: z.boolean(),
+  /** The crew runs late: "about 11:30 AM"; else ''. */
+  arrivalWords: z.string(),
   isOldHouse: z.boolean(),
 });
 export type CustomerVisitView = z.infer<typeof customerVisitView>;
+
+/** What the page of other times shows. */
+export type CustomerTimesView = {
+  language: 'en' | 'es';
+  shopName: string;
+  shopPhone: string;
+  mayChange: boolean;
+  /** Of the visit as it stands. */
+  dayWords: string;
+  windowWords: string;
+  times: { crewId: string; date: string; time: string; dayWords: string; windowWords: string }[];
+  /** `untilWords`: "10:45 AM", of the site. */
+  hold: {
+    heldVisitId: string;
+    holdEndsAt: string;
+    dayWords: string;
+    windowWords: string;
+    untilWords: string;
+  } | null;
+};
+
+const linkToken = z.string().min(10).max(60);
+export const customerHoldInput = z.object({
+  token: linkToken,
+  crewId: id,
+  date: localDate,
+  time: localTime,
+});
+export const customerTakeInput = z.object({ token: linkToken, heldVisitId: id });
 
 /** A box of a plain form: there as "yes", or not there. */
 const ticked = z.preprocess((value) => value === 'yes', z.boolean());

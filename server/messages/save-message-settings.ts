@@ -21,8 +21,8 @@ export async function saveMessageSettings(
     const silent = silentOn.map((occasion) => occasionWords[occasion]).join(', ');
     await writeAudit(tx, ctx, {
       verb: 'save-message-settings',
-      subjectKind: 'shop',
-      subjectId: ctx.shop.id,
+      subjectKind: 'person',
+      subjectId: ctx.actor.personId,
       summary: silent
         ? `Customers are not told: ${silent}`
         : 'Customers are told on every occasion',

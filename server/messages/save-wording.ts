@@ -32,10 +32,10 @@ export async function saveWording(ctx: PersonContext, input: SaveWordingInput): 
     }
     await writeAudit(tx, ctx, {
       verb: 'save-wording',
-      subjectKind: 'wording',
-      subjectId: `${occasion}:${language}`,
+      subjectKind: 'person',
+      subjectId: ctx.actor.personId,
       summary: `Words for "${occasionWords[occasion]}" in ${language === 'es' ? 'Spanish' : 'English'} ${isEmpty ? 'left to Setwell' : 'changed'}`,
-      detail: own,
+      detail: { occasion, language, ...own },
     });
   });
 }

@@ -1,3 +1,4 @@
+import type { Database } from '@/db/database';
 import { database } from '@/server/base/database';
 import { logBug } from '@/server/base/log';
 import { getPorts } from '@/server/ports/choose-ports';
@@ -12,10 +13,22 @@ type Worker = { kick: () => void; stop: () => Promise<void> };
 /** Held for the process: the bundler makes several copies of this module. */
 const held = globalThis as typeof globalThis & { __setwellWorker?: Worker };
 
-/** Sends what is due, every two seconds and when kicked; gives what stops it after the round under way. */
-export function startWorker(compose: Compose): () => Promise<void> {
+/** What else falls due with the clock, and is known to a room above. */
+export type Alongside = (db: Database, now: Date) => Promise<void>;
+
+/**
+ * Sends what is due, every two seconds and when kicked, after what falls due beside it; gives what stops it
+ * after the round under way.
+ */
+export function startWorker(
+  compose: Compose,
+  alongside: readonly Alongside[] = [],
+): () => Promise<void> {
   held.__setwellWorker ??= makeWorker(async () => {
     const { db } = await database();
+    for (const work of alongside) {
+      await work(db, new Date()).catch((error) => logBug('messages/worker alongside', error));
+    }
     const sending = { db, ports: await getPorts(), compose, now: () => new Date() };
     await settle(sending);
     await sendDue(sending);

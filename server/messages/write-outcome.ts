@@ -18,7 +18,7 @@ export async function writeWhileHeld(
   const changed = await db
     .update(messages)
     .set(change)
-    .where(stillHeld(message))
+    .where(and(eq(messages.shopId, message.shopId), stillHeld(message)))
     .returning({ id: messages.id });
   return changed.length > 0;
 }
@@ -34,7 +34,6 @@ export function giveUpWhileHeld(
 
 function stillHeld(message: Claimed) {
   return and(
-    eq(messages.shopId, message.shopId),
     eq(messages.id, message.id),
     eq(messages.state, 'sending'),
     message.claimedAt ? eq(messages.claimedAt, message.claimedAt) : undefined,

@@ -1,12 +1,11 @@
+import { eq } from 'drizzle-orm';
 import type { Transaction } from '@/db/database';
-import { channels } from '@/lib/messages/consent';
+import { signOffs } from '@/db/schema';
 import type { PersonContext } from '@/server/base/context';
-import { enqueue } from '@/server/messages/enqueue';
-import { readRecipient } from '@/server/messages/recipient';
+import type { SignedCopyOf } from '@/server/visits/compose-message';
 import type { LockedVisit } from '@/server/visits/lock-visit';
-
-/** A copy is of use for days: the customer's mailbox may be down over a weekend. */
-const usefulDays = 7;
+import { tellDone } from '@/server/visits/tell-from-site';
+import { makeCopy } from './make-copy';
 
 /** The customer is told that it is done, with a copy of what was signed. */
 export async function tellSigned(
@@ -14,13 +13,11 @@ export async function tellSigned(
   ctx: PersonContext,
   visit: LockedVisit,
 ): Promise<void> {
-  const recipient = await readRecipient(tx, ctx.shop.id, visit.customerId);
-  const { id: visitId, jobId, version, zone } = visit;
-  const notAfter = new Date(ctx.now.getTime() + usefulDays * 86_400_000);
-  await enqueue(
-    tx,
-    ctx,
-    { recipient, about: { visitId, jobId, version, zone } },
-    channels.map((channel) => ({ occasion: 'done' as const, channel, dueAt: ctx.now, notAfter })),
-  );
+  await tellDone(tx, ctx, visit, true);
 }
+
+/** The copy that goes with the message, made when it goes: what was signed never changes. */
+export const signedCopyOf: SignedCopyOf = async (ctx, visitId) => {
+  const copy = await makeCopy(ctx, eq(signOffs.visitId, visitId));
+  return copy && { filename: copy.fileName, contentType: 'application/pdf', content: copy.bytes };
+};

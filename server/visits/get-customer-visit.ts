@@ -4,9 +4,8 @@ import { formatAtLocalTime } from '@/lib/time/format-civil';
 import { formatDay, formatTime, formatWindow } from '@/lib/time/format-instant';
 import { toLocal } from '@/lib/time/local-moment';
 import type { TextLocale } from '@/lib/time/text-locale';
-import type { CustomerContext } from '@/server/base/context';
-import { Refusal } from '@/server/base/problem-response';
-import { customerContext } from './customer-context';
+import { aboutWords } from './message-values';
+import { openLink } from './open-link';
 import { type CustomerVisit, readCustomerVisit } from './read-customer-visit';
 import { shopPhoneWords } from './shop-phone';
 import { whoComes } from './visit-people';
@@ -23,8 +22,11 @@ export async function getCustomerVisit(
   const { language, zone, kind, status, street, town, customerSays } = visit;
   const locale: TextLocale = { language, region: shop.region };
   const { weekdayWords, dateWords } = dayParts(visit, locale);
+  const isLate =
+    visit.expectedAt !== null && ['booked', 'confirmed', 'on-the-way'].includes(status);
   return {
     language,
+    region: shop.region,
     shopName: shop.name,
     shopPhone: shopPhoneWords(shop),
     kind,
@@ -41,18 +43,10 @@ export async function getCustomerVisit(
     street,
     town,
     customerSays,
+    saysNotReady: customerSays !== '' && customerSays === visit.notReady,
+    arrivalWords: isLate && visit.expectedAt ? aboutWords(visit.expectedAt, zone, locale) : '',
     isOldHouse: isOldHouse(visit.yearBuilt, shop.region),
   };
-}
-
-/** Past the limit of tries the answer is that of any link that opens nothing. */
-async function openLink(token: string, from: string): Promise<CustomerContext | null> {
-  try {
-    return await customerContext(token, from);
-  } catch (error) {
-    if (error instanceof Refusal) return null;
-    throw error;
-  }
 }
 
 /** "Thursday" and "December 10": the page sets them on two lines. */

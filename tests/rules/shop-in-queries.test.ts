@@ -14,6 +14,7 @@ const folders = [
   'files',
   'keeping',
   'numbers',
+  'programs',
 ];
 
 /** Queries that belong to no one shop, by the start of their file's name; each with the reason. */
@@ -21,9 +22,16 @@ const ofNoShop: Record<string, string> = {
   'server/people/create-user.ts': 'a sign-in may belong to two shops',
   'server/people/list-demo-people.ts': 'by the e-mails of the invented shop',
   'server/shops/create-shop.ts': 'makes the shop',
+  'server/programs/send-deliveries.ts':
+    'the worker tells for every shop; each row it takes names its own',
   'server/messages/claim-due.ts':
     'the worker sends for every shop; each row it takes names its own',
   'server/messages/hear-report.ts': 'the provider names the message, not the shop',
+  'server/messages/claim-unreported.ts':
+    'the worker asks for every shop; each row it takes names its own',
+  'server/messages/give-up.ts': 'its caller says which messages; each row it takes names its shop',
+  'server/visits/notice-silence.ts':
+    'the clock looks through every shop; each item it puts names its own',
   'server/visits/sms-sender.ts':
     'a text tells its number, not the shop; the newest told visit decides',
 };

@@ -3,15 +3,20 @@ import ICAL from 'ical.js';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { POST as answerRoute } from '@/app/v/[token]/answer/route';
 import { GET as calendarRoute } from '@/app/v/[token]/calendar/route';
-import { jobs, visitLinks, visits } from '@/db/schema';
+import { POST as holdRoute } from '@/app/v/[token]/hold/route';
+import { POST as takeRoute } from '@/app/v/[token]/take/route';
+import { jobs, messages, schedulerItems, visitLinks, visits } from '@/db/schema';
 import type { BookedVisit } from '@/lib/contracts/visits';
 import { database } from '@/server/base/database';
+import type { RouteHandler } from '@/server/base/handle';
 import { newLinkToken } from '@/server/base/secret';
+import { getCustomerTimes } from '@/server/visits/get-customer-times';
 import { getCustomerVisit } from '@/server/visits/get-customer-visit';
+import { reportVisit } from '@/server/visits/report-visit';
 import { bookTestVisit } from '../help/book-test-visit';
 import { changeLink, tokenOfVisit } from '../help/link-of';
 import { makeCrew } from '../help/make-crew';
-import { makeShop, type TestShop } from '../help/make-shop';
+import { contextOf, makeShop, type TestShop } from '../help/make-shop';
 import { startTestJob } from '../help/start-test-job';
 
 describe('the customer’s page', () => {
@@ -47,6 +52,24 @@ describe('the customer’s page', () => {
     return answerRoute(request, { params: Promise.resolve({ token }) });
   }
 
+  /** The forms of the page of other times. */
+  async function choose(route: RouteHandler, token: string, form: Record<string, string>) {
+    const request = new Request(`http://localhost:3000/v/${token}/hold`, {
+      method: 'POST',
+      headers: {
+        origin: 'http://localhost:3000',
+        'content-type': 'application/x-www-form-urlencoded',
+      },
+      body: new URLSearchParams(form).toString(),
+    });
+    return route(request, { params: Promise.resolve({ token }) });
+  }
+
+  async function itemsOf({ id }: BookedVisit) {
+    const { db } = await database();
+    return db.select().from(schedulerItems).where(eq(schedulerItems.visitId, id));
+  }
+
   async function stateOf({ id }: BookedVisit) {
     const { db } = await database();
     const [row] = await db
@@ -60,6 +83,7 @@ describe('the customer’s page', () => {
     const { token } = await booked({ site: { yearBuilt: 1931 } });
     expect(await getCustomerVisit(token, 'here')).toEqual({
       language: 'en',
+      region: 'US',
       shopName: 'Juniper Bend',
       shopPhone: '(212) 555-0142',
       kind: 'site-measure',
@@ -72,6 +96,8 @@ describe('the customer’s page', () => {
       street: '12 Alder Row',
       town: 'Fernhollow',
       customerSays: '',
+      saysNotReady: false,
+      arrivalWords: '',
       isOldHouse: true,
     });
   });
@@ -121,13 +147,97 @@ describe('the customer’s page', () => {
 
   it('closes the gate of the job when the customer is not ready', async () => {
     const { visit, token } = await booked();
-    await post(token, { answer: 'not-ready', words: 'No power yet' });
+    await post(token, { answer: 'not-ready', power: 'yes', away: 'yes', words: 'Two weeks' });
     const { db } = await database();
-    const [job] = await db
-      .select({ notReady: jobs.notReady })
-      .from(jobs)
-      .where(eq(jobs.id, visit.jobId));
-    expect(job?.notReady).toBe('No power yet');
+    const notReady = async () => {
+      const [job] = await db
+        .select({ notReady: jobs.notReady })
+        .from(jobs)
+        .where(eq(jobs.id, visit.jobId));
+      return job?.notReady;
+    };
+    expect(await notReady()).toBe('the power; nobody at home that day; Two weeks');
+    const told = await db.select().from(messages).where(eq(messages.visitId, visit.id));
+    expect(told.filter(({ occasion }) => occasion === 'not-ready')).toMatchObject([
+      { cause: { reason: 'the power; nobody at home that day; Two weeks' } },
+      { channel: 'email' },
+    ]);
+    expect(await itemsOf(visit)).toMatchObject([{ kind: 'not-ready', doneAt: null }]);
+    expect(await getCustomerVisit(token, 'here')).toMatchObject({ saysNotReady: true });
+
+    await post(token, { answer: 'ready-now' });
+    expect(await notReady()).toBe('');
+    expect(await itemsOf(visit)).toMatchObject([{ doneBy: 'The customer says that it is ready.' }]);
+    expect(await getCustomerVisit(token, 'here')).toMatchObject({ saysNotReady: false });
+  });
+
+  it('asks for a call, which comes to the scheduler’s list once', async () => {
+    const { visit, token } = await booked();
+    for (let count = 0; count < 2; count += 1) await post(token, { answer: 'call-me', words: '' });
+    expect(await itemsOf(visit)).toMatchObject([
+      { kind: 'call-me', words: 'Measure: Call me, please' },
+    ]);
+  });
+
+  it('keeps another time for a quarter of an hour and moves the visit there, by plain forms', async () => {
+    const { visit, token } = await booked();
+    const before = await getCustomerTimes(token, 'here');
+    const [first, second] = before?.times ?? [];
+    if (!first || !second) throw new Error('nothing was offered');
+    const { crewId, date, time } = first;
+    const kept = await choose(holdRoute, token, { crewId, date, time });
+    expect(kept.headers.get('location')).toBe(`/v/${token}/times`);
+    const held = await getCustomerTimes(token, 'here');
+    expect(held?.hold).toMatchObject({ dayWords: first.dayWords, windowWords: first.windowWords });
+    expect(await stateOf(visit)).toMatchObject({ status: 'booked', version: 1 });
+    const heldVisitId = held?.hold?.heldVisitId ?? '';
+    const taken = await choose(takeRoute, token, { heldVisitId });
+    expect(taken.headers.get('location')).toBe(`/v/${token}`);
+    expect(await stateOf(visit)).toMatchObject({ status: 'confirmed' });
+    expect(await getCustomerVisit(token, 'here')).toMatchObject({
+      windowWords: first.windowWords,
+    });
+    expect(await itemsOf(visit)).toMatchObject([{ kind: 'time-taken', doneAt: null }]);
+    const again = await choose(takeRoute, token, { heldVisitId });
+    expect(again.headers.get('location')).toBe(`/v/${token}/times?taken=1`);
+  });
+
+  it('keeps nothing that was not offered, and takes nothing that was kept for somebody else', async () => {
+    const mine = await booked();
+    const theirs = await booked();
+    const times = await getCustomerTimes(theirs.token, 'here');
+    const [offered] = times?.times ?? [];
+    if (!offered) throw new Error('nothing was offered');
+    const { date, time } = offered;
+    const made = await choose(holdRoute, mine.token, { crewId, date, time: '03:17' });
+    expect(made.headers.get('location')).toContain('taken=1');
+    await choose(holdRoute, theirs.token, { crewId, date, time });
+    const hold = (await getCustomerTimes(theirs.token, 'here'))?.hold;
+    if (!hold) throw new Error('nothing was kept');
+    const stolen = await choose(takeRoute, mine.token, { heldVisitId: hold.heldVisitId });
+    expect(stolen.headers.get('location')).toContain('taken=1');
+    expect(await stateOf(mine.visit)).toMatchObject({ status: 'booked', version: 1 });
+    const guessed = await choose(holdRoute, newLinkToken(), { crewId, date, time });
+    expect([guessed.status, guessed.headers.get('location')?.startsWith('/v/')]).toEqual([
+      303,
+      true,
+    ]);
+    expect(await getCustomerTimes(newLinkToken(), 'here')).toBeNull();
+  });
+
+  it('says when a late crew now arrives, that they are on the way, and that they are there', async () => {
+    const { visit, token } = await booked();
+    const ctx = await contextOf(shop, 'measurer', new Date(visit.startsAt));
+    const at = visit.startsAt;
+    await reportVisit(ctx, { visitId: visit.id, what: 'running-late', lateMinutes: 45, at });
+    expect(await getCustomerVisit(token, 'here')).toMatchObject({
+      arrivalWords: 'about 11:45 AM',
+    });
+    await reportVisit(ctx, { visitId: visit.id, what: 'arrived', at });
+    expect(await getCustomerVisit(token, 'here')).toMatchObject({
+      status: 'on-site',
+      arrivalWords: '',
+    });
   });
 
   it('answers a guess, an ended and a revoked link alike, and changes nothing by them', async () => {
