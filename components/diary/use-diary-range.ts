@@ -54,7 +54,8 @@ export function useDiaryRange(startOn: LocalDate, shown: ShownView) {
       }),
     goTo: (date: LocalDate) => {
       setOn(date);
-      calendarRef.current?.getApi().gotoDate(date);
+      // The calendar draws at once, which it cannot while React does.
+      queueMicrotask(() => calendarRef.current?.getApi().gotoDate(date));
     },
     step: (way: 1 | -1) => {
       const api = calendarRef.current?.getApi();

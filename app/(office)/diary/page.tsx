@@ -4,6 +4,7 @@ import { may } from '@/lib/permissions';
 import { isLocalDate } from '@/lib/time/civil';
 import { localDate } from '@/lib/time/local-moment';
 import { pageContext } from '@/server/base/page-context';
+import { bookingDays } from '@/server/shops/booking-days';
 import { listCrews } from '@/server/shops/list-crews';
 
 export const metadata: Metadata = { title: 'Diary' };
@@ -15,8 +16,8 @@ export default async function DiaryPage({
 }) {
   const ctx = await pageContext('visits:read');
   const { on } = await searchParams;
-  const { zone, rules } = ctx.shop;
-  const { dayStart, dayEnd, workdays, closedDays } = rules.booking;
+  const { zone } = ctx.shop;
+  const { dayStart, dayEnd, workdays, closedDays } = bookingDays(ctx);
   const today = localDate(ctx.now, zone);
   return (
     <DiaryScreen

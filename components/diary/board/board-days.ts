@@ -11,15 +11,16 @@ export type BoardDay = {
 
 /**
  * The columns of the board: whole weeks from a Monday. Weekdays that the shop never works are folded away,
- * unless a visit lies on them; a closed day keeps its column, so that everybody sees why it is empty.
+ * unless a visit lies on them or a crew works them; a closed day keeps its column, so that everybody sees why
+ * it is empty.
  */
 export function boardDays(
   range: { from: LocalDate; weeks: number },
   shopDays: WorkingDays,
-  visitDates: ReadonlySet<LocalDate>,
+  busyDates: ReadonlySet<LocalDate>,
 ): BoardDay[] {
   const days = Array.from({ length: range.weeks * 7 }, (_, index) => addDays(range.from, index))
-    .filter((date) => shopDays.workdays.includes(weekdayOf(date)) || visitDates.has(date))
+    .filter((date) => shopDays.workdays.includes(weekdayOf(date)) || busyDates.has(date))
     .map((date) => ({ date, isWorked: isWorkday(date, shopDays), isWeekStart: false }));
   return days.map((day, index) => ({
     ...day,

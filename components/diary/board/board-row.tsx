@@ -1,7 +1,7 @@
 import { crewColour } from '@/components/diary/crew-colour';
+import type { HoursOf } from '@/components/diary/crew-hours-query';
 import type { CrewView, VisitView } from '@/lib/contracts/visits';
 import { localDate } from '@/lib/time/local-moment';
-import type { WorkingPattern } from '@/lib/time/workdays';
 import type { Zone } from '@/lib/time/zones';
 import { BoardBarButton } from './board-bar-button';
 import { boardBars } from './board-bars';
@@ -13,7 +13,7 @@ type BoardRowProps = {
   crew: CrewView;
   days: readonly BoardDay[];
   zone: Zone;
-  pattern: WorkingPattern;
+  hoursOf: HoursOf;
   today: string;
   weeks: number;
   visits: readonly VisitView[];
@@ -23,7 +23,7 @@ type BoardRowProps = {
 };
 
 /** One crew: its days with what is free of each, and its visits as bars under them. */
-export function BoardRow({ crew, days, zone, pattern, visits, ...rest }: BoardRowProps) {
+export function BoardRow({ crew, days, zone, hoursOf, visits, ...rest }: BoardRowProps) {
   const bars = boardBars(visits, days, zone);
   const lanes = Math.max(1, ...bars.map(({ lane }) => lane + 1));
   const pieces = visits
@@ -50,7 +50,7 @@ export function BoardRow({ crew, days, zone, pattern, visits, ...rest }: BoardRo
           crewDay={crewDay(
             day.date,
             pieces.filter(({ date }) => date === day.date),
-            pattern,
+            hoursOf(crew.id, day.date),
             zone,
           )}
         />

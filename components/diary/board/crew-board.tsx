@@ -1,6 +1,7 @@
 'use client';
 
 import { useMemo, useRef } from 'react';
+import { useCrewHours } from '@/components/diary/crew-hours-query';
 import type { Place } from '@/components/diary/place';
 import type { CrewView, VisitView } from '@/lib/contracts/visits';
 import type { WorkingPattern } from '@/lib/time/workdays';
@@ -35,10 +36,11 @@ export function CrewBoard(props: CrewBoardProps) {
   const { zone, from, weeks, pattern, crews, visits, ghost, today } = props;
   const boardRef = useRef<HTMLElement>(null);
   const shown = useMemo(() => (ghost ? [...visits, ghost] : [...visits]), [visits, ghost]);
+  const { hoursOf, workedDates } = useCrewHours({ from, weeks, pattern });
   const days = useMemo(() => {
-    const dates = new Set(shown.flatMap((visit) => pieceDates(visit, zone)));
-    return boardDays({ from, weeks }, pattern, dates);
-  }, [shown, zone, from, weeks, pattern]);
+    const visitDates = shown.flatMap((visit) => pieceDates(visit, zone));
+    return boardDays({ from, weeks }, pattern, new Set([...visitDates, ...workedDates]));
+  }, [shown, zone, from, weeks, pattern, workedDates]);
   useBoardDrag(boardRef, { ...props, days });
 
   return (
@@ -53,7 +55,7 @@ export function CrewBoard(props: CrewBoardProps) {
       {crews.map((crew) => (
         <BoardRow
           key={crew.id}
-          {...{ crew, days, zone, pattern, today, weeks }}
+          {...{ crew, days, zone, hoursOf, today, weeks }}
           ghostId={ghost?.id ?? null}
           visits={shown.filter(({ crewId }) => crewId === crew.id)}
           mayMove={props.mayBook}

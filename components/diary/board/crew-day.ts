@@ -1,6 +1,6 @@
+import type { WorkedHours } from '@/lib/schedule/working-pattern';
 import type { LocalDate } from '@/lib/time/civil';
 import { fromLocal } from '@/lib/time/local-moment';
-import { isWorkday, type WorkingPattern } from '@/lib/time/workdays';
 import type { Zone } from '@/lib/time/zones';
 
 export type CrewDay = {
@@ -18,14 +18,12 @@ type Stretch = { startsAt: string; endsAt: string };
 export function crewDay(
   date: LocalDate,
   pieces: readonly Stretch[],
-  pattern: WorkingPattern,
+  hours: WorkedHours | null,
   zone: Zone,
 ): CrewDay {
-  if (!isWorkday(date, pattern) || pattern.dayStart >= pattern.dayEnd) {
-    return { isWorked: false, freeMinutes: 0, workedMinutes: 0, taken: [] };
-  }
-  const opensMs = fromLocal(date, pattern.dayStart, zone).getTime();
-  const closesMs = fromLocal(date, pattern.dayEnd, zone).getTime();
+  if (!hours) return { isWorked: false, freeMinutes: 0, workedMinutes: 0, taken: [] };
+  const opensMs = fromLocal(date, hours.start, zone).getTime();
+  const closesMs = fromLocal(date, hours.end, zone).getTime();
   const within = pieces
     .map(({ startsAt, endsAt }) => ({
       fromMs: Math.max(opensMs, Date.parse(startsAt)),

@@ -1,0 +1,48 @@
+'use client';
+
+import { keepPreviousData, useQuery } from '@tanstack/react-query';
+import { useMemo } from 'react';
+import { askServer } from '@/components/shell/ask-server';
+import type { CrewHours } from '@/lib/contracts/crew-hours';
+import { apiPaths } from '@/lib/paths';
+import type { WorkedHours } from '@/lib/schedule/working-pattern';
+import { addDays, type LocalDate } from '@/lib/time/civil';
+import { isWorkday, type WorkingPattern } from '@/lib/time/workdays';
+
+export type HoursOf = (crewId: string, date: LocalDate) => WorkedHours | null;
+
+/** When each crew works; by the shop's own hours until it is known. */
+export function useCrewHours({
+  from,
+  weeks,
+  pattern,
+}: {
+  from: LocalDate;
+  weeks: number;
+  pattern: WorkingPattern;
+}): { hoursOf: HoursOf; workedDates: LocalDate[] } {
+  const to = addDays(from, weeks * 7);
+  const { data } = useQuery({
+    queryKey: ['crews', 'hours', from, to],
+    queryFn: ({ signal }) => askServer<CrewHours[]>(apiPaths.crewHours(from, to), { signal }),
+    placeholderData: keepPreviousData,
+    staleTime: 60_000,
+  });
+  return useMemo(() => {
+    const known = new Map(
+      data?.map(({ crewId, days }) => [
+        crewId,
+        new Map(days.map(({ date, ...hours }) => [date, hours])),
+      ]),
+    );
+    const shopHours = { start: pattern.dayStart, end: pattern.dayEnd };
+    return {
+      hoursOf: (crewId, date) => {
+        const crew = known.get(crewId);
+        if (crew) return crew.get(date) ?? null;
+        return isWorkday(date, pattern) ? shopHours : null;
+      },
+      workedDates: [...new Set([...known.values()].flatMap((days) => [...days.keys()]))],
+    };
+  }, [data, pattern]);
+}
