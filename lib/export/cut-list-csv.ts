@@ -41,13 +41,14 @@ export function cutListCsv(sheet: SheetView): string {
 }
 
 function rowOf(row: CutRow, sheet: SheetView): CsvCell[] {
-  const { piece, end } = pieceAndEnd(row.piece);
+  // The end has its own column.
+  const piece = row.end === null ? row.piece : row.piece.replace(`, ${row.end}`, '');
   const words = (figure: FitFigure | null) => (figure ? textOf(figure, sheet).value : '');
   const mm = (figure: FitFigure | null) => (figure && isLength(figure) ? figure.value : null);
   return [
     piece,
     row.runName,
-    end,
+    row.end,
     row.how,
     words(row.first),
     words(row.last),
@@ -73,9 +74,3 @@ function textOf(figure: FitFigure, { rules }: SheetView) {
 }
 
 const isLength = ({ kind }: FitFigure) => figureWords[kind].measure === 'length';
-
-/** "Filler, left" is a filler at the left end. */
-function pieceAndEnd(words: string): { piece: string; end: string } {
-  const [, piece, end] = words.match(/^(.*), (left|right)$/) ?? [];
-  return piece && end ? { piece, end } : { piece: words, end: '' };
-}

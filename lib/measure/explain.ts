@@ -254,6 +254,14 @@ export const figureWords: Record<FigureKind, FigureWords> = {
     measure: 'length',
     rounding: 'nearest',
   },
+  'ceiling-blank': {
+    name: 'Blank of the piece to the ceiling',
+    formula:
+      'The least gap to the ceiling plus the scribe allowance of its top edge, rounded up once.',
+    surer: 'Ceiling readings above the run, from the set-up of the floor readings.',
+    measure: 'length',
+    rounding: 'up',
+  },
   'upper-gap': {
     name: 'Counter to the units above',
     formula: 'From the counter up to the underside of the boxes that hang over it.',
@@ -309,6 +317,22 @@ export const figureWords: Record<FigureKind, FigureWords> = {
     name: 'Saw for a mitre',
     formula: 'Each piece is cut at half the corner; the saw reads |90° − θ/2|.',
     surer: 'Longer legs on the corner.',
+    measure: 'angle',
+    rounding: 'nearest',
+  },
+  'crown-mitre': {
+    name: 'Crown on the saw: mitre',
+    formula:
+      'atan(sin s ÷ tan(θ/2)), s between the moulding’s back and the wall, θ the corner; the moulding lies flat.',
+    surer: 'Longer legs on the corner; the spring angle off the moulding itself.',
+    measure: 'angle',
+    rounding: 'nearest',
+  },
+  'crown-bevel': {
+    name: 'Crown on the saw: tilt of the blade',
+    formula:
+      'asin(cos s · cos(θ/2)), s between the moulding’s back and the wall, θ the corner; the moulding lies flat.',
+    surer: 'Longer legs on the corner; the spring angle off the moulding itself.',
     measure: 'angle',
     rounding: 'nearest',
   },

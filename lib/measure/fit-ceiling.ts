@@ -1,5 +1,6 @@
 /** From the tops of tall and hung boxes to the ceiling. */
 
+import { crownCuts } from '@/lib/measure/crown-cuts';
 import { figure } from '@/lib/measure/figure';
 import type { FitContext } from '@/lib/measure/fit-context';
 import { fitFigure } from '@/lib/measure/fit-figure';
@@ -18,8 +19,8 @@ const CLOSED_TO_CEILING_MM = 400;
 
 /**
  * The gap over tall and hung boxes, and the piece that closes it.
- * Edge: null for base runs, without rises, or without a datum; boxes that end more than 400 below the
- * ceiling are left open above. Example: rises 1440 and 1447, datum drop 1000, top 2400: 40 and 47.
+ * Edge: null for base runs, without rises, or without a datum; unless the run says what closes it, boxes
+ * that end more than 400 below the ceiling are left open above. Example: rises 1440 and 1447, datum drop 1000, top 2400: 40 and 47.
  */
 export function fitCeiling(
   context: FitContext,
@@ -50,7 +51,9 @@ export function fitCeiling(
   });
   if (!gap.value) return { ceiling: null, problems: gap.problems };
   const { left, right, least, greatest, scribe, blankMm } = gap.value;
-  const isClosed = least.value <= CLOSED_TO_CEILING_MM;
+  const isClosed =
+    run.overBoxes !== 'open' &&
+    (run.overBoxes !== undefined || least.value <= CLOSED_TO_CEILING_MM);
   const from = [...new Set([...least.from, ...greatest.from])];
   const words = `${context.words(left.value)} at the left, ${context.words(right.value)} at the right`;
   return {
@@ -58,8 +61,9 @@ export function fitCeiling(
       left: fitFigure('ceiling-gap', left),
       right: fitFigure('ceiling-gap', right),
       least: fitFigure('ceiling-gap', least),
-      blank: isClosed ? fitFigure('ceiling-gap', figure(blankMm, least.u, from)) : null,
+      blank: isClosed ? fitFigure('ceiling-blank', figure(blankMm, scribe.unrounded.u, from)) : null,
       scribe: isClosed ? edgeScribe('ceiling', 'top, to the ceiling', null, scribe) : null,
+      crown: run.overBoxes === 'crown' ? crownCuts(context, run) : [],
       words: isClosed ? `${words}; blank ${context.words(blankMm)}` : words,
     },
     problems: gap.problems,

@@ -33,6 +33,7 @@ export type FigureKind =
   | 'kick-face-blank'
   | 'appliance-height'
   | 'ceiling-gap'
+  | 'ceiling-blank'
   | 'upper-gap'
   | 'tilt-height'
   | 'way-in-margin'
@@ -40,7 +41,9 @@ export type FigureKind =
   | 'pipe-offset'
   | 'room-angle-misclosure'
   | 'room-linear-misclosure'
-  | 'saw-angle';
+  | 'saw-angle'
+  | 'crown-mitre'
+  | 'crown-bevel';
 
 /** Rounded to 1e-4 like every output of the fit, so that phone and server agree to the byte. */
 export type FitFigure = Figure & { kind: FigureKind };

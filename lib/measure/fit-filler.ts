@@ -55,6 +55,8 @@ export function fitFiller(
   const greatest = extreme((a, b) => a > b + 1e-6);
   const from = [...new Set([...least.from, ...greatest.from])];
   const blankMm = roundBlankUp(least.value + scribe.unrounded.value, rules.stepMm);
+  // Held at its limit a filler is as wide as it is meant to be, but no surer than the box beside it is built.
+  const blankU = Math.max(scribe.unrounded.u, rules.unitBuildToleranceMm / Math.sqrt(3));
   const taperU = Math.hypot(
     Math.sqrt(Math.max(0, first.width.u ** 2 - uShared ** 2)),
     Math.sqrt(Math.max(0, last.width.u ** 2 - uShared ** 2)),
@@ -70,7 +72,7 @@ export function fitFiller(
       least: fitFigure('filler-width', least),
       greatest: fitFigure('filler-width', greatest),
       taper: fitFigure('filler-taper', taper),
-      blank: fitFigure('filler-blank', figure(blankMm, least.u, from)),
+      blank: fitFigure('filler-blank', figure(blankMm, blankU, from)),
       scribe: edgeScribe(`filler-${end}`, `filler, ${end} end`, null, {
         ...scribe,
         outOfTrue: { ...scribe.outOfTrue, from },

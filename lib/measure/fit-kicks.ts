@@ -199,7 +199,7 @@ function faceBlank(face: KickFace): { blank: ReturnType<typeof fitFigure>; scrib
   const { height } = face.least;
   const from = [...new Set([...height.from, ...face.scribe.outOfTrue.from])];
   return {
-    blank: fitFigure('kick-face-blank', figure(face.blankMm, height.u, from)),
+    blank: fitFigure('kick-face-blank', figure(face.blankMm, face.scribe.unrounded.u, from)),
     scribe: edgeScribe('kick', `kick face, ${face.side}`, null, face.scribe),
   };
 }

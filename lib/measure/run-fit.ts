@@ -208,7 +208,17 @@ export type RunCeiling = {
   /** Crown or filler to scribe: least gap + allowance, rounded up once. */
   blank: FitFigure | null;
   scribe: EdgeScribe | null;
+  /** Where a crown turns a corner, flat on the saw; sheets from before crowns were asked for have none. */
+  crown?: CrownCut[];
   words: string;
+};
+
+export type CrownCut = {
+  end: 'left' | 'right';
+  mitre: FitFigure;
+  bevel: FitFigure;
+  /** Outside corners are cut the other way. */
+  corner: 'inside' | 'outside';
 };
 
 export type IslandFit = {

@@ -46,5 +46,7 @@ function blanksOf(run: RunFit, stepMm: number): Map<string, number> {
   add('filler left', run.left.filler?.blank);
   add('filler right', run.right.filler?.blank);
   add('kick face', run.kicks?.faceBlank?.blank);
+  for (const { side, blank } of run.kicks?.returns ?? []) add(`kick return ${side}`, blank);
+  add('piece to the ceiling', run.ceiling?.blank ?? undefined);
   return blanks;
 }

@@ -1,7 +1,7 @@
 import type { Run } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import type { FitFigure } from '@/lib/measure/fit-figure';
-import type { RunFit } from '@/lib/measure/run-fit';
+import type { KickCorner, RunFit } from '@/lib/measure/run-fit';
 import { unitWords } from './unit-words';
 
 /** One piece that the bench cuts or leaves long. */
@@ -12,6 +12,8 @@ export type CutRow = {
   wallId: string | null;
   /** "Filler, left". */
   piece: string;
+  /** At which end (or side) of its run. */
+  end: 'left' | 'right' | 'back' | null;
   /** Face at the top and bottom of a filler; at the left and right of a kick face. */
   first: FitFigure | null;
   last: FitFigure | null;
@@ -25,7 +27,8 @@ export type CutRow = {
 };
 
 /**
- * The cut list of a fit: fillers and kick faces with their blanks, edges to be left long, mitres.
+ * The cut list of a fit: fillers, kick faces and their returns, pieces to the ceiling, edges to be left long,
+ * mitres.
  *
  * Edge: a run that cannot be filled has no fillers here; its verdict says so. Corners are listed only where
  * runs meet at them.
@@ -50,6 +53,7 @@ function rowsOf(run: RunFit, runs: readonly Run[]): CutRow[] {
       ...common,
       key: `${run.runId} filler ${side}`,
       piece: `Filler, ${side}`,
+      end: side,
       first: filler.widths[0]?.width ?? filler.greatest,
       last: filler.widths.at(-1)?.width ?? filler.least,
       cut: filler.blank,
@@ -63,6 +67,7 @@ function rowsOf(run: RunFit, runs: readonly Run[]): CutRow[] {
       ...common,
       key: `${run.runId} ${scribe.edge} ${scribe.unitId ?? ''}`,
       piece: `${scribeWords[scribe.edge]}, ${unitName(scribe.unitId)}`,
+      end: endOf(scribe.words),
       first: null,
       last: null,
       cut: scribe.allowance,
@@ -71,21 +76,87 @@ function rowsOf(run: RunFit, runs: readonly Run[]): CutRow[] {
       isWrong: false,
     });
   }
+  return [...rows, ...kickRows(run, common), ...ceilingRows(run, laidOut, common)];
+}
+
+type OfRun = Pick<CutRow, 'runId' | 'runName' | 'wallId'>;
+
+function kickRows(run: RunFit, common: OfRun): CutRow[] {
   const { kicks } = run;
-  if (kicks?.faceBlank) {
-    const [firstUnit, lastUnit] = [run.units[0]?.unitId, run.units.at(-1)?.unitId];
-    const corner = (unitId: string | undefined, at: 'front-left' | 'front-right') =>
-      kicks.corners.find((one) => one.unitId === unitId && one.corner === at)?.height ?? null;
+  if (!kicks) return [];
+  const [firstUnit, lastUnit] = [run.units[0]?.unitId, run.units.at(-1)?.unitId];
+  const corner = (unitId: string | undefined, at: KickCorner['corner']) =>
+    kicks.corners.find((one) => one.unitId === unitId && one.corner === at)?.height ?? null;
+  const isWrong = kicks.corners.some(({ legs }) => legs !== 'within');
+  const rows: CutRow[] = [];
+  if (kicks.faceBlank) {
     rows.push({
       ...common,
       key: `${run.runId} kick`,
       piece: 'Kick face',
+      end: null,
       first: corner(firstUnit, 'front-left'),
       last: corner(lastUnit, 'front-right'),
       cut: kicks.faceBlank.blank,
       how: 'blank',
       note: kicks.faceBlank.scribe.words,
-      isWrong: kicks.corners.some(({ legs }) => legs !== 'within'),
+      isWrong,
+    });
+  }
+  // Seen from outside: a return's own left and right.
+  const seen = {
+    left: [corner(firstUnit, 'back-left'), corner(firstUnit, 'front-left')],
+    right: [corner(lastUnit, 'front-right'), corner(lastUnit, 'back-right')],
+    back: [corner(lastUnit, 'back-right'), corner(firstUnit, 'back-left')],
+  } as const;
+  for (const { side, blank, scribe } of kicks.returns) {
+    rows.push({
+      ...common,
+      key: `${run.runId} kick ${side}`,
+      piece: `Kick return, ${side}`,
+      end: side,
+      first: seen[side][0],
+      last: seen[side][1],
+      cut: blank,
+      how: 'blank',
+      note: scribe.words,
+      isWrong,
+    });
+  }
+  return rows;
+}
+
+function ceilingRows(run: RunFit, laidOut: Run | undefined, common: OfRun): CutRow[] {
+  const { ceiling } = run;
+  if (!ceiling) return [];
+  const isCrowned = laidOut?.overBoxes === 'crown';
+  const rows: CutRow[] = [];
+  if (ceiling.blank) {
+    rows.push({
+      ...common,
+      key: `${run.runId} ceiling`,
+      piece: isCrowned ? 'Backing of the crown' : 'Filler to the ceiling',
+      end: null,
+      first: ceiling.left,
+      last: ceiling.right,
+      cut: ceiling.blank,
+      how: 'blank',
+      note: ceiling.scribe?.words ?? '',
+      isWrong: ceiling.least.value - ceiling.least.U < 0,
+    });
+  }
+  for (const { end, mitre, bevel, corner } of ceiling.crown ?? []) {
+    rows.push({
+      ...common,
+      key: `${run.runId} crown ${end}`,
+      piece: `Crown, ${end}`,
+      end,
+      first: null,
+      last: null,
+      cut: mitre,
+      how: 'saw',
+      note: `flat on the saw, blade tilted ${bevel.value.toFixed(1)}°; ${corner} corner`,
+      isWrong: false,
     });
   }
   return rows;
@@ -108,6 +179,7 @@ function mitres(fit: Fit, runs: readonly Run[]): CutRow[] {
         runName: `Corner ${corner.name}`,
         wallId: corner.cornerWallId,
         piece: 'Kick mitre, each piece',
+        end: null,
         first: null,
         last: null,
         cut: corner.saw,
@@ -126,3 +198,8 @@ const scribeWords = {
   ceiling: 'To the ceiling',
   kick: 'Kick',
 } as const;
+
+/** "finished end, left" is at the left. */
+function endOf(words: string): CutRow['end'] {
+  return words.endsWith(', left') ? 'left' : words.endsWith(', right') ? 'right' : null;
+}

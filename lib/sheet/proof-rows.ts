@@ -26,7 +26,7 @@ export type ProofRow = {
 /**
  * What was proved on site: corners, walls, floor, runs, and whether the room closes; as they are walked.
  *
- * Edge: a corner that is true within the reading says so; what no rule judges is left out, but for corners,
+ * Edge: readings that nothing checks are in doubt; a corner that is true within the reading says so; what no rule judges is left out, but for corners,
  * which stand with their angle.
  */
 export function proofRows(fit: Fit, rules: FitRules): ProofRow[] {
@@ -89,6 +89,7 @@ export function ruleWords({ rule, source, edition, clause }: Verdict): string {
 }
 
 const subjects: [pattern: RegExp, words: string][] = [
+  [/^ceiling-fall/, ', ceiling'],
   [/straightedge/, ', under a straightedge'],
   [/straight/, ', straight'],
   [/plumb|lean/, ', plumb'],
@@ -105,8 +106,9 @@ function checkWords(check: string): string {
 
 function closureRow({ closure }: Fit): ProofRow[] {
   const { adjustment } = closure;
-  if (!adjustment) return [];
-  const { value, limit, passes } = adjustment.chiSquare;
+  // A room of which nothing was read lies as drawn, and proves nothing.
+  if (!adjustment || adjustment.observations.length === 0) return [];
+  const { value, limit, passes, degreesOfFreedom } = adjustment.chiSquare;
   const [chain] = closure.chains.filter(({ relativePrecision }) => relativePrecision !== null);
   return [
     {
@@ -118,7 +120,7 @@ function closureRow({ closure }: Fit): ProofRow[] {
         : '',
       limitWords: `χ² ${value.toFixed(1)} of ${limit.toFixed(1)}`,
       verdict: passes && !closure.suspect ? 'within' : 'over',
-      inDoubt: false,
+      inDoubt: degreesOfFreedom <= 0,
       rule: 'least squares, global test at 1 %',
       by: {
         short: `Least squares, χ² test at 1 %: at most ${limit.toFixed(1)}`,

@@ -17,11 +17,15 @@ describe('cutList', () => {
       'Sink wall: Kick face',
       'Uppers left: Filler, left',
       'Uppers left: Filler, right',
+      'Uppers left: Filler to the ceiling',
       'Uppers right: Filler, left',
       'Uppers right: Filler, right',
+      'Uppers right: Filler to the ceiling',
       'Tall wall: Filler, right',
       'Tall wall: Finished end, end panel',
       'Tall wall: Kick face',
+      'Tall wall: Kick return, left',
+      'Tall wall: Filler to the ceiling',
     ]);
     expect(new Set(rows.map(({ key }) => key)).size).toBe(rows.length);
   });
@@ -52,6 +56,34 @@ describe('cutList', () => {
     );
     expect(saws.map(({ runName }) => runName)).toEqual(['Corner A–B']);
     expect(saws[0]?.cut.value).toBeCloseTo(Math.abs(90 - 91.18 / 2), 1);
+  });
+
+  it('says at which end of its run a piece goes', () => {
+    const ends = rows.filter(({ end }) => end !== null).map(({ piece, end }) => [piece, end]);
+    expect(ends).toContainEqual(['Filler, left', 'left']);
+    expect(ends).toContainEqual(['Finished end, end panel', 'left']);
+    expect(ends).toContainEqual(['Kick return, left', 'left']);
+    expect(ends).not.toContainEqual(['Kick face', 'left']);
+  });
+
+  it('turns the crown of a run round its finished end, and closes nothing where the run is left open', () => {
+    const over = (overBoxes: 'crown' | 'open') => {
+      const crowned = runs.map((run) => (run.level === 'tall' ? { ...run, overBoxes } : run));
+      const ofTall = (row: (typeof rows)[number]) => row.runName === 'Tall wall';
+      return cutList(fitRoom(wallBook, crowned, rules), crowned).filter(ofTall);
+    };
+    const crown = over('crown').find(({ piece }) => piece === 'Crown, left');
+    expect(crown).toMatchObject({ how: 'saw', end: 'left' });
+    expect(crown?.cut.value).toBeCloseTo(31.62, 2);
+    expect(crown?.note).toBe('flat on the saw, blade tilted 33.9°; outside corner');
+    expect(over('crown').map(({ piece }) => piece)).toContain('Backing of the crown');
+    expect(over('open').some(({ piece }) => /ceiling|rown/.test(piece))).toBe(false);
+  });
+
+  it('never states a blank as exact, for the box beside it is not', () => {
+    for (const { cut, how, piece } of rows) {
+      if (how === 'blank') expect(cut.U, piece).toBeGreaterThan(0.1);
+    }
   });
 
   it('marks the filler of a run that is too long', () => {

@@ -40,6 +40,20 @@ describe('proofRows', () => {
     expect(corners).toHaveLength(4);
     expect(corners.some(({ readWords }) => readWords === 'true within the reading')).toBe(true);
   });
+
+  it('proves nothing of a room of which nothing was read', () => {
+    const { wallBook, runs } = crookedKitchen();
+    const empty = fitRoom({ ...wallBook, readings: [] }, runs, own);
+    expect(proofRows(empty, own)).toEqual([]);
+  });
+
+  it('calls the fall of a ceiling by its name', () => {
+    const { rows } = proofOf({}, { ...own, ruleSet: 'din-18202' });
+    const named = (pattern: RegExp) => rows.filter(({ check }) => pattern.test(check)).length;
+    expect(named(/, ceiling$/)).toBeGreaterThan(0);
+    expect(named(/^(Sink wall|Tall wall|Floor), level$/)).toBeGreaterThan(0);
+    expect(named(/^Uppers.*, level$/)).toBe(0);
+  });
 });
 
 describe('openPoints', () => {
