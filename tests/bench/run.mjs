@@ -16,3 +16,5 @@ for (const script of ['fit-room.ts', 'diary-week.ts', 'blunder-study.ts']) {
     stdio: 'inherit',
   });
 }
+say('thousand-messages.mjs');
+spawnSync(process.execPath, ['tests/bench/thousand-messages.mjs'], { stdio: 'inherit' });

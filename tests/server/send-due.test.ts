@@ -1,7 +1,7 @@
 import { and, eq, ne } from 'drizzle-orm';
 import ICAL from 'ical.js';
 import { afterAll, beforeAll, beforeEach, describe, expect, it } from 'vitest';
-import { consents, customers, jobs, messages, shops, visits } from '@/db/schema';
+import { consents, customers, messages, shops, visits } from '@/db/schema';
 import { type BookedVisit, moveVisitInput } from '@/lib/contracts/visits';
 import { database } from '@/server/base/database';
 import { changeConsent } from '@/server/messages/change-consent';
@@ -164,40 +164,6 @@ describe('sending what is due', () => {
     expect(texts()[1]).toContain('moves from');
     expect(texts()[2]).toContain('is called off');
     expect(mails()[2]?.text).toContain('The floor is not down.');
-  });
-
-  it('sends two hundred messages with two workers, each once', { timeout: 120_000 }, async () => {
-    const { visit, texts, mails } = await booked();
-    const { db } = await database();
-    await db.delete(messages);
-    const [{ customerId } = { customerId: '' }] = await db
-      .select({ customerId: jobs.customerId })
-      .from(jobs)
-      .where(eq(jobs.id, visit.jobId));
-    await db.insert(messages).values(
-      Array.from({ length: 200 }, (_, index) => ({
-        shopId: shop.shop.id,
-        customerId,
-        jobId: visit.jobId,
-        visitId: visit.id,
-        occasion: `load ${index}`,
-        channel: index % 2 ? ('sms' as const) : ('email' as const),
-        key: `load:${index}`,
-        dueAt: clock,
-      })),
-    );
-    const compose: Compose = async (_, message) =>
-      message.channel === 'sms'
-        ? { is: 'sms', body: message.occasion }
-        : { is: 'email', email: { subject: message.occasion, text: message.occasion } };
-    test.fakeSms.faults.set({ kind: 'refuse', code: 20429 }, { times: 7 });
-    test.fakeEmail.faults.set({ kind: 'refuse', code: 451 }, { times: 7 });
-    await Promise.all([send(compose), send(compose)]);
-    pass(120_000);
-    await Promise.all([send(compose), send(compose)]);
-    const got = [...texts(), ...mails().map(({ subject }) => subject)];
-    expect(got.sort()).toEqual(Array.from({ length: 200 }, (_, index) => `load ${index}`).sort());
-    expect(await db.$count(messages, eq(messages.state, 'sent'))).toBe(200);
   });
 
   it('keeps a text for the morning at the site, and sends the e-mail at once', async () => {
