@@ -30,6 +30,8 @@ export const permissions = [
   'messages:read',
   'messages:send',
   'numbers:read',
+  /** Keys for other programs, and what they are told. */
+  'programs:change',
 ] as const;
 export type Permission = (typeof permissions)[number];
 

@@ -3,7 +3,7 @@ import type { ShopRules } from '@/lib/contracts/shop-rules';
 import type { Permission, Role } from '@/lib/permissions';
 import { may } from '@/lib/permissions';
 import type { Log } from './log';
-import { refused } from './problem-response';
+import { refused, refusedToKey } from './problem-response';
 
 export type Shop = {
   id: string;
@@ -21,6 +21,8 @@ export type PersonActor = {
   userId: string;
   name: string;
   role: Role;
+  /** Asking through another program: no more than its key was given. */
+  scopes?: ReadonlySet<Permission>;
 };
 export type CustomerActor = { kind: 'customer'; name: string; customerId: string; visitId: string };
 export type SystemActor = { kind: 'system'; name: string };
@@ -39,5 +41,7 @@ export type CustomerContext = Context<CustomerActor>;
 
 /** The first line of every verb that a person calls. */
 export function mustBeAllowed(ctx: PersonContext, permission: Permission): void {
-  if (!may(ctx.actor.role, permission)) throw refused();
+  const { role, scopes } = ctx.actor;
+  if (!may(role, permission)) throw refused();
+  if (scopes && !scopes.has(permission)) throw refusedToKey(permission);
 }

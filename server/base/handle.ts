@@ -1,5 +1,6 @@
 import type { z } from 'zod';
 import type { PersonContext } from './context';
+import { bearerKey, keyContext } from './key-context';
 import { logBug } from './log';
 import { checkOrigin } from './origin-check';
 import { personContext } from './person-context';
@@ -22,7 +23,8 @@ export function handle<S extends z.ZodType, O>(
 
 /** Who asks; a request that nobody is signed in for goes no further. */
 export async function signedIn(request: Request): Promise<PersonContext> {
-  const ctx = await personContext(request.headers);
+  const key = bearerKey(request.headers);
+  const ctx = key === null ? await personContext(request.headers) : await keyContext(key);
   if (ctx) return ctx;
   throw new Refusal({
     status: 401,

@@ -35,6 +35,14 @@ export function refused(): Refusal {
   });
 }
 
+export function refusedToKey(permission: string): Refusal {
+  return new Refusal({
+    status: 403,
+    code: 'not-in-scope',
+    message: `This key was not given ${permission}. Its owner can make another under Other programs.`,
+  });
+}
+
 export function problemResponse(refusal: RefusalDetail): Response {
   const { status, code, message, errors, current } = refusal;
   const [title, detail] = firstSentence(message);

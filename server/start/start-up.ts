@@ -3,14 +3,19 @@ import { startBackUps } from '@/server/base/back-ups/start-back-ups';
 import { database } from '@/server/base/database';
 import { env } from '@/server/base/env';
 import { log } from '@/server/base/log';
+import { repeat } from '@/server/base/repeat';
 import { startWorker } from '@/server/messages/worker';
 import { hashPassword } from '@/server/people/sign-in';
 import { getPorts } from '@/server/ports/choose-ports';
+import { sendDeliveries } from '@/server/programs/send-deliveries';
 import { signedCopyOf } from '@/server/snags/tell-signed';
 import { composeWithCopy } from '@/server/visits/compose-message';
 import { noticeSilence } from '@/server/visits/notice-silence';
 import { startLapsing } from '@/server/visits/start-lapsing';
 import { makeVisitLink } from '@/server/visits/visit-link';
+
+/** Other programs hear of a change within so long. */
+const tellEveryMs = 5_000;
 
 /** Once a process, before the first request is answered. */
 export async function startUp(): Promise<void> {
@@ -28,11 +33,12 @@ export async function startUp(): Promise<void> {
   const stopWorker = startWorker(composeWithCopy(signedCopyOf), [noticeSilence]);
   const stopLapsing = startLapsing();
   const stopBackUps = startBackUps(open, { dataDirectory, backUpDirectory });
+  const stopTelling = repeat('programs', tellEveryMs, () => sendDeliveries(open.db, new Date()));
   log('started', { database: open.kind, demo });
 
   for (const signal of ['SIGTERM', 'SIGINT'] as const) {
     process.once(signal, async () => {
-      await Promise.all([stopWorker(), stopLapsing(), stopBackUps()]);
+      await Promise.all([stopWorker(), stopLapsing(), stopBackUps(), stopTelling()]);
       await open.close();
       log('stopped');
       process.exit(0);

@@ -1,6 +1,8 @@
 import type { Metadata } from 'next';
+import Link from 'next/link';
 import { RulesForm } from '@/components/rules/rules-form';
 import { TitleBlock } from '@/components/ui/title-block';
+import { paths } from '@/lib/paths';
 import { may } from '@/lib/permissions';
 import { pageContext } from '@/server/base/page-context';
 import { getShopRules } from '@/server/shops/get-shop-rules';
@@ -15,7 +17,16 @@ export default async function RulesPage() {
       <TitleBlock
         level={1}
         title="Shop rules"
-        meta="a change never reaches a sheet that is released"
+        meta={
+          <span className="flex flex-wrap gap-x-4">
+            a change never reaches a sheet that is released
+            {may(ctx.actor.role, 'programs:change') ? (
+              <Link href={paths.programs()} className="link">
+                Other programs
+              </Link>
+            ) : null}
+          </span>
+        }
         className="mb-4"
       />
       <RulesForm
