@@ -61,7 +61,9 @@ export function fitCeiling(
       left: fitFigure('ceiling-gap', left),
       right: fitFigure('ceiling-gap', right),
       least: fitFigure('ceiling-gap', least),
-      blank: isClosed ? fitFigure('ceiling-blank', figure(blankMm, scribe.unrounded.u, from)) : null,
+      blank: isClosed
+        ? fitFigure('ceiling-blank', figure(blankMm, scribe.unrounded.u, from))
+        : null,
       scribe: isClosed ? edgeScribe('ceiling', 'top, to the ceiling', null, scribe) : null,
       crown: run.overBoxes === 'crown' ? crownCuts(context, run) : [],
       words: isClosed ? `${words}; blank ${context.words(blankMm)}` : words,

@@ -1,5 +1,6 @@
 /** Floor and ceiling, from one level line thrown round the room. */
 import type { Run } from '@/lib/contracts/wall-book';
+import { planBareLevels } from '@/lib/measure/plan-bare-room';
 import {
   type AskedSlot,
   extentOf,
@@ -27,6 +28,7 @@ export function planLevels(context: PlanContext): AskedSlot[] {
   );
   const setUpId = last && 'setUpId' in last ? last.setUpId : null;
   return context.walk.walls.flatMap((walked) => [
+    ...planBareLevels(context, walked, { group: SET_UP_GROUP, id: setUpId }),
     ...planFloor(context, walked, setUpId),
     ...context.islands
       .filter(({ wallId }) => wallId === walked.wall.id)

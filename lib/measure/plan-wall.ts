@@ -1,5 +1,6 @@
 /** Readings of one wall, as one walks up to it: corner, lengths, face, studs, services. */
 import type { Run } from '@/lib/contracts/wall-book';
+import { planBareFaces } from '@/lib/measure/plan-bare-room';
 import {
   type AskedSlot,
   extentOf,
@@ -30,6 +31,7 @@ export function planWall(context: PlanContext, walked: WalkedWall): AskedSlot[] 
   return [
     ...planCorner(context, walked),
     ...planLengths(context, walked, [...own, ...against.map(({ run }) => run)]),
+    ...planBareFaces(context, walked, lengthSoFar(context, walked)),
     ...planFaces(context, walked, own, against),
     ...planStuds(walked, own),
     ...planServices(walked, own),

@@ -35,6 +35,31 @@ function skipOf(slot: string): Reading {
   };
 }
 
+describe('a room before runs are laid out', () => {
+  const missing = whatIsMissing(empty(bookOf(square)), [], metric);
+  const words = missing.map((one) => one.words);
+
+  test('asks for lean, floor and ceiling as well, and for nothing that only a run would need', () => {
+    expect(words).toContain('Wall A, gap to the level 1500 mm from the left, at the floor');
+    expect(words).toContain('Wall A, gap to the level 1500 mm from the left, at the ceiling');
+    expect(words).toContain('Floor in corner D–A');
+    expect(words).toContain('Ceiling in corner D–A');
+    expect(missing.some(({ ask }) => ask.kind === 'stud' || ask.kind === 'feature')).toBe(false);
+  });
+
+  test('stays short: sixteen readings more for four walls', () => {
+    const more = missing.filter(({ ask }) => ['face', 'floor', 'ceiling'].includes(ask.kind));
+    expect(more).toHaveLength(16);
+    expect(new Set(missing.map(({ slot }) => slot)).size).toBe(missing.length);
+  });
+
+  test('gives way to what the runs ask for once one is laid out', () => {
+    const run = sampleRun(1, 1, { name: 'Sink wall' });
+    const asked = whatIsMissing(empty(bookOf(square)), [run], metric);
+    expect(asked.some(({ slot }) => /:corner$|:plumb:/.test(slot))).toBe(false);
+  });
+});
+
 describe('an empty book', () => {
   const runs = [sampleRun(1, 1, { name: 'Sink wall' })];
   const missing = whatIsMissing(empty(bookOf(square)), runs, metric);
