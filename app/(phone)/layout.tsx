@@ -21,6 +21,8 @@ export default async function PhoneLayout({ children }: { children: ReactNode })
         shopName: shop.name,
         mayReport: may(role, 'visits:report'),
         mayMeasure: may(role, 'walls:measure'),
+        region: shop.region,
+        zone: shop.zone,
       }}
     >
       {children}

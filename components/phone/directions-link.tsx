@@ -6,7 +6,15 @@ import { directionsHref } from './directions';
 const never = () => () => {};
 
 /** To the phone's own map. */
-export function DirectionsLink({ street, town }: { street: string; town: string }) {
+export function DirectionsLink({
+  street,
+  town,
+  words,
+}: {
+  street: string;
+  town: string;
+  words: string;
+}) {
   const agent = useSyncExternalStore(
     never,
     () => navigator.userAgent,
@@ -17,7 +25,7 @@ export function DirectionsLink({ street, town }: { street: string; town: string 
       href={directionsHref(street, town, agent)}
       className="flex min-h-thumb items-center justify-center rounded border border-pine font-bold text-pine active:bg-tint"
     >
-      Directions
+      {words}
     </a>
   );
 }

@@ -2,9 +2,13 @@
 const PATIENCE_MS = 30_000;
 
 /** One question to the office; null when it does not answer, or not with what was asked for. */
-export async function getJson<Answer>(path: string): Promise<Answer | null> {
+export async function getJson<Answer>(
+  path: string,
+  method: 'GET' | 'POST' = 'GET',
+): Promise<Answer | null> {
   try {
     const response = await fetch(path, {
+      method,
       headers: { accept: 'application/json' },
       redirect: 'manual',
       signal: AbortSignal.timeout(PATIENCE_MS),

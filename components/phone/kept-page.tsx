@@ -1,6 +1,8 @@
 'use client';
 
 import { useEffect, useState, useSyncExternalStore } from 'react';
+import { StopScreen } from '@/components/day/stop-screen';
+import { TodayScreen } from '@/components/day/today-screen';
 import { PhoneShell } from '@/components/shell/phone-shell';
 import { EmptyState } from '@/components/ui/empty-state';
 import { LinkButton } from '@/components/ui/link-button';
@@ -11,11 +13,10 @@ import { paths } from '@/lib/paths';
 import type { Holder } from '@/lib/sync/holder';
 import { type PhonePlace, phonePlaceOf } from '@/lib/sync/phone-pages';
 import { readDay, readDays, readFetched, readHolder } from './kept-store';
+import { localToday } from './local-today';
 import { PhonePerson } from './phone-person';
 import { readBook } from './read-book';
 import { readUnsent } from './read-unsent';
-import { StopScreen } from './stop-screen';
-import { TodayScreen } from './today-screen';
 import { useLive } from './use-live';
 import { useOnce } from './use-once';
 
@@ -57,7 +58,7 @@ function KeptPlace({ place, holder }: { place: PhonePlace; holder: Holder }) {
     case 'today':
       return <KeptDay date={place.date} holder={holder} />;
     case 'visit':
-      return <KeptVisit visitId={place.visitId} holder={holder} />;
+      return <KeptVisit visitId={place.visitId} />;
     case 'walls':
       return <KeptBook roomId={place.roomId} jobId={place.jobId} holder={holder} />;
     case 'unknown':
@@ -66,19 +67,19 @@ function KeptPlace({ place, holder }: { place: PhonePlace; holder: Holder }) {
 }
 
 function KeptDay({ date, holder }: { date: string | null; holder: Holder }) {
-  const [today] = useState(() => localDateOf(new Date()));
+  const [today] = useState(() => localToday());
   const live = useLive(`day:${date ?? today}`, () => readDayOf(date, today));
   if (live.state === 'reading') return <Opening />;
   if (live.state === 'failed' || !live.value) return <NotKept what="This day" />;
   return <TodayScreen view={live.value} holder={holder} />;
 }
 
-function KeptVisit({ visitId, holder }: { visitId: string; holder: Holder }) {
+function KeptVisit({ visitId }: { visitId: string }) {
   const live = useLive('days', readDays);
   if (live.state === 'reading') return <Opening />;
   const days = live.state === 'here' ? live.value : [];
   const visit = days.flatMap((day) => day.visits).find(({ id }) => id === visitId);
-  return visit ? <StopScreen visit={visit} holder={holder} /> : <NotKept what="This visit" />;
+  return visit ? <StopScreen visit={visit} stop={null} /> : <NotKept what="This visit" />;
 }
 
 function KeptBook(asked: { roomId: string; jobId: string | null; holder: Holder }) {
@@ -95,12 +96,6 @@ async function readDayOf(date: string | null, today: string): Promise<TodayView 
   if (date !== null) return readDay(date);
   const fetched = await readFetched();
   return (await readDay(today)) ?? (fetched ? readDay(fetched.date) : null);
-}
-
-/** The phone's own day: the shop's, unless the phone is set to another part of the world. */
-function localDateOf(now: Date): string {
-  const two = (part: number) => String(part).padStart(2, '0');
-  return `${now.getFullYear()}-${two(now.getMonth() + 1)}-${two(now.getDate())}`;
 }
 
 function NotKept({ what }: { what: string }) {

@@ -1,5 +1,7 @@
 import type { WallBookView } from '@/lib/contracts/rooms';
+import type { AccessCodeView, StopView } from '@/lib/contracts/stops';
 import type { TodayView } from '@/lib/contracts/visits';
+import { newerStop } from '@/lib/days/stop-on-phone';
 import type { Holder } from '@/lib/sync/holder';
 import { phoneDatabase } from './phone-database';
 
@@ -9,6 +11,8 @@ export type Fetched = { at: string; date: string };
 const holderKey = 'holder';
 const fetchedKey = 'fetched';
 const dayKey = (date: string): string => `day:${date}`;
+const stopKey = (visitId: string): string => `stop:${visitId}`;
+const codeKey = (visitId: string): string => `code:${visitId}`;
 const blankKey = (jobId: string): string => `blank:${jobId}`;
 
 /** Who holds the phone from now on. What the office showed somebody else is gone first; nothing unsent is. */
@@ -30,21 +34,29 @@ export type DayFetched = {
   personId: string;
   days: TodayView[];
   blanks: WallBookView[];
+  stops: StopView[];
+  /** Of today's sites; a code is kept for its day and no longer. */
+  codes: AccessCodeView[];
   at: string;
 };
 
 /** The day as the office showed it, in place of the one before; nothing when somebody else holds the phone by now. */
-export async function keepDays({ personId, days, blanks, at }: DayFetched): Promise<void> {
+export async function keepDays(fetched: DayFetched): Promise<void> {
+  const { personId, days, blanks, stops, codes, at } = fetched;
   const { kept } = phoneDatabase();
   await phoneDatabase().transaction('rw', kept, async () => {
     const holder = await read<Holder>(holderKey);
     const [today] = days;
     if (holder?.personId !== personId || !today) return;
+    const newer: StopView[] = [];
+    for (const stop of stops) newer.push(newerStop(await readKeptStop(stop.visitId), stop));
     await kept.clear();
     await kept.bulkPut([
       { key: holderKey, value: holder },
       { key: fetchedKey, value: { at, date: today.date } satisfies Fetched },
       ...days.map((day) => ({ key: dayKey(day.date), value: day })),
+      ...newer.map((stop) => ({ key: stopKey(stop.visitId), value: stop })),
+      ...codes.map((code) => ({ key: codeKey(code.visitId), value: code })),
       ...blanks.map((blank) => ({ key: blankKey(blank.jobId), value: blank })),
     ]);
   });
@@ -67,6 +79,42 @@ export async function readDays(): Promise<TodayView[]> {
 /** An empty book for a room of this job that nobody has drawn yet. */
 export function readBlank(jobId: string): Promise<WallBookView | null> {
   return read<WallBookView>(blankKey(jobId));
+}
+
+/** A stop as the office last showed it, with what it has taken since. */
+export function readKeptStop(visitId: string): Promise<StopView | null> {
+  return read<StopView>(stopKey(visitId));
+}
+
+/** Within the transaction of what changed it. */
+export async function putStop(stop: StopView): Promise<void> {
+  await phoneDatabase().kept.put({ key: stopKey(stop.visitId), value: stop });
+}
+
+/** Shown by the office just now; nothing when somebody else holds the phone by now. */
+export async function keepStop(stop: StopView, personId: string): Promise<void> {
+  const { kept } = phoneDatabase();
+  await phoneDatabase().transaction('rw', kept, async () => {
+    const holder = await read<Holder>(holderKey);
+    if (holder && holder.personId !== personId) return;
+    const value = newerStop(await readKeptStop(stop.visitId), stop);
+    await kept.put({ key: stopKey(stop.visitId), value });
+  });
+}
+
+/** The access code of a stop, on its day; on any other day it is gone. */
+export async function readCode(visitId: string, date: string): Promise<string | null> {
+  const code = await read<AccessCodeView>(codeKey(visitId));
+  return code?.date === date ? code.code : null;
+}
+
+/** Codes of days that are past leave the phone. */
+export async function dropPastCodes(date: string): Promise<void> {
+  await phoneDatabase()
+    .kept.where('key')
+    .startsWith(codeKey(''))
+    .filter(({ value }) => (value as AccessCodeView).date !== date)
+    .delete();
 }
 
 /** The writer of each key knows its shape, and the store is cleared when the program's shapes change. */

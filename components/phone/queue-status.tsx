@@ -1,6 +1,7 @@
 'use client';
 
 import { useSyncExternalStore } from 'react';
+import { useCrewLanguage } from '@/components/day/crew-language';
 import { Verdict, type VerdictKind } from '@/components/ui/verdict';
 import { paths } from '@/lib/paths';
 import { type StripState, stripState } from '@/lib/sync/strip-words';
@@ -22,6 +23,7 @@ const marks: Record<StripState['kind'], VerdictKind> = {
 /** Right on the strip of every phone page: what is safe here, and what the office has. */
 export function QueueStatus({ isInRoom = false }: { isInRoom?: boolean }) {
   const personId = usePersonId();
+  const language = useCrewLanguage();
   const live = useLive('unsent', readUnsent);
   const isProgramKept = useSyncExternalStore(subscribeToWorker, hasWorker, () => false);
   const ready = useLive(`ready:${isProgramKept}`, () => readReadiness(personId, isProgramKept));
@@ -30,7 +32,13 @@ export function QueueStatus({ isInRoom = false }: { isInRoom?: boolean }) {
   if (live.state === 'failed') return <Verdict kind="problem">nothing can be kept here</Verdict>;
   // In a room the strip's other half says where one is, and needs the place.
   const isReady = !isInRoom && ready.state === 'here' && ready.value.isReady;
-  const { kind, words } = stripState({ unsent: live.value, personId, isReady, ...sending });
+  const { kind, words } = stripState({
+    unsent: live.value,
+    personId,
+    isReady,
+    language,
+    ...sending,
+  });
   const mark = <Verdict kind={marks[kind]}>{words}</Verdict>;
   if (kind === 'parked') return <a href={`${paths.today()}#kept`}>{mark}</a>;
   if (kind === 'sign-in') return <a href={paths.signIn(window.location.pathname)}>{mark}</a>;

@@ -1,9 +1,12 @@
+import { stopOnPhone } from '@/lib/days/stop-on-phone';
 import { withSent } from '@/lib/sync/book-on-phone';
 import type { Batch } from '@/lib/sync/next-batch';
 import { ownIdOf, type Queued, type QueuedWork, roomIdOf } from '@/lib/sync/queued';
 import type { Settled } from '@/lib/sync/settle-batch';
+import { putStop, readHolder, readKeptStop } from './kept-store';
 import { newId } from './new-id';
 import { phoneDatabase } from './phone-database';
+import { tapperOf } from './tapper';
 
 /** Puts work on the phone's disk. When it has resolved, the work cannot be lost but with the phone. */
 export async function keepWork(personId: string, works: readonly QueuedWork[]): Promise<void> {
@@ -31,8 +34,9 @@ export async function settleQueue({ items }: Batch, settled: Settled): Promise<v
   const database = phoneDatabase();
   const sentIds = new Set(settled.sentIds);
   const sent = items.filter(({ id }) => sentIds.has(id));
-  await database.transaction('rw', database.queue, database.rooms, async () => {
+  await database.transaction('rw', database.queue, database.rooms, database.kept, async () => {
     await rememberSent(sent);
+    await rememberTold(sent);
     await database.queue.bulkDelete(sent.map(({ order }) => order));
     for (const { id, message } of settled.parked) {
       await database.queue.where('id').equals(id).modify({ parked: message });
@@ -45,6 +49,16 @@ export async function tryParkedAgain(personId: string): Promise<void> {
   await phoneDatabase()
     .queue.filter((item) => item.personId === personId && item.parked !== null)
     .modify({ parked: null });
+}
+
+/** What the office has of a stop now, so that it stays on the screen when it has left the queue. */
+async function rememberTold(sent: Queued[]): Promise<void> {
+  const events = sent.flatMap(({ work }) => (work.kind === 'event' ? [work.event] : []));
+  for (const visitId of new Set(events.map((event) => event.visitId))) {
+    const stop = await readKeptStop(visitId);
+    const holder = await readHolder();
+    if (stop && holder) await putStop(stopOnPhone(stop, events, tapperOf(holder.personName)));
+  }
 }
 
 async function rememberSent(sent: Queued[]): Promise<void> {

@@ -21,13 +21,22 @@ export function statusOnPhone(visit: TodayVisit, queue: readonly Queued[]): Visi
   return taps.at(-1) ?? visit.status;
 }
 
-export const tapWords: Record<VisitTap, string> = {
-  'on-the-way': 'On my way',
-  'running-late': 'Running late',
-  arrived: 'Arrived',
-  done: 'Done',
-  'nobody-home': 'Nobody home',
-};
+/** When they came and left, by the office and by the taps that are still on this phone. */
+export function arrivalOnPhone(visit: TodayVisit, queue: readonly Queued[]) {
+  const tappedAt = (...whats: VisitTap[]) =>
+    queue.flatMap(({ work, parked }) =>
+      parked === null &&
+      work.kind === 'report' &&
+      work.report.visitId === visit.id &&
+      whats.includes(work.report.what)
+        ? [work.report.at]
+        : [],
+    )[0] ?? null;
+  return {
+    arrivedAt: visit.arrivedAt ?? tappedAt('arrived'),
+    leftAt: visit.leftAt ?? tappedAt('done', 'nobody-home'),
+  };
+}
 
 /** What can be tapped next, the likeliest first. */
 export function tapsFrom(status: VisitStatus): VisitTap[] {

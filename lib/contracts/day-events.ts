@@ -50,6 +50,11 @@ export const asFoundEvent = z.object({
   what: z.literal('as-found'),
   releaseId: id,
   readings: z.array(reading).min(1).max(24),
+  /** What the phone said of them then; the office works it out again for itself. */
+  said: z.object({
+    disagreements: z.array(plainWords(300)).max(24),
+    changes: z.array(plainWords(300)).max(60),
+  }),
 });
 
 export const signOffEvent = z.object({ ...common, what: z.literal('sign-off'), ...signOffFields });

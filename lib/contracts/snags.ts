@@ -1,5 +1,6 @@
 /** Snags on the wire: what is not right yet, who mends it, by when, and how it was closed. */
 import { z } from 'zod';
+import { type SnagKind, type SnagMender, snagKinds, snagMenders } from './snag-kinds';
 
 const id = z.uuid();
 /** Text that the database can keep: no NUL and no half of a surrogate pair. */
@@ -10,12 +11,7 @@ export const plainWords = (most: number) =>
     .max(most)
     .refine((words) => !words.includes('\0') && words.isWellFormed(), 'Type it again, in letters.');
 
-/** fault: not right as it is set. The others are parts: short, damaged, or not the right one. */
-export const snagKinds = ['fault', 'short', 'damaged', 'wrong-part'] as const;
-export type SnagKind = (typeof snagKinds)[number];
-
-export const snagMenders = ['crew', 'bench', 'supplier', 'other-trade', 'customer'] as const;
-export type SnagMender = (typeof snagMenders)[number];
+export { type SnagKind, type SnagMender, snagKinds, snagMenders };
 
 export const MOST_SNAG_PHOTOS = 8;
 const photoIds = z.array(id).max(MOST_SNAG_PHOTOS).default([]);

@@ -13,6 +13,8 @@ export type StopView = {
   date: string;
   parking: string;
   hasAccessCode: boolean;
+  /** It is the day, and the reader is of the crew: the phone may take the code. */
+  mayTakeCode: boolean;
   /** "White oak, clear matt". */
   finish: string;
   /** The newest released sheet of each room; none where the kind of visit sets nothing. */

@@ -5,4 +5,7 @@ export type Holder = {
   shopName: string;
   mayReport: boolean;
   mayMeasure: boolean;
+  /** Of the shop: how things are called, and which clock its times are read by. */
+  region: 'US' | 'UK' | 'AU' | 'EU';
+  zone: string;
 };

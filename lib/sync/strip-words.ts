@@ -8,6 +8,7 @@ export type QueueState = {
   isOffline: boolean;
   /** The day can go on without a signal. */
   isReady: boolean;
+  language?: 'en' | 'es';
 };
 export type StripState = {
   kind: 'sent' | 'waiting' | 'sign-in' | 'parked';
@@ -22,22 +23,46 @@ export type StripState = {
  */
 export function stripState(state: QueueState): StripState {
   const { unsent, personId, isSignedOut, isOffline, isReady } = state;
+  const say = words[state.language ?? 'en'];
   const own = unsent.filter((item) => item.personId === personId);
   const parked = own.filter((item) => item.parked !== null).length;
   const waiting = own.length - parked;
   const others = unsent.length - own.length;
-  const ofOthers = others > 0 ? ` · ${others} of another person` : '';
+  const ofOthers = others > 0 ? ` · ${say.ofOthers(others)}` : '';
   if (parked > 0) {
-    const more = waiting > 0 ? ` · ${waiting} to send` : '';
-    return { kind: 'parked', words: `saved here · ${parked} not taken${more}` };
+    const more = waiting > 0 ? ` · ${say.toSend(waiting)}` : '';
+    return { kind: 'parked', words: `${say.saved} · ${say.notTaken(parked)}${more}` };
   }
   if (waiting === 0) {
-    const ready = isReady && ofOthers === '' ? ' · ready for no signal' : '';
-    return { kind: 'sent', words: `all sent${ready}${ofOthers}` };
+    const ready = isReady && ofOthers === '' ? ` · ${say.ready}` : '';
+    return { kind: 'sent', words: `${say.allSent}${ready}${ofOthers}` };
   }
-  if (isSignedOut) return { kind: 'sign-in', words: `saved here · sign in to send ${waiting}` };
+  if (isSignedOut) return { kind: 'sign-in', words: `${say.saved} · ${say.signIn(waiting)}` };
   return {
     kind: 'waiting',
-    words: `saved here · ${waiting}${isOffline ? ', no signal' : ' to send'}${ofOthers}`,
+    words: `${say.saved} · ${isOffline ? say.noSignal(waiting) : say.toSend(waiting)}${ofOthers}`,
   };
 }
+
+const words = {
+  en: {
+    saved: 'saved here',
+    allSent: 'all sent',
+    ready: 'ready for no signal',
+    toSend: (count: number) => `${count} to send`,
+    noSignal: (count: number) => `${count}, no signal`,
+    notTaken: (count: number) => `${count} not taken`,
+    signIn: (count: number) => `sign in to send ${count}`,
+    ofOthers: (count: number) => `${count} of another person`,
+  },
+  es: {
+    saved: 'guardado aquí',
+    allSent: 'todo enviado',
+    ready: 'listo sin señal',
+    toSend: (count: number) => `${count} por enviar`,
+    noSignal: (count: number) => `${count}, sin señal`,
+    notTaken: (count: number) => `${count} no aceptado`,
+    signIn: (count: number) => `entre para enviar ${count}`,
+    ofOthers: (count: number) => `${count} de otra persona`,
+  },
+};

@@ -36,6 +36,7 @@ export const crewEn: CrewWords = {
   },
   howLate: 'How late will you be?',
   lateMinutes: (minutes) => `${minutes} minutes after the window`,
+  notLate: 'Not late after all',
   pause: 'Pause',
   goOn: 'Go on',
   pauseWhy: 'Why do you pause?',
@@ -183,6 +184,8 @@ export const crewEn: CrewWords = {
   noRoom: 'no room',
   place: 'Unit or place',
   words: 'What is not right?',
+  sayWhat: 'Say what is not right.',
+  unit: 'Unit',
   mender: 'Who mends it?',
   menders: {
     crew: 'Crew',

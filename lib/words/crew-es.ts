@@ -36,6 +36,7 @@ export const crewEs: CrewWords = {
   },
   howLate: '¿Qué tan tarde llegan?',
   lateMinutes: (minutes) => `${minutes} minutos después del horario`,
+  notLate: 'Al final no',
   pause: 'Pausa',
   goOn: 'Seguir',
   pauseWhy: '¿Por qué la pausa?',
@@ -184,6 +185,8 @@ export const crewEs: CrewWords = {
   noRoom: 'ningún cuarto',
   place: 'Gabinete o lugar',
   words: '¿Qué no está bien?',
+  sayWhat: 'Diga qué no está bien.',
+  unit: 'Gabinete',
   mender: '¿Quién lo arregla?',
   menders: {
     crew: 'Equipo',

@@ -28,6 +28,7 @@ export type CrewWords = {
   taps: Record<ReportVisitInput['what'], string>;
   howLate: string;
   lateMinutes: Count;
+  notLate: string;
   pause: string;
   goOn: string;
   pauseWhy: string;
@@ -123,6 +124,8 @@ export type CrewWords = {
   noRoom: string;
   place: string;
   words: string;
+  sayWhat: string;
+  unit: string;
   mender: string;
   menders: Record<SnagMender, string>;
   due: string;

@@ -1,12 +1,12 @@
-import { and, eq, gt, lt } from 'drizzle-orm';
-import { jobs, sites, visitPieces } from '@/db/schema';
+import { and, eq } from 'drizzle-orm';
+import { jobs, sites } from '@/db/schema';
 import type { AccessCodeView } from '@/lib/contracts/stops';
-import { addDays } from '@/lib/time/civil';
-import { localDate, startOfLocalDay } from '@/lib/time/local-moment';
+import { localDate } from '@/lib/time/local-moment';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { notFound, Refusal } from '@/server/base/problem-response';
 import { openText } from '@/server/base/sealed-text';
+import { isVisitToday } from './is-visit-today';
 import { isOfOwnCrew } from './own-crews';
 import { ownVisit } from './own-visit';
 import { codeBelongsTo } from './set-for-crew';
@@ -25,19 +25,7 @@ export async function getAccessCode(
     // The office sees every visit, and no code: it is for who stands at the door.
     if (!(await isOfOwnCrew(tx, ctx, visit.crewId))) throw notFound('visit');
     const date = localDate(ctx.now, ctx.shop.zone);
-    const [today] = await tx
-      .select({ id: visitPieces.id })
-      .from(visitPieces)
-      .where(
-        and(
-          eq(visitPieces.shopId, ctx.shop.id),
-          eq(visitPieces.visitId, visitId),
-          lt(visitPieces.startsAt, startOfLocalDay(addDays(date, 1), ctx.shop.zone)),
-          gt(visitPieces.endsAt, startOfLocalDay(date, ctx.shop.zone)),
-        ),
-      )
-      .limit(1);
-    if (!today || visit.status === 'called-off') throw notToday();
+    if (!(await isVisitToday(tx, ctx, visit))) throw notToday();
     const [site] = await tx
       .select({ id: sites.id, sealed: sites.accessCodeSealed })
       .from(jobs)

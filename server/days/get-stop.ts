@@ -12,6 +12,7 @@ import {
 import type { SheetView } from '@/lib/contracts/rooms';
 import type { StopView } from '@/lib/contracts/stops';
 import { checklistOf } from '@/lib/days/checklists';
+import { may } from '@/lib/permissions';
 import type { VisitKind } from '@/lib/schedule/visit-kind';
 import { localDate } from '@/lib/time/local-moment';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
@@ -19,6 +20,8 @@ import { getSheet } from '@/server/sheets/get-sheet';
 import { readSignOffs } from '@/server/snags/read-sign-offs';
 import { readSnags } from '@/server/snags/read-snags';
 import { newestReleases } from '@/server/walls/newest-releases';
+import { isVisitToday } from './is-visit-today';
+import { isOfOwnCrew } from './own-crews';
 import { ownVisit } from './own-visit';
 
 /** On these a crew sets or carries what was released. */
@@ -72,12 +75,18 @@ export async function getStop(
     .where(and(eq(siteChecks.shopId, shopId), eq(siteChecks.visitId, visitId)))
     .orderBy(asc(siteChecks.at));
   const signed = await readSignOffs(db, ctx, eq(signOffs.visitId, visitId));
+  const hasAccessCode = Boolean(site?.sealed);
   return {
     visitId,
     jobId: visit.jobId,
     date: localDate(ctx.now, ctx.shop.zone),
     parking: site?.parking ?? '',
-    hasAccessCode: Boolean(site?.sealed),
+    hasAccessCode,
+    mayTakeCode:
+      hasAccessCode &&
+      may(ctx.actor.role, 'visits:report') &&
+      (await isOfOwnCrew(db, ctx, visit.crewId)) &&
+      (await isVisitToday(db, ctx, visit)),
     finish: site?.finish ?? '',
     sheets: needsSheets[visit.kind] ? await sheetsOf(ctx, visit.jobId) : [],
     checklist: checklistOf(visit.kind, ctx.shop.rules.checklists),

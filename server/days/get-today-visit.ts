@@ -16,5 +16,5 @@ export async function getTodayVisit(
   const found = await readVisits(ctx.db, ctx, and(eq(visits.id, input.visitId), ofOwnCrews(ctx)));
   const [visit] = await withRooms(ctx, found);
   if (!visit) throw notFound('visit');
-  return visit;
+  return { ...visit, drive: null };
 }

@@ -7,6 +7,7 @@ import { localDate, startOfLocalDay } from '@/lib/time/local-moment';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { readVisits } from '@/server/visits/read-visits';
 import { ofOwnCrews } from './own-crews';
+import { withDrives } from './with-drives';
 import { withRooms } from './with-rooms';
 
 /** What is to be done on a day, in order; a visit of several days is on each day that it has work. */
@@ -33,6 +34,6 @@ export async function getToday(ctx: PersonContext, input: TodayInput): Promise<T
   return {
     date,
     dayWords: formatLocalDay(date, { language: 'en', region }),
-    visits: await withRooms(ctx, found),
+    visits: await withDrives(ctx, await withRooms(ctx, found)),
   };
 }

@@ -1,13 +1,13 @@
 import { and, asc, eq, inArray } from 'drizzle-orm';
 import { jobs, rooms } from '@/db/schema';
-import type { TodayView, VisitView } from '@/lib/contracts/visits';
+import type { TodayVisit, VisitView } from '@/lib/contracts/visits';
 import type { PersonContext } from '@/server/base/context';
 
 /** Visits with what is done there: the rooms of their jobs, and the office's notes. */
 export async function withRooms(
   ctx: PersonContext,
   visits: VisitView[],
-): Promise<TodayView['visits']> {
+): Promise<Omit<TodayVisit, 'drive'>[]> {
   const jobIds = [...new Set(visits.map(({ jobId }) => jobId))];
   if (jobIds.length === 0) return [];
   const notes = await ctx.db

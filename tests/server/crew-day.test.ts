@@ -111,7 +111,11 @@ describe('a crew’s day as it reaches the office', () => {
         value,
       });
     const found = (value: number) =>
-      tap(stop, 'as-found', { releaseId: stop.releaseId, readings: [reading(value)] });
+      tap(stop, 'as-found', {
+        releaseId: stop.releaseId,
+        readings: [reading(value)],
+        said: { disagreements: [], changes: [] },
+      });
     await send(stop, found(corner.wasMm));
     await send(stop, found(corner.wasMm + 40));
     const [same, other] = (await stopOf(stop)).asFound;

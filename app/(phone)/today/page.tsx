@@ -1,5 +1,5 @@
 import type { Metadata } from 'next';
-import { TodayScreen } from '@/components/phone/today-screen';
+import { TodayScreen } from '@/components/day/today-screen';
 import { isLocalDate } from '@/lib/time/civil';
 import { pageContext } from '@/server/base/page-context';
 import { getToday } from '@/server/days/get-today';

@@ -1,8 +1,8 @@
 import type { Metadata } from 'next';
-import { StopScreen } from '@/components/phone/stop-screen';
-import { may } from '@/lib/permissions';
+import { StopScreen } from '@/components/day/stop-screen';
 import { found } from '@/server/base/found';
 import { pageContext } from '@/server/base/page-context';
+import { getStop } from '@/server/days/get-stop';
 import { getTodayVisit } from '@/server/days/get-today-visit';
 
 export const metadata: Metadata = { title: 'Visit' };
@@ -11,11 +11,6 @@ export default async function TodayVisitPage({ params }: { params: Promise<{ vis
   const ctx = await pageContext('visits:read');
   const { visitId } = await params;
   const visit = await found(getTodayVisit(ctx, { visitId }));
-  const { role } = ctx.actor;
-  return (
-    <StopScreen
-      visit={visit}
-      holder={{ mayReport: may(role, 'visits:report'), mayMeasure: may(role, 'walls:measure') }}
-    />
-  );
+  const stop = await getStop(ctx, { visitId });
+  return <StopScreen visit={visit} stop={stop} />;
 }

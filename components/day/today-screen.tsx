@@ -1,10 +1,11 @@
+import { DayOnPhone } from '@/components/phone/day-on-phone';
+import { KeptList } from '@/components/phone/kept-list';
+import { QueueStatus } from '@/components/phone/queue-status';
+import { SignOutPhone } from '@/components/phone/sign-out-phone';
 import { PhoneShell } from '@/components/shell/phone-shell';
 import type { TodayView } from '@/lib/contracts/visits';
 import type { Holder } from '@/lib/sync/holder';
-import { DayOnPhone } from './day-on-phone';
-import { KeptList } from './kept-list';
-import { QueueStatus } from './queue-status';
-import { SignOutPhone } from './sign-out-phone';
+import { LanguageSwitch } from './language-switch';
 import { TodayList } from './today-list';
 
 type TodayScreenProps = { view: TodayView; holder: Pick<Holder, 'shopName' | 'personName'> };
@@ -13,9 +14,10 @@ type TodayScreenProps = { view: TodayView; holder: Pick<Holder, 'shopName' | 'pe
 export function TodayScreen({ view, holder }: TodayScreenProps) {
   return (
     <PhoneShell where={<b>{holder.shopName}</b>} status={<QueueStatus />}>
-      <TodayList view={view} personName={holder.personName} />
+      <TodayList view={view} />
       <KeptList />
       <DayOnPhone />
+      <LanguageSwitch />
       <SignOutPhone personName={holder.personName} />
     </PhoneShell>
   );

@@ -1,0 +1,30 @@
+'use client';
+
+import { TitleBlock } from '@/components/ui/title-block';
+import type { Run } from '@/lib/contracts/wall-book';
+import { settingOrder } from '@/lib/days/setting-order';
+import { useCrew } from './crew-language';
+
+/** What is set first, run by run. */
+export function SettingOrder({ runs }: { runs: readonly Run[] }) {
+  const { words, say } = useCrew();
+  return (
+    <section>
+      <TitleBlock title={words.order} />
+      <ol className="list-decimal divide-y divide-rule border-b border-rule pl-7">
+        {settingOrder(runs).map((one) => (
+          <li key={'runName' in one ? `${one.step} ${one.runName}` : one.step} className="py-2">
+            {'runName' in one ? <b>{one.runName}. </b> : null}
+            {say(words.steps[one.step])}
+            {'runName' in one && one.startAt ? (
+              <span className="block text-graphite">
+                {words.startAt(one.startAt, words.startWhy[one.why])}
+              </span>
+            ) : null}
+          </li>
+        ))}
+      </ol>
+      <p className="pt-2 text-note text-graphite">{words.orderNote}</p>
+    </section>
+  );
+}

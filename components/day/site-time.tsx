@@ -1,0 +1,33 @@
+'use client';
+
+import { useSyncExternalStore } from 'react';
+import { readQueue } from '@/components/phone/queue-store';
+import { useLive } from '@/components/phone/use-live';
+import { arrivalOnPhone } from '@/components/phone/visit-report';
+import type { StopView } from '@/lib/contracts/stops';
+import type { TodayVisit } from '@/lib/contracts/visits';
+import { isPaused, onSiteMinutes } from '@/lib/days/on-site-minutes';
+import { useCrew } from './crew-language';
+
+/** How long they have worked here, without the pauses; new each minute. */
+export function SiteTime({ visit, stop }: { visit: TodayVisit; stop: StopView }) {
+  const { words } = useCrew();
+  const live = useLive('queue', readQueue);
+  const minuteNow = useSyncExternalStore(eachMinute, thisMinute, () => 0);
+  const times = arrivalOnPhone(visit, live.state === 'here' ? live.value : []);
+  if (times.arrivedAt === null || minuteNow === 0) return null;
+  const minutes = onSiteMinutes({ ...times, pauses: stop.pauses }, minuteNow * 60_000);
+  return (
+    <p>
+      {words.onSite(Math.floor(minutes / 60), minutes % 60)}
+      {times.leftAt === null && isPaused(stop.pauses) ? `, ${words.paused}` : ''}
+    </p>
+  );
+}
+
+const thisMinute = () => Math.floor(Date.now() / 60_000);
+
+function eachMinute(listener: () => void): () => void {
+  const timer = setInterval(listener, 15_000);
+  return () => clearInterval(timer);
+}

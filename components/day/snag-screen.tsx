@@ -1,0 +1,110 @@
+'use client';
+
+import { useState } from 'react';
+import { TakePhoto } from '@/components/photos/take-photo';
+import { Button } from '@/components/ui/button';
+import { TextareaField } from '@/components/ui/textarea-field';
+import { TitleBlock } from '@/components/ui/title-block';
+import { Verdict } from '@/components/ui/verdict';
+import type { StopView } from '@/lib/contracts/stops';
+import type { TodayVisit } from '@/lib/contracts/visits';
+import { useCrew } from './crew-language';
+import { KeepFailed } from './keep-failed';
+import { stillHere } from './new-snag-screen';
+import { ScreenFrame } from './screen-frame';
+import { SnagPhotos } from './snag-photos';
+import { snagFacts } from './snags-screen';
+import { goToStop } from './stop-place';
+import { useKeptDraft } from './use-kept-draft';
+import { useTell } from './use-tell';
+
+type SnagScreenProps = { visit: TodayVisit; stop: StopView; snagId: string };
+
+/** One snag: what it is, what the bench says, and how it is closed. */
+export function SnagScreen({ visit, stop, snagId }: SnagScreenProps) {
+  const crew = useCrew();
+  const { words } = crew;
+  const snag = stop.snags.find(({ id }) => id === snagId);
+  if (!snag) {
+    return (
+      <ScreenFrame title={words.snags} back={{ at: 'snags' }}>
+        {words.notKept}
+      </ScreenFrame>
+    );
+  }
+  return (
+    <ScreenFrame title={snag.words} back={{ at: 'snags' }}>
+      <div>
+        <p className="text-lead">{snagFacts(snag, crew)}</p>
+        <p className="text-graphite">{snag.foundWords}</p>
+        <SnagPhotos photoIds={snag.photoIds} />
+        {snag.benchSays ? (
+          <p className="border-l-4 border-blueprint bg-tint px-3 py-2">
+            {words.benchSays(snag.benchSays)}
+            {snag.benchReadyOn ? `, ${words.dueOn(snag.benchReadyOn)}` : ''}
+          </p>
+        ) : null}
+      </div>
+      {snag.closedAt ? (
+        <section>
+          <TitleBlock
+            title={<Verdict kind="confirmed">{words.closed}</Verdict>}
+            meta={snag.closedBy}
+          />
+          <p className="py-2">{snag.closedWords}</p>
+          <SnagPhotos photoIds={snag.closedPhotoIds} />
+        </section>
+      ) : (
+        <Closing visit={visit} snagId={snagId} roomId={snag.roomId} />
+      )}
+    </ScreenFrame>
+  );
+}
+
+type ClosingProps = { visit: TodayVisit; snagId: string; roomId: string | null };
+
+function Closing({ visit, snagId, roomId }: ClosingProps) {
+  const { words } = useCrew();
+  const { tell, isFailed } = useTell(visit.id);
+  const [isAsking, setIsAsking] = useState(false);
+  const { draft, change, drop } = useKeptDraft<{ words: string; photoIds: string[] }>(
+    `close:${snagId}`,
+    { words: '', photoIds: [] },
+  );
+  if (!draft) return null;
+  const close = async () => {
+    const photoIds = await stillHere(draft.photoIds);
+    const said = draft.words.trim();
+    if (said === '' && photoIds.length === 0) return setIsAsking(true);
+    if (!(await tell({ what: 'close-snag', snagId, words: said, photoIds }))) return;
+    drop();
+    goToStop({ at: 'snags' });
+  };
+  return (
+    <section className="flex flex-col gap-3">
+      <TitleBlock title={words.closeIt} />
+      <TextareaField
+        label={words.closeHow}
+        value={draft.words}
+        maxLength={400}
+        error={isAsking && draft.words.trim() === '' ? words.closeNeeds : undefined}
+        onChange={(event) => change({ words: event.target.value })}
+      />
+      <SnagPhotos photoIds={draft.photoIds} />
+      <TakePhoto
+        roomId={roomId}
+        jobId={visit.jobId}
+        wallId={null}
+        place={words.closed}
+        onKept={(photoId) => {
+          change({ photoIds: [...draft.photoIds, photoId] });
+          goToStop({ at: 'photo', photoId, kind: '', snagId });
+        }}
+      />
+      <KeepFailed isFailed={isFailed} />
+      <Button size="thumb" onClick={close}>
+        {words.closeIt}
+      </Button>
+    </section>
+  );
+}

@@ -1,0 +1,74 @@
+'use client';
+
+import { EmptyState } from '@/components/ui/empty-state';
+import { LinkButton } from '@/components/ui/link-button';
+import { Verdict } from '@/components/ui/verdict';
+import type { SnagView } from '@/lib/contracts/snags';
+import type { StopView } from '@/lib/contracts/stops';
+import { type Crew, useCrew } from './crew-language';
+import { ScreenFrame } from './screen-frame';
+import { stopHref } from './stop-place';
+
+/** Every snag of the job: the open ones first, so that a return visit finds them together. */
+export function SnagsScreen({ stop }: { stop: StopView }) {
+  const { words } = useCrew();
+  const open = stop.snags.filter(({ closedAt }) => closedAt === null);
+  const closed = stop.snags.filter(({ closedAt }) => closedAt !== null);
+  return (
+    <ScreenFrame title={words.snags} meta={words.open(open.length)}>
+      <LinkButton size="thumb" href={stopHref({ at: 'new-snag', kind: 'fault' })}>
+        {words.newSnag}
+      </LinkButton>
+      {stop.snags.length === 0 ? (
+        <EmptyState title={words.noSnags}>{words.noSnagsMore}</EmptyState>
+      ) : (
+        <ul className="divide-y divide-rule border-b border-rule">
+          {[...open, ...closed].map((snag) => (
+            <SnagLine key={snag.id} snag={snag} />
+          ))}
+        </ul>
+      )}
+    </ScreenFrame>
+  );
+}
+
+function SnagLine({ snag }: { snag: SnagView }) {
+  const crew = useCrew();
+  const { words } = crew;
+  return (
+    <li>
+      <a
+        href={stopHref({ at: 'snag', snagId: snag.id })}
+        className="flex min-h-thumb touch-manipulation items-start justify-between gap-3 py-3 active:bg-tint"
+      >
+        <span>
+          <span className="block text-lead leading-tight font-bold">{snag.words}</span>
+          <span className="block">{snagFacts(snag, crew)}</span>
+          {snag.benchSays ? <span className="block">{words.benchSays(snag.benchSays)}</span> : null}
+        </span>
+        <span className="flex shrink-0 items-center gap-2">
+          {snag.closedAt ? (
+            <Verdict kind="confirmed">{words.closed}</Verdict>
+          ) : snag.isLate ? (
+            <Verdict kind="late" />
+          ) : null}
+          <span aria-hidden="true">›</span>
+        </span>
+      </a>
+    </li>
+  );
+}
+
+/** "Part short · Kitchen, sink 36 · Bench · by Fri, Dec 4". */
+export function snagFacts(snag: SnagView, { words }: Crew): string {
+  const where = [snag.roomName, snag.place].filter(Boolean).join(', ');
+  return [
+    words.snagKinds[snag.kind],
+    where,
+    words.menders[snag.mender],
+    snag.dueOn ? words.dueOn(snag.dueWords ?? snag.dueOn) : '',
+    snag.isAfterSignOff ? words.afterSignOff : '',
+  ]
+    .filter(Boolean)
+    .join(' · ');
+}

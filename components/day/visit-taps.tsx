@@ -1,0 +1,83 @@
+'use client';
+
+import { useState } from 'react';
+import { usePersonId } from '@/components/phone/phone-person';
+import { keepWork, readQueue } from '@/components/phone/queue-store';
+import { useLive } from '@/components/phone/use-live';
+import { statusOnPhone, tapsFrom, type VisitTap } from '@/components/phone/visit-report';
+import { Button } from '@/components/ui/button';
+import type { PauseReason } from '@/lib/contracts/day-events';
+import type { StopView } from '@/lib/contracts/stops';
+import type { TodayVisit } from '@/lib/contracts/visits';
+import { isPaused } from '@/lib/days/on-site-minutes';
+import { useCrew } from './crew-language';
+import { HowLate } from './how-late';
+import { KeepFailed } from './keep-failed';
+import { useTell } from './use-tell';
+import { WhyPause } from './why-pause';
+
+type VisitTapsProps = { visit: TodayVisit; stop: StopView | null };
+
+/** One tap tells the office, and the office the customer; without a signal it is told later. */
+export function VisitTaps({ visit, stop }: VisitTapsProps) {
+  const personId = usePersonId();
+  const { words } = useCrew();
+  const live = useLive('queue', readQueue);
+  const { tell, isFailed } = useTell(visit.id);
+  const [isNotKept, setIsNotKept] = useState(false);
+  const [asks, setAsks] = useState<'how-late' | 'why-pause' | null>(null);
+  const status = statusOnPhone(visit, live.state === 'here' ? live.value : []);
+  const rests = stop !== null && isPaused(stop.pauses);
+
+  const report = async (what: VisitTap, lateMinutes?: number) => {
+    if (what === 'running-late' && lateMinutes === undefined) return setAsks('how-late');
+    setAsks(null);
+    try {
+      const at = new Date().toISOString();
+      const told = { visitId: visit.id, what, at, lateMinutes };
+      await keepWork(personId, [{ kind: 'report', report: told }]);
+      setIsNotKept(false);
+    } catch {
+      setIsNotKept(true);
+    }
+  };
+  const pause = async (why: PauseReason) => {
+    if (await tell({ what: 'pause', why })) setAsks(null);
+  };
+
+  if (asks === 'how-late') {
+    return (
+      <HowLate onSay={(minutes) => report('running-late', minutes)} onLeave={() => setAsks(null)} />
+    );
+  }
+  if (asks === 'why-pause') return <WhyPause onSay={pause} onLeave={() => setAsks(null)} />;
+  const taps = tapsFrom(status);
+  if (taps.length === 0) return null;
+  return (
+    <div className="flex flex-col gap-2">
+      {status === 'on-site' && rests ? (
+        <Button size="thumb" onClick={() => void tell({ what: 'go-on' })}>
+          {words.goOn}
+        </Button>
+      ) : null}
+      <div className="grid grid-cols-2 gap-2">
+        {taps.map((what, at) => (
+          <Button
+            key={what}
+            size="thumb"
+            look={at === 0 && !rests ? 'fill' : what === 'nobody-home' ? 'chalk' : 'line'}
+            onClick={() => report(what)}
+          >
+            {words.taps[what]}
+          </Button>
+        ))}
+        {status === 'on-site' && !rests ? (
+          <Button size="thumb" look="line" onClick={() => setAsks('why-pause')}>
+            {words.pause}
+          </Button>
+        ) : null}
+      </div>
+      <KeepFailed isFailed={isNotKept || isFailed} />
+    </div>
+  );
+}
