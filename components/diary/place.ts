@@ -54,15 +54,16 @@ export function visitAt(
   };
 }
 
-/** The next day that is worked, later or earlier; ten weeks of closed days are gone past and no more. */
+/** The next day that is worked, later or earlier; the day itself where none is within ten weeks. */
 export function workdayBeside(
   date: LocalDate,
   step: 1 | -1,
   pattern: Pick<WorkingPattern, 'workdays' | 'closedDays'>,
 ): LocalDate {
-  let day = addDays(date, step);
-  for (let left = 70; left > 0 && !isWorkday(day, pattern); left -= 1) day = addDays(day, step);
-  return day;
+  for (let ahead = 1, day = addDays(date, step); ahead <= 70; ahead++, day = addDays(day, step)) {
+    if (isWorkday(day, pattern)) return day;
+  }
+  return date;
 }
 
 /** A time of day some minutes later, kept within the day. Example: 30 minutes after "23:45" is "23:45". */

@@ -120,19 +120,31 @@ export function TimesPanel(props: TimesPanelProps) {
         />
       ) : null}
       <FormError problem={booking.problem} shownFields={[]} />
-      <footer className="flex flex-wrap gap-2 border-t border-rule pt-2 max-lg:sticky max-lg:bottom-0 max-lg:bg-paper">
+      <footer className="flex flex-wrap gap-2 border-t border-rule pt-2 max-lg:sticky max-lg:-bottom-4 max-lg:bg-paper max-lg:pb-4">
         <Button
           onClick={() => book()}
           disabled={!opening}
           keyName="Enter"
+          className="max-lg:min-h-thumb max-lg:flex-1"
           busyText={booking.isPending ? 'Booking…' : undefined}
         >
           {subject.visit ? 'Move it there' : 'Book it'}
         </Button>
-        <Button look="line" onClick={hold} disabled={!opening} keyName="H">
+        <Button
+          look="line"
+          onClick={hold}
+          disabled={!opening}
+          keyName="H"
+          className="max-lg:min-h-thumb"
+        >
           Keep 15 min
         </Button>
-        <Button look="line" onClick={props.onByHand} keyName="B">
+        <Button
+          look="plain"
+          onClick={props.onByHand}
+          keyName="B"
+          className="px-1.5 max-lg:min-h-thumb"
+        >
           By hand
         </Button>
       </footer>
