@@ -1,4 +1,5 @@
 /** Some forty invented jobs at every stage, in words; days are working days from the day of seeding. */
+import type { SnagKind, SnagMender } from '@/lib/contracts/snags';
 import type { Stage } from '@/lib/schedule/stages';
 import type { VisitKind } from '@/lib/schedule/visit-kind';
 import type { RoomPlan } from './demo-rooms';
@@ -14,6 +15,18 @@ export type DemoVisit = {
   /** Open: booked and not answered. */
   isConfirmed: boolean;
   customerSays?: string;
+  /** Nobody was home. */
+  isMissed?: boolean;
+};
+
+export type DemoSnag = {
+  kind: SnagKind;
+  place: string;
+  words: string;
+  mender: SnagMender;
+  /** Working days from today on which it was found, and mended where it is. */
+  foundDay: number;
+  closedDay?: number;
 };
 
 export type DemoJob = {
@@ -32,6 +45,7 @@ export type DemoJob = {
   readyDay?: number;
   room?: RoomPlan;
   visits?: DemoVisit[];
+  snags?: DemoSnag[];
 };
 
 const measure = (crew: CrewKey, day: number, time: string, isConfirmed = true): DemoVisit => ({
@@ -401,6 +415,22 @@ export const demoJobs: DemoJob[] = [
     readyDay: -14,
     floorAgreed: true,
     visits: [measure('ines', -50, '09:00'), install('north', -9, 960), goBack('north', 2, '08:00')],
+    snags: [
+      {
+        kind: 'short',
+        place: 'Filler, right end',
+        words: 'Filler 4 mm short at the top; the wall leans away. Make a new one.',
+        mender: 'bench',
+        foundDay: -8,
+      },
+      {
+        kind: 'fault',
+        place: 'Drawer base 24',
+        words: 'Top drawer rubs on the left.',
+        mender: 'crew',
+        foundDay: -8,
+      },
+    ],
   },
   {
     customer: 'Gwen Ashlar',
@@ -413,6 +443,15 @@ export const demoJobs: DemoJob[] = [
     readyDay: -16,
     floorAgreed: true,
     visits: [measure('tor', -52, '09:00'), install('south', -10, 480)],
+    snags: [
+      {
+        kind: 'damaged',
+        place: 'Tall unit, door',
+        words: 'Corner of the door bruised in the van.',
+        mender: 'bench',
+        foundDay: -10,
+      },
+    ],
   },
   // Signed off.
   {
@@ -425,7 +464,21 @@ export const demoJobs: DemoJob[] = [
     room: 'plain',
     readyDay: -24,
     floorAgreed: true,
-    visits: [measure('ines', -60, '09:00'), install('north', -18, 960)],
+    visits: [
+      measure('ines', -60, '09:00'),
+      install('north', -18, 960),
+      goBack('north', -12, '08:00'),
+    ],
+    snags: [
+      {
+        kind: 'wrong-part',
+        place: 'Wall unit 30',
+        words: 'Hinged left, drawn right.',
+        mender: 'bench',
+        foundDay: -17,
+        closedDay: -12,
+      },
+    ],
   },
   {
     customer: 'Mae Bright',
@@ -449,7 +502,11 @@ export const demoJobs: DemoJob[] = [
     room: 'plain',
     readyDay: -30,
     floorAgreed: true,
-    visits: [measure('ines', -66, '09:00'), install('south', -24, 960)],
+    visits: [
+      { ...measure('ines', -67, '13:00', false), isMissed: true },
+      measure('ines', -66, '09:00'),
+      install('south', -24, 960),
+    ],
   },
   {
     customer: 'Tess Lamb',

@@ -7,7 +7,7 @@ export type StoryLine = {
   at: Date;
   by: StaffKey | { customer: string };
   verb: string;
-  subjectKind: 'job' | 'visit' | 'room' | 'release';
+  subjectKind: 'job' | 'visit' | 'room' | 'release' | 'snag';
   subjectId: string;
   summary: string;
 };

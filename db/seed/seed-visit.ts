@@ -29,6 +29,7 @@ export async function seedVisit(
   const crew = shop.crews[visit.crew];
   const isDone = last.endsAt <= now && visit.day < 0;
   const hasBegun = visit.day < 0;
+  const went = howItWent(customer, visit);
   const visitId = randomUUID();
   await tx.insert(visits).values({
     id: visitId,
@@ -36,16 +37,26 @@ export async function seedVisit(
     jobId,
     kind: visit.kind,
     crewId: crew.id,
-    status: isDone ? 'done' : hasBegun ? 'on-site' : visit.isConfirmed ? 'confirmed' : 'booked',
+    status: visit.isMissed
+      ? 'missed'
+      : isDone
+        ? 'done'
+        : hasBegun
+          ? 'on-site'
+          : visit.isConfirmed
+            ? 'confirmed'
+            : 'booked',
     startsAt,
     endsAt: last.endsAt,
     windowStartsAt: startsAt,
     windowEndsAt: new Date(startsAt.getTime() + rules.booking.windowMinutes * 60_000),
     workMinutes: visit.workMinutes,
     customerSays: visit.customerSays ?? '',
-    confirmedAt: visit.isConfirmed ? new Date(startsAt.getTime() - 3 * 86_400_000) : null,
-    arrivedAt: hasBegun ? startsAt : null,
-    leftAt: isDone ? last.endsAt : null,
+    confirmedAt: visit.isConfirmed
+      ? new Date(startsAt.getTime() - went.confirmedHoursBefore * 3_600_000)
+      : null,
+    arrivedAt: hasBegun && !visit.isMissed ? later(startsAt, went.lateMin) : null,
+    leftAt: isDone && !visit.isMissed ? later(last.endsAt, went.longerMin) : null,
   });
   await shop.linkVisit(tx, { shopId, visitId, endsAt: last.endsAt });
   for (const piece of pieces) {
@@ -58,6 +69,19 @@ export async function seedVisit(
       .values(crew.personIds.map((personId) => ({ shopId, pieceId, personId, ...piece })));
   }
   return storyOf(shop, { visitId, customer, visit, startsAt, endsAt: last.endsAt });
+}
+
+const later = (at: Date, minutes: number) => new Date(at.getTime() + minutes * 60_000);
+
+/** As days go: most crews a little after the start of the window, a few past its end; some work takes longer. */
+function howItWent(customer: string, { kind, workMinutes }: DemoVisit) {
+  const letters = [...customer, ...kind].reduce((sum, letter) => sum + letter.charCodeAt(0), 0);
+  const isLate = letters % 9 === 0;
+  return {
+    lateMin: isLate ? 140 : (letters * 7) % 45,
+    longerMin: Math.round((((letters * 13) % 40) - 12) * (workMinutes / 1_000)),
+    confirmedHoursBefore: letters % 8 === 0 ? 1 : 70,
+  };
 }
 
 function storyOf(
@@ -96,7 +120,8 @@ function storyOf(
           ),
         ]
       : []),
-    ...(isPast
+    ...(isPast && visit.isMissed ? [line(startsAt, first, 'report-visit', ': nobody home')] : []),
+    ...(isPast && !visit.isMissed
       ? [
           line(startsAt, first, 'report-visit', ': arrived'),
           line(endsAt, first, 'report-visit', ': done'),
