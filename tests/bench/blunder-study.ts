@@ -1,7 +1,9 @@
 /**
  * How often one wrong reading is noticed and rightly named, over random rooms.
- * Run: npx tsx tests/bench/blunder-study.ts [--rooms 2000] [--seed 1] [--only loose,crooked-1,crooked-3]
+ * Run: npx tsx tests/bench/blunder-study.ts [--rooms 2000] [--from 0] [--seed 1] [--only loose,crooked-3] [--json]
+ * With --json the counts of a slice are printed to be added up: --add slice.json slice.json …
  */
+import { readFileSync } from 'node:fs';
 import { pathToFileURL } from 'node:url';
 import { CROOKED, STRAIGHT } from '../lib/measure/random-room';
 import { type Condition, type StudyRow, studyCondition } from './blunder-trials';
@@ -54,16 +56,37 @@ function printTable(condition: Condition, rows: StudyRow[]): void {
     'cells: alarmed / named first / named among equals / wrongly named / named after the one reading asked for, %',
   );
   const head = Array.from({ length: MOST_DIAGONALS + 1 }, (_, n) => `${n} diagonals`.padEnd(36));
-  console.log(`${'slip'.padEnd(15)}${head.join('')}`);
+  console.log(`${'slip (trials)'.padEnd(22)}${head.join('')}`);
   for (const slip of new Set(rows.map((row) => row.slip))) {
-    const cells = rows
-      .filter((row) => row.slip === slip)
-      .map((row) => {
-        const share = (count: number) => ((100 * count) / row.trials).toFixed(1);
-        const { alarmed, first, among, wrong, settled } = row;
-        return [alarmed, first, among, wrong, settled].map(share).join(' / ').padEnd(36);
-      });
-    console.log(`${slip.padEnd(15)}${cells.join('')}`);
+    const ofSlip = rows.filter((row) => row.slip === slip);
+    const cells = ofSlip.map((row) => {
+      const share = (count: number) => ((100 * count) / Math.max(1, row.trials)).toFixed(1);
+      const { alarmed, first, among, wrong, settled } = row;
+      return [alarmed, first, among, wrong, settled].map(share).join(' / ').padEnd(36);
+    });
+    console.log(`${`${slip} (${ofSlip[0]?.trials ?? 0})`.padEnd(22)}${cells.join('')}`);
+  }
+}
+
+type Slice = { condition: string; rows: StudyRow[] };
+
+/** Slices of one study in one table: the counts are added up. */
+function addUp(slices: Slice[]): void {
+  for (const condition of CONDITIONS) {
+    const [first, ...others] = slices.filter((slice) => slice.condition === condition.name);
+    if (!first) continue;
+    const rows = first.rows.map((row, i) => {
+      const sum = { ...row };
+      for (const other of others) {
+        const more = other.rows[i];
+        if (more?.slip !== row.slip || more.diagonals !== row.diagonals) throw new Error(row.slip);
+        for (const count of ['trials', 'alarmed', 'first', 'among', 'wrong', 'settled'] as const) {
+          sum[count] += more[count];
+        }
+      }
+      return sum;
+    });
+    printTable(condition, rows);
   }
 }
 
@@ -73,13 +96,23 @@ function argument(name: string, otherwise: string): string {
 }
 
 function main(): void {
+  const add = process.argv.indexOf('--add');
+  if (add > 0) {
+    addUp(process.argv.slice(add + 1).map((file): Slice => JSON.parse(readFileSync(file, 'utf8'))));
+    return;
+  }
   const rooms = Number(argument('rooms', '2000'));
   const seed = Number(argument('seed', '1'));
+  const from = Number(argument('from', '0'));
   const only = argument('only', '').split(',').filter(Boolean);
   for (const condition of CONDITIONS) {
     if (only.length > 0 && !only.includes(condition.name)) continue;
     const began = performance.now();
-    const rows = studyCondition(condition, { rooms, seed, mostDiagonals: MOST_DIAGONALS });
+    const rows = studyCondition(condition, { rooms, seed, from, mostDiagonals: MOST_DIAGONALS });
+    if (process.argv.includes('--json')) {
+      console.log(JSON.stringify({ condition: condition.name, rows } satisfies Slice));
+      continue;
+    }
     printTable(condition, rows);
     console.log(`${rooms} rooms in ${((performance.now() - began) / 1000).toFixed(0)} s`);
   }

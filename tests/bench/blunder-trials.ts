@@ -48,28 +48,47 @@ export type StudyRow = {
   settled: number;
 };
 
-export const SLIPS = ['none', ...SLIP_LENGTHS_MM.map(({ name }) => name), 'digits swapped'];
+const SLIP_NAMES = [...SLIP_LENGTHS_MM.map(({ name }) => name), 'digits swapped'];
+/** Each room is tried without a slip and with two of the six kinds in turn, so that rooms go further. */
+const SLIPS_PER_ROOM = 2;
 const FINDER_U_DEG = 0.12;
 /** Own part of a reading by the one tape: to the millimetre, repeating to 0.5. */
 const CORNER_U_MM = Math.hypot(0.5, 1 / Math.sqrt(12));
 const LEAST_WALLS = 4;
 const MOST_WALLS = 10;
 
+export type StudySize = {
+  rooms: number;
+  seed: number;
+  /** Number of the first room: slices of one study are other rooms. */
+  from?: number;
+  mostDiagonals: number;
+};
+
 export function studyCondition(
   condition: Condition,
-  { rooms, seed, mostDiagonals }: { rooms: number; seed: number; mostDiagonals: number },
+  { rooms, seed, from = 0, mostDiagonals }: StudySize,
 ): StudyRow[] {
   const rows = new Map<string, StudyRow>();
-  for (let n = 0; n < rooms; n++) {
+  for (const slip of ['none', ...SLIP_NAMES]) {
+    for (let diagonals = 0; diagonals <= mostDiagonals; diagonals++) rowOf(rows, slip, diagonals);
+  }
+  for (let n = from; n < from + rooms; n++) {
     const random = seeded(seed * 1_000_003 + n);
     const wallCount = LEAST_WALLS + (n % (MOST_WALLS - LEAST_WALLS + 1));
     const trial = beginRoom(condition, random, wallCount);
     for (let diagonals = 0; diagonals <= mostDiagonals; diagonals++) {
       if (diagonals > 0) takeDiagonal(trial);
-      for (const slip of SLIPS) tryOne(trial, rowOf(rows, slip, diagonals));
+      for (const slip of slipsOf(n)) tryOne(trial, rowOf(rows, slip, diagonals));
     }
   }
   return [...rows.values()];
+}
+
+function slipsOf(room: number): string[] {
+  const turn = Math.floor(room / (MOST_WALLS - LEAST_WALLS + 1)) * SLIPS_PER_ROOM;
+  const slips = Array.from({ length: SLIPS_PER_ROOM }, (_, i) => (turn + i) % SLIP_NAMES.length);
+  return ['none', ...slips.map((slip) => SLIP_NAMES[slip] ?? '')];
 }
 
 function rowOf(rows: Map<string, StudyRow>, slip: string, diagonals: number): StudyRow {
