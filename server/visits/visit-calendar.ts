@@ -38,11 +38,11 @@ export function visitCalendar(
     status: method === 'CANCEL' ? ICalEventStatus.CANCELLED : ICalEventStatus.CONFIRMED,
   });
   const organizer = shop.email || addressIn(env().emailFrom);
-  event.organizer({ name: shop.name, email: organizer });
+  event.organizer({ name: nameOr(shop.name, organizer), email: organizer });
   // RFC 5546, 3.2: PUBLISH names no attendee, REQUEST and CANCEL name who is asked.
   if (method !== 'PUBLISH' && visit.email) {
     event.createAttendee({
-      name: visit.customerName,
+      name: nameOr(visit.customerName, visit.email),
       email: visit.email,
       role: ICalAttendeeRole.REQ,
       status:
@@ -50,6 +50,11 @@ export function visitCalendar(
     });
   }
   return calendar.toString();
+}
+
+/** A name on one line; who has none is called by the address. */
+function nameOr(name: string, address: string): string {
+  return name.replace(/[\p{Cc}"]+/gu, ' ').trim() || address;
 }
 
 /** "Setwell <no-reply@setwell.example>" → "no-reply@setwell.example" */
