@@ -17,6 +17,8 @@ export const paths = {
   diaryOn: (date: string) => `/diary?on=${part(date)}`,
   /** The shop is late: what it moves. */
   slip: () => '/diary/late',
+  /** The same, begun with a job that is so many working days late. */
+  slipOf: (jobId: string, days: number) => `/diary/late?job=${part(jobId)}&days=${days}`,
   days: () => '/days',
   day: (date: string) => `/days/${part(date)}`,
   jobs: () => '/jobs',

@@ -23,6 +23,7 @@ const kinds: Record<SchedulerItemKind, { words: string; kind: VerdictKind }> = {
   'said-stop': { words: 'no more texts', kind: 'problem' },
   'running-late': { words: 'running late', kind: 'late' },
   'nobody-home': { words: 'nobody home', kind: 'problem' },
+  'cabinets-late': { words: 'cabinets late', kind: 'late' },
 };
 
 /** What somebody of the office has to answer, the longest waiting first; gone when it is seen to. */

@@ -137,6 +137,7 @@ export const schedulerItemKinds = [
   'said-stop',
   'running-late',
   'nobody-home',
+  'cabinets-late',
 ] as const;
 
 /** The scheduler's list: what a person of the office has to look at, until it is ticked off. */

@@ -65,7 +65,14 @@ export const changeJobInput = z.object({
 export type ChangeJobInput = z.infer<typeof changeJobInput>;
 
 /** The bench: cabinets ready now or on a day. */
-export const sayReadyInput = z.object({ jobId: id, readyOn: z.iso.date().nullable() });
+export const sayReadyInput = z.object({
+  jobId: id,
+  readyOn: z.iso.date().nullable(),
+  /** Where they stand, once they do. */
+  where: z.string().trim().max(120).optional(),
+  /** Why they are late or short, until they do. */
+  why: z.string().trim().max(400).optional(),
+});
 export type SayReadyInput = z.infer<typeof sayReadyInput>;
 
 export const jobIdInput = z.object({ jobId: id });

@@ -44,6 +44,7 @@ export const schedulerItemKind = z.enum([
   'said-stop',
   'running-late',
   'nobody-home',
+  'cabinets-late',
 ]);
 export type SchedulerItemKind = z.infer<typeof schedulerItemKind>;
 

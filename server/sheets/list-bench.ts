@@ -1,16 +1,17 @@
 import { and, asc, eq, inArray } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { customers, jobs, releaseReceipts, releases, rooms, visits } from '@/db/schema';
-import type { BenchRow } from '@/lib/contracts/rooms';
+import type { BenchSheet } from '@/lib/contracts/bench';
+import { daysBetween } from '@/lib/time/civil';
 import { formatLocalDayShort } from '@/lib/time/format-civil';
-import { formatDayShort } from '@/lib/time/format-instant';
+import { localDate } from '@/lib/time/local-moment';
 import type { TextLocale } from '@/lib/time/text-locale';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { momentWords } from '@/server/walls/moment-words';
 import { newestReleases } from '@/server/walls/newest-releases';
 
 /** What the bench has to build: the newest sheet of each room, first install first. */
-export async function listBench(ctx: PersonContext): Promise<BenchRow[]> {
+export async function listBench(ctx: PersonContext): Promise<BenchSheet[]> {
   mustBeAllowed(ctx, 'sheets:read');
   const roomRows = await ctx.db
     .select({ roomId: rooms.id })
@@ -42,14 +43,22 @@ export async function listBench(ctx: PersonContext): Promise<BenchRow[]> {
         compare(one.releasedAt.getTime(), other.releasedAt.getTime()) ||
         one.jobNumber - other.jobNumber,
     )
-    .map(({ releasedAt, takenUpAt, ...row }) => ({
-      ...row,
-      releasedAtWords: momentWords(ctx, releasedAt),
-      takenUpWords: takenUpAt ? momentWords(ctx, takenUpAt) : null,
-      isSuperseded: newest.get(row.roomId)?.isSuperseded ?? false,
-      installWords: dayWords(ctx, installs.get(row.jobId)),
-      readyWords: row.readyOn ? formatLocalDayShort(row.readyOn, localeOf(ctx)) : null,
-    }));
+    .map(({ releasedAt, takenUpAt, stage, ...row }) => {
+      const install = installs.get(row.jobId);
+      const needOn = install ? localDate(install, ctx.shop.zone) : null;
+      return {
+        ...row,
+        releasedAtWords: momentWords(ctx, releasedAt),
+        takenUpWords: takenUpAt ? momentWords(ctx, takenUpAt) : null,
+        isSuperseded: newest.get(row.roomId)?.isSuperseded ?? false,
+        needOn,
+        needWords: dayWords(ctx, needOn),
+        lateDays: needOn && row.readyOn ? Math.max(0, daysBetween(needOn, row.readyOn)) : 0,
+        readyWords: dayWords(ctx, row.readyOn),
+        isReady: stage === 'ready',
+        today: localDate(ctx.now, ctx.shop.zone),
+      };
+    });
 }
 
 function readSheets(ctx: PersonContext, releaseIds: string[]) {
@@ -66,6 +75,10 @@ function readSheets(ctx: PersonContext, releaseIds: string[]) {
       releasedAt: releases.releasedAt,
       takenUpAt: releaseReceipts.takenUpAt,
       readyOn: jobs.readyOn,
+      readyWhere: jobs.readyWhere,
+      readyWhy: jobs.readyWhy,
+      finish: jobs.finish,
+      stage: jobs.stage,
     })
     .from(releases)
     .innerJoin(rooms, eq(rooms.id, releases.roomId))
@@ -96,8 +109,8 @@ async function firstInstalls(
   return new Map(found.map(({ jobId, startsAt }) => [jobId, startsAt]));
 }
 
-function dayWords(ctx: PersonContext, startsAt: Date | undefined): string | null {
-  return startsAt ? formatDayShort(startsAt, ctx.shop.zone, localeOf(ctx)) : null;
+function dayWords(ctx: PersonContext, date: string | null): string | null {
+  return date ? formatLocalDayShort(date, localeOf(ctx)) : null;
 }
 
 const localeOf = (ctx: PersonContext): TextLocale => ({ language: 'en', region: ctx.shop.region });

@@ -7,18 +7,19 @@ import { POST as takeUpRoute } from '@/app/api/sheets/[releaseId]/take-up/route'
 import { POST as releaseRoute, GET as sheetRoute } from '@/app/api/sheets/route';
 import { crews, releases, shops, visits } from '@/db/schema';
 import type { RoomRow } from '@/lib/contracts/jobs';
-import type { BenchRow, FitView, SheetView } from '@/lib/contracts/rooms';
+import type { BenchSheet } from '@/lib/contracts/bench';
+import type { FitView, SheetView } from '@/lib/contracts/rooms';
 import { standingIds } from '@/lib/measure/standing-readings';
 import type { Role } from '@/lib/permissions';
 import { database } from '@/server/base/database';
 import { refusedConstraint } from '@/server/base/database-refusal';
 import { getJob } from '@/server/jobs/get-job';
-import { sayReady } from '@/server/jobs/say-ready';
 import { getFit } from '@/server/sheets/get-fit';
 import { releaseSheet } from '@/server/sheets/release-sheet';
 import { listRooms } from '@/server/walls/list-rooms';
 import { recordReadings } from '@/server/walls/record-readings';
 import { saveRuns } from '@/server/walls/save-runs';
+import { sayReady } from '@/server/visits/say-ready';
 import { callRoute } from '../help/call-route';
 import { contextOf, cookieOf, makeShop, type TestShop } from '../help/make-shop';
 import { lengthOn, type PutKitchen, putDrawnKitchen, putKitchen } from '../help/put-kitchen';
@@ -228,11 +229,11 @@ describe('sheets', () => {
     await readMore(own, 1);
     expect(await roomOf()).toMatchObject({ revision: 'A', isSuperseded: true });
     const bench = await callRoute(benchRoute, { method: 'GET', cookie: cookies.bench });
-    expect((bench.body as BenchRow[]).find(({ roomId }) => roomId === own.roomId)).toMatchObject({
+    expect((bench.body as BenchSheet[]).find(({ roomId }) => roomId === own.roomId)).toMatchObject({
       revision: 'A',
       isSuperseded: true,
       takenUpWords: null,
-      installWords: null,
+      needWords: null,
     });
   });
 
@@ -270,14 +271,14 @@ describe('sheets', () => {
       await release(own.roomId);
       const listed = async (cookie: string) => {
         const { body } = await callRoute(benchRoute, { method: 'GET', cookie });
-        return (body as BenchRow[]).map(({ roomId }) => roomId);
+        return (body as BenchSheet[]).map(({ roomId }) => roomId);
       };
       expect(await listed(cookies.bench)).toContain(own.roomId);
       expect(await listed(otherCookie)).not.toContain(own.roomId);
       const ctx = await contextOf(shop, 'bench');
       await sayReady(ctx, { jobId: own.jobId, readyOn: '2026-12-01' });
       const rows = (await callRoute(benchRoute, { method: 'GET', cookie: cookies.bench })).body;
-      expect((rows as BenchRow[]).find(({ roomId }) => roomId === own.roomId)).toMatchObject({
+      expect((rows as BenchSheet[]).find(({ roomId }) => roomId === own.roomId)).toMatchObject({
         readyOn: '2026-12-01',
       });
     });
@@ -318,7 +319,7 @@ describe('sheets', () => {
           workMinutes: 60,
         });
       }
-      const rows = (await callRoute(benchRoute, { method: 'GET', cookie })).body as BenchRow[];
+      const rows = (await callRoute(benchRoute, { method: 'GET', cookie })).body as BenchSheet[];
       expect(rows.map(({ roomId }) => roomId)).toEqual([...rooms].reverse());
       expect(rows.map(({ installWords }) => installWords)).toEqual([
         'Mon, Jan 11',

@@ -1,5 +1,5 @@
 import { sayReadyInput } from '@/lib/contracts/jobs';
 import { handle } from '@/server/base/handle';
-import { sayReady } from '@/server/jobs/say-ready';
+import { sayReady } from '@/server/visits/say-ready';
 
 export const POST = handle(sayReadyInput, sayReady);
