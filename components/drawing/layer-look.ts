@@ -34,6 +34,9 @@ export const layerLook: Record<Layer, string> = {
   'suspect-line': 'fill-none stroke-chalk [stroke-width:5]',
   'suspect-ring': 'fill-sheet stroke-chalk [stroke-width:2]',
   suspect: 'fill-none stroke-chalk [stroke-width:2.4]',
+  'revision-cloud': 'fill-none stroke-chalk [stroke-width:1.4]',
+  'revision-letter': 'fill-sheet stroke-chalk [stroke-width:1.4]',
+  'revision-struck': 'fill-none stroke-graphite [stroke-width:1.4]',
   collision: 'fill-none stroke-chalk [stroke-width:2] [stroke-dasharray:4_3]',
 };
 

@@ -40,6 +40,7 @@ export function FitScreen({ view, choice, mayLayOut, mayRelease }: FitScreenProp
     walls.find(({ id }) => id === (choice.wall ?? ofRun)) ?? firstWithRun(view) ?? walls[0];
   const plan = drawPlan({ wallBook, runs, fit, rules });
   const hrefOf = (part: DrawnPart['part']): string | null => {
+    if (part.kind === 'revision') return null;
     const wallId = part.kind === 'run' ? runs.find(({ id }) => id === part.id)?.wallId : part.id;
     return wallId ? fitHref(jobId, room.id, { wall: wallId }) : null;
   };

@@ -54,33 +54,33 @@ export function ProofTable({ rows }: { rows: ProofRow[] }) {
 
 function ProofLine({ row }: { row: ProofRow }) {
   return (
-    <tr className="border-b border-rule align-top *:py-1 print:*:py-px">
-      <th scope="row" className="text-left font-normal">
-        {row.check}
-        {row.by ? (
-          <div className="print:hidden">
-            <RuleLine by={row.by} />
-          </div>
-        ) : (
-          <span className="block text-note text-graphite print:hidden">{row.rule}</span>
-        )}
-      </th>
-      <td className="pl-2 text-right">
-        {row.read ? <Figure figure={row.read} of={row.check} showsSurely /> : null}
-        {row.readWords ? (
-          <span className="block text-note text-graphite">{row.readWords}</span>
-        ) : null}
-      </td>
-      <td className="pl-2 text-right">
-        <InFractions words={row.limitWords} />
-      </td>
-      <td className="w-0 pl-4 whitespace-nowrap">
-        <Verdict kind={row.verdict}>
-          {closureWord(row)}
-          {row.inDoubt ? ', in doubt' : ''}
-        </Verdict>
-      </td>
-    </tr>
+    <>
+      <tr className="align-top *:pt-1.5 print:border-b print:border-rule print:*:py-px">
+        <th scope="row" className="text-left font-normal">
+          {row.check}
+        </th>
+        <td className="pl-2 text-right">
+          {row.read ? <Figure figure={row.read} of={row.check} showsSurely /> : null}
+          {row.readWords ? (
+            <span className="block text-note text-graphite">{row.readWords}</span>
+          ) : null}
+        </td>
+        <td className="pl-2 text-right">
+          <InFractions words={row.limitWords} />
+        </td>
+        <td className="w-0 pl-4 whitespace-nowrap">
+          <Verdict kind={row.verdict}>
+            {closureWord(row)}
+            {row.inDoubt ? ', in doubt' : ''}
+          </Verdict>
+        </td>
+      </tr>
+      <tr className="border-b border-rule print:hidden">
+        <td colSpan={4} className="pb-1.5 text-note text-graphite">
+          {row.by ? <RuleLine by={row.by} /> : row.rule}
+        </td>
+      </tr>
+    </>
   );
 }
 

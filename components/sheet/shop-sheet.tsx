@@ -23,13 +23,13 @@ type ShopSheetProps = { sheet: SheetView; mayTakeUp: boolean };
 
 /** The released fit for the bench: a leaf for the room, then one for every wall with a run. */
 export function ShopSheet({ sheet, mayTakeUp }: ShopSheetProps) {
-  const { wallBook, runs, fit, rules } = sheet;
+  const { wallBook, runs, fit, rules, revised } = sheet;
   const walls = wallsOf(wallBook.room)
     .map(({ wall }) => wall)
     .filter(({ id }) => runs.some(({ wallId }) => wallId === id));
   const count = walls.length + 1;
   const cuts = cutList(fit, runs);
-  const plan = drawPlan({ wallBook, runs, fit, rules });
+  const plan = drawPlan({ wallBook, runs, fit, rules, revised });
   return (
     <Figures readings={readingLines(wallBook, {}, rules.unit)} rules={rules}>
       <SheetBar
@@ -65,7 +65,7 @@ export function ShopSheet({ sheet, mayTakeUp }: ShopSheetProps) {
         </SheetLeaf>
         {walls.map((wall, index) => {
           const ofWall = fit.runs.filter(({ wallId }) => wallId === wall.id);
-          const drawing = drawElevation({ wallBook, runs, fit, rules, wallId: wall.id });
+          const drawing = drawElevation({ wallBook, runs, fit, rules, revised, wallId: wall.id });
           return (
             <SheetLeaf
               key={wall.id}
@@ -91,7 +91,7 @@ export function ShopSheet({ sheet, mayTakeUp }: ShopSheetProps) {
                   title="Cut list: fillers, scribes, kicks"
                   meta={rules.unit === 'in' ? 'inches' : 'millimetres'}
                 />
-                <CutList rows={cuts.filter(({ wallId }) => wallId === wall.id)} />
+                <CutList rows={cuts.filter(({ wallId }) => wallId === wall.id)} revised={revised} />
               </section>
             </SheetLeaf>
           );

@@ -8,7 +8,10 @@ type SupersededBandProps = {
   supersededBy: string[];
 };
 
-/** Across every leaf, in red, on screen and on paper: this sheet no longer holds, and why. */
+/**
+ * Across every leaf, in red, on screen and on paper: this sheet no longer holds, and why. On paper in one line,
+ * so that no leaf runs over its page.
+ */
 export function SupersededBand({
   revision,
   newerRevision,
@@ -17,7 +20,10 @@ export function SupersededBand({
 }: SupersededBandProps) {
   if (!newerRevision && supersededBy.length === 0) return null;
   return (
-    <div role="alert" className="mb-3 border-2 border-chalk bg-chalk px-3 py-2 text-on-fill">
+    <div
+      role="alert"
+      className="superseded-band mb-3 border-2 border-chalk bg-chalk px-3 py-2 text-on-fill print:mb-1.5 print:flex print:items-baseline print:gap-4 print:py-0.5"
+    >
       <p className="text-lead font-bold">
         <Glyph name="over" className="mr-2" />
         Superseded. Do not cut from revision {revision}.
@@ -37,7 +43,7 @@ export function SupersededBand({
         )}
       </p>
       {supersededBy.length > 0 ? (
-        <ul className="list-disc pl-5">
+        <ul className="list-disc pl-5 print:hidden">
           {supersededBy.slice(0, 6).map((words) => (
             <li key={words}>
               <InFractions words={words} />

@@ -2,6 +2,7 @@
 import { z } from 'zod';
 import type { Fit } from '@/lib/measure/fit';
 import type { MissingReading } from '@/lib/measure/missing-reading';
+import type { Revised } from '@/lib/sheet/revision-marks';
 import type { FitRules } from './shop-rules';
 import type { Run } from './wall-book';
 import { reading, room, run, type Tool, type WallBook } from './wall-book';
@@ -122,6 +123,8 @@ export type SheetView = {
   measuredWords: string;
   /** The house may hold lead paint or asbestos. */
   isOldHouse: boolean;
+  /** What differs on the drawings and in the cut list from the revision before; null on the first. */
+  revised: Revised | null;
   /** The newest revision, when it is not this one. */
   newerRevision: string | null;
   /** Readings that came after the release, or runs that changed. */

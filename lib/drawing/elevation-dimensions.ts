@@ -10,20 +10,29 @@ const overallPx = 58;
 
 /** Strings of widths under the floor and over the ceiling, the wall's length, and the heights at the right. */
 export function elevationDimensions(sheet: ElevationSheet): Shape[] {
-  const lowest = Math.min(...sheet.floor.map(({ zMm }) => zMm), 0);
-  const foot = (xMm: number) => sheet.at({ xMm, zMm: lowest });
+  const foot = (xMm: number) => footAt(sheet, xMm);
   const head = (xMm: number) => sheet.at({ xMm, zMm: sheet.topMm });
   const standing = sheet.ofWall.filter(({ run }) => run.level !== 'wall');
   const hung = sheet.ofWall.filter(({ run }) => run.level === 'wall');
   return [
     ...standing.flatMap((one) => widths(sheet, one, foot, -stringPx)),
     ...hung.flatMap((one) => widths(sheet, one, head, stringPx)),
-    ...dimension(foot(0), foot(sheet.lengthMm), {
-      offsetPx: -(standing.length > 0 ? overallPx : stringPx),
-      spans: wallLength(sheet),
-    }),
+    ...wallDimension(sheet),
     ...heights(sheet),
   ];
+}
+
+/** The wall's own length, under the string of widths where there is one. */
+export function wallDimension(sheet: ElevationSheet): Shape[] {
+  const hasString = sheet.ofWall.some(({ run }) => run.level !== 'wall');
+  return dimension(footAt(sheet, 0), footAt(sheet, sheet.lengthMm), {
+    offsetPx: -(hasString ? overallPx : stringPx),
+    spans: wallLength(sheet),
+  });
+}
+
+function footAt(sheet: ElevationSheet, xMm: number): Point {
+  return sheet.at({ xMm, zMm: Math.min(...sheet.floor.map(({ zMm }) => zMm), 0) });
 }
 
 function widths(

@@ -32,8 +32,13 @@ export function elevationFillers(sheet: ElevationSheet, run: Run, runFit: RunFit
 }
 
 /** The face widths of a run's fillers at the places where they hold, and the blank between them. */
-export function fillerFigures(sheet: ElevationSheet, run: Run, runFit: RunFit): Shape[] {
-  return (['left', 'right'] as const).flatMap((side) => {
+export function fillerFigures(
+  sheet: ElevationSheet,
+  run: Run,
+  runFit: RunFit,
+  sides: readonly ('left' | 'right')[] = ['left', 'right'],
+): Shape[] {
+  return sides.flatMap((side) => {
     const end = runFit[side];
     const unit = side === 'left' ? runFit.units[0] : runFit.units.at(-1);
     if (!end.filler || !unit) return [];

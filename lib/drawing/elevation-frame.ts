@@ -2,6 +2,7 @@ import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Run, WallBook } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import type { RunFit } from '@/lib/measure/run-fit';
+import type { Revised } from '@/lib/sheet/revision-marks';
 import { wallsOf } from '@/lib/sheet/room-names';
 import { ceilingLine } from './ceiling-line';
 import { exaggerationFor } from './exaggeration';
@@ -14,6 +15,8 @@ export type ElevationSource = {
   fit: Fit;
   rules: FitRules;
   wallId: string;
+  /** What to cloud: it differs from the revision before. */
+  revised?: Revised | null;
 };
 
 /** A place on the wall: along it from its left corner, and up from the finished floor's high point. */

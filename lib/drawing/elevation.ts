@@ -9,6 +9,7 @@ import {
   elevationFrame,
 } from './elevation-frame';
 import { elevationLevels } from './elevation-levels';
+import { elevationRevisions } from './elevation-revisions';
 import { elevationTrouble } from './elevation-trouble';
 import { elevationUnits } from './elevation-units';
 import { elevationStuds, elevationWall } from './elevation-wall';
@@ -50,6 +51,7 @@ export function drawElevation(
     ...sheet.ofWall.flatMap(({ run, runFit }) => fillerFigures(sheet, run, runFit)),
     ...elevationDimensions(sheet),
     ...elevationTrouble(sheet),
+    ...elevationRevisions(sheet),
   ];
   const { exaggeration, pxPerMm } = sheet;
   return { shapes, bounds: boundsOf(shapes, 12), exaggeration, pxPerMm };

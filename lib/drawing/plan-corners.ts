@@ -37,6 +37,14 @@ export function planCorners(sheet: PlanSheet): Shape[] {
   });
 }
 
+/** The words at a corner, as they are drawn; none where it is not read. */
+export function cornerLabel(sheet: PlanSheet, cornerWallId: string): Shape[] {
+  const corner = sheet.fit.corners.find((one) => one.cornerWallId === cornerWallId);
+  const wall = sheet.walls.find(({ wallId }) => wallId === cornerWallId);
+  const before = sheet.walls.find(({ wallId }) => wallId === corner?.leftWallId);
+  return corner?.angle && wall && before ? label(sheet, { corner, wall, before }) : [];
+}
+
 type Corner = { corner: CornerFit; wall: PlanWall; before: PlanWall };
 
 /** Where the left arm would stand if the corner were true, turned away from where it does stand. */

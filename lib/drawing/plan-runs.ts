@@ -27,6 +27,21 @@ export function planRuns(sheet: PlanSheet): Shape[] {
   });
 }
 
+/** A unit's box in the plan; null where its run is not drawn. */
+export function unitOutline(
+  sheet: PlanSheet,
+  { runId, unitId }: { runId: string; unitId: string },
+): Shape | null {
+  const runFit = sheet.fit.runs.find((one) => one.runId === runId);
+  const run = sheet.runs.find(({ id }) => id === runId);
+  const wall = sheet.walls.find(({ wallId }) => wallId === runFit?.wallId);
+  const unit = runFit?.units.find((one) => one.unitId === unitId);
+  // What hangs is only hinted at in the plan: its elevation has the mark.
+  if (!runFit || !run || !wall || !unit || run.level === 'wall') return null;
+  const place = placeOf({ sheet, wall, run, runFit });
+  return { kind: 'area', layer: 'unit', points: box(place, unit, run.carcassDepthMm) };
+}
+
 type Drawn = { sheet: PlanSheet; wall: PlanWall; run: Run; runFit: RunFit };
 
 /** A place of the run: along the set line, and out from it; the stand-off is drawn larger like the face. */

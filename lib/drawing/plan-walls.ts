@@ -21,13 +21,23 @@ export function planWalls(sheet: PlanSheet): Shape[] {
     shapes: [
       ...body(sheet, wall),
       ...openings(sheet, wall),
-      ...dimension(sheet.at(wall.from), sheet.at(wall.to), {
-        offsetPx: wallDimensionPx,
-        spans: lengthSpans(sheet, wall),
-      }),
+      ...wallDimension(sheet, wall),
       ...nameTag(sheet, wall),
     ],
   }));
+}
+
+function wallDimension(sheet: PlanSheet, wall: PlanWall): Shape[] {
+  return dimension(sheet.at(wall.from), sheet.at(wall.to), {
+    offsetPx: wallDimensionPx,
+    spans: lengthSpans(sheet, wall),
+  });
+}
+
+/** The figure of a wall's dimension, as it is drawn. */
+export function wallFigure(sheet: PlanSheet, wall: PlanWall): Shape {
+  const figure = wallDimension(sheet, wall).find(({ kind }) => kind === 'text');
+  return figure ?? text(sheet.at(wall.from), wall.name);
 }
 
 /** From a little inside the room out past the dimension. */

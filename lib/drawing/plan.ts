@@ -1,9 +1,11 @@
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Run, WallBook } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
+import type { Revised } from '@/lib/sheet/revision-marks';
 import { exaggerationFor } from './exaggeration';
 import { planCorners } from './plan-corners';
 import { planMarks } from './plan-marks';
+import { planRevisions } from './plan-revisions';
 import { planRuns } from './plan-runs';
 import { planSuspects } from './plan-suspects';
 import { planWalls } from './plan-walls';
@@ -11,7 +13,14 @@ import { type PlanWall, roomPlan } from './room-plan';
 import { boundsOf, type Drawing, type Point } from './shape';
 import { type FaceProfile, faceProfile } from './wall-faces';
 
-export type PlanSource = { wallBook: WallBook; runs: readonly Run[]; fit: Fit; rules: FitRules };
+export type PlanSource = {
+  wallBook: WallBook;
+  runs: readonly Run[];
+  fit: Fit;
+  rules: FitRules;
+  /** What to cloud: it differs from the revision before. */
+  revised?: Revised | null;
+};
 
 /** What each part of the plan is drawn from. */
 export type PlanSheet = PlanSource & {
@@ -75,6 +84,7 @@ export function drawPlan(
     ...planMarks(sheet),
     ...planCorners(sheet),
     ...planSuspects(sheet),
+    ...planRevisions(sheet),
   ];
   return { shapes, bounds: boundsOf(shapes, 12), exaggeration, pxPerMm };
 }

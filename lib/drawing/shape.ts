@@ -38,7 +38,10 @@ export type Layer =
   | 'suspect'
   | 'suspect-line'
   | 'suspect-ring'
-  | 'collision';
+  | 'collision'
+  | 'revision-cloud'
+  | 'revision-letter'
+  | 'revision-struck';
 
 /** How a text speaks: plain; strong; by the way; or in the colour of a verdict. */
 export type Tone = 'plain' | 'strong' | 'quiet' | 'over' | 'close' | 'within' | 'site';
@@ -64,7 +67,7 @@ export type DrawnText = {
 /** A part that can be touched: a wall, a run. */
 export type DrawnPart = {
   kind: 'part';
-  part: { kind: 'wall' | 'run' | 'corner'; id: string };
+  part: { kind: 'wall' | 'run' | 'corner' | 'revision'; id: string };
   /** "Wall B, 113 3/8, over". */
   label: string;
   /** Where a thumb may touch it, past its thin lines; left out: its areas are large enough. */

@@ -69,6 +69,9 @@ export const layerStyle: Record<Layer, LayerStyle> = {
   'suspect-line': line(inks.chalk, 5),
   'suspect-ring': area(inks.sheet, inks.chalk, 2),
   suspect: line(inks.chalk, 2.4),
+  'revision-cloud': line(inks.chalk, 1.4),
+  'revision-letter': area(inks.sheet, inks.chalk, 1.4),
+  'revision-struck': line(inks.graphite, 1.4),
   collision: line(inks.chalk, 2, [4, 3]),
 };
 

@@ -40,6 +40,7 @@ const looks: Record<TrueLayer, LayerLook> = {
   Counters: { colour: 8, line: 'Continuous' },
   Kicks: { colour: 8, line: 'Continuous' },
   Words: { colour: 7, line: 'Continuous' },
+  Revision: { colour: 1, line: 'Continuous' },
 };
 
 /**

@@ -28,7 +28,7 @@ function element(shape: Shape, placing: Placing): string {
     case 'text':
       return textElement(shape, placing);
     case 'part':
-      return `<g><title>${xmlText(shape.label)}</title>\n${svgElements(shape.shapes, placing)}\n</g>`;
+      return `<g class="${shape.part.kind}"><title>${xmlText(shape.label)}</title>\n${svgElements(shape.shapes, placing)}\n</g>`;
   }
 }
 

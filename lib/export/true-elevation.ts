@@ -5,6 +5,7 @@ import { floorLine } from '@/lib/drawing/floor-line';
 import type { RunFit } from '@/lib/measure/run-fit';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { featureWords } from '@/lib/sheet/reading-words';
+import { wallRevisionsAtTrueSize } from './true-revisions';
 import { trueRun } from './true-run';
 import { type TrueShape, trueWords } from './true-shape';
 
@@ -55,6 +56,7 @@ export function trueElevation(
     ...studs(sheet, { wall, runs, topMm }),
     ...features(sheet, wall),
     ...laidOut.flatMap(({ run, runFit }) => trueRun(sheet, run, runFit)),
+    ...wallRevisionsAtTrueSize(sheet, wall.id),
   ];
 }
 

@@ -6,6 +6,7 @@ import type { RunFit } from '@/lib/measure/run-fit';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { featureWords } from '@/lib/sheet/reading-words';
 import { onPlan, placeOnPlan } from './run-on-plan';
+import { planRevisionsAtTrueSize } from './true-revisions';
 import { type TrueShape, trueWords } from './true-shape';
 import { unitLabel } from './unit-label';
 
@@ -28,6 +29,7 @@ export function truePlan(sheet: SheetView): TrueShape[] {
       const run = sheet.runs.find(({ id }) => id === runFit.runId);
       return wall && run ? runShapes(sheet, { wall, run, runFit }) : [];
     }),
+    ...planRevisionsAtTrueSize(sheet),
   ];
 }
 

@@ -20,6 +20,7 @@ export const trueLayers = [
   'Counters',
   'Kicks',
   'Words',
+  'Revision',
 ] as const;
 export type TrueLayer = (typeof trueLayers)[number];
 

@@ -32,7 +32,7 @@ export function ruleBehind(judged: Judged, { unit, stepMm }: Steps): RuleBehind 
   const isOwn = source === COMMON_PRACTICE;
   const sense = check === 'aisle' ? 'at least' : 'at most';
   const over = spanMm > 0 ? ` over ${length(spanMm)}` : '';
-  const place = isOwn ? source : placeWords(clause);
+  const place = isOwn ? 'common practice' : placeWords(clause);
   return {
     short: `${[rule, place].filter(Boolean).join(', ')}: ${sense} ${length(limitMm)}${over}`,
     details: [

@@ -40,6 +40,32 @@ export async function readReleases(
   }));
 }
 
+/** What one revision froze; null where this room has none of that letter. */
+export async function readFrozen(
+  db: Database,
+  ctx: PersonContext,
+  { roomId, revision }: { roomId: string; revision: string },
+) {
+  const [found] = await db
+    .select({
+      overrideReason: releases.overrideReason,
+      engineVersion: releases.engineVersion,
+      wallBook: releases.wallBook,
+      runs: releases.runs,
+      rules: releases.rules,
+      fit: releases.fit,
+    })
+    .from(releases)
+    .where(
+      and(
+        eq(releases.shopId, ctx.shop.id),
+        eq(releases.roomId, roomId),
+        eq(releases.revision, revision),
+      ),
+    );
+  return found ?? null;
+}
+
 /** What the newest revision froze; null before the first. */
 export async function readNewestFrozen(
   db: Database,

@@ -6,8 +6,8 @@ import { GET as fitRoute } from '@/app/api/fits/route';
 import { POST as takeUpRoute } from '@/app/api/sheets/[releaseId]/take-up/route';
 import { POST as releaseRoute, GET as sheetRoute } from '@/app/api/sheets/route';
 import { crews, releases, shops, visits } from '@/db/schema';
-import type { RoomRow } from '@/lib/contracts/jobs';
 import type { BenchSheet } from '@/lib/contracts/bench';
+import type { RoomRow } from '@/lib/contracts/jobs';
 import type { FitView, SheetView } from '@/lib/contracts/rooms';
 import { standingIds } from '@/lib/measure/standing-readings';
 import type { Role } from '@/lib/permissions';
@@ -16,10 +16,10 @@ import { refusedConstraint } from '@/server/base/database-refusal';
 import { getJob } from '@/server/jobs/get-job';
 import { getFit } from '@/server/sheets/get-fit';
 import { releaseSheet } from '@/server/sheets/release-sheet';
+import { sayReady } from '@/server/visits/say-ready';
 import { listRooms } from '@/server/walls/list-rooms';
 import { recordReadings } from '@/server/walls/record-readings';
 import { saveRuns } from '@/server/walls/save-runs';
-import { sayReady } from '@/server/visits/say-ready';
 import { callRoute } from '../help/call-route';
 import { contextOf, cookieOf, makeShop, type TestShop } from '../help/make-shop';
 import { lengthOn, type PutKitchen, putDrawnKitchen, putKitchen } from '../help/put-kitchen';
@@ -114,6 +114,15 @@ describe('sheets', () => {
       true,
     );
     expect(newer.supersededBy).toEqual([]);
+    const sink = units.find(({ kind }) => kind === 'sink');
+    expect(newer.revised?.revision).toBe('B');
+    expect(newer.revised?.marks).toContainEqual({
+      on: 'unit',
+      runId: sinkWall.id,
+      unitId: sink?.id,
+      was: '36"',
+    });
+    expect(older.revised).toBeNull();
     const job = await getJob(await contextOf(shop, 'scheduler'), { jobId: own.jobId });
     expect(job.stage).toBe('released');
   });

@@ -40,6 +40,7 @@ export function releasedSheet(
     engineVersion: fit.engineVersion,
     measuredWords: 'Ines Testwell; Tue, Dec 1; Laser meter, Tape, class II',
     isOldHouse: true,
+    revised: null,
     newerRevision: null,
     supersededBy: [],
     ...change,

@@ -30,6 +30,27 @@ describe('sheetPdf', () => {
     ({ pages, title } = await printed(sheet));
   });
 
+  it('takes no page more when it is superseded, however much has changed since', async () => {
+    const changes = Array.from(
+      { length: 14 },
+      (_, index) => `Wall A, stud ${index + 1}: taken back`,
+    );
+    const { pages: after } = await printed({ ...sheet, newerRevision: 'C', supersededBy: changes });
+    expect(after).toHaveLength(pages.length);
+    expect(after[0]).toContain('and 9 more');
+    for (const page of after) expect(page).toContain('Superseded by revision C');
+  });
+
+  it('strikes in the cut list what stood there on the revision before', async () => {
+    const [row] = cutList(sheet.fit, sheet.runs);
+    if (!row) throw new Error('nothing is cut');
+    const { key, runId, wallId } = row;
+    const marks = [{ on: 'cut', key, runId, wallId, was: '9 7/8"' } as const];
+    const { pages: revised } = await printed({ ...sheet, revised: { revision: 'B', marks } });
+    expect(revised.join(' ')).toMatch(/rev B, was/);
+    expect(pages.join(' ')).not.toMatch(/rev B, was/);
+  });
+
   it('names shop, job, room, revision, dates and what changed on the first page', () => {
     expect(title).toBe('2418 Kitchen, revision B');
     for (const words of [

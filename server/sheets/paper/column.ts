@@ -21,14 +21,50 @@ const titleLook: WordLook = { sizePt: 9.5, weight: 600 };
 const markPt = 19;
 const bulletPt = 9;
 const betweenPt = 2.4;
+const titlePt = 18;
+const afterPt = 5;
 
-/** Sections one under another; what no longer goes in goes on in the area that `nextArea` gives. */
+/** Smaller letters are tried before a page is turned; below this they are no longer read at arm's length. */
+const shares = [1, 0.94, 0.88, 0.84] as const;
+
+/**
+ * Sections one under another, in letters as large as let all of them go into the area; where not even the
+ * smallest do, what no longer goes in goes on in the area that `nextArea` gives.
+ */
 export function putSections(
   doc: Doc,
   sections: readonly Section[],
   area: Area,
   nextArea: () => Area,
 ): Area {
+  const share = shares.find(
+    (one) => sectionsHeight(doc, inSize(sections, one), area.width) <= area.height,
+  );
+  return putInSize(doc, inSize(sections, share ?? 1), area, nextArea);
+}
+
+function inSize(sections: readonly Section[], share: number): Section[] {
+  return sections.map((section) => ({
+    ...section,
+    paragraphs: section.paragraphs.map((paragraph) => {
+      const { sizePt } = { ...bodyLook, ...paragraph.look };
+      return { ...paragraph, look: { ...paragraph.look, sizePt: sizePt * share } };
+    }),
+  }));
+}
+
+/** How high some sections come out in one column. */
+function sectionsHeight(doc: Doc, sections: readonly Section[], widthPt: number): number {
+  return sections
+    .filter(({ paragraphs }) => paragraphs.length > 0)
+    .flatMap(({ paragraphs }) => [
+      titlePt + afterPt,
+      ...paragraphs.map((paragraph) => heightIn(doc, paragraph, widthPt) + betweenPt),
+    ])
+    .reduce((sum, height) => sum + height, 0);
+}
+
+function putInSize(doc: Doc, sections: readonly Section[], area: Area, nextArea: () => Area): Area {
   let free = area;
   for (const { title, meta, paragraphs } of sections) {
     if (paragraphs.length === 0) continue;
@@ -42,7 +78,7 @@ export function putSections(
       put(doc, paragraph, free);
       free = below(free, heightIn(doc, paragraph, free.width) + betweenPt);
     }
-    free = below(free, 5);
+    free = below(free, afterPt);
   }
   return free;
 }
@@ -60,7 +96,7 @@ function putTitle(doc: Doc, { title, meta }: { title: string; meta?: string }, a
     .lineWidth(0.6)
     .undash()
     .stroke(inks.ink);
-  return below(area, 18);
+  return below(area, titlePt);
 }
 
 function put(doc: Doc, { words, look, mark, isListed }: Paragraph, area: Area): void {

@@ -60,11 +60,11 @@ function cutRows({ sheet }: Paper): TableRow[] {
     { kind: 'group', words: runName },
     ...rows
       .filter((row) => row.runName === runName)
-      .map((row): TableRow => ({ kind: 'row', cells: cutCells(row, sheet.rules) })),
+      .map((row): TableRow => ({ kind: 'row', cells: cutCells(row, sheet) })),
   ]);
 }
 
-function cutCells(row: CutRow, rules: Paper['sheet']['rules']): Cell[] {
+function cutCells(row: CutRow, { rules, revised }: Paper['sheet']): Cell[] {
   const value = (figure: FitFigure | null) => (figure ? figureText(figure, rules).value : '');
   const isLength = figureWords[row.cut.kind].measure === 'length';
   const how = row.how === 'leave long' ? 'leave ' : row.how === 'saw' ? 'saw ' : '';
@@ -72,13 +72,30 @@ function cutCells(row: CutRow, rules: Paper['sheet']['rules']): Cell[] {
     cell(row.piece, { weight: 500 }),
     cell(value(row.first)),
     cell(value(row.last)),
-    cell(`${how}${value(row.cut)}`, { sizePt: 10.5, weight: 600 }),
+    {
+      lines: [
+        { words: `${how}${value(row.cut)}`, look: { sizePt: 10.5, weight: 600 } },
+        ...changeLines(row, revised),
+      ],
+    },
     cell(figureText(row.cut, rules).surely, { colour: inks.graphite }),
     cell(isLength ? row.cut.value.toFixed(1) : '', { colour: inks.graphite }),
     row.isWrong
       ? { lines: [{ words: row.note, look: { colour: inks.chalk } }], mark: 'over' }
       : cell(row.note, { colour: inks.graphite }),
     { lines: [], box: true },
+  ];
+}
+
+/** "rev B, was" and under it the size that no longer holds, struck. */
+function changeLines({ key }: CutRow, revised: Paper['sheet']['revised']): Cell['lines'] {
+  const mark = revised?.marks.find((one) => one.on === 'cut' && one.key === key);
+  if (!revised || !mark) return [];
+  const look = { sizePt: 7, colour: inks.chalk };
+  if (mark.was === null) return [{ words: `rev ${revised.revision}, new`, look }];
+  return [
+    { words: `rev ${revised.revision}, was`, look },
+    { words: mark.was, look: { sizePt: 8, colour: inks.graphite, isStruck: true } },
   ];
 }
 

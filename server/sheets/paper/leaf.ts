@@ -18,16 +18,18 @@ export type Area = { x: number; y: number; width: number; height: number };
 
 export const marginPt = 28;
 const headPt = 30;
-const bandPt = 26;
+/** In the upper margin, where a printer still prints: a sheet takes no page more for being superseded. */
+const bandPt = 20;
+const bandTopPt = 12;
 export const stampPt = 50;
 
 /** Landscape, as drawings are: points, width by height. */
 const sizes = { letter: [792, 612], A4: [841.89, 595.28] } as const;
 
 /** What is free on every page of a print, under its heading and over its title block. */
-export function areaOf({ sheet, size }: Paper): Area {
+export function areaOf({ size }: Paper): Area {
   const [pageWidth, pageHeight] = sizes[size];
-  const y = marginPt + (supersededWords(sheet) ? bandPt + 8 : 0) + headPt;
+  const y = marginPt + headPt;
   const foot = pageHeight - marginPt - stampPt - 10;
   return { x: marginPt, y, width: pageWidth - 2 * marginPt, height: foot - y };
 }
@@ -39,7 +41,7 @@ export function newLeaf(paper: Paper, heading: { title: string; meta: string }):
   doc.addPage({ size: [...sizes[size]], margin: 0 });
   const stamp = supersededWords(sheet);
   if (stamp) {
-    putBand(doc, stamp, { x: marginPt, y: marginPt, width: area.width }, sheet.release.revision);
+    putBand(doc, stamp, { x: marginPt, y: bandTopPt, width: area.width }, sheet.release.revision);
   }
   const foot = area.y - 16;
   putWords(doc, heading.title, { sizePt: 14, weight: 600 }, { x: area.x, y: foot });
@@ -59,6 +61,6 @@ function putBand(
 ): void {
   doc.rect(x, y, width, bandPt).fill(inks.chalk);
   const words = `${stamp.charAt(0).toUpperCase()}${stamp.slice(1)}. Do not cut from revision ${revision}.`;
-  const look = { sizePt: 13, weight: 600, colour: inks.sheet } as const;
-  putWords(doc, words, look, { x: x + 10, y: y + 18 });
+  const look = { sizePt: 12, weight: 600, colour: inks.sheet } as const;
+  putWords(doc, words, look, { x: x + 10, y: y + 14.5 });
 }

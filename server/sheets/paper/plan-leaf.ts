@@ -34,12 +34,21 @@ const listed = (words: string, look?: Paragraph['look']): Paragraph => ({
   isListed: true,
 });
 
+/** Past this many they are counted: the page is for the bench, the whole list is on the screen. */
+const mostTold = 6;
+
+function told(changes: readonly string[]): string[] {
+  if (changes.length <= mostTold) return [...changes];
+  const more = changes.length - mostTold + 1;
+  return [...changes.slice(0, mostTold - 1), `and ${more} more: see the sheet on the screen`];
+}
+
 /** Why the sheet no longer holds. */
 function sinceThen({ sheet }: Paper): Section {
   const look = { colour: inks.chalk, weight: 500 } as const;
   return {
     title: `Since revision ${sheet.release.revision}`,
-    paragraphs: sheet.supersededBy.map((words) => listed(words, look)),
+    paragraphs: told(sheet.supersededBy).map((words) => listed(words, look)),
   };
 }
 

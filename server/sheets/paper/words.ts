@@ -2,7 +2,13 @@ import { fractionRuns } from '@/lib/export/fraction-runs';
 import { inks } from '@/lib/export/layer-style';
 import { fontName, partOf, printable, type Weight } from './paper-fonts';
 
-export type WordLook = { sizePt: number; weight?: Weight; colour?: string };
+export type WordLook = {
+  sizePt: number;
+  weight?: Weight;
+  colour?: string;
+  /** With a line through it: it stood there before. */
+  isStruck?: true;
+};
 type Doc = PDFKit.PDFDocument;
 type Run = { words: string; font: string; features: ('frac' | 'tnum')[] };
 
@@ -33,6 +39,14 @@ export function putWords(
     doc.text(letters, x, at.y, { lineBreak: false, baseline: 'alphabetic', features });
     x += runWidth(doc, run, look);
   }
+  if (!look.isStruck) return;
+  const middle = at.y - look.sizePt * 0.28;
+  doc
+    .moveTo(at.x - back, middle)
+    .lineTo(x, middle)
+    .lineWidth(look.sizePt * 0.09)
+    .undash()
+    .stroke(look.colour ?? inks.ink);
 }
 
 /** Words broken into lines that keep to a width; a word wider than that stands alone. */
