@@ -30,7 +30,7 @@ export function StopLine({
         {Math.round(stop.driveMinutes)} min drive
       </p>
       <div
-        className={`grid grid-cols-[1.75rem_minmax(0,1fr)] gap-x-2 rounded border px-2 py-1.5 ${
+        className={`grid grid-cols-[1.75rem_minmax(0,1fr)] max-md:grid-cols-[2.5rem_minmax(0,1fr)] gap-x-2 rounded border px-2 py-1.5 ${
           isLookedAt ? 'border-blueprint outline-2 outline-blueprint' : 'border-rule'
         } ${move ? 'bg-tint' : 'bg-sheet'}`}
       >

@@ -184,6 +184,7 @@ export function DiaryScreen(props: DiaryScreenProps) {
             setOpenedId(null);
             setSubject(subjectOfVisit(opened));
           }}
+          onRefused={mover.askAgain}
           onClose={() => setOpenedId(null)}
         />
       ) : null}

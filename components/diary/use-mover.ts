@@ -84,11 +84,19 @@ export function useMover({ zone, pattern, crews }: Shop) {
     [places, pattern, zone, crews],
   );
 
-  return { draw, send, nudge, refused, forgetRefused: () => setRefused(null) };
+  return {
+    draw,
+    send,
+    nudge,
+    refused,
+    askAgain: setRefused,
+    forgetRefused: () => setRefused(null),
+  };
 }
 
-const isWorthAsking = ({ type }: ProblemDetails) =>
-  type.endsWith('visit-changed') || type.endsWith('gate-not-passed');
+/** Refused for now: on the newer visit, or with a reason, it may go through. */
+export const isWorthAsking = ({ code }: ProblemDetails) =>
+  code === 'visit-changed' || code === 'gate-not-passed';
 
 export const saidOf = ({ title, detail }: ProblemDetails): string =>
   detail ? `${title}. ${detail}` : title;

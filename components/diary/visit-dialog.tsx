@@ -17,6 +17,7 @@ import { useCallOffVisit, useMoveVisit } from './change-visit-query';
 import { canChange } from './place';
 import { type Placing, PlacingFields } from './placing-fields';
 import { HeldActions } from './times/held-actions';
+import { isWorthAsking, type RefusedMove } from './use-mover';
 import { useTakeBack } from './use-take-back';
 import { minutesWords, statusWords } from './visit-words';
 
@@ -28,6 +29,8 @@ type VisitDialogProps = {
   mayBook: boolean;
   /** Looks for times that work in place of this one. */
   onAnotherTime: () => void;
+  /** Somebody was faster, or a gate stands against it. */
+  onRefused: (refused: RefusedMove) => void;
   onClose: () => void;
 };
 
@@ -38,6 +41,7 @@ export function VisitDialog({
   crews,
   mayBook,
   onAnotherTime,
+  onRefused,
   onClose,
 }: VisitDialogProps) {
   const { words, verdict } = statusWords[visit.status];
@@ -91,7 +95,7 @@ export function VisitDialog({
       {mayBook && visit.status === 'held' ? (
         <HeldActions visitId={visit.id} onDone={onClose} />
       ) : null}
-      {isChangeable ? <MoveForm {...{ visit, start, crews, onClose }} /> : null}
+      {isChangeable ? <MoveForm {...{ visit, start, crews, onRefused, onClose }} /> : null}
       {isChangeable ? <CallOffForm {...{ visit, onClose }} /> : null}
     </Dialog>
   );
@@ -101,8 +105,11 @@ function MoveForm({
   visit,
   start,
   crews,
+  onRefused,
   onClose,
 }: Omit<VisitDialogProps, 'mayBook' | 'onAnotherTime'>) {
+  // What was seen when it was opened: a change by somebody else meanwhile must not be moved over unseen.
+  const [seen] = useState(visit);
   const [placing, setPlacing] = useState<Placing>({
     crewId: visit.crewId,
     ...start,
@@ -117,7 +124,7 @@ function MoveForm({
     event.preventDefault();
     setProblem(null);
     try {
-      const { id, version } = visit;
+      const { id, version } = seen;
       const moved = await move.mutateAsync({
         visitId: id,
         version,
@@ -130,7 +137,10 @@ function MoveForm({
       });
       onClose();
     } catch (caught) {
-      setProblem(problemOf(caught));
+      const refusal = problemOf(caught);
+      if (!isWorthAsking(refusal)) return setProblem(refusal);
+      onClose();
+      onRefused({ visit: seen, place: placing, problem: refusal });
     }
   }
 
