@@ -18,6 +18,8 @@ import { type CustomerVisit, readCustomerVisit } from './read-customer-visit';
 
 /** A choice that fits on a phone; who finds nothing in it rings the shop. */
 const mostTimes = 6;
+/** Several crews may be free at one time; it is offered once. */
+const crewsAtOneTime = 4;
 /** The shop has to be ready, and the day before is told of the evening before. */
 const leastDaysAhead = 2;
 
@@ -43,11 +45,15 @@ export async function offerTimes(
     peopleNeeded: 1,
     isGateOverridden: false,
     wishes,
-    limit: mostTimes + 1,
+    limit: mostTimes * crewsAtOneTime,
   });
   const times = openings
-    // The time that they have is no other time.
-    .filter(({ windowStartsAt }) => windowStartsAt !== visit.windowStartsAt.toISOString())
+    // The time that they have is no other time, and who comes makes no second one of it.
+    .filter(
+      ({ windowStartsAt }, index) =>
+        windowStartsAt !== visit.windowStartsAt.toISOString() &&
+        openings.findIndex((other) => other.windowStartsAt === windowStartsAt) === index,
+    )
     .slice(0, mostTimes)
     .sort((a, b) => a.startsAt.localeCompare(b.startsAt))
     .map(({ crewId, date, time, windowStartsAt, windowEndsAt }) => ({
