@@ -14,7 +14,7 @@ import { type CrewPlan, readCrewPlans } from '@/server/shops/crew-plans';
 import { estimateMinutes } from './job-facts';
 import type { JobRecord } from './job-records';
 import { type Drives, estimatedDrives, PlaceList, roadDrives } from './opening-drives';
-import { busyOf, readBusy } from './read-busy';
+import { type Busy, busyOf, readBusy } from './read-busy';
 
 /** A visit may go on for so long after the last day on which it may begin. */
 const mostDaysOfVisit = 60;
@@ -30,22 +30,37 @@ export type Search = {
   drives: Drives;
 };
 
-/** All that the search needs, read at once; what it finds is a proposal, which booking alone makes good. */
+/** Crews and what is taken: read once, for one search or for many. */
+export type SearchGround = { plans: CrewPlan[]; busy: Busy[] };
+
+export async function readSearchGround(
+  ctx: Context,
+  span: { from: LocalDate; until: LocalDate },
+): Promise<SearchGround> {
+  const { zone } = ctx.shop;
+  const busy = await readBusy(ctx.db, ctx, {
+    from: startOfLocalDay(span.from, zone),
+    until: startOfLocalDay(addDays(span.until, mostDaysOfVisit), zone),
+  });
+  return { plans: await readCrewPlans(ctx.db, ctx), busy };
+}
+
+/** What it finds is a proposal, which booking alone makes good. */
 export async function searchOpenings(
   ctx: Context,
   job: JobRecord,
   asked: FindOpeningsInput & { from: LocalDate; until: LocalDate },
+  ground?: SearchGround,
 ): Promise<Search> {
   const { zone, rules } = ctx.shop;
-  const plans = (await readCrewPlans(ctx.db, ctx, asked.crewIds)).filter(
-    (crew) => goesOutFor(crew, asked.kind) && crew.people.length >= asked.peopleNeeded,
+  const known = ground ?? (await readSearchGround(ctx, asked));
+  const plans = known.plans.filter(
+    (crew) =>
+      (asked.crewIds?.includes(crew.id) ?? true) &&
+      goesOutFor(crew, asked.kind) &&
+      crew.people.length >= asked.peopleNeeded,
   );
-  const busy = (
-    await readBusy(ctx.db, ctx, {
-      from: startOfLocalDay(asked.from, zone),
-      until: startOfLocalDay(addDays(asked.until, mostDaysOfVisit), zone),
-    })
-  ).filter(({ visitId }) => visitId !== asked.visitId);
+  const busy = known.busy.filter(({ visitId }) => visitId !== asked.visitId);
 
   const list = new PlaceList();
   const { latitude: lat, longitude: lon } = job;
