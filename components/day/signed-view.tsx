@@ -1,8 +1,8 @@
 'use client';
 
+import { Signature } from '@/components/sign-off/signature';
 import { Verdict } from '@/components/ui/verdict';
 import type { SignOffView } from '@/lib/contracts/sign-offs';
-import { strokePath } from '@/lib/signing/stroke-path';
 import { useCrew } from './crew-language';
 
 /** What was signed, as it stands: the words, the list of that moment, the signature. */
@@ -18,34 +18,8 @@ export function SignedView({ signOff }: { signOff: SignOffView }) {
           <li key={snag.id}>{[snag.place, snag.words].filter(Boolean).join(': ')}</li>
         ))}
       </ul>
-      <Signature signOff={signOff} label={words.signOff} />
+      <Signature strokes={signOff.strokes} label={words.signOff} />
       <p className="text-graphite">{words.signedSafe}</p>
     </section>
-  );
-}
-
-export function Signature({
-  signOff,
-  label,
-}: {
-  signOff: Pick<SignOffView, 'strokes'>;
-  label: string;
-}) {
-  return (
-    <svg
-      viewBox="0 0 600 260"
-      role="img"
-      aria-label={label}
-      className="w-full max-w-md border-b border-ink"
-    >
-      <path
-        d={strokePath(signOff.strokes)}
-        fill="none"
-        stroke="currentColor"
-        strokeWidth={4}
-        strokeLinecap="round"
-        strokeLinejoin="round"
-      />
-    </svg>
   );
 }

@@ -7,6 +7,7 @@ export const officePages = [
   { name: 'days', word: 'Days', path: paths.days(), letter: 'Y', permission: 'visits:read' },
   { name: 'jobs', word: 'Jobs', path: paths.jobs(), letter: 'J', permission: 'jobs:read' },
   { name: 'bench', word: 'Bench', path: paths.bench(), letter: 'B', permission: 'sheets:read' },
+  { name: 'snags', word: 'Snags', path: paths.snags(), letter: 'S', permission: 'jobs:read' },
   {
     name: 'messages',
     word: 'Messages',

@@ -6,14 +6,20 @@ import { JobStory } from '@/components/jobs/job-story';
 import { RoomList } from '@/components/jobs/room-list';
 import { SiteForm } from '@/components/jobs/site-form';
 import { JobPhotos } from '@/components/photos/job-photos';
+import { SignOffList } from '@/components/sign-off/sign-off-list';
+import { ForCrewForm } from '@/components/snags/for-crew-form';
+import { JobSnags } from '@/components/snags/job-snags';
 import { TitleBlock } from '@/components/ui/title-block';
 import { paths } from '@/lib/paths';
 import { may } from '@/lib/permissions';
 import { stageWords } from '@/lib/schedule/stages';
 import { found } from '@/server/base/found';
 import { pageContext } from '@/server/base/page-context';
+import { getForCrew } from '@/server/days/get-for-crew';
 import { listPhotos } from '@/server/files/list-photos';
 import { getJob } from '@/server/jobs/get-job';
+import { listSignOffs } from '@/server/snags/list-sign-offs';
+import { listSnags } from '@/server/snags/list-snags';
 import { listRooms } from '@/server/walls/list-rooms';
 
 export const metadata: Metadata = { title: 'Job' };
@@ -24,6 +30,9 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
   const job = await found(getJob(ctx, { jobId }));
   const rooms = await listRooms(ctx, { jobId });
   const photos = await listPhotos(ctx, { jobId });
+  const snags = await listSnags(ctx, { jobId });
+  const signOffs = await listSignOffs(ctx, { jobId });
+  const forCrew = await getForCrew(ctx, { jobId });
   return (
     <>
       <TitleBlock
@@ -64,6 +73,27 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
             />
           </section>
         ) : null}
+        {may(ctx.actor.role, 'jobs:change') ? (
+          <section>
+            <TitleBlock title="For the crew" />
+            <ForCrewForm jobId={job.id} forCrew={forCrew} key={JSON.stringify(forCrew)} />
+          </section>
+        ) : null}
+        <section>
+          <TitleBlock title="Snags" meta={openWords(snags)} />
+          <JobSnags
+            jobId={job.id}
+            snags={snags}
+            rooms={rooms}
+            mayChange={may(ctx.actor.role, 'snags:change')}
+          />
+        </section>
+        {signOffs.length > 0 ? (
+          <section>
+            <TitleBlock title="Signed" />
+            <SignOffList signOffs={signOffs} />
+          </section>
+        ) : null}
         <section>
           <TitleBlock title="What happened" />
           <JobStory story={job.story} />
@@ -77,4 +107,9 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
       </div>
     </>
   );
+}
+
+function openWords(snags: { closedAt: string | null }[]): string {
+  const open = snags.filter(({ closedAt }) => closedAt === null).length;
+  return open === 0 ? 'none open' : `${open} open`;
 }
