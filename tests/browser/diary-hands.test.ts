@@ -8,6 +8,7 @@ import { getAt } from '../help/ask-at';
 import { keepPicture, useBrowser } from '../help/browser';
 import { expectNoSeriousFault } from '../help/browser-faults';
 import { moveShopToMorning } from '../help/morning-shop';
+import { settled } from '../help/settled';
 
 describe('the diary under the hand', () => {
   const browser = useBrowser();
@@ -38,6 +39,8 @@ describe('the diary under the hand', () => {
     const page = await browser.openPage({ as: 'scheduler', mayLog });
     await page.goto(paths.diaryOn(monday));
     await page.locator('li[data-waiting]').first().waitFor();
+    // Keys are heard and lists stand still only then; a busy machine takes its time.
+    await settled(page);
     return page;
   }
 
@@ -65,7 +68,6 @@ describe('the diary under the hand', () => {
 
   it('rests when nothing happens', async () => {
     const page = await openWeek();
-    await page.waitForTimeout(1_000);
     const changes = await page.evaluate(async () => {
       let count = 0;
       const observer = new MutationObserver((records) => {

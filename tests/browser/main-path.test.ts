@@ -11,6 +11,7 @@ import { keepPicture, signIn, useBrowser } from '../help/browser';
 import { expectNoSeriousFault } from '../help/browser-faults';
 import { moveShopToMorning } from '../help/morning-shop';
 import { pressNext, typeInches } from '../help/pad';
+import { settled } from '../help/settled';
 import { inShort, readOff, trueAngleDeg, trueLengthMm } from '../help/true-kitchen';
 
 const customer = 'Wilma Stroud';
@@ -50,7 +51,7 @@ describe('one job from the first call to the booked install', () => {
   it('begins with a call: customer, site and job in one go', async () => {
     const page = await browser.openPage({ as: 'scheduler' });
     await page.goto(paths.jobs());
-    await page.waitForLoadState('networkidle');
+    await settled(page);
     await page.keyboard.press('n');
     await page.waitForURL(`**${paths.newJob()}`);
     await page.getByLabel('Customer', { exact: true }).fill(customer);
@@ -72,9 +73,11 @@ describe('one job from the first call to the booked install', () => {
   it('is booked by key from the waiting list, and a taken time is refused in clear words', async () => {
     const page = await browser.openPage({ as: 'scheduler', mayLog: [/status of 409/] });
     await page.goto(paths.diary());
-    await page.waitForLoadState('networkidle');
+    await settled(page);
     const key = await waitingLine(page).locator('kbd').first().textContent();
     await page.keyboard.press(key ?? '');
+    await page.getByRole('heading', { name: 'Times that work' }).waitFor();
+    await page.keyboard.press('b');
     const dialog = page.getByRole('dialog');
     await dialog.getByRole('heading', { name: new RegExp(customer) }).waitFor();
     const days = await visits(shop.today, addDays(shop.today, 20));
@@ -148,7 +151,8 @@ describe('one job from the first call to the booked install', () => {
           await page.goto(paths.demoPhoneOf({ number: phone }));
           return links.count();
         },
-        { timeout: 15_000 },
+        // The office may take a booking back for twelve seconds before anybody is told.
+        { timeout: 30_000 },
       )
       .toBeGreaterThanOrEqual(least);
     return (await links.last().getAttribute('href')) ?? '';

@@ -9,26 +9,31 @@ import type { Queued } from '@/lib/sync/queued';
 import { answerPad, questionOn } from '../help/answer-pad';
 import { getAt } from '../help/ask-at';
 import { expectNoSeriousFault } from '../help/browser-faults';
+import { drawSixWalls } from '../help/draw-kitchen';
 import { type OwnPhone, useOwnPhones } from '../help/own-phone';
 import { pressNext, typeInches } from '../help/pad';
 import { readStore } from '../help/phone-store';
-import { openShopOfToday, type ShopOfToday } from '../help/shop-of-today';
+import { joinAsMeasurer, openShopOfToday, type ShopOfToday } from '../help/shop-of-today';
 import { plainJpeg } from '../help/test-photo';
-import { inShort, readOff } from '../help/true-kitchen';
+import { inShort, readOff, sixWalls, sixWallsInches } from '../help/true-kitchen';
 import { wakeWorker } from '../help/wake-worker';
 import { openWobblyLine, type WobblyLine } from '../help/wobbly-line';
 
 describe('a room read with no signal at all', () => {
   const ownPhone = useOwnPhones();
   let shop: ShopOfToday;
+  /** The session of the other measurer. */
+  let second = '';
   let line: WobblyLine;
   beforeAll(async () => {
     shop = await openShopOfToday(inject('baseUrl'), 'Nan Reed');
+    second = await joinAsMeasurer(shop, 'Bo Marsh');
     line = await openWobblyLine(inject('baseUrl'));
   });
 
   beforeEach(() => line.set('through'));
 
+  const isReady = (page: Page) => page.getByText('all sent · ready for no signal').waitFor();
   const phoneOf = (own: ShopOfToday) => ownPhone({ ...own, baseUrl: line.baseUrl });
   /** The browser knows that there is no signal, and its worker, which it does not tell, finds none either. */
   async function loseSignal(phone: OwnPhone): Promise<void> {
@@ -54,10 +59,10 @@ describe('a room read with no signal at all', () => {
       work.kind === 'reading' ? [work.reading] : [],
     );
 
-  it('arrives whole, once and in order, though the phone died three times in between', async () => {
+  it('arrives whole, once and in order, though the phone died three times and another read there too', async () => {
     const phone = await phoneOf(shop);
     await phone.page.goto(paths.today());
-    await phone.page.getByText('all sent · ready for no signal').waitFor();
+    await isReady(phone.page);
     await loseSignal(phone);
 
     // From here on there is no signal: the day, the stop and a new room open all the same.
@@ -66,23 +71,22 @@ describe('a room read with no signal at all', () => {
     await phone.page.getByRole('button', { name: 'Arrived' }).tap();
     await expectNoSeriousFault(phone.page);
     await phone.page.getByRole('button', { name: 'Draw the first room' }).tap();
-    await phone.page.getByRole('button', { name: /^All round/ }).tap();
-    for (const inches of [142, 120, 142, 120]) {
-      await typeInches(phone.page, inches * 25.4, 25.4 / 16);
-      await pressNext(phone.page);
-    }
-    await phone.page.getByRole('button', { name: 'Start measuring' }).tap();
-    await phone.page.getByRole('heading', { name: /^Corner D–A/ }).waitFor();
+    const hand = handOf(phone);
+    await hand.does(() => drawSixWalls(phone.page));
+    await phone.page.getByRole('heading', { name: /^Corner F–A/ }).waitFor();
     const [address = ''] = phone.page.url().split('#');
     const book = await bookOn(phone.page);
-    const asked = readOff(book);
+    const walls = book.wallBook.room.chains.flatMap((chain) => chain.walls);
+    expect(walls.map(({ nominalLengthMm }) => Math.round(nominalLengthMm / 25.4))).toEqual(
+      sixWallsInches,
+    );
+    const asked = readOff(book, sixWalls);
     const { stepMm } = book.rules;
-    expect(asked.length).toBeGreaterThan(15);
-    const roomId = book.wallBook.room.id;
+    expect(asked.length).toBeGreaterThan(25);
 
-    const deaths = [3, 9, 14];
+    const deaths = [3, Math.floor(asked.length / 2), asked.length - 3];
     for (const [at, reading] of asked.entries()) {
-      await answerPad(phone.page, reading, stepMm);
+      await hand.does(() => answerPad(phone.page, reading, stepMm));
       if (!deaths.includes(at)) continue;
       // Half a value stands there; the battery is empty.
       const question = await questionOn(phone.page);
@@ -98,6 +102,9 @@ describe('a room read with no signal at all', () => {
       await phone.page.getByRole('button', { name: 'clear' }).tap();
     }
     await phone.page.getByText('Nothing more is asked for').waitFor();
+    console.log(
+      `· a kitchen of six walls, drawn and read: ${asked.length} readings, ${hand.words()}`,
+    );
 
     await markPhoto(phone.page);
     await phone.page.goto(`${address}#leave`);
@@ -109,26 +116,90 @@ describe('a room read with no signal at all', () => {
 
     await findSignal(phone);
     await phone.page.getByText(/^all sent/).waitFor({ timeout: 60_000 });
-    const { wallBook, submittedAt, readers } = await getAt<WallBookView>(
-      shop,
-      apiPaths.room(roomId),
-    );
-    expect(wallBook.readings.map(inShort)).toEqual(asked.map(inShort));
-    expect(new Set(wallBook.readings.map(({ id }) => id)).size).toBe(asked.length);
-    expect(readers.map(({ name }) => name)).toEqual(['Nan Reed']);
-    expect(submittedAt).not.toBe(null);
+    const roomId = book.wallBook.room.id;
+    const sent = await getAt<WallBookView>(shop, apiPaths.room(roomId));
+    expect(sent.wallBook.readings.map(inShort)).toEqual(asked.map(inShort));
+    expect(new Set(sent.wallBook.readings.map(({ id }) => id)).size).toBe(asked.length);
+    expect(sent.submittedAt).not.toBe(null);
     const photos = await getAt<PhotoRow[]>(shop, apiPaths.photosOfRoom(roomId));
     expect(photos).toMatchObject([
       { caption: expect.stringMatching(/^Wall A: \d+/), takenBy: 'Nan Reed' },
     ]);
     expect(await readStore(phone.page, 'queue')).toEqual([]);
+
+    const other = await ownPhone({ ...shop, baseUrl: line.baseUrl, cookie: second });
+    await readBesideEachOther([phone, other], sent);
   });
 
+  /** Both read wall A at a height that nobody has read yet, 140 and 141 inches, and neither hears of the other. */
+  async function readBesideEachOther(phones: [OwnPhone, OwnPhone], before: WallBookView) {
+    const { id: roomId, chains } = before.wallBook.room;
+    const wallId = chains[0]?.walls[0]?.id ?? '';
+    for (const phone of phones) {
+      await phone.page.goto(paths.today());
+      await isReady(phone.page);
+      await phone.page.goto(`${paths.walls(roomId)}#add/length/${wallId}`);
+      await phone.page.getByRole('heading', { level: 1, name: 'Wall A, length' }).waitFor();
+      await phone.setOffline(true);
+    }
+    line.set('gone');
+    for (const [at, { page }] of phones.entries()) {
+      await typeInches(page, 70 * 25.4, 25.4 / 16);
+      await pressNext(page);
+      await page.locator('output[aria-label="length"]').waitFor();
+      await typeInches(page, (140 + at) * 25.4, 25.4 / 16);
+      await pressNext(page);
+      await page.getByText('saved here · 1, no signal').waitFor();
+    }
+    for (const phone of phones) {
+      await findSignal(phone);
+      await phone.page.getByText(/^all sent/).waitFor({ timeout: 60_000 });
+    }
+    const { wallBook, readers } = await getAt<WallBookView>(shop, apiPaths.room(roomId));
+    const known = new Set(before.wallBook.readings.map(({ id }) => id));
+    const added = wallBook.readings.filter(({ id }) => !known.has(id));
+    expect(added.map((reading) => 'valueMm' in reading && reading.valueMm / 25.4)).toEqual([
+      140, 141,
+    ]);
+    // Nothing that stood there was touched.
+    expect(wallBook.readings.filter(({ id }) => known.has(id))).toEqual(before.wallBook.readings);
+    const readBy = ({ id }: Reading) =>
+      readers.find(({ readingIds }) => readingIds.includes(id))?.name;
+    expect(added.map(readBy)).toEqual(['Nan Reed', 'Bo Marsh']);
+
+    // Each is shown the other's, with the name and the difference.
+    const says: [OwnPhone, RegExp, string][] = [
+      [phones[0], /Bo Marsh read/, '1" more'],
+      [phones[1], /Nan Reed read/, '1" less'],
+    ];
+    for (const [{ page }, name, words] of says) {
+      await page.goto(`${paths.walls(roomId)}#wall/${wallId}`);
+      await page.reload();
+      expect(await page.getByRole('link', { name }).first().textContent()).toContain(words);
+    }
+    await phones[0].page.goto(`${paths.walls(roomId)}#leave`);
+    await phones[0].page.getByText(/140".*\(Nan Reed\).*141".*\(Bo Marsh\)/).waitFor();
+  }
+
+  /** What a thumb does on a phone: how many taps, and how long the phone took for them. */
+  function handOf(phone: OwnPhone) {
+    let [taps, ms] = [0, 0];
+    return {
+      does: async (work: () => Promise<void>) => {
+        const [tapsBefore, began] = [phone.taps, performance.now()];
+        await work();
+        taps += phone.taps - tapsBefore;
+        ms += performance.now() - began;
+      },
+      words: () => `${taps} taps, ${Math.round(ms / 1_000)} s by a robot that need not look`,
+    };
+  }
+
   it('goes out by itself when the signal is back, though every page was closed by then', async () => {
-    const own = await openShopOfToday(inject('baseUrl'), 'Bo Marsh');
+    const own = await openShopOfToday(inject('baseUrl'), 'Ida Quill');
     const phone = await phoneOf(own);
     await phone.page.goto(paths.todayVisit(own.visitId));
-    await phone.page.getByText('all sent · ready for no signal').waitFor();
+    await isReady(phone.page);
     await loseSignal(phone);
     await phone.page.getByRole('button', { name: 'Arrived' }).tap();
     await phone.page.getByText('saved here · 1, no signal').waitFor();

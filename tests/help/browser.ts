@@ -2,6 +2,7 @@ import { mkdirSync } from 'node:fs';
 import { type Browser, type BrowserContext, chromium, type Page } from 'playwright-core';
 import { afterAll, afterEach, beforeAll, expect, inject } from 'vitest';
 import type { Role } from '@/lib/permissions';
+import { watchRequests } from './settled';
 
 export type Size = 'desk' | 'phone';
 export type Theme = 'light' | 'dark';
@@ -65,6 +66,7 @@ export function useBrowser() {
     });
     context.setDefaultTimeout(15_000);
     opened.push(context);
+    watchRequests(context);
     if (as) await context.addCookies(cookies(inject('sessions')[as], baseURL));
     const fault = (words: string) => {
       if (!mayLog.some((pattern) => pattern.test(words))) faults.push(words);
@@ -99,8 +101,9 @@ export async function signIn(page: Page, role: Role): Promise<void> {
   await page.waitForURL((url) => url.pathname !== '/sign-in');
 }
 
-/** Kept for whoever wants to look: tests/.out/shots/<name>-<size>-<theme>.png. */
+/** For whoever wants to look, with KEEP_PICTURES=1: tests/.out/shots/<name>-<size>-<theme>.png. */
 export async function keepPicture(page: Page, name: string, theme: Theme = 'light') {
+  if (!process.env.KEEP_PICTURES) return;
   const size = (page.viewportSize()?.width ?? 0) > 800 ? 'desk' : 'phone';
   mkdirSync('tests/.out/shots', { recursive: true });
   await page.screenshot({

@@ -8,6 +8,8 @@ import { flags, sizes } from './browser';
 export type OwnPhone = {
   /** The page that is open; another after each start. */
   page: Page;
+  /** How often the glass was touched, over all its lives. */
+  taps: number;
   setOffline: (isOffline: boolean) => Promise<void>;
   /** Ends the browser's process where it stands, as a phone does when it needs room or its battery is empty. */
   kill: () => Promise<void>;
@@ -36,6 +38,7 @@ export function useOwnPhones() {
       return context;
     };
     const phone: OwnPhone = {
+      taps: 0,
       get page() {
         const page = held().pages().at(-1);
         if (!page) throw new Error('no page is open');
@@ -53,6 +56,12 @@ export function useOwnPhones() {
         });
         opened.push(context);
         context.setDefaultTimeout(15_000);
+        await context.exposeFunction('countTap', () => {
+          phone.taps += 1;
+        });
+        await context.addInitScript(() =>
+          addEventListener('pointerdown', () => Reflect.get(window, 'countTap')(), true),
+        );
         await context.setOffline(isOffline);
         // A killed browser may not have written its cookies yet; the person is signed in all the same.
         await context.addCookies(cookiesFor(cookie, baseUrl));

@@ -18,7 +18,7 @@ export type ShopOfToday = {
   visitId: string;
 };
 
-export const shopPassword = 'a-long-password';
+const shopPassword = 'a-long-password';
 
 /** A shop of its own where it is morning, with one measure booked for today; its owner is the measurer. */
 export async function openShopOfToday(baseUrl: string, personName: string): Promise<ShopOfToday> {
@@ -74,4 +74,21 @@ export async function openShopOfToday(baseUrl: string, personName: string): Prom
     },
   });
   return { ...at, zone, shopName, email, personName, customer, jobId, visitId: visit.id };
+}
+
+/** One more measurer of the shop, who joins by the link of an invitation; gives the session. */
+export async function joinAsMeasurer(shop: ShopOfToday, personName: string): Promise<string> {
+  const body = { email: `${randomUUID().slice(0, 8)}@shop.example`, role: 'measurer' };
+  const { link } = await getAt<{ link: string }>(shop, apiPaths.invitations(), { body });
+  const response = await fetch(shop.baseUrl + apiPaths.joinShop(), {
+    method: 'POST',
+    headers: { origin: shop.baseUrl, 'content-type': 'application/json' },
+    body: JSON.stringify({
+      invitationId: new URL(link).pathname.split('/').at(-1),
+      personName,
+      password: shopPassword,
+    }),
+  });
+  expect(response.status).toBe(200);
+  return cookiesOf(response);
 }

@@ -1,4 +1,4 @@
-import { planRoom } from '@/db/seed/demo-rooms';
+import { planRoom, type RoomPlan } from '@/db/seed/demo-rooms';
 import { measureRoom } from '@/db/seed/measure-room';
 import { seededRandom } from '@/db/seed/seeded-random';
 import { angleAt, lengthOf } from '@/db/seed/true-room';
@@ -6,21 +6,28 @@ import type { WallBookView } from '@/lib/contracts/rooms';
 import type { Reading, Tool } from '@/lib/contracts/wall-book';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 
+const planned = (plan: RoomPlan) =>
+  planRoom(plan, defaultShopRules('US').fit, seededRandom(1)).truth;
+
 /** A nearly true kitchen that stands nowhere, 142 by 120 inches or so; the walls A to D of a room drawn all round. */
-const { truth } = planRoom('nearly-true', defaultShopRules('US').fit, seededRandom(1));
+const truth = planned('nearly-true');
+
+/** An L, 166 by 142 inches or so: six walls, of which D begins at an outside corner. */
+export const sixWalls = planned('misread');
+export const sixWallsInches = [166, 82, 71, 59, 95, 142];
 
 export const trueAngleDeg = (wallIndex: number, zMm: number) => angleAt(truth, wallIndex, zMm);
 export const trueLengthMm = (wallIndex: number, zMm: number) => lengthOf(truth, wallIndex, zMm);
 
 /** What a measurer reads off it to everything that the program asks of this book, in the order asked. */
-export function readOff({ wallBook, runs, rules }: WallBookView): Reading[] {
+export function readOff({ wallBook, runs, rules }: WallBookView, of = truth): Reading[] {
   const toolOf = (kind: Tool['spec']['kind']) => {
     const tool = wallBook.tools.find(({ spec }) => spec.kind === kind);
     if (!tool) throw new Error(`the shop has no ${kind}`);
     return tool;
   };
   return measureRoom({
-    truth,
+    truth: of,
     room: wallBook.room,
     runs,
     rules,
