@@ -10,7 +10,7 @@ const { measureFirstLoad } = await import('./first-load.mjs');
 ensureBuilt(say);
 say('first-load JavaScript of each route, gzipped, beside an empty page of the framework');
 await measureFirstLoad();
-for (const script of ['fit-room.ts', 'diary-week.ts', 'blunder-study.ts']) {
+for (const script of ['fit-room.ts', 'diary-week.ts', 'fuzz.ts', 'blunder-study.ts']) {
   say(script);
   spawnSync(process.execPath, ['node_modules/tsx/dist/cli.mjs', `tests/bench/${script}`], {
     stdio: 'inherit',
