@@ -164,6 +164,8 @@ export const apiPaths = {
   /** Where a typed address is. */
   geocode: () => '/api/geocode',
   rules: () => '/api/rules',
+  /** What a change of the rules would do. */
+  rulesPreview: () => '/api/rules/preview',
   messages: () => '/api/messages',
   schedulerItem: (itemId: string) => `/api/messages/items/${part(itemId)}`,
   wordings: () => '/api/messages/wordings',

@@ -1,7 +1,7 @@
 import type { ChangeShopRulesInput, ShopSettings } from '@/lib/contracts/shop-rules';
+import { lengthRuleGroups } from '@/lib/rules/length-rules';
 import { formatLength } from '@/lib/units/format-length';
 import { parseLength } from '@/lib/units/parse-length';
-import { lengthRuleGroups } from './length-rules';
 
 type Read = { body: ChangeShopRulesInput | null; errors: Record<string, string> };
 

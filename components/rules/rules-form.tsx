@@ -11,10 +11,12 @@ import { SelectField } from '@/components/ui/select-field';
 import { TextField } from '@/components/ui/text-field';
 import { TitleBlock } from '@/components/ui/title-block';
 import { showToast } from '@/components/ui/toast-store';
-import type { ShopSettings } from '@/lib/contracts/shop-rules';
+import type { RulePreview } from '@/lib/contracts/rule-changes';
+import type { ChangeShopRulesInput, ShopSettings } from '@/lib/contracts/shop-rules';
 import { apiPaths } from '@/lib/paths';
+import { lengthRuleGroups } from '@/lib/rules/length-rules';
 import { formatLength } from '@/lib/units/format-length';
-import { lengthRuleGroups } from './length-rules';
+import { ChangePreview } from './change-preview';
 import { readRules } from './read-rules';
 
 const weekdays = ['Monday', 'Tuesday', 'Wednesday', 'Thursday', 'Friday', 'Saturday', 'Sunday'];
@@ -23,6 +25,9 @@ const weekdays = ['Monday', 'Tuesday', 'Wednesday', 'Thursday', 'Friday', 'Satur
 export function RulesForm({ settings, mayChange }: { settings: ShopSettings; mayChange: boolean }) {
   const router = useRouter();
   const [unit, setUnit] = useState(settings.fit.unit);
+  const [looked, setLooked] = useState<{ preview: RulePreview; body: ChangeShopRulesInput } | null>(
+    null,
+  );
   const form = useFormRequest(
     async (fields) => {
       const { body, errors } = readRules(fields, settings);
@@ -35,12 +40,22 @@ export function RulesForm({ settings, mayChange }: { settings: ShopSettings; may
           errors,
         });
       }
-      await askServer(apiPaths.rules(), { method: 'PATCH', body });
+      const asked = { method: 'POST', body } as const;
+      const preview = await askServer<RulePreview>(apiPaths.rulesPreview(), asked);
+      if (preview.changes.length === 0) showToast({ text: 'Nothing is changed yet' });
+      else setLooked({ preview, body });
+    },
+    () => form.rest(),
+  );
+  const saving = useFormRequest(
+    async () => {
+      await askServer(apiPaths.rules(), { method: 'PATCH', body: looked?.body });
     },
     () => {
       showToast({ text: 'Shop rules saved. Released sheets keep the rules they were made by.' });
+      setLooked(null);
+      saving.rest();
       router.refresh();
-      form.rest();
     },
   );
   const { fit, booking } = settings;
@@ -193,8 +208,17 @@ export function RulesForm({ settings, mayChange }: { settings: ShopSettings; may
         ))}
       </fieldset>
       <FormError problem={form.problem} shownFields={Object.keys(form.problem?.errors ?? {})} />
+      <FormError problem={saving.problem} shownFields={[]} />
+      {looked ? (
+        <ChangePreview
+          preview={looked.preview}
+          isBusy={saving.isBusy}
+          onSave={() => saving.run({})}
+          onClose={() => setLooked(null)}
+        />
+      ) : null}
       {mayChange ? (
-        <Button type="submit" className="mt-4" busyText={form.isBusy ? 'Saving…' : undefined}>
+        <Button type="submit" className="mt-4" busyText={form.isBusy ? 'Looking…' : undefined}>
           Save the rules
         </Button>
       ) : (

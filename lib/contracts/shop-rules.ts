@@ -1,6 +1,7 @@
 /** Shop rules: what the shop decides. Each default's basis is in `lib/measure/rules`. */
 import { z } from 'zod';
 import { checklistRules } from './checklists';
+import { ownRuleSet } from './rule-sets';
 
 const mmValue = z.number().finite().min(0).max(5_000);
 
@@ -75,7 +76,9 @@ export const fitRules = z.object({
   /** Between the back of a crown moulding and the wall. */
   crownSpringDeg: z.number().gt(0).lt(90).default(38),
   /** Which published rule set gives the verdicts; `shop` for the shop's own. */
-  ruleSet: z.string().max(40),
+  ruleSet: z.string().max(60),
+  /** Copies of rule sets that the shop has made its own. */
+  ownRuleSets: z.array(ownRuleSet).max(12).optional(),
 });
 export type FitRules = z.infer<typeof fitRules>;
 

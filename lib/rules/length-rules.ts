@@ -1,6 +1,8 @@
 import type { FitRules } from '@/lib/contracts/shop-rules';
 
-type LengthRule = { [K in keyof FitRules]: FitRules[K] extends number ? K : never }[keyof FitRules];
+type LengthRule = {
+  [K in keyof FitRules]-?: FitRules[K] extends number ? K : never;
+}[keyof FitRules];
 
 export type RuleGroup = {
   title: string;

@@ -18,7 +18,13 @@ export async function changeShopRules(
   return ctx.db.transaction(async (tx) => {
     const isThisShop = eq(shops.id, ctx.shop.id);
     const [before] = await tx
-      .select({ rules: shops.rules })
+      .select({
+        name: shops.name,
+        phone: shops.phone,
+        email: shops.email,
+        zone: shops.zone,
+        rules: shops.rules,
+      })
       .from(shops)
       .where(isThisShop)
       .for('update');
@@ -47,7 +53,10 @@ export async function changeShopRules(
       subjectKind: 'person',
       subjectId: ctx.actor.personId,
       summary: 'Shop rules changed',
-      detail: { before: before.rules, given: input },
+      detail: {
+        before: { ...before, ...before.rules, rules: undefined },
+        given: { ...input, phone },
+      },
     });
     const { rules: kept, ...shop } = after;
     return { ...shop, ...kept };

@@ -1,11 +1,14 @@
 import type { Metadata } from 'next';
 import Link from 'next/link';
+import { RuleHistory } from '@/components/rules/rule-history';
+import { RuleSetPart } from '@/components/rules/rule-set-part';
 import { RulesForm } from '@/components/rules/rules-form';
 import { TitleBlock } from '@/components/ui/title-block';
 import { paths } from '@/lib/paths';
 import { may } from '@/lib/permissions';
 import { pageContext } from '@/server/base/page-context';
 import { getShopRules } from '@/server/shops/get-shop-rules';
+import { listRuleChanges } from '@/server/shops/list-rule-changes';
 
 export const metadata: Metadata = { title: 'Shop rules' };
 
@@ -34,6 +37,14 @@ export default async function RulesPage() {
         settings={settings}
         mayChange={may(ctx.actor.role, 'shop:change')}
       />
+      <div className="mt-8 flex flex-col gap-8">
+        <RuleSetPart
+          key={JSON.stringify([settings.fit.ruleSet, settings.fit.ownRuleSets])}
+          fit={settings.fit}
+          mayChange={may(ctx.actor.role, 'shop:change')}
+        />
+        <RuleHistory lines={await listRuleChanges(ctx)} />
+      </div>
     </>
   );
 }

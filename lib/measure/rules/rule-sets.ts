@@ -8,7 +8,7 @@ import type { RuleSet } from './rule-set';
 import { shopRuleSet } from './shop-own';
 import { usResidential } from './us-residential';
 
-/** Published sets, as the Shop rules screen lists them; `shop` stands beside them. */
+/** Published sets, as the Shop rules screen lists them; the shop's copies and `shop` stand beside them. */
 export const PUBLISHED_RULE_SETS: readonly RuleSet[] = [
   usResidential,
   awi0620Premium,
@@ -30,6 +30,7 @@ export const PUBLISHED_RULE_SETS: readonly RuleSet[] = [
  * Edge: an unknown id leaves the shop's own alone. Example: ruleSet 'nhbc-2020' → [NHBC 2020, shop's own].
  */
 export function ruleSetsOf(rules: FitRules): RuleSet[] {
-  const picked = PUBLISHED_RULE_SETS.filter(({ id }) => id === rules.ruleSet);
+  const all: readonly RuleSet[] = [...PUBLISHED_RULE_SETS, ...(rules.ownRuleSets ?? [])];
+  const picked = all.filter(({ id }) => id === rules.ruleSet);
   return [...picked, shopRuleSet(rules)];
 }
