@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { adjustRoom } from '@/lib/measure/adjust-room';
 import type { AdjustedRoom } from '@/lib/measure/adjusted-room';
+import { findBlunder } from '@/lib/measure/find-blunder';
 import type { RoomObservation, RoomShape } from '@/lib/measure/room-observations';
 import { looseTape, readDiagonal, readLegs, readLength, type Tape } from './random-readings';
 import {
@@ -223,6 +224,40 @@ describe('adjusting a room', () => {
       const match = other.walls.find((wall) => wall.wallId === id);
       expect(match?.lengthMm.value).toBeCloseTo(lengthMm.value, 4);
     }
+  });
+
+  it('gives the same room, checks and suspects from whichever corner it is walked', () => {
+    fc.assert(
+      fc.property(fc.integer({ min: 1, max: 1_000 }), fc.nat(9), (seed, turn) => {
+        const random = seeded(seed);
+        const plan = { ...randomPlan(random, 4 + (seed % 7), CROOKED), zRefMm: 910 };
+        const readings = readAll(plan, looseTape(random), random);
+        const wrong = readings.map((o, i) =>
+          i === seed % 7 && o.kind === 'length' ? { ...o, valueMm: o.valueMm + 25.4 } : o,
+        );
+        const room = drawnShape(plan);
+        const walls = room.chains[0]?.walls ?? [];
+        const by = turn % walls.length;
+        const turned = {
+          chains: [{ closed: true, walls: [...walls.slice(by), ...walls.slice(0, by)] }],
+        };
+        const [one, other] = [adjusted(room, wrong), adjusted(turned, wrong)];
+        expect(other.chiSquare.value).toBeCloseTo(one.chiSquare.value, 3);
+        for (const [i, { w, redundancy }] of one.checks.entries()) {
+          expect(other.checks[i]?.w).toBeCloseTo(w, 3);
+          expect(other.checks[i]?.redundancy).toBeCloseTo(redundancy, 5);
+        }
+        for (const { wallId: id, lengthMm } of one.walls) {
+          const match = other.walls.find((wall) => wall.wallId === id)?.lengthMm;
+          expect(match?.value).toBeCloseTo(lengthMm.value, 3);
+          expect(match?.u).toBeCloseTo(lengthMm.u, 4);
+        }
+        const named = (adjustment: AdjustedRoom) =>
+          findBlunder(adjustment)?.suspects.map(({ readingIds }) => readingIds);
+        expect(named(other)).toEqual(named(one));
+      }),
+      { numRuns: 25, seed: 2 },
+    );
   });
 
   it('never grows a U by one more reading that agrees', () => {
