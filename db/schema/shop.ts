@@ -1,5 +1,5 @@
 import { sql } from 'drizzle-orm';
-import { check, integer, jsonb, pgTable, text, timestamp } from 'drizzle-orm/pg-core';
+import { boolean, check, integer, jsonb, pgTable, text, timestamp } from 'drizzle-orm/pg-core';
 import type { ShopRules } from '@/lib/contracts/shop-rules';
 
 /** A cabinet shop: where, in what units, by which rules. Every other table hangs from it. */
@@ -14,6 +14,8 @@ export const shops = pgTable(
     /** IANA zone; everything a person types or reads is in it. */
     zone: text('zone').notNull(),
     rules: jsonb('rules').$type<ShopRules>().notNull(),
+    /** To play with: nobody is told anything from it, and it can be removed whole. */
+    isSample: boolean('is_sample').notNull().default(false),
     nextJobNumber: integer('next_job_number').notNull().default(1),
     createdAt: timestamp('created_at', { withTimezone: true, mode: 'date' }).notNull().defaultNow(),
   },
