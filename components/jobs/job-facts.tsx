@@ -1,10 +1,21 @@
+import Link from 'next/link';
 import { Verdict } from '@/components/ui/verdict';
 import type { JobView } from '@/lib/contracts/jobs';
 import { phoneWords } from '@/lib/messages/phone-number';
+import { paths } from '@/lib/paths';
 import type { Region } from '@/lib/time/text-locale';
 
 /** Who and where, as one reads it out on the phone. */
-export function JobFacts({ job, region }: { job: JobView; region: Region }) {
+export function JobFacts({
+  job,
+  region,
+  mayRead,
+}: {
+  job: JobView;
+  region: Region;
+  /** What was said with the customer is one step away. */
+  mayRead: boolean;
+}) {
   const place = [job.street, job.town, job.postcode].filter(Boolean).join(', ');
   const told = [job.mayText ? 'text' : null, job.mayEmail ? 'e-mail' : null].filter(Boolean);
   return (
@@ -31,6 +42,14 @@ export function JobFacts({ job, region }: { job: JobView; region: Region }) {
       <dd>
         {told.length > 0 ? told.join(' and ') : <Verdict kind="waiting">call them</Verdict>}
         {job.language === 'es' ? ', in Spanish' : ''}
+        {mayRead ? (
+          <>
+            {' · '}
+            <Link href={paths.thread(job.customerId)} className="link">
+              messages
+            </Link>
+          </>
+        ) : null}
       </dd>
       <dt className="text-graphite">Site</dt>
       <dd>{place}</dd>

@@ -7,6 +7,7 @@ import { addressPlace, towns } from '@/lib/island/demo-island';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { demoJobs } from './demo-jobs';
 import { seedJob } from './seed-job';
+import { seedMessages } from './seed-messages';
 import { seedSignIn } from './seed-sign-in';
 import { seededRandom } from './seeded-random';
 import { type CrewKey, crewsOfTheShop, juniperBend, type StaffKey, staff } from './staff';
@@ -49,19 +50,22 @@ export type SeedShop = {
   random: () => number;
 };
 
-async function seedJuniperBend(
-  tx: Transaction,
-  { now, linkVisit }: SeedOptions,
-  passwordHash: string,
-) {
-  const id = randomUUID();
+async function seedJuniperBend(tx: Transaction, options: SeedOptions, passwordHash: string) {
   const rules = defaultShopRules('US');
-  rules.booking = { ...rules.booking, dayStart: '07:30' };
-  const { name, phone, email, zone } = juniperBend;
-  const nextJobNumber = 2401 + demoJobs.length;
-  await tx
-    .insert(shops)
-    .values({ id, name, phone, email, zone, region: 'US', rules, nextJobNumber });
+  const shop = { ...juniperBend, id: randomUUID(), region: 'US' as const, rules };
+  await seedWorkingShop(tx, shop, options, (shopId) => seedStaff(tx, shopId, passwordHash));
+}
+
+/** A shop in the middle of its work: crews, tools, some forty jobs, what was told and answered. */
+export async function seedWorkingShop(
+  tx: Transaction,
+  row: Omit<typeof shops.$inferInsert, 'nextJobNumber'>,
+  { now, linkVisit }: Omit<SeedOptions, 'hashPassword'>,
+  seedPeople: (shopId: string) => Promise<Record<StaffKey, string>>,
+): Promise<void> {
+  const { id, zone } = row;
+  const rules = { ...row.rules, booking: { ...row.rules.booking, dayStart: '07:30' } };
+  await tx.insert(shops).values({ ...row, rules, nextJobNumber: 2401 + demoJobs.length });
   const shop: SeedShop = {
     id,
     zone,
@@ -69,7 +73,7 @@ async function seedJuniperBend(
     now,
     linkVisit,
     random: seededRandom(20_26),
-    staff: await seedStaff(tx, id, passwordHash),
+    staff: await seedPeople(id),
     crews: {} as SeedShop['crews'],
     tools: await seedTools(tx, id, rules.fit.stepMm),
   };
@@ -81,6 +85,7 @@ async function seedJuniperBend(
       place: addressPlace(job.street, job.house),
     });
   }
+  await seedMessages(tx, shop);
 }
 
 async function seedStaff(tx: Transaction, shopId: string, passwordHash: string) {

@@ -52,7 +52,11 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
               ) : null
             }
           />
-          <JobFacts job={job} region={ctx.shop.region} />
+          <JobFacts
+            job={job}
+            region={ctx.shop.region}
+            mayRead={may(ctx.actor.role, 'messages:read')}
+          />
         </section>
         <section>
           <TitleBlock title="Rooms" meta={`${rooms.length} of ${job.roomCount}`} />
