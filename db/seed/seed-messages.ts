@@ -1,7 +1,7 @@
 /** What the demo's customers were told before the newcomer came, what they answered, and what the office has to answer. */
 import { and, asc, eq, ne } from 'drizzle-orm';
 import type { Transaction } from '@/db/database';
-import { customers, jobs, messages, schedulerItems, sites, visits } from '@/db/schema';
+import { customers, jobs, messages, schedulerItems, shops, sites, visits } from '@/db/schema';
 import type { SchedulerItemKind } from '@/lib/contracts/messages';
 import { phoneWords } from '@/lib/messages/phone-number';
 import { renderEmail, renderSms } from '@/lib/messages/render-message';
@@ -10,7 +10,6 @@ import { visitInWords } from '@/lib/messages/visit-words';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { formatDay, formatWindow } from '@/lib/time/format-instant';
 import type { SeedShop } from './seed-demo';
-import { juniperBend } from './staff';
 
 const dayMs = 86_400_000;
 /** Which of the booked visits, by their order in time, asks something, and whose phone was off. */
@@ -18,8 +17,13 @@ const asksAt = 1;
 const phoneOffAt = 3;
 
 export async function seedMessages(tx: Transaction, shop: SeedShop): Promise<void> {
+  const [from] = await tx
+    .select({ name: shops.name, phone: shops.phone })
+    .from(shops)
+    .where(eq(shops.id, shop.id));
+  if (!from) throw new Error('the demo has no shop');
   const told = await readVisits(tx, shop);
-  for (const visit of told) await tx.insert(messages).values(bookedRows(shop, visit));
+  for (const visit of told) await tx.insert(messages).values(bookedRows(shop, from, visit));
   const confirmed = told.filter(({ status }) => status === 'confirmed');
   for (const visit of confirmed) {
     await tx.insert(messages).values(replyRow(shop, visit, 'Yes', 'Confirmed by this text.'));
@@ -77,18 +81,18 @@ function toldAt(shop: SeedShop, { startsAt }: Told): Date {
   return new Date(Math.min(startsAt.getTime() - 7 * dayMs, shop.now.getTime() - dayMs));
 }
 
-function bookedRows(shop: SeedShop, visit: Told) {
+function bookedRows(shop: SeedShop, from: { name: string; phone: string }, visit: Told) {
   const { language } = visit;
   const locale = { language, region: 'US' } as const;
   const values = {
-    shop: juniperBend.name,
-    shopPhone: phoneWords(juniperBend.phone, 'US'),
+    shop: from.name,
+    shopPhone: phoneWords(from.phone, 'US'),
     customer: visit.customer,
     visit: visitInWords(visit.kind, locale),
     day: formatDay(visit.startsAt, shop.zone, locale),
     window: formatWindow({ from: visit.startsAt, until: visit.windowEndsAt }, shop.zone, locale),
     address: `${visit.street}, ${visit.town}`,
-    crew: juniperBend.name,
+    crew: from.name,
     // The token is known to the signing secret alone.
     link: '(link)',
   };
