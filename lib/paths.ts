@@ -12,6 +12,8 @@ export const paths = {
   signUp: () => '/sign-up',
   join: (invitationId: string) => `/join/${part(invitationId)}`,
 
+  /** How a new shop begins. */
+  start: () => '/start',
   diary: () => '/diary',
   /** The diary opened at a civil date, "2026-05-12". */
   diaryOn: (date: string) => `/diary?on=${part(date)}`,
@@ -36,6 +38,7 @@ export const paths = {
   /** The shop's own words for each occasion. */
   wordings: () => '/messages/wording',
   snags: () => '/snags',
+  checklists: () => '/rules/checklists',
   numbers: () => '/numbers',
   /** One figure of the last so many days, with the jobs behind it. */
   numbersOf: (figure: string, days: number) => `/numbers?figure=${part(figure)}&days=${days}`,
@@ -76,6 +79,7 @@ export const apiPaths = {
   signOut: () => '/api/auth/sign-out',
   switchShop: () => '/api/people/switch-shop',
   shops: () => '/api/shops',
+  sampleShop: () => '/api/shops/sample',
   joinShop: () => '/api/people/join',
   people: () => '/api/people',
   invitations: () => '/api/people/invitations',

@@ -23,6 +23,9 @@ export default async function RulesPage() {
         meta={
           <span className="flex flex-wrap gap-x-4">
             a change never reaches a sheet that is released
+            <Link href={paths.checklists()} className="link">
+              Checklists
+            </Link>
             {may(ctx.actor.role, 'programs:change') ? (
               <Link href={paths.programs()} className="link">
                 Other programs
