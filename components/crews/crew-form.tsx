@@ -1,6 +1,5 @@
 'use client';
 
-import { useRouter } from 'next/navigation';
 import { type FormEvent, useState } from 'react';
 import { askServer, problemOf } from '@/components/shell/ask-server';
 import { Button } from '@/components/ui/button';
@@ -9,23 +8,14 @@ import { FormError } from '@/components/ui/form-error';
 import { SelectField } from '@/components/ui/select-field';
 import { TextField } from '@/components/ui/text-field';
 import { TitleBlock } from '@/components/ui/title-block';
-import type { PersonView } from '@/lib/contracts/people';
-import type { CreateCrewInput } from '@/lib/contracts/visits';
 import { apiPaths } from '@/lib/paths';
 import type { ProblemDetails } from '@/lib/problem-details';
-
-const colours: { value: CreateCrewInput['colour']; label: string }[] = [
-  { value: '1', label: 'pine' },
-  { value: '2', label: 'ochre' },
-  { value: '3', label: 'blueprint' },
-  { value: '4', label: 'plum' },
-  { value: '5', label: 'olive' },
-  { value: '6', label: 'brick' },
-];
+import { crewColours } from './crew-colours';
+import { useRefetchCrews } from './crews-query';
 
 /** Who goes out together. A measurer alone is a crew of one. */
-export function CrewForm({ people }: { people: PersonView[] }) {
-  const router = useRouter();
+export function CrewForm({ people }: { people: readonly { id: string; name: string }[] }) {
+  const refetch = useRefetchCrews();
   const [problem, setProblem] = useState<ProblemDetails | null>(null);
   const [isBusy, setIsBusy] = useState(false);
 
@@ -45,7 +35,7 @@ export function CrewForm({ people }: { people: PersonView[] }) {
         },
       });
       form.reset();
-      router.refresh();
+      await refetch();
     } catch (caught) {
       setProblem(problemOf(caught));
     } finally {
@@ -72,13 +62,15 @@ export function CrewForm({ people }: { people: PersonView[] }) {
             { value: 'measure', label: 'measures' },
           ]}
         />
-        <SelectField label="Colour in the diary" name="colour" options={colours} />
+        <SelectField label="Colour in the diary" name="colour" options={crewColours} />
       </div>
       <fieldset>
         <legend className="font-medium">People</legend>
-        {people.map((person) => (
-          <CheckField key={person.id} label={person.name} name="person" value={person.id} />
-        ))}
+        <div className="columns-2 gap-6">
+          {people.map((person) => (
+            <CheckField key={person.id} label={person.name} name="person" value={person.id} />
+          ))}
+        </div>
       </fieldset>
       <FormError problem={problem} shownFields={['name']} />
       <div>
