@@ -44,8 +44,18 @@ export type EndView = {
 const DEG = Math.PI / 180;
 const NO_SLOPE: readonly number[] = new Array<number>(PARAMETER_COUNT).fill(0);
 
+/** The opening and the fill of a run look at the same ends: a frame, once made, is never changed. */
+const views = new WeakMap<RunFrame, Partial<Record<'left' | 'right', EndView>>>();
+
 /** Look at one end of the run from its set line. */
 export function viewEnd(frame: RunFrame, end: 'left' | 'right'): EndView {
+  const seen = views.get(frame) ?? {};
+  views.set(frame, seen);
+  seen[end] ??= lookFrom(frame, end);
+  return seen[end];
+}
+
+function lookFrom(frame: RunFrame, end: 'left' | 'right'): EndView {
   const face = frame[end];
   if (face.meets === 'plane') return viewPlane(frame, end, face);
   const baseFrom = unique([...(end === 'right' ? frame.length.from : []), ...face.angle.from]);

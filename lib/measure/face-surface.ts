@@ -59,7 +59,7 @@ export function faceSurface(points: EndFacePoint[], unread: UnreadFace): FaceSur
   const yMm = distinct(points.map((point) => point.yMm));
   const zMm = distinct(points.map((point) => point.zMm));
   if (points.length === 0) return { yMm, zMm, at: (y, z) => nobodyRead(y, z, unread) };
-  const read = yMm.map((y) => zMm.map((z) => exactly(points, y, z)));
+  const read = atPlaces(points, yMm, zMm);
   const nodes = yMm.map((_, i) =>
     zMm.map((_z, j) => read[i]?.[j] ?? fillNode(read, yMm, zMm, i, j, unread)),
   );
@@ -98,14 +98,28 @@ function distinct(values: number[]): number[] {
   return sorted.filter((value, i) => i === 0 || value - (sorted[i - 1] ?? 0) > SAME_PLACE_MM);
 }
 
-/** Mean of the readings at exactly one place; null where there is none. */
-function exactly(points: EndFacePoint[], yMm: number, zMm: number): FaceValue | null {
-  const here = points.filter(
-    (point) =>
-      Math.abs(point.yMm - yMm) <= SAME_PLACE_MM && Math.abs(point.zMm - zMm) <= SAME_PLACE_MM,
-  );
-  const first = here[0];
+/** The readings on their grid of places: the mean where there are several, null where there is none. */
+function atPlaces(points: EndFacePoint[], yMm: number[], zMm: number[]): (FaceValue | null)[][] {
+  const here: EndFacePoint[][][] = yMm.map(() => zMm.map(() => []));
+  const placeOf = (places: number[], value: number) => {
+    let i = 0;
+    while (Math.abs((places[i] ?? value) - value) > SAME_PLACE_MM) i++;
+    return i;
+  };
+  for (const point of points) {
+    here[placeOf(yMm, point.yMm)]?.[placeOf(zMm, point.zMm)]?.push(point);
+  }
+  return here.map((column) => column.map(meanHere));
+}
+
+function meanHere(here: EndFacePoint[]): FaceValue | null {
+  const [first] = here;
   if (!first) return null;
+  if (here.length === 1) {
+    const { proudMm, uMm, leanShareMm, bowShare, readingId } = first;
+    const madeOf = [readingId];
+    return { proudMm, uMm, leanShareMm, bowShare, readingId, madeOf, extrapolated: false };
+  }
   const mean = (of: (point: EndFacePoint) => number) =>
     here.reduce((sum, point) => sum + of(point), 0) / here.length;
   return {

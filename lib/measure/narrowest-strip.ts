@@ -52,7 +52,9 @@ function widestOf<P extends HullPoint>(points: P[]) {
   for (const hull of [upper, lower]) {
     for (const { at } of hull) {
       const apart = heightAt(upper, at) - heightAt(lower, at);
-      if (apart > width) [width, atMm] = [apart, at];
+      if (apart <= width) continue;
+      width = apart;
+      atMm = at;
     }
   }
   return { upper, lower, atMm, width };

@@ -4,7 +4,7 @@
  */
 export function solveSmall(matrix: number[][], right: number[]): number[] | null {
   const size = right.length;
-  const rows = matrix.map((row, index) => [...row, right[index] ?? 0]);
+  const rows = matrix.map((row, index) => row.concat(right[index] ?? 0));
   for (let column = 0; column < size; column += 1) {
     let best = column;
     for (let row = column + 1; row < size; row += 1) {

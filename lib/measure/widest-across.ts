@@ -64,15 +64,19 @@ function furthestOutside(points: SpacePoint[], slab: number[], fast: boolean): S
   const [proudLevel = 0, farLevel = 0, slopeX = 0, slopeY = 0] = slab;
   let best: Side | null = null;
   let gain = NO_GAIN;
-  for (const [index, { x, y, s }] of points.entries()) {
-    const level = s - slopeX * x - slopeY * y;
-    for (const proud of [true, false]) {
-      const outside = proud ? level - proudLevel : -level - farLevel;
-      if (outside <= gain) continue;
-      if (!fast) return { index, proud };
-      best = { index, proud };
-      gain = outside;
-    }
+  for (let index = 0; index < points.length; index++) {
+    const point = points[index];
+    if (!point) continue;
+    const level = point.s - slopeX * point.x - slopeY * point.y;
+    const above = level - proudLevel;
+    const below = -level - farLevel;
+    const proud = above > gain;
+    if (!proud && !(below > gain)) continue;
+    if (!fast) return { index, proud };
+    // A point may stand outside both sides of a slab that is still thinner than nothing.
+    const isBelow = below > Math.max(gain, above);
+    best = { index, proud: !isBelow };
+    gain = isBelow ? below : above;
   }
   return best;
 }
