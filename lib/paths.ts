@@ -25,6 +25,7 @@ export const paths = {
   day: (date: string) => `/days/${part(date)}`,
   jobs: () => '/jobs',
   newJob: () => '/jobs/new',
+  importJobs: () => '/jobs/import',
   job: (jobId: string) => `/jobs/${part(jobId)}`,
   room: (jobId: string, roomId: string) => `/jobs/${part(jobId)}/rooms/${part(roomId)}`,
   /** The released sheet, by the letter of its revision. */
@@ -159,6 +160,11 @@ export const apiPaths = {
   dayOff: (daysOffId: string) => `/api/days-off/${part(daysOffId)}`,
   closedDays: () => '/api/closed-days',
   feeds: () => '/api/feeds',
+  /** A list of customers and jobs: looked at, brought in, taken away. */
+  previewList: (said: Record<string, string>) =>
+    `/api/imports/preview?${new URLSearchParams(said)}`,
+  importList: (said: Record<string, string>) => `/api/imports?${new URLSearchParams(said)}`,
+  exportJobs: () => '/api/exports/jobs',
   /** A calendar that others' programs read; the token is the whole of the permission. */
   feed: (token: string) => `/api/feeds/${part(token)}.ics`,
   /** The stream of what changes in the shop. */

@@ -33,7 +33,7 @@ export function SignUpForm() {
   const form = useFormRequest(
     ({ shopName = '', zone = '', personName = '', email = '', password = '' }) =>
       signUpShop({ shopName, region, zone, unit, personName, email: email.trim(), password }),
-    () => window.location.assign(paths.signIn()),
+    () => window.location.assign(paths.signIn(paths.start())),
   );
   return (
     <form onSubmit={form.submit} className="flex flex-col gap-4">

@@ -13,6 +13,8 @@ export type Shop = {
   region: 'US' | 'UK' | 'AU' | 'EU';
   zone: string;
   rules: ShopRules;
+  /** To play with: nobody is told anything from it. */
+  isSample?: boolean;
 };
 
 export type PersonActor = {

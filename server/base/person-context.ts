@@ -42,4 +42,5 @@ export const shopFields = {
   region: shops.region,
   zone: shops.zone,
   rules: shops.rules,
+  isSample: shops.isSample,
 } satisfies Record<keyof Shop, unknown>;

@@ -20,6 +20,7 @@ export async function prepare(
   compose: Compose,
 ): Promise<Prepared> {
   const { channel, notAfter } = message;
+  if (ctx.shop.isSample) return withdrawn('This is a sample shop: nobody is told.');
   if (notAfter && notAfter < ctx.now) return withdrawn('Too late to be of use.');
   const recipient = await readRecipient(ctx.db, ctx.shop.id, message.customerId);
   const leftOut = recipient.decision.leftOut.find((entry) => entry.channel === channel);

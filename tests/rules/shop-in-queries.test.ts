@@ -22,6 +22,8 @@ const ofNoShop: Record<string, string> = {
   'server/people/create-user.ts': 'a sign-in may belong to two shops',
   'server/people/list-demo-people.ts': 'by the e-mails of the invented shop',
   'server/shops/create-shop.ts': 'makes the shop',
+  'server/keeping/start-sample.ts': 'whether the asker has a sample, whichever it is',
+  'server/keeping/remove-sample.ts': 'the asker’s sample, whichever it is',
   'server/programs/send-deliveries.ts':
     'the worker tells for every shop; each row it takes names its own',
   'server/messages/claim-due.ts':
