@@ -3,10 +3,8 @@
 import { useEffect, useEffectEvent, useRef } from 'react';
 import SignaturePad from 'signature_pad';
 import type { PenStrokes } from '@/lib/contracts/sign-offs';
-
-/** The field is kept as 600 wide, whatever the glass. */
-const FIELD_WIDTH = 600;
-const FIELD_HEIGHT = 260;
+import { keptStrokes } from '@/lib/signing/kept-strokes';
+import { PEN_FIELD } from '@/lib/signing/pen-field';
 
 type SignPadProps = { label: string; onChange: (strokes: PenStrokes) => void; isCleared: number };
 
@@ -26,14 +24,16 @@ export function SignPad({ label, onChange, isCleared }: SignPadProps) {
     field.getContext('2d')?.scale(ratio, ratio);
     const ink = getComputedStyle(field).color;
     const pad = new SignaturePad(field, { penColor: ink, minDistance: 2 });
-    const scale = FIELD_WIDTH / Math.max(1, width);
+    const scale = PEN_FIELD.width / Math.max(1, width);
     const tell = () =>
       told(
-        pad
-          .toData()
-          .map(({ points }) =>
-            points.map(({ x, y }): [number, number] => [tenth(x * scale), tenth(y * scale)]),
-          ),
+        keptStrokes(
+          pad
+            .toData()
+            .map(({ points }) =>
+              points.map(({ x, y }): [number, number] => [x * scale, y * scale]),
+            ),
+        ),
       );
     pad.addEventListener('endStroke', tell);
     return () => {
@@ -47,10 +47,8 @@ export function SignPad({ label, onChange, isCleared }: SignPadProps) {
       ref={canvas}
       role="img"
       aria-label={label}
-      style={{ aspectRatio: `${FIELD_WIDTH} / ${FIELD_HEIGHT}` }}
+      style={{ aspectRatio: `${PEN_FIELD.width} / ${PEN_FIELD.height}` }}
       className="block w-full touch-none rounded border border-ink bg-sheet text-ink"
     />
   );
 }
-
-const tenth = (value: number): number => Math.round(value * 10) / 10;

@@ -3,7 +3,7 @@
 import { useSyncExternalStore } from 'react';
 import { Glyph } from '@/components/ui/glyph';
 import { TitleBlock } from '@/components/ui/title-block';
-import { usePersonId } from './phone-person';
+import { useHolder } from './phone-person';
 import { readReadiness } from './read-readiness';
 import { useLive } from './use-live';
 import { useStoragePersisted } from './use-storage-persisted';
@@ -11,9 +11,9 @@ import { hasWorker, subscribeToWorker } from './worker';
 
 /** What of the day is on this phone, line by line, and how safe the browser keeps it. */
 export function DayOnPhone() {
-  const personId = usePersonId();
+  const holder = useHolder();
   const isProgramKept = useSyncExternalStore(subscribeToWorker, hasWorker, () => false);
-  const live = useLive(`ready:${isProgramKept}`, () => readReadiness(personId, isProgramKept));
+  const live = useLive(`ready:${isProgramKept}`, () => readReadiness(holder, isProgramKept));
   const isPersisted = useStoragePersisted();
   if (live.state !== 'here') return null;
   const { isReady, lines, asOf } = live.value;

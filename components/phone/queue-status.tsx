@@ -5,7 +5,7 @@ import { useCrewLanguage } from '@/components/day/crew-language';
 import { Verdict, type VerdictKind } from '@/components/ui/verdict';
 import { paths } from '@/lib/paths';
 import { type StripState, stripState } from '@/lib/sync/strip-words';
-import { usePersonId } from './phone-person';
+import { useHolder } from './phone-person';
 import { readReadiness } from './read-readiness';
 import { readUnsent } from './read-unsent';
 import { currentSendingState, type SendingState, subscribeToSending } from './sending-state';
@@ -22,11 +22,12 @@ const marks: Record<StripState['kind'], VerdictKind> = {
 
 /** Right on the strip of every phone page: what is safe here, and what the office has. */
 export function QueueStatus({ isInRoom = false }: { isInRoom?: boolean }) {
-  const personId = usePersonId();
+  const holder = useHolder();
+  const { personId } = holder;
   const language = useCrewLanguage();
   const live = useLive('unsent', readUnsent);
   const isProgramKept = useSyncExternalStore(subscribeToWorker, hasWorker, () => false);
-  const ready = useLive(`ready:${isProgramKept}`, () => readReadiness(personId, isProgramKept));
+  const ready = useLive(`ready:${isProgramKept}`, () => readReadiness(holder, isProgramKept));
   const sending = useSyncExternalStore(subscribeToSending, currentSendingState, () => before);
   if (live.state === 'reading') return null;
   if (live.state === 'failed') return <Verdict kind="problem">nothing can be kept here</Verdict>;

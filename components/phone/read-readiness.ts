@@ -1,10 +1,12 @@
+import type { TodayVisit } from '@/lib/contracts/visits';
+import type { Holder } from '@/lib/sync/holder';
 import { type Readiness, readinessOf } from '@/lib/sync/readiness';
-import { readDay, readFetched } from './kept-store';
+import { readDay, readFetched, readKeptStop } from './kept-store';
 import { phoneDatabase } from './phone-database';
 
 /** What of the day is in the phone's store; watched as the store changes. */
 export async function readReadiness(
-  personId: string,
+  { personId, mayReport }: Pick<Holder, 'personId' | 'mayReport'>,
   isProgramKept: boolean,
 ): Promise<Readiness & { asOf: string | null }> {
   const fetched = await readFetched();
@@ -17,8 +19,14 @@ export async function readReadiness(
     isProgramKept,
     fetchedAt: fetched?.at ?? null,
     visitCount: visits.length,
+    keptStopCount: mayReport ? await countStops(visits) : undefined,
     roomIds: [...new Set(visits.flatMap(({ rooms }) => rooms.map(({ id }) => id)))],
     keptRoomIds: new Set(rows),
   });
   return { ...readiness, asOf: fetched?.at ?? null };
+}
+
+async function countStops(visits: readonly TodayVisit[]): Promise<number> {
+  const kept = await Promise.all(visits.map(({ id }) => readKeptStop(id)));
+  return kept.filter((stop) => stop !== null).length;
 }

@@ -1,21 +1,26 @@
 /** The customer's signature on the wire, and the record that is made of it. */
 import { z } from 'zod';
+import { MOST_POINTS, MOST_STROKES, PEN_FIELD } from '@/lib/signing/pen-field';
 import { plainWords, snagKinds, snagMenders } from './snags';
 
 const id = z.uuid();
 
-/** A point of the pen on the glass, from the upper left, in points of a field 600 wide. */
+/** A point of the pen, from the upper left of the field. */
 const penPoint = z.tuple([
-  z.number().finite().min(-50).max(1_300),
-  z.number().finite().min(-50).max(700),
+  z.number().finite().min(0).max(PEN_FIELD.width),
+  z.number().finite().min(0).max(PEN_FIELD.height),
 ]);
-export const MOST_STROKES = 200;
 /** Strokes in the order in which they were drawn; drawn again wherever the record is shown. */
 export const penStrokes = z
-  .array(z.array(penPoint).min(1).max(2_000))
+  .array(
+    z
+      .array(penPoint)
+      .min(1)
+      .max(MOST_POINTS / 6),
+  )
   .min(1, 'Sign in the field.')
   .max(MOST_STROKES)
-  .refine((strokes) => strokes.reduce((sum, stroke) => sum + stroke.length, 0) <= 12_000, {
+  .refine((strokes) => strokes.reduce((sum, stroke) => sum + stroke.length, 0) <= MOST_POINTS, {
     message: 'That is more than a signature. Clear the field and sign again.',
   });
 export type PenStrokes = z.infer<typeof penStrokes>;

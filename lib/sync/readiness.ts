@@ -5,6 +5,8 @@ export type KeptHere = {
   /** The last time the day was fetched whole; null: never. */
   fetchedAt: string | null;
   visitCount: number;
+  /** Of these, kept with what is done there; left out for who does not report from site. */
+  keptStopCount?: number;
   /** Of the day's visits. */
   roomIds: readonly string[];
   /** Of these, kept with their wall books. */
@@ -21,12 +23,13 @@ export type Readiness = { isReady: boolean; lines: { words: string; isKept: bool
  */
 export function readinessOf(kept: KeptHere): Readiness {
   const { isProgramKept, fetchedAt, visitCount, roomIds, keptRoomIds } = kept;
+  const stops = kept.keptStopCount ?? visitCount;
   const books = roomIds.filter((id) => keptRoomIds.has(id)).length;
   const lines = [
     { words: isProgramKept ? 'The program' : 'The program: not yet', isKept: isProgramKept },
     {
-      words: fetchedAt === null ? 'Visits: not yet' : `Visits: ${visitCount}`,
-      isKept: fetchedAt !== null,
+      words: fetchedAt === null ? 'Visits: not yet' : `Visits: ${ofAll(stops, visitCount)}`,
+      isKept: fetchedAt !== null && stops === visitCount,
     },
     {
       words:
@@ -38,3 +41,5 @@ export function readinessOf(kept: KeptHere): Readiness {
   ];
   return { isReady: lines.every(({ isKept }) => isKept), lines };
 }
+
+const ofAll = (count: number, all: number) => (count === all ? `${all}` : `${count} of ${all}`);

@@ -1,5 +1,8 @@
 import { and, eq, type SQL } from 'drizzle-orm';
 import { customers, jobs, signOffs, sites } from '@/db/schema';
+import type { SignOffView } from '@/lib/contracts/sign-offs';
+import { formatDay, formatTime } from '@/lib/time/format-instant';
+import type { TextLocale } from '@/lib/time/text-locale';
 import type { Context } from '@/server/base/context';
 import { copyWords } from './copy-words';
 import { readSignOffs } from './read-sign-offs';
@@ -27,6 +30,7 @@ export async function makeCopy(ctx: Context, which: SQL): Promise<SignedCopy | n
   if (!about) return null;
   const bytes = await signOffPdf({
     signOff,
+    signedWords: signedWords(ctx, signOff),
     shopName: ctx.shop.name,
     customerName: about.customerName,
     address: [about.street, about.town].filter(Boolean).join(', '),
@@ -34,4 +38,11 @@ export async function makeCopy(ctx: Context, which: SQL): Promise<SignedCopy | n
     size: ctx.shop.region === 'US' ? 'letter' : 'A4',
   });
   return { fileName: copyWords[signOff.language].fileName, bytes, signOffId: signOff.id };
+}
+
+/** When it was signed, in the language that it was signed in. */
+function signedWords({ shop }: Context, { signedAt, language }: SignOffView): string {
+  const locale: TextLocale = { language, region: shop.region };
+  const at = new Date(signedAt);
+  return `${formatDay(at, shop.zone, locale)}, ${formatTime(at, shop.zone, locale)}`;
 }

@@ -1,6 +1,7 @@
 import PDFDocument from 'pdfkit';
 import type { SignedSnag, SignOffView } from '@/lib/contracts/sign-offs';
 import { inks } from '@/lib/export/layer-style';
+import { PEN_FIELD } from '@/lib/signing/pen-field';
 import { strokePath } from '@/lib/signing/stroke-path';
 import { registerFonts } from '@/server/sheets/paper/paper-fonts';
 import { putParagraph, putWords } from '@/server/sheets/paper/words';
@@ -8,6 +9,8 @@ import { copyWords } from './copy-words';
 
 export type SignOffPaper = {
   signOff: SignOffView;
+  /** In the language that it was signed in. */
+  signedWords: string;
   shopName: string;
   customerName: string;
   address: string;
@@ -66,7 +69,7 @@ export function signOffPdf(paper: SignOffPaper): Promise<Uint8Array> {
   paragraph(words.openSnags(signOff.snags.length), { ...body, weight: 600 } as typeof body);
   for (const snag of signOff.snags) paragraph(`•  ${snagLine(snag, signOff.language)}`, body, 4);
   y += 10;
-  const heightPt = 260 * penScale;
+  const heightPt = PEN_FIELD.height * penScale;
   if (y + heightPt + 60 > pages[size][1] - marginPt) {
     doc.addPage();
     y = marginPt;
@@ -77,11 +80,11 @@ export function signOffPdf(paper: SignOffPaper): Promise<Uint8Array> {
   y += heightPt;
   doc
     .moveTo(marginPt, y)
-    .lineTo(marginPt + 600 * penScale, y)
+    .lineTo(marginPt + PEN_FIELD.width * penScale, y)
     .lineWidth(0.6)
     .stroke(inks.ink);
   y += 6;
-  paragraph(`${signOff.name}, ${signOff.signedWords}`, body, 3);
+  paragraph(`${signOff.name}, ${paper.signedWords}`, body, 3);
   paragraph(words.takenBy(signOff.takenBy), note, 3);
   paragraph(words.record(signOff.id, signOff.isUntouched), note, 3);
   doc.end();

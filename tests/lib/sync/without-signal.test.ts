@@ -80,6 +80,8 @@ describe('ready for no signal', () => {
   it('not while one of them is missing, and says which', () => {
     expect(readinessOf({ ...kept, isProgramKept: false }).isReady).toBe(false);
     expect(readinessOf({ ...kept, fetchedAt: null }).isReady).toBe(false);
+    expect(readinessOf({ ...kept, keptStopCount: kept.visitCount }).isReady).toBe(true);
+    expect(readinessOf({ ...kept, keptStopCount: kept.visitCount - 1 }).isReady).toBe(false);
     const { isReady, lines } = readinessOf({ ...kept, keptRoomIds: new Set(['b']) });
     expect(isReady).toBe(false);
     expect(lines.filter(({ isKept }) => !isKept)).toEqual([
