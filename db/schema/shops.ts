@@ -12,6 +12,7 @@ import {
   unique,
   uuid,
 } from 'drizzle-orm/pg-core';
+import type { SavedTableView } from '@/lib/contracts/saved-views';
 import type { Tool } from '@/lib/contracts/wall-book';
 import { roles } from '@/lib/permissions';
 import type { VisitKind } from '@/lib/schedule/visit-kind';
@@ -165,6 +166,27 @@ export const calendarFeeds = pgTable(
       foreignColumns: [people.shopId, people.id],
     }),
     index('calendar_feeds_by_shop').on(table.shopId),
+  ],
+);
+
+/** How a person likes to look at a table, by a name of theirs. */
+export const savedViews = pgTable(
+  'saved_views',
+  {
+    ...shopColumns(),
+    personId: uuid('person_id').notNull(),
+    tableName: text('table_name').notNull(),
+    name: text('name').notNull(),
+    view: jsonb('view').$type<SavedTableView>().notNull(),
+    createdAt: createdAt(),
+  },
+  (table) => [
+    unique('saved_views_name').on(table.shopId, table.personId, table.tableName, table.name),
+    foreignKey({
+      name: 'saved_views_person',
+      columns: [table.shopId, table.personId],
+      foreignColumns: [people.shopId, people.id],
+    }).onDelete('cascade'),
   ],
 );
 
