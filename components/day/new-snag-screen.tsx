@@ -2,7 +2,6 @@
 
 import { useState } from 'react';
 import { newId } from '@/components/phone/new-id';
-import { readPhoto } from '@/components/photos/photo-store';
 import { TakePhoto } from '@/components/photos/take-photo';
 import { Button } from '@/components/ui/button';
 import { SelectField } from '@/components/ui/select-field';
@@ -16,6 +15,7 @@ import { useCrew } from './crew-language';
 import { KeepFailed } from './keep-failed';
 import { ScreenFrame } from './screen-frame';
 import { SnagPhotos } from './snag-photos';
+import { stillHere } from './still-here';
 import { goToStop } from './stop-place';
 import { unitChoices } from './unit-choices';
 import { useKeptDraft } from './use-kept-draft';
@@ -146,14 +146,4 @@ export function NewSnagScreen({ visit, stop, kind: asked }: NewSnagScreenProps) 
       </Button>
     </ScreenFrame>
   );
-}
-
-/** A photo that was thrown away on its own screen belongs to nothing. */
-export async function stillHere(photoIds: readonly string[]): Promise<string[]> {
-  const found = await Promise.all(
-    photoIds.map(async (photoId) =>
-      (await readPhoto(photoId).catch(() => null)) ? photoId : null,
-    ),
-  );
-  return found.flatMap((photoId) => photoId ?? []);
 }

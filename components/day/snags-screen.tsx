@@ -5,8 +5,9 @@ import { LinkButton } from '@/components/ui/link-button';
 import { Verdict } from '@/components/ui/verdict';
 import type { SnagView } from '@/lib/contracts/snags';
 import type { StopView } from '@/lib/contracts/stops';
-import { type Crew, useCrew } from './crew-language';
+import { useCrew } from './crew-language';
 import { ScreenFrame } from './screen-frame';
+import { snagFacts } from './snag-facts';
 import { stopHref } from './stop-place';
 
 /** Every snag of the job: the open ones first, so that a return visit finds them together. */
@@ -57,18 +58,4 @@ function SnagLine({ snag }: { snag: SnagView }) {
       </a>
     </li>
   );
-}
-
-/** "Part short · Kitchen, sink 36 · Bench · by Fri, Dec 4". */
-export function snagFacts(snag: SnagView, { words }: Crew): string {
-  const where = [snag.roomName, snag.place].filter(Boolean).join(', ');
-  return [
-    words.snagKinds[snag.kind],
-    where,
-    words.menders[snag.mender],
-    snag.dueOn ? words.dueOn(snag.dueWords ?? snag.dueOn) : '',
-    snag.isAfterSignOff ? words.afterSignOff : '',
-  ]
-    .filter(Boolean)
-    .join(' · ');
 }

@@ -316,15 +316,16 @@ describe('one job from the first call to the booked install', () => {
 
     const bench = await browser.openPage();
     await signIn(bench, 'bench');
-    const row = bench.getByRole('row', { name: new RegExp(customer) });
+    const card = bench.getByRole('article', { name: new RegExp(customer) });
     await expectNoSeriousFault(bench);
-    await row.getByRole('link', { name: 'Kitchen, revision A' }).click();
+    await card.getByRole('link', { name: 'Kitchen, revision A' }).click();
     await bench.getByRole('button', { name: 'Take it up at the bench' }).click();
     await bench.getByText('taken up:').first().waitFor();
     await keepPicture(bench, 'sheet');
     await bench.goto(paths.bench());
-    await row.getByLabel('Cabinets ready on').fill(shop.today);
-    await row.getByLabel('Cabinets ready on').blur();
+    await card.getByRole('button', { name: 'Ready', exact: true }).click();
+    await card.getByLabel('Where they stand').fill('rack 3 by the door');
+    await card.getByRole('button', { name: 'They are ready' }).click();
     await bench.getByText('Said. The waiting list knows.').waitFor();
   });
 
