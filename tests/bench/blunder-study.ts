@@ -34,6 +34,13 @@ const CROOKED_3: Condition = {
   title: 'the same, lengths and corners at three heights',
   heightsMm: [100, 910, 1_450],
 };
+/** What `whatIsMissing` asks of every wall: three lengths, and each corner once. */
+const AS_ASKED: Condition = {
+  ...CROOKED_3,
+  name: 'as-asked',
+  title: 'the same, lengths at three heights, corners at the middle one',
+  cornerHeightsMm: [910],
+};
 const CORNERS_1: Condition = {
   ...CROOKED_1,
   name: 'corners-1',
@@ -46,7 +53,7 @@ const CORNERS_3: Condition = {
   title: 'three heights, the slip in a leg’s diagonal of a corner',
   slipIn: ['corner'],
 };
-export const CONDITIONS = [LOOSE, CROOKED_1, CROOKED_3, CORNERS_1, CORNERS_3];
+export const CONDITIONS = [LOOSE, CROOKED_1, CROOKED_3, AS_ASKED, CORNERS_1, CORNERS_3];
 
 export const MOST_DIAGONALS = 5;
 

@@ -29,6 +29,8 @@ export type Condition = {
   title: string;
   out: OutOfTrue;
   heightsMm: number[];
+  /** Left out: corners are read at every height too. */
+  cornerHeightsMm?: number[];
   corners: 'finder' | 'legs';
   usualBowMm: number;
   slipIn: RoomObservation['kind'][];
@@ -113,12 +115,15 @@ function beginRoom(condition: Condition, random: Random, wallCount: number): Tri
   const plan = { ...randomPlan(random, wallCount, condition.out), zRefMm };
   const tape = condition.corners === 'finder' ? looseTape(random) : oneTape(random);
   const observations = plan.corners.flatMap((_, i) =>
-    condition.heightsMm.flatMap((zMm) => [
-      readLength(plan, tape, i, zMm),
-      condition.corners === 'finder'
-        ? findAngle(plan, random, i, zMm, FINDER_U_DEG)
-        : readLegs(plan, random, tape, i, zMm),
-    ]),
+    condition.heightsMm.flatMap((zMm) => {
+      const length = readLength(plan, tape, i, zMm);
+      if (condition.cornerHeightsMm?.includes(zMm) === false) return [length];
+      const corner =
+        condition.corners === 'finder'
+          ? findAngle(plan, random, i, zMm, FINDER_U_DEG)
+          : readLegs(plan, random, tape, i, zMm);
+      return [length, corner];
+    }),
   );
   return { condition, random, plan, shape: drawnShape(plan), tape, observations };
 }
