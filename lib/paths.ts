@@ -85,6 +85,9 @@ export const apiPaths = {
   people: () => '/api/people',
   invitations: () => '/api/people/invitations',
 
+  views: () => '/api/views',
+  viewsOf: (table: string) => `/api/views?table=${part(table)}`,
+  view: (viewId: string) => `/api/views/${part(viewId)}`,
   jobs: () => '/api/jobs',
   jobSearch: (search: string) => `/api/jobs?search=${part(search)}`,
   job: (jobId: string) => `/api/jobs/${part(jobId)}`,

@@ -2,14 +2,17 @@
 
 import Link from 'next/link';
 import { useRouter } from 'next/navigation';
+import { useState } from 'react';
+import { useJobSearch } from '@/components/shell/job-search-query';
 import { usePageKeys } from '@/components/shell/page-keys';
 import { type Column, DataTable } from '@/components/ui/data-table';
 import { EmptyState } from '@/components/ui/empty-state';
 import { KeyHint } from '@/components/ui/key-hint';
 import { LinkButton } from '@/components/ui/link-button';
 import type { JobRow } from '@/lib/contracts/jobs';
-import { paths } from '@/lib/paths';
+import { apiPaths, paths } from '@/lib/paths';
 import { stages, stageWords } from '@/lib/schedule/stages';
+import { SavedViews } from './saved-views';
 
 const columns: Column<JobRow>[] = [
   {
@@ -68,8 +71,13 @@ const columns: Column<JobRow>[] = [
   },
 ];
 
+const jobKey = ({ id }: JobRow) => id;
+
 export function JobsTable({ jobs, mayStart }: { jobs: JobRow[]; mayStart: boolean }) {
   const router = useRouter();
+  const [typed, setTyped] = useState('');
+  // The list has the newest jobs; older ones, and what only the notes say, are asked for.
+  const { data: found } = useJobSearch(typed);
   usePageKeys(
     'Jobs',
     mayStart ? [{ keys: 'n', words: 'New job', run: () => router.push(paths.newJob()) }] : [],
@@ -77,17 +85,30 @@ export function JobsTable({ jobs, mayStart }: { jobs: JobRow[]; mayStart: boolea
   return (
     <DataTable
       name="jobs"
+      onTyped={setTyped}
+      alsoFound={found}
+      viewTools={(view, changeView) => (
+        <SavedViews table="jobs" view={view} changeView={changeView} />
+      )}
       caption={`Jobs, ${jobs.length}`}
       rows={jobs}
       columns={columns}
-      rowKey={(job) => job.id}
+      rowKey={jobKey}
       order={{ column: 'number', isDescending: true }}
-      filterLabel="Name, street, phone or number"
+      filterLabel="Name, street, phone, note or number"
       tools={
         mayStart ? (
-          <LinkButton href={paths.newJob()}>
-            New job <KeyHint keys="N" isOnFill />
-          </LinkButton>
+          <>
+            <LinkButton look="line" href={paths.importJobs()}>
+              From a list
+            </LinkButton>
+            <LinkButton look="line" href={apiPaths.exportJobs()} prefetch={false} download>
+              As CSV
+            </LinkButton>
+            <LinkButton href={paths.newJob()}>
+              New job <KeyHint keys="N" isOnFill />
+            </LinkButton>
+          </>
         ) : null
       }
       empty={

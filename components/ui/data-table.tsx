@@ -1,6 +1,6 @@
 'use client';
 
-import { type ReactNode, useMemo } from 'react';
+import { type ReactNode, useEffect, useMemo } from 'react';
 import { Button } from './button';
 import { DataTableFilters } from './data-table-filters';
 import { DataTableHead } from './data-table-head';
@@ -37,6 +37,12 @@ type DataTableProps<Row> = {
   filterLabel?: string;
   /** Beside the filters. */
   tools?: ReactNode;
+  /** Beside the filters, for what keeps or takes up a whole view. */
+  viewTools?: (view: TableView, changeView: (change: Partial<TableView>) => void) => ReactNode;
+  /** Hears what is typed, for tables whose rows are not all here. */
+  onTyped?: (typed: string) => void;
+  /** Rows that match what is typed by more than their columns show; shown with the rest. */
+  alsoFound?: readonly Row[];
   /** In place of the table while there are no rows at all. */
   empty?: ReactNode;
 };
@@ -51,16 +57,35 @@ export function DataTable<Row>({
   order,
   filterLabel,
   tools,
+  viewTools,
+  onTyped,
+  alsoFound,
   empty,
 }: DataTableProps<Row>) {
   const start: TableView = { order: order ?? null, typed: '', choices: {} };
   const [view, changeView] = useRememberedView(name, start);
-  const shown = useMemo(() => shownRows(rows, columns, view), [rows, columns, view]);
+  const shown = useMemo(
+    () => shownRows(rows, columns, view, { alsoFound, rowKey }),
+    [rows, columns, view, alsoFound, rowKey],
+  );
+  useEffect(() => onTyped?.(view.typed), [onTyped, view.typed]);
 
   if (rows.length === 0 && empty) return empty;
   return (
     <div className="min-w-0">
-      <DataTableFilters {...{ rows, columns, view, changeView, filterLabel, tools }} />
+      <DataTableFilters
+        {...{ rows, columns, view, changeView, filterLabel }}
+        tools={
+          viewTools ? (
+            <>
+              {viewTools(view, changeView)}
+              {tools}
+            </>
+          ) : (
+            tools
+          )
+        }
+      />
       <div className="overflow-x-auto">
         <table className="w-full border-collapse">
           <caption className="sr-only">{caption}</caption>
@@ -107,15 +132,23 @@ export function DataTable<Row>({
   );
 }
 
-function shownRows<Row>(rows: readonly Row[], columns: Column<Row>[], view: TableView): Row[] {
-  const kept = rows.filter(
-    (row) =>
-      matchesWords(columns.map((column) => column.text?.(row) ?? '').join(' '), view.typed) &&
-      columns.every((column) => {
-        const wanted = view.choices[column.key];
-        return !wanted || !column.choice || column.choice(row) === wanted;
-      }),
-  );
+function shownRows<Row>(
+  rows: readonly Row[],
+  columns: Column<Row>[],
+  view: TableView,
+  { alsoFound = [], rowKey }: { alsoFound?: readonly Row[]; rowKey: (row: Row) => string },
+): Row[] {
+  const found = view.typed ? alsoFound : [];
+  const foundKeys = new Set(found.map(rowKey));
+  const others = rows.filter((row) => !foundKeys.has(rowKey(row)));
+  const isTyped = (row: Row) =>
+    matchesWords(columns.map((column) => column.text?.(row) ?? '').join(' '), view.typed);
+  const isChosen = (row: Row) =>
+    columns.every((column) => {
+      const wanted = view.choices[column.key];
+      return !wanted || !column.choice || column.choice(row) === wanted;
+    });
+  const kept = [...found, ...others.filter(isTyped)].filter(isChosen);
   const { order } = view;
   const sortValue = columns.find((column) => column.key === order?.column)?.sortValue;
   return order && sortValue ? sortRows(kept, sortValue, order.isDescending) : kept;

@@ -9,8 +9,9 @@ import { nextVisitWords } from './next-visits';
 const mostRows = 300;
 /** Fewer digits than this would match half of all phone numbers. */
 const fewestPhoneDigits = 4;
+const mostWords = 6;
 
-/** Jobs, newest first, by any part of name, street, title or phone, or by number. */
+/** Jobs, newest first, by any part of name, street, town, title, notes, e-mail or phone, or by number. */
 export async function listJobs(ctx: PersonContext, input: ListJobsInput): Promise<JobRow[]> {
   mustBeAllowed(ctx, 'jobs:read');
   const rows = await ctx.db
@@ -39,17 +40,29 @@ export async function listJobs(ctx: PersonContext, input: ListJobsInput): Promis
   }));
 }
 
+/** Each word typed is to be found somewhere: "alder stonebeck" finds the Alders of Stonebeck. */
 function matches(search: string): SQL | undefined {
-  const part = `%${search.replace(/[\\%_]/g, '\\$&')}%`;
+  const words = search.split(/\s+/).filter(Boolean).slice(0, mostWords);
   const digits = search.replace(/\D/g, '');
-  const isNumber = /^#?\d{1,9}$/.test(search);
   const isPhone = digits.length >= fewestPhoneDigits && !/[a-z]/i.test(search);
   return or(
-    ilike(customers.name, part),
-    ilike(sites.street, part),
-    ilike(jobs.title, part),
-    isNumber ? eq(jobs.number, Number(digits)) : undefined,
+    and(...words.map(wordMatches)),
     // A number is kept as +1…; whoever types it may begin with the trunk 0, which is not kept.
     isPhone ? sql`${customers.phone} like ${`%${digits.replace(/^0/, '')}%`}` : undefined,
+  );
+}
+
+function wordMatches(word: string): SQL | undefined {
+  const part = `%${word.replace(/[\\%_]/g, '\\$&')}%`;
+  const number = /^#?(\d{1,9})$/.exec(word)?.[1];
+  return or(
+    ilike(customers.name, part),
+    ilike(customers.email, part),
+    ilike(sites.street, part),
+    ilike(sites.town, part),
+    ilike(sites.postcode, part),
+    ilike(jobs.title, part),
+    ilike(jobs.notes, part),
+    number ? eq(jobs.number, Number(number)) : undefined,
   );
 }

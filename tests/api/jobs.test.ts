@@ -107,6 +107,18 @@ describe('jobs', () => {
     expect(await search('larks_')).toEqual([]);
   });
 
+  it('finds a job by what only its notes say, and by two words that stand in two places', async () => {
+    const { jobId } = await startTestJob(shop, {
+      notes: 'Ask about the larder hinges',
+      customer: { name: 'Ada Kestrel' },
+      site: { street: '3 Heron Walk', town: 'Saltmere' },
+    });
+    expect((await search('larder')).map(({ id }) => id)).toEqual([jobId]);
+    expect((await search('kestrel saltmere')).map(({ id }) => id)).toEqual([jobId]);
+    expect(await search('kestrel fernhollow')).toEqual([]);
+    expect(await search('larder', otherCookie)).toEqual([]);
+  });
+
   it('keeps what the office learned and tells it in the story', async () => {
     const { jobId } = await startTestJob(shop);
     const answer = await callRoute(changeJobRoute, {

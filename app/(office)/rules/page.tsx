@@ -27,9 +27,14 @@ export default async function RulesPage() {
               Checklists
             </Link>
             {may(ctx.actor.role, 'programs:change') ? (
-              <Link href={paths.programs()} className="link">
-                Other programs
-              </Link>
+              <>
+                <Link href={paths.start()} className="link">
+                  Starting a shop
+                </Link>
+                <Link href={paths.programs()} className="link">
+                  Other programs
+                </Link>
+              </>
             ) : null}
           </span>
         }
