@@ -1,6 +1,6 @@
 /** When a crew works, in local hours: by weekday, the same each week or alternating over a few weeks. */
 import type { Problem } from '@/lib/problem';
-import { addDays, daysBetween, type LocalDate, type LocalTime, weekdayOf } from '@/lib/time/civil';
+import { dayStartUtcMs, type LocalDate, type LocalTime } from '@/lib/time/civil';
 import type { WorkingPattern } from '@/lib/time/workdays';
 
 /** [start, end) of a local day. */
@@ -25,11 +25,12 @@ export const mostWeeksOfPattern = 4;
  * 2026-05-09 is worked, Saturday 2026-05-16 is off. Weeks begin on Monday (ISO 8601).
  */
 export function hoursOn(pattern: CrewPattern, date: LocalDate): WorkedHours | null {
-  const weeksOn = daysBetween(mondayOf(pattern.firstWeekOf), mondayOf(date)) / 7;
   const count = pattern.weeks.length;
   if (count === 0) return null;
-  const week = pattern.weeks[((weeksOn % count) + count) % count] ?? [];
-  const day = week.find(({ weekday }) => weekday === weekdayOf(date));
+  const dayNumber = dayStartUtcMs(date) / DAY_MS;
+  const weeksOn = weekNumber(dayNumber) - weekNumber(dayStartUtcMs(pattern.firstWeekOf) / DAY_MS);
+  const weekday = modulo(dayNumber + MONDAY_BEFORE_EPOCH, 7) + 1;
+  const day = pattern.weeks[modulo(weeksOn, count)]?.find((worked) => worked.weekday === weekday);
   return day ? { start: day.start, end: day.end } : null;
 }
 
@@ -66,6 +67,9 @@ export function patternProblems({ weeks }: CrewPattern): Problem[] {
   return isTwice ? problem('weekday-twice', 'One weekday stands twice in a week.') : [];
 }
 
-function mondayOf(date: LocalDate): LocalDate {
-  return addDays(date, 1 - weekdayOf(date));
-}
+/** 1970-01-01 was a Thursday: the week that holds it began three days before. */
+const MONDAY_BEFORE_EPOCH = 3;
+const DAY_MS = 86_400_000;
+
+const weekNumber = (dayNumber: number): number => Math.floor((dayNumber + MONDAY_BEFORE_EPOCH) / 7);
+const modulo = (number: number, by: number): number => ((number % by) + by) % by;

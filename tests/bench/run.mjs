@@ -10,11 +10,20 @@ const { measureFirstLoad } = await import('./first-load.mjs');
 ensureBuilt(say);
 say('first-load JavaScript of each route, gzipped, beside an empty page of the framework');
 await measureFirstLoad();
-for (const script of ['fit-room.ts', 'diary-week.ts', 'fuzz.ts', 'blunder-study.ts']) {
+for (const script of [
+  'fit-room.ts',
+  'diary-week.ts',
+  'openings.ts',
+  'solomon.ts',
+  'fuzz.ts',
+  'blunder-study.ts',
+]) {
   say(script);
   spawnSync(process.execPath, ['node_modules/tsx/dist/cli.mjs', `tests/bench/${script}`], {
     stdio: 'inherit',
   });
 }
-say('thousand-messages.mjs');
-spawnSync(process.execPath, ['tests/bench/thousand-messages.mjs'], { stdio: 'inherit' });
+for (const script of ['thousand-messages.mjs', 'diary-model.mjs']) {
+  say(script);
+  spawnSync(process.execPath, [`tests/bench/${script}`], { stdio: 'inherit' });
+}

@@ -4,9 +4,10 @@ import {
   leastUsefulMinutes,
   startStepMinutes,
 } from '@/lib/schedule/planning-rules';
-import { addDays, daysBetween, type LocalDate } from '@/lib/time/civil';
-import { type CrewDay, type CrewDays, crewDays, type Gap, instantCache } from './crew-days';
-import { missedWishes } from './missed-wishes';
+import { daysBetween } from '@/lib/time/civil';
+import { type CrewDay, type CrewDays, crewDays, type Gap } from './crew-days';
+import { makeHorizon } from './horizon';
+import { type MissedWishes, readyWishes } from './missed-wishes';
 import type { FoundOpening, OpeningCrew, OpeningsInput, PlaceIndex } from './opening-input';
 
 const MINUTE_MS = 60_000;
@@ -21,6 +22,7 @@ type Search = {
   crew: OpeningCrew;
   days: CrewDays;
   workMs: number;
+  missed: MissedWishes;
   drive: (from: PlaceIndex, to: PlaceIndex) => number;
 };
 
@@ -38,17 +40,18 @@ type Search = {
  * Complete: a start that works lies in a stretch that is found (checked against brute force).
  */
 export function findOpenings(input: OpeningsInput): FoundOpening[] {
-  const instantMs = instantCache(input.zone);
-  const dates = datesBetween(input.from, input.until);
+  const { from, until, zone, wishes, windowMinutes } = input;
+  const horizon = makeHorizon(from, zone);
+  const dayCount = Math.max(0, daysBetween(from, until) + 1);
+  const missed = readyWishes(wishes, windowMinutes);
+  const drive = driveOf(input);
   const found = input.crews.flatMap((crew) => {
-    const days = crewDays({ ...crew, zone: input.zone, instantMs });
+    const days = crewDays({ ...crew, horizon });
     const workMs = crew.workMinutes * MINUTE_MS;
-    const search: Search = { input, crew, days, workMs, drive: driveOf(input) };
-    const isOneDay = dates.some((date) => {
-      const day = days.on(date);
-      return day !== null && day.endMs - day.startMs >= workMs;
-    });
-    return dates.flatMap((date) => openingsOn(search, date, isOneDay));
+    const search: Search = { input, crew, days, workMs, missed, drive };
+    const worked = Array.from({ length: dayCount }, (_, day) => days.on(day) ?? []).flat();
+    const isOneDay = worked.some((day) => day.endMs - day.startMs >= workMs);
+    return worked.flatMap((day) => openingsOn(search, day, isOneDay));
   });
   return found.sort((a, b) => a.score - b.score || a.startsAt.getTime() - b.startsAt.getTime());
 }
@@ -69,9 +72,7 @@ export function variedOpenings(found: readonly FoundOpening[], limit: number): F
   return [...first, ...rest].sort((a, b) => a.score - b.score);
 }
 
-function openingsOn(search: Search, date: LocalDate, isOneDay: boolean): FoundOpening[] {
-  const day = search.days.on(date);
-  if (!day) return [];
+function openingsOn(search: Search, day: CrewDay, isOneDay: boolean): FoundOpening[] {
   const gaps = isOneDay ? day.gaps : day.gaps.filter(({ before }) => before === null);
   return gaps.flatMap((gap) => {
     const best = isOneDay ? bestInGap(search, day, gap) : bestOverDays(search, day, gap);
@@ -93,9 +94,10 @@ function stretchOf({ drive, input }: Search, gap: Gap): { fromMs: number; untilM
 
 function bestInGap(search: Search, day: CrewDay, gap: Gap): Candidate | null {
   const { fromMs, untilMs } = stretchOf(search, gap);
-  let best: Candidate | null = null;
-  const driveAddedMinutes = driveAdded(search, gap);
   const first = firstStart(search, day, fromMs);
+  if (first + search.workMs > untilMs) return null;
+  const driveAddedMinutes = driveAdded(search, gap);
+  let best: Candidate | null = null;
   for (let startMs = first; startMs + search.workMs <= untilMs; startMs += STEP_MS) {
     const pieces = [{ startMs, endMs: startMs + search.workMs, day, gap }];
     const scrapMs = scrap(startMs - fromMs) + scrap(untilMs - startMs - search.workMs);
@@ -106,45 +108,63 @@ function bestInGap(search: Search, day: CrewDay, gap: Gap): Candidate | null {
 
 function bestOverDays(search: Search, day: CrewDay, gap: Gap): Candidate | null {
   const { fromMs } = stretchOf(search, gap);
-  let best: Candidate | null = null;
   const lastStart = day.endMs - leastFirstDayMinutes * MINUTE_MS;
-  for (let startMs = firstStart(search, day, fromMs); startMs <= lastStart; startMs += STEP_MS) {
-    const more = followingPieces(search, day, search.workMs - (day.endMs - startMs));
-    if (!more) continue;
+  const first = firstStart(search, day, fromMs);
+  if (first > lastStart) return null;
+  const days = followingDays(search, day, search.workMs - (day.endMs - first));
+  const firstDrive = driveAdded(search, gap);
+  let best: Candidate | null = null;
+  for (let startMs = first; startMs <= lastStart; startMs += STEP_MS) {
+    const more = followingPieces(days, search.workMs - (day.endMs - startMs));
+    // A later start leaves more for the days after it, which does not fit either.
+    if (!more) break;
     const pieces = [{ startMs, endMs: day.endMs, day, gap }, ...more.pieces];
     const scrapMs = scrap(startMs - fromMs) + more.scrapMs;
-    const driveAddedMinutes = driveAdded(search, gap) + more.driveAddedMinutes;
+    const driveAddedMinutes = firstDrive + more.driveAddedMinutes;
     best = better(best, { search, pieces, driveAddedMinutes, scrapMs });
   }
   return best;
 }
 
-/** The days after the first, each from its start; null where one of them is taken. */
-function followingPieces(search: Search, firstDay: CrewDay, workMs: number) {
-  const pieces: Piece[] = [];
-  let driveAddedMinutes = 0;
-  let leftMs = workMs;
+type FollowingDay = { day: CrewDay; gap: Gap; untilMs: number; driveAddedMinutes: number };
+
+/** The worked days after the first that are free at their start, up to the one after the work is used up. */
+function followingDays(search: Search, firstDay: CrewDay, workMs: number): FollowingDay[] {
+  const following: FollowingDay[] = [];
+  let leftMs = workMs + firstDay.endMs - firstDay.startMs;
   let daysOff = 0;
-  for (let date = addDays(firstDay.date, 1); leftMs > 0; date = addDays(date, 1)) {
-    const day = search.days.on(date);
+  for (let number = firstDay.day + 1; leftMs > 0; number += 1) {
+    const day = search.days.on(number);
     if (!day) {
       daysOff += 1;
-      if (daysOff > MOST_DAYS_OFF) return null;
+      if (daysOff > MOST_DAYS_OFF) return following;
       continue;
     }
     daysOff = 0;
     const gap = day.gaps[0];
-    if (!gap) return null;
+    if (!gap) return following;
     const { fromMs, untilMs } = stretchOf(search, gap);
-    if (fromMs > day.startMs) return null;
+    if (fromMs > day.startMs) return following;
+    following.push({ day, gap, untilMs, driveAddedMinutes: driveAdded(search, gap) });
+    leftMs -= day.endMs - day.startMs;
+  }
+  return following;
+}
+
+/** The work of the days after the first, each from its start; null where one of them is taken. */
+function followingPieces(days: FollowingDay[], workMs: number) {
+  const pieces: Piece[] = [];
+  let driveAddedMinutes = 0;
+  let leftMs = workMs;
+  for (const { day, gap, untilMs, driveAddedMinutes: added } of days) {
     const endMs = day.startMs + Math.min(leftMs, day.endMs - day.startMs);
     if (endMs > untilMs) return null;
     leftMs -= endMs - day.startMs;
-    driveAddedMinutes += driveAdded(search, gap);
+    driveAddedMinutes += added;
     pieces.push({ startMs: day.startMs, endMs, day, gap });
     if (leftMs <= 0) return { pieces, driveAddedMinutes, scrapMs: scrap(untilMs - endMs) };
   }
-  return { pieces, driveAddedMinutes, scrapMs: 0 };
+  return null;
 }
 
 /** On the steps from the day's start, not before the stretch and not before now. */
@@ -163,12 +183,13 @@ function better(
   },
 ): Candidate {
   const { search, pieces, driveAddedMinutes, scrapMs } = next;
-  const { weights, wishes, windowMinutes, from } = search.input;
-  const waited = daysBetween(from, pieces[0]?.day.date ?? from);
-  const missed = missedWishes(pieces, { wishes, windowMinutes }).length;
+  const { weights } = search.input;
+  const [first] = pieces;
+  if (!first) return best ?? { pieces, driveAddedMinutes, score: 0 };
+  const missed = search.missed.count(first.day, first.startMs, pieces);
   const score =
     weights.driveMinute * driveAddedMinutes +
-    weights.dayWaited * waited +
+    weights.dayWaited * first.day.day +
     weights.scrapMinute * (scrapMs / MINUTE_MS) +
     weights.missedWish * missed;
   return best && best.score <= score ? best : { pieces, driveAddedMinutes, score };
@@ -186,11 +207,11 @@ function ends({ after, before }: Gap, { base }: OpeningCrew): [PlaceIndex, Place
   return [after ? after.piece.place : base, before ? before.piece.place : base];
 }
 
-function opening({ crew, input }: Search, best: Candidate): FoundOpening {
+function opening({ crew, missed }: Search, best: Candidate): FoundOpening {
   const { pieces } = best;
-  const { wishes, windowMinutes } = input;
-  const startMs = pieces[0]?.startMs ?? 0;
-  const gap = pieces[0]?.gap;
+  const [first] = pieces;
+  if (!first) throw new Error('an opening without a piece');
+  const { startMs, gap } = first;
   return {
     crewId: crew.id,
     pieces: pieces.map((piece) => ({
@@ -201,11 +222,11 @@ function opening({ crew, input }: Search, best: Candidate): FoundOpening {
     workMinutes: crew.workMinutes,
     driveAddedMinutes: best.driveAddedMinutes,
     leavesFreeMinutes: pieces.reduce((sum, piece) => sum + freeAfter(piece), 0) / MINUTE_MS,
-    missedWishes: missedWishes(pieces, { wishes, windowMinutes }),
+    missedWishes: missed.list(first.day, startMs, pieces),
     score: best.score,
     places: [...new Set(pieces.flatMap((piece) => ends(piece.gap, crew)))],
-    after: gap?.after?.piece.label ?? null,
-    before: gap?.before?.piece.label ?? null,
+    after: gap.after?.piece.label ?? null,
+    before: gap.before?.piece.label ?? null,
   };
 }
 
@@ -228,10 +249,4 @@ function driveOf(input: OpeningsInput) {
     if (from === null || to === null) return input.driveWhenUnknownMinutes;
     return Math.ceil(input.driveMinutes(from, to));
   };
-}
-
-function datesBetween(from: LocalDate, until: LocalDate): LocalDate[] {
-  return Array.from({ length: Math.max(0, daysBetween(from, until) + 1) }, (_, ahead) =>
-    addDays(from, ahead),
-  );
 }
