@@ -132,21 +132,3 @@ export type SheetView = {
 };
 
 export const takeUpSheetInput = z.object({ releaseId: id });
-
-/** What the bench has to build, first need first. */
-export type BenchRow = {
-  releaseId: string;
-  jobId: string;
-  roomId: string;
-  jobNumber: number;
-  jobTitle: string;
-  customerName: string;
-  roomName: string;
-  revision: string;
-  releasedAtWords: string;
-  takenUpWords: string | null;
-  isSuperseded: boolean;
-  installWords: string | null;
-  readyOn: string | null;
-  readyWords: string | null;
-};

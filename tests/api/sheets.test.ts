@@ -330,11 +330,7 @@ describe('sheets', () => {
       }
       const rows = (await callRoute(benchRoute, { method: 'GET', cookie })).body as BenchSheet[];
       expect(rows.map(({ roomId }) => roomId)).toEqual([...rooms].reverse());
-      expect(rows.map(({ installWords }) => installWords)).toEqual([
-        'Mon, Jan 11',
-        'Mon, Feb 1',
-        null,
-      ]);
+      expect(rows.map(({ needWords }) => needWords)).toEqual(['Mon, Jan 11', 'Mon, Feb 1', null]);
     });
 
     it('refuses the other roles and the other shop', async () => {
