@@ -91,6 +91,7 @@ export const apiPaths = {
   jobs: () => '/api/jobs',
   jobSearch: (search: string) => `/api/jobs?search=${part(search)}`,
   job: (jobId: string) => `/api/jobs/${part(jobId)}`,
+  papers: (jobId: string) => `/api/jobs/${part(jobId)}/papers`,
   /** The bench says that the cabinets are ready. */
   jobReady: (jobId: string) => `/api/jobs/${part(jobId)}/ready`,
   /** Everything of one customer, to save. */
@@ -151,6 +152,8 @@ export const apiPaths = {
   acceptDayPlan: () => '/api/days/plan/accept',
   /** For the map, which puts the numbers in. */
   tiles: () => '/api/tiles/{z}/{x}/{y}',
+  /** What real times say about the shop's minutes. */
+  durationCorrections: () => '/api/visits/duration-corrections',
   /** The shop is late: what it moves, and all of it accepted at once. */
   slipPreview: () => '/api/slips/preview',
   acceptSlip: () => '/api/slips/accept',

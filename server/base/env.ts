@@ -22,6 +22,9 @@ const schema = z.object({
     .optional(),
   TILES_ATTRIBUTION: z.string().default(''),
   EMAIL_FROM: z.string().default('Setwell <no-reply@setwell.example>'),
+  FILES_BUCKET: z.string().optional(),
+  FILES_REGION: z.string().default('us-east-1'),
+  FILES_ENDPOINT: z.url().optional(),
   NODE_ENV: z.enum(['development', 'test', 'production']).default('development'),
   NEXT_PHASE: z.string().optional(),
 });
@@ -38,6 +41,8 @@ export type Env = {
   sms: { accountSid: string; authToken: string; from: string } | null;
   smtpUrl: string | null;
   emailFrom: string;
+  /** Where files lie when not in the data folder. */
+  filesBucket: { bucket: string; region: string; endpoint: string | null } | null;
   travelUrl: string | null;
   geocodeUrl: string | null;
   /** Of the map: an address with {z}, {x} and {y}, and who is to be named for it. */
@@ -68,6 +73,13 @@ export function env(): Env {
       : null,
     smtpUrl: read.SMTP_URL || null,
     emailFrom: read.EMAIL_FROM,
+    filesBucket: read.FILES_BUCKET
+      ? {
+          bucket: read.FILES_BUCKET,
+          region: read.FILES_REGION,
+          endpoint: read.FILES_ENDPOINT ?? null,
+        }
+      : null,
     travelUrl: read.TRAVEL_URL ?? null,
     tiles: read.TILES_URL ? { url: read.TILES_URL, attribution: read.TILES_ATTRIBUTION } : null,
     geocodeUrl: read.GEOCODE_URL ?? null,

@@ -2,6 +2,7 @@ import type { Metadata } from 'next';
 import Link from 'next/link';
 import { CustomerData } from '@/components/jobs/customer-data';
 import { JobFacts } from '@/components/jobs/job-facts';
+import { JobFiles } from '@/components/jobs/job-files';
 import { JobStory } from '@/components/jobs/job-story';
 import { RoomList } from '@/components/jobs/room-list';
 import { SiteForm } from '@/components/jobs/site-form';
@@ -16,6 +17,7 @@ import { stageWords } from '@/lib/schedule/stages';
 import { found } from '@/server/base/found';
 import { pageContext } from '@/server/base/page-context';
 import { getForCrew } from '@/server/days/get-for-crew';
+import { listJobFiles } from '@/server/files/list-job-files';
 import { listPhotos } from '@/server/files/list-photos';
 import { getJob } from '@/server/jobs/get-job';
 import { listSignOffs } from '@/server/snags/list-sign-offs';
@@ -30,6 +32,7 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
   const job = await found(getJob(ctx, { jobId }));
   const rooms = await listRooms(ctx, { jobId });
   const photos = await listPhotos(ctx, { jobId });
+  const papers = await listJobFiles(ctx, { jobId });
   const snags = await listSnags(ctx, { jobId });
   const signOffs = await listSignOffs(ctx, { jobId });
   const forCrew = await getForCrew(ctx, { jobId });
@@ -68,6 +71,10 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
             <JobPhotos photos={photos} rooms={rooms} />
           </section>
         ) : null}
+        <section>
+          <TitleBlock title="Papers" meta={papers.length} />
+          <JobFiles jobId={job.id} files={papers} mayAdd={may(ctx.actor.role, 'jobs:change')} />
+        </section>
         {may(ctx.actor.role, 'jobs:change') ? (
           <section>
             <TitleBlock title="State of the site" />

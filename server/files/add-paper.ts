@@ -1,0 +1,91 @@
+import { createHash } from 'node:crypto';
+import { and, eq } from 'drizzle-orm';
+import { files, jobs } from '@/db/schema';
+import type { AddPaperInput } from '@/lib/contracts/papers';
+import { pictureKind } from '@/lib/files/picture-kind';
+import { writeAudit } from '@/server/base/audit';
+import { mustBeAllowed, type PersonContext } from '@/server/base/context';
+import { countTry } from '@/server/base/limits';
+import { notFound, Refusal } from '@/server/base/problem-response';
+import { filesPort } from '@/server/ports/files/choose-files';
+
+const limit = { most: 100, windowSeconds: 3_600 };
+
+/** Keeps a plan or a letter as it came. It is a PDF by its bytes, whatever its name says; it is never opened here. */
+export async function addPaper(
+  ctx: PersonContext,
+  input: AddPaperInput & { bytes: Uint8Array },
+): Promise<{ fileId: string }> {
+  mustBeAllowed(ctx, 'jobs:change');
+  const { jobId, fileId, bytes } = input;
+  await countTry(ctx.db, `paper:${ctx.actor.personId}`, limit, ctx.now);
+  await mustBeOurs(ctx, jobId);
+  if (pictureKind(bytes) !== 'pdf' || !endsAsPdf(bytes)) throw notPdf();
+  const sha256 = createHash('sha256').update(bytes).digest('hex');
+  const storageKey = `${ctx.shop.id}/${fileId}-${sha256.slice(0, 16)}.pdf`;
+  await filesPort().put(storageKey, bytes);
+  return ctx.db.transaction(async (tx) => {
+    const name = input.name.toLowerCase().endsWith('.pdf') ? input.name : `${input.name}.pdf`;
+    const [added] = await tx
+      .insert(files)
+      .values({
+        shopId: ctx.shop.id,
+        id: fileId,
+        jobId,
+        name,
+        mediaType: 'application/pdf',
+        bytes: bytes.length,
+        sha256,
+        storageKey,
+        takenAt: ctx.now,
+        addedBy: ctx.actor.personId,
+      })
+      .onConflictDoNothing({ target: files.id })
+      .returning({ id: files.id });
+    if (added) {
+      await writeAudit(tx, ctx, {
+        verb: 'add-paper',
+        subjectKind: 'file',
+        subjectId: fileId,
+        jobId,
+        summary: `Added ${name}`,
+      });
+      return { fileId };
+    }
+    const [kept] = await tx
+      .select({ sha256: files.sha256 })
+      .from(files)
+      .where(and(eq(files.shopId, ctx.shop.id), eq(files.id, fileId), eq(files.jobId, jobId)));
+    if (kept?.sha256 !== sha256) throw idTaken();
+    return { fileId };
+  });
+}
+
+async function mustBeOurs(ctx: PersonContext, jobId: string): Promise<void> {
+  const [job] = await ctx.db
+    .select({ id: jobs.id })
+    .from(jobs)
+    .where(and(eq(jobs.shopId, ctx.shop.id), eq(jobs.id, jobId)));
+  if (!job) throw notFound('job');
+}
+
+/** The end mark stands in the last kilobyte (ISO 32000-1, 7.5.5): a file cut short has none. */
+function endsAsPdf(bytes: Uint8Array): boolean {
+  return new TextDecoder('latin1').decode(bytes.subarray(-1_024)).includes('%%EOF');
+}
+
+function notPdf(): Refusal {
+  return new Refusal({
+    status: 415,
+    code: 'not-a-paper',
+    message: 'Papers are kept as whole PDF files, and this is none. Nothing was kept.',
+  });
+}
+
+function idTaken(): Refusal {
+  return new Refusal({
+    status: 409,
+    code: 'id-taken',
+    message: 'Another file has this id already. It was not changed; add the file again.',
+  });
+}
