@@ -1,5 +1,5 @@
 /** What the records of a job mean for the order of work. */
-import { estimateVisit, type JobFacts, type VisitKind } from '@/lib/schedule';
+import { type Estimate, estimateVisit, type JobFacts, type VisitKind } from '@/lib/schedule';
 import { localDate } from '@/lib/time/local-moment';
 import type { Context } from '@/server/base/context';
 import type { JobRecord } from './job-records';
@@ -35,13 +35,30 @@ export function standing(job: JobRecord, kind: VisitKind): JobRecord['visits'] {
   return job.visits.filter((visit) => visit.kind === kind && !notStanding.has(visit.status));
 }
 
+type ToEstimate = { kind: VisitKind; crewSize?: number };
+
 /** Minutes on site by the shop's own figures, for a crew of this many people. */
-export function estimateMinutes(
-  ctx: Context,
+export function estimateMinutes(ctx: Context, job: JobRecord, visit: ToEstimate): number {
+  return estimate(job, visit, ctx.shop.rules.booking).minutes;
+}
+
+/**
+ * The same taken apart: minutes of one person beside the units or rooms, and how many of those there are, as the
+ * shop's minutes for each multiply.
+ */
+export function estimateTakenApart(job: JobRecord, visit: ToEstimate) {
+  const of = (minutes: number) =>
+    estimate(job, visit, { measureMinutesPerRoom: minutes, installMinutesPerUnit: minutes })
+      .personMinutes;
+  return { fixedPersonMinutes: of(0), count: of(1) - of(0) };
+}
+
+function estimate(
   job: JobRecord,
-  visit: { kind: VisitKind; crewSize?: number },
-): number {
-  const { measureMinutesPerRoom, installMinutesPerUnit } = ctx.shop.rules.booking;
+  visit: ToEstimate,
+  shop: { measureMinutesPerRoom: number; installMinutesPerUnit: number },
+): Estimate {
+  const { measureMinutesPerRoom, installMinutesPerUnit } = shop;
   const units = Object.fromEntries(job.units.map(({ kind, count }) => [kind, count]));
   const roomCount = Math.max(job.rooms.length, job.roomCount);
   const { value } = estimateVisit({
@@ -60,7 +77,7 @@ export function estimateMinutes(
     },
   });
   if (!value) throw new Error(`the counts of job ${job.id} give no estimate`);
-  return value.minutes;
+  return value;
 }
 
 /** Handed in when every room of the job is. */
