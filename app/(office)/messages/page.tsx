@@ -2,7 +2,7 @@ import type { Metadata } from 'next';
 import Link from 'next/link';
 import { MessagesTable } from '@/components/messages/messages-table';
 import { SchedulerList } from '@/components/messages/scheduler-list';
-import { LiveRefresh, LiveRefresh } from '@/components/shell/live/live-refresh';
+import { LiveRefresh } from '@/components/shell/live/live-refresh';
 import { TitleBlock } from '@/components/ui/title-block';
 import { paths } from '@/lib/paths';
 import { may } from '@/lib/permissions';
@@ -23,7 +23,6 @@ export default async function MessagesPage() {
   return (
     <>
       <TitleBlock level={1} title="Messages" meta={wording} className="mb-4" />
-      <LiveRefresh topics={['messages']} />
       <LiveRefresh topics={['messages']} />
       <SchedulerList items={items} maySettle={may(ctx.actor.role, 'messages:send')} />
       <MessagesTable messages={await listMessages(ctx, {})} />
