@@ -1,9 +1,10 @@
 import type { StartJobInput } from '@/lib/contracts/jobs';
+import type { LatLon } from '@/lib/travel/place';
 
 type Fields = Record<string, string>;
 
 /** What the form's texts mean. Numbers that are none go as they are, and come back with the words for it. */
-export function newJobBody(fields: Fields): StartJobInput {
+export function newJobBody(fields: Fields, place: LatLon | null): StartJobInput {
   const { name = '', phone = '', email = '', street = '', town = '', postcode = '' } = fields;
   return {
     customer: {
@@ -18,8 +19,8 @@ export function newJobBody(fields: Fields): StartJobInput {
       street,
       town,
       postcode,
-      latitude: null,
-      longitude: null,
+      latitude: place?.lat ?? null,
+      longitude: place?.lon ?? null,
       wayIn: fields.wayIn ?? '',
       floorsUp: Number(fields.floorsUp || 0),
       hasLift: fields.hasLift === 'yes',

@@ -1,8 +1,10 @@
 'use client';
 
 import { useRouter } from 'next/navigation';
-import { useRef } from 'react';
+import { useRef, useState } from 'react';
 import { useFormRequest } from '@/components/door/use-form-request';
+import type { MapGround } from '@/components/map/map-day';
+import { PlaceField } from '@/components/place/place-field';
 import { askServer } from '@/components/shell/ask-server';
 import { Button } from '@/components/ui/button';
 import { CheckField } from '@/components/ui/check-field';
@@ -13,23 +15,30 @@ import { TextareaField } from '@/components/ui/textarea-field';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { JobRow } from '@/lib/contracts/jobs';
 import { apiPaths, paths } from '@/lib/paths';
+import type { LatLon } from '@/lib/travel/place';
 import { newJobBody } from './new-job-body';
 
 /** The call that starts it all, in the order in which a caller tells it. */
-export function NewJobForm() {
+export function NewJobForm({ ground }: { ground: MapGround }) {
   const router = useRouter();
   const madeId = useRef('');
+  const formRef = useRef<HTMLFormElement>(null);
+  const [place, setPlace] = useState<LatLon | null>(null);
   const form = useFormRequest(
     async (fields) => {
       madeId.current = (
-        await askServer<Pick<JobRow, 'id'>>(apiPaths.jobs(), { body: newJobBody(fields) })
+        await askServer<Pick<JobRow, 'id'>>(apiPaths.jobs(), { body: newJobBody(fields, place) })
       ).id;
     },
     () => router.push(paths.job(madeId.current)),
   );
   const error = form.errorOf;
   return (
-    <form onSubmit={form.submit} className="mt-5 grid max-w-page gap-8 lg:grid-cols-3">
+    <form
+      ref={formRef}
+      onSubmit={form.submit}
+      className="mt-5 grid max-w-page gap-8 lg:grid-cols-3"
+    >
       <fieldset className="flex flex-col gap-3">
         <legend className="contents">
           <TitleBlock title="Who" level={3} />
@@ -89,6 +98,12 @@ export function NewJobForm() {
             error={error('site.postcode')}
           />
         </div>
+        <PlaceField
+          addressOf={() => addressIn(formRef.current)}
+          place={place}
+          ground={ground}
+          onChange={setPlace}
+        />
         <TextareaField
           label="Way in"
           name="wayIn"
@@ -168,6 +183,13 @@ export function NewJobForm() {
       </div>
     </form>
   );
+}
+
+/** The address as it is typed so far. */
+function addressIn(form: HTMLFormElement | null) {
+  const fields = form ? new FormData(form) : new FormData();
+  const text = (name: string) => String(fields.get(name) ?? '');
+  return { street: text('street'), town: text('town'), postcode: text('postcode') };
 }
 
 const shownFields = [

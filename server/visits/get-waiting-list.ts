@@ -2,6 +2,7 @@ import type { WaitingItem } from '@/lib/contracts/visits';
 import { readinessFor, type VisitKind } from '@/lib/schedule';
 import { localDate } from '@/lib/time/local-moment';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
+import { bookingDays } from '@/server/shops/booking-days';
 import { estimateMinutes, factsOf, standing } from './job-facts';
 import { type JobRecord, openJobs, readJobRecords } from './job-records';
 
@@ -44,11 +45,11 @@ function nextKind(job: JobRecord): VisitKind | null {
 }
 
 function waitingItem(ctx: PersonContext, job: JobRecord, kind: VisitKind): WaitingItem {
-  const { region, zone, rules } = ctx.shop;
+  const { region, zone } = ctx.shop;
   const readiness = readinessFor({
     kind,
     facts: factsOf(ctx, job),
-    rules: rules.booking,
+    rules: bookingDays(ctx),
     today: localDate(ctx.now, zone),
     locale: { language: 'en', region },
   });

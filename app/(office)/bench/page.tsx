@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import { BenchScreen } from '@/components/bench/bench-screen';
+import { LiveRefresh } from '@/components/shell/live/live-refresh';
 import { TitleBlock } from '@/components/ui/title-block';
 import { may } from '@/lib/permissions';
 import { pageContext } from '@/server/base/page-context';
@@ -15,6 +16,7 @@ export default async function BenchPage() {
   return (
     <>
       <TitleBlock level={1} title="Bench" meta="newest sheets, first need first" className="mb-4" />
+      <LiveRefresh topics={['releases', 'jobs']} />
       <BenchScreen
         sheets={await listBench(ctx)}
         notes={snags.filter(({ mender }) => mender === 'bench')}

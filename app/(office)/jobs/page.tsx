@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import { JobsTable } from '@/components/jobs/jobs-table';
+import { LiveRefresh } from '@/components/shell/live/live-refresh';
 import { TitleBlock } from '@/components/ui/title-block';
 import { may } from '@/lib/permissions';
 import { pageContext } from '@/server/base/page-context';
@@ -13,6 +14,7 @@ export default async function JobsPage() {
   return (
     <>
       <TitleBlock level={1} title="Jobs" className="mb-4" />
+      <LiveRefresh topics={['jobs', 'visits']} />
       <JobsTable jobs={jobs} mayStart={may(ctx.actor.role, 'jobs:change')} />
     </>
   );
