@@ -104,6 +104,7 @@ function NotKept({ what }: { what: string }) {
       <div className="p-3.5">
         <EmptyState
           title={`${what} is not on this phone`}
+          isPage
           action={
             <LinkButton size="thumb" href={paths.today()}>
               Today
@@ -124,7 +125,7 @@ function NobodyHere() {
   return (
     <PhoneShell where={<b>No signal</b>}>
       <div className="p-3.5">
-        <EmptyState title="Nobody is signed in on this phone">
+        <EmptyState title="Nobody is signed in on this phone" isPage>
           Signing in wants a signal.
           {unsent > 0
             ? ` What was measured here is kept: ${unsent} to send when its reader signs in again.`

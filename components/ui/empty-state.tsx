@@ -7,13 +7,16 @@ type EmptyStateProps = {
   children: ReactNode;
   /** The button that does it. */
   action?: ReactNode;
+  /** It is all that the page says, and so its heading. */
+  isPage?: boolean;
 };
 
 /** A screen with nothing on it says what to do first. */
-export function EmptyState({ title, children, action }: EmptyStateProps) {
+export function EmptyState({ title, children, action, isPage = false }: EmptyStateProps) {
+  const Title = isPage ? 'h1' : 'p';
   return (
     <div className="flex max-w-prose flex-col items-start gap-3 border border-dashed border-graphite px-5 py-6">
-      <p className="text-lead font-bold">{title}</p>
+      <Title className="text-lead font-bold">{title}</Title>
       <div className="text-graphite">{children}</div>
       {action}
     </div>
