@@ -3,10 +3,12 @@
 import { Suspense, useEffect, useRef, useState } from 'react';
 import { keepDraft } from '@/components/phone/draft-store';
 import type { RoomOnPhone } from '@/components/phone/room-store';
+import type { WallBookView } from '@/lib/contracts/rooms';
 import { walkRoom } from '@/lib/measure/room-walk';
 import { nextAsk, toGoWords } from '@/lib/walls-pad/next-ask';
 import { photoFigures } from '@/lib/walls-pad/photo-figures';
-import { speechIn } from '@/lib/walls-pad/say-length';
+import { readingWords } from '@/lib/walls-pad/reading-words';
+import { type LengthSpeech, speechIn } from '@/lib/walls-pad/say-length';
 import { type BookPlace, goTo, placeHref, useBookPlace } from './book-place';
 import { AllRead, Waiting } from './book-states';
 import { afterKey } from './draft-keys';
@@ -88,6 +90,7 @@ function BookScreen({ room, kept }: BookScreensProps) {
       keptDraft={kept.draft}
       picture={<QuestionPicture {...{ question, view, speech }} />}
       toGo={toGoWords(plan)}
+      lastKept={lastKeptWords(lastKeptId, view, speech)}
       onHabits={changeHabits}
       onKept={(reading, isAgain) => {
         setLastKeptId(reading.id);
@@ -208,13 +211,26 @@ function BookScreen({ room, kept }: BookScreensProps) {
     case 'list':
       return (
         <WallsOverview
-          {...{ view, plan, speech }}
+          {...{ view, plan, speech, habits }}
+          onHabits={changeHabits}
           picture={<WallPicture {...{ view, speech }} wallId={null} />}
         />
       );
     case 'leave':
       return <LeaveScreen {...{ view, plan, queue }} />;
   }
+}
+
+/** What was kept a moment ago, so that it can be seen once more and taken back up. */
+function lastKeptWords(
+  id: string | null,
+  { wallBook }: WallBookView,
+  speech: LengthSpeech,
+): string | undefined {
+  const reading = wallBook.readings.find((one) => one.id === id);
+  if (!reading) return undefined;
+  const { what, value } = readingWords(reading, wallBook.room, speech);
+  return `${what}, ${value}. Back to correct it.`;
 }
 
 /** Another place of the book is another page: it begins at its top. */

@@ -3,15 +3,24 @@
 import { type ReactNode, useState } from 'react';
 import { useTyping } from '@/components/phone/use-typing';
 import type { LengthUnit } from '@/lib/units/brands';
+import { mayGoOn } from '@/lib/walls-pad/go-on';
 import type { PadDraft } from '@/lib/walls-pad/pad-draft';
-import { emptyEntry, type PadEntry, pressKey, pressTick } from '@/lib/walls-pad/pad-entry';
+import {
+  emptyEntry,
+  isEmptyEntry,
+  type PadEntry,
+  pressKey,
+  pressTick,
+} from '@/lib/walls-pad/pad-entry';
 import type { PadField } from '@/lib/walls-pad/pad-fields';
+import type { SameStart } from '@/lib/walls-pad/same-start';
 import { nudged, tapeTicks } from '@/lib/walls-pad/tape-ticks';
 import { FractionWords } from './fraction-words';
 import { PadKeys } from './pad-keys';
 import { type PadSays, PadSaysBox } from './pad-says';
 import { PadValue } from './pad-value';
 import { TapeStrip } from './tape-strip';
+import { useGoOn } from './use-go-on';
 
 export type FieldPadProps = {
   /** Fills what the keys leave. */
@@ -29,6 +38,12 @@ export type FieldPadProps = {
   says: PadSays;
   /** Opens the rule behind what is said. */
   onRule?: () => void;
+  /** What was kept before this, while nothing is typed yet. */
+  lastKept?: string;
+  /** What the figure will begin with, offered while nothing is typed. */
+  start?: SameStart | null;
+  /** Goes on by itself once a tick is touched. */
+  goesOn?: boolean;
   /** Beside the chips: another way to take the same thing. */
   otherWay?: { words: string; onPress: () => void };
   /** Tool, what it touches, can't reach it … */
@@ -47,8 +62,20 @@ export function FieldPad(props: FieldPadProps) {
   useTyping(draft !== begun);
   const field = fields.find(({ name }) => name === draft.active);
   const entry = draft.entries[draft.active] ?? emptyEntry(unit);
-  const put = (next: PadEntry) =>
-    onDraft({ ...draft, entries: { ...draft.entries, [draft.active]: next } });
+  const withEntry = (next: PadEntry): PadDraft => ({
+    ...draft,
+    entries: { ...draft.entries, [draft.active]: next },
+  });
+  const put = (next: PadEntry) => onDraft(withEntry(next));
+  const [ticked, setTicked] = useState<PadDraft | null>(null);
+  const tick = (sixtyFourths: number) => {
+    const next = withEntry(pressTick(entry, sixtyFourths));
+    setTicked(next);
+    onDraft(next);
+  };
+  const isGoing = props.goesOn === true && ticked === draft && mayGoOn(entry, props.says.kind);
+  useGoOn(isGoing ? draft : null, props.onNext);
+  const isUntyped = isEmptyEntry(entry) && !entry.isNegative;
   const cornerKey = field?.kind === 'projection' ? 'sign' : entry.unit === 'in' ? 'ft' : 'point';
   const { nudge } = tapeTicks(stepMm);
   return (
@@ -77,7 +104,9 @@ export function FieldPad(props: FieldPadProps) {
           />
         </output>
         <span className="flex items-center gap-2">
-          {nudge !== null && entry.unit === 'in' ? (
+          {isUntyped && props.start ? (
+            <StartKey start={props.start} onStart={(start) => put(start.entry)} />
+          ) : nudge !== null && entry.unit === 'in' ? (
             <Nudges
               nudge={nudge}
               onNudge={(by) => put(pressTick(entry, nudged(entry.sixtyFourths, by)))}
@@ -86,14 +115,16 @@ export function FieldPad(props: FieldPadProps) {
           <UnitButton entry={entry} onUnit={props.onUnit} />
         </span>
       </div>
-      <PadSaysBox says={props.says} onRule={props.onRule} />
+      <PadSaysBox says={props.says} onRule={props.onRule}>
+        {props.lastKept && isUntyped ? (
+          <span className="mt-0.5 block text-graphite">
+            Kept: <FractionWords>{props.lastKept}</FractionWords>
+          </span>
+        ) : null}
+      </PadSaysBox>
       <ActionRow actions={props.actions} />
       {entry.unit === 'in' ? (
-        <TapeStrip
-          stepMm={stepMm}
-          sixtyFourths={entry.sixtyFourths}
-          onTick={(tick) => put(pressTick(entry, tick))}
-        />
+        <TapeStrip stepMm={stepMm} sixtyFourths={entry.sixtyFourths} onTick={tick} />
       ) : (
         <div className="border-t border-ink" />
       )}
@@ -101,11 +132,27 @@ export function FieldPad(props: FieldPadProps) {
         cornerKey={cornerKey}
         onKey={(key) => put(pressKey(entry, key))}
         nextWords={props.nextWords}
+        isGoing={isGoing}
         onNext={props.onNext}
         isBusy={props.isBusy}
         onAgain={props.onAgain}
       />
     </div>
+  );
+}
+
+/** One touch for the digits that were the same beside it; the fraction is read. */
+function StartKey({ start, onStart }: { start: SameStart; onStart: (start: SameStart) => void }) {
+  return (
+    <button
+      type="button"
+      aria-label={`begin with ${start.shown}, as beside it`}
+      onClick={() => onStart(start)}
+      className="min-h-thumb touch-manipulation border border-pine px-3 text-left leading-tight active:bg-tint"
+    >
+      <b className="block text-lead">{start.shown} …</b>
+      <span className="text-note text-graphite">as beside it</span>
+    </button>
   );
 }
 

@@ -16,6 +16,8 @@ export type PadHabits = {
   cornerMethod: CornerMethod;
   studAt: ReadingOf<'stud'>['at'];
   doorwayName: string;
+  /** The next question comes by itself once a tick of the tape is touched. */
+  goesOn: boolean;
   /** Set-ups begun on this phone, by room and group. */
   setUps: Record<string, SetUp>;
 };
@@ -28,6 +30,7 @@ export function freshHabits(unit: LengthUnit): PadHabits {
     cornerMethod: 'legs',
     studAt: 'centre',
     doorwayName: 'Front door',
+    goesOn: true,
     setUps: {},
   };
 }

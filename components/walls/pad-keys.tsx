@@ -10,6 +10,8 @@ type PadKeysProps = {
   nextWords: string;
   onNext: () => void;
   isBusy: boolean;
+  /** It will be pressed by itself in a moment. */
+  isGoing?: boolean;
   /** Keeps this value and asks the same once more; null where that means nothing. */
   onAgain: (() => void) | null;
 };
@@ -18,7 +20,8 @@ const cornerWords = { ft: 'ft', point: '.', sign: '±' };
 const cornerSpoken = { ft: 'feet', point: 'point', sign: 'plus or minus' };
 
 /** Digits under the thumb; the system keyboard never opens. A real keyboard, where there is one, types too. */
-export function PadKeys({ cornerKey, onKey, nextWords, onNext, isBusy, onAgain }: PadKeysProps) {
+export function PadKeys(props: PadKeysProps) {
+  const { cornerKey, onKey, nextWords, onNext, isBusy, isGoing = false, onAgain } = props;
   useRealKeyboard(onKey, onNext);
   const digit = (key: PadKey) => (
     <Key key={key} onPress={() => onKey(key)} className="text-title font-medium">
@@ -38,9 +41,15 @@ export function PadKeys({ cornerKey, onKey, nextWords, onNext, isBusy, onAgain }
         type="button"
         onClick={onNext}
         aria-busy={isBusy}
-        className="row-span-2 touch-manipulation bg-pine text-lead font-bold text-on-fill select-none active:opacity-90"
+        className="relative row-span-2 touch-manipulation overflow-hidden bg-pine text-lead font-bold text-on-fill select-none active:opacity-90"
       >
         {nextWords}
+        {isGoing ? (
+          <span
+            aria-hidden="true"
+            className="pad-going absolute inset-x-0 bottom-0 h-2 bg-on-fill"
+          />
+        ) : null}
       </button>
       <Key onPress={() => onKey(cornerKey)} label={cornerSpoken[cornerKey]} className="text-lead">
         {cornerWords[cornerKey]}

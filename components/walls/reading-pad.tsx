@@ -18,6 +18,8 @@ type ReadingPadProps = ReadingPadInput & {
   picture: ReactNode;
   /** "5 of 23 to go". */
   toGo: string;
+  /** "Wall A, length at the floor: 142 1/8\"". */
+  lastKept: string | undefined;
   onHabits: (change: Partial<PadHabits>) => void;
   onSkipped: () => void;
   onBack: () => void;
@@ -113,6 +115,9 @@ export function ReadingPad(props: ReadingPadProps) {
         onBack: props.onBack,
         onSheet: setSheet,
       })}
+      lastKept={corrects ? undefined : props.lastKept}
+      start={pad.start}
+      goesOn={habits.goesOn && !corrects}
       nextWords="next ›"
       onNext={pad.next}
       isBusy={pad.isBusy}

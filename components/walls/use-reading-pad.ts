@@ -12,6 +12,7 @@ import { isEmptyEntry } from '@/lib/walls-pad/pad-entry';
 import { type CornerMethod, padFields } from '@/lib/walls-pad/pad-fields';
 import { type ToolUse, toolInHand } from '@/lib/walls-pad/pad-tools';
 import { placeFields } from '@/lib/walls-pad/place-fields';
+import { sameStart } from '@/lib/walls-pad/same-start';
 import { speechIn } from '@/lib/walls-pad/say-length';
 import { refusalOf, verdictOf } from '@/lib/walls-pad/verdict-of';
 import { draftKey } from './draft-keys';
@@ -119,8 +120,17 @@ export function useReadingPad({ question, view, habits, keptDraft, onKept }: Rea
     else change({ ...draft, active: field });
   };
 
+  // What is read afresh, or corrected, must not begin with what stood there.
+  const isAfresh = question.corrects !== null || question.key.startsWith('again:');
+  const isMain = fields.at(-1)?.name === draft.active && !fields.at(-1)?.isOptional;
+  const start =
+    isAfresh || !isMain
+      ? null
+      : sameStart(ask, { book: wallBook, setUpId: setUp?.setUpId ?? null, unit: habits.unit });
+
   return {
     draft,
+    start,
     change,
     fields,
     tool,

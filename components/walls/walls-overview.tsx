@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { Button } from '@/components/ui/button';
 import { LinkButton } from '@/components/ui/link-button';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { WallBookView } from '@/lib/contracts/rooms';
@@ -13,6 +14,7 @@ import { placeHref } from './book-place';
 import { FractionWords } from './fraction-words';
 import { LineLink } from './line-link';
 import { OtherReaderWords } from './other-reader-words';
+import type { PadHabits } from './pad-habits';
 import { PlaceButton } from './place-button';
 import { RoomFrame } from './room-frame';
 import { useOtherReaders } from './use-other-readers';
@@ -22,11 +24,14 @@ type WallsOverviewProps = {
   view: WallBookView;
   plan: PlannedReading[];
   speech: LengthSpeech;
+  habits: PadHabits;
+  onHabits: (change: Partial<PadHabits>) => void;
   picture: ReactNode;
 };
 
 /** The whole room: each wall with what it still needs, what lies across, and the ways on. */
-export function WallsOverview({ view, plan, speech, picture }: WallsOverviewProps) {
+export function WallsOverview(props: WallsOverviewProps) {
+  const { view, plan, speech, habits, onHabits, picture } = props;
   const othersOf = useOtherReaders(view, speech);
   const { room, readings } = view.wallBook;
   const walls = room.chains.flatMap((chain) => chain.walls);
@@ -90,6 +95,16 @@ export function WallsOverview({ view, plan, speech, picture }: WallsOverviewProp
         <PlaceButton look="line" place={{ at: 'leave' }}>
           Before you leave
         </PlaceButton>
+        {speech.unit === 'in' ? (
+          <Button
+            size="thumb"
+            look="plain"
+            aria-pressed={habits.goesOn}
+            onClick={() => onHabits({ goesOn: !habits.goesOn })}
+          >
+            {habits.goesOn ? 'Goes on by itself after the fraction' : 'Waits for next every time'}
+          </Button>
+        ) : null}
         <PlaceButton look="plain" place={{ at: 'sketch' }}>
           Change the drawing
         </PlaceButton>

@@ -17,25 +17,27 @@ export function isSameThing(one: Reading, other: Reading): boolean {
       return (
         other.kind === 'length' &&
         one.wallId === other.wallId &&
-        isNear(one.yMm, other.yMm) &&
-        isNear(one.zMm, other.zMm)
+        isNearPlace(one.yMm, other.yMm) &&
+        isNearPlace(one.zMm, other.zMm)
       );
     case 'corner':
       return (
         other.kind === 'corner' &&
         one.cornerWallId === other.cornerWallId &&
-        isNear(one.zMm, other.zMm)
+        isNearPlace(one.zMm, other.zMm)
       );
     case 'diagonal':
       return (
-        other.kind === 'diagonal' && endsOf(one) === endsOf(other) && isNear(one.zMm, other.zMm)
+        other.kind === 'diagonal' &&
+        endsOf(one) === endsOf(other) &&
+        isNearPlace(one.zMm, other.zMm)
       );
     case 'width':
       return (
         other.kind === 'width' &&
         one.wallId === other.wallId &&
         one.toWallId === other.toWallId &&
-        isNear(one.xMm, other.xMm)
+        isNearPlace(one.xMm, other.xMm)
       );
     case 'feature':
       return (
@@ -62,7 +64,8 @@ export function isSameThing(one: Reading, other: Reading): boolean {
   }
 }
 
-function isNear(one: number, other: number): boolean {
+/** Heights, depths and places that count as one. */
+export function isNearPlace(one: number, other: number): boolean {
   return Math.abs(one - other) <= SAME_PLACE_MM;
 }
 
