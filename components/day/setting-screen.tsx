@@ -46,10 +46,12 @@ export function SettingScreen({ stop, roomId }: { stop: StopView; roomId: string
           <section key={wall.id}>
             <TitleBlock
               title={
-                <InFractions words={`${wall.name}: ${ofWall.map(({ name }) => name).join(', ')}`} />
+                <InFractions
+                  words={`${words.wall(wall.name)}: ${ofWall.map(({ name }) => name).join(', ')}`}
+                />
               }
             />
-            {drawing ? <DrawingView drawing={drawing} title={wall.name} /> : null}
+            {drawing ? <DrawingView drawing={drawing} title={words.wall(wall.name)} /> : null}
           </section>
         );
       })}

@@ -1,7 +1,7 @@
 'use client';
 
+import { buttonLook } from '@/components/ui/button-look';
 import { EmptyState } from '@/components/ui/empty-state';
-import { LinkButton } from '@/components/ui/link-button';
 import { Verdict } from '@/components/ui/verdict';
 import type { SnagView } from '@/lib/contracts/snags';
 import type { StopView } from '@/lib/contracts/stops';
@@ -17,9 +17,9 @@ export function SnagsScreen({ stop }: { stop: StopView }) {
   const closed = stop.snags.filter(({ closedAt }) => closedAt !== null);
   return (
     <ScreenFrame title={words.snags} meta={words.open(open.length)}>
-      <LinkButton size="thumb" href={stopHref({ at: 'new-snag', kind: 'fault' })}>
+      <a href={stopHref({ at: 'new-snag', kind: 'fault' })} className={buttonLook('fill', 'thumb')}>
         {words.newSnag}
-      </LinkButton>
+      </a>
       {stop.snags.length === 0 ? (
         <EmptyState title={words.noSnags}>{words.noSnagsMore}</EmptyState>
       ) : (

@@ -39,7 +39,7 @@ export function StopScreen({ visit, stop: fresh }: StopScreenProps) {
   const holder = useHolder();
   const { words } = useCrew();
   const place = useStopPlace();
-  const live = useLive(`stop:${visit.id}`, () => readStop(visit.id, holder));
+  const live = useLive(`stop:${visit.id}`, () => readStop(visit.id, holder, fresh));
   useEffect(() => {
     if (fresh) void keepStop(fresh, holder.personId).catch(() => {});
     void fetchStopScreens();

@@ -8,8 +8,13 @@ import { tapperOf } from './tapper';
 type Holder = { personId: string; personName: string };
 
 /** A stop with everything that was tapped here, sent or not; null when the office never showed it here. */
-export async function readStop(visitId: string, holder: Holder): Promise<StopView | null> {
-  const kept = await readKeptStop(visitId);
+export async function readStop(
+  visitId: string,
+  holder: Holder,
+  /** Shown by the office just now, and perhaps not kept yet. */
+  fresh: StopView | null,
+): Promise<StopView | null> {
+  const kept = (await readKeptStop(visitId)) ?? fresh;
   if (!kept) return null;
   const events = (await readQueue()).flatMap(({ work, personId }) =>
     work.kind === 'event' && personId === holder.personId ? [work.event] : [],

@@ -95,6 +95,7 @@ export const crewEn: CrewWords = {
   },
   highPoint: (wall, along) => `High point ▼ on wall ${wall}, ${along} from its left`,
   datum: (name, height) => `${name}: the boxes stand ${height} over the high point`,
+  wall: (name) => `Wall ${name}`,
   order: 'Order of setting',
   orderNote: 'Bases before wall units is your choice where boxes are altered for level.',
   steps: {

@@ -95,6 +95,7 @@ export const crewEs: CrewWords = {
   },
   highPoint: (wall, along) => `Punto más alto ▼ en la pared ${wall}, a ${along} de su izquierda`,
   datum: (name, height) => `${name}: las cajas van a ${height} sobre el punto más alto`,
+  wall: (name) => `Pared ${name}`,
   order: 'Orden de colocación',
   orderNote: 'Los bajos antes que los altos es decisión suya si hay que ajustar cajas al nivel.',
   steps: {

@@ -79,6 +79,7 @@ export type CrewWords = {
   >;
   highPoint: (wall: string, along: string) => string;
   datum: (name: string, height: string) => string;
+  wall: One;
   order: string;
   orderNote: string;
   steps: Record<SettingStep['step'], string>;
