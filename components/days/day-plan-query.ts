@@ -1,12 +1,6 @@
 'use client';
 
-import {
-  keepPreviousData,
-  queryOptions,
-  useMutation,
-  useQuery,
-  useQueryClient,
-} from '@tanstack/react-query';
+import { queryOptions, useMutation, useQuery, useQueryClient } from '@tanstack/react-query';
 import { askServer } from '@/components/shell/ask-server';
 import type {
   AcceptDayPlanInput,
@@ -24,7 +18,6 @@ export const dayPlanQuery = (asked: PlanDayInput) =>
     queryKey: [...daysKey, 'plan', asked],
     queryFn: ({ signal }) =>
       askServer<DayPlanView>(apiPaths.planDay(), { method: 'POST', body: asked, signal }),
-    placeholderData: keepPreviousData,
   });
 
 export const useDayPlan = (asked: PlanDayInput) => useQuery(dayPlanQuery(asked));

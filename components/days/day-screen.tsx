@@ -42,9 +42,9 @@ export function DayScreen({ date, today, title, ground, mayBook }: DayScreenProp
   const crewIds = better && better !== 'all' ? { crewIds: [better.crewId] } : {};
   const day = useDayPlan({ date });
   const offer = useDayPlan({ date, ...crewIds });
-  const plan = better ? offer.data : day.data;
+  const plan = better && offer.data ? offer.data : day.data;
   const crews = shownCrews(day.data?.now ?? [], better ? (offer.data?.better ?? []) : null);
-  const moves = better && plan ? movesOfPlan(plan) : nothingMoves;
+  const moves = better && offer.data ? movesOfPlan(offer.data) : nothingMoves;
   const lines = useCrewLines(crews);
   const stopCount = crews.reduce((sum, { stops }) => sum + stops.length, 0);
 
@@ -92,11 +92,16 @@ export function DayScreen({ date, today, title, ground, mayBook }: DayScreenProp
       ) : null}
       <div className="grid min-h-0 flex-1 gap-5 pt-3 lg:grid-cols-[minmax(22rem,2fr)_3fr]">
         <div className="min-h-0 lg:overflow-y-auto lg:pr-2">
-          {better && plan ? (
+          {better && !offer.data && !offer.error ? (
+            <p role="status" className="pb-3">
+              Looking for a better order…
+            </p>
+          ) : null}
+          {better && offer.data ? (
             <div className="pb-3">
               <PlanOffer
                 key={better === 'all' ? 'all' : better.crewId}
-                plan={plan}
+                plan={offer.data}
                 what={better === 'all' ? 'all crews' : better.name}
                 onDone={() => setBetter(null)}
               />

@@ -62,7 +62,6 @@ export function PlanOffer({
       <div className="flex flex-wrap gap-2">
         <Button
           onClick={() => void take()}
-          keyName="Enter"
           busyText={accept.isPending ? 'Putting in order…' : undefined}
         >
           Put the day in this order

@@ -1,6 +1,5 @@
 'use client';
 
-import { useQueryClient } from '@tanstack/react-query';
 import { useCallback, useMemo, useRef, useState } from 'react';
 import { problemOf } from '@/components/shell/ask-server';
 import { showToast } from '@/components/ui/toast-store';
@@ -11,7 +10,6 @@ import type { Zone } from '@/lib/time/zones';
 import { useMoveVisit } from './change-visit-query';
 import { isSamePlace, type Place, placeOf, visitAt } from './place';
 import { useTakeBack } from './use-take-back';
-import { visitsKey } from './visits-query';
 
 /** A move that was refused and may be tried again: on the newer visit, or with a reason. */
 export type RefusedMove = { visit: VisitView; place: Place; problem: ProblemDetails };
@@ -26,9 +24,10 @@ export function useMover({ zone, pattern, crews }: Shop) {
   const [places, setPlaces] = useState<ReadonlyMap<string, Place>>(new Map());
   const [refused, setRefused] = useState<RefusedMove | null>(null);
   const gathering = useRef(new Map<string, ReturnType<typeof setTimeout>>());
+  const underWay = useRef(new Map<string, Promise<boolean>>());
+  const newest = useRef(new Map<string, VisitView>());
   const move = useMoveVisit();
   const takeBack = useTakeBack();
-  const client = useQueryClient();
 
   const put = useCallback((visitId: string, place: Place | null) => {
     setPlaces((now) => {
@@ -39,7 +38,17 @@ export function useMover({ zone, pattern, crews }: Shop) {
     });
   }, []);
 
-  async function send(visit: VisitView, place: Place, overrideReason = ''): Promise<boolean> {
+  async function send(seen: VisitView, place: Place, overrideReason = ''): Promise<boolean> {
+    // Our own move before this one may still be under way, or not yet be in the diary.
+    await underWay.current.get(seen.id);
+    const own = newest.current.get(seen.id);
+    const visit = own && own.version > seen.version ? own : seen;
+    const sent = sendOne(visit, place, overrideReason);
+    underWay.current.set(visit.id, sent);
+    return sent;
+  }
+
+  async function sendOne(visit: VisitView, place: Place, overrideReason: string): Promise<boolean> {
     if (isSamePlace(place, placeOf(visit, zone))) {
       put(visit.id, null);
       return true;
@@ -48,6 +57,7 @@ export function useMover({ zone, pattern, crews }: Shop) {
     try {
       const { id: visitId, version } = visit;
       const moved = await move.mutateAsync({ visitId, version, ...place, overrideReason });
+      newest.current.set(visitId, moved);
       showToast({
         text: `${moved.customerName}: ${moved.dayWords}, ${moved.windowWords}`,
         undo: () => void takeBack(moved),
@@ -59,7 +69,6 @@ export function useMover({ zone, pattern, crews }: Shop) {
       else showToast({ text: saidOf(problem), isProblem: true });
       return false;
     } finally {
-      await client.invalidateQueries({ queryKey: visitsKey });
       put(visit.id, null);
     }
   }
