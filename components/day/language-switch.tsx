@@ -1,7 +1,7 @@
 'use client';
 
+import { chooseLanguage, useCrewLanguage } from '@/components/phone/spoken-language';
 import { type CrewLanguage, crewWords } from '@/lib/words/crew';
-import { chooseLanguage, useCrewLanguage } from './crew-language';
 
 const languages: CrewLanguage[] = ['en', 'es'];
 

@@ -2,6 +2,7 @@
 
 import { useState } from 'react';
 import { useHolder } from '@/components/phone/phone-person';
+import { chooseLanguage } from '@/components/phone/spoken-language';
 import { useTyping } from '@/components/phone/use-typing';
 import { Button } from '@/components/ui/button';
 import { TextField } from '@/components/ui/text-field';
@@ -9,7 +10,7 @@ import type { PenStrokes, SignedSnag } from '@/lib/contracts/sign-offs';
 import type { StopView } from '@/lib/contracts/stops';
 import type { TodayVisit } from '@/lib/contracts/visits';
 import { type CrewLanguage, crewWords } from '@/lib/words/crew';
-import { chooseLanguage, useCrew } from './crew-language';
+import { useCrew } from './crew-language';
 import { KeepFailed } from './keep-failed';
 import { ScreenFrame } from './screen-frame';
 import { SignPad } from './sign-pad';

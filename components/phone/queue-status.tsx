@@ -1,7 +1,6 @@
 'use client';
 
 import { useSyncExternalStore } from 'react';
-import { useCrewLanguage } from '@/components/day/crew-language';
 import { Verdict, type VerdictKind } from '@/components/ui/verdict';
 import { paths } from '@/lib/paths';
 import { type StripState, stripState } from '@/lib/sync/strip-words';
@@ -9,6 +8,7 @@ import { useHolder } from './phone-person';
 import { readReadiness } from './read-readiness';
 import { readUnsent } from './read-unsent';
 import { currentSendingState, type SendingState, subscribeToSending } from './sending-state';
+import { useCrewLanguage } from './spoken-language';
 import { useLive } from './use-live';
 import { hasWorker, subscribeToWorker } from './worker';
 
