@@ -32,6 +32,7 @@ export function readRules(fields: Record<string, string>, before: ShopSettings):
       email,
       zone,
       fit: nextFit,
+      keeping: { customerYears: Number(fields.customerYears) || null },
       booking: {
         ...booking,
         dayStart: fields.dayStart ?? booking.dayStart,
@@ -42,6 +43,10 @@ export function readRules(fields: Record<string, string>, before: ShopSettings):
         closedDays: (fields.closedDays ?? '').split(/[\s,]+/).filter(Boolean),
         windowMinutes: Number(fields.windowMinutes),
         leadWorkdays: Number(fields.leadWorkdays),
+        weightDriveMinute: Number(fields.weightDriveMinute),
+        weightDayWaited: Number(fields.weightDayWaited),
+        weightScrapMinute: Number(fields.weightScrapMinute),
+        weightMissedWish: Number(fields.weightMissedWish),
       },
     },
   };

@@ -17,6 +17,7 @@ import { apiPaths } from '@/lib/paths';
 import { lengthRuleGroups } from '@/lib/rules/length-rules';
 import { formatLength } from '@/lib/units/format-length';
 import { ChangePreview } from './change-preview';
+import { OpeningWeights } from './opening-weights';
 import { readRules } from './read-rules';
 
 const weekdays = ['Monday', 'Tuesday', 'Wednesday', 'Thursday', 'Friday', 'Saturday', 'Sunday'];
@@ -184,6 +185,15 @@ export function RulesForm({ settings, mayChange }: { settings: ShopSettings; may
             hint="As 2026-12-24, with spaces between."
             defaultValue={booking.closedDays.join(' ')}
             error={form.errorOf('booking.closedDays')}
+          />
+          <OpeningWeights booking={booking} errorOf={form.errorOf} />
+          <TextField
+            label="Forget a customer after so many years"
+            name="customerYears"
+            type="number"
+            hint="After the last visit of jobs that are signed off or called off. Empty: never by itself."
+            defaultValue={settings.keeping?.customerYears ?? ''}
+            error={form.errorOf('keeping.customerYears')}
           />
         </section>
         {lengthRuleGroups.map((group) => (

@@ -1,5 +1,6 @@
 /** Shop rules: what the shop decides. Each default's basis is in `lib/measure/rules`. */
 import { z } from 'zod';
+import { usualOpeningWeights } from '@/lib/schedule/planning-rules';
 import { checklistRules } from './checklists';
 import { ownRuleSet } from './rule-sets';
 
@@ -82,6 +83,8 @@ export const fitRules = z.object({
 });
 export type FitRules = z.infer<typeof fitRules>;
 
+const weight = z.number('A number, 0 for no matter.').min(0).max(1_000);
+
 /** Rules of booking and telling. Times are local, in the shop's zone. */
 export const bookingRules = z.object({
   dayStart: z.string().regex(/^\d\d:\d\d$/),
@@ -109,14 +112,25 @@ export const bookingRules = z.object({
   quietUntil: z.string().regex(/^\d\d:\d\d$/),
   /** The speed of drives that no road service answered for. */
   driveKmPerHour: z.number().min(5).max(130).default(45),
+  /** How times that work are ranked: what counts as how many minutes of trouble (lib/schedule/planning-rules). */
+  weightDriveMinute: weight.default(usualOpeningWeights.driveMinute),
+  weightDayWaited: weight.default(usualOpeningWeights.dayWaited),
+  weightScrapMinute: weight.default(usualOpeningWeights.scrapMinute),
+  weightMissedWish: weight.default(usualOpeningWeights.missedWish),
 });
 export type BookingRules = z.infer<typeof bookingRules>;
+
+/** How long a customer is kept after the last thing that happened; null: until the owner erases them. */
+export const keepingRules = z.object({
+  customerYears: z.number().int().min(1, 'One year at least.').max(50).nullable(),
+});
 
 export const shopRules = z.object({
   fit: fitRules,
   booking: bookingRules,
   /** Left out: the usual lists. */
   checklists: checklistRules.optional(),
+  keeping: keepingRules.optional(),
 });
 export type ShopRules = z.infer<typeof shopRules>;
 
@@ -178,5 +192,6 @@ export const changeShopRulesInput = z.object({
   booking: orderedBooking.optional(),
   /** A kind that is left out goes back to the usual list. */
   checklists: checklistRules.optional(),
+  keeping: keepingRules.optional(),
 });
 export type ChangeShopRulesInput = z.infer<typeof changeShopRulesInput>;

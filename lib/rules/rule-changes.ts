@@ -21,8 +21,19 @@ const others: Record<string, { label: string; affects: string }> = {
   'booking.closedDays': { label: 'Closed days', affects: 'times that are offered' },
   'booking.windowMinutes': { label: 'Arrival window', affects: 'what customers are promised' },
   'booking.leadWorkdays': { label: 'Release to ready', affects: 'when an install may be booked' },
+  'booking.weightDriveMinute': {
+    label: 'A minute driven counts',
+    affects: 'order of times offered',
+  },
+  'booking.weightDayWaited': { label: 'A day waited counts', affects: 'order of times offered' },
+  'booking.weightScrapMinute': { label: 'A minute lost counts', affects: 'order of times offered' },
+  'booking.weightMissedWish': { label: 'A missed wish counts', affects: 'order of times offered' },
   'booking.quietFrom': { label: 'No texts from', affects: 'when texts go out' },
   'booking.quietUntil': { label: 'No texts until', affects: 'when texts go out' },
+  'keeping.customerYears': {
+    label: 'Customers are forgotten after, years',
+    affects: 'names, addresses, photos and texts of old jobs',
+  },
   checklists: { label: 'Checklists', affects: 'what crews are asked on site' },
 };
 
@@ -49,10 +60,15 @@ export function ruleChanges(before: Settings, after: Partial<Settings>): RuleCha
 }
 
 function flattened(settings: Partial<Settings>): Map<string, unknown> {
-  const { fit, booking, ...rest } = settings;
+  const { fit, booking, keeping, ...rest } = settings;
   const inPart = (part: string, values: object | undefined): [string, unknown][] =>
     Object.entries(values ?? {}).map(([key, value]) => [`${part}.${key}`, value]);
-  return new Map([...Object.entries(rest), ...inPart('fit', fit), ...inPart('booking', booking)]);
+  return new Map([
+    ...Object.entries(rest),
+    ...inPart('fit', fit),
+    ...inPart('booking', booking),
+    ...inPart('keeping', keeping),
+  ]);
 }
 
 function lengthWords(value: unknown, { unit, stepMm }: FitRules): string {

@@ -3,11 +3,10 @@ import { customers } from '@/db/schema';
 import type { EraseCustomerInput } from '@/lib/contracts/keeping';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
-import { logBug } from '@/server/base/log';
 import { notFound, Refusal } from '@/server/base/problem-response';
-import { filesPort } from '@/server/ports/files/choose-files';
 import { forgetCustomer } from './forget-customer';
 import { countOpenVisits } from './open-visits';
+import { removeBytes } from './remove-bytes';
 
 /**
  * Forgets who a customer was. The jobs, their times and their sizes stay for the numbers; the name, the
@@ -59,13 +58,4 @@ function mustHaveNoVisits(open: number): void {
     code: 'visits-open',
     message: `There ${open === 1 ? 'is 1 visit' : `are ${open} visits`} still to come. Call off first; nothing was erased.`,
   });
-}
-
-/** After the rows: bytes without a row are found by nobody, a row without bytes would be a photo that is lost. */
-async function removeBytes(storageKeys: string[]): Promise<void> {
-  for (const key of storageKeys) {
-    await filesPort()
-      .remove(key)
-      .catch((error) => logBug('keeping/erase-customer', error));
-  }
 }

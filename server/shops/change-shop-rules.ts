@@ -29,11 +29,12 @@ export async function changeShopRules(
       .where(isThisShop)
       .for('update');
     if (!before) throw new Error('the shop is gone');
-    const { fit, booking, checklists } = input;
+    const { fit, booking, checklists, keeping } = input;
     const rules = {
       fit: fit ?? before.rules.fit,
       booking: booking ?? before.rules.booking,
       checklists: checklists ?? before.rules.checklists,
+      keeping: keeping ?? before.rules.keeping,
     };
     const [after] = await tx
       .update(shops)

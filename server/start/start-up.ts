@@ -4,6 +4,7 @@ import { database } from '@/server/base/database';
 import { env } from '@/server/base/env';
 import { log } from '@/server/base/log';
 import { repeat } from '@/server/base/repeat';
+import { forgetOld } from '@/server/keeping/forget-old';
 import { startWorker } from '@/server/messages/worker';
 import { hashPassword } from '@/server/people/sign-in';
 import { getPorts } from '@/server/ports/choose-ports';
@@ -16,6 +17,7 @@ import { makeVisitLink } from '@/server/visits/visit-link';
 
 /** Other programs hear of a change within so long. */
 const tellEveryMs = 5_000;
+const forgetEveryMs = 6 * 3_600_000;
 
 /** Once a process, before the first request is answered. */
 export async function startUp(): Promise<void> {
@@ -34,11 +36,18 @@ export async function startUp(): Promise<void> {
   const stopLapsing = startLapsing();
   const stopBackUps = startBackUps(open, { dataDirectory, backUpDirectory });
   const stopTelling = repeat('programs', tellEveryMs, () => sendDeliveries(open.db, new Date()));
+  const stopForgetting = repeat('keeping', forgetEveryMs, () => forgetOld(open.db, new Date()));
   log('started', { database: open.kind, demo });
 
   for (const signal of ['SIGTERM', 'SIGINT'] as const) {
     process.once(signal, async () => {
-      await Promise.all([stopWorker(), stopLapsing(), stopBackUps(), stopTelling()]);
+      await Promise.all([
+        stopWorker(),
+        stopLapsing(),
+        stopBackUps(),
+        stopTelling(),
+        stopForgetting(),
+      ]);
       await open.close();
       log('stopped');
       process.exit(0);

@@ -6,9 +6,10 @@ import {
   GET as previewRoute,
 } from '@/app/api/customers/[customerId]/erasure/route';
 import { GET as exportRoute } from '@/app/api/customers/[customerId]/export/route';
-import { audit, consents, customers, jobs, messages, sites, visits } from '@/db/schema';
+import { audit, consents, customers, jobs, messages, shops, sites, visits } from '@/db/schema';
 import type { Role } from '@/lib/permissions';
 import { database } from '@/server/base/database';
+import { forgetOld } from '@/server/keeping/forget-old';
 import { changeConsent } from '@/server/messages/change-consent';
 import { callOffVisit } from '@/server/visits/call-off-visit';
 import { bookTestVisit } from '../help/book-test-visit';
@@ -67,7 +68,7 @@ describe('a customer who asks what is known of them, and to be forgotten', () =>
     const { db } = await database();
     await db
       .update(sites)
-      .set({ accessCodeSealed: 'sealed-4711' })
+      .set({ accessCodeSealed: 'sealed way in' })
       .where(eq(sites.customerId, customerId));
     const asked = new Request('http://localhost:3000/api/test', {
       headers: { cookie: cookies.owner },
@@ -80,7 +81,7 @@ describe('a customer who asks what is known of them, and to be forgotten', () =>
     expect(record.customer).toMatchObject({ name, email: told.email });
     expect(record.visits).toHaveLength(1);
     expect(record.messages.length).toBeGreaterThan(0);
-    expect(text).not.toContain('4711');
+    expect(text).not.toContain('sealed way in');
   });
 
   it('is not forgotten while a crew still drives there, nor by a slip of the hand', async () => {
@@ -151,6 +152,30 @@ describe('a customer who asks what is known of them, and to be forgotten', () =>
     expect(said.filter(({ channel }) => channel === 'sms').at(-1)?.given).toBe(false);
     const sent = await db.select().from(messages).where(eq(messages.jobId, again.jobId));
     expect(sent.filter(({ channel }) => channel === 'sms')).toEqual([]);
+  });
+
+  it('is forgotten by the shop’s own rule, years after the last visit, and not while a job is open', async () => {
+    const { db } = await database();
+    const closed = await bookedCustomer();
+    await callOff(closed);
+    await db.update(jobs).set({ stage: 'signed-off' }).where(eq(jobs.id, closed.jobId));
+    const open = await bookedCustomer();
+    await callOff(open);
+    const inYears = (years: number) => new Date(Date.now() + years * 366 * 86_400_000);
+    expect(await forgetOld(db, inYears(9))).toBe(0);
+    const { rules } = shop.shop;
+    await db
+      .update(shops)
+      .set({ rules: { ...rules, keeping: { customerYears: 3 } } })
+      .where(eq(shops.id, shop.shop.id));
+    const nameOf = async (customerId: string) =>
+      (await db.select().from(customers).where(eq(customers.id, customerId)))[0]?.name;
+    await forgetOld(db, inYears(2));
+    expect(await nameOf(closed.customerId)).toBe(name);
+    await forgetOld(db, inYears(4));
+    expect(await nameOf(closed.customerId)).toBe('Erased customer');
+    expect(await nameOf(open.customerId)).toBe(name);
+    await db.update(shops).set({ rules }).where(eq(shops.id, shop.shop.id));
   });
 
   it('is shown and erased by the owner of the shop alone', async () => {
