@@ -91,6 +91,8 @@ export const apiPaths = {
   jobs: () => '/api/jobs',
   jobSearch: (search: string) => `/api/jobs?search=${part(search)}`,
   job: (jobId: string) => `/api/jobs/${part(jobId)}`,
+  /** The pin of its site on the map. */
+  jobPlace: (jobId: string) => `/api/jobs/${part(jobId)}/place`,
   papers: (jobId: string) => `/api/jobs/${part(jobId)}/papers`,
   /** The bench says that the cabinets are ready. */
   jobReady: (jobId: string) => `/api/jobs/${part(jobId)}/ready`,

@@ -6,6 +6,10 @@ export const latLon = z.object({
   lon: z.number().min(-180).max(180),
 });
 
+/** Where a job's site is; null takes the pin away. */
+export const placeSiteInput = z.object({ jobId: z.uuid(), place: latLon.nullable() });
+export type PlaceSiteInput = z.infer<typeof placeSiteInput>;
+
 /** More stops than any crew makes in a day. */
 const mostPoints = 30;
 

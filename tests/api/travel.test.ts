@@ -1,14 +1,17 @@
 import { eq } from 'drizzle-orm';
 import { afterEach, beforeAll, describe, expect, it } from 'vitest';
 import { GET as geocodeRoute } from '@/app/api/geocode/route';
+import { PATCH as placeRoute } from '@/app/api/jobs/[jobId]/place/route';
 import { POST as travelRouteRoute } from '@/app/api/travel/route';
 import { driveTimes } from '@/db/schema';
 import { estimateDriveMinutes } from '@/lib/travel/estimate-drive';
+import { getJob } from '@/server/jobs/get-job';
 import { getPorts } from '@/server/ports/choose-ports';
 import type { FakeJsonServer } from '@/server/ports/fakes/fake-json-server';
 import { travelMatrix } from '@/server/shops/travel-matrix';
 import { callRoute } from '../help/call-route';
 import { contextOf, cookieOf, makeShop, type TestShop } from '../help/make-shop';
+import { startTestJob } from '../help/start-test-job';
 
 const juniper = { lat: 41.284, lon: -58.312 };
 const quayside = { lat: 41.217, lon: -58.312 };
@@ -120,5 +123,24 @@ describe('drive times and addresses of a shop', () => {
     const other = await cookieOf(otherShop.people.scheduler);
     await callRoute(geocodeRoute, { method: 'GET', cookie: other, url });
     expect(addresses.asked()).toHaveLength(asked + 1);
+  });
+
+  it('need the pin of a site, which the office puts and takes away, and nobody of another shop', async () => {
+    const { jobId } = await startTestJob(shop);
+    const put = (cookie: string, place: object | null) =>
+      callRoute(placeRoute, { method: 'PATCH', cookie, params: { jobId }, body: { place } });
+    const scheduler = await cookieOf(shop.people.scheduler);
+    expect((await put(await cookieOf(shop.people.crew), gannet)).status).toBe(403);
+    expect((await put(await cookieOf(otherShop.people.owner), gannet)).status).toBe(404);
+    expect((await put(scheduler, { lat: 91, lon: 0 })).status).toBe(422);
+    const kept = async () => {
+      const { latitude, longitude } = await getJob(await contextOf(shop, 'owner'), { jobId });
+      return [latitude, longitude];
+    };
+    expect(await kept()).toEqual([null, null]);
+    expect((await put(scheduler, gannet)).status).toBe(200);
+    expect(await kept()).toEqual([gannet.lat, gannet.lon]);
+    await put(scheduler, null);
+    expect(await kept()).toEqual([null, null]);
   });
 });

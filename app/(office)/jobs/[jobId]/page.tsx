@@ -7,6 +7,7 @@ import { JobStory } from '@/components/jobs/job-story';
 import { RoomList } from '@/components/jobs/room-list';
 import { SiteForm } from '@/components/jobs/site-form';
 import { JobPhotos } from '@/components/photos/job-photos';
+import { SitePlace } from '@/components/place/site-place';
 import { SignOffList } from '@/components/sign-off/sign-off-list';
 import { ForCrewForm } from '@/components/snags/for-crew-form';
 import { JobSnags } from '@/components/snags/job-snags';
@@ -17,6 +18,7 @@ import { stageWords } from '@/lib/schedule/stages';
 import { found } from '@/server/base/found';
 import { pageContext } from '@/server/base/page-context';
 import { getForCrew } from '@/server/days/get-for-crew';
+import { getMapGround } from '@/server/days/get-map-ground';
 import { listJobFiles } from '@/server/files/list-job-files';
 import { listPhotos } from '@/server/files/list-photos';
 import { getJob } from '@/server/jobs/get-job';
@@ -60,6 +62,9 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
             region={ctx.shop.region}
             mayRead={may(ctx.actor.role, 'messages:read')}
           />
+          {may(ctx.actor.role, 'jobs:change') ? (
+            <SitePlace job={job} ground={getMapGround(ctx)} />
+          ) : null}
         </section>
         <section>
           <TitleBlock title="Rooms" meta={`${rooms.length} of ${job.roomCount}`} />
