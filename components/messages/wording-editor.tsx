@@ -62,7 +62,7 @@ export function WordingEditor({ wording, shop, price, mayChange }: Props) {
   };
 
   return (
-    <div className="grid items-start gap-x-10 gap-y-6 lg:grid-cols-2">
+    <div className="grid grid-cols-1 items-start gap-x-10 gap-y-6 lg:grid-cols-2">
       <form onSubmit={submit}>
         <fieldset disabled={!mayChange} className="flex flex-col gap-3">
           <TextareaField

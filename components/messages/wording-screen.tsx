@@ -67,7 +67,7 @@ export function WordingScreen({ wordings, settings, shop, mayChange }: Props) {
           mayChange={mayChange}
         />
       ) : null}
-      <div className="mt-10 grid items-start gap-x-10 gap-y-8 lg:grid-cols-2">
+      <div className="mt-10 grid grid-cols-1 items-start gap-x-10 gap-y-8 lg:grid-cols-2">
         <MessageSettingsForm settings={settings} mayChange={mayChange} />
         {mayChange ? <TestForm shop={shop} /> : null}
       </div>
