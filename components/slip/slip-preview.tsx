@@ -58,24 +58,7 @@ export function SlipPreview({
 
   return (
     <form onSubmit={take} className="flex flex-col gap-4">
-      <div className="overflow-x-auto">
-        <table className="w-full border-collapse text-left">
-          <caption className="sr-only">Visits that the slip moves</caption>
-          <thead>
-            <tr className="border-b border-ink text-note text-graphite">
-              <th className="py-1 pr-4 font-medium">Visit</th>
-              <th className="py-1 pr-4 font-medium">Stands now</th>
-              <th className="py-1 pr-4 font-medium">What is in its way</th>
-              <th className="py-1 font-medium">Goes to</th>
-            </tr>
-          </thead>
-          <tbody>
-            {preview.moves.map((move) => (
-              <MoveRow key={move.visitId} move={move} />
-            ))}
-          </tbody>
-        </table>
-      </div>
+      {preview.moves.length > 0 ? <MovesTable moves={preview.moves} /> : null}
       {preview.moves.length === 0 ? <p>No booked visit is in the way: nothing moves.</p> : null}
       <ul className="text-note text-graphite">
         {preview.jobs.map((job) => (
@@ -113,6 +96,29 @@ export function SlipPreview({
         </Button>
       </div>
     </form>
+  );
+}
+
+function MovesTable({ moves }: { moves: readonly SlipMove[] }) {
+  return (
+    <div className="overflow-x-auto">
+      <table className="w-full border-collapse text-left">
+        <caption className="sr-only">Visits that the slip moves</caption>
+        <thead>
+          <tr className="border-b border-ink text-note text-graphite">
+            <th className="py-1 pr-4 font-medium">Visit</th>
+            <th className="py-1 pr-4 font-medium">Stands now</th>
+            <th className="py-1 pr-4 font-medium">What is in its way</th>
+            <th className="py-1 font-medium">Goes to</th>
+          </tr>
+        </thead>
+        <tbody>
+          {moves.map((move) => (
+            <MoveRow key={move.visitId} move={move} />
+          ))}
+        </tbody>
+      </table>
+    </div>
   );
 }
 

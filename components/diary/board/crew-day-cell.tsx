@@ -40,11 +40,16 @@ export function CrewDayCell({
           </span>
           <span className="board-free">
             <span className="sr-only">{dayHeadWords(day.date)}: </span>
-            {freeMinutes === 0
-              ? 'full'
-              : freeMinutes === workedMinutes
-                ? 'free'
-                : `${minutesWords(freeMinutes)} free`}
+            {freeMinutes === 0 ? (
+              'full'
+            ) : freeMinutes === workedMinutes ? (
+              'free'
+            ) : (
+              <>
+                {minutesWords(freeMinutes)}
+                <span className="board-free-word"> free</span>
+              </>
+            )}
           </span>
         </>
       ) : (
