@@ -1,9 +1,11 @@
 import type { FindOpeningsInput } from '@/lib/contracts/openings';
+import type { BookingRules } from '@/lib/contracts/shop-rules';
 import {
   driveWhenUnknownMinutes,
   type FoundOpening,
   findOpenings,
   type OpeningsInput,
+  type OpeningWeights,
   usualOpeningWeights,
 } from '@/lib/schedule';
 import { goesOutFor } from '@/lib/schedule/crew-kinds';
@@ -85,7 +87,7 @@ export async function searchOpenings(
     zone,
     windowMinutes: rules.booking.windowMinutes,
     wishes: asked.wishes,
-    weights: usualOpeningWeights,
+    weights: weightsOf(rules.booking),
   };
   const drives = await drivesFor(ctx, list, input);
   return {
@@ -93,6 +95,17 @@ export async function searchOpenings(
     crews: new Map(plans.map((crew) => [crew.id, crew])),
     crewCount: plans.length,
     drives,
+  };
+}
+
+/** A shop of before there were weights in the rules ranks as a new shop does. */
+function weightsOf(booking: Partial<BookingRules>): OpeningWeights {
+  const usual = usualOpeningWeights;
+  return {
+    driveMinute: booking.weightDriveMinute ?? usual.driveMinute,
+    dayWaited: booking.weightDayWaited ?? usual.dayWaited,
+    scrapMinute: booking.weightScrapMinute ?? usual.scrapMinute,
+    missedWish: booking.weightMissedWish ?? usual.missedWish,
   };
 }
 

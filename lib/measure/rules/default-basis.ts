@@ -83,6 +83,7 @@ export const fitRuleBasis: Record<keyof FitRules, RuleBasis> = {
   sheetActualMm: practice('Nominal is not actual: read a sheet of each delivery.'),
   crownSpringDeg: practice('38° against the wall (52° against the ceiling) is the usual crown.'),
   ruleSet: practice('The limits above, until the shop picks a published set.'),
+  ownRuleSets: practice('Sets that the shop wrote itself.'),
 };
 
 /** Basis of every booking rule. */
@@ -98,5 +99,9 @@ export const bookingRuleBasis: Record<keyof BookingRules, RuleBasis> = {
   installMinutesPerUnit: basis('T01 T03', 'medium', 'One box, one hour.'),
   quietFrom: basis('', 'strong', '47 CFR 64.1200(c)(1): no messages after 21:00 local time.'),
   quietUntil: basis('', 'strong', '47 CFR 64.1200(c)(1): no messages before 08:00 local time.'),
+  weightDriveMinute: practice('A minute driven is a minute of trouble.'),
+  weightDayWaited: practice('A day that the customer waits counts as three minutes of driving.'),
+  weightScrapMinute: practice('Four minutes that no other visit can use count as one of driving.'),
+  weightMissedWish: practice('A wish that is missed counts as an hour of driving.'),
   driveKmPerHour: practice('Towns, lanes and main roads of a working day together.'),
 };

@@ -1,5 +1,6 @@
 /** What a new shop starts with. The basis of every figure is in `default-basis.ts`. */
 import type { BookingRules, FitRules, ShopRules } from '@/lib/contracts/shop-rules';
+import { usualOpeningWeights } from '@/lib/schedule/planning-rules';
 import { exactInches as inches } from './exact-inches';
 
 export type Region = FitRules['region'];
@@ -160,5 +161,9 @@ function bookingRules(): BookingRules {
     quietFrom: '21:00',
     quietUntil: '08:00',
     driveKmPerHour: 45,
+    weightDriveMinute: usualOpeningWeights.driveMinute,
+    weightDayWaited: usualOpeningWeights.dayWaited,
+    weightScrapMinute: usualOpeningWeights.scrapMinute,
+    weightMissedWish: usualOpeningWeights.missedWish,
   };
 }
