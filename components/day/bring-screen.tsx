@@ -42,9 +42,9 @@ function itemWords(item: BringItem, { words }: Crew, length: (mm: number) => str
     case 'legs':
       return bringItems.legs(item.count, length(item.leastMm), length(item.mostMm));
     case 'shims':
-      return bringItems.shims(item.runs.join(', '));
+      return bringItems.shims(item.runs.join('; '));
     case 'backing':
-      return bringItems.backing(item.units.join(', '));
+      return bringItems.backing(item.units.join('; '));
     default:
       return bringItems[item.what];
   }
