@@ -22,7 +22,6 @@ export { type Piece, type PiecesInput, splitIntoPieces, splitOverCalendar } from
 export {
   driveWhenUnknownMinutes,
   type OpeningWeights,
-  openingWeights,
   usualOpeningWeights,
 } from './planning-rules';
 export {

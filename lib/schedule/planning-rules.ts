@@ -1,18 +1,16 @@
 /** How times are ranked and found: what a new shop starts with. Common practice, no source. */
-import { z } from 'zod';
 
 /** What counts as how many minutes of trouble; the sum of all ranks an opening. */
-export const openingWeights = z.object({
+export type OpeningWeights = {
   /** Of each minute of driving that the visit adds. */
-  driveMinute: z.number().min(0).max(100),
+  driveMinute: number;
   /** Of each day that the customer waits after the first day on which it could be. */
-  dayWaited: z.number().min(0).max(1000),
+  dayWaited: number;
   /** Of each minute left over beside the visit that is too short for another one. */
-  scrapMinute: z.number().min(0).max(100),
+  scrapMinute: number;
   /** Of each wish that the time misses. */
-  missedWish: z.number().min(0).max(10_000),
-});
-export type OpeningWeights = z.infer<typeof openingWeights>;
+  missedWish: number;
+};
 
 export const usualOpeningWeights: OpeningWeights = {
   driveMinute: 1,
