@@ -11,6 +11,7 @@ const guardedOtherwise: Record<string, string> = {
   signedInResponse: 'asks for the password',
   listMyShops: 'one’s own shops only',
   switchShop: 'one’s own shops only',
+  bookingDays: 'reckons with what the context carries, and reads no row',
   readFeed: 'the address is the permission; guesses are counted',
   getCustomerVisit: 'the link is the permission',
   getCustomerCalendar: 'the link is the permission',
