@@ -1,4 +1,5 @@
 import type { CustomerVisitView } from '@/lib/contracts/visits';
+import { spanishTradeWord, tradeWord } from '@/lib/words/trade';
 import { wordsEn } from './words-en';
 import { wordsEs } from './words-es';
 
@@ -8,13 +9,12 @@ export type CustomerWords = typeof wordsEn;
 export const customerWords = (language: CustomerVisitView['language']): CustomerWords =>
   language === 'es' ? wordsEs : wordsEn;
 
-/** Things of the trade by the names of the shop's region. */
+/** Things of the trade, in braces, by the names of the shop's region. */
 export function regionalWords(
   text: string,
   { language, region }: Pick<CustomerVisitView, 'language' | 'region'>,
 ): string {
-  if (region === 'US') return text;
-  return language === 'es'
-    ? text.replaceAll('cubierta', 'encimera')
-    : text.replaceAll('countertop', 'worktop');
+  const counter =
+    language === 'es' ? spanishTradeWord('counter', region) : tradeWord('counter', region);
+  return text.replaceAll('{counter}', counter);
 }

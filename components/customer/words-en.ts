@@ -4,12 +4,12 @@ import type { VisitKind } from '@/lib/schedule/visit-kind';
 type Clear = Record<VisitKind, string[]>;
 
 const measure = [
-  'Clear the countertops and what stands along the walls',
+  'Clear the {counter}s and what stands along the walls',
   'Somebody at home who can open the door',
   'Have the sheets of your appliances and sink at hand, if they are chosen',
 ];
 const work = [
-  'Clear the countertops and the way in from the street',
+  'Clear the {counter}s and the way in from the street',
   'Water, gas and power to the kitchen off and disconnected by the licensed trade',
   'Children and pets out of the room: saws and lifting',
   'Room for the van near the door',
@@ -25,7 +25,7 @@ export const wordsEn = {
     'check-measure': 'will check a measurement',
     delivery: 'will deliver your cabinets',
     install: 'will set your cabinets',
-    'worktop-template': 'will take the template for your countertop',
+    'worktop-template': 'will take the template for your {counter}',
     return: 'will come back for the last pieces',
   } satisfies Record<VisitKind, string>,
   yes: 'Yes, that works',

@@ -1,12 +1,12 @@
 import type { CustomerWords } from './customer-words';
 
 const measure = [
-  'Despeje las cubiertas y lo que esté junto a las paredes',
+  'Despeje las {counter}s y lo que esté junto a las paredes',
   'Alguien en casa que pueda abrir la puerta',
   'Tenga a mano las hojas de sus electrodomésticos y del fregadero, si ya los eligió',
 ];
 const work = [
-  'Despeje las cubiertas y el paso desde la calle',
+  'Despeje las {counter}s y el paso desde la calle',
   'Agua, gas y electricidad de la cocina cortados y desconectados por un profesional con licencia',
   'Niños y mascotas fuera del cuarto: hay sierras y carga pesada',
   'Lugar para la camioneta cerca de la puerta',
@@ -22,7 +22,7 @@ export const wordsEs: CustomerWords = {
     'check-measure': 'revisará una medida',
     delivery: 'entregará sus gabinetes',
     install: 'instalará sus gabinetes',
-    'worktop-template': 'tomará la plantilla de su cubierta',
+    'worktop-template': 'tomará la plantilla de su {counter}',
     return: 'regresará para las últimas piezas',
   },
   yes: 'Sí, está bien',

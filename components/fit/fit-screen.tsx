@@ -33,7 +33,7 @@ export type FitScreenProps = {
 export function FitScreen({ view, choice, mayLayOut, mayRelease }: FitScreenProps) {
   const { wallBook, fit, rules, runs, missing, jobId, releases } = view;
   const { room } = wallBook;
-  const lines = readingLines(wallBook, view.takenBy, rules.unit);
+  const lines = readingLines(wallBook, view.takenBy, rules.unit, rules.region);
   const walls = wallsOf(room).map(({ wall }) => wall);
   const ofRun = runs.find(({ id }) => id === choice.lay)?.wallId;
   const chosen =
@@ -95,7 +95,7 @@ export function FitScreen({ view, choice, mayLayOut, mayRelease }: FitScreenProp
           </section>
           <section>
             <TitleBlock title="Cut list" meta={rules.unit === 'in' ? 'inches' : 'millimetres'} />
-            <CutList rows={cutList(fit, runs)} />
+            <CutList rows={cutList(fit, runs, rules.region)} />
           </section>
           <section>
             <TitleBlock title="Still to read" meta={missingWords(missing)} />

@@ -7,6 +7,7 @@ import type { Room, Run } from '@/lib/contracts/wall-book';
 import { newRun } from '@/lib/sheet/new-run';
 import { wallsOf } from '@/lib/sheet/room-names';
 import { unitWords } from '@/lib/sheet/unit-words';
+import { type Region, tradeName, tradeWord } from '@/lib/words/trade';
 import { LengthField } from './length-field';
 
 type RunFieldsProps = {
@@ -55,7 +56,7 @@ export function RunFields({ run, room, rules, onRun, errorOf }: RunFieldsProps) 
             const { z0Mm, z1Mm, carcassDepthMm } = newRun(rules, { ...run, level });
             onRun({ level, z0Mm, z1Mm, carcassDepthMm });
           }}
-          options={[...levels]}
+          options={levels.map(({ value, words }) => ({ value, label: words(rules.region) }))}
         />
         {length('Box depth', 'carcassDepthMm')}
         {length('Door', 'doorMm')}
@@ -64,8 +65,8 @@ export function RunFields({ run, room, rules, onRun, errorOf }: RunFieldsProps) 
       </div>
       <ShareFields run={run} rules={rules} onRun={onRun} error={errorOf('share.unitId')} />
       <TextField
-        label="Counter"
-        hint="Runs with the same word here stand under one counter and share its height."
+        label={tradeName('counter', rules.region)}
+        hint="Runs with the same word here stand under one top and share its height."
         value={run.counterGroup ?? ''}
         maxLength={20}
         isOptional
@@ -76,9 +77,9 @@ export function RunFields({ run, room, rules, onRun, errorOf }: RunFieldsProps) 
 }
 
 const levels = [
-  { value: 'base', label: 'base, on a kick' },
-  { value: 'wall', label: 'hung on the wall' },
-  { value: 'tall', label: 'tall, on a kick' },
+  { value: 'base', words: (region: Region) => `base, on a ${tradeWord('kick', region)}` },
+  { value: 'wall', words: () => 'hung on the wall' },
+  { value: 'tall', words: (region: Region) => `tall, on a ${tradeWord('kick', region)}` },
 ] as const;
 
 function ShareFields({
@@ -116,7 +117,7 @@ function ShareFields({
             onChange={(event) => onRun({ share: { ...share, unitId: event.target.value } })}
             options={run.units.map((unit, index) => ({
               value: unit.id,
-              label: `${index + 1}: ${unitWords(unit)}`,
+              label: `${index + 1}: ${unitWords(unit, rules.region)}`,
             }))}
             error={error}
           />

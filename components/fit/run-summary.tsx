@@ -2,6 +2,7 @@ import Link from 'next/link';
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { OpeningPlace, RunFit } from '@/lib/measure/run-fit';
 import { fillRuleBehind } from '@/lib/sheet/rule-behind';
+import { tradeWord } from '@/lib/words/trade';
 import { Figure } from './figure';
 import { InFractions } from './in-fractions';
 import { RuleLine } from './rule-line';
@@ -75,9 +76,17 @@ export function RunSummary({ runFit, rules, editHref }: RunSummaryProps) {
           </Fact>
         ) : null}
         {kicks ? (
-          <Fact name="kick">
-            <Figure figure={kicks.least} of={`Least kick, ${runFit.name}`} /> to{' '}
-            <Figure figure={kicks.greatest} of={`Greatest kick, ${runFit.name}`} showsSurely />
+          <Fact name={tradeWord('kick', rules.region)}>
+            <Figure
+              figure={kicks.least}
+              of={`Least ${tradeWord('kick', rules.region)}, ${runFit.name}`}
+            />{' '}
+            to{' '}
+            <Figure
+              figure={kicks.greatest}
+              of={`Greatest ${tradeWord('kick', rules.region)}, ${runFit.name}`}
+              showsSurely
+            />
           </Fact>
         ) : null}
       </dl>

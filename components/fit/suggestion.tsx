@@ -39,7 +39,11 @@ export function Suggestion({ run, suggestion, before, after, rules }: Suggestion
     ...suggestion.changes.map(({ unitId, fromMm, toMm }): [string, string, string] => {
       const place = run.units.findIndex(({ id }) => id === unitId);
       const unit = run.units[place];
-      return [`${place + 1}: ${unit ? unitWords(unit) : 'unit'}`, length(fromMm), length(toMm)];
+      return [
+        `${place + 1}: ${unit ? unitWords(unit, rules.region) : 'unit'}`,
+        length(fromMm),
+        length(toMm),
+      ];
     }),
     ['Left filler', face(before, 'left'), face(after, 'left')],
     ['Right filler', face(before, 'right'), face(after, 'right')],

@@ -5,7 +5,7 @@ import { controlLook } from '@/components/ui/field-frame';
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import { type Run, type Unit, unitKind } from '@/lib/contracts/wall-book';
 import { alterableAbout, newUnit } from '@/lib/sheet/new-run';
-import { unitKindWords, unitWords } from '@/lib/sheet/unit-words';
+import { unitKindName, unitWords } from '@/lib/sheet/unit-words';
 import { LengthField } from './length-field';
 
 type UnitRowsProps = {
@@ -68,7 +68,7 @@ export function UnitRows({ run, rules, onUnits }: UnitRowsProps) {
                 >
                   {unitKind.options.map((kind) => (
                     <option key={kind} value={kind}>
-                      {unitKindWords[kind]}
+                      {unitKindName(kind, rules.region)}
                     </option>
                   ))}
                 </select>
@@ -84,7 +84,7 @@ export function UnitRows({ run, rules, onUnits }: UnitRowsProps) {
               </td>
               <td className="px-2 py-1.5">
                 <LengthField
-                  label={`Width of ${unitWords(unit)}`}
+                  label={`Width of ${unitWords(unit, rules.region)}`}
                   mm={unit.widthMm}
                   unit={rules.unit}
                   kind="unit-width"
@@ -101,19 +101,19 @@ export function UnitRows({ run, rules, onUnits }: UnitRowsProps) {
               </td>
               <td className="py-1.5 pl-2 text-right whitespace-nowrap">
                 <PlaceButton
-                  label={`Move ${unitWords(unit)} left`}
+                  label={`Move ${unitWords(unit, rules.region)} left`}
                   sign="←"
                   isOff={index === 0}
                   onPress={() => move(index, index - 1)}
                 />
                 <PlaceButton
-                  label={`Move ${unitWords(unit)} right`}
+                  label={`Move ${unitWords(unit, rules.region)} right`}
                   sign="→"
                   isOff={index === units.length - 1}
                   onPress={() => move(index, index + 1)}
                 />
                 <PlaceButton
-                  label={`Take ${unitWords(unit)} out`}
+                  label={`Take ${unitWords(unit, rules.region)} out`}
                   sign="✕"
                   isOff={false}
                   onPress={() => onUnits(units.filter(({ id }) => id !== unit.id))}
@@ -143,7 +143,7 @@ function Alterable({
   return (
     <div className="flex items-start gap-2">
       <select
-        aria-label={`Whether ${unitWords(unit)} may be changed`}
+        aria-label={`Whether ${unitWords(unit, rules.region)} may be changed`}
         value={alterable ? 'alterable' : 'fixed'}
         className={`${controlLook} min-w-44`}
         onChange={(event) =>
@@ -157,7 +157,7 @@ function Alterable({
         ? (['minMm', 'maxMm', 'stepMm'] as const).map((field) => (
             <div key={field} className="w-22">
               <LengthField
-                label={`${fieldWords[field]} of ${unitWords(unit)}`}
+                label={`${fieldWords[field]} of ${unitWords(unit, rules.region)}`}
                 mm={alterable[field]}
                 unit={rules.unit}
                 isBare

@@ -14,6 +14,7 @@ import { cutList } from '@/lib/sheet/cut-list';
 import { proofRows } from '@/lib/sheet/proof-rows';
 import { readingLines } from '@/lib/sheet/reading-lines';
 import { wallsOf } from '@/lib/sheet/room-names';
+import { tradeWord } from '@/lib/words/trade';
 import { SheetBar } from './sheet-bar';
 import { SheetChanges } from './sheet-changes';
 import { SheetFiles } from './sheet-files';
@@ -28,10 +29,10 @@ export function ShopSheet({ sheet, mayTakeUp }: ShopSheetProps) {
     .map(({ wall }) => wall)
     .filter(({ id }) => runs.some(({ wallId }) => wallId === id));
   const count = walls.length + 1;
-  const cuts = cutList(fit, runs);
+  const cuts = cutList(fit, runs, rules.region);
   const plan = drawPlan({ wallBook, runs, fit, rules, revised });
   return (
-    <Figures readings={readingLines(wallBook, {}, rules.unit)} rules={rules}>
+    <Figures readings={readingLines(wallBook, {}, rules.unit, rules.region)} rules={rules}>
       <SheetBar
         release={sheet.release}
         newerRevision={sheet.newerRevision}
@@ -88,7 +89,7 @@ export function ShopSheet({ sheet, mayTakeUp }: ShopSheetProps) {
               <section>
                 <TitleBlock
                   level={3}
-                  title="Cut list: fillers, scribes, kicks"
+                  title={`Cut list: fillers, scribes, ${tradeWord('kick', rules.region)}`}
                   meta={rules.unit === 'in' ? 'inches' : 'millimetres'}
                 />
                 <CutList rows={cuts.filter(({ wallId }) => wallId === wall.id)} revised={revised} />

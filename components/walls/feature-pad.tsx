@@ -6,15 +6,15 @@ import { newId } from '@/components/phone/new-id';
 import { usePersonId } from '@/components/phone/phone-person';
 import { keepWork } from '@/components/phone/queue-store';
 import type { WallBookView } from '@/lib/contracts/rooms';
-import type { FeatureKind, ReadingOf } from '@/lib/contracts/wall-book';
+import { type FeatureKind, featureKind, type ReadingOf } from '@/lib/contracts/wall-book';
 import { entriesOfReading } from '@/lib/walls-pad/ask-of-reading';
 import { buildFeature, featureFields, opens } from '@/lib/walls-pad/feature-fields';
 import { draftInUnit, nextField, type PadDraft } from '@/lib/walls-pad/pad-draft';
 import { emptyEntry } from '@/lib/walls-pad/pad-entry';
 import { toolInHand } from '@/lib/walls-pad/pad-tools';
-import { featureWord } from '@/lib/walls-pad/reading-words';
 import { speechIn } from '@/lib/walls-pad/say-length';
 import { refusalOf } from '@/lib/walls-pad/verdict-of';
+import { featureName } from '@/lib/words/feature-words';
 import { ChoiceSheet } from './choice-sheet';
 import { draftKey } from './draft-keys';
 import { featureChoices, swingChoices } from './feature-words';
@@ -54,7 +54,7 @@ export function FeaturePad(props: FeaturePadProps) {
     return (
       <ChoiceSheet
         title={`What is on wall ${props.wallName}?`}
-        choices={featureChoices}
+        choices={featureChoices(view.rules.region)}
         onChoose={setKind}
         onBack={props.onBack}
       />
@@ -77,6 +77,7 @@ export function FeaturePad(props: FeaturePadProps) {
       <PadSheets
         {...{ sheet, habits }}
         tools={view.tools}
+        region={view.rules.region}
         toolId={tool?.id}
         use="feature"
         questionTitle=""
@@ -143,10 +144,11 @@ export function FeaturePad(props: FeaturePadProps) {
         <WallElevation
           book={view.wallBook}
           wallId={wallId}
+          region={view.rules.region}
           typed={typed?.kind === 'feature' ? typed : null}
         />
       }
-      title={`${featureWord(kind)} on wall ${props.wallName}`}
+      title={`${featureName(kind, view.rules.region)} on wall ${props.wallName}`}
       detail="from the left corner · up from the floor · out of the wall"
       toGo=""
       fields={featureFields}
@@ -181,7 +183,7 @@ export function FeaturePad(props: FeaturePadProps) {
 function keptOf(prefix: string, draft: PadDraft | null) {
   if (!draft?.question.startsWith(`${prefix}/`)) return null;
   const [kindName, swingName] = draft.question.slice(prefix.length + 1).split('/');
-  const kind = featureChoices.find(({ value }) => value === kindName)?.value;
+  const kind = featureKind.options.find((value) => value === kindName);
   const swing = swingChoices.find(({ value }) => value === swingName)?.value;
   return kind && swing ? { kind, swing, draft } : null;
 }

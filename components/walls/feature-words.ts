@@ -1,14 +1,21 @@
 import type { FeatureKind, ReadingOf } from '@/lib/contracts/wall-book';
+import { featureName } from '@/lib/words/feature-words';
+import { type Region, tradeWord } from '@/lib/words/trade';
 import type { Choice } from './choice-sheet';
 
-export const featureChoices: Choice<FeatureKind>[] = [
-  { value: 'window', words: 'Window', hint: 'to the outside of its casing' },
-  { value: 'door', words: 'Door', hint: 'to the outside of its casing' },
+/** What may be on a wall, as it is called where the shop is. */
+export const featureChoices = (region: Region): Choice<FeatureKind>[] => [
+  {
+    value: 'window',
+    words: 'Window',
+    hint: `to the outside of its ${tradeWord('casing', region)}`,
+  },
+  { value: 'door', words: 'Door', hint: `to the outside of its ${tradeWord('casing', region)}` },
   { value: 'opening', words: 'Opening without a door' },
-  { value: 'outlet', words: 'Outlet' },
+  { value: 'outlet', words: featureName('outlet', region) },
   { value: 'switch', words: 'Switch' },
   { value: 'water', words: 'Water' },
-  { value: 'waste', words: 'Waste' },
+  { value: 'waste', words: featureName('waste', region) },
   { value: 'gas', words: 'Gas', hint: 'only the licensed trade moves it' },
   { value: 'vent', words: 'Vent' },
   { value: 'radiator', words: 'Radiator' },

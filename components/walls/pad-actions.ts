@@ -1,4 +1,5 @@
 import type { PadAsk } from '@/lib/walls-pad/pad-fields';
+import type { Region } from '@/lib/words/trade';
 import type { PadAction } from './field-pad';
 import type { PadHabits, SetUp } from './pad-habits';
 import type { PadSheet } from './pad-sheets';
@@ -10,6 +11,7 @@ type PadActionsInput = {
   toolName: string;
   setUp: SetUp | null;
   canSkip: boolean;
+  region: Region;
   onBack: () => void;
   onSheet: (sheet: PadSheet) => void;
 };
@@ -28,7 +30,7 @@ export function padActions(input: PadActionsInput): PadAction[] {
   return actions;
 }
 
-function ownAction({ ask, habits, setUp, onSheet }: PadActionsInput): PadAction {
+function ownAction({ ask, habits, setUp, region, onSheet }: PadActionsInput): PadAction {
   switch (ask.kind) {
     case 'stud': {
       const value = studSides.find((side) => side.value === habits.studAt)?.words ?? '';
@@ -49,7 +51,7 @@ function ownAction({ ask, habits, setUp, onSheet }: PadActionsInput): PadAction 
     case 'ceiling':
       return { key: 'set-up', label: 'laser', value: 'moved?', onPress: () => onSheet('set-up') };
     default: {
-      const value = touchesWord(habits.touches);
+      const value = touchesWord(habits.touches, region);
       return { key: 'touches', label: 'against', value, onPress: () => onSheet('touches') };
     }
   }

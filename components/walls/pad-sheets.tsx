@@ -3,6 +3,7 @@
 import type { Tool } from '@/lib/contracts/wall-book';
 import type { ToolUse } from '@/lib/walls-pad/pad-tools';
 import { toolsFor } from '@/lib/walls-pad/pad-tools';
+import type { Region } from '@/lib/words/trade';
 import { ChoiceSheet } from './choice-sheet';
 import type { PadHabits } from './pad-habits';
 import { doorwayNames, skipReasons, studSides, touchesChoices } from './pad-words';
@@ -12,6 +13,7 @@ export type PadSheet = 'tool' | 'touches' | 'skip' | 'set-up' | 'stud' | 'doorwa
 type PadSheetsProps = {
   sheet: Exclude<PadSheet, 'set-up' | 'rule'>;
   tools: readonly Tool[];
+  region: Region;
   toolId: string | undefined;
   use: ToolUse;
   habits: PadHabits;
@@ -42,7 +44,7 @@ export function PadSheets({ sheet, tools, use, habits, onClose, ...props }: PadS
       return (
         <ChoiceSheet
           title="What does the tool touch?"
-          choices={touchesChoices}
+          choices={touchesChoices(props.region)}
           chosen={habits.touches}
           onChoose={(touches) => choose({ touches })}
           onBack={onClose}

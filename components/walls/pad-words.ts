@@ -1,18 +1,26 @@
 import type { ReadingOf, Touches } from '@/lib/contracts/wall-book';
+import { type Region, tradeName, tradeWord } from '@/lib/words/trade';
 import type { Choice } from './choice-sheet';
 
-export const touchesChoices: Choice<Touches>[] = [
-  { value: 'board', words: 'Board' },
+/** What the tool may touch, as it is called where the shop is. */
+export const touchesChoices = (region: Region): Choice<Touches>[] => [
+  { value: 'board', words: tradeName('board', region) },
   { value: 'plaster', words: 'Plaster' },
   { value: 'tile', words: 'Tile' },
-  { value: 'bare-stud', words: 'Bare stud', hint: 'the board to come is added' },
-  { value: 'skirting', words: 'Skirting' },
-  { value: 'casing', words: 'Casing' },
+  {
+    value: 'bare-stud',
+    words: 'Bare stud',
+    hint: `the ${tradeWord('board', region)} to come is added`,
+  },
+  { value: 'skirting', words: tradeName('skirting', region) },
+  { value: 'casing', words: tradeName('casing', region) },
   { value: 'existing-cabinet', words: 'A cabinet that stands already' },
 ];
 
-export const touchesWord = (touches: Touches): string =>
-  touchesChoices.find(({ value }) => value === touches)?.words.replace(/ that.*/, '') ?? touches;
+export const touchesWord = (touches: Touches, region: Region): string =>
+  touchesChoices(region)
+    .find(({ value }) => value === touches)
+    ?.words.replace(/ that.*/, '') ?? touches;
 
 export const skipReasons: Choice<string>[] = [
   'Something stands in the way',

@@ -77,7 +77,7 @@ export function ReadingDetail(props: ReadingDetailProps) {
         cells={[
           { label: 'typed', value: reading.typed || '–' },
           { label: 'tool', value: tool },
-          { label: 'against', value: touchesWord(reading.touches) },
+          { label: 'against', value: touchesWord(reading.touches, view.rules.region) },
           { label: 'taken', value: timeWords(reading.takenAt) },
           { label: 'by', value: by ?? 'you' },
           {

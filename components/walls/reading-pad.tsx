@@ -56,6 +56,7 @@ export function ReadingPad(props: ReadingPadProps) {
       <PadSheets
         {...{ sheet, habits, onHabits }}
         tools={view.tools}
+        region={view.rules.region}
         toolId={pad.tool?.id}
         use={pad.use}
         questionTitle={question.title}
@@ -112,6 +113,7 @@ export function ReadingPad(props: ReadingPadProps) {
         toolName: pad.tool?.name ?? 'none',
         setUp: pad.setUp,
         canSkip: slot !== null,
+        region: view.rules.region,
         onBack: props.onBack,
         onSheet: setSheet,
       })}

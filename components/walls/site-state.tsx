@@ -1,11 +1,13 @@
 import { Button } from '@/components/ui/button';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { LengthUnit } from '@/lib/units/brands';
+import { type Region, tradeName } from '@/lib/words/trade';
 import type { SketchDraft } from './sketch-draft';
 
 type SiteStateProps = {
   draft: SketchDraft;
   unit: LengthUnit;
+  region: Region;
   refusal: string | null;
   onDraft: (draft: SketchDraft) => void;
   onDone: () => void;
@@ -26,7 +28,15 @@ const inchWords: Record<string, string> = {
 };
 
 /** The last of the drawing: what the room is called, and what is still to come on its faces. */
-export function SiteState({ draft, unit, refusal, onDraft, onDone, onBack }: SiteStateProps) {
+export function SiteState({
+  draft,
+  unit,
+  region,
+  refusal,
+  onDraft,
+  onDone,
+  onBack,
+}: SiteStateProps) {
   const words = (mm: number) =>
     mm === 0 ? 'none' : unit === 'in' ? (inchWords[String(mm)] ?? `${mm} mm`) : `${mm} mm`;
   const offered = (list: number[], chosen: number) =>
@@ -41,7 +51,7 @@ export function SiteState({ draft, unit, refusal, onDraft, onDone, onBack }: Sit
         onPick={(name) => onDraft({ ...draft, name })}
       />
       <Pick
-        legend="Board or plaster still to come on the walls"
+        legend={`${tradeName('board', region)} or plaster still to come on the walls`}
         choices={offered(boardsMm[unit], draft.wallThicknessToComeMm)}
         chosen={draft.wallThicknessToComeMm}
         onPick={(wallThicknessToComeMm) => onDraft({ ...draft, wallThicknessToComeMm })}

@@ -79,6 +79,7 @@ export function SketchScreen({ view, keptSketch, wallId, habits, onHabits }: Ske
     <SiteState
       draft={draft}
       unit={habits.unit}
+      region={view.rules.region}
       refusal={refusal}
       onDraft={change}
       onDone={finish}

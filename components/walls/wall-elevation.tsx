@@ -1,11 +1,13 @@
 import type { Reading, ReadingOf, WallBook } from '@/lib/contracts/wall-book';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { asRead } from '@/lib/walls-pad/as-read';
-import { featureWord } from '@/lib/walls-pad/reading-words';
+import { featureName } from '@/lib/words/feature-words';
+import type { Region } from '@/lib/words/trade';
 
 type WallElevationProps = {
   book: WallBook;
   wallId: string;
+  region: Region;
   /** The feature being typed; drawn thick. */
   typed: ReadingOf<'feature'> | null;
 };
@@ -15,7 +17,7 @@ const FRAME = { width: 360, height: 150, margin: 16 };
 const WALL_HEIGHT_MM = 2_440;
 
 /** The wall from inside the room, with what is on it: openings, services, studs. */
-export function WallElevation({ book, wallId, typed }: WallElevationProps) {
+export function WallElevation({ book, wallId, region, typed }: WallElevationProps) {
   const wall = book.room.chains.flatMap(({ walls }) => walls).find(({ id }) => id === wallId);
   if (!wall) return null;
   const lengthMm = asRead(book).lengthMm.get(wallId)?.value ?? wall.nominalLengthMm;
@@ -66,7 +68,7 @@ export function WallElevation({ book, wallId, typed }: WallElevationProps) {
             y={box(feature).y + 11}
             className="fill-graphite text-[10px]"
           >
-            {featureWord(feature.feature)}
+            {featureName(feature.feature, region)}
           </text>
         </g>
       ))}

@@ -11,6 +11,7 @@ import { isOpen } from '@/lib/walls-pad/next-ask';
 import type { OtherReader } from '@/lib/walls-pad/other-readers';
 import { readingWords } from '@/lib/walls-pad/reading-words';
 import type { LengthSpeech } from '@/lib/walls-pad/say-length';
+import { type Region, tradeWord } from '@/lib/words/trade';
 import { type BookPlace, placeHref } from './book-place';
 import { FractionWords } from './fraction-words';
 import { LineLink } from './line-link';
@@ -76,7 +77,7 @@ export function WallList({ wallId, view, plan, hereIds, speech, picture }: WallL
       <section>
         <TitleBlock title="Add" />
         <ul className="divide-y divide-rule">
-          {addable(wallId, walked.before !== null).map(({ words, place }) => (
+          {addable(wallId, walked.before !== null, view.rules.region).map(({ words, place }) => (
             <li key={words}>
               <LineLink href={placeHref(place)} value="+">
                 {words}
@@ -117,10 +118,17 @@ function ReadLine({
   );
 }
 
-function addable(wallId: string, hasCorner: boolean): { words: string; place: BookPlace }[] {
+function addable(
+  wallId: string,
+  hasCorner: boolean,
+  region: Region,
+): { words: string; place: BookPlace }[] {
   const add = (kind: string): BookPlace => ({ at: 'add', kind, wallId });
   return [
-    { words: 'A window, door, outlet, pipe …', place: { at: 'feature', wallId } },
+    {
+      words: `A window, door, ${tradeWord('outlet', region)}, pipe …`,
+      place: { at: 'feature', wallId },
+    },
     { words: 'A stud', place: add('stud') },
     { words: 'Its length at another height', place: add('length') },
     ...(hasCorner ? [{ words: 'The corner at its left, once more', place: add('corner') }] : []),

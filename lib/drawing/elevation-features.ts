@@ -1,6 +1,6 @@
 import type { Reading } from '@/lib/contracts/wall-book';
 import { standingReadings } from '@/lib/measure/standing-readings';
-import { featureWords } from '@/lib/sheet/reading-words';
+import { featureWord } from '@/lib/words/feature-words';
 import type { ElevationSheet } from './elevation-frame';
 import {
   type DrawnText,
@@ -55,7 +55,7 @@ function nameOf(sheet: ElevationSheet, reading: Feature): DrawnText | null {
   if (feature === 'window') return null;
   const zMm = (z0Mm + z1Mm) / 2;
   const look = { tone: 'site', sizePx: smallTextSizePx } as const;
-  const words = featureWords[feature];
+  const words = featureWord(feature, sheet.rules.region);
   if (isHole(feature)) return text(sheet.at({ xMm: (x0Mm + x1Mm) / 2, zMm }), words, look);
   const [x, y] = sheet.at({ xMm: x1Mm, zMm });
   return text([x + 4, y + 4], words, { ...look, anchor: 'start' });

@@ -1,4 +1,5 @@
 import { formatLength } from '@/lib/units/format-length';
+import { tradeWord } from '@/lib/words/trade';
 import { type ElevationSheet, heightAt } from './elevation-frame';
 import { bare } from './figure-spans';
 import { type Shape, smallTextSizePx, text } from './shape';
@@ -34,7 +35,7 @@ export function elevationLevels(sheet: ElevationSheet): Shape[] {
       shapes.push(
         text(
           [x + (end.anchor === 'start' ? 24 : -6), y + 15],
-          `kick ${length(found.height.value)}`,
+          `${tradeWord('kick', sheet.rules.region)} ${length(found.height.value)}`,
           {
             anchor: end.anchor,
             sizePx: smallTextSizePx,

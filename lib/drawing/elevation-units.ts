@@ -1,6 +1,6 @@
 import type { Run } from '@/lib/contracts/wall-book';
 import type { PlacedUnit, RunFit } from '@/lib/measure/run-fit';
-import { unitKindWords } from '@/lib/sheet/unit-words';
+import { unitKindName } from '@/lib/sheet/unit-words';
 import { formatLength } from '@/lib/units/format-length';
 import { type ElevationSheet, heightAt, type WallPlace } from './elevation-frame';
 import { bare } from './figure-spans';
@@ -102,7 +102,7 @@ function label(sheet: ElevationSheet, run: Run, unit: PlacedUnit): Shape[] {
   const width = bare(formatLength(widthMm, { unit: lengthUnit, stepMm }));
   const placed = run.units.find(({ id }) => id === unit.unitId);
   const isPlain = !placed || placed.kind === 'base' || placed.kind === 'wall';
-  const kind = isPlain ? '' : unitKindWords[placed.kind].toLowerCase();
+  const kind = isPlain ? '' : unitKindName(placed.kind, sheet.rules.region).toLowerCase();
   const names = [[placed?.name, kind].filter(Boolean).join(' '), kind, placed?.name ?? ''];
   const roomPx = widthMm * sheet.pxPerMm - 4;
   const fits = (words: string, size: number) =>

@@ -36,7 +36,7 @@ export const cutListColumns = [
  * Example: a filler of 54 to 46 mm face is `Filler,Sink wall,left,blank,54 mm,46 mm,64 mm,…,63.5,…`.
  */
 export function cutListCsv(sheet: SheetView): string {
-  const rows = cutList(sheet.fit, sheet.runs).map((row) => rowOf(row, sheet));
+  const rows = cutList(sheet.fit, sheet.runs, sheet.rules.region).map((row) => rowOf(row, sheet));
   return csvText([cutListColumns, ...rows]);
 }
 

@@ -3,6 +3,7 @@ import type { FitFigure, Share } from '@/lib/measure/fit-figure';
 import type { OpeningPlace, RunFit, RunVerdict } from '@/lib/measure/run-fit';
 import { figureText } from '@/lib/sheet/figure-text';
 import { formatLength } from '@/lib/units/format-length';
+import { tradeName } from '@/lib/words/trade';
 
 /** How loud a run's verdict is beside those of the rules. */
 export const shareOfRun: Record<RunVerdict, Share> = {
@@ -31,7 +32,7 @@ export function runFacts(run: RunFit, rules: FitRules): string[] {
     fill?.suggestion ? `To make it fit: ${fill.suggestion.words}` : '',
     setLine ? behindWords(setLine, sure, rules) : '',
     kicks
-      ? `Kick ${figureText(kicks.least, rules).value} to ${sure(kicks.greatest)}. ${kicks.words}`
+      ? `${tradeName('kick', rules.region)} ${figureText(kicks.least, rules).value} to ${sure(kicks.greatest)}. ${kicks.words}`
       : '',
     upperGap ? `Counter to the boxes above: ${sure(upperGap)}.` : '',
     ceiling ? `To the ceiling: ${ceiling.words}.` : '',

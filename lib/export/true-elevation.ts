@@ -4,7 +4,7 @@ import { ceilingLine } from '@/lib/drawing/ceiling-line';
 import { floorLine } from '@/lib/drawing/floor-line';
 import type { RunFit } from '@/lib/measure/run-fit';
 import { standingReadings } from '@/lib/measure/standing-readings';
-import { featureWords } from '@/lib/sheet/reading-words';
+import { featureWord } from '@/lib/words/feature-words';
 import { wallRevisionsAtTrueSize } from './true-revisions';
 import { trueRun } from './true-run';
 import { type TrueShape, trueWords } from './true-shape';
@@ -102,7 +102,10 @@ function features(sheet: SheetView, wall: Wall): TrueShape[] {
     ] as const;
     return [
       { kind: 'outline', layer, points },
-      trueWords([x0Mm, z1Mm + 15], featureWords[feature], { layer, heightMm: 35 }),
+      trueWords([x0Mm, z1Mm + 15], featureWord(feature, sheet.rules.region), {
+        layer,
+        heightMm: 35,
+      }),
     ];
   });
 }

@@ -4,7 +4,7 @@ import { type PlanWall, roomPlan } from '@/lib/drawing/room-plan';
 import { faceProfile } from '@/lib/drawing/wall-faces';
 import type { RunFit } from '@/lib/measure/run-fit';
 import { standingReadings } from '@/lib/measure/standing-readings';
-import { featureWords } from '@/lib/sheet/reading-words';
+import { featureWord } from '@/lib/words/feature-words';
 import { onPlan, placeOnPlan } from './run-on-plan';
 import { planRevisionsAtTrueSize } from './true-revisions';
 import { type TrueShape, trueWords } from './true-shape';
@@ -66,7 +66,11 @@ function onWall(sheet: SheetView, wall: PlanWall): TrueShape[] {
     const layer = isOpening ? 'Windows and doors' : 'Services';
     const face = [onPlan(wall, x0Mm, 0), onPlan(wall, x1Mm, 0)];
     const at = onPlan(wall, (x0Mm + x1Mm) / 2, isOpening ? -150 : -90);
-    const words = trueWords(at, featureWords[feature], { layer, anchor: 'middle', heightMm: 35 });
+    const words = trueWords(at, featureWord(feature, sheet.rules.region), {
+      layer,
+      anchor: 'middle',
+      heightMm: 35,
+    });
     if (projectionMm <= 0) return [{ kind: 'line', layer, points: face }, words];
     const front = [onPlan(wall, x1Mm, projectionMm), onPlan(wall, x0Mm, projectionMm)];
     return [{ kind: 'outline', layer, points: [...face, ...front] }, words];

@@ -22,7 +22,7 @@ export function unitLabel(
   if (!unit || rightMm - leftMm < leastWidthMm) return [];
   const look = { layer, anchor: 'middle' } as const;
   return [
-    trueWords([at[0], at[1] + 15], unitWords(unit), look),
+    trueWords([at[0], at[1] + 15], unitWords(unit, rules.region), look),
     trueWords([at[0], at[1] - 55], formatLength(rightMm - leftMm, rules), look),
   ];
 }

@@ -2,6 +2,7 @@ import type { Run } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import type { FitFigure } from '@/lib/measure/fit-figure';
 import type { KickCorner, RunFit } from '@/lib/measure/run-fit';
+import { type Region, tradeName } from '@/lib/words/trade';
 import { unitWords } from './unit-words';
 
 /** One piece that the bench cuts or leaves long. */
@@ -34,15 +35,15 @@ export type CutRow = {
  * runs meet at them.
  * Example: a filler of 46 to 54 mm with an allowance of 17 mm is "Filler, left", 54, 46, blank 63.5 mm.
  */
-export function cutList(fit: Fit, runs: readonly Run[]): CutRow[] {
-  return [...fit.runs.flatMap((run) => rowsOf(run, runs)), ...mitres(fit, runs)];
+export function cutList(fit: Fit, runs: readonly Run[], region: Region): CutRow[] {
+  return [...fit.runs.flatMap((run) => rowsOf(run, runs, region)), ...mitres(fit, runs, region)];
 }
 
-function rowsOf(run: RunFit, runs: readonly Run[]): CutRow[] {
+function rowsOf(run: RunFit, runs: readonly Run[], region: Region): CutRow[] {
   const laidOut = runs.find(({ id }) => id === run.runId);
   const unitName = (unitId: string | null) => {
     const unit = laidOut?.units.find(({ id }) => id === unitId);
-    return unit ? unitWords(unit).toLowerCase() : run.name;
+    return unit ? unitWords(unit, region).toLowerCase() : run.name;
   };
   const common = { runId: run.runId, runName: run.name, wallId: run.wallId };
   const rows: CutRow[] = [];
@@ -76,12 +77,12 @@ function rowsOf(run: RunFit, runs: readonly Run[]): CutRow[] {
       isWrong: false,
     });
   }
-  return [...rows, ...kickRows(run, common), ...ceilingRows(run, laidOut, common)];
+  return [...rows, ...kickRows(run, common, region), ...ceilingRows(run, laidOut, common)];
 }
 
 type OfRun = Pick<CutRow, 'runId' | 'runName' | 'wallId'>;
 
-function kickRows(run: RunFit, common: OfRun): CutRow[] {
+function kickRows(run: RunFit, common: OfRun, region: Region): CutRow[] {
   const { kicks } = run;
   if (!kicks) return [];
   const [firstUnit, lastUnit] = [run.units[0]?.unitId, run.units.at(-1)?.unitId];
@@ -93,7 +94,7 @@ function kickRows(run: RunFit, common: OfRun): CutRow[] {
     rows.push({
       ...common,
       key: `${run.runId} kick`,
-      piece: 'Kick face',
+      piece: `${tradeName('kick', region)} face`,
       end: null,
       first: corner(firstUnit, 'front-left'),
       last: corner(lastUnit, 'front-right'),
@@ -113,7 +114,7 @@ function kickRows(run: RunFit, common: OfRun): CutRow[] {
     rows.push({
       ...common,
       key: `${run.runId} kick ${side}`,
-      piece: `Kick return, ${side}`,
+      piece: `${tradeName('kick', region)} return, ${side}`,
       end: side,
       first: seen[side][0],
       last: seen[side][1],
@@ -162,7 +163,7 @@ function ceilingRows(run: RunFit, laidOut: Run | undefined, common: OfRun): CutR
   return rows;
 }
 
-function mitres(fit: Fit, runs: readonly Run[]): CutRow[] {
+function mitres(fit: Fit, runs: readonly Run[], region: Region): CutRow[] {
   const meet = new Set(
     runs.flatMap((run) => [
       ...(run.left.kind === 'run' ? [`left ${run.wallId}`] : []),
@@ -178,7 +179,7 @@ function mitres(fit: Fit, runs: readonly Run[]): CutRow[] {
         runId: null,
         runName: `Corner ${corner.name}`,
         wallId: corner.cornerWallId,
-        piece: 'Kick mitre, each piece',
+        piece: `${tradeName('kick', region)} mitre, each piece`,
         end: null,
         first: null,
         last: null,

@@ -1,5 +1,6 @@
 import type { Reading, WallBook } from '@/lib/contracts/wall-book';
 import { standingReadings } from '@/lib/measure/standing-readings';
+import type { Region } from '@/lib/words/trade';
 import { readingWords } from './reading-words';
 
 /** Past this many of one sort they are counted, not told one by one. */
@@ -11,11 +12,16 @@ const MOST_TOLD = 6;
  * Edge: what does not stand in either state is not told; with more than six of a sort they are counted.
  * Example: a length on wall B corrected gives `Wall B, length at 36": 95 1/16" is now 95 1/4"`.
  */
-export function readingChanges(before: WallBook, after: WallBook, unit: 'in' | 'mm'): string[] {
+export function readingChanges(
+  before: WallBook,
+  after: WallBook,
+  unit: 'in' | 'mm',
+  region: Region = 'US',
+): string[] {
   const stoodBefore = new Map(standingReadings(before.readings).map((one) => [one.id, one]));
   const standsNow = new Map(standingReadings(after.readings).map((one) => [one.id, one]));
   const inBook = new Map(after.readings.map((one) => [one.id, one]));
-  const words = (reading: Reading) => readingWords(reading, after.room, unit);
+  const words = (reading: Reading) => readingWords(reading, after.room, unit, region);
   const corrected: string[] = [];
   const added: string[] = [];
   const told = new Set<string>();

@@ -1,5 +1,6 @@
 import type { WallBook } from '@/lib/contracts/wall-book';
 import { standingReadings } from '@/lib/measure/standing-readings';
+import type { Region } from '@/lib/words/trade';
 import { readingWords } from './reading-words';
 
 /** One reading as a list shows it. */
@@ -20,12 +21,13 @@ export function readingLines(
   wallBook: WallBook,
   takenBy: Record<string, string>,
   unit: 'in' | 'mm',
+  region: Region = 'US',
 ): ReadingLine[] {
   const standing = new Set(standingReadings(wallBook.readings).map(({ id }) => id));
   const tools = new Map(wallBook.tools.map((tool) => [tool.id, tool.name]));
   return wallBook.readings.map((reading) => ({
     id: reading.id,
-    ...readingWords(reading, wallBook.room, unit),
+    ...readingWords(reading, wallBook.room, unit, region),
     typed: reading.typed,
     taken: takenBy[reading.id] ?? '',
     tool: tools.get(reading.toolId) ?? 'unknown tool',

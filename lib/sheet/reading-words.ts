@@ -1,5 +1,7 @@
-import type { FeatureKind, Reading, Room } from '@/lib/contracts/wall-book';
+import type { Reading, Room } from '@/lib/contracts/wall-book';
 import { formatLength } from '@/lib/units/format-length';
+import { featureWord } from '@/lib/words/feature-words';
+import type { Region } from '@/lib/words/trade';
 import { cornerName, wallName } from './room-names';
 
 export type ReadingWords = {
@@ -9,30 +11,18 @@ export type ReadingWords = {
   came: string;
 };
 
-export const featureWords: Record<FeatureKind, string> = {
-  window: 'window',
-  door: 'door',
-  opening: 'opening',
-  outlet: 'outlet',
-  switch: 'switch',
-  water: 'water',
-  waste: 'waste',
-  gas: 'gas',
-  vent: 'vent',
-  radiator: 'radiator',
-  panel: 'service panel',
-  beam: 'beam',
-  pipe: 'pipe',
-  other: 'other',
-};
-
 /**
  * A reading in words, in the unit in which the shop works, to 1/64 in or 0.1 mm.
  *
  * Edge: a wall that is no longer drawn is called so.
  * Example: a length of 2414.6 mm on wall B at 914.4 mm is "Wall B, length at 36\"" and "95 1/16\"".
  */
-export function readingWords(reading: Reading, room: Room, unit: 'in' | 'mm'): ReadingWords {
+export function readingWords(
+  reading: Reading,
+  room: Room,
+  unit: 'in' | 'mm',
+  region: Region = 'US',
+): ReadingWords {
   const length = (mm: number) => fineLength(mm, unit);
   const wall = (id: string) => wallName(room, id);
   const corner = (id: string) => cornerName(room, id);
@@ -79,7 +69,7 @@ export function readingWords(reading: Reading, room: Room, unit: 'in' | 'mm'): R
       };
     case 'feature':
       return {
-        what: `${wall(reading.wallId)}, ${featureWords[reading.feature]}${reading.note ? ` (${reading.note})` : ''}`,
+        what: `${wall(reading.wallId)}, ${featureWord(reading.feature, region)}${reading.note ? ` (${reading.note})` : ''}`,
         came: `${length(reading.x0Mm)} to ${length(reading.x1Mm)} along, ${length(reading.z0Mm)} to ${length(reading.z1Mm)} up`,
       };
     case 'stud':

@@ -96,11 +96,15 @@ function isFeature(reading: Reading | undefined): reading is Extract<Reading, { 
 }
 
 function cutMarks(before: Sheet, after: Sheet): RevisionMark[] {
-  const old = new Map(cutList(before.fit, before.runs).map((row) => [row.key, row.cut]));
-  return cutList(after.fit, after.runs).flatMap(({ key, runId, wallId, cut }): RevisionMark[] => {
-    const was = changed(old.get(key) ?? null, cut, after.rules);
-    return was === undefined ? [] : [{ on: 'cut', runId, wallId, key, was }];
-  });
+  const old = new Map(
+    cutList(before.fit, before.runs, after.rules.region).map((row) => [row.key, row.cut]),
+  );
+  return cutList(after.fit, after.runs, after.rules.region).flatMap(
+    ({ key, runId, wallId, cut }): RevisionMark[] => {
+      const was = changed(old.get(key) ?? null, cut, after.rules);
+      return was === undefined ? [] : [{ on: 'cut', runId, wallId, key, was }];
+    },
+  );
 }
 
 /** What stood there; null where nothing did; undefined where it is shown the same. */

@@ -1,5 +1,6 @@
 import type { Reading, Room } from '@/lib/contracts/wall-book';
 import { cornerName, walkRoom } from '@/lib/measure/room-walk';
+import { featureName } from '@/lib/words/feature-words';
 import { type LengthSpeech, sayLength } from './say-length';
 
 export type ReadingLine = { what: string; value: string };
@@ -44,7 +45,7 @@ export function readingWords(reading: Reading, room: Room, speech: LengthSpeech)
     case 'feature': {
       const size = `${say(reading.x1Mm - reading.x0Mm)} × ${say(reading.z1Mm - reading.z0Mm)}`;
       const place = `${say(reading.x0Mm)} along, ${say(reading.z0Mm)} up`;
-      return { what: `${featureWord(reading.feature)}, ${place}`, value: size };
+      return { what: `${featureName(reading.feature, speech.region)}, ${place}`, value: size };
     }
     case 'stud':
       return { what: `Stud, ${reading.at.replace('-', ' ')}`, value: say(reading.xMm) };
@@ -58,10 +59,6 @@ export function readingWords(reading: Reading, room: Room, speech: LengthSpeech)
     case 'skip':
       return { what: 'Not taken', value: reading.reason };
   }
-}
-
-export function featureWord(feature: string): string {
-  return feature.charAt(0).toUpperCase() + feature.slice(1);
 }
 
 function placeWords(

@@ -5,15 +5,19 @@ import { MM_PER_INCH } from '@/lib/units/fraction-parts';
 import { roundBlankUp, roundNearest } from '@/lib/units/round';
 
 /** How the shop reads and writes lengths. */
-export type LengthSpeech = Pick<FitRules, 'unit' | 'stepMm'>;
+export type LengthSpeech = Pick<FitRules, 'unit' | 'stepMm'> & {
+  /** How things of the trade are called; left out: as in the US. */
+  region?: FitRules['region'];
+};
 
 /**
  * Speech in the unit that the measurer reads in: the shop's step in the shop's own unit, else the plain one.
  * Example: an inch shop read in millimetres: to 1 mm.
  */
 export function speechIn(rules: LengthSpeech, unit: LengthUnit): LengthSpeech {
-  if (unit === rules.unit) return { unit, stepMm: rules.stepMm };
-  return { unit, stepMm: unit === 'in' ? MM_PER_INCH / 16 : 1 };
+  const region = rules.region ? { region: rules.region } : {};
+  if (unit === rules.unit) return { unit, stepMm: rules.stepMm, ...region };
+  return { unit, stepMm: unit === 'in' ? MM_PER_INCH / 16 : 1, ...region };
 }
 
 /** A place or a whole reading: `36"`, `914 mm`. */

@@ -9,6 +9,7 @@ import type { BringItem } from '@/lib/days/what-to-bring';
 import type { VisitKind } from '@/lib/schedule/visit-kind';
 import { crewEn } from './crew-en';
 import { crewEs } from './crew-es';
+import { tradeName, tradeWord } from './trade';
 
 export type CrewLanguage = 'en' | 'es';
 type Region = 'US' | 'UK' | 'AU' | 'EU';
@@ -132,6 +133,11 @@ export type CrewWords = {
   due: string;
   photos: string;
   photosOf: Count;
+  takePhoto: Record<'take' | 'choose' | 'keeping' | 'cannotOpen' | 'cannotKeep', string>;
+  rooms: string;
+  measureRoom: One;
+  firstRoom: string;
+  addRoom: string;
   closeIt: string;
   closeHow: string;
   closeNeeds: string;
@@ -156,22 +162,13 @@ export type CrewWords = {
 
 export const crewWords: Record<CrewLanguage, CrewWords> = { en: crewEn, es: crewEs };
 
-/** Glossary V35 and the makers' usage: the same thing under its name in each region. */
-const tradeWords: Record<Region, { kick: string; drywall: string }> = {
-  US: { kick: 'toe kick', drywall: 'drywall' },
-  UK: { kick: 'plinth', drywall: 'plasterboard' },
-  AU: { kick: 'kickboard', drywall: 'plasterboard' },
-  EU: { kick: 'plinth', drywall: 'plasterboard' },
-};
-
 /**
  * Fills the names of things as the shop's region calls them; a capital in the braces keeps a capital.
  * Edge: words without braces come back as they are. Example: "{Kick} face" in the UK is "Plinth face".
  */
 export function inRegion(words: string, region: Region): string {
-  const { kick, drywall } = tradeWords[region];
   return words
-    .replaceAll('{kick}', kick)
-    .replaceAll('{Kick}', kick.charAt(0).toUpperCase() + kick.slice(1))
-    .replaceAll('{drywall}', drywall);
+    .replaceAll('{kick}', tradeWord('kick', region))
+    .replaceAll('{Kick}', tradeName('kick', region))
+    .replaceAll('{drywall}', tradeWord('board', region));
 }

@@ -37,6 +37,6 @@ export async function getSheet(
     isOldHouse: isOldHouse(yearBuilt, ctx.shop.region),
     revised: older ? { revision, marks: revisionMarks(older, frozen) } : null,
     newerRevision: newest === revision ? null : newest,
-    supersededBy: supersededBy(frozen, now, frozen.rules.unit),
+    supersededBy: supersededBy(frozen, now, frozen.rules.unit, frozen.rules.region),
   };
 }

@@ -42,7 +42,7 @@ describe('sheetPdf', () => {
   });
 
   it('strikes in the cut list what stood there on the revision before', async () => {
-    const [row] = cutList(sheet.fit, sheet.runs);
+    const [row] = cutList(sheet.fit, sheet.runs, 'US');
     if (!row) throw new Error('nothing is cut');
     const { key, runId, wallId } = row;
     const marks = [{ on: 'cut', key, runId, wallId, was: '9 7/8"' } as const];
@@ -79,7 +79,7 @@ describe('sheetPdf', () => {
 
   it('lists every piece with its cut as the shop writes it', async () => {
     const list = pages.find((page) => page.includes('cut list and kick heights')) ?? '';
-    for (const row of cutList(sheet.fit, sheet.runs)) {
+    for (const row of cutList(sheet.fit, sheet.runs, 'US')) {
       expect(list).toContain(row.piece);
       expect(list).toContain(figureText(row.cut, sheet.rules).value);
     }
@@ -90,7 +90,7 @@ describe('sheetPdf', () => {
     const all = pages.join(' ');
     for (const run of sheet.fit.runs) {
       if (!run.kicks) continue;
-      expect(all).toContain(`Kick heights, ${run.name}`);
+      expect(all).toContain(`Toe kick heights, ${run.name}`);
       for (const { height } of run.kicks.corners) {
         expect(all).toContain(figureText(height, sheet.rules).value);
       }

@@ -6,6 +6,7 @@ import { type CutRow, cutList } from '@/lib/sheet/cut-list';
 import { figureText } from '@/lib/sheet/figure-text';
 import { unitWords } from '@/lib/sheet/unit-words';
 import { formatLength } from '@/lib/units/format-length';
+import { tradeName, tradeWord } from '@/lib/words/trade';
 import { newLeaf, type Paper } from './leaf';
 import { below, type Cell, type Column, cell, putTable, type TableRow, tableHeight } from './table';
 import { putWords } from './words';
@@ -34,7 +35,7 @@ const kickColumns: Column[] = [
 /** Everything to be cut, on one page where it goes, for whoever stands at the saw; then the kick heights. */
 export function putCutListLeaf(paper: Paper): void {
   const { doc, sheet } = paper;
-  const title = `${sheet.roomName}: cut list and kick heights`;
+  const title = `${sheet.roomName}: cut list and ${tradeWord('kick', sheet.rules.region)} heights`;
   const unit = sheet.rules.unit === 'in' ? 'inches' : 'millimetres';
   const meta = `${unit}; blanks and allowances rounded up once`;
   const next = () => newLeaf(paper, { title: `${title}, continued`, meta });
@@ -54,7 +55,7 @@ export function putCutListLeaf(paper: Paper): void {
 }
 
 function cutRows({ sheet }: Paper): TableRow[] {
-  const rows = cutList(sheet.fit, sheet.runs);
+  const rows = cutList(sheet.fit, sheet.runs, sheet.rules.region);
   const runNames = [...new Set(rows.map(({ runName }) => runName))];
   return runNames.flatMap((runName): TableRow[] => [
     { kind: 'group', words: runName },
@@ -117,9 +118,12 @@ function kickRows({ sheet }: Paper, run: RunFit): TableRow[] {
       {
         kind: 'row',
         cells: [
-          cell(`${index + 1}. ${unitWords(unit)} ${formatLength(unit.widthMm, rules)}`, {
-            weight: 500,
-          }),
+          cell(
+            `${index + 1}. ${unitWords(unit, rules.region)} ${formatLength(unit.widthMm, rules)}`,
+            {
+              weight: 500,
+            },
+          ),
           at('front-left'),
           at('front-right'),
           at('back-left'),
@@ -132,7 +136,13 @@ function kickRows({ sheet }: Paper, run: RunFit): TableRow[] {
   });
   return rows.length === 0
     ? []
-    : [{ kind: 'group', words: `Kick heights, ${run.name}: ${lower(kicks.words)}` }, ...rows];
+    : [
+        {
+          kind: 'group',
+          words: `${tradeName('kick', rules.region)} heights, ${run.name}: ${lower(kicks.words)}`,
+        },
+        ...rows,
+      ];
 }
 
 function legsCell(corners: readonly KickCorner[]): Cell {

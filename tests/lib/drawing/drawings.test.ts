@@ -139,7 +139,7 @@ describe('drawElevation', () => {
     expect(onLayer(elevation, 'kick')).toHaveLength(1);
     expect(onLayer(elevation, 'stud').length).toBeGreaterThanOrEqual(6);
     expect(words(elevation)).toEqual(
-      expect.arrayContaining(['outlet', 'water', 'waste', 'high point', 'datum', '21', 'drawers']),
+      expect.arrayContaining(['outlet', 'water', 'drain', 'high point', 'datum', '21', 'drawers']),
     );
   });
 

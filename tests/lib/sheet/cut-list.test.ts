@@ -7,14 +7,21 @@ import { crookedKitchen } from '../../help/crooked-kitchen';
 const rules = defaultShopRules('US').fit;
 const { wallBook, runs } = crookedKitchen();
 const fit = fitRoom(wallBook, runs, rules);
-const rows = cutList(fit, runs);
+const rows = cutList(fit, runs, 'US');
 
 describe('cutList', () => {
+  it('calls a kick as the shop’s region does', () => {
+    const pieces = (region: 'UK' | 'AU') => cutList(fit, runs, region).map(({ piece }) => piece);
+    expect(pieces('UK')).toContain('Plinth face');
+    expect(pieces('AU')).toContain('Kickboard face');
+    expect(pieces('UK').join()).not.toContain('kick');
+  });
+
   it('lists fillers, kick faces and finished ends run by run, each once', () => {
     expect(rows.map(({ runName, piece }) => `${runName}: ${piece}`)).toEqual([
       'Sink wall: Filler, left',
       'Sink wall: Filler, right',
-      'Sink wall: Kick face',
+      'Sink wall: Toe kick face',
       'Uppers left: Filler, left',
       'Uppers left: Filler, right',
       'Uppers left: Filler to the ceiling',
@@ -23,8 +30,8 @@ describe('cutList', () => {
       'Uppers right: Filler to the ceiling',
       'Tall wall: Filler, right',
       'Tall wall: Finished end, end panel',
-      'Tall wall: Kick face',
-      'Tall wall: Kick return, left',
+      'Tall wall: Toe kick face',
+      'Tall wall: Toe kick return, left',
       'Tall wall: Filler to the ceiling',
     ]);
     expect(new Set(rows.map(({ key }) => key)).size).toBe(rows.length);
@@ -51,7 +58,7 @@ describe('cutList', () => {
       { ...sink, right: { kind: 'run', runId: side.id, through: 'this' } as const },
       side,
     ];
-    const saws = cutList(fitRoom(wallBook, meeting, rules), meeting).filter(
+    const saws = cutList(fitRoom(wallBook, meeting, rules), meeting, 'US').filter(
       ({ how }) => how === 'saw',
     );
     expect(saws.map(({ runName }) => runName)).toEqual(['Corner A–B']);
@@ -62,15 +69,15 @@ describe('cutList', () => {
     const ends = rows.filter(({ end }) => end !== null).map(({ piece, end }) => [piece, end]);
     expect(ends).toContainEqual(['Filler, left', 'left']);
     expect(ends).toContainEqual(['Finished end, end panel', 'left']);
-    expect(ends).toContainEqual(['Kick return, left', 'left']);
-    expect(ends).not.toContainEqual(['Kick face', 'left']);
+    expect(ends).toContainEqual(['Toe kick return, left', 'left']);
+    expect(ends).not.toContainEqual(['Toe kick face', 'left']);
   });
 
   it('turns the crown of a run round its finished end, and closes nothing where the run is left open', () => {
     const over = (overBoxes: 'crown' | 'open') => {
       const crowned = runs.map((run) => (run.level === 'tall' ? { ...run, overBoxes } : run));
       const ofTall = (row: (typeof rows)[number]) => row.runName === 'Tall wall';
-      return cutList(fitRoom(wallBook, crowned, rules), crowned).filter(ofTall);
+      return cutList(fitRoom(wallBook, crowned, rules), crowned, 'US').filter(ofTall);
     };
     const crown = over('crown').find(({ piece }) => piece === 'Crown, left');
     expect(crown).toMatchObject({ how: 'saw', end: 'left' });
@@ -91,7 +98,9 @@ describe('cutList', () => {
       ...run,
       units: run.units.map((unit) => ({ ...unit, widthMm: unit.widthMm + 20 })),
     }));
-    const wrong = cutList(fitRoom(wallBook, wide, rules), wide).filter(({ isWrong }) => isWrong);
+    const wrong = cutList(fitRoom(wallBook, wide, rules), wide, 'US').filter(
+      ({ isWrong }) => isWrong,
+    );
     expect(wrong.map(({ runName }) => runName)).toContain('Sink wall');
   });
 });

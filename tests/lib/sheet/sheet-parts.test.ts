@@ -29,7 +29,7 @@ describe('readingWords', () => {
       'Wall D, face at 114 11/64" along, 84" up',
       'Floor by wall D, 98 27/64" along, 22 3/64" out',
       'Ceiling by wall D, 98 27/64" along, 63/64" out',
-      'Wall A, waste',
+      'Wall A, drain',
       'Wall A, stud',
       'Way in: back door',
     ]);
