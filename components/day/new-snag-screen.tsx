@@ -120,6 +120,7 @@ export function NewSnagScreen({ visit, stop, kind: asked }: NewSnagScreenProps) 
           roomId={draft.roomId || null}
           jobId={visit.jobId}
           wallId={null}
+          words={words.takePhoto}
           place={draft.words.trim().slice(0, 80) || words.snagKinds[draft.kind]}
           onKept={(photoId) => {
             change({ photoIds: [...draft.photoIds, photoId] });

@@ -9,14 +9,16 @@ import type { TodayVisit } from '@/lib/contracts/visits';
 import { isPaused, onSiteMinutes } from '@/lib/days/on-site-minutes';
 import { useCrew } from './crew-language';
 
-/** How long they have worked here, without the pauses; new each minute. */
+/** How long they have worked here today, without the pauses; new each minute. */
 export function SiteTime({ visit, stop }: { visit: TodayVisit; stop: StopView }) {
   const { words } = useCrew();
   const live = useLive('queue', readQueue);
   const minuteNow = useSyncExternalStore(eachMinute, thisMinute, () => 0);
   const times = arrivalOnPhone(visit, live.state === 'here' ? live.value : []);
   if (times.arrivedAt === null || minuteNow === 0) return null;
-  const minutes = onSiteMinutes({ ...times, pauses: stop.pauses }, minuteNow * 60_000);
+  const nowMs = minuteNow * 60_000;
+  const arrivedAt = laterOf(times.arrivedAt, dayBegan(visit, nowMs));
+  const minutes = onSiteMinutes({ ...times, arrivedAt, pauses: stop.pauses }, nowMs);
   return (
     <p>
       {words.onSite(Math.floor(minutes / 60), minutes % 60)}
@@ -24,6 +26,14 @@ export function SiteTime({ visit, stop }: { visit: TodayVisit; stop: StopView })
     </p>
   );
 }
+
+/** Where work goes over days, each begins anew: a night without a pause is no work. */
+function dayBegan({ pieces }: TodayVisit, nowMs: number): string | null {
+  return pieces.findLast(({ startsAt }) => Date.parse(startsAt) <= nowMs)?.startsAt ?? null;
+}
+
+const laterOf = (one: string, other: string | null) =>
+  other !== null && other > one ? other : one;
 
 const thisMinute = () => Math.floor(Date.now() / 60_000);
 

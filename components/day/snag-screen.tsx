@@ -95,6 +95,7 @@ function Closing({ visit, snagId, roomId }: ClosingProps) {
         roomId={roomId}
         jobId={visit.jobId}
         wallId={null}
+        words={words.takePhoto}
         place={words.closed}
         onKept={(photoId) => {
           change({ photoIds: [...draft.photoIds, photoId] });

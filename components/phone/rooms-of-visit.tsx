@@ -1,5 +1,6 @@
 'use client';
 
+import { useCrew } from '@/components/day/crew-language';
 import { LinkButton } from '@/components/ui/link-button';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { TodayVisit } from '@/lib/contracts/visits';
@@ -12,21 +13,22 @@ import { useLive } from './use-live';
 /** The rooms of the job: those that the office knows, and those that this phone has drawn since. */
 export function RoomsOfVisit({ visit }: { visit: TodayVisit }) {
   const personId = usePersonId();
+  const { words } = useCrew();
   const { jobId, jobTitle } = visit;
   const live = useLive(`rooms:${jobId}`, () => readRoomsOfJob(jobId, personId));
   const known = new Set(visit.rooms.map(({ id }) => id));
   const here = live.state === 'here' ? live.value.filter(({ id }) => !known.has(id)) : [];
   return (
     <section className="flex flex-col gap-2">
-      <TitleBlock title="Rooms" meta={jobTitle} />
+      <TitleBlock title={words.rooms} meta={jobTitle} />
       {visit.rooms.map(({ id, name }) => (
         <LinkButton key={id} size="thumb" look="line" href={paths.walls(id)}>
-          Measure {name}
+          {words.measureRoom(name)}
         </LinkButton>
       ))}
       {here.map(({ id, name }) => (
         <LinkButton key={id} size="thumb" look="line" href={paths.newWalls(id, jobId)}>
-          Measure {name}
+          {words.measureRoom(name)}
         </LinkButton>
       ))}
       <AddRoom jobId={jobId} isFirst={visit.rooms.length + here.length === 0} />

@@ -14,12 +14,34 @@ type TakePhotoProps = {
   wallId: string | null;
   /** Where it is taken: "Wall B". */
   place: string;
+  /** In the reader's language; English unless said. */
+  words?: TakePhotoWords;
   /** It is on the phone's disk, without marks yet. */
   onKept: (photoId: string) => void;
 };
 
+export type TakePhotoWords = Record<
+  'take' | 'choose' | 'keeping' | 'cannotOpen' | 'cannotKeep',
+  string
+>;
+
+const english: TakePhotoWords = {
+  take: 'Take a photo',
+  choose: 'Choose a photo',
+  keeping: 'Keeping it…',
+  cannotOpen: 'This phone cannot open that picture. Take a photo instead.',
+  cannotKeep: 'This phone could not keep the photo. Free some space and try again.',
+};
+
 /** Takes a photo with the phone's own camera, or one that was taken before, and keeps it at once. */
-export function TakePhoto({ roomId, jobId, wallId, place, onKept }: TakePhotoProps) {
+export function TakePhoto({
+  roomId,
+  jobId,
+  wallId,
+  place,
+  words = english,
+  onKept,
+}: TakePhotoProps) {
   const personId = usePersonId();
   const [isBusy, setIsBusy] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
@@ -32,7 +54,7 @@ export function TakePhoto({ roomId, jobId, wallId, place, onKept }: TakePhotoPro
     setProblem(null);
     try {
       const scaled = await scaledPhoto(file);
-      if (!scaled) return setProblem('This phone cannot open that picture. Take a photo instead.');
+      if (!scaled) return setProblem(words.cannotOpen);
       const id = newId();
       await keepPhoto({
         ...scaled,
@@ -51,7 +73,7 @@ export function TakePhoto({ roomId, jobId, wallId, place, onKept }: TakePhotoPro
       });
       onKept(id);
     } catch {
-      setProblem('This phone could not keep the photo. Free some space and try again.');
+      setProblem(words.cannotKeep);
     } finally {
       setIsBusy(false);
     }
@@ -60,8 +82,8 @@ export function TakePhoto({ roomId, jobId, wallId, place, onKept }: TakePhotoPro
   return (
     <div className="flex flex-col gap-2 py-2">
       <div className="grid grid-cols-2 gap-2">
-        <PhotoInput words={isBusy ? 'Keeping it…' : 'Take a photo'} onTake={take} isCamera />
-        <PhotoInput words="Choose a photo" onTake={take} />
+        <PhotoInput words={isBusy ? words.keeping : words.take} onTake={take} isCamera />
+        <PhotoInput words={words.choose} onTake={take} />
       </div>
       {problem ? (
         <p role="alert" className="border-l-4 border-chalk bg-tint px-3 py-2">

@@ -48,7 +48,7 @@ export function settingLines(
         ]
       : []),
     ...fit.runs.flatMap(({ kicks, name }) =>
-      kicks ? [line('levels', '', words.datum(name, length(kicks.datumMm)))] : [],
+      kicks ? [line('levels', '', words.datum(name, length(kicks.datumMm + kicks.nominalMm)))] : [],
     ),
     ...fit.runs.flatMap((run) =>
       (['left', 'right'] as const).flatMap((side) => {
