@@ -144,6 +144,7 @@ export function DiaryScreen(props: DiaryScreenProps) {
             }}
             onBooked={(date) => {
               setSubject(null);
+              waiting.setTyped('');
               range.goTo(date);
             }}
             onClose={() => setSubject(null)}
