@@ -111,6 +111,7 @@ async function seedCrews(tx: Transaction, shop: SeedShop): Promise<SeedShop['cre
       name,
       does,
       colour,
+      baseAddress: 'Juniper Bend, at the shop',
       baseLatitude: base.latitude,
       baseLongitude: base.longitude,
     });

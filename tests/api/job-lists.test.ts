@@ -53,6 +53,7 @@ describe('a list of customers and jobs', () => {
     await startTestJob(shop, {
       customer: { name: 'Ada Known', phone: '(212) 555-0101', email: 'ada@known.example' },
     });
+    await startTestJob(shop, { site: { street: 'Große Straße 3', town: 'Ñandú' } });
     const before = await kept();
     const list = [
       'Client;Phone;E-mail;Address;City;Colour',
@@ -61,6 +62,7 @@ describe('a list of customers and jobs', () => {
       'Cy Wrong;12;nobody;;;',
       'Di First;(212) 555-0102;;1 Elm;Gannet;',
       'Di Again;+1 212 555 0102;;2 Elm;Gannet;',
+      'Ed Accent;;;GROßE straße, 3;ñandú;',
     ].join('\r\n');
     const seen = await preview(list);
     expect(seen).toMatchObject({
@@ -68,7 +70,7 @@ describe('a list of customers and jobs', () => {
       separator: ';',
       columns: ['customer', 'phone', 'email', 'street', 'town', null],
       samples: ['Ada K.', '212-555-0101', 'bo@next.example', '9 New Street', 'Gannet', 'red'],
-      counts: { ready: 1, problems: 1, doubles: 3 },
+      counts: { ready: 1, problems: 1, doubles: 4 },
     });
     expect(seen.rows.map(({ row, double }) => [row, double])).toEqual([
       [2, 'the phone of Ada Known, job 1'],
@@ -76,6 +78,7 @@ describe('a list of customers and jobs', () => {
       [4, ''],
       [5, ''],
       [6, 'the phone of row 5'],
+      [7, 'the address of Robin Testwood, job 2'],
     ]);
     expect(seen.rows[2]).toMatchObject({
       words: 'Cy Wrong',
