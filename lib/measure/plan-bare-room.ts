@@ -23,7 +23,9 @@ export function planBareFaces(context: PlanContext, { wall }: WalkedWall, length
   if (!isBare(context) || lengthMm < TOO_SHORT_TO_PLUMB_MM) return [];
   const { rules } = context;
   const last = context.byKind('face').findLast(({ wallId }) => wallId === wall.id);
-  const xMm = Math.round(lengthMm / 2);
+  // A round figure that a tape shows, near enough to the middle.
+  const roundMm = rules.unit === 'in' ? 50.8 : 50;
+  const xMm = Math.round(lengthMm / 2 / roundMm) * roundMm;
   const heights = [Math.min(...rules.readingHeightsMm), Math.max(...rules.readingHeightsMm)];
   return [...new Set(heights)].map(
     (zMm): AskedSlot => ({
