@@ -14,7 +14,7 @@ const work = [
 
 /** Recalled, not read in sources: to be checked by a native speaker. */
 export const wordsEs: CustomerWords = {
-  arrive: (window, until) => `Llegamos ${window}${until ? ` y trabajamos ${until}` : ''}.`,
+  arrive: (window, until) => sentence(`Llegamos ${window}${until ? ` y trabajamos ${until}` : ''}`),
   comes: (names, what) => `${names} ${what} en`,
   shopComes: 'El taller',
   what: {
@@ -62,7 +62,7 @@ export const wordsEs: CustomerWords = {
   thanks: 'Gracias. Le esperamos y nos espera.',
   said: (words) => `Recibimos sus palabras: «${words}». El taller se comunicará con usted.`,
   onTheWay: 'Vamos en camino.',
-  late: (arrival) => `Disculpe, vamos con retraso. Ahora llegamos ${arrival}.`,
+  late: (arrival) => sentence(`Disculpe, vamos con retraso. Ahora llegamos ${arrival}`),
   here: 'Ya estamos aquí.',
   done: 'Esta visita ha terminado. Gracias.',
   copy: 'Su copia de lo que se firmó',
@@ -71,7 +71,7 @@ export const wordsEs: CustomerWords = {
   ring: 'Llame al taller',
   map: 'en el mapa',
   timesTitle: 'Otra hora',
-  now: (day, window) => `Ahora es el ${day}, ${window}.`,
+  now: (day, window) => sentence(`Ahora es el ${day}, ${window}`),
   choose: 'Elija una y se la guardamos 15 minutos.',
   noTimes: 'Por ahora no encontramos otra hora.',
   taken: 'Esa hora ya no está libre, o se guardó demasiado tiempo. Esto es lo que hay ahora.',
@@ -87,3 +87,8 @@ export const wordsEs: CustomerWords = {
   keep: 'Dejar la hora como está',
   tooLate: 'Esta visita ya no se puede mover aquí. Llame al taller.',
 };
+
+/** One full stop at the end, though "a.m." brings its own. */
+function sentence(words: string): string {
+  return words.endsWith('.') ? words : `${words}.`;
+}

@@ -14,7 +14,8 @@ type Part = { text: string } | { field: string };
 
 /**
  * Fills a template. A field that is unknown, or has no value here, gives no text at all rather than a hole.
- * Values are taken as they are: braces in them mean nothing. Spaces left over by an empty value go.
+ * Values are taken as they are: braces in them mean nothing. Spaces left over by an empty value go, and so
+ * does a full stop after one ("a la 1:00 p.m..").
  * Example: "{shop}: we come {day}." with shop "Juniper Bend" and day "Tue, May 12" is
  * "Juniper Bend: we come Tue, May 12.".
  * Problems: template-brace, field-unknown, field-without-value (errors).
@@ -36,6 +37,7 @@ export function renderTemplate(template: string, values: FieldValues): Outcome<s
     .join('')
     .replace(/[ \t]+$/gm, '')
     .replace(/\n{3,}/g, '\n\n')
+    .replace(/(?<!\.)\.\.(?!\.)/g, '.')
     .trim();
   return { value, problems: [] };
 }

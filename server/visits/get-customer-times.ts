@@ -28,7 +28,11 @@ export async function getCustomerTimes(
       zone,
       locale,
     ),
-    times,
+    // What is kept already is no other time, even where a second crew is free then.
+    times: times.filter(
+      ({ dayWords, windowWords }) =>
+        dayWords !== hold?.dayWords || windowWords !== hold.windowWords,
+    ),
     hold: hold && { ...hold, untilWords: formatTime(new Date(hold.holdEndsAt), zone, locale) },
   };
 }

@@ -38,6 +38,12 @@ describe('filling', () => {
   test('knows no field by a name that every object has', () => {
     expect(renderTemplate('{constructor}', {}).problems[0]?.code).toBe('field-unknown');
   });
+  test('ends a sentence with one full stop, though a value brings its own', () => {
+    const values = { window: 'a la 1:00 p.m.', reason: 'Wait ...' };
+    expect(renderTemplate('Llegamos {window}. {reason}', values).value).toBe(
+      'Llegamos a la 1:00 p.m. Wait ...',
+    );
+  });
   test('leaves no space or gap behind an empty value', () => {
     const template = 'It is called off. {reason}\n\n{reason}\n\nBye';
     expect(renderTemplate(template, { reason: '' }).value).toBe('It is called off.\n\nBye');
