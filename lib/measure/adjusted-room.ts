@@ -11,7 +11,7 @@ export type AdjustedRoom = {
   /** Chord angle at each corner that has two arms. */
   angles: { cornerWallId: string; angleDeg: Figure }[];
   chiSquare: { value: number; degreesOfFreedom: number; limit: number; passes: boolean };
-  /** |w| beyond this raises an alarm: one false alarm in a hundred such rooms. */
+  /** |w| beyond this raises an alarm: three false alarms in a thousand such rooms. */
   alarmW: number;
   /** In the order of the observations given. */
   checks: ObservationCheck[];

@@ -12,8 +12,11 @@ export const SEEN_WITH_POWER = 4.1;
 export const EQUAL_FIT = 6;
 /** Below this hardly anything checks a reading. */
 export const HARDLY_CHECKED = 0.1;
-/** Chance that all the tests w of a sound room together raise an alarm. */
-const FALSE_ALARM = 0.005;
+/**
+ * Chance that all the tests w of a sound room together raise an alarm; with the 1 in 100 of the global test
+ * no more than 2 in 100 of true rooms are doubted (tests/bench).
+ */
+const FALSE_ALARM = 0.003;
 
 /** Checks in the order of the observations, the |w| that raises an alarm in this room, and what both rest on. */
 export function checkObservations(
@@ -48,7 +51,7 @@ export function checkObservations(
 
 /**
  * The usual 3.29 is one false alarm in a thousand for ONE reading: four in a hundred for a room of forty.
- * Šidák's correction keeps it at one in a hundred for the room, few readings or many.
+ * Šidák's correction keeps it where it is for the room, few readings or many.
  */
 function alarmLevel(independentTests: number): number {
   const each = 1 - (1 - FALSE_ALARM) ** (1 / Math.max(1, independentTests));

@@ -1,6 +1,6 @@
 /**
  * Solves a small square system by Gaussian elimination with row pivoting; null where it is singular.
- * For the three or four unknowns of a plane; larger systems go to the matrix library.
+ * For the three or four unknowns of a plane; larger systems go to `cholesky`.
  */
 export function solveSmall(matrix: number[][], right: number[]): number[] | null {
   const size = right.length;
