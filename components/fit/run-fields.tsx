@@ -63,6 +63,20 @@ export function RunFields({ run, room, rules, onRun, errorOf }: RunFieldsProps) 
         {length('Foot, over the high point', 'z0Mm')}
         {length('Top', 'z1Mm')}
       </div>
+      <SelectField
+        label="Over the boxes"
+        value={run.overBoxes ?? ''}
+        onChange={(event) => {
+          const overBoxes = closings.find((one) => one === event.target.value);
+          onRun({ overBoxes });
+        }}
+        options={[
+          { value: '', label: 'a filler, where they end near the ceiling' },
+          { value: 'filler', label: 'a filler to the ceiling' },
+          { value: 'crown', label: tradeWord('crown', rules.region) },
+          { value: 'open', label: 'nothing: open' },
+        ]}
+      />
       <ShareFields run={run} rules={rules} onRun={onRun} error={errorOf('share.unitId')} />
       <TextField
         label={tradeName('counter', rules.region)}
@@ -75,6 +89,8 @@ export function RunFields({ run, room, rules, onRun, errorOf }: RunFieldsProps) 
     </>
   );
 }
+
+const closings = ['filler', 'crown', 'open'] as const;
 
 const levels = [
   { value: 'base', words: (region: Region) => `base, on a ${tradeWord('kick', region)}` },

@@ -14,6 +14,9 @@ type UnitRowsProps = {
   onUnits: (units: Unit[]) => void;
 };
 
+/** Sheets that a width may stack: an applied panel is one; a box is built to its width. */
+const sheetCounts = [0, 1, 2, 3, 4] as const;
+
 /** The boxes of a run, left to right: what each is, how wide, and how far it may be changed. */
 export function UnitRows({ run, rules, onUnits }: UnitRowsProps) {
   const { units } = run;
@@ -91,6 +94,20 @@ export function UnitRows({ run, rules, onUnits }: UnitRowsProps) {
                   isBare
                   onMm={(widthMm) => change(unit.id, { widthMm })}
                 />
+                <select
+                  aria-label={`What the width of ${unitWords(unit, rules.region)} stacks`}
+                  value={unit.sheets ?? 0}
+                  className="mt-1 w-full text-note text-graphite"
+                  onChange={(event) =>
+                    change(unit.id, { sheets: Number(event.target.value) || undefined })
+                  }
+                >
+                  {sheetCounts.map((count) => (
+                    <option key={count} value={count}>
+                      {count === 0 ? 'built to it' : count === 1 ? '1 sheet' : `${count} sheets`}
+                    </option>
+                  ))}
+                </select>
               </td>
               <td className="px-2 py-1.5">
                 <Alterable

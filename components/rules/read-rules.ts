@@ -1,5 +1,6 @@
-import type { ChangeShopRulesInput, ShopSettings } from '@/lib/contracts/shop-rules';
+import type { ChangeShopRulesInput, FitRules, ShopSettings } from '@/lib/contracts/shop-rules';
 import { lengthRuleGroups } from '@/lib/rules/length-rules';
+import { fineLength } from '@/lib/sheet/reading-words';
 import { formatLength } from '@/lib/units/format-length';
 import { parseLength } from '@/lib/units/parse-length';
 
@@ -22,6 +23,7 @@ export function readRules(fields: Record<string, string>, before: ShopSettings):
     if (value === null) errors[rule] = problems[0]?.message ?? 'That is no length.';
     else nextFit[rule] = value;
   }
+  readSheetGoods(fields, { fit, nextFit, errors });
   if (Object.keys(errors).length > 0) return { body: null, errors };
   const { name = '', phone = '', email = '', zone = '' } = fields;
   return {
@@ -50,4 +52,24 @@ export function readRules(fields: Record<string, string>, before: ShopSettings):
       },
     },
   };
+}
+
+type SheetGoods = { fit: FitRules; nextFit: FitRules; errors: Record<string, string> };
+
+/** A sheet is read to 1/64 in or 0.1 mm; left as it was shown it keeps its exact thickness. */
+function readSheetGoods(fields: Record<string, string>, { fit, nextFit, errors }: SheetGoods) {
+  const read = (rule: 'sheetNominalMm' | 'sheetActualMm'): number | null => {
+    const typed = (fields[rule] ?? '').trim();
+    const before = fit[rule];
+    if (typed === (before === null ? '' : fineLength(before, fit.unit))) return before;
+    if (typed === '' && rule === 'sheetActualMm') return null;
+    const { value, problems } = parseLength(typed, { unit: fit.unit });
+    if (value === null) errors[rule] = problems[0]?.message ?? 'That is no thickness.';
+    return value;
+  };
+  nextFit.sheetNominalMm = read('sheetNominalMm') ?? fit.sheetNominalMm;
+  nextFit.sheetActualMm = read('sheetActualMm');
+  const springDeg = Number(fields.crownSpringDeg ?? fit.crownSpringDeg);
+  if (springDeg > 0 && springDeg < 90) nextFit.crownSpringDeg = springDeg;
+  else errors.crownSpringDeg = 'Between 0 and 90 degrees.';
 }

@@ -19,6 +19,7 @@ import { formatLength } from '@/lib/units/format-length';
 import { ChangePreview } from './change-preview';
 import { OpeningWeights } from './opening-weights';
 import { readRules } from './read-rules';
+import { SheetGoods } from './sheet-goods';
 
 const weekdays = ['Monday', 'Tuesday', 'Wednesday', 'Thursday', 'Friday', 'Saturday', 'Sunday'];
 
@@ -216,6 +217,7 @@ export function RulesForm({ settings, mayChange }: { settings: ShopSettings; may
             </div>
           </section>
         ))}
+        <SheetGoods fit={fit} errorOf={form.errorOf} />
       </fieldset>
       <FormError problem={form.problem} shownFields={Object.keys(form.problem?.errors ?? {})} />
       <FormError problem={saving.problem} shownFields={[]} />

@@ -65,6 +65,7 @@ export function newUnit(rules: FitRules, unit: { id: string; kind: UnitKind }): 
     name: '',
     widthMm,
     alterable: isFixed ? null : alterableAbout(widthMm, rules),
+    ...(unit.kind === 'panel' ? { sheets: 1 } : {}),
   };
 }
 
