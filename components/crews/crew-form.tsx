@@ -66,7 +66,7 @@ export function CrewForm({ people }: { people: readonly { id: string; name: stri
       </div>
       <fieldset>
         <legend className="font-medium">People</legend>
-        <div className="columns-2 gap-6">
+        <div className="grid grid-cols-2 gap-x-6">
           {people.map((person) => (
             <CheckField key={person.id} label={person.name} name="person" value={person.id} />
           ))}

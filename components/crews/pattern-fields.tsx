@@ -29,7 +29,10 @@ export function PatternFields({ weeks, onChange }: PatternFieldsProps) {
       {weeks
         .map((texts, week) => ({ texts, week, number: week + 1 }))
         .map(({ texts, week, number }) => (
-          <fieldset key={number} className="grid grid-cols-2 gap-2 sm:grid-cols-4 xl:grid-cols-7">
+          <fieldset
+            key={number}
+            className="grid grid-cols-[repeat(auto-fill,minmax(7.5rem,1fr))] gap-2"
+          >
             <legend className="mb-1 text-note text-graphite">
               {weeks.length === 1 ? 'Each week' : `Week ${number} of ${weeks.length}`}
             </legend>

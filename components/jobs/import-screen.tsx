@@ -22,7 +22,7 @@ export function ImportScreen() {
   const [leavesOut, setLeavesOut] = useState(false);
   const [takesDoubles, setTakesDoubles] = useState(false);
   const list = useImport(({ jobs, leftOut }) => {
-    const rest = leftOut > 0 ? ` ${leftOut} rows were left out.` : '';
+    const rest = leftOut > 0 ? ` Left out: ${rowsWords(leftOut)}.` : '';
     showToast({ text: `${jobs} ${jobs === 1 ? 'job' : 'jobs'} imported.${rest}` });
     router.push(paths.jobs());
   });
@@ -51,7 +51,7 @@ export function ImportScreen() {
             <TitleBlock title="Rows" meta={countWords(preview)} />
             {preview.counts.problems > 0 ? (
               <CheckField
-                label={`Leave out the ${preview.counts.problems} rows that are not as they should be`}
+                label={`Leave out ${rowsWords(preview.counts.problems)} with something wrong`}
                 hint="Without this nothing comes in until the list is mended."
                 checked={leavesOut}
                 onChange={(event) => setLeavesOut(event.target.checked)}
@@ -59,7 +59,7 @@ export function ImportScreen() {
             ) : null}
             {preview.counts.doubles > 0 ? (
               <CheckField
-                label={`Bring in the ${preview.counts.doubles} rows of people or places that are known already`}
+                label={`Bring in ${rowsWords(preview.counts.doubles)} of people or places that are known already`}
                 hint="Each begins one more job; the same phone or e-mail is the same customer."
                 checked={takesDoubles}
                 onChange={(event) => setTakesDoubles(event.target.checked)}
@@ -92,6 +92,8 @@ const fileWords = ({ encoding, separator }: ListPreview) =>
 
 const countWords = ({ counts }: ListPreview) =>
   `${counts.ready} ready · ${counts.doubles} known already · ${counts.problems} with something wrong`;
+
+const rowsWords = (rows: number) => (rows === 1 ? 'one row' : `${rows} rows`);
 
 /** How many jobs a press of the button would begin. */
 function jobsIn(

@@ -24,7 +24,7 @@ export function LeafletPinMap({ place, ground, onPut }: LeafletPinMapProps) {
     ? { center: [place.lat, place.lon] as [number, number], zoom: closeUp }
     : { bounds: wholeIsland };
   return (
-    <div className="h-72">
+    <div className="h-80">
       <MapContainer {...view} className="day-map" attributionControl={ground !== null}>
         {ground ? (
           <TileLayer url={ground.tilesUrl} attribution={ground.attribution} />

@@ -8,6 +8,6 @@ export const PinMap = dynamic(
   () => import('./leaflet-pin-map').then((made) => made.LeafletPinMap),
   {
     ssr: false,
-    loading: () => <Skeleton className="h-72 w-full" />,
+    loading: () => <Skeleton className="h-80 w-full" />,
   },
 );
