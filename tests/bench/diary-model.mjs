@@ -5,6 +5,6 @@ const test = 'tests/server/diary-model.test.ts';
 const { status } = spawnSync(
   process.execPath,
   ['node_modules/vitest/vitest.mjs', 'run', '--project', 'database', test],
-  { stdio: 'inherit', env: { ...process.env, SETWELL_DIARY_RUNS: '100' } },
+  { stdio: 'inherit', env: { ...process.env, SETWELL_DIARY_RUNS: '150' } },
 );
 process.exitCode = status ?? 1;

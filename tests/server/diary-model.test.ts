@@ -5,7 +5,7 @@ import { type DiaryWorld, makeDiaryWorld } from '../help/diary/diary-world';
 
 /** `npm run bench` asks for thousands of steps; a few are done each time. */
 const runs = Number(process.env.SETWELL_DIARY_RUNS ?? 2);
-const stepsOfRun = 30;
+const stepsOfRun = runs > 2 ? 60 : 24;
 const seed = 11;
 
 it(
