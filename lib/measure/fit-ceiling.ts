@@ -20,7 +20,8 @@ const CLOSED_TO_CEILING_MM = 400;
 /**
  * The gap over tall and hung boxes, and the piece that closes it.
  * Edge: null for base runs, without rises, or without a datum; unless the run says what closes it, boxes
- * that end more than 400 below the ceiling are left open above. Example: rises 1440 and 1447, datum drop 1000, top 2400: 40 and 47.
+ * that end more than 400 below the ceiling are left open above.
+ * Example: rises 1440 and 1447, datum drop 1000, top 2400: 40 and 47.
  */
 export function fitCeiling(
   context: FitContext,
