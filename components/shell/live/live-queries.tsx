@@ -5,13 +5,13 @@ import { useEffect } from 'react';
 import type { LiveTopic } from '@/lib/contracts/live';
 import { hearLive } from './live-source';
 
-/** By topic, the first parts of the query keys that hold something of it. */
+/** By topic, the first parts of the query keys that hold something of it; pages of the server use LiveRefresh. */
 const keysOf: Record<LiveTopic, readonly string[]> = {
-  visits: ['visits', 'visit', 'waiting', 'days', 'openings', 'jobs'],
-  readings: ['rooms', 'fits'],
-  messages: ['messages'],
-  releases: ['sheets', 'fits', 'waiting', 'bench'],
-  jobs: ['jobs', 'waiting', 'bench'],
+  visits: ['visits', 'waiting', 'openings', 'days'],
+  readings: [],
+  messages: [],
+  releases: ['waiting', 'openings'],
+  jobs: ['waiting', 'openings', 'job-search'],
   crews: ['crews', 'openings', 'days'],
 };
 

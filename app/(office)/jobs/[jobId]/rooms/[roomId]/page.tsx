@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import { FitScreen } from '@/components/fit/fit-screen';
+import { LiveRefresh } from '@/components/shell/live/live-refresh';
 import { may } from '@/lib/permissions';
 import { found } from '@/server/base/found';
 import { pageContext } from '@/server/base/page-context';
@@ -18,11 +19,14 @@ export default async function FitPage({ params, searchParams }: FitPageProps) {
   const { wall, lay } = await searchParams;
   const mayLayOut = may(ctx.actor.role, 'runs:change');
   return (
-    <FitScreen
-      view={await found(getFit(ctx, { roomId }))}
-      choice={{ wall, lay: mayLayOut ? lay : undefined }}
-      mayLayOut={mayLayOut}
-      mayRelease={may(ctx.actor.role, 'sheets:release')}
-    />
+    <>
+      <LiveRefresh topics={['readings', 'releases']} />
+      <FitScreen
+        view={await found(getFit(ctx, { roomId }))}
+        choice={{ wall, lay: mayLayOut ? lay : undefined }}
+        mayLayOut={mayLayOut}
+        mayRelease={may(ctx.actor.role, 'sheets:release')}
+      />
+    </>
   );
 }
