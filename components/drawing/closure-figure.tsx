@@ -12,7 +12,7 @@ type ClosureFigureProps = {
 /** The closure picture, as wide as its place, with a key to its lines: none is told by colour alone. */
 export function ClosureFigure({ drawing, title }: ClosureFigureProps) {
   const { left, top, width, height } = drawing.bounds;
-  const key = legend.filter(({ layer }) =>
+  const key = legendOf(drawing).filter(({ layer }) =>
     drawing.shapes.some((shape) => 'layer' in shape && shape.layer === layer),
   );
   return (
@@ -40,11 +40,12 @@ export function ClosureFigure({ drawing, title }: ClosureFigureProps) {
   );
 }
 
-const legend: { layer: Layer; words: string }[] = [
+/** Every line of the picture, and how many times larger than life what is enlarged is drawn. */
+const legendOf = (drawing: ClosureDrawing): { layer: Layer; words: string }[] => [
   { layer: 'wall-face', words: 'walls, evened out' },
-  { layer: 'walk-as-read', words: 'the walk as read' },
+  { layer: 'walk-as-read', words: `the walk as read, ×${drawing.walkFactor}` },
   { layer: 'walk-gap', words: 'where it fails to close' },
-  { layer: 'error-ellipse', words: 'where a corner lies' },
+  { layer: 'error-ellipse', words: `where a corner lies, 95 of 100, ×${drawing.ellipseFactor}` },
   { layer: 'held-corner', words: 'corner held' },
   { layer: 'diagonal', words: 'diagonal read' },
   { layer: 'diagonal-asked', words: 'diagonal to take' },

@@ -22,7 +22,10 @@ export function RoomProof({ fit, view, plan }: RoomProofProps) {
   const known = new Set(plan.map(({ slot }) => slot));
   const { room } = view.wallBook;
   const canAsk = (slot: string) => known.has(slot) || questionOfDiagonal(slot, room) !== null;
+  const named = new Set((suspect?.readings ?? []).flatMap(({ readingIds }) => readingIds));
   const steps = settle.flatMap((step) => {
+    // The suspect itself is offered above already.
+    if (named.has(step.slot.replace('again:', ''))) return [];
     const place = placeOfSlot(step.slot, canAsk);
     return place ? [{ ...step, place }] : [];
   });

@@ -226,7 +226,7 @@ describe('one job from the first call to the booked install', () => {
     await page.getByRole('link', { name: 'Lay out a new run on wall A' }).click();
     const editor = page.getByRole('region', { name: /^Lay out/ });
     for (const [index, inches] of ['30', '33', '24', '30', '21'].entries()) {
-      await editor.getByRole('button', { name: 'Add a unit at the right' }).click();
+      await editor.getByRole('button', { name: /^Base \d/ }).click();
       const width = editor.getByLabel(/^Width of/).nth(index);
       await width.fill(inches);
       await width.blur();
