@@ -22,7 +22,7 @@ export function BenchCard({ sheet, onTakeUp, maySayReady, mayBook }: BenchCardPr
   return (
     <article
       aria-label={`${sheet.customerName}, ${sheet.roomName}`}
-      className={`grid gap-x-6 gap-y-3 rounded border bg-sheet px-5 py-4 lg:grid-cols-[11rem_minmax(0,1fr)_minmax(0,24rem)] ${
+      className={`grid gap-x-6 gap-y-3 rounded border bg-sheet px-5 py-4 lg:grid-cols-[9rem_minmax(0,1fr)_minmax(0,19rem)] ${
         isSuperseded ? 'border-2 border-chalk' : 'border-ink'
       }`}
     >
