@@ -66,6 +66,7 @@ async function write(
   const locked: { move: MoveInput; before: LockedVisit }[] = [];
   for (const move of input.moves.toSorted((a, b) => a.visitId.localeCompare(b.visitId))) {
     const before = await lockVisit(tx, ctx, move.visitId);
+    if (!input.jobs.some(({ jobId }) => jobId === before.jobId)) throw notFound('visit');
     await mustBeCurrent(tx, ctx, before, move.version);
     mustBeMovable(before);
     locked.push({ move, before });

@@ -16,7 +16,9 @@ const STEP_MS = startStepMinutes * MINUTE_MS;
 const MOST_DAYS_OFF = 30;
 
 type Piece = { startMs: number; endMs: number; day: CrewDay; gap: Gap };
-type Candidate = { pieces: Piece[]; driveAddedMinutes: number; score: number };
+/** The first day, and for a visit of several days those after it. */
+type Pieces = [Piece, ...Piece[]];
+type Candidate = { pieces: Pieces; driveAddedMinutes: number; score: number };
 type Search = {
   input: OpeningsInput;
   crew: OpeningCrew;
@@ -99,7 +101,7 @@ function bestInGap(search: Search, day: CrewDay, gap: Gap): Candidate | null {
   const driveAddedMinutes = driveAdded(search, gap);
   let best: Candidate | null = null;
   for (let startMs = first; startMs + search.workMs <= untilMs; startMs += STEP_MS) {
-    const pieces = [{ startMs, endMs: startMs + search.workMs, day, gap }];
+    const pieces: Pieces = [{ startMs, endMs: startMs + search.workMs, day, gap }];
     const scrapMs = scrap(startMs - fromMs) + scrap(untilMs - startMs - search.workMs);
     best = better(best, { search, pieces, driveAddedMinutes, scrapMs });
   }
@@ -118,7 +120,7 @@ function bestOverDays(search: Search, day: CrewDay, gap: Gap): Candidate | null 
     const more = followingPieces(days, search.workMs - (day.endMs - startMs));
     // A later start leaves more for the days after it, which does not fit either.
     if (!more) break;
-    const pieces = [{ startMs, endMs: day.endMs, day, gap }, ...more.pieces];
+    const pieces: Pieces = [{ startMs, endMs: day.endMs, day, gap }, ...more.pieces];
     const scrapMs = scrap(startMs - fromMs) + more.scrapMs;
     const driveAddedMinutes = firstDrive + more.driveAddedMinutes;
     best = better(best, { search, pieces, driveAddedMinutes, scrapMs });
@@ -177,7 +179,7 @@ function better(
   best: Candidate | null,
   next: {
     search: Search;
-    pieces: Piece[];
+    pieces: Pieces;
     driveAddedMinutes: number;
     scrapMs: number;
   },
@@ -185,7 +187,6 @@ function better(
   const { search, pieces, driveAddedMinutes, scrapMs } = next;
   const { weights } = search.input;
   const [first] = pieces;
-  if (!first) return best ?? { pieces, driveAddedMinutes, score: 0 };
   const missed = search.missed.count(first.day, first.startMs, pieces);
   const score =
     weights.driveMinute * driveAddedMinutes +
@@ -210,7 +211,6 @@ function ends({ after, before }: Gap, { base }: OpeningCrew): [PlaceIndex, Place
 function opening({ crew, missed }: Search, best: Candidate): FoundOpening {
   const { pieces } = best;
   const [first] = pieces;
-  if (!first) throw new Error('an opening without a piece');
   const { startMs, gap } = first;
   return {
     crewId: crew.id,
