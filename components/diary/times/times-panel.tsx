@@ -1,6 +1,7 @@
 'use client';
 
 import { useEffect, useRef, useState } from 'react';
+import { flushSync } from 'react-dom';
 import { Button } from '@/components/ui/button';
 import { FormError } from '@/components/ui/form-error';
 import { TextareaField } from '@/components/ui/textarea-field';
@@ -49,7 +50,11 @@ export function TimesPanel(props: TimesPanelProps) {
   const booking = useBookOpening(subject, props.onBooked);
 
   const openingKey = opening ? `${opening.crewId} ${opening.startsAt} ${opening.endsAt}` : '';
-  useLook(openingKey, opening ?? null, onLook);
+  // The list is fetched anew by the booking itself: the diary must stay where that was, and not follow it.
+  const isSettled = useRef(false);
+  useLook(openingKey, opening ?? null, (looked) => {
+    if (!looked || !isSettled.current) onLook(looked);
+  });
 
   useEffect(() => panelRef.current?.focus(), []);
 
@@ -57,7 +62,10 @@ export function TimesPanel(props: TimesPanelProps) {
   const book = (which = opening) => {
     if (!which || booking.isPending) return;
     if (needsReason) return panelRef.current?.querySelector('textarea')?.focus();
-    void booking.bookOpening(which, isOverridden ? reason : '');
+    isSettled.current = true;
+    void booking.bookOpening(which, isOverridden ? reason : '').then((isBooked) => {
+      isSettled.current = isBooked;
+    });
   };
   const hold = () => {
     if (!opening || booking.isPending) return;
@@ -66,7 +74,8 @@ export function TimesPanel(props: TimesPanelProps) {
   useTimesKeys({
     count: openings.length,
     chosen,
-    choose: setChosen,
+    // Enter may follow within the same breath: it must book what the digit chose.
+    choose: (index) => flushSync(() => setChosen(index)),
     book: () => book(),
     hold,
     byHand: props.onByHand,

@@ -24,7 +24,8 @@ export function useBookOpening(subject: TimesSubject, onBooked: (date: string) =
   const takeBack = useTakeBack();
   const client = useQueryClient();
 
-  async function bookOpening(opening: Opening, overrideReason: string) {
+  /** Whether it is booked now. */
+  async function bookOpening(opening: Opening, overrideReason: string): Promise<boolean> {
     const { crewId, date, time, workMinutes } = opening;
     const place = { crewId, date, time, workMinutes, overrideReason };
     const { jobId, kind, visit } = subject;
@@ -43,9 +44,11 @@ export function useBookOpening(subject: TimesSubject, onBooked: (date: string) =
         undo: () => void takeBack(booked),
       });
       onBooked(date);
+      return true;
     } catch (caught) {
       setProblem(problemOf(caught));
       await client.invalidateQueries({ queryKey: openingsKey });
+      return false;
     }
   }
 
