@@ -2,7 +2,7 @@ import { createHash } from 'node:crypto';
 import type { NumbersFileInput } from '@/lib/contracts/numbers';
 import { csvText } from '@/lib/export/csv';
 import { figureWords } from '@/lib/numbers/figure-words';
-import type { PersonContext } from '@/server/base/context';
+import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import type { FileAnswer } from '@/server/base/handle-file';
 import { getNumbers } from './get-numbers';
 
@@ -11,6 +11,7 @@ export async function getNumbersFile(
   ctx: PersonContext,
   { figure: key, days }: NumbersFileInput,
 ): Promise<FileAnswer> {
+  mustBeAllowed(ctx, 'numbers:read');
   const { figures, from, until, currency } = await getNumbers(ctx, { days });
   const figure = figures.find((one) => one.key === key);
   const unit = figure?.unit === 'money' ? currency : (figure?.unit ?? '');

@@ -24,11 +24,13 @@ const guardedOtherwise: Record<string, string> = {
   handleSmsWebhook: 'the provider’s signature',
   hearSms: 'called behind handleSmsWebhook',
   hearReport: 'called behind handleSmsWebhook',
+  openInterface: 'says how to ask, and nothing of any shop',
   readPhone: 'not there outside the demo',
   replyAsCustomer: 'not there outside the demo',
 };
 
-const rooms = 'people|shops|jobs|walls|sheets|messages|visits|snags|days|files|numbers|demo';
+const rooms =
+  'people|shops|jobs|walls|sheets|messages|visits|snags|days|files|numbers|keeping|programs|demo';
 
 type Verb = { name: string; file: string };
 
