@@ -49,10 +49,12 @@ describe('booking a visit', () => {
       dueAt: new Date(iso),
     });
     expect(told).toEqual([
-      at('booked', 'email', '2026-12-01T15:00:00Z'),
-      at('booked', 'sms', '2026-12-01T15:00:00Z'),
+      at('booked', 'email', '2026-12-01T15:00:12Z'),
+      at('booked', 'sms', '2026-12-01T15:00:12Z'),
       at('please-confirm', 'email', '2026-12-08T15:00:00Z'),
       at('please-confirm', 'sms', '2026-12-08T15:00:00Z'),
+      at('asked-again', 'email', '2026-12-09T15:00:00Z'),
+      at('asked-again', 'sms', '2026-12-09T15:00:00Z'),
       at('day-before', 'email', '2026-12-09T21:00:00Z'),
       at('day-before', 'sms', '2026-12-09T21:00:00Z'),
     ]);
@@ -126,7 +128,7 @@ describe('booking a visit', () => {
     for (const answer of answers) expect(answer).toEqual(answers[0]);
     const { db } = await database();
     expect(await db.$count(visits, eq(visits.jobId, jobId))).toBe(1);
-    expect(await db.$count(messages, eq(messages.jobId, jobId))).toBe(6);
+    expect(await db.$count(messages, eq(messages.jobId, jobId))).toBe(8);
   });
 
   it('refuses a gate that is not passed with its words, and keeps why it was overridden', async () => {

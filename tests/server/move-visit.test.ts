@@ -87,8 +87,13 @@ describe('moving and calling off a visit', () => {
     });
     for (const channel of ['sms', 'email'] as const) {
       const rows = await outbox(visit.id, channel);
-      expect(inState(rows, 'withdrawn')).toEqual(['please-confirm', 'day-before']);
-      expect(inState(rows, 'waiting')).toEqual(['moved', 'please-confirm', 'day-before']);
+      expect(inState(rows, 'withdrawn')).toEqual(['please-confirm', 'asked-again', 'day-before']);
+      expect(inState(rows, 'waiting')).toEqual([
+        'moved',
+        'please-confirm',
+        'asked-again',
+        'day-before',
+      ]);
       expect(rows.find(({ occasion }) => occasion === 'moved')?.cause).toEqual({
         toldFrom: '2026-12-10T14:00:00.000Z',
         toldUntil: '2026-12-10T16:00:00.000Z',
@@ -100,7 +105,12 @@ describe('moving and calling off a visit', () => {
     const visit = await booked();
     await move(visit, {});
     const rows = await outbox(visit.id);
-    expect(inState(rows, 'waiting')).toEqual(['booked', 'please-confirm', 'day-before']);
+    expect(inState(rows, 'waiting')).toEqual([
+      'booked',
+      'please-confirm',
+      'asked-again',
+      'day-before',
+    ]);
   });
 
   it('counts a second move from the time that the customer knows', async () => {
@@ -126,6 +136,7 @@ describe('moving and calling off a visit', () => {
     expect(inState(await outbox(visit.id), 'waiting')).toEqual([
       'booked',
       'please-confirm',
+      'asked-again',
       'day-before',
     ]);
   });

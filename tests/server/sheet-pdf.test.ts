@@ -78,7 +78,7 @@ describe('sheetPdf', () => {
   });
 
   it('lists every piece with its cut as the shop writes it', async () => {
-    const list = pages.find((page) => page.includes('cut list and kick heights')) ?? '';
+    const list = pages.find((page) => page.includes('cut list and toe kick heights')) ?? '';
     for (const row of cutList(sheet.fit, sheet.runs, 'US')) {
       expect(list).toContain(row.piece);
       expect(list).toContain(figureText(row.cut, sheet.rules).value);

@@ -19,7 +19,8 @@ it('sends what a booking puts into the outbox by itself, and stops when told to'
   const mails = (address: string) => fakes.email?.mailsFor(address).length ?? 0;
   const book = async (email: string, date: string) => {
     const { jobId } = await startTestJob(shop, { customer: { email } });
-    await bookTestVisit(shop, { jobId, crewId, date }, new Date());
+    // Half a minute ago: what a booking tells waits until it can no longer be undone.
+    await bookTestVisit(shop, { jobId, crewId, date }, new Date(Date.now() - 30_000));
   };
   const stop = startWorker(composeVisitMessage);
   expect(startWorker(composeVisitMessage)).toBe(stop);
