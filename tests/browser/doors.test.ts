@@ -83,11 +83,11 @@ describe('doors', () => {
     await page.getByLabel('Your e-mail').fill('tilda@lowtide.example');
     await page.getByLabel('A password').fill('a-long-password');
     await page.getByRole('button', { name: 'Open the shop' }).click();
-    await page.waitForURL(`**${paths.diary()}`);
+    await page.waitForURL(`**${paths.start()}`);
     const pages: [string, RegExp][] = [
       [paths.diary(), /Nothing waits/],
       [paths.jobs(), /No jobs yet/],
-      [paths.bench(), /Nothing to build yet/],
+      [paths.bench(), /Nothing to build here/],
       [paths.messages(), /Nothing told yet/],
       [paths.crews(), /Tilda Low/],
       [paths.today(), /Nothing booked/],
