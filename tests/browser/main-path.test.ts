@@ -319,7 +319,9 @@ describe('one job from the first call to the booked install', () => {
     const line = waitingLine(page);
     expect(await line.textContent()).toContain(`Install · ${customer}`);
     await line.getByText(/^now: revision A released/).waitFor();
-    await line.getByRole('button', { name: /^Book/ }).click();
+    await line.getByRole('button', { name: /^Times that work/ }).click();
+    await page.getByRole('heading', { name: 'Times that work' }).waitFor();
+    await page.keyboard.press('b');
     const dialog = page.getByRole('dialog');
     await dialog.getByLabel('Day', { exact: true }).fill(addDays(shop.today, 21));
     await dialog.getByRole('button', { name: /^Book and tell/ }).click();
