@@ -19,6 +19,7 @@ export default defineConfig({
           include: ['lib', 'reference', 'rules', 'components'].map(
             (part) => `tests/${part}/**/*.test.ts`,
           ),
+          setupFiles: ['tests/setup/one-seed.ts'],
         },
       },
       {
@@ -27,7 +28,7 @@ export default defineConfig({
           name: 'database',
           include: ['tests/server/**/*.test.ts', 'tests/api/**/*.test.ts'],
           globalSetup: 'tests/setup/template-database.ts',
-          setupFiles: ['tests/setup/own-database.ts'],
+          setupFiles: ['tests/setup/one-seed.ts', 'tests/setup/own-database.ts'],
           maxWorkers: 2,
           testTimeout: 30_000,
           hookTimeout: 60_000,

@@ -62,6 +62,9 @@ export function scribeAllowance(input: ScribeInput): Outcome<ScribeAllowance> {
   const u = held === 'by-size' ? Math.hypot(greatest.u, uShared) : outOfTrue.u;
   const { marginMm, leastMm, stepMm } = rules;
   const needed = outOfTrue.value + 2 * u + marginMm;
+  if (!Number.isFinite(needed / stepMm)) {
+    return refused(problem('uncertainty-not-known', 'This edge is too unsure to be cut by.'));
+  }
   const unrounded = figure(Math.max(needed, leastMm), u, outOfTrue.from);
   const value: ScribeAllowance = {
     outOfTrue,
@@ -76,7 +79,8 @@ export function scribeAllowance(input: ScribeInput): Outcome<ScribeAllowance> {
 
 /** A shop's scribe rules that no edge can be cut by. */
 export function refuseScribeRules({ marginMm, leastMm, stepMm }: ScribeRules): Problem[] {
-  if (marginMm >= 0 && leastMm >= 0 && stepMm > 0 && marginMm + leastMm + stepMm < Infinity)
+  const steps = (marginMm + leastMm) / stepMm;
+  if (marginMm >= 0 && leastMm >= 0 && stepMm > 0 && stepMm < Infinity && steps < Infinity)
     return [];
   const words = 'The shop’s scribe rules are lengths from 0 up, its step above 0.';
   return [problem('rules-not-known', words)];
