@@ -177,7 +177,10 @@ function mailedLink(address: string): Promise<string> {
   );
 }
 
-describe.each(looks)('at the $size, $theme', ({ size, theme }) => {
+/** Two minutes that each run need not wait for: `npm run test:screens`, when a page or the look has changed. */
+const isAsked = Boolean(process.env.EVERY_SCREEN);
+
+describe.runIf(isAsked).each(looks)('at the $size, $theme', ({ size, theme }) => {
   const browser = useBrowser();
   // The e-mail to the customer takes a while, so whoever comes by link comes last.
   const everybody = [...roles, 'nobody'] as const;
@@ -203,7 +206,7 @@ describe.each(looks)('at the $size, $theme', ({ size, theme }) => {
   );
 });
 
-it('no page is left out of the list', async () => {
+it.runIf(isAsked)('no page is left out of the list', async () => {
   const addresses = await Promise.all(
     Object.values(screens).flatMap((list) => list.map(({ path }) => path(known))),
   );
