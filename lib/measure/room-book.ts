@@ -3,6 +3,7 @@ import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Reading, ReadingOf, Tool, WallBook } from '@/lib/contracts/wall-book';
 import { type RoomWalk, walkRoom } from '@/lib/measure/room-walk';
 import { standingReadings } from '@/lib/measure/standing-readings';
+import { wallIdsOf } from '@/lib/measure/wall-ids';
 import { type Problem, warning } from '@/lib/problem';
 
 export type RoomBook = {
@@ -33,7 +34,7 @@ export function openBook(wallBook: WallBook, rules: FitRules): RoomBook {
   const tools = new Map(wallBook.tools.map((tool) => [tool.id, tool]));
   const problems: Problem[] = [];
   const standing = standingReadings(wallBook.readings);
-  const strange = standing.filter((reading) => wallsOf(reading).some((id) => !walk.byId.has(id)));
+  const strange = standing.filter((reading) => wallIdsOf(reading).some((id) => !walk.byId.has(id)));
   const notNumbers = standing.filter((reading) => !hasOnlyNumbers(reading));
   const leftOut = new Set([...strange, ...notNumbers].map(({ id }) => id));
   const readings = standing.filter(({ id }) => !leftOut.has(id));
@@ -67,23 +68,6 @@ export function openBook(wallBook: WallBook, rules: FitRules): RoomBook {
     toolOf: ({ toolId }) => tools.get(toolId) ?? UNKNOWN_TOOL,
     problems,
   };
-}
-
-function wallsOf(reading: Reading): string[] {
-  switch (reading.kind) {
-    case 'corner':
-      return [reading.cornerWallId];
-    case 'diagonal':
-      return [reading.fromCornerWallId, reading.toCornerWallId];
-    case 'width':
-      return [reading.wallId, reading.toWallId];
-    case 'doorway':
-    case 'withdrawal':
-    case 'skip':
-      return [];
-    default:
-      return [reading.wallId];
-  }
 }
 
 function hasOnlyNumbers(reading: Reading): boolean {
