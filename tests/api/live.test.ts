@@ -2,7 +2,9 @@ import { eq } from 'drizzle-orm';
 import { afterEach, beforeAll, describe, expect, it } from 'vitest';
 import { GET as liveRoute } from '@/app/api/live/route';
 import { jobs, visits } from '@/db/schema';
+import { openSnagInput, snagMenders } from '@/lib/contracts/snags';
 import { handleLive } from '@/server/base/handle-live';
+import { openSnag } from '@/server/snags/open-snag';
 import { bookTestVisit } from '../help/book-test-visit';
 import { callRoute } from '../help/call-route';
 import { makeCrew } from '../help/make-crew';
@@ -106,6 +108,21 @@ describe('what changes in a shop', () => {
       await tx.update(visits).set({ customerSays: 'b' }).where(eq(visits.id, visit.id));
     });
     await expect.poll(() => screen.heard()).toEqual(['visits']);
+  });
+
+  it('reaches the office from the site: a snag is heard of as it is found', async () => {
+    const { jobId } = await startTestJob(shop);
+    const screen = await openScreen(shop);
+    await openSnag(
+      await contextOf(shop, 'crew'),
+      openSnagInput.parse({
+        id: crypto.randomUUID(),
+        jobId,
+        words: 'Door rubs',
+        mender: snagMenders[0],
+      }),
+    );
+    await expect.poll(() => screen.heard()).toEqual(['site']);
   });
 
   it('is told beside a beat, and the stream ends by itself so that who listens is asked again', async () => {

@@ -1,4 +1,5 @@
 import type { Metadata } from 'next';
+import { LiveRefresh } from '@/components/shell/live/live-refresh';
 import { SnagsTable } from '@/components/snags/snags-table';
 import { TitleBlock } from '@/components/ui/title-block';
 import { may } from '@/lib/permissions';
@@ -12,6 +13,7 @@ export default async function SnagsPage() {
   const snags = await listSnags(ctx, {});
   return (
     <>
+      <LiveRefresh topics={['site']} />
       <TitleBlock level={1} title="Snags" meta="open, the most pressing first" />
       <SnagsTable snags={snags} mayChange={may(ctx.actor.role, 'snags:change')} />
     </>

@@ -13,6 +13,7 @@ const keysOf: Record<LiveTopic, readonly string[]> = {
   releases: ['waiting', 'openings'],
   jobs: ['waiting', 'openings', 'job-search'],
   crews: ['crews', 'openings', 'days'],
+  site: ['days'],
 };
 
 /** What another person changed is fetched again at once, where it is on the screen. */

@@ -8,6 +8,7 @@ import { RoomList } from '@/components/jobs/room-list';
 import { SiteForm } from '@/components/jobs/site-form';
 import { JobPhotos } from '@/components/photos/job-photos';
 import { SitePlace } from '@/components/place/site-place';
+import { LiveRefresh } from '@/components/shell/live/live-refresh';
 import { SignOffList } from '@/components/sign-off/sign-off-list';
 import { ForCrewForm } from '@/components/snags/for-crew-form';
 import { JobSnags } from '@/components/snags/job-snags';
@@ -40,6 +41,7 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
   const forCrew = await getForCrew(ctx, { jobId });
   return (
     <>
+      <LiveRefresh topics={['jobs', 'visits', 'messages', 'releases', 'site']} />
       <TitleBlock
         level={1}
         title={`${job.customerName} · ${job.title}`}
