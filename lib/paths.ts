@@ -185,6 +185,7 @@ export const apiPaths = {
   /** What a change of the rules would do. */
   rulesPreview: () => '/api/rules/preview',
   messages: () => '/api/messages',
+  schedulerItems: () => '/api/messages/items',
   schedulerItem: (itemId: string) => `/api/messages/items/${part(itemId)}`,
   wordings: () => '/api/messages/wordings',
   messageSettings: () => '/api/messages/settings',

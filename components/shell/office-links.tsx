@@ -3,17 +3,15 @@
 import Link from 'next/link';
 import { usePathname } from 'next/navigation';
 import { currentOfficePage, type OfficePage } from './office-pages';
-
-export type OfficeCounts = Partial<Record<OfficePage['name'], { count: number; words: string }>>;
+import { ToAnswer } from './to-answer';
 
 /** The office's pages, the current one marked by weight and by a stroke on the margin line. */
-export function OfficeLinks({ pages, counts }: { pages: OfficePage[]; counts: OfficeCounts }) {
+export function OfficeLinks({ pages }: { pages: OfficePage[] }) {
   const current = currentOfficePage(usePathname());
   return (
     <ul>
       {pages.map((page) => {
         const isCurrent = page.name === current?.name;
-        const badge = counts[page.name];
         return (
           <li key={page.name}>
             <Link
@@ -24,12 +22,7 @@ export function OfficeLinks({ pages, counts }: { pages: OfficePage[]; counts: Of
               }`}
             >
               {page.word}
-              {badge && badge.count > 0 ? (
-                <span className="font-bold text-chalk">
-                  {badge.count}
-                  <span className="sr-only"> {badge.words}</span>
-                </span>
-              ) : null}
+              {page.name === 'messages' ? <ToAnswer /> : null}
             </Link>
           </li>
         );

@@ -3,7 +3,7 @@ import { Toaster } from '@/components/ui/toaster';
 import { type Role, roleWords } from '@/lib/permissions';
 import { ListButtons } from './list-buttons';
 import { OfficeKeys } from './office-keys';
-import { type OfficeCounts, OfficeLinks } from './office-links';
+import { OfficeLinks } from './office-links';
 import { OfficeMenu } from './office-menu';
 import { officePagesFor } from './office-pages';
 import { type ShopChoice, ShopSwitch } from './shop-switch';
@@ -16,14 +16,12 @@ type OfficeShellProps = {
   /** All shops of this person. */
   shops?: ShopChoice[];
   person: { name: string; role: Role };
-  /** Beside the names of pages: messages that nobody has read. */
-  counts?: OfficeCounts;
   children: ReactNode;
 };
 
 /** The office's margin with its pages, and the sheet beside it. Wants the query client around it. */
-export function OfficeShell({ shop, shops = [], person, counts = {}, children }: OfficeShellProps) {
-  const links = <OfficeLinks pages={officePagesFor(person.role)} counts={counts} />;
+export function OfficeShell({ shop, shops = [], person, children }: OfficeShellProps) {
+  const links = <OfficeLinks pages={officePagesFor(person.role)} />;
   const foot = (
     <div className="flex flex-col gap-2 pr-3 max-md:pr-0">
       <ShopSwitch shop={shop} shops={shops} />

@@ -61,6 +61,9 @@ export const schedulerItemView = z.object({
 });
 export type SchedulerItemView = z.infer<typeof schedulerItemView>;
 
+/** How many lines of the scheduler's list are open. */
+export type ToAnswerView = { toAnswer: number };
+
 export const tickOffInput = z.object({ itemId: id });
 export type TickOffInput = z.infer<typeof tickOffInput>;
 

@@ -4,6 +4,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { POST as consentRoute } from '@/app/api/customers/[customerId]/consent/route';
 import { PATCH as languageRoute } from '@/app/api/customers/[customerId]/language/route';
 import { DELETE as itemRoute } from '@/app/api/messages/items/[itemId]/route';
+import { GET as countRoute } from '@/app/api/messages/items/route';
 import { GET as listRoute, POST as writeRoute } from '@/app/api/messages/route';
 import { PATCH as settingsRoute } from '@/app/api/messages/settings/route';
 import { POST as testRoute } from '@/app/api/messages/test/route';
@@ -118,7 +119,7 @@ describe('messages by hand, consent and wording', () => {
       expect((await callRoute(route, { ...call, cookie: asCrew })).status).toBe(403);
       expect((await callRoute(route, { ...call, cookie: asOther })).status).toBe(404);
     }
-    for (const route of [listRoute, wordingsRoute]) {
+    for (const route of [listRoute, wordingsRoute, countRoute]) {
       expect((await callRoute(route, { method: 'GET', cookie: asCrew })).status).toBe(403);
     }
     const listed = await callRoute(listRoute, { method: 'GET', cookie: asOther });
@@ -137,6 +138,11 @@ describe('messages by hand, consent and wording', () => {
     const to = await customer();
     const itemId = await item(to);
     const ctx = await contextOf(shop, 'scheduler');
+    const counted = async (of = shop) => {
+      const asked = { method: 'GET', cookie: await cookie('owner', of) } as const;
+      return (await callRoute(countRoute, asked)).body;
+    };
+    const before = (await counted()) as { toAnswer: number };
     const open = async () => (await listItems(ctx, to)).map(({ id }) => id);
     expect(await open()).toContain(itemId);
     for (const role of ['scheduler', 'owner'] as const) {
@@ -144,6 +150,8 @@ describe('messages by hand, consent and wording', () => {
       expect((await callRoute(itemRoute, call)).status).toBe(200);
     }
     expect(await open()).not.toContain(itemId);
+    expect(await counted()).toEqual({ toAnswer: before.toAnswer - 1 });
+    expect(await counted(otherShop)).toEqual({ toAnswer: 0 });
     const { db } = await database();
     const [row] = await db.select().from(schedulerItems).where(eq(schedulerItems.id, itemId));
     expect(row?.doneBy).toBe('Scheduler Test');

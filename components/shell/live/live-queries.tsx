@@ -9,7 +9,7 @@ import { hearLive } from './live-source';
 const keysOf: Record<LiveTopic, readonly string[]> = {
   visits: ['visits', 'waiting', 'openings', 'days'],
   readings: [],
-  messages: [],
+  messages: ['messages'],
   releases: ['waiting', 'openings'],
   jobs: ['waiting', 'openings', 'job-search'],
   crews: ['crews', 'openings', 'days'],
