@@ -13,12 +13,16 @@ export function proxy(request: NextRequest) {
 
 export const config = {
   matcher: [
+    '/bench/:path*',
+    '/crews/:path*',
+    '/days/:path*',
     '/diary/:path*',
     '/jobs/:path*',
-    '/bench',
-    '/messages',
-    '/crews',
-    '/rules',
+    '/messages/:path*',
+    '/numbers/:path*',
+    '/rules/:path*',
+    '/snags/:path*',
+    '/start/:path*',
     '/today/:path*',
     '/walls/:path*',
   ],

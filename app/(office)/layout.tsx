@@ -3,6 +3,7 @@ import { Providers } from '@/app/providers';
 import { OfficeShell } from '@/components/shell/office-shell';
 import { pageContext } from '@/server/base/page-context';
 import { listMyShops } from '@/server/people/switch-shop';
+import { carriersMissing } from '@/server/ports/carriers-missing';
 
 export default async function OfficeLayout({ children }: { children: ReactNode }) {
   const ctx = await pageContext('shop:read');
@@ -13,6 +14,7 @@ export default async function OfficeLayout({ children }: { children: ReactNode }
         shop={{ id: shop.id, name: shop.name }}
         shops={await listMyShops(ctx)}
         person={{ name: actor.name, role: actor.role }}
+        carriersMissing={carriersMissing()}
       >
         {children}
       </OfficeShell>

@@ -1,6 +1,7 @@
 import type { ReactNode } from 'react';
 import { Toaster } from '@/components/ui/toaster';
-import { type Role, roleWords } from '@/lib/permissions';
+import { may, type Role, roleWords } from '@/lib/permissions';
+import { CarriersNote } from './carriers-note';
 import { ListButtons } from './list-buttons';
 import { OfficeKeys } from './office-keys';
 import { OfficeLinks } from './office-links';
@@ -16,11 +17,19 @@ type OfficeShellProps = {
   /** All shops of this person. */
   shops?: ShopChoice[];
   person: { name: string; role: Role };
+  /** What nobody carries to customers yet. */
+  carriersMissing?: readonly string[];
   children: ReactNode;
 };
 
 /** The office's margin with its pages, and the sheet beside it. Wants the query client around it. */
-export function OfficeShell({ shop, shops = [], person, children }: OfficeShellProps) {
+export function OfficeShell({
+  shop,
+  shops = [],
+  person,
+  carriersMissing = [],
+  children,
+}: OfficeShellProps) {
   const links = <OfficeLinks pages={officePagesFor(person.role)} />;
   const foot = (
     <div className="flex flex-col gap-2 pr-3 max-md:pr-0">
@@ -53,6 +62,7 @@ export function OfficeShell({ shop, shops = [], person, children }: OfficeShellP
         <div className="mt-auto">{foot}</div>
       </header>
       <main id="main" tabIndex={-1} className="min-w-0 px-4 py-4 outline-none md:px-6">
+        {may(person.role, 'messages:read') ? <CarriersNote missing={carriersMissing} /> : null}
         {children}
       </main>
       <OfficeKeys role={person.role} />
