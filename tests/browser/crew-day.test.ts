@@ -7,7 +7,7 @@ import { asFoundAsks } from '@/lib/days/as-found-asks';
 import { apiPaths, paths } from '@/lib/paths';
 import { formatLength } from '@/lib/units/format-length';
 import { getAt } from '../help/ask-at';
-import { keepPicture } from '../help/browser';
+import { keepPicture, useBrowser } from '../help/browser';
 import { expectNoSeriousFault } from '../help/browser-faults';
 import { type CrewDayShop, openCrewDayShop } from '../help/crew-day-shop';
 import { type OwnPhone, useOwnPhones } from '../help/own-phone';
@@ -16,6 +16,7 @@ import { plainJpeg } from '../help/test-photo';
 import { openWobblyLine, type WobblyLine } from '../help/wobbly-line';
 
 describe('a crew’s day with no signal', () => {
+  const browser = useBrowser();
   const ownPhone = useOwnPhones();
   let shop: CrewDayShop;
   let line: WobblyLine;
@@ -29,7 +30,7 @@ describe('a crew’s day with no signal', () => {
   const title = (page: Page, name: RegExp) =>
     page.getByRole('heading', { level: 1, name }).waitFor();
 
-  it('goes from the first drive to the signature, and arrives whole when the signal is back', async () => {
+  it('goes from the first drive to the signature, arrives whole when the signal is back, and is seen at once in the office', async () => {
     const phone = await ownPhone({ ...shop, baseUrl: line.baseUrl });
     await phone.page.goto(paths.today());
     await phone.page.getByText('all sent · ready for no signal').waitFor();
@@ -40,6 +41,10 @@ describe('a crew’s day with no signal', () => {
       )
       .toContain(`code:${shop.installId}`);
     await expectNoSeriousFault(phone.page);
+
+    const office = await browser.openPage({ cookie: shop.cookie });
+    await office.goto(paths.job(shop.jobId));
+    await office.getByText('none open').waitFor();
 
     line.set('gone');
     await phone.setOffline(true);
@@ -81,6 +86,9 @@ describe('a crew’s day with no signal', () => {
     await phone.setOffline(false);
     await phone.page.getByText(/^all sent/).waitFor({ timeout: 30_000 });
     await arrivedWhole();
+    // The page stood open in the office all day, and nobody touched it.
+    await office.getByRole('heading', { name: 'Signed' }).waitFor();
+    await office.getByText('1 open').waitFor();
     expect(await readStore(phone.page, 'queue')).toEqual([]);
   });
 

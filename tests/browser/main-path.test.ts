@@ -289,7 +289,7 @@ describe('one job from the first call to the booked install', () => {
     await measurer.getByRole('heading', { name: 'Shop sheet, revision A' }).waitFor();
     await expectNoSeriousFault(measurer);
 
-    const bench = await browser.openPage();
+    const bench = await browser.openPage({ size: 'tablet' });
     await signIn(bench, 'bench');
     const card = bench.getByRole('article', { name: new RegExp(customer) });
     await expectNoSeriousFault(bench);
@@ -298,6 +298,7 @@ describe('one job from the first call to the booked install', () => {
     await bench.getByText('taken up:').first().waitFor();
     await keepPicture(bench, 'sheet');
     await bench.goto(paths.bench());
+    await keepPicture(bench, 'bench');
     await card.getByRole('button', { name: 'Ready', exact: true }).click();
     await card.getByLabel('Where they stand').fill('rack 3 by the door');
     await card.getByRole('button', { name: 'They are ready' }).click();

@@ -5,7 +5,7 @@ import { afterAll, afterEach, beforeAll, expect, inject } from 'vitest';
 import type { Role } from '@/lib/permissions';
 import { watchRequests } from './settled';
 
-export type Size = 'desk' | 'phone';
+export type Size = 'desk' | 'tablet' | 'phone';
 export type Theme = 'light' | 'dark';
 
 type Opening = {
@@ -13,6 +13,8 @@ type Opening = {
   theme?: Theme;
   /** Who is signed in; nobody where it is left out. */
   as?: Role;
+  /** Who is signed in, of another shop than the demo's: what their browser sends. */
+  cookie?: string;
   javaScript?: boolean;
   /** Lines of the console that belong to the test, such as a refusal that it asks for. */
   mayLog?: RegExp[];
@@ -30,6 +32,7 @@ export const flags = [
 
 export const sizes = {
   desk: { viewport: { width: 1440, height: 900 } },
+  tablet: { viewport: { width: 1024, height: 768 }, hasTouch: true },
   phone: {
     viewport: { width: 390, height: 844 },
     deviceScaleFactor: 2,
@@ -55,6 +58,7 @@ export function useBrowser() {
 
   async function openContext(opening: Opening = {}): Promise<BrowserContext> {
     const { size = 'desk', theme = 'light', as, javaScript = true, mayLog = [] } = opening;
+    const cookie = opening.cookie ?? (as && inject('sessions')[as]);
     const baseURL = inject('baseUrl');
     const context = await browser.newContext({
       ...sizes[size],
@@ -72,7 +76,7 @@ export function useBrowser() {
     context.setDefaultTimeout(15_000);
     opened.push(context);
     watchRequests(context);
-    if (as) await context.addCookies(cookies(inject('sessions')[as], baseURL));
+    if (cookie) await context.addCookies(cookies(cookie, baseURL));
     const fault = (words: string) => {
       if (!mayLog.some((pattern) => pattern.test(words))) faults.push(words);
     };
@@ -109,7 +113,8 @@ export async function signIn(page: Page, role: Role): Promise<void> {
 /** For whoever wants to look, with KEEP_PICTURES=1: tests/.out/shots/<name>-<size>-<theme>.png. */
 export async function keepPicture(page: Page, name: string, theme: Theme = 'light') {
   if (!process.env.KEEP_PICTURES) return;
-  const size = (page.viewportSize()?.width ?? 0) > 800 ? 'desk' : 'phone';
+  const width = page.viewportSize()?.width;
+  const size = Object.entries(sizes).find(([, { viewport }]) => viewport.width === width)?.[0];
   mkdirSync('tests/.out/shots', { recursive: true });
   await page.screenshot({
     path: `tests/.out/shots/${name}-${size}-${theme}.png`,
