@@ -47,6 +47,8 @@ export const messages = pgTable(
     claimedAt: instant('claimed_at'),
     /** Of the first try: since then the provider may have it. */
     firstTriedAt: instant('first_tried_at'),
+    /** Told in one message with this one of the same customer, whose fate it shares from then on. */
+    toldWith: uuid('told_with'),
     providerId: text('provider_id'),
     sentAt: instant('sent_at'),
     deliveredAt: instant('delivered_at'),
@@ -86,6 +88,11 @@ export const messages = pgTable(
       columns: [table.shopId, table.writtenBy],
       foreignColumns: [people.shopId, people.id],
     }),
+    foreignKey({
+      name: 'messages_told_with',
+      columns: [table.shopId, table.toldWith],
+      foreignColumns: [table.shopId, table.id],
+    }),
     index('messages_due').on(table.state, table.dueAt),
     index('messages_to_ask').on(table.askAt),
     index('messages_by_customer').on(table.shopId, table.customerId),
@@ -93,6 +100,7 @@ export const messages = pgTable(
     index('messages_by_job').on(table.shopId, table.jobId),
     index('messages_by_visit').on(table.shopId, table.visitId),
     index('messages_by_provider').on(table.providerId),
+    index('messages_by_lead').on(table.toldWith),
   ],
 );
 
