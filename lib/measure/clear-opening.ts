@@ -1,16 +1,8 @@
 /** The largest plumb, square block that goes between the two ends of a run. */
-import {
-  combinedU,
-  type EndView,
-  type FacePlace,
-  furthestIn,
-  leastSafe,
-  placeFrom,
-  placesOf,
-  viewEnd,
-  weigh,
-} from '@/lib/measure/end-view';
+import { type EndView, type FacePlace, viewEnd } from '@/lib/measure/end-view';
 import { type Figure, figure } from '@/lib/measure/figure';
+import { furthestIn, placeFrom, placesOf } from '@/lib/measure/governing-places';
+import { combinedU, leastSafe, weigh } from '@/lib/measure/place-uncertainty';
 import { angleToSetLine, frameCovariance, type RunFrame } from '@/lib/measure/run-frame';
 import type { Outcome, Problem } from '@/lib/problem';
 

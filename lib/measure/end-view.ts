@@ -1,10 +1,5 @@
 /** One end of a run as seen from its set line: where its face stands at any place, and how sure. */
-import {
-  type FaceSurface,
-  type FaceValue,
-  faceSurface,
-  readingsBehind,
-} from '@/lib/measure/face-surface';
+import { type FaceSurface, type FaceValue, faceSurface } from '@/lib/measure/face-surface';
 import {
   angleToSetLine,
   type OtherRunEnd,
@@ -42,7 +37,8 @@ export type EndView = {
 };
 
 const DEG = Math.PI / 180;
-const NO_SLOPE: readonly number[] = new Array<number>(PARAMETER_COUNT).fill(0);
+/** A place that no parameter of the frame moves. */
+export const NO_SLOPE: readonly number[] = new Array<number>(PARAMETER_COUNT).fill(0);
 
 /** The opening and the fill of a run look at the same ends: a frame, once made, is never changed. */
 const views = new WeakMap<RunFrame, Partial<Record<'left' | 'right', EndView>>>();
@@ -190,118 +186,6 @@ function lensOf(frame: RunFrame, end: 'left' | 'right'): Lens {
       return slope;
     },
   };
-}
-
-/** Every place that can govern: the corners of the part asked for and the readings' lines inside it. */
-export function placesOf(
-  view: EndView,
-  yRangeMm: readonly [number, number],
-  zRangeMm: readonly [number, number],
-): FacePlace[] {
-  const ys = nodes(view.surface?.yMm ?? [], yRangeMm);
-  const zs = nodes(view.surface?.zMm ?? [], zRangeMm);
-  return ys.flatMap((y) => zs.map((z) => view.at(y, z)));
-}
-
-/** The place furthest into the run; the first of equals within 1e-6 mm. */
-export function furthestIn(places: FacePlace[]): FacePlace | null {
-  let found: FacePlace | null = null;
-  for (const place of places) {
-    if (!found || inward(place) > inward(found) + 1e-6) found = place;
-  }
-  return found;
-}
-
-/** Larger: further into the run. */
-export function inward(place: FacePlace): number {
-  return place.end === 'left' ? place.xMm : -place.xMm;
-}
-
-/** Readings behind one place. */
-export function placeFrom(view: EndView, place: FacePlace): string[] {
-  return unique([...view.baseFrom, ...readingsBehind(place)]);
-}
-
-/** A term of a sum of places; the sign may be any weight. */
-export type PlaceTerm = { place: FacePlace; sign: number };
-
-/** Standard u of Σ sign·x over places, with what they share counted once. */
-export function combinedU(covariance: number[][], terms: PlaceTerm[], otherU = 0): number {
-  const slope = [...NO_SLOPE];
-  let variance = otherU * otherU;
-  for (const { place, sign } of samePlacesMerged(terms)) {
-    for (let i = 0; i < PARAMETER_COUNT; i++) {
-      slope[i] = (slope[i] ?? 0) + sign * (place.slope[i] ?? 0);
-    }
-    variance += (sign * place.ownU) ** 2;
-  }
-  return Math.sqrt(Math.max(0, variance + dot(slope, timesCovariance(covariance, slope))));
-}
-
-/** One place named twice is one reading, not two. */
-function samePlacesMerged(terms: PlaceTerm[]): PlaceTerm[] {
-  const merged: PlaceTerm[] = [];
-  for (const term of terms) {
-    const same = merged.find(
-      ({ place }) =>
-        place.end === term.place.end &&
-        place.yMm === term.place.yMm &&
-        place.zMm === term.place.zMm,
-    );
-    if (same) same.sign += term.sign;
-    else merged.push({ ...term });
-  }
-  return merged;
-}
-
-/** A place with what must be kept clear of it, ready for many pairings. */
-export type WeighedPlace = {
-  place: FacePlace;
-  clearMm: number;
-  variance: number;
-  covarianceSlope: number[];
-};
-
-/** Places with what must be kept clear of each, their variances reckoned once for many pairings. */
-export function weigh(
-  covariance: number[][],
-  places: { place: FacePlace; clearMm: number }[],
-): WeighedPlace[] {
-  return places.map(({ place, clearMm }) => {
-    const covarianceSlope = timesCovariance(covariance, place.slope);
-    const variance = dot(place.slope, covarianceSlope) + place.ownU ** 2;
-    return { place, clearMm, variance, covarianceSlope };
-  });
-}
-
-/** Least of (room between − 2u) over every pair of places, each clear of its end. */
-export function leastSafe(lefts: WeighedPlace[], rights: WeighedPlace[], otherU = 0): number {
-  let least = Number.POSITIVE_INFINITY;
-  for (const left of lefts) {
-    for (const right of rights) {
-      const shared = dot(left.place.slope, right.covarianceSlope);
-      const variance = left.variance + right.variance - 2 * shared + otherU * otherU;
-      const roomMm = right.place.xMm - right.clearMm - left.place.xMm - left.clearMm;
-      least = Math.min(least, roomMm - 2 * Math.sqrt(Math.max(0, variance)));
-    }
-  }
-  return least;
-}
-
-function timesCovariance(covariance: number[][], slope: readonly number[]): number[] {
-  return covariance.map((row) => dot(row, slope));
-}
-
-function dot(a: readonly number[], b: readonly number[]): number {
-  let sum = 0;
-  for (let i = 0; i < PARAMETER_COUNT; i++) sum += (a[i] ?? 0) * (b[i] ?? 0);
-  return sum;
-}
-
-function nodes(inside: number[], range: readonly [number, number]): number[] {
-  const [from, to] = range;
-  if (to <= from) return [from];
-  return [from, ...inside.filter((value) => value > from + 1e-6 && value < to - 1e-6), to];
 }
 
 function unique(ids: readonly string[]): string[] {

@@ -1,14 +1,10 @@
 /** Filling a run: room, slack, where each unit stands, and whether it goes. */
 import { endProblems } from '@/lib/measure/clear-opening';
-import {
-  combinedU,
-  type FacePlace,
-  leastSafe,
-  type PlaceTerm,
-  placeFrom,
-} from '@/lib/measure/end-view';
+import type { FacePlace } from '@/lib/measure/end-view';
 import { type Figure, figure } from '@/lib/measure/figure';
 import { type FillEnd, type FillSide, lookAtEnd } from '@/lib/measure/fill-side';
+import { placeFrom } from '@/lib/measure/governing-places';
+import { combinedU, leastSafe, type PlaceTerm } from '@/lib/measure/place-uncertainty';
 import { frameCovariance, type RunFrame } from '@/lib/measure/run-frame';
 import {
   type EndLimit,

@@ -1,14 +1,7 @@
 /** One end of a run as filling sees it: the two limits, and the place that governs. */
-import {
-  type EndView,
-  type FacePlace,
-  furthestIn,
-  inward,
-  placesOf,
-  viewEnd,
-  type WeighedPlace,
-  weigh,
-} from '@/lib/measure/end-view';
+import { type EndView, type FacePlace, viewEnd } from '@/lib/measure/end-view';
+import { furthestIn, inward, placesOf } from '@/lib/measure/governing-places';
+import { type WeighedPlace, weigh } from '@/lib/measure/place-uncertainty';
 import type { RunFrame } from '@/lib/measure/run-frame';
 
 export type FillEnd = {
