@@ -9,6 +9,7 @@ import { nextRevision } from '@/lib/sheet/next-revision';
 import { openPoints } from '@/lib/sheet/open-points';
 import { proofRows } from '@/lib/sheet/proof-rows';
 import { readingLines } from '@/lib/sheet/reading-lines';
+import { releaseStops } from '@/lib/sheet/release-stops';
 import { wallsOf } from '@/lib/sheet/room-names';
 import { ClosurePanel } from './closure-panel';
 import { CutList } from './cut-list';
@@ -87,7 +88,10 @@ export function FitScreen({ view, choice, mayLayOut, mayRelease }: FitScreenProp
         <div className="flex min-w-0 flex-col gap-6">
           <section>
             <TitleBlock title="What the room says" meta={revisionWords(view)} />
-            <VerdictList fit={fit} room={room} rules={rules} />
+            <VerdictList
+              {...{ fit, room, rules }}
+              wallHref={(wall) => fitHref(jobId, room.id, { wall })}
+            />
           </section>
           <section>
             <TitleBlock title="Does it close?" meta={fit.closure.suspect ? 'look again' : null} />
@@ -111,6 +115,7 @@ export function FitScreen({ view, choice, mayLayOut, mayRelease }: FitScreenProp
                 seenRunsMark={view.runsMark}
                 nextRevision={nextRevision(releases[0]?.revision ?? null)}
                 openPoints={openPoints(fit, missing)}
+                stops={releaseStops(fit)}
                 changes={view.changesSinceRelease}
               />
             ) : null}

@@ -18,13 +18,16 @@ type ReleasePanelProps = {
   nextRevision: string;
   /** What speaks against it; with any, a reason is asked for. */
   openPoints: string[];
+  /** What no reason lifts; with any, there is no button. */
+  stops: string[];
   /** What it would change against the newest revision; null before the first. */
   changes: string[] | null;
 };
 
 /** The step from a fit to the bench: what is open, what changes, and the button. */
 export function ReleasePanel(props: ReleasePanelProps) {
-  const { jobId, roomId, seenReadingIds, seenRunsMark, nextRevision, openPoints, changes } = props;
+  const { jobId, roomId, seenReadingIds, seenRunsMark, nextRevision, openPoints, stops, changes } =
+    props;
   const router = useRouter();
   let released = nextRevision;
   const form = useFormRequest(
@@ -42,6 +45,18 @@ export function ReleasePanel(props: ReleasePanelProps) {
       <p className="py-2">
         <Verdict kind="confirmed">nothing changed since the newest revision</Verdict>
       </p>
+    );
+  }
+  if (stops.length > 0) {
+    return (
+      <section className="py-2">
+        <h3>
+          <Verdict kind="over" className="font-bold">
+            cannot be released yet
+          </Verdict>
+        </h3>
+        <Lines lines={stops} />
+      </section>
     );
   }
   return (

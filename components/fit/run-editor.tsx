@@ -11,7 +11,7 @@ import type { FitView } from '@/lib/contracts/rooms';
 import type { Run } from '@/lib/contracts/wall-book';
 import { drawElevation } from '@/lib/drawing/elevation';
 import { fitRoom } from '@/lib/measure/fit-room';
-import { withWidths } from '@/lib/sheet/with-widths';
+import { wayOutOf } from '@/lib/sheet/with-widths';
 import { EndFields } from './end-fields';
 import { InFractions } from './in-fractions';
 import { RunFields } from './run-fields';
@@ -146,11 +146,10 @@ function useLiveFit({ wallBook, rules, runs: saved }: RunEditorProps['view'], ru
   return useMemo(() => {
     const runs = [...saved.filter(({ id }) => id !== run.id), run];
     const fit = fitRoom(wallBook, runs, rules);
-    const of = (all: typeof fit) => all.runs.find(({ runId }) => runId === run.id) ?? null;
-    const runFit = of(fit);
-    const suggestion = runFit?.fill?.suggestion ?? null;
-    const changed = suggestion?.possible ? withWidths(run, suggestion) : null;
-    const after = changed ? of(fitRoom(wallBook, [...runs.slice(0, -1), changed], rules)) : runFit;
+    const runFit = fit.runs.find(({ runId }) => runId === run.id) ?? null;
+    const wayOut = runFit ? wayOutOf({ wallBook, runs, rules }, runFit) : null;
+    const changed = wayOut?.run ?? null;
+    const after = wayOut?.after ?? runFit;
     const drawing = drawElevation({ wallBook, runs, fit, rules, wallId: run.wallId });
     return { runFit, after, changed, drawing };
   }, [wallBook, rules, saved, run]);

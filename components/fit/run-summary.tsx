@@ -1,4 +1,5 @@
 import Link from 'next/link';
+import type { ReactNode } from 'react';
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { OpeningPlace, RunFit } from '@/lib/measure/run-fit';
 import { fillRuleBehind } from '@/lib/sheet/rule-behind';
@@ -13,10 +14,12 @@ type RunSummaryProps = {
   rules: FitRules;
   /** Where the run is laid out; absent where the person may not. */
   editHref?: string;
+  /** In place of the words of a way out: the way itself, to be taken. */
+  wayOut?: ReactNode;
 };
 
 /** What the room leaves a run: the largest plumb block and what governs it, slack, gap behind, verdict. */
-export function RunSummary({ runFit, rules, editHref }: RunSummaryProps) {
+export function RunSummary({ runFit, rules, editHref, wayOut }: RunSummaryProps) {
   const { clearOpening, fill, setLine, kicks } = runFit;
   return (
     <section className="border-b border-rule py-2.5 print:py-1">
@@ -41,8 +44,9 @@ export function RunSummary({ runFit, rules, editHref }: RunSummaryProps) {
           <RuleLine by={fillRuleBehind(runFit, rules)} />
         </div>
       ) : null}
+      {wayOut}
       {fill?.suggestion ? (
-        <p>
+        <p className={wayOut ? 'hidden print:block' : undefined}>
           <span className="font-medium">
             {fill.suggestion.possible ? 'A way out: ' : 'No way out: '}
           </span>

@@ -1,17 +1,26 @@
+import Link from 'next/link';
 import { Verdict } from '@/components/ui/verdict';
 import { VerdictNote } from '@/components/ui/verdict-note';
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Room } from '@/lib/contracts/wall-book';
 import { suspectAdvice } from '@/lib/drawing/closure-words';
 import type { Fit } from '@/lib/measure/fit';
+import type { RunFill, RunFit } from '@/lib/measure/run-fit';
 import { ruleBehind } from '@/lib/sheet/rule-behind';
 import { InFractions } from './in-fractions';
 import { RuleLine } from './rule-line';
+import { RunVerdict } from './run-verdict';
 
-type VerdictListProps = { fit: Fit; room: Room; rules: FitRules };
+type VerdictListProps = {
+  fit: Fit;
+  room: Room;
+  rules: FitRules;
+  /** Where a wall with its runs is shown. */
+  wallHref: (wallId: string) => string;
+};
 
 /** What the fit says about the room, worst first, each with the rule that says so. */
-export function VerdictList({ fit, room, rules }: VerdictListProps) {
+export function VerdictList({ fit, room, rules, wallHref }: VerdictListProps) {
   const loud = fit.verdicts.filter(({ verdict }) => verdict !== 'within');
   const quiet = fit.verdicts.length - loud.length;
   const errors = fit.problems.filter(({ severity }) => severity === 'error');
@@ -30,6 +39,11 @@ export function VerdictList({ fit, room, rules }: VerdictListProps) {
         </VerdictNote>
       ))}
       <ul>
+        {fit.runs.map((run) =>
+          run.fill && run.fill.verdict !== 'fits' ? (
+            <RunLine key={run.runId} run={run} fill={run.fill} href={wallHref(run.wallId)} />
+          ) : null,
+        )}
         {loud.map((verdict) => (
           <li
             key={`${verdict.check} ${verdict.words}`}
@@ -64,10 +78,25 @@ export function VerdictList({ fit, room, rules }: VerdictListProps) {
       {quiet > 0 ? (
         <p className="text-graphite">
           {loud.length === 0 && !suspect && errors.length === 0
-            ? `All ${quiet} checks are within their rules.`
-            : `${quiet} more checks are within their rules.`}
+            ? `All ${quiet} checks of the room are within their rules.`
+            : `${quiet} more checks of the room are within their rules.`}
         </p>
       ) : null}
     </div>
+  );
+}
+
+/** A run that does not come out, and the way to its wall, where the change of widths can be taken. */
+function RunLine({ run, fill, href }: { run: RunFit; fill: RunFill; href: string }) {
+  return (
+    <li className="grid grid-cols-[5.5rem_minmax(0,1fr)] gap-x-2 border-b border-rule py-1.5">
+      <RunVerdict verdict={fill.verdict} className="self-start" />
+      <div>
+        {run.name}: <InFractions words={fill.words} />{' '}
+        <Link href={href} scroll={false} className="link">
+          {fill.suggestion?.possible ? 'See the way out' : 'See its wall'}
+        </Link>
+      </div>
+    </li>
   );
 }

@@ -4,13 +4,16 @@ import { TitleBlock } from '@/components/ui/title-block';
 import type { FitView } from '@/lib/contracts/rooms';
 import type { Wall } from '@/lib/contracts/wall-book';
 import { drawElevation } from '@/lib/drawing/elevation';
+import type { RunFit } from '@/lib/measure/run-fit';
 import { linesOfWall } from '@/lib/sheet/lines-of-wall';
 import type { ReadingLine } from '@/lib/sheet/reading-lines';
+import { wayOutOf } from '@/lib/sheet/with-widths';
 import { fitHref } from './fit-links';
 import { ReadingTable } from './reading-table';
 import { RunSummary } from './run-summary';
 import { TroubleList } from './trouble-list';
 import { WallTabs } from './wall-tabs';
+import { WayOut } from './way-out';
 
 type WallPanelProps = {
   view: FitView;
@@ -55,6 +58,7 @@ export function WallPanel({ view, wall, lines, mayLayOut }: WallPanelProps) {
           editHref={
             mayLayOut ? fitHref(jobId, roomId, { wall: wall.id, lay: runFit.runId }) : undefined
           }
+          wayOut={mayLayOut ? wayOut(view, runFit) : null}
         />
       ))}
       {mayLayOut ? (
@@ -75,5 +79,16 @@ export function WallPanel({ view, wall, lines, mayLayOut }: WallPanelProps) {
         <ReadingTable lines={ofWallLines} caption={`Readings of wall ${wall.name}`} />
       </details>
     </section>
+  );
+}
+
+/** Null where the run comes out, or no change of its widths can help. */
+function wayOut(view: FitView, runFit: RunFit) {
+  const way = wayOutOf(view, runFit);
+  if (!way) return null;
+  const { runs, runsMark, rules } = view;
+  const roomId = view.wallBook.room.id;
+  return (
+    <WayOut key={runsMark} view={{ runs, runsMark, rules, roomId }} before={runFit} way={way} />
   );
 }
