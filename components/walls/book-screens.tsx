@@ -4,8 +4,9 @@ import { Suspense, useEffect, useRef, useState } from 'react';
 import { keepDraft } from '@/components/phone/draft-store';
 import type { RoomOnPhone } from '@/components/phone/room-store';
 import type { WallBookView } from '@/lib/contracts/rooms';
+import { IN_THE_WAY } from '@/lib/measure/in-the-way';
 import { walkRoom } from '@/lib/measure/room-walk';
-import { nextAsk, toGoWords } from '@/lib/walls-pad/next-ask';
+import { nextAsk, slotBefore, toGoWords } from '@/lib/walls-pad/next-ask';
 import { photoFigures } from '@/lib/walls-pad/photo-figures';
 import { readingWords } from '@/lib/walls-pad/reading-words';
 import { type LengthSpeech, speechIn } from '@/lib/walls-pad/say-length';
@@ -98,8 +99,9 @@ function BookScreen({ room, kept }: BookScreensProps) {
         goOn(question.slot);
         goTo(onward);
       }}
-      onSkipped={() => {
-        goOn(question.slot);
+      onSkipped={(reason) => {
+        const isAskedInPieces = question.ask.kind === 'length' && reason === IN_THE_WAY;
+        goOn(isAskedInPieces ? slotBefore(plan, question.slot) : question.slot);
         goTo(onward);
       }}
       onBack={() => goTo(back)}

@@ -86,6 +86,7 @@ export function questionAgain(
 
 export const freeKinds = [
   'length',
+  'pieces',
   'corner',
   'face',
   'floor',
@@ -120,6 +121,19 @@ export function freeQuestion(
         ...base,
         title: `Wall ${name}, length`,
         ask: { kind, wallId, zMm, yMm: 0, nominalMm: walked?.wall.nominalLengthMm ?? 0 },
+      };
+    case 'pieces':
+      return {
+        ...base,
+        title: `Wall ${name}, in pieces`,
+        why: 'Up from the floor; then corner to mark, mark to mark, mark to corner.',
+        ask: {
+          kind,
+          wallId,
+          zMm,
+          nominalMm: walked?.wall.nominalLengthMm ?? 0,
+          stretches: ['piece to the mark', 'piece from the mark'],
+        },
       };
     case 'corner': {
       if (!walked?.before) return null;

@@ -74,7 +74,7 @@ export function PadSheets({ sheet, tools, use, habits, onClose, ...props }: PadS
       return (
         <ChoiceSheet
           title="Why can it not be taken?"
-          choices={skipReasons}
+          choices={skipReasons(use)}
           onChoose={props.onSkip}
           onBack={onClose}
         >

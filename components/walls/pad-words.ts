@@ -1,4 +1,6 @@
 import type { ReadingOf, Touches } from '@/lib/contracts/wall-book';
+import { IN_THE_WAY } from '@/lib/measure/in-the-way';
+import type { ToolUse } from '@/lib/walls-pad/pad-tools';
 import { type Region, tradeName, tradeWord } from '@/lib/words/trade';
 import type { Choice } from './choice-sheet';
 
@@ -22,14 +24,23 @@ export const touchesWord = (touches: Touches, region: Region): string =>
     .find(({ value }) => value === touches)
     ?.words.replace(/ that.*/, '') ?? touches;
 
-export const skipReasons: Choice<string>[] = [
-  'Something stands in the way',
+const otherSkips: Choice<string>[] = [
   'Not built yet',
   'No safe way to reach it',
   'The customer asked us not to',
   'The tool for it is not here',
   'Not needed: no cabinet comes here',
 ].map((words) => ({ value: words, words }));
+
+/** Why a question is left; a length that something stands in the way of is asked for in pieces. */
+export const skipReasons = (use: ToolUse): Choice<string>[] => [
+  {
+    value: IN_THE_WAY,
+    words: IN_THE_WAY,
+    ...(use === 'length' ? { hint: 'then it is asked for in pieces, mark to mark' } : {}),
+  },
+  ...otherSkips,
+];
 
 export const withdrawReasons: Choice<string>[] = [
   'Misread',

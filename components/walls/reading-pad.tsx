@@ -21,7 +21,7 @@ type ReadingPadProps = ReadingPadInput & {
   /** "Wall A, length at the floor: 142 1/8\"". */
   lastKept: string | undefined;
   onHabits: (change: Partial<PadHabits>) => void;
-  onSkipped: () => void;
+  onSkipped: (reason: string) => void;
   onBack: () => void;
 };
 
@@ -67,7 +67,7 @@ export function ReadingPad(props: ReadingPadProps) {
           const { personId } = pad;
           await keepSkip({ personId, roomId, toolId: pad.tool.id, habits, reason, slot });
           close();
-          props.onSkipped();
+          props.onSkipped(reason);
         }}
       />
     );

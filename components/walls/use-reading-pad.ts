@@ -41,7 +41,10 @@ export function useReadingPad({ question, view, habits, keptDraft, onKept }: Rea
 
   const speech = speechIn(rules, habits.unit);
   const { ask, isFree } = question;
-  const fields = [...(isFree ? placeFields(ask) : []), ...padFields(ask, draft.cornerMethod)];
+  const fields = [
+    ...(isFree ? placeFields(ask) : []),
+    ...padFields(ask, draft.cornerMethod, draft.entries),
+  ];
   const use: ToolUse = ask.kind === 'corner' && draft.cornerMethod === 'angle' ? 'angle' : ask.kind;
   const tool = toolInHand(view.tools, use, habits.toolIds[use]);
   const group = 'setUpGroup' in ask ? setUpKey(roomId, ask.setUpGroup) : null;

@@ -131,6 +131,7 @@ function addable(
     },
     { words: 'A stud', place: add('stud') },
     { words: 'Its length at another height', place: add('length') },
+    { words: 'Its length in pieces, from mark to mark', place: add('pieces') },
     ...(hasCorner ? [{ words: 'The corner at its left, once more', place: add('corner') }] : []),
     { words: 'A gap to a plumb or straight line', place: add('face') },
     { words: 'The floor along it', place: add('floor') },

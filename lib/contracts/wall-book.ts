@@ -54,6 +54,16 @@ export const lengthReading = z.object({
   valueMm: lengthMm,
 });
 
+/** A wall whose whole cannot be reached, or is to be checked: stretches from its left corner to its right one. */
+export const piecesReading = z.object({
+  ...common,
+  kind: z.literal('pieces'),
+  wallId: id,
+  zMm: heightMm,
+  /** Left to right, mark to mark along the wall; together they are its whole length. */
+  piecesMm: z.array(lengthMm).min(2).max(12),
+});
+
 /** A corner is named by the wall that begins at it: the corner at that wall's LEFT end. */
 export const cornerReading = z.object({
   ...common,
@@ -207,6 +217,7 @@ export const skip = z.object({
 
 export const reading = z.discriminatedUnion('kind', [
   lengthReading,
+  piecesReading,
   cornerReading,
   faceReading,
   floorReading,

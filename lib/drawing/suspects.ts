@@ -61,6 +61,7 @@ export function slipWords({ slip, unit, known }: Slip, rules: Steps): string {
 function placeOf(reading: Reading): SuspectPlace | null {
   switch (reading.kind) {
     case 'length':
+    case 'pieces':
       return { kind: 'wall', wallId: reading.wallId, zMm: reading.zMm };
     case 'width':
       return { kind: 'wall', wallId: reading.wallId, zMm: reading.zMm };

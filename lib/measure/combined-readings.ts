@@ -13,6 +13,7 @@ import {
   lengthUncertainty,
   toolCommonPart,
 } from '@/lib/measure/uncertainty';
+import { piecesUncertainty, wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import type { Problem } from '@/lib/problem';
 
 /** Heights or depths no further apart than this are one place; from memory. */
@@ -23,10 +24,14 @@ export type CombinedLength = {
   zMm: number;
   yMm: number;
   length: Figure;
-  repeats: (Repeat & { reading: ReadingOf<'length'> })[];
+  repeats: LengthRepeat[];
+  /** Read in pieces; the whole beside it, where it was read, stands for itself. */
+  isInPieces: boolean;
   /** The repeats disagree by more than tool and shop allow. */
   disagree: boolean;
 };
+
+export type LengthRepeat = Repeat & { reading: ReadingOf<'length' | 'pieces'> };
 
 export type CombinedCorner = {
   cornerWallId: string;
@@ -43,38 +48,60 @@ export const FINDER_BLADE_MM = 250;
 /** Corners that differ by less are not a disagreement whatever the tool says; from memory. */
 const CORNER_AGREEMENT_DEG = 0.2;
 
-/** Lengths by wall, height and depth, in walking order. */
+/** Lengths by wall, height and depth, in walking order; after the wholes of a wall what its pieces make. */
 export function combinedLengths(book: RoomBook): {
   lengths: CombinedLength[];
   problems: Problem[];
 } {
   const problems: Problem[] = [];
   const lengths = book.walk.walls.flatMap(({ wall }) => {
-    const ofWall = book.ofKind('length').filter(({ wallId }) => wallId === wall.id);
-    return cluster(ofWall, ({ yMm }) => yMm, SAME_PLACE_MM).flatMap((atDepth) =>
-      cluster(atDepth, ({ zMm }) => zMm, SAME_PLACE_MM).flatMap((readings): CombinedLength[] => {
-        const first = readings[0];
-        const repeats = readings.map((reading) => ({
-          ...lengthRepeat(book, reading, reading.valueMm, 2),
-          reading,
-        }));
-        const mean = meanOf(repeats, book.rules.repeatAgreementMm);
-        problems.push(...mean.problems);
-        if (!first || !mean.value) return [];
-        return [
-          {
-            wallId: wall.id,
-            zMm: first.zMm,
-            yMm: first.yMm <= SAME_PLACE_MM ? 0 : first.yMm,
-            length: mean.value,
-            repeats,
-            disagree: mean.problems.length > 0,
-          },
-        ];
-      }),
-    );
+    const groups = [...wholesOf(book, wall.id), ...piecesOf(book, wall.id)];
+    return groups.flatMap(({ repeats, agreementMm, ...place }): CombinedLength[] => {
+      const mean = meanOf(repeats, agreementMm);
+      problems.push(...mean.problems);
+      if (!mean.value) return [];
+      const disagree = mean.problems.length > 0;
+      return [{ wallId: wall.id, ...place, length: mean.value, repeats, disagree }];
+    });
   });
   return { lengths, problems };
+}
+
+type LengthGroup = Pick<CombinedLength, 'zMm' | 'yMm' | 'repeats' | 'isInPieces'> & {
+  agreementMm: number;
+};
+
+function wholesOf(book: RoomBook, wallId: string): LengthGroup[] {
+  const ofWall = book.ofKind('length').filter((reading) => reading.wallId === wallId);
+  return cluster(ofWall, ({ yMm }) => yMm, SAME_PLACE_MM).flatMap((atDepth) =>
+    cluster(atDepth, ({ zMm }) => zMm, SAME_PLACE_MM).flatMap((readings): LengthGroup[] => {
+      const first = readings[0];
+      if (!first) return [];
+      const repeats = readings.map((reading) => ({
+        ...lengthRepeat(book, reading, reading.valueMm, 2),
+        reading,
+      }));
+      const yMm = first.yMm <= SAME_PLACE_MM ? 0 : first.yMm;
+      const agreementMm = book.rules.repeatAgreementMm;
+      return [{ zMm: first.zMm, yMm, repeats, isInPieces: false, agreementMm }];
+    }),
+  );
+}
+
+function piecesOf(book: RoomBook, wallId: string): LengthGroup[] {
+  const ofWall = book.ofKind('pieces').filter((reading) => reading.wallId === wallId);
+  return cluster(ofWall, ({ zMm }) => zMm, SAME_PLACE_MM).flatMap((readings): LengthGroup[] => {
+    const zMm = readings[0]?.zMm;
+    if (zMm === undefined) return [];
+    const repeats = readings.map((reading) => ({
+      id: reading.id,
+      value: wholeOfPieces(reading),
+      ...piecesUncertainty(book.toolOf(reading), reading.piecesMm),
+      toolId: reading.toolId,
+      reading,
+    }));
+    return [{ zMm, yMm: 0, repeats, isInPieces: true, agreementMm: book.rules.piecesAskMm }];
+  });
 }
 
 /** One reading of a length with its own and its tool's part of u. */

@@ -22,8 +22,9 @@ export function facesToCome(book: RoomBook): { faces: FacesToCome; problems: Pro
   if (thicknessMm > 0) {
     for (const reading of book.readings) {
       if (reading.touches !== 'bare-stud') continue;
-      if (reading.kind === 'length' || reading.kind === 'face') bare.add(reading.wallId);
-      if (reading.kind === 'corner') bare.add(reading.cornerWallId);
+      const { kind } = reading;
+      if (kind === 'length' || kind === 'pieces' || kind === 'face') bare.add(reading.wallId);
+      if (kind === 'corner') bare.add(reading.cornerWallId);
     }
   }
   const uMm = THICKNESS_LIMIT_MM / Math.sqrt(3);

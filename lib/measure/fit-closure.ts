@@ -132,7 +132,7 @@ function sizeWords(context: FitContext, size: number, unit: keyof typeof WAYS): 
 }
 
 function settleSteps(context: FitContext, room: AdjustedRoom, suspects: number[]): SettleStep[] {
-  const tape = context.book.toolOf(context.book.ofKind('length')[0] ?? { toolId: '' });
+  const tape = context.book.toolOf(context.lengths[0]?.repeats[0] ?? { toolId: '' });
   const steps = settle(room, {
     ...(suspects.length > 0 ? { suspects } : {}),
     uOfLengthMm: (lengthMm) => lengthUncertainty(tape, lengthMm, 2),

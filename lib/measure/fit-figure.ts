@@ -8,6 +8,8 @@ export type FigureKind =
   | 'corner-offset'
   | 'corner-twist'
   | 'wall-length-read'
+  | 'wall-length-in-pieces'
+  | 'pieces-against-whole'
   | 'wall-length'
   | 'wall-straightness'
   | 'wall-straightedge-gap'

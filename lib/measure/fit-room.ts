@@ -19,6 +19,7 @@ import {
   floorVerdicts,
   type Judge,
   judgeBy,
+  piecesVerdicts,
   runVerdicts,
   straightedgeOf,
   wallVerdicts,
@@ -109,7 +110,7 @@ function judgedWalls(context: FitContext, judge: Judge, ruleSets: readonly RuleS
   const isOverEdge = ruleFor(ruleSets, 'wall-straightness')?.rule.overMm !== null;
   const judged = walls.map((wall) => ({
     ...wall,
-    verdicts: wallVerdicts(judge, wall, isOverEdge),
+    verdicts: [...piecesVerdicts(judge, context, wall), ...wallVerdicts(judge, wall, isOverEdge)],
   }));
   return { walls: judged, problems };
 }

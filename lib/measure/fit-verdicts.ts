@@ -5,6 +5,8 @@ import type { CornerFit, FloorFit, WallFit } from '@/lib/measure/fit';
 import type { FoundAisle } from '@/lib/measure/fit-aisles';
 import type { FitContext } from '@/lib/measure/fit-context';
 import { type FitFigure, fitFigure, type Verdict } from '@/lib/measure/fit-figure';
+import { piecesAgainstWhole } from '@/lib/measure/pieces-against-whole';
+import { heightWords } from '@/lib/measure/plan-context';
 import type { CheckKind, RuleSet } from '@/lib/measure/rules/rule-set';
 import type { RunFit } from '@/lib/measure/run-fit';
 
@@ -62,6 +64,18 @@ export function wallVerdicts(judge: Judge, wall: WallFit, isOverEdge: boolean): 
     judge('wall-plumb', `Wall ${wall.name}, plumb`, over, heightMm),
   );
   return [...worstOf(rows), ...worstOf(columns)];
+}
+
+/** What the pieces of a wall make beside its whole, at each height that has both. */
+export function piecesVerdicts(judge: Judge, context: FitContext, wall: WallFit): Verdict[] {
+  return piecesAgainstWhole(context.lengths, wall.wallId).flatMap(({ zMm, difference }) =>
+    judge(
+      'pieces-against-whole',
+      `Wall ${wall.name}, pieces against the whole ${heightWords(zMm, context.rules)}`,
+      fitFigure('pieces-against-whole', difference),
+      0,
+    ),
+  );
 }
 
 /** Out of square over the depth of what stands there. */

@@ -43,10 +43,10 @@ function fitWall(
     name: wall.name,
     readAt: context.lengths
       .filter(({ wallId }) => wallId === wall.id)
-      .map(({ zMm, yMm, length }) => ({
+      .map(({ zMm, yMm, length, isInPieces }) => ({
         zMm,
         yMm,
-        length: fitFigure('wall-length-read', length),
+        length: fitFigure(isInPieces ? 'wall-length-in-pieces' : 'wall-length-read', length),
       })),
     length: isSure ? fitFigure('wall-length', frame.length) : null,
     zRefMm: frame?.zRefMm ?? 0,

@@ -32,6 +32,10 @@ export function knownSlips(observation: RoomObservation): KnownSlip[] {
       return cornerSlips(observation);
     case 'plumb':
       return [];
+    case 'length':
+      return observation.piecesMm
+        ? piecesSlips(observation.piecesMm, observation.unit)
+        : lengthSlips(observation.valueMm, observation.unit);
     default:
       return lengthSlips(observation.valueMm, observation.unit);
   }
@@ -42,6 +46,15 @@ function lengthSlips(valueMm: number, unit: RoomObservation['unit']): KnownSlip[
     [lengthMm, -lengthMm].filter((size) => valueMm - size > 0).map((size) => ({ name, size })),
   );
   return [...whole, ...swappedDigits(valueMm, unit)];
+}
+
+/** Each size once: a whole inch is the same slip in whichever piece it lies. */
+function piecesSlips(piecesMm: readonly number[], unit: RoomObservation['unit']): KnownSlip[] {
+  const slips = piecesMm.flatMap((piece) => lengthSlips(piece, unit));
+  return slips.filter(
+    ({ name, size }, at) =>
+      slips.findIndex((other) => other.name === name && other.size === size) === at,
+  );
 }
 
 /** Slips by two neighbouring digits of the whole inches or millimetres typed the wrong way round. */

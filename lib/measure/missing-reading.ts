@@ -4,6 +4,14 @@
 export type AskedReading =
   | { kind: 'length'; wallId: string; zMm: number; yMm: number; nominalMm: number }
   | {
+      kind: 'pieces';
+      wallId: string;
+      zMm: number;
+      nominalMm: number;
+      /** What each piece is called, left to right, at least two: "piece to the window", "window". */
+      stretches: string[];
+    }
+  | {
       kind: 'corner';
       cornerWallId: string;
       zMm: number;

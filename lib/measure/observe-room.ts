@@ -4,6 +4,7 @@ import {
   type CombinedLength,
   type CornerRepeat,
   cornerArms,
+  type LengthRepeat,
   lengthRepeat,
 } from '@/lib/measure/combined-readings';
 import type { Figure } from '@/lib/measure/figure';
@@ -89,6 +90,7 @@ function lengthObservations(combined: CombinedLength): LengthObservation[] {
   if (disagree) {
     return repeats.map((repeat) => ({
       ...base,
+      ...inPieces(repeat),
       valueMm: repeat.value,
       uMm: repeat.uOwn,
       tool: { toolId: repeat.toolId, uCommon: repeat.uCommon },
@@ -99,7 +101,14 @@ function lengthObservations(combined: CombinedLength): LengthObservation[] {
   const { own, tool } = shareOf(repeats);
   const unit = repeats[0]?.reading.unit ?? 'mm';
   const readingIds = repeats.map(({ id }) => id);
-  return [{ ...base, valueMm: length.value, uMm: own(length.u), tool, readingIds, unit }];
+  const valueMm = length.value;
+  return [
+    { ...base, ...inPieces(repeats[0]), valueMm, uMm: own(length.u), tool, readingIds, unit },
+  ];
+}
+
+function inPieces(repeat: LengthRepeat | undefined): Pick<LengthObservation, 'piecesMm'> {
+  return repeat?.reading.kind === 'pieces' ? { piecesMm: repeat.reading.piecesMm } : {};
 }
 
 function cornerObservations(input: ObserveInput, combined: CombinedCorner): CornerObservation[] {

@@ -4,6 +4,7 @@ import type { Reading, ReadingOf, Run, WallBook } from '@/lib/contracts/wall-boo
 import type { PlannedReading } from '@/lib/measure/missing-reading';
 import { type RoomWalk, type WalkedWall, walkRoom } from '@/lib/measure/room-walk';
 import { standingReadings } from '@/lib/measure/standing-readings';
+import { wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import { formatLength } from '@/lib/units/format-length';
 import { lengthLimits } from '@/lib/units/length-limits';
 
@@ -50,12 +51,15 @@ export function planContext(wallBook: WallBook, runs: Run[], rules: FitRules): P
 /** As read if it can be, else as drawn: where places along the wall are asked for. */
 export function lengthSoFar(context: PlanContext, walked: WalkedWall): number {
   const longestMm = lengthLimits.length.mostMm;
-  const read = context
-    .byKind('length')
-    .find(
-      ({ wallId, valueMm }) => wallId === walked.wall.id && valueMm > 0 && valueMm <= longestMm,
-    );
-  return read?.valueMm ?? Math.min(walked.wall.nominalLengthMm, longestMm);
+  const ofWall = ({ wallId }: { wallId: string }) => wallId === walked.wall.id;
+  const read = [
+    ...context
+      .byKind('length')
+      .filter(ofWall)
+      .map(({ valueMm }) => valueMm),
+    ...context.byKind('pieces').filter(ofWall).map(wholeOfPieces),
+  ].find((valueMm) => valueMm > 0 && valueMm <= longestMm);
+  return read ?? Math.min(walked.wall.nominalLengthMm, longestMm);
 }
 
 /** Runs that stand against a wall. */

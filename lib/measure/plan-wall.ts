@@ -15,6 +15,7 @@ import {
   runsOn,
   spreadPlaces,
 } from '@/lib/measure/plan-context';
+import { piecesInstead } from '@/lib/measure/plan-pieces';
 import { cornerName, frontDepth, type WalkedWall } from '@/lib/measure/room-walk';
 
 /** Face readings along a wall no further apart; common practice, no source. */
@@ -91,10 +92,10 @@ function planLengths(context: PlanContext, walked: WalkedWall, runs: Run[]): Ask
   // Two more heights prove a wall that no run touches as well: they let the room find a slip.
   const asked = heights.length >= 3 ? heights : lowestThree(rules.readingHeightsMm, heights);
   const plan = planHeight(rules);
-  return asked.map((zMm) => {
+  return asked.map((zMm): AskedSlot => {
     const served = runs.filter((run) => zMm >= run.z0Mm - 160 && zMm <= run.z1Mm + 160);
     const names = [...new Set(served.map(({ name }) => name))].join(' and ');
-    return {
+    const length: AskedSlot = {
       slot: `length:${wall.id}:${zMm}`,
       words: `Wall ${wall.name}, length ${heightWords(zMm, rules)}`,
       why:
@@ -112,6 +113,7 @@ function planLengths(context: PlanContext, walked: WalkedWall, runs: Run[]): Ask
         nominalMm: wall.nominalLengthMm,
       },
     };
+    return piecesInstead(context, walked, length) ?? length;
   });
 }
 

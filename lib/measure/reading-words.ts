@@ -14,6 +14,10 @@ export function observationWords(
   switch (observation.kind) {
     case 'length': {
       const out = observation.yMm > 0 ? `, ${lengthWords(observation.yMm, rules)} out` : '';
+      const { piecesMm } = observation;
+      if (piecesMm) {
+        return `Wall ${name(observation.wallId)}, ${piecesMm.length} pieces ${heightWords(observation.zMm, rules)}`;
+      }
       return `Wall ${name(observation.wallId)}, length ${heightWords(observation.zMm, rules)}${out}`;
     }
     case 'corner': {

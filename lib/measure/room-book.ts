@@ -75,6 +75,7 @@ function hasOnlyNumbers(reading: Reading): boolean {
   for (const key in fields) {
     const field = fields[key];
     if (typeof field === 'number' && !Number.isFinite(field)) return false;
+    if (Array.isArray(field) && !field.every(Number.isFinite)) return false;
   }
   return true;
 }

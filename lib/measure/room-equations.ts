@@ -38,6 +38,7 @@ export function equationOf(state: RoomState, observation: RoomObservation): Equa
 function bareEquation(state: RoomState, observation: RoomObservation): Equation | null {
   const { layout } = state;
   switch (observation.kind) {
+    // Pieces of a wall come as the whole that they make: the marks between lie on one line and drop out of the sum.
     case 'length': {
       const wall = wallOf(layout, observation.wallId);
       if (!wall) return null;

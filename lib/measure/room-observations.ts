@@ -37,6 +37,8 @@ export type LengthObservation = Common & {
   valueMm: number;
   /** Standard uncertainty without the tool's share. */
   uMm: number;
+  /** Read in pieces that make up the value: a slip may lie in any of them. */
+  piecesMm?: readonly number[];
 };
 
 /** How far the leg mark stands proud of the straight line corner to corner, from a face row. */

@@ -14,10 +14,11 @@ export function takenBy(context: PlanContext, ask: AskedReading): string[] {
   const ids = (readings: Reading[]) => readings.map(({ id }) => id);
   switch (ask.kind) {
     case 'length':
+    case 'pieces':
       return ids(
-        context
-          .byKind('length')
-          .filter(({ wallId, zMm }) => wallId === ask.wallId && near(zMm, ask.zMm, NEAR_HEIGHT_MM)),
+        [...context.byKind('length'), ...context.byKind('pieces')].filter(
+          ({ wallId, zMm }) => wallId === ask.wallId && near(zMm, ask.zMm, NEAR_HEIGHT_MM),
+        ),
       );
     case 'corner':
       return ids(

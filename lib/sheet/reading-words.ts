@@ -1,4 +1,5 @@
 import type { Reading, Room } from '@/lib/contracts/wall-book';
+import { wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import { formatLength } from '@/lib/units/format-length';
 import { featureWord } from '@/lib/words/feature-words';
 import type { Region } from '@/lib/words/trade';
@@ -34,6 +35,11 @@ export function readingWords(
         came: length(reading.valueMm),
       };
     }
+    case 'pieces':
+      return {
+        what: `${wall(reading.wallId)}, in pieces at ${length(reading.zMm)}`,
+        came: `${reading.piecesMm.map(length).join(' + ')} = ${length(wholeOfPieces(reading))}`,
+      };
     case 'corner':
       return {
         what: `Corner ${corner(reading.cornerWallId)} at ${length(reading.zMm)}`,

@@ -2,6 +2,7 @@ import type { Reading, ReadingOf, Tool, WallBook } from '@/lib/contracts/wall-bo
 import { type Figure, figure } from '@/lib/measure/figure';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { lengthUncertainty } from '@/lib/measure/uncertainty';
+import { piecesUncertainty, wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import { angleOfReading } from './verdict-corner';
 
 /** What has been read of walls and corners, one figure each; not adjusted, for the pad's plan and checks. */
@@ -10,7 +11,8 @@ export type AsRead = { lengthMm: Map<string, Figure>; cornerDeg: Map<string, Fig
 /**
  * Mean of the standing readings of every wall's length at the wall, and of every corner.
  *
- * Edge: what was not read is not there; lengths at the front depth count only where none was read at the wall.
+ * Edge: what was not read is not there; lengths at the front depth and those in pieces count only where none was
+ * read whole at the wall.
  */
 export function asRead({ readings, tools }: WallBook): AsRead {
   const standing = standingReadings(readings);
@@ -26,6 +28,10 @@ export function asRead({ readings, tools }: WallBook): AsRead {
   for (const reading of standing) {
     const tool = toolOf(reading);
     if (!tool) continue;
+    if (reading.kind === 'pieces' && !atWall.has(reading.wallId)) {
+      add(lengths, reading.wallId, piecesFigure(reading, tool));
+      continue;
+    }
     if (isLength(reading) && (isAtWall(reading) || !atWall.has(reading.wallId))) {
       add(lengths, reading.wallId, lengthFigure(reading, tool));
     } else if (reading.kind === 'corner') {
@@ -46,6 +52,11 @@ function isAtWall({ yMm }: ReadingOf<'length'>): boolean {
 
 function lengthFigure({ id, valueMm }: ReadingOf<'length'>, tool: Tool): Figure {
   return figure(valueMm, lengthUncertainty(tool, valueMm, 2), [id]);
+}
+
+function piecesFigure(reading: ReadingOf<'pieces'>, tool: Tool): Figure {
+  const { uOwn, uCommon } = piecesUncertainty(tool, reading.piecesMm);
+  return figure(wholeOfPieces(reading), Math.hypot(uOwn, uCommon), [reading.id]);
 }
 
 function add(groups: Map<string, Figure[]>, key: string, value: Figure): void {

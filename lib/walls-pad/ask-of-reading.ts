@@ -1,8 +1,9 @@
 import type { Reading, Room } from '@/lib/contracts/wall-book';
 import { walkRoom } from '@/lib/measure/room-walk';
+import { wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import type { LengthUnit } from '@/lib/units/brands';
 import { entryOfAngle, entryOfLength, type PadEntry } from './pad-entry';
-import type { PadAsk } from './pad-fields';
+import { type PadAsk, pieceName } from './pad-fields';
 
 /** The question that a reading answered; null for those that have a screen of their own. */
 export function askOfReading(reading: Reading, room: Room): PadAsk | null {
@@ -10,6 +11,11 @@ export function askOfReading(reading: Reading, room: Room): PadAsk | null {
     case 'length': {
       const { wallId, zMm, yMm, valueMm } = reading;
       return { kind: 'length', wallId, zMm, yMm, nominalMm: valueMm };
+    }
+    case 'pieces': {
+      const { wallId, zMm, piecesMm } = reading;
+      const stretches = piecesMm.map((_, i) => `piece ${i + 1}`);
+      return { kind: 'pieces', wallId, zMm, nominalMm: wholeOfPieces(reading), stretches };
     }
     case 'corner': {
       const { cornerWallId, zMm, by } = reading;
@@ -60,6 +66,10 @@ export function entriesOfReading(reading: Reading, unit: LengthUnit): Record<str
     case 'diagonal':
     case 'width':
       return { value: length(reading.valueMm) };
+    case 'pieces':
+      return Object.fromEntries(
+        reading.piecesMm.map((piece, i) => [pieceName(i + 1), length(piece)]),
+      );
     case 'corner':
       if (reading.by.method === 'angle') return { angle: entryOfAngle(reading.by.angleDeg) };
       return {

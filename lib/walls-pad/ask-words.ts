@@ -18,6 +18,8 @@ export function howToWords(
       const out = ask.yMm > 1 ? ` · ${say(ask.yMm)} out from the wall` : '';
       return `${say(ask.zMm)} up · left corner to right corner${out}`;
     }
+    case 'pieces':
+      return `${say(ask.zMm)} up · mark the wall, then corner to mark, mark to mark, mark to corner`;
     case 'corner': {
       if (cornerMethod === 'angle') return `${say(ask.zMm)} up · the angle inside the room`;
       const walls = walkRoom(room).byId.get(ask.cornerWallId);

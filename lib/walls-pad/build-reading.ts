@@ -71,13 +71,14 @@ export function buildReading({ ask, fields, entries, common, choices }: BuildInp
   if (first) return { reading: null, problems: [first, ...others] };
   const typed = texts.join(' / ').slice(0, 80);
   return {
-    reading: readingOf(askAtPlace(ask, values), values, { ...common, typed }, choices),
+    reading: readingOf(askAtPlace(ask, values), fields, values, { ...common, typed }, choices),
     problems: [],
   };
 }
 
 function readingOf(
   ask: PadAsk,
+  fields: readonly PadField[],
   values: Record<string, number>,
   common: ReadingCommon & { typed: string },
   { setUpId, setUpKind, studAt, doorwayName }: ReadingChoices,
@@ -87,6 +88,12 @@ function readingOf(
     case 'length': {
       const { wallId, zMm, yMm } = ask;
       return { ...common, kind: 'length', wallId, zMm, yMm, valueMm: value('value') };
+    }
+    case 'pieces': {
+      const { wallId, zMm } = ask;
+      const pieces = fields.filter((field) => field.kind === 'length');
+      const piecesMm = pieces.flatMap(({ name }) => values[name] ?? []);
+      return { ...common, kind: 'pieces', wallId, zMm, piecesMm };
     }
     case 'corner':
       return {

@@ -21,6 +21,11 @@ export function nextAsk(
   return [...plan.slice(at + 1), ...plan.slice(0, at + 1)].find(isOpen) ?? null;
 }
 
+/** The slot before another in walking order, so that what takes its place is asked next; null at the start. */
+export function slotBefore(plan: readonly PlannedReading[], slot: string | null): string | null {
+  return plan[plan.findIndex((planned) => planned.slot === slot) - 1]?.slot ?? null;
+}
+
 /** "5 of 23 to go"; must and should count alike, skipped ones are done with. */
 export function toGoWords(plan: readonly PlannedReading[]): string {
   const open = plan.filter(isOpen).length;

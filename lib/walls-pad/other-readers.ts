@@ -2,6 +2,7 @@ import type { Reader } from '@/lib/contracts/rooms';
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Reading, WallBook } from '@/lib/contracts/wall-book';
 import { standingReadings } from '@/lib/measure/standing-readings';
+import { wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import { readingWords } from './reading-words';
 import { isSameThing } from './same-thing';
 import { type LengthSpeech, sayDifference } from './say-length';
@@ -73,6 +74,8 @@ function sizesOf(reading: Reading, { tools }: WallBook): Sizes | null {
     case 'diagonal':
     case 'width':
       return { unit: 'mm', values: [reading.valueMm] };
+    case 'pieces':
+      return { unit: 'mm', values: [wholeOfPieces(reading)] };
     case 'corner': {
       const tool = tools.find(({ id }) => id === reading.toolId);
       const angle = tool ? angleOfReading(reading, tool).value : null;

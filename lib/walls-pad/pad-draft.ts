@@ -46,9 +46,9 @@ export function freshDraft(
  * Example: width typed, height empty: height. Both typed, the optional third empty: the third, then null.
  */
 export function nextField(fields: readonly PadField[], draft: PadDraft): string | null {
-  const isOpen = ({ name }: PadField) => {
+  const isOpen = ({ name, isOnDemand }: PadField) => {
     const entry = draft.entries[name];
-    return !entry || isEmptyEntry(entry);
+    return !isOnDemand && (!entry || isEmptyEntry(entry));
   };
   const at = fields.findIndex(({ name }) => name === draft.active);
   const later = fields.slice(at + 1).find(isOpen);

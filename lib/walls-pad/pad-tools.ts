@@ -8,6 +8,7 @@ export type ToolUse = PadAsk['kind'] | 'angle' | 'feature';
 /** Best first; common practice. */
 const suited: Record<ToolUse, ToolKind[]> = {
   length: ['tape', 'laser'],
+  pieces: ['tape', 'laser'],
   corner: ['tape', 'laser'],
   angle: ['angle-finder'],
   face: ['level', 'laser', 'tape'],

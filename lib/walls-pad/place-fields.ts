@@ -8,6 +8,7 @@ const z: PadField = { name: 'placeZ', label: 'up', kind: 'height' };
 export function placeFields(ask: PadAsk): PadField[] {
   switch (ask.kind) {
     case 'length':
+    case 'pieces':
     case 'corner':
     case 'diagonal':
       return [z];

@@ -1,5 +1,6 @@
 import type { Reading, Room } from '@/lib/contracts/wall-book';
 import { cornerName, walkRoom } from '@/lib/measure/room-walk';
+import { wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import { featureName } from '@/lib/words/feature-words';
 import { type LengthSpeech, sayLength } from './say-length';
 
@@ -17,6 +18,10 @@ export function readingWords(reading: Reading, room: Room, speech: LengthSpeech)
     case 'length': {
       const out = reading.yMm > 1 ? `, ${say(reading.yMm)} out` : '';
       return { what: `Length, ${say(reading.zMm)} up${out}`, value: say(reading.valueMm) };
+    }
+    case 'pieces': {
+      const what = `In ${reading.piecesMm.length} pieces, ${say(reading.zMm)} up`;
+      return { what, value: say(wholeOfPieces(reading)) };
     }
     case 'corner': {
       const what = `Corner ${corner(reading.cornerWallId)}, ${say(reading.zMm)} up`;

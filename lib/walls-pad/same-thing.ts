@@ -20,6 +20,10 @@ export function isSameThing(one: Reading, other: Reading): boolean {
         isNearPlace(one.yMm, other.yMm) &&
         isNearPlace(one.zMm, other.zMm)
       );
+    case 'pieces':
+      return (
+        other.kind === 'pieces' && one.wallId === other.wallId && isNearPlace(one.zMm, other.zMm)
+      );
     case 'corner':
       return (
         other.kind === 'corner' &&

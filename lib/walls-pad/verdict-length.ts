@@ -5,6 +5,7 @@ import { lengthOwnPart, lengthUncertainty } from '@/lib/measure/uncertainty';
 import type { RuleBehind } from '@/lib/sheet/rule-behind';
 import { type JudgeInput, judgedBy, type PadVerdict } from './pad-verdict';
 import { sayDifference, sayLength, sayPlusMinus } from './say-length';
+import { verdictBesidePieces } from './verdict-pieces';
 
 /** Further from the sketch than both of these is worth a word: rough lengths are rough. */
 const SKETCH_SHARE = 0.08;
@@ -12,7 +13,7 @@ const SKETCH_MM = 100;
 const SAME_PLACE_MM = 1;
 
 /**
- * A wall's length beside what is known of it: a repeat of the same height, else the nearest other height,
+ * A wall's length beside what is known of it: its pieces, a repeat of the same height, else the nearest other height,
  * else the sketch.
  *
  * Edge: a difference smaller than its U is "the same within the reading".
@@ -25,6 +26,8 @@ export function verdictOfLength(input: JudgeInput<ReadingOf<'length'>>): PadVerd
     (other): other is ReadingOf<'length'> =>
       other.kind === 'length' && other.wallId === reading.wallId && isNear(other.yMm, reading.yMm),
   );
+  const besidePieces = verdictBesidePieces(input);
+  if (besidePieces) return besidePieces;
   const repeats = onWall.filter((other) => isNear(other.zMm, reading.zMm));
   if (repeats.length > 0) return besideRepeats(input, repeats);
   const nearest = [...onWall].sort(

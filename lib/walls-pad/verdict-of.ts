@@ -6,6 +6,7 @@ import { angleOfReading, verdictOfCorner } from './verdict-corner';
 import { verdictOfFace } from './verdict-face';
 import { verdictOfCeiling, verdictOfFloor } from './verdict-floor';
 import { verdictOfLength } from './verdict-length';
+import { verdictOfPieces } from './verdict-pieces';
 import { verdictOfStud } from './verdict-stud';
 
 /** What the pad says of a reading at once; null where there is nothing to say. */
@@ -16,6 +17,8 @@ export function verdictOf(reading: Reading, input: VerdictInput): PadVerdict | n
   switch (reading.kind) {
     case 'length':
       return verdictOfLength({ ...given, reading });
+    case 'pieces':
+      return verdictOfPieces({ ...given, reading });
     case 'corner':
       return verdictOfCorner({ ...given, reading });
     case 'face':

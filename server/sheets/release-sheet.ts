@@ -7,6 +7,7 @@ import { standingIds } from '@/lib/measure/standing-readings';
 import { whatIsMissing } from '@/lib/measure/what-is-missing';
 import { nextRevision } from '@/lib/sheet/next-revision';
 import { openPoints } from '@/lib/sheet/open-points';
+import { releaseStops } from '@/lib/sheet/release-stops';
 import { type FrozenSheet, sheetChanges } from '@/lib/sheet/sheet-changes';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
@@ -34,6 +35,7 @@ export async function releaseSheet(
       const { wallBook, runs } = book;
       refuseUnseen(input, book);
       const fit = fitRoom(wallBook, runs, rules);
+      refuseStopped(releaseStops(fit));
       refuseWithoutReason(input, openPoints(fit, whatIsMissing(wallBook, runs, rules)));
       const newest = await readNewestFrozen(tx, ctx, input.roomId);
       const frozen = { wallBook, runs, rules, fit };
@@ -104,6 +106,17 @@ function refuseUnseen(input: ReleaseSheetInput, { wallBook, runs }: BookOnFile):
     message: isSeen
       ? 'The runs were changed since you opened this fit. Nothing was released; look at it again.'
       : 'Readings came in since you opened this fit. Nothing was released; look at it again.',
+  });
+}
+
+function refuseStopped(stops: string[]): void {
+  const [first] = stops;
+  if (first === undefined) return;
+  throw new Refusal({
+    status: 422,
+    code: 'pieces-do-not-add-up',
+    message: `${first} Take back the reading that is wrong, or measure again. Nothing was released.`,
+    current: stops,
   });
 }
 

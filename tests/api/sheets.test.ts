@@ -180,6 +180,33 @@ describe('sheets', () => {
     expect(((await fitOf(own.roomId)).body as FitView).releases).toEqual([]);
   });
 
+  it('releases nothing while the pieces of a wall do not add up, whatever the reason, and does once they are taken back', async () => {
+    const own = await putKitchen(shop);
+    const { kind: _kind, yMm: _yMm, valueMm, ...like } = lengthOn(own, 0);
+    const whole = own.wallBook.readings.find(
+      (one) => one.kind === 'length' && one.wallId === like.wallId && one.zMm === like.zMm,
+    );
+    const wholeMm = whole?.kind === 'length' ? whole.valueMm : valueMm;
+    const pieces = { ...like, kind: 'pieces' as const, piecesMm: [1_000, wholeMm - 1_000 + 8] };
+    const ctx = await contextOf(shop, 'measurer', new Date());
+    await recordReadings(ctx, { roomId: own.roomId, readings: [pieces] });
+    const refusal = await release(own.roomId);
+    expect(refusal.status).toBe(422);
+    expect(refusal.body).toMatchObject({ code: 'pieces-do-not-add-up' });
+    expect((refusal.body as { current: string[] }).current[0]).toContain(
+      'No release until the pieces add up.',
+    );
+    const takenBack = {
+      ...like,
+      id: randomUUID(),
+      kind: 'withdrawal' as const,
+      readingId: pieces.id,
+      reason: 'Misread',
+    };
+    await recordReadings(ctx, { roomId: own.roomId, readings: [takenBack] });
+    expect((await release(own.roomId)).status).toBe(200);
+  });
+
   it('asks for a reason while something is open, and keeps it with the sheet', async () => {
     const own = await putKitchen(shop);
     const [sinkWall, ...others] = own.runs;
