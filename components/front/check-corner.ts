@@ -25,10 +25,15 @@ export type CornerCheck = {
 export type CornerResult = {
   mm: Record<CornerField, number>;
   theta: Figure;
+  /** Mark to mark as read, less what a square corner would read. */
+  offSquareMm: number;
+  squareMm: number;
   /** Positive: the left wall is in the way at the front. Null where the corner is no square one. */
   offset: Figure | null;
   share: Share;
   limitMm: number;
+  /** What a filler at a wall is asked to keep at its narrowest. */
+  leastFillerMm: number;
 };
 
 /** Past this the corner is a bay or a splay and was never meant to be square. */
@@ -72,16 +77,16 @@ export function checkCorner(text: CornerText, unit: LengthUnit): CornerCheck {
   const theta = angle.value;
   const isSquare = Math.abs(theta.value - 90) <= squareWithinDeg;
   const offset = isSquare ? cornerOffset(theta, mm.depth).value : null;
-  const limitMm = limitOver(mm.depth, unit);
+  const { fit } = defaultShopRules(unit === 'in' ? 'US' : 'UK');
+  // The shop's starting rule is for one depth; it is carried to another in proportion.
+  const limitMm = (fit.cornerFlagMm * mm.depth) / fit.cornerFlagOverMm;
+  const { fillerLeastMm: leastFillerMm } = fit;
+  const squareMm = Math.hypot(mm.legLeft, mm.legRight);
+  const share = offset ? shareOf(offset, limitMm) : 'within';
+  const offSquareMm = mm.diagonal - squareMm;
   return {
     errors,
     notes,
-    result: { mm, theta, offset, share: offset ? shareOf(offset, limitMm) : 'within', limitMm },
+    result: { mm, theta, squareMm, offSquareMm, offset, share, limitMm, leastFillerMm },
   };
-}
-
-/** The shop's starting rule, which is for one depth, carried to another in proportion. */
-function limitOver(depthMm: number, unit: LengthUnit): number {
-  const { cornerFlagMm, cornerFlagOverMm } = defaultShopRules(unit === 'in' ? 'US' : 'UK').fit;
-  return (cornerFlagMm * depthMm) / cornerFlagOverMm;
 }

@@ -6,6 +6,8 @@ import { UnitChoice } from './unit-choice';
 type CheckLayoutProps = {
   id: string;
   title: string;
+  /** How it is read off the wall. */
+  how: string;
   unit: LengthUnit;
   onUnit: (unit: LengthUnit) => void;
   /** What is typed. */
@@ -25,6 +27,7 @@ type CheckLayoutProps = {
 export function CheckLayout({
   id,
   title,
+  how,
   unit,
   onUnit,
   fields,
@@ -40,6 +43,7 @@ export function CheckLayout({
         title={title}
         meta={<UnitChoice unit={unit} onUnit={onUnit} name={`${id}-unit`} />}
       />
+      <p className="pt-2 text-graphite">{how}</p>
       <div className="grid items-start gap-x-8 gap-y-5 pt-4 md:grid-cols-[11rem_minmax(0,1fr)] lg:grid-cols-[11rem_minmax(0,1fr)_19rem]">
         <div className="grid grid-cols-2 items-end gap-x-4 gap-y-3 md:grid-cols-1">{fields}</div>
         <div className="min-w-0">

@@ -7,6 +7,7 @@ import type { LengthUnit } from '@/lib/units/brands';
 import { CheckLayout } from './check-layout';
 import { checkWall, type WallText } from './check-wall';
 import { GapFields } from './gap-fields';
+import { typedIn } from './typed-length';
 import { WallDrawing } from './wall-drawing';
 import { WallWords } from './wall-words';
 
@@ -35,8 +36,19 @@ export function WallForm() {
     <CheckLayout
       id="wall"
       title="Check a wall"
+      how="Lay a straightedge along the wall, or stand a level plumb against it, and read the gap behind it at even places."
       unit={unit}
-      onUnit={(next) => change({ ...examples[next], way: text.way }, next)}
+      onUnit={(next) => {
+        const { way, spacing, gaps } = text;
+        const inNext = (typed: string) => typedIn(typed, unit, next);
+        const isExample = gaps === examples[unit].gaps && spacing === examples[unit].spacing;
+        change(
+          isExample
+            ? { ...examples[next], way }
+            : { way, spacing: inNext(spacing), gaps: gaps.map(inNext) },
+          next,
+        );
+      }}
       fields={
         <>
           <SelectField

@@ -19,6 +19,12 @@ describe('checkCorner', () => {
     expect(result?.share).toBe('over');
   });
 
+  it('says what square would read, and how far off that the diagonal is', () => {
+    const { result } = checkCorner({ ...inches, diagonal: '59 3/8' }, 'in');
+    expect((result?.squareMm ?? 0) / 25.4).toBeCloseTo(60, 9);
+    expect((result?.offSquareMm ?? 0) / 25.4).toBeCloseTo(-0.625, 9);
+  });
+
   it('reads millimetres and feet alike', () => {
     const typed = { legLeft: "3'", legRight: `4'`, diagonal: '1508.125', depth: '24"' };
     expect(checkCorner(typed, 'mm').result?.theta.value).toBeCloseTo(88.763, 3);
