@@ -1,13 +1,11 @@
-import { createHash } from 'node:crypto';
 import { and, eq } from 'drizzle-orm';
-import { files, jobs } from '@/db/schema';
+import { jobs } from '@/db/schema';
 import type { AddPaperInput } from '@/lib/contracts/papers';
 import { pictureKind } from '@/lib/files/picture-kind';
-import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { countTry } from '@/server/base/limits';
 import { notFound, Refusal } from '@/server/base/problem-response';
-import { filesPort } from '@/server/ports/files/choose-files';
+import { keepFile } from './keep-file';
 
 const limit = { most: 100, windowSeconds: 3_600 };
 
@@ -21,44 +19,13 @@ export async function addPaper(
   await countTry(ctx.db, `paper:${ctx.actor.personId}`, limit, ctx.now);
   await mustBeOurs(ctx, jobId);
   if (pictureKind(bytes) !== 'pdf' || !endsAsPdf(bytes)) throw notPdf();
-  const sha256 = createHash('sha256').update(bytes).digest('hex');
-  const storageKey = `${ctx.shop.id}/${fileId}-${sha256.slice(0, 16)}.pdf`;
-  await filesPort().put(storageKey, bytes);
-  return ctx.db.transaction(async (tx) => {
-    const name = input.name.toLowerCase().endsWith('.pdf') ? input.name : `${input.name}.pdf`;
-    const [added] = await tx
-      .insert(files)
-      .values({
-        shopId: ctx.shop.id,
-        id: fileId,
-        jobId,
-        name,
-        mediaType: 'application/pdf',
-        bytes: bytes.length,
-        sha256,
-        storageKey,
-        takenAt: ctx.now,
-        addedBy: ctx.actor.personId,
-      })
-      .onConflictDoNothing({ target: files.id })
-      .returning({ id: files.id });
-    if (added) {
-      await writeAudit(tx, ctx, {
-        verb: 'add-paper',
-        subjectKind: 'file',
-        subjectId: fileId,
-        jobId,
-        summary: `Added ${name}`,
-      });
-      return { fileId };
-    }
-    const [kept] = await tx
-      .select({ sha256: files.sha256 })
-      .from(files)
-      .where(and(eq(files.shopId, ctx.shop.id), eq(files.id, fileId), eq(files.jobId, jobId)));
-    if (kept?.sha256 !== sha256) throw idTaken();
-    return { fileId };
-  });
+  const name = input.name.toLowerCase().endsWith('.pdf') ? input.name : `${input.name}.pdf`;
+  return keepFile(
+    ctx,
+    bytes,
+    { id: fileId, jobId, name, mediaType: 'application/pdf', ending: 'pdf', takenAt: ctx.now },
+    { verb: 'add-paper', subjectKind: 'file', subjectId: fileId, summary: `Added ${name}` },
+  );
 }
 
 async function mustBeOurs(ctx: PersonContext, jobId: string): Promise<void> {
@@ -79,13 +46,5 @@ function notPdf(): Refusal {
     status: 415,
     code: 'not-a-paper',
     message: 'Papers are kept as whole PDF files, and this is none. Nothing was kept.',
-  });
-}
-
-function idTaken(): Refusal {
-  return new Refusal({
-    status: 409,
-    code: 'id-taken',
-    message: 'Another file has this id already. It was not changed; add the file again.',
   });
 }

@@ -1,22 +1,17 @@
-import { createHash } from 'node:crypto';
 import { and, eq } from 'drizzle-orm';
-import { files, jobs, rooms } from '@/db/schema';
+import { jobs, rooms } from '@/db/schema';
 import type { AddPhotoAnswer, AddPhotoInput } from '@/lib/contracts/files';
 import { cleanJpeg } from '@/lib/files/clean-jpeg';
 import { pictureKind } from '@/lib/files/picture-kind';
-import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { countTry } from '@/server/base/limits';
 import { notFound, Refusal } from '@/server/base/problem-response';
-import { filesPort } from '@/server/ports/files/choose-files';
+import { keepFile } from './keep-file';
 
 /** A long day with both hands full of photos stays far below. */
 const limit = { most: 300, windowSeconds: 3_600 };
 
-/**
- * Keeps a photo of a room or a job, stripped of everything but the picture. Sent twice it is kept once. The bytes
- * are safe before the row says that they are there.
- */
+/** Keeps a photo of a room or a job, stripped of everything but the picture. Sent twice it is kept once. */
 export async function addPhoto(
   ctx: PersonContext,
   input: AddPhotoInput & { bytes: Uint8Array },
@@ -26,48 +21,29 @@ export async function addPhoto(
   await countTry(ctx.db, `photo:${ctx.actor.personId}`, limit, ctx.now);
   const { jobId, roomId, placeWords } = await findPlace(ctx, input);
   const { bytes, widthPx, heightPx } = cleaned(input.bytes);
-  const sha256 = createHash('sha256').update(bytes).digest('hex');
-  const storageKey = `${ctx.shop.id}/${fileId}-${sha256.slice(0, 16)}.jpg`;
-  await filesPort().put(storageKey, bytes);
-  return ctx.db.transaction(async (tx) => {
-    const [added] = await tx
-      .insert(files)
-      .values({
-        shopId: ctx.shop.id,
-        id: fileId,
-        jobId,
-        roomId,
-        wallId,
-        name: `photo-${fileId.slice(0, 8)}.jpg`,
-        caption: input.caption,
-        mediaType: 'image/jpeg',
-        bytes: bytes.length,
-        widthPx,
-        heightPx,
-        sha256,
-        storageKey,
-        takenAt: new Date(input.takenAt),
-        addedBy: ctx.actor.personId,
-      })
-      .onConflictDoNothing({ target: files.id })
-      .returning({ id: files.id });
-    if (added) {
-      await writeAudit(tx, ctx, {
-        verb: 'add-photo',
-        subjectKind: roomId ? 'room' : 'job',
-        subjectId: roomId ?? jobId,
-        jobId,
-        summary: `Took a photo${placeWords}`,
-      });
-      return { fileId };
-    }
-    const [kept] = await tx
-      .select({ sha256: files.sha256 })
-      .from(files)
-      .where(and(eq(files.shopId, ctx.shop.id), eq(files.id, fileId), eq(files.jobId, jobId)));
-    if (kept?.sha256 !== sha256) throw idTaken();
-    return { fileId };
-  });
+  return keepFile(
+    ctx,
+    bytes,
+    {
+      id: fileId,
+      jobId,
+      roomId,
+      wallId,
+      name: `photo-${fileId.slice(0, 8)}.jpg`,
+      caption: input.caption,
+      mediaType: 'image/jpeg',
+      ending: 'jpg',
+      widthPx,
+      heightPx,
+      takenAt: new Date(input.takenAt),
+    },
+    {
+      verb: 'add-photo',
+      subjectKind: roomId ? 'room' : 'job',
+      subjectId: roomId ?? jobId,
+      summary: `Took a photo${placeWords}`,
+    },
+  );
 }
 
 type Place = { jobId: string; roomId: string | null; placeWords: string };
@@ -120,13 +96,5 @@ function notJpeg(words: string): Refusal {
     status: 415,
     code: 'not-a-photo',
     message: `Photos are kept as JPEG, and this is ${words}. Nothing was kept.`,
-  });
-}
-
-function idTaken(): Refusal {
-  return new Refusal({
-    status: 409,
-    code: 'id-taken',
-    message: 'Another file has this id already. It was not changed; take the photo again.',
   });
 }

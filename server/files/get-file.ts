@@ -29,7 +29,8 @@ export async function getFile(
     bytes,
     mark: sha256,
     open: async () => {
-      const stream = await filesPort().read(storageKey);
+      const port = await filesPort();
+      const stream = await port.read(storageKey);
       // The row is there and the bytes are not: a folder that was not restored with the database.
       if (!stream) throw notFound('file');
       return stream;

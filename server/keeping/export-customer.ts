@@ -42,8 +42,9 @@ export async function exportCustomer(
 /** One at a time: a job has hundreds of photos at most, and they must not all be read twice over. */
 async function readBytes({ files }: CustomerRecord): Promise<Record<string, Uint8Array>> {
   const found: Record<string, Uint8Array> = {};
+  const port = await filesPort();
   for (const { id, name, storageKey } of files) {
-    const stream = await filesPort().read(storageKey);
+    const stream = await port.read(storageKey);
     if (!stream) continue;
     const bytes = new Uint8Array(await new Response(stream).arrayBuffer());
     found[`files/${id}-${name.replace(/[^\w.-]+/g, '-')}`] = bytes;

@@ -2,17 +2,18 @@ import path from 'node:path';
 import { env } from '@/server/base/env';
 import type { FilesPort } from './files-port';
 import { localFiles } from './local-files';
-import { s3Files } from './s3-files';
 
-const held = globalThis as typeof globalThis & { setwellFiles?: FilesPort };
+const held = globalThis as typeof globalThis & { setwellFiles?: Promise<FilesPort> };
 
 /** In a bucket where one is named; else beside the database, in the data folder that a shop backs up. */
-export function filesPort(): FilesPort {
+export async function filesPort(): Promise<FilesPort> {
   const { filesBucket, dataDirectory } = env();
   if (!filesBucket) {
     return localFiles(path.join(/*turbopackIgnore: true*/ dataDirectory, 'files'));
   }
-  // One client a process: each keeps its own connections.
-  held.setwellFiles ??= s3Files({ ...filesBucket, credentials: null });
+  // One client a process: each keeps its own connections. Its library is heavy, and loaded where there is a bucket.
+  held.setwellFiles ??= import('./s3-files').then(({ s3Files }) =>
+    s3Files({ ...filesBucket, credentials: null }),
+  );
   return held.setwellFiles;
 }
