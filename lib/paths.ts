@@ -17,6 +17,8 @@ export const paths = {
   diary: () => '/diary',
   /** The diary opened at a civil date, "2026-05-12". */
   diaryOn: (date: string) => `/diary?on=${part(date)}`,
+  /** The diary with the times that work for a job. */
+  diaryTimes: (jobId: string) => `/diary?times=${part(jobId)}`,
   /** The shop is late: what it moves. */
   slip: () => '/diary/late',
   /** The same, begun with a job that is so many working days late. */
@@ -126,6 +128,7 @@ export const apiPaths = {
   webhooks: () => '/api/programs/webhooks',
   webhook: (webhookId: string) => `/api/programs/webhooks/${part(webhookId)}`,
   visits: () => '/api/visits',
+  findVisits: (search: string) => `/api/visits/find?search=${part(search)}`,
   visit: (visitId: string) => `/api/visits/${part(visitId)}`,
   callOffVisit: (visitId: string) => `/api/visits/${part(visitId)}/call-off`,
   undoVisitChange: (visitId: string) => `/api/visits/${part(visitId)}/undo`,
@@ -184,6 +187,8 @@ export const apiPaths = {
   rules: () => '/api/rules',
   /** What a change of the rules would do. */
   rulesPreview: () => '/api/rules/preview',
+  /** What takes one change of them back. */
+  ruleChangeBack: (changeId: string) => `/api/rules/changes/${part(changeId)}`,
   messages: () => '/api/messages',
   schedulerItems: () => '/api/messages/items',
   schedulerItem: (itemId: string) => `/api/messages/items/${part(itemId)}`,

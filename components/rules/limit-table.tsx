@@ -4,17 +4,19 @@ import { limitRows, withLimit } from '@/lib/measure/rules/copy-rule-set';
 import type { Rule, RuleSet } from '@/lib/measure/rules/rule-set';
 import { checkWords } from '@/lib/rules/check-words';
 import { formatLength } from '@/lib/units/format-length';
+import type { Region } from '@/lib/words/trade';
 
 type LimitTableProps = {
   set: RuleSet;
   unit: 'in' | 'mm';
+  region: Region;
   /** The shop's own copy, when this is one: its figures can be typed over. */
   editable: OwnRuleSet | null;
   onChange: (changed: OwnRuleSet) => void;
 };
 
 /** Each limit with where it was published; in a copy, each figure can be typed over, in millimetres. */
-export function LimitTable({ set, unit, editable, onChange }: LimitTableProps) {
+export function LimitTable({ set, unit, region, editable, onChange }: LimitTableProps) {
   return (
     <div className="overflow-x-auto">
       <table className="w-full">
@@ -38,7 +40,7 @@ export function LimitTable({ set, unit, editable, onChange }: LimitTableProps) {
               className="border-b border-rule align-baseline"
             >
               <th scope="row" className="py-1.5 pr-4 text-left font-medium">
-                {checkWords[rule.check]}
+                {checkWords(rule.check, region)}
                 {rule.overMm ? (
                   <span className="font-normal text-graphite"> over {rule.overMm / 1000} m</span>
                 ) : null}
@@ -54,7 +56,7 @@ export function LimitTable({ set, unit, editable, onChange }: LimitTableProps) {
                         type="number"
                         min={0}
                         step={0.1}
-                        aria-label={`${checkWords[rule.check]} ${words}, mm`}
+                        aria-label={`${checkWords(rule.check, region)} ${words}, mm`}
                         defaultValue={limitMm}
                         onChange={(event) => {
                           const typed = event.target.valueAsNumber;

@@ -1,5 +1,7 @@
-import { TextField } from '@/components/ui/text-field';
+import { TitleBlock } from '@/components/ui/title-block';
 import type { BookingRules } from '@/lib/contracts/shop-rules';
+import { bookingRuleBasis } from '@/lib/measure/rules/default-basis';
+import { type ErrorOf, RuleField } from './rule-field';
 
 const fields = [
   { name: 'weightDriveMinute', label: 'A minute driven' },
@@ -8,32 +10,29 @@ const fields = [
   { name: 'weightMissedWish', label: 'A wish missed' },
 ] as const;
 
+type OpeningWeightsProps = { booking: BookingRules; errorOf: ErrorOf };
+
 /** What counts as how much trouble when times that work are put in order. */
-export function OpeningWeights({
-  booking,
-  errorOf,
-}: {
-  booking: BookingRules;
-  errorOf: (field: string) => string | undefined;
-}) {
+export function OpeningWeights({ booking, errorOf }: OpeningWeightsProps) {
   return (
-    <fieldset className="flex flex-col gap-2">
-      <legend className="font-medium">Times that work: what counts as minutes of trouble</legend>
-      <p className="text-graphite text-note">The time with the least trouble is offered first.</p>
-      <div className="grid grid-cols-2 gap-3 sm:grid-cols-4">
-        {fields.map(({ name, label }) => (
-          <TextField
-            key={name}
-            label={label}
-            name={name}
-            type="number"
-            step="any"
-            min={0}
-            defaultValue={booking[name]}
-            error={errorOf(`booking.${name}`)}
-          />
-        ))}
-      </div>
-    </fieldset>
+    <section>
+      <TitleBlock
+        title="Times that work"
+        meta="in minutes of trouble; the least is offered first"
+      />
+      {fields.map(({ name, label }) => (
+        <RuleField
+          key={name}
+          label={label}
+          hint={bookingRuleBasis[name].note.replace(' Common practice, no source.', '')}
+          name={name}
+          type="number"
+          step="any"
+          min={0}
+          defaultValue={booking[name]}
+          errorOf={errorOf}
+        />
+      ))}
+    </section>
   );
 }

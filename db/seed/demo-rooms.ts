@@ -15,6 +15,8 @@ export type PlannedRoom = {
 };
 
 const inch = 25.4;
+/** What the layouts leave at each end of a wall. */
+const fillerMm = 1.5 * inch;
 
 /** A plain kitchen differs from the next by its seed; the three told ones are always the same. */
 export function planRoom(plan: RoomPlan, rules: FitRules, random: () => number): PlannedRoom {
@@ -118,7 +120,7 @@ function drawnRoom(truth: TrueRoom): Room {
 function wallRuns(room: Room, truth: TrueRoom, rules: FitRules): Run[] {
   const wallA = room.chains[0]?.walls[0];
   if (!wallA) return [];
-  const space = lengthOf(truth, 0) - 2 * rules.fillerAimMm;
+  const space = lengthOf(truth, 0) - 2 * fillerMm;
   return [
     baseRun(wallA.id, 'Sink wall', baseUnits(space), rules),
     upperRun(wallA.id, 'Sink wall, uppers', upperUnits(space), rules),
@@ -130,12 +132,7 @@ function cornerRuns(room: Room, truth: TrueRoom, rules: FitRules): Run[] {
   const [wallA, wallB] = room.chains[0]?.walls ?? [];
   if (!wallA || !wallB) return [];
   const depth = baseDepthMm + 21;
-  const long = baseRun(
-    wallA.id,
-    'Long wall',
-    baseUnits(lengthOf(truth, 0) - 2 * rules.fillerAimMm),
-    rules,
-  );
+  const long = baseRun(wallA.id, 'Long wall', baseUnits(lengthOf(truth, 0) - 2 * fillerMm), rules);
   const spaceB = 2200 - depth - rules.cornerFillerDrawersMm;
   const short = baseRun(wallB.id, 'Range wall', baseUnits(spaceB), rules);
   return [
@@ -145,12 +142,7 @@ function cornerRuns(room: Room, truth: TrueRoom, rules: FitRules): Run[] {
       left: { kind: 'run', runId: long.id, through: 'other' },
       right: { kind: 'open', limitMm: 2400 },
     },
-    upperRun(
-      wallA.id,
-      'Long wall, uppers',
-      upperUnits(lengthOf(truth, 0) - 2 * rules.fillerAimMm),
-      rules,
-    ),
+    upperRun(wallA.id, 'Long wall, uppers', upperUnits(lengthOf(truth, 0) - 2 * fillerMm), rules),
   ];
 }
 

@@ -1,4 +1,5 @@
 /** What changing the shop's rules would do, and what was changed before. */
+import { z } from 'zod';
 import type { RuleChange } from '@/lib/rules/rule-changes';
 
 export type RulePreview = {
@@ -11,3 +12,7 @@ export type RulePreview = {
 };
 
 export type RuleHistoryLine = { id: string; who: string; atWords: string; changes: RuleChange[] };
+
+/** One line of that history, to be taken back. */
+export const ruleChangeInput = z.object({ changeId: z.uuid() });
+export type RuleChangeInput = z.infer<typeof ruleChangeInput>;

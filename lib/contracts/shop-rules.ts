@@ -4,7 +4,11 @@ import { usualOpeningWeights } from '@/lib/schedule/planning-rules';
 import { checklistRules } from './checklists';
 import { ownRuleSet } from './rule-sets';
 
-const mmValue = z.number().finite().min(0).max(5_000);
+const mmValue = z
+  .number()
+  .finite()
+  .min(0, 'A length cannot be less than nothing.')
+  .max(5_000, 'At most 5 m.');
 
 /** Rules of the measuring engine. Lengths in millimetres, angles in degrees. */
 export const fitRules = z.object({
@@ -13,9 +17,11 @@ export const fitRules = z.object({
   stepMm: z.number().positive(),
   region: z.enum(['US', 'UK', 'AU', 'EU']),
   /** Heights at which a wall's length is asked for. */
-  readingHeightsMm: z.array(mmValue).min(1).max(6),
+  readingHeightsMm: z
+    .array(mmValue)
+    .min(1, 'At least one height.')
+    .max(6, 'At most six heights: a measurer has to read each.'),
   fillerLeastMm: mmValue,
-  fillerAimMm: mmValue,
   fillerMostMm: mmValue,
   /** Least filler at an inside corner between two runs: doors, drawers. */
   cornerFillerDoorsMm: mmValue,
@@ -83,7 +89,16 @@ export const fitRules = z.object({
 });
 export type FitRules = z.infer<typeof fitRules>;
 
-const weight = z.number('A number, 0 for no matter.').min(0).max(1_000);
+const weight = z
+  .number('A number, 0 for no matter.')
+  .min(0, '0 or more.')
+  .max(1_000, 'At most 1000.');
+const minutes = (least: number) =>
+  z
+    .number('Minutes.')
+    .int('Whole minutes.')
+    .min(least, `At least ${least} minutes.`)
+    .max(480, 'At most 480 minutes, eight hours.');
 
 /** Rules of booking and telling. Times are local, in the shop's zone. */
 export const bookingRules = z.object({
@@ -104,14 +119,22 @@ export const bookingRules = z.object({
     })
     .nullable()
     .default(null),
-  windowMinutes: z.number().int().min(15).max(480),
-  leadWorkdays: z.number().int().min(0).max(260),
-  measureMinutesPerRoom: z.number().int().min(10).max(480),
-  installMinutesPerUnit: z.number().int().min(10).max(480),
+  windowMinutes: minutes(15),
+  leadWorkdays: z
+    .number()
+    .int('Whole days.')
+    .min(0, 'None is 0.')
+    .max(260, 'At most 260, a year of working days.'),
+  measureMinutesPerRoom: minutes(10),
+  installMinutesPerUnit: minutes(10),
   quietFrom: z.string().regex(/^\d\d:\d\d$/),
   quietUntil: z.string().regex(/^\d\d:\d\d$/),
   /** The speed of drives that no road service answered for. */
-  driveKmPerHour: z.number().min(5).max(130).default(45),
+  driveKmPerHour: z
+    .number('A speed.')
+    .min(5, 'At least 5 km/h (3 mph).')
+    .max(130, 'At most 130 km/h (80 mph).')
+    .default(45),
   /** How times that work are ranked: what counts as how many minutes of trouble (lib/schedule/planning-rules). */
   weightDriveMinute: weight.default(usualOpeningWeights.driveMinute),
   weightDayWaited: weight.default(usualOpeningWeights.dayWaited),
@@ -153,8 +176,7 @@ const orderedFit = fitRules.superRefine((fit, ctx) => {
       ctx.addIssue({ code: 'custom', path: [greater], message });
     }
   };
-  mustNotFall('fillerLeastMm', 'fillerAimMm', 'The aim is less than the least filler.');
-  mustNotFall('fillerAimMm', 'fillerMostMm', 'The most is less than the aim.');
+  mustNotFall('fillerLeastMm', 'fillerMostMm', 'The greatest is less than the least.');
   mustNotFall('legMinMm', 'legMaxMm', 'The longest leg is shorter than the shortest.');
   mustNotFall('plumbFlagMm', 'plumbSeriousMm', 'Serious comes before the flag.');
   mustNotFall('piecesAskMm', 'piecesRefuseMm', 'Refusing comes before asking.');

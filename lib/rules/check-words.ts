@@ -1,7 +1,14 @@
 import type { CheckKind } from '@/lib/measure/rules/rule-set';
+import { type Region, tradeName } from '@/lib/words/trade';
 
-/** What each check looks at, as the trade says it. */
-export const checkWords: Record<CheckKind, string> = {
+/** What a check looks at, as the trade of the region says it. */
+export function checkWords(check: CheckKind, region: Region): string {
+  return check === 'counter-parallel-to-floor'
+    ? `${tradeName('counter', region)} along the floor`
+    : words[check];
+}
+
+const words: Record<Exclude<CheckKind, 'counter-parallel-to-floor'>, string> = {
   'wall-straightness': 'Wall, straight',
   'wall-plumb': 'Wall, plumb',
   'corner-square': 'Corner, square',
@@ -13,7 +20,6 @@ export const checkWords: Record<CheckKind, string> = {
   'cabinet-faces-in-line': 'Cabinet faces, in line',
   'cabinet-corners-in-line': 'Cabinet corners, in line',
   'cabinet-warp': 'Cabinets, warp',
-  'counter-parallel-to-floor': 'Counter along the floor',
   'gap-at-wall': 'Gap at a wall',
   'joint-wood': 'Joint, wood to wood',
   'joint-wood-nonwood': 'Joint, wood to another stuff',

@@ -1,6 +1,7 @@
 import type { FitRules, ShopRules } from '@/lib/contracts/shop-rules';
-import { formatLength } from '@/lib/units/format-length';
-import { lengthRuleGroups } from './length-rules';
+import { fineLength } from '@/lib/sheet/reading-words';
+import { tradeWord } from '@/lib/words/trade';
+import { lengthListRules, lengthRuleGroups, shownLength, shownLengths } from './length-rules';
 
 export type RuleChange = { label: string; from: string; to: string; affects: string };
 
@@ -14,15 +15,23 @@ const others: Record<string, { label: string; affects: string }> = {
   'fit.unit': { label: 'Lengths', affects: 'what is typed and shown' },
   'fit.stepMm': { label: 'Cut sizes to', affects: 'blanks, openings' },
   'fit.ruleSet': { label: 'Rule set', affects: 'verdicts' },
-  'fit.sheetNominalMm': { label: 'Sheet is called, mm', affects: 'widths that stack sheets' },
-  'fit.sheetActualMm': { label: 'Sheet really measures, mm', affects: 'widths that stack sheets' },
-  'fit.crownSpringDeg': { label: 'Spring of the crown, degrees', affects: 'its mitres' },
+  'fit.fillerPlane': { label: 'Plane of the fillers', affects: 'where a width counts' },
   'fit.ownRuleSets': { label: 'The shop’s own rule sets', affects: 'verdicts' },
   'booking.dayStart': { label: 'Day starts', affects: 'times that are offered' },
   'booking.dayEnd': { label: 'Day ends', affects: 'times that are offered, length of installs' },
   'booking.workdays': { label: 'Days worked', affects: 'times that are offered' },
   'booking.closedDays': { label: 'Closed days', affects: 'times that are offered' },
   'booking.windowMinutes': { label: 'Arrival window', affects: 'what customers are promised' },
+  'booking.holidays': { label: 'Public holidays', affects: 'times that are offered' },
+  'booking.measureMinutesPerRoom': {
+    label: 'To measure a kitchen, minutes',
+    affects: 'how long a measure is booked for',
+  },
+  'booking.installMinutesPerUnit': {
+    label: 'To set a unit, minutes',
+    affects: 'how long an install is booked for',
+  },
+  'booking.driveKmPerHour': { label: 'Drives go at, km/h', affects: 'drive times without roads' },
   'booking.leadWorkdays': { label: 'Release to ready', affects: 'when an install may be booked' },
   'booking.weightDriveMinute': {
     label: 'A minute driven counts',
@@ -46,21 +55,59 @@ const others: Record<string, { label: string; affects: string }> = {
  */
 export function ruleChanges(before: Settings, after: Partial<Settings>): RuleChange[] {
   const fit = after.fit ?? before.fit;
-  const lengths = new Map(
-    lengthRuleGroups
-      .flatMap(({ rules }) => rules)
-      .map(({ rule, label, affects }) => [`fit.${rule}`, { label, affects }]),
-  );
+  const named = namedRules(fit);
   const flat = flattened(before);
   return [...flattened(after)].flatMap(([key, to]) => {
     const from = flat.get(key);
     if (to === undefined || JSON.stringify(to) === JSON.stringify(from)) return [];
-    const length = lengths.get(key);
-    const words = (value: unknown) => (length ? lengthWords(value, fit) : valueWords(key, value));
-    const named = length ?? others[key] ?? { label: key, affects: '' };
-    return [{ ...named, from: words(from), to: words(to) }];
+    const { words, ...rule } = named.get(key) ?? { label: key, affects: '' };
+    const said = (value: unknown) => words?.(value) ?? valueWords(key, value);
+    return [{ ...rule, from: said(from), to: said(to) }];
   });
 }
+
+type NamedRule = {
+  label: string;
+  affects: string;
+  /** Null for what is no value of this rule. */
+  words?: (value: unknown) => string | null;
+};
+
+/** Every rule that has a name, called as the shop's region calls it. */
+function namedRules(fit: FitRules): Map<string, NamedRule> {
+  const lengths = lengthRuleGroups(fit.region).flatMap(({ rules }) => rules);
+  const crown = tradeWord('crown', fit.region);
+  const asFine = (value: unknown) =>
+    typeof value === 'number' ? fineLength(value, fit.unit) : null;
+  const named: [string, NamedRule][] = [
+    ...Object.entries(others),
+    ...lengths.map(({ rule, label, affects, isFine }): [string, NamedRule] => [
+      `fit.${rule}`,
+      {
+        label,
+        affects,
+        words: (value) => (typeof value === 'number' ? shownLength(value, fit, isFine) : null),
+      },
+    ]),
+    ...lengthListRules.map(({ rule, label, affects }): [string, NamedRule] => [
+      `fit.${rule}`,
+      { label, affects, words: (value) => (isNumbers(value) ? shownLengths(value, fit) : null) },
+    ]),
+    [
+      'fit.sheetNominalMm',
+      { label: 'Sheet is called', affects: 'widths that stack sheets', words: asFine },
+    ],
+    [
+      'fit.sheetActualMm',
+      { label: 'Sheet really measures', affects: 'widths that stack sheets', words: asFine },
+    ],
+    ['fit.crownSpringDeg', { label: `Spring of the ${crown}, degrees`, affects: 'its mitres' }],
+  ];
+  return new Map(named);
+}
+
+const isNumbers = (value: unknown): value is number[] =>
+  Array.isArray(value) && value.every((one) => typeof one === 'number');
 
 function flattened(settings: Partial<Settings>): Map<string, unknown> {
   const { fit, booking, keeping, ...rest } = settings;
@@ -72,10 +119,6 @@ function flattened(settings: Partial<Settings>): Map<string, unknown> {
     ...inPart('booking', booking),
     ...inPart('keeping', keeping),
   ]);
-}
-
-function lengthWords(value: unknown, { unit, stepMm }: FitRules): string {
-  return typeof value === 'number' ? formatLength(value, { unit, stepMm }) : 'none';
 }
 
 function valueWords(key: string, value: unknown): string {

@@ -1,4 +1,5 @@
 import { beforeAll, describe, expect, it } from 'vitest';
+import { GET as backRoute } from '@/app/api/rules/changes/[changeId]/route';
 import { POST as previewRoute } from '@/app/api/rules/preview/route';
 import { PATCH as changeRoute } from '@/app/api/rules/route';
 import type { RulePreview } from '@/lib/contracts/rule-changes';
@@ -51,6 +52,30 @@ describe('a change of the shop’s rules', () => {
       'The shop’s own rule sets',
     ]);
   });
+
+  it('is put back by what the server says would undo it, and what came after stays', async () => {
+    const ctx = await contextOf(shop, 'owner');
+    const { booking } = ctx.shop.rules;
+    const change = (body: unknown) =>
+      callRoute(changeRoute, { method: 'PATCH', body, cookie: owner });
+    await change({ booking: { ...booking, windowMinutes: 90 } });
+    await change({ booking: { ...booking, windowMinutes: 90, dayStart: '07:00' } });
+    const lines = await listRuleChanges(ctx);
+    const line = lines.find(({ changes }) => changes[0]?.label === 'Arrival window');
+    const back = await askBack(line?.id ?? '', owner);
+    expect(back).toMatchObject({ status: 200 });
+    expect((await change(back.body)).status).toBe(200);
+    expect((await contextOf(shop, 'owner')).shop.rules.booking).toEqual({
+      ...booking,
+      dayStart: '07:00',
+    });
+    expect((await askBack(line?.id ?? '', await cookieOf(shop.people.scheduler))).status).toBe(403);
+    const other = await makeShop();
+    expect((await askBack(line?.id ?? '', await cookieOf(other.people.owner))).status).toBe(404);
+  });
+
+  const askBack = (changeId: string, cookie: string) =>
+    callRoute(backRoute, { method: 'GET', params: { changeId }, cookie });
 
   it('is looked at and made by the owner alone', async () => {
     for (const role of ['scheduler', 'measurer', 'bench', 'crew'] as const) {

@@ -29,7 +29,7 @@ describe('shop rules and crews', () => {
   it('changes what is given, keeps the rest, and leaves another shop as it was', async () => {
     const before = await rules();
     const others = await rules(otherOwner);
-    const fit = { ...before.fit, unit: 'mm' as const, stepMm: 1, fillerAimMm: 44 };
+    const fit = { ...before.fit, unit: 'mm' as const, stepMm: 1, fillerLeastMm: 30 };
     const answer = await change({ zone: 'America/Denver', phone: '(303) 555-0119', fit });
     expect(answer.status).toBe(200);
     expect(await rules()).toEqual({
@@ -45,7 +45,7 @@ describe('shop rules and crews', () => {
   it('says at each field what cannot be', async () => {
     const { fit, booking } = await rules();
     const wrong = await change({
-      fit: { ...fit, fillerLeastMm: 90, fillerAimMm: 40 },
+      fit: { ...fit, fillerLeastMm: 90, fillerMostMm: 40 },
       booking: { ...booking, dayStart: '17:00', quietFrom: '25:00', workdays: [] },
     });
     expect(wrong.status).toBe(422);
@@ -53,7 +53,7 @@ describe('shop rules and crews', () => {
       'booking.dayEnd',
       'booking.quietFrom',
       'booking.workdays',
-      'fit.fillerAimMm',
+      'fit.fillerMostMm',
     ]);
     expect((await change({ zone: 'Atlantis/Centre' })).body).toMatchObject({
       errors: { zone: expect.any(String) },

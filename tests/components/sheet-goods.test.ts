@@ -2,10 +2,14 @@ import { describe, expect, it } from 'vitest';
 import { readRules } from '@/components/rules/read-rules';
 import { changeShopRulesInput, type ShopSettings } from '@/lib/contracts/shop-rules';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
-import { lengthRuleGroups } from '@/lib/rules/length-rules';
+import {
+  lengthListRules,
+  lengthRuleGroups,
+  shownLength,
+  shownLengths,
+} from '@/lib/rules/length-rules';
 import { newUnit } from '@/lib/sheet/new-run';
 import { fineLength } from '@/lib/sheet/reading-words';
-import { formatLength } from '@/lib/units/format-length';
 
 const settings: ShopSettings = {
   ...defaultShopRules('US'),
@@ -19,11 +23,12 @@ const { fit } = settings;
 
 /** The form as it is shown, with some of it typed anew. */
 function typed(change: Record<string, string>): Record<string, string> {
-  const lengths = lengthRuleGroups.flatMap(({ rules }) =>
-    rules.map(({ rule }) => [rule, formatLength(fit[rule], fit)] as const),
+  const lengths = lengthRuleGroups(fit.region).flatMap(({ rules }) =>
+    rules.map(({ rule, isFine }) => [rule, shownLength(fit[rule], fit, isFine)] as const),
   );
+  const lists = lengthListRules.map(({ rule }) => [rule, shownLengths(fit[rule], fit)] as const);
   return {
-    ...Object.fromEntries(lengths),
+    ...Object.fromEntries([...lengths, ...lists]),
     unit: 'in',
     sheetNominalMm: fineLength(fit.sheetNominalMm, 'in'),
     sheetActualMm: '',

@@ -15,6 +15,7 @@ export const metadata: Metadata = { title: 'Shop rules' };
 export default async function RulesPage() {
   const ctx = await pageContext('shop:read');
   const settings = await getShopRules(ctx);
+  const mayChange = may(ctx.actor.role, 'shop:change');
   return (
     <>
       <TitleBlock
@@ -40,18 +41,14 @@ export default async function RulesPage() {
         }
         className="mb-4"
       />
-      <RulesForm
-        key={JSON.stringify(settings)}
-        settings={settings}
-        mayChange={may(ctx.actor.role, 'shop:change')}
-      />
+      <RulesForm key={JSON.stringify(settings)} settings={settings} mayChange={mayChange} />
       <div className="mt-8 flex flex-col gap-8">
         <RuleSetPart
           key={JSON.stringify([settings.fit.ruleSet, settings.fit.ownRuleSets])}
-          fit={settings.fit}
-          mayChange={may(ctx.actor.role, 'shop:change')}
+          settings={settings}
+          mayChange={mayChange}
         />
-        <RuleHistory lines={await listRuleChanges(ctx)} />
+        <RuleHistory lines={await listRuleChanges(ctx)} settings={settings} mayChange={mayChange} />
       </div>
     </>
   );

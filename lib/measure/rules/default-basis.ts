@@ -31,7 +31,6 @@ export const fitRuleBasis: Record<keyof FitRules, RuleBasis> = {
     'Floor, counter and wall-unit heights from measuring guides; the last stands for just under the ceiling.',
   ),
   fillerLeastMm: basis('F01 F05', 'strong', 'A maker asks for at least 1 in at a wall.'),
-  fillerAimMm: basis('F01 F05', 'medium', 'Half of a 3 in stock filler.'),
   fillerMostMm: basis('F05', 'medium', 'Stock fillers are 3 and 6 in wide.'),
   cornerFillerDoorsMm: basis('F01 F02 F06', 'strong', '2 in each side, never under 1 1/2.'),
   cornerFillerDrawersMm: basis('F02 F04', 'medium', '3 in, or front + handle + 1 1/4 if more.'),

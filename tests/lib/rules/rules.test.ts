@@ -59,7 +59,7 @@ describe('a change of the shop’s rules, told', () => {
     const before = { name: 'Juniper Bend', zone: 'America/New_York', ...rules };
     const after = {
       zone: 'America/Denver',
-      fit: { ...rules.fit, fillerAimMm: 50.8 },
+      fit: { ...rules.fit, fillerMostMm: 50.8 },
       booking: { ...rules.booking, workdays: [1, 2, 3] },
     };
     expect(ruleChanges(before, after)).toEqual([
@@ -70,8 +70,8 @@ describe('a change of the shop’s rules, told', () => {
         to: 'America/Denver',
       },
       {
-        label: 'Filler aimed at',
-        affects: 'suggested widths',
+        label: 'Greatest filler',
+        affects: 'when a run is loose',
         from: expect.any(String),
         to: expect.stringMatching(/^2( in|")?$/),
       },
