@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { EmptyState } from '@/components/ui/empty-state';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { Figure } from '@/lib/contracts/numbers';
@@ -6,10 +7,16 @@ import { apiPaths } from '@/lib/paths';
 import { FigureJobs } from './figure-jobs';
 import { LazyChart } from './lazy-chart';
 
-type FigureDetailProps = { figure: Figure; currency: string; days: number };
+type FigureDetailProps = {
+  figure: Figure;
+  currency: string;
+  days: number;
+  /** What can be done about this figure, before the jobs behind it. */
+  children?: ReactNode;
+};
 
 /** One figure: how it is counted, what it is made of, drawn and as a table, and the jobs behind it. */
-export function FigureDetail({ figure, currency, days }: FigureDetailProps) {
+export function FigureDetail({ figure, currency, days, children }: FigureDetailProps) {
   const words = figureWords[figure.key];
   return (
     <section>
@@ -42,6 +49,7 @@ export function FigureDetail({ figure, currency, days }: FigureDetailProps) {
           </table>
         </div>
       ) : null}
+      {children}
       {figure.lines.length > 0 ? (
         <>
           <TitleBlock

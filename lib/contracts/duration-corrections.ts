@@ -12,6 +12,16 @@ export const durationCorrection = z.object({
   setAsideCount: z.number().int(),
   /** "A unit takes 75 min by 12 installs; the rule says 60." */
   words: z.string(),
+  /** Visits that wait to be booked and would be booked for longer or shorter. */
+  waiting: z.array(
+    z.object({
+      jobId: z.uuid(),
+      jobNumber: z.number().int(),
+      customerName: z.string(),
+      fromMinutes: z.number(),
+      toMinutes: z.number(),
+    }),
+  ),
 });
 export type DurationCorrection = z.infer<typeof durationCorrection>;
 

@@ -10,6 +10,7 @@ import {
   workedMinutes,
 } from '@/lib/schedule/duration-corrections';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
+import { getWaitingList } from '@/server/visits/get-waiting-list';
 import { estimateTakenApart } from '@/server/visits/job-facts';
 import { readJobRecords } from '@/server/visits/job-records';
 
@@ -32,13 +33,38 @@ export async function getDurationCorrections(ctx: PersonContext): Promise<Durati
     const own = timed.filter((visit) => visit.kind === kind);
     const correction = correctedMinutes(own, ctx.shop.rules.booking[rule]);
     if (correction) {
-      view.corrections.push({ rule, ...correction, words: words(kind, correction) });
+      view.corrections.push({
+        rule,
+        ...correction,
+        words: words(kind, correction),
+        waiting: await waitingOtherwise(ctx, rule, correction.offeredMinutes),
+      });
     } else {
       const what = kind === 'install' ? 'installs' : 'measures';
       view.tooFew.push(`${own.length} ${what} were timed; from ${leastTimedVisits} on they tell.`);
     }
   }
   return view;
+}
+
+/** The waiting list by the rule as it is, beside the same list by what is offered. */
+async function waitingOtherwise(
+  ctx: PersonContext,
+  rule: DurationCorrection['rule'],
+  minutes: number,
+): Promise<DurationCorrection['waiting']> {
+  const { shop } = ctx;
+  const booking = { ...shop.rules.booking, [rule]: minutes };
+  const offered = await getWaitingList({
+    ...ctx,
+    shop: { ...shop, rules: { ...shop.rules, booking } },
+  });
+  const now = await getWaitingList(ctx);
+  return offered.flatMap(({ jobId, jobNumber, kind, customerName, workMinutes: toMinutes }) => {
+    const same = now.find((item) => item.jobId === jobId && item.kind === kind);
+    if (!same || same.workMinutes === toMinutes) return [];
+    return [{ jobId, jobNumber, customerName, fromMinutes: same.workMinutes, toMinutes }];
+  });
 }
 
 async function readTimedVisits(ctx: PersonContext) {

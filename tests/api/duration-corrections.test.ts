@@ -13,8 +13,10 @@ import { startTestJob } from '../help/start-test-job';
 
 describe('what real times say', () => {
   let shop: TestShop;
+  let waitingJobId = '';
   beforeAll(async () => {
     shop = await makeShop();
+    waitingJobId = (await startTestJob(shop)).jobId;
     const { crewId } = await makeCrew(shop);
     const { db } = await database();
     for (const [index, minutes] of [100, 110, 120, 130, 140].entries()) {
@@ -40,7 +42,7 @@ describe('what real times say', () => {
     }
   });
 
-  it('is offered against the rule, pauses taken off, and says of what too little is known', async () => {
+  it('is offered against the rule, pauses taken off, with what it would do to those who wait', async () => {
     const ctx = await contextOf(shop, 'owner', new Date('2026-12-20T15:00:00Z'));
     const { corrections, tooFew } = await getDurationCorrections(ctx);
     expect(corrections).toEqual([
@@ -53,6 +55,15 @@ describe('what real times say', () => {
         visitCount: 5,
         setAsideCount: 0,
         words: 'A room takes 120 min by 5 measures; the rule says 90.',
+        waiting: [
+          {
+            jobId: waitingJobId,
+            jobNumber: expect.any(Number),
+            customerName: expect.any(String),
+            fromMinutes: 90,
+            toMinutes: 120,
+          },
+        ],
       },
     ]);
     expect(tooFew).toEqual(['0 installs were timed; from 5 on they tell.']);

@@ -2,11 +2,14 @@ import type { Metadata } from 'next';
 import Link from 'next/link';
 import { FigureDetail } from '@/components/numbers/figure-detail';
 import { FigureList } from '@/components/numbers/figure-list';
+import { OwnTimes } from '@/components/numbers/own-times';
 import { TitleBlock } from '@/components/ui/title-block';
 import { figureKeys, numbersInput } from '@/lib/contracts/numbers';
 import { paths } from '@/lib/paths';
 import { pageContext } from '@/server/base/page-context';
+import { getDurationCorrections } from '@/server/days/get-duration-corrections';
 import { getNumbers } from '@/server/numbers/get-numbers';
+import { getShopRules } from '@/server/shops/get-shop-rules';
 
 export const metadata: Metadata = { title: 'Numbers' };
 
@@ -47,7 +50,16 @@ export default async function NumbersPage({ searchParams }: NumbersPageProps) {
       />
       <div className="mt-4 grid gap-x-10 gap-y-6 lg:grid-cols-[22rem_minmax(0,1fr)]">
         <FigureList numbers={numbers} days={days} shown={shown} />
-        {figure ? <FigureDetail figure={figure} currency={numbers.currency} days={days} /> : null}
+        {figure ? (
+          <FigureDetail figure={figure} currency={numbers.currency} days={days}>
+            {shown === 'hours' ? (
+              <OwnTimes
+                times={await getDurationCorrections(ctx)}
+                settings={await getShopRules(ctx)}
+              />
+            ) : null}
+          </FigureDetail>
+        ) : null}
       </div>
     </>
   );
