@@ -1,5 +1,6 @@
 'use client';
 
+import { useRouter } from 'next/navigation';
 import { useState } from 'react';
 import { useFormRequest } from '@/components/door/use-form-request';
 import { askServer } from '@/components/shell/ask-server';
@@ -9,12 +10,14 @@ import { SelectField } from '@/components/ui/select-field';
 import { TextField } from '@/components/ui/text-field';
 import { TitleBlock } from '@/components/ui/title-block';
 import { apiPaths } from '@/lib/paths';
-import { roles, roleWords } from '@/lib/permissions';
+import { parseRole, type Role, roles, roleWords } from '@/lib/permissions';
 
 type Invited = { link: string; emailed: boolean; email: string };
 
 /** Invites by e-mail, and shows the link for the day when the e-mail does not arrive. */
 export function InviteForm() {
+  const router = useRouter();
+  const [role, setRole] = useState<Role>('crew');
   const [invited, setInvited] = useState<Invited | null>(null);
   const form = useFormRequest(
     async ({ email = '', role = '' }) => {
@@ -23,7 +26,10 @@ export function InviteForm() {
       });
       setInvited({ ...answer, email });
     },
-    () => form.rest(),
+    () => {
+      form.rest();
+      router.refresh();
+    },
   );
   return (
     <form onSubmit={form.submit} className="mt-6 flex max-w-form flex-col gap-3">
@@ -32,7 +38,9 @@ export function InviteForm() {
       <SelectField
         label="Role"
         name="role"
-        defaultValue="crew"
+        value={role}
+        onChange={(event) => setRole(parseRole(event.target.value) ?? 'crew')}
+        hint={roleDoes[role]}
         options={roles.map((role) => ({ value: role, label: roleWords[role] }))}
       />
       <FormError problem={form.problem} shownFields={['email']} />
@@ -53,3 +61,12 @@ export function InviteForm() {
     </form>
   );
 }
+
+/** What each may do, for whoever has to choose. */
+const roleDoes: Record<Role, string> = {
+  owner: 'Everything, the shop rules and the numbers too.',
+  scheduler: 'Jobs, the diary and messages.',
+  measurer: 'Reads the walls on a phone, lays out runs, releases sheets.',
+  bench: 'Builds to the released sheets and says when they are ready.',
+  crew: 'Sees its own day on a phone, reports from site, gets the signature.',
+};

@@ -30,6 +30,7 @@ export const officePages = [
     permission: 'numbers:read',
   },
   { name: 'rules', word: 'Shop rules', path: paths.rules(), letter: 'R', permission: 'shop:read' },
+  { name: 'start', word: 'Start', path: paths.start(), letter: 'A', permission: 'shop:change' },
   { name: 'today', word: 'Today', path: paths.today(), letter: 'T', permission: 'visits:report' },
 ] as const satisfies readonly {
   name: string;

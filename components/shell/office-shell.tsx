@@ -19,6 +19,8 @@ type OfficeShellProps = {
   person: { name: string; role: Role };
   /** What nobody carries to customers yet. */
   carriersMissing?: readonly string[];
+  /** No visit of this shop was confirmed yet: the way there stands first. */
+  isStarting?: boolean;
   children: ReactNode;
 };
 
@@ -28,9 +30,13 @@ export function OfficeShell({
   shops = [],
   person,
   carriersMissing = [],
+  isStarting = false,
   children,
 }: OfficeShellProps) {
-  const links = <OfficeLinks pages={officePagesFor(person.role)} />;
+  const pages = officePagesFor(person.role);
+  const shown = pages.filter(({ name }) => name !== 'start');
+  const start = isStarting ? pages.filter(({ name }) => name === 'start') : [];
+  const links = <OfficeLinks pages={[...start, ...shown]} />;
   const foot = (
     <div className="flex flex-col gap-2 pr-3 max-md:pr-0">
       <ShopSwitch shop={shop} shops={shops} />

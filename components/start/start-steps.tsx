@@ -1,67 +1,86 @@
 import Link from 'next/link';
-import { Glyph } from '@/components/ui/glyph';
-import type { StartStep, StartView } from '@/lib/contracts/start';
-import { startSteps } from '@/lib/contracts/start';
+import { InviteForm } from '@/components/crews/invite-form';
+import { LinkButton } from '@/components/ui/link-button';
+import type { CrewsView } from '@/lib/contracts/crews';
+import type { ShopSettings } from '@/lib/contracts/shop-rules';
+import { type StartView, type StartStep as Step, startSteps } from '@/lib/contracts/start';
 import { paths } from '@/lib/paths';
+import { CrewStep } from './crew-step';
+import { HoursStep } from './hours-step';
+import { StartStep } from './start-step';
 
-const steps: Record<StartStep, { title: string; words: string; href: string }> = {
-  rules: {
-    title: 'Look over the shop rules',
-    words: 'Units, hours, the arrival window, least fillers. They start from common practice.',
-    href: paths.rules(),
-  },
-  crew: {
-    title: 'Make a crew',
-    words: 'Who goes out together: a measurer alone is a crew too.',
-    href: paths.crews(),
-  },
-  people: {
-    title: 'Invite your people',
-    words: 'They get a link by e-mail; what each may do goes by their role.',
-    href: paths.crews(),
-  },
-  job: {
-    title: 'Start the first job',
-    words: 'Customer, site and what they want made. Many at once come from a CSV file.',
-    href: paths.newJob(),
-  },
-  visit: {
-    title: 'Book its site measure',
-    words: 'Drag it from the waiting list into the diary, or ask for times that work.',
-    href: paths.diary(),
-  },
-  yes: {
-    title: 'Wait for the yes',
-    words: 'The customer gets a text and an e-mail, and confirms from the link.',
-    href: paths.messages(),
-  },
+const titles: Record<Step, string> = {
+  hours: 'Say when you work',
+  crew: 'Make a crew',
+  job: 'Start the first job',
+  visit: 'Book its site measure',
+  yes: 'Wait for the yes',
+  people: 'Invite your people, when you like',
 };
 
-/** From nothing to a confirmed visit: what is done is ticked, what comes next stands out. */
-export function StartSteps({ done }: Pick<StartView, 'done'>) {
+type StartStepsProps = {
+  start: StartView;
+  settings: ShopSettings;
+  crews: CrewsView;
+  person: { personId: string; name: string };
+};
+
+/** From nothing to a confirmed visit. What comes next stands open, and most of it is done on this page. */
+export function StartSteps({ start, settings, crews, person }: StartStepsProps) {
+  const { done, customerPage } = start;
   const next = startSteps.find((step) => !done[step]);
+  const bodies: Record<Step, React.ReactNode> = {
+    hours: <HoursStep settings={settings} places={crews.holidayPlaces} />,
+    crew: <CrewStep crews={crews.crews} person={person} />,
+    job: (
+      <>
+        <p>Who called, where, and what they want made. Tick that they may be texted or e-mailed.</p>
+        <LinkButton href={paths.newJob()}>Start a job</LinkButton>
+        <Link href={paths.importJobs()} className="link">
+          Or bring in a list of customers and jobs, as CSV
+        </Link>
+      </>
+    ),
+    visit: (
+      <>
+        <p>
+          The job stands in the list beside the diary. “Times” finds times that work, best first;
+          “Book it” takes one, and the customer is told.
+        </p>
+        <LinkButton href={paths.diary()}>To the diary</LinkButton>
+      </>
+    ),
+    yes: (
+      <>
+        <p>
+          The customer has a link by text and e-mail, and says yes there without an account. You see
+          it in the diary and here.
+        </p>
+        {customerPage ? (
+          <a href={customerPage} target="_blank" rel="noreferrer" className="link">
+            See the page that they have
+          </a>
+        ) : null}
+        <Link href={paths.messages()} className="link">
+          What was sent, and whether it arrived
+        </Link>
+      </>
+    ),
+    people: <InviteForm />,
+  };
   return (
-    <ol className="border-t border-rule">
-      {startSteps.map((step, place) => {
-        const { title, words, href } = steps[step];
-        return (
-          <li key={step} className="grid grid-cols-[2rem_1fr] border-b border-rule py-3">
-            <span className="text-lead font-bold tabular-nums">
-              {done[step] ? <Glyph name="within" /> : place + 1}
-            </span>
-            <div>
-              <Link
-                href={href}
-                className={step === next ? 'link text-lead font-bold' : 'font-bold hover:underline'}
-              >
-                {title}
-              </Link>
-              {done[step] ? <span className="ml-2 text-moss">done</span> : null}
-              <p className="text-graphite">{words}</p>
-            </div>
-          </li>
-        );
-      })}
+    <ol className="border-t border-ink">
+      {startSteps.map((step, place) => (
+        <StartStep
+          key={step}
+          number={place + 1}
+          title={titles[step]}
+          isDone={done[step]}
+          isNext={step === next}
+        >
+          {bodies[step]}
+        </StartStep>
+      ))}
     </ol>
   );
 }

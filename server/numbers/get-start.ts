@@ -1,7 +1,8 @@
-import { and, eq, isNotNull, isNull, sql } from 'drizzle-orm';
+import { and, asc, eq, inArray, isNotNull, isNull, sql } from 'drizzle-orm';
 import { audit, crews, invitations, jobs, people, shops, visits } from '@/db/schema';
 import type { StartView } from '@/lib/contracts/start';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
+import { visitLinkAddress } from '@/server/visits/visit-link';
 
 /** What a new shop has done and has still to do, read from what is there. */
 export async function getStart(ctx: PersonContext): Promise<StartView> {
@@ -21,7 +22,7 @@ export async function getStart(ctx: PersonContext): Promise<StartView> {
   const isNotAlone = await has(db.select({ n }).from(people).where(eq(people.shopId, shop.id)), 1);
   return {
     done: {
-      rules: await has(
+      hours: await has(
         db
           .select({ n })
           .from(audit)
@@ -38,7 +39,18 @@ export async function getStart(ctx: PersonContext): Promise<StartView> {
           .where(and(eq(visits.shopId, shop.id), isNotNull(visits.confirmedAt))),
       ),
     },
+    customerPage: await firstCustomerPage(ctx),
     isSample: shop.isSample ?? false,
     sampleShopId: sample?.id ?? null,
   };
+}
+
+async function firstCustomerPage(ctx: PersonContext): Promise<string | null> {
+  const [visit] = await ctx.db
+    .select({ id: visits.id })
+    .from(visits)
+    .where(and(eq(visits.shopId, ctx.shop.id), inArray(visits.status, ['booked'])))
+    .orderBy(asc(visits.createdAt))
+    .limit(1);
+  return visit ? visitLinkAddress(ctx.db, ctx, visit.id) : null;
 }

@@ -69,7 +69,7 @@ describe('a sample shop beside one’s own', () => {
   it('shows a new shop what comes first', async () => {
     const fresh = await makeShop();
     expect((await getStart(await contextOf(fresh, 'owner'))).done).toMatchObject({
-      rules: false,
+      hours: false,
       crew: false,
       job: false,
       visit: false,

@@ -1,22 +1,39 @@
 import type { Metadata } from 'next';
+import { LiveRefresh } from '@/components/shell/live/live-refresh';
 import { SamplePart } from '@/components/start/sample-part';
 import { StartSteps } from '@/components/start/start-steps';
 import { TitleBlock } from '@/components/ui/title-block';
+import { laterSteps, startSteps } from '@/lib/contracts/start';
 import { pageContext } from '@/server/base/page-context';
 import { getStart } from '@/server/numbers/get-start';
+import { getShopRules } from '@/server/shops/get-shop-rules';
+import { getCrews } from '@/server/visits/get-crews';
 
 export const metadata: Metadata = { title: 'Start' };
 
 export default async function StartPage() {
   const ctx = await pageContext('shop:change');
-  const { done, isSample, sampleShopId } = await getStart(ctx);
-  const left = Object.values(done).filter((isDone) => !isDone).length;
+  const start = await getStart(ctx);
+  const { personId, name } = ctx.actor;
+  const left = startSteps.filter((step) => !start.done[step] && !laterSteps.includes(step)).length;
   return (
     <>
-      <TitleBlock level={1} title="Start" meta={left === 0 ? 'all done' : `${left} of 6 to go`} />
+      <TitleBlock
+        level={1}
+        title="Start"
+        meta={
+          left === 0 ? 'a first visit stands confirmed' : `${left} to the first confirmed visit`
+        }
+      />
+      <LiveRefresh topics={['visits']} />
       <div className="mt-4 grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]">
-        <StartSteps done={done} />
-        <SamplePart isSample={isSample} sampleShopId={sampleShopId} />
+        <StartSteps
+          start={start}
+          settings={await getShopRules(ctx)}
+          crews={await getCrews(ctx)}
+          person={{ personId, name }}
+        />
+        <SamplePart isSample={start.isSample} sampleShopId={start.sampleShopId} />
       </div>
     </>
   );

@@ -1,5 +1,5 @@
 import type { Metadata } from 'next';
-import Link from 'next/link';
+import { BookNext } from '@/components/jobs/book-next';
 import { CustomerData } from '@/components/jobs/customer-data';
 import { JobFacts } from '@/components/jobs/job-facts';
 import { JobFiles } from '@/components/jobs/job-files';
@@ -13,7 +13,6 @@ import { SignOffList } from '@/components/sign-off/sign-off-list';
 import { ForCrewForm } from '@/components/snags/for-crew-form';
 import { JobSnags } from '@/components/snags/job-snags';
 import { TitleBlock } from '@/components/ui/title-block';
-import { paths } from '@/lib/paths';
 import { may } from '@/lib/permissions';
 import { stageWords } from '@/lib/schedule/stages';
 import { found } from '@/server/base/found';
@@ -49,21 +48,13 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
       />
       <div className="mt-4 grid gap-x-10 gap-y-6 xl:grid-cols-[minmax(0,1fr)_minmax(0,1fr)]">
         <section>
-          <TitleBlock
-            title="Who and where"
-            meta={
-              may(ctx.actor.role, 'visits:book') ? (
-                <Link href={paths.diary()} className="link">
-                  Book in the diary
-                </Link>
-              ) : null
-            }
-          />
+          <TitleBlock title="Who and where" />
           <JobFacts
             job={job}
             region={ctx.shop.region}
             mayRead={may(ctx.actor.role, 'messages:read')}
           />
+          {may(ctx.actor.role, 'visits:book') ? <BookNext job={job} /> : null}
           {may(ctx.actor.role, 'jobs:change') ? (
             <SitePlace job={job} ground={getMapGround(ctx)} />
           ) : null}
