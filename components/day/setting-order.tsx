@@ -1,7 +1,7 @@
 'use client';
 
 import { TitleBlock } from '@/components/ui/title-block';
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { settingOrder } from '@/lib/days/setting-order';
 import { useCrew } from './crew-language';
 

@@ -1,8 +1,8 @@
 'use client';
 
 import { SelectField } from '@/components/ui/select-field';
+import type { Run, RunEnd } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run, RunEnd } from '@/lib/contracts/wall-book';
 import { LengthField } from './length-field';
 
 type EndFieldsProps = {

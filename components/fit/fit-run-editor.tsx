@@ -2,7 +2,7 @@
 
 import { useState } from 'react';
 import type { FitView } from '@/lib/contracts/rooms';
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { newRun } from '@/lib/sheet/new-run';
 import { wallName } from '@/lib/sheet/room-names';
 import { type FitChoice, fitHref } from './fit-links';

@@ -8,7 +8,7 @@ import { Button } from '@/components/ui/button';
 import { FormError } from '@/components/ui/form-error';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { FitView } from '@/lib/contracts/rooms';
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { drawElevation } from '@/lib/drawing/elevation';
 import { fitRoom } from '@/lib/measure/fit-room';
 import { wayOutOf } from '@/lib/sheet/with-widths';

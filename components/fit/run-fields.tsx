@@ -2,8 +2,9 @@
 
 import { SelectField } from '@/components/ui/select-field';
 import { TextField } from '@/components/ui/text-field';
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Room, Run } from '@/lib/contracts/wall-book';
+import type { Room } from '@/lib/contracts/wall-book';
 import { newRun } from '@/lib/sheet/new-run';
 import { wallsOf } from '@/lib/sheet/room-names';
 import { unitWords } from '@/lib/sheet/unit-words';

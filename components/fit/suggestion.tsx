@@ -1,6 +1,6 @@
 import { Verdict } from '@/components/ui/verdict';
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run } from '@/lib/contracts/wall-book';
 import type { RunFit, WidthSuggestion } from '@/lib/measure/run-fit';
 import { roundedMm } from '@/lib/sheet/figure-text';
 import { unitWords } from '@/lib/sheet/unit-words';

@@ -1,5 +1,5 @@
+import type { Run, Unit, UnitKind } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run, Unit, UnitKind } from '@/lib/contracts/wall-book';
 import { newUnit } from '@/lib/sheet/new-run';
 import { unitKindName } from '@/lib/sheet/unit-words';
 import { formatLength } from '@/lib/units/format-length';

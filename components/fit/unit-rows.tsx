@@ -1,8 +1,8 @@
 'use client';
 
 import { controlLook } from '@/components/ui/field-frame';
+import { type Run, type Unit, unitKind } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import { type Run, type Unit, unitKind } from '@/lib/contracts/wall-book';
 import { alterableAbout, newUnit } from '@/lib/sheet/new-run';
 import { unitKindName, unitWords } from '@/lib/sheet/unit-words';
 import { LengthField } from './length-field';

@@ -5,7 +5,7 @@ import { useState } from 'react';
 import { problemOf } from '@/components/shell/ask-server';
 import { showToast } from '@/components/ui/toast-store';
 import type { FitView } from '@/lib/contracts/rooms';
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import type { ProblemDetails } from '@/lib/problem-details';
 import { sendRuns } from './save-runs-query';
 

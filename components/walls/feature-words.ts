@@ -1,4 +1,4 @@
-import type { FeatureKind, ReadingOf } from '@/lib/contracts/wall-book';
+import type { FeatureKind, ReadingOf } from '@/lib/contracts/readings';
 import { featureName } from '@/lib/words/feature-words';
 import { type Region, tradeWord } from '@/lib/words/trade';
 import type { Choice } from './choice-sheet';

@@ -1,6 +1,6 @@
 import { newId } from '@/components/phone/new-id';
 import { keepWork } from '@/components/phone/queue-store';
-import type { Reading } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
 import type { PadHabits } from './pad-habits';
 
 type Note = {

@@ -1,6 +1,6 @@
 import { useState } from 'react';
 import { keepDraft } from '@/components/phone/draft-store';
-import type { ReadingOf, Touches } from '@/lib/contracts/wall-book';
+import type { ReadingOf, Touches } from '@/lib/contracts/readings';
 import type { LengthUnit } from '@/lib/units/brands';
 import type { CornerMethod } from '@/lib/walls-pad/pad-fields';
 import type { ToolUse } from '@/lib/walls-pad/pad-tools';

@@ -1,4 +1,5 @@
-import type { Reading, Room } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { Room } from '@/lib/contracts/wall-book';
 import type { PlannedReading } from '@/lib/measure/missing-reading';
 import { cornerName, walkRoom } from '@/lib/measure/room-walk';
 import { askOfReading } from '@/lib/walls-pad/ask-of-reading';

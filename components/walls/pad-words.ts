@@ -1,4 +1,4 @@
-import type { ReadingOf, Touches } from '@/lib/contracts/wall-book';
+import type { ReadingOf, Touches } from '@/lib/contracts/readings';
 import { IN_THE_WAY } from '@/lib/measure/in-the-way';
 import type { ToolUse } from '@/lib/walls-pad/pad-tools';
 import { type Region, tradeName, tradeWord } from '@/lib/words/trade';

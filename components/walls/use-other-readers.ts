@@ -1,6 +1,6 @@
 import { usePersonId } from '@/components/phone/phone-person';
+import type { Reading } from '@/lib/contracts/readings';
 import type { WallBookView } from '@/lib/contracts/rooms';
-import type { Reading } from '@/lib/contracts/wall-book';
 import { type OtherReader, otherReaders } from '@/lib/walls-pad/other-readers';
 import type { LengthSpeech } from '@/lib/walls-pad/say-length';
 

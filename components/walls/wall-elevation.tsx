@@ -1,4 +1,5 @@
-import type { Reading, ReadingOf, WallBook } from '@/lib/contracts/wall-book';
+import type { Reading, ReadingOf } from '@/lib/contracts/readings';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { asRead } from '@/lib/walls-pad/as-read';
 import { featureName } from '@/lib/words/feature-words';

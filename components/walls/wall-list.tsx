@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react';
 import { TitleBlock } from '@/components/ui/title-block';
+import type { Reading } from '@/lib/contracts/readings';
 import type { WallBookView } from '@/lib/contracts/rooms';
-import type { Reading } from '@/lib/contracts/wall-book';
 import type { PlannedReading } from '@/lib/measure/missing-reading';
 import { walkRoom } from '@/lib/measure/room-walk';
 import { standingReadings } from '@/lib/measure/standing-readings';

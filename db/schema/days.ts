@@ -1,6 +1,6 @@
 import { foreignKey, index, jsonb, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
 import { checkAnswers, pauseReasons } from '@/lib/contracts/day-events';
-import type { Reading } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
 import { createdAt, instant, shopColumns } from './columns';
 import { releases } from './sheets';
 import { people } from './shops';

@@ -1,6 +1,7 @@
 import { foreignKey, index, jsonb, pgTable, text, unique, uuid } from 'drizzle-orm/pg-core';
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import { instant, shopColumns } from './columns';
 import { people } from './shops';

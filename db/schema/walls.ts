@@ -11,7 +11,8 @@ import {
   unique,
   uuid,
 } from 'drizzle-orm/pg-core';
-import type { Reading, Run, Unit } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { Run, Unit } from '@/lib/contracts/runs';
 import { createdAt, instant, shopColumns } from './columns';
 import { jobs } from './jobs';
 import { people } from './shops';

@@ -1,7 +1,8 @@
 /** The demo's rooms: three told in full (nearly true, badly out, one wall misread) and plain ones for the rest. */
 import { randomUUID } from 'node:crypto';
+import { type Run, run, type Unit } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import { type Room, type Run, run, type Unit } from '@/lib/contracts/wall-book';
+import type { Room } from '@/lib/contracts/wall-book';
 import { nominalAngle } from './measure-room';
 import { lengthOf, type TrueRoom, type TrueWall } from './true-room';
 

@@ -1,6 +1,8 @@
 import { randomUUID } from 'node:crypto';
+import { type Reading, reading } from '@/lib/contracts/readings';
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import { type Reading, type Room, type Run, reading, type Tool } from '@/lib/contracts/wall-book';
+import type { Room, Tool } from '@/lib/contracts/wall-book';
 import type { AskedReading } from '@/lib/measure/missing-reading';
 import { whatIsMissing } from '@/lib/measure/what-is-missing';
 import { formatLength } from '@/lib/units/format-length';

@@ -1,7 +1,8 @@
 import { randomUUID } from 'node:crypto';
 import type { Transaction } from '@/db/database';
 import { readings, releaseReceipts, releases, rooms, runs, units, walls } from '@/db/schema';
-import type { Reading, WallBook } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { fitRoom } from '@/lib/measure/fit-room';
 import type { DemoJob } from './demo-jobs';
 import { type PlannedRoom, planRoom, type RoomPlan } from './demo-rooms';

@@ -1,4 +1,4 @@
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import type { Fit } from '@/lib/measure/fit';
 import { oneHangingLimitKg } from './lifting';
 

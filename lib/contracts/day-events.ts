@@ -1,8 +1,8 @@
 /** What a crew tells from site, one event a tap; each is safe on the phone first and is sent in order. */
 import { z } from 'zod';
+import { reading } from './readings';
 import { signOffFields } from './sign-offs';
 import { closeFields, closeNeeds, isShownClosed, plainWords, snagFields } from './snags';
-import { reading } from './wall-book';
 
 const id = z.uuid();
 

@@ -3,9 +3,11 @@ import { z } from 'zod';
 import type { Fit } from '@/lib/measure/fit';
 import type { MissingReading } from '@/lib/measure/missing-reading';
 import type { Revised } from '@/lib/sheet/revision-marks';
+import { reading } from './readings';
+import type { Run } from './runs';
+import { run } from './runs';
 import type { FitRules } from './shop-rules';
-import type { Run } from './wall-book';
-import { reading, room, run, type Tool, type WallBook } from './wall-book';
+import { room, type Tool, type WallBook } from './wall-book';
 
 const id = z.uuid();
 

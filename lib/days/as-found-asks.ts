@@ -1,5 +1,5 @@
 /** Which readings a crew takes again before setting: the corners that runs stand in, and the fall of the floor. */
-import type { Reading, ReadingOf } from '@/lib/contracts/wall-book';
+import type { Reading, ReadingOf } from '@/lib/contracts/readings';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import type { Released } from './as-found';
 

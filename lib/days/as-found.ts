@@ -1,6 +1,9 @@
 /** Readings taken again before setting, held against the sheet that the crew sets by. */
+
+import type { Reading, ReadingOf } from '@/lib/contracts/readings';
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Reading, ReadingOf, Run, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { cornerOffset } from '@/lib/measure/corner';
 import type { CornerFit, Fit } from '@/lib/measure/fit';
 import { type FitFigure, fitFigure } from '@/lib/measure/fit-figure';

@@ -1,4 +1,4 @@
-import type { Run, Unit } from '@/lib/contracts/wall-book';
+import type { Run, Unit } from '@/lib/contracts/runs';
 
 export type SettingStep =
   | { step: 'lines' }

@@ -1,5 +1,5 @@
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import { roundBlankUp } from '@/lib/units/round';
 

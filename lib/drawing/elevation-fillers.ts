@@ -1,4 +1,4 @@
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import type { RunEndFit, RunFit } from '@/lib/measure/run-fit';
 import { roundedMm } from '@/lib/sheet/figure-text';
 import { formatLength } from '@/lib/units/format-length';

@@ -1,5 +1,6 @@
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import type { RunFit } from '@/lib/measure/run-fit';
 import type { Revised } from '@/lib/sheet/revision-marks';

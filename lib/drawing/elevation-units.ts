@@ -1,4 +1,4 @@
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import type { PlacedUnit, RunFit } from '@/lib/measure/run-fit';
 import { unitKindName } from '@/lib/sheet/unit-words';
 import { formatLength } from '@/lib/units/format-length';

@@ -1,4 +1,4 @@
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { elevationDimensions } from './elevation-dimensions';
 import { elevationFeatures } from './elevation-features';
 import { elevationFillers, fillerFigures } from './elevation-fillers';

@@ -1,4 +1,4 @@
-import type { Reading } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { figureText } from '@/lib/sheet/figure-text';
 import { dimension } from './dimension';

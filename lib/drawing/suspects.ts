@@ -1,5 +1,6 @@
+import type { Reading } from '@/lib/contracts/readings';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Reading, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import type { ProvedRoom } from '@/lib/measure/prove-room';
 import type { Suspect } from '@/lib/measure/room-closure';
 import { formatLength } from '@/lib/units/format-length';

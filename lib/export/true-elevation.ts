@@ -1,5 +1,6 @@
 import type { SheetView } from '@/lib/contracts/rooms';
-import type { Run, Wall } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
+import type { Wall } from '@/lib/contracts/wall-book';
 import { ceilingLine } from '@/lib/drawing/ceiling-line';
 import { floorLine } from '@/lib/drawing/floor-line';
 import type { RunFit } from '@/lib/measure/run-fit';

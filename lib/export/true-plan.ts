@@ -1,5 +1,5 @@
 import type { SheetView } from '@/lib/contracts/rooms';
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { type PlanWall, roomPlan } from '@/lib/drawing/room-plan';
 import { faceProfile } from '@/lib/drawing/wall-faces';
 import type { RunFit } from '@/lib/measure/run-fit';

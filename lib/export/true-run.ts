@@ -1,5 +1,5 @@
 import type { SheetView } from '@/lib/contracts/rooms';
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import type { PlacedUnit, RunFit } from '@/lib/measure/run-fit';
 import type { TruePoint, TrueShape } from './true-shape';
 import { unitLabel } from './unit-label';

@@ -1,5 +1,5 @@
 import type { SheetView } from '@/lib/contracts/rooms';
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import type { PlacedUnit } from '@/lib/measure/run-fit';
 import { unitWords } from '@/lib/sheet/unit-words';
 import { formatLength } from '@/lib/units/format-length';

@@ -1,6 +1,7 @@
 /** Units as their sheets really are: a width that stacks sheets is corrected before anything is laid out. */
+
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run } from '@/lib/contracts/wall-book';
 import { sheetCorrection } from '@/lib/measure/sheet-correction';
 import type { Problem } from '@/lib/problem';
 

@@ -1,5 +1,5 @@
 /** Repeats of one length or one corner brought together: what each place of the room was read as. */
-import type { ReadingOf } from '@/lib/contracts/wall-book';
+import type { ReadingOf } from '@/lib/contracts/readings';
 import { cornerAngle } from '@/lib/measure/corner';
 import type { Figure } from '@/lib/measure/figure';
 import { meanOf, type Repeat } from '@/lib/measure/mean-of';

@@ -1,5 +1,5 @@
 /** The corners that a crown over a run turns, as the saw must be set. */
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { type Figure, figure } from '@/lib/measure/figure';
 import type { FitContext } from '@/lib/measure/fit-context';
 import { fitFigure } from '@/lib/measure/fit-figure';

@@ -1,5 +1,5 @@
 /** Walking width between the fronts of runs that face each other. */
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { type Figure, figure } from '@/lib/measure/figure';
 import type { FitContext } from '@/lib/measure/fit-context';
 import type { WorkedRun } from '@/lib/measure/fit-runs';

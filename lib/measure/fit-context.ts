@@ -1,6 +1,8 @@
 /** Everything the parts of a fit look things up in; built once from the wall book. */
+
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { actualWidths } from '@/lib/measure/actual-widths';
 import { adjustBook } from '@/lib/measure/adjust-book';
 import { type AdjustedFrame, adjustedFrame } from '@/lib/measure/adjusted-frame';

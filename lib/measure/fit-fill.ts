@@ -1,5 +1,5 @@
 /** The fill of a run and the widths that would make it fit, as the fit shows them. */
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import type { FilledRun, FillRunInput } from '@/lib/measure/fill-run';
 import type { FitContext } from '@/lib/measure/fit-context';
 import { fitFigure } from '@/lib/measure/fit-figure';

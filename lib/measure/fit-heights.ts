@@ -1,5 +1,5 @@
 /** Heights that units need: tall ones to stand up, appliances under the counter, uppers over it. */
-import type { Unit } from '@/lib/contracts/wall-book';
+import type { Unit } from '@/lib/contracts/runs';
 import { type Figure, figure } from '@/lib/measure/figure';
 import type { FloorFit } from '@/lib/measure/fit';
 import type { FitContext } from '@/lib/measure/fit-context';

@@ -1,5 +1,5 @@
 /** Islands and peninsulas of a fit: where they stand, what they face, which pipes they meet. */
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { figure } from '@/lib/measure/figure';
 import { type FitContext, SURE_LENGTH_U_MM } from '@/lib/measure/fit-context';
 import { fitFigure } from '@/lib/measure/fit-figure';

@@ -1,5 +1,5 @@
 /** Kick bases of the runs of a fit: one datum for each group that shares a counter. */
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import type { Figure } from '@/lib/measure/figure';
 import { figure } from '@/lib/measure/figure';
 import type { FitContext } from '@/lib/measure/fit-context';

@@ -1,6 +1,8 @@
 /** The whole fit of a room for its runs. */
+
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { ruleFor } from '@/lib/measure/check-rule';
 import { ENGINE_VERSION } from '@/lib/measure/engine-version';
 import { finishRun } from '@/lib/measure/finish-run';

@@ -1,5 +1,5 @@
 /** Every run of a fit, from its set line to its cut sizes. */
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { type ClearOpening, clearOpening, placeWords } from '@/lib/measure/clear-opening';
 import type { FacePlace } from '@/lib/measure/end-view';
 import { type FilledRun, type FillRunInput, fillRun, layOut } from '@/lib/measure/fill-run';

@@ -1,5 +1,5 @@
 /** The set line behind every run of a fit: who shares a plane, who shares a turn, what is fixed. */
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import type { FacePoint } from '@/lib/measure/face';
 import { type Figure, figure } from '@/lib/measure/figure';
 import type { FitContext } from '@/lib/measure/fit-context';

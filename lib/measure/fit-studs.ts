@@ -1,5 +1,5 @@
 /** What the hung boxes of a run catch, and what on the wall they meet. */
-import type { ReadingOf } from '@/lib/contracts/wall-book';
+import type { ReadingOf } from '@/lib/contracts/readings';
 import { type CollisionFound, collisions, type WallFeature } from '@/lib/measure/collisions';
 import type { Collision } from '@/lib/measure/fit';
 import type { FitContext } from '@/lib/measure/fit-context';

@@ -1,5 +1,6 @@
 /** Whether the units come in: through each doorway read, and round the passage behind it. */
-import type { ReadingOf, Run, Unit } from '@/lib/contracts/wall-book';
+import type { ReadingOf } from '@/lib/contracts/readings';
+import type { Run, Unit } from '@/lib/contracts/runs';
 import { figure } from '@/lib/measure/figure';
 import type { WayInFit } from '@/lib/measure/fit';
 import type { FitContext } from '@/lib/measure/fit-context';

@@ -1,5 +1,5 @@
 /** Floor and ceiling readings brought to one level line. */
-import type { ReadingOf } from '@/lib/contracts/wall-book';
+import type { ReadingOf } from '@/lib/contracts/readings';
 import type { LevelPoint } from '@/lib/measure/floor-surface';
 import type { RoomBook } from '@/lib/measure/room-book';
 import { lengthUncertainty } from '@/lib/measure/uncertainty';

@@ -1,6 +1,9 @@
 /** What planning the readings looks things up in, and the words for places. */
+
+import type { Reading, ReadingOf } from '@/lib/contracts/readings';
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Reading, ReadingOf, Run, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import type { PlannedReading } from '@/lib/measure/missing-reading';
 import { type RoomWalk, type WalkedWall, walkRoom } from '@/lib/measure/room-walk';
 import { standingReadings } from '@/lib/measure/standing-readings';

@@ -1,5 +1,5 @@
 /** Floor and ceiling, from one level line thrown round the room. */
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { planBareLevels } from '@/lib/measure/plan-bare-room';
 import {
   type AskedSlot,

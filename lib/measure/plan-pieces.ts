@@ -1,6 +1,7 @@
 /** A wall that cannot be read from corner to corner is asked for in pieces, mark to mark. */
+
+import type { ReadingOf } from '@/lib/contracts/readings';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { ReadingOf } from '@/lib/contracts/wall-book';
 import { IN_THE_WAY } from '@/lib/measure/in-the-way';
 import {
   type AskedSlot,

@@ -1,5 +1,5 @@
 /** Readings of one wall, as one walks up to it: corner, lengths, face, studs, services. */
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { planBareFaces } from '@/lib/measure/plan-bare-room';
 import {
   type AskedSlot,

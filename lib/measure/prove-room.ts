@@ -1,6 +1,8 @@
 /** What a measurer asks before leaving: do the readings hold together? Light to load. */
+
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import { fitClosure } from '@/lib/measure/fit-closure';
 import { fitContext } from '@/lib/measure/fit-context';

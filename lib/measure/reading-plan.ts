@@ -1,6 +1,8 @@
 /** Every reading a room needs for its runs, in walking order, with what answers each. */
+
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import type { PlannedReading } from '@/lib/measure/missing-reading';
 import { planAcross } from '@/lib/measure/plan-across';
 import { type AskedSlot, type PlanContext, planContext } from '@/lib/measure/plan-context';

@@ -1,6 +1,8 @@
 /** A wall book made ready for the engine: what stands, what it was read with, and what cannot be used. */
+
+import type { Reading, ReadingOf } from '@/lib/contracts/readings';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Reading, ReadingOf, Tool, WallBook } from '@/lib/contracts/wall-book';
+import type { Tool, WallBook } from '@/lib/contracts/wall-book';
 import { type RoomWalk, walkRoom } from '@/lib/measure/room-walk';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { wallIdsOf } from '@/lib/measure/wall-ids';

@@ -1,5 +1,6 @@
 /** The walls of a room in walking order, each with its neighbours at the corners. */
-import type { Room, Run, Wall } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
+import type { Room, Wall } from '@/lib/contracts/wall-book';
 
 export type WalkedWall = {
   wall: Wall;

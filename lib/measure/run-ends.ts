@@ -1,5 +1,5 @@
 /** What stands at the two ends of a run: the face it meets and the filler rules that hold there. */
-import type { Run, Unit } from '@/lib/contracts/wall-book';
+import type { Run, Unit } from '@/lib/contracts/runs';
 import type { AdjustedFrame } from '@/lib/measure/adjusted-frame';
 import type { EndFacePoint } from '@/lib/measure/face-surface';
 import { figure } from '@/lib/measure/figure';

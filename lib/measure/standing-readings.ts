@@ -1,4 +1,4 @@
-import type { Reading } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
 
 /** What decides whether a reading stands: its id, what it corrects, what it takes back. */
 export type BookLine = { id: string; kind: string; replaces?: string; readingId?: string };

@@ -1,5 +1,5 @@
 /** Doors and drawers beside a wall or casing: have they room to open? */
-import type { Unit } from '@/lib/contracts/wall-book';
+import type { Unit } from '@/lib/contracts/runs';
 import { bothUnits } from '@/lib/units/both-units';
 import type { Measured } from './measured';
 import { exactInches as inches } from './rules/exact-inches';

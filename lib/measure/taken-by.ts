@@ -1,5 +1,5 @@
 /** Which standing readings answer a reading asked for. */
-import type { Reading } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
 import type { AskedReading } from '@/lib/measure/missing-reading';
 import type { PlanContext } from '@/lib/measure/plan-context';
 

@@ -1,5 +1,5 @@
 /** The face readings of one wall: rows, columns, and the row that shows it from corner to corner. */
-import type { ReadingOf } from '@/lib/contracts/wall-book';
+import type { ReadingOf } from '@/lib/contracts/readings';
 import type { ProfilePoint } from '@/lib/measure/profile';
 import { cluster, type RoomBook } from '@/lib/measure/room-book';
 import { lengthUncertainty, slopeUncertainty } from '@/lib/measure/uncertainty';

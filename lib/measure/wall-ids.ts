@@ -1,4 +1,4 @@
-import type { Reading } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
 
 /**
  * The walls that a reading names; a corner or a diagonal names the walls that begin at its corners.

@@ -1,5 +1,6 @@
 /** A wall read in pieces: stretches from mark to mark that make up its whole length. */
-import type { ReadingOf, Tool } from '@/lib/contracts/wall-book';
+import type { ReadingOf } from '@/lib/contracts/readings';
+import type { Tool } from '@/lib/contracts/wall-book';
 import { type BoundedEnds, lengthOwnPart, toolCommonPart } from '@/lib/measure/uncertainty';
 
 /** The whole that the pieces make, mm. Example: 1210.5, 914.4 and 875.1 make 3000. */

@@ -1,5 +1,5 @@
 /** How long a visit takes, from what is to be done there. */
-import type { UnitKind } from '@/lib/contracts/wall-book';
+import type { UnitKind } from '@/lib/contracts/runs';
 import type { Outcome, Problem } from '@/lib/problem';
 import { type DurationKey, durationTable } from './duration-table';
 import type { VisitKind } from './visit-kind';

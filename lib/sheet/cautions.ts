@@ -1,4 +1,5 @@
-import type { Reading, Run } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { Run } from '@/lib/contracts/runs';
 import { standingReadings } from '@/lib/measure/standing-readings';
 
 type CautionSource = { runs: readonly Run[]; readings: readonly Reading[]; isOldHouse: boolean };

@@ -1,4 +1,4 @@
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import type { Fit } from '@/lib/measure/fit';
 import type { FitFigure } from '@/lib/measure/fit-figure';
 import type { KickCorner, RunFit } from '@/lib/measure/run-fit';

@@ -1,5 +1,5 @@
+import type { Run, Unit, UnitKind } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Run, Unit, UnitKind } from '@/lib/contracts/wall-book';
 import { exactInches as inches } from '@/lib/measure/rules/exact-inches';
 
 /**

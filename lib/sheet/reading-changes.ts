@@ -1,4 +1,5 @@
-import type { Reading, WallBook } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import type { Region } from '@/lib/words/trade';
 import { readingWords } from './reading-words';

@@ -1,4 +1,5 @@
-import type { Reading, Room } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { Room } from '@/lib/contracts/wall-book';
 import { wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import { formatLength } from '@/lib/units/format-length';
 import { featureWord } from '@/lib/words/feature-words';

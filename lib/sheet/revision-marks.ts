@@ -1,5 +1,6 @@
+import type { Reading } from '@/lib/contracts/readings';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Reading, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import type { FitFigure } from '@/lib/measure/fit-figure';
 import { standingReadings } from '@/lib/measure/standing-readings';

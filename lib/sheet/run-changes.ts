@@ -1,4 +1,5 @@
-import type { Room, Run, RunEnd, Unit } from '@/lib/contracts/wall-book';
+import type { Run, RunEnd, Unit } from '@/lib/contracts/runs';
+import type { Room } from '@/lib/contracts/wall-book';
 import { sortedJson } from '@/lib/sync/sorted-json';
 import { fineLength } from './reading-words';
 import { wallName } from './room-names';

@@ -1,5 +1,6 @@
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Room, Run, WallBook } from '@/lib/contracts/wall-book';
+import type { Room, WallBook } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import { sortedJson } from '@/lib/sync/sorted-json';
 import { type Region, tradeName } from '@/lib/words/trade';

@@ -1,4 +1,5 @@
-import type { Room, Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
+import type { Room } from '@/lib/contracts/wall-book';
 import { sortedJson } from '@/lib/sync/sorted-json';
 
 /**

@@ -1,4 +1,4 @@
-import type { Unit, UnitKind } from '@/lib/contracts/wall-book';
+import type { Unit, UnitKind } from '@/lib/contracts/runs';
 import { type Region, tradeName } from '@/lib/words/trade';
 
 /** One name for each kind of unit, as the shop's region calls it. */

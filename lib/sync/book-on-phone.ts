@@ -1,5 +1,6 @@
+import type { Reading } from '@/lib/contracts/readings';
 import type { WallBookView } from '@/lib/contracts/rooms';
-import type { Reading, Room } from '@/lib/contracts/wall-book';
+import type { Room } from '@/lib/contracts/wall-book';
 import type { Queued } from './queued';
 
 /**

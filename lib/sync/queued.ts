@@ -1,6 +1,7 @@
 import type { DayEvent } from '@/lib/contracts/day-events';
+import type { Reading } from '@/lib/contracts/readings';
 import type { ReportVisitInput } from '@/lib/contracts/visits';
-import type { Reading, Room } from '@/lib/contracts/wall-book';
+import type { Room } from '@/lib/contracts/wall-book';
 
 /** What the phone has to tell the office. Types alone are taken from the contracts: no schema is loaded. */
 export type QueuedWork =

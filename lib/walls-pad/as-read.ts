@@ -1,4 +1,5 @@
-import type { Reading, ReadingOf, Tool, WallBook } from '@/lib/contracts/wall-book';
+import type { Reading, ReadingOf } from '@/lib/contracts/readings';
+import type { Tool, WallBook } from '@/lib/contracts/wall-book';
 import { type Figure, figure } from '@/lib/measure/figure';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { lengthUncertainty } from '@/lib/measure/uncertainty';

@@ -1,4 +1,4 @@
-import type { Reading, ReadingOf, Touches } from '@/lib/contracts/wall-book';
+import type { Reading, ReadingOf, Touches } from '@/lib/contracts/readings';
 import { type Problem, problem } from '@/lib/problem';
 import type { LengthUnit } from '@/lib/units/brands';
 import { entryValue } from './entry-value';

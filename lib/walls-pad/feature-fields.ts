@@ -1,4 +1,4 @@
-import type { FeatureKind, Reading, ReadingOf } from '@/lib/contracts/wall-book';
+import type { FeatureKind, Reading, ReadingOf } from '@/lib/contracts/readings';
 import { type Problem, problem } from '@/lib/problem';
 import { entryValue } from './entry-value';
 import { entryText, isEmptyEntry, type PadEntry } from './pad-entry';

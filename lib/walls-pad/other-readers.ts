@@ -1,6 +1,7 @@
+import type { Reading } from '@/lib/contracts/readings';
 import type { Reader } from '@/lib/contracts/rooms';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Reading, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import { readingWords } from './reading-words';

@@ -1,5 +1,7 @@
+import type { Reading } from '@/lib/contracts/readings';
+import type { Run } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { Reading, Run, Tool, WallBook } from '@/lib/contracts/wall-book';
+import type { Tool, WallBook } from '@/lib/contracts/wall-book';
 import { checkRule } from '@/lib/measure/check-rule';
 import type { CheckKind } from '@/lib/measure/rules/rule-set';
 import { ruleSetsOf } from '@/lib/measure/rules/rule-sets';

@@ -1,4 +1,5 @@
-import type { Reading, Room } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { Room } from '@/lib/contracts/wall-book';
 import { cornerName, walkRoom } from '@/lib/measure/room-walk';
 import { wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import { featureName } from '@/lib/words/feature-words';

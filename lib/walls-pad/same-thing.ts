@@ -1,4 +1,4 @@
-import type { Reading, ReadingOf } from '@/lib/contracts/wall-book';
+import type { Reading, ReadingOf } from '@/lib/contracts/readings';
 
 /** Heights, depths and places no further apart are one place, as the engine has it; from memory. */
 const SAME_PLACE_MM = 40;

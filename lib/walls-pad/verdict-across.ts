@@ -1,4 +1,4 @@
-import type { ReadingOf } from '@/lib/contracts/wall-book';
+import type { ReadingOf } from '@/lib/contracts/readings';
 import { lengthOwnPart, lengthUncertainty } from '@/lib/measure/uncertainty';
 import type { RuleBehind } from '@/lib/sheet/rule-behind';
 import { expectedDiagonal } from './expected-diagonal';

@@ -1,4 +1,6 @@
-import type { ReadingOf, Run, Tool } from '@/lib/contracts/wall-book';
+import type { ReadingOf } from '@/lib/contracts/readings';
+import type { Run } from '@/lib/contracts/runs';
+import type { Tool } from '@/lib/contracts/wall-book';
 import { cornerAngle } from '@/lib/measure/corner';
 import { cornerDeviation } from '@/lib/measure/corner-deviation';
 import type { Figure } from '@/lib/measure/figure';

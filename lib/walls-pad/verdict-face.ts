@@ -1,5 +1,6 @@
+import type { ReadingOf } from '@/lib/contracts/readings';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { ReadingOf, Tool } from '@/lib/contracts/wall-book';
+import type { Tool } from '@/lib/contracts/wall-book';
 import { ruleFor } from '@/lib/measure/check-rule';
 import type { Figure } from '@/lib/measure/figure';
 import { plumbOf } from '@/lib/measure/plumb';

@@ -1,4 +1,5 @@
-import type { ReadingOf, WallBook } from '@/lib/contracts/wall-book';
+import type { ReadingOf } from '@/lib/contracts/readings';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { lengthOwnPart } from '@/lib/measure/uncertainty';
 import { type JudgeInput, judgedBy, type PadVerdict } from './pad-verdict';
 import { placeBy, roomPlan } from './room-plan';

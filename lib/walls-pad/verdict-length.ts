@@ -1,5 +1,5 @@
+import type { ReadingOf } from '@/lib/contracts/readings';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import type { ReadingOf } from '@/lib/contracts/wall-book';
 import { walkRoom } from '@/lib/measure/room-walk';
 import { lengthOwnPart, lengthUncertainty } from '@/lib/measure/uncertainty';
 import type { RuleBehind } from '@/lib/sheet/rule-behind';

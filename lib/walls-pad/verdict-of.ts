@@ -1,4 +1,4 @@
-import type { Reading } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
 import { type Problem, problem } from '@/lib/problem';
 import { otherReadings, type PadVerdict, type VerdictInput } from './pad-verdict';
 import { verdictOfDiagonal, verdictOfWidth } from './verdict-across';

@@ -1,4 +1,4 @@
-import type { Reading, ReadingOf } from '@/lib/contracts/wall-book';
+import type { Reading, ReadingOf } from '@/lib/contracts/readings';
 import { lengthOwnPart, toolCommonPart } from '@/lib/measure/uncertainty';
 import { piecesUncertainty, wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import { type JudgeInput, judgedBy, type PadVerdict } from './pad-verdict';

@@ -1,4 +1,4 @@
-import type { ReadingOf } from '@/lib/contracts/wall-book';
+import type { ReadingOf } from '@/lib/contracts/readings';
 import type { JudgeInput, PadVerdict } from './pad-verdict';
 import { sayLength } from './say-length';
 

@@ -1,4 +1,4 @@
-import type { FeatureKind } from '@/lib/contracts/wall-book';
+import type { FeatureKind } from '@/lib/contracts/readings';
 import { type Region, tradeWord } from './trade';
 
 /** What is on a wall, in the middle of a sentence: "outlet" in the US is "socket" in the UK. */

@@ -1,7 +1,7 @@
 import { and, asc, eq, inArray } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { runs, units } from '@/db/schema';
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import type { Context } from '@/server/base/context';
 
 /** The runs of these rooms with their units, left to right; a room without any is not in the answer. */

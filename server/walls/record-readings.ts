@@ -1,12 +1,12 @@
 import { and, eq, inArray } from 'drizzle-orm';
 import type { Transaction } from '@/db/database';
 import { readings, rooms } from '@/db/schema';
+import type { Reading } from '@/lib/contracts/readings';
 import {
   parseReading,
   type RecordReadingsAnswer,
   type RecordReadingsInput,
 } from '@/lib/contracts/rooms';
-import type { Reading } from '@/lib/contracts/wall-book';
 import { sortedJson } from '@/lib/sync/sorted-json';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';

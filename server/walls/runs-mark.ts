@@ -1,5 +1,5 @@
 import { createHash } from 'node:crypto';
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { sortedJson } from '@/lib/sync/sorted-json';
 
 /** The same for the same runs: a screen sends it back to show what it saw. */

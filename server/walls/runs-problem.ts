@@ -1,4 +1,5 @@
-import type { Room, Run, RunEnd } from '@/lib/contracts/wall-book';
+import type { Run, RunEnd } from '@/lib/contracts/runs';
+import type { Room } from '@/lib/contracts/wall-book';
 import type { RefusalDetail } from '@/server/base/problem-response';
 
 /** What is wrong with a set of runs as a whole, field by field; null when they can be kept. */

@@ -1,9 +1,9 @@
 import type { Page } from 'playwright-core';
 import { beforeAll, beforeEach, describe, expect, inject, it } from 'vitest';
 import type { PhotoRow } from '@/lib/contracts/files';
+import type { Reading } from '@/lib/contracts/readings';
 import type { WallBookView } from '@/lib/contracts/rooms';
 import type { VisitView } from '@/lib/contracts/visits';
-import type { Reading } from '@/lib/contracts/wall-book';
 import { apiPaths, paths } from '@/lib/paths';
 import type { Queued } from '@/lib/sync/queued';
 import { answerPad, isTypedAtOnce, questionOn } from '../help/answer-pad';

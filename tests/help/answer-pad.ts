@@ -1,6 +1,6 @@
 import type { Page } from 'playwright-core';
 import { expect } from 'vitest';
-import type { Reading } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
 import { pressNext, typeInches } from './pad';
 
 const titles: Partial<Record<Reading['kind'], RegExp>> = {

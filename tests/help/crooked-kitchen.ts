@@ -1,5 +1,7 @@
 /** A kitchen badly out of true, read as a measurer would: the same for the server, the drawings and the look. */
-import type { Reading, Room, Run, Tool, WallBook } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { Run } from '@/lib/contracts/runs';
+import type { Room, Tool, WallBook } from '@/lib/contracts/wall-book';
 import { formatLength } from '@/lib/units/format-length';
 import { kitchenRuns } from './kitchen-runs';
 

@@ -1,4 +1,4 @@
-import type { Run, Unit, UnitKind } from '@/lib/contracts/wall-book';
+import type { Run, Unit, UnitKind } from '@/lib/contracts/runs';
 
 const inch = 25.4;
 

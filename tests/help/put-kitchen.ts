@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import { tools } from '@/db/schema';
-import type { Reading } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
 import { database } from '@/server/base/database';
 import { recordReadings } from '@/server/walls/record-readings';
 import { saveRoom } from '@/server/walls/save-room';

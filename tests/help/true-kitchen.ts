@@ -2,8 +2,9 @@ import { planRoom, type RoomPlan } from '@/db/seed/demo-rooms';
 import { measureRoom } from '@/db/seed/measure-room';
 import { seededRandom } from '@/db/seed/seeded-random';
 import { angleAt, lengthOf } from '@/db/seed/true-room';
+import type { Reading } from '@/lib/contracts/readings';
 import type { WallBookView } from '@/lib/contracts/rooms';
-import type { Reading, Tool } from '@/lib/contracts/wall-book';
+import type { Tool } from '@/lib/contracts/wall-book';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 
 const planned = (plan: RoomPlan) =>

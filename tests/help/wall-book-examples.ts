@@ -1,5 +1,6 @@
+import type { Reading, ReadingOf } from '@/lib/contracts/readings';
 import type { WallBookView } from '@/lib/contracts/rooms';
-import type { Reading, ReadingOf, Room, Tool, WallBook } from '@/lib/contracts/wall-book';
+import type { Room, Tool, WallBook } from '@/lib/contracts/wall-book';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import type { Queued, QueuedWork } from '@/lib/sync/queued';
 import { roomIdOf } from '@/lib/sync/queued';

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { siteCautions } from '@/lib/cautions/site-cautions';
-import type { Run } from '@/lib/contracts/wall-book';
+import type { Run } from '@/lib/contracts/runs';
 import { checklistOf, usualChecklists } from '@/lib/days/checklists';
 import { settingLines } from '@/lib/days/setting-lines';
 import { settingOrder } from '@/lib/days/setting-order';

@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import type { Reading, WallBook } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { askedDiagonals } from '@/lib/drawing/asked-diagonals';
 import { sureFactor } from '@/lib/drawing/closure-frame';
 import { type ClosureDrawing, drawClosure } from '@/lib/drawing/closure-picture';

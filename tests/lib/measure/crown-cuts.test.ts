@@ -1,6 +1,6 @@
 import { describe, expect, test } from 'vitest';
+import type { Run } from '@/lib/contracts/runs';
 import { fitRules } from '@/lib/contracts/shop-rules';
-import type { Run } from '@/lib/contracts/wall-book';
 import { fitRoom } from '@/lib/measure/fit-room';
 import { crownMitre } from '@/lib/measure/mitre';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';

@@ -1,6 +1,8 @@
 import { describe, expect, test } from 'vitest';
+import type { Reading } from '@/lib/contracts/readings';
+import type { Run } from '@/lib/contracts/runs';
 import { fitRules } from '@/lib/contracts/shop-rules';
-import type { Reading, Run, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { fitRoom } from '@/lib/measure/fit-room';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { sampleRun, sampleUnit } from './sample-runs';

@@ -1,7 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
+import type { Reading } from '@/lib/contracts/readings';
+import type { Run } from '@/lib/contracts/runs';
 import { fitRules } from '@/lib/contracts/shop-rules';
-import type { Reading, Run, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import type { FitFigure } from '@/lib/measure/fit-figure';
 import { fitRoom } from '@/lib/measure/fit-room';

@@ -1,6 +1,7 @@
 import { expect, test } from 'vitest';
+import type { Reading } from '@/lib/contracts/readings';
 import { fitRules } from '@/lib/contracts/shop-rules';
-import type { Reading, Tool, WallBook } from '@/lib/contracts/wall-book';
+import type { Tool, WallBook } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import type { FitFigure } from '@/lib/measure/fit-figure';
 import { fitRoom } from '@/lib/measure/fit-room';

@@ -1,6 +1,7 @@
 /** Fuzzed readings through the contract and the fit: counts of what became of them, and of what must not be. */
+
+import { type Reading, reading as readingContract } from '@/lib/contracts/readings';
 import { fitRules } from '@/lib/contracts/shop-rules';
-import { type Reading, reading as readingContract } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import { fitRoom } from '@/lib/measure/fit-room';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';

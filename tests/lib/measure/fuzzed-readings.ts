@@ -1,5 +1,6 @@
 /** Readings of any shape and number, as a broken phone or a hostile one might send them. */
-import type { Reading, WallBook } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import type { Random } from './random-room';
 import { countedId } from './true-room';
 

@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
+import type { Reading } from '@/lib/contracts/readings';
 import { fitRules } from '@/lib/contracts/shop-rules';
-import type { Reading } from '@/lib/contracts/wall-book';
 import { oneLevelLine } from '@/lib/measure/level-line';
 import { openBook } from '@/lib/measure/room-book';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';

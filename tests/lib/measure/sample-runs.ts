@@ -1,5 +1,5 @@
 /** Runs for tests. */
-import type { Run, Unit } from '@/lib/contracts/wall-book';
+import type { Run, Unit } from '@/lib/contracts/runs';
 import { countedId } from './true-room';
 
 export function sampleUnit(n: number, over: Partial<Unit> = {}): Unit {

@@ -1,5 +1,6 @@
 /** A made-up room that is known exactly, and the readings a measurer would take in it. */
-import type { Reading, Tool, WallBook } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { Tool, WallBook } from '@/lib/contracts/wall-book';
 import { seeded } from './seeded';
 
 export type TrueWall = {

@@ -1,5 +1,7 @@
 /** The same wall book seen in a mirror, walked from another wall, or taken in another order. */
-import type { Reading, Run, RunEnd, WallBook } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { Run, RunEnd } from '@/lib/contracts/runs';
+import type { WallBook } from '@/lib/contracts/wall-book';
 
 /** Left and right change places; every number stays. */
 export function mirroredBook(book: WallBook): WallBook {

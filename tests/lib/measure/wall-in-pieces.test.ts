@@ -1,12 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
+import { piecesReading, type Reading, type ReadingOf } from '@/lib/contracts/readings';
 import { fitRules } from '@/lib/contracts/shop-rules';
-import {
-  piecesReading,
-  type Reading,
-  type ReadingOf,
-  type WallBook,
-} from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import type { Fit } from '@/lib/measure/fit';
 import { fitRoom } from '@/lib/measure/fit-room';
 import { IN_THE_WAY } from '@/lib/measure/in-the-way';

@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest';
+import type { Reading } from '@/lib/contracts/readings';
 import { fitRules } from '@/lib/contracts/shop-rules';
-import type { Reading, WallBook } from '@/lib/contracts/wall-book';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { readingPlan } from '@/lib/measure/reading-plan';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { whatIsMissing } from '@/lib/measure/what-is-missing';

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { run as runSchema } from '@/lib/contracts/wall-book';
+import { run as runSchema } from '@/lib/contracts/runs';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { isOldHouse } from '@/lib/measure/rules/old-house';
 import { cautionsFor } from '@/lib/sheet/cautions';

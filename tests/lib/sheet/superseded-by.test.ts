@@ -1,5 +1,7 @@
 import { describe, expect, it } from 'vitest';
-import type { Reading, Run, WallBook } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
+import type { Run } from '@/lib/contracts/runs';
+import type { WallBook } from '@/lib/contracts/wall-book';
 import { standingIds } from '@/lib/measure/standing-readings';
 import { supersededBy } from '@/lib/sheet/sheet-changes';
 import { sheetKey } from '@/lib/sheet/sheet-key';

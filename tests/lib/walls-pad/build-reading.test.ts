@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { reading as readingSchema } from '@/lib/contracts/wall-book';
+import { reading as readingSchema } from '@/lib/contracts/readings';
 import { askOfReading, entriesOfReading } from '@/lib/walls-pad/ask-of-reading';
 import {
   buildReading,

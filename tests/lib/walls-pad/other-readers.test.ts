@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { Reading, ReadingOf } from '@/lib/contracts/wall-book';
+import type { Reading, ReadingOf } from '@/lib/contracts/readings';
 import { otherReaders } from '@/lib/walls-pad/other-readers';
 import {
   exampleBook,

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { type ReadingOf, reading as readingSchema } from '@/lib/contracts/wall-book';
+import { type ReadingOf, reading as readingSchema } from '@/lib/contracts/readings';
 import { asRead } from '@/lib/walls-pad/as-read';
 import { askOfReading, entriesOfReading } from '@/lib/walls-pad/ask-of-reading';
 import { buildReading } from '@/lib/walls-pad/build-reading';

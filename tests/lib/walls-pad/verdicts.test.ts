@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import type { Reading } from '@/lib/contracts/wall-book';
+import type { Reading } from '@/lib/contracts/readings';
 import { judgedBy, worstOf } from '@/lib/walls-pad/pad-verdict';
 import { verdictOf } from '@/lib/walls-pad/verdict-of';
 import {
