@@ -23,7 +23,9 @@ export function ImportScreen() {
   const [takesDoubles, setTakesDoubles] = useState(false);
   const list = useImport(({ jobs, leftOut }) => {
     const rest = leftOut > 0 ? ` Left out: ${rowsWords(leftOut)}.` : '';
-    showToast({ text: `${jobs} ${jobs === 1 ? 'job' : 'jobs'} imported.${rest}` });
+    showToast({
+      text: `${jobs} ${jobs === 1 ? 'job' : 'jobs'} imported.${rest} Their addresses are being put on the map; those not found stay under “no pin”.`,
+    });
     router.push(paths.jobs());
   });
   const { preview } = list;

@@ -62,6 +62,13 @@ const columns: Column<JobRow>[] = [
     cell: (job) => job.nextVisit ?? <span className="text-graphite">none booked</span>,
   },
   {
+    key: 'map',
+    header: 'Map',
+    isForDesk: true,
+    cell: (job) => (job.isOnMap ? '' : <span className="text-ochre">no pin</span>),
+    choice: (job) => (job.isOnMap ? 'has a pin' : 'no pin'),
+  },
+  {
     key: 'units',
     header: 'Units',
     isForDesk: true,

@@ -1,3 +1,4 @@
+import { sql } from 'drizzle-orm';
 import {
   bigint,
   boolean,
@@ -91,6 +92,8 @@ export const sites = pgTable(
     postcode: text('postcode').notNull().default(''),
     latitude: doublePrecision('latitude'),
     longitude: doublePrecision('longitude'),
+    /** When the address service is next asked for the pin; null: nobody waits for it. */
+    placeDueAt: instant('place_due_at'),
     /** IANA zone of the site; messages keep to its hours. */
     zone: text('zone').notNull(),
     wayIn: text('way_in').notNull().default(''),
@@ -111,6 +114,7 @@ export const sites = pgTable(
       foreignColumns: [customers.shopId, customers.id],
     }).onDelete('cascade'),
     index('sites_by_customer').on(table.shopId, table.customerId),
+    index('sites_place_due').on(table.placeDueAt).where(sql`${table.placeDueAt} is not null`),
   ],
 );
 

@@ -93,6 +93,8 @@ export const jobRow = z.object({
   phone: z.string(),
   street: z.string(),
   town: z.string(),
+  /** Its site has a pin, by which drives are reckoned. */
+  isOnMap: z.boolean(),
   unitCount: z.number().int(),
   readyOn: z.string().nullable(),
   /** Local date and time of the next visit in words, or null. */

@@ -65,6 +65,8 @@ async function write(tx: Transaction, ctx: PersonContext, rows: TakenRow[]): Pro
         customerId,
         zone: ctx.shop.zone,
         ...job.site,
+        // Pins that the list does not give are looked up afterwards (place-due-sites).
+        placeDueAt: job.site.latitude === null ? ctx.now : null,
       })),
     );
     await tx.insert(jobs).values(

@@ -1,3 +1,4 @@
+import { sql } from 'drizzle-orm';
 import { customers, jobs, sites } from '@/db/schema';
 
 /** What a row of the list shows, from the job joined with its customer and site. */
@@ -10,6 +11,7 @@ export const jobRowFields = {
   phone: customers.phone,
   street: sites.street,
   town: sites.town,
+  isOnMap: sql<boolean>`${sites.latitude} is not null`,
   unitCount: jobs.unitCount,
   readyOn: jobs.readyOn,
   createdAt: jobs.createdAt,

@@ -4,6 +4,7 @@ import { database } from '@/server/base/database';
 import { env } from '@/server/base/env';
 import { log } from '@/server/base/log';
 import { repeat } from '@/server/base/repeat';
+import { placeDueSites } from '@/server/jobs/place-due-sites';
 import { forgetOld } from '@/server/keeping/forget-old';
 import { startWorker } from '@/server/messages/worker';
 import { hashPassword } from '@/server/people/sign-in';
@@ -17,6 +18,7 @@ import { makeVisitLink } from '@/server/visits/visit-link';
 
 /** Other programs hear of a change within so long. */
 const tellEveryMs = 5_000;
+const placeEveryMs = 2_000;
 const forgetEveryMs = 6 * 3_600_000;
 
 /** Once a process, before the first request is answered. */
@@ -24,7 +26,7 @@ export async function startUp(): Promise<void> {
   const { building, demo, dataDirectory, backUpDirectory } = env();
   if (building) return;
   const open = await database();
-  await getPorts();
+  const { geocode } = await getPorts();
   if (demo) {
     await seedDemo(open.db, {
       now: new Date(),
@@ -35,8 +37,11 @@ export async function startUp(): Promise<void> {
   const stopWorker = startWorker(composeWithCopy(signedCopyOf), [noticeSilence]);
   const stopLapsing = startLapsing();
   const stopBackUps = startBackUps(open, { dataDirectory, backUpDirectory });
-  const stopTelling = repeat('programs', tellEveryMs, () => sendDeliveries(open.db, new Date()));
-  const stopForgetting = repeat('keeping', forgetEveryMs, () => forgetOld(open.db, new Date()));
+  const telling = repeat('programs', tellEveryMs, () => sendDeliveries(open.db, new Date()));
+  const placing = repeat('jobs/place-due-sites', placeEveryMs, () =>
+    placeDueSites(open.db, geocode, new Date()),
+  );
+  const forgetting = repeat('keeping', forgetEveryMs, () => forgetOld(open.db, new Date()));
   log('started', { database: open.kind, demo });
 
   for (const signal of ['SIGTERM', 'SIGINT'] as const) {
@@ -45,8 +50,9 @@ export async function startUp(): Promise<void> {
         stopWorker(),
         stopLapsing(),
         stopBackUps(),
-        stopTelling(),
-        stopForgetting(),
+        telling.stop(),
+        placing.stop(),
+        forgetting.stop(),
       ]);
       await open.close();
       log('stopped');

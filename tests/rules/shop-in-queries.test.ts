@@ -23,6 +23,8 @@ const ofNoShop: Record<string, string> = {
   'server/people/list-demo-people.ts': 'by the e-mails of the invented shop',
   'server/shops/create-shop.ts': 'makes the shop',
   'server/visits/lapse-holds.ts': 'the clock lets holds go in every shop alike',
+  'server/jobs/place-due-sites.ts':
+    'the worker looks addresses up for every shop; each row it takes names its own',
   'server/keeping/forget-old.ts': 'each shop by its own rule',
   'server/keeping/start-sample.ts': 'whether the asker has a sample, whichever it is',
   'server/keeping/remove-sample.ts': 'the asker’s sample, whichever it is',

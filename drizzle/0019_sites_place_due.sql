@@ -1,0 +1,2 @@
+ALTER TABLE "sites" ADD COLUMN "place_due_at" timestamp with time zone;--> statement-breakpoint
+CREATE INDEX "sites_place_due" ON "sites" USING btree ("place_due_at") WHERE "sites"."place_due_at" is not null;
