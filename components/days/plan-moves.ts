@@ -1,4 +1,4 @@
-import type { CrewDay, DayPlanView, PlannedStop } from '@/lib/contracts/day-plans';
+import type { CrewDay, DayChange, DayPlanView, PlannedStop } from '@/lib/contracts/day-plans';
 
 /** What the better order does to one stop. */
 export type StopMove = {
@@ -24,6 +24,17 @@ export function movesOfPlan({ now, better, changes }: DayPlanView): Map<string, 
     });
   }
   return moves;
+}
+
+/** What puts the day back as it was before the plan was taken; taking it has raised each version by one. */
+export function changesBack({ now, changes }: DayPlanView): DayChange[] {
+  const before = placedByVisit(now);
+  return changes.flatMap(({ visitId, version }) => {
+    const was = before.get(visitId);
+    if (!was) return [];
+    const { crew, stop } = was;
+    return [{ visitId, version: version + 1, crewId: crew.crewId, startsAt: stop.startsAt }];
+  });
 }
 
 function placedByVisit(crews: readonly CrewDay[]): Map<string, Placed> {

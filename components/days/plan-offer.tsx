@@ -1,6 +1,7 @@
 'use client';
 
 import { useState } from 'react';
+import { saidOf } from '@/components/diary/use-mover';
 import { problemOf } from '@/components/shell/ask-server';
 import { Button } from '@/components/ui/button';
 import { FormError } from '@/components/ui/form-error';
@@ -8,7 +9,7 @@ import { showToast } from '@/components/ui/toast-store';
 import type { DayPlanView } from '@/lib/contracts/day-plans';
 import type { ProblemDetails } from '@/lib/problem-details';
 import { useAcceptDayPlan } from './day-plan-query';
-import { savedWords } from './plan-moves';
+import { changesBack, savedWords } from './plan-moves';
 
 /** The better order in minutes before and after, taken whole or not at all. */
 export function PlanOffer({
@@ -32,10 +33,21 @@ export function PlanOffer({
       const { changed } = await accept.mutateAsync({ idempotencyKey, date, changes });
       showToast({
         text: `${changed} ${changed === 1 ? 'visit' : 'visits'} moved. No promise is broken.`,
+        undo: () => void putBack(),
       });
       onDone();
     } catch (caught) {
       setProblem(problemOf(caught));
+    }
+  }
+
+  async function putBack() {
+    try {
+      const back = { idempotencyKey: crypto.randomUUID(), date, changes: changesBack(plan) };
+      await accept.mutateAsync(back);
+      showToast({ text: 'Taken back: the day is in the order that it had.' });
+    } catch (caught) {
+      showToast({ text: saidOf(problemOf(caught)), isProblem: true });
     }
   }
 

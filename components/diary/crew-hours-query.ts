@@ -10,8 +10,12 @@ import { addDays, type LocalDate } from '@/lib/time/civil';
 import { isWorkday, type WorkingPattern } from '@/lib/time/workdays';
 
 export type HoursOf = (crewId: string, date: LocalDate) => WorkedHours | null;
+export type Elsewhere = CrewHours['elsewhere'][number];
+export type ElsewhereOf = (crewId: string) => readonly Elsewhere[];
 
-/** When each crew works; by the shop's own hours until it is known. */
+const nowhereElse: readonly Elsewhere[] = [];
+
+/** When each crew works, by the shop's own hours until it is known, and when its people are out with others. */
 export function useCrewHours({
   from,
   weeks,
@@ -20,10 +24,11 @@ export function useCrewHours({
   from: LocalDate;
   weeks: number;
   pattern: WorkingPattern;
-}): { hoursOf: HoursOf; workedDates: LocalDate[] } {
+}): { hoursOf: HoursOf; elsewhereOf: ElsewhereOf; workedDates: LocalDate[] } {
   const to = addDays(from, weeks * 7);
   const { data } = useQuery({
-    queryKey: ['crews', 'hours', from, to],
+    // Of what is asked for again when a visit or a crew has changed.
+    queryKey: ['days', 'crew-hours', from, to],
     queryFn: ({ signal }) => askServer<CrewHours[]>(apiPaths.crewHours(from, to), { signal }),
     placeholderData: keepPreviousData,
     staleTime: 60_000,
@@ -42,6 +47,8 @@ export function useCrewHours({
         if (crew) return crew.get(date) ?? null;
         return isWorkday(date, pattern) ? shopHours : null;
       },
+      elsewhereOf: (crewId) =>
+        data?.find((crew) => crew.crewId === crewId)?.elsewhere ?? nowhereElse,
       workedDates: [...new Set([...known.values()].flatMap((days) => [...days.keys()]))],
     };
   }, [data, pattern]);

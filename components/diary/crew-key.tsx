@@ -1,4 +1,5 @@
 import { Button } from '@/components/ui/button';
+import { KeyHint } from '@/components/ui/key-hint';
 import type { CrewView } from '@/lib/contracts/visits';
 import { visitKinds } from '@/lib/schedule/visit-kind';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
@@ -46,6 +47,7 @@ export function CrewKey({ crews, filter }: { crews: readonly CrewView[]; filter:
           onChange={filter.toggleOnlyOpen}
         />
         <span className="border border-dashed border-graphite px-1">no answer yet</span> only
+        <KeyHint keys="N" />
       </label>
       {filter.isAnythingHidden ? (
         <Button look="plain" className="min-h-6 px-1 py-0 text-note" onClick={filter.showAll}>

@@ -7,6 +7,7 @@ const views: { view: DiaryView; word: string; key: string }[] = [
   { view: 'month', word: 'month', key: 'M' },
   { view: 'week', word: 'week', key: 'W' },
   { view: 'day', word: 'day', key: 'D' },
+  { view: 'list', word: 'list', key: 'L' },
 ];
 
 export function DiaryHead({
@@ -55,6 +56,15 @@ export function DiaryHead({
             ))}
           </fieldset>
           {shown.view === 'crews' ? <WeeksChoice shown={shown} onShow={onShow} /> : null}
+          <Button
+            look="plain"
+            aria-pressed={!shown.isListFolded}
+            onClick={() => onShow({ isListFolded: !shown.isListFolded })}
+            keyName="R"
+            className="px-2.5 max-lg:hidden"
+          >
+            {shown.isListFolded ? 'waiting list' : 'more room'}
+          </Button>
         </div>
       }
     />

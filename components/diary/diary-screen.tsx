@@ -13,6 +13,7 @@ import { useDiaryFilter } from './diary-filter';
 import { DiaryHead } from './diary-head';
 import { DiarySheet } from './diary-sheet';
 import { useDiaryView } from './diary-view';
+import { localStart } from './local-start';
 import { placeOf } from './place';
 import { RefusedMoveDialog } from './refused-move-dialog';
 import { ghostVisit } from './times/ghost-visit';
@@ -21,6 +22,7 @@ import { subjectOfItem, subjectOfVisit, type TimesSubject } from './times/times-
 import { useDiaryKeys } from './use-diary-keys';
 import { useDiaryRange } from './use-diary-range';
 import { useMover } from './use-mover';
+import { useTimesAsked } from './use-times-asked';
 import { VisitDialog } from './visit-dialog';
 import { useVisits } from './visits-query';
 import { WaitingList } from './waiting-list';
@@ -60,12 +62,15 @@ export function DiaryScreen(props: DiaryScreenProps) {
     [subject, looked],
   );
   const waiting = useWaiting();
+  // Times that are looked for unfold it, until they are settled.
+  const isAsideShown = subject !== null || !shown.isListFolded;
 
   const itemOf = (of: Pick<TimesSubject, 'jobId' | 'kind'>) =>
     waiting.all?.find(({ jobId, kind }) => jobId === of.jobId && kind === of.kind);
   const openTimes = (item: WaitingItem) => {
     if (mayBook) setSubject(subjectOfItem(item));
   };
+  useTimesAsked(waiting.all, openTimes);
   const openBooking = (item: WaitingItem, at: Partial<Booking> = {}) =>
     setBooking({
       item,
@@ -83,6 +88,8 @@ export function DiaryScreen(props: DiaryScreenProps) {
     today,
     range,
     show,
+    isListFolded: shown.isListFolded,
+    toggleOnlyOpen: filter.toggleOnlyOpen,
     shop: { pattern, crews },
     visitOf: (id) => data?.find((visit) => visit.id === id),
     nudge: mayBook ? mover.nudge : null,
@@ -93,7 +100,11 @@ export function DiaryScreen(props: DiaryScreenProps) {
   });
 
   return (
-    <div className="diary-sheet grid gap-6 lg:h-[calc(100dvh-2rem)] lg:grid-cols-[minmax(0,1fr)_20rem] print:block print:h-auto">
+    <div
+      className={`diary-sheet grid gap-6 lg:h-[calc(100dvh-2rem)] print:block print:h-auto ${
+        isAsideShown ? 'lg:grid-cols-[minmax(0,1fr)_20rem]' : ''
+      }`}
+    >
       <section aria-label="Diary" className="flex min-h-[70dvh] min-w-0 flex-col lg:min-h-0">
         <DiaryHead
           title={range.title}
@@ -125,9 +136,15 @@ export function DiaryScreen(props: DiaryScreenProps) {
           onDropWaiting={dropWaiting}
         />
       </section>
-      <aside className="flex min-h-0 flex-col border-rule lg:border-l lg:pl-5 print:hidden">
+      <aside
+        className={`flex min-h-0 flex-col border-rule lg:border-l lg:pl-5 print:hidden ${
+          isAsideShown ? '' : 'lg:hidden'
+        }`}
+      >
         {subject ? (
           <TimesPanel
+            today={today}
+            visitDate={subject.visit ? placeOf(subject.visit, zone).date : null}
             key={`${subject.jobId}/${subject.kind}/${subject.visit?.id ?? ''}`}
             subject={subject}
             crews={crews}
@@ -153,8 +170,12 @@ export function DiaryScreen(props: DiaryScreenProps) {
           <WaitingList
             waiting={waiting}
             mayBook={mayBook}
-            isCalendarShown={shown.view !== 'crews'}
+            isCalendarShown={shown.view !== 'crews' && shown.view !== 'list'}
             onTimes={openTimes}
+            onFound={(visit) => {
+              range.goTo(localStart(visit.startsAt, zone).date);
+              setOpenedId(visit.id);
+            }}
           />
         )}
         {mayBook && !subject ? (

@@ -9,6 +9,7 @@ import { mondayOf } from './board/board-days';
 import { CrewBoard } from './board/crew-board';
 import { DiaryCalendar } from './diary-calendar';
 import type { ShownView } from './diary-view';
+import { VisitList } from './list/visit-list';
 import { localStart } from './local-start';
 import type { Place } from './place';
 import type { DiaryRange } from './use-diary-range';
@@ -31,11 +32,16 @@ type DiarySheetProps = {
   onDropWaiting: (key: string, at: { date: string; time?: string; crewId?: string }) => void;
 };
 
-/** The days themselves: by crew on our board, or by month, week and day on the calendar. On paper always by crew. */
+/**
+ * The days themselves: by crew on our board, by month, week and day on the calendar, or one under the other as a
+ * list. On paper by crew, but for the list.
+ */
 export function DiarySheet(props: DiarySheetProps) {
   const { zone, pattern, shown, range, crews, visits, ghost, mayBook } = props;
   const isPrinted = useIsPrinted();
-  const isBoard = shown.view === 'crews';
+  const { view } = shown;
+  const isBoard = view === 'crews';
+  const isList = view === 'list';
   const board = (
     <CrewBoard
       {...{ zone, pattern, visits, mayBook, ghost }}
@@ -53,12 +59,15 @@ export function DiarySheet(props: DiarySheetProps) {
     // biome-ignore lint/a11y/noStaticElementInteractions: it only hears the keys pressed on the visits within
     <div className="min-h-0 flex-1" onKeyDown={props.onVisitKey}>
       {isBoard ? board : null}
-      {isBoard ? null : (
+      {isList ? (
+        <VisitList {...{ visits, crews, range, zone }} today={props.today} onOpen={props.onOpen} />
+      ) : null}
+      {isBoard || isList ? null : (
         <div className="h-full print:hidden">
           <DiaryCalendar
             {...{ zone, visits, crews, ghost, mayBook }}
             calendarRef={range.calendarRef}
-            view={calendarViews[shown.view === 'crews' ? 'week' : shown.view]}
+            view={calendarViews[view]}
             startOn={range.on}
             hours={pattern}
             onRange={range.heard}
@@ -81,7 +90,7 @@ export function DiarySheet(props: DiarySheetProps) {
           />
         </div>
       )}
-      {isPrinted && !isBoard ? <div className="hidden print:block">{board}</div> : null}
+      {isPrinted && !isBoard && !isList ? <div className="hidden print:block">{board}</div> : null}
     </div>
   );
 }

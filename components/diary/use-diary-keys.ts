@@ -1,6 +1,7 @@
 'use client';
 
 import type { KeyboardEvent } from 'react';
+import { flushSync } from 'react-dom';
 import { areSingleKeysOn } from '@/components/shell/key-listener';
 import { usePageKeys } from '@/components/shell/page-keys';
 import type { CrewView, VisitView } from '@/lib/contracts/visits';
@@ -14,6 +15,8 @@ type DiaryKeys = {
   today: string;
   range: DiaryRange;
   show: (change: Partial<ShownView>) => void;
+  isListFolded: boolean;
+  toggleOnlyOpen: () => void;
   shop: { pattern: WorkingPattern; crews: readonly CrewView[] };
   visitOf: (id: string) => VisitView | undefined;
   /** Null where the person may not move visits. */
@@ -32,7 +35,21 @@ export function useDiaryKeys(diary: DiaryKeys) {
     { keys: 'm', words: 'Month', run: () => show({ view: 'month' }) },
     { keys: 'w', words: 'Week', run: () => show({ view: 'week' }) },
     { keys: 'd', words: 'Day', run: () => show({ view: 'day' }) },
-    { keys: 'f', words: 'Find in the waiting list; Enter looks for times', run: focusSearch },
+    {
+      keys: 'f',
+      words: 'Find who waits or is booked; Enter looks for times, or opens the visit',
+      run: () => {
+        flushSync(() => show({ isListFolded: false }));
+        focusSearch();
+      },
+    },
+    { keys: 'l', words: 'List, day by day', run: () => show({ view: 'list' }) },
+    { keys: 'n', words: 'Only visits with no answer yet, or all', run: diary.toggleOnlyOpen },
+    {
+      keys: 'r',
+      words: 'More room: fold the waiting list away, or out again',
+      run: () => show({ isListFolded: !diary.isListFolded }),
+    },
     { keys: 'v', words: 'To the visits: arrows go from one to the next', run: focusFirstVisit },
     ...visitKeyWords.map(({ keys, words }) => ({ keys, words, run: focusFirstVisit })),
     ...[1, 2, 3, 4, 5, 6, 7, 8, 9].map((digit) => ({

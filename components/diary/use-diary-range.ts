@@ -3,10 +3,14 @@
 import type FullCalendar from '@fullcalendar/react';
 import { useEffect, useRef, useState } from 'react';
 import { addDays, type LocalDate } from '@/lib/time/civil';
+import { formatLocalDay } from '@/lib/time/format-civil';
 import { mondayOf } from './board/board-days';
 import type { CalendarRange } from './diary-calendar';
 import { boardTitle } from './diary-title';
 import type { ShownView } from './diary-view';
+
+/** The list begins on any day, and goes on for two weeks. */
+const listedDays = 14;
 
 export type DiaryRange = ReturnType<typeof useDiaryRange>;
 
@@ -16,9 +20,11 @@ export function useDiaryRange(startOn: LocalDate, shown: ShownView) {
   const [on, setOn] = useState(startOn);
   const [calendarRange, setCalendarRange] = useState<CalendarRange | null>(null);
   const isBoard = shown.view === 'crews';
+  const isList = shown.view === 'list';
   const monday = mondayOf(on);
   const calendarView = {
     crews: null,
+    list: null,
     month: 'dayGridMonth',
     week: 'timeGridWeek',
     day: 'timeGridDay',
@@ -38,10 +44,15 @@ export function useDiaryRange(startOn: LocalDate, shown: ShownView) {
     to: addDays(monday, shown.weeks * 7),
     title: boardTitle(monday, shown.weeks),
   };
+  const list = {
+    from: on,
+    to: addDays(on, listedDays),
+    title: `From ${formatLocalDay(on, { language: 'en', region: 'UK' })}`,
+  };
   return {
     calendarRef,
     on,
-    ...(isBoard || !calendarRange ? board : calendarRange),
+    ...(isList ? list : isBoard || !calendarRange ? board : calendarRange),
     /** The calendar shows other days. */
     heard: (range: CalendarRange) =>
       queueMicrotask(() => {
@@ -59,7 +70,8 @@ export function useDiaryRange(startOn: LocalDate, shown: ShownView) {
     },
     step: (way: 1 | -1) => {
       const api = calendarRef.current?.getApi();
-      if (isBoard || !api) setOn(addDays(on, way * 7 * shown.weeks));
+      if (isList) setOn(addDays(on, way));
+      else if (isBoard || !api) setOn(addDays(on, way * 7 * shown.weeks));
       else if (way === 1) api.next();
       else api.prev();
     },

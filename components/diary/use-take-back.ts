@@ -3,6 +3,7 @@
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { askServer, problemOf } from '@/components/shell/ask-server';
 import { showToast } from '@/components/ui/toast-store';
+import type { TakenBackVisit } from '@/lib/contracts/visit-changes';
 import type { VisitView } from '@/lib/contracts/visits';
 import { apiPaths } from '@/lib/paths';
 import { visitsKey } from './visits-query';
@@ -13,7 +14,7 @@ export function useTakeBack() {
   const client = useQueryClient();
   const undo = useMutation({
     mutationFn: ({ id, version }: Pick<VisitView, 'id' | 'version'>) =>
-      askServer<VisitView>(apiPaths.undoVisitChange(id), { body: { version } }),
+      askServer<TakenBackVisit>(apiPaths.undoVisitChange(id), { body: { version } }),
     onSettled: () =>
       Promise.all([
         client.invalidateQueries({ queryKey: visitsKey }),
@@ -23,11 +24,12 @@ export function useTakeBack() {
 
   return async (visit: Pick<VisitView, 'id' | 'version'>) => {
     try {
-      const { status, customerName, dayWords, windowWords } = await undo.mutateAsync(visit);
+      const back = await undo.mutateAsync(visit);
+      const { status, customerName, dayWords, windowWords } = back;
       const words =
         status === 'called-off'
-          ? `${customerName} waits to be booked again`
-          : `${customerName} is back on ${dayWords}, ${windowWords}`;
+          ? `${customerName} waits to be booked again${back.isHeldAgain ? ', the time is held as before' : ''}`
+          : `${customerName} is back on ${dayWords}, ${windowWords}${back.isHeldAgain ? ', the other time is held as before' : ''}`;
       showToast({ text: `Taken back: ${words}` });
     } catch (caught) {
       const { title, detail } = problemOf(caught);

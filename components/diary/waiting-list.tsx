@@ -7,7 +7,9 @@ import { ErrorState } from '@/components/ui/error-state';
 import { controlLook } from '@/components/ui/field-frame';
 import { Skeleton, SkeletonScreen } from '@/components/ui/skeleton';
 import { TitleBlock } from '@/components/ui/title-block';
-import type { WaitingItem } from '@/lib/contracts/visits';
+import type { VisitView, WaitingItem } from '@/lib/contracts/visits';
+import { useFoundVisits } from './find-visits-query';
+import { FoundVisits } from './found-visits';
 import { WaitingLine } from './waiting-line';
 import type { Waiting } from './waiting-query';
 
@@ -17,16 +19,20 @@ export function WaitingList({
   mayBook,
   isCalendarShown,
   onTimes,
+  onFound,
 }: {
   waiting: Waiting;
   mayBook: boolean;
   /** The calendar takes what is dragged by its own means; the crews' board has its own. */
   isCalendarShown: boolean;
   onTimes: (item: WaitingItem) => void;
+  /** A visit that is booked already was looked for by what is typed. */
+  onFound: (visit: VisitView) => void;
 }) {
   const { all, shown, typed, setTyped, error, isPending } = waiting;
   const listRef = useRef<HTMLUListElement>(null);
   const hasItems = shown.length > 0;
+  const found = useFoundVisits(typed);
 
   useEffect(() => {
     if (!listRef.current || !mayBook || !hasItems || !isCalendarShown) return;
@@ -61,26 +67,28 @@ export function WaitingList({
           Every job has its next visit. A new call begins with <kbd>N</kbd> on Jobs.
         </EmptyState>
       ) : null}
-      {all && all.length > 0 ? (
+      {all ? (
         <input
           type="search"
           id="waiting-search"
-          aria-label="Find in the waiting list"
-          placeholder="Find in the list  (F)"
+          aria-label="Find who waits or is booked"
+          placeholder="Find who waits or is booked  (F)"
           value={typed}
           onChange={(event) => setTyped(event.target.value)}
           onKeyDown={(event) => {
-            const first = shown[0];
-            if (event.key !== 'Enter' || !first || !mayBook) return;
+            const first = mayBook ? shown[0] : undefined;
+            const booked = found[0];
+            if (event.key !== 'Enter' || !typed.trim() || !(first || booked)) return;
             event.preventDefault();
             event.currentTarget.blur();
-            onTimes(first);
+            if (first) onTimes(first);
+            else if (booked) onFound(booked);
           }}
           className={`${controlLook} mt-2`}
         />
       ) : null}
-      {hasItems || !all?.length ? null : (
-        <p className="py-3 text-graphite">Nobody on the list fits “{typed}”.</p>
+      {hasItems || !typed.trim() ? null : (
+        <p className="py-3 text-graphite">Nobody who waits fits “{typed}”.</p>
       )}
       <ul ref={listRef} className="min-h-0 overflow-y-auto">
         {shown.map((item, index) => (
@@ -93,6 +101,7 @@ export function WaitingList({
           />
         ))}
       </ul>
+      {found.length > 0 ? <FoundVisits visits={found} onOpen={onFound} /> : null}
     </section>
   );
 }

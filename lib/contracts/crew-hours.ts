@@ -1,4 +1,4 @@
-/** The days and hours that each crew works: its pattern, less closed days, holidays and days off. */
+/** The days and hours that each crew works, less closed days, holidays and days off, and who of it is out with others. */
 import { z } from 'zod';
 import { daysBetween } from '@/lib/time/civil';
 
@@ -22,5 +22,13 @@ export const crewHours = z.object({
   crewId: z.uuid(),
   /** Only the days worked. */
   days: z.array(z.object({ date: localDate, start: z.string(), end: z.string() })),
+  /** When somebody of it is out with another crew, and it cannot go. */
+  elsewhere: z.array(
+    z.object({
+      startsAt: z.iso.datetime(),
+      endsAt: z.iso.datetime(),
+      crewName: z.string(),
+    }),
+  ),
 });
 export type CrewHours = z.infer<typeof crewHours>;

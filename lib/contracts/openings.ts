@@ -41,8 +41,8 @@ export const findOpeningsInput = z
     until: localDate.optional(),
     /** Left out: the estimate for each crew's size. */
     workMinutes: workMinutes.optional(),
-    /** Two for a measure that one person cannot do: only crews of so many are asked. */
-    peopleNeeded: z.number().int().min(1).max(12).default(1),
+    /** Two for a measure that one person cannot do. Left out: one, or as many as go on the measure that moves. */
+    peopleNeeded: z.number().int().min(1).max(12).optional(),
     /** The scheduler will write why: days before the gates allow it are offered too. */
     isGateOverridden: z.boolean().default(false),
     wishes: openingWishes.default(noWishes),

@@ -22,3 +22,10 @@ export const undoVisitChangeInput = z.object({
   version: z.number().int(),
 });
 export type UndoVisitChangeInput = z.infer<typeof undoVisitChangeInput>;
+
+/** The visit as it stands again. */
+export const takenBackVisit = visitView.extend({
+  /** The time that it had been given is held for the customer once more. */
+  isHeldAgain: z.boolean(),
+});
+export type TakenBackVisit = z.infer<typeof takenBackVisit>;

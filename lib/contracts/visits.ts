@@ -83,6 +83,9 @@ export const listVisitsInput = z.object({
 });
 export type ListVisitsInput = z.infer<typeof listVisitsInput>;
 
+export const findVisitsInput = z.object({ search: z.string().trim().min(2).max(120) });
+export type FindVisitsInput = z.infer<typeof findVisitsInput>;
+
 /** A job and a kind of visit that it needs next: from when, or why not yet. */
 export const waitingItem = z.object({
   jobId: id,

@@ -11,3 +11,22 @@ export function goesOutFor(
 ): boolean {
   return crew.kinds.length > 0 ? crew.kinds.includes(kind) : doesKind[kind] === crew.does;
 }
+
+/**
+ * The crews that are as many as a visit needs and take nobody for nothing: a measure by two takes no less time than
+ * by one, so a crew of two is left out where a crew of some of its people can go. Fitters are quicker by more.
+ * Example: of Tor, Ana and the pair of both, one person needed leaves Tor and Ana, two leave the pair.
+ * Common practice.
+ */
+export function crewsOfEnough<
+  Crew extends { does: 'measure' | 'fit'; people: readonly { id: string }[] },
+>(crews: readonly Crew[], peopleNeeded: number): Crew[] {
+  const enough = crews.filter(({ people }) => people.length >= peopleNeeded);
+  return enough.filter(
+    (crew) => crew.does === 'fit' || !enough.some((other) => isPartOf(other.people, crew.people)),
+  );
+}
+
+function isPartOf(some: readonly { id: string }[], all: readonly { id: string }[]): boolean {
+  return some.length < all.length && some.every(({ id }) => all.some((one) => one.id === id));
+}

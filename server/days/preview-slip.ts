@@ -124,7 +124,6 @@ async function moveOf(
       workMinutes: visit.workMinutes,
       from,
       until: addDays(from, horizonDays),
-      peopleNeeded: 1,
       isGateOverridden: false,
       wishes,
       limit: 1,

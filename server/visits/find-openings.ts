@@ -94,7 +94,7 @@ async function visitOfJob(ctx: Context, input: FindOpeningsInput & { visitId: st
   return visit;
 }
 
-function noCrewWords({ kind, crewIds, peopleNeeded }: FindOpeningsInput): string {
+function noCrewWords({ kind, crewIds, peopleNeeded = 1 }: FindOpeningsInput): string {
   const what = visitKindWords[kind].toLowerCase();
   const people = peopleNeeded > 1 ? ` with ${peopleNeeded} people` : '';
   return crewIds

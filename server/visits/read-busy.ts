@@ -1,6 +1,9 @@
 import { and, asc, eq, gt, gte, lt, ne, or } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { customers, jobs, sites, visitPiecePeople, visitPieces, visits } from '@/db/schema';
+import { goesOn } from '@/lib/schedule/work-calendar';
+import { localDate } from '@/lib/time/local-moment';
+import type { Zone } from '@/lib/time/zones';
 import type { LatLon } from '@/lib/travel/place';
 import type { Context } from '@/server/base/context';
 
@@ -67,13 +70,18 @@ export async function readBusy(
   }));
 }
 
-/** What keeps a crew from going out: its own visits, and those of its people with other crews. */
+/**
+ * What keeps a crew from going out: its own visits, and those of its people with other crews on days on which
+ * they would go with it.
+ */
 export function busyOf(
   busy: readonly Busy[],
-  crew: { id: string; people: readonly { id: string }[] },
+  crew: { id: string; people: readonly { id: string; weekdays: number[] | null }[] },
+  zone: Zone,
 ): Busy[] {
-  const people = new Set(crew.people.map(({ id }) => id));
-  return busy.filter(
-    ({ crewId, personIds }) => crewId === crew.id || personIds.some((id) => people.has(id)),
-  );
+  return busy.filter(({ crewId, personIds, startsAt }) => {
+    if (crewId === crew.id) return true;
+    const shared = crew.people.filter(({ id }) => personIds.includes(id));
+    return shared.some((person) => goesOn(person, localDate(startsAt, zone)));
+  });
 }

@@ -8,7 +8,7 @@ import {
   type OpeningWeights,
   usualOpeningWeights,
 } from '@/lib/schedule';
-import { goesOutFor } from '@/lib/schedule/crew-kinds';
+import { crewsOfEnough, goesOutFor } from '@/lib/schedule/crew-kinds';
 import { addDays, type LocalDate } from '@/lib/time/civil';
 import { startOfLocalDay } from '@/lib/time/local-moment';
 import type { Context } from '@/server/base/context';
@@ -16,6 +16,7 @@ import { type CrewPlan, readCrewPlans } from '@/server/shops/crew-plans';
 import { estimateMinutes } from './job-facts';
 import type { JobRecord } from './job-records';
 import { type Drives, estimatedDrives, PlaceList, roadDrives } from './opening-drives';
+import { peopleGoing } from './people-going';
 import { type Busy, busyOf, readBusy } from './read-busy';
 
 /** A visit may go on for so long after the last day on which it may begin. */
@@ -56,12 +57,10 @@ export async function searchOpenings(
 ): Promise<Search> {
   const { zone, rules } = ctx.shop;
   const known = ground ?? (await readSearchGround(ctx, asked));
-  const plans = known.plans.filter(
-    (crew) =>
-      (asked.crewIds?.includes(crew.id) ?? true) &&
-      goesOutFor(crew, asked.kind) &&
-      crew.people.length >= asked.peopleNeeded,
+  const able = known.plans.filter(
+    (crew) => (asked.crewIds?.includes(crew.id) ?? true) && goesOutFor(crew, asked.kind),
   );
+  const plans = crewsOfEnough(able, asked.peopleNeeded ?? (await peopleGoing(ctx, asked)));
   const busy = known.busy.filter(({ visitId }) => visitId !== asked.visitId);
 
   const list = new PlaceList();
@@ -72,7 +71,7 @@ export async function searchOpenings(
     name: crew.name,
     calendar: crew.calendar,
     base: list.indexOf(crew.base),
-    busy: busyOf(busy, crew).map((piece) => ({ ...piece, place: list.indexOf(piece.place) })),
+    busy: busyOf(busy, crew, zone).map((piece) => ({ ...piece, place: list.indexOf(piece.place) })),
     workMinutes:
       asked.workMinutes ??
       estimateMinutes(ctx, job, { kind: asked.kind, crewSize: crew.people.length }),

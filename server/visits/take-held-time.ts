@@ -14,6 +14,7 @@ import { changeVisit, type LockedVisit, lockVisit } from './lock-visit';
 import { readVisit } from './read-visits';
 import { tellBooked, toldWords } from './tell-customer';
 import { makeVisitLink } from './visit-link';
+import { readStanding } from './visit-standing';
 import { mustBeMovable, writeMove } from './write-move';
 
 /** The office takes a held time: it is booked, or the booked visit moves there, and the customer is told. */
@@ -59,6 +60,7 @@ export async function moveToHeld(
 ): Promise<VisitView> {
   const before = await lockVisit(tx, ctx, visitId);
   mustBeMovable(before);
+  const stood = await readStanding(tx, ctx, before.id);
   const crew = await lockCrew(tx, ctx, held.crewId);
   const pieces = await tx
     .select({ startsAt: visitPieces.startsAt, endsAt: visitPieces.endsAt })
@@ -78,7 +80,7 @@ export async function moveToHeld(
     subjectId: after.id,
     jobId: after.jobId,
     summary: `${visitKindWords[after.kind]} moved to the held time, ${view.dayWords}, ${view.windowWords}, with ${crew.name}${told ? `; ${toldWords(told)}` : ''}`,
-    detail: { told },
+    detail: { before: stood, told, holdEndsAt: held.holdEndsAt },
   });
   return view;
 }
@@ -101,7 +103,7 @@ async function bookHeld(
     subjectId: visit.id,
     jobId: visit.jobId,
     summary: `${visitKindWords[visit.kind]} booked for ${view.dayWords}, ${view.windowWords}, with ${view.crewName}; ${toldWords(told)}`,
-    detail: { told },
+    detail: { told, holdEndsAt: held.holdEndsAt },
   });
   return view;
 }

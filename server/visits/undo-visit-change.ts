@@ -1,13 +1,14 @@
 import { and, eq, inArray, like } from 'drizzle-orm';
+import { z } from 'zod';
 import type { Transaction } from '@/db/database';
 import { messages } from '@/db/schema';
-import type { UndoVisitChangeInput } from '@/lib/contracts/visit-changes';
-import type { VisitView } from '@/lib/contracts/visits';
+import type { TakenBackVisit, UndoVisitChangeInput } from '@/lib/contracts/visit-changes';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { Refusal } from '@/server/base/problem-response';
 import { kickWorker } from '@/server/messages/worker';
+import { holdAgain } from './hold-again';
 import { readLastChange } from './last-change';
 import { lockCrew } from './lock-crew';
 import { changeVisit, type LockedVisit, lockVisit, mustBeCurrent } from './lock-visit';
@@ -15,20 +16,21 @@ import { readVisit } from './read-visits';
 import { type Attempt, translateTakenTime } from './taken-time';
 import { tellCalledOff, tellMoved, tellStandsAgain, toldWords } from './tell-customer';
 import { keepVisitLink } from './visit-link';
-import { type VisitStanding, visitStanding } from './visit-standing';
+import { readStanding, type VisitStanding, visitStanding } from './visit-standing';
 import { removePieces, writePieces } from './write-pieces';
 
 /** Undo stands on the screen for ten seconds, and as long as a hand rests on it. */
 const undoWithinMs = 120_000;
 
 /**
- * Takes back what the same person did to a visit just now: a booking, a move, a calling off. The visit
- * stands as it stood, a yes of the customer included; what had not gone out yet never goes out.
+ * Takes back what the same person did to a visit just now: a booking, a move, a calling off, the taking of a
+ * held time, which is held again. The visit stands as it stood, a yes of the customer included; what had not
+ * gone out yet never goes out.
  */
 export async function undoVisitChange(
   ctx: PersonContext,
   input: UndoVisitChangeInput,
-): Promise<VisitView> {
+): Promise<TakenBackVisit> {
   mustBeAllowed(ctx, 'visits:book');
   let attempt: Attempt | null = null;
   const view = await translateTakenTime(
@@ -39,12 +41,14 @@ export async function undoVisitChange(
         const visit = await lockVisit(tx, ctx, input.visitId);
         await mustBeCurrent(tx, ctx, visit, input.version);
         const change = await undoableChange(tx, ctx, visit);
+        const stood = await readStanding(tx, ctx, visit.id);
         const told =
           change.what === 'book'
             ? await takeBooking(tx, ctx, visit)
             : await putBack(tx, ctx, visit, change, (planned) => {
                 attempt = planned;
               });
+        const isHeldAgain = await holdOnceMore(tx, ctx, { visit, stood, change });
         const after = await readVisit(tx, ctx, visit.id);
         const where =
           change.what === 'book'
@@ -55,16 +59,22 @@ export async function undoVisitChange(
           subjectKind: 'visit',
           subjectId: visit.id,
           jobId: visit.jobId,
-          summary: `${visitKindWords[visit.kind]}: the last change is taken back, ${where}${told.length > 0 ? `; ${toldWords(told)}` : ''}`,
+          summary: `${visitKindWords[visit.kind]}: the last change is taken back, ${where}${isHeldAgain ? ', the other time is held as before' : ''}${told.length > 0 ? `; ${toldWords(told)}` : ''}`,
         });
-        return after;
+        return { ...after, isHeldAgain };
       }),
   );
   kickWorker();
   return view;
 }
 
-type Change = { what: 'book' } | { what: 'move' | 'call-off'; before: VisitStanding };
+/** `holdEndsAt`: it came of the taking of a held time. */
+type Change = { holdEndsAt: Date | null } & (
+  | { what: 'book' }
+  | { what: 'move' | 'call-off'; before: VisitStanding }
+);
+
+const takenHold = z.object({ holdEndsAt: z.coerce.date() });
 
 async function undoableChange(
   tx: Transaction,
@@ -75,12 +85,27 @@ async function undoableChange(
   const isMine = line?.by === ctx.actor.name;
   const isRecent = line !== null && ctx.now.getTime() - line.at.getTime() <= undoWithinMs;
   if (!isMine || !isRecent) throw tooLate();
-  if (line.verb === 'book-visit') return { what: 'book' };
-  const before = visitStanding.safeParse(line.detail.before);
-  if (!before.success) throw tooLate();
-  if (line.verb === 'move-visit') return { what: 'move', before: before.data };
-  if (line.verb === 'call-off-visit') return { what: 'call-off', before: before.data };
+  const holdEndsAt = takenHold.safeParse(line.detail).data?.holdEndsAt ?? null;
+  if (line.verb === 'book-visit') return { what: 'book', holdEndsAt };
+  const { data: before } = visitStanding.safeParse(line.detail.before);
+  if (line.verb === 'take-held-time' && holdEndsAt) {
+    return before ? { what: 'move', before, holdEndsAt } : { what: 'book', holdEndsAt };
+  }
+  if (before && line.verb === 'move-visit') return { what: 'move', before, holdEndsAt };
+  if (before && line.verb === 'call-off-visit') return { what: 'call-off', before, holdEndsAt };
   throw tooLate();
+}
+
+async function holdOnceMore(
+  tx: Transaction,
+  ctx: PersonContext,
+  { visit, stood, change }: { visit: LockedVisit; stood: VisitStanding; change: Change },
+): Promise<boolean> {
+  const { holdEndsAt } = change;
+  if (!holdEndsAt) return false;
+  const { jobId, kind } = visit;
+  const forVisitId = change.what === 'book' ? null : visit.id;
+  return holdAgain(tx, ctx, { jobId, kind, stood, holdEndsAt, forVisitId });
 }
 
 async function takeBooking(tx: Transaction, ctx: PersonContext, visit: LockedVisit) {

@@ -1,8 +1,7 @@
 import type { Page } from 'playwright-core';
 import { describe, expect, inject, it } from 'vitest';
 import type { MessageView } from '@/lib/contracts/messages';
-import type { OpeningsView } from '@/lib/contracts/openings';
-import type { VisitView, WaitingItem } from '@/lib/contracts/visits';
+import type { VisitView } from '@/lib/contracts/visits';
 import { apiPaths, paths } from '@/lib/paths';
 import { addDays } from '@/lib/time/civil';
 import { localDate, toLocal } from '@/lib/time/local-moment';
@@ -43,7 +42,7 @@ describe('booking with the customer on the phone', () => {
 
   it('by mouse: the best times with reasons, drawn in the diary; taken back in time, nobody hears of it', async () => {
     const page = await openBoard();
-    await page.getByRole('searchbox', { name: 'Find in the waiting list' }).fill('pryce');
+    await page.getByRole('searchbox', { name: 'Find who waits or is booked' }).fill('pryce');
     await page.getByRole('button', { name: /^Times that work: .*Odile Pryce/ }).click();
     const openings = page.locator('[data-openings] li');
     await openings.first().waitFor();
@@ -122,54 +121,5 @@ describe('booking with the customer on the phone', () => {
     await expectNoSeriousFault(mine);
     await faster.getByRole('button', { name: 'Do it all the same' }).click();
     await expect.poll(async () => startOf(await visitOf('Bram Fenn'))?.time).toBe('13:30');
-  });
-
-  /** Books the install of a job that waits as soon as a crew can, so that a late bench is in its way. */
-  async function bookSoonest(customer: string): Promise<void> {
-    const waiting = await getAt<WaitingItem[]>(scheduler, apiPaths.waiting());
-    const item = waiting.find(({ customerName }) => customerName === customer);
-    if (!item) throw new Error(`${customer} does not wait in the demo`);
-    const { jobId, kind } = item;
-    const { openings } = await getAt<OpeningsView>(scheduler, apiPaths.openings(), {
-      body: { jobId, kind, limit: 60 },
-    });
-    const [soonest] = openings.sort((a, b) => a.startsAt.localeCompare(b.startsAt));
-    if (!soonest) throw new Error(`no time works for ${customer}`);
-    const { crewId, date, time, workMinutes } = soonest;
-    await getAt(scheduler, apiPaths.visits(), {
-      body: { idempotencyKey: crypto.randomUUID(), jobId, kind, crewId, date, time, workMinutes },
-    });
-  }
-
-  it('moves all that a late shop moves at once: three days over six jobs', async () => {
-    const late = ['Mo Fairlie', 'Ines Tarn', 'Vera Knoll'];
-    for (const customer of late) await bookSoonest(customer);
-    const before = await Promise.all(late.map(visitOf));
-    const page = await browser.openPage({ as: 'scheduler' });
-    await page.goto(paths.diary());
-    await settled(page);
-    await page.getByRole('link', { name: 'The shop is late…' }).click();
-    await page.getByRole('heading', { level: 1, name: 'The shop is late' }).waitFor();
-    await settled(page);
-    for (const customer of [...late, 'Cass Orme', 'Roy Tansy', 'Bea Sandys'])
-      await page.getByRole('checkbox', { name: new RegExp(customer) }).check();
-    await expectNoSeriousFault(page);
-    expect(await page.getByLabel('Working days late').inputValue()).toBe('3');
-    await page.getByRole('button', { name: 'See what it moves' }).click();
-    for (const customer of late)
-      await page.getByRole('row', { name: new RegExp(customer) }).waitFor();
-    await expectNoSeriousFault(page);
-    await keepPicture(page, 'slip');
-    expect((await Promise.all(late.map(visitOf))).map((visit) => visit?.version)).toEqual(
-      before.map((visit) => visit?.version),
-    );
-    await page.getByLabel('Why the shop is late').fill('The finish has not cured.');
-    await page.getByRole('button', { name: /^Move all \d and tell/ }).click();
-    await page.getByText(/\d visits moved, \d customers told/).waitFor();
-    for (const visit of before) {
-      const after = await visitOf(visit?.customerName ?? '');
-      expect(after?.version).toBe((visit?.version ?? 0) + 1);
-      expect((after?.startsAt ?? '') > (visit?.startsAt ?? '')).toBe(true);
-    }
   });
 });

@@ -19,6 +19,7 @@ const piece = (date: string, from: string, until: string) => ({
   id: `${date} ${from}`,
   startsAt: at(date, from),
   endsAt: at(date, until),
+  with: '',
 });
 
 describe('the columns of the board', () => {
@@ -54,9 +55,20 @@ describe('what is free of a crew’s day', () => {
     );
     expect(day).toMatchObject({ isWorked: true, workedMinutes: 480, freeMinutes: 300 });
     expect(day.taken).toEqual([
-      { from: 0, until: 0.125 },
-      { from: 0.5, until: 0.75 },
+      { from: 0, until: 0.125, isElsewhere: false },
+      { from: 0.5, until: 0.75, isElsewhere: false },
     ]);
+  });
+
+  it('is less where somebody of the crew is out with another, counted once where two are', () => {
+    const out = (from: string, until: string) => ({
+      ...piece('2026-12-07', from, until),
+      with: 'Measure: both',
+    });
+    const pieces = [out('08:30', '10:30'), out('09:30', '11:30')];
+    const day = crewDay('2026-12-07', pieces, hours, zone);
+    expect(day).toMatchObject({ freeMinutes: 300, with: ['Measure: both'] });
+    expect(day.taken.map(({ isElsewhere }) => isElsewhere)).toEqual([true, true]);
   });
 
   it('loses nothing to work outside the hours', () => {

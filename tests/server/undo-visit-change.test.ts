@@ -1,10 +1,14 @@
+import { randomUUID } from 'node:crypto';
 import { and, eq } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { messages, visits } from '@/db/schema';
+import { holdOpeningInput } from '@/lib/contracts/openings';
 import { type BookedVisit, type MoveVisitInput, moveVisitInput } from '@/lib/contracts/visits';
 import { database } from '@/server/base/database';
 import { callOffVisit } from '@/server/visits/call-off-visit';
+import { holdOpening } from '@/server/visits/hold-opening';
 import { moveVisit } from '@/server/visits/move-visit';
+import { takeHeldTime } from '@/server/visits/take-held-time';
 import { undoVisitChange } from '@/server/visits/undo-visit-change';
 import { bookTestVisit } from '../help/book-test-visit';
 import { makeCrew } from '../help/make-crew';
@@ -32,6 +36,36 @@ describe('taking the last change of a visit back', () => {
     const { id: visitId, version, crewId } = visit;
     const input = { visitId, version, crewId, date: '2026-12-11', time: '13:00', ...change };
     return moveVisit(await scheduler(at), moveVisitInput.parse(input));
+  }
+
+  async function hold(input: {
+    jobId: string;
+    crewId: string;
+    forVisitId?: string;
+    date?: string;
+  }) {
+    return holdOpening(
+      await scheduler(seconds(0)),
+      holdOpeningInput.parse({
+        idempotencyKey: randomUUID(),
+        kind: 'site-measure',
+        date: '2026-12-10',
+        time: '09:00',
+        ...input,
+      }),
+    );
+  }
+
+  async function heldOf(jobId: string) {
+    const { db } = await database();
+    return db
+      .select({
+        id: visits.id,
+        holdEndsAt: visits.holdEndsAt,
+        heldForVisitId: visits.heldForVisitId,
+      })
+      .from(visits)
+      .where(and(eq(visits.jobId, jobId), eq(visits.status, 'held')));
   }
 
   async function undo(visit: { id: string; version: number }, at: Date) {
@@ -132,6 +166,49 @@ describe('taking the last change of a visit back', () => {
     await sendAll(visit.id);
     await undo(off, seconds(90));
     expect(await waiting(visit.id)).toEqual(['booked']);
+  });
+
+  it('holds a time again whose taking is taken back, for what is left of its quarter of an hour', async () => {
+    const { jobId } = await startTestJob(shop);
+    const { crewId } = await makeCrew(shop, 'measure', []);
+    const held = await hold({ jobId, crewId });
+    const taken = await takeHeldTime(await scheduler(seconds(120)), { visitId: held.id });
+    const off = await undo(taken, seconds(126));
+    expect(off).toMatchObject({ status: 'called-off', pieces: [], isHeldAgain: true });
+    expect(await waiting(taken.id)).toEqual([]);
+    const [again] = await heldOf(jobId);
+    expect(again?.holdEndsAt?.toISOString()).toBe(held.holdEndsAt);
+    const other = bookTestVisit(shop, { ...(await startTestJob(shop)), crewId }, seconds(130));
+    expect(await refusalOf(other)).toMatchObject({ code: 'crew-already-booked' });
+    const retaken = await takeHeldTime(await scheduler(seconds(140)), { visitId: again?.id ?? '' });
+    expect(retaken).toMatchObject({ status: 'booked', startsAt: held.startsAt });
+  });
+
+  it('puts a visit back that went to a held time, and holds that time for it again', async () => {
+    const visit = await booked();
+    await sendAll(visit.id);
+    await say(visit, { status: 'confirmed', confirmedAt: seconds(1) });
+    const { jobId, crewId, id: forVisitId } = visit;
+    await hold({ jobId, crewId, forVisitId, date: '2026-12-14' });
+    const [before] = await heldOf(jobId);
+    const taken = await takeHeldTime(await scheduler(seconds(60)), { visitId: before?.id ?? '' });
+    const back = await undo(taken, seconds(65));
+    expect(back).toMatchObject({
+      status: 'confirmed',
+      startsAt: visit.startsAt,
+      isHeldAgain: true,
+    });
+    expect(await waiting(visit.id)).toEqual([]);
+    expect(await heldOf(jobId)).toMatchObject([{ heldForVisitId: visit.id }]);
+  });
+
+  it('holds nothing again once the quarter of an hour is over', async () => {
+    const { jobId } = await startTestJob(shop);
+    const { crewId } = await makeCrew(shop, 'measure', []);
+    const held = await hold({ jobId, crewId });
+    const taken = await takeHeldTime(await scheduler(seconds(895)), { visitId: held.id });
+    expect(await undo(taken, seconds(902))).toMatchObject({ isHeldAgain: false });
+    expect(await heldOf(jobId)).toEqual([]);
   });
 
   it('is refused when the freed time was taken meanwhile, and leaves the visit called off', async () => {

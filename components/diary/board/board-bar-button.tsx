@@ -6,9 +6,13 @@ import { Glyph } from '@/components/ui/glyph';
 import type { VisitView } from '@/lib/contracts/visits';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import type { Zone } from '@/lib/time/zones';
+import { barName } from './bar-name';
 import type { BoardBar } from './board-bars';
 
-/** A visit on the board. Its right edge stretches it; keys do both as well. */
+/**
+ * A visit on the board. Its right edge stretches it; keys do both as well. How much it says goes by its own
+ * width (crew-board.css): the whole, the name and the time, or the last name under the two glyphs.
+ */
 export function BoardBarButton({
   bar,
   zone,
@@ -29,6 +33,7 @@ export function BoardBarButton({
   const { time } = localStart(visit.startsAt, zone);
   const isMovable = mayMove && canChange(visit) && !isGhost;
   const columns = lastColumn - firstColumn + 1;
+  const { first, last } = barName(visit.customerName);
   return (
     <button
       type="button"
@@ -55,10 +60,14 @@ export function BoardBarButton({
           }}
         />
       ))}
-      <span className="board-bar-line">
+      <span className="board-bar-line board-who">
         <KindMark kind={visit.kind} isNamed />{' '}
         {isGhost ? null : <Glyph name={verdict} className="board-status" />}
-        <b>{visit.customerName}</b>
+        <span className="board-time">{time}</span>{' '}
+        <b>
+          <span className="board-first">{first} </span>
+          {last}
+        </b>
         <span className="board-more">, {visit.street}</span>
       </span>
       {isShort ? null : (

@@ -1,6 +1,8 @@
+import Link from 'next/link';
 import { crewColour } from '@/components/diary/crew-colour';
-import type { HoursOf } from '@/components/diary/crew-hours-query';
+import type { Elsewhere, HoursOf } from '@/components/diary/crew-hours-query';
 import type { CrewView, VisitView } from '@/lib/contracts/visits';
+import { paths } from '@/lib/paths';
 import { localDate } from '@/lib/time/local-moment';
 import type { Zone } from '@/lib/time/zones';
 import { BoardBarButton } from './board-bar-button';
@@ -14,6 +16,7 @@ type BoardRowProps = {
   days: readonly BoardDay[];
   zone: Zone;
   hoursOf: HoursOf;
+  elsewhere: readonly Elsewhere[];
   today: string;
   weeks: number;
   visits: readonly VisitView[];
@@ -23,13 +26,19 @@ type BoardRowProps = {
 };
 
 /** One crew: its days with what is free of each, and its visits as bars under them. */
-export function BoardRow({ crew, days, zone, hoursOf, visits, ...rest }: BoardRowProps) {
+export function BoardRow(props: BoardRowProps) {
+  const { crew, days, zone, hoursOf, visits, ...rest } = props;
   const bars = boardBars(visits, days, zone);
   const lanes = Math.max(1, ...bars.map(({ lane }) => lane + 1));
   const pieces = visits
     .filter(({ id }) => id !== rest.ghostId)
     .flatMap((visit) => visit.pieces)
-    .map((piece) => ({ ...piece, date: localDate(new Date(piece.startsAt), zone) }));
+    .map(({ startsAt, endsAt }) => ({ startsAt, endsAt, with: '' }));
+  const elsewhere = rest.elsewhere.map(({ crewName, ...piece }) => ({ ...piece, with: crewName }));
+  const taken = [...pieces, ...elsewhere].map((piece) => ({
+    ...piece,
+    date: localDate(new Date(piece.startsAt), zone),
+  }));
   return (
     <section
       aria-label={crew.name}
@@ -37,7 +46,9 @@ export function BoardRow({ crew, days, zone, hoursOf, visits, ...rest }: BoardRo
       style={{ '--lanes': lanes, '--crew': crewColour(crew.colour) } as React.CSSProperties}
     >
       <h2 className="board-name">
-        {crew.name}
+        <Link href={paths.crews()} className="hover:underline">
+          {crew.name}
+        </Link>
         <span>{crew.people.map(({ name }) => name.split(' ')[0]).join(', ')}</span>
       </h2>
       {days.map((day, column) => (
@@ -49,7 +60,7 @@ export function BoardRow({ crew, days, zone, hoursOf, visits, ...rest }: BoardRo
           isToday={day.date === rest.today}
           crewDay={crewDay(
             day.date,
-            pieces.filter(({ date }) => date === day.date),
+            taken.filter(({ date }) => date === day.date),
             hoursOf(crew.id, day.date),
             zone,
           )}

@@ -12,6 +12,8 @@ import { BoardHead } from './board-head';
 import { BoardRow } from './board-row';
 import './crew-board.css';
 import { useBoardDrag } from './use-board-drag';
+import { useVisitPeek } from './use-visit-peek';
+import { VisitPeek } from './visit-peek';
 
 type CrewBoardProps = {
   zone: Zone;
@@ -36,12 +38,14 @@ export function CrewBoard(props: CrewBoardProps) {
   const { zone, from, weeks, pattern, crews, visits, ghost, today } = props;
   const boardRef = useRef<HTMLElement>(null);
   const shown = useMemo(() => (ghost ? [...visits, ghost] : [...visits]), [visits, ghost]);
-  const { hoursOf, workedDates } = useCrewHours({ from, weeks, pattern });
+  const { hoursOf, elsewhereOf, workedDates } = useCrewHours({ from, weeks, pattern });
   const days = useMemo(() => {
     const visitDates = shown.flatMap((visit) => pieceDates(visit, zone));
     return boardDays({ from, weeks }, pattern, new Set([...visitDates, ...workedDates]));
   }, [shown, zone, from, weeks, pattern, workedDates]);
   useBoardDrag(boardRef, { ...props, days });
+  const peek = useVisitPeek(boardRef);
+  const peeked = peek ? visits.find(({ id }) => id === peek.visitId) : undefined;
 
   return (
     <section
@@ -56,12 +60,14 @@ export function CrewBoard(props: CrewBoardProps) {
         <BoardRow
           key={crew.id}
           {...{ crew, days, zone, hoursOf, today, weeks }}
+          elsewhere={elsewhereOf(crew.id)}
           ghostId={ghost?.id ?? null}
           visits={shown.filter(({ crewId }) => crewId === crew.id)}
           mayMove={props.mayBook}
           onOpen={props.onOpen}
         />
       ))}
+      {peek && peeked ? <VisitPeek visit={peeked} bar={peek.bar} /> : null}
     </section>
   );
 }

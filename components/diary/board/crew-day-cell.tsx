@@ -18,6 +18,7 @@ export function CrewDayCell({
   crewDay: CrewDay;
 }) {
   const { isWorked, freeMinutes, workedMinutes, taken } = crewDay;
+  const withOthers = crewDay.with.join(', ');
   return (
     <div
       className="board-cell"
@@ -31,14 +32,15 @@ export function CrewDayCell({
       {isWorked ? (
         <>
           <span className="board-hours" aria-hidden="true">
-            {taken.map(({ from, until }) => (
+            {taken.map(({ from, until, isElsewhere }) => (
               <span
-                key={from}
+                key={`${from} ${isElsewhere}`}
+                data-elsewhere={isElsewhere || undefined}
                 style={{ left: `${from * 100}%`, width: `${(until - from) * 100}%` }}
               />
             ))}
           </span>
-          <span className="board-free">
+          <span className="board-free" title={withOthers ? `with ${withOthers}` : undefined}>
             <span className="sr-only">{dayHeadWords(day.date)}: </span>
             {freeMinutes === 0 ? (
               'full'
@@ -50,6 +52,7 @@ export function CrewDayCell({
                 <span className="board-free-word"> free</span>
               </>
             )}
+            {withOthers ? `, with ${withOthers}` : ''}
           </span>
         </>
       ) : (

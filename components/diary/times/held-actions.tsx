@@ -1,6 +1,7 @@
 'use client';
 
 import { useState } from 'react';
+import { useTakeBack } from '@/components/diary/use-take-back';
 import { problemOf } from '@/components/shell/ask-server';
 import { Button } from '@/components/ui/button';
 import { FormError } from '@/components/ui/form-error';
@@ -13,11 +14,12 @@ export function HeldActions({ visitId, onDone }: { visitId: string; onDone: () =
   const [problem, setProblem] = useState<ProblemDetails | null>(null);
   const take = useTakeHeldTime();
   const letGo = useLetGoHeldTime();
+  const takeBack = useTakeBack();
 
-  async function run(work: () => Promise<string>) {
+  async function run(work: () => Promise<{ text: string; undo?: () => void }>) {
     setProblem(null);
     try {
-      showToast({ text: await work() });
+      showToast(await work());
       onDone();
     } catch (caught) {
       setProblem(problemOf(caught));
@@ -32,8 +34,12 @@ export function HeldActions({ visitId, onDone }: { visitId: string; onDone: () =
           busyText={take.isPending ? 'Booking…' : undefined}
           onClick={() =>
             run(async () => {
-              const { customerName, dayWords, windowWords } = await take.mutateAsync({ visitId });
-              return `Booked: ${customerName}, ${dayWords}, ${windowWords}`;
+              const taken = await take.mutateAsync({ visitId });
+              const { customerName, dayWords, windowWords } = taken;
+              return {
+                text: `Booked: ${customerName}, ${dayWords}, ${windowWords}`,
+                undo: () => void takeBack(taken),
+              };
             })
           }
         >
@@ -45,7 +51,7 @@ export function HeldActions({ visitId, onDone }: { visitId: string; onDone: () =
           onClick={() =>
             run(async () => {
               await letGo.mutateAsync({ visitId });
-              return 'Let go: the time is free again.';
+              return { text: 'Let go: the time is free again.' };
             })
           }
         >

@@ -8,17 +8,21 @@ import { TextareaField } from '@/components/ui/textarea-field';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { Opening } from '@/lib/contracts/openings';
 import type { CrewView } from '@/lib/contracts/visits';
+import { doesKind } from '@/lib/schedule/visit-kind-words';
 import { HoldTime } from './hold-time';
 import { OpeningsList } from './openings-list';
 import { useOpenings } from './openings-query';
 import { subjectTitle, type TimesSubject } from './times-subject';
 import { useBookOpening } from './use-book-opening';
 import { useTimesKeys } from './use-times-keys';
-import { anyTime, askedWishes } from './wishes';
+import { anyTime, askedDays, askedWishes, halfToggled, type Wishes } from './wishes';
 import { WishesBar } from './wishes-bar';
 
 type TimesPanelProps = {
   subject: TimesSubject;
+  today: string;
+  /** The day on which the visit is booked now, where there is one. */
+  visitDate: string | null;
   crews: readonly CrewView[];
   workdays: readonly number[];
   /** The opening that is looked at, to be drawn in the diary. */
@@ -36,6 +40,10 @@ export function TimesPanel(props: TimesPanelProps) {
   const [reason, setReason] = useState('');
   const [chosen, setChosen] = useState(0);
   const panelRef = useRef<HTMLElement>(null);
+  const changeWishes = (next: Wishes) => {
+    setWishes(next);
+    setChosen(0);
+  };
   const { data, error, isPending } = useOpenings({
     jobId: subject.jobId,
     kind: subject.kind,
@@ -43,7 +51,8 @@ export function TimesPanel(props: TimesPanelProps) {
     isGateOverridden: isOverridden,
     limit: 9,
     ...(subject.visit ? { visitId: subject.visit.id } : {}),
-    ...(wishes.from ? { from: wishes.from } : {}),
+    ...askedDays(wishes, props),
+    ...(wishes.isForTwo ? { peopleNeeded: 2 } : {}),
   });
   const openings = data?.openings ?? [];
   const opening = openings[Math.min(chosen, openings.length - 1)];
@@ -80,6 +89,8 @@ export function TimesPanel(props: TimesPanelProps) {
     hold,
     byHand: props.onByHand,
     close: onClose,
+    halfDay: (half) => changeWishes({ ...wishes, ...halfToggled(wishes, half) }),
+    sooner: subject.visit ? () => changeWishes({ ...wishes, isSooner: !wishes.isSooner }) : null,
   });
 
   return (
@@ -107,11 +118,10 @@ export function TimesPanel(props: TimesPanelProps) {
       {booking.held ? <HoldTime held={booking.held} onDone={onClose} /> : null}
       <WishesBar
         wishes={wishes}
+        isBooked={subject.visit !== null}
+        isMeasure={doesKind[subject.kind] === 'measure'}
         workdays={props.workdays}
-        onChange={(next) => {
-          setWishes(next);
-          setChosen(0);
-        }}
+        onChange={changeWishes}
       />
       <OpeningsList
         {...{ data, error, isPending, crews, chosen }}

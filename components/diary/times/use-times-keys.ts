@@ -10,6 +10,9 @@ type TimesKeys = {
   hold: () => void;
   byHand: () => void;
   close: () => void;
+  halfDay: (half: 'morning' | 'afternoon') => void;
+  /** Null where nothing is booked yet that another time could be sooner than. */
+  sooner: (() => void) | null;
 };
 
 /** The panel's keys; while it is open they stand before those of the diary. */
@@ -21,6 +24,8 @@ export function useTimesKeys({
   hold,
   byHand,
   close,
+  halfDay,
+  sooner,
 }: TimesKeys): void {
   const last = Math.max(0, count - 1);
   usePageKeys('Times that work', [
@@ -34,6 +39,9 @@ export function useTimesKeys({
     { keys: 'ArrowDown', words: 'The next time', run: () => choose(Math.min(last, chosen + 1)) },
     { keys: 'ArrowUp', words: 'The time before', run: () => choose(Math.max(0, chosen - 1)) },
     { keys: 'Enter', words: 'Book the time that is looked at', run: () => pressOr(book) },
+    { keys: 'a', words: 'Mornings', run: () => halfDay('morning') },
+    { keys: 'p', words: 'Afternoons', run: () => halfDay('afternoon') },
+    ...(sooner ? [{ keys: 's', words: 'Sooner than it is booked', run: sooner }] : []),
     { keys: 'h', words: 'Keep it a quarter of an hour for the customer', run: hold },
     { keys: 'b', words: 'Book by hand, at any time', run: byHand },
     { keys: 'Escape', words: 'Close', run: close },

@@ -1,21 +1,26 @@
 import { controlLook } from '@/components/ui/field-frame';
+import { KeyHint } from '@/components/ui/key-hint';
 import { weekdayWords } from '@/lib/time/text-locale';
-import type { Wishes } from './wishes';
+import { halfToggled, type Wishes } from './wishes';
 
 /** What the customer wishes, one press each while they are on the phone. */
 export function WishesBar({
   wishes,
+  isBooked,
+  isMeasure,
   workdays,
   onChange,
 }: {
   wishes: Wishes;
+  /** There is a booked time that another may be sooner than. */
+  isBooked: boolean;
+  isMeasure: boolean;
   /** ISO weekdays that the shop works. */
   workdays: readonly number[];
   onChange: (wishes: Wishes) => void;
 }) {
   const change = (part: Partial<Wishes>) => onChange({ ...wishes, ...part });
-  const toggleHalf = (half: NonNullable<Wishes['half']>) =>
-    change({ half: wishes.half === half ? null : half });
+  const toggleHalf = (half: NonNullable<Wishes['half']>) => change(halfToggled(wishes, half));
   const toggleDay = (day: number) =>
     change({
       weekdays: wishes.weekdays.includes(day)
@@ -36,10 +41,14 @@ export function WishesBar({
             {weekdayWords.en[day - 1]?.slice(0, 3)}
           </Toggle>
         ))}
-        <Toggle isOn={wishes.half === 'morning'} onPress={() => toggleHalf('morning')}>
+        <Toggle isOn={wishes.half === 'morning'} onPress={() => toggleHalf('morning')} keyName="A">
           mornings
         </Toggle>
-        <Toggle isOn={wishes.half === 'afternoon'} onPress={() => toggleHalf('afternoon')}>
+        <Toggle
+          isOn={wishes.half === 'afternoon'}
+          onPress={() => toggleHalf('afternoon')}
+          keyName="P"
+        >
           afternoons
         </Toggle>
         <Toggle
@@ -48,6 +57,20 @@ export function WishesBar({
         >
           not school run
         </Toggle>
+        {isBooked ? (
+          <Toggle
+            isOn={wishes.isSooner}
+            onPress={() => change({ isSooner: !wishes.isSooner })}
+            keyName="S"
+          >
+            sooner
+          </Toggle>
+        ) : null}
+        {isMeasure ? (
+          <Toggle isOn={wishes.isForTwo} onPress={() => change({ isForTwo: !wishes.isForTwo })}>
+            two people
+          </Toggle>
+        ) : null}
       </div>
       <div className="grid grid-cols-2 gap-2 text-note">
         <label className="flex flex-col text-graphite">
@@ -77,11 +100,14 @@ export function WishesBar({
 function Toggle({
   isOn,
   words,
+  keyName,
   onPress,
   children,
 }: {
   isOn: boolean;
   words?: string;
+  /** The key that does the same (use-times-keys). */
+  keyName?: string;
   onPress: () => void;
   children: React.ReactNode;
 }) {
@@ -91,13 +117,14 @@ function Toggle({
       aria-pressed={isOn}
       aria-label={words}
       onClick={onPress}
-      className={`min-h-8 rounded border px-2 text-note max-lg:min-h-key max-lg:px-3 ${
+      className={`inline-flex min-h-8 items-center gap-1.5 rounded border px-2 text-note max-lg:min-h-key max-lg:px-3 ${
         isOn
           ? 'border-pine bg-pine font-bold text-on-fill'
           : 'border-rule bg-sheet hover:border-ink'
       }`}
     >
       {children}
+      {keyName ? <KeyHint keys={keyName} isOnFill={isOn} /> : null}
     </button>
   );
 }
