@@ -1,5 +1,5 @@
 import type { CustomerVisitView } from '@/lib/contracts/visits';
-import { spanishTradeWord, tradeWord } from '@/lib/words/trade';
+import { spanishTradeWord, tradeTerms, tradeWord } from '@/lib/words/trade';
 import { wordsEn } from './words-en';
 import { wordsEs } from './words-es';
 
@@ -14,7 +14,9 @@ export function regionalWords(
   text: string,
   { language, region }: Pick<CustomerVisitView, 'language' | 'region'>,
 ): string {
-  const counter =
-    language === 'es' ? spanishTradeWord('counter', region) : tradeWord('counter', region);
-  return text.replaceAll('{counter}', counter);
+  const wordOf = language === 'es' ? spanishTradeWord : tradeWord;
+  return text.replace(/\{(\w+)\}/g, (braced, name) => {
+    const term = tradeTerms.find((known) => known === name);
+    return term ? wordOf(term, region) : braced;
+  });
 }

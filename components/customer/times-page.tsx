@@ -47,9 +47,8 @@ function Choices({ view, token }: Omit<Props, 'wasTaken'>) {
       ) : (
         <ul className="mt-3 flex flex-col gap-3">
           {times.map((time) => (
-            <li key={`${time.crewId} ${time.date} ${time.time}`}>
+            <li key={`${time.date} ${time.time}`}>
               <form method="post" action={paths.customerHold(token)}>
-                <input type="hidden" name="crewId" value={time.crewId} />
                 <input type="hidden" name="date" value={time.date} />
                 <input type="hidden" name="time" value={time.time} />
                 <Button type="submit" size="thumb" look="line" className="flex-col gap-0">

@@ -17,7 +17,6 @@ type Props = {
 /** What the customer sees from the link: when, who, what to clear, and one tap to say yes. No script is needed. */
 export function VisitPage({ visit, token, hasCopy, mapHref }: Props) {
   const words = customerWords(visit.language);
-  const names = new Intl.ListFormat(visit.language).format(visit.whoComes) || words.shopComes;
   const place = [visit.street, visit.town].filter(Boolean).join(', ');
   const { status } = visit;
   const isOver = status === 'done' || status === 'missed' || status === 'called-off';
@@ -40,7 +39,7 @@ export function VisitPage({ visit, token, hasCopy, mapHref }: Props) {
         <>
           <p className="mt-2 text-lead">{words.arrive(visit.windowWords, visit.untilWords)}</p>
           <p className="mt-2">
-            {words.comes(names, regionalWords(words.what[visit.kind], visit))}{' '}
+            {words.comes(visit.whoComes, regionalWords(words.what[visit.kind], visit))}{' '}
             <a href={mapHref} className="underline" title={words.map}>
               {place}
             </a>

@@ -15,18 +15,22 @@ const work = [
   'Room for the van near the door',
 ];
 
+const listOf = (names: readonly string[]) => new Intl.ListFormat('en').format(names);
+
 export const wordsEn = {
+  title: 'Your visit',
   arrive: (window: string, until: string) =>
     `We arrive ${window}${until ? ` and work ${until}` : ''}.`,
-  comes: (names: string, what: string) => `${names} ${what} at`,
-  shopComes: 'We',
+  /** "Ines and Bram will come to measure your room at"; without names, who comes is the shop. */
+  comes: (names: readonly string[], what: string) =>
+    `${names.length > 0 ? listOf(names) : 'We'} will come to ${what} at`,
   what: {
-    'site-measure': 'will measure your room',
-    'check-measure': 'will check a measurement',
-    delivery: 'will deliver your cabinets',
-    install: 'will set your cabinets',
-    'worktop-template': 'will take the template for your {counter}',
-    return: 'will come back for the last pieces',
+    'site-measure': 'measure your room',
+    'check-measure': 'check a measurement',
+    delivery: 'deliver your cabinets',
+    install: 'set your cabinets',
+    'worktop-template': 'take the template for your {counter}',
+    return: 'finish what is left',
   } satisfies Record<VisitKind, string>,
   yes: 'Yes, that works',
   another: 'Ask for another time',
@@ -53,8 +57,8 @@ export const wordsEn = {
     ],
     install: work,
     'worktop-template': [
-      'Clear the base cabinets and put nothing on them',
-      'Have the sink, the faucet and the hob at hand, or their sheets',
+      'Clear the {baseUnit}s and put nothing on them',
+      'Have the sink, the {tap} and the {cooktop} at hand, or their sheets',
       'Somebody at home who can decide on edges and holes',
     ],
     return: work,
@@ -62,8 +66,8 @@ export const wordsEn = {
   oldHouse:
     'Your home may be old enough for lead paint or asbestos. Tell us what you know: the local law comes before anything is cut, sanded or scraped.',
   caution: 'Stay clear of tools and lifted cabinets while we work.',
-  thanks: 'Thank you. You are expected, and so are we.',
-  said: (words: string) => `We have your words: “${words}”. The shop will get back to you.`,
+  thanks: 'Thank you, it is confirmed. See you then.',
+  said: (words: string) => `You told us: “${words}”. The shop will get back to you.`,
   onTheWay: 'We are on the way.',
   late: (arrival: string) => `We are running late, sorry. We now arrive ${arrival}.`,
   here: 'We are here.',

@@ -9,10 +9,10 @@ import { TextField } from '@/components/ui/text-field';
 import { TitleBlock } from '@/components/ui/title-block';
 import { showToast } from '@/components/ui/toast-store';
 import type { MessageSettingsView } from '@/lib/contracts/wordings';
-import { isTextAnswer, occasions, occasionWhen, occasionWords } from '@/lib/messages/occasions';
+import { maySilence, occasions, occasionWhen, occasionWords } from '@/lib/messages/occasions';
 import { saveMessageSettings } from './messages-query';
 
-const tellings = occasions.filter((occasion) => !isTextAnswer(occasion));
+const tellings = occasions.filter(maySilence);
 
 /** On which occasions customers are told, and what one message of a text costs the shop. */
 export function MessageSettingsForm({

@@ -123,7 +123,10 @@ export type HeldVisit = z.infer<typeof heldVisit>;
 export const heldVisitInput = z.object({ visitId: id });
 export type HeldVisitInput = z.infer<typeof heldVisitInput>;
 
-/** What the customer's page offers in place of the booked time; words in their language, in the site's zone. */
+/**
+ * What the customer's page offers in place of the booked time; words in their language, in the site's zone.
+ * The crew stays on the server: the customer chooses a time.
+ */
 export const offeredTime = z.object({
   crewId: id,
   date: localDate,
@@ -136,6 +139,7 @@ export type OfferedTime = z.infer<typeof offeredTime>;
 /** The time that is kept for the customer just now. */
 export const customerHold = z.object({
   heldVisitId: id,
+  startsAt: z.iso.datetime(),
   holdEndsAt: z.iso.datetime(),
   dayWords: z.string(),
   windowWords: z.string(),
@@ -148,5 +152,5 @@ export const offeredTimes = z.object({
 });
 export type OfferedTimes = z.infer<typeof offeredTimes>;
 
-export const holdForCustomerInput = z.object({ crewId: id, date: localDate, time: localTime });
+export const holdForCustomerInput = z.object({ date: localDate, time: localTime });
 export type HoldForCustomerInput = z.infer<typeof holdForCustomerInput>;

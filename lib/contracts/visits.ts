@@ -212,7 +212,7 @@ export type CustomerTimesView = {
   /** Of the visit as it stands. */
   dayWords: string;
   windowWords: string;
-  times: { crewId: string; date: string; time: string; dayWords: string; windowWords: string }[];
+  times: { date: string; time: string; dayWords: string; windowWords: string }[];
   /** `untilWords`: "10:45 AM", of the site. */
   hold: {
     heldVisitId: string;
@@ -226,7 +226,6 @@ export type CustomerTimesView = {
 const linkToken = z.string().min(10).max(60);
 export const customerHoldInput = z.object({
   token: linkToken,
-  crewId: id,
   date: localDate,
   time: localTime,
 });

@@ -8,6 +8,7 @@ export const occasions = [
   'on-my-way',
   'running-late',
   'moved',
+  'moved-together',
   'called-off',
   'missed',
   'not-ready',
@@ -26,6 +27,11 @@ export function isTextAnswer(occasion: string): boolean {
   return textAnswers.some((answer) => answer === occasion);
 }
 
+/** What a shop may keep silent on: no answer to a customer, and visits that move together go with "moved". */
+export function maySilence(occasion: Occasion): boolean {
+  return !isTextAnswer(occasion) && occasion !== 'moved-together';
+}
+
 /** Known occasions only. */
 export function parseOccasion(text: string): Occasion | null {
   return occasions.find((occasion) => occasion === text) ?? null;
@@ -39,6 +45,7 @@ export const occasionWords: Record<Occasion, string> = {
   'on-my-way': 'On my way',
   'running-late': 'Running late',
   moved: 'Moved',
+  'moved-together': 'Moved, several visits',
   'called-off': 'Called off',
   missed: 'Nobody home',
   'not-ready': 'Not ready, noted',
@@ -57,6 +64,7 @@ export const occasionWhen: Record<Occasion, string> = {
   'on-my-way': 'When the crew taps "On my way".',
   'running-late': 'When the crew taps "Running late" and says how long.',
   moved: 'At once, when a visit is moved to another arrival.',
+  'moved-together': 'In place of "Moved", when several visits of one customer move at once.',
   'called-off': 'At once, when a visit is called off.',
   missed: 'When the crew taps "Nobody home".',
   'not-ready': 'When the customer says on their page that something is not ready.',
@@ -83,6 +91,7 @@ export const fieldWords = {
   arrival: 'when a late crew now arrives, "about 11:30 AM"',
   reason: 'why it is called off',
   missing: 'what the customer says is not ready',
+  moves: 'each visit that moves, with its new time and its page',
   choices: 'the visits to choose from, each with its number',
 } as const;
 export type Field = keyof typeof fieldWords;
@@ -99,6 +108,7 @@ export const fieldsOf: Record<Occasion, readonly Field[]> = {
   'on-my-way': withTime,
   'running-late': [...withTime, 'minutesLate', 'arrival'],
   moved: [...withTime, 'oldDay', 'oldWindow'],
+  'moved-together': ['shop', 'shopPhone', 'customer', 'moves'],
   'called-off': [...always, 'day', 'reason'],
   missed: [...always, 'day', 'link'],
   'not-ready': [...withTime, 'missing'],

@@ -40,7 +40,7 @@ export function renderEmail(input: RenderInput): Outcome<RenderedEmail> {
   const { language, values } = input;
   const wording = wordingOf(input);
   const subject = renderTemplate(wording.subject, oneLine(values));
-  const text = renderTemplate(wording.email, oneLine(values));
+  const text = renderTemplate(wording.email, { ...oneLine(values), ...linesOf(values) });
   if (subject.value === null || text.value === null) {
     return { value: null, problems: [...subject.problems, ...text.problems] };
   }
@@ -50,6 +50,11 @@ export function renderEmail(input: RenderInput): Outcome<RenderedEmail> {
 
 function wordingOf({ occasion, language, ownWording }: RenderInput): Wording {
   return { ...usualWording(occasion, language), ...ownWording };
+}
+
+/** A list that is ours, each visit with its page on a line of its own; nothing in it was typed by anybody. */
+function linesOf({ moves }: FieldValues): FieldValues {
+  return moves === undefined ? {} : { moves };
 }
 
 /** A value with line ends could look like a paragraph or a header of its own. */

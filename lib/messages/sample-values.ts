@@ -23,6 +23,12 @@ export const sampleValues: Record<Language, Record<Field, string>> = {
     arrival: 'about 11:45 AM',
     reason: 'The floor is not down yet.',
     missing: 'the floor; the power',
+    moves: [
+      'Cabinet install: Wed, Sep 16, 11:00 AM-1:00 PM',
+      'https://setwell.example/v/7hK2mXqP9sRtV4wYbN6cDf',
+      'Countertop template: Wed, Sep 23, 11:00 AM-1:00 PM',
+      'https://setwell.example/v/Qw3rTy8uIoPa5sDfGhJkLz',
+    ].join('\n'),
     choices:
       '1 for the site measure on Wed, Sep 16, or 2 for the countertop template on Wed, Sep 23',
   },
@@ -37,6 +43,12 @@ export const sampleValues: Record<Language, Record<Field, string>> = {
     arrival: 'cerca de las 11:45 a.m.',
     reason: 'El piso aún no está puesto.',
     missing: 'el piso; la electricidad',
+    moves: [
+      'Instalación de gabinetes: mié 16 sep, 11:00 a.m.-1:00 p.m.',
+      'https://setwell.example/v/7hK2mXqP9sRtV4wYbN6cDf',
+      'Plantilla de la cubierta: mié 23 sep, 11:00 a.m.-1:00 p.m.',
+      'https://setwell.example/v/Qw3rTy8uIoPa5sDfGhJkLz',
+    ].join('\n'),
     choices:
       '1 para la toma de medidas del mié 16 sep, o 2 para la plantilla de la cubierta del mié 23 sep',
   },

@@ -95,6 +95,19 @@ If that does not suit, ask for another time:
 {shop}
 {shopPhone}`,
   },
+  'moved-together': {
+    sms: '{shop}: new times for your visits. {moves} Questions: {shopPhone}',
+    subject: 'Moved: new times for your visits',
+    email: `Hello {customer},
+
+Your visits have new times:
+
+{moves}
+
+If one of them does not suit, ask for another time on its page, or ring us: {shopPhone}.
+
+{shop}`,
+  },
   'called-off': {
     sms: '{shop}: your {visit} on {day} is called off. We will talk to you about a new time. Questions: {shopPhone}',
     subject: 'Called off: {visit} on {day}',

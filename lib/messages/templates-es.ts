@@ -14,33 +14,33 @@ Su {visit} en {address} queda para el {day}. Llegamos {window}.
 
 Quién va: {crew}.
 
-Vea qué conviene despejar, añada la cita a su calendario o pida otra hora:
+Vea qué conviene despejar, agregue la cita a su calendario o pida otra fecha:
 {link}
 
 {shop}
 {shopPhone}`,
   },
   'please-confirm': {
-    sms: '{shop}: ¿podemos ir el {day}, {window}, para su {visit}? Responda SI, o CAMBIO para otra hora. {link}',
+    sms: '{shop}: ¿podemos ir el {day}, {window}, para su {visit}? Responda SI, o CAMBIO para pedir otra fecha. {link}',
     subject: 'Confirme, por favor: {visit} el {day}',
     email: `Hola, {customer}:
 
 Pensamos ir el {day}, {window}, para su {visit} en {address}.
 
-Díganos con un toque si la hora le conviene, o pida otra:
+Díganos con un toque si le conviene, o pida otra fecha:
 {link}
 
 {shop}
 {shopPhone}`,
   },
   'asked-again': {
-    sms: '{shop}: no hemos recibido su respuesta. ¿Podemos ir el {day}, {window}, para su {visit}? Responda SI, o CAMBIO para otra hora. {link}',
+    sms: '{shop}: no hemos recibido su respuesta. ¿Podemos ir el {day}, {window}, para su {visit}? Responda SI, o CAMBIO para pedir otra fecha. {link}',
     subject: '¿Le conviene? {visit} el {day}',
     email: `Hola, {customer}:
 
 Todavía no hemos recibido su respuesta. Pensamos ir el {day}, {window}, para su {visit} en {address}.
 
-Díganos con un toque si la hora le conviene, o pida otra:
+Díganos con un toque si le conviene, o pida otra fecha:
 {link}
 
 {shop}
@@ -74,11 +74,11 @@ Quién va: {crew}.
 {shopPhone}`,
   },
   'running-late': {
-    sms: '{shop}: disculpe, vamos unos {minutesLate} minutos tarde y ahora llegamos {arrival}. Preguntas: {shopPhone}',
+    sms: '{shop}: disculpe, llevamos unos {minutesLate} minutos de retraso y ahora llegamos {arrival}. Preguntas: {shopPhone}',
     subject: 'Vamos con retraso',
     email: `Hola, {customer}:
 
-Disculpe: vamos unos {minutesLate} minutos tarde para su {visit} y ahora llegamos {arrival}.
+Disculpe: llevamos unos {minutesLate} minutos de retraso para su {visit} y ahora llegamos {arrival}.
 
 {link}
 
@@ -92,62 +92,75 @@ Disculpe: vamos unos {minutesLate} minutos tarde para su {visit} y ahora llegamo
 
 Su {visit} en {address} pasa del {oldDay}, {oldWindow}, al {day}. Llegamos {window}.
 
-Si no le conviene, pida otra hora:
+Si no le conviene, pida otra fecha:
 {link}
 
 {shop}
 {shopPhone}`,
   },
-  'called-off': {
-    sms: '{shop}: su {visit} del {day} queda suspendida. Le hablaremos de una nueva fecha. Preguntas: {shopPhone}',
-    subject: 'Suspendida: {visit} del {day}',
+  'moved-together': {
+    sms: '{shop}: nuevas fechas para sus visitas. {moves} Preguntas: {shopPhone}',
+    subject: 'Nuevas fechas para sus visitas',
     email: `Hola, {customer}:
 
-Su {visit} del {day} en {address} queda suspendida. {reason}
+Sus visitas tienen nuevas fechas:
 
-Le hablaremos de una nueva fecha. Nuestro teléfono es {shopPhone}.
+{moves}
+
+Si alguna no le conviene, pida otra fecha en su página o llámenos: {shopPhone}.
+
+{shop}`,
+  },
+  'called-off': {
+    sms: '{shop}: su {visit} del {day} queda cancelada. Le llamaremos para acordar otra fecha. Preguntas: {shopPhone}',
+    subject: 'Cancelada: {visit} del {day}',
+    email: `Hola, {customer}:
+
+Su {visit} del {day} en {address} queda cancelada. {reason}
+
+Le llamaremos para acordar otra fecha. Nuestro teléfono es {shopPhone}.
 
 {shop}`,
   },
   missed: {
-    sms: '{shop}: fuimos para su {visit} y no encontramos a nadie en casa. Llame al {shopPhone} y buscamos otra hora.',
+    sms: '{shop}: fuimos para su {visit} y no encontramos a nadie en casa. Llame al {shopPhone} y buscamos otra fecha.',
     subject: 'No le encontramos: {visit} del {day}',
     email: `Hola, {customer}:
 
 Fuimos a {address} el {day} para su {visit} y no había nadie en casa.
 
-Llámenos y buscamos otra hora: {shopPhone}.
+Llámenos y buscamos otra fecha: {shopPhone}.
 
 {shop}`,
   },
   'not-ready': {
-    sms: '{shop}: anotado, falta: {missing}. Le hablamos antes del {day}. Preguntas: {shopPhone}',
+    sms: '{shop}: anotado, falta: {missing}. Le llamamos antes del {day}. Preguntas: {shopPhone}',
     subject: 'Anotado: falta algo para su {visit}',
     email: `Hola, {customer}:
 
 Anotamos lo que falta todavía para su {visit} en {address}: {missing}.
 
-Le hablamos antes del {day}. Cuando esté listo, avísenos aquí o por teléfono:
+Le llamamos antes del {day}. Cuando esté listo, avísenos aquí o por teléfono:
 {link}
 
 {shop}
 {shopPhone}`,
   },
   done: {
-    sms: '{shop}: su {visit} queda terminada. Gracias. Vea el estado: {link}',
-    subject: 'Terminada: su {visit}',
+    sms: '{shop}: su {visit} ha terminado. Gracias. Vea lo que queda: {link}',
+    subject: 'Ha terminado su {visit}',
     email: `Hola, {customer}:
 
-Su {visit} en {address} queda terminada. Gracias.
+Su {visit} en {address} ha terminado. Gracias.
 
-Cómo queda, y lo que aún esté pendiente:
+Vea cómo quedó y lo que aún esté pendiente:
 {link}
 
 {shop}
 {shopPhone}`,
   },
   'other-time': {
-    sms: '{shop}: elija otra hora para su {visit}: {link} O llame al {shopPhone}.',
+    sms: '{shop}: elija otra fecha para su {visit}: {link} O llame al {shopPhone}.',
     subject: '',
     email: '',
   },

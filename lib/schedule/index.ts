@@ -9,7 +9,7 @@ export {
   type JobFacts,
 } from './gate-input';
 export { type Gate, gateProblems, gatesFor, type Readiness, readinessFor } from './gates';
-export { findOpenings, variedOpenings } from './openings/find-openings';
+export { eachStartOnce, findOpenings, variedOpenings } from './openings/find-openings';
 export type {
   BusyPiece,
   FoundOpening,

@@ -1,11 +1,12 @@
 import type { VisitKind } from './visit-kind';
 
+/** For the office: short, and the same in every region. Customers read `visitInWords`. */
 export const visitKindWords: Record<VisitKind, string> = {
   'site-measure': 'Measure',
   'check-measure': 'Check measure',
   delivery: 'Delivery',
   install: 'Install',
-  'worktop-template': 'Worktop template',
+  'worktop-template': 'Template',
   return: 'Return visit',
 };
 

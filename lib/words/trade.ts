@@ -50,6 +50,10 @@ const rows = {
   /** V74. */
   range: { us: 'range', uk: 'cooker', es: 'estufa' },
   /** V74. */
+  cooktop: { us: 'cooktop', uk: 'hob', au: 'cooktop', es: 'placa', esUs: 'parrilla' },
+  /** Recalled, in no row. */
+  tap: { us: 'faucet', uk: 'tap', es: 'llave' },
+  /** V74. */
   hood: { us: 'hood', uk: 'extractor', es: 'campana' },
   /** V24. */
   refrigerator: { us: 'refrigerator', uk: 'fridge', es: 'refrigerador' },

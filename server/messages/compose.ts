@@ -11,11 +11,16 @@ export type DueMessage = {
   occasion: string;
   channel: Channel;
   cause: MessageCause;
+  /** Other visits of the same customer that it tells of as well. */
+  others: { id: string; visitId: string; cause: MessageCause }[];
 };
 
+/** Of the others that go with a message, one that it says nothing of after all, with why. */
+export type LeftOut = { id: string; reason: string };
+
 export type Composed =
-  | { is: 'sms'; body: string }
-  | { is: 'email'; email: Omit<OutgoingEmail, 'to' | 'idempotencyKey'> }
+  | { is: 'sms'; body: string; leftOut?: LeftOut[] }
+  | { is: 'email'; email: Omit<OutgoingEmail, 'to' | 'idempotencyKey'>; leftOut?: LeftOut[] }
   /** Not sent after all, with why. */
   | { is: 'withdrawn'; reason: string }
   /** It cannot be written, with why. */

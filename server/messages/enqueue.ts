@@ -7,6 +7,7 @@ import { nextAllowedTime } from '@/lib/messages/quiet-hours';
 import type { Context } from '@/server/base/context';
 import { readMessageSettings } from './message-settings';
 import type { Recipient } from './recipient';
+import { findMoveToJoin } from './told-together';
 
 export type Note = {
   occasion: Occasion;
@@ -24,8 +25,8 @@ export type Told = { jobId: string; visitId: string; version: number; zone: stri
 /**
  * Puts notes into the outbox, in the transaction of their cause. A channel that the customer does not
  * allow, an occasion that the shop keeps silent on, and a text that could only go at night or too late, are
- * left out; a note of the same visit,
- * version, occasion and channel is there already and stays one. Gives the channels that will be used.
+ * left out; a note of the same visit, version, occasion and channel is there already and stays one. Who
+ * waits to be told of another visit's move is told of both together. Gives the channels that will be used.
  */
 export async function enqueue(
   tx: Transaction,
@@ -42,6 +43,9 @@ export async function enqueue(
       const dueAt = dueTime(ctx, about, note);
       return dueAt ? [rowOf(ctx, to, { ...note, dueAt })] : [];
     });
+  for (const row of rows) {
+    if (row.occasion === 'moved') row.toldWith = await findMoveToJoin(tx, row);
+  }
   if (rows.length > 0) {
     await tx
       .insert(messages)
@@ -58,7 +62,11 @@ function dueTime(ctx: Context, { zone }: Told, { channel, dueAt, notAfter }: Not
   return nextAllowedTime({ dueAt, zone, quietFrom, quietUntil, notAfter });
 }
 
-function rowOf(ctx: Context, { recipient, about }: { recipient: Recipient; about: Told }, n: Note) {
+function rowOf(
+  ctx: Context,
+  { recipient, about }: { recipient: Recipient; about: Told },
+  n: Note,
+): typeof messages.$inferInsert {
   const { jobId, visitId, version } = about;
   const { occasion, channel, dueAt, notAfter, cause, once = version } = n;
   return {

@@ -37,7 +37,10 @@ export async function giveUp(
       })
       .where(which)
       .returning(givenUpFields);
+    const ids = new Set(given.map(({ id }) => id));
     for (const row of given) {
+      // Told in one message, it is one thing to do.
+      if (row.toldWith && ids.has(row.toldWith)) continue;
       await putBeforeScheduler(tx, row, message, now);
       if (code === 'opted-out') await writeOptOut(tx, row, now);
       if (code === 'cannot-receive' || code === 'bad-number') await rememberNumber(tx, row);
@@ -59,6 +62,7 @@ const givenUpFields = {
   channel: messages.channel,
   key: messages.key,
   toAddress: messages.toAddress,
+  toldWith: messages.toldWith,
 };
 type GivenUp = { [Field in keyof typeof givenUpFields]: (typeof messages.$inferSelect)[Field] };
 

@@ -17,16 +17,23 @@ export const messageFields = {
   segments: messages.segments,
   dueAt: messages.dueAt,
   sentAt: messages.sentAt,
+  toldWith: messages.toldWith,
 };
-type Row = Omit<MessageView, 'dueAtWords'> & { dueAt: Date; sentAt: Date | null };
+type Row = Omit<MessageView, 'dueAtWords'> & {
+  dueAt: Date;
+  sentAt: Date | null;
+  toldWith: string | null;
+};
 
 export function messageView<R extends Row>(
   ctx: Context,
-  { dueAt, sentAt, ...row }: R,
-): Omit<R, 'dueAt' | 'sentAt'> & { dueAtWords: string } {
+  { dueAt, sentAt, toldWith, ...row }: R,
+): Omit<R, 'dueAt' | 'sentAt' | 'toldWith'> & { dueAtWords: string } {
   const { zone, region } = ctx.shop;
   const locale = { language: 'en', region } as const;
   const at = sentAt ?? dueAt;
   const dueAtWords = `${formatDayShort(at, zone, locale)}, ${formatTime(at, zone, locale)}`;
-  return { ...row, dueAtWords };
+  const isTogether = toldWith !== null && row.state !== 'withdrawn';
+  const together = isTogether ? 'In one message with another visit.' : '';
+  return { ...row, reason: [together, row.reason].filter(Boolean).join(' '), dueAtWords };
 }

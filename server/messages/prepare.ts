@@ -4,7 +4,7 @@ import { messages } from '@/db/schema';
 import { nextAllowedTime } from '@/lib/messages/quiet-hours';
 import type { Context, SystemActor } from '@/server/base/context';
 import type { Claimed } from './claim-due';
-import type { Compose, Composed } from './compose';
+import type { Compose, Composed, LeftOut } from './compose';
 import { byHand, composeByHand } from './compose-by-hand';
 import { type Recipient, readRecipient } from './recipient';
 import { zoneOfJob } from './zone-of-job';
@@ -44,11 +44,20 @@ async function writeOut(
   if (message.occasion === byHand) return composeByHand(ctx, message, recipient);
   const { visitId } = message;
   if (!visitId) return { is: 'withdrawn', reason: 'It is about no visit.' };
-  if (await isOvertaken(ctx, message)) {
-    return { is: 'withdrawn', reason: 'The visit has changed since.' };
+  if (await isOvertaken(ctx, message)) return { is: 'withdrawn', reason: overtaken };
+  const others = [];
+  const leftOut: LeftOut[] = [];
+  for (const other of message.others) {
+    if (!other.visitId || (await isOvertaken(ctx, other))) {
+      leftOut.push({ id: other.id, reason: overtaken });
+    } else others.push({ ...other, visitId: other.visitId });
   }
-  return compose(ctx, { ...message, visitId }, recipient);
+  const composed = await compose(ctx, { ...message, visitId, others }, recipient);
+  if (composed.is === 'withdrawn' || composed.is === 'refused') return composed;
+  return { ...composed, leftOut: [...leftOut, ...(composed.leftOut ?? [])] };
 }
+
+const overtaken = 'The visit has changed since.';
 
 function withdrawn(reason: string): Prepared {
   return { is: 'withdrawn', reason };
@@ -63,7 +72,10 @@ async function allowedAt(ctx: Context, message: Claimed): Promise<Date | null> {
 }
 
 /** It was claimed before the visit moved or was called off: the newer message tells it all. */
-async function isOvertaken(ctx: Context, message: Claimed): Promise<boolean> {
+async function isOvertaken(
+  ctx: Context,
+  message: Pick<Claimed, 'visitId' | 'channel' | 'createdAt'>,
+): Promise<boolean> {
   if (!message.visitId) return false;
   const [newer] = await ctx.db
     .select({ id: messages.id })

@@ -1,6 +1,6 @@
 import { messageSettings } from '@/db/schema';
 import type { SaveMessageSettingsInput } from '@/lib/contracts/wordings';
-import { isTextAnswer, occasionWords } from '@/lib/messages/occasions';
+import { maySilence, occasionWords } from '@/lib/messages/occasions';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 
@@ -10,7 +10,7 @@ export async function saveMessageSettings(
   input: SaveMessageSettingsInput,
 ): Promise<void> {
   mustBeAllowed(ctx, 'shop:change');
-  const silentOn = [...new Set(input.silentOn)].filter((occasion) => !isTextAnswer(occasion));
+  const silentOn = [...new Set(input.silentOn)].filter(maySilence);
   const { segmentPrice, currency } = input;
   const settings = { silentOn, segmentPrice, currency };
   await ctx.db.transaction(async (tx) => {

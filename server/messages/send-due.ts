@@ -53,15 +53,26 @@ async function putAside(
   prepared: Exclude<Prepared, { is: 'ready' }>,
   now: Date,
 ): Promise<void> {
+  // Waiting for the morning is no failed try.
+  const attempts = message.attempts - 1;
   if (prepared.is === 'later') {
-    // Waiting for the morning is no failed try.
-    const attempts = message.attempts - 1;
     await writeWhileHeld(db, message, { state: 'waiting', dueAt: prepared.dueAt, attempts });
-  } else if (prepared.is === 'refused') {
-    await giveUpWhileHeld(db, message, { message: prepared.reason, code: null }, now);
-  } else {
-    await writeWhileHeld(db, message, { state: 'withdrawn', reason: prepared.reason });
+    return;
   }
+  // What stands against one visit stands against no other: those are looked at by themselves.
+  const alone = { ...message, others: [] };
+  if (prepared.is === 'refused') {
+    await giveUpWhileHeld(db, alone, { message: prepared.reason, code: null }, now);
+  } else {
+    await writeWhileHeld(db, alone, { state: 'withdrawn', reason: prepared.reason });
+  }
+  for (const other of eachAlone(message.others)) {
+    await writeWhileHeld(db, other, { state: 'waiting', dueAt: now, attempts });
+  }
+}
+
+function eachAlone(others: Claimed['others']): Claimed[] {
+  return others.map((other) => ({ ...other, others: [] }));
 }
 
 /** What goes out is written down first, so that after a crash the provider can be asked for it. */
@@ -73,7 +84,14 @@ async function carry(
   const { db } = sending;
   const body = composed.is === 'sms' ? composed.body : composed.email.text;
   const segments = composed.is === 'sms' ? countSegments(body).segments : 0;
-  if (!(await writeWhileHeld(db, message, { toAddress: to, body, segments }))) return;
+  const words = { toAddress: to, body, segments };
+  if (!(await writeWhileHeld(db, { ...message, others: [] }, words))) return;
+  const others = eachAlone(message.others);
+  for (const other of others) {
+    const leftOut = composed.leftOut?.find(({ id }) => id === other.id);
+    if (leftOut) await writeWhileHeld(db, other, { state: 'withdrawn', reason: leftOut.reason });
+    else await writeWhileHeld(db, other, { toAddress: to });
+  }
   const result = await send(sending.ports, message.id, to, composed);
   const now = sending.now();
   if (!result.ok) return writeRefusal(db, message, result.refusal, now);

@@ -1,6 +1,7 @@
 import type { Database } from '@/db/database';
 import { database } from '@/server/base/database';
 import { logBug } from '@/server/base/log';
+import { type Repeated, repeat } from '@/server/base/repeat';
 import { getPorts } from '@/server/ports/choose-ports';
 import { askLate } from './ask-late';
 import type { Compose } from './compose';
@@ -9,9 +10,8 @@ import { settle } from './settle';
 
 const tickMs = 2_000;
 
-type Worker = { kick: () => void; stop: () => Promise<void> };
 /** Held for the process: the bundler makes several copies of this module. */
-const held = globalThis as typeof globalThis & { __setwellWorker?: Worker };
+const held = globalThis as typeof globalThis & { __setwellWorker?: Repeated };
 
 /** What else falls due with the clock, and is known to a room above. */
 export type Alongside = (db: Database, now: Date) => Promise<void>;
@@ -24,7 +24,12 @@ export function startWorker(
   compose: Compose,
   alongside: readonly Alongside[] = [],
 ): () => Promise<void> {
-  held.__setwellWorker ??= makeWorker(async () => {
+  held.__setwellWorker ??= startRounds(compose, alongside);
+  return held.__setwellWorker.stop;
+}
+
+function startRounds(compose: Compose, alongside: readonly Alongside[]): Repeated {
+  const rounds = repeat('messages/worker', tickMs, async () => {
     const { db } = await database();
     for (const work of alongside) {
       await work(db, new Date()).catch((error) => logBug('messages/worker alongside', error));
@@ -34,43 +39,17 @@ export function startWorker(
     await sendDue(sending);
     await askLate(sending);
   });
-  return held.__setwellWorker.stop;
+  rounds.kick();
+  return {
+    ...rounds,
+    stop: async () => {
+      await rounds.stop();
+      held.__setwellWorker = undefined;
+    },
+  };
 }
 
 /** Something was put into the outbox and committed: no need to wait for the next round. */
 export function kickWorker(): void {
   held.__setwellWorker?.kick();
-}
-
-function makeWorker(round: () => Promise<void>): Worker {
-  let isStopped = false;
-  let isKicked = false;
-  let timer: NodeJS.Timeout | undefined;
-  let underWay: Promise<void> | null = null;
-
-  function run(): void {
-    if (isStopped || underWay) return;
-    clearTimeout(timer);
-    isKicked = false;
-    underWay = round()
-      .catch((error) => logBug('messages/worker', error))
-      .finally(() => {
-        underWay = null;
-        if (!isStopped) timer = setTimeout(run, isKicked ? 0 : tickMs);
-      });
-  }
-
-  timer = setTimeout(run, 0);
-  return {
-    kick() {
-      isKicked = true;
-      run();
-    },
-    async stop() {
-      isStopped = true;
-      clearTimeout(timer);
-      await underWay;
-      held.__setwellWorker = undefined;
-    },
-  };
 }

@@ -1,4 +1,4 @@
-import { and, eq } from 'drizzle-orm';
+import { and, eq, inArray } from 'drizzle-orm';
 import type { Database } from '@/db/database';
 import { messages } from '@/db/schema';
 import type { EmailRefusal } from '@/server/ports/email/email-port';
@@ -9,7 +9,7 @@ import { nextAskAt } from './next-ask-at';
 
 type Change = Partial<typeof messages.$inferInsert>;
 
-/** Changes a message that this worker still holds; false when a report or another worker was faster. */
+/** Changes a message that this worker still holds, and what is told with it; false when a report or another worker was faster. */
 export async function writeWhileHeld(
   db: Database,
   message: Claimed,
@@ -34,7 +34,7 @@ export function giveUpWhileHeld(
 
 function stillHeld(message: Claimed) {
   return and(
-    eq(messages.id, message.id),
+    inArray(messages.id, [message.id, ...message.others.map(({ id }) => id)]),
     eq(messages.state, 'sending'),
     message.claimedAt ? eq(messages.claimedAt, message.claimedAt) : undefined,
   );

@@ -1,4 +1,4 @@
-import { and, asc, eq, gte, inArray, lt, lte, sql } from 'drizzle-orm';
+import { and, asc, eq, gte, inArray, isNull, lt, lte, sql } from 'drizzle-orm';
 import { jobs, messageSettings, messages, releases, rooms, snags, visits } from '@/db/schema';
 import type { JobFact, MessageFact, ShortReleaseFact, SnagFact } from '@/lib/numbers/facts';
 import type { VisitKind } from '@/lib/schedule/visit-kind';
@@ -113,6 +113,8 @@ export async function readMessageFacts(
         eq(messages.shopId, ctx.shop.id),
         eq(messages.channel, 'sms'),
         inArray(messages.state, ['sent', 'delivered']),
+        // What went in one text with another is that one text.
+        isNull(messages.toldWith),
         gte(messages.sentAt, from),
         lte(messages.sentAt, until),
       ),

@@ -37,11 +37,11 @@ export async function startUp(): Promise<void> {
   const stopWorker = startWorker(composeWithCopy(signedCopyOf), [noticeSilence]);
   const stopLapsing = startLapsing();
   const stopBackUps = startBackUps(open, { dataDirectory, backUpDirectory });
-  const stopTelling = repeat('programs', tellEveryMs, () => sendDeliveries(open.db, new Date()));
-  const stopPlacing = repeat('jobs/place-due-sites', placeEveryMs, () =>
+  const telling = repeat('programs', tellEveryMs, () => sendDeliveries(open.db, new Date()));
+  const placing = repeat('jobs/place-due-sites', placeEveryMs, () =>
     placeDueSites(open.db, geocode, new Date()),
   );
-  const stopForgetting = repeat('keeping', forgetEveryMs, () => forgetOld(open.db, new Date()));
+  const forgetting = repeat('keeping', forgetEveryMs, () => forgetOld(open.db, new Date()));
   log('started', { database: open.kind, demo });
 
   for (const signal of ['SIGTERM', 'SIGINT'] as const) {
@@ -50,9 +50,9 @@ export async function startUp(): Promise<void> {
         stopWorker(),
         stopLapsing(),
         stopBackUps(),
-        stopTelling(),
-        stopPlacing(),
-        stopForgetting(),
+        telling.stop(),
+        placing.stop(),
+        forgetting.stop(),
       ]);
       await open.close();
       log('stopped');

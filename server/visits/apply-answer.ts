@@ -3,7 +3,7 @@ import type { Transaction } from '@/db/database';
 import { jobs } from '@/db/schema';
 import type { SchedulerItemKind } from '@/lib/contracts/messages';
 import type { CustomerAnswerInput } from '@/lib/contracts/visits';
-import { missingWords } from '@/lib/messages/missing-words';
+import { callMeWords, notReadyWords, otherTimeWords } from '@/lib/messages/said-words';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { writeAudit } from '@/server/base/audit';
 import type { CustomerContext } from '@/server/base/context';
@@ -30,14 +30,11 @@ export async function applyAnswer(
     case 'not-ready':
       return notReady(tx, ctx, visit, answer);
     case 'call-me':
-      return ask(tx, ctx, visit, {
-        kind: 'call-me',
-        says: answer.words ? `Call me: ${answer.words}` : 'Call me, please',
-      });
+      return ask(tx, ctx, visit, { kind: 'call-me', says: callMeWords(answer.words) });
     case 'another-time':
       return ask(tx, ctx, visit, {
         kind: 'asks-other-time',
-        says: answer.words || 'Another time, please',
+        says: otherTimeWords(answer.words),
       });
   }
 }
@@ -90,7 +87,7 @@ async function notReady(
   visit: LockedVisit,
   { missing, words }: Answer,
 ): Promise<LockedVisit> {
-  const says = missingWords(missing, words, 'en') || 'Not ready';
+  const says = notReadyWords(missing, words);
   if (visit.customerSays === says) return visit;
   const asked = await ask(tx, ctx, visit, { kind: 'not-ready', says });
   await writeNotReady(tx, ctx, visit.jobId, says);

@@ -7,6 +7,7 @@ import { readMessageSettings } from '@/server/messages/message-settings';
 import { readOwnWording } from '@/server/messages/read-wording';
 import type { Attachment } from '@/server/ports/email/email-port';
 import { choiceWords, valuesOf } from './message-values';
+import { calendarFiles, movesWords, readOthers, toldWindow } from './moves-together';
 import { type CustomerVisit, readCustomerVisit } from './read-customer-visit';
 import { type CalendarMethod, visitCalendar } from './visit-calendar';
 import { visitLinkAddress } from './visit-link';
@@ -37,33 +38,47 @@ export function composeWithCopy(signedCopyOf: SignedCopyOf): Compose {
     const link = await visitLinkAddress(ctx.db, ctx, visit.id);
     const { language } = recipient;
     const locale: TextLocale = { language, region: ctx.shop.region };
-    const { cause } = message;
+    const { cause, channel } = message;
+    const others = await readOthers(ctx, message.others);
+    const leftOut = others.flatMap((other) => {
+      const reason = whyPointless(occasion, other.visit);
+      return reason ? [{ id: other.id, reason }] : [];
+    });
+    const along = others.filter(({ id }) => leftOut.every((left) => left.id !== id));
+    const said = along.length > 0 ? 'moved-together' : occasion;
     const values = valuesOf(ctx, visit, {
       cause,
       locale,
       names: await whoComes(ctx.db, ctx, visit.id),
       link,
       choices: await choiceWords(ctx, cause.choices ?? [], locale),
+      moves: movesWords(
+        [{ visit, told: toldWindow(visit, cause), link }, ...along],
+        channel,
+        locale,
+      ),
     });
-    const ownWording = await readOwnWording(ctx.db, ctx.shop.id, { occasion, language });
-    const input = { occasion, language, values, ownWording };
-    if (message.channel === 'sms') {
+    const ownWording = await readOwnWording(ctx.db, ctx.shop.id, { occasion: said, language });
+    const input = { occasion: said, language, values, ownWording };
+    if (channel === 'sms') {
       const { value, problems } = renderSms(input);
-      return value === null ? refused(problems[0]?.message) : { is: 'sms', body: value };
+      return value === null ? refused(problems[0]?.message) : { is: 'sms', body: value, leftOut };
     }
     const { value, problems } = renderEmail(input);
     if (value === null) return refused(problems[0]?.message);
     const method = calendarMethod(occasion);
     const copy = occasion === 'done' ? await signedCopyOf(ctx, visit.id) : null;
+    const attachments = [...calendarFiles(ctx, along), ...(copy ? [copy] : [])];
     return {
       is: 'email',
+      leftOut,
       email: {
         ...value,
         ...(ctx.shop.email ? { replyTo: ctx.shop.email } : {}),
         ...(method
           ? { ics: { method, content: visitCalendar(ctx, visit, { method, link }) } }
           : {}),
-        ...(copy ? { attachments: [copy] } : {}),
+        ...(attachments.length > 0 ? { attachments } : {}),
       },
     };
   };

@@ -1,7 +1,7 @@
 import { and, eq } from 'drizzle-orm';
 import { jobs, visits } from '@/db/schema';
 import type { FindOpeningsInput, OpeningsView } from '@/lib/contracts/openings';
-import { readinessFor, variedOpenings } from '@/lib/schedule';
+import { type FoundOpening, readinessFor, variedOpenings } from '@/lib/schedule';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { addDays, type LocalDate } from '@/lib/time/civil';
 import { formatLocalDayShort } from '@/lib/time/format-civil';
@@ -32,11 +32,12 @@ export async function findOpenings(
   });
 }
 
-/** The same for whoever asks: the office, or a customer for their own visit. */
+/** The same for whoever asks: the office, or a customer for their own visit, from whom some are kept back. */
 export async function openingsOfJob(
   ctx: Context,
   job: JobRecord,
   input: FindOpeningsInput,
+  offerable: (found: FoundOpening[]) => FoundOpening[] = (found) => found,
 ): Promise<OpeningsView> {
   const today = localDate(ctx.now, ctx.shop.zone);
   const locale = { language: 'en', region: ctx.shop.region } as const;
@@ -62,17 +63,18 @@ export async function openingsOfJob(
   }
   const search = await searchOpenings(ctx, job, { ...input, from, until });
   if (search.crewCount === 0) return none(noCrewWords(input));
-  if (search.found.length === 0) {
+  const found = offerable(search.found);
+  if (found.length === 0) {
     return none(
       `Nothing is free until ${lastDay}. Allow later days or other crews, or shorten the visit.`,
     );
   }
   return {
     ...gates,
-    openings: variedOpenings(search.found, input.limit).map((opening) =>
+    openings: variedOpenings(found, input.limit).map((opening) =>
       openingView(ctx, opening, search, input.wishes),
     ),
-    found: search.found.length,
+    found: found.length,
     whyNone: '',
   };
 }

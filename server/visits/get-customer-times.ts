@@ -28,11 +28,7 @@ export async function getCustomerTimes(
       zone,
       locale,
     ),
-    // What is kept already is no other time, even where a second crew is free then.
-    times: times.filter(
-      ({ dayWords, windowWords }) =>
-        dayWords !== hold?.dayWords || windowWords !== hold.windowWords,
-    ),
+    times: times.map(({ crewId: _, ...time }) => time),
     hold: hold && { ...hold, untilWords: formatTime(new Date(hold.holdEndsAt), zone, locale) },
   };
 }

@@ -1,5 +1,6 @@
 import type { CustomerVisitView } from '@/lib/contracts/visits';
 import { isOldHouse } from '@/lib/measure/rules/old-house';
+import { saidBack } from '@/lib/messages/said-words';
 import { formatAtLocalTime } from '@/lib/time/format-civil';
 import { formatDay, formatTime, formatWindow } from '@/lib/time/format-instant';
 import { toLocal } from '@/lib/time/local-moment';
@@ -42,7 +43,7 @@ export async function getCustomerVisit(
     whoComes: await whoComes(ctx.db, ctx, visit.id),
     street,
     town,
-    customerSays,
+    customerSays: saidBack(customerSays, language),
     saysNotReady: customerSays !== '' && customerSays === visit.notReady,
     arrivalWords: isLate && visit.expectedAt ? aboutWords(visit.expectedAt, zone, locale) : '',
     isOldHouse: isOldHouse(visit.yearBuilt, shop.region),

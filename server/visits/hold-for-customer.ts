@@ -8,19 +8,16 @@ import { offerTimes } from './offer-times';
 import { type Attempt, translateTakenTime } from './taken-time';
 
 /**
- * Keeps an offered time for the customer while they decide. Only what is offered can be kept: a crew, day or
- * hour that was made up in the request is refused like one that somebody else just took.
+ * Keeps an offered time for the customer while they decide. Only what is offered can be kept: a day or hour
+ * that was made up in the request is refused like one that somebody else just took. Which crew comes is settled here.
  */
 export async function holdForCustomer(
   ctx: CustomerContext,
   input: HoldForCustomerInput,
 ): Promise<void> {
   const { times } = await offerTimes(ctx);
-  const isOffered = times.some(
-    ({ crewId, date, time }) =>
-      crewId === input.crewId && date === input.date && time === input.time,
-  );
-  if (!isOffered) throw justTaken();
+  const offered = times.find(({ date, time }) => date === input.date && time === input.time);
+  if (!offered) throw justTaken();
   const [visit] = await ctx.db
     .select({ jobId: visits.jobId, kind: visits.kind, workMinutes: visits.workMinutes })
     .from(visits)
@@ -32,7 +29,13 @@ export async function holdForCustomer(
       writeHold(
         tx,
         ctx,
-        { ...visit, ...input, forVisitId: ctx.actor.visitId, overrideReason: '' },
+        {
+          ...visit,
+          ...input,
+          crewId: offered.crewId,
+          forVisitId: ctx.actor.visitId,
+          overrideReason: '',
+        },
         (planned) => {
           attempt = planned;
         },

@@ -7,6 +7,7 @@ import { visitInWords } from '@/lib/messages/visit-words';
 import { formatDay, formatDayShort, formatTime, formatWindow } from '@/lib/time/format-instant';
 import type { TextLocale } from '@/lib/time/text-locale';
 import type { Context } from '@/server/base/context';
+import { toldWindow } from './moves-together';
 import type { CustomerVisit } from './read-customer-visit';
 import { shopPhoneWords } from './shop-phone';
 
@@ -19,15 +20,13 @@ export function valuesOf(
     names: string[];
     link: string | null;
     choices: string;
+    moves: string;
   },
 ): FieldValues {
-  const { cause, locale, names, link, choices } = known;
+  const { cause, locale, names, link, choices, moves } = known;
   const { zone } = visit;
   const now = { from: visit.windowStartsAt, until: visit.windowEndsAt };
-  const told = {
-    from: cause.toldFrom ? new Date(cause.toldFrom) : now.from,
-    until: cause.toldUntil ? new Date(cause.toldUntil) : now.until,
-  };
+  const told = toldWindow(visit, cause);
   // A visit that is called off is named by the day that the customer was told last.
   const day = visit.status === 'called-off' ? told.from : now.from;
   return {
@@ -44,6 +43,7 @@ export function valuesOf(
     reason: cause.reason ?? '',
     missing: cause.reason ?? visit.notReady,
     choices,
+    moves,
     ...lateValues(visit, locale),
     ...(link ? { link } : {}),
   };

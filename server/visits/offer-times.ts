@@ -6,6 +6,7 @@ import {
   type OfferedTimes,
   type OpeningWishes,
 } from '@/lib/contracts/openings';
+import { eachStartOnce } from '@/lib/schedule';
 import { addDays } from '@/lib/time/civil';
 import { formatDay, formatWindow } from '@/lib/time/format-instant';
 import { localDate } from '@/lib/time/local-moment';
@@ -18,8 +19,6 @@ import { type CustomerVisit, readCustomerVisit } from './read-customer-visit';
 
 /** A choice that fits on a phone; who finds nothing in it rings the shop. */
 const mostTimes = 6;
-/** Several crews may be free at one time; it is offered once. */
-const crewsAtOneTime = 4;
 /** The shop has to be ready, and the day before is told of the evening before. */
 const leastDaysAhead = 2;
 
@@ -36,26 +35,28 @@ export async function offerTimes(
     .where(and(eq(visits.shopId, ctx.shop.id), eq(visits.id, visit.id)));
   const [job] = record ? await readJobRecords(ctx.db, ctx, eq(jobs.id, record.jobId)) : [];
   if (!record || !job) throw notFound('visit');
-  const { openings } = await openingsOfJob(ctx, job, {
-    jobId: job.id,
-    kind: visit.kind,
-    visitId: visit.id,
-    workMinutes: record.workMinutes,
-    from: addDays(localDate(ctx.now, ctx.shop.zone), leastDaysAhead),
-    peopleNeeded: 1,
-    isGateOverridden: false,
-    wishes,
-    limit: mostTimes * crewsAtOneTime,
-  });
+  const hold = await heldFor(ctx, visit);
+  // Neither the time that they have nor the one that is kept for them is another time.
+  const known = [visit.windowStartsAt.toISOString(), hold?.startsAt];
+  const { openings } = await openingsOfJob(
+    ctx,
+    job,
+    {
+      jobId: job.id,
+      kind: visit.kind,
+      visitId: visit.id,
+      workMinutes: record.workMinutes,
+      from: addDays(localDate(ctx.now, ctx.shop.zone), leastDaysAhead),
+      peopleNeeded: 1,
+      isGateOverridden: false,
+      wishes,
+      limit: mostTimes,
+    },
+    (found) =>
+      eachStartOnce(found.filter(({ startsAt }) => !known.includes(startsAt.toISOString()))),
+  );
   const times = openings
-    // The time that they have is no other time, and who comes makes no second one of it.
-    .filter(
-      ({ windowStartsAt }, index) =>
-        windowStartsAt !== visit.windowStartsAt.toISOString() &&
-        openings.findIndex((other) => other.windowStartsAt === windowStartsAt) === index,
-    )
-    .slice(0, mostTimes)
-    .sort((a, b) => a.startsAt.localeCompare(b.startsAt))
+    .toSorted((a, b) => a.startsAt.localeCompare(b.startsAt))
     .map(({ crewId, date, time, windowStartsAt, windowEndsAt }) => ({
       crewId,
       date,
@@ -65,7 +66,7 @@ export async function offerTimes(
         until: new Date(windowEndsAt),
       }),
     }));
-  return { times, hold: await heldFor(ctx, visit) };
+  return { times, hold };
 }
 
 /** What is kept for the customer just now; null when nothing is, or its quarter of an hour is over. */
@@ -89,6 +90,7 @@ async function heldFor(ctx: CustomerContext, visit: CustomerVisit): Promise<Cust
   if (!held?.holdEndsAt) return null;
   return {
     heldVisitId: held.id,
+    startsAt: held.from.toISOString(),
     holdEndsAt: held.holdEndsAt.toISOString(),
     ...windowWordsOf(ctx, visit, held),
   };

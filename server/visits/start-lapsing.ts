@@ -6,7 +6,8 @@ const tickMs = 10_000;
 
 /** Lets holds go when their quarter of an hour is over, so that the diaries show it; gives what stops it. */
 export function startLapsing(): () => Promise<void> {
-  return repeat('visits/start-lapsing', tickMs, async () =>
+  const lapsing = repeat('visits/start-lapsing', tickMs, async () =>
     lapseAllHolds((await database()).db, new Date()),
   );
+  return lapsing.stop;
 }

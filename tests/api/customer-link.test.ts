@@ -22,6 +22,7 @@ describe('what a customer’s link opens', () => {
   let shop: TestShop;
   let otherShop: TestShop;
   let crewId: string;
+  let otherCrewId: string;
   let mine: { id: string; token: string };
   let theirs: { id: string; token: string };
 
@@ -29,9 +30,9 @@ describe('what a customer’s link opens', () => {
     shop = await makeShop();
     otherShop = await makeShop();
     ({ crewId } = await makeCrew(shop));
-    const otherCrew = await makeCrew(otherShop);
+    ({ crewId: otherCrewId } = await makeCrew(otherShop));
     mine = await booked(shop, crewId, '2030-01-03');
-    theirs = await booked(otherShop, otherCrew.crewId, '2030-01-03');
+    theirs = await booked(otherShop, otherCrewId, '2030-01-03');
     const ended = await booked(shop, crewId, '2030-01-04');
     const revoked = await booked(shop, crewId, '2030-01-07');
     await changeLink(ended.id, { endsAt: new Date('2026-01-01T00:00:00Z') });
@@ -71,7 +72,7 @@ describe('what a customer’s link opens', () => {
   const time = { date: '2030-01-10', time: '09:00' };
   const doors = (): [string, RouteHandler, Record<string, string> | undefined][] => [
     ['answer', answerRoute, { answer: 'confirm' }],
-    ['hold', holdRoute, { crewId, ...time }],
+    ['hold', holdRoute, time],
     ['take', takeRoute, { heldVisitId: mine.id }],
     ['calendar', calendarRoute, undefined],
     ['copy', copyRoute, undefined],
@@ -102,17 +103,42 @@ describe('what a customer’s link opens', () => {
     expect(untouched).toMatchObject({ status: 'booked', version: 1 });
     const [confirmed] = await db.select().from(visits).where(eq(visits.id, theirs.id));
     expect(confirmed).toMatchObject({ status: 'confirmed' });
-    const times = await getCustomerTimes(theirs.token, 'here');
-    expect(times?.times.some((offered) => offered.crewId === crewId)).toBe(false);
   });
 
-  it('holds a time of another shop’s crew for nobody', async () => {
-    const times = await getCustomerTimes(mine.token, 'here');
+  it('keeps a time with a crew of its own shop, whatever crew the form names', async () => {
+    const times = await getCustomerTimes(theirs.token, 'here');
     const [offered] = times?.times ?? [];
     if (!offered) throw new Error('nothing was offered');
     const { date, time: at } = offered;
     const answer = await ask(holdRoute, theirs.token, { crewId, date, time: at });
-    expect(answer.location).toContain('taken=1');
-    expect((await getCustomerTimes(mine.token, 'here'))?.times).toContainEqual(offered);
+    expect(answer.location).not.toContain('taken=1');
+    const { db } = await database();
+    const held = await db.select().from(visits).where(eq(visits.heldForVisitId, theirs.id));
+    expect(held).toMatchObject([{ crewId: otherCrewId, shopId: otherShop.shop.id }]);
+  });
+
+  it('offers each time once, though two crews are free, and takes the one that still is', async () => {
+    const two = await makeShop();
+    const first = await makeCrew(two);
+    const second = await makeCrew(two, 'measure', [two.people.crew.personId]);
+    const visit = await booked(two, first.crewId, '2030-01-03');
+    const words = (await getCustomerTimes(visit.token, 'here'))?.times.map(
+      ({ dayWords, windowWords }) => `${dayWords} ${windowWords}`,
+    );
+    expect(words?.length).toBe(6);
+    expect(new Set(words).size).toBe(6);
+    const [offered] = (await getCustomerTimes(visit.token, 'here'))?.times ?? [];
+    if (!offered) throw new Error('nothing was offered');
+    const { jobId } = await startTestJob(two);
+    await bookTestVisit(two, { jobId, crewId: first.crewId, ...offered });
+    await ask(holdRoute, visit.token, { date: offered.date, time: offered.time });
+    const { db } = await database();
+    const held = await db.select().from(visits).where(eq(visits.heldForVisitId, visit.id));
+    expect(held).toMatchObject([{ crewId: second.crewId }]);
+    const after = await getCustomerTimes(visit.token, 'here');
+    expect(after?.hold?.dayWords).toBe(offered.dayWords);
+    expect(
+      after?.times.map(({ dayWords, windowWords }) => [dayWords, windowWords]),
+    ).not.toContainEqual([offered.dayWords, offered.windowWords]);
   });
 });

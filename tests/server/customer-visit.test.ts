@@ -184,8 +184,8 @@ describe('the customer’s page', () => {
     const before = await getCustomerTimes(token, 'here');
     const [first, second] = before?.times ?? [];
     if (!first || !second) throw new Error('nothing was offered');
-    const { crewId, date, time } = first;
-    const kept = await choose(holdRoute, token, { crewId, date, time });
+    const { date, time } = first;
+    const kept = await choose(holdRoute, token, { date, time });
     expect(kept.headers.get('location')).toBe(`/v/${token}/times`);
     const held = await getCustomerTimes(token, 'here');
     expect(held?.hold).toMatchObject({ dayWords: first.dayWords, windowWords: first.windowWords });
@@ -209,15 +209,15 @@ describe('the customer’s page', () => {
     const [offered] = times?.times ?? [];
     if (!offered) throw new Error('nothing was offered');
     const { date, time } = offered;
-    const made = await choose(holdRoute, mine.token, { crewId, date, time: '03:17' });
+    const made = await choose(holdRoute, mine.token, { date, time: '03:17' });
     expect(made.headers.get('location')).toContain('taken=1');
-    await choose(holdRoute, theirs.token, { crewId, date, time });
+    await choose(holdRoute, theirs.token, { date, time });
     const hold = (await getCustomerTimes(theirs.token, 'here'))?.hold;
     if (!hold) throw new Error('nothing was kept');
     const stolen = await choose(takeRoute, mine.token, { heldVisitId: hold.heldVisitId });
     expect(stolen.headers.get('location')).toContain('taken=1');
     expect(await stateOf(mine.visit)).toMatchObject({ status: 'booked', version: 1 });
-    const guessed = await choose(holdRoute, newLinkToken(), { crewId, date, time });
+    const guessed = await choose(holdRoute, newLinkToken(), { date, time });
     expect([guessed.status, guessed.headers.get('location')?.startsWith('/v/')]).toEqual([
       303,
       true,

@@ -58,6 +58,20 @@ export function findOpenings(input: OpeningsInput): FoundOpening[] {
   return found.sort((a, b) => a.score - b.score || a.startsAt.getTime() - b.startsAt.getTime());
 }
 
+/**
+ * Each start once, with the crew for which it is least trouble: who comes makes no second time of it for a
+ * customer. Example: two crews free on Monday at 8:00, of 20 and of 35 minutes' trouble: the one of 20.
+ */
+export function eachStartOnce(found: readonly FoundOpening[]): FoundOpening[] {
+  const best = new Map<number, FoundOpening>();
+  for (const opening of found) {
+    const startMs = opening.startsAt.getTime();
+    const known = best.get(startMs);
+    if (!known || opening.score < known.score) best.set(startMs, opening);
+  }
+  return found.filter((opening) => best.get(opening.startsAt.getTime()) === opening);
+}
+
 /** The best few, but not all on one day: somebody on the phone wants a choice. */
 export function variedOpenings(found: readonly FoundOpening[], limit: number): FoundOpening[] {
   const mostADay = Math.ceil(limit / 3);

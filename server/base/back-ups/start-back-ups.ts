@@ -8,8 +8,9 @@ const everyMs = 3_600_000;
 /** A copy an hour while the program runs. A database server is backed up with its own tools. */
 export function startBackUps(database: OpenDatabase, places: BackUpPlaces): () => Promise<void> {
   if (database.kind === 'server') return async () => {};
-  return repeat('back-ups', everyMs, async () => {
+  const copies = repeat('back-ups', everyMs, async () => {
     await writeBackUp(database, places, new Date());
     log('backed up');
   });
+  return copies.stop;
 }

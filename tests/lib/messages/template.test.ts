@@ -221,6 +221,9 @@ test('a visit is named as the region names it', () => {
   expect(visitInWords('worktop-template', { language: 'en', region: 'UK' })).toBe(
     'worktop template',
   );
+  expect(visitInWords('worktop-template', { language: 'en', region: 'AU' })).toBe(
+    'benchtop template',
+  );
   expect(visitInWords('worktop-template', { language: 'es', region: 'US' })).toBe(
     'plantilla de la cubierta',
   );

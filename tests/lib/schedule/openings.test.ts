@@ -4,6 +4,7 @@ import { noWishes } from '@/lib/contracts/openings';
 import {
   type BusyPiece,
   crewCalendar,
+  eachStartOnce,
   findOpenings,
   type OpeningCrew,
   type OpeningsInput,
@@ -153,6 +154,22 @@ describe('times that work', () => {
     expect(found).toHaveLength(20);
     expect([chosen.length, days.size]).toEqual([6, 3]);
     expect(chosen[0]).toEqual(found[0]);
+  });
+
+  test('a time that several crews could keep is one time, with the crew it suits best', () => {
+    const far = { ...crewOf({ id: 'far' }), base: 1 };
+    const found = findOpenings(
+      asked({ crews: [far, crewOf({ id: 'near' })], until: '2026-05-15' }),
+    );
+    const once = eachStartOnce(found);
+    const times = found.map(({ startsAt }) => startsAt.toISOString());
+    expect(once.map(({ startsAt }) => startsAt.toISOString()).toSorted()).toEqual(
+      [...new Set(times)].toSorted(),
+    );
+    for (const { startsAt, score } of once) {
+      const same = found.filter((other) => +other.startsAt === +startsAt);
+      expect(score).toBe(Math.min(...same.map((other) => other.score)));
+    }
   });
 });
 
