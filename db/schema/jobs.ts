@@ -12,6 +12,7 @@ import {
   unique,
   uuid,
 } from 'drizzle-orm/pg-core';
+import { stages } from '@/lib/schedule/stages';
 import { createdAt, instant, shopColumns } from './columns';
 import { people } from './shops';
 
@@ -118,20 +119,6 @@ export const sites = pgTable(
   ],
 );
 
-export const jobStages = [
-  'enquiry',
-  'to-measure',
-  'measured',
-  'released',
-  'in-build',
-  'ready',
-  'installing',
-  'snags',
-  'signed-off',
-  'on-hold',
-  'called-off',
-] as const;
-
 export const jobs = pgTable(
   'jobs',
   {
@@ -140,7 +127,7 @@ export const jobs = pgTable(
     title: text('title').notNull(),
     customerId: uuid('customer_id').notNull(),
     siteId: uuid('site_id').notNull(),
-    stage: text('stage', { enum: jobStages }).notNull().default('enquiry'),
+    stage: text('stage', { enum: stages }).notNull().default('enquiry'),
     /** Gates of the order of work. */
     wallsReady: text('walls_ready', { enum: ['not-yet', 'bare-studs', 'closed'] })
       .notNull()

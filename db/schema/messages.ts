@@ -9,21 +9,11 @@ import {
   unique,
   uuid,
 } from 'drizzle-orm/pg-core';
-import type { MessageCause } from '@/lib/contracts/messages';
+import { type MessageCause, messageStates, schedulerItemKinds } from '@/lib/contracts/messages';
 import { createdAt, instant, shopColumns } from './columns';
 import { customers, jobs } from './jobs';
 import { people } from './shops';
 import { visits } from './visits';
-
-export const messageStates = [
-  'waiting',
-  'sending',
-  'sent',
-  'delivered',
-  'refused',
-  'withdrawn',
-  'received',
-] as const;
 
 /** The outbox: written only in the transaction of its cause, rendered from the visit as it is when sent. */
 export const messages = pgTable(
@@ -133,20 +123,6 @@ export const messageSettings = pgTable(
   },
   (table) => [unique('message_settings_one').on(table.shopId)],
 );
-
-export const schedulerItemKinds = [
-  'unclear-reply',
-  'asks-other-time',
-  'call-me',
-  'not-ready',
-  'time-taken',
-  'no-answer',
-  'not-delivered',
-  'said-stop',
-  'running-late',
-  'nobody-home',
-  'cabinets-late',
-] as const;
 
 /** The scheduler's list: what a person of the office has to look at, until it is ticked off. */
 export const schedulerItems = pgTable(

@@ -9,29 +9,11 @@ import {
   unique,
   uuid,
 } from 'drizzle-orm/pg-core';
+import { visitStatuses } from '@/lib/contracts/visits';
+import { visitKinds } from '@/lib/schedule/visit-kind';
 import { createdAt, instant, instantRange, shopColumns } from './columns';
 import { jobs } from './jobs';
 import { crews, people } from './shops';
-
-export const visitKinds = [
-  'site-measure',
-  'check-measure',
-  'delivery',
-  'install',
-  'worktop-template',
-  'return',
-] as const;
-
-export const visitStatuses = [
-  'held',
-  'booked',
-  'confirmed',
-  'on-the-way',
-  'on-site',
-  'done',
-  'missed',
-  'called-off',
-] as const;
 
 export const visits = pgTable(
   'visits',

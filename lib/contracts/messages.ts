@@ -17,13 +17,24 @@ export type MessageCause = {
   subject?: string;
 };
 
+export const messageStates = [
+  'waiting',
+  'sending',
+  'sent',
+  'delivered',
+  'refused',
+  'withdrawn',
+  'received',
+] as const;
+export const messageState = z.enum(messageStates);
+
 export const messageView = z.object({
   id,
   jobId: id.nullable(),
   customerName: z.string(),
   occasion: z.string(),
   channel: z.enum(['sms', 'email']),
-  state: z.enum(['waiting', 'sending', 'sent', 'delivered', 'refused', 'withdrawn', 'received']),
+  state: messageState,
   dueAtWords: z.string(),
   reason: z.string(),
   body: z.string(),
@@ -33,7 +44,7 @@ export const messageView = z.object({
 });
 export type MessageView = z.infer<typeof messageView>;
 
-export const schedulerItemKind = z.enum([
+export const schedulerItemKinds = [
   'unclear-reply',
   'asks-other-time',
   'call-me',
@@ -45,7 +56,8 @@ export const schedulerItemKind = z.enum([
   'running-late',
   'nobody-home',
   'cabinets-late',
-]);
+] as const;
+export const schedulerItemKind = z.enum(schedulerItemKinds);
 export type SchedulerItemKind = z.infer<typeof schedulerItemKind>;
 
 /** One thing for the office to look at. */

@@ -2,13 +2,14 @@
 import { z } from 'zod';
 import { missingThings } from '@/lib/messages/missing-words';
 import { visitKind } from '@/lib/schedule/visit-kind';
+import type { CrewSnag } from './snags';
 
 const id = z.uuid();
 /** A local day and time in the shop's zone; the server makes the instant of it. */
 const localDate = z.iso.date();
 const localTime = z.string().regex(/^([01]\d|2[0-3]):[0-5]\d$/, 'Write the time as 07:30.');
 
-export const visitStatus = z.enum([
+export const visitStatuses = [
   'held',
   'booked',
   'confirmed',
@@ -17,7 +18,8 @@ export const visitStatus = z.enum([
   'done',
   'missed',
   'called-off',
-]);
+] as const;
+export const visitStatus = z.enum(visitStatuses);
 export type VisitStatus = z.infer<typeof visitStatus>;
 
 export const crewView = z.object({
@@ -170,12 +172,13 @@ export const todayVisit = visitView.extend({
 });
 export type TodayVisit = z.infer<typeof todayVisit>;
 
-export const todayView = z.object({
-  date: localDate,
-  dayWords: z.string(),
-  visits: z.array(todayVisit),
-});
-export type TodayView = z.infer<typeof todayView>;
+export type TodayView = {
+  date: string;
+  dayWords: string;
+  visits: TodayVisit[];
+  /** What the crew has to mend, whichever day it goes there again. */
+  snags: CrewSnag[];
+};
 
 /** What the customer's page shows; only this visit, nothing else of the shop. */
 export const customerVisitView = z.object({
