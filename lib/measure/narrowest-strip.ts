@@ -60,9 +60,16 @@ function widestOf<P extends HullPoint>(points: P[]) {
   return { upper, lower, atMm, width };
 }
 
+/** On the way through many strips nothing is made but the number. */
 function heightAt(hull: HullPoint[], at: number): number {
-  const edge = bracket(hull, positionOf, at);
-  return edge === null ? Number.NaN : edge.from.s + edge.share * (edge.to.s - edge.from.s);
+  for (let i = 0; i < hull.length; i++) {
+    const to = hull[i];
+    if (!to || to.at < at) continue;
+    const from = hull[i - 1];
+    if (to.at === at) return to.s;
+    return from ? from.s + ((at - from.at) / (to.at - from.at)) * (to.s - from.s) : Number.NaN;
+  }
+  return Number.NaN;
 }
 
 function placeAt(hull: StripPoint[], at: number): Combination {
