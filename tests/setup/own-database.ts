@@ -1,6 +1,7 @@
 import { mkdtempSync, readFileSync, rmSync } from 'node:fs';
 import os from 'node:os';
 import path from 'node:path';
+import { sql } from 'drizzle-orm';
 import { Client } from 'pg';
 import { afterAll, inject } from 'vitest';
 import type { OpenDatabase } from '@/db/database';
@@ -8,10 +9,20 @@ import { openInMemory } from '@/db/open-embedded';
 import { openServer } from '@/db/open-server';
 import { setDatabase } from '@/server/base/database';
 
+// What the program holds for its process: each file begins as a program that has just started.
+for (const name of Object.keys(globalThis)) {
+  if (/^(__)?setwell/.test(name)) Reflect.deleteProperty(globalThis, name);
+}
+
 const dataFolder = mkdtempSync(path.join(os.tmpdir(), 'setwell-test-'));
 process.env.SETWELL_DATA = dataFolder;
 process.env.PUBLIC_URL = 'http://localhost:3000';
 process.env.BETTER_AUTH_SECRET = 'only-for-tests-only-for-tests';
+
+const emptyAllTables = sql`DO $$ BEGIN EXECUTE (
+  SELECT 'TRUNCATE ' || string_agg(format('%I', tablename), ', ') || ' CASCADE'
+  FROM pg_tables WHERE schemaname = 'public'
+); END $$`;
 
 const serverUrl = inject('serverUrl');
 const name = `setwell_test_${process.pid}_${Math.floor(performance.now() * 1000)}`;
@@ -24,10 +35,17 @@ afterAll(async () => {
   rmSync(dataFolder, { recursive: true, force: true });
 });
 
+/** One a worker, emptied for each file: to start one takes longer than most files. */
 async function openOwnEmbedded(): Promise<OpenDatabase> {
-  const dump = inject('templateDump');
-  if (!dump) throw new Error('the template was not made');
-  return openInMemory(new Blob([readFileSync(dump)]));
+  const worker = globalThis as typeof globalThis & { ownEmbedded?: OpenDatabase };
+  if (worker.ownEmbedded) {
+    await worker.ownEmbedded.db.execute(emptyAllTables);
+  } else {
+    const dump = inject('templateDump');
+    if (!dump) throw new Error('the template was not made');
+    worker.ownEmbedded = await openInMemory(new Blob([readFileSync(dump)]));
+  }
+  return { ...worker.ownEmbedded, close: async () => {} };
 }
 
 async function openOwnOnServer(url: string): Promise<OpenDatabase> {
