@@ -9,6 +9,7 @@ import { demoJobs } from './demo-jobs';
 import { seedJob } from './seed-job';
 import { seedMessages } from './seed-messages';
 import { seedSignIn } from './seed-sign-in';
+import type { DemoSignature } from './seed-sign-off';
 import { seededRandom } from './seeded-random';
 import { type CrewKey, crewsOfTheShop, juniperBend, type StaffKey, staff } from './staff';
 
@@ -18,8 +19,11 @@ export type SeedOptions = {
   hashPassword: (password: string) => Promise<string>;
   /** The customer's link of a visit: its token needs the signing secret. */
   linkVisit: LinkVisit;
+  /** What a customer signed, kept by the program's own verb: its seal needs the signing secret. */
+  signOff: KeepSignOff;
 };
 
+type KeepSignOff = (tx: Transaction, signature: DemoSignature) => Promise<void>;
 type LinkVisit = (
   tx: Transaction,
   visit: { shopId: string; visitId: string; endsAt: Date },
@@ -46,7 +50,9 @@ export type SeedShop = {
   crews: Record<CrewKey, { id: string; personIds: string[] }>;
   tools: { tape: Tool; level: Tool };
   now: Date;
+  name: string;
   linkVisit: LinkVisit;
+  signOff: KeepSignOff;
   random: () => number;
 };
 
@@ -60,7 +66,7 @@ async function seedJuniperBend(tx: Transaction, options: SeedOptions, passwordHa
 export async function seedWorkingShop(
   tx: Transaction,
   row: Omit<typeof shops.$inferInsert, 'nextJobNumber'>,
-  { now, linkVisit }: Omit<SeedOptions, 'hashPassword'>,
+  { now, linkVisit, signOff }: Omit<SeedOptions, 'hashPassword'>,
   seedPeople: (shopId: string) => Promise<Record<StaffKey, string>>,
 ): Promise<void> {
   const { id, zone } = row;
@@ -71,7 +77,9 @@ export async function seedWorkingShop(
     zone,
     rules,
     now,
+    name: row.name,
     linkVisit,
+    signOff,
     random: seededRandom(20_26),
     staff: await seedPeople(id),
     crews: {} as SeedShop['crews'],

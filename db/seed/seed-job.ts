@@ -5,6 +5,7 @@ import type { DemoJob } from './demo-jobs';
 import { fictionPhone } from './phones';
 import type { SeedShop } from './seed-demo';
 import { seedRoom } from './seed-room';
+import { seedSignOff } from './seed-sign-off';
 import { seedSnag } from './seed-snag';
 import { type StoryLine, seedStory } from './seed-story';
 import { seedVisit } from './seed-visit';
@@ -89,6 +90,7 @@ export async function seedJob(tx: Transaction, shop: SeedShop, { job, number, pl
   for (const snag of job.snags ?? []) story.push(...(await seedSnag(tx, shop, { jobId, snag })));
   if (job.room) story.push(...(await seedRoom(tx, shop, { jobId, job, plan: job.room })));
   await seedStory(tx, { shopId: shop.id, jobId, now: shop.now }, story);
+  await seedSignOff(tx, shop, { jobId, job });
 }
 
 const earliestDay = (job: DemoJob) => Math.min(0, ...(job.visits ?? []).map(({ day }) => day));

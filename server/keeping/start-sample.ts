@@ -5,6 +5,7 @@ import { seedSample } from '@/db/seed/seed-sample';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { Refusal } from '@/server/base/problem-response';
+import { keepDemoSignOff } from '@/server/snags/keep-demo-sign-off';
 import { makeVisitLink } from '@/server/visits/visit-link';
 
 /** A shop in the middle of its work, beside one's own: nobody is told anything from it. One at a time. */
@@ -35,6 +36,7 @@ export async function startSample(ctx: PersonContext): Promise<{ shopId: string 
         now,
         linkVisit: (inner, { shopId: id, ...visit }) =>
           makeVisitLink(inner, { shop: { id } }, visit),
+        signOff: keepDemoSignOff,
       },
     );
     await writeAudit(tx, ctx, {

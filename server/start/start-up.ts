@@ -10,6 +10,7 @@ import { startWorker } from '@/server/messages/worker';
 import { hashPassword } from '@/server/people/sign-in';
 import { getPorts } from '@/server/ports/choose-ports';
 import { sendDeliveries } from '@/server/programs/send-deliveries';
+import { keepDemoSignOff } from '@/server/snags/keep-demo-sign-off';
 import { signedCopyOf } from '@/server/snags/tell-signed';
 import { composeWithCopy } from '@/server/visits/compose-message';
 import { noticeSilence } from '@/server/visits/notice-silence';
@@ -32,6 +33,7 @@ export async function startUp(): Promise<void> {
       now: new Date(),
       hashPassword,
       linkVisit: (tx, { shopId, ...visit }) => makeVisitLink(tx, { shop: { id: shopId } }, visit),
+      signOff: keepDemoSignOff,
     });
   }
   const stopWorker = startWorker(composeWithCopy(signedCopyOf), [noticeSilence]);

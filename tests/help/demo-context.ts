@@ -3,6 +3,7 @@ import { people, shops } from '@/db/schema';
 import { seedDemo } from '@/db/seed/seed-demo';
 import type { PersonContext } from '@/server/base/context';
 import { database } from '@/server/base/database';
+import { keepDemoSignOff } from '@/server/snags/keep-demo-sign-off';
 import { makeVisitLink } from '@/server/visits/visit-link';
 
 /** The demo's shop, seeded at an instant, seen by its owner. */
@@ -12,6 +13,7 @@ export async function demoContext(now: Date): Promise<PersonContext> {
     now,
     hashPassword: async (password) => `hash of ${password}`,
     linkVisit: (tx, { shopId, ...visit }) => makeVisitLink(tx, { shop: { id: shopId } }, visit),
+    signOff: keepDemoSignOff,
   });
   const [found] = await db
     .select()

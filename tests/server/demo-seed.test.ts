@@ -1,6 +1,6 @@
 import { and, count, eq, ne } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
-import { audit, jobs, people, rooms, shops, visits } from '@/db/schema';
+import { audit, jobs, messages, people, rooms, shops, visits } from '@/db/schema';
 import { seedDemo } from '@/db/seed/seed-demo';
 import { stages } from '@/lib/schedule/stages';
 import { localDate } from '@/lib/time/local-moment';
@@ -11,6 +11,9 @@ import { log } from '@/server/base/log';
 import { getJob } from '@/server/jobs/get-job';
 import { listJobs } from '@/server/jobs/list-jobs';
 import { getFit } from '@/server/sheets/get-fit';
+import { getSignOffCopy } from '@/server/snags/get-sign-off-copy';
+import { keepDemoSignOff } from '@/server/snags/keep-demo-sign-off';
+import { listSignOffs } from '@/server/snags/list-sign-offs';
 import { getWaitingList } from '@/server/visits/get-waiting-list';
 import { makeVisitLink } from '@/server/visits/visit-link';
 
@@ -24,6 +27,7 @@ describe('the demo’s shop, seeded on a Saturday evening', () => {
       now,
       hashPassword: async (password) => `hash of ${password}`,
       linkVisit: (tx, { shopId, ...visit }) => makeVisitLink(tx, { shop: { id: shopId } }, visit),
+      signOff: keepDemoSignOff,
     });
 
   beforeAll(async () => {
@@ -123,6 +127,23 @@ describe('the demo’s shop, seeded on a Saturday evening', () => {
       'Job 2425 started from a call',
     ]);
     expect(story.every(({ at }) => new Date(at) <= now)).toBe(true);
+  });
+
+  it('has signatures with their strokes under a seal that holds, told to nobody now', async () => {
+    const jobId = await jobIdOf('Mae Bright');
+    const [record, ...more] = await listSignOffs(ctx, { jobId });
+    expect(more).toEqual([]);
+    expect(record).toMatchObject({ name: 'Mae Bright', isUntouched: true, snags: [] });
+    expect(record?.strokes.length).toBeGreaterThan(1);
+    const copy = await getSignOffCopy(ctx, { signOffId: record?.id ?? '' });
+    expect(copy.bytes).toBeGreaterThan(2_000);
+    const { story, stage } = await getJob(ctx, { jobId });
+    expect(stage).toBe('signed-off');
+    expect(story[0]?.summary).toBe('Signed by Mae Bright, no snag open');
+    const [open] = await listSignOffs(ctx, { jobId: await jobIdOf('Ivo Merrow') });
+    expect(open?.snags).toHaveLength(2);
+    const waiting = await ctx.db.select().from(messages).where(eq(messages.occasion, 'done'));
+    expect(waiting).toEqual([]);
   });
 
   it('has a second shop that sees nothing of the first', async () => {
