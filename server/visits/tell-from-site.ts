@@ -2,6 +2,7 @@
 import { and, eq, ne } from 'drizzle-orm';
 import type { Transaction } from '@/db/database';
 import { messages } from '@/db/schema';
+import type { Channel } from '@/lib/messages/consent';
 import type { Occasion } from '@/lib/messages/occasions';
 import type { Context } from '@/server/base/context';
 import { withdrawWaiting } from '@/server/messages/withdraw';
@@ -33,24 +34,28 @@ export async function tellMissed(tx: Transaction, ctx: Context, visit: ToldVisit
 }
 
 /**
- * Told once: when the crew is done, or with the copy of what was signed. Signed first, the tap tells
- * nothing more; signed after it, the copy goes out by itself.
+ * The end of each visit is told once: when the crew is done, or with the copy of what was signed. Signed
+ * first, the tap tells nothing more. Signed after a text has gone, no second text follows, since the page it
+ * leads to shows the copy too; the e-mail with the copy goes out by itself. Two jobs of one customer end twice.
  */
 export async function tellDone(tx: Transaction, ctx: Context, visit: ToldVisit, isSigned: boolean) {
   const notAfter = after(ctx.now, doneDays * 86_400_000);
-  if (!isSigned && (await isToldDone(tx, ctx, visit.id))) return [];
   if (isSigned) await withdraw(tx, ctx, visit, ['done'], 'The signed copy tells it.');
+  const told = await doneToldBy(tx, ctx, visit.id);
+  if (!isSigned && told.length > 0) return [];
+  const once = isSigned ? 'signed' : 'as it is';
+  const notes = onEachChannel('done', { dueAt: ctx.now, notAfter }, { once });
   return putNotes(
     tx,
     ctx,
     visit,
-    onEachChannel('done', { dueAt: ctx.now, notAfter }, { once: isSigned ? 'signed' : 'as it is' }),
+    notes.filter(({ channel }) => channel === 'email' || !told.includes(channel)),
   );
 }
 
-async function isToldDone(tx: Transaction, ctx: Context, visitId: string): Promise<boolean> {
-  const [told] = await tx
-    .select({ id: messages.id })
+async function doneToldBy(tx: Transaction, ctx: Context, visitId: string): Promise<Channel[]> {
+  const told = await tx
+    .select({ channel: messages.channel })
     .from(messages)
     .where(
       and(
@@ -59,9 +64,8 @@ async function isToldDone(tx: Transaction, ctx: Context, visitId: string): Promi
         eq(messages.occasion, 'done' satisfies Occasion),
         ne(messages.state, 'withdrawn'),
       ),
-    )
-    .limit(1);
-  return told !== undefined;
+    );
+  return told.map(({ channel }) => channel);
 }
 
 function tell(tx: Transaction, ctx: Context, visit: ToldVisit, occasion: Occasion, notAfter: Date) {
