@@ -56,15 +56,16 @@ export function DiaryHead({
             ))}
           </fieldset>
           {shown.view === 'crews' ? <WeeksChoice shown={shown} onShow={onShow} /> : null}
-          <Button
-            look="plain"
-            aria-pressed={!shown.isListFolded}
-            onClick={() => onShow({ isListFolded: !shown.isListFolded })}
-            keyName="R"
-            className="px-2.5 max-lg:hidden"
-          >
-            {shown.isListFolded ? 'waiting list' : 'more room'}
-          </Button>
+          {shown.isListFolded ? (
+            <Button
+              look="plain"
+              onClick={() => onShow({ isListFolded: false })}
+              keyName="R"
+              className="px-2.5 max-lg:hidden"
+            >
+              waiting list
+            </Button>
+          ) : null}
         </div>
       }
     />

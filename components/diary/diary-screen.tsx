@@ -172,6 +172,7 @@ export function DiaryScreen(props: DiaryScreenProps) {
             mayBook={mayBook}
             isCalendarShown={shown.view !== 'crews' && shown.view !== 'list'}
             onTimes={openTimes}
+            onFold={() => show({ isListFolded: true })}
             onFound={(visit) => {
               range.goTo(localStart(visit.startsAt, zone).date);
               setOpenedId(visit.id);

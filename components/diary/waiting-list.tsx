@@ -2,6 +2,7 @@
 
 import { Draggable } from '@fullcalendar/interaction';
 import { useEffect, useRef } from 'react';
+import { Button } from '@/components/ui/button';
 import { EmptyState } from '@/components/ui/empty-state';
 import { ErrorState } from '@/components/ui/error-state';
 import { controlLook } from '@/components/ui/field-frame';
@@ -20,6 +21,7 @@ export function WaitingList({
   isCalendarShown,
   onTimes,
   onFound,
+  onFold,
 }: {
   waiting: Waiting;
   mayBook: boolean;
@@ -28,6 +30,7 @@ export function WaitingList({
   onTimes: (item: WaitingItem) => void;
   /** A visit that is booked already was looked for by what is typed. */
   onFound: (visit: VisitView) => void;
+  onFold: () => void;
 }) {
   const { all, shown, typed, setTyped, error, isPending } = waiting;
   const listRef = useRef<HTMLUListElement>(null);
@@ -49,7 +52,24 @@ export function WaitingList({
 
   return (
     <section aria-labelledby="waiting-title" className="flex min-h-0 flex-1 flex-col">
-      <TitleBlock id="waiting-title" title="Waiting to be booked" meta={all?.length} />
+      <TitleBlock
+        id="waiting-title"
+        title="Waiting to be booked"
+        meta={
+          <span className="flex items-baseline gap-2">
+            {all?.length}
+            <Button
+              look="plain"
+              onClick={onFold}
+              keyName="R"
+              aria-label="Fold the waiting list away"
+              className="-my-2 -mr-3 px-1.5 max-lg:hidden"
+            >
+              fold
+            </Button>
+          </span>
+        }
+      />
       {error ? (
         <ErrorState title="The waiting list could not be fetched">
           The diary is still here. It is tried again by itself.

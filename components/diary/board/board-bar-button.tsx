@@ -11,7 +11,8 @@ import type { BoardBar } from './board-bars';
 
 /**
  * A visit on the board. Its right edge stretches it; keys do both as well. How much it says goes by its own
- * width (crew-board.css): the whole, the name and the time, or the last name under the two glyphs.
+ * width (crew-board.css): the whole, the name and the time, or the last name under the two glyphs. The name is
+ * what is looked for, so it gives way last.
  */
 export function BoardBarButton({
   bar,
@@ -63,12 +64,12 @@ export function BoardBarButton({
       <span className="board-bar-line board-who">
         <KindMark kind={visit.kind} isNamed />{' '}
         {isGhost ? null : <Glyph name={verdict} className="board-status" />}
-        <span className="board-time">{time}</span>{' '}
         <b>
           <span className="board-first">{first} </span>
           {last}
         </b>
-        <span className="board-more">, {visit.street}</span>
+        <span className="board-more">, {visit.street}</span>{' '}
+        <span className="board-time">{time}</span>
       </span>
       {isShort ? null : (
         <span className="board-bar-line board-detail">
