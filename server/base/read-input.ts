@@ -20,13 +20,20 @@ export function understood<S extends z.ZodType>(schema: S, value: unknown): z.ou
   const parsed = schema.safeParse(value);
   if (parsed.success) return parsed.data;
   const errors: Record<string, string> = {};
-  for (const issue of parsed.error.issues) errors[issue.path.join('.')] ??= issue.message;
+  for (const issue of parsed.error.issues) errors[issue.path.join('.')] ??= issueWords(issue);
   throw new Refusal({
     status: 422,
     code: 'not-understood',
     message: 'Something in what was sent is not as it should be. Nothing was changed.',
     errors,
   });
+}
+
+/** What a contract has no words for is said by the library in its own; of these a missing field is the usual one. */
+function issueWords(issue: z.core.$ZodIssue): string {
+  return issue.code === 'invalid_type' && issue.message.endsWith('received undefined')
+    ? 'Is missing.'
+    : issue.message;
 }
 
 async function readBody(request: Request): Promise<Record<string, unknown>> {

@@ -1,13 +1,17 @@
 import { z } from 'zod';
+import { benchSheet } from '@/lib/contracts/bench';
 import {
   changeJobInput,
   jobIdInput,
   jobRow,
   jobView,
   listJobsInput,
+  roomRow,
   sayReadyInput,
   startJobInput,
 } from '@/lib/contracts/jobs';
+import { listMessagesInput, messageView } from '@/lib/contracts/messages';
+import { numbersInput, numbersView } from '@/lib/contracts/numbers';
 import { findOpeningsInput, openingsView } from '@/lib/contracts/openings';
 import type { keyScopes } from '@/lib/contracts/programs';
 import {
@@ -195,5 +199,50 @@ export const operations: Operation[] = [
       date: '2027-01-14',
       time: '13:00',
     },
+  },
+  {
+    id: 'listRooms',
+    method: 'get',
+    path: '/api/rooms',
+    scope: 'walls:read',
+    summary: 'The rooms of a job: how far each is read, and the revision that the bench has.',
+    input: jobIdInput,
+    inPath: [],
+    answer: z.array(roomRow),
+    example: { jobId: exampleIds.jobId },
+  },
+  {
+    id: 'listBench',
+    method: 'get',
+    path: '/api/bench',
+    scope: 'sheets:read',
+    summary: 'The newest released sheet of each room that is to be built, first need first.',
+    input: z.object({}),
+    inPath: [],
+    answer: z.array(benchSheet),
+    example: {},
+  },
+  {
+    id: 'listMessages',
+    method: 'get',
+    path: '/api/messages',
+    scope: 'messages:read',
+    summary:
+      'What customers were told and what they said, newest first; of one job where it is named.',
+    input: listMessagesInput,
+    inPath: [],
+    answer: z.array(messageView),
+    example: { jobId: exampleIds.jobId },
+  },
+  {
+    id: 'getNumbers',
+    method: 'get',
+    path: '/api/numbers',
+    scope: 'numbers:read',
+    summary: 'The owner’s figures of the last so many days, each with the jobs behind it.',
+    input: numbersInput,
+    inPath: [],
+    answer: numbersView,
+    example: { days: '90' },
   },
 ];

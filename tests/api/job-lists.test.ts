@@ -254,7 +254,9 @@ describe('a list of customers and jobs', () => {
     expect(headers.get('content-disposition')).toContain('attachment');
     const rows = readStrictCsv(text.replace(/^\uFEFF/, ''));
     // A number stays a number; all else that a spreadsheet would run does not begin so.
-    for (const cell of rows.flat()) expect(cell).not.toMatch(/^(?!-?\d+$)[=+\-@\t\r]/);
+    for (const cell of rows.flat()) {
+      expect(cell).not.toMatch(/^(?![+-]?\d+(?:\.\d+)?$)[=+\-@\t\r]/);
+    }
 
     const second = await makeShop();
     const back = await cookieOf(second.people.owner);

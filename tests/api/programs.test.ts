@@ -4,20 +4,25 @@ import type { AddressInfo } from 'node:net';
 import { Validator } from '@seriousme/openapi-schema-validator';
 import { eq } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
+import { GET as benchRoute } from '@/app/api/bench/route';
 import { POST as readyRoute } from '@/app/api/jobs/[jobId]/ready/route';
 import { PATCH as changeJobRoute, GET as getJobRoute } from '@/app/api/jobs/[jobId]/route';
 import { GET as listJobsRoute, POST as startJobRoute } from '@/app/api/jobs/route';
+import { GET as messagesRoute } from '@/app/api/messages/route';
+import { GET as numbersRoute } from '@/app/api/numbers/route';
 import { GET as interfaceRoute } from '@/app/api/openapi.json/route';
 import { POST as openingsRoute } from '@/app/api/openings/route';
 import { DELETE as revokeRoute } from '@/app/api/programs/keys/[keyId]/route';
 import { POST as makeKeyRoute, GET as programsRoute } from '@/app/api/programs/keys/route';
 import { DELETE as stopRoute } from '@/app/api/programs/webhooks/[webhookId]/route';
 import { POST as addWebhookRoute } from '@/app/api/programs/webhooks/route';
+import { GET as roomsRoute } from '@/app/api/rooms/route';
 import { POST as callOffRoute } from '@/app/api/visits/[visitId]/call-off/route';
 import { GET as getVisitRoute, PATCH as moveVisitRoute } from '@/app/api/visits/[visitId]/route';
 import { POST as bookVisitRoute, GET as listVisitsRoute } from '@/app/api/visits/route';
 import { GET as waitingRoute } from '@/app/api/waiting/route';
 import { people, webhookDeliveries } from '@/db/schema';
+import { numbersView } from '@/lib/contracts/numbers';
 import type { AddedWebhook, MadeKey, ProgramsView } from '@/lib/contracts/programs';
 import { keyScopes, programEvents } from '@/lib/contracts/programs';
 import { database } from '@/server/base/database';
@@ -43,6 +48,10 @@ const routes: Record<string, RouteHandler> = {
   bookVisit: bookVisitRoute,
   moveVisit: moveVisitRoute,
   callOffVisit: callOffRoute,
+  listRooms: roomsRoute,
+  listBench: benchRoute,
+  listMessages: messagesRoute,
+  getNumbers: numbersRoute,
 };
 
 describe('a door for other programs', () => {
@@ -133,6 +142,10 @@ describe('a door for other programs', () => {
     const checked = await new Validator().validate(document);
     expect(checked).toMatchObject({ valid: true });
     expect(Object.keys(document.paths).length).toBeGreaterThan(7);
+    // What a key can be given is described somewhere, or nobody could use it.
+    expect([...new Set(operations.map(({ scope }) => scope))].sort()).toEqual(
+      [...keyScopes].sort(),
+    );
   });
 
   it('answers each example of its description, in the shape that is described', async () => {
@@ -143,6 +156,16 @@ describe('a door for other programs', () => {
       expect(operation.answer.safeParse(body).error).toBeUndefined();
     }
     expect(operations.map(({ id }) => id).sort()).toEqual(Object.keys(routes).sort());
+  });
+
+  it('gives the numbers to their owner, and no other shop’s', async () => {
+    const get = async (of: TestShop, role: 'owner' | 'scheduler') =>
+      callRoute(numbersRoute, { method: 'GET', cookie: await cookieOf(of.people[role]) });
+    expect((await get(shop, 'scheduler')).status).toBe(403);
+    const { status, body } = await get(otherShop, 'owner');
+    expect(status).toBe(200);
+    const { figures } = numbersView.parse(body);
+    expect(figures.flatMap(({ lines }) => lines)).toEqual([]);
   });
 
   async function ask({ id, method, inPath, example }: Operation, key: MadeKey) {

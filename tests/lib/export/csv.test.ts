@@ -16,13 +16,17 @@ describe('csvText', () => {
     );
   });
 
-  it.each(['=1+1', '+1', '-1', '@sum', '\tx', '\rx', '\nx', '＝1'])(
+  it.each(['=1+1', '+1+1', '-1+cmd', '-', '@sum', '\tx', '\rx', '\nx', '＝1'])(
     'keeps a spreadsheet from running %j',
     (words) => {
       const [[cell] = []] = readStrictCsv(withoutMark(csvText([[words]])));
       expect(cell).toBe(`'${words}`);
     },
   );
+
+  it.each(['+12125550143', '-58.3073'])('leaves %s as it is: it can only be a number', (words) => {
+    expect(withoutMark(csvText([[words]]))).toBe(`${words}\r\n`);
+  });
 
   it('writes numbers plainly, negative ones too, and nothing for what is no number', () => {
     const numbers = [-2.5, 1e-7, -1e-9, 63.50004, 1234567.8, Number.NaN, Number.POSITIVE_INFINITY];
@@ -40,7 +44,11 @@ describe('csvText', () => {
       fc.property(rows, (table) => {
         const back = readStrictCsv(withoutMark(csvText(table)));
         const guarded = table.map((row) =>
-          row.map((words) => (/^[=+\-@\t\r\n＝＋－＠]/.test(words) ? `'${words}` : words)),
+          row.map((words) =>
+            /^[=+\-@\t\r\n＝＋－＠]/.test(words) && !/^[+-]\d+(\.\d+)?$/.test(words)
+              ? `'${words}`
+              : words,
+          ),
         );
         expect(back).toEqual(guarded);
       }),
