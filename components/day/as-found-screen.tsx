@@ -1,6 +1,6 @@
 'use client';
 
-import { useState } from 'react';
+import { useMemo, useState } from 'react';
 import { InFractions } from '@/components/fit/in-fractions';
 import { newId } from '@/components/phone/new-id';
 import { Button } from '@/components/ui/button';
@@ -8,7 +8,7 @@ import { TextField } from '@/components/ui/text-field';
 import { Verdict } from '@/components/ui/verdict';
 import type { Reading } from '@/lib/contracts/readings';
 import type { SheetView } from '@/lib/contracts/rooms';
-import type { StopView } from '@/lib/contracts/stops';
+import type { StopAsFound, StopView } from '@/lib/contracts/stops';
 import { asFound } from '@/lib/days/as-found';
 import { type AsFoundAsk, asFoundAsks, asFoundReading } from '@/lib/days/as-found-asks';
 import { formatLength } from '@/lib/units/format-length';
@@ -70,7 +70,7 @@ function Asking({ stop, sheet }: { stop: StopView; sheet: SheetView }) {
   };
   return (
     <ScreenFrame title={words.asFound} meta={`${sheet.roomName}, ${sheet.release.revision}`}>
-      {last ? <Outcome found={last} /> : null}
+      {last ? <Outcome found={last} sheet={sheet} /> : null}
       <p>{words.asFoundLead}</p>
       {asks.map((ask) => (
         <TextField
@@ -97,8 +97,13 @@ function Asking({ stop, sheet }: { stop: StopView; sheet: SheetView }) {
   );
 }
 
-function Outcome({ found }: { found: StopView['asFound'][number] }) {
-  const { words } = useCrew();
+function Outcome({ found: told, sheet }: { found: StopAsFound; sheet: SheetView }) {
+  const { words, language, say } = useCrew();
+  // The office tells it in English; what an older sheet was held against stays as it was told.
+  const found = useMemo(
+    () => (told.releaseId === sheet.release.id ? asFound(sheet, told.readings, language) : told),
+    [told, sheet, language],
+  );
   if (found.disagreements.length === 0) {
     return <Verdict kind="within">{words.agrees}</Verdict>;
   }
@@ -118,7 +123,7 @@ function Outcome({ found }: { found: StopView['asFound'][number] }) {
           <ul className="list-disc pl-5">
             {found.changes.map((line) => (
               <li key={line}>
-                <InFractions words={line} />
+                <InFractions words={say(line)} />
               </li>
             ))}
           </ul>

@@ -4,6 +4,7 @@ import { InFractions } from '@/components/fit/in-fractions';
 import type { StopView } from '@/lib/contracts/stops';
 import { type BringItem, whatToBring } from '@/lib/days/what-to-bring';
 import { formatLength } from '@/lib/units/format-length';
+import { unitIn } from '@/lib/words/unit-names';
 import { type Crew, useCrew } from './crew-language';
 import { ScreenFrame } from './screen-frame';
 
@@ -20,7 +21,7 @@ export function BringScreen({ stop }: { stop: StopView }) {
       meta={stop.finish ? `${words.finish}: ${stop.finish}` : undefined}
     >
       <ul className="divide-y divide-rule border-b border-rule">
-        {whatToBring(stop.sheets).map((item) => (
+        {whatToBring(stop.sheets, (unit) => unitIn(unit, crew)).map((item) => (
           <li key={JSON.stringify(item)} className="py-3 text-lead">
             <InFractions words={crew.say(itemWords(item, crew, length))} />
           </li>

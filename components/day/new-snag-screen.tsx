@@ -36,7 +36,8 @@ type SnagDraft = {
 
 /** What is not right, or not there: with where it is, who mends it, by when, and photos with marks. */
 export function NewSnagScreen({ visit, stop, kind: asked }: NewSnagScreenProps) {
-  const { words } = useCrew();
+  const crew = useCrew();
+  const { words } = crew;
   const { tell, isFailed } = useTell(visit.id);
   const isPart = asked !== 'fault';
   const { draft, change, drop } = useKeptDraft<SnagDraft>(`snag:${visit.id}:${asked}`, {
@@ -52,7 +53,7 @@ export function NewSnagScreen({ visit, stop, kind: asked }: NewSnagScreenProps) 
   });
   const [isAskingWords, setIsAskingWords] = useState(false);
   if (!draft) return null;
-  const units = unitChoices(stop, draft.roomId);
+  const units = unitChoices(stop, draft.roomId, crew);
   const save = async () => {
     if (draft.words.trim() === '') return setIsAskingWords(true);
     const unit = units.find(({ id }) => id === draft.unitId);

@@ -3,16 +3,18 @@
 import { TitleBlock } from '@/components/ui/title-block';
 import type { Run } from '@/lib/contracts/runs';
 import { settingOrder } from '@/lib/days/setting-order';
+import { unitIn } from '@/lib/words/unit-names';
 import { useCrew } from './crew-language';
 
 /** What is set first, run by run. */
 export function SettingOrder({ runs }: { runs: readonly Run[] }) {
-  const { words, say } = useCrew();
+  const crew = useCrew();
+  const { words, say } = crew;
   return (
     <section>
       <TitleBlock title={words.order} />
       <ol className="list-decimal divide-y divide-rule border-b border-rule pl-7">
-        {settingOrder(runs).map((one) => (
+        {settingOrder(runs, (unit) => unitIn(unit, crew)).map((one) => (
           <li key={'runName' in one ? `${one.step} ${one.runName}` : one.step} className="py-2">
             {'runName' in one ? <b>{one.runName}. </b> : null}
             {say(words.steps[one.step])}

@@ -7,6 +7,7 @@ import type { StopView } from '@/lib/contracts/stops';
 import { drawElevation } from '@/lib/drawing/elevation';
 import { drawPlan } from '@/lib/drawing/plan';
 import { wallsOf } from '@/lib/sheet/room-names';
+import { drawingIn } from '@/lib/words/drawn-words';
 import { useCrew } from './crew-language';
 import { ScreenFrame } from './screen-frame';
 import { SettingCautions } from './setting-cautions';
@@ -15,14 +16,15 @@ import { SettingOrder } from './setting-order';
 
 /** The released fit for who sets by it: levels, order, drawings, what is cut on site, cautions. */
 export function SettingScreen({ stop, roomId }: { stop: StopView; roomId: string }) {
-  const { words } = useCrew();
+  const crew = useCrew();
+  const { words } = crew;
   const sheet = stop.sheets.find(({ wallBook }) => wallBook.room.id === roomId);
   if (!sheet) return <ScreenFrame title={words.setting}>{words.notKept}</ScreenFrame>;
   const { wallBook, runs, fit, rules } = sheet;
   const walls = wallsOf(wallBook.room).filter(({ wall }) =>
     runs.some(({ wallId }) => wallId === wall.id),
   );
-  const plan = drawPlan({ wallBook, runs, fit, rules });
+  const plan = drawingIn(drawPlan({ wallBook, runs, fit, rules }), crew);
   return (
     <ScreenFrame
       title={`${words.setting}: ${sheet.roomName}`}
@@ -51,7 +53,9 @@ export function SettingScreen({ stop, roomId }: { stop: StopView; roomId: string
                 />
               }
             />
-            {drawing ? <DrawingView drawing={drawing} title={words.wall(wall.name)} /> : null}
+            {drawing ? (
+              <DrawingView drawing={drawingIn(drawing, crew)} title={words.wall(wall.name)} />
+            ) : null}
           </section>
         );
       })}

@@ -1,13 +1,12 @@
 'use client';
 
-import { useState } from 'react';
+import { type ReactNode, useState } from 'react';
 import { TakePhoto } from '@/components/photos/take-photo';
 import { Button } from '@/components/ui/button';
 import { TextareaField } from '@/components/ui/textarea-field';
 import { TitleBlock } from '@/components/ui/title-block';
 import { Verdict } from '@/components/ui/verdict';
-import type { StopView } from '@/lib/contracts/stops';
-import type { TodayVisit } from '@/lib/contracts/visits';
+import type { SnagView } from '@/lib/contracts/snags';
 import { useCrew } from './crew-language';
 import { KeepFailed } from './keep-failed';
 import { ScreenFrame } from './screen-frame';
@@ -18,13 +17,19 @@ import { goToStop } from './stop-place';
 import { useKeptDraft } from './use-kept-draft';
 import { useTell } from './use-tell';
 
-type SnagScreenProps = { visit: TodayVisit; stop: StopView; snagId: string };
+type SnagScreenProps = {
+  /** Not there when it was never kept here, or is closed and gone from the list. */
+  snag: SnagView | undefined;
+  /** From which it is closed. */
+  visitId: string;
+  /** Where it is, when that is not plain from the screen before. */
+  lead?: ReactNode;
+};
 
 /** One snag: what it is, what the bench says, and how it is closed. */
-export function SnagScreen({ visit, stop, snagId }: SnagScreenProps) {
+export function SnagScreen({ snag, visitId, lead }: SnagScreenProps) {
   const crew = useCrew();
   const { words } = crew;
-  const snag = stop.snags.find(({ id }) => id === snagId);
   if (!snag) {
     return (
       <ScreenFrame title={words.snags} back={{ at: 'snags' }}>
@@ -34,6 +39,7 @@ export function SnagScreen({ visit, stop, snagId }: SnagScreenProps) {
   }
   return (
     <ScreenFrame title={snag.words} back={{ at: 'snags' }}>
+      {lead}
       <div>
         <p className="text-lead">{snagFacts(snag, crew)}</p>
         <p className="text-graphite">{snag.foundWords}</p>
@@ -55,17 +61,16 @@ export function SnagScreen({ visit, stop, snagId }: SnagScreenProps) {
           <SnagPhotos photoIds={snag.closedPhotoIds} />
         </section>
       ) : (
-        <Closing visit={visit} snagId={snagId} roomId={snag.roomId} />
+        <Closing visitId={visitId} snag={snag} />
       )}
     </ScreenFrame>
   );
 }
 
-type ClosingProps = { visit: TodayVisit; snagId: string; roomId: string | null };
-
-function Closing({ visit, snagId, roomId }: ClosingProps) {
+function Closing({ visitId, snag }: { visitId: string; snag: SnagView }) {
   const { words } = useCrew();
-  const { tell, isFailed } = useTell(visit.id);
+  const { id: snagId, roomId, jobId } = snag;
+  const { tell, isFailed } = useTell(visitId);
   const [isAsking, setIsAsking] = useState(false);
   const { draft, change, drop } = useKeptDraft<{ words: string; photoIds: string[] }>(
     `close:${snagId}`,
@@ -93,7 +98,7 @@ function Closing({ visit, snagId, roomId }: ClosingProps) {
       <SnagPhotos photoIds={draft.photoIds} />
       <TakePhoto
         roomId={roomId}
-        jobId={visit.jobId}
+        jobId={jobId}
         wallId={null}
         words={words.takePhoto}
         place={words.closed}

@@ -8,7 +8,6 @@ import { QueueStatus } from '@/components/phone/queue-status';
 import { readStop } from '@/components/phone/stop-store';
 import { useLive } from '@/components/phone/use-live';
 import { PhoneShell } from '@/components/shell/phone-shell';
-import { Skeleton, SkeletonScreen } from '@/components/ui/skeleton';
 import type { StopView } from '@/lib/contracts/stops';
 import type { TodayVisit } from '@/lib/contracts/visits';
 import { paths } from '@/lib/paths';
@@ -25,6 +24,7 @@ import {
   SnagScreen,
   SnagsScreen,
 } from './lazy-screens';
+import { OpeningStop } from './opening-stop';
 import { goToStop, type StopPlace, useStopPlace } from './stop-place';
 import { VisitScreen } from './visit-screen';
 
@@ -47,7 +47,7 @@ export function StopScreen({ visit, stop: fresh }: StopScreenProps) {
   const stop = (live.state === 'here' ? live.value : null) ?? fresh;
   return (
     <PhoneShell where={<Link href={paths.today()}>‹ {words.today}</Link>} status={<QueueStatus />}>
-      <Suspense fallback={<Opening />}>
+      <Suspense fallback={<OpeningStop />}>
         {stop === null || place.at === 'stop' ? (
           <VisitScreen visit={visit} stop={stop} />
         ) : (
@@ -80,23 +80,13 @@ function screenAt(
     case 'new-snag':
       return <NewSnagScreen key={place.kind} {...shown} kind={place.kind} />;
     case 'snag':
-      return <SnagScreen {...shown} snagId={place.snagId} />;
+      return (
+        <SnagScreen snag={stop.snags.find(({ id }) => id === place.snagId)} visitId={visit.id} />
+      );
     case 'photo': {
       const { kind, snagId } = place;
       const back = kind ? ({ at: 'new-snag', kind } as const) : ({ at: 'snag', snagId } as const);
       return <PhotoScreen photoId={place.photoId} figures={[]} onDone={() => goToStop(back)} />;
     }
   }
-}
-
-function Opening() {
-  return (
-    <SkeletonScreen what="the stop">
-      <div className="flex flex-col gap-3 p-3.5">
-        <Skeleton className="h-8 w-2/3" />
-        <Skeleton className="h-16 w-full" />
-        <Skeleton className="h-16 w-full" />
-      </div>
-    </SkeletonScreen>
-  );
 }

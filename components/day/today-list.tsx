@@ -55,7 +55,7 @@ function Drive({ visit, isFirst }: { visit: TodayVisit; isFirst: boolean }) {
 
 function Stop({ visit }: { visit: TodayVisit }) {
   const { zone } = useHolder();
-  const { language, words } = useCrew();
+  const { language, words, say } = useCrew();
   return (
     <Link
       href={paths.todayVisit(visit.id)}
@@ -69,7 +69,7 @@ function Stop({ visit }: { visit: TodayVisit }) {
           {visit.town ? `, ${visit.town}` : ''}
         </span>
         <span className="block text-note text-graphite">
-          {words.kinds[visit.kind]} · {visit.jobTitle}
+          {say(words.kinds[visit.kind])} · {visit.jobTitle}
         </span>
         <VisitState visit={visit} />
       </span>

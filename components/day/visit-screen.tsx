@@ -17,14 +17,14 @@ import { dayIn, windowIn } from './visit-times';
 /** One stop: when, where, how to get in, what to do there. */
 export function VisitScreen({ visit, stop }: { visit: TodayVisit; stop: StopView | null }) {
   const { mayReport, mayMeasure, zone } = useHolder();
-  const { language, words } = useCrew();
+  const { language, words, say } = useCrew();
   return (
     <div lang={language} className="flex flex-col gap-5 px-3.5 py-4">
       <section className="flex flex-col gap-3">
         <TitleBlock
           level={1}
           title={visit.customerName}
-          meta={`${words.kinds[visit.kind]} · ${visit.jobNumber}`}
+          meta={`${say(words.kinds[visit.kind])} · ${visit.jobNumber}`}
         />
         <p className="text-lead font-bold">
           {dayIn(visit, language, zone)}, {windowIn(visit, language, zone)}

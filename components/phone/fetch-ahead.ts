@@ -15,7 +15,7 @@ const FRESH_MS = 5 * 60_000;
 
 /**
  * While a phone page is open, keeps on the phone what the day needs without a signal: today's and
- * tomorrow's visits with their stops, the wall books of their rooms, and an empty book for each job. Runs when the page
+ * tomorrow's visits with their stops, those of the snags to mend, the wall books of their rooms, and an empty book for each job. Runs when the page
  * opens, when the signal is back, and when the page is looked at again, until the returned function is called.
  */
 export function startFetchingAhead(holder: Holder): () => void {
@@ -55,7 +55,12 @@ export async function fetchAhead({ personId, mayMeasure, mayReport }: Holder): P
   let isWhole = tomorrow !== null;
   const stops: StopView[] = [];
   const codes: AccessCodeView[] = [];
-  for (const { id } of mayReport ? days.flatMap((day) => day.visits) : []) {
+  // A snag is mended on a later visit too: its stop is kept with those of the day.
+  const stopIds = new Set([
+    ...days.flatMap((day) => day.visits.map(({ id }) => id)),
+    ...today.snags.map(({ visitId }) => visitId),
+  ]);
+  for (const id of mayReport ? stopIds : []) {
     const stop = await getJson<StopView>(apiPaths.stop(id));
     if (stop) stops.push(stop);
     else isWhole = false;

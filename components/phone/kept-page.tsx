@@ -12,11 +12,14 @@ import type { TodayView } from '@/lib/contracts/visits';
 import { paths } from '@/lib/paths';
 import type { Holder } from '@/lib/sync/holder';
 import { type PhonePlace, phonePlaceOf } from '@/lib/sync/phone-pages';
+import type { CrewLanguage } from '@/lib/words/crew';
+import { type KeptThing, phoneWords } from '@/lib/words/phone-words';
 import { readDay, readDays, readFetched, readHolder } from './kept-store';
 import { localToday } from './local-today';
 import { PhonePerson } from './phone-person';
 import { readBook } from './read-book';
 import { readUnsent } from './read-unsent';
+import { useCrewLanguage } from './spoken-language';
 import { useLive } from './use-live';
 import { useOnce } from './use-once';
 
@@ -43,35 +46,34 @@ export function KeptPage() {
   );
 }
 
-const titles: Record<PhonePlace['page'], string> = {
-  today: 'Today',
-  visit: 'Visit',
-  walls: 'Wall book',
-  unknown: 'No signal',
+const titles: Record<CrewLanguage, Record<PhonePlace['page'], string>> = {
+  en: { today: 'Today', visit: 'Visit', walls: 'Wall book', unknown: 'No signal' },
+  es: { today: 'Hoy', visit: 'Visita', walls: 'Libro de medidas', unknown: 'Sin señal' },
 };
 
 function KeptPlace({ place, holder }: { place: PhonePlace; holder: Holder }) {
+  const title = titles[useCrewLanguage()][place.page];
   useEffect(() => {
-    document.title = `${titles[place.page]} · Setwell`;
-  }, [place.page]);
+    document.title = `${title} · Setwell`;
+  }, [title]);
   switch (place.page) {
     case 'today':
-      return <KeptDay date={place.date} holder={holder} />;
+      return <KeptDay date={place.date} />;
     case 'visit':
       return <KeptVisit visitId={place.visitId} />;
     case 'walls':
       return <KeptBook roomId={place.roomId} jobId={place.jobId} holder={holder} />;
     case 'unknown':
-      return <NotKept what="This page" />;
+      return <NotKept what="page" />;
   }
 }
 
-function KeptDay({ date, holder }: { date: string | null; holder: Holder }) {
+function KeptDay({ date }: { date: string | null }) {
   const [today] = useState(() => localToday());
   const live = useLive(`day:${date ?? today}`, () => readDayOf(date, today));
   if (live.state === 'reading') return <Opening />;
-  if (live.state === 'failed' || !live.value) return <NotKept what="This day" />;
-  return <TodayScreen view={live.value} holder={holder} />;
+  if (live.state === 'failed' || !live.value) return <NotKept what="day" />;
+  return <TodayScreen view={live.value} />;
 }
 
 function KeptVisit({ visitId }: { visitId: string }) {
@@ -79,7 +81,7 @@ function KeptVisit({ visitId }: { visitId: string }) {
   if (live.state === 'reading') return <Opening />;
   const days = live.state === 'here' ? live.value : [];
   const visit = days.flatMap((day) => day.visits).find(({ id }) => id === visitId);
-  return visit ? <StopScreen visit={visit} stop={null} /> : <NotKept what="This visit" />;
+  return visit ? <StopScreen visit={visit} stop={null} /> : <NotKept what="visit" />;
 }
 
 function KeptBook(asked: { roomId: string; jobId: string | null; holder: Holder }) {
@@ -87,7 +89,7 @@ function KeptBook(asked: { roomId: string; jobId: string | null; holder: Holder 
   // Once: the screen writes the book that it was given, and then follows the store by itself.
   const once = useOnce(`book:${roomId}`, () => readBook(roomId, jobId, holder.personId));
   if (once.state === 'reading') return <Opening />;
-  if (once.state === 'failed' || !once.value) return <NotKept what="This room" />;
+  if (once.state === 'failed' || !once.value) return <NotKept what="room" />;
   return <RoomScreen view={once.value} isStale />;
 }
 
@@ -98,21 +100,22 @@ async function readDayOf(date: string | null, today: string): Promise<TodayView 
   return (await readDay(today)) ?? (fetched ? readDay(fetched.date) : null);
 }
 
-function NotKept({ what }: { what: string }) {
+function NotKept({ what }: { what: KeptThing }) {
+  const language = useCrewLanguage();
+  const words = phoneWords[language];
   return (
-    <PhoneShell where={<b>No signal</b>}>
-      <div className="p-3.5">
+    <PhoneShell where={<b>{words.noSignal}</b>}>
+      <div lang={language} className="p-3.5">
         <EmptyState
-          title={`${what} is not on this phone`}
+          title={words.notHere[what]}
           isPage
           action={
             <LinkButton size="thumb" href={paths.today()}>
-              Today
+              {titles[language].today}
             </LinkButton>
           }
         >
-          There is no signal, and it was not opened here while there was one. What you measured is
-          kept; try again where there is a signal.
+          {words.notOpenedHere}
         </EmptyState>
       </div>
     </PhoneShell>
@@ -121,15 +124,14 @@ function NotKept({ what }: { what: string }) {
 
 function NobodyHere() {
   const live = useLive('unsent', readUnsent);
+  const language = useCrewLanguage();
+  const words = phoneWords[language];
   const unsent = live.state === 'here' ? live.value.length : 0;
   return (
-    <PhoneShell where={<b>No signal</b>}>
-      <div className="p-3.5">
-        <EmptyState title="Nobody is signed in on this phone" isPage>
-          Signing in wants a signal.
-          {unsent > 0
-            ? ` What was measured here is kept: ${unsent} to send when its reader signs in again.`
-            : ''}
+    <PhoneShell where={<b>{words.noSignal}</b>}>
+      <div lang={language} className="p-3.5">
+        <EmptyState title={words.nobody} isPage>
+          {words.wantsSignal} {unsent > 0 ? words.keptForReader(unsent) : ''}
         </EmptyState>
       </div>
     </PhoneShell>

@@ -3,7 +3,8 @@ import type { AccessCodeView, StopView } from '@/lib/contracts/stops';
 import type { TodayView } from '@/lib/contracts/visits';
 import { newerStop } from '@/lib/days/stop-on-phone';
 import type { Holder } from '@/lib/sync/holder';
-import { phoneDatabase } from './phone-database';
+import { inStore } from './phone-database';
+import type { PhoneDatabase } from './phone-tables';
 
 /** When the day was last fetched whole, and which day that was. */
 export type Fetched = { at: string; date: string };
@@ -17,12 +18,14 @@ const blankKey = (jobId: string): string => `blank:${jobId}`;
 
 /** Who holds the phone from now on. What the office showed somebody else is gone first; nothing unsent is. */
 export async function keepHolder(holder: Holder): Promise<void> {
-  const { kept, rooms } = phoneDatabase();
-  await phoneDatabase().transaction('rw', kept, rooms, async () => {
-    const before = await read<Holder>(holderKey);
-    if (before?.personId !== holder.personId) await kept.clear();
-    await rooms.filter(({ personId }) => personId !== holder.personId).delete();
-    await kept.put({ key: holderKey, value: holder });
+  await inStore((database) => {
+    const { kept, rooms } = database;
+    return database.transaction('rw', kept, rooms, async () => {
+      const before = await read<Holder>(holderKey);
+      if (before?.personId !== holder.personId) await kept.clear();
+      await rooms.filter(({ personId }) => personId !== holder.personId).delete();
+      await kept.put({ key: holderKey, value: holder });
+    });
   });
 }
 
@@ -43,8 +46,7 @@ export type DayFetched = {
 /** The day as the office showed it, in place of the one before; nothing when somebody else holds the phone by now. */
 export async function keepDays(fetched: DayFetched): Promise<void> {
   const { personId, days, blanks, stops, codes, at } = fetched;
-  const { kept } = phoneDatabase();
-  await phoneDatabase().transaction('rw', kept, async () => {
+  await inKept(async (kept) => {
     const holder = await read<Holder>(holderKey);
     const [today] = days;
     if (holder?.personId !== personId || !today) return;
@@ -66,14 +68,18 @@ export function readFetched(): Promise<Fetched | null> {
   return read<Fetched>(fetchedKey);
 }
 
-export function readDay(date: string): Promise<TodayView | null> {
-  return read<TodayView>(dayKey(date));
+export async function readDay(date: string): Promise<TodayView | null> {
+  const day = await read<TodayView>(dayKey(date));
+  return day && withSnags(day);
 }
+
+/** A day that an older program kept has none. */
+const withSnags = (day: TodayView): TodayView => ({ ...day, snags: day.snags ?? [] });
 
 /** Every day that is kept, in order. */
 export async function readDays(): Promise<TodayView[]> {
-  const rows = await phoneDatabase().kept.where('key').startsWith(dayKey('')).toArray();
-  return rows.map(({ value }) => value as TodayView);
+  const rows = await inStore(({ kept }) => kept.where('key').startsWith(dayKey('')).toArray());
+  return rows.map(({ value }) => withSnags(value as TodayView));
 }
 
 /** An empty book for a room of this job that nobody has drawn yet. */
@@ -88,13 +94,12 @@ export function readKeptStop(visitId: string): Promise<StopView | null> {
 
 /** Within the transaction of what changed it. */
 export async function putStop(stop: StopView): Promise<void> {
-  await phoneDatabase().kept.put({ key: stopKey(stop.visitId), value: stop });
+  await inStore(({ kept }) => kept.put({ key: stopKey(stop.visitId), value: stop }));
 }
 
 /** Shown by the office just now; nothing when somebody else holds the phone by now. */
 export async function keepStop(stop: StopView, personId: string): Promise<void> {
-  const { kept } = phoneDatabase();
-  await phoneDatabase().transaction('rw', kept, async () => {
+  await inKept(async (kept) => {
     const holder = await read<Holder>(holderKey);
     if (holder && holder.personId !== personId) return;
     const value = newerStop(await readKeptStop(stop.visitId), stop);
@@ -110,15 +115,24 @@ export async function readCode(visitId: string, date: string): Promise<string | 
 
 /** Codes of days that are past leave the phone. */
 export async function dropPastCodes(date: string): Promise<void> {
-  await phoneDatabase()
-    .kept.where('key')
-    .startsWith(codeKey(''))
-    .filter(({ value }) => (value as AccessCodeView).date !== date)
-    .delete();
+  await inStore(({ kept }) =>
+    kept
+      .where('key')
+      .startsWith(codeKey(''))
+      .filter(({ value }) => (value as AccessCodeView).date !== date)
+      .delete(),
+  );
 }
 
 /** The writer of each key knows its shape, and the store is cleared when the program's shapes change. */
 async function read<Value>(key: string): Promise<Value | null> {
-  const row = await phoneDatabase().kept.get(key);
+  const row = await inStore(({ kept }) => kept.get(key));
   return (row?.value as Value | undefined) ?? null;
+}
+
+/** One transaction over what is kept. */
+function inKept(work: (kept: PhoneDatabase['kept']) => Promise<void>): Promise<void> {
+  return inStore((database) =>
+    database.transaction('rw', database.kept, () => work(database.kept)),
+  );
 }

@@ -1,39 +1,66 @@
-import Dexie, { type EntityTable, type Table } from 'dexie';
-import type { WallBookView } from '@/lib/contracts/rooms';
-import type { KeptPhoto } from '@/lib/photos/kept-photo';
-import type { Queued } from '@/lib/sync/queued';
+import type { PhoneDatabase } from './phone-tables';
 
-type PhoneTables = {
-  /** What the office has not yet said that it has. */
-  queue: Table<Queued, number, Omit<Queued, 'order'>>;
-  /** The office's last word to a person on each room opened here, with what it has taken since. */
-  rooms: EntityTable<{ roomId: string; personId: string; view: WallBookView }, 'roomId'>;
-  /** Half-typed values, choices and sketches, by a name of their own. */
-  drafts: EntityTable<{ key: string; value: unknown }, 'key'>;
-  /** What the office last showed of the day, and whom; gone with a sign-out. */
-  kept: EntityTable<{ key: string; value: unknown }, 'key'>;
-  /** Photos, until the office has had them for a while. */
-  photos: EntityTable<KeptPhoto, 'id'>;
-};
-export type PhoneDatabase = Dexie & PhoneTables;
+type Library = { database: PhoneDatabase; liveQuery: typeof import('./phone-tables').liveQuery };
 
-let opened: PhoneDatabase | null = null;
+let here: Library | null = null;
+let coming: Promise<Library> | null = null;
+
+/** A watched question is asked again this soon where the store's library did not come. */
+const ASK_AGAIN_MS = 5_000;
 
 /**
- * The phone's own store. It is migrated by adding a version below, never deleted. Strict durability: the
- * promise of a write holds only when it is on the disk, not when it is on its way.
+ * Does it with the phone's own store. Its library is a third of what a phone page would load and comes after
+ * the page is drawn: what is tapped before waits for it, in order. Once it is here nothing comes between, since
+ * within a transaction or a watched question only the store's own promises may be awaited.
  */
-export function phoneDatabase(): PhoneDatabase {
-  if (opened) return opened;
-  const database = new Dexie('setwell', {
-    chromeTransactionDurability: 'strict',
-  }) as PhoneDatabase;
-  database.version(1).stores({
-    queue: '++order, &id, roomId',
-    rooms: 'roomId',
-    drafts: 'key',
-  });
-  database.version(2).stores({ kept: 'key', photos: 'id, roomId' });
-  opened = database;
-  return database;
+export function inStore<Value>(work: (database: PhoneDatabase) => Promise<Value>): Promise<Value> {
+  return here ? work(here.database) : library().then(({ database }) => work(database));
+}
+
+/** Tells what the store answers, now and after every change of it, until the returned function is called. */
+export function watchStore<Value>(
+  read: () => Promise<Value>,
+  listener: { next: (value: Value) => void; error: () => void },
+): () => void {
+  let stop = () => {};
+  let isStopped = false;
+  const ask = () => {
+    library().then(
+      ({ liveQuery }) => {
+        if (isStopped) return;
+        const subscription = liveQuery(read).subscribe(listener);
+        stop = () => subscription.unsubscribe();
+      },
+      () => {
+        if (isStopped) return;
+        listener.error();
+        const timer = setTimeout(ask, ASK_AGAIN_MS);
+        stop = () => clearTimeout(timer);
+      },
+    );
+  };
+  ask();
+  return () => {
+    isStopped = true;
+    stop();
+  };
+}
+
+function library(): Promise<Library> {
+  if (coming) return coming;
+  const asked = import('./phone-tables').then(
+    ({ phoneTables, liveQuery }): Library => ({ database: phoneTables(), liveQuery }),
+  );
+  // The first to hear of it, so that nobody later is served before those who wait.
+  asked.then(
+    (library) => {
+      here = library;
+    },
+    () => {
+      // A weak signal: whoever comes next asks for it anew.
+      coming = null;
+    },
+  );
+  coming = asked;
+  return asked;
 }

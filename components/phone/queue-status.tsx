@@ -4,6 +4,7 @@ import { useSyncExternalStore } from 'react';
 import { Verdict, type VerdictKind } from '@/components/ui/verdict';
 import { paths } from '@/lib/paths';
 import { type StripState, stripState } from '@/lib/sync/strip-words';
+import { phoneWords } from '@/lib/words/phone-words';
 import { useHolder } from './phone-person';
 import { readReadiness } from './read-readiness';
 import { readUnsent } from './read-unsent';
@@ -30,7 +31,8 @@ export function QueueStatus({ isInRoom = false }: { isInRoom?: boolean }) {
   const ready = useLive(`ready:${isProgramKept}`, () => readReadiness(holder, isProgramKept));
   const sending = useSyncExternalStore(subscribeToSending, currentSendingState, () => before);
   if (live.state === 'reading') return null;
-  if (live.state === 'failed') return <Verdict kind="problem">nothing can be kept here</Verdict>;
+  if (live.state === 'failed')
+    return <Verdict kind="problem">{phoneWords[language].cannotKeep}</Verdict>;
   // In a room the strip's other half says where one is, and needs the place.
   const isReady = !isInRoom && ready.state === 'here' && ready.value.isReady;
   const { kind, words } = stripState({

@@ -5,50 +5,53 @@ import { ownIdOf, type Queued, type QueuedWork, roomIdOf } from '@/lib/sync/queu
 import type { Settled } from '@/lib/sync/settle-batch';
 import { putStop, readHolder, readKeptStop } from './kept-store';
 import { newId } from './new-id';
-import { phoneDatabase } from './phone-database';
+import { inStore } from './phone-database';
 import { tapperOf } from './tapper';
 
 /** Puts work on the phone's disk. When it has resolved, the work cannot be lost but with the phone. */
 export async function keepWork(personId: string, works: readonly QueuedWork[]): Promise<void> {
-  await phoneDatabase().queue.bulkAdd(
-    works.map((work) => ({
-      id: ownIdOf(work) ?? newId(),
-      personId,
-      roomId: roomIdOf(work),
-      work,
-      parked: null,
-    })),
-  );
+  const items = works.map((work) => ({
+    id: ownIdOf(work) ?? newId(),
+    personId,
+    roomId: roomIdOf(work),
+    work,
+    parked: null,
+  }));
+  await inStore(({ queue }) => queue.bulkAdd(items));
 }
 
 export function readQueue(): Promise<Queued[]> {
-  return phoneDatabase().queue.orderBy('order').toArray();
+  return inStore(({ queue }) => queue.orderBy('order').toArray());
 }
 
 export function readQueueOfRoom(roomId: string): Promise<Queued[]> {
-  return phoneDatabase().queue.where('roomId').equals(roomId).sortBy('order');
+  return inStore(({ queue }) => queue.where('roomId').equals(roomId).sortBy('order'));
 }
 
 /** One transaction: what the office has taken moves from the queue to the room's last known state. */
 export async function settleQueue({ items }: Batch, settled: Settled): Promise<void> {
-  const database = phoneDatabase();
   const sentIds = new Set(settled.sentIds);
   const sent = items.filter(({ id }) => sentIds.has(id));
-  await database.transaction('rw', database.queue, database.rooms, database.kept, async () => {
-    await rememberSent(sent);
-    await rememberTold(sent);
-    await database.queue.bulkDelete(sent.map(({ order }) => order));
-    for (const { id, message } of settled.parked) {
-      await database.queue.where('id').equals(id).modify({ parked: message });
-    }
+  await inStore((database) => {
+    const { queue, rooms, kept } = database;
+    return database.transaction('rw', queue, rooms, kept, async () => {
+      await rememberSent(sent);
+      await rememberTold(sent);
+      await queue.bulkDelete(sent.map(({ order }) => order));
+      for (const { id, message } of settled.parked) {
+        await queue.where('id').equals(id).modify({ parked: message });
+      }
+    });
   });
 }
 
 /** Sends parked things once more: after a sign-in as somebody who may, or a mended room. */
 export async function tryParkedAgain(personId: string): Promise<void> {
-  await phoneDatabase()
-    .queue.filter((item) => item.personId === personId && item.parked !== null)
-    .modify({ parked: null });
+  await inStore(({ queue }) =>
+    queue
+      .filter((item) => item.personId === personId && item.parked !== null)
+      .modify({ parked: null }),
+  );
 }
 
 /** What the office has of a stop now, so that it stays on the screen when it has left the queue. */
@@ -62,9 +65,8 @@ async function rememberTold(sent: Queued[]): Promise<void> {
 }
 
 async function rememberSent(sent: Queued[]): Promise<void> {
-  const { rooms } = phoneDatabase();
   for (const roomId of new Set(sent.map((item) => item.roomId))) {
-    const kept = roomId === null ? undefined : await rooms.get(roomId);
+    const kept = roomId === null ? undefined : await inStore(({ rooms }) => rooms.get(roomId));
     if (!kept) continue;
     const works = sent
       .filter((item) => item.roomId === roomId && item.personId === kept.personId)
@@ -74,6 +76,6 @@ async function rememberSent(sent: Queued[]): Promise<void> {
     const view = withSent(kept.view, readings, drawn.at(-1) ?? null);
     const isSubmitted = works.some(({ kind }) => kind === 'submit');
     const submittedAt = isSubmitted ? new Date().toISOString() : view.submittedAt;
-    await rooms.put({ ...kept, view: { ...view, submittedAt } });
+    await inStore(({ rooms }) => rooms.put({ ...kept, view: { ...view, submittedAt } }));
   }
 }

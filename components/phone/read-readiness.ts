@@ -1,22 +1,25 @@
 import type { TodayVisit } from '@/lib/contracts/visits';
 import type { Holder } from '@/lib/sync/holder';
 import { type Readiness, readinessOf } from '@/lib/sync/readiness';
+import type { CrewLanguage } from '@/lib/words/crew';
 import { readDay, readFetched, readKeptStop } from './kept-store';
-import { phoneDatabase } from './phone-database';
+import { inStore } from './phone-database';
 
 /** What of the day is in the phone's store; watched as the store changes. */
 export async function readReadiness(
   { personId, mayReport }: Pick<Holder, 'personId' | 'mayReport'>,
   isProgramKept: boolean,
+  language?: CrewLanguage,
 ): Promise<Readiness & { asOf: string | null }> {
   const fetched = await readFetched();
   const today = fetched ? await readDay(fetched.date) : null;
   const visits = today?.visits ?? [];
-  const rows = await phoneDatabase()
-    .rooms.filter((row) => row.personId === personId)
-    .primaryKeys();
+  const rows = await inStore(({ rooms }) =>
+    rooms.filter((row) => row.personId === personId).primaryKeys(),
+  );
   const readiness = readinessOf({
     isProgramKept,
+    language,
     fetchedAt: fetched?.at ?? null,
     visitCount: visits.length,
     keptStopCount: mayReport ? await countStops(visits) : undefined,

@@ -1,7 +1,7 @@
 import type { WallBookView } from '@/lib/contracts/rooms';
 import { apiPaths } from '@/lib/paths';
 import { getJson } from './get-json';
-import { phoneDatabase } from './phone-database';
+import { inStore } from './phone-database';
 import { rememberRoom } from './room-store';
 
 /** A second person in the same room is seen this soon. */
@@ -46,6 +46,6 @@ export function startRefreshing({ roomId, personId, isStale }: Refreshing): () =
 
 /** A room that was begun here is unknown there until its drawing was sent. */
 async function isAtOffice(roomId: string): Promise<boolean> {
-  const kept = await phoneDatabase().rooms.get(roomId);
+  const kept = await inStore(({ rooms }) => rooms.get(roomId));
   return (kept?.view.wallBook.room.chains.length ?? 0) > 0;
 }

@@ -5,6 +5,7 @@ import { LinkButton } from '@/components/ui/link-button';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { TodayVisit } from '@/lib/contracts/visits';
 import { paths } from '@/lib/paths';
+import { phoneWords } from '@/lib/words/phone-words';
 import { AddRoom } from './add-room';
 import { usePersonId } from './phone-person';
 import { readRoomsOfJob } from './room-store';
@@ -13,9 +14,12 @@ import { useLive } from './use-live';
 /** The rooms of the job: those that the office knows, and those that this phone has drawn since. */
 export function RoomsOfVisit({ visit }: { visit: TodayVisit }) {
   const personId = usePersonId();
-  const { words } = useCrew();
+  const { words, language } = useCrew();
   const { jobId, jobTitle } = visit;
-  const live = useLive(`rooms:${jobId}`, () => readRoomsOfJob(jobId, personId));
+  const { halfDrawn } = phoneWords[language];
+  const live = useLive(`rooms:${jobId}:${language}`, () =>
+    readRoomsOfJob(jobId, personId, halfDrawn),
+  );
   const known = new Set(visit.rooms.map(({ id }) => id));
   const here = live.state === 'here' ? live.value.filter(({ id }) => !known.has(id)) : [];
   return (

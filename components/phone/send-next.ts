@@ -1,6 +1,6 @@
 import { nextBatch } from '@/lib/sync/next-batch';
 import { type Settled, settleBatch } from '@/lib/sync/settle-batch';
-import { phoneDatabase } from './phone-database';
+import { inStore } from './phone-database';
 import { postBatch } from './post-batch';
 import { readQueue, settleQueue } from './queue-store';
 
@@ -15,7 +15,7 @@ export async function sendNext(personId: string): Promise<AfterSending> {
     await settleQueue(batch, settled);
     return settled.next;
   }
-  if ((await phoneDatabase().photos.count()) === 0) return 'nothing';
+  if ((await inStore(({ photos }) => photos.count())) === 0) return 'nothing';
   const { sendOnePhoto } = await import('@/components/photos/send-photos');
   return sendOnePhoto(personId);
 }

@@ -1,7 +1,6 @@
-import { liveQuery } from 'dexie';
 import { isWaiting } from '@/lib/photos/kept-photo';
 import { backOffMs } from '@/lib/sync/back-off';
-import { phoneDatabase } from './phone-database';
+import { inStore, watchStore } from './phone-database';
 import { readQueue } from './queue-store';
 import { askToSendLater } from './send-later';
 import { alone, sendNext } from './send-next';
@@ -68,13 +67,13 @@ export function startSending(personId: string): () => void {
     if (document.visibilityState === 'visible') wakeAfresh();
   };
 
-  const kept = liveQuery(readWaiting).subscribe({ next: wakeIfMore(wake), error: () => {} });
+  const stopWatching = watchStore(readWaiting, { next: wakeIfMore(wake), error: () => {} });
   window.addEventListener('online', wakeAfresh);
   document.addEventListener('visibilitychange', wakeWhenSeen);
   return () => {
     isStopped = true;
     clearTimeout(timer);
-    kept.unsubscribe();
+    stopWatching();
     window.removeEventListener('online', wakeAfresh);
     document.removeEventListener('visibilitychange', wakeWhenSeen);
   };
@@ -82,10 +81,10 @@ export function startSending(personId: string): () => void {
 
 async function readWaiting(): Promise<number> {
   const queue = await readQueue();
-  const photos = await phoneDatabase()
-    .photos.filter((photo) => isWaiting(photo) && photo.isDone)
-    .count();
-  return queue.filter(({ parked }) => parked === null).length + photos;
+  const waiting = await inStore(({ photos }) =>
+    photos.filter((photo) => isWaiting(photo) && photo.isDone).count(),
+  );
+  return queue.filter(({ parked }) => parked === null).length + waiting;
 }
 
 /** Fewer things waiting is our own doing; more is a reason to go. */

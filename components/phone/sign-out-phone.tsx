@@ -5,13 +5,17 @@ import { signOut } from '@/components/door/auth-requests';
 import { problemOf } from '@/components/shell/ask-server';
 import { Button } from '@/components/ui/button';
 import { paths } from '@/lib/paths';
+import { phoneWords } from '@/lib/words/phone-words';
 import { usePersonId } from './phone-person';
 import { readUnsent } from './read-unsent';
+import { useCrewLanguage } from './spoken-language';
 import { useLive } from './use-live';
 
 /** For a phone that goes to somebody else: clears what the office showed, never what was read here. */
 export function SignOutPhone({ personName }: { personName: string }) {
   const personId = usePersonId();
+  const language = useCrewLanguage();
+  const words = phoneWords[language];
   const live = useLive('unsent', readUnsent);
   const [isLeaving, setIsLeaving] = useState(false);
   const [problem, setProblem] = useState<string | null>(null);
@@ -29,12 +33,10 @@ export function SignOutPhone({ personName }: { personName: string }) {
     }
   };
   return (
-    <section className="flex flex-col gap-2 px-3.5 pt-2 pb-6">
+    <section lang={language} className="flex flex-col gap-2 px-3.5 pt-2 pb-6">
       {unsent > 0 ? (
         <p className="border-l-4 border-ochre bg-tint px-3 py-2">
-          {unsent === 1 ? '1 thing is' : `${unsent} things are`} not with the office yet.{' '}
-          {unsent === 1 ? 'It stays' : 'They stay'} on this phone, and{' '}
-          {unsent === 1 ? 'goes' : 'go'} out when {personName} signs in on it again.
+          {words.notWithOffice(unsent, personName)}
         </p>
       ) : null}
       {problem ? (
@@ -46,9 +48,9 @@ export function SignOutPhone({ personName }: { personName: string }) {
         look="plain"
         size="thumb"
         onClick={leave}
-        busyText={isLeaving ? 'Signing out…' : undefined}
+        busyText={isLeaving ? words.signingOut : undefined}
       >
-        Sign out
+        {words.signOut}
       </Button>
     </section>
   );

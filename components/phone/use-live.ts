@@ -1,7 +1,7 @@
 'use client';
 
-import { liveQuery } from 'dexie';
 import { useEffect, useEffectEvent, useState } from 'react';
+import { watchStore } from './phone-database';
 
 export type Live<Value> =
   | { state: 'reading' }
@@ -16,13 +16,14 @@ export function useLive<Value>(key: string, read: () => Promise<Value>): Live<Va
   });
   const readNow = useEffectEvent(read);
 
-  useEffect(() => {
-    const subscription = liveQuery(() => readNow()).subscribe({
-      next: (value) => setLive({ key, live: { state: 'here', value } }),
-      error: () => setLive({ key, live: { state: 'failed' } }),
-    });
-    return () => subscription.unsubscribe();
-  }, [key]);
+  useEffect(
+    () =>
+      watchStore(() => readNow(), {
+        next: (value) => setLive({ key, live: { state: 'here', value } }),
+        error: () => setLive({ key, live: { state: 'failed' } }),
+      }),
+    [key],
+  );
 
   return live.key === key ? live.live : { state: 'reading' };
 }

@@ -2,6 +2,7 @@
 
 import { useState } from 'react';
 import { newId } from '@/components/phone/new-id';
+import { useCrewLanguage } from '@/components/phone/spoken-language';
 import { useLive } from '@/components/phone/use-live';
 import { useTyping } from '@/components/phone/use-typing';
 import { Button } from '@/components/ui/button';
@@ -9,6 +10,7 @@ import { TitleBlock } from '@/components/ui/title-block';
 import { ChoiceSheet } from '@/components/walls/choice-sheet';
 import type { KeptPhoto } from '@/lib/photos/kept-photo';
 import { captionOf, markOf, type PhotoMark, type PhotoPoint } from '@/lib/photos/photo-marks';
+import { photoWords } from '@/lib/words/photo-words';
 import { markedPhoto } from './marked-photo';
 import { PhotoPicture } from './photo-picture';
 import { dropPhoto, finishPhoto, keepMarks, readPhoto } from './photo-store';
@@ -23,14 +25,15 @@ type PhotoScreenProps = {
 
 /** A photo on this phone: circles, arrows and figures are put on it by touch until it has gone out. */
 export function PhotoScreen({ photoId, figures, onDone }: PhotoScreenProps) {
+  const words = photoWords[useCrewLanguage()];
   const live = useLive(`photo:${photoId}`, () => readPhoto(photoId));
   if (live.state === 'reading') return null;
   if (live.state === 'failed' || !live.value) {
     return (
       <section className="flex flex-col gap-4 p-3.5">
-        <p>This photo is not on this phone any more.</p>
+        <p>{words.gone}</p>
         <Button size="thumb" onClick={onDone}>
-          Back
+          {words.back}
         </Button>
       </section>
     );
@@ -46,6 +49,7 @@ function Marking({
   onDone,
 }: Omit<PhotoScreenProps, 'photoId'> & { photo: KeptPhoto }) {
   const { id, place, marks, parked } = photo;
+  const words = photoWords[useCrewLanguage()];
   const isSent = photo.sentAt !== null;
   const url = useBlobUrl(photo.clean ?? photo.marked);
   const [tool, setTool] = useState<MarkTool>({ kind: 'circle' });
@@ -56,11 +60,11 @@ function Marking({
   if (isChoosing) {
     return (
       <ChoiceSheet
-        title="Which figure?"
-        choices={figures.map(({ id: value, what, value: words }) => ({
-          value,
-          words,
-          hint: what,
+        title={words.whichFigure}
+        choices={figures.map((figure) => ({
+          value: figure.id,
+          words: figure.value,
+          hint: figure.what,
         }))}
         onChoose={(chosen) => {
           const figure = figures.find((each) => each.id === chosen);
@@ -69,7 +73,7 @@ function Marking({
         }}
         onBack={() => setIsChoosing(false)}
       >
-        Then touch the photo where it goes.
+        {words.thenTouch}
       </ChoiceSheet>
     );
   }
@@ -88,7 +92,7 @@ function Marking({
   };
   return (
     <section className="flex flex-1 flex-col gap-3 px-3.5 py-4">
-      <TitleBlock level={1} title={place} meta={isSent ? 'with the office' : 'saved here'} />
+      <TitleBlock level={1} title={place} meta={isSent ? words.withOffice : words.savedHere} />
       {url ? (
         <PhotoPicture
           url={url}
@@ -101,30 +105,32 @@ function Marking({
       ) : null}
       {parked ? (
         <p role="alert" className="border-l-4 border-chalk bg-tint px-3 py-2">
-          The office did not take it: {parked}
+          {words.notTaken(parked)}
         </p>
       ) : null}
       {isSent ? (
         <Button size="thumb" className="mt-auto" onClick={onDone}>
-          Back
+          {words.back}
         </Button>
       ) : (
         <>
-          <p className="text-note text-graphite">{howTo(tool)}</p>
-          <div className="grid grid-cols-3 gap-2">
+          <p className="text-note text-graphite">{words.howTo[tool.kind]}</p>
+          <div className={`grid gap-2 ${figures.length > 0 ? 'grid-cols-3' : 'grid-cols-2'}`}>
             <ToolButton isOn={tool.kind === 'circle'} onPress={() => setTool({ kind: 'circle' })}>
-              Circle
+              {words.tools.circle}
             </ToolButton>
             <ToolButton isOn={tool.kind === 'arrow'} onPress={() => setTool({ kind: 'arrow' })}>
-              Arrow
+              {words.tools.arrow}
             </ToolButton>
-            <ToolButton isOn={tool.kind === 'words'} onPress={() => setIsChoosing(true)}>
-              {tool.kind === 'words' ? tool.words : 'Figure'}
-            </ToolButton>
+            {figures.length > 0 ? (
+              <ToolButton isOn={tool.kind === 'words'} onPress={() => setIsChoosing(true)}>
+                {tool.kind === 'words' ? tool.words : words.tools.words}
+              </ToolButton>
+            ) : null}
           </div>
           <div className="mt-auto flex flex-col gap-2">
-            <Button size="thumb" onClick={finish} busyText={isBusy ? 'Drawing it in…' : undefined}>
-              Done
+            <Button size="thumb" onClick={finish} busyText={isBusy ? words.drawingIn : undefined}>
+              {words.done}
             </Button>
             <div className="grid grid-cols-2 gap-2">
               <Button
@@ -133,7 +139,7 @@ function Marking({
                 disabled={marks.length === 0}
                 onClick={() => void keepMarks(id, marks.slice(0, -1))}
               >
-                Take the last mark off
+                {words.takeOff}
               </Button>
               <Button
                 size="thumb"
@@ -143,7 +149,7 @@ function Marking({
                   onDone();
                 }}
               >
-                Throw it away
+                {words.throwAway}
               </Button>
             </div>
           </div>
@@ -151,17 +157,6 @@ function Marking({
       )}
     </section>
   );
-}
-
-function howTo(tool: MarkTool): string {
-  switch (tool.kind) {
-    case 'circle':
-      return 'Touch what you mean, or draw from its middle outward.';
-    case 'arrow':
-      return 'Touch what you mean, or draw toward it.';
-    case 'words':
-      return 'Touch the photo where the figure goes.';
-  }
 }
 
 type ToolButtonProps = { isOn: boolean; onPress: () => void; children: string };

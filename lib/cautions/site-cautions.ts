@@ -1,5 +1,7 @@
-import type { Run } from '@/lib/contracts/runs';
+import type { Run, Unit } from '@/lib/contracts/runs';
+import { shortOfStuds } from '@/lib/days/short-of-studs';
 import type { Fit } from '@/lib/measure/fit';
+import { unitWords } from '@/lib/sheet/unit-words';
 import { oneHangingLimitKg } from './lifting';
 
 export const cautionKinds = [
@@ -35,6 +37,8 @@ export type CautionsHere = {
   features: readonly string[];
   isOldHouse: boolean;
   region: 'US' | 'UK' | 'AU' | 'EU';
+  /** Boxes are named in English unless said otherwise. */
+  nameOf?: (unit: Unit) => string;
 };
 
 const serviceFeatures = new Set([
@@ -62,6 +66,7 @@ export function siteCautions({
   features,
   isOldHouse,
   region,
+  nameOf = unitWords,
 }: CautionsHere): SiteCaution[] {
   const hung = runs.filter(({ level }) => level === 'wall');
   const has = (feature: string) => features.includes(feature);
@@ -72,7 +77,7 @@ export function siteCautions({
     ...(hung.length > 0
       ? [{ kind: 'wall-fixing', source: 'ANSI/AWI 0620-2018, 3.1; maker’s handbook 2009' } as const]
       : []),
-    ...studsShort(fit),
+    ...studsShort(shortOfStuds(runs, fit, nameOf)),
     { kind: 'cables', source: region === 'UK' ? 'BS 7671, 522.6 (zones 150 mm)' : '' },
     ...(features.some((feature) => serviceFeatures.has(feature))
       ? [{ kind: 'services', names: has('gas') ? ['gas'] : [], source: '' } as const]
@@ -100,11 +105,6 @@ function hangAlone(hung: readonly Run[]): SiteCaution[] {
 }
 
 /** Hung boxes that catch fewer studs than the shop's rule asks for: they want backing. */
-function studsShort(fit: Fit): SiteCaution[] {
-  const names = fit.runs.flatMap((run) =>
-    run.units.flatMap(({ studs, name, kind }) =>
-      studs && !studs.enough ? [`${run.name}: ${name || kind}`] : [],
-    ),
-  );
+function studsShort(names: string[]): SiteCaution[] {
   return names.length > 0 ? [{ kind: 'studs-short', names, source: '' }] : [];
 }

@@ -93,3 +93,12 @@ export type SnagView = {
   closedPhotoIds: string[];
   closedBy: string | null;
 };
+
+/** A snag that a crew has to mend, and the visit from which it can say that it is done. */
+export type CrewSnag = SnagView & {
+  visitId: string;
+  street: string;
+  town: string;
+  /** The day on which the crew is there next; null where no visit is booked. */
+  nextOn: string | null;
+};

@@ -2,6 +2,7 @@
 import { z } from 'zod';
 import type { ChecklistItem } from './checklists';
 import type { CheckAnswer, PauseReason } from './day-events';
+import type { Reading } from './readings';
 import type { SheetView } from './rooms';
 import type { SignOffView } from './sign-offs';
 import { plainWords, type SnagView } from './snags';
@@ -33,6 +34,9 @@ export type StopPause = { what: 'pause' | 'go-on'; why: PauseReason | null; at: 
 export type StopAsFound = {
   id: string;
   roomId: string;
+  /** What was read, and against which release: told anew in the reader's language. */
+  releaseId: string;
+  readings: Reading[];
   disagreements: string[];
   changes: string[];
   at: string;

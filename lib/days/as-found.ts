@@ -11,6 +11,8 @@ import { fitRoom } from '@/lib/measure/fit-room';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { figureText } from '@/lib/sheet/figure-text';
 import { formatLength } from '@/lib/units/format-length';
+import { type AsFoundWords, asFoundWords } from '@/lib/words/as-found-words';
+import type { CrewLanguage } from '@/lib/words/crew';
 
 export type Released = { wallBook: WallBook; runs: Run[]; rules: FitRules; fit: Fit };
 
@@ -30,15 +32,20 @@ const SAME_PLACE_MM = 80;
  * Two figures disagree when they differ by more than √(U₁² + U₂²), both at k = 2. A corner that disagrees
  * takes the difference of its offsets at the front of each run that meets that wall from the run's filler
  * there: it is compared reading against reading, and not spread over the room as an adjustment would.
- * Units: mm, degrees; a corner found more closed makes the filler narrower at the front. Edge: what was
+ * Told in English unless another language is asked for. Units: mm, degrees; a corner found more closed makes the filler narrower at the front. Edge: what was
  * not read for the release disagrees with nothing.
  * Example: a corner released at 90.0° and found at 89.0°, a front at 610 mm: 10.6 mm narrower.
  * Source: ISO/IEC Guide 98-3, 5.1 (uncertainty of a difference of independent readings); plane geometry.
  */
-export function asFound(released: Released, readings: readonly Reading[]): AsFound {
+export function asFound(
+  released: Released,
+  readings: readonly Reading[],
+  language: CrewLanguage = 'en',
+): AsFound {
+  const words = asFoundWords[language];
   const told = [
-    ...readings.flatMap((one) => (one.kind === 'corner' ? cornerTold(released, one) : [])),
-    ...fallTold(released, readings.filter(isDrop)),
+    ...readings.flatMap((one) => (one.kind === 'corner' ? cornerTold(released, one, words) : [])),
+    ...fallTold(released, readings.filter(isDrop), words),
   ];
   return {
     disagreements: told.map(({ disagreement }) => disagreement),
@@ -53,7 +60,7 @@ export function agree(one: FitFigure, other: FitFigure): boolean {
 
 type Told = { disagreement: string; changes: string[] };
 
-function cornerTold(released: Released, read: ReadingOf<'corner'>): Told[] {
+function cornerTold(released: Released, read: ReadingOf<'corner'>, words: AsFoundWords): Told[] {
   const { fit, rules } = released;
   const was = fit.corners.find(({ cornerWallId }) => cornerWallId === read.cornerWallId);
   const before = was?.readAt.find(({ zMm }) => Math.abs(zMm - read.zMm) < 1)?.angle ?? was?.angle;
@@ -63,8 +70,8 @@ function cornerTold(released: Released, read: ReadingOf<'corner'>): Told[] {
   if (!was || !before || !now || agree(before, now)) return [];
   return [
     {
-      disagreement: differs(`Corner ${was.name}`, { before, now }, rules),
-      changes: fillerChanges(released, was, { before, now }),
+      disagreement: differs(words, words.corner(was.name), { before, now, rules }),
+      changes: fillerChanges(released, was, { before, now, words }),
     },
   ];
 }
@@ -78,7 +85,7 @@ function alone({ wallBook, runs, rules }: Released, readings: Reading[]): Fit {
 function fillerChanges(
   { runs, fit, rules }: Released,
   corner: CornerFit,
-  { before, now }: { before: FitFigure; now: FitFigure },
+  { before, now, words }: { before: FitFigure; now: FitFigure; words: AsFoundWords },
 ): string[] {
   return runs.flatMap((run) =>
     (['left', 'right'] as const).flatMap((end) => {
@@ -91,8 +98,7 @@ function fillerChanges(
       if (was === undefined || is === undefined) return [];
       const narrowerMm = is - was;
       const by = formatLength(Math.abs(narrowerMm), rules);
-      const how = narrowerMm > 0 ? 'narrower' : 'wider';
-      return [`${run.name}, filler ${end}: ${by} ${how} at the front than on the sheet`];
+      return [words.filler(run.name, { end, by, isNarrower: narrowerMm > 0 })];
     }),
   );
 }
@@ -103,7 +109,11 @@ const isSamePlace = (one: ReadingOf<'floor'>, other: ReadingOf<'floor'>) =>
   Math.hypot(one.xMm - other.xMm, one.yMm - other.yMm) <= SAME_PLACE_MM;
 
 /** From the high point to each other place that was read again; down is positive. */
-function fallTold(released: Released, drops: readonly ReadingOf<'floor'>[]): Told[] {
+function fallTold(
+  released: Released,
+  drops: readonly ReadingOf<'floor'>[],
+  words: AsFoundWords,
+): Told[] {
   const { wallBook, fit, runs, rules } = released;
   const standing = standingReadings(wallBook.readings).filter(isDrop);
   const high = standing.find(({ id }) => id === fit.floor?.highPoint.readingId);
@@ -124,21 +134,18 @@ function fallTold(released: Released, drops: readonly ReadingOf<'floor'>[]): Tol
     const kicked = runs.filter((run) => run.wallId === drop.wallId && run.level !== 'wall');
     return [
       {
-        disagreement: differs('Fall of the floor from the high point', { before, now }, rules),
-        changes: kicked.map(
-          ({ name }) =>
-            `${name}, kick: up to ${by} ${moreMm > 0 ? 'higher' : 'lower'} at the low point`,
-        ),
+        disagreement: differs(words, words.fall, { before, now, rules }),
+        changes: kicked.map(({ name }) => words.kick(name, { by, isHigher: moreMm > 0 })),
       },
     ];
   });
 }
 
 function differs(
+  words: AsFoundWords,
   what: string,
-  { before, now }: { before: FitFigure; now: FitFigure },
-  rules: FitRules,
+  { before, now, rules }: { before: FitFigure; now: FitFigure; rules: FitRules },
 ): string {
   const [was, is] = [figureText(before, rules), figureText(now, rules)];
-  return `${what}: ${is.value} ± ${is.surely} as found, ${was.value} ± ${was.surely} on the sheet`;
+  return words.differs(what, `${is.value} ± ${is.surely}`, `${was.value} ± ${was.surely}`);
 }

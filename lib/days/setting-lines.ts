@@ -79,7 +79,9 @@ export function settingLines(
         : [],
     ),
     ...fit.runs.flatMap(({ name, scribes }) =>
-      scribes.map((scribe) => line('long', name, `${scribe.words} ${text(scribe.allowance)}`)),
+      scribes.map((scribe) =>
+        line('long', name, `${words.edge(scribe)} ${text(scribe.allowance)}`),
+      ),
     ),
     ...studLines(fit, wallName, length, words).map((said) => line('studs', '', said)),
   ];

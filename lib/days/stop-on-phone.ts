@@ -55,9 +55,9 @@ function withEvent(stop: StopView, event: DayEvent, tapper: Tapper): StopView {
     case 'as-found': {
       const sheet = stop.sheets.find(({ release }) => release.id === event.releaseId);
       if (!sheet || stop.asFound.some(({ id }) => id === event.id)) return stop;
-      const { id, at } = event;
+      const { id, at, releaseId, readings } = event;
       const roomId = sheet.wallBook.room.id;
-      const found = { id, roomId, at, ...event.said };
+      const found = { id, roomId, releaseId, readings, at, ...event.said };
       return { ...stop, asFound: [...stop.asFound, found] };
     }
     case 'sign-off': {

@@ -1,7 +1,9 @@
-import type { Run } from '@/lib/contracts/runs';
+import type { Run, Unit } from '@/lib/contracts/runs';
 import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { Fit } from '@/lib/measure/fit';
+import { unitWords } from '@/lib/sheet/unit-words';
 import { roundBlankUp } from '@/lib/units/round';
+import { shortOfStuds } from './short-of-studs';
 
 export type BringItem =
   /** Strips of one length; the widest blank of them. */
@@ -28,7 +30,10 @@ const standsOnLegs = new Set(['base', 'drawers', 'sink', 'corner', 'tall']);
  * Example: two fillers of 762 with blanks 63 and 92: { filler, 2, 762, 92 }.
  * Source: the fit; tools by common practice (S07, S12, S17).
  */
-export function whatToBring(sets: readonly Set[]): BringItem[] {
+export function whatToBring(
+  sets: readonly Set[],
+  nameOf: (unit: Unit) => string = unitWords,
+): BringItem[] {
   const fillers = new Map<number, { count: number; widestMm: number }>();
   const units = sets.flatMap((set) => set.runs.flatMap((run) => run.units));
   const fits = sets.flatMap((set) => set.fit.runs);
@@ -55,11 +60,7 @@ export function whatToBring(sets: readonly Set[]): BringItem[] {
   const rocking = fits.filter(({ setLine }) => setLine?.rocks).map(({ name }) => name);
   const onLegs = units.filter(({ kind }) => standsOnLegs.has(kind)).length;
   const hasScribes = fillers.size > 0 || fits.some(({ scribes }) => scribes.length > 0);
-  const short = fits.flatMap((run) =>
-    run.units.flatMap(({ studs, name, kind }) =>
-      studs && !studs.enough ? [`${run.name}: ${name || kind}`] : [],
-    ),
-  );
+  const short = sets.flatMap(({ runs, fit }) => shortOfStuds(runs, fit, nameOf));
   return [
     ...[...fillers]
       .sort(([one], [other]) => other - one)

@@ -11,6 +11,7 @@ export type KeptHere = {
   roomIds: readonly string[];
   /** Of these, kept with their wall books. */
   keptRoomIds: ReadonlySet<string>;
+  language?: 'en' | 'es';
 };
 
 export type Readiness = { isReady: boolean; lines: { words: string; isKept: boolean }[] };
@@ -23,23 +24,41 @@ export type Readiness = { isReady: boolean; lines: { words: string; isKept: bool
  */
 export function readinessOf(kept: KeptHere): Readiness {
   const { isProgramKept, fetchedAt, visitCount, roomIds, keptRoomIds } = kept;
+  const say = words[kept.language ?? 'en'];
   const stops = kept.keptStopCount ?? visitCount;
   const books = roomIds.filter((id) => keptRoomIds.has(id)).length;
   const lines = [
-    { words: isProgramKept ? 'The program' : 'The program: not yet', isKept: isProgramKept },
+    { words: isProgramKept ? say.program : say.notYet(say.program), isKept: isProgramKept },
     {
-      words: fetchedAt === null ? 'Visits: not yet' : `Visits: ${ofAll(stops, visitCount)}`,
+      words:
+        fetchedAt === null
+          ? say.notYet(say.visits)
+          : `${say.visits}: ${stops === visitCount ? visitCount : say.of(stops, visitCount)}`,
       isKept: fetchedAt !== null && stops === visitCount,
     },
     {
-      words:
-        roomIds.length === 0
-          ? 'Wall books: no room is drawn yet'
-          : `Wall books: ${books} of ${roomIds.length}`,
+      words: `${say.books}: ${roomIds.length === 0 ? say.noRoom : say.of(books, roomIds.length)}`,
       isKept: fetchedAt !== null && books === roomIds.length,
     },
   ];
   return { isReady: lines.every(({ isKept }) => isKept), lines };
 }
 
-const ofAll = (count: number, all: number) => (count === all ? `${all}` : `${count} of ${all}`);
+const words = {
+  en: {
+    program: 'The program',
+    visits: 'Visits',
+    books: 'Wall books',
+    noRoom: 'no room is drawn yet',
+    notYet: (what: string) => `${what}: not yet`,
+    of: (count: number, all: number) => `${count} of ${all}`,
+  },
+  es: {
+    program: 'El programa',
+    visits: 'Visitas',
+    books: 'Libros de medidas',
+    noRoom: 'aún no hay cuartos dibujados',
+    notYet: (what: string) => `${what}: aún no`,
+    of: (count: number, all: number) => `${count} de ${all}`,
+  },
+};

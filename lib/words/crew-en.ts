@@ -14,7 +14,7 @@ export const crewEn: CrewWords = {
     'check-measure': 'Check measure',
     delivery: 'Delivery',
     install: 'Install',
-    'worktop-template': 'Top template',
+    'worktop-template': '{Counter} template',
     return: 'Return visit',
   },
   statuses: {
@@ -125,6 +125,7 @@ export const crewEn: CrewWords = {
   mitres: 'Corners as they are',
   mitre: (corner, angle, saw) => `Corner ${corner}: ${angle}, saw at ${saw}`,
   leftLong: 'Left long by the bench',
+  edge: ({ words }) => words,
   studsHere: 'Studs',
   studsAt: (wall, list) => `Wall ${wall}, from its left: ${list}`,
   predicted: 'worked out from the spacing: find it first',
@@ -232,4 +233,11 @@ export const crewEn: CrewWords = {
   signedSafe:
     'It is safe on this phone, and nothing in it can be changed. A copy goes to the customer.',
   copy: 'Open the copy',
+  toMend: 'Snags to mend',
+  toMendOf: (count, late) => `${count}${late > 0 ? `, ${late} late` : ''}`,
+  late: 'late',
+  nothingToMend: 'Nothing to mend',
+  nothingToMendMore: 'Snags of all your jobs that the crew mends stand here, by due date.',
+  thereOn: (day) => `you are there ${day}`,
+  noVisitThere: 'no visit there is booked',
 };

@@ -1,5 +1,13 @@
 import type { CrewWords } from './crew';
 
+const edgesEs = {
+  'filler-left': 'relleno, extremo izquierdo',
+  'filler-right': 'relleno, extremo derecho',
+  'finished-end': 'extremo terminado',
+  ceiling: 'arriba, hasta el techo',
+  kick: 'frente del {kick}',
+} as const;
+
 /** What a crew's phone says in Spanish as it is spoken on sites in the US; recalled, see DEVELOPERS.md. */
 export const crewEs: CrewWords = {
   languageName: 'Español',
@@ -14,7 +22,7 @@ export const crewEs: CrewWords = {
     'check-measure': 'Segunda medición',
     delivery: 'Entrega',
     install: 'Instalación',
-    'worktop-template': 'Plantilla de cubierta',
+    'worktop-template': 'Plantilla de {counter}',
     return: 'Visita de regreso',
   },
   statuses: {
@@ -82,13 +90,13 @@ export const crewEs: CrewWords = {
   bringItems: {
     filler: (count, length, widest) =>
       `Relleno: ${count === 1 ? '1 tira' : `${count} tiras`} de ${length}, de al menos ${widest} de ancho`,
-    kick: (length, tallest) => `Zócalo: ${length} en total, de al menos ${tallest} de alto`,
+    kick: (length, tallest) => `{Kick}: ${length} en total, de al menos ${tallest} de alto`,
     crown: (length) => `Moldura de corona o relleno de techo: ${length}`,
     legs: (count, least, most) => `${count} patas niveladoras, de ${least} a ${most}`,
     shims: (runs) => `Cuñas: ${runs} tocan la pared en un solo punto`,
     backing: (units) => `Refuerzo para la pared, faltan montantes detrás de: ${units}`,
     'scribe-tools': 'Compás de trazar, cepillo, sierra de hoja fina, lijadora de banda',
-    fixings: 'Tornillos para montantes y para unir cajas; ni clavos ni tornillos de tablarroca',
+    fixings: 'Tornillos para montantes y para unir cajas; ni clavos ni tornillos de {drywall}',
     finder: 'Detector de montantes, cables y tubos',
     level: 'Nivel largo, láser, regla recta',
     protection: 'Cubiertas de piso, plástico, aspiradora, protección de ojos, oídos y polvo',
@@ -103,9 +111,9 @@ export const crewEs: CrewWords = {
     tall: 'Torres, aseguradas antes de poner las puertas',
     wall: 'Gabinetes altos',
     base: 'Gabinetes bajos, calzados hasta el punto más alto',
-    island: 'Isla, fija al piso antes de la cubierta',
+    island: 'Isla, fija al piso antes de la {counter}',
     fillers: 'Rellenos y paneles',
-    kicks: 'Zócalo, corona, moldura inferior',
+    kicks: '{Kick}, corona, moldura inferior',
     doors: 'Puertas y cajones parejos, jaladeras puestas',
     walk: 'Limpiar, y recorrer con el cliente',
   },
@@ -120,11 +128,15 @@ export const crewEs: CrewWords = {
   filler: (side, top, bottom) => `${side}: ${top} arriba, ${bottom} abajo`,
   blank: (size) => `pieza de ${size}`,
   sides: { left: 'izquierda', right: 'derecha' },
-  kickHeights: 'Alturas del zócalo',
+  kickHeights: 'Alturas del {kick}',
   kickRange: (least, most) => `de ${least} a ${most}`,
   mitres: 'Esquinas como están',
   mitre: (corner, angle, saw) => `Esquina ${corner}: ${angle}, sierra a ${saw}`,
   leftLong: 'El taller dejó de más',
+  edge: ({ edge, words }) => {
+    const side = words.endsWith('left') ? ' izquierdo' : words.endsWith('right') ? ' derecho' : '';
+    return `${edgesEs[edge]}${side}`;
+  },
   studsHere: 'Montantes',
   studsAt: (wall, list) => `Pared ${wall}, desde su izquierda: ${list}`,
   predicted: 'calculado por la separación: búsquelo primero',
@@ -138,7 +150,7 @@ export const crewEs: CrewWords = {
       `Al colgar estos gabinetes, una persona puede sostener ${c.kg} kg (${c.lb} lb). Más pesado: entre dos o con elevador.`,
     tall: () => 'Torres: se levantan entre dos y se aseguran antes de poner las puertas.',
     'wall-fixing': () =>
-      'Los gabinetes altos van arriba y abajo a montantes o refuerzos, nunca solo al panel; sin tornillos de tablarroca.',
+      'Los gabinetes altos van arriba y abajo a montantes o refuerzos, nunca solo al panel; sin tornillos de {drywall}.',
     'studs-short': (c) =>
       `Faltan montantes detrás de ${c.names?.join(', ')}: ponga refuerzo primero.`,
     cables: () => 'Busque cables y tubos antes de taladrar.',
@@ -232,4 +244,11 @@ export const crewEs: CrewWords = {
   signedBy: (name, when) => `Firmado por ${name}, ${when}`,
   signedSafe: 'Está a salvo en este teléfono y nada se puede cambiar. Una copia va al cliente.',
   copy: 'Abrir la copia',
+  toMend: 'Pendientes por arreglar',
+  toMendOf: (count, late) => `${count}${late > 0 ? `, ${late} atrasados` : ''}`,
+  late: 'atrasado',
+  nothingToMend: 'Nada por arreglar',
+  nothingToMendMore: 'Los pendientes de todos sus trabajos que arregla el equipo, por fecha.',
+  thereOn: (day) => `va el ${day}`,
+  noVisitThere: 'sin visita agendada',
 };

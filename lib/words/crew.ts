@@ -6,13 +6,13 @@ import type { SnagKind, SnagMender } from '@/lib/contracts/snags';
 import type { ReportVisitInput, VisitStatus } from '@/lib/contracts/visits';
 import type { SettingStep, StartReason } from '@/lib/days/setting-order';
 import type { BringItem } from '@/lib/days/what-to-bring';
+import type { EdgeScribe } from '@/lib/measure/run-fit';
 import type { VisitKind } from '@/lib/schedule/visit-kind';
 import { crewEn } from './crew-en';
 import { crewEs } from './crew-es';
-import { tradeName, tradeWord } from './trade';
+import { type Region, spanishTradeWord, tradeWord } from './trade';
 
 export type CrewLanguage = 'en' | 'es';
-type Region = 'US' | 'UK' | 'AU' | 'EU';
 type Count = (count: number) => string;
 type One = (text: string) => string;
 
@@ -95,6 +95,8 @@ export type CrewWords = {
   mitres: string;
   mitre: (corner: string, angle: string, saw: string) => string;
   leftLong: string;
+  /** Which edge: the engine says it in English. */
+  edge: (scribe: Pick<EdgeScribe, 'edge' | 'words'>) => string;
   studsHere: string;
   studsAt: (wall: string, list: string) => string;
   predicted: string;
@@ -158,17 +160,31 @@ export type CrewWords = {
   signedBy: (name: string, when: string) => string;
   signedSafe: string;
   copy: string;
+  toMend: string;
+  toMendOf: (count: number, late: number) => string;
+  late: string;
+  nothingToMend: string;
+  nothingToMendMore: string;
+  thereOn: One;
+  noVisitThere: string;
 };
 
 export const crewWords: Record<CrewLanguage, CrewWords> = { en: crewEn, es: crewEs };
+
+const fills = { kick: 'kick', drywall: 'board', counter: 'counter' } as const;
 
 /**
  * Fills the names of things as the shop's region calls them; a capital in the braces keeps a capital.
  * Edge: words without braces come back as they are. Example: "{Kick} face" in the UK is "Plinth face".
  */
-export function inRegion(words: string, region: Region): string {
-  return words
-    .replaceAll('{kick}', tradeWord('kick', region))
-    .replaceAll('{Kick}', tradeName('kick', region))
-    .replaceAll('{drywall}', tradeWord('board', region));
+export function inRegion(
+  words: string,
+  { region, language }: { region: Region; language: CrewLanguage },
+): string {
+  return words.replace(/\{(\w)(\w+)\}/g, (braces, first: string, rest: string) => {
+    const term = Object.entries(fills).find(([name]) => name === first.toLowerCase() + rest)?.[1];
+    if (!term) return braces;
+    const word = language === 'es' ? spanishTradeWord(term, region) : tradeWord(term, region);
+    return first === first.toLowerCase() ? word : word.charAt(0).toUpperCase() + word.slice(1);
+  });
 }

@@ -67,6 +67,8 @@ export async function getStop(
     .select({
       id: siteChecks.id,
       roomId: siteChecks.roomId,
+      releaseId: siteChecks.releaseId,
+      readings: siteChecks.readings,
       disagreements: siteChecks.disagreements,
       changes: siteChecks.changes,
       at: siteChecks.at,

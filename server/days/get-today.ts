@@ -7,6 +7,7 @@ import { localDate, startOfLocalDay } from '@/lib/time/local-moment';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { readVisits } from '@/server/visits/read-visits';
 import { ofOwnCrews } from './own-crews';
+import { readSnagsToMend } from './read-snags-to-mend';
 import { withDrives } from './with-drives';
 import { withRooms } from './with-rooms';
 
@@ -35,5 +36,6 @@ export async function getToday(ctx: PersonContext, input: TodayInput): Promise<T
     date,
     dayWords: formatLocalDay(date, { language: 'en', region }),
     visits: await withDrives(ctx, await withRooms(ctx, found)),
+    snags: await readSnagsToMend(ctx),
   };
 }

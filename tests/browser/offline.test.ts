@@ -215,6 +215,33 @@ describe('a room read with no signal at all', () => {
     await expect.poll(status, { timeout: 15_000 }).toBe('on-site');
   });
 
+  it('keeps what is tapped before the library of its store has come', async () => {
+    const own = await openShopOfToday(inject('baseUrl'), 'Ada Moss');
+    const phone = await phoneOf(own);
+    let letCome = () => {};
+    const coming = new Promise<void>((resolve) => {
+      letCome = resolve;
+    });
+    let isHeld = false;
+    await phone.page.route('**/_next/static/chunks/*.js', async (route) => {
+      const response = await route.fetch();
+      const body = await response.text();
+      if (body.includes('MissingAPIError')) {
+        isHeld = true;
+        await coming;
+      }
+      await route.fulfill({ response, body });
+    });
+    await phone.page.goto(paths.todayVisit(own.visitId));
+    await expect.poll(() => isHeld).toBe(true);
+    await phone.page.getByRole('button', { name: 'Arrived' }).tap();
+    const status = async () => (await getAt<VisitView>(own, apiPaths.visit(own.visitId))).status;
+    expect(await status()).toBe('booked');
+    letCome();
+    await expect.poll(status, { timeout: 15_000 }).toBe('on-site');
+    await phone.page.getByText(/^all sent/).waitFor();
+  });
+
   /** Takes a photo of wall A and puts a circle, an arrow and a figure on it. */
   async function markPhoto(page: Page): Promise<void> {
     await page.getByRole('link', { name: 'The whole room' }).tap();

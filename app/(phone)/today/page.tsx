@@ -14,7 +14,5 @@ export default async function TodayPage({
   const ctx = await pageContext('visits:read');
   const { on } = await searchParams;
   const view = await getToday(ctx, on && isLocalDate(on) ? { date: on } : {});
-  return (
-    <TodayScreen view={view} holder={{ shopName: ctx.shop.name, personName: ctx.actor.name }} />
-  );
+  return <TodayScreen view={view} />;
 }

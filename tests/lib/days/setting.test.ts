@@ -115,10 +115,15 @@ describe('what stands on the crew’s sheet', () => {
   });
 
   it('calls things as the shop’s region calls them', () => {
-    expect(inRegion('{Kick} face, no {drywall} screws', 'US')).toBe(
+    expect(inRegion('{Kick} face, no {drywall} screws', { region: 'US', language: 'en' })).toBe(
       'Toe kick face, no drywall screws',
     );
-    expect(inRegion('{Kick} face, {kick}', 'UK')).toBe('Plinth face, plinth');
+    expect(inRegion('{Kick} face, {kick}', { region: 'UK', language: 'en' })).toBe(
+      'Plinth face, plinth',
+    );
+    expect(inRegion('Alturas del {kick}', { region: 'US', language: 'es' })).toBe(
+      'Alturas del zoclo',
+    );
     expect(rules.region).toBe('US');
   });
 });
