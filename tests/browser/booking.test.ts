@@ -84,7 +84,7 @@ describe('booking with the customer on the phone', () => {
     await keepPicture(page, 'crews-board');
   });
 
-  it('on a phone: kept a quarter of an hour while the customer thinks, then booked', async () => {
+  it('on a phone: kept a quarter of an hour while the customer thinks, booked, and kept again by undo', async () => {
     const page = await browser.openPage({ as: 'scheduler', size: 'phone' });
     await page.goto(paths.diary());
     await settled(page);
@@ -98,6 +98,9 @@ describe('booking with the customer on the phone', () => {
     await page.getByRole('button', { name: 'Book the held time' }).tap();
     await page.getByText('Booked: Wren Castell').waitFor();
     expect((await visitOf('Wren Castell'))?.status).toBe('booked');
+    await page.getByRole('button', { name: 'Undo' }).tap();
+    await page.getByText('Wren Castell waits to be booked again, the time is held').waitFor();
+    expect((await visitOf('Wren Castell'))?.status).toBe('held');
   });
 
   it('shows two at once what the other does, and lets neither move over it unseen', async () => {

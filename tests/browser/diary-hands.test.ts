@@ -152,7 +152,7 @@ describe('the diary under the hand', () => {
     return list.find(({ customerName }) => customerName === customer)?.jobId ?? '';
   }
 
-  it('goes by key: month, day, week, earlier, today, the list of keys, a job by name', async () => {
+  it('goes by key: month, day, week, list, the list of keys, a job by name', async () => {
     const page = await openWeek();
     await page.keyboard.press('m');
     await page.locator('.fc-dayGridMonth-view').waitFor();
@@ -162,6 +162,12 @@ describe('the diary under the hand', () => {
     await page.locator('.fc-timeGridDay-view').waitFor();
     await page.keyboard.press('w');
     await page.locator('.fc-timeGridWeek-view').waitFor();
+    await page.keyboard.press('l');
+    const list = page.getByRole('region', { name: 'List of visits' });
+    await list.getByRole('button', { name: /Marit Aldous/ }).waitFor();
+    await expectNoSeriousFault(page);
+    await keepPicture(page, 'diary-list');
+    await page.keyboard.press('w');
     await page.keyboard.press('?');
     const keys = page.getByRole('dialog');
     await keys.getByText('Find a job or a page').waitFor();
@@ -174,5 +180,22 @@ describe('the diary under the hand', () => {
     await expectNoSeriousFault(page);
     await page.keyboard.press('Enter');
     await page.getByRole('heading', { level: 1, name: /Ruth Ember/ }).waitFor();
+  });
+
+  it('finds a booked visit by name and opens it where it stands, by key alone', async () => {
+    const page = await browser.openPage({ as: 'scheduler' });
+    await page.goto(paths.diary());
+    await settled(page);
+    for (const key of ['f', ...'aldous']) await page.keyboard.press(key);
+    await page.getByRole('heading', { name: 'Booked' }).waitFor();
+    await expectNoSeriousFault(page);
+    await settled(page);
+    await page.keyboard.press('Enter');
+    await page.getByRole('dialog', { name: /Marit Aldous/ }).waitFor();
+    await page
+      .getByText(new RegExp(`Week of ${Number(monday.slice(8))} `))
+      .or(page.locator(`[data-date="${monday}"]`))
+      .first()
+      .waitFor();
   });
 });
