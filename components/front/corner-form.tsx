@@ -18,6 +18,7 @@ export function CornerForm() {
         diagonal: 'Mark to mark',
         depth: 'Depth of the base',
       }}
+      taped="diagonal"
       examples={{
         in: { legLeft: '36', legRight: '48', diagonal: '59 3/8', depth: '24' },
         mm: { legLeft: '900', legRight: '1200', diagonal: '1484', depth: '600' },

@@ -13,6 +13,7 @@ export function FillerForm() {
       title="Get the filler"
       how="Stand the last cabinet plumb and measure from its face to the wall at three heights."
       labels={{ top: 'Gap at the top', middle: 'In the middle', bottom: 'At the bottom' }}
+      taped="top"
       examples={{
         in: { top: '1 13/16', middle: '1 7/8', bottom: '2 1/8' },
         mm: { top: '46', middle: '48', bottom: '54' },

@@ -15,6 +15,8 @@ type LengthsFormProps<Field extends string, Result> = {
   /** How it is read off the wall, in one line. */
   how: string;
   labels: Lengths<Field>;
+  /** The length that the marks of the tape change until another is touched. */
+  taped: Field;
   /** What stands there at first sight, in each unit: out of true, so that it shows what it finds. */
   examples: Record<LengthUnit, Lengths<Field>>;
   check: (
@@ -31,6 +33,7 @@ export function LengthsForm<Field extends string, Result>({
   title,
   how,
   labels,
+  taped,
   examples,
   check,
   Drawing,
@@ -39,7 +42,7 @@ export function LengthsForm<Field extends string, Result>({
   const fields = Object.keys(labels) as Field[];
   const [unit, setUnit] = useState<LengthUnit>('in');
   const [text, setText] = useState(examples.in);
-  const [active, setActive] = useState(fields[fields.length - 1]);
+  const [active, setActive] = useState(taped);
   const checked = check(text, unit);
   const [last, setLast] = useState(checked.result);
 
@@ -79,14 +82,12 @@ export function LengthsForm<Field extends string, Result>({
               enterKeyHint="next"
             />
           ))}
-          {active ? (
-            <TapeMarks
-              of={labels[active]}
-              text={text[active]}
-              unit={unit}
-              onText={(next) => change({ ...text, [active]: next }, unit)}
-            />
-          ) : null}
+          <TapeMarks
+            of={labels[active]}
+            text={text[active]}
+            unit={unit}
+            onText={(next) => change({ ...text, [active]: next }, unit)}
+          />
         </>
       }
       drawing={shown ? <Drawing result={shown} unit={unit} /> : null}

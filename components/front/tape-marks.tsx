@@ -22,11 +22,12 @@ export function TapeMarks({ of, text, unit, onText }: TapeMarksProps) {
       <div className="grid grid-cols-8 gap-1 md:grid-cols-4">
         {unit === 'in'
           ? eighths.map((fraction, at) => (
+              // A keyboard at hand types it as fast.
               <button
                 key={fraction}
                 type="button"
                 aria-label={at === 0 ? 'no fraction' : `and ${fraction}`}
-                className={`${look} diagonal-fractions`}
+                className={`${look} pointer-fine:hidden ${at === 0 ? '' : 'diagonal-fractions'}`}
                 onClick={() => onText(withSixteenths(text, at * 2))}
               >
                 {fraction}
