@@ -93,6 +93,7 @@ export function DiaryScreen(props: DiaryScreenProps) {
     shop: { pattern, crews },
     visitOf: (id) => data?.find((visit) => visit.id === id),
     nudge: mayBook ? mover.nudge : null,
+    anotherTime: (visit) => setSubject(subjectOfVisit(visit)),
     openWaiting: (index) => {
       const item = waiting.shown[index];
       if (item) openTimes(item);

@@ -21,6 +21,7 @@ type DiaryKeys = {
   visitOf: (id: string) => VisitView | undefined;
   /** Null where the person may not move visits. */
   nudge: ((visit: VisitView, change: (place: Place) => Place) => void) | null;
+  anotherTime: (visit: VisitView) => void;
   openWaiting: (index: number) => void;
 };
 
@@ -68,9 +69,15 @@ export function useDiaryKeys(diary: DiaryKeys) {
       beside.focus();
       return;
     }
-    const step = visitStep(event, diary.shop);
     const visit = diary.visitOf(element.dataset.visitId ?? '');
-    if (!step || !visit || !diary.nudge || !canChange(visit)) return;
+    if (!visit || !diary.nudge || !canChange(visit)) return;
+    if (event.key.toLowerCase() === 'o') {
+      event.preventDefault();
+      diary.anotherTime(visit);
+      return;
+    }
+    const step = visitStep(event, diary.shop);
+    if (!step) return;
     event.preventDefault();
     diary.nudge(visit, (place) => step(visit, place));
     keepFocusOn(visit.id);

@@ -89,7 +89,9 @@ export function VisitDialog({
       </dl>
       {isChangeable ? (
         <div>
-          <Button onClick={onAnotherTime}>Times that work instead</Button>
+          <Button onClick={onAnotherTime} data-first-focus>
+            Times that work instead
+          </Button>
         </div>
       ) : null}
       {mayBook && visit.status === 'held' ? (

@@ -18,6 +18,7 @@ export const visitKeyWords = [
   { keys: '+', words: 'The visit in focus: half an hour longer' },
   { keys: '-', words: 'The visit in focus: half an hour shorter' },
   { keys: 'X', words: 'The visit in focus: to the next crew that can' },
+  { keys: 'O', words: 'The visit in focus: other times that work' },
 ] as const;
 
 export function visitStep(

@@ -22,6 +22,9 @@ type DialogProps = {
   className?: string;
 };
 
+/** Whichever stands first; a dialog may put a button before its fields, for what is wanted most. */
+const firstToFocus = '[data-first-focus], input, select, textarea, footer button';
+
 /** A sheet laid over the page: the browser's own dialog, so focus, Escape and the backdrop are its own. */
 export function Dialog({ isOpen, onClose, title, children, footer, className }: DialogProps) {
   const ref = useRef<HTMLDialogElement>(null);
@@ -32,7 +35,7 @@ export function Dialog({ isOpen, onClose, title, children, footer, className }: 
     if (!dialog || !isOpen) return;
     const focusedBefore = document.activeElement;
     dialog.showModal();
-    dialog.querySelector<HTMLElement>('input, select, textarea, footer button')?.focus();
+    dialog.querySelector<HTMLElement>(firstToFocus)?.focus();
     return () => {
       dialog.close();
       // A dialog that is taken away whole does not give the focus back by itself.
