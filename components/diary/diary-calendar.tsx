@@ -17,9 +17,11 @@ import FullCalendar from '@fullcalendar/react';
 import timeGridPlugin from '@fullcalendar/timegrid';
 import { type RefObject, useMemo } from 'react';
 import type { CrewView, VisitView } from '@/lib/contracts/visits';
+import { clockOf } from '@/lib/time/text-locale';
 import type { WorkingPattern } from '@/lib/time/workdays';
 import './diary-calendar.css';
 import { diaryEvents, type EventDetail } from './diary-events';
+import { useDiaryLocale } from './diary-locale';
 import { reachByKey } from './reach-by-key';
 import { VisitEvent } from './visit-event';
 
@@ -49,7 +51,12 @@ type DiaryCalendarProps = {
 // The calendar takes a new array, object or function for a changed option, and a changed option for a new
 // range, which it tells the page, which renders it anew: all that never changes stands out here.
 const plugins = [dayGridPlugin, timeGridPlugin, interactionPlugin, momentTimezonePlugin];
-const clock = { hour: '2-digit', minute: '2-digit', hour12: false } as const;
+const clocks = {
+  '12h': { hour: 'numeric', hour12: true },
+  '24h': { hour: '2-digit', minute: '2-digit', hour12: false },
+} as const;
+/** For the days in its title (BCP 47); Europe's office reads English too. */
+const localeOf = { US: 'en-US', UK: 'en-GB', AU: 'en-AU', EU: 'en-GB' } as const;
 const views = { dayGridMonth: { dayHeaderFormat: { weekday: 'short' } } } as const;
 const drawVisit = ({ event, view }: EventContentArg) => {
   const { visit, pieceNumber = 1, isGhost = false } = event.extendedProps as Partial<EventDetail>;
@@ -67,6 +74,7 @@ const nameVisit = ({ el, event }: EventMountArg) => {
 
 export function DiaryCalendar(props: DiaryCalendarProps) {
   const { visits, crews, ghost, mayBook, hours } = props;
+  const { region } = useDiaryLocale();
   // A new array at each render would snap a dragged visit back.
   const events = useMemo(
     () =>
@@ -104,12 +112,12 @@ export function DiaryCalendar(props: DiaryCalendarProps) {
       snapDuration="00:15:00"
       slotMinTime={hoursAround(hours.dayStart, -1)}
       slotMaxTime={hoursAround(hours.dayEnd, 3)}
-      slotLabelFormat={clock}
+      locale={localeOf[region]}
+      slotLabelFormat={clocks[clockOf[region]]}
       views={views}
       dayHeaderFormat={dayHead}
       businessHours={businessHours}
       hiddenDays={daysOff}
-      eventTimeFormat={clock}
       dayMaxEvents={5}
       droppable={mayBook}
       events={events}

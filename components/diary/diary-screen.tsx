@@ -6,11 +6,13 @@ import { LinkButton } from '@/components/ui/link-button';
 import type { Opening } from '@/lib/contracts/openings';
 import type { CrewView, VisitView, WaitingItem } from '@/lib/contracts/visits';
 import { paths } from '@/lib/paths';
+import type { Region } from '@/lib/time/text-locale';
 import type { WorkingPattern } from '@/lib/time/workdays';
 import { BookDialog } from './book-dialog';
 import { CrewKey } from './crew-key';
 import { useDiaryFilter } from './diary-filter';
 import { DiaryHead } from './diary-head';
+import { DiaryLocale } from './diary-locale';
 import { DiarySheet } from './diary-sheet';
 import { useDiaryView } from './diary-view';
 import { localStart } from './local-start';
@@ -30,6 +32,7 @@ import { useWaiting } from './waiting-query';
 
 export type DiaryScreenProps = {
   zone: string;
+  region: Region;
   today: string;
   /** Local date to open on, today unless the address says otherwise. */
   startOn: string;
@@ -42,9 +45,10 @@ type Booking = { item: WaitingItem; date: string; time: string; crewId?: string 
 
 /** The diary beside its waiting list: the scheduler's whole screen. */
 export function DiaryScreen(props: DiaryScreenProps) {
-  const { zone, today, startOn, pattern, crews, mayBook } = props;
+  const { zone, region, today, startOn, pattern, crews, mayBook } = props;
+  const locale = useMemo(() => ({ language: 'en', region }) as const, [region]);
   const [shown, show] = useDiaryView();
-  const range = useDiaryRange(startOn, shown);
+  const range = useDiaryRange(startOn, shown, locale);
   const filter = useDiaryFilter(crews);
   const mover = useMover({ zone, pattern, crews });
   const { data, error } = useVisits(range);
@@ -121,21 +125,23 @@ export function DiaryScreen(props: DiaryScreenProps) {
             What is shown may be old. It is tried again by itself.
           </ErrorState>
         ) : null}
-        <DiarySheet
-          {...{ zone, today, pattern, shown, range, visits, mayBook, onVisitKey }}
-          crews={crews}
-          shownCrews={filter.shownCrews}
-          ghost={ghost}
-          onOpen={({ id }) => setOpenedId(id)}
-          onDay={(date) => {
-            range.goTo(date);
-            show({ view: 'day' });
-          }}
-          onMove={(visit, change) =>
-            mover.send(original(visit), { ...placeOf(original(visit), zone), ...change })
-          }
-          onDropWaiting={dropWaiting}
-        />
+        <DiaryLocale value={locale}>
+          <DiarySheet
+            {...{ zone, today, pattern, shown, range, visits, mayBook, onVisitKey }}
+            crews={crews}
+            shownCrews={filter.shownCrews}
+            ghost={ghost}
+            onOpen={({ id }) => setOpenedId(id)}
+            onDay={(date) => {
+              range.goTo(date);
+              show({ view: 'day' });
+            }}
+            onMove={(visit, change) =>
+              mover.send(original(visit), { ...placeOf(original(visit), zone), ...change })
+            }
+            onDropWaiting={dropWaiting}
+          />
+        </DiaryLocale>
       </section>
       <aside
         className={`flex min-h-0 flex-col border-rule lg:border-l lg:pl-5 print:hidden ${

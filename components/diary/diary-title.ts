@@ -1,12 +1,14 @@
 import { addDays, type LocalDate } from '@/lib/time/civil';
-import { monthWords } from '@/lib/time/text-locale';
+import { monthWords, type TextLocale } from '@/lib/time/text-locale';
 
-/** Example: "Week of 7 December", "7 December – 1 January". */
-export function boardTitle(from: LocalDate, weeks: number): string {
-  if (weeks === 1) return `Week of ${dayOfMonth(from)}`;
-  return `${dayOfMonth(from)} – ${dayOfMonth(addDays(from, weeks * 7 - 1))}`;
+/** Example: "Week of December 7" (US), "7 December – 1 January" (UK). */
+export function boardTitle(from: LocalDate, weeks: number, locale: TextLocale): string {
+  if (weeks === 1) return `Week of ${dayOfMonth(from, locale)}`;
+  return `${dayOfMonth(from, locale)} – ${dayOfMonth(addDays(from, weeks * 7 - 1), locale)}`;
 }
 
-function dayOfMonth(date: LocalDate): string {
-  return `${Number(date.slice(8))} ${monthWords.en[Number(date.slice(5, 7)) - 1]}`;
+function dayOfMonth(date: LocalDate, { language, region }: TextLocale): string {
+  const day = Number(date.slice(8));
+  const month = monthWords[language][Number(date.slice(5, 7)) - 1];
+  return region === 'US' ? `${month} ${day}` : `${day} ${month}`;
 }

@@ -4,6 +4,7 @@ import type FullCalendar from '@fullcalendar/react';
 import { useEffect, useRef, useState } from 'react';
 import { addDays, type LocalDate } from '@/lib/time/civil';
 import { formatLocalDay } from '@/lib/time/format-civil';
+import type { TextLocale } from '@/lib/time/text-locale';
 import { mondayOf } from './board/board-days';
 import type { CalendarRange } from './diary-calendar';
 import { boardTitle } from './diary-title';
@@ -15,7 +16,7 @@ const listedDays = 14;
 export type DiaryRange = ReturnType<typeof useDiaryRange>;
 
 /** Which days are shown, whether by the crews' board or by the calendar, and how to get to others. */
-export function useDiaryRange(startOn: LocalDate, shown: ShownView) {
+export function useDiaryRange(startOn: LocalDate, shown: ShownView, locale: TextLocale) {
   const calendarRef = useRef<FullCalendar>(null);
   const [on, setOn] = useState(startOn);
   const [calendarRange, setCalendarRange] = useState<CalendarRange | null>(null);
@@ -42,12 +43,12 @@ export function useDiaryRange(startOn: LocalDate, shown: ShownView) {
   const board = {
     from: monday,
     to: addDays(monday, shown.weeks * 7),
-    title: boardTitle(monday, shown.weeks),
+    title: boardTitle(monday, shown.weeks, locale),
   };
   const list = {
     from: on,
     to: addDays(on, listedDays),
-    title: `From ${formatLocalDay(on, { language: 'en', region: 'UK' })}`,
+    title: `From ${formatLocalDay(on, locale)}`,
   };
   return {
     calendarRef,

@@ -193,7 +193,7 @@ describe('the diary under the hand', () => {
     await page.keyboard.press('Enter');
     await page.getByRole('dialog', { name: /Marit Aldous/ }).waitFor();
     await page
-      .getByText(new RegExp(`Week of ${Number(monday.slice(8))} `))
+      .getByText(new RegExp(`Week of \\w+ ${Number(monday.slice(8))}$`))
       .or(page.locator(`[data-date="${monday}"]`))
       .first()
       .waitFor();

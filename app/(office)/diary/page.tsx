@@ -16,12 +16,13 @@ export default async function DiaryPage({
 }) {
   const ctx = await pageContext('visits:read');
   const { on } = await searchParams;
-  const { zone } = ctx.shop;
+  const { zone, region } = ctx.shop;
   const { dayStart, dayEnd, workdays, closedDays } = bookingDays(ctx);
   const today = localDate(ctx.now, zone);
   return (
     <DiaryScreen
       zone={zone}
+      region={region}
       today={today}
       startOn={on && isLocalDate(on) ? on : today}
       pattern={{ dayStart, dayEnd, workdays, closedDays }}

@@ -1,10 +1,11 @@
+import { useDiaryLocale } from '@/components/diary/diary-locale';
 import { KindMark } from '@/components/diary/kind-mark';
-import { localStart } from '@/components/diary/local-start';
 import { canChange, isOpen } from '@/components/diary/place';
 import { minutesWords, statusWords } from '@/components/diary/visit-words';
 import { Glyph } from '@/components/ui/glyph';
 import type { VisitView } from '@/lib/contracts/visits';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
+import { formatTime } from '@/lib/time/format-instant';
 import type { Zone } from '@/lib/time/zones';
 import { barName } from './bar-name';
 import type { BoardBar } from './board-bars';
@@ -31,7 +32,7 @@ export function BoardBarButton({
 }) {
   const { visit, firstColumn, lastColumn, lane, restColumns } = bar;
   const { words, verdict } = statusWords[visit.status];
-  const { time } = localStart(visit.startsAt, zone);
+  const time = formatTime(new Date(visit.startsAt), zone, useDiaryLocale());
   const isMovable = mayMove && canChange(visit) && !isGhost;
   const columns = lastColumn - firstColumn + 1;
   const { first, last } = barName(visit.customerName);

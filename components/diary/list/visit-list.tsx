@@ -1,5 +1,6 @@
 'use client';
 
+import { useDiaryLocale } from '@/components/diary/diary-locale';
 import { EmptyState } from '@/components/ui/empty-state';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { CrewView, VisitView } from '@/lib/contracts/visits';
@@ -26,6 +27,7 @@ export function VisitList({
   zone: Zone;
   onOpen: (visit: VisitView) => void;
 }) {
+  const locale = useDiaryLocale();
   const days = listDays(visits, range, zone);
   return (
     <section
@@ -41,7 +43,7 @@ export function VisitList({
         <section key={date} aria-labelledby={`list-${date}`} className="pb-4">
           <TitleBlock
             id={`list-${date}`}
-            title={formatLocalDay(date, { language: 'en', region: 'UK' })}
+            title={formatLocalDay(date, locale)}
             meta={date === today ? 'today' : stands.length}
           />
           <ul>

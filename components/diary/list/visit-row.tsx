@@ -1,11 +1,12 @@
 import { crewColour } from '@/components/diary/crew-colour';
+import { useDiaryLocale } from '@/components/diary/diary-locale';
 import { KindMark } from '@/components/diary/kind-mark';
-import { localStart } from '@/components/diary/local-start';
 import { isOpen } from '@/components/diary/place';
 import { minutesWords, statusWords } from '@/components/diary/visit-words';
 import { Verdict } from '@/components/ui/verdict';
 import type { CrewView, VisitView } from '@/lib/contracts/visits';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
+import { formatTime } from '@/lib/time/format-instant';
 import type { Zone } from '@/lib/time/zones';
 
 /** One visit in a line: opened by its name, rung by its number. */
@@ -23,6 +24,7 @@ export function VisitRow({
   zone: Zone;
   onOpen: (visit: VisitView) => void;
 }) {
+  const locale = useDiaryLocale();
   const { words, verdict } = statusWords[visit.status];
   const piece = visit.pieces[dayNumber - 1];
   const days = visit.pieces.length;
@@ -33,7 +35,7 @@ export function VisitRow({
       style={{ '--crew': crew ? crewColour(crew.colour) : undefined } as React.CSSProperties}
     >
       <span className="visit-row-when">
-        <b>{piece ? localStart(piece.startsAt, zone).time : ''}</b>{' '}
+        <b>{piece ? formatTime(new Date(piece.startsAt), zone, locale) : ''}</b>{' '}
         <span className="text-note text-graphite">
           {days > 1 ? `day ${dayNumber} of ${days}` : minutesWords(visit.workMinutes)}
         </span>
