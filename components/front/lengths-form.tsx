@@ -16,7 +16,7 @@ type LengthsFormProps<Field extends string, Result> = {
   how: string;
   labels: Lengths<Field>;
   /** The length that the marks of the tape change until another is touched. */
-  taped: Field;
+  taped: NoInfer<Field>;
   /** What stands there at first sight, in each unit: out of true, so that it shows what it finds. */
   examples: Record<LengthUnit, Lengths<Field>>;
   check: (
@@ -42,7 +42,7 @@ export function LengthsForm<Field extends string, Result>({
   const fields = Object.keys(labels) as Field[];
   const [unit, setUnit] = useState<LengthUnit>('in');
   const [text, setText] = useState(examples.in);
-  const [active, setActive] = useState(taped);
+  const [active, setActive] = useState<Field>(taped);
   const checked = check(text, unit);
   const [last, setLast] = useState(checked.result);
 
