@@ -105,27 +105,27 @@ export function DiaryScreen(props: DiaryScreenProps) {
   });
 
   return (
-    <div
-      className={`diary-sheet grid gap-6 lg:h-[calc(100dvh-2rem)] print:block print:h-auto ${
-        isAsideShown ? 'lg:grid-cols-[minmax(0,1fr)_20rem]' : ''
-      }`}
-    >
-      <section aria-label="Diary" className="flex min-h-[70dvh] min-w-0 flex-col lg:min-h-0">
-        <DiaryHead
-          title={range.title}
-          shown={shown}
-          onShow={show}
-          onEarlier={() => range.step(-1)}
-          onToday={() => range.goTo(today)}
-          onLater={() => range.step(1)}
-        />
-        <CrewKey crews={crews} filter={filter} />
-        {error ? (
-          <ErrorState title="The diary could not be fetched">
-            What is shown may be old. It is tried again by itself.
-          </ErrorState>
-        ) : null}
-        <DiaryLocale value={locale}>
+    <DiaryLocale value={locale}>
+      <div
+        className={`diary-sheet grid gap-6 lg:h-[calc(100dvh-2rem)] print:block print:h-auto ${
+          isAsideShown ? 'lg:grid-cols-[minmax(0,1fr)_20rem]' : ''
+        }`}
+      >
+        <section aria-label="Diary" className="flex min-h-[70dvh] min-w-0 flex-col lg:min-h-0">
+          <DiaryHead
+            title={range.title}
+            shown={shown}
+            onShow={show}
+            onEarlier={() => range.step(-1)}
+            onToday={() => range.goTo(today)}
+            onLater={() => range.step(1)}
+          />
+          <CrewKey crews={crews} filter={filter} />
+          {error ? (
+            <ErrorState title="The diary could not be fetched">
+              What is shown may be old. It is tried again by itself.
+            </ErrorState>
+          ) : null}
           <DiarySheet
             {...{ zone, today, pattern, shown, range, visits, mayBook, onVisitKey }}
             crews={crews}
@@ -141,94 +141,94 @@ export function DiaryScreen(props: DiaryScreenProps) {
             }
             onDropWaiting={dropWaiting}
           />
-        </DiaryLocale>
-      </section>
-      <aside
-        className={`flex min-h-0 flex-col border-rule lg:border-l lg:pl-5 print:hidden ${
-          isAsideShown ? '' : 'lg:hidden'
-        }`}
-      >
-        {subject ? (
-          <TimesPanel
-            today={today}
-            visitDate={subject.visit ? placeOf(subject.visit, zone).date : null}
-            key={`${subject.jobId}/${subject.kind}/${subject.visit?.id ?? ''}`}
-            subject={subject}
+        </section>
+        <aside
+          className={`flex min-h-0 flex-col border-rule lg:border-l lg:pl-5 print:hidden ${
+            isAsideShown ? '' : 'lg:hidden'
+          }`}
+        >
+          {subject ? (
+            <TimesPanel
+              today={today}
+              visitDate={subject.visit ? placeOf(subject.visit, zone).date : null}
+              key={`${subject.jobId}/${subject.kind}/${subject.visit?.id ?? ''}`}
+              subject={subject}
+              crews={crews}
+              workdays={pattern.workdays}
+              onLook={(opening) => {
+                setLooked(opening);
+                if (opening) range.goTo(opening.date);
+              }}
+              onByHand={() => {
+                const item = itemOf(subject);
+                setSubject(null);
+                if (subject.visit) setOpenedId(subject.visit.id);
+                else if (item) openBooking(item, looked ?? {});
+              }}
+              onBooked={(date) => {
+                setSubject(null);
+                waiting.setTyped('');
+                range.goTo(date);
+              }}
+              onClose={() => setSubject(null)}
+            />
+          ) : (
+            <WaitingList
+              waiting={waiting}
+              mayBook={mayBook}
+              isCalendarShown={shown.view !== 'crews' && shown.view !== 'list'}
+              onTimes={openTimes}
+              onFold={() => show({ isListFolded: true })}
+              onFound={(visit) => {
+                range.goTo(localStart(visit.startsAt, zone).date);
+                setOpenedId(visit.id);
+              }}
+            />
+          )}
+          {mayBook && !subject ? (
+            <LinkButton look="line" href={paths.slip()} className="mt-2 self-start">
+              The shop is late…
+            </LinkButton>
+          ) : null}
+        </aside>
+        {booking ? (
+          <BookDialog
+            item={booking.item}
             crews={crews}
-            workdays={pattern.workdays}
-            onLook={(opening) => {
-              setLooked(opening);
-              if (opening) range.goTo(opening.date);
-            }}
-            onByHand={() => {
-              const item = itemOf(subject);
-              setSubject(null);
-              if (subject.visit) setOpenedId(subject.visit.id);
-              else if (item) openBooking(item, looked ?? {});
-            }}
+            start={booking}
+            onClose={() => setBooking(null)}
             onBooked={(date) => {
-              setSubject(null);
-              waiting.setTyped('');
+              setBooking(null);
               range.goTo(date);
             }}
-            onClose={() => setSubject(null)}
           />
-        ) : (
-          <WaitingList
-            waiting={waiting}
+        ) : null}
+        {opened ? (
+          <VisitDialog
+            visit={opened}
+            start={placeOf(opened, zone)}
+            crews={crews}
             mayBook={mayBook}
-            isCalendarShown={shown.view !== 'crews' && shown.view !== 'list'}
-            onTimes={openTimes}
-            onFold={() => show({ isListFolded: true })}
-            onFound={(visit) => {
-              range.goTo(localStart(visit.startsAt, zone).date);
-              setOpenedId(visit.id);
+            onAnotherTime={() => {
+              setOpenedId(null);
+              setSubject(subjectOfVisit(opened));
+            }}
+            onRefused={mover.askAgain}
+            onClose={() => setOpenedId(null)}
+          />
+        ) : null}
+        {mover.refused ? (
+          <RefusedMoveDialog
+            refused={mover.refused}
+            crews={crews}
+            onClose={mover.forgetRefused}
+            onAgain={(visit, place, reason) => {
+              mover.forgetRefused();
+              void mover.send(visit, place, reason);
             }}
           />
-        )}
-        {mayBook && !subject ? (
-          <LinkButton look="line" href={paths.slip()} className="mt-2 self-start">
-            The shop is late…
-          </LinkButton>
         ) : null}
-      </aside>
-      {booking ? (
-        <BookDialog
-          item={booking.item}
-          crews={crews}
-          start={booking}
-          onClose={() => setBooking(null)}
-          onBooked={(date) => {
-            setBooking(null);
-            range.goTo(date);
-          }}
-        />
-      ) : null}
-      {opened ? (
-        <VisitDialog
-          visit={opened}
-          start={placeOf(opened, zone)}
-          crews={crews}
-          mayBook={mayBook}
-          onAnotherTime={() => {
-            setOpenedId(null);
-            setSubject(subjectOfVisit(opened));
-          }}
-          onRefused={mover.askAgain}
-          onClose={() => setOpenedId(null)}
-        />
-      ) : null}
-      {mover.refused ? (
-        <RefusedMoveDialog
-          refused={mover.refused}
-          crews={crews}
-          onClose={mover.forgetRefused}
-          onAgain={(visit, place, reason) => {
-            mover.forgetRefused();
-            void mover.send(visit, place, reason);
-          }}
-        />
-      ) : null}
-    </div>
+      </div>
+    </DiaryLocale>
   );
 }

@@ -7,6 +7,7 @@ import { TextareaField } from '@/components/ui/textarea-field';
 import type { StaleVisit } from '@/lib/contracts/visit-changes';
 import type { CrewView, VisitView } from '@/lib/contracts/visits';
 import { formatLocalDayShort } from '@/lib/time/format-civil';
+import { useDiaryLocale } from './diary-locale';
 import type { Place } from './place';
 import type { RefusedMove } from './use-mover';
 import { minutesWords, statusWords } from './visit-words';
@@ -27,7 +28,7 @@ export function RefusedMoveDialog({ refused, crews, onAgain, onClose }: RefusedM
   const [reason, setReason] = useState('');
   const now = problem.code === 'visit-changed' ? (problem.current as StaleVisit) : null;
   const crewName = crews.find(({ id }) => id === place.crewId)?.name ?? '';
-  const day = formatLocalDayShort(place.date, { language: 'en', region: 'UK' });
+  const day = formatLocalDayShort(place.date, useDiaryLocale());
 
   function again(event: FormEvent) {
     event.preventDefault();

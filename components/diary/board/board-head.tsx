@@ -1,3 +1,4 @@
+import { useDiaryLocale } from '@/components/diary/diary-locale';
 import { formatLocalDay } from '@/lib/time/format-civil';
 import type { BoardDay } from './board-days';
 import { weekdayShort } from './day-head-words';
@@ -12,6 +13,7 @@ export function BoardHead({
   today: string;
   onDay: (date: string) => void;
 }) {
+  const locale = useDiaryLocale();
   return (
     <div className="board-line board-head">
       <span className="board-name" />
@@ -22,7 +24,7 @@ export function BoardHead({
           className="board-day-name"
           data-today={day.date === today || undefined}
           data-week-start={day.isWeekStart || undefined}
-          aria-label={`Open ${formatLocalDay(day.date, { language: 'en', region: 'UK' })}`}
+          aria-label={`Open ${formatLocalDay(day.date, locale)}`}
           onClick={() => onDay(day.date)}
         >
           <b>
