@@ -37,11 +37,13 @@ export function startWorker(): () => void {
   const watch = (found: ServiceWorkerRegistration) => {
     registration = found;
     takeOver();
-    found.addEventListener('updatefound', () => {
-      const { installing } = found;
-      installing?.addEventListener('statechange', () => {
-        if (installing.state === 'installed' && serviceWorker.controller) takeOver();
-      });
+    // One may have been found before this page could listen.
+    watchInstalling(found.installing);
+    found.addEventListener('updatefound', () => watchInstalling(found.installing));
+  };
+  const watchInstalling = (installing: ServiceWorker | null) => {
+    installing?.addEventListener('statechange', () => {
+      if (installing.state === 'installed' && serviceWorker.controller) takeOver();
     });
   };
   const askAgain = () => {

@@ -43,7 +43,12 @@ export async function openWobblyLine(programUrl: string): Promise<WobblyLine> {
       },
     );
     onward.on('error', () => response.destroy());
-    if (tail !== '') onward.setHeader('accept-encoding', 'identity');
+    if (tail !== '') {
+      onward.setHeader('accept-encoding', 'identity');
+      // "Not changed" would be said of the worker as it was.
+      onward.removeHeader('if-none-match');
+      onward.removeHeader('if-modified-since');
+    }
     request.pipe(onward);
   });
   const own = await freePort();

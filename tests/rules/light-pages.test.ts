@@ -2,13 +2,17 @@ import { existsSync, readFileSync, statSync } from 'node:fs';
 import path from 'node:path';
 import { describe, expect, it } from 'vitest';
 
-/** Pages for a stranger's or a customer's phone: what the browser loads for them stays small. */
+/** Pages for a stranger's, a customer's or a crew's phone: what the browser loads at first for them stays small. */
 const lightPages = [
   'app/(front)/page.tsx',
   'app/(front)/check/page.tsx',
   'app/(door)/sign-in/page.tsx',
   'app/(door)/join/[invitationId]/page.tsx',
   'app/v/[token]/page.tsx',
+  'app/(phone)/today/page.tsx',
+  'app/(phone)/today/[visitId]/page.tsx',
+  'app/(phone)/walls/[roomId]/page.tsx',
+  'app/no-signal/page.tsx',
 ];
 const heavy = /^(@tanstack\/|zod|ml-matrix|@fullcalendar\/|leaflet|react-leaflet|dexie|moment)/;
 
