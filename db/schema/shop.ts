@@ -1,6 +1,6 @@
 import { sql } from 'drizzle-orm';
-import { boolean, check, integer, jsonb, pgTable, text, timestamp } from 'drizzle-orm/pg-core';
-import type { ShopRules } from '@/lib/contracts/shop-rules';
+import { boolean, check, integer, pgTable, text, timestamp } from 'drizzle-orm/pg-core';
+import { rulesColumn } from './rules-column';
 
 /** A cabinet shop: where, in what units, by which rules. Every other table hangs from it. */
 export const shops = pgTable(
@@ -13,7 +13,7 @@ export const shops = pgTable(
     region: text('region', { enum: ['US', 'UK', 'AU', 'EU'] }).notNull(),
     /** IANA zone; everything a person types or reads is in it. */
     zone: text('zone').notNull(),
-    rules: jsonb('rules').$type<ShopRules>().notNull(),
+    rules: rulesColumn('rules').notNull(),
     /** To play with: nobody is told anything from it, and it can be removed whole. */
     isSample: boolean('is_sample').notNull().default(false),
     nextJobNumber: integer('next_job_number').notNull().default(1),

@@ -414,21 +414,21 @@ export const demoJobs: DemoJob[] = [
     room: 'plain',
     readyDay: -14,
     floorAgreed: true,
-    visits: [measure('ines', -50, '09:00'), install('north', -9, 960), goBack('north', 2, '08:00')],
+    visits: [measure('ines', -50, '09:00'), install('north', -9, 480), goBack('north', 2, '08:00')],
     snags: [
       {
         kind: 'short',
         place: 'Filler, right end',
         words: 'Filler 4 mm short at the top; the wall leans away. Make a new one.',
         mender: 'bench',
-        foundDay: -8,
+        foundDay: -9,
       },
       {
         kind: 'fault',
         place: 'Drawer base 24',
         words: 'Top drawer rubs on the left.',
         mender: 'crew',
-        foundDay: -8,
+        foundDay: -9,
       },
     ],
   },
@@ -466,7 +466,7 @@ export const demoJobs: DemoJob[] = [
     floorAgreed: true,
     visits: [
       measure('ines', -60, '09:00'),
-      install('north', -18, 960),
+      install('north', -18, 480),
       goBack('north', -12, '08:00'),
     ],
     snags: [
@@ -475,7 +475,7 @@ export const demoJobs: DemoJob[] = [
         place: 'Wall unit 30',
         words: 'Hinged left, drawn right.',
         mender: 'bench',
-        foundDay: -17,
+        foundDay: -18,
         closedDay: -12,
       },
     ],
@@ -505,7 +505,7 @@ export const demoJobs: DemoJob[] = [
     visits: [
       { ...measure('ines', -67, '13:00', false), isMissed: true },
       measure('ines', -66, '09:00'),
-      install('south', -24, 960),
+      install('south', -24, 540),
     ],
   },
   {
@@ -518,7 +518,7 @@ export const demoJobs: DemoJob[] = [
     room: 'plain',
     readyDay: -33,
     floorAgreed: true,
-    visits: [measure('tor', -68, '09:00'), install('north', -27, 960)],
+    visits: [measure('tor', -68, '09:00'), install('north', -27, 480)],
   },
   // Standing still.
   {

@@ -67,7 +67,7 @@ function estimate(
     rooms: Array.from({ length: roomCount }, () => 'kitchen' as const),
     units,
     unitsNotLaidOut: job.units.length > 0 ? 0 : job.unitCount,
-    fitExtraMinutes: sum(job.rooms.map(({ release }) => release?.extraInstallMinutes ?? 0)),
+    fitExtraMinutes: visit.kind === 'install' ? extraInstallMinutes(job) : 0,
     stairFloors: job.hasLift ? 0 : Math.abs(job.floorsUp),
     ownMinutes: {
       measureKitchen: measureMinutesPerRoom,
@@ -79,6 +79,9 @@ function estimate(
   if (!value) throw new Error(`the counts of job ${job.id} give no estimate`);
   return value;
 }
+
+const extraInstallMinutes = ({ rooms }: JobRecord) =>
+  sum(rooms.map(({ release }) => release?.extraInstallMinutes ?? 0));
 
 /** Handed in when every room of the job is. */
 function measuredOn(ctx: Context, { rooms }: JobRecord): string | null {

@@ -1,10 +1,12 @@
 import { eq } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { GET as correctionsRoute } from '@/app/api/visits/duration-corrections/route';
-import { visitPauses, visits } from '@/db/schema';
+import { jobs, visitPauses, visits } from '@/db/schema';
 import { addDays } from '@/lib/time/civil';
 import { database } from '@/server/base/database';
 import { getDurationCorrections } from '@/server/days/get-duration-corrections';
+import { estimateTakenApart } from '@/server/visits/job-facts';
+import { type JobRecord, readJobRecords } from '@/server/visits/job-records';
 import { bookTestVisit } from '../help/book-test-visit';
 import { callRoute } from '../help/call-route';
 import { makeCrew } from '../help/make-crew';
@@ -67,6 +69,34 @@ describe('what real times say', () => {
       },
     ]);
     expect(tooFew).toEqual(['0 installs were timed; from 5 on they tell.']);
+  });
+
+  it('takes what the walls add to an install off no measure', async () => {
+    const ctx = await contextOf(shop, 'owner');
+    const [job] = await readJobRecords(ctx.db, ctx, eq(jobs.id, waitingJobId));
+    if (!job) throw new Error('the job is gone');
+    const released: JobRecord = {
+      ...job,
+      rooms: [
+        {
+          jobId: job.id,
+          id: job.id,
+          submittedAt: new Date(),
+          hasRuns: true,
+          release: {
+            releaseId: job.id,
+            revision: 'A',
+            releasedAt: new Date(),
+            isSuperseded: false,
+            extraInstallMinutes: 400,
+          },
+        },
+      ],
+    };
+    const fixed = (of: JobRecord, kind: 'site-measure' | 'install') =>
+      estimateTakenApart(of, { kind, crewSize: 2 }).fixedPersonMinutes;
+    expect(fixed(released, 'site-measure')).toBe(0);
+    expect(fixed(released, 'install')).toBe(fixed(job, 'install') + 400);
   });
 
   it('is refused to a role without the numbers, and tells another shop nothing', async () => {

@@ -1,7 +1,10 @@
+import { sql } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { POST as createCrewRoute, GET as listCrewsRoute } from '@/app/api/crews/route';
 import { PATCH as changeRulesRoute, GET as getRulesRoute } from '@/app/api/rules/route';
 import type { ShopSettings } from '@/lib/contracts/shop-rules';
+import { usualOpeningWeights } from '@/lib/schedule/planning-rules';
+import { database } from '@/server/base/database';
 import { callRoute } from '../help/call-route';
 import { cookieOf, makeShop, type TestShop } from '../help/make-shop';
 
@@ -40,6 +43,16 @@ describe('shop rules and crews', () => {
     });
     expect(await rules(otherOwner)).toEqual(others);
     expect((await change({ zone: 'America/New_York' })).status).toBe(200);
+  });
+
+  it('has the start value of a rule that came after the shop’s were written', async () => {
+    const { db } = await database();
+    await db.execute(
+      sql`update shops set rules = rules #- '{booking,weightDayWaited}' #- '{fit,crownSpringDeg}' where id = ${shop.shop.id}`,
+    );
+    const { booking, fit } = await rules();
+    expect(booking.weightDayWaited).toBe(usualOpeningWeights.dayWaited);
+    expect(fit.crownSpringDeg).toBe(38);
   });
 
   it('says at each field what cannot be', async () => {
