@@ -102,7 +102,7 @@ export function JobsTable({ jobs, mayStart }: { jobs: JobRow[]; mayStart: boolea
       columns={columns}
       rowKey={jobKey}
       order={{ column: 'number', isDescending: true }}
-      filterLabel="Name, street, phone, note or number"
+      filterLabel="Name, street, phone or note"
       tools={
         mayStart ? (
           <>

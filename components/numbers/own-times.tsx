@@ -19,7 +19,7 @@ type OwnTimesProps = { times: DurationCorrectionsView; settings: ShopSettings };
 /** What the year's visits say of the minutes in the rules, what taking them up would do, and the way back. */
 export function OwnTimes({ times, settings }: OwnTimesProps) {
   return (
-    <section>
+    <section className="pb-6">
       <TitleBlock
         level={3}
         title="The shop’s own times"

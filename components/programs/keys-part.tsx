@@ -13,7 +13,7 @@ import { showToast } from '@/components/ui/toast-store';
 import type { KeyView, MadeKey } from '@/lib/contracts/programs';
 import { apiPaths } from '@/lib/paths';
 import { ChooseSeveral, chosenOf } from './choose-several';
-import { scopeWords } from './scope-words';
+import { scopeText, scopeWords } from './scope-words';
 import { ShownOnce } from './shown-once';
 
 /** Keys by which other programs ask; made, shown once, taken back. */
@@ -42,7 +42,11 @@ export function KeysPart({ keys }: { keys: KeyView[] }) {
   };
   return (
     <section>
-      <TitleBlock title="Keys" meta={`${keys.length}`} />
+      <TitleBlock
+        title="Keys"
+        meta={`${keys.length}`}
+        className={keys.length === 0 ? 'mb-3' : ''}
+      />
       {keys.length === 0 ? (
         <EmptyState title="No program has a key">
           A key lets another program of yours read or book, and no more than you tick.
@@ -56,8 +60,8 @@ export function KeysPart({ keys }: { keys: KeyView[] }) {
             >
               <span className="font-bold">{key.name}</span>
               <span className="text-graphite">
-                {key.scopes.join(', ')} · by {key.madeByName}, {key.madeAtWords} ·{' '}
-                {key.lastUsedWords ? `last used ${key.lastUsedWords}` : 'not used yet'}
+                may {key.scopes.map(scopeText).join(', ')} · by {key.madeByName}, {key.madeAtWords}{' '}
+                · {key.lastUsedWords ? `last used ${key.lastUsedWords}` : 'not used yet'}
               </span>
               <Button look="line" onClick={() => takeBack(key)}>
                 Take back<span className="sr-only"> the key of {key.name}</span>
@@ -68,8 +72,17 @@ export function KeysPart({ keys }: { keys: KeyView[] }) {
       )}
       {made ? (
         <ShownOnce title="The key, shown this once" text={made.key}>
-          Put it into the other program now: “Authorization: Bearer” and this.
+          Put it into the other program now, behind “Authorization: Bearer”.
         </ShownOnce>
+      ) : null}
+      {made ? (
+        <p className="py-2">
+          Try it from a shell:{' '}
+          <code className="block break-all font-mono text-note">
+            curl -H "Authorization: Bearer {made.key}" {window.location.origin}
+            {apiPaths.jobs()}
+          </code>
+        </p>
       ) : null}
       <form onSubmit={form.submit} className="flex max-w-lg flex-col gap-3 py-4">
         <TextField

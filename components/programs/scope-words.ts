@@ -20,3 +20,7 @@ export const eventWords: Record<ProgramEvent, string> = {
   'sheet.released': 'a sheet is released',
   'job.signed-off': 'a customer signs',
 };
+
+/** A scope that a newer or an older program named keeps its own name. */
+export const scopeText = (scope: string): string =>
+  Object.entries(scopeWords).find(([key]) => key === scope)?.[1] ?? scope;

@@ -43,7 +43,11 @@ export function WebhooksPart({ webhooks }: { webhooks: WebhookView[] }) {
   };
   return (
     <section>
-      <TitleBlock title="Told of what happens" meta={`${webhooks.length}`} />
+      <TitleBlock
+        title="Told of what happens"
+        meta={`${webhooks.length}`}
+        className={webhooks.length === 0 ? 'mb-3' : ''}
+      />
       {webhooks.length === 0 ? (
         <EmptyState title="No program is told">
           Give an address, and it is told within seconds when something you ticked has happened.

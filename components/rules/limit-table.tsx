@@ -1,10 +1,11 @@
-import { controlLook } from '@/components/ui/field-frame';
 import type { OwnRuleSet } from '@/lib/contracts/rule-sets';
-import { limitRows, withLimit } from '@/lib/measure/rules/copy-rule-set';
+import { limitRows, spanWords, withLimit } from '@/lib/measure/rules/copy-rule-set';
 import type { Rule, RuleSet } from '@/lib/measure/rules/rule-set';
 import { checkWords } from '@/lib/rules/check-words';
-import { formatLength } from '@/lib/units/format-length';
+import { fineLength } from '@/lib/sheet/reading-words';
 import type { Region } from '@/lib/words/trade';
+
+import { LimitField } from './limit-field';
 
 type LimitTableProps = {
   set: RuleSet;
@@ -15,7 +16,7 @@ type LimitTableProps = {
   onChange: (changed: OwnRuleSet) => void;
 };
 
-/** Each limit with where it was published; in a copy, each figure can be typed over, in millimetres. */
+/** Each limit with where it was published; in a copy, each figure can be typed over. */
 export function LimitTable({ set, unit, region, editable, onChange }: LimitTableProps) {
   return (
     <div className="overflow-x-auto">
@@ -42,36 +43,29 @@ export function LimitTable({ set, unit, region, editable, onChange }: LimitTable
               <th scope="row" className="py-1.5 pr-4 text-left font-medium">
                 {checkWords(rule.check, region)}
                 {rule.overMm ? (
-                  <span className="font-normal text-graphite"> over {rule.overMm / 1000} m</span>
+                  <span className="font-normal text-graphite">
+                    {' '}
+                    over {spanWords(rule.overMm, unit)}
+                  </span>
                 ) : null}
               </th>
               <td className="py-1.5 pr-4">
-                {limitRows(rule.limit).map(({ limitMm, words }, row) => (
+                {limitRows(rule.limit, unit).map(({ limitMm, words }, row) => (
                   <div key={words} className="flex items-baseline gap-2 tabular-nums">
                     <span className="text-graphite">
                       {rule.sense === 'least' ? 'at least' : 'at most'}
                     </span>
                     {editable ? (
-                      <input
-                        type="number"
-                        min={0}
-                        step={0.1}
-                        aria-label={`${checkWords(rule.check, region)} ${words}, mm`}
-                        defaultValue={limitMm}
-                        onChange={(event) => {
-                          const typed = event.target.valueAsNumber;
-                          if (typed >= 0) onChange(withLimit(editable, at, typed, row));
-                        }}
-                        className={`${controlLook} max-w-24`}
+                      <LimitField
+                        label={`${checkWords(rule.check, region)} ${words}`.trim()}
+                        limitMm={limitMm}
+                        unit={unit}
+                        onChange={(typed) => onChange(withLimit(editable, at, typed, row))}
                       />
                     ) : (
-                      <span>
-                        {unit === 'in'
-                          ? formatLength(limitMm, { unit, stepMm: 25.4 / 32 })
-                          : limitMm}
-                      </span>
+                      <span>{fineLength(limitMm, unit)}</span>
                     )}
-                    {editable || unit === 'mm' ? 'mm' : null} {words}
+                    {words}
                   </div>
                 ))}
               </td>

@@ -5,6 +5,7 @@ import type { ChangeShopRulesInput, FitRules } from '@/lib/contracts/shop-rules'
 import { fitRoom } from '@/lib/measure/fit-room';
 import { ruleChanges } from '@/lib/rules/rule-changes';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
+import { checkedRules } from '@/server/shops/checked-rules';
 import { readWallBook } from '@/server/walls/read-wall-book';
 
 /** The newest rooms show what a change does; more would keep the owner waiting. */
@@ -13,9 +14,10 @@ const mostRooms = 12;
 /** What a change of the rules would do; nothing is changed. */
 export async function previewRules(
   ctx: PersonContext,
-  input: ChangeShopRulesInput,
+  asked: ChangeShopRulesInput,
 ): Promise<RulePreview> {
   mustBeAllowed(ctx, 'shop:change');
+  const input = checkedRules(ctx, asked);
   const { name, phone, email, zone, rules } = ctx.shop;
   const changes = ruleChanges({ name, phone, email, zone, ...rules }, input);
   const [released] = await ctx.db

@@ -1,20 +1,17 @@
 import { eq } from 'drizzle-orm';
 import { shops } from '@/db/schema';
 import type { ChangeShopRulesInput, ShopSettings } from '@/lib/contracts/shop-rules';
-import { isZone } from '@/lib/time/zones';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
-import { Refusal } from '@/server/base/problem-response';
-import { phoneOf } from './phone-of';
+import { checkedRules } from './checked-rules';
 
 /** What the shop decides. Released sheets keep the rules that they were made by. */
 export async function changeShopRules(
   ctx: PersonContext,
-  input: ChangeShopRulesInput,
+  asked: ChangeShopRulesInput,
 ): Promise<ShopSettings> {
   mustBeAllowed(ctx, 'shop:change');
-  if (input.zone !== undefined && !isZone(input.zone)) throw noSuchZone();
-  const phone = input.phone === undefined ? undefined : phoneOf(ctx.shop, input.phone, 'phone');
+  const given = checkedRules(ctx, asked);
   return ctx.db.transaction(async (tx) => {
     const isThisShop = eq(shops.id, ctx.shop.id);
     const [before] = await tx
@@ -29,7 +26,7 @@ export async function changeShopRules(
       .where(isThisShop)
       .for('update');
     if (!before) throw new Error('the shop is gone');
-    const { fit, booking, checklists, keeping } = input;
+    const { name, phone, email, zone, fit, booking, checklists, keeping } = given;
     const rules = {
       fit: fit ?? before.rules.fit,
       booking: booking ?? before.rules.booking,
@@ -38,7 +35,7 @@ export async function changeShopRules(
     };
     const [after] = await tx
       .update(shops)
-      .set({ name: input.name, phone, email: input.email, zone: input.zone, rules })
+      .set({ name, phone, email, zone, rules })
       .where(isThisShop)
       .returning({
         name: shops.name,
@@ -56,19 +53,10 @@ export async function changeShopRules(
       summary: 'Shop rules changed',
       detail: {
         before: { ...before, ...before.rules, rules: undefined },
-        given: { ...input, phone },
+        given,
       },
     });
     const { rules: kept, ...shop } = after;
     return { ...shop, ...kept };
-  });
-}
-
-function noSuchZone(): Refusal {
-  return new Refusal({
-    status: 422,
-    code: 'no-such-zone',
-    message: 'That time zone is not known.',
-    errors: { zone: 'Pick a zone from the list.' },
   });
 }

@@ -35,6 +35,16 @@ describe('a change of the shop’s rules', () => {
     expect((await contextOf(shop, 'owner')).shop.rules.fit).toEqual(fitRules());
   });
 
+  it('is no change where the phone is only written otherwise, and is refused where it is none', async () => {
+    await callRoute(changeRoute, { method: 'PATCH', body: { phone: '2125550119' }, cookie: owner });
+    const looked = await preview({ phone: '(212) 555-0119' });
+    expect(looked.body).toMatchObject({ changes: [] });
+    expect(await preview({ phone: '12' })).toMatchObject({
+      status: 422,
+      body: { errors: { phone: expect.any(String) } },
+    });
+  });
+
   it('is kept with who made it, and a copied rule set with it', async () => {
     const set = PUBLISHED_RULE_SETS[0];
     if (!set) throw new Error('there is no set');

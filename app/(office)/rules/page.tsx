@@ -4,6 +4,7 @@ import { RuleHistory } from '@/components/rules/rule-history';
 import { RuleSetPart } from '@/components/rules/rule-set-part';
 import { RulesForm } from '@/components/rules/rules-form';
 import { TitleBlock } from '@/components/ui/title-block';
+import { phoneWords } from '@/lib/messages/phone-number';
 import { paths } from '@/lib/paths';
 import { may } from '@/lib/permissions';
 import { pageContext } from '@/server/base/page-context';
@@ -14,7 +15,8 @@ export const metadata: Metadata = { title: 'Shop rules' };
 
 export default async function RulesPage() {
   const ctx = await pageContext('shop:read');
-  const settings = await getShopRules(ctx);
+  const kept = await getShopRules(ctx);
+  const settings = { ...kept, phone: phoneWords(kept.phone, kept.region) };
   const mayChange = may(ctx.actor.role, 'shop:change');
   return (
     <>

@@ -4,6 +4,7 @@ import { SamplePart } from '@/components/start/sample-part';
 import { StartSteps } from '@/components/start/start-steps';
 import { TitleBlock } from '@/components/ui/title-block';
 import { laterSteps, startSteps } from '@/lib/contracts/start';
+import { phoneWords } from '@/lib/messages/phone-number';
 import { pageContext } from '@/server/base/page-context';
 import { getStart } from '@/server/numbers/get-start';
 import { getShopRules } from '@/server/shops/get-shop-rules';
@@ -14,6 +15,7 @@ export const metadata: Metadata = { title: 'Start' };
 export default async function StartPage() {
   const ctx = await pageContext('shop:change');
   const start = await getStart(ctx);
+  const rules = await getShopRules(ctx);
   const { personId, name } = ctx.actor;
   const left = startSteps.filter((step) => !start.done[step] && !laterSteps.includes(step)).length;
   return (
@@ -29,7 +31,7 @@ export default async function StartPage() {
       <div className="mt-4 grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,3fr)_minmax(0,2fr)]">
         <StartSteps
           start={start}
-          settings={await getShopRules(ctx)}
+          settings={{ ...rules, phone: phoneWords(rules.phone, rules.region) }}
           crews={await getCrews(ctx)}
           person={{ personId, name }}
         />

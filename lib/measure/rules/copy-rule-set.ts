@@ -1,4 +1,6 @@
 import type { OwnRuleSet } from '@/lib/contracts/rule-sets';
+import type { LengthUnit } from '@/lib/units/brands';
+import { formatLength } from '@/lib/units/format-length';
 import type { Limit, RuleSet } from './rule-set';
 
 /**
@@ -39,24 +41,34 @@ export function withLimit(set: OwnRuleSet, at: number, limitMm: number, row = 0)
   };
 }
 
-/** The figures of a limit that can be edited, with what each is for. */
-export function limitRows(limit: Limit): { limitMm: number; words: string }[] {
+/**
+ * The figures of a limit that can be edited, with what each is for, in the shop's unit.
+ * Example: 6 mm over 600, in inches: "in each 23 5/8\"".
+ */
+export function limitRows(limit: Limit, unit: LengthUnit): { limitMm: number; words: string }[] {
+  const span = (mm: number) => spanWords(mm, unit);
   switch (limit.kind) {
     case 'constant':
       return [{ limitMm: limit.limitMm, words: '' }];
     case 'proportional':
-      return [{ limitMm: limit.limitMm, words: `in each ${limit.perMm} mm` }];
+      return [{ limitMm: limit.limitMm, words: `in each ${span(limit.perMm)}` }];
     case 'interpolated':
       return limit.points.map((point) => ({
         limitMm: point.limitMm,
-        words: `at ${point.spanMm / 1000} m`,
+        words: `at ${span(point.spanMm)}`,
       }));
     case 'bands':
       return limit.rows.map((row, place) => ({
         limitMm: row.limitMm,
-        words: row.toMm > 1e6 ? 'beyond' : `${place === 0 ? 'up' : 'then'} to ${row.toMm / 1000} m`,
+        words: row.toMm > 1e6 ? 'beyond' : `${place === 0 ? 'up' : 'then'} to ${span(row.toMm)}`,
       }));
   }
+}
+
+/** Metres are how published metric limits are written: 3 m, and 600 mm below one. */
+export function spanWords(mm: number, unit: LengthUnit): string {
+  if (unit === 'in') return formatLength(mm, { unit, stepMm: 25.4 / 8 });
+  return mm >= 1_000 ? `${mm / 1_000} m` : `${mm} mm`;
 }
 
 function limitWith(limit: OwnRuleSet['rules'][number]['limit'], limitMm: number, row: number) {
