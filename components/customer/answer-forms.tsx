@@ -11,20 +11,25 @@ import { customerWords } from './customer-words';
 export function AnswerForms({ visit, token }: { visit: CustomerVisitView; token: string }) {
   const words = customerWords(visit.language);
   const action = paths.customerAnswer(token);
+  // Who says that something is missing says next that it is there: a yes comes after it.
+  const isAsked = visit.status !== 'confirmed' && !visit.saysNotReady;
   return (
     <div className="mt-4 flex flex-col gap-3">
-      {visit.status === 'confirmed' ? null : (
-        <OneTap action={action} answer="confirm" look="fill" text={words.yes} />
-      )}
+      {isAsked ? (
+        <>
+          <p className="text-lead font-bold">{words.ask}</p>
+          <OneTap action={action} answer="confirm" text={words.yes} />
+        </>
+      ) : null}
       {visit.saysNotReady ? (
-        <OneTap action={action} answer="ready-now" look="line" text={words.readyNow} />
+        <OneTap action={action} answer="ready-now" text={words.readyNow} />
       ) : null}
       <a href={paths.customerTimes(token)} className={buttonLook('line', 'thumb')}>
         {words.another}
       </a>
       <details className="rounded border border-pine">
         <summary className="flex min-h-thumb cursor-pointer items-center justify-center px-4 text-lead font-bold text-pine">
-          {words.notReady}
+          {visit.saysNotReady ? words.notReadyMore : words.notReady}
         </summary>
         <form method="post" action={action} className="flex flex-col gap-3 px-4 pb-4">
           <input type="hidden" name="answer" value="not-ready" />
@@ -47,18 +52,16 @@ export function AnswerForms({ visit, token }: { visit: CustomerVisitView; token:
 function OneTap({
   action,
   answer,
-  look,
   text,
 }: {
   action: string;
   answer: 'confirm' | 'ready-now';
-  look: 'fill' | 'line';
   text: string;
 }) {
   return (
     <form method="post" action={action}>
       <input type="hidden" name="answer" value={answer} />
-      <Button type="submit" size="thumb" look={look}>
+      <Button type="submit" size="thumb">
         {text}
       </Button>
     </form>

@@ -62,7 +62,7 @@ function Choices({ view, token }: Omit<Props, 'wasTaken'>) {
       )}
       <details className="mt-6 rounded border border-pine" open={times.length === 0 && !hold}>
         <summary className="flex min-h-thumb cursor-pointer items-center justify-center px-4 text-lead font-bold text-pine">
-          {words.noneSuits}
+          {times.length === 0 && !hold ? words.askCall : words.noneSuits}
         </summary>
         <form
           method="post"

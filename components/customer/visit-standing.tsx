@@ -2,12 +2,20 @@ import { Verdict, type VerdictKind } from '@/components/ui/verdict';
 import type { CustomerVisitView } from '@/lib/contracts/visits';
 import { customerWords } from './customer-words';
 
+const edges: Partial<Record<VerdictKind, string>> = {
+  confirmed: 'border-moss',
+  waiting: 'border-ochre',
+  late: 'border-chalk',
+  problem: 'border-chalk',
+  off: 'border-graphite',
+};
+
 /** How the visit stands, in one line with its glyph; nothing while we wait for the first answer. */
 export function VisitStanding({ visit }: { visit: CustomerVisitView }) {
   const line = standingOf(visit);
   if (!line) return null;
   return (
-    <p role="status" className="mt-3 border-l-4 border-moss bg-tint px-3 py-2">
+    <p role="status" className={`mt-3 border-l-4 bg-tint px-3 py-2 ${edges[line.kind]}`}>
       <Verdict kind={line.kind}>{line.text}</Verdict>
     </p>
   );

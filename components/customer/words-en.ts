@@ -32,9 +32,11 @@ export const wordsEn = {
     'worktop-template': 'take the template for your {counter}',
     return: 'finish what is left',
   } satisfies Record<VisitKind, string>,
+  ask: 'Does this time suit you?',
   yes: 'Yes, that works',
   another: 'Ask for another time',
   notReady: 'We are not ready yet',
+  notReadyMore: 'Something else is not ready',
   notReadyLegend: 'What is not ready?',
   missing: {
     floor: 'The floor',
@@ -79,9 +81,10 @@ export const wordsEn = {
   map: 'on the map',
   // Other times
   timesTitle: 'Another time',
-  now: (day: string, window: string) => `Now it is ${day}, ${window}.`,
+  now: (day: string, window: string) => `Your visit is set for ${day}, ${window}.`,
   choose: 'Choose one, and we keep it for you for 15 minutes.',
-  noTimes: 'We find no other time by ourselves just now.',
+  noTimes:
+    'There is no other time to choose here just now. Tell us what would suit, and we call you.',
   taken: 'That time has just gone, or was kept for too long. Here is what is free now.',
   kept: 'Kept for you',
   keptUntil: (time: string) => `until ${time}`,
@@ -90,6 +93,7 @@ export const wordsEn = {
   take: 'Take this time',
   others: 'Or another one',
   noneSuits: 'None of these: call me',
+  askCall: 'Ask us to call you',
   callHint: 'When do you want to be called, and what would suit you?',
   callMe: 'Call me',
   keep: 'Keep the time as it is',
