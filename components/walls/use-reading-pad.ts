@@ -11,6 +11,7 @@ import { freshDraft, nextField, type PadDraft } from '@/lib/walls-pad/pad-draft'
 import { isEmptyEntry } from '@/lib/walls-pad/pad-entry';
 import { type CornerMethod, padFields } from '@/lib/walls-pad/pad-fields';
 import { type ToolUse, toolInHand } from '@/lib/walls-pad/pad-tools';
+import { piecesSoFar } from '@/lib/walls-pad/pieces-so-far';
 import { placeFields } from '@/lib/walls-pad/place-fields';
 import { sameStart } from '@/lib/walls-pad/same-start';
 import { speechIn } from '@/lib/walls-pad/say-length';
@@ -79,7 +80,8 @@ export function useReadingPad({ question, view, habits, keptDraft, onKept }: Rea
     const verdict = reading
       ? verdictOf(reading, { book: wallBook, runs, rules: { ...rules, ...speech } })
       : null;
-    return verdict ?? { kind: 'why', words: question.why };
+    const soFar = reading ? null : piecesSoFar(ask, fields, draft.entries, speech);
+    return verdict ?? { kind: 'why', words: soFar ?? question.why };
   };
 
   const change = (next: PadDraft) => {

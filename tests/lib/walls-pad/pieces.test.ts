@@ -6,6 +6,7 @@ import { buildReading } from '@/lib/walls-pad/build-reading';
 import { freshDraft, nextField } from '@/lib/walls-pad/pad-draft';
 import { emptyEntry, entryOfLength, type PadEntry } from '@/lib/walls-pad/pad-entry';
 import { type PadAsk, padFields } from '@/lib/walls-pad/pad-fields';
+import { piecesSoFar } from '@/lib/walls-pad/pieces-so-far';
 import { readingWords } from '@/lib/walls-pad/reading-words';
 import { verdictOf } from '@/lib/walls-pad/verdict-of';
 import {
@@ -75,6 +76,12 @@ describe('a wall typed in pieces', () => {
     expect(
       nextField(fields, { ...last, entries: { ...last.entries, piece2: emptyEntry('mm') } }),
     ).toBe('piece2');
+  });
+
+  it('says what the pieces make so far, beside the sketch', () => {
+    const soFar = (...mm: number[]) => piecesSoFar(ask, padFields(ask), typed(...mm), metricRules);
+    expect(soFar()).toBeNull();
+    expect(soFar(1_210, 914)).toBe('2124 mm so far, of some 4000 mm on the sketch.');
   });
 
   it('is kept as one reading, with the texts as typed', () => {
