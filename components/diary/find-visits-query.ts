@@ -8,14 +8,18 @@ import { visitsKey } from './visits-query';
 
 const none: readonly VisitView[] = [];
 
-/** Booked visits that fit what is typed, from the second letter on. */
-export function useFoundVisits(typed: string): readonly VisitView[] {
+/** Booked visits that fit what is typed, from the second letter on; those of the letters before while it is asked. */
+export function useFoundVisits(typed: string): {
+  found: readonly VisitView[];
+  isAsking: boolean;
+} {
   const search = typed.trim();
-  const { data } = useQuery({
+  const { data, isPending, isPlaceholderData } = useQuery({
     queryKey: [...visitsKey, 'found', search],
     queryFn: ({ signal }) => askServer<VisitView[]>(apiPaths.findVisits(search), { signal }),
     enabled: search.length >= 2,
     placeholderData: keepPreviousData,
   });
-  return search.length >= 2 ? (data ?? none) : none;
+  if (search.length < 2) return { found: none, isAsking: false };
+  return { found: data ?? none, isAsking: isPending || isPlaceholderData };
 }

@@ -1,7 +1,7 @@
 'use client';
 
 import { Draggable } from '@fullcalendar/interaction';
-import { useEffect, useRef } from 'react';
+import { useEffect, useRef, useState } from 'react';
 import { Button } from '@/components/ui/button';
 import { EmptyState } from '@/components/ui/empty-state';
 import { ErrorState } from '@/components/ui/error-state';
@@ -35,7 +35,15 @@ export function WaitingList({
   const { all, shown, typed, setTyped, error, isPending } = waiting;
   const listRef = useRef<HTMLUListElement>(null);
   const hasItems = shown.length > 0;
-  const found = useFoundVisits(typed);
+  const { found, isAsking } = useFoundVisits(typed);
+  const [opensFirst, setOpensFirst] = useState(false);
+
+  // Enter follows the last letter at once: what was asked by then is opened when it is found.
+  useEffect(() => {
+    if (!opensFirst || isAsking) return;
+    setOpensFirst(false);
+    if (found[0]) onFound(found[0]);
+  }, [opensFirst, isAsking, found, onFound]);
 
   useEffect(() => {
     if (!listRef.current || !mayBook || !hasItems || !isCalendarShown) return;
@@ -61,9 +69,8 @@ export function WaitingList({
             <Button
               look="plain"
               onClick={onFold}
-              keyName="R"
               aria-label="Fold the waiting list away"
-              className="-my-2 -mr-3 px-1.5 max-lg:hidden"
+              className="-my-2 -mr-2 px-1.5 max-lg:hidden"
             >
               fold
             </Button>
@@ -94,15 +101,17 @@ export function WaitingList({
           aria-label="Find who waits or is booked"
           placeholder="Find who waits or is booked  (F)"
           value={typed}
-          onChange={(event) => setTyped(event.target.value)}
+          onChange={(event) => {
+            setOpensFirst(false);
+            setTyped(event.target.value);
+          }}
           onKeyDown={(event) => {
             const first = mayBook ? shown[0] : undefined;
-            const booked = found[0];
-            if (event.key !== 'Enter' || !typed.trim() || !(first || booked)) return;
+            if (event.key !== 'Enter' || !typed.trim()) return;
             event.preventDefault();
             event.currentTarget.blur();
             if (first) onTimes(first);
-            else if (booked) onFound(booked);
+            else setOpensFirst(true);
           }}
           className={`${controlLook} mt-2`}
         />

@@ -74,7 +74,11 @@ export function BoardBarButton({
       </span>
       {isShort ? null : (
         <span className="board-bar-line board-detail">
-          {time} · {isGhost ? 'would be here' : minutesWords(visit.workMinutes)}
+          {time}
+          <span className="board-length">
+            {' · '}
+            {isGhost ? 'would be here' : minutesWords(visit.workMinutes)}
+          </span>
           <span className="board-more"> · {visit.jobTitle}</span>
         </span>
       )}
