@@ -15,6 +15,8 @@ import { KeepFailed } from './keep-failed';
 import { ScreenFrame } from './screen-frame';
 import { SignPad } from './sign-pad';
 import { SignedView } from './signed-view';
+import { goToStop } from './stop-place';
+import { useReport } from './use-report';
 import { useTell } from './use-tell';
 
 /** The customer reads what is open and signs for it; in their own language, at one tap. */
@@ -32,6 +34,7 @@ export function SignScreen({ visit, stop }: { visit: TodayVisit; stop: StopView 
     return (
       <ScreenFrame title={words.signTitle}>
         <SignedView signOff={stop.signOff} />
+        <DoneHere visit={visit} />
       </ScreenFrame>
     );
   }
@@ -106,6 +109,24 @@ export function SignScreen({ visit, stop }: { visit: TodayVisit; stop: StopView 
         {words.signNow}
       </Button>
     </ScreenFrame>
+  );
+}
+
+/** Signed is mostly the last thing here: they leave by one more tap, and stand before the next stop. */
+function DoneHere({ visit }: { visit: TodayVisit }) {
+  const { words } = useCrew();
+  const { status, report, isFailed } = useReport(visit);
+  if (status !== 'on-site') return null;
+  const leave = async () => {
+    if (await report('done')) goToStop({ at: 'stop' });
+  };
+  return (
+    <>
+      <KeepFailed isFailed={isFailed} />
+      <Button size="thumb" onClick={leave}>
+        {words.taps.done}
+      </Button>
+    </>
   );
 }
 

@@ -1,24 +1,21 @@
 'use client';
 
 import { useSyncExternalStore } from 'react';
-import { readQueue } from '@/components/phone/queue-store';
-import { useLive } from '@/components/phone/use-live';
-import { arrivalOnPhone } from '@/components/phone/visit-report';
 import type { StopView } from '@/lib/contracts/stops';
 import type { TodayVisit } from '@/lib/contracts/visits';
 import { isPaused, onSiteMinutes } from '@/lib/days/on-site-minutes';
 import { useCrew } from './crew-language';
+import { useVisitHere } from './use-visit-here';
 
 /** How long they have worked here today, without the pauses; new each minute. */
 export function SiteTime({ visit, stop }: { visit: TodayVisit; stop: StopView }) {
   const { words } = useCrew();
-  const live = useLive('queue', readQueue);
+  const times = useVisitHere(visit);
   const minuteNow = useSyncExternalStore(eachMinute, thisMinute, () => 0);
-  const times = arrivalOnPhone(visit, live.state === 'here' ? live.value : []);
   if (times.arrivedAt === null || minuteNow === 0) return null;
   const nowMs = minuteNow * 60_000;
   const arrivedAt = laterOf(times.arrivedAt, dayBegan(visit, nowMs));
-  const minutes = onSiteMinutes({ ...times, arrivedAt, pauses: stop.pauses }, nowMs);
+  const minutes = onSiteMinutes({ arrivedAt, leftAt: times.leftAt, pauses: stop.pauses }, nowMs);
   return (
     <p>
       {words.onSite(Math.floor(minutes / 60), minutes % 60)}

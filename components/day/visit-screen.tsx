@@ -8,6 +8,7 @@ import type { StopView } from '@/lib/contracts/stops';
 import type { TodayVisit } from '@/lib/contracts/visits';
 import { AccessCode } from './access-code';
 import { useCrew } from './crew-language';
+import { NextStop } from './next-stop';
 import { SiteTime } from './site-time';
 import { StopMenu } from './stop-menu';
 import { VisitState } from './visit-state';
@@ -32,6 +33,7 @@ export function VisitScreen({ visit, stop }: { visit: TodayVisit; stop: StopView
         <VisitState visit={visit} />
         {stop ? <SiteTime visit={visit} stop={stop} /> : null}
         {mayReport ? <VisitTaps visit={visit} stop={stop} /> : null}
+        <NextStop visit={visit} />
       </section>
 
       <section>

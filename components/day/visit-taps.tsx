@@ -1,10 +1,7 @@
 'use client';
 
 import { useState } from 'react';
-import { usePersonId } from '@/components/phone/phone-person';
-import { keepWork, readQueue } from '@/components/phone/queue-store';
-import { useLive } from '@/components/phone/use-live';
-import { statusOnPhone, tapsFrom, type VisitTap } from '@/components/phone/visit-report';
+import { tapsFrom, type VisitTap } from '@/components/phone/visit-report';
 import { Button } from '@/components/ui/button';
 import type { PauseReason } from '@/lib/contracts/day-events';
 import type { StopView } from '@/lib/contracts/stops';
@@ -13,6 +10,7 @@ import { isPaused } from '@/lib/days/on-site-minutes';
 import { useCrew } from './crew-language';
 import { HowLate } from './how-late';
 import { KeepFailed } from './keep-failed';
+import { useReport } from './use-report';
 import { useTell } from './use-tell';
 import { WhyPause } from './why-pause';
 
@@ -20,26 +18,16 @@ type VisitTapsProps = { visit: TodayVisit; stop: StopView | null };
 
 /** One tap tells the office, and the office the customer; without a signal it is told later. */
 export function VisitTaps({ visit, stop }: VisitTapsProps) {
-  const personId = usePersonId();
   const { words } = useCrew();
-  const live = useLive('queue', readQueue);
+  const { status, report, isFailed: isNotKept } = useReport(visit);
   const { tell, isFailed } = useTell(visit.id);
-  const [isNotKept, setIsNotKept] = useState(false);
   const [asks, setAsks] = useState<'how-late' | 'why-pause' | null>(null);
-  const status = statusOnPhone(visit, live.state === 'here' ? live.value : []);
   const rests = stop !== null && isPaused(stop.pauses);
 
-  const report = async (what: VisitTap, lateMinutes?: number) => {
+  const say = (what: VisitTap, lateMinutes?: number) => {
     if (what === 'running-late' && lateMinutes === undefined) return setAsks('how-late');
     setAsks(null);
-    try {
-      const at = new Date().toISOString();
-      const told = { visitId: visit.id, what, at, lateMinutes };
-      await keepWork(personId, [{ kind: 'report', report: told }]);
-      setIsNotKept(false);
-    } catch {
-      setIsNotKept(true);
-    }
+    void report(what, lateMinutes);
   };
   const pause = async (why: PauseReason) => {
     if (await tell({ what: 'pause', why })) setAsks(null);
@@ -47,7 +35,7 @@ export function VisitTaps({ visit, stop }: VisitTapsProps) {
 
   if (asks === 'how-late') {
     return (
-      <HowLate onSay={(minutes) => report('running-late', minutes)} onLeave={() => setAsks(null)} />
+      <HowLate onSay={(minutes) => say('running-late', minutes)} onLeave={() => setAsks(null)} />
     );
   }
   if (asks === 'why-pause') return <WhyPause onSay={pause} onLeave={() => setAsks(null)} />;
@@ -66,7 +54,7 @@ export function VisitTaps({ visit, stop }: VisitTapsProps) {
             key={what}
             size="thumb"
             look={at === 0 && !rests ? 'fill' : what === 'nobody-home' ? 'chalk' : 'line'}
-            onClick={() => report(what)}
+            onClick={() => say(what)}
           >
             {words.taps[what]}
           </Button>

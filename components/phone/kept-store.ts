@@ -2,7 +2,9 @@ import type { WallBookView } from '@/lib/contracts/rooms';
 import type { AccessCodeView, StopView } from '@/lib/contracts/stops';
 import type { TodayView } from '@/lib/contracts/visits';
 import { newerStop } from '@/lib/days/stop-on-phone';
+import { furtherVisit, visitAfter } from '@/lib/days/visit-on-phone';
 import type { Holder } from '@/lib/sync/holder';
+import type { QueuedWork } from '@/lib/sync/queued';
 import { inStore } from './phone-database';
 import type { PhoneDatabase } from './phone-tables';
 
@@ -50,13 +52,18 @@ export async function keepDays(fetched: DayFetched): Promise<void> {
     const holder = await read<Holder>(holderKey);
     const [today] = days;
     if (holder?.personId !== personId || !today) return;
+    const known = (await readDays()).flatMap(({ visits }) => visits);
+    const keptOf = (visitId: string) => known.find(({ id }) => id === visitId) ?? null;
     const newer: StopView[] = [];
     for (const stop of stops) newer.push(newerStop(await readKeptStop(stop.visitId), stop));
     await kept.clear();
     await kept.bulkPut([
       { key: holderKey, value: holder },
       { key: fetchedKey, value: { at, date: today.date } satisfies Fetched },
-      ...days.map((day) => ({ key: dayKey(day.date), value: day })),
+      ...days.map((day) => {
+        const visits = day.visits.map((visit) => furtherVisit(visit, keptOf(visit.id)));
+        return { key: dayKey(day.date), value: { ...day, visits } };
+      }),
       ...newer.map((stop) => ({ key: stopKey(stop.visitId), value: stop })),
       ...codes.map((code) => ({ key: codeKey(code.visitId), value: code })),
       ...blanks.map((blank) => ({ key: blankKey(blank.jobId), value: blank })),
@@ -80,6 +87,14 @@ const withSnags = (day: TodayView): TodayView => ({ ...day, snags: day.snags ?? 
 export async function readDays(): Promise<TodayView[]> {
   const rows = await inStore(({ kept }) => kept.where('key').startsWith(dayKey('')).toArray());
   return rows.map(({ value }) => withSnags(value as TodayView));
+}
+
+/** Within the transaction of what changed it: the days as they are after what the office has taken. */
+export async function putVisitsAfter(works: readonly QueuedWork[]): Promise<void> {
+  for (const day of await readDays()) {
+    const value = { ...day, visits: day.visits.map((visit) => visitAfter(visit, works)) };
+    await inStore(({ kept }) => kept.put({ key: dayKey(day.date), value }));
+  }
 }
 
 /** An empty book for a room of this job that nobody has drawn yet. */

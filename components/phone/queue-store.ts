@@ -3,7 +3,7 @@ import { withSent } from '@/lib/sync/book-on-phone';
 import type { Batch } from '@/lib/sync/next-batch';
 import { ownIdOf, type Queued, type QueuedWork, roomIdOf } from '@/lib/sync/queued';
 import type { Settled } from '@/lib/sync/settle-batch';
-import { putStop, readHolder, readKeptStop } from './kept-store';
+import { putStop, putVisitsAfter, readHolder, readKeptStop } from './kept-store';
 import { newId } from './new-id';
 import { inStore } from './phone-database';
 import { tapperOf } from './tapper';
@@ -37,6 +37,7 @@ export async function settleQueue({ items }: Batch, settled: Settled): Promise<v
     return database.transaction('rw', queue, rooms, kept, async () => {
       await rememberSent(sent);
       await rememberTold(sent);
+      await rememberReports(sent);
       await queue.bulkDelete(sent.map(({ order }) => order));
       for (const { id, message } of settled.parked) {
         await queue.where('id').equals(id).modify({ parked: message });
@@ -62,6 +63,12 @@ async function rememberTold(sent: Queued[]): Promise<void> {
     const holder = await readHolder();
     if (stop && holder) await putStop(stopOnPhone(stop, events, tapperOf(holder.personName)));
   }
+}
+
+/** How the visits stand now: the page that shows them may stay open for hours. */
+async function rememberReports(sent: Queued[]): Promise<void> {
+  const works = sent.map(({ work }) => work);
+  if (works.some(({ kind }) => kind === 'report')) await putVisitsAfter(works);
 }
 
 async function rememberSent(sent: Queued[]): Promise<void> {

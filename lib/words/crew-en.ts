@@ -233,6 +233,7 @@ export const crewEn: CrewWords = {
   signedSafe:
     'It is safe on this phone, and nothing in it can be changed. A copy goes to the customer.',
   copy: 'Open the copy',
+  nextStop: 'Next',
   toMend: 'Snags to mend',
   toMendOf: (count, late) => `${count}${late > 0 ? `, ${late} late` : ''}`,
   late: 'late',

@@ -244,6 +244,7 @@ export const crewEs: CrewWords = {
   signedBy: (name, when) => `Firmado por ${name}, ${when}`,
   signedSafe: 'Está a salvo en este teléfono y nada se puede cambiar. Una copia va al cliente.',
   copy: 'Abrir la copia',
+  nextStop: 'Sigue',
   toMend: 'Pendientes por arreglar',
   toMendOf: (count, late) => `${count}${late > 0 ? `, ${late} atrasados` : ''}`,
   late: 'atrasado',

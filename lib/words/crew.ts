@@ -160,6 +160,7 @@ export type CrewWords = {
   signedBy: (name: string, when: string) => string;
   signedSafe: string;
   copy: string;
+  nextStop: string;
   toMend: string;
   toMendOf: (count: number, late: number) => string;
   late: string;

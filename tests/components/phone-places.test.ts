@@ -1,9 +1,8 @@
 import { describe, expect, it } from 'vitest';
 import { directionsHref } from '@/components/phone/directions';
-import { statusOnPhone, tapsFrom } from '@/components/phone/visit-report';
+import { tapsFrom } from '@/components/phone/visit-report';
 import { type BookPlace, placeHref, placeOf } from '@/components/walls/book-place';
-import type { TodayVisit } from '@/lib/contracts/visits';
-import { id, queuedExample } from '@/tests/help/wall-book-examples';
+import { id } from '@/tests/help/wall-book-examples';
 
 describe('places of the wall book', () => {
   it.each<BookPlace>([
@@ -33,28 +32,7 @@ describe('places of the wall book', () => {
   );
 });
 
-describe('a visit on the phone', () => {
-  const visit = { id: id(7), status: 'confirmed' } as TodayVisit;
-  const tap = (order: number, what: 'on-the-way' | 'arrived' | 'nobody-home', visitId = id(7)) =>
-    queuedExample(order, {
-      kind: 'report',
-      report: { visitId, what, at: '2026-12-01T09:00:00.000Z' },
-    });
-
-  it('stands as it was tapped, before the office has heard', () => {
-    expect(statusOnPhone(visit, [tap(1, 'on-the-way'), tap(2, 'arrived')])).toBe('on-site');
-  });
-
-  it('stands as the office has it when nothing was tapped, or another visit was', () => {
-    expect(statusOnPhone(visit, [tap(1, 'arrived', id(8))])).toBe('confirmed');
-  });
-
-  it('does not count a tap that the office refused', () => {
-    expect(statusOnPhone(visit, [{ ...tap(1, 'arrived'), parked: 'called off' }])).toBe(
-      'confirmed',
-    );
-  });
-
+describe('taps of a visit', () => {
   it.each([
     ['booked', ['on-the-way', 'arrived', 'running-late']],
     ['on-the-way', ['arrived', 'running-late', 'nobody-home']],
