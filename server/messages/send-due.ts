@@ -1,6 +1,7 @@
 import type { Database } from '@/db/database';
 import { countSegments } from '@/lib/messages/segments';
 import { apiPaths } from '@/lib/paths';
+import type { Context, SystemActor } from '@/server/base/context';
 import { env } from '@/server/base/env';
 import { logBug } from '@/server/base/log';
 import { shopContext } from '@/server/base/shop-context';
@@ -25,23 +26,34 @@ export async function sendDue(sending: Sending): Promise<number> {
     const batch = await claimDue(sending.db, sending.now());
     if (batch.length === 0) return taken;
     taken += batch.length;
-    await Promise.all(batch.map((message) => sendOne(sending, message)));
+    const contextOf = shopContexts(sending.db, sending.now());
+    await Promise.all(batch.map((message) => sendOne(sending, message, contextOf)));
   }
 }
 
+/** Each shop of a batch is read once. */
+function shopContexts(db: Database, now: Date) {
+  const read = new Map<string, Promise<Context<SystemActor>>>();
+  return (shopId: string) => {
+    const known = read.get(shopId);
+    if (known) return known;
+    const context = shopContext(db, { shopId, actor: { kind: 'system', name: 'Setwell' }, now });
+    read.set(shopId, context);
+    return context;
+  };
+}
+
 /** A bug over one message keeps neither the others nor the next try; its lease lapses and it is settled. */
-async function sendOne(sending: Sending, message: Claimed): Promise<void> {
+async function sendOne(
+  sending: Sending,
+  message: Claimed,
+  contextOf: ReturnType<typeof shopContexts>,
+): Promise<void> {
   try {
-    const { db } = sending;
-    const now = sending.now();
-    const ctx = await shopContext(db, {
-      shopId: message.shopId,
-      actor: { kind: 'system', name: 'Setwell' },
-      now,
-    });
+    const ctx = await contextOf(message.shopId);
     const prepared = await prepare(ctx, message, sending.compose);
     if (prepared.is === 'ready') await carry(sending, message, prepared);
-    else await putAside(db, message, prepared, now);
+    else await putAside(sending.db, message, prepared, ctx.now);
   } catch (error) {
     logBug('messages/send-due', error);
   }
