@@ -69,7 +69,10 @@ function Asking({ stop, sheet }: { stop: StopView; sheet: SheetView }) {
     if (await tell({ what: 'as-found', releaseId: sheet.release.id, readings, said })) drop();
   };
   return (
-    <ScreenFrame title={words.asFound} meta={`${sheet.roomName}, ${sheet.release.revision}`}>
+    <ScreenFrame
+      title={words.asFound}
+      meta={`${sheet.roomName}, ${words.revision(sheet.release.revision)}`}
+    >
       {last ? <Outcome found={last} sheet={sheet} /> : null}
       <p>{words.asFoundLead}</p>
       {asks.map((ask) => (

@@ -8,13 +8,13 @@ export function MendWhere({ snag }: { snag: CrewSnag }) {
   const { words } = crew;
   const address = [snag.street, snag.town].filter(Boolean).join(', ');
   return (
-    <>
+    <span className="block">
       <span className="block font-medium">
         {snag.customerName}, {address}
       </span>
       <span className="block text-graphite">
         {snag.nextOn ? words.thereOn(dayWords(snag.nextOn, crew)) : words.noVisitThere}
       </span>
-    </>
+    </span>
   );
 }

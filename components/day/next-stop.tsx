@@ -13,7 +13,8 @@ import { windowIn } from './visit-times';
 /** Once a stop is over, the one after it is one tap away; after the last, the day. */
 export function NextStop({ visit }: { visit: TodayVisit }) {
   const { zone } = useHolder();
-  const { words, language } = useCrew();
+  const crew = useCrew();
+  const { words } = crew;
   const live = useLive(`next:${visit.id}`, () => readNextVisit(visit));
   const next = live.state === 'here' ? live.value : undefined;
   if (next === undefined) return null;
@@ -26,7 +27,7 @@ export function NextStop({ visit }: { visit: TodayVisit }) {
   }
   return (
     <Link href={paths.todayVisit(next.id)} className={buttonLook('fill', 'thumb')}>
-      {words.nextStop}: {windowIn(next, language, zone)}, {next.customerName}
+      {words.nextStop}: {windowIn(next, crew, zone)}, {next.customerName}
     </Link>
   );
 }

@@ -1,6 +1,7 @@
 'use client';
 
 import { type ReactNode, useState } from 'react';
+import { useHolder } from '@/components/phone/phone-person';
 import { TakePhoto } from '@/components/photos/take-photo';
 import { Button } from '@/components/ui/button';
 import { TextareaField } from '@/components/ui/textarea-field';
@@ -16,6 +17,7 @@ import { stillHere } from './still-here';
 import { goToStop } from './stop-place';
 import { useKeptDraft } from './use-kept-draft';
 import { useTell } from './use-tell';
+import { foundIn } from './visit-times';
 
 type SnagScreenProps = {
   /** Not there when it was never kept here, or is closed and gone from the list. */
@@ -30,6 +32,7 @@ type SnagScreenProps = {
 export function SnagScreen({ snag, visitId, lead }: SnagScreenProps) {
   const crew = useCrew();
   const { words } = crew;
+  const { zone } = useHolder();
   if (!snag) {
     return (
       <ScreenFrame title={words.snags} back={{ at: 'snags' }}>
@@ -42,7 +45,7 @@ export function SnagScreen({ snag, visitId, lead }: SnagScreenProps) {
       {lead}
       <div>
         <p className="text-lead">{snagFacts(snag, crew)}</p>
-        <p className="text-graphite">{snag.foundWords}</p>
+        <p className="text-graphite">{foundIn(snag, crew, zone)}</p>
         <SnagPhotos photoIds={snag.photoIds} />
         {snag.benchSays ? (
           <p className="border-l-4 border-blueprint bg-tint px-3 py-2">

@@ -6,18 +6,17 @@ import { EmptyState } from '@/components/ui/empty-state';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { TodayView, TodayVisit } from '@/lib/contracts/visits';
 import { paths } from '@/lib/paths';
+import { formatLocalDay } from '@/lib/time/format-civil';
 import { useCrew } from './crew-language';
 import { VisitState } from './visit-state';
-import { spanishDay, windowIn } from './visit-times';
+import { windowIn } from './visit-times';
 
 /** The day's stops in order, with the drive to each. */
 export function TodayList({ view }: { view: TodayView }) {
   const { visits, dayWords, date } = view;
   const { personName } = useHolder();
-  const { language, words } = useCrew();
-  // Noon, so that no zone makes it another day.
-  const day =
-    language === 'es' ? spanishDay(new Date(`${date}T12:00:00Z`), 'UTC', 'long') : dayWords;
+  const { language, region, words } = useCrew();
+  const day = language === 'en' ? dayWords : formatLocalDay(date, { language, region });
   return (
     <section lang={language} className="px-3.5 py-4">
       <TitleBlock level={1} title={day} meta={`${personName} · ${words.stops(visits.length)}`} />
@@ -55,13 +54,14 @@ function Drive({ visit, isFirst }: { visit: TodayVisit; isFirst: boolean }) {
 
 function Stop({ visit }: { visit: TodayVisit }) {
   const { zone } = useHolder();
-  const { language, words, say } = useCrew();
+  const crew = useCrew();
+  const { words, say } = crew;
   return (
     <Link
       href={paths.todayVisit(visit.id)}
       className="grid touch-manipulation grid-cols-[auto_1fr_auto] items-start gap-x-3 py-3 active:bg-tint"
     >
-      <span className="w-[5.2rem] leading-tight font-bold">{windowIn(visit, language, zone)}</span>
+      <span className="w-[5.2rem] leading-tight font-bold">{windowIn(visit, crew, zone)}</span>
       <span className="min-w-0">
         <span className="block text-lead leading-tight font-bold">{visit.customerName}</span>
         <span className="block">

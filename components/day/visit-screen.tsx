@@ -18,7 +18,8 @@ import { dayIn, windowIn } from './visit-times';
 /** One stop: when, where, how to get in, what to do there. */
 export function VisitScreen({ visit, stop }: { visit: TodayVisit; stop: StopView | null }) {
   const { mayReport, mayMeasure, zone } = useHolder();
-  const { language, words, say } = useCrew();
+  const crew = useCrew();
+  const { language, words, say } = crew;
   return (
     <div lang={language} className="flex flex-col gap-5 px-3.5 py-4">
       <section className="flex flex-col gap-3">
@@ -28,7 +29,7 @@ export function VisitScreen({ visit, stop }: { visit: TodayVisit; stop: StopView
           meta={`${say(words.kinds[visit.kind])} · ${visit.jobNumber}`}
         />
         <p className="text-lead font-bold">
-          {dayIn(visit, language, zone)}, {windowIn(visit, language, zone)}
+          {dayIn(visit, crew, zone)}, {windowIn(visit, crew, zone)}
         </p>
         <VisitState visit={visit} />
         {stop ? <SiteTime visit={visit} stop={stop} /> : null}

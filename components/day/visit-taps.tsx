@@ -49,7 +49,7 @@ export function VisitTaps({ visit, stop }: VisitTapsProps) {
         </Button>
       ) : null}
       <div className="grid grid-cols-2 gap-2">
-        {taps.map((what, at) => (
+        {taps.flatMap((what, at) => [
           <Button
             key={what}
             size="thumb"
@@ -57,13 +57,14 @@ export function VisitTaps({ visit, stop }: VisitTapsProps) {
             onClick={() => say(what)}
           >
             {words.taps[what]}
-          </Button>
-        ))}
-        {status === 'on-site' && !rests ? (
-          <Button size="thumb" look="line" onClick={() => setAsks('why-pause')}>
-            {words.pause}
-          </Button>
-        ) : null}
+          </Button>,
+          // Beside "Done", so that "Nobody home" is not hit for it.
+          what === 'done' && !rests ? (
+            <Button key="pause" size="thumb" look="line" onClick={() => setAsks('why-pause')}>
+              {words.pause}
+            </Button>
+          ) : null,
+        ])}
       </div>
       <KeepFailed isFailed={isNotKept || isFailed} />
     </div>

@@ -1,29 +1,43 @@
 import type { TodayVisit } from '@/lib/contracts/visits';
-import type { CrewLanguage } from '@/lib/words/crew';
+import {
+  formatLocalDayShort,
+  formatLocalTime,
+  formatLocalWindowShort,
+} from '@/lib/time/format-civil';
+import type { Crew } from './crew-language';
 
-/** The promised window in the crew's language: the office's own words in English, the phone's in Spanish. */
-export function windowIn(visit: TodayVisit, language: CrewLanguage, zone: string): string {
-  if (language === 'en') return visit.windowWords;
-  const time = (at: string) =>
-    new Date(at).toLocaleTimeString('es-US', {
-      timeZone: zone,
-      hour: 'numeric',
-      minute: '2-digit',
-    });
-  return `${time(visit.windowStartsAt)}–${time(visit.windowEndsAt)}`;
+type Speech = Pick<Crew, 'language' | 'region'>;
+
+/** The promised window in the crew's language: "8:00-10:00 AM", "8:00-10:00 a.m.". */
+export function windowIn(visit: TodayVisit, crew: Speech, zone: string): string {
+  const { windowWords, windowStartsAt, windowEndsAt } = visit;
+  if (crew.language === 'en') return windowWords;
+  return formatLocalWindowShort(timeAt(windowStartsAt, zone), timeAt(windowEndsAt, zone), crew);
 }
 
-/** "Tue, Dec 1", "mar, 1 dic". */
-export function dayIn(visit: TodayVisit, language: CrewLanguage, zone: string): string {
-  if (language === 'en') return visit.dayWords;
-  return spanishDay(new Date(visit.windowStartsAt), zone, 'short');
+/** "Tue, Dec 1", "mar 1 dic". */
+export function dayIn(visit: TodayVisit, crew: Speech, zone: string): string {
+  if (crew.language === 'en') return visit.dayWords;
+  return formatLocalDayShort(dateAt(visit.windowStartsAt, zone), crew);
 }
 
-export function spanishDay(day: Date, zone: string, length: 'short' | 'long'): string {
-  return day.toLocaleDateString('es-US', {
+/** Who, and when: the office's own words in English. */
+export function foundIn(
+  { foundBy, foundAt, foundWords }: { foundBy: string; foundAt: string; foundWords: string },
+  crew: Speech,
+  zone: string,
+): string {
+  if (crew.language === 'en') return foundWords;
+  const day = formatLocalDayShort(dateAt(foundAt, zone), crew);
+  return `${foundBy}, ${day}, ${formatLocalTime(timeAt(foundAt, zone), crew)}`;
+}
+
+/** As British and Swedish clocks and calendars write it: "07:30", "2026-12-01". */
+const timeAt = (instant: string, zone: string) =>
+  new Date(instant).toLocaleTimeString('en-GB', {
     timeZone: zone,
-    weekday: length,
-    day: 'numeric',
-    month: length,
+    hour: '2-digit',
+    minute: '2-digit',
   });
-}
+const dateAt = (instant: string, zone: string) =>
+  new Date(instant).toLocaleDateString('sv-SE', { timeZone: zone });

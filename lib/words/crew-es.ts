@@ -78,7 +78,8 @@ export const crewEs: CrewWords = {
   checklist: 'Lista de revisión',
   checked: (done, all) => `${done} de ${all}`,
   snags: 'Pendientes',
-  open: (count) => (count === 0 ? 'ninguno abierto' : `${count} abiertos`),
+  open: (count) =>
+    count === 0 ? 'ninguno abierto' : count === 1 ? '1 abierto' : `${count} abiertos`,
   partShort: 'Pieza faltante o dañada',
   signOff: 'Firma',
   signed: 'firmado',
@@ -246,7 +247,8 @@ export const crewEs: CrewWords = {
   copy: 'Abrir la copia',
   nextStop: 'Sigue',
   toMend: 'Pendientes por arreglar',
-  toMendOf: (count, late) => `${count}${late > 0 ? `, ${late} atrasados` : ''}`,
+  toMendOf: (count, late) =>
+    `${count}${late > 0 ? `, ${late} ${late === 1 ? 'atrasado' : 'atrasados'}` : ''}`,
   late: 'atrasado',
   nothingToMend: 'Nada por arreglar',
   nothingToMendMore: 'Los pendientes de todos sus trabajos que arregla el equipo, por fecha.',
