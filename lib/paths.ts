@@ -47,6 +47,8 @@ export const paths = {
   numbersOf: (figure: string, days: number) => `/numbers?figure=${part(figure)}&days=${days}`,
   rules: () => '/rules',
   programs: () => '/rules/programs',
+  /** The measuring tools and how far each may be off. */
+  tools: () => '/rules/tools',
 
   today: () => '/today',
   todayVisit: (visitId: string) => `/today/${part(visitId)}`,
@@ -184,6 +186,8 @@ export const apiPaths = {
   travel: () => '/api/travel',
   /** Where a typed address is. */
   geocode: () => '/api/geocode',
+  tools: () => '/api/tools',
+  tool: (toolId: string) => `/api/tools/${part(toolId)}`,
   rules: () => '/api/rules',
   /** What a change of the rules would do. */
   rulesPreview: () => '/api/rules/preview',

@@ -66,6 +66,7 @@ const screens: Record<Role | 'nobody', Screen[]> = {
     { name: 'numbers', path: paths.numbers },
     { name: 'rules', path: paths.rules },
     { name: 'programs', path: paths.programs },
+    { name: 'tools', path: paths.tools },
     { name: 'checklists', path: paths.checklists },
     { name: 'start', path: paths.start },
   ],

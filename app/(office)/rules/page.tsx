@@ -26,6 +26,9 @@ export default async function RulesPage() {
         meta={
           <span className="flex flex-wrap gap-x-4">
             a change never reaches a sheet that is released
+            <Link href={paths.tools()} className="link">
+              Measuring tools
+            </Link>
             <Link href={paths.checklists()} className="link">
               Checklists
             </Link>
