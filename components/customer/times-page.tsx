@@ -53,7 +53,7 @@ function Choices({ view, token }: Omit<Props, 'wasTaken'>) {
                 <input type="hidden" name="time" value={time.time} />
                 <Button type="submit" size="thumb" look="line" className="flex-col gap-0">
                   <span className="first-letter:uppercase">{time.dayWords}</span>
-                  <span className="font-normal text-ink">{time.windowWords}</span>
+                  <span className="font-normal text-balance text-ink">{time.windowWords}</span>
                 </Button>
               </form>
             </li>

@@ -37,7 +37,9 @@ export function VisitPage({ visit, token, hasCopy, mapHref }: Props) {
       ) : null}
       {isOver ? null : (
         <>
-          <p className="mt-2 text-lead">{words.arrive(visit.windowWords, visit.untilWords)}</p>
+          <p className="mt-2 text-lead text-balance">
+            {words.arrive(visit.windowWords, visit.untilWords)}
+          </p>
           <p className="mt-2">
             {words.comes(visit.whoComes, regionalWords(words.what[visit.kind], visit))}{' '}
             <a href={mapHref} className="underline" title={words.map}>

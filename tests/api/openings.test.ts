@@ -237,6 +237,8 @@ describe('times that work', () => {
       expect(times).toHaveLength(6);
       expect(times[0]?.dayWords).toBe('Thursday, December 3');
       expect(times[0]?.windowWords).toBe('between 8:00 and 10:00 AM');
+      // Who works in the mornings finds as many afternoons.
+      expect(times.filter(({ time }) => time >= '12:00')).toHaveLength(3);
       expect(times.some(({ date, time }) => date === '2026-12-10' && time === '09:00')).toBe(false);
     });
 
