@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
-import { fitRules } from '@/lib/contracts/shop-rules';
 import type { Run } from '@/lib/contracts/runs';
+import { fitRules } from '@/lib/contracts/shop-rules';
 import { fitRoom } from '@/lib/measure/fit-room';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { wayOutOf } from '@/lib/sheet/with-widths';
