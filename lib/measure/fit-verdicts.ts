@@ -25,10 +25,14 @@ export function judgeBy(context: FitContext, ruleSets: readonly RuleSet[]): Judg
     const { words } = context;
     const over = judged.spanMm > 0 ? ` over ${words(judged.spanMm)}` : '';
     const limit = check === 'aisle' ? 'the least is' : 'the limit is';
+    const size = words(Math.abs(value.value));
+    // On the shop's step it may look the same as the limit that it is past.
+    const isJustPast = verdict === 'over' && size === words(limitMm);
+    const justPast = check === 'aisle' ? 'just under ' : 'just over ';
     return [
       {
         check,
-        words: `${what}: ${words(Math.abs(value.value))}${over}; ${limit} ${words(limitMm)}.`,
+        words: `${what}: ${isJustPast ? justPast : ''}${size}${over}; ${limit} ${words(limitMm)}.`,
         verdict,
         inDoubt,
         serious,

@@ -43,7 +43,10 @@ function cornerRows(corner: CornerFit, rules: FitRules): ProofRow[] {
   const subject = `Corner ${corner.name}`;
   const readWords = corner.trueWithinReading ? 'true within the reading' : '';
   if (corner.verdicts.length > 0) {
-    return rowsOf(corner.verdicts, subject, rules).map((row) => ({ ...row, readWords }));
+    return rowsOf(corner.verdicts, subject, rules).map((row) => ({
+      ...row,
+      readWords: readWords || row.readWords,
+    }));
   }
   if (!corner.angle) return [];
   return [
@@ -67,7 +70,7 @@ function rowsOf(verdicts: readonly Verdict[], subject: string, rules: FitRules):
     key: `${subject} ${verdict.check} ${verdict.value.from[0] ?? ''} ${verdict.value.value}`,
     check: `${subject}${checkWords(verdict.check)}`,
     read: verdict.value,
-    readWords: '',
+    readWords: justPastWords(verdict, rules),
     limitWords: limitWords(verdict, rules),
     verdict: verdict.verdict,
     inDoubt: verdict.inDoubt,
@@ -75,6 +78,13 @@ function rowsOf(verdicts: readonly Verdict[], subject: string, rules: FitRules):
     by: ruleBehind(verdict, rules),
     action: verdict.action,
   }));
+}
+
+/** On the shop's step a figure may look the same as the limit that it is past; nothing to say else. */
+function justPastWords({ check, value, limitMm, verdict }: Verdict, rules: FitRules): string {
+  const isSameOnStep = formatLength(Math.abs(value.value), rules) === formatLength(limitMm, rules);
+  if (verdict !== 'over' || !isSameOnStep) return '';
+  return check === 'aisle' ? 'just under the least' : 'just over the limit';
 }
 
 function limitWords({ limitMm, spanMm }: Verdict, { unit, stepMm }: FitRules): string {

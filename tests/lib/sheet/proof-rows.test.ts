@@ -4,6 +4,7 @@ import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { whatIsMissing } from '@/lib/measure/what-is-missing';
 import { openPoints } from '@/lib/sheet/open-points';
 import { proofRows } from '@/lib/sheet/proof-rows';
+import { formatLength } from '@/lib/units/format-length';
 import { crookedKitchen } from '../../help/crooked-kitchen';
 
 const own = defaultShopRules('US').fit;
@@ -39,6 +40,20 @@ describe('proofRows', () => {
     const corners = rows.filter(({ check }) => check.startsWith('Corner'));
     expect(corners).toHaveLength(4);
     expect(corners.some(({ readWords }) => readWords === 'true within the reading')).toBe(true);
+  });
+
+  it('never shows a figure as its limit and calls it over without saying so', () => {
+    const { fit, rows } = proofOf({});
+    const same = fit.verdicts.filter(
+      ({ verdict, value, limitMm }) =>
+        verdict === 'over' &&
+        formatLength(Math.abs(value.value), own) === formatLength(limitMm, own),
+    );
+    expect(same.length).toBeGreaterThan(0);
+    for (const { words } of same) expect(words).toContain('just over');
+    expect(rows.filter(({ readWords }) => readWords === 'just over the limit')).toHaveLength(
+      same.length,
+    );
   });
 
   it('proves nothing of a room of which nothing was read', () => {
