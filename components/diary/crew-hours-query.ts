@@ -26,7 +26,7 @@ export function useCrewHours({
   pattern: WorkingPattern;
 }): { hoursOf: HoursOf; elsewhereOf: ElsewhereOf; workedDates: LocalDate[] } {
   const to = addDays(from, weeks * 7);
-  const { data } = useQuery({
+  const { data, isPlaceholderData } = useQuery({
     // Of what is asked for again when a visit or a crew has changed.
     queryKey: ['days', 'crew-hours', from, to],
     queryFn: ({ signal }) => askServer<CrewHours[]>(apiPaths.crewHours(from, to), { signal }),
@@ -44,12 +44,13 @@ export function useCrewHours({
     return {
       hoursOf: (crewId, date) => {
         const crew = known.get(crewId);
-        if (crew) return crew.get(date) ?? null;
+        // Of the days before, while these are fetched, nothing follows for days that they do not name.
+        if (crew && (crew.has(date) || !isPlaceholderData)) return crew.get(date) ?? null;
         return isWorkday(date, pattern) ? shopHours : null;
       },
       elsewhereOf: (crewId) =>
         data?.find((crew) => crew.crewId === crewId)?.elsewhere ?? nowhereElse,
       workedDates: [...new Set([...known.values()].flatMap((days) => [...days.keys()]))],
     };
-  }, [data, pattern]);
+  }, [data, isPlaceholderData, pattern]);
 }
