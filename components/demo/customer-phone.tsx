@@ -4,6 +4,7 @@ import { EmptyState } from '@/components/ui/empty-state';
 import { TextField } from '@/components/ui/text-field';
 import { TitleBlock } from '@/components/ui/title-block';
 import type { DemoPhone } from '@/lib/contracts/demo';
+import { phoneWords } from '@/lib/messages/phone-number';
 import { paths } from '@/lib/paths';
 import { LinkedText } from './linked-text';
 
@@ -32,7 +33,7 @@ export function CustomerPhone({ phone }: { phone: DemoPhone }) {
               aria-current={isShown ? 'page' : undefined}
               className="shrink-0 rounded border border-rule px-3 py-2 text-note aria-[current]:border-pine aria-[current]:font-bold"
             >
-              {name}
+              {'number' in to ? phoneWords(to.number, 'US') : name}
             </Link>
           );
         })}
@@ -50,7 +51,7 @@ export function CustomerPhone({ phone }: { phone: DemoPhone }) {
 function Texts({ phone, number }: { phone: DemoPhone; number: string }) {
   return (
     <>
-      <TitleBlock title="Texts" meta={number} />
+      <TitleBlock title="Texts" meta={phoneWords(number, 'US')} />
       <ol className="flex flex-col gap-3">
         {phone.texts.map((text) => (
           <li

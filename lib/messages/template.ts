@@ -15,13 +15,14 @@ type Part = { text: string } | { field: string };
 /**
  * Fills a template. A field that is unknown, or has no value here, gives no text at all rather than a hole.
  * Values are taken as they are: braces in them mean nothing. Spaces left over by an empty value go, and so
- * does a full stop after one ("a la 1:00 p.m..").
+ * does a full stop after one ("a la 1:00 p.m.."); a shop without a phone does not say "Questions: ".
  * Example: "{shop}: we come {day}." with shop "Juniper Bend" and day "Tue, May 12" is
  * "Juniper Bend: we come Tue, May 12.".
  * Problems: template-brace, field-unknown, field-without-value (errors).
  */
 export function renderTemplate(template: string, values: FieldValues): Outcome<string> {
-  const { parts, problems } = readTemplate(template);
+  const { parts: written, problems } = readTemplate(template);
+  const parts = values.shopPhone === '' ? withoutPhone(written) : written;
   const texts: string[] = [];
   for (const part of parts) {
     if ('text' in part) texts.push(part.text);
@@ -40,6 +41,21 @@ export function renderTemplate(template: string, values: FieldValues): Outcome<s
     .replace(/(?<!\.)\.\.(?!\.)/g, '.')
     .trim();
   return { value, problems: [] };
+}
+
+/** Each phone goes with what stands around it in its sentence, up to the field before and the one after. */
+function withoutPhone(parts: Part[]): Part[] {
+  const isPhone = (part: Part | undefined) =>
+    part !== undefined && 'field' in part && part.field === 'shopPhone';
+  return parts
+    .map((part, index): Part => {
+      if (!('text' in part)) return part;
+      let { text } = part;
+      if (isPhone(parts[index - 1])) text = text.replace(/^[^.!?\n]*[.!?]?/, '');
+      if (isPhone(parts[index + 1])) text = text.replace(/(^|[.!?]|\n)[^.!?\n]*$/, '$1');
+      return { text };
+    })
+    .filter((part) => !isPhone(part));
 }
 
 /** The text and the fields of a template, in order; a lone brace is a problem and stands as text. */

@@ -147,7 +147,7 @@ Le llamamos antes del {day}. Cuando esté listo, avísenos aquí o por teléfono
 {shopPhone}`,
   },
   done: {
-    sms: '{shop}: su {visit} ha terminado. Gracias. Vea lo que queda: {link}',
+    sms: '{shop}: su {visit} ha terminado. Gracias. Detalles: {link}',
     subject: 'Ha terminado su {visit}',
     email: `Hola, {customer}:
 

@@ -10,8 +10,8 @@ export async function readPhone(chosen: { number?: string; address?: string }): 
   // At night there is an e-mail only: the text waits for the morning.
   const address = chosen.address ?? (number ? undefined : addresses[0]);
   return {
-    numbers,
-    addresses,
+    numbers: shownFirst(numbers, number),
+    addresses: shownFirst(addresses, address),
     number: number ?? null,
     address: address ?? null,
     texts: number
@@ -32,4 +32,8 @@ export async function readPhone(chosen: { number?: string; address?: string }): 
         }))
       : [],
   };
+}
+
+function shownFirst(all: string[], shown: string | undefined): string[] {
+  return shown && all.includes(shown) ? [shown, ...all.filter((each) => each !== shown)] : all;
 }

@@ -7,9 +7,9 @@ export default function VisitNotFound() {
         It may have ended, or part of it was cut off. Your shop’s newest message has the link that
         works; or ring them.
       </p>
-      <p className="mt-4" lang="es">
-        Este enlace ya no abre nada. El mensaje más reciente del taller tiene el que sirve; o
-        llámeles.
+      <p className="mt-4 text-lead" lang="es">
+        Este enlace ya no abre nada. El mensaje más reciente del taller trae el que sirve; o
+        llámelos.
       </p>
     </main>
   );

@@ -95,11 +95,9 @@ describe('checking', () => {
   });
 });
 
-describe('what a new shop says', () => {
-  const all = languages.flatMap((language) =>
-    occasions.map((occasion) => ({ language, occasion })),
-  );
+const all = languages.flatMap((language) => occasions.map((occasion) => ({ language, occasion })));
 
+describe('what a new shop says', () => {
   test.each(all)('$occasion in $language passes its own check', ({ language, occasion }) => {
     const wording = usualWording(occasion, language);
     const parts = isTextAnswer(occasion) ? (['sms'] as const) : wordingParts;
@@ -170,6 +168,21 @@ describe('rendering', () => {
     expect(spanish).toContain('instalacion de gabinetes queda para el miércoles');
     expect(spanish).toBe(plainSms(spanish ?? ''));
   });
+
+  test.each(all)(
+    '$occasion in $language is whole for a shop without a phone',
+    ({ language, occasion }) => {
+      const input = { occasion, language, values: { ...sampleValues[language], shopPhone: '' } };
+      const texts = [renderSms(input).value ?? '', renderEmail(input).value?.text ?? ''];
+      for (const text of texts) {
+        expect(text).not.toMatch(/\s[.,]|\b(ring|at|Questions|Preguntas|Llame al|es)[:\s]*$/m);
+      }
+      const saysLink = usualWording(occasion, language).sms.includes('{link}');
+      expect(texts[0]?.includes(sampleValues[language].link)).toBe(
+        saysLink || occasion === 'moved-together',
+      );
+    },
+  );
 
   test('the HTML escapes whatever a value holds', () => {
     const html = renderEmail({ occasion: 'booked', language: 'en', values }).value?.html ?? '';
