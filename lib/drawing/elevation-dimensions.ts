@@ -3,10 +3,12 @@ import { formatLength } from '@/lib/units/format-length';
 import { dimension, dimensionString } from './dimension';
 import { type ElevationSheet, edgeAt } from './elevation-frame';
 import { bare } from './figure-spans';
-import type { DrawnText, Point, Shape } from './shape';
+import { type DrawnText, type Point, type Shape, smallTextSizePx, textWidthPx } from './shape';
 
 const stringPx = 30;
 const overallPx = 58;
+/** A figure wider than its unit stands under the string; the wall's own then goes further down. */
+const underStringPx = 12;
 
 /** Strings of widths under the floor and over the ceiling, the wall's length, and the heights at the right. */
 export function elevationDimensions(sheet: ElevationSheet): Shape[] {
@@ -25,10 +27,27 @@ export function elevationDimensions(sheet: ElevationSheet): Shape[] {
 /** The wall's own length, under the string of widths where there is one. */
 export function wallDimension(sheet: ElevationSheet): Shape[] {
   const hasString = sheet.ofWall.some(({ run }) => run.level !== 'wall');
+  const downPx = hasString ? overallPx + (hasFigureUnder(sheet) ? underStringPx : 0) : stringPx;
   return dimension(footAt(sheet, 0), footAt(sheet, sheet.lengthMm), {
-    offsetPx: -(hasString ? overallPx : stringPx),
+    offsetPx: -downPx,
     spans: wallLength(sheet),
   });
+}
+
+function hasFigureUnder(sheet: ElevationSheet): boolean {
+  return sheet.ofWall.some(
+    ({ run, runFit }) =>
+      run.level !== 'wall' &&
+      runFit.units.some(({ leftMm, rightMm }) => {
+        const [from, to] = [footAt(sheet, leftMm), footAt(sheet, rightMm)];
+        const figure = textWidthPx(widthFigure(sheet, rightMm - leftMm), smallTextSizePx);
+        return figure > Math.hypot(to[0] - from[0], to[1] - from[1]);
+      }),
+  );
+}
+
+function widthFigure({ rules }: ElevationSheet, widthMm: number): DrawnText['spans'] {
+  return [{ words: bare(formatLength(widthMm, rules)), tone: 'plain' }];
 }
 
 function footAt(sheet: ElevationSheet, xMm: number): Point {
@@ -41,13 +60,10 @@ function widths(
   at: (xMm: number) => Point,
   offsetPx: number,
 ): Shape[] {
-  const { unit, stepMm } = sheet.rules;
   const edges = runFit.units.flatMap((placed, index) =>
     index === 0 ? [placed.leftMm, placed.rightMm] : [placed.rightMm],
   );
-  const figures = runFit.units.map(({ leftMm, rightMm }): DrawnText['spans'] => [
-    { words: bare(formatLength(rightMm - leftMm, { unit, stepMm })), tone: 'plain' },
-  ]);
+  const figures = runFit.units.map(({ leftMm, rightMm }) => widthFigure(sheet, rightMm - leftMm));
   return dimensionString(edges.map(at), figures, offsetPx);
 }
 

@@ -34,9 +34,16 @@ export function runFacts(run: RunFit, rules: FitRules): string[] {
     kicks
       ? `${tradeName('kick', rules.region)} ${figureText(kicks.least, rules).value} to ${sure(kicks.greatest)}. ${kicks.words}`
       : '',
-    upperGap ? `Counter to the boxes above: ${sure(upperGap)}.` : '',
+    upperGap ? upperGapWords(upperGap, rules) : '',
     ceiling ? `To the ceiling: ${ceiling.words}.` : '',
   ].filter((words) => words !== '');
+}
+
+/** Nothing is read between two heights that are set out from one level line, so nothing is unsure. */
+function upperGapWords(gap: FitFigure, rules: FitRules): string {
+  const { value, surely } = figureText(gap, rules);
+  const words = gap.U > 0 ? `${value} ± ${surely}` : `${value}, both set out from one level line`;
+  return `Counter to the boxes above: ${words}.`;
 }
 
 function endsWords({ left, right }: RunFit, rules: FitRules): string {
