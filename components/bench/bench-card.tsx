@@ -22,13 +22,15 @@ export function BenchCard({ sheet, onTakeUp, maySayReady, mayBook }: BenchCardPr
   return (
     <article
       aria-label={`${sheet.customerName}, ${sheet.roomName}`}
-      className={`grid gap-x-6 gap-y-3 rounded border bg-sheet px-5 py-4 lg:grid-cols-[9rem_minmax(0,1fr)_minmax(0,19rem)] ${
+      className={`grid gap-x-6 gap-y-3 rounded border bg-sheet px-5 py-4 lg:grid-cols-[10.5rem_minmax(0,1fr)_minmax(0,18rem)] ${
         isSuperseded ? 'border-2 border-chalk' : 'border-ink'
       }`}
     >
       <div>
         <p className="text-note text-graphite">needed</p>
-        <p className="text-title leading-tight font-bold">{needWords ?? 'not booked'}</p>
+        <p className="text-title leading-tight font-bold whitespace-nowrap">
+          {needWords ?? 'not booked'}
+        </p>
         {lateDays > 0 ? (
           <Verdict kind="late">{lateDays === 1 ? '1 day late' : `${lateDays} days late`}</Verdict>
         ) : null}
@@ -58,7 +60,9 @@ export function BenchCard({ sheet, onTakeUp, maySayReady, mayBook }: BenchCardPr
       </div>
       <div className="flex flex-col gap-3">
         {sheet.takenUpWords ? (
-          <Verdict kind="confirmed">taken up {sheet.takenUpWords}</Verdict>
+          <Verdict kind="confirmed" className="text-body">
+            taken up {sheet.takenUpWords}
+          </Verdict>
         ) : onTakeUp ? (
           <Button size="thumb" onClick={onTakeUp}>
             Take it up

@@ -38,23 +38,22 @@ export function ReadyForm({ sheet }: { sheet: BenchSheet }) {
     if (day) void say(day, { why: words.trim() });
   };
 
+  if (sheet.isReady) {
+    return (
+      <Button size="thumb" look="plain" onClick={() => void say(null, {})}>
+        Not ready after all
+      </Button>
+    );
+  }
   if (asked === null) {
     return (
       <div className="grid grid-cols-2 gap-2">
-        {sheet.isReady ? (
-          <Button size="thumb" look="plain" onClick={() => void say(null, {})}>
-            Not ready after all
-          </Button>
-        ) : (
-          <Button size="thumb" look="line" onClick={() => setAsked('now')}>
-            Ready
-          </Button>
-        )}
-        {sheet.isReady ? null : (
-          <Button size="thumb" look="line" onClick={() => setAsked('later')}>
-            Ready on …
-          </Button>
-        )}
+        <Button size="thumb" look="line" onClick={() => setAsked('now')}>
+          Ready
+        </Button>
+        <Button size="thumb" look="line" onClick={() => setAsked('later')}>
+          Ready on …
+        </Button>
       </div>
     );
   }

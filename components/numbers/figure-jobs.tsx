@@ -36,13 +36,16 @@ const columns: Column<Line>[] = [
   },
 ];
 
+/** Of what counts as a yes or a no there is nothing to add up. */
+const withoutValue = columns.filter(({ key }) => key !== 'value');
+
 export function FigureJobs({ figure, lines }: { figure: FigureKey; lines: Line[] }) {
   return (
     <DataTable
       name={`numbers-${figure}`}
       caption={`Jobs behind the figure, ${lines.length}`}
       rows={lines}
-      columns={columns}
+      columns={lines.some(({ value }) => value !== null) ? columns : withoutValue}
       rowKey={({ place }) => String(place)}
       filterLabel="Find a job or a word"
     />

@@ -34,5 +34,5 @@ export function FigureList({ numbers, days, shown }: FigureListProps) {
 
 function ofWords({ key, unit, outOf }: Figure): string {
   const count = unit === 'hours' ? outOf.toFixed(1) : String(outOf);
-  return `of ${count} ${figureWords[key].of}`;
+  return figureWords[key].of.replace('#', count);
 }

@@ -42,11 +42,7 @@ export function KeysPart({ keys }: { keys: KeyView[] }) {
   };
   return (
     <section>
-      <TitleBlock
-        title="Keys"
-        meta={`${keys.length}`}
-        className={keys.length === 0 ? 'mb-3' : ''}
-      />
+      <TitleBlock title="Keys" meta={`${keys.length}`} />
       {keys.length === 0 ? (
         <EmptyState title="No program has a key">
           A key lets another program of yours read or book, and no more than you tick.
@@ -84,7 +80,7 @@ export function KeysPart({ keys }: { keys: KeyView[] }) {
           </code>
         </p>
       ) : null}
-      <form onSubmit={form.submit} className="flex max-w-lg flex-col gap-3 py-4">
+      <form key={made?.id} onSubmit={form.submit} className="flex max-w-lg flex-col gap-3 py-4">
         <TextField
           label="For which program"
           name="name"

@@ -43,11 +43,7 @@ export function WebhooksPart({ webhooks }: { webhooks: WebhookView[] }) {
   };
   return (
     <section>
-      <TitleBlock
-        title="Told of what happens"
-        meta={`${webhooks.length}`}
-        className={webhooks.length === 0 ? 'mb-3' : ''}
-      />
+      <TitleBlock title="Told of what happens" meta={`${webhooks.length}`} />
       {webhooks.length === 0 ? (
         <EmptyState title="No program is told">
           Give an address, and it is told within seconds when something you ticked has happened.
@@ -83,7 +79,7 @@ export function WebhooksPart({ webhooks }: { webhooks: WebhookView[] }) {
           With it the other program knows that it was us. Keep it there; it is not shown again.
         </ShownOnce>
       ) : null}
-      <form onSubmit={form.submit} className="flex max-w-lg flex-col gap-3 py-4">
+      <form key={added?.id} onSubmit={form.submit} className="flex max-w-lg flex-col gap-3 py-4">
         <TextField
           label="Address"
           name="url"

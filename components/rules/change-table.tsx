@@ -18,7 +18,8 @@ export function ChangeTable({ changes }: { changes: RuleChange[] }) {
               {label}
             </th>
             <td className="py-1 pr-4 tabular-nums">
-              <s className="text-graphite">{from}</s> → {to}
+              <s className={`text-graphite ${inOnePiece(from)}`}>{from}</s> →{' '}
+              <span className={inOnePiece(to)}>{to}</span>
             </td>
             <td className="py-1 text-graphite">{affects}</td>
           </tr>
@@ -27,3 +28,6 @@ export function ChangeTable({ changes }: { changes: RuleChange[] }) {
     </table>
   );
 }
+
+/** `2 1/2"` is one figure; a list of days may break. */
+const inOnePiece = (words: string) => (words.length < 24 ? 'whitespace-nowrap' : '');

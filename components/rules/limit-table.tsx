@@ -49,9 +49,12 @@ export function LimitTable({ set, unit, region, editable, onChange }: LimitTable
                   </span>
                 ) : null}
               </th>
-              <td className="py-1.5 pr-4">
+              <td className="py-1.5 pr-8">
                 {limitRows(rule.limit, unit).map(({ limitMm, words }, row) => (
-                  <div key={words} className="flex items-baseline gap-2 tabular-nums">
+                  <div
+                    key={words}
+                    className="flex items-baseline gap-2 whitespace-nowrap tabular-nums"
+                  >
                     <span className="text-graphite">
                       {rule.sense === 'least' ? 'at least' : 'at most'}
                     </span>

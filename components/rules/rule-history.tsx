@@ -25,11 +25,7 @@ export function RuleHistory({ lines, settings, mayChange }: RuleHistoryProps) {
   );
   return (
     <section>
-      <TitleBlock
-        title="Changed before"
-        meta={`${lines.length}`}
-        className={lines.length === 0 ? 'mb-3' : ''}
-      />
+      <TitleBlock title="Changed before" meta={`${lines.length}`} />
       {lines.length === 0 ? (
         <EmptyState title="Nothing was changed yet">
           Each change is kept here: who, when, from what to what.

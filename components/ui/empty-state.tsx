@@ -15,7 +15,7 @@ type EmptyStateProps = {
 export function EmptyState({ title, children, action, isPage = false }: EmptyStateProps) {
   const Title = isPage ? 'h1' : 'p';
   return (
-    <div className="flex max-w-prose flex-col items-start gap-3 border border-dashed border-graphite px-5 py-6">
+    <div className="mt-3 flex max-w-prose flex-col items-start gap-3 border border-dashed border-graphite px-5 py-6">
       <Title className="text-lead font-bold">{title}</Title>
       <div className="text-graphite">{children}</div>
       {action}

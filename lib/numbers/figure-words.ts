@@ -1,50 +1,50 @@
 import type { Figure, FigureKey } from '@/lib/contracts/numbers';
 
-/** What each figure is called, what it is of, and how it is counted. */
+/** What each figure is called, what it is of (# for how many), and how it is counted. */
 export const figureWords: Record<FigureKey, { name: string; of: string; how: string }> = {
   'second-trips': {
     name: 'Second trips',
-    of: 'visits made',
+    of: 'of # visits made',
     how: 'Return visits, rooms measured again, and visits where nobody was home. Why: the newest snag before the visit.',
   },
   'short-fills': {
     name: 'Short fills',
-    of: 'short',
+    of: 'found short on site or released short',
     how: 'Parts noted as too short on site, and sheets released although a run came out short.',
   },
   'days-to-measure': {
     name: 'Enquiry to measure',
-    of: 'jobs first measured',
+    of: 'of # jobs first measured',
     how: 'The middle job: from the day it was asked for to the measurer’s first arrival.',
   },
   'days-to-install': {
     name: 'Enquiry to install',
-    of: 'jobs first installed',
+    of: 'of # jobs first installed',
     how: 'The middle job: from the day it was asked for to the crew’s first arrival for the install.',
   },
   'confirmed-before': {
     name: 'Confirmed before the day',
-    of: 'visits that came due',
+    of: 'of # visits that came due',
     how: 'The customer had said yes before midnight of the visit’s own day, in the shop’s zone.',
   },
   'in-the-window': {
     name: 'Arrived in the window',
-    of: 'arrivals',
+    of: 'of # arrivals',
     how: 'Arrived between the two times promised, both included.',
   },
   hours: {
     name: 'Hours against estimate',
-    of: 'hours expected',
+    of: 'for # hours expected',
     how: 'From arriving to leaving, without pauses and without the nights between the days of one visit.',
   },
   drive: {
     name: 'Drive for a visit',
-    of: 'visits',
+    of: 'of # visits',
     how: 'All minutes of a crew’s day, base to base in the order of its stops, shared over its visits.',
   },
   'message-cost': {
     name: 'Texts',
-    of: 'texts sent',
+    of: 'for # texts sent',
     how: 'Each text is charged in messages of the carrier; long ones and those with rare letters take more.',
   },
 };

@@ -1,4 +1,5 @@
 import type { Figure, FigureKey } from '@/lib/contracts/numbers';
+import { occasionWords, parseOccasion } from '@/lib/messages/occasions';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { localDate } from '@/lib/time/local-moment';
 import type { DriveFact, JobFact, MessageFact, VisitFact } from './facts';
@@ -96,6 +97,12 @@ export function drivePerVisit(days: readonly DriveFact[], isEstimated: boolean):
   };
 }
 
+/** An occasion that is no more keeps its name. */
+function occasionName(occasion: string): string {
+  const known = parseOccasion(occasion);
+  return known ? occasionWords[known] : occasion;
+}
+
 /** What texts cost, by occasion; null while the shop has not said what one message costs. */
 export function messageCost(
   sent: readonly MessageFact[],
@@ -110,13 +117,13 @@ export function messageCost(
     value: segmentPrice === null ? segments : segments * price,
     outOf: sent.length,
     splits: splitBy(sent, ({ occasion, segments: count }) => ({
-      name: occasion,
+      name: occasionName(occasion),
       value: segmentPrice === null ? count : count * price,
     })),
     lines: sent.map((message) => ({
       ...jobOf(message),
       on: localDate(message.sentAt, zone),
-      words: `${message.occasion}: ${message.segments === 1 ? '1 message' : `${message.segments} messages`}`,
+      words: `${occasionName(message.occasion)}: ${message.segments === 1 ? '1 message' : `${message.segments} messages`}`,
       value: segmentPrice === null ? message.segments : message.segments * price,
     })),
     caution:

@@ -22,7 +22,7 @@ const words: Record<Exclude<CheckKind, 'counter-parallel-to-floor'>, string> = {
   'cabinet-warp': 'Cabinets, warp',
   'gap-at-wall': 'Gap at a wall',
   'joint-wood': 'Joint, wood to wood',
-  'joint-wood-nonwood': 'Joint, wood to another stuff',
+  'joint-wood-nonwood': 'Joint, wood to another material',
   'pieces-against-whole': 'Pieces against the whole',
   aisle: 'Aisle',
 };

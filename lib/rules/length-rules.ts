@@ -114,12 +114,12 @@ export function lengthRuleGroups(region: Region): RuleGroup[] {
         {
           rule: 'repeatAgreementMm',
           label: 'Two readings agree within',
-          affects: 'before you leave',
+          affects: 'what disagrees before the measurer leaves',
         },
         {
           rule: 'piecesAskMm',
           label: 'Pieces against the whole: ask',
-          affects: 'before you leave',
+          affects: 'what is asked before the measurer leaves',
         },
         {
           rule: 'piecesRefuseMm',
@@ -146,7 +146,7 @@ export function lengthRuleGroups(region: Region): RuleGroup[] {
         {
           rule: 'wallGapAimMm',
           label: 'Gap at a wall, before it is closed',
-          affects: 'setting',
+          affects: 'what a fitter aims at',
         },
         { rule: 'wallGapRejectMm', label: 'Gap at a wall, too much', affects: 'verdicts' },
         {

@@ -59,7 +59,8 @@ export function ruleChanges(before: Settings, after: Partial<Settings>): RuleCha
   const flat = flattened(before);
   return [...flattened(after)].flatMap(([key, to]) => {
     const from = flat.get(key);
-    if (to === undefined || JSON.stringify(to) === JSON.stringify(from)) return [];
+    // A rule that the shop never said and one that says none are the same.
+    if (to === undefined || JSON.stringify(to ?? null) === JSON.stringify(from ?? null)) return [];
     const { words, ...rule } = named.get(key) ?? { label: key, affects: '' };
     const said = (value: unknown) => words?.(value) ?? valueWords(key, value);
     return [{ ...rule, from: said(from), to: said(to) }];

@@ -31,7 +31,7 @@ export default async function NumbersPage({ searchParams }: NumbersPageProps) {
         level={1}
         title="Numbers"
         meta={
-          <nav aria-label="Period" className="flex gap-4">
+          <nav aria-label="Period" className="flex flex-wrap gap-x-4 whitespace-nowrap">
             <span>
               {numbers.from} to {numbers.until}
             </span>

@@ -46,73 +46,77 @@ export default async function JobPage({ params }: { params: Promise<{ jobId: str
         title={`${job.customerName} · ${job.title}`}
         meta={`job ${job.number} · ${stageWords[job.stage]}`}
       />
-      <div className="mt-4 grid gap-x-10 gap-y-6 xl:grid-cols-[minmax(0,1fr)_minmax(0,1fr)]">
-        <section>
-          <TitleBlock title="Who and where" />
-          <JobFacts
-            job={job}
-            region={ctx.shop.region}
-            mayRead={may(ctx.actor.role, 'messages:read')}
-          />
-          {may(ctx.actor.role, 'visits:book') ? <BookNext job={job} /> : null}
-          {may(ctx.actor.role, 'jobs:change') ? (
-            <SitePlace job={job} ground={getMapGround(ctx)} />
-          ) : null}
-        </section>
-        <section>
-          <TitleBlock title="Rooms" meta={`${rooms.length} of ${job.roomCount}`} />
-          <RoomList jobId={job.id} rooms={rooms} />
-        </section>
-        {photos.length > 0 ? (
+      <div className="mt-4 grid items-start gap-x-10 gap-y-6 xl:grid-cols-2">
+        <div className="flex min-w-0 flex-col gap-6">
           <section>
-            <TitleBlock title="Photos" meta={photos.length} />
-            <JobPhotos photos={photos} rooms={rooms} />
-          </section>
-        ) : null}
-        <section>
-          <TitleBlock title="Papers" meta={papers.length} />
-          <JobFiles jobId={job.id} files={papers} mayAdd={may(ctx.actor.role, 'jobs:change')} />
-        </section>
-        {may(ctx.actor.role, 'jobs:change') ? (
-          <section>
-            <TitleBlock title="State of the site" />
-            <SiteForm
+            <TitleBlock title="Who and where" />
+            <JobFacts
               job={job}
-              key={JSON.stringify([job.notReady, job.floorAgreed, job.wallsReady])}
+              region={ctx.shop.region}
+              mayRead={may(ctx.actor.role, 'messages:read')}
+            />
+            {may(ctx.actor.role, 'visits:book') ? <BookNext job={job} /> : null}
+            {may(ctx.actor.role, 'jobs:change') ? (
+              <SitePlace job={job} ground={getMapGround(ctx)} />
+            ) : null}
+          </section>
+          {may(ctx.actor.role, 'jobs:change') ? (
+            <section>
+              <TitleBlock title="State of the site" />
+              <SiteForm
+                job={job}
+                key={JSON.stringify([job.notReady, job.floorAgreed, job.wallsReady])}
+              />
+            </section>
+          ) : null}
+          {may(ctx.actor.role, 'jobs:change') ? (
+            <section>
+              <TitleBlock title="For the crew" />
+              <ForCrewForm jobId={job.id} forCrew={forCrew} key={JSON.stringify(forCrew)} />
+            </section>
+          ) : null}
+          {may(ctx.actor.role, 'customers:erase') && !job.isErased ? (
+            <section>
+              <TitleBlock title="The customer’s data" />
+              <CustomerData customerId={job.customerId} />
+            </section>
+          ) : null}
+        </div>
+        <div className="flex min-w-0 flex-col gap-6">
+          <section>
+            <TitleBlock title="Rooms" meta={`${rooms.length} of ${job.roomCount}`} />
+            <RoomList jobId={job.id} rooms={rooms} />
+          </section>
+          {photos.length > 0 ? (
+            <section>
+              <TitleBlock title="Photos" meta={photos.length} />
+              <JobPhotos photos={photos} rooms={rooms} />
+            </section>
+          ) : null}
+          <section>
+            <TitleBlock title="Papers" meta={papers.length} />
+            <JobFiles jobId={job.id} files={papers} mayAdd={may(ctx.actor.role, 'jobs:change')} />
+          </section>
+          <section>
+            <TitleBlock title="Snags" meta={openWords(snags)} />
+            <JobSnags
+              jobId={job.id}
+              snags={snags}
+              rooms={rooms}
+              mayChange={may(ctx.actor.role, 'snags:change')}
             />
           </section>
-        ) : null}
-        {may(ctx.actor.role, 'jobs:change') ? (
+          {signOffs.length > 0 ? (
+            <section>
+              <TitleBlock title="Signed" />
+              <SignOffList signOffs={signOffs} />
+            </section>
+          ) : null}
           <section>
-            <TitleBlock title="For the crew" />
-            <ForCrewForm jobId={job.id} forCrew={forCrew} key={JSON.stringify(forCrew)} />
+            <TitleBlock title="What happened" />
+            <JobStory story={job.story} />
           </section>
-        ) : null}
-        <section>
-          <TitleBlock title="Snags" meta={openWords(snags)} />
-          <JobSnags
-            jobId={job.id}
-            snags={snags}
-            rooms={rooms}
-            mayChange={may(ctx.actor.role, 'snags:change')}
-          />
-        </section>
-        {signOffs.length > 0 ? (
-          <section>
-            <TitleBlock title="Signed" />
-            <SignOffList signOffs={signOffs} />
-          </section>
-        ) : null}
-        <section>
-          <TitleBlock title="What happened" />
-          <JobStory story={job.story} />
-        </section>
-        {may(ctx.actor.role, 'customers:erase') && !job.isErased ? (
-          <section>
-            <TitleBlock title="The customer’s data" />
-            <CustomerData customerId={job.customerId} />
-          </section>
-        ) : null}
+        </div>
       </div>
     </>
   );
