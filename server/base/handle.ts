@@ -26,6 +26,14 @@ export async function signedIn(request: Request): Promise<PersonContext> {
   const key = bearerKey(request.headers);
   const ctx = key === null ? await personContext(request.headers) : await keyContext(key);
   if (ctx) return ctx;
+  if (key !== null) {
+    throw new Refusal({
+      status: 401,
+      code: 'no-such-key',
+      message:
+        'This key opens nothing: it was never made, or was taken back. Ask the shop’s owner.',
+    });
+  }
   throw new Refusal({
     status: 401,
     code: 'not-signed-in',

@@ -29,11 +29,13 @@ export function understood<S extends z.ZodType>(schema: S, value: unknown): z.ou
   });
 }
 
-/** What a contract has no words for is said by the library in its own; of these a missing field is the usual one. */
+/** What a contract has no words for is said by the library in its own; of these a missing field and a number that is none are the usual ones. */
 function issueWords(issue: z.core.$ZodIssue): string {
-  return issue.code === 'invalid_type' && issue.message.endsWith('received undefined')
-    ? 'Is missing.'
-    : issue.message;
+  if (issue.code !== 'invalid_type' || !issue.message.startsWith('Invalid input')) {
+    return issue.message;
+  }
+  if (issue.message.endsWith('received undefined')) return 'Is missing.';
+  return issue.expected === 'number' ? 'Write a number.' : issue.message;
 }
 
 async function readBody(request: Request): Promise<Record<string, unknown>> {

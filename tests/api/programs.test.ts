@@ -99,7 +99,10 @@ describe('a door for other programs', () => {
     expect((await callRoute(revokeRoute, revoke)).status).toBe(200);
     expect((await listJobs(asKey(key))).status).toBe(401);
     expect((await callRoute(revokeRoute, revoke)).status).toBe(404);
-    expect((await listJobs({ authorization: 'Bearer setwell_nothing' })).status).toBe(401);
+    expect(await listJobs({ authorization: 'Bearer setwell_nothing' })).toMatchObject({
+      status: 401,
+      body: { code: 'no-such-key' },
+    });
     // A key that does not fit is not helped by a session that would.
     expect((await listJobs({ authorization: 'Bearer x', cookie: owner })).status).toBe(401);
 
