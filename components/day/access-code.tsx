@@ -27,7 +27,7 @@ export function AccessCode({ visitId }: { visitId: string }) {
       ) : isShown ? (
         <div className="flex items-center justify-between gap-4">
           <p className="text-title font-bold tracking-wider">{code}</p>
-          <Button look="plain" size="thumb" className="w-auto" onClick={() => setIsShown(false)}>
+          <Button look="plain" size="thumb" className="w-auto!" onClick={() => setIsShown(false)}>
             {words.hideCode}
           </Button>
         </div>

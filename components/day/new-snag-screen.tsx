@@ -81,6 +81,27 @@ export function NewSnagScreen({ visit, stop, kind: asked }: NewSnagScreenProps) 
         chosen={draft.kind}
         onChoose={(kind) => change({ kind })}
       />
+      <TextareaField
+        label={words.words}
+        value={draft.words}
+        maxLength={600}
+        error={isAskingWords && draft.words.trim() === '' ? words.sayWhat : undefined}
+        onChange={(event) => change({ words: event.target.value })}
+      />
+      <div>
+        <SnagPhotos photoIds={draft.photoIds} />
+        <TakePhoto
+          roomId={draft.roomId || null}
+          jobId={visit.jobId}
+          wallId={null}
+          words={words.takePhoto}
+          place={draft.words.trim().slice(0, 80) || words.snagKinds[draft.kind]}
+          onKept={(photoId) => {
+            change({ photoIds: [...draft.photoIds, photoId] });
+            goToStop({ at: 'photo', photoId, kind: asked, snagId: '' });
+          }}
+        />
+      </div>
       {visit.rooms.length > 0 ? (
         <SelectField
           label={words.where}
@@ -108,27 +129,6 @@ export function NewSnagScreen({ visit, stop, kind: asked }: NewSnagScreenProps) 
         className="min-h-thumb"
         onChange={(event) => change({ place: event.target.value })}
       />
-      <TextareaField
-        label={words.words}
-        value={draft.words}
-        maxLength={600}
-        error={isAskingWords && draft.words.trim() === '' ? words.sayWhat : undefined}
-        onChange={(event) => change({ words: event.target.value })}
-      />
-      <div>
-        <SnagPhotos photoIds={draft.photoIds} />
-        <TakePhoto
-          roomId={draft.roomId || null}
-          jobId={visit.jobId}
-          wallId={null}
-          words={words.takePhoto}
-          place={draft.words.trim().slice(0, 80) || words.snagKinds[draft.kind]}
-          onKept={(photoId) => {
-            change({ photoIds: [...draft.photoIds, photoId] });
-            goToStop({ at: 'photo', photoId, kind: asked, snagId: '' });
-          }}
-        />
-      </div>
       <ChoiceRow
         legend={words.mender}
         choices={snagMenders.map((mender) => ({ value: mender, words: words.menders[mender] }))}

@@ -93,7 +93,7 @@ export function SignScreen({ visit, stop }: { visit: TodayVisit; stop: StopView 
       <div className="flex flex-col gap-2">
         <div className="flex items-center justify-between">
           <p className="font-medium">{words.signHere}</p>
-          <Button look="plain" size="thumb" className="w-auto" onClick={clear}>
+          <Button look="plain" size="thumb" className="w-auto!" onClick={clear}>
             {words.clear}
           </Button>
         </div>
@@ -138,7 +138,7 @@ function OtherLanguage({ current }: { current: CrewLanguage }) {
       look="line"
       size="thumb"
       lang={other}
-      className="w-auto self-end"
+      className="w-auto! self-end"
       onClick={() => chooseLanguage(other)}
     >
       {crewWords[other].languageName}
