@@ -73,6 +73,7 @@ function units(drawn: Drawn): Shape[] {
   const { run, runFit, sheet } = drawn;
   const place = placeOf(drawn);
   const front = run.carcassDepthMm + run.bumperMm + run.doorMm;
+  const widthAt = front * WIDTH_SHARE;
   return runFit.units.flatMap((unit) => {
     const corners = box(place, unit, run.carcassDepthMm);
     const [a, b, c, d] = corners;
@@ -97,11 +98,14 @@ function units(drawn: Drawn): Shape[] {
       ...widthFigure(
         sheet,
         unit,
-        between(place(unit.leftMm, front * 0.8), place(unit.rightMm, front * 0.8), 0.5),
+        between(place(unit.leftMm, widthAt), place(unit.rightMm, widthAt), 0.5),
       ),
     ];
   });
 }
+
+/** Between the fronts of the units above and the kick line, where the floor is read and marked. */
+const WIDTH_SHARE = 0.66;
 
 const hasDoors = ({ kind }: PlacedUnit) => kind !== 'panel' && kind !== 'open';
 
