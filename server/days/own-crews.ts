@@ -5,12 +5,16 @@ import type { PersonContext } from '@/server/base/context';
 
 /** Fitters and measurers see the visits of their own crews; owner, scheduler and bench see all. */
 export function ofOwnCrews(ctx: PersonContext): SQL | undefined {
-  const { role, personId } = ctx.actor;
-  if (role !== 'measurer' && role !== 'crew') return undefined;
+  const { role } = ctx.actor;
+  return role === 'measurer' || role === 'crew' ? ofCrewsWithThem(ctx) : undefined;
+}
+
+/** The visits of the crews that this person goes with, whatever the role. */
+export function ofCrewsWithThem(ctx: PersonContext): SQL {
   const own = ctx.db
     .select({ crewId: crewPeople.crewId })
     .from(crewPeople)
-    .where(and(eq(crewPeople.shopId, ctx.shop.id), eq(crewPeople.personId, personId)));
+    .where(and(eq(crewPeople.shopId, ctx.shop.id), eq(crewPeople.personId, ctx.actor.personId)));
   return inArray(visits.crewId, own);
 }
 

@@ -5,18 +5,18 @@ import { may } from '@/lib/permissions';
 import { localDate } from '@/lib/time/local-moment';
 import type { PersonContext } from '@/server/base/context';
 import { readSnags } from '@/server/snags/read-snags';
-import { ofOwnCrews } from './own-crews';
+import { ofCrewsWithThem } from './own-crews';
 
 /**
- * What one's own crews have to mend on any of their jobs, the most pressing first; in the office every
- * crew's. Whoever may close no snag is shown none.
+ * What the crews that one goes with have to mend on any of their jobs, the most pressing first. Whoever may
+ * close no snag is shown none.
  */
 export async function readSnagsToMend(ctx: PersonContext): Promise<CrewSnag[]> {
   if (!may(ctx.actor.role, 'snags:change')) return [];
   const isOwnVisit = and(
     eq(visits.shopId, ctx.shop.id),
     notInArray(visits.status, ['held', 'called-off']),
-    ofOwnCrews(ctx),
+    ofCrewsWithThem(ctx),
   );
   const open = await readSnags(
     ctx.db,
