@@ -68,7 +68,12 @@ export function NewJobForm({ ground }: { ground: MapGround }) {
           isOptional
           error={error('customer.email')}
         />
-        <CheckField label="May be e-mailed (asked, and said yes)" name="mayEmail" value="yes" />
+        <CheckField
+          label="May be e-mailed (asked, and said yes)"
+          hint="With neither, nobody is told by itself: you call them."
+          name="mayEmail"
+          value="yes"
+        />
         <SelectField
           label="Language"
           name="language"

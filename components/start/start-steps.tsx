@@ -53,8 +53,9 @@ export function StartSteps({ start, settings, crews, person }: StartStepsProps) 
     yes: (
       <>
         <p>
-          The customer has a link by text and e-mail, and says yes there without an account. You see
-          it in the diary and here.
+          The customer has a link by text or e-mail, and says yes there without an account. You see
+          it in the diary and here. From {settings.booking.quietFrom} to{' '}
+          {settings.booking.quietUntil} nothing goes out: it waits for the morning.
         </p>
         {customerPage ? (
           <a href={customerPage} target="_blank" rel="noreferrer" className="link">

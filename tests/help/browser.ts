@@ -16,6 +16,8 @@ type Opening = {
   /** Who is signed in, of another shop than the demo's: what their browser sends. */
   cookie?: string;
   javaScript?: boolean;
+  /** Where the browser stands: "Asia/Tokyo"; where the machine stands, if left out. */
+  timezone?: string;
   /** Lines of the console that belong to the test, such as a refusal that it asks for. */
   mayLog?: RegExp[];
 };
@@ -57,7 +59,14 @@ export function useBrowser() {
   });
 
   async function openContext(opening: Opening = {}): Promise<BrowserContext> {
-    const { size = 'desk', theme = 'light', as, javaScript = true, mayLog = [] } = opening;
+    const {
+      size = 'desk',
+      theme = 'light',
+      as,
+      javaScript = true,
+      timezone,
+      mayLog = [],
+    } = opening;
     const cookie = opening.cookie ?? (as && inject('sessions')[as]);
     const baseURL = inject('baseUrl');
     const context = await browser.newContext({
@@ -65,6 +74,7 @@ export function useBrowser() {
       baseURL,
       colorScheme: theme,
       javaScriptEnabled: javaScript,
+      timezoneId: timezone,
       // A second look at a page must not wait for things to slide.
       reducedMotion: 'reduce',
       locale: 'en-US',
