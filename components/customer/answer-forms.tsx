@@ -28,7 +28,7 @@ export function AnswerForms({ visit, token }: { visit: CustomerVisitView; token:
         {words.another}
       </a>
       <details className="rounded border border-pine">
-        <summary className="flex min-h-thumb cursor-pointer items-center justify-center px-4 text-lead font-bold text-pine">
+        <summary className="flex min-h-thumb cursor-pointer items-center justify-center px-4 py-2 text-center text-lead font-bold text-pine">
           {visit.saysNotReady ? words.notReadyMore : words.notReady}
         </summary>
         <form method="post" action={action} className="flex flex-col gap-3 px-4 pb-4">

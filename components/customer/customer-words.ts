@@ -20,3 +20,8 @@ export function regionalWords(
     return term ? wordOf(term, region) : braced;
   });
 }
+
+/** No line of the page begins with "PM" or "a.m.". In a text such a space would cost dear, so it is put here. */
+export function unbroken(words: string): string {
+  return words.replace(/(\d) (?=[ap]\.?m\b)/gi, '$1\u00A0');
+}

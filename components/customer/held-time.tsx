@@ -1,7 +1,7 @@
 import { Button } from '@/components/ui/button';
 import type { CustomerTimesView } from '@/lib/contracts/visits';
 import { paths } from '@/lib/paths';
-import { customerWords } from './customer-words';
+import { customerWords, unbroken } from './customer-words';
 import { HoldLeft } from './hold-left';
 
 type Props = {
@@ -25,7 +25,7 @@ export function HeldTime({ hold, language, token }: Props) {
       </h2>
       <p className="mt-1 text-lead">
         <span className="block font-bold first-letter:uppercase">{hold.dayWords}</span>
-        {hold.windowWords}
+        {unbroken(hold.windowWords)}
       </p>
       <form method="post" action={paths.customerTake(token)} className="mt-3">
         <input type="hidden" name="heldVisitId" value={hold.heldVisitId} />

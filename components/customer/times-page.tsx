@@ -2,7 +2,7 @@ import { Button } from '@/components/ui/button';
 import { TextareaField } from '@/components/ui/textarea-field';
 import type { CustomerTimesView } from '@/lib/contracts/visits';
 import { paths } from '@/lib/paths';
-import { customerWords } from './customer-words';
+import { customerWords, unbroken } from './customer-words';
 import { HeldTime } from './held-time';
 import { PageFrame } from './page-frame';
 
@@ -53,7 +53,9 @@ function Choices({ view, token }: Omit<Props, 'wasTaken'>) {
                 <input type="hidden" name="time" value={time.time} />
                 <Button type="submit" size="thumb" look="line" className="flex-col gap-0">
                   <span className="first-letter:uppercase">{time.dayWords}</span>
-                  <span className="font-normal text-balance text-ink">{time.windowWords}</span>
+                  <span className="font-normal text-balance text-ink">
+                    {unbroken(time.windowWords)}
+                  </span>
                 </Button>
               </form>
             </li>
@@ -61,7 +63,7 @@ function Choices({ view, token }: Omit<Props, 'wasTaken'>) {
         </ul>
       )}
       <details className="mt-6 rounded border border-pine" open={times.length === 0 && !hold}>
-        <summary className="flex min-h-thumb cursor-pointer items-center justify-center px-4 text-lead font-bold text-pine">
+        <summary className="flex min-h-thumb cursor-pointer items-center justify-center px-4 py-2 text-center text-lead font-bold text-pine">
           {times.length === 0 && !hold ? words.askCall : words.noneSuits}
         </summary>
         <form

@@ -1,7 +1,7 @@
 import type { CustomerVisitView } from '@/lib/contracts/visits';
 import { paths } from '@/lib/paths';
 import { AnswerForms } from './answer-forms';
-import { customerWords, regionalWords } from './customer-words';
+import { customerWords, regionalWords, unbroken } from './customer-words';
 import { PageFrame } from './page-frame';
 import { VisitStanding } from './visit-standing';
 
@@ -20,6 +20,8 @@ export function VisitPage({ visit, token, hasCopy, mapHref }: Props) {
   const place = [visit.street, visit.town].filter(Boolean).join(', ');
   const { status } = visit;
   const isOver = status === 'done' || status === 'missed' || status === 'called-off';
+  // A late crew and one that is there have said so above.
+  const saysWindow = visit.arrivalWords === '' && status !== 'on-site';
   const mayAnswer = status === 'held' || status === 'booked' || status === 'confirmed';
   return (
     <PageFrame of={visit}>
@@ -37,9 +39,11 @@ export function VisitPage({ visit, token, hasCopy, mapHref }: Props) {
       ) : null}
       {isOver ? null : (
         <>
-          <p className="mt-2 text-lead text-balance">
-            {words.arrive(visit.windowWords, visit.untilWords)}
-          </p>
+          {saysWindow ? (
+            <p className="mt-2 text-lead text-balance">
+              {unbroken(words.arrive(visit.windowWords, visit.untilWords))}
+            </p>
+          ) : null}
           <p className="mt-2">
             {words.comes(visit.whoComes, regionalWords(words.what[visit.kind], visit))}{' '}
             <a href={mapHref} className="underline" title={words.map}>
@@ -53,7 +57,7 @@ export function VisitPage({ visit, token, hasCopy, mapHref }: Props) {
               {words.calendar}
             </a>
           </p>
-          <Before visit={visit} />
+          {status === 'on-site' ? null : <Before visit={visit} />}
         </>
       )}
     </PageFrame>

@@ -13,6 +13,10 @@ export const messageStates: Record<MessageView['state'], { words: string; kind: 
   received: { words: 'from the customer', kind: 'waiting' },
 };
 
+/** Why it stands so, without what its state says already. */
+export const reasonOf = ({ reason }: Pick<MessageView, 'reason'>) =>
+  reason.replace(/^Not delivered: call them\. /, '');
+
 const words: Record<string, string> = {
   ...occasionWords,
   reply: 'Reply',

@@ -6,7 +6,7 @@ import { EmptyState } from '@/components/ui/empty-state';
 import { Verdict } from '@/components/ui/verdict';
 import type { MessageView } from '@/lib/contracts/messages';
 import { paths } from '@/lib/paths';
-import { messageStates, occasionOf } from './message-state';
+import { messageStates, occasionOf, reasonOf } from './message-state';
 
 const columns: Column<MessageView>[] = [
   {
@@ -30,10 +30,16 @@ const columns: Column<MessageView>[] = [
     key: 'channel',
     header: 'By',
     isForDesk: true,
-    cell: (message) => (message.channel === 'sms' ? 'text' : 'e-mail'),
+    cell: (message) => (
+      <span className="whitespace-nowrap">{message.channel === 'sms' ? 'text' : 'e-mail'}</span>
+    ),
     choice: (message) => (message.channel === 'sms' ? 'text' : 'e-mail'),
   },
-  { key: 'due', header: 'When', cell: (message) => message.dueAtWords },
+  {
+    key: 'due',
+    header: 'When',
+    cell: (message) => <span className="sm:whitespace-nowrap">{message.dueAtWords}</span>,
+  },
   {
     key: 'state',
     header: 'Stands',
@@ -43,7 +49,7 @@ const columns: Column<MessageView>[] = [
         <>
           <Verdict kind={kind}>{words}</Verdict>
           {message.reason ? (
-            <span className="block text-note text-graphite">{message.reason}</span>
+            <span className="block text-note text-graphite">{reasonOf(message)}</span>
           ) : null}
         </>
       );

@@ -13,7 +13,7 @@ export function TextCost({
   const { segments, encoding, culprits } = countSegments(plainSms(text));
   return (
     <p aria-live="polite" className={`text-note ${segments > 2 ? 'text-chalk' : 'text-graphite'}`}>
-      {textCostWords(segments, price)}
+      {text === '' ? null : textCostWords(segments, price)}
       {encoding === 'UCS-2'
         ? `; ${culprits.map(({ character, code }) => `${character} (${code})`).join(', ')} leaves room for 70 letters a message, not 160`
         : ''}

@@ -1,6 +1,6 @@
 import { Verdict } from '@/components/ui/verdict';
 import type { ThreadView } from '@/lib/contracts/messages';
-import { messageStates, occasionOf } from './message-state';
+import { messageStates, occasionOf, reasonOf } from './message-state';
 
 /** Theirs on the left, ours on the right, in the order of time; what was withdrawn is one quiet line. */
 export function ThreadMessages({ messages }: Pick<ThreadView, 'messages'>) {
@@ -45,7 +45,7 @@ function ThreadMessage({ message }: { message: ThreadView['messages'][number] })
       ) : null}
       <p className="mt-0.5 text-note">
         <Verdict kind={kind}>{words}</Verdict>
-        {reason ? <span className="text-graphite"> {reason}</span> : null}
+        {reason ? <span className="text-graphite"> {reasonOf(message)}</span> : null}
       </p>
     </>
   );
