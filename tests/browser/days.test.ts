@@ -50,7 +50,7 @@ describe('a day on the map, and a shop that is late', () => {
     const { id: jobId } = await getAt<{ id: string }>(scheduler, apiPaths.jobs(), {
       body: {
         customer: { name },
-        site: { street: '4 Test Row', town, latitude, longitude },
+        site: { street: '4 Test Row', town, latitude, longitude, wayIn: 'Side door' },
         title: 'Kitchen',
         wallsReady: 'closed',
       },
