@@ -10,7 +10,7 @@ const ASK_AGAIN_MS = 3_600_000;
  * http, private windows) pages want a signal, and everything else goes on.
  */
 export function startWorker(): () => void {
-  const { serviceWorker } = navigator;
+  const serviceWorker = workersOf(navigator);
   if (!serviceWorker) return () => {};
   let isStopped = false;
   let registration: ServiceWorkerRegistration | null = null;
@@ -68,6 +68,11 @@ export function startWorker(): () => void {
     serviceWorker.removeEventListener('controllerchange', changed);
     document.removeEventListener('visibilitychange', askAgain);
   };
+}
+
+/** Read by name: the bundler takes `navigator.serviceWorker` to be there, and leaves a plain test for it out. */
+function workersOf(owner: Navigator): ServiceWorkerContainer | null {
+  return Reflect.get(owner, 'serviceWorker') ?? null;
 }
 
 /** Whether a worker has the program; asked once it may. */

@@ -68,9 +68,16 @@ describe('a crew’s day with no signal', () => {
     await phone.start();
     await phone.page.goto(`${stop}#snags`);
     await phone.page.getByText('2 open').waitFor();
+    // What the crew mends is in one list with that of other jobs, one tap from the day.
+    await phone.page.goto(paths.today());
+    await open(phone.page, /^Snags to mend/);
+    await expectNoSeriousFault(phone.page);
+    await keepPicture(phone.page, 'crew-mend');
     await open(phone.page, /Door of the sink base rubs/);
     await phone.page.getByLabel('How was it mended?').fill('planed the edge');
     await press(phone.page, 'Close it');
+    await phone.page.getByText('Nothing to mend').waitFor();
+    await phone.page.goto(`${stop}#snags`);
     await phone.page.getByText('1 open').waitFor();
 
     await sign(phone.page);
@@ -90,6 +97,10 @@ describe('a crew’s day with no signal', () => {
     await office.getByRole('heading', { name: 'Signed' }).waitFor();
     await office.getByText('1 open').waitFor();
     expect(await readStore(phone.page, 'queue')).toEqual([]);
+    // What the office has taken still stands on the phone's page, which stayed open too.
+    await phone.page.getByRole('main').getByRole('link', { name: 'Today', exact: true }).waitFor();
+    expect(await phone.page.getByRole('button', { name: 'Done', exact: true }).count()).toBe(0);
+    console.log(`· a crew's day, from the first drive to the signature: ${phone.taps} taps`);
   });
 
   const visitNow = () => getAt<VisitView>(shop, apiPaths.visit(shop.installId));

@@ -240,6 +240,7 @@ describe('a room read with no signal at all', () => {
     letCome();
     await expect.poll(status, { timeout: 15_000 }).toBe('on-site');
     await phone.page.getByText(/^all sent/).waitFor();
+    await phone.page.unrouteAll({ behavior: 'ignoreErrors' });
   });
 
   /** Takes a photo of wall A and puts a circle, an arrow and a figure on it. */

@@ -36,6 +36,18 @@ describe('the program on the phone', () => {
     expect(worker.headers()['cache-control']).toBe('no-cache');
   });
 
+  it('goes on without a worker where the browser has none, as on plain http', async () => {
+    const context = await browser.openContext({ size: 'phone', as: 'measurer' });
+    await context.addInitScript(() => {
+      Reflect.deleteProperty(Navigator.prototype, 'serviceWorker');
+    });
+    const page = await context.newPage();
+    await page.goto(paths.today());
+    await page.getByText(/^all sent/).waitFor();
+    await page.getByText('The program: not yet').waitFor();
+    expect(await page.evaluate(() => 'serviceWorker' in navigator)).toBe(false);
+  });
+
   it('keeps itself and nothing that anybody was shown: no page, no answer of the office', async () => {
     const page = await browser.openPage({ size: 'phone', as: 'owner' });
     await page.goto(paths.today());
