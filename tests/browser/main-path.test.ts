@@ -133,11 +133,11 @@ describe('one job from the first call to the booked install', () => {
     await plain.goto(customerLink);
     await plain.getByText('5 Quay Rise').first().waitFor();
     await plain.getByRole('button', { name: 'Yes, that works' }).click();
-    await plain.getByText('You are expected').waitFor();
+    await plain.getByText('Thank you, it is confirmed').waitFor();
     expect(await plain.getByRole('button', { name: 'Yes, that works' }).count()).toBe(0);
 
     await page.goto(customerLink);
-    await page.getByText('You are expected').waitFor();
+    await page.getByText('Thank you, it is confirmed').waitFor();
     await expectNoSeriousFault(page);
     await keepPicture(page, 'customer-confirmed');
   });

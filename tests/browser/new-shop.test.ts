@@ -107,6 +107,6 @@ describe('a new shop', () => {
   async function sayYes(page: Page) {
     await page.getByText('18 Mill Lane').first().waitFor();
     await page.getByRole('button', { name: 'Yes, that works' }).tap();
-    await page.getByText('You are expected').waitFor();
+    await page.getByText('Thank you, it is confirmed').waitFor();
   }
 });
