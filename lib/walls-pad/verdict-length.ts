@@ -1,5 +1,6 @@
 import type { ReadingOf } from '@/lib/contracts/readings';
 import type { FitRules } from '@/lib/contracts/shop-rules';
+import { SLIP_LENGTHS_MM } from '@/lib/measure/known-slips';
 import { walkRoom } from '@/lib/measure/room-walk';
 import { lengthOwnPart, lengthUncertainty } from '@/lib/measure/uncertainty';
 import type { RuleBehind } from '@/lib/sheet/rule-behind';
@@ -16,7 +17,8 @@ const SAME_PLACE_MM = 1;
  * A wall's length beside what is known of it: its pieces, a repeat of the same height, else the nearest other height,
  * else the sketch.
  *
- * Edge: a difference smaller than its U is "the same within the reading".
+ * Edge: a difference smaller than its U is "the same within the reading"; one that is over the rule and as large as a
+ * known slip is asked about.
  * Example: 2414.6 at the counter, 2411.4 at the floor: 1/8" longer, within a 1/4" rule.
  * Source: agreement of repeats, the shop's; plumb, the rule set that the shop has picked.
  */
@@ -90,11 +92,20 @@ function besideHeight(
   const isApartUpward = difference > 0 === reading.zMm > other.zMm;
   const way = isApartUpward ? 'lean apart going up' : 'lean together going up';
   const size = `${sayDifference(difference, rules)} ${difference > 0 ? 'longer' : 'shorter'} than ${there}`;
+  const misread = kind === 'over' ? misreadWords(difference, expanded) : '.';
   return {
     kind,
     by,
-    words: `${size} ${sayPlusMinus(expanded, rules)}: the ends ${way}.`,
+    words: `${size} ${sayPlusMinus(expanded, rules)}: the ends ${way}${misread}`,
   };
+}
+
+/** A lean past the rule that is just as large as a slip of the hand is more often one: it is read again here and now. */
+function misreadWords(differenceMm: number, expandedMm: number): string {
+  const slip = SLIP_LENGTHS_MM.find(
+    ({ lengthMm }) => Math.abs(Math.abs(differenceMm) - lengthMm) <= expandedMm,
+  );
+  return slip ? `, or one of the two is ${slip.name} misread. Read it once more.` : '.';
 }
 
 function besideSketch({ reading, tool, book, rules }: JudgeInput<ReadingOf<'length'>>): PadVerdict {

@@ -171,6 +171,14 @@ describe('the verdict on a length', () => {
     });
   });
 
+  it('asks whether an inch was misread where the ends would lean by just that much', () => {
+    const floor = exampleLength(1, { zMm: 100, valueMm: 4_000 });
+    expect(say(exampleLength(2, { valueMm: 4_025 }), [floor])?.words).toContain(
+      'lean apart going up, or one of the two is 1 in misread. Read it once more.',
+    );
+    expect(say(exampleLength(2, { valueMm: 4_019 }), [floor])?.words).toMatch(/going up\.$/);
+  });
+
   it('calls a difference inside its uncertainty the same', () => {
     const floor = exampleLength(1, { zMm: 100, valueMm: 3_999.5 });
     expect(say(exampleLength(2), [floor])?.words).toBe(
