@@ -109,6 +109,7 @@ describe('a day on the map, and a shop that is late', () => {
     // Their news does not reach this screen in time.
     await page.route(`**${apiPaths.live()}`, (route) => route.abort());
     await page.reload();
+    await settled(page);
     await page.getByRole('button', { name: 'Better order for Measure: Tor' }).click();
     const take = page.getByRole('button', { name: 'Put the day in this order' });
     await take.waitFor();
