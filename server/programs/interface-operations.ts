@@ -1,6 +1,12 @@
 import { z } from 'zod';
 import { benchSheet } from '@/lib/contracts/bench';
 import {
+  importedList,
+  importListInput,
+  listPreview,
+  previewListInput,
+} from '@/lib/contracts/job-lists';
+import {
   changeJobInput,
   jobIdInput,
   jobRow,
@@ -35,6 +41,8 @@ export type Operation = {
   input: z.ZodObject | z.ZodType;
   inPath: string[];
   answer: z.ZodType;
+  /** A list as CSV: sent as the body, with the input in the query, or given as the answer. */
+  csv?: 'sent' | 'given';
   /** One that works on a shop with these rows. */
   example: Record<string, unknown>;
 };
@@ -46,6 +54,10 @@ export const exampleIds = {
   crewId: 'c1d3a8f7-2b4e-4c69-b0d5-7e8f9a1b2c30',
   key: '7a9c2e4d-1f3b-4d5e-9c8b-0a1b2c3d4e50',
 } as const;
+
+/** A list as it may be sent, for the examples. */
+export const exampleList =
+  'Customer,Street,Phone,Job\r\nAda Quill,4 Kiln Yard,212-555-0188,Pantry\r\n';
 
 /** What other programs may ask, and how; the document is made from this and from the contracts alone. */
 export const operations: Operation[] = [
@@ -199,6 +211,44 @@ export const operations: Operation[] = [
       date: '2027-01-14',
       time: '13:00',
     },
+  },
+  {
+    id: 'exportJobs',
+    method: 'get',
+    path: '/api/exports/jobs',
+    scope: 'jobs:change',
+    summary:
+      'Every job with its customer and site, as CSV; what goes out in these columns comes in by them.',
+    input: z.object({}),
+    inPath: [],
+    answer: z.string(),
+    csv: 'given',
+    example: {},
+  },
+  {
+    id: 'previewList',
+    method: 'post',
+    path: '/api/imports/preview',
+    scope: 'jobs:change',
+    summary: 'What would become of each row of a list of customers and jobs; nothing is written.',
+    input: previewListInput,
+    inPath: [],
+    answer: listPreview,
+    csv: 'sent',
+    example: {},
+  },
+  {
+    id: 'importList',
+    method: 'post',
+    path: '/api/imports',
+    scope: 'jobs:change',
+    summary:
+      'Brings a list in, all of it or nothing, once under its idempotencyKey. `columns` names what each column is, in order, as the preview gives it.',
+    input: importListInput,
+    inPath: [],
+    answer: importedList,
+    csv: 'sent',
+    example: { idempotencyKey: exampleIds.key, columns: 'customer,street,phone,title' },
   },
   {
     id: 'listRooms',

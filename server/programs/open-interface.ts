@@ -6,7 +6,7 @@ import {
 } from 'zod-openapi';
 import { programEvents } from '@/lib/contracts/programs';
 import { env } from '@/server/base/env';
-import { type Operation, operations } from './interface-operations';
+import { exampleList, type Operation, operations } from './interface-operations';
 
 /** RFC 9457, as every refusal of ours is. */
 const problem = z
@@ -65,37 +65,40 @@ function pathsOf(all: Operation[]): ZodOpenApiPathsObject {
 }
 
 function described(operation: Operation): ZodOpenApiOperationObject {
-  const { id, summary, scope, method, input, inPath, answer, example } = operation;
+  const { id, summary, scope, method, input, inPath, answer, csv } = operation;
   const fields = Object.keys(input instanceof z.ZodObject ? input.shape : {});
-  const place = (name: string) => inPath.includes(name);
-  const elsewhere = fields.filter((name) => !place(name));
+  const elsewhere = fields.filter((name) => !inPath.includes(name));
+  const isInQuery = method === 'get' || csv === 'sent';
   return {
     operationId: id,
     summary,
     description: `The key needs ${scope}.`,
     requestParams: {
       ...(inPath.length > 0 ? { path: picked(input, inPath) } : {}),
-      ...(method === 'get' && elsewhere.length > 0 ? { query: picked(input, elsewhere) } : {}),
+      ...(isInQuery && elsewhere.length > 0 ? { query: picked(input, elsewhere) } : {}),
     },
-    ...(method === 'get'
-      ? {}
-      : {
-          requestBody: {
-            required: true,
-            content: {
-              'application/json': {
-                schema: inPath.length > 0 ? picked(input, elsewhere) : input,
-                example: without(example, inPath),
-              },
-            },
-          },
-        }),
+    ...(method === 'get' ? {} : { requestBody: bodyOf(operation, elsewhere) }),
     responses: {
-      200: { description: 'Done.', content: { 'application/json': { schema: answer } } },
+      200: {
+        description: 'Done.',
+        content: { [csv === 'given' ? 'text/csv' : 'application/json']: { schema: answer } },
+      },
       '4XX': {
         description: 'Refused: nothing was changed.',
         content: { 'application/problem+json': { schema: problem } },
       },
+    },
+  };
+}
+
+function bodyOf({ input, inPath, csv, example }: Operation, elsewhere: string[]) {
+  const schema = inPath.length > 0 ? picked(input, elsewhere) : input;
+  return {
+    required: true,
+    content: {
+      ...(csv === 'sent'
+        ? { 'text/csv': { schema: z.string(), example: exampleList } }
+        : { 'application/json': { schema, example: without(example, inPath) } }),
     },
   };
 }

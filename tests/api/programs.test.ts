@@ -5,6 +5,9 @@ import { Validator } from '@seriousme/openapi-schema-validator';
 import { eq } from 'drizzle-orm';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import { GET as benchRoute } from '@/app/api/bench/route';
+import { GET as exportRoute } from '@/app/api/exports/jobs/route';
+import { POST as previewListRoute } from '@/app/api/imports/preview/route';
+import { POST as importListRoute } from '@/app/api/imports/route';
 import { POST as readyRoute } from '@/app/api/jobs/[jobId]/ready/route';
 import { PATCH as changeJobRoute, GET as getJobRoute } from '@/app/api/jobs/[jobId]/route';
 import { GET as listJobsRoute, POST as startJobRoute } from '@/app/api/jobs/route';
@@ -27,7 +30,12 @@ import type { AddedWebhook, MadeKey, ProgramsView } from '@/lib/contracts/progra
 import { keyScopes, programEvents } from '@/lib/contracts/programs';
 import { database } from '@/server/base/database';
 import type { RouteHandler } from '@/server/base/handle';
-import { exampleIds, type Operation, operations } from '@/server/programs/interface-operations';
+import {
+  exampleIds,
+  exampleList,
+  type Operation,
+  operations,
+} from '@/server/programs/interface-operations';
 import { sendDeliveries } from '@/server/programs/send-deliveries';
 import { bookTestVisit } from '../help/book-test-visit';
 import { callRoute } from '../help/call-route';
@@ -48,6 +56,9 @@ const routes: Record<string, RouteHandler> = {
   bookVisit: bookVisitRoute,
   moveVisit: moveVisitRoute,
   callOffVisit: callOffRoute,
+  exportJobs: exportRoute,
+  previewList: previewListRoute,
+  importList: importListRoute,
   listRooms: roomsRoute,
   listBench: benchRoute,
   listMessages: messagesRoute,
@@ -171,7 +182,7 @@ describe('a door for other programs', () => {
     expect(figures.flatMap(({ lines }) => lines)).toEqual([]);
   });
 
-  async function ask({ id, method, inPath, example }: Operation, key: MadeKey) {
+  async function ask({ id, method, inPath, example, csv }: Operation, key: MadeKey) {
     const text = JSON.stringify(example)
       .replaceAll(exampleIds.jobId, ids.jobId)
       .replaceAll(exampleIds.visitId, ids.visitId)
@@ -183,6 +194,17 @@ describe('a door for other programs', () => {
     );
     const route = routes[id];
     if (!route) throw new Error(`no route is named for ${id}`);
+    if (csv) {
+      const response = await route(
+        new Request(`http://localhost:3000/api/x?${new URLSearchParams(rest)}`, {
+          method: method.toUpperCase(),
+          headers: { ...asKey(key), 'content-type': 'text/csv' },
+          body: csv === 'sent' ? exampleList : undefined,
+        }),
+      );
+      const body = csv === 'given' ? await response.text() : await response.json();
+      return { status: response.status, body };
+    }
     return callRoute(route, {
       method: method.toUpperCase() as 'GET' | 'POST' | 'PATCH',
       url: method === 'get' ? `/api/x?${new URLSearchParams(rest)}` : '/api/x',
