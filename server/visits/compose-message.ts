@@ -1,13 +1,13 @@
 import { type Occasion, parseOccasion } from '@/lib/messages/occasions';
-import { renderEmail, renderSms } from '@/lib/messages/render-message';
+import { type RenderInput, renderEmail, renderSms } from '@/lib/messages/render-message';
 import type { TextLocale } from '@/lib/time/text-locale';
 import type { Context, SystemActor } from '@/server/base/context';
-import type { Compose, Composed } from '@/server/messages/compose';
+import type { Compose, Composed, LeftOut } from '@/server/messages/compose';
 import { readMessageSettings } from '@/server/messages/message-settings';
 import { readOwnWording } from '@/server/messages/read-wording';
 import type { Attachment } from '@/server/ports/email/email-port';
 import { choiceWords, valuesOf } from './message-values';
-import { calendarFiles, movesWords, readOthers, toldWindow } from './moves-together';
+import { calendarFiles, type Moved, movesWords, readOthers, toldWindow } from './moves-together';
 import { type CustomerVisit, readCustomerVisit } from './read-customer-visit';
 import { type CalendarMethod, visitCalendar } from './visit-calendar';
 import { visitLinkAddress } from './visit-link';
@@ -64,23 +64,44 @@ export function composeWithCopy(signedCopyOf: SignedCopyOf): Compose {
       const { value, problems } = renderSms(input);
       return value === null ? refused(problems[0]?.message) : { is: 'sms', body: value, leftOut };
     }
-    const { value, problems } = renderEmail(input);
-    if (value === null) return refused(problems[0]?.message);
-    const method = calendarMethod(occasion);
     const copy = occasion === 'done' ? await signedCopyOf(ctx, visit.id) : null;
-    const attachments = [...calendarFiles(ctx, along), ...(copy ? [copy] : [])];
-    return {
-      is: 'email',
+    return writeEmail(ctx, input, {
+      visit,
+      link,
+      method: calendarMethod(occasion),
+      along,
       leftOut,
-      email: {
-        ...value,
-        ...(ctx.shop.email ? { replyTo: ctx.shop.email } : {}),
-        ...(method
-          ? { ics: { method, content: visitCalendar(ctx, visit, { method, link }) } }
-          : {}),
-        ...(attachments.length > 0 ? { attachments } : {}),
-      },
-    };
+      copy,
+    });
+  };
+}
+
+function writeEmail(
+  ctx: Context<SystemActor>,
+  input: RenderInput,
+  it: {
+    visit: CustomerVisit;
+    link: string | null;
+    method: CalendarMethod | null;
+    /** Other visits that it tells of as well. */
+    along: Moved[];
+    leftOut: LeftOut[];
+    copy: Attachment | null;
+  },
+): Composed {
+  const { visit, link, method, along, leftOut, copy } = it;
+  const { value, problems } = renderEmail(input);
+  if (value === null) return refused(problems[0]?.message);
+  const attachments = [...calendarFiles(ctx, along), ...(copy ? [copy] : [])];
+  return {
+    is: 'email',
+    leftOut,
+    email: {
+      ...value,
+      ...(ctx.shop.email ? { replyTo: ctx.shop.email } : {}),
+      ...(method ? { ics: { method, content: visitCalendar(ctx, visit, { method, link }) } } : {}),
+      ...(attachments.length > 0 ? { attachments } : {}),
+    },
   };
 }
 
