@@ -11,14 +11,14 @@ import { readStop } from './stop-store';
 export async function readSnagsToMend(shown: TodayView, holder: Holder): Promise<CrewSnag[]> {
   const queue = await readQueue();
   const days = [shown, ...(await readDays())];
-  const ends = [
+  const places = [
     ...shown.snags,
     ...days.flatMap(({ date, visits }) =>
       visits.map((visit) => ({ ...visit, visitId: visit.id, nextOn: date })),
     ),
   ];
   const stops: StopSnags[] = [];
-  for (const { visitId, jobId, customerName, street, town, nextOn } of ends) {
+  for (const { visitId, jobId, customerName, street, town, nextOn } of places) {
     if (stops.some((stop) => stop.visitId === visitId)) continue;
     const stop = await readStop(visitId, holder, null);
     if (!stop) continue;
