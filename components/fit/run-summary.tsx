@@ -63,8 +63,9 @@ export function RunSummary({ runFit, rules, editHref, wayOut }: RunSummaryProps)
             />
             <span className="text-graphite">
               {' '}
-              left decides {placeWords(clearOpening.governing.left)}, right{' '}
-              {placeWords(clearOpening.governing.right)}
+              <InFractions
+                words={`left decides ${placeWords(clearOpening.governing.left)}, right ${placeWords(clearOpening.governing.right)}`}
+              />
             </span>
           </Fact>
         ) : null}
