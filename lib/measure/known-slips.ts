@@ -1,5 +1,6 @@
 /** The slips people make with a tape, as data, and what each would do to one reading. */
 import type { RoomObservation } from './room-observations';
+import { SLIP_LENGTHS_MM } from './slip-lengths';
 
 export type KnownSlip = {
   /** "1 in", "digits swapped". */
@@ -7,15 +8,6 @@ export type KnownSlip = {
   /** Read less true, in the reading's own unit: mm, or degrees for a corner. */
   size: number;
 };
-
-/** Whole amounts that are lost or gained with a tape or a laser; common practice, no source. */
-export const SLIP_LENGTHS_MM = [
-  { name: '10 mm', lengthMm: 10 },
-  { name: '1/2 in', lengthMm: 12.7 },
-  { name: '1 in', lengthMm: 25.4 },
-  { name: '100 mm', lengthMm: 100 },
-  { name: '1 ft', lengthMm: 304.8 },
-] as const;
 
 /**
  * Every known slip that could lie in a reading, with sign and size.

@@ -1,7 +1,7 @@
 import type { ReadingOf } from '@/lib/contracts/readings';
 import type { FitRules } from '@/lib/contracts/shop-rules';
-import { SLIP_LENGTHS_MM } from '@/lib/measure/known-slips';
 import { walkRoom } from '@/lib/measure/room-walk';
+import { SLIP_LENGTHS_MM } from '@/lib/measure/slip-lengths';
 import { lengthOwnPart, lengthUncertainty } from '@/lib/measure/uncertainty';
 import type { RuleBehind } from '@/lib/sheet/rule-behind';
 import { type JudgeInput, judgedBy, type PadVerdict } from './pad-verdict';

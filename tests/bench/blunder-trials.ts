@@ -1,9 +1,10 @@
 /** The trials of the blunder study: rooms, readings, one slip in each, and what the search says of it. */
 import { adjustRoom } from '@/lib/measure/adjust-room';
 import { findBlunder } from '@/lib/measure/find-blunder';
-import { SLIP_LENGTHS_MM, swappedDigits } from '@/lib/measure/known-slips';
+import { swappedDigits } from '@/lib/measure/known-slips';
 import type { RoomObservation, RoomShape } from '@/lib/measure/room-observations';
 import { settle } from '@/lib/measure/settle';
+import { SLIP_LENGTHS_MM } from '@/lib/measure/slip-lengths';
 import {
   cornerByLegs,
   findAngle,
