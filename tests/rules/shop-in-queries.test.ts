@@ -33,6 +33,8 @@ const ofNoShop: Record<string, string> = {
   'server/messages/claim-due.ts':
     'the worker sends for every shop; each row it takes names its own',
   'server/messages/hear-report.ts': 'the provider names the message, not the shop',
+  'server/messages/told-together.ts':
+    'its caller says which messages lead; those with them are of their shop by the foreign key',
   'server/messages/claim-unreported.ts':
     'the worker asks for every shop; each row it takes names its own',
   'server/messages/give-up.ts': 'its caller says which messages; each row it takes names its shop',
