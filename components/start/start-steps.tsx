@@ -28,7 +28,8 @@ type StartStepsProps = {
 /** From nothing to a confirmed visit. What comes next stands open, and most of it is done on this page. */
 export function StartSteps({ start, settings, crews, person }: StartStepsProps) {
   const { done, customerPage } = start;
-  const next = startSteps.find((step) => !done[step]);
+  // The last one stays open: it shows the link of whoever was invited, and there may be more to invite.
+  const next = startSteps.find((step) => !done[step]) ?? 'people';
   const bodies: Record<Step, React.ReactNode> = {
     hours: <HoursStep settings={settings} places={crews.holidayPlaces} />,
     crew: <CrewStep crews={crews.crews} person={person} />,
