@@ -1,6 +1,6 @@
 'use client';
 
-import { useState } from 'react';
+import { useId, useState } from 'react';
 import { FieldError } from '@/components/ui/field-error';
 import { controlLook } from '@/components/ui/field-frame';
 import { fineLength } from '@/lib/sheet/reading-words';
@@ -16,6 +16,7 @@ type LimitFieldProps = {
 
 /** One figure of a limit, typed as the shop writes lengths; what cannot be read is said, and changes nothing. */
 export function LimitField({ label, limitMm, unit, onChange }: LimitFieldProps) {
+  const errorId = useId();
   const [error, setError] = useState<string | undefined>();
   const shown = fineLength(limitMm, unit);
   const read = (typed: string) => {
@@ -30,11 +31,12 @@ export function LimitField({ label, limitMm, unit, onChange }: LimitFieldProps) 
       <input
         aria-label={label}
         aria-invalid={error ? true : undefined}
+        aria-describedby={error ? errorId : undefined}
         defaultValue={shown}
         onBlur={(event) => read(event.target.value)}
         className={`${controlLook} max-w-28 text-right tabular-nums`}
       />
-      <FieldError error={error} />
+      <FieldError id={errorId} error={error} />
     </div>
   );
 }
