@@ -55,7 +55,7 @@ export function BookScreens(props: BookScreensProps) {
 function BookScreen({ room, kept }: BookScreensProps) {
   const { view, queue } = room;
   const place = useBookPlace();
-  const plan = usePlan(view);
+  const planned = usePlan(view);
   const [habits, changeHabits] = useHabits(kept.habits);
   const [afterSlot, setAfterSlot] = useState(kept.afterSlot);
   const [lastKeptId, setLastKeptId] = useState<string | null>(null);
@@ -75,7 +75,8 @@ function BookScreen({ room, kept }: BookScreensProps) {
       />
     );
   }
-  if (plan === null) return <Waiting />;
+  if (planned === null) return <Waiting />;
+  const { plan, judge } = planned;
 
   const goOn = (slot: string | null) => {
     if (slot === null) return;
@@ -87,6 +88,7 @@ function BookScreen({ room, kept }: BookScreensProps) {
       key={question.key}
       question={question}
       view={view}
+      judge={judge}
       habits={habits}
       keptDraft={kept.draft}
       picture={<QuestionPicture {...{ question, view, speech }} />}
@@ -138,21 +140,21 @@ function BookScreen({ room, kept }: BookScreensProps) {
   switch (place.at) {
     case 'next':
     case 'ask': {
-      const planned =
+      const asked =
         place.at === 'ask'
           ? plan.find(({ slot }) => slot === place.slot)
           : nextAsk(plan, afterSlot);
-      if (!planned) {
+      if (!asked) {
         const settling =
           place.at === 'ask' ? questionOfDiagonal(place.slot, view.wallBook.room) : null;
         const leave: BookPlace = { at: 'leave' };
         return settling ? pad(settling, { onward: leave, back: leave }) : <AllRead />;
       }
-      const { ask, slot } = planned;
+      const { ask, slot } = asked;
       if (ask.kind === 'feature') {
         return feature(ask.wallId, { askedSlot: slot, askedKind: ask.feature });
       }
-      const question = questionOfPlan(planned);
+      const question = questionOfPlan(asked);
       return question ? pad(question, { onward: next, back: beforeThis }) : null;
     }
     case 'add': {

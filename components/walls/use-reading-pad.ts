@@ -15,15 +15,16 @@ import { piecesSoFar } from '@/lib/walls-pad/pieces-so-far';
 import { placeFields } from '@/lib/walls-pad/place-fields';
 import { sameStart } from '@/lib/walls-pad/same-start';
 import { speechIn } from '@/lib/walls-pad/say-length';
-import { refusalOf, verdictOf } from '@/lib/walls-pad/verdict-of';
 import { draftKey } from './draft-keys';
 import { type PadHabits, setUpKey } from './pad-habits';
 import type { PadQuestion } from './pad-question';
 import type { PadSays } from './pad-says';
+import type { PadJudge } from './use-plan';
 
 export type ReadingPadInput = {
   question: PadQuestion;
   view: WallBookView;
+  judge: PadJudge;
   habits: PadHabits;
   /** Half typed before the page was closed. */
   keptDraft: PadDraft | null;
@@ -32,7 +33,8 @@ export type ReadingPadInput = {
 };
 
 /** The state of one question: what is typed, what it means, and keeping it. */
-export function useReadingPad({ question, view, habits, keptDraft, onKept }: ReadingPadInput) {
+export function useReadingPad(input: ReadingPadInput) {
+  const { question, view, judge, habits, keptDraft, onKept } = input;
   const personId = usePersonId();
   const { wallBook, rules, runs } = view;
   const roomId = wallBook.room.id;
@@ -78,7 +80,7 @@ export function useReadingPad({ question, view, habits, keptDraft, onKept }: Rea
     if (refusal) return { kind: 'refused', words: refusal };
     const { reading } = build('typing', '');
     const verdict = reading
-      ? verdictOf(reading, { book: wallBook, runs, rules: { ...rules, ...speech } })
+      ? judge.verdictOf(reading, { book: wallBook, runs, rules: { ...rules, ...speech } })
       : null;
     const soFar = reading ? null : piecesSoFar(ask, fields, draft.entries, speech);
     return verdict ?? { kind: 'why', words: soFar ?? question.why };
@@ -98,7 +100,7 @@ export function useReadingPad({ question, view, habits, keptDraft, onKept }: Rea
   const keep = async (isAgain: boolean) => {
     const { reading, problems } = build(newId(), new Date().toISOString());
     if (!reading) return refuse(problems[0].message, problems[0].field);
-    const impossible = refusalOf(reading, { book: wallBook, runs, rules });
+    const impossible = judge.refusalOf(reading, { book: wallBook, runs, rules });
     if (impossible) return refuse(impossible.message, null);
     if (!tool) return refuse('The shop has no tools yet. Ask the office to add one.', null);
     setIsBusy(true);

@@ -4,7 +4,7 @@ import { type Figure, figure } from '@/lib/measure/figure';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { lengthUncertainty } from '@/lib/measure/uncertainty';
 import { piecesUncertainty, wholeOfPieces } from '@/lib/measure/wall-in-pieces';
-import { angleOfReading } from './verdict-corner';
+import { angleOfReading } from './angle-of-reading';
 
 /** What has been read of walls and corners, one figure each; not adjusted, for the pad's plan and checks. */
 export type AsRead = { lengthMm: Map<string, Figure>; cornerDeg: Map<string, Figure> };

@@ -4,10 +4,10 @@ import type { FitRules } from '@/lib/contracts/shop-rules';
 import type { WallBook } from '@/lib/contracts/wall-book';
 import { standingReadings } from '@/lib/measure/standing-readings';
 import { wholeOfPieces } from '@/lib/measure/wall-in-pieces';
+import { angleOfReading } from './angle-of-reading';
 import { readingWords } from './reading-words';
 import { isSameThing } from './same-thing';
 import { type LengthSpeech, sayDifference } from './say-length';
-import { angleOfReading } from './verdict-corner';
 
 /** A second person's reading of the same thing, beside the one that is looked at. */
 export type OtherReader = {

@@ -1,8 +1,9 @@
 import type { Reading } from '@/lib/contracts/readings';
 import { type Problem, problem } from '@/lib/problem';
+import { angleOfReading } from './angle-of-reading';
 import { otherReadings, type PadVerdict, type VerdictInput } from './pad-verdict';
 import { verdictOfDiagonal, verdictOfWidth } from './verdict-across';
-import { angleOfReading, verdictOfCorner } from './verdict-corner';
+import { verdictOfCorner } from './verdict-corner';
 import { verdictOfFace } from './verdict-face';
 import { verdictOfCeiling, verdictOfFloor } from './verdict-floor';
 import { verdictOfLength } from './verdict-length';
