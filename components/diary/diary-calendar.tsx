@@ -23,7 +23,7 @@ import './diary-calendar.css';
 import { diaryEvents, type EventDetail } from './diary-events';
 import { useDiaryLocale } from './diary-locale';
 import { reachByKey } from './reach-by-key';
-import { VisitEvent } from './visit-event';
+import { VisitEvent, VisitLine } from './visit-event';
 
 export type CalendarView = 'dayGridMonth' | 'timeGridWeek' | 'timeGridDay';
 
@@ -57,13 +57,19 @@ const clocks = {
 } as const;
 /** For the days in its title (BCP 47); Europe's office reads English too. */
 const localeOf = { US: 'en-US', UK: 'en-GB', AU: 'en-AU', EU: 'en-GB' } as const;
-const views = { dayGridMonth: { dayHeaderFormat: { weekday: 'short' } } } as const;
+const views = {
+  dayGridMonth: { dayHeaderFormat: { weekday: 'short' }, dayMaxEvents: 6, fixedWeekCount: false },
+} as const;
 const drawVisit = ({ event, view }: EventContentArg) => {
   const { visit, pieceNumber = 1, isGhost = false } = event.extendedProps as Partial<EventDetail>;
   // On its way from the waiting list it is no visit yet.
   if (!visit) return <div className="visit-box">{event.title}</div>;
-  const isCompact = view.type === 'dayGridMonth';
-  return <VisitEvent detail={{ visit, pieceNumber, isGhost }} isCompact={isCompact} />;
+  const detail = { visit, pieceNumber, isGhost };
+  return view.type === 'dayGridMonth' ? (
+    <VisitLine detail={detail} colour={event.borderColor} />
+  ) : (
+    <VisitEvent detail={detail} />
+  );
 };
 
 /** Keys find the visit that has the focus by this. */
@@ -118,7 +124,6 @@ export function DiaryCalendar(props: DiaryCalendarProps) {
       dayHeaderFormat={dayHead}
       businessHours={businessHours}
       hiddenDays={daysOff}
-      dayMaxEvents={5}
       droppable={mayBook}
       events={events}
       eventInteractive

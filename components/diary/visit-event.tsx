@@ -3,26 +3,27 @@ import type { EventDetail } from './diary-events';
 import { KindMark } from './kind-mark';
 import { statusWords } from './visit-words';
 
+const partOf = ({ visit, pieceNumber }: EventDetail): string =>
+  visit.pieces.length > 1 ? `${pieceNumber} of ${visit.pieces.length}` : '';
+
+/** A visit in the month: what and whom in a line. The calendar colours no edge there, so the line has the crew's. */
+export function VisitLine({ detail, colour }: { detail: EventDetail; colour: string }) {
+  const { visit } = detail;
+  return (
+    <div className="visit-line" style={{ borderLeftColor: colour }}>
+      <KindMark kind={visit.kind} />
+      <span className="truncate">
+        {visit.customerName} {partOf(detail)}
+      </span>
+    </div>
+  );
+}
+
 /** A visit as it stands in the diary: whom, where, what, and whether they said yes. */
-export function VisitEvent({
-  detail: { visit, pieceNumber, isGhost },
-  isCompact,
-}: {
-  detail: EventDetail;
-  isCompact: boolean;
-}) {
+export function VisitEvent({ detail }: { detail: EventDetail }) {
+  const { visit, pieceNumber, isGhost } = detail;
   const { words, verdict } = statusWords[visit.status];
-  const part = visit.pieces.length > 1 ? `${pieceNumber} of ${visit.pieces.length}` : '';
-  if (isCompact) {
-    return (
-      <div className="visit-line">
-        <KindMark kind={visit.kind} />
-        <span className="truncate">
-          {visit.customerName} {part}
-        </span>
-      </div>
-    );
-  }
+  const part = partOf(detail);
   return (
     <div className="visit-box">
       <span className="visit-mark">
