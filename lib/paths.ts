@@ -132,6 +132,7 @@ export const apiPaths = {
   visits: () => '/api/visits',
   findVisits: (search: string) => `/api/visits/find?search=${part(search)}`,
   visit: (visitId: string) => `/api/visits/${part(visitId)}`,
+  noteYes: (visitId: string) => `/api/visits/${part(visitId)}/yes`,
   callOffVisit: (visitId: string) => `/api/visits/${part(visitId)}/call-off`,
   undoVisitChange: (visitId: string) => `/api/visits/${part(visitId)}/undo`,
   reportVisit: (visitId: string) => `/api/visits/${part(visitId)}/report`,

@@ -4,6 +4,7 @@ import type {
   BookVisitInput,
   CallOffVisitInput,
   MoveVisitInput,
+  NoteYesInput,
   VisitView,
 } from '@/lib/contracts/visits';
 import { apiPaths } from '@/lib/paths';
@@ -36,4 +37,9 @@ export const useMoveVisit = () =>
 export const useCallOffVisit = () =>
   useDiaryChange(({ visitId, ...body }: CallOffVisitInput) =>
     askServer<VisitView>(apiPaths.callOffVisit(visitId), { body }),
+  );
+
+export const useNoteYes = () =>
+  useDiaryChange(({ visitId, ...body }: NoteYesInput) =>
+    askServer<VisitView>(apiPaths.noteYes(visitId), { body }),
   );

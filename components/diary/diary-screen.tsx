@@ -25,6 +25,7 @@ import { useDiaryKeys } from './use-diary-keys';
 import { useDiaryRange } from './use-diary-range';
 import { useMover } from './use-mover';
 import { useTimesAsked } from './use-times-asked';
+import { useYesByPhone } from './use-yes-by-phone';
 import { VisitDialog } from './visit-dialog';
 import { useVisits } from './visits-query';
 import { WaitingList } from './waiting-list';
@@ -65,6 +66,7 @@ export function DiaryScreen(props: DiaryScreenProps) {
     () => (subject && looked ? ghostVisit(subject, looked) : null),
     [subject, looked],
   );
+  const sayYes = useYesByPhone();
   const waiting = useWaiting();
   // Times that are looked for unfold it, until they are settled.
   const isAsideShown = subject !== null || !shown.isListFolded;
@@ -97,6 +99,7 @@ export function DiaryScreen(props: DiaryScreenProps) {
     shop: { pattern, crews },
     visitOf: (id) => data?.find((visit) => visit.id === id),
     nudge: mayBook ? mover.nudge : null,
+    sayYes,
     anotherTime: (visit) => setSubject(subjectOfVisit(visit)),
     openWaiting: (index) => {
       const item = waiting.shown[index];

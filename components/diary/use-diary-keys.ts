@@ -22,6 +22,7 @@ type DiaryKeys = {
   /** Null where the person may not move visits. */
   nudge: ((visit: VisitView, change: (place: Place) => Place) => void) | null;
   anotherTime: (visit: VisitView) => void;
+  sayYes: (visit: VisitView) => Promise<void>;
   openWaiting: (index: number) => void;
 };
 
@@ -74,6 +75,11 @@ export function useDiaryKeys(diary: DiaryKeys) {
     if (event.key.toLowerCase() === 'o') {
       event.preventDefault();
       diary.anotherTime(visit);
+      return;
+    }
+    if (event.key.toLowerCase() === 'y' && visit.status === 'booked') {
+      event.preventDefault();
+      void diary.sayYes(visit);
       return;
     }
     const step = visitStep(event, diary.shop);

@@ -19,6 +19,7 @@ import { type Placing, PlacingFields } from './placing-fields';
 import { HeldActions } from './times/held-actions';
 import { isWorthAsking, type RefusedMove } from './use-mover';
 import { useTakeBack } from './use-take-back';
+import { useYesByPhone } from './use-yes-by-phone';
 import { minutesWords, statusWords } from './visit-words';
 
 type VisitDialogProps = {
@@ -34,7 +35,7 @@ type VisitDialogProps = {
   onClose: () => void;
 };
 
-/** One visit opened: who and where, how it stands, and the two things that can be done with it. */
+/** One visit opened: who and where, how it stands, and what can be done with it. */
 export function VisitDialog({
   visit,
   start,
@@ -46,6 +47,7 @@ export function VisitDialog({
 }: VisitDialogProps) {
   const { words, verdict } = statusWords[visit.status];
   const isChangeable = mayBook && canChange(visit);
+  const sayYes = useYesByPhone();
   return (
     <Dialog
       isOpen
@@ -88,10 +90,21 @@ export function VisitDialog({
         </dd>
       </dl>
       {isChangeable ? (
-        <div>
+        <div className="flex flex-wrap gap-3">
           <Button onClick={onAnotherTime} data-first-focus>
             Times that work instead
           </Button>
+          {visit.status === 'booked' ? (
+            <Button
+              look="line"
+              onClick={() => {
+                void sayYes(visit);
+                onClose();
+              }}
+            >
+              They said yes on the phone
+            </Button>
+          ) : null}
         </div>
       ) : null}
       {mayBook && visit.status === 'held' ? (

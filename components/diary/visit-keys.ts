@@ -19,6 +19,7 @@ export const visitKeyWords = [
   { keys: '-', words: 'The visit in focus: half an hour shorter' },
   { keys: 'X', words: 'The visit in focus: to the next crew that can' },
   { keys: 'O', words: 'The visit in focus: other times that work' },
+  { keys: 'Y', words: 'The visit in focus: they said yes on the phone' },
 ] as const;
 
 export function visitStep(

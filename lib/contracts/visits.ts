@@ -144,6 +144,10 @@ export const callOffVisitInput = z.object({
 });
 export type CallOffVisitInput = z.infer<typeof callOffVisitInput>;
 
+/** The customer's yes, as the office heard it. */
+export const noteYesInput = z.object({ visitId: id, version: z.number().int() });
+export type NoteYesInput = z.infer<typeof noteYesInput>;
+
 /** One tap on site. */
 export const reportVisitInput = z
   .object({

@@ -50,3 +50,21 @@ export async function settleItems(
       ),
     );
 }
+
+/** What was settled at that moment was not: it is on the list again. */
+export async function reopenItems(
+  tx: Transaction,
+  ctx: { shop: { id: string } },
+  of: { visitId: string; at: Date },
+): Promise<void> {
+  await tx
+    .update(schedulerItems)
+    .set({ doneAt: null, doneBy: '' })
+    .where(
+      and(
+        eq(schedulerItems.shopId, ctx.shop.id),
+        eq(schedulerItems.visitId, of.visitId),
+        eq(schedulerItems.doneAt, of.at),
+      ),
+    );
+}

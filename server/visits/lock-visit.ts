@@ -21,6 +21,7 @@ const fields = {
   version: visits.version,
   customerSays: visits.customerSays,
   expectedAt: visits.expectedAt,
+  confirmedAt: visits.confirmedAt,
   arrivedAt: visits.arrivedAt,
   holdEndsAt: visits.holdEndsAt,
   heldForVisitId: visits.heldForVisitId,

@@ -7,6 +7,7 @@ import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
 import { Refusal } from '@/server/base/problem-response';
+import { reopenItems } from '@/server/messages/scheduler-items';
 import { kickWorker } from '@/server/messages/worker';
 import { holdAgain } from './hold-again';
 import { readLastChange } from './last-change';
@@ -23,8 +24,8 @@ import { removePieces, writePieces } from './write-pieces';
 const undoWithinMs = 120_000;
 
 /**
- * Takes back what the same person did to a visit just now: a booking, a move, a calling off, the taking of a
- * held time, which is held again. The visit stands as it stood, a yes of the customer included; what had not
+ * Takes back what the same person did to a visit just now: a booking, a move, a calling off, a yes that was
+ * noted, the taking of a held time, which is held again. The visit stands as it stood, a yes of the customer included; what had not
  * gone out yet never goes out.
  */
 export async function undoVisitChange(
@@ -42,12 +43,9 @@ export async function undoVisitChange(
         await mustBeCurrent(tx, ctx, visit, input.version);
         const change = await undoableChange(tx, ctx, visit);
         const stood = await readStanding(tx, ctx, visit.id);
-        const told =
-          change.what === 'book'
-            ? await takeBooking(tx, ctx, visit)
-            : await putBack(tx, ctx, visit, change, (planned) => {
-                attempt = planned;
-              });
+        const told = await takeBack(tx, ctx, visit, change, (planned) => {
+          attempt = planned;
+        });
         const isHeldAgain = await holdOnceMore(tx, ctx, { visit, stood, change });
         const after = await readVisit(tx, ctx, visit.id);
         const where =
@@ -71,7 +69,7 @@ export async function undoVisitChange(
 /** `holdEndsAt`: it came of the taking of a held time. */
 type Change = { holdEndsAt: Date | null } & (
   | { what: 'book' }
-  | { what: 'move' | 'call-off'; before: VisitStanding }
+  | { what: 'move' | 'call-off' | 'yes'; before: VisitStanding }
 );
 
 const takenHold = z.object({ holdEndsAt: z.coerce.date() });
@@ -93,6 +91,7 @@ async function undoableChange(
   }
   if (before && line.verb === 'move-visit') return { what: 'move', before, holdEndsAt };
   if (before && line.verb === 'call-off-visit') return { what: 'call-off', before, holdEndsAt };
+  if (before && line.verb === 'note-yes') return { what: 'yes', before, holdEndsAt };
   throw tooLate();
 }
 
@@ -106,6 +105,35 @@ async function holdOnceMore(
   const { jobId, kind } = visit;
   const forVisitId = change.what === 'book' ? null : visit.id;
   return holdAgain(tx, ctx, { jobId, kind, stood, holdEndsAt, forVisitId });
+}
+
+async function takeBack(
+  tx: Transaction,
+  ctx: PersonContext,
+  visit: LockedVisit,
+  change: Change,
+  onPlanned: (attempt: Attempt) => void,
+) {
+  switch (change.what) {
+    case 'book':
+      return takeBooking(tx, ctx, visit);
+    case 'yes':
+      return takeYes(tx, ctx, visit, change.before);
+    default:
+      return putBack(tx, ctx, visit, { what: change.what, before: change.before }, onPlanned);
+  }
+}
+
+/** Nobody was told of it, so nobody is told that it is gone; what it had settled waits again. */
+async function takeYes(
+  tx: Transaction,
+  ctx: PersonContext,
+  visit: LockedVisit,
+  { status, confirmedAt, customerSays }: VisitStanding,
+) {
+  if (visit.confirmedAt) await reopenItems(tx, ctx, { visitId: visit.id, at: visit.confirmedAt });
+  await changeVisit(tx, ctx, visit, { status, confirmedAt, customerSays });
+  return [];
 }
 
 async function takeBooking(tx: Transaction, ctx: PersonContext, visit: LockedVisit) {

@@ -7,6 +7,7 @@ import { POST as callOffRoute } from '@/app/api/visits/[visitId]/call-off/route'
 import { POST as reportRoute } from '@/app/api/visits/[visitId]/report/route';
 import { PATCH as moveRoute, GET as visitRoute } from '@/app/api/visits/[visitId]/route';
 import { POST as undoRoute } from '@/app/api/visits/[visitId]/undo/route';
+import { POST as yesRoute } from '@/app/api/visits/[visitId]/yes/route';
 import { POST as bookRoute, GET as visitsRoute } from '@/app/api/visits/route';
 import { GET as waitingRoute } from '@/app/api/waiting/route';
 import { jobs } from '@/db/schema';
@@ -93,6 +94,22 @@ describe('visits by HTTP', () => {
     expect((await get(visitsRoute, cookies.bench, url)).body).toEqual([]);
   });
 
+  it('notes the yes that a customer said on the phone: once, and of the visit that was seen', async () => {
+    const visit = await booked();
+    const yes = (version: number) =>
+      callRoute(yesRoute, {
+        params: { visitId: visit.id },
+        cookie: cookies.scheduler,
+        body: { version },
+      });
+    expect(await yes(7)).toMatchObject({ status: 409, body: { code: 'visit-changed' } });
+    expect(await yes(1)).toMatchObject({
+      status: 200,
+      body: { status: 'confirmed', confirmedAt: expect.any(String) },
+    });
+    expect(await yes(2)).toMatchObject({ status: 409, body: { code: 'not-waiting-for-yes' } });
+  });
+
   it('answers a taken time with 409, the words and the visit that has it', async () => {
     const visit = await booked();
     const date = localDate(new Date(visit.startsAt), 'America/New_York');
@@ -120,6 +137,7 @@ describe('visits by HTTP', () => {
       const off = { params, cookie, body: { version: 1, reason: 'No' } };
       expect((await callRoute(callOffRoute, off)).status, role).toBe(403);
       expect((await callRoute(undoRoute, off)).status, role).toBe(403);
+      expect((await callRoute(yesRoute, off)).status, role).toBe(403);
       expect((await get(waitingRoute, cookie)).status, role).toBe(403);
       expect((await get(messagesRoute, cookie)).status, role).toBe(403);
     }
@@ -143,6 +161,7 @@ describe('visits by HTTP', () => {
     const off = { params, cookie, body: { version: 1, reason: 'No' } };
     expect((await callRoute(callOffRoute, off)).status).toBe(404);
     expect((await callRoute(undoRoute, off)).status).toBe(404);
+    expect((await callRoute(yesRoute, off)).status).toBe(404);
     const tap = { what: 'arrived', at: new Date().toISOString() };
     expect((await callRoute(reportRoute, { params, cookie, body: tap })).status).toBe(404);
     expect((await book(cookie)).status).toBe(404);

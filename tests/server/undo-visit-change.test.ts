@@ -1,13 +1,16 @@
 import { randomUUID } from 'node:crypto';
 import { and, eq } from 'drizzle-orm';
 import { beforeAll, describe, expect, it } from 'vitest';
-import { messages, visits } from '@/db/schema';
+import { jobs, messages, visits } from '@/db/schema';
 import { holdOpeningInput } from '@/lib/contracts/openings';
 import { type BookedVisit, type MoveVisitInput, moveVisitInput } from '@/lib/contracts/visits';
 import { database } from '@/server/base/database';
+import { listItems } from '@/server/messages/list-items';
+import { putItem } from '@/server/messages/scheduler-items';
 import { callOffVisit } from '@/server/visits/call-off-visit';
 import { holdOpening } from '@/server/visits/hold-opening';
 import { moveVisit } from '@/server/visits/move-visit';
+import { noteYes } from '@/server/visits/note-yes';
 import { takeHeldTime } from '@/server/visits/take-held-time';
 import { undoVisitChange } from '@/server/visits/undo-visit-change';
 import { bookTestVisit } from '../help/book-test-visit';
@@ -209,6 +212,34 @@ describe('taking the last change of a visit back', () => {
     const taken = await takeHeldTime(await scheduler(seconds(895)), { visitId: held.id });
     expect(await undo(taken, seconds(902))).toMatchObject({ isHeldAgain: false });
     expect(await heldOf(jobId)).toEqual([]);
+  });
+
+  it('takes back a yes that was noted of the wrong customer: what it had settled waits again', async () => {
+    const visit = await booked();
+    const { db } = await database();
+    const [job] = await db.select().from(jobs).where(eq(jobs.id, visit.jobId));
+    const customerId = job?.customerId ?? '';
+    await db.transaction((tx) =>
+      putItem(tx, {
+        shopId: shop.shop.id,
+        customerId,
+        jobId: visit.jobId,
+        visitId: visit.id,
+        kind: 'no-answer',
+        key: `no-answer:${visit.id}`,
+        words: 'No answer yet.',
+        at: seconds(30),
+      }),
+    );
+    const open = async () => (await listItems(await scheduler(seconds(70)), { customerId })).length;
+    const before = await waiting(visit.id);
+    const said = await noteYes(await scheduler(seconds(60)), { visitId: visit.id, version: 1 });
+    expect(said.status).toBe('confirmed');
+    expect(await open()).toBe(0);
+    const back = await undo(said, seconds(66));
+    expect(back).toMatchObject({ status: 'booked', confirmedAt: null, startsAt: visit.startsAt });
+    expect(await open()).toBe(1);
+    expect(await waiting(visit.id)).toEqual(before);
   });
 
   it('is refused when the freed time was taken meanwhile, and leaves the visit called off', async () => {
