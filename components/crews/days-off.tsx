@@ -1,7 +1,7 @@
 'use client';
 
 import { type FormEvent, useState } from 'react';
-import { problemOf } from '@/components/shell/ask-server';
+import { sayProblem } from '@/components/shell/say-problem';
 import { Button } from '@/components/ui/button';
 import { FormError } from '@/components/ui/form-error';
 import { TextField } from '@/components/ui/text-field';
@@ -23,8 +23,7 @@ export function DaysOff({ person, today, mayChange }: DaysOffProps) {
       await removeDaysOff(daysOffId);
       showToast({ text: `${person.name} works ${words} after all.` });
     } catch (caught) {
-      const { title, detail } = problemOf(caught);
-      showToast({ text: [title, detail].filter(Boolean).join('. '), isProblem: true });
+      sayProblem(caught);
     }
     await refetch();
   }

@@ -1,7 +1,7 @@
 'use client';
 
 import { useState } from 'react';
-import { problemOf } from '@/components/shell/ask-server';
+import { sayProblem } from '@/components/shell/say-problem';
 import { Button } from '@/components/ui/button';
 import { showToast } from '@/components/ui/toast-store';
 import type { FeedView, MakeFeedInput } from '@/lib/contracts/feeds';
@@ -24,8 +24,7 @@ export function FeedButtons({ name, of, feeds }: FeedButtonsProps) {
     try {
       await work();
     } catch (caught) {
-      const { title, detail } = problemOf(caught);
-      showToast({ text: [title, detail].filter(Boolean).join('. '), isProblem: true });
+      sayProblem(caught);
     } finally {
       setIsBusy(false);
       await refetch();

@@ -1,8 +1,8 @@
 'use client';
 
 import { useState } from 'react';
-import { saidOf } from '@/components/diary/use-mover';
 import { problemOf } from '@/components/shell/ask-server';
+import { sayProblem } from '@/components/shell/say-problem';
 import { Button } from '@/components/ui/button';
 import { FormError } from '@/components/ui/form-error';
 import { showToast } from '@/components/ui/toast-store';
@@ -47,7 +47,7 @@ export function PlanOffer({
       await accept.mutateAsync(back);
       showToast({ text: 'Taken back: the day is in the order that it had.' });
     } catch (caught) {
-      showToast({ text: saidOf(problemOf(caught)), isProblem: true });
+      sayProblem(caught);
     }
   }
 

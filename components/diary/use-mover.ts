@@ -2,6 +2,7 @@
 
 import { useCallback, useMemo, useRef, useState } from 'react';
 import { problemOf } from '@/components/shell/ask-server';
+import { sayProblem } from '@/components/shell/say-problem';
 import { showToast } from '@/components/ui/toast-store';
 import type { CrewView, VisitView } from '@/lib/contracts/visits';
 import type { ProblemDetails } from '@/lib/problem-details';
@@ -66,7 +67,7 @@ export function useMover({ zone, pattern, crews }: Shop) {
     } catch (caught) {
       const problem = problemOf(caught);
       if (isWorthAsking(problem)) setRefused({ visit, place, problem });
-      else showToast({ text: saidOf(problem), isProblem: true });
+      else sayProblem(caught);
       return false;
     } finally {
       put(visit.id, null);
@@ -106,6 +107,3 @@ export function useMover({ zone, pattern, crews }: Shop) {
 /** Refused for now: on the newer visit, or with a reason, it may go through. */
 export const isWorthAsking = ({ code }: ProblemDetails) =>
   code === 'visit-changed' || code === 'gate-not-passed';
-
-export const saidOf = ({ title, detail }: ProblemDetails): string =>
-  detail ? `${title}. ${detail}` : title;

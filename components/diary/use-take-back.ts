@@ -1,7 +1,8 @@
 'use client';
 
 import { useMutation, useQueryClient } from '@tanstack/react-query';
-import { askServer, problemOf } from '@/components/shell/ask-server';
+import { askServer } from '@/components/shell/ask-server';
+import { sayProblem } from '@/components/shell/say-problem';
 import { showToast } from '@/components/ui/toast-store';
 import type { TakenBackVisit } from '@/lib/contracts/visit-changes';
 import type { VisitView } from '@/lib/contracts/visits';
@@ -32,8 +33,7 @@ export function useTakeBack() {
           : `${customerName} is back on ${dayWords}, ${windowWords}${back.isHeldAgain ? ', the other time is held as before' : ''}`;
       showToast({ text: `Taken back: ${words}` });
     } catch (caught) {
-      const { title, detail } = problemOf(caught);
-      showToast({ text: detail ? `${title}. ${detail}` : title, isProblem: true });
+      sayProblem(caught);
     }
   };
 }

@@ -1,6 +1,6 @@
 'use client';
 
-import { problemOf } from '@/components/shell/ask-server';
+import { sayProblem } from '@/components/shell/say-problem';
 import { showToast } from '@/components/ui/toast-store';
 import type { VisitView } from '@/lib/contracts/visits';
 import { useNoteYes } from './change-visit-query';
@@ -18,8 +18,7 @@ export function useYesByPhone() {
         undo: () => void takeBack(said),
       });
     } catch (caught) {
-      const { title, detail } = problemOf(caught);
-      showToast({ text: detail ? `${title}. ${detail}` : title, isProblem: true });
+      sayProblem(caught);
     }
   };
 }

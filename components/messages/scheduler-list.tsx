@@ -3,10 +3,9 @@
 import Link from 'next/link';
 import { useRouter } from 'next/navigation';
 import { useState } from 'react';
-import { problemOf } from '@/components/shell/ask-server';
+import { sayProblem } from '@/components/shell/say-problem';
 import { Button } from '@/components/ui/button';
 import { TitleBlock } from '@/components/ui/title-block';
-import { showToast } from '@/components/ui/toast-store';
 import { Verdict, type VerdictKind } from '@/components/ui/verdict';
 import type { SchedulerItemKind, SchedulerItemView } from '@/lib/contracts/messages';
 import { paths } from '@/lib/paths';
@@ -45,8 +44,7 @@ export function SchedulerList({
       router.refresh();
     } catch (caught) {
       setLeaving((before) => new Set([...before].filter((other) => other !== id)));
-      const { title, detail } = problemOf(caught);
-      showToast({ text: [title, detail].filter(Boolean).join('. '), isProblem: true });
+      sayProblem(caught);
     }
   }
 

@@ -2,7 +2,8 @@
 
 import { useRouter } from 'next/navigation';
 import { type ReactNode, useState } from 'react';
-import { askServer, problemOf } from '@/components/shell/ask-server';
+import { askServer } from '@/components/shell/ask-server';
+import { sayProblem } from '@/components/shell/say-problem';
 import { showToast } from '@/components/ui/toast-store';
 import type { RulePreview } from '@/lib/contracts/rule-changes';
 import type { ChangeShopRulesInput, ShopSettings } from '@/lib/contracts/shop-rules';
@@ -36,8 +37,7 @@ export function useRuleChange(settings: ShopSettings): RuleChanger {
       showToast(said);
       router.refresh();
     } catch (caught) {
-      const { title, detail } = problemOf(caught);
-      showToast({ text: [title, detail].filter(Boolean).join(' '), isProblem: true });
+      sayProblem(caught);
     }
   };
   const save = async ({ body }: Looked) => {
