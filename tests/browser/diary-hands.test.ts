@@ -187,7 +187,7 @@ describe('the diary under the hand', () => {
     await page.goto(paths.diary());
     await settled(page);
     for (const key of ['f', ...'aldous']) await page.keyboard.press(key);
-    await page.getByRole('heading', { name: 'Booked' }).waitFor();
+    await page.getByRole('heading', { name: 'Booked', exact: true }).waitFor();
     await expectNoSeriousFault(page);
     await settled(page);
     await page.keyboard.press('Enter');

@@ -332,7 +332,7 @@ describe('one job from the first call to the booked install', () => {
     const phonePage = await browser.openPage({ size: 'phone' });
     const link = await textedLink(phonePage, 2);
     await phonePage.goto(link);
-    await phonePage.getByText('will set your cabinets').waitFor();
+    await phonePage.getByText('to set your cabinets').waitFor();
     await expectNoSeriousFault(phonePage);
   });
 });

@@ -232,7 +232,8 @@ describe('a room read with no signal at all', () => {
       }
       await route.fulfill({ response, body });
     });
-    await phone.page.goto(paths.todayVisit(own.visitId));
+    // The library that is held back is a part of the load.
+    await phone.page.goto(paths.todayVisit(own.visitId), { waitUntil: 'commit' });
     await expect.poll(() => isHeld).toBe(true);
     await phone.page.getByRole('button', { name: 'Arrived' }).tap();
     const status = async () => (await getAt<VisitView>(own, apiPaths.visit(own.visitId))).status;

@@ -7,7 +7,7 @@ const { runVitest } = await import('./run-vitest.mjs');
 
 const given = process.env.TEST_DATABASE_URL;
 const server = given ? { url: given, stop: () => {} } : await startPostgres();
-const { passed, failed } = runVitest('database', { TEST_DATABASE_URL: server.url });
+const { passed, failed } = await runVitest('database', { env: { TEST_DATABASE_URL: server.url } });
 server.stop();
 console.log(`${passed} passed, ${failed} failed`);
 process.exit(failed === 0 ? 0 : 1);

@@ -1,12 +1,15 @@
-import { spawnSync } from 'node:child_process';
+import { spawn } from 'node:child_process';
 import { mkdirSync, readFileSync, rmSync } from 'node:fs';
 
-/** Runs one project and gives how many tests passed and failed; a run that counted nothing has failed. */
-export function runVitest(project, env = {}) {
+/**
+ * Runs one project, or those of its files that `args` choose, and gives how many tests passed and failed; a run
+ * that counted nothing has failed. `name` is its report's, where several run side by side.
+ */
+export async function runVitest(project, { env = {}, args = [], name = project } = {}) {
   mkdirSync('tests/.out', { recursive: true });
-  const report = `tests/.out/${project}.json`;
+  const report = `tests/.out/${name}.json`;
   rmSync(report, { force: true });
-  const run = spawnSync(
+  const run = spawn(
     process.execPath,
     [
       'node_modules/vitest/vitest.mjs',
@@ -16,12 +19,14 @@ export function runVitest(project, env = {}) {
       '--reporter=default',
       '--reporter=json',
       `--outputFile.json=${report}`,
+      ...args,
     ],
     { stdio: 'inherit', env: { ...process.env, ...env } },
   );
+  const status = await new Promise((resolve) => run.once('exit', resolve));
   try {
     const { numPassedTests, numFailedTests } = JSON.parse(readFileSync(report, 'utf8'));
-    const brokeOutsideTests = run.status !== 0 && numFailedTests === 0 ? 1 : 0;
+    const brokeOutsideTests = status !== 0 && numFailedTests === 0 ? 1 : 0;
     const ranNone = numPassedTests + numFailedTests === 0 ? 1 : 0;
     return {
       passed: numPassedTests,
