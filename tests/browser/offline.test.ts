@@ -234,7 +234,7 @@ describe('a room read with no signal at all', () => {
     });
     // The library that is held back is a part of the load.
     await phone.page.goto(paths.todayVisit(own.visitId), { waitUntil: 'commit' });
-    await expect.poll(() => isHeld).toBe(true);
+    await expect.poll(() => isHeld, { timeout: 15_000 }).toBe(true);
     await phone.page.getByRole('button', { name: 'Arrived' }).tap();
     const status = async () => (await getAt<VisitView>(own, apiPaths.visit(own.visitId))).status;
     expect(await status()).toBe('booked');
