@@ -45,6 +45,7 @@ export default defineConfig({
           include: ['tests/browser/**/*.test.ts'],
           globalSetup: 'tests/setup/running-server.ts',
           fileParallelism: false,
+          expect: { poll: { timeout: 10_000 } },
           testTimeout: 180_000,
           hookTimeout: 180_000,
         },

@@ -2,18 +2,25 @@
 import { type LiveTopic, liveEvent } from '@/lib/contracts/live';
 import type { PersonContext } from './context';
 import { answering, type RouteHandler, signedIn } from './handle';
-import { hearShop } from './live-bus';
+import { changedLately, hearShop } from './live-bus';
 
 export type LiveTimes = {
   /** Changes that come together are told together. */
   gatherMs: number;
   /** A line now and then keeps what stands between from cutting a silent connection. */
   beatMs: number;
+  /** A page may have been drawn so long before it listens: what changed meanwhile is told at once. */
+  missedMs: number;
   /** Then the screen asks again, and is asked who it is again. */
   mostMs: number;
 };
 
-const usualTimes: LiveTimes = { gatherMs: 100, beatMs: 20_000, mostMs: 600_000 };
+const usualTimes: LiveTimes = {
+  gatherMs: 100,
+  beatMs: 20_000,
+  missedMs: 10_000,
+  mostMs: 600_000,
+};
 const retryMs = 3_000;
 
 export function handleLive(times: LiveTimes = usualTimes): RouteHandler {
@@ -47,10 +54,11 @@ function streamOf(ctx: PersonContext, signal: AbortSignal, times: LiveTimes) {
         for (const topic of waiting) write(`event: ${liveEvent}\ndata: ${topic}\n\n`);
         waiting.clear();
       };
-      const end = await hearShop(ctx.shop.id, (topics) => {
+      const hear = (topics: readonly LiveTopic[]) => {
         for (const topic of topics) waiting.add(topic);
         gathering ??= setTimeout(tell, times.gatherMs);
-      });
+      };
+      const end = await hearShop(ctx.shop.id, hear);
       stop = () => {
         if (isOver) return;
         isOver = true;
@@ -69,6 +77,7 @@ function streamOf(ctx: PersonContext, signal: AbortSignal, times: LiveTimes) {
       timers.push(setTimeout(finish, times.mostMs));
       // The screen fetches once when it hears this: what changed while it was away is not told again.
       write(`retry: ${retryMs}\n\n`);
+      hear(changedLately(ctx.shop.id, times.missedMs));
     },
     cancel: () => stop(),
   });

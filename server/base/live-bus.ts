@@ -6,7 +6,12 @@ import { database } from './database';
 const channel = 'setwell_live';
 
 type Hear = (topics: readonly LiveTopic[]) => void;
-type Bus = { hearers: Map<string, Set<Hear>>; listening: Promise<unknown> };
+type Bus = {
+  hearers: Map<string, Set<Hear>>;
+  /** When each "shop topic" changed last, by this process's own clock. */
+  changedAtMs: Map<string, number>;
+  listening: Promise<unknown>;
+};
 
 /** Held for the process: the bundler makes several copies of this module. */
 const held = globalThis as typeof globalThis & { __setwellLive?: Bus };
@@ -29,8 +34,17 @@ export async function hearShop(shopId: string, hear: Hear): Promise<() => void> 
   };
 }
 
+/** What changed in a shop within so long before now, as far as this process has listened. */
+export function changedLately(shopId: string, withinMs: number): LiveTopic[] {
+  const since = performance.now() - withinMs;
+  return liveTopics.filter(
+    (topic) => (held.__setwellLive?.changedAtMs.get(`${shopId} ${topic}`) ?? -Infinity) > since,
+  );
+}
+
 function startBus(): Bus {
   const hearers: Bus['hearers'] = new Map();
+  const changedAtMs: Bus['changedAtMs'] = new Map();
   const listening = database().then((open) =>
     open.listen(channel, (payload) => {
       // Nothing said: the connection was away, and anything may have changed in any shop.
@@ -40,8 +54,9 @@ function startBus(): Bus {
       }
       const [shopId = '', topic = ''] = payload.split(' ');
       if (!isLiveTopic(topic)) return;
+      changedAtMs.set(payload, performance.now());
       for (const hear of hearers.get(shopId) ?? []) hear([topic]);
     }),
   );
-  return { hearers, listening };
+  return { hearers, changedAtMs, listening };
 }

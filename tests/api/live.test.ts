@@ -11,7 +11,7 @@ import { makeCrew } from '../help/make-crew';
 import { contextOf, cookieOf, makeShop, type TestShop } from '../help/make-shop';
 import { startTestJob } from '../help/start-test-job';
 
-const times = { gatherMs: 10, beatMs: 60_000, mostMs: 60_000 };
+const times = { gatherMs: 10, beatMs: 60_000, missedMs: 0, mostMs: 60_000 };
 
 describe('what changes in a shop', () => {
   let shop: TestShop;
@@ -125,8 +125,16 @@ describe('what changes in a shop', () => {
     await expect.poll(() => screen.heard()).toEqual(['site']);
   });
 
+  it('is told to a screen that was being drawn when it happened', async () => {
+    const early = await openScreen(shop);
+    await startTestJob(shop);
+    await expect.poll(() => early.heard()).toEqual(['jobs']);
+    const late = await openScreen(shop, handleLive({ ...times, missedMs: 60_000 }));
+    await expect.poll(() => late.heard()).toContain('jobs');
+  });
+
   it('is told beside a beat, and the stream ends by itself so that who listens is asked again', async () => {
-    const screen = await openScreen(shop, handleLive({ gatherMs: 10, beatMs: 20, mostMs: 120 }));
+    const screen = await openScreen(shop, handleLive({ ...times, beatMs: 20, mostMs: 120 }));
     await screen.whole;
     expect(screen.text()).toMatch(/^: still here$/m);
   });

@@ -68,7 +68,7 @@ describe('crews and lists', () => {
     await unfound.getByText('no pin').waitFor();
     // The pin comes by itself, on the list that stands open.
     const found = page.getByRole('row', { name: /Ada Fell/ });
-    await expect.poll(() => found.getByText('no pin').count(), { timeout: 12_000 }).toBe(0);
+    await expect.poll(() => found.getByText('no pin').count(), { timeout: 20_000 }).toBe(0);
     expect(await unfound.getByText('no pin').count()).toBe(1);
     const jobs = await getAt<JobRow[]>(scheduler, apiPaths.jobSearch('Ada Fell'));
     expect(jobs).toMatchObject([{ isOnMap: true }]);

@@ -83,7 +83,7 @@ export function useBrowser() {
         'x-forwarded-for': `10.${randomInt(256)}.${randomInt(256)}.${randomInt(256)}`,
       },
     });
-    context.setDefaultTimeout(15_000);
+    context.setDefaultTimeout(30_000);
     opened.push(context);
     watchRequests(context);
     if (cookie) await context.addCookies(cookies(cookie, baseURL));

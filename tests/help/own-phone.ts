@@ -55,7 +55,7 @@ export function useOwnPhones() {
           reducedMotion: 'reduce',
         });
         opened.push(context);
-        context.setDefaultTimeout(15_000);
+        context.setDefaultTimeout(30_000);
         await context.exposeFunction('countTap', () => {
           phone.taps += 1;
         });

@@ -40,7 +40,7 @@ process.exit(total.failed === 0 ? 0 : 1);
 
 /** Two at a time, each with a program and a shop of its own: much of such a test is waiting. */
 function runBrowserTests(env) {
-  const first = ['main-path', 'booking', 'exchange', 'diary-hands'].map(
+  const first = ['main-path', 'booking', 'exchange', 'diary-hands', 'doors'].map(
     (file) => `tests/browser/${file}.test.ts`,
   );
   const others = first.map((file) => `--exclude=${file}`);

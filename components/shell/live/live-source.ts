@@ -10,7 +10,11 @@ type Hear = (news: LiveNews) => void;
 
 const againMs = { first: 5_000, most: 60_000 };
 
+/** A page that another leads to may have been drawn so long before it listens. */
+const missedMs = 5_000;
+
 const hearers = new Set<Hear>();
+const toldAtMs = new Map<LiveNews, number>();
 let source: EventSource | null = null;
 let hasBeenOpen = false;
 let againTimer: ReturnType<typeof setTimeout> | undefined;
@@ -19,6 +23,7 @@ let waitMs = againMs.first;
 /** Hears the shop's changes until the function that it gives is called. */
 export function hearLive(hear: Hear): () => void {
   hearers.add(hear);
+  for (const [news, atMs] of toldAtMs) if (performance.now() - atMs < missedMs) hear(news);
   if (hearers.size === 1) {
     document.addEventListener('visibilitychange', follow);
     follow();
@@ -64,5 +69,6 @@ function close(): void {
 }
 
 function tell(news: LiveNews): void {
+  toldAtMs.set(news, performance.now());
   for (const hear of hearers) hear(news);
 }
