@@ -1,24 +1,7 @@
-import type { ReportVisitInput, TodayVisit, VisitStatus } from '@/lib/contracts/visits';
+import type { TodayVisit } from '@/lib/contracts/visits';
+import { progressRank, statusAfter } from '@/lib/days/visit-progress';
 import type { Queued, QueuedWork } from '@/lib/sync/queued';
 
-/** Running late leaves the visit where it stands. */
-const statusAfter: Partial<Record<ReportVisitInput['what'], VisitStatus>> = {
-  'on-the-way': 'on-the-way',
-  arrived: 'on-site',
-  done: 'done',
-  'nobody-home': 'missed',
-};
-/** As in the office: what is told later than something that comes after it changes nothing. */
-const rank: Record<VisitStatus, number> = {
-  held: 0,
-  booked: 0,
-  confirmed: 0,
-  'on-the-way': 1,
-  'on-site': 2,
-  done: 3,
-  missed: 3,
-  'called-off': 4,
-};
 type Standing = Pick<TodayVisit, 'id' | 'status' | 'arrivedAt' | 'leftAt'>;
 
 /**
@@ -33,10 +16,11 @@ export function visitAfter<Visit extends Standing>(
   for (const work of taps) {
     if (work.kind !== 'report' || work.report.visitId !== visit.id) continue;
     const { what, at } = work.report;
+    if (what === 'running-late') continue;
     const status = statusAfter[what];
-    if (!status || rank[status] <= rank[after.status]) continue;
+    if (progressRank[status] <= progressRank[after.status]) continue;
     const arrivedAt = after.arrivedAt ?? (status === 'on-site' ? at : null);
-    const leftAt = after.leftAt ?? (rank[status] === 3 ? at : null);
+    const leftAt = after.leftAt ?? (progressRank[status] === 3 ? at : null);
     after = { ...after, status, arrivedAt, leftAt };
   }
   return after;
@@ -47,7 +31,7 @@ export function visitAfter<Visit extends Standing>(
  * that stays open is not drawn anew when the office has taken a tap.
  */
 export function furtherVisit<Visit extends Standing>(drawn: Visit, kept: Standing | null): Visit {
-  if (!kept || rank[kept.status] <= rank[drawn.status]) return drawn;
+  if (!kept || progressRank[kept.status] <= progressRank[drawn.status]) return drawn;
   const { status, arrivedAt, leftAt } = kept;
   return {
     ...drawn,
@@ -63,4 +47,4 @@ export function waitingWork(queue: readonly Queued[]): QueuedWork[] {
 }
 
 /** Nothing more is done there. */
-export const isOver = ({ status }: Pick<Standing, 'status'>): boolean => rank[status] >= 3;
+export const isOver = ({ status }: Pick<Standing, 'status'>): boolean => progressRank[status] >= 3;

@@ -1,6 +1,7 @@
 import type { Transaction } from '@/db/database';
-import { visits } from '@/db/schema';
+import type { visits } from '@/db/schema';
 import type { Context } from '@/server/base/context';
+import { insertHold } from './insert-hold';
 import { lockCrew } from './lock-crew';
 import type { VisitStanding } from './visit-standing';
 import { writePieces } from './write-pieces';
@@ -24,20 +25,14 @@ export async function holdAgain(tx: Transaction, ctx: Context, hold: TakenHold):
   if (holdEndsAt <= ctx.now) return false;
   const { crewId, startsAt, endsAt, windowStartsAt, windowEndsAt, workMinutes, pieces } = stood;
   const crew = await lockCrew(tx, ctx, crewId);
-  const [held] = await tx
-    .insert(visits)
-    .values({
-      shopId: ctx.shop.id,
-      jobId,
-      kind,
-      crewId,
-      status: 'held',
-      holdEndsAt,
-      heldForVisitId: hold.forVisitId,
-      ...{ startsAt, endsAt, windowStartsAt, windowEndsAt, workMinutes },
-    })
-    .returning({ id: visits.id });
-  if (!held) throw new Error('the hold was not written');
-  await writePieces(tx, ctx, { visitId: held.id, crew, pieces });
+  const visitId = await insertHold(tx, ctx, {
+    jobId,
+    kind,
+    crewId,
+    holdEndsAt,
+    heldForVisitId: hold.forVisitId,
+    ...{ startsAt, endsAt, windowStartsAt, windowEndsAt, workMinutes },
+  });
+  await writePieces(tx, ctx, { visitId, crew, pieces });
   return true;
 }

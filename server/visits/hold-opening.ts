@@ -6,6 +6,7 @@ import { type Context, mustBeAllowed, type PersonContext } from '@/server/base/c
 import { onlyOnce } from '@/server/base/only-once';
 import { notFound } from '@/server/base/problem-response';
 import { lockJob, writeOverrides } from './book-visit';
+import { insertHold } from './insert-hold';
 import { lockCrew } from './lock-crew';
 import { lockVisit } from './lock-visit';
 import { mustPassGates, planVisit } from './plan-visit';
@@ -65,24 +66,18 @@ export async function writeHold(
 
   const { pieces, openGates, warnings, ...times } = plan;
   const holdEndsAt = new Date(ctx.now.getTime() + holdMinutes * 60_000);
-  const [held] = await tx
-    .insert(visits)
-    .values({
-      shopId: ctx.shop.id,
-      jobId,
-      kind,
-      crewId: crew.id,
-      status: 'held',
-      holdEndsAt,
-      heldForVisitId: forVisitId ?? null,
-      ...times,
-    })
-    .returning({ id: visits.id });
-  if (!held) throw new Error('the hold was not written');
+  const visitId = await insertHold(tx, ctx, {
+    jobId,
+    kind,
+    crewId: crew.id,
+    holdEndsAt,
+    heldForVisitId: forVisitId ?? null,
+    ...times,
+  });
   const personIds = crew.people.map(({ id }) => id);
-  onPlanned({ visitId: held.id, crewId: crew.id, personIds, pieces });
-  await writePieces(tx, ctx, { visitId: held.id, crew, pieces });
-  return { visitId: held.id, holdEndsAt, openGates, warnings };
+  onPlanned({ visitId, crewId: crew.id, personIds, pieces });
+  await writePieces(tx, ctx, { visitId, crew, pieces });
+  return { visitId, holdEndsAt, openGates, warnings };
 }
 
 /** One hold for one need: a customer who looks at a third time no longer keeps the second. */

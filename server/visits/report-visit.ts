@@ -1,7 +1,8 @@
 import { and, asc, eq, gte, ne } from 'drizzle-orm';
 import type { Transaction } from '@/db/database';
 import { crewPeople, visitPiecePeople, visitPieces } from '@/db/schema';
-import type { ReportVisitInput, VisitStatus, VisitView } from '@/lib/contracts/visits';
+import type { ReportVisitInput, VisitView } from '@/lib/contracts/visits';
+import { type ProgressTap, progressRank, statusAfter } from '@/lib/days/visit-progress';
 import { visitKindWords } from '@/lib/schedule/visit-kind-words';
 import { writeAudit } from '@/server/base/audit';
 import { mustBeAllowed, type PersonContext } from '@/server/base/context';
@@ -13,32 +14,12 @@ import { readVisit } from './read-visits';
 import { runLate } from './run-late';
 import { tellTap } from './tell-tap';
 
-type What = ReportVisitInput['what'];
-
-const statusAfter: Record<Exclude<What, 'running-late'>, VisitStatus> = {
-  'on-the-way': 'on-the-way',
-  arrived: 'on-site',
-  done: 'done',
-  'nobody-home': 'missed',
-};
-const words: Record<Exclude<What, 'running-late'>, string> = {
+const words: Record<ProgressTap, string> = {
   'on-the-way': 'on the way',
   arrived: 'arrived',
   done: 'done',
   'nobody-home': 'nobody home',
 };
-/** What is told later than something that comes after it changes nothing. */
-const rank: Record<VisitStatus, number> = {
-  held: 0,
-  booked: 0,
-  confirmed: 0,
-  'on-the-way': 1,
-  'on-site': 2,
-  done: 3,
-  missed: 3,
-  'called-off': 4,
-};
-
 /** One tap on site. Sent twice, or late from a phone without signal, it does no harm. */
 export async function reportVisit(ctx: PersonContext, input: ReportVisitInput): Promise<VisitView> {
   mustBeAllowed(ctx, 'visits:report');
@@ -63,16 +44,16 @@ async function goOn(
   tx: Transaction,
   ctx: PersonContext,
   before: LockedVisit,
-  { what, at }: { what: Exclude<What, 'running-late'>; at: Date },
+  { what, at }: { what: ProgressTap; at: Date },
 ): Promise<void> {
   const status = statusAfter[what];
-  if (rank[status] <= rank[before.status]) return;
+  if (progressRank[status] <= progressRank[before.status]) return;
   const after = await changeVisit(tx, ctx, before, {
     status,
     ...(what === 'arrived' ? { arrivedAt: at } : {}),
-    ...(rank[status] === 3 ? { leftAt: at } : {}),
+    ...(progressRank[status] === 3 ? { leftAt: at } : {}),
   });
-  if (rank[status] === 3) await freeTimeAfter(tx, ctx, after.id, at);
+  if (progressRank[status] === 3) await freeTimeAfter(tx, ctx, after.id, at);
   if (what === 'arrived' && after.kind === 'install') {
     await moveStage(tx, ctx, { jobId: after.jobId, event: 'arrived-for-install' });
   }
