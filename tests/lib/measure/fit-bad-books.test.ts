@@ -8,19 +8,12 @@ import { fitRoom } from '@/lib/measure/fit-room';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { whatIsMissing } from '@/lib/measure/what-is-missing';
 import { sampleRun, sampleUnit } from './sample-runs';
-import { bookOf, countedId, type TrueRoom } from './true-room';
+import { bookOf, countedId, squareRoom, type TrueRoom } from './true-room';
 
 const rules = fitRules.parse(defaultShopRules('US').fit);
 const room: TrueRoom = {
-  closed: true,
-  zRefMm: 910,
-  walls: ['A', 'B', 'C', 'D'].map((name, i) => ({
-    name,
-    lengthMm: i % 2 === 0 ? 3_000 : 2_400,
-    cornerDeg: 90,
-    lean: 0.002,
-    bowMm: 2,
-  })),
+  ...squareRoom,
+  walls: squareRoom.walls.map((wall) => ({ ...wall, lean: 0.002, bowMm: 2 })),
 };
 const book = bookOf(room, { diagonals: [[0, 2]] });
 const runs: Run[] = [

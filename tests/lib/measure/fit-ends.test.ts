@@ -6,19 +6,10 @@ import type { WallBook } from '@/lib/contracts/wall-book';
 import { fitRoom } from '@/lib/measure/fit-room';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { sampleRun, sampleUnit } from './sample-runs';
-import { bookOf, countedId, type TrueRoom } from './true-room';
+import { bookOf, countedId, squareRoom, type TrueRoom } from './true-room';
 
 const rules = fitRules.parse(defaultShopRules('UK').fit);
-const square = (over: Partial<TrueRoom> = {}): TrueRoom => ({
-  closed: true,
-  zRefMm: 910,
-  walls: ['A', 'B', 'C', 'D'].map((name, i) => ({
-    name,
-    lengthMm: i % 2 === 0 ? 3_000 : 2_400,
-    cornerDeg: 90,
-  })),
-  ...over,
-});
+const square = (over: Partial<TrueRoom> = {}): TrueRoom => ({ ...squareRoom, ...over });
 const book = bookOf(square(), {
   diagonals: [
     [0, 2],

@@ -23,6 +23,17 @@ export type TrueRoom = {
   ceilingMm?: number;
 };
 
+/** Four straight, plumb walls of 3000 and 2400 mm, every corner at 90°. */
+export const squareRoom: TrueRoom = {
+  closed: true,
+  zRefMm: 910,
+  walls: ['A', 'B', 'C', 'D'].map((name, i) => ({
+    name,
+    lengthMm: i % 2 === 0 ? 3_000 : 2_400,
+    cornerDeg: 90,
+  })),
+};
+
 /** A uuid that counts. */
 export function countedId(n: number): string {
   return `00000000-0000-4000-8000-${String(n).padStart(12, '0')}`;

@@ -12,19 +12,10 @@ import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { piecesUncertainty, wholeOfPieces } from '@/lib/measure/wall-in-pieces';
 import { notNumbers } from './fuzzed-readings';
 import { monteCarlo, seeded } from './seeded';
-import { bookOf, countedId, type TrueRoom, tape } from './true-room';
+import { bookOf, countedId, squareRoom, tape } from './true-room';
 
 const rules = fitRules.parse(defaultShopRules('UK').fit);
-const room: TrueRoom = {
-  closed: true,
-  zRefMm: 910,
-  walls: ['A', 'B', 'C', 'D'].map((name, i) => ({
-    name,
-    lengthMm: i % 2 === 0 ? 3_000 : 2_400,
-    cornerDeg: 90,
-  })),
-};
-const book = bookOf(room, {
+const book = bookOf(squareRoom, {
   diagonals: [
     [0, 2],
     [1, 3],

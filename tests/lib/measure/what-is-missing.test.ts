@@ -6,19 +6,10 @@ import { readingPlan } from '@/lib/measure/reading-plan';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { whatIsMissing } from '@/lib/measure/what-is-missing';
 import { sampleRun, sampleUnit } from './sample-runs';
-import { bookOf, countedId, type TrueRoom, tape } from './true-room';
+import { bookOf, countedId, squareRoom as square, type TrueRoom, tape } from './true-room';
 
 const metric = fitRules.parse(defaultShopRules('UK').fit);
 const inches = fitRules.parse(defaultShopRules('US').fit);
-const square: TrueRoom = {
-  closed: true,
-  zRefMm: 910,
-  walls: ['A', 'B', 'C', 'D'].map((name, i) => ({
-    name,
-    lengthMm: i % 2 === 0 ? 3_000 : 2_400,
-    cornerDeg: 90,
-  })),
-};
 const empty = (book: WallBook): WallBook => ({ ...book, readings: [] });
 
 function skipOf(slot: string): Reading {

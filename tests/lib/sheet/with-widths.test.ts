@@ -5,19 +5,10 @@ import { fitRoom } from '@/lib/measure/fit-room';
 import { defaultShopRules } from '@/lib/measure/rules/default-rules';
 import { wayOutOf } from '@/lib/sheet/with-widths';
 import { sampleRun, sampleUnit } from '../measure/sample-runs';
-import { bookOf, type TrueRoom } from '../measure/true-room';
+import { bookOf, squareRoom } from '../measure/true-room';
 
 const rules = fitRules.parse(defaultShopRules('UK').fit);
-const room: TrueRoom = {
-  closed: true,
-  zRefMm: 910,
-  walls: ['A', 'B', 'C', 'D'].map((name, i) => ({
-    name,
-    lengthMm: i % 2 === 0 ? 3_000 : 2_400,
-    cornerDeg: 90,
-  })),
-};
-const wallBook = bookOf(room);
+const wallBook = bookOf(squareRoom);
 const alterable = { minMm: 300, maxMm: 900, stepMm: 50 };
 const runOf = (...widths: number[]): Run =>
   sampleRun(1, 0, {
